@@ -1,0 +1,45 @@
+import type { Metadata, Viewport } from 'next';
+import localFont from 'next/font/local';
+import { cookies } from 'next/headers';
+import type { ReactNode } from 'react';
+import { LIGHT_COOKIE, lightPaper, parseLight } from '@/ui/light';
+import { Providers } from '@/ui/providers';
+import './globals.css';
+
+const literata = localFont({
+  src: '../../node_modules/@fontsource-variable/literata/files/literata-latin-wght-normal.woff2',
+  weight: '200 900',
+  variable: '--font-literata',
+  adjustFontFallback: 'Times New Roman',
+});
+
+const sourceSans = localFont({
+  src: '../../node_modules/@fontsource-variable/source-sans-3/files/source-sans-3-latin-wght-normal.woff2',
+  weight: '200 900',
+  variable: '--font-source-sans',
+  adjustFontFallback: 'Arial',
+});
+
+export const metadata: Metadata = {
+  title: { default: 'Windrest', template: '%s · Windrest' },
+  description: 'Where to sit without the deer ever knowing, and who else is in the woods.',
+  robots: { index: false, follow: false },
+};
+
+async function readLight() {
+  return parseLight((await cookies()).get(LIGHT_COOKIE)?.value);
+}
+
+export async function generateViewport(): Promise<Viewport> {
+  return { width: 'device-width', initialScale: 1, viewportFit: 'cover', themeColor: lightPaper(await readLight()) };
+}
+
+export default async function RootLayout({ children }: { children: ReactNode }) {
+  return (
+    <html lang="en" data-light={await readLight()} className={`${literata.variable} ${sourceSans.variable}`}>
+      <body>
+        <Providers>{children}</Providers>
+      </body>
+    </html>
+  );
+}

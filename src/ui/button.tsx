@@ -1,0 +1,61 @@
+import Link from 'next/link';
+import type { ComponentProps, ReactNode } from 'react';
+import { joinClasses } from './join-classes';
+
+export type ButtonLook = 'primary' | 'plain' | 'danger' | 'quiet';
+
+const BASE =
+  'inline-flex min-h-11 min-w-11 items-center justify-center gap-2 rounded-sm px-4 py-2 text-center font-semibold leading-tight no-underline transition-colors duration-150 ease-page disabled:opacity-60 aria-disabled:opacity-60';
+
+const LOOKS: Record<ButtonLook, string> = {
+  primary: 'border border-moss bg-moss-fill text-on-moss hover:bg-moss-fill/90 active:bg-moss-fill/80',
+  plain: 'border border-rule-strong bg-panel text-ink hover:border-ink hover:bg-sunk',
+  danger: 'border border-clay bg-clay-fill text-on-clay hover:bg-clay-fill/90 active:bg-clay-fill/80',
+  quiet: 'border border-transparent px-2 text-ink underline decoration-rule-strong underline-offset-4 hover:bg-sunk',
+};
+
+export function buttonClasses(look: ButtonLook = 'plain', className?: string): string {
+  return joinClasses(BASE, LOOKS[look], className);
+}
+
+export interface ButtonProps extends ComponentProps<'button'> {
+  look?: ButtonLook;
+  /** Work under way: shows `pendingLabel`, and presses do nothing. */
+  pending?: boolean;
+  pendingLabel?: ReactNode;
+}
+
+export function Button({ look = 'plain', pending, pendingLabel, type = 'button', className, ...rest }: ButtonProps) {
+  return (
+    <button
+      {...rest}
+      type={type}
+      aria-busy={pending || undefined}
+      disabled={rest.disabled || pending}
+      className={buttonClasses(look, className)}
+    >
+      {pending ? (pendingLabel ?? rest.children) : rest.children}
+    </button>
+  );
+}
+
+export interface ButtonLinkProps extends ComponentProps<typeof Link> {
+  look?: ButtonLook;
+}
+
+export function ButtonLink({ look = 'plain', className, ...rest }: ButtonLinkProps) {
+  return <Link {...rest} className={buttonClasses(look, className)} />;
+}
+
+/** A link in running text. */
+export function TextLink({ className, ...rest }: ComponentProps<typeof Link>) {
+  return (
+    <Link
+      {...rest}
+      className={joinClasses(
+        'text-moss underline decoration-1 underline-offset-[0.2em] hover:decoration-2 rounded-sm',
+        className,
+      )}
+    />
+  );
+}

@@ -1,0 +1,27 @@
+/** The three lights of the screen, and auto, which follows the device. */
+export const LIGHTS = ['auto', 'day', 'dark', 'dim'] as const;
+export type Light = (typeof LIGHTS)[number];
+
+export const LIGHT_COOKIE = 'light';
+
+export const LIGHT_NAMES: Record<Light, string> = {
+  auto: 'Auto',
+  day: 'Day',
+  dark: 'Dark',
+  dim: 'Dim red',
+};
+
+export function parseLight(value: string | undefined): Light {
+  return LIGHTS.find((light) => light === value) ?? 'auto';
+}
+
+const PAPER = { day: '#f4efe3', dark: '#171a16', dim: '#000000' };
+
+/** Paper colour for the browser's own frame, in the form Next's viewport takes. */
+export function lightPaper(light: Light): string | { media: string; color: string }[] {
+  if (light !== 'auto') return PAPER[light];
+  return [
+    { media: '(prefers-color-scheme: light)', color: PAPER.day },
+    { media: '(prefers-color-scheme: dark)', color: PAPER.dark },
+  ];
+}
