@@ -1,0 +1,118 @@
+import { WEAPONS, type Weapon } from '../types';
+import { ydToM } from '../units';
+
+/** Hours in which the club allows a shot, counted from the sun. The club states it; nothing here says what is legal. */
+export interface LegalLightRule {
+  name: string;
+  minutesBeforeSunrise: number;
+  minutesAfterSunset: number;
+  source: string;
+  /** Day on which an officer stated it, YYYY-MM-DD. */
+  statedOn: string;
+}
+
+export interface WindowHours {
+  morning: { startMinutesFromSunrise: number; endClock: string };
+  evening: { startClock: string; endMinutesFromSunset: number };
+}
+
+export interface Season {
+  id: string;
+  name: string;
+  weapons: Weapon[];
+  /** Both days are in the season. */
+  fromDay: string;
+  toDay: string;
+  /** Name of one of the club's legal-light rules. */
+  legalLightName?: string | null;
+}
+
+/** 'hunt_time': only within so many hours of the window's start, and one stand at a time. */
+export type ClaimAhead = { kind: 'days'; days: number } | { kind: 'hunt_time'; hours: number };
+
+export interface ClosedDays {
+  fromDay: string;
+  toDay: string;
+  reason: string;
+}
+
+export const SIGHTINGS_SEEN_BY = ['all', 'officers', 'after_season'] as const;
+export type SightingsSeenBy = (typeof SIGHTINGS_SEEN_BY)[number];
+
+export const CALENDAR_PRIVACY = ['names_and_stands', 'names_only', 'busy_only'] as const;
+export type CalendarPrivacy = (typeof CALENDAR_PRIVACY)[number];
+
+export interface OrangeRule {
+  text: string;
+  source: string;
+  statedOn: string;
+}
+
+/** Everything a club decides for itself about booking. null: the club sets no such limit. */
+export interface ClubRules {
+  legalLight: LegalLightRule[];
+  windowHours: WindowHours;
+  /** Empty: no season dates are set and every day is open. */
+  seasons: Season[];
+  claimAhead: ClaimAhead;
+  maxLiveClaims: number | null;
+  /** Minutes after a window's start at which an unsigned claim lapses. */
+  holdMinutes: number | null;
+  restDaysDefault: number;
+  mostSitsPerMemberSeason: number | null;
+  /** Least distance between two occupied stands; of two weapons the wider one counts. 0: none. */
+  spacingM: Record<Weapon, number>;
+  /** No walking within this of an occupied stand. 0: none. */
+  passThroughM: number;
+  guestDaysPerSeason: number | null;
+  guestsAtOnce: number;
+  closedDays: ClosedDays[];
+  /** After the end of the window, before a sit counts as overdue. */
+  backByMinutes: number;
+  sightingsSeenBy: SightingsSeenBy;
+  calendarPrivacy: CalendarPrivacy;
+  /** A member at the gate may take a free stand whose window has begun. */
+  walkUpSits: boolean;
+  orangeRule: OrangeRule | null;
+}
+
+/** 300 yd is the spacing found most often in clubs' posted rules, whatever the weapon (practice). */
+const DEFAULT_SPACING_M = ydToM(300);
+
+/** Where clubs differ these follow the commonest posted rule; the rest are our choice. Three rest days: practice. */
+export const DEFAULT_CLUB_RULES: ClubRules = {
+  legalLight: [],
+  windowHours: {
+    morning: { startMinutesFromSunrise: -30, endClock: '11:00' },
+    evening: { startClock: '14:30', endMinutesFromSunset: 30 },
+  },
+  seasons: [],
+  claimAhead: { kind: 'days', days: 14 },
+  maxLiveClaims: null,
+  holdMinutes: null,
+  restDaysDefault: 3,
+  mostSitsPerMemberSeason: null,
+  spacingM: {
+    bow: DEFAULT_SPACING_M,
+    crossbow: DEFAULT_SPACING_M,
+    muzzleloader: DEFAULT_SPACING_M,
+    shotgun: DEFAULT_SPACING_M,
+    rifle: DEFAULT_SPACING_M,
+  },
+  passThroughM: ydToM(100),
+  guestDaysPerSeason: 5,
+  guestsAtOnce: 1,
+  closedDays: [],
+  backByMinutes: 60,
+  sightingsSeenBy: 'all',
+  calendarPrivacy: 'names_and_stands',
+  walkUpSits: true,
+  orangeRule: null,
+};
+
+/** The spacing that holds between two sits; a weapon not said is taken as the one with the widest. */
+export function spacingBetweenM(rules: ClubRules, a: Weapon | null, b: Weapon | null): number {
+  const of = (weapon: Weapon | null) =>
+    weapon === null ? Math.max(...WEAPONS.map((w) => rules.spacingM[w])) : rules.spacingM[weapon];
+  return Math.max(of(a), of(b));
+}
