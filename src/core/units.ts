@@ -65,3 +65,9 @@ export function formatTemp(c: number, units: Units): string {
 export function formatArea(m2: number, units: Units): string {
   return units === 'us' ? `${m2ToAcre(m2).toFixed(1)} acres` : `${m2ToHa(m2).toFixed(1)} ha`;
 }
+
+/** A distance that a rule compares: a tenth of a yard or metre, rounded down so that a short one never reads as enough. */
+export function formatExactDistance(m: number, units: Units): string {
+  const value = units === 'us' ? mToYd(m) : m;
+  return `${Math.floor((value + 1e-6) * 10) / 10} ${units === 'us' ? 'yd' : 'm'}`;
+}

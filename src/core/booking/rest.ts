@@ -1,0 +1,58 @@
+import { addDays, daysBetween, formatDay } from '../day-time';
+import type { Gate } from '../types';
+import type { OtherSit } from './booking-types';
+
+/**
+ * Rest is counted in full days after the day of a sit: a sit on Saturday the 7th with 3 rest days leaves the stand resting
+ * on the 8th, 9th and 10th and ready on the 11th. Any number of sits on one day are one day's disturbance.
+ */
+function restsBetween(a: string, b: string, restDays: number): boolean {
+  const apart = Math.abs(daysBetween(a, b));
+  return apart > 0 && apart <= restDays;
+}
+
+/** The first day on or after `day` that breaks no rest, before or after it, of the days sat. */
+export function firstRestedDay(input: { restDays: number; sitDays: readonly string[]; day: string }): string {
+  let day = input.day;
+  while (input.sitDays.some((sat) => restsBetween(sat, day, input.restDays))) day = addDays(day, 1);
+  return day;
+}
+
+/** The last day on which the stand still rests from earlier sits, as seen from `day`; null when it is ready on that day. */
+export function restingUntil(input: { restDays: number; sitDays: readonly string[]; day: string }): string | null {
+  const last = input.sitDays
+    .filter((sat) => sat < input.day)
+    .sort()
+    .at(-1);
+  if (last === undefined || !restsBetween(last, input.day, input.restDays)) return null;
+  return addDays(last, input.restDays);
+}
+
+/** Rest both ways: the day may not fall in the rest of an earlier sit, nor put a later one into its own. */
+export function restGates(input: {
+  standName: string;
+  restDays: number;
+  day: string;
+  sits: readonly Pick<OtherSit, 'day' | 'memberName'>[];
+}): Gate[] {
+  const { standName, restDays, day, sits } = input;
+  const clashing = sits
+    .filter((sit) => restsBetween(sit.day, day, restDays))
+    .sort((a, b) => a.day.localeCompare(b.day) || a.memberName.localeCompare(b.memberName));
+  if (clashing.length === 0) return [];
+  const endsOn = firstRestedDay({ restDays, sitDays: sits.map((sit) => sit.day), day });
+  const rule = `${restDays} full ${restDays === 1 ? 'day' : 'days'} of rest`;
+  const gates: Gate[] = [];
+  const earlier = clashing.filter((sit) => sit.day < day).at(-1);
+  if (earlier) {
+    const ready = formatDay(addDays(earlier.day, restDays + 1));
+    const text = `${standName} is resting: ${earlier.memberName} sat there on ${formatDay(earlier.day)}. The rule is ${rule}, so it is ready on ${ready}.`;
+    gates.push({ code: 'resting', text, endsOn });
+  }
+  const later = clashing.find((sit) => sit.day > day);
+  if (later) {
+    const text = `${standName} is booked by ${later.memberName} on ${formatDay(later.day)}. The rule is ${rule}, and a sit on ${formatDay(day)} would break it.`;
+    gates.push({ code: 'breaks_later_rest', text, endsOn });
+  }
+  return gates;
+}

@@ -1,0 +1,70 @@
+import { formatDay } from '../day-time';
+import type { Gate, Weapon } from '../types';
+import type { ClubRules, LegalLightRule, Season } from './rules';
+
+const WEAPON_WORDS: Record<Weapon, string> = {
+  bow: 'bow',
+  crossbow: 'crossbow',
+  muzzleloader: 'muzzleloader',
+  shotgun: 'shotgun',
+  rifle: 'rifle',
+};
+
+/** A weapon in plain words. */
+export function weaponWord(weapon: Weapon): string {
+  return WEAPON_WORDS[weapon];
+}
+
+/** The seasons open on a day, for a weapon or (null) for any. */
+export function openSeasons(seasons: readonly Season[], day: string, weapon: Weapon | null): Season[] {
+  return seasons.filter((s) => s.fromDay <= day && day <= s.toDay && (weapon === null || s.weapons.includes(weapon)));
+}
+
+/** First day after `day` on which a season for the weapon is open; null when none is set. */
+function nextOpenDay(seasons: readonly Season[], day: string, weapon: Weapon | null): string | null {
+  const starts = seasons
+    .filter((s) => s.fromDay > day && s.fromDay <= s.toDay && (weapon === null || s.weapons.includes(weapon)))
+    .map((s) => s.fromDay)
+    .sort();
+  return starts[0] ?? null;
+}
+
+/** Season dates as the club set them; a club that set none is always open. */
+export function seasonGates(rules: Pick<ClubRules, 'seasons'>, day: string, weapon: Weapon | null): Gate[] {
+  const { seasons } = rules;
+  if (seasons.length === 0 || openSeasons(seasons, day, weapon).length > 0) return [];
+  const next = nextOpenDay(seasons, day, weapon);
+  const opens = next === null ? 'No later season is set.' : `The next opens on ${formatDay(next, true)}.`;
+  const open = openSeasons(seasons, day, null)
+    .map((s) => s.name)
+    .join(', ');
+  const what =
+    weapon !== null && open !== ''
+      ? `${formatDay(day)} is in ${open}, which does not take the ${weaponWord(weapon)}.`
+      : `${formatDay(day)} is out of season${weapon === null ? '' : ` for the ${weaponWord(weapon)}`} by the club's dates.`;
+  return [{ code: 'out_of_season', text: `${what} ${opens}`, endsOn: next }];
+}
+
+/** Weapons the stand is set up for. */
+export function weaponGates(stand: { name: string; weapons: readonly Weapon[] }, weapon: Weapon | null): Gate[] {
+  if (weapon === null || stand.weapons.includes(weapon)) return [];
+  const allowed = stand.weapons.length === 0 ? 'none' : stand.weapons.map(weaponWord).join(', ');
+  const text = `${stand.name} is not for the ${weaponWord(weapon)}: weapons allowed there are ${allowed}.`;
+  return [{ code: 'weapon', text, endsOn: null }];
+}
+
+/**
+ * The club's legal-light rule of a day: that of the first open season which names one, else the club's only rule; null
+ * when the club has said nothing that settles it.
+ */
+export function legalLightRuleOf(
+  rules: Pick<ClubRules, 'seasons' | 'legalLight'>,
+  day: string,
+  weapon: Weapon | null,
+): LegalLightRule | null {
+  for (const season of openSeasons(rules.seasons, day, weapon)) {
+    const rule = rules.legalLight.find((r) => r.name === season.legalLightName);
+    if (rule) return rule;
+  }
+  return rules.legalLight.length === 1 ? (rules.legalLight[0] ?? null) : null;
+}
