@@ -1,0 +1,62 @@
+import { makeHostedWeather } from './hosted';
+import { type WeatherPort, weatherFailure } from './port';
+import { makeReplayWeather } from './replay';
+
+export interface WeatherSettings {
+  /** fake, hosted or replay:FILE. */
+  weather: string;
+  weatherForecastUrl?: string | undefined;
+  weatherEnsembleUrl?: string | undefined;
+  weatherApiKey?: string | undefined;
+}
+
+const REPLAY = 'replay:';
+
+/** The weather a setting names. `issuedAt` is for replays: when their hours count as forecast (default: now). */
+export function chooseWeather(
+  settings: WeatherSettings,
+  options: { now?: () => number; issuedAt?: () => number } = {},
+): WeatherPort {
+  const now = options.now ?? Date.now;
+  if (settings.weather.startsWith(REPLAY)) {
+    return makeReplayWeather({ file: settings.weather.slice(REPLAY.length), issuedAt: options.issuedAt ?? now });
+  }
+  if (settings.weather === 'hosted') return hosted(settings, now);
+  return fake(now);
+}
+
+function hosted(settings: WeatherSettings, now: () => number): WeatherPort {
+  const customer = settings.weatherApiKey ? 'customer-' : '';
+  return makeHostedWeather({
+    forecastUrl: settings.weatherForecastUrl ?? `https://${customer}api.open-meteo.com/v1/forecast`,
+    ensembleUrl: settings.weatherEnsembleUrl ?? `https://${customer}ensemble-api.open-meteo.com/v1/ensemble`,
+    apiKey: settings.weatherApiKey,
+    source: 'hosted',
+    label: 'Open-Meteo',
+    now,
+  });
+}
+
+/** The hosted adapter pointed at made weather on this machine, whose server starts with the first request. */
+function fake(now: () => number): WeatherPort {
+  return {
+    source: 'fake',
+    forecast: async (place, signal) => {
+      let url: string;
+      try {
+        const { serveFakeWeather } = await import('./fake/serve');
+        url = await serveFakeWeather(now);
+      } catch {
+        return weatherFailure('unavailable', 'The made weather could not be started on this machine.');
+      }
+      const port = makeHostedWeather({
+        forecastUrl: `${url}/v1/forecast`,
+        ensembleUrl: `${url}/v1/ensemble`,
+        source: 'fake',
+        label: 'Made weather (no real forecast)',
+        now,
+      });
+      return port.forecast(place, signal);
+    },
+  };
+}

@@ -1,0 +1,27 @@
+import type { Forecast } from '@/core/types';
+
+export interface WeatherPlace {
+  lat: number;
+  lon: number;
+}
+
+export type WeatherFailure = {
+  ok: false;
+  /** unavailable: no answer; bad_answer: an answer that cannot be used; limit: asked too often. */
+  reason: 'unavailable' | 'bad_answer' | 'limit';
+  /** Plain words for people; holds no key and no address. */
+  message: string;
+};
+
+export type WeatherResult = { ok: true; forecast: Forecast } | WeatherFailure;
+
+/** Where forecasts come from. An answer from it was checked; it never throws. */
+export interface WeatherPort {
+  /** The setting that chose it: fake, hosted or replay:FILE. */
+  readonly source: string;
+  forecast(place: WeatherPlace, signal?: AbortSignal): Promise<WeatherResult>;
+}
+
+export function weatherFailure(reason: WeatherFailure['reason'], message: string): WeatherFailure {
+  return { ok: false, reason, message };
+}

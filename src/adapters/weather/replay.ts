@@ -1,0 +1,53 @@
+import { readFile } from 'node:fs/promises';
+import type { Forecast, WeatherHour } from '@/core/types';
+import { type WeatherPort, weatherFailure } from './port';
+import { parseReplayCsv } from './replay-csv';
+
+export interface ReplayOptions {
+  file: string;
+  /** The instant at which the hours count as having been forecast; the lead of each hour is taken from it. */
+  issuedAt: () => number;
+  /** Hours kept, both ends included; none given keeps all. */
+  fromAt?: number | undefined;
+  toAt?: number | undefined;
+}
+
+/** Observed hours played as the forecast that somebody might have had at `issuedAt`. No members: it is one course of the wind. */
+export function replayForecast(
+  hours: WeatherHour[],
+  play: { issuedAt: number; label: string; fromAt?: number | undefined; toAt?: number | undefined },
+): Forecast {
+  const fromAt = play.fromAt ?? Number.NEGATIVE_INFINITY;
+  const toAt = play.toAt ?? Number.POSITIVE_INFINITY;
+  return {
+    issuedAt: play.issuedAt,
+    fetchedAt: play.issuedAt,
+    source: play.label,
+    hours: hours.filter((hour) => hour.at >= fromAt && hour.at <= toAt),
+    members: [],
+  };
+}
+
+/** A file of hourly observations in place of a weather service: the same hours at every place. */
+export function makeReplayWeather(options: ReplayOptions): WeatherPort {
+  return {
+    source: `replay:${options.file}`,
+    forecast: async (_place, signal) => {
+      let text: string;
+      try {
+        text = await readFile(options.file, { encoding: 'utf8', ...(signal ? { signal } : {}) });
+      } catch {
+        return weatherFailure('unavailable', `The file ${options.file} cannot be read.`);
+      }
+      const { hours, problems } = parseReplayCsv(text);
+      if (hours.length === 0) {
+        const first = problems[0];
+        const why = first ? ` Line ${first.line}: ${first.message}` : '';
+        return weatherFailure('bad_answer', `The file ${options.file} holds no hours.${why}`);
+      }
+      const { fromAt, toAt } = options;
+      const label = `Replay of ${options.file.split(/[\\/]/).at(-1)}`;
+      return { ok: true, forecast: replayForecast(hours, { issuedAt: options.issuedAt(), label, fromAt, toAt }) };
+    },
+  };
+}
