@@ -1,0 +1,6 @@
+export * from './accounts';
+export * from './bookings';
+export * from './clubs';
+export * from './ground';
+export * from './operations';
+export * from './weather';

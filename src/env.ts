@@ -1,0 +1,89 @@
+import { z } from 'zod';
+
+/** The one reader of the process environment. Each variable here stands in .env.example (a test compares them). */
+const optional = z
+  .string()
+  .optional()
+  .transform((text) => (text?.trim() ? text.trim() : undefined));
+
+const flag = (fallback: boolean) =>
+  optional.transform((text, ctx) => {
+    if (text === undefined) return fallback;
+    if (['1', 'true', 'yes', 'on'].includes(text.toLowerCase())) return true;
+    if (['0', 'false', 'no', 'off'].includes(text.toLowerCase())) return false;
+    ctx.addIssue({ code: 'custom', message: `is "${text}"; write 1 or 0` });
+    return z.NEVER;
+  });
+
+const url = (protocols: string[]) =>
+  optional.superRefine((text, ctx) => {
+    if (text === undefined) return;
+    const parsed = URL.canParse(text) ? new URL(text) : null;
+    if (!parsed || !protocols.includes(parsed.protocol)) {
+      ctx.addIssue({
+        code: 'custom',
+        message: `is "${text}"; write an address that starts with ${protocols.join(' or ')}`,
+      });
+    }
+  });
+
+export const environmentSchema = z.object({
+  NODE_ENV: optional,
+  PORT: optional.transform((text, ctx) => {
+    const port = Number(text ?? '3000');
+    if (!Number.isInteger(port) || port < 1 || port > 65535) {
+      ctx.addIssue({ code: 'custom', message: `is "${text}"; write a port number from 1 to 65535` });
+      return z.NEVER;
+    }
+    return port;
+  }),
+  APP_URL: url(['http:', 'https:']),
+  DATABASE_URL: url(['file:', 'libsql:', 'http:', 'https:']),
+  DATABASE_TOKEN: optional,
+  WEATHER: optional.superRefine((text, ctx) => {
+    if (text === undefined || text === 'fake' || text === 'hosted' || /^replay:.+/.test(text)) return;
+    ctx.addIssue({ code: 'custom', message: `is "${text}"; write fake, hosted or replay:FILE` });
+  }),
+  WEATHER_FORECAST_URL: url(['http:', 'https:']),
+  WEATHER_ENSEMBLE_URL: url(['http:', 'https:']),
+  WEATHER_API_KEY: optional,
+  SMTP_URL: url(['smtp:', 'smtps:']),
+  MAIL_FROM: optional,
+  DEV_PAGES: flag(false),
+  RUN_JOBS: flag(true),
+  LOG_LEVEL: optional,
+});
+
+export class EnvironmentError extends Error {}
+
+export function readEnvironment(source: Record<string, string | undefined>) {
+  const parsed = environmentSchema.safeParse(source);
+  if (!parsed.success) {
+    const lines = parsed.error.issues.map((issue) => `  ${issue.path.join('.')} ${issue.message}`);
+    throw new EnvironmentError(`These settings cannot be used:\n${lines.join('\n')}\nSee .env.example.`);
+  }
+  const set = parsed.data;
+  const production = set.NODE_ENV === 'production';
+  return {
+    production,
+    port: set.PORT,
+    appUrl: (set.APP_URL ?? `http://127.0.0.1:${set.PORT}`).replace(/\/$/, ''),
+    databaseUrl: set.DATABASE_URL ?? 'file:data/windrest.db',
+    databaseToken: set.DATABASE_TOKEN,
+    weather: set.WEATHER ?? 'fake',
+    weatherForecastUrl: set.WEATHER_FORECAST_URL,
+    weatherEnsembleUrl: set.WEATHER_ENSEMBLE_URL,
+    weatherApiKey: set.WEATHER_API_KEY,
+    /** None: the fake keeps every message in the database. */
+    smtpUrl: set.SMTP_URL,
+    mailFrom: set.MAIL_FROM ?? 'Windrest <windrest@localhost>',
+    /** Pages under /dev: the kept mail and the parts of the look. */
+    devPages: set.DEV_PAGES || !production,
+    runJobs: set.RUN_JOBS,
+    logLevel: set.LOG_LEVEL ?? (set.NODE_ENV === 'test' ? 'silent' : 'info'),
+  };
+}
+
+export type Environment = ReturnType<typeof readEnvironment>;
+
+export const env: Environment = readEnvironment(process.env);
