@@ -85,10 +85,18 @@ export function cautionsFor(input: CautionInput): Caution[] {
   const cold = coldCaution(input);
   if (cold) found.push(cold);
   if (input.forecastAgeHours === null) {
-    found.push({ code: 'no_forecast', level: 'caution', text: 'No forecast: ranked by arcs, rest and the way in only' });
+    found.push({
+      code: 'no_forecast',
+      level: 'caution',
+      text: 'No forecast: ranked by arcs, rest and the way in only',
+    });
   } else if (input.forecastAgeHours > input.staleHours) {
     const hours = Math.round(input.forecastAgeHours);
-    found.push({ code: 'stale_forecast', level: 'caution', text: `The forecast is ${hours} h old: check the wind yourself` });
+    found.push({
+      code: 'stale_forecast',
+      level: 'caution',
+      text: `The forecast is ${hours} h old: check the wind yourself`,
+    });
   }
   if (raised) found.push({ code: 'harness', level: 'note', text: 'Harness on and tied in from ground to ground' });
   if (input.orangeRule) found.push({ code: 'orange', level: 'note', text: input.orangeRule });

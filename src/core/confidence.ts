@@ -34,6 +34,7 @@ export function confidenceFor(trust: ForecastTrust | null, now: number, s: Score
   if (spread <= s.fairSpreadDeg && trust.leadHours <= s.fairLeadHours) {
     return { level: 'fair', text: `Forecast ${Math.round(trust.leadHours)} h ahead; ${about}`, ...base };
   }
-  const why = spread > s.fairSpreadDeg ? 'Wind may come from almost anywhere' : `${Math.round(trust.leadHours / 24)} days ahead`;
+  const why =
+    spread > s.fairSpreadDeg ? 'Wind may come from almost anywhere' : `${Math.round(trust.leadHours / 24)} days ahead`;
   return { level: 'low', text: `${why}; ${about}`, ...base };
 }

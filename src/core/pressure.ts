@@ -88,7 +88,12 @@ export function pressed(pressure: number, s: PressureSettings): number {
  * Factor (1 - mostCut to 1) on promise. `dayShare` and `twilightShare` are the shares of the sit's promise that fall in full
  * daylight and in twilight.
  */
-export function pressureOnPromise(pressure: number, dayShare: number, twilightShare: number, s: PressureSettings): number {
+export function pressureOnPromise(
+  pressure: number,
+  dayShare: number,
+  twilightShare: number,
+  s: PressureSettings,
+): number {
   return 1 - s.mostCut * pressed(pressure, s) * Math.min(1, dayShare + s.twilightShare * twilightShare);
 }
 

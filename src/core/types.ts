@@ -302,6 +302,8 @@ export interface Verdict {
   approachAlternatives: ApproachOption[];
   /** Pressure left near the stand, 0 (none) upwards. */
   pressure: number;
+  /** Mean direction of the wind over the sit; null: none, or no forecast. */
+  meanFromDeg?: number | null;
   reasons: Reason[];
   counterfactuals: Counterfactual[];
   cautions: Caution[];

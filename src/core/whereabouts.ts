@@ -1,4 +1,11 @@
-import { FEATURE_KINDS, type FeatureKind, type ScoredFeature, TIMES_OF_DAY, type TimeOfDay, type UseTable } from './types';
+import {
+  FEATURE_KINDS,
+  type FeatureKind,
+  type ScoredFeature,
+  TIMES_OF_DAY,
+  type TimeOfDay,
+  type UseTable,
+} from './types';
 
 const MIN = 60_000;
 
@@ -24,7 +31,14 @@ export interface WhereaboutsSettings {
 }
 
 function table(...shares: [number, number, number, number, number, number]): UseTable {
-  return { night: shares[0], dawn: shares[1], morning: shares[2], midday: shares[3], afternoon: shares[4], dusk: shares[5] };
+  return {
+    night: shares[0],
+    dawn: shares[1],
+    morning: shares[2],
+    midday: shares[3],
+    afternoon: shares[4],
+    dusk: shares[5],
+  };
 }
 
 /**

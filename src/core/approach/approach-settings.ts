@@ -3,12 +3,14 @@ export interface ApproachSettings {
   vehicleSpeedMps: number;
   /** Mean height of a walking person's scent above ground, metres. */
   sourceHeightM: number;
+  /** Wind at walking height as a share of the open wind at 10 m. */
+  groundWindShare: number;
   /** Spacing of the points at which a walk is looked at, metres. */
   spacingM: number;
   /** No scent of a walk is followed beyond this, metres. */
   scentReachM: number;
-  /** Walking by is brief: this share of the chance of a half hour's stay at the worst point. */
-  passingShare: number;
+  /** Minutes for which a passing walker counts as standing at the worst point of his way, for a feature. */
+  passingMinutes: number;
   /** Chance of being noticed by sight or sound at no distance, and the distance at which nothing is left, metres. */
   seenNearChance: number;
   seenReachM: number;
@@ -36,9 +38,10 @@ export const DEFAULT_APPROACH: ApproachSettings = {
   walkingSpeedMps: 1,
   vehicleSpeedMps: 4,
   sourceHeightM: 1,
+  groundWindShare: 0.6,
   spacingM: 40,
   scentReachM: 400,
-  passingShare: 0.5,
+  passingMinutes: 15,
   seenNearChance: 0.7,
   seenReachM: 400,
   heardShare: 0.5,

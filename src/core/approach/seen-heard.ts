@@ -18,6 +18,11 @@ export function senseFactor(dark: number, windSpeedMps: number | null, s: Approa
 }
 
 /** Chance (0-1) that a deer at this distance notices a person walking by. */
-export function seenHeardChance(metres: number, dark: number, windSpeedMps: number | null, s: ApproachSettings): number {
+export function seenHeardChance(
+  metres: number,
+  dark: number,
+  windSpeedMps: number | null,
+  s: ApproachSettings,
+): number {
   return s.seenNearChance * seenFalloff(metres, s) * senseFactor(dark, windSpeedMps, s);
 }

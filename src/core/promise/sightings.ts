@@ -16,7 +16,11 @@ export function clubRate(log: StandSightings[], s: PromiseSettings): number {
  * A stand's deer an hour, shrunk to the club's: the mean of a gamma with the club's rate as prior, worth so many hours, after a Poisson count.
  * Few hours stay near the club's mean; many hours stand on their own.
  */
-export function shrunkRate(own: { deer: number; hours: number } | null, clubRatePerHour: number, priorHours: number): number {
+export function shrunkRate(
+  own: { deer: number; hours: number } | null,
+  clubRatePerHour: number,
+  priorHours: number,
+): number {
   const deer = Math.max(0, own?.deer ?? 0);
   const hours = Math.max(0, own?.hours ?? 0);
   return (deer + clubRatePerHour * priorHours) / (hours + priorHours);

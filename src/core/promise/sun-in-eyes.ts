@@ -9,7 +9,12 @@ export interface LowSunMinute {
 }
 
 /** 0-1: how far the sun stands in the sitter's eyes; 1 straight ahead on the horizon. Facing null: he turns away from it. */
-export function sunInEyes(facingDeg: number | null, altitudeDeg: number, azimuthDeg: number, s: PromiseSettings): number {
+export function sunInEyes(
+  facingDeg: number | null,
+  altitudeDeg: number,
+  azimuthDeg: number,
+  s: PromiseSettings,
+): number {
   if (facingDeg === null || altitudeDeg <= -0.3 || altitudeDeg >= s.sunAltitudeDeg) return 0;
   const off = apartDeg(facingDeg, azimuthDeg);
   if (off >= s.sunTurnDeg) return 0;

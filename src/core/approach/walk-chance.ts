@@ -1,0 +1,90 @@
+import type { ApproachSettings } from './approach-settings';
+import { senseFactor } from './seen-heard';
+import type { WalkGround } from './walk-ground';
+
+/** Bearing bins of the walk tables: 5 degrees each. */
+export const WALK_BINS = 72;
+
+/** The wind at the moment of a walk: one entry a scenario with a direction, the rest as one with none. */
+export interface WalkWind {
+  /** Position among the bins, 0 to 72. */
+  bins: Float64Array;
+  weights: Float64Array;
+  /** One over the speed at walking height, s/m, of each entry. */
+  perSpeed: Float64Array;
+  anyWeight: number;
+  anyPerSpeed: number;
+  /** Mean open wind, m/s. */
+  speedMps: number;
+  /** 0 (A) to 5 (F). */
+  stability: number;
+}
+
+/** Everything about an instant that a walk needs and that all walks share. */
+export interface WalkMoment {
+  /** 0 (day) to 1 (night). */
+  dark: number;
+  /** Chance (0-1) of deer at each feature. */
+  shares: Float64Array;
+  /** null: no forecast; then only sight and sound count. */
+  wind: WalkWind | null;
+}
+
+export interface WalkChance {
+  /** Chance (0-1) that deer somewhere are alerted by the walk. */
+  chance: number;
+  /** Feature that costs most, and its part; null when none is touched. */
+  worst: { feature: number; chance: number } | null;
+}
+
+/** Turns an index at the worst point of a walk into a chance. */
+export type Saturation = (index: number) => number;
+
+function scentChance(table: Float32Array, slot: number, wind: WalkWind, chanceOf: Saturation): number {
+  const row = slot * WALK_BINS;
+  const { bins, weights, perSpeed } = wind;
+  let sum = 0;
+  for (let i = 0; i < bins.length; i++) {
+    const at = bins[i] as number;
+    const low = Math.floor(at);
+    const share = at - low;
+    const a = table[row + (low % WALK_BINS)] as number;
+    const b = table[row + ((low + 1) % WALK_BINS)] as number;
+    const index = a + (b - a) * share;
+    if (index > 0) sum += (weights[i] as number) * chanceOf(index * (perSpeed[i] as number));
+  }
+  if (wind.anyWeight > 0) {
+    let any = 0;
+    for (let bin = 0; bin < WALK_BINS; bin += 2) {
+      const index = table[row + bin] as number;
+      if (index > 0) any += chanceOf(index * wind.anyPerSpeed);
+    }
+    sum += (wind.anyWeight * any) / (WALK_BINS / 2);
+  }
+  return sum;
+}
+
+/**
+ * Chance that a walk alerts deer: for each feature, deer being there times being winded or noticed at the worst point of the
+ * way; then at least one of them, or of deer nobody has mapped. `table` is the walk's own for the wind's stability class.
+ */
+export function walkChance(
+  ground: WalkGround,
+  table: Float32Array | null,
+  moment: WalkMoment,
+  chanceOf: Saturation,
+  s: ApproachSettings,
+): WalkChance {
+  const sense = s.seenNearChance * senseFactor(moment.dark, moment.wind?.speedMps ?? null, s);
+  let unnoticed = (1 - s.unmappedPer100M) ** (ground.walkedM / 100);
+  let worst: WalkChance['worst'] = null;
+  ground.slots.forEach((slot, i) => {
+    const share = moment.shares[slot.feature] as number;
+    if (share < 0.005) return;
+    const scent = table && moment.wind ? scentChance(table, i, moment.wind, chanceOf) : 0;
+    const part = share * (1 - (1 - scent) * (1 - sense * slot.seen));
+    unnoticed *= 1 - part;
+    if (part > 0 && (worst === null || part > worst.chance)) worst = { feature: slot.feature, chance: part };
+  });
+  return { chance: 1 - unnoticed, worst };
+}

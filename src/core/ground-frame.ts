@@ -1,0 +1,60 @@
+import { buildWalkGround, circleOf, type WalkGround } from './approach/walk-ground';
+import { type NearEvent, nearEvents } from './pressure';
+import { featuresInRange, type InRange } from './promise/in-range';
+import { clubRate, shrunkRate, sightingsFactor } from './promise/sightings';
+import type { GroundInput } from './rank-input';
+import type { ScoredApproach, ScoredStand } from './types';
+
+/** A stand with all about it that does not depend on the hour. */
+export interface StandFrame {
+  stand: ScoredStand;
+  inRange: InRange[];
+  near: NearEvent[];
+  sightings: { factor: number; ratePerHour: number };
+  waysIn: WalkGround[];
+  waysOut: WalkGround[];
+}
+
+/** A club's ground prepared for scoring; good for as long as the input it was made from. */
+export interface GroundFrame {
+  input: GroundInput;
+  clubRatePerHour: number;
+  stands: StandFrame[];
+}
+
+function byStand<T extends { standId: string }>(rows: T[]): Map<string, T[]> {
+  const map = new Map<string, T[]>();
+  for (const row of rows) {
+    const list = map.get(row.standId);
+    if (list) list.push(row);
+    else map.set(row.standId, [row]);
+  }
+  return map;
+}
+
+export function frameGround(input: GroundInput): GroundFrame {
+  const { settings, features } = input;
+  const circles = features.map(circleOf);
+  const approaches = byStand(input.approaches);
+  const logs = new Map(input.sightings.map((row) => [row.standId, row]));
+  const clubRatePerHour = clubRate(input.sightings, settings.promise);
+  const walkOf = (a: ScoredApproach) => buildWalkGround(a, features, circles, settings.approach);
+  const stands = input.stands.map((stand): StandFrame => {
+    const log = logs.get(stand.id) ?? null;
+    const walks = (approaches.get(stand.id) ?? []).filter((a) => a.points.length > 0).map(walkOf);
+    const waysIn = walks.filter((w) => w.approach.direction !== 'out');
+    const waysOut = walks.filter((w) => w.approach.direction !== 'in');
+    return {
+      stand,
+      inRange: featuresInRange(stand, features, input.weapon, settings.promise),
+      near: nearEvents(stand.at, input.events, settings.pressure),
+      sightings: {
+        factor: sightingsFactor(log, clubRatePerHour, settings.promise),
+        ratePerHour: shrunkRate(log, clubRatePerHour, settings.promise.sightingsPriorHours),
+      },
+      waysIn,
+      waysOut,
+    };
+  });
+  return { input, clubRatePerHour, stands };
+}
