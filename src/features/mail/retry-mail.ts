@@ -1,0 +1,27 @@
+import { write } from '@/db/client';
+import { audit } from '@/server/audit';
+import { notFound } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { reviveDead } from './data';
+import type { RetryMailInput } from './retry-mail-schema';
+
+/** Puts a mail that was given up back in the line, as new. */
+export async function retryMail(scope: ClubScope, input: RetryMailInput, now: number): Promise<{ toName: string }> {
+  return write(async (tx) => {
+    const row = await reviveDead(scope, tx, input.id, now);
+    if (!row) throw notFound();
+    await audit(
+      tx,
+      {
+        clubId: scope.club.id,
+        actor: scope.actor,
+        action: 'mail.retried',
+        subjectType: 'mail',
+        subjectId: input.id,
+        summary: `${scope.actor.name} had the mail "${row.subject}" to ${row.toName} sent again.`,
+      },
+      now,
+    );
+    return { toName: row.toName };
+  });
+}
