@@ -1,4 +1,10 @@
+import { type ApproachSettings, DEFAULT_APPROACH } from './approach/approach-settings';
+import { DEFAULT_PRESSURE, type PressureSettings } from './pressure';
+import { DEFAULT_PROMISE, type PromiseSettings } from './promise/promise-settings';
+import { DEFAULT_SCORE, type ScoreSettings } from './score';
+import { HUNT_SETTING_NOTES } from './setting-notes';
 import type { Evidence, ShelterClass } from './types';
+import { DEFAULT_WHEREABOUTS, type WhereaboutsSettings } from './whereabouts';
 
 /** A value at a speed; values between entries are interpolated, ends are held. */
 export interface SpeedPoint {
@@ -80,6 +86,11 @@ export interface ScoringSettings {
   air: AirSettings;
   wind: WindSettings;
   scent: ScentSettings;
+  whereabouts: WhereaboutsSettings;
+  approach: ApproachSettings;
+  pressure: PressureSettings;
+  promise: PromiseSettings;
+  score: ScoreSettings;
 }
 
 export const DEFAULT_SETTINGS: ScoringSettings = {
@@ -115,7 +126,7 @@ export const DEFAULT_SETTINGS: ScoringSettings = {
     errorPerLeadDayDeg: 5,
     errorCapDeg: 90,
     strayShare: 0,
-    scenarioCount: 15,
+    scenarioCount: 11,
     leastMembers: 5,
     scatterCapDeg: 40,
   },
@@ -129,6 +140,11 @@ export const DEFAULT_SETTINGS: ScoringSettings = {
     mostSamples: 12,
     sampleSpacingM: 40,
   },
+  whereabouts: DEFAULT_WHEREABOUTS,
+  approach: DEFAULT_APPROACH,
+  pressure: DEFAULT_PRESSURE,
+  promise: DEFAULT_PROMISE,
+  score: DEFAULT_SCORE,
 };
 
 export interface SettingNote {
@@ -140,7 +156,10 @@ export interface SettingNote {
 export const SETTING_NOTES: Record<string, SettingNote> = {
   'air.stepMinutes': { evidence: 'our choice', note: 'Half hours: finer than the forecast, coarse enough to read.' },
   'air.maxGapHours': { evidence: 'our choice', note: 'Longer gaps are shown as no forecast.' },
-  'air.calmMps': { evidence: 'standard', note: 'Below the start speed of common vane-and-cup gauges (EPA-454/R-99-005).' },
+  'air.calmMps': {
+    evidence: 'standard',
+    note: 'Below the start speed of common vane-and-cup gauges (EPA-454/R-99-005).',
+  },
   'air.cancelShare': { evidence: 'our choice', note: 'Two hours of opposed wind leave no direction between them.' },
   'air.cloudWhenUnknownPercent': { evidence: 'our choice', note: 'Half cover when the forecast gives no cloud.' },
   'air.shelterShare.*': {
@@ -155,21 +174,37 @@ export const SETTING_NOTES: Record<string, SettingNote> = {
     evidence: 'our choice',
     note: 'Consistent with Lavdas (38 % within 22.5 degrees) and MAE near 30 degrees of good models; under 2 m/s all but uniform.',
   },
-  'wind.errorPerLeadDayDeg': { evidence: 'our choice', note: 'No published table of direction error by lead was found.' },
+  'wind.errorPerLeadDayDeg': {
+    evidence: 'our choice',
+    note: 'No published table of direction error by lead was found.',
+  },
   'wind.errorCapDeg': { evidence: 'our choice', note: 'Past this the forecast says next to nothing.' },
-  'wind.strayShare': { evidence: 'study', note: 'Forecast errors have fat tails (Lavdas: 79 % within 67.5 degrees). Zero unless tuned.' },
-  'wind.scenarioCount': { evidence: 'our choice', note: 'Enough for arc shares within 0.01 of the smooth curve.' },
+  'wind.strayShare': {
+    evidence: 'study',
+    note: 'Forecast errors have fat tails (Lavdas: 79 % within 67.5 degrees). Zero unless tuned.',
+  },
+  'wind.scenarioCount': {
+    evidence: 'our choice',
+    note: 'Enough for arc shares within 0.01 of the smooth curve; each stands for a bundle of directions.',
+  },
   'wind.leastMembers': { evidence: 'our choice', note: 'Fewer members than this say too little about spread.' },
   'wind.scatterCapDeg': { evidence: 'our choice', note: 'The 1/V law runs away near zero.' },
   'scent.noseHeightM': { evidence: 'our choice', note: 'Head height of a walking deer.' },
-  'scent.leastSpeedMps': { evidence: 'standard', note: 'EPA: raise speeds below 1 m/s to 1 m/s in steady plume models.' },
+  'scent.leastSpeedMps': {
+    evidence: 'standard',
+    note: 'EPA: raise speeds below 1 m/s to 1 m/s in steady plume models.',
+  },
   'scent.halfAtM': {
     evidence: 'our choice',
     note: 'Practice says disturbance carries 200-400 yards; 300 yards is the middle. No study gives a distance: an index, not a promise.',
   },
   'scent.halfSeatHeightM': { evidence: 'our choice', note: 'A common hang-on height.' },
-  'scent.exposureMinutes': { evidence: 'our choice', note: 'Even odds for a deer that stays two hours at the reference distance.' },
+  'scent.exposureMinutes': {
+    evidence: 'our choice',
+    note: 'Even odds for a deer that stays two hours at the reference distance.',
+  },
   'scent.reachM': { evidence: 'our choice', note: 'Beyond half a mile the index is too small to matter.' },
   'scent.mostSamples': { evidence: 'our choice', note: 'Bounds the work for one feature.' },
   'scent.sampleSpacingM': { evidence: 'our choice', note: 'About the width of a plume at 200 m.' },
+  ...HUNT_SETTING_NOTES,
 };

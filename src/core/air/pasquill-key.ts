@@ -22,23 +22,53 @@ type Column = Exclude<PasquillSky, 'overcast' | 'turn_of_day'>;
 const ROWS: { belowMps: number; classes: Record<Column, Range> }[] = [
   {
     belowMps: 2,
-    classes: { day_strong: one('A'), day_moderate: A_B, day_slight: one('B'), night_cloudy: one('E'), night_clear: one('F') },
+    classes: {
+      day_strong: one('A'),
+      day_moderate: A_B,
+      day_slight: one('B'),
+      night_cloudy: one('E'),
+      night_clear: one('F'),
+    },
   },
   {
     belowMps: 3,
-    classes: { day_strong: A_B, day_moderate: one('B'), day_slight: one('C'), night_cloudy: one('E'), night_clear: one('F') },
+    classes: {
+      day_strong: A_B,
+      day_moderate: one('B'),
+      day_slight: one('C'),
+      night_cloudy: one('E'),
+      night_clear: one('F'),
+    },
   },
   {
     belowMps: 5,
-    classes: { day_strong: one('B'), day_moderate: B_C, day_slight: one('C'), night_cloudy: one('D'), night_clear: one('E') },
+    classes: {
+      day_strong: one('B'),
+      day_moderate: B_C,
+      day_slight: one('C'),
+      night_cloudy: one('D'),
+      night_clear: one('E'),
+    },
   },
   {
     belowMps: 6,
-    classes: { day_strong: one('C'), day_moderate: C_D, day_slight: one('D'), night_cloudy: one('D'), night_clear: one('D') },
+    classes: {
+      day_strong: one('C'),
+      day_moderate: C_D,
+      day_slight: one('D'),
+      night_cloudy: one('D'),
+      night_clear: one('D'),
+    },
   },
   {
     belowMps: Number.POSITIVE_INFINITY,
-    classes: { day_strong: one('C'), day_moderate: one('D'), day_slight: one('D'), night_cloudy: one('D'), night_clear: one('D') },
+    classes: {
+      day_strong: one('C'),
+      day_moderate: one('D'),
+      day_slight: one('D'),
+      night_cloudy: one('D'),
+      night_clear: one('D'),
+    },
   },
 ];
 

@@ -55,6 +55,7 @@ export function netRadiationIndex({ isNight, sunAltitudeDeg, cloudPercent, ceili
   if (isNight) return tenths <= 4 ? -2 : -1;
   const sun = insolationNumber(sunAltitudeDeg);
   if (tenths <= 5) return sun;
-  const less = ceilingFt !== null && ceilingFt < 7000 ? 2 : ceilingFt === null || ceilingFt < 16000 || tenths >= 10 ? 1 : 0;
+  const less =
+    ceilingFt !== null && ceilingFt < 7000 ? 2 : ceilingFt === null || ceilingFt < 16000 || tenths >= 10 ? 1 : 0;
   return INDEX[Math.max(1, sun - less)] ?? 1;
 }
