@@ -62,7 +62,8 @@ export function coveredDeg(arcs: readonly Arc[]): number {
   return mergeArcs(arcs).reduce((sum, arc) => sum + arcWidthDeg(arc), 0);
 }
 
-function compassSpan(arc: Arc): string {
+/** An arc as compass points alone: 'NW-N', 'W', 'any'. */
+export function compassSpan(arc: Arc): string {
   const width = arcWidthDeg(arc);
   if (width === 360) return 'any';
   const first = sectorOf(arc.fromDeg);

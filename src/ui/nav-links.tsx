@@ -1,0 +1,116 @@
+'use client';
+
+import { Menu as MenuSign } from 'lucide-react';
+import Link from 'next/link';
+import { usePathname } from 'next/navigation';
+import { type ReactNode, useState } from 'react';
+import { findCurrent } from './current-path';
+import { Dialog } from './dialog';
+import { joinClasses } from './join-classes';
+
+export interface NavItem {
+  href: string;
+  label: string;
+  /** A lucide icon of 24 px, drawn on the phone's bar. */
+  icon: ReactNode;
+}
+
+function useCurrent(items: readonly NavItem[]): string | null {
+  const hrefs = items.map((item) => item.href);
+  return findCurrent(usePathname(), hrefs);
+}
+
+/** The side rail's list of pages, as a table of contents. */
+export function RailLinks({ items }: { items: readonly NavItem[] }) {
+  const current = useCurrent(items);
+  return (
+    <ul className="divide-y divide-rule border-rule border-y">
+      {items.map((item) => (
+        <li key={item.href}>
+          <Link
+            href={item.href}
+            aria-current={item.href === current ? 'page' : undefined}
+            className="group flex min-h-11 items-center gap-2 py-1.5 pl-2 font-serif no-underline hover:bg-sunk aria-[current=page]:font-semibold"
+          >
+            <span
+              aria-hidden="true"
+              className="h-1 w-0 bg-moss transition-[width] duration-150 group-aria-[current=page]:w-5"
+            />
+            {item.label}
+          </Link>
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+const CELL =
+  'flex min-h-14 w-full flex-col items-center justify-center gap-0.5 border-transparent border-t-[3px] px-1 pb-1 text-ink-soft text-xs no-underline aria-[current=page]:border-moss aria-[current=page]:font-semibold aria-[current=page]:text-ink';
+
+export interface BottomBarProps {
+  items: readonly NavItem[];
+  /** How many stand on the bar; the rest go under More. */
+  onBar?: number;
+  /** Foot of the More sheet: light switch, account. */
+  foot?: ReactNode;
+}
+
+export function BottomBar({ items, onBar = 4, foot }: BottomBarProps) {
+  const current = useCurrent(items);
+  const [open, setOpen] = useState(false);
+  const first = items.slice(0, onBar);
+  const rest = items.slice(onBar);
+  const inRest = rest.some((item) => item.href === current);
+  return (
+    <ul className="grid auto-cols-fr grid-flow-col">
+      {first.map((item) => (
+        <li key={item.href}>
+          <Link href={item.href} aria-current={item.href === current ? 'page' : undefined} className={CELL}>
+            <span aria-hidden="true">{item.icon}</span>
+            {item.label}
+          </Link>
+        </li>
+      ))}
+      {(rest.length > 0 || foot) && (
+        <li>
+          <Dialog
+            title="More"
+            open={open}
+            onOpenChange={setOpen}
+            trigger={
+              <button type="button" className={joinClasses(CELL, inRest && 'border-moss! text-ink')}>
+                <MenuSign aria-hidden="true" />
+                More
+              </button>
+            }
+          >
+            <nav aria-label="More pages">
+              <ul className="divide-y divide-rule">
+                {rest.map((item) => (
+                  <li key={item.href}>
+                    <Link
+                      href={item.href}
+                      onClick={() => setOpen(false)}
+                      aria-current={item.href === current ? 'page' : undefined}
+                      className="flex min-h-12 items-center gap-3 font-serif text-lg no-underline aria-[current=page]:font-semibold"
+                    >
+                      <span aria-hidden="true" className="text-ink-soft">
+                        {item.icon}
+                      </span>
+                      {item.label}
+                    </Link>
+                  </li>
+                ))}
+              </ul>
+            </nav>
+            {foot && (
+              <div className="mt-3 flex flex-wrap items-center justify-between gap-2 border-rule-strong border-t pt-3">
+                {foot}
+              </div>
+            )}
+          </Dialog>
+        </li>
+      )}
+    </ul>
+  );
+}
