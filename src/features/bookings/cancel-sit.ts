@@ -1,0 +1,64 @@
+import { type Tx, write } from '@/db/client';
+import { audit } from '@/server/audit';
+import { AppError, notFound } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { deleteClaims, findSit, type SitDetail, updateSit } from './data';
+import { queueSitMail } from './sit-mails';
+import type { CancelSitInput } from './sit-schema';
+import { clockText, dayAndWindow } from './sit-words';
+
+/** Frees the claims and keeps the record, inside a change of which it is a part (a member removed, a day closed). */
+export async function cancelSitIn(
+  tx: Tx,
+  scope: ClubScope,
+  sit: SitDetail,
+  reason: string | null,
+  now: number,
+): Promise<SitDetail> {
+  const set = {
+    status: 'cancelled' as const,
+    cancelReason: reason,
+    cancelledAt: now,
+    updatedAt: now,
+    sequence: sit.sequence + 1,
+  };
+  await updateSit(scope, tx, sit.id, set);
+  await deleteClaims(scope, tx, sit.id);
+  await audit(
+    tx,
+    {
+      clubId: scope.club.id,
+      actor: scope.actor,
+      action: 'sit.cancelled',
+      subjectType: 'sit',
+      subjectId: sit.id,
+      summary: `Cancelled the sit of ${sit.memberName} at ${sit.standName}: ${dayAndWindow(sit.day, sit.windows, true)}.`,
+      detail: { reason, standId: sit.standId, memberId: sit.memberId, day: sit.day, windows: sit.windows },
+    },
+    now,
+  );
+  const after = { ...sit, ...set };
+  await queueSitMail(tx, scope, 'cancelled', after, now);
+  return after;
+}
+
+/** One's own, or with the permission anybody's and then with a reason. Cancelling twice changes nothing. */
+export async function cancelSit(scope: ClubScope, input: CancelSitInput, now: number): Promise<SitDetail> {
+  return write(async (tx) => {
+    const sit = await findSit(scope, input.sitId, tx);
+    if (!sit) throw notFound();
+    const own = sit.memberId === scope.member.id;
+    if (!own && !scope.can('sits.cancel_any')) {
+      throw new AppError('forbidden', `This is ${sit.memberName}'s sit. Only they or a club admin can cancel it.`);
+    }
+    if (sit.status === 'cancelled') return sit;
+    if (sit.endAt <= now) {
+      throw new AppError('conflict', `This sit ended at ${clockText(sit.endAt, scope.club)}: it stays on record.`);
+    }
+    if (!own && input.reason === '') {
+      const message = `Say why: ${sit.memberName} is told the reason.`;
+      throw new AppError('invalid', message, { fields: { reason: message } });
+    }
+    return cancelSitIn(tx, scope, sit, input.reason === '' ? null : input.reason, now);
+  });
+}

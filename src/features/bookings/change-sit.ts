@@ -1,0 +1,74 @@
+import { isDeepStrictEqual } from 'node:util';
+import { write } from '@/db/client';
+import { audit } from '@/server/audit';
+import { AppError, notFound } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { checkSit, refuseIfAny } from './check-sit';
+import { claimWindows } from './claim-windows';
+import { deleteClaims, findSit, type SitDetail, updateSit } from './data';
+import { queueSitMail } from './sit-mails';
+import type { ChangeSitInput } from './sit-schema';
+import { clockText, dayAndWindow, windowsHeld } from './sit-words';
+
+function refuseChange(scope: ClubScope, sit: SitDetail, sequence: number, now: number): void {
+  if (sit.memberId !== scope.member.id && !scope.can('sits.book_for_others')) {
+    throw new AppError('forbidden', `This is ${sit.memberName}'s sit. Only they or a club admin can change it.`);
+  }
+  if (sit.status === 'cancelled') throw new AppError('conflict', 'This sit was cancelled. Book it anew.');
+  if (sit.endAt <= now) {
+    throw new AppError(
+      'conflict',
+      `This sit ended at ${clockText(sit.endAt, scope.club)}: it stays on record as it is.`,
+    );
+  }
+  if (sit.sequence !== sequence) {
+    throw new AppError('conflict', 'This sit was changed after you opened it. Reload the page to see it as it is now.');
+  }
+}
+
+const HELD = ['standId', 'day', 'windows'] as const;
+const WORDS = ['weapon', 'approachId', 'guests', 'note'] as const;
+
+/** Changes stand, day, window, weapon, way in, guests or note; what stays as it was is not checked anew. */
+export async function changeSit(scope: ClubScope, input: ChangeSitInput, now: number): Promise<SitDetail> {
+  const { sitId, sequence, ...chosen } = input;
+  return write(async (tx) => {
+    const sit = await findSit(scope, sitId, tx);
+    if (!sit) throw notFound();
+    refuseChange(scope, sit, sequence, now);
+    const changed = [...HELD, ...WORDS].filter((name) => !isDeepStrictEqual(sit[name], chosen[name]));
+    if (changed.length === 0) return sit;
+    const moved = HELD.some((name) => changed.includes(name));
+    const checked = await checkSit(scope, tx, { ...chosen, memberId: sit.memberId }, { now, exceptSitId: sit.id });
+    const asksAnew = moved || changed.includes('weapon');
+    const guests = changed.includes('guests');
+    refuseIfAny(checked.refusals.filter(({ about }) => asksAnew || (guests && about === 'guests')));
+    const times = moved ? { startAt: checked.startAt, endAt: checked.endAt } : {};
+    await updateSit(scope, tx, sit.id, { ...chosen, ...times, sequence: sit.sequence + 1, updatedAt: now });
+    if (moved) {
+      await deleteClaims(scope, tx, sit.id);
+      const claimed = { id: sit.id, memberId: sit.memberId, standId: chosen.standId, day: chosen.day };
+      await claimWindows(scope, tx, claimed, windowsHeld(chosen.windows));
+    }
+    await audit(
+      tx,
+      {
+        clubId: scope.club.id,
+        actor: scope.actor,
+        action: 'sit.changed',
+        subjectType: 'sit',
+        subjectId: sit.id,
+        summary: `Changed the sit of ${sit.memberName} at ${sit.standName}, ${dayAndWindow(sit.day, sit.windows, true)}: now ${checked.standName}, ${dayAndWindow(chosen.day, chosen.windows, true)}.`,
+        detail: {
+          before: Object.fromEntries(changed.map((name) => [name, sit[name]])),
+          after: Object.fromEntries(changed.map((name) => [name, chosen[name]])),
+        },
+      },
+      now,
+    );
+    const after = await findSit(scope, sit.id, tx);
+    if (!after) throw notFound();
+    await queueSitMail(tx, scope, 'changed', after, now);
+    return after;
+  });
+}
