@@ -11,7 +11,7 @@ function restsBetween(a: string, b: string, restDays: number): boolean {
   return apart > 0 && apart <= restDays;
 }
 
-/** The first day on or after `day` that breaks no rest, before or after it, of the days sat. */
+/** The first day on or after `day` that breaks no rest of the days sat, before it or after it; a day sat anyway may be it. */
 export function firstRestedDay(input: { restDays: number; sitDays: readonly string[]; day: string }): string {
   let day = input.day;
   while (input.sitDays.some((sat) => restsBetween(sat, day, input.restDays))) day = addDays(day, 1);
@@ -45,8 +45,8 @@ export function restGates(input: {
   const gates: Gate[] = [];
   const earlier = clashing.filter((sit) => sit.day < day).at(-1);
   if (earlier) {
-    const ready = formatDay(addDays(earlier.day, restDays + 1));
-    const text = `${standName} is resting: ${earlier.memberName} sat there on ${formatDay(earlier.day)}. The rule is ${rule}, so it is ready on ${ready}.`;
+    const through = formatDay(addDays(earlier.day, restDays));
+    const text = `${standName} is resting: ${earlier.memberName} sat there on ${formatDay(earlier.day)}. The rule is ${rule}, so it rests through ${through}.`;
     gates.push({ code: 'resting', text, endsOn });
   }
   const later = clashing.find((sit) => sit.day > day);
