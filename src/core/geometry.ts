@@ -19,7 +19,7 @@ export interface LatLon {
   lon: number;
 }
 
-/** Position to local metres about a centre. Good to 0.1 % within 20 km of the centre below 70 degrees of latitude. */
+/** Position to local metres about a centre. Good to 0.1 % within 5 km of the centre below 50 degrees of latitude, a club's ground. */
 export function toLocal(centre: LatLon, at: LatLon): Point {
   const { perLat, perLon } = metresPerDegree(centre.lat);
   const dLon = ((at.lon - centre.lon + 540) % 360) - 180;

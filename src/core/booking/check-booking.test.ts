@@ -1,9 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { bookingCheck, otherSit, PLACE, rulesWith, STAND } from '../../../tests/helpers/booking-check';
 import { addDays, localToUtc } from '../day-time';
 import type { WindowName } from '../types';
 import { checkBooking } from './check-booking';
+import { bookingCheck, otherSit, PLACE, rulesWith, STAND } from './example-booking';
 
 const windowsGen = fc.constantFrom<WindowName[]>(['morning'], ['evening'], ['morning', 'evening']);
 const sitGen = fc

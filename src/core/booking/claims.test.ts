@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import { bookingCheck, otherSit, PLACE, rulesWith, STAND } from '../../../tests/helpers/booking-check';
 import { localToUtc } from '../day-time';
 import { checkBooking } from './check-booking';
+import { bookingCheck, otherSit, PLACE, rulesWith, STAND } from './example-booking';
 
 const codes = (change: Parameters<typeof bookingCheck>[0]) => checkBooking(bookingCheck(change)).map((g) => g.code);
 const atCreek = { standId: STAND.id, standName: STAND.name, standAt: STAND.at };

@@ -1,9 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { bookingCheck, rulesWith } from '../../../tests/helpers/booking-check';
 import { addDays } from '../day-time';
 import type { WindowName } from '../types';
 import { checkBooking } from './check-booking';
+import { bookingCheck, rulesWith } from './example-booking';
 import { countGuestDays, guestDaysLeft } from './guest-days';
 
 const hunt = (day: string, windows: WindowName[], guests = 1) => ({ sitId: `sit_${day}`, day, windows, guests });

@@ -1,10 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { bookingCheck, otherSit, rulesWith, STAND } from '../../../tests/helpers/booking-check';
 import { pointAt } from '../geometry';
 import { WEAPONS } from '../types';
 import { ydToM } from '../units';
 import { checkBooking } from './check-booking';
+import { bookingCheck, otherSit, rulesWith, STAND } from './example-booking';
 import { clearApproaches } from './pass-through';
 import { spacingBetweenM } from './rules';
 

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { bookingCheck, rulesWith, STAND } from '../../../tests/helpers/booking-check';
 import { checkBooking } from './check-booking';
+import { bookingCheck, rulesWith, STAND } from './example-booking';
 import { huntingYear } from './hunting-year';
 import type { LegalLightRule, Season } from './rules';
 import { legalLightRuleOf } from './seasons';

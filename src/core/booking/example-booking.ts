@@ -1,9 +1,10 @@
-import type { BookingCheck, BookingStand, OtherSit } from '@/core/booking/check-booking';
-import { type ClubRules, DEFAULT_CLUB_RULES } from '@/core/booking/rules';
-import { localToUtc } from '@/core/day-time';
-import type { WindowName } from '@/core/types';
-import { sitWindow } from '@/core/windows';
+import { localToUtc } from '../day-time';
+import type { WindowName } from '../types';
+import { sitWindow } from '../windows';
+import type { BookingCheck, BookingStand, OtherSit } from './check-booking';
+import { type ClubRules, DEFAULT_CLUB_RULES } from './rules';
 
+/** An invented booking that breaks no rule, for tests to change one thing at a time. */
 export const PLACE = { lat: 34.1, lon: -84, zone: 'America/New_York' };
 
 /** A rested stand at the club's centre, without limits. */
