@@ -1,0 +1,62 @@
+import { z } from 'zod';
+import { LONGEST_PASSWORD, passwordProblem } from './password-rules';
+
+export const nameField = z
+  .string()
+  .trim()
+  .min(1, 'Write the name your club knows you by.')
+  .max(60, 'Use at most 60 characters.')
+  .refine((name) => !/[\p{Cc}\p{Cf}<>]/u.test(name), 'Use letters, digits and plain signs only.');
+
+export const emailField = z
+  .string()
+  .trim()
+  .toLowerCase()
+  .max(254, 'That is too long for an e-mail address.')
+  .pipe(z.email('Write an e-mail address, such as name@example.com.'));
+
+/** A password as it is asked for, whatever it was when it was set. */
+const givenPassword = z.string().min(1, 'Write your password.').max(1000, 'That is too long for a password.');
+
+/** A new password; its rules need its owner's name and address too. */
+export const newPasswordField = z.string().max(1000, `Use at most ${LONGEST_PASSWORD} characters.`);
+
+const secretField = z.string().regex(/^[\w-]{20,60}$/, 'This link is not whole. Open it from the mail again.');
+
+type Check = (value: { name: string; email: string; password: string }, ctx: z.RefinementCtx) => void;
+
+/** For `superRefine` on any schema with a name, an e-mail address and a new password. */
+export const checkNewPassword: Check = (value, ctx) => {
+  const message = passwordProblem(value.password, value);
+  if (message) ctx.addIssue({ code: 'custom', path: ['password'], message });
+};
+
+export const signUpSchema = z
+  .object({ name: nameField, email: emailField, password: newPasswordField })
+  .superRefine(checkNewPassword);
+export type SignUpInput = z.output<typeof signUpSchema>;
+
+export const signInSchema = z.object({
+  email: emailField,
+  password: givenPassword,
+  next: z.string().max(2000).optional(),
+});
+export type SignInInput = z.output<typeof signInSchema>;
+
+export const forgotSchema = z.object({ email: emailField });
+export type ForgotInput = z.output<typeof forgotSchema>;
+
+export const resetSchema = z.object({ token: secretField, password: newPasswordField });
+export type ResetInput = z.output<typeof resetSchema>;
+
+export const verifySchema = z.object({ token: secretField });
+
+export const changeNameSchema = z.object({ name: nameField });
+export type ChangeNameInput = z.output<typeof changeNameSchema>;
+
+export const changePasswordSchema = z.object({ current: givenPassword, password: newPasswordField });
+export type ChangePasswordInput = z.output<typeof changePasswordSchema>;
+
+export const endSessionSchema = z.object({ id: z.string().min(1).max(100) });
+
+export const nothingSchema = z.object({});

@@ -1,0 +1,15 @@
+import { write } from '@/db/client';
+import type { ChangeNameInput } from './account-schema';
+import { auditAccount } from './audit-account';
+import { updateUser } from './data';
+
+export async function changeName(
+  user: { id: string; name: string },
+  input: ChangeNameInput,
+  now: number,
+): Promise<void> {
+  await write(async (tx) => {
+    await updateUser(tx, user.id, { name: input.name });
+    await auditAccount(tx, user, 'renamed', `${user.name} is now called ${input.name}.`, now);
+  });
+}

@@ -1,0 +1,26 @@
+import { write } from '@/db/client';
+import { AppError } from '@/server/errors';
+import { mailVerifyLink } from './account-mails';
+import { takeMailRate } from './rates';
+
+interface SignedIn {
+  id: string;
+  email: string;
+  name: string;
+  emailVerifiedAt: number | null;
+}
+
+export async function resendVerify(user: SignedIn, source: { address: string }, now: number): Promise<void> {
+  if (user.emailVerifiedAt !== null) throw new AppError('conflict', 'Your e-mail address is confirmed already.');
+  await takeMailRate(user.email, source.address, now);
+  await write((tx) => mailVerifyLink(tx, user, now));
+}
+
+/** Before anything that makes the club write to others. */
+export function requireVerified(user: { emailVerifiedAt: number | null }): void {
+  if (user.emailVerifiedAt !== null) return;
+  throw new AppError(
+    'forbidden',
+    'Confirm your own e-mail address before you invite others: open the link we mailed you, or have it sent again under Account.',
+  );
+}
