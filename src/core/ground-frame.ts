@@ -1,8 +1,10 @@
 import { buildWalkGround, circleOf, type WalkGround } from './approach/walk-ground';
+import { type WalkPlumes, walkPlumes } from './approach/walk-scent';
 import { type NearEvent, nearEvents } from './pressure';
 import { featuresInRange, type InRange } from './promise/in-range';
 import { clubRate, shrunkRate, sightingsFactor } from './promise/sightings';
 import type { GroundInput } from './rank-input';
+import { type SourceGeometry, scentGround, sourceGeometry } from './scent/scent-ground';
 import type { ScoredApproach, ScoredStand } from './types';
 
 /** A stand with all about it that does not depend on the hour. */
@@ -13,6 +15,7 @@ export interface StandFrame {
   sightings: { factor: number; ratePerHour: number };
   waysIn: WalkGround[];
   waysOut: WalkGround[];
+  seat: SourceGeometry;
 }
 
 /** A club's ground prepared for scoring; good for as long as the input it was made from. */
@@ -20,6 +23,7 @@ export interface GroundFrame {
   input: GroundInput;
   clubRatePerHour: number;
   stands: StandFrame[];
+  plumes: WalkPlumes;
 }
 
 function byStand<T extends { standId: string }>(rows: T[]): Map<string, T[]> {
@@ -34,6 +38,7 @@ function byStand<T extends { standId: string }>(rows: T[]): Map<string, T[]> {
 
 export function frameGround(input: GroundInput): GroundFrame {
   const { settings, features } = input;
+  const scent = scentGround(features, settings.scent);
   const circles = features.map(circleOf);
   const approaches = byStand(input.approaches);
   const logs = new Map(input.sightings.map((row) => [row.standId, row]));
@@ -54,7 +59,8 @@ export function frameGround(input: GroundInput): GroundFrame {
       },
       waysIn,
       waysOut,
+      seat: sourceGeometry(scent, stand.at, stand.seatHeightM),
     };
   });
-  return { input, clubRatePerHour, stands };
+  return { input, clubRatePerHour, stands, plumes: walkPlumes(settings.scent, settings.approach) };
 }

@@ -18,7 +18,10 @@ export interface ReasonFacts {
   forecast: boolean;
   topScent: { name: string; chance: number } | null;
   windedChance: number | null;
+  /** null: no way in is drawn. */
   wayName: string | null;
+  outName: string | null;
+  unknownWayChance: number;
   inChance: number;
   inWorst: { name: string; chance: number } | null;
   outChance: number;
@@ -68,8 +71,11 @@ function quietDrafts(f: Factors, x: ReasonFacts): Draft[] {
       'study',
       swap({ walkIn: 1 }),
     );
-    const out = `Walking out by ${x.wayName}: ${percent(x.outChance)}${named(x.outWorst)}`;
+    const out = `Walking out by ${x.outName ?? x.wayName}: ${percent(x.outChance)}${named(x.outWorst)}`;
     add('walk_out', out, 'study', swap({ walkOut: 1 }));
+  } else {
+    const text = `No way in is drawn: ${percent(x.unknownWayChance)} assumed each way`;
+    add('no_way', text, 'our choice', swap({ walkIn: 1, walkOut: 1 }));
   }
   if (f.quiet.pressurePower > 1) {
     const text = `Deer near here were disturbed lately (${x.recentEvents} ${x.recentEvents === 1 ? 'time' : 'times'}): they are alerted sooner`;

@@ -1,3 +1,5 @@
+import { stepStarts } from './air/interpolate';
+import { movementOf } from './promise/promise-factors';
 import type { LowSunMinute } from './promise/sun-in-eyes';
 import type { ScoringSettings } from './settings';
 import { type Place, sunPosition, sunTimes } from './sun';
@@ -10,16 +12,20 @@ const MIN = 60_000;
 export interface WindowFrame {
   window: SitWindow;
   sun: SunMarks;
-  /** Starts of the half hours. */
+  /** Starts of the steps. */
   stepAts: number[];
-  /** Weights of the six times of day at the middle of each half hour. */
+  /** Weights of the six times of day at the middle of each step. */
   times: number[][];
-  /** Chance (0-1) of deer at each feature, by half hour. */
+  /** Chance (0-1) of deer at each feature, by step. */
   shares: Float64Array[];
-  /** Minutes with the sun low enough to blind, and the half hour each falls in. */
+  /** The same as one table: feature by feature, its steps in a row. */
+  deer: Float64Array;
+  /** How much of the sit's promise falls in each step. */
+  moves: number[];
+  /** Minutes with the sun low enough to blind, and the step each falls in. */
   lowSun: (LowSunMinute & { step: number })[];
-  /** Chances of deer at each feature at any instant, worked out once a quarter hour. */
-  sharesAt: (at: number) => Float64Array;
+  /** Darkness (0 day, 1 night) and chances of deer at each feature at any instant, worked out once a quarter hour. */
+  momentAt: (at: number) => { dark: number; shares: Float64Array };
 }
 
 /** Instants the day is cut into for walks: a quarter hour is finer than where deer are is known. */
@@ -29,14 +35,13 @@ export function toQuarter(at: number): number {
   return Math.round(at / QUARTER_MS) * QUARTER_MS;
 }
 
-function lowSunMinutes(window: SitWindow, place: Place, belowDeg: number): WindowFrame['lowSun'] {
+function lowSunMinutes(stepAts: number[], endAt: number, place: Place, belowDeg: number): WindowFrame['lowSun'] {
   const found: WindowFrame['lowSun'] = [];
-  const steps = Math.ceil((window.endAt - window.startAt) / (30 * MIN));
-  for (let step = 0; step < steps; step++) {
-    const from = window.startAt + step * 30 * MIN;
-    const until = Math.min(from + 30 * MIN, window.endAt);
+  for (let step = 0; step < stepAts.length; step++) {
+    const from = stepAts[step] as number;
+    const until = Math.min(stepAts[step + 1] ?? endAt, endAt);
     const ends = [from, until].map((at) => sunPosition(at, place.lat, place.lon).altitudeDeg);
-    // The sun climbs no faster than 15 degrees an hour: a half hour whose ends are both far from low has no low minute.
+    // The sun climbs no faster than 15 degrees an hour: a step whose ends are both far from low has no low minute.
     if (Math.min(...ends) > belowDeg + 8 || Math.max(...ends) < -8) continue;
     for (let at = from; at < until; at += MIN) {
       const sun = sunPosition(at, place.lat, place.lon);
@@ -56,23 +61,34 @@ export function frameWindow(
   const month = Number(window.day.slice(5, 7));
   const uses = features.map((f) => usesOf(f, month, settings.whereabouts));
   const sharesFor = (times: number[]) => Float64Array.from(uses, (use) => shareAt(use, times));
-  const stepAts: number[] = [];
-  for (let at = window.startAt; at < window.endAt && stepAts.length < 200; at += 30 * MIN) stepAts.push(at);
-  const times = stepAts.map((at) => timeWeights(Math.min(at + 15 * MIN, window.endAt), sun));
-  const kept = new Map<number, Float64Array>();
-  const sharesAt = (at: number) => {
+  const { stepMinutes } = settings.air;
+  const stepAts = stepStarts(window.startAt, window.endAt, stepMinutes);
+  const times = stepAts.map((at) => timeWeights(Math.min(at + (stepMinutes * MIN) / 2, window.endAt), sun));
+  const kept = new Map<number, { dark: number; shares: Float64Array }>();
+  const momentAt = (at: number) => {
     const quarter = toQuarter(at);
-    const known = kept.get(quarter) ?? sharesFor(timeWeights(quarter, sun));
-    kept.set(quarter, known);
+    let known = kept.get(quarter);
+    if (!known) {
+      const weights = timeWeights(quarter, sun);
+      known = { dark: weights[0] as number, shares: sharesFor(weights) };
+      kept.set(quarter, known);
+    }
     return known;
   };
+  const shares = times.map(sharesFor);
+  const deer = new Float64Array(features.length * times.length);
+  shares.forEach((row, t) => {
+    for (let f = 0; f < features.length; f++) deer[f * times.length + t] = row[f] as number;
+  });
   return {
     window,
     sun,
     stepAts,
     times,
-    shares: times.map(sharesFor),
-    lowSun: lowSunMinutes(window, place, settings.promise.sunAltitudeDeg),
-    sharesAt,
+    shares,
+    deer,
+    moves: times.map((weights) => movementOf(weights, settings.promise)),
+    lowSun: lowSunMinutes(stepAts, window.endAt, place, settings.promise.sunAltitudeDeg),
+    momentAt,
   };
 }

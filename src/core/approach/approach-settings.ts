@@ -5,6 +5,10 @@ export interface ApproachSettings {
   sourceHeightM: number;
   /** Wind at walking height as a share of the open wind at 10 m. */
   groundWindShare: number;
+  /** Wander of the wind's direction during a walk: sweeps the plume to and fro, degrees. */
+  sweepDeg: number;
+  /** Chance of alerting deer each way where no way in is drawn. */
+  unknownWayChance: number;
   /** Spacing of the points at which a walk is looked at, metres. */
   spacingM: number;
   /** No scent of a walk is followed beyond this, metres. */
@@ -39,6 +43,8 @@ export const DEFAULT_APPROACH: ApproachSettings = {
   vehicleSpeedMps: 4,
   sourceHeightM: 1,
   groundWindShare: 0.6,
+  sweepDeg: 12,
+  unknownWayChance: 0.15,
   spacingM: 40,
   scentReachM: 400,
   passingMinutes: 15,

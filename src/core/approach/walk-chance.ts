@@ -1,3 +1,4 @@
+import { chanceOfExposure } from '../scent/saturate';
 import type { ApproachSettings } from './approach-settings';
 import { senseFactor } from './seen-heard';
 import type { WalkGround } from './walk-ground';
@@ -37,10 +38,7 @@ export interface WalkChance {
   worst: { feature: number; chance: number } | null;
 }
 
-/** Turns an index at the worst point of a walk into a chance. */
-export type Saturation = (index: number) => number;
-
-function scentChance(table: Float32Array, slot: number, wind: WalkWind, chanceOf: Saturation): number {
+function scentChance(table: Float32Array, slot: number, wind: WalkWind): number {
   const row = slot * WALK_BINS;
   const { bins, weights, perSpeed } = wind;
   let sum = 0;
@@ -50,14 +48,14 @@ function scentChance(table: Float32Array, slot: number, wind: WalkWind, chanceOf
     const share = at - low;
     const a = table[row + (low % WALK_BINS)] as number;
     const b = table[row + ((low + 1) % WALK_BINS)] as number;
-    const index = a + (b - a) * share;
-    if (index > 0) sum += (weights[i] as number) * chanceOf(index * (perSpeed[i] as number));
+    const exposure = a + (b - a) * share;
+    if (exposure > 0) sum += (weights[i] as number) * chanceOfExposure(exposure * (perSpeed[i] as number));
   }
   if (wind.anyWeight > 0) {
     let any = 0;
     for (let bin = 0; bin < WALK_BINS; bin += 2) {
-      const index = table[row + bin] as number;
-      if (index > 0) any += chanceOf(index * wind.anyPerSpeed);
+      const exposure = table[row + bin] as number;
+      if (exposure > 0) any += chanceOfExposure(exposure * wind.anyPerSpeed);
     }
     sum += (wind.anyWeight * any) / (WALK_BINS / 2);
   }
@@ -72,7 +70,6 @@ export function walkChance(
   ground: WalkGround,
   table: Float32Array | null,
   moment: WalkMoment,
-  chanceOf: Saturation,
   s: ApproachSettings,
 ): WalkChance {
   const sense = s.seenNearChance * senseFactor(moment.dark, moment.wind?.speedMps ?? null, s);
@@ -81,7 +78,7 @@ export function walkChance(
   ground.slots.forEach((slot, i) => {
     const share = moment.shares[slot.feature] as number;
     if (share < 0.005) return;
-    const scent = table && moment.wind ? scentChance(table, i, moment.wind, chanceOf) : 0;
+    const scent = table && moment.wind ? scentChance(table, i, moment.wind) : 0;
     const part = share * (1 - (1 - scent) * (1 - sense * slot.seen));
     unnoticed *= 1 - part;
     if (part > 0 && (worst === null || part > worst.chance)) worst = { feature: slot.feature, chance: part };

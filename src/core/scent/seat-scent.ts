@@ -30,6 +30,8 @@ export interface SeatScent {
   windedChance: number | null;
   /** The same for each feature by the ground's index. */
   byFeature: Float64Array;
+  /** Chance in each step alone, at either detail; 0 where no forecast. */
+  stepChance: Float64Array;
   /** In each step alone, and the feature most reached; chance null where no forecast. Empty for detail 'list'. */
   byStep: { chance: number | null; featureIndex: number | null }[];
 }
@@ -37,6 +39,8 @@ export interface SeatScent {
 /** What one step holds for every scenario. */
 interface StepPlan {
   table: AngularTable;
+  /** Share of deer at each of the source's features. */
+  deer: Float64Array;
   /** Chances by source feature for a wind of no direction, by speed. */
   anyWay: { speedMps: number; chance: Float64Array } | null;
 }
@@ -72,8 +76,8 @@ export function seatScent(q: ScentQuestion): SeatScent {
       const stepRow = stepFeature ? stepFeature.subarray(t * count, (t + 1) * count) : null;
       const missedStep =
         step.fromDeg === null
-          ? anyDirection(q, plan, t, speed, perIndex / speed, missed, stepRow, weight)
-          : oneDirection(q, plan.table, t, step.fromDeg, perIndex / speed, missed, stepRow, weight);
+          ? anyDirection(plan, speed, perIndex / speed, missed, stepRow, weight)
+          : oneDirection(plan, step.fromDeg, perIndex / speed, missed, stepRow, weight);
       missedAll *= missedStep;
       stepChance[t] = (stepChance[t] ?? 0) + weight * (1 - missedStep);
     }
@@ -90,42 +94,40 @@ export function seatScent(q: ScentQuestion): SeatScent {
         featureIndex: most(source, stepFeature.subarray(t * count, (t + 1) * count)),
       }))
     : [];
-  return { windedChance: some ? Math.min(1, Math.max(0, windedChance)) : null, byFeature, byStep };
+  return { windedChance: some ? Math.min(1, Math.max(0, windedChance)) : null, byFeature, stepChance, byStep };
 }
 
 function planStep(q: ScentQuestion, t: number): StepPlan {
   const c = q.stability[t] ?? 'D';
   const widening = Math.hypot(extraScatterDeg(c, q.set.scatterDeg[t] ?? 0), q.set.bundleDeg[t] ?? 0);
-  return { table: angularTable(q.source, c, wideningLevel(widening)), anyWay: null };
+  const steps = q.set.at.length;
+  const deer = new Float64Array(q.source.features.length);
+  for (let f = 0; f < deer.length; f++) {
+    const share = q.deer[(q.source.features[f] as number) * steps + t] as number;
+    deer[f] = share > 0 ? Math.min(1, share) : 0;
+  }
+  return { table: angularTable(q.source, c, wideningLevel(widening)), deer, anyWay: null };
 }
 
 /** Adds one scenario's step with a direction; answers the chance that no feature was reached. */
 function oneDirection(
-  q: ScentQuestion,
-  table: AngularTable,
-  t: number,
+  { table, deer }: StepPlan,
   fromDeg: number,
   perIndex: number,
   missed: Float64Array,
   stepRow: Float64Array | null,
   weight: number,
 ): number {
-  const { features } = q.source;
-  const steps = q.set.at.length;
   const x = normalizeDeg(fromDeg) / BIN_DEG;
   const bin = Math.min(WIND_BINS - 1, Math.floor(x));
   const part = x - bin;
+  const { feature, values } = table;
   const end = table.start[bin + 1] as number;
   let missedStep = 1;
   for (let e = table.start[bin] as number; e < end; e++) {
-    const f = table.feature[e] as number;
-    const deer = q.deer[(features[f] as number) * steps + t] as number;
-    if (!(deer > 0)) continue;
-    const index = table.index[e] as number;
-    const share = table.share[e] as number;
-    const shareHere = share + ((table.nextShare[e] as number) - share) * part;
-    const indexHere = index + ((table.nextIndex[e] as number) - index) * part;
-    const p = deer * shareHere * chanceOfExposure((indexHere * perIndex) / shareHere);
+    const f = feature[e] as number;
+    const index = (values[3 * e + 1] as number) + (values[3 * e + 2] as number) * part;
+    const p = (deer[f] as number) * (values[3 * e] as number) * chanceOfExposure(index * perIndex);
     missed[f] = (missed[f] as number) * (1 - p);
     missedStep *= 1 - p;
     if (stepRow) stepRow[f] = (stepRow[f] as number) + weight * p;
@@ -135,9 +137,7 @@ function oneDirection(
 
 /** The same for a wind of no direction: each feature's chance is its mean over all directions. */
 function anyDirection(
-  q: ScentQuestion,
   plan: StepPlan,
-  t: number,
   speedMps: number,
   perIndex: number,
   missed: Float64Array,
@@ -145,13 +145,11 @@ function anyDirection(
   weight: number,
 ): number {
   if (!plan.anyWay || plan.anyWay.speedMps !== speedMps) {
-    plan.anyWay = { speedMps, chance: meanOverDirections(plan.table, q.source.features.length, perIndex) };
+    plan.anyWay = { speedMps, chance: meanOverDirections(plan.table, plan.deer.length, perIndex) };
   }
-  const steps = q.set.at.length;
   let missedStep = 1;
-  for (let f = 0; f < plan.anyWay.chance.length; f++) {
-    const deer = q.deer[(q.source.features[f] as number) * steps + t] as number;
-    const p = Math.max(deer, 0) * (plan.anyWay.chance[f] as number);
+  for (let f = 0; f < plan.deer.length; f++) {
+    const p = (plan.deer[f] as number) * (plan.anyWay.chance[f] as number);
     missed[f] = (missed[f] as number) * (1 - p);
     missedStep *= 1 - p;
     if (stepRow) stepRow[f] = (stepRow[f] as number) + weight * p;
@@ -162,9 +160,8 @@ function anyDirection(
 function meanOverDirections(table: AngularTable, count: number, perIndex: number): Float64Array {
   const chance = new Float64Array(count);
   for (let e = 0; e < table.feature.length; e++) {
-    const share = table.share[e] as number;
     const f = table.feature[e] as number;
-    const p = share * chanceOfExposure(((table.index[e] as number) * perIndex) / share);
+    const p = (table.values[3 * e] as number) * chanceOfExposure((table.values[3 * e + 1] as number) * perIndex);
     chance[f] = (chance[f] as number) + p / WIND_BINS;
   }
   return chance;

@@ -1,0 +1,31 @@
+/** Share (0-1) of a sit's weights that falls after an instant; the step the instant lies in counts by its rest. */
+export function shareAfter(at: number, stepAts: number[], endAt: number, weights: ArrayLike<number>): number {
+  let after = 0;
+  let total = 0;
+  for (let i = 0; i < stepAts.length; i++) {
+    const from = stepAts[i] as number;
+    const until = Math.min(stepAts[i + 1] ?? endAt, endAt);
+    const weight = weights[i] as number;
+    total += weight;
+    if (at <= from) after += weight;
+    else if (at < until) after += (weight * (until - at)) / (until - from);
+  }
+  return total > 0 ? after / total : 0;
+}
+
+/**
+ * Chance of being winded after an instant, from the whole sit's chance and each step's: the exponent of never being winded is
+ * shared out by the steps' own.
+ */
+export function windedAfter(
+  at: number,
+  stepAts: number[],
+  endAt: number,
+  winded: number,
+  byStep: ArrayLike<number>,
+): number {
+  if (winded <= 0) return 0;
+  const exponents = Array.from(byStep, (p) => -Math.log1p(-Math.min(0.999999, Math.max(0, p))));
+  const share = shareAfter(at, stepAts, endAt, exponents);
+  return 1 - (1 - Math.min(0.999999, winded)) ** share;
+}

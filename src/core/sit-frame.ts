@@ -1,0 +1,118 @@
+import { type AirFrame, frameAir } from './air-frame';
+import { entriesFor } from './approach/entries';
+import type { WalkContext } from './approach/try-ways';
+import { type CautionInput, cautionsFor } from './cautions';
+import { confidenceFor } from './confidence';
+import { formatClock } from './day-time';
+import { type Glare, glareOf } from './glare';
+import type { GroundFrame } from './ground-frame';
+import { lightShares } from './promise/promise-factors';
+import type { Detail } from './rank-input';
+import type { Caution, Confidence, Forecast, ScoredStand, SitWindow } from './types';
+import { frameWindow, type WindowFrame } from './window-frame';
+
+const HOUR = 3_600_000;
+
+/** Everything that the stands of one window share. */
+export interface SitFrame {
+  ground: GroundFrame;
+  window: WindowFrame;
+  /** null: no forecast for this window. */
+  air: AirFrame | null;
+  walks: WalkContext;
+  confidence: Confidence;
+  light: { day: number; twilight: number };
+  cautionsOf: (stand: ScoredStand) => Caution[];
+  glareOf: (facingDeg: number | null) => Glare;
+  clock: (at: number) => string;
+  detail: Detail;
+}
+
+function cautionInput(
+  stand: ScoredStand,
+  window: WindowFrame,
+  air: AirFrame | null,
+  ground: GroundFrame,
+  age: number | null,
+): CautionInput {
+  const { units, orangeRule, settings, place } = ground.input;
+  const steps = window.stepAts.map((at, t) => {
+    const step = air?.steps[t];
+    return {
+      at,
+      speedMps: step?.speedMps ?? null,
+      gustMps: step?.gustMps ?? null,
+      tempC: step?.tempC ?? null,
+      thunder: step?.thunder ?? false,
+    };
+  });
+  return {
+    kind: stand.kind,
+    seatHeightM: stand.seatHeightM,
+    steps,
+    forecastAgeHours: age,
+    staleHours: settings.score.staleHours,
+    orangeRule: orangeRule ?? null,
+    units: units ?? 'us',
+    clock: (at) => formatClock(at, place.zone),
+  };
+}
+
+/** Lays out what all stands share in one window. `now` (UTC ms) is what the forecast's age is counted to. */
+export function frameSits(
+  ground: GroundFrame,
+  sitWindow: SitWindow,
+  forecast: Forecast | null,
+  now: number,
+  detail: Detail,
+): SitFrame {
+  const { place, features, settings } = ground.input;
+  const window = frameWindow(sitWindow, place, features, settings);
+  const firstIn = Math.min(
+    sitWindow.startAt,
+    ...entriesFor(sitWindow, window.sun, settings.approach).map((e) => e.inBy),
+  );
+  const air = frameAir(sitWindow, firstIn - HOUR, sitWindow.endAt + HOUR, forecast, place, settings);
+  const trust = air && forecast ? { issuedAt: forecast.issuedAt, air } : null;
+  const confidence = confidenceFor(
+    trust && {
+      issuedAt: trust.issuedAt,
+      leadHours: trust.air.open.leadHours,
+      spreadDeg: trust.air.sit.meanFromDeg === null ? null : trust.air.sit.spreadDeg,
+      missingShare: trust.air.missingShare,
+    },
+    now,
+    settings.score,
+  );
+  const cautions = new Map<string, Caution[]>();
+  const glares = new Map<number | null, Glare>();
+  const noAir = { seatSpeedMps: null, precipMm: null, cloudPercent: null, meanFromDeg: null };
+  const steps = window.times.map((times, t) => ({ times, shares: window.shares[t] as Float64Array, ...noAir }));
+  return {
+    ground,
+    window,
+    air,
+    walks: {
+      frame: window,
+      windAt: (at) => air?.walkWindAt(at) ?? null,
+      plumes: ground.plumes,
+      settings: settings.approach,
+    },
+    confidence,
+    light: lightShares(steps, window.moves),
+    cautionsOf: (stand) => {
+      const key = `${stand.kind}|${stand.seatHeightM > 1}`;
+      const known =
+        cautions.get(key) ?? cautionsFor(cautionInput(stand, window, air, ground, confidence.forecastAgeHours));
+      cautions.set(key, known);
+      return known;
+    },
+    glareOf: (facingDeg) => {
+      const known = glares.get(facingDeg) ?? glareOf(facingDeg, window, settings.promise);
+      glares.set(facingDeg, known);
+      return known;
+    },
+    clock: (at) => formatClock(at, place.zone),
+    detail,
+  };
+}

@@ -1,0 +1,25 @@
+import { frameGround, type GroundFrame } from './ground-frame';
+import { compareVerdicts, namesOf } from './rank';
+import type { WeekInput } from './rank-input';
+import { frameSits } from './sit-frame';
+import type { SitWindow, Verdict } from './types';
+import { judgeSit } from './verdict';
+
+export interface WeekColumn {
+  window: SitWindow;
+  /** Best first, blocked ones last. */
+  verdicts: Verdict[];
+}
+
+/**
+ * All stands in all windows in one call that shares work; the same verdicts as rankSits gives one by one at this detail.
+ * Windows the forecast does not reach are ranked without one.
+ */
+export function rankWeek(input: WeekInput, prepared: GroundFrame = frameGround(input)): WeekColumn[] {
+  const compare = compareVerdicts(namesOf(input.stands));
+  return input.windows.map((window) => {
+    const frame = frameSits(prepared, window, input.forecast, input.now, input.detail ?? 'list');
+    const verdicts = prepared.stands.map((stand) => judgeSit(frame, stand, input.gatesFor(stand.stand.id, window)));
+    return { window, verdicts: verdicts.sort(compare) };
+  });
+}
