@@ -1,0 +1,64 @@
+import { mkdirSync } from 'node:fs';
+import { join } from 'node:path';
+import { AxeBuilder } from '@axe-core/playwright';
+import { type Browser, type BrowserContext, chromium, type Page } from 'playwright-core';
+
+export const PHONE = { width: 390, height: 844 };
+export const DESKTOP = { width: 1280, height: 800 };
+
+export function launchBrowser(): Promise<Browser> {
+  return chromium.launch({
+    executablePath: '/usr/bin/chromium',
+    headless: true,
+    args: [
+      '--no-sandbox',
+      '--disable-gpu',
+      '--disable-quic',
+      '--no-first-run',
+      '--disable-background-networking',
+      '--disable-component-update',
+      '--disable-sync',
+    ],
+  });
+}
+
+export interface Visitor {
+  context: BrowserContext;
+  page: Page;
+  /** Errors the pages have thrown or printed, and requests that left the machine. */
+  troubles: string[];
+}
+
+/** A browser of its own for one person, with touch at phone size. */
+export async function newVisitor(browser: Browser, baseURL: string, size = PHONE): Promise<Visitor> {
+  const touch = size.width < 600;
+  const context = await browser.newContext({ baseURL, viewport: size, hasTouch: touch, isMobile: touch });
+  const page = await context.newPage();
+  const troubles: string[] = [];
+  page.on('pageerror', (error) => troubles.push(`page error: ${error.message}`));
+  page.on('console', (message) => {
+    if (message.type() === 'error') troubles.push(`console: ${message.text()} at ${page.url()}`);
+  });
+  page.on('request', (request) => {
+    const { protocol, hostname } = new URL(request.url());
+    if (protocol.startsWith('http') && hostname !== '127.0.0.1') troubles.push(`left the machine: ${request.url()}`);
+  });
+  return { context, page, troubles };
+}
+
+/** Serious and critical findings of axe on the page as it stands, in words. */
+export async function axeFindings(page: Page): Promise<string[]> {
+  await page.waitForFunction(() => document.title !== '');
+  const { violations } = await new AxeBuilder({ page }).analyze();
+  return violations
+    .filter((v) => v.impact === 'serious' || v.impact === 'critical')
+    .map((v) => `${v.id}: ${v.help}: ${v.nodes.map((n) => n.target.join(' ')).join(', ')}`);
+}
+
+/** Kept when SCREENSHOTS names a folder. */
+export async function keepPicture(page: Page, name: string): Promise<void> {
+  const folder = process.env.SCREENSHOTS;
+  if (!folder) return;
+  mkdirSync(folder, { recursive: true });
+  await page.screenshot({ path: join(folder, `${name}.png`), fullPage: true });
+}
