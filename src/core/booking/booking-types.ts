@@ -1,7 +1,7 @@
 import type { Role } from '../permissions';
 import type { Point, SitWindow, Weapon, WindowName } from '../types';
 import type { Units } from '../units';
-import type { ClubRules } from './rules';
+import type { ClosedDays, ClubRules } from './rules';
 
 export interface BookingStand {
   id: string;
@@ -69,6 +69,8 @@ export interface BookingCheck {
   zone: string;
   units: Units;
   rules: ClubRules;
+  /** Closures of the whole ground. */
+  closedDays: ClosedDays[];
   /**
    * At least: sits at this stand within its rest days of the day on either side, every sit of the day, and this member's
    * sits that have not ended. More does no harm.

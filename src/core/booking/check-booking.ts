@@ -25,7 +25,7 @@ export function checkBooking(input: BookingCheck): Gate[] {
   const claim = { day, windows, sits };
   return [
     ...standClosureGates(stand, day),
-    ...closedDayGates(rules.closedDays, day),
+    ...closedDayGates(input.closedDays, day),
     ...seasonGates(rules, day, weapon),
     ...weaponGates(stand, weapon),
     ...whoMayHuntGates(stand, member),

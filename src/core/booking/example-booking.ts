@@ -60,6 +60,7 @@ export function bookingCheck(change: Partial<BookingCheck> = {}): BookingCheck {
     zone: PLACE.zone,
     units: 'us',
     rules: DEFAULT_CLUB_RULES,
+    closedDays: [],
     otherSits: [],
     seasonCounts: { stand: 0, member: 0 },
     exceptSitId: null,

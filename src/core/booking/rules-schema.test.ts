@@ -36,7 +36,6 @@ describe('clubRulesSchema', () => {
         },
       ],
       claimAhead: { kind: 'hunt_time', hours: 2 },
-      closedDays: [{ fromDay: '2026-11-26', toDay: '2026-11-26', reason: 'Thanksgiving' }],
       orangeRule: {
         text: '500 square inches above the waist in gun season',
         source: 'State digest',
@@ -52,12 +51,12 @@ describe('clubRulesSchema', () => {
     [{ restDaysDefault: Number.NaN }, 'restDaysDefault: Rest days must be a whole number from 0 to 60.'],
     [{ passThroughM: 5000 }, 'passThroughM: Walking distance from an occupied stand must be from 0 to 1000 metres.'],
     [
-      { closedDays: [{ fromDay: '2026-02-30', toDay: '2026-03-01', reason: 'x' }] },
-      'closedDays.0.fromDay: Give a day as YYYY-MM-DD.',
+      { seasons: [{ id: 'a', name: 'A', weapons: ['bow'], fromDay: '2026-02-30', toDay: '2026-03-01' }] },
+      'seasons.0.fromDay: Give a day as YYYY-MM-DD.',
     ],
     [
-      { closedDays: [{ fromDay: '2026-03-02', toDay: '2026-03-01', reason: 'x' }] },
-      'closedDays.0.toDay: The last day may not come before the first.',
+      { seasons: [{ id: 'a', name: 'A', weapons: ['bow'], fromDay: '2026-03-02', toDay: '2026-03-01' }] },
+      'seasons.0.toDay: The last day may not come before the first.',
     ],
     [
       {

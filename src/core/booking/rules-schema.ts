@@ -56,10 +56,6 @@ export const claimAheadSchema = z.discriminatedUnion('kind', [
   z.object({ kind: z.literal('hunt_time'), hours: whole('Hours ahead', 1, 24) }),
 ]);
 
-export const closedDaysSchema = z
-  .object({ fromDay: day, toDay: day, reason: text('A reason', 200) })
-  .refine(inOrder, LAST_FIRST);
-
 export const orangeRuleSchema = z.object({
   text: text('The rule', 500),
   source: text('Where the rule is written', 300),
@@ -97,7 +93,6 @@ export const clubRulesSchema = z
     passThroughM: metres('Walking distance from an occupied stand', 1000),
     guestDaysPerSeason: whole('Guest days', 0, 366).nullable(),
     guestsAtOnce: whole('Guests at once', 0, 20),
-    closedDays: z.array(closedDaysSchema).max(200),
     backByMinutes: whole('Back-by allowance', 0, 720),
     sightingsSeenBy: z.enum(SIGHTINGS_SEEN_BY),
     calendarPrivacy: z.enum(CALENDAR_PRIVACY),

@@ -30,6 +30,7 @@ export interface Season {
 /** 'hunt_time': only within so many hours of the window's start, and one stand at a time. */
 export type ClaimAhead = { kind: 'days'; days: number } | { kind: 'hunt_time'; hours: number };
 
+/** Days on which the whole ground is closed, both inside. They stand beside the rules: stewards and landowners set them. */
 export interface ClosedDays {
   fromDay: string;
   toDay: string;
@@ -66,7 +67,6 @@ export interface ClubRules {
   passThroughM: number;
   guestDaysPerSeason: number | null;
   guestsAtOnce: number;
-  closedDays: ClosedDays[];
   /** After the end of the window, before a sit counts as overdue. */
   backByMinutes: number;
   sightingsSeenBy: SightingsSeenBy;
@@ -102,7 +102,6 @@ export const DEFAULT_CLUB_RULES: ClubRules = {
   passThroughM: ydToM(100),
   guestDaysPerSeason: 5,
   guestsAtOnce: 1,
-  closedDays: [],
   backByMinutes: 60,
   sightingsSeenBy: 'all',
   calendarPrivacy: 'names_and_stands',

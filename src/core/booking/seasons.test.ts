@@ -91,10 +91,8 @@ describe('the stand', () => {
   });
 
   it('cannot be had on a closed day of the ground', () => {
-    const closed = rulesWith({
-      closedDays: [{ fromDay: '2026-11-10', toDay: '2026-11-10', reason: 'landowner drives cattle' }],
-    });
-    expect(checkBooking(bookingCheck({ rules: closed }))[0]).toMatchObject({
+    const closedDays = [{ fromDay: '2026-11-10', toDay: '2026-11-10', reason: 'landowner drives cattle' }];
+    expect(checkBooking(bookingCheck({ closedDays }))[0]).toMatchObject({
       code: 'closed_day',
       endsOn: '2026-11-11',
     });

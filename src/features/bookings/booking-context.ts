@@ -2,7 +2,7 @@ import type { BookingStand, OtherSit } from '@/core/booking/booking-types';
 import { checkBooking } from '@/core/booking/check-booking';
 import { guestGates } from '@/core/booking/guest-days';
 import { huntingYear } from '@/core/booking/hunting-year';
-import type { ClubRules } from '@/core/booking/rules';
+import type { ClosedDays, ClubRules } from '@/core/booking/rules';
 import { addDays } from '@/core/day-time';
 import { toLocal } from '@/core/geometry';
 import { type Gate, type SitWindow, WEAPONS, type Weapon, type WindowName } from '@/core/types';
@@ -39,6 +39,7 @@ export interface BookingContext {
   club: ScopeClub;
   input: ContextInput;
   rules: ClubRules;
+  closedDays: ClosedDays[];
   spans: SitWindow[];
   stands: Map<string, BookingStand>;
   seats: Map<string, number>;
@@ -56,11 +57,10 @@ const ofStand = (closure: Closure, standId: string) =>
   closure.standId === standId || (closure.standId === null && closure.toDay === null);
 
 /** The whole ground closed between two days; without an end it is kept as a closure of each stand, which may have none. */
-function closedDays(rules: ClubRules, closures: Closure[]): ClubRules['closedDays'] {
-  const whole = closures.flatMap(({ standId, fromDay, toDay, reason }) =>
+function closedDays(closures: Closure[]): ClosedDays[] {
+  return closures.flatMap(({ standId, fromDay, toDay, reason }) =>
     standId === null && toDay !== null ? [{ fromDay, toDay, reason }] : [],
   );
-  return [...rules.closedDays, ...whole];
 }
 
 async function loadMember(scope: ClubScope, memberId: string | null, from: ReadFrom): Promise<MemberForRules | null> {
@@ -106,7 +106,8 @@ export async function loadBookingContext(
   return {
     club,
     input,
-    rules: { ...club.rules, closedDays: closedDays(club.rules, closures) },
+    rules: club.rules,
+    closedDays: closedDays(closures),
     spans: input.windows.map((window) => sitWindow(input.day, window, club.rules, club)),
     stands: new Map(
       standRows.map((row) => [
@@ -172,6 +173,7 @@ export function gatesFor(
       zone: club.zone,
       units: club.units,
       rules,
+      closedDays: context.closedDays,
       otherSits: context.otherSits,
       seasonCounts: { stand: context.standCounts.get(standId) ?? 0, member: context.memberCount },
       exceptSitId: input.exceptSitId ?? null,
