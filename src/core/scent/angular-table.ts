@@ -1,6 +1,7 @@
 import { type StabilityClass, stabilityIndex } from '../air/stability-types';
 import { atDistance, WIDENINGS_DEG } from './plume-table';
 import { type AngularTable, groundPlume, type SourceGeometry } from './scent-ground';
+import { reserve, type TableScratch } from './table-scratch';
 
 export const WIND_BINS = 120;
 const BIN_DEG = 360 / WIND_BINS;
@@ -19,44 +20,59 @@ export function angularTable(g: SourceGeometry, c: StabilityClass, level: number
   return made;
 }
 
+/** Exposure of one feature by wind direction, and the bins that hold any. */
+interface Row {
+  sum: Float64Array;
+  squares: Float64Array;
+  from: number;
+  to: number;
+}
+
 function makeTable(g: SourceGeometry, c: StabilityClass, level: number): AngularTable {
   const plume = groundPlume(g.ground, c, level, g.heightM);
   const count = g.features.length;
-  const sum = new Float64Array(count * WIND_BINS);
-  const squares = new Float64Array(count * WIND_BINS);
+  const row: Row = { sum: new Float64Array(WIND_BINS), squares: new Float64Array(WIND_BINS), from: 0, to: -1 };
+  const out = g.ground.scratch;
+  out.count = 0;
   for (let f = 0; f < count; f++) {
-    const until = g.sampleStart[f + 1] ?? 0;
-    for (let j = g.sampleStart[f] ?? 0; j < until; j++) {
-      const d = g.distanceM[j] ?? 0;
-      const sigma = atDistance(plume.sigmaDeg, d);
+    row.sum.fill(0);
+    row.squares.fill(0);
+    row.from = Number.POSITIVE_INFINITY;
+    row.to = Number.NEGATIVE_INFINITY;
+    const until = g.sampleStart[f + 1] as number;
+    for (let j = g.sampleStart[f] as number; j < until; j++) {
+      const d = g.distanceM[j] as number;
       const strength = atDistance(plume.onAxis, d) / g.ground.reference;
-      addSample(sum, squares, f * WIND_BINS, g.windFromDeg[j] ?? 0, sigma, strength, g.weight[j] ?? 0);
+      addSample(row, g.windFromDeg[j] as number, atDistance(plume.sigmaDeg, d), strength, g.weight[j] as number);
     }
+    addEntries(row, f, out);
   }
-  return pack(sum, squares, count);
+  return pack(out);
 }
 
-function addSample(
-  sum: Float64Array,
-  squares: Float64Array,
-  row: number,
-  centreDeg: number,
-  sigma: number,
-  strength: number,
-  weight: number,
-): void {
+function addSample(row: Row, centreDeg: number, sigma: number, strength: number, weight: number): void {
   const half = Math.min(89.9, REACH_SIGMA * sigma);
   const first = Math.ceil((centreDeg - half) / BIN_DEG);
   const last = Math.floor((centreDeg + half) / BIN_DEG);
+  if (first > last || !(strength > LEAST_INDEX)) return;
+  // A normal curve at even steps, each from the one before by a ratio that itself falls by a fixed factor.
   const scale = -0.5 / (sigma * sigma);
+  const off = first * BIN_DEG - centreDeg;
+  let v = strength * Math.exp(off * off * scale);
+  let ratio = Math.exp((2 * off * BIN_DEG + BIN_DEG * BIN_DEG) * scale);
+  const fall = Math.exp(2 * BIN_DEG * BIN_DEG * scale);
   for (let b = first; b <= last; b++) {
-    const off = b * BIN_DEG - centreDeg;
-    const v = strength * Math.exp(off * off * scale);
-    if (!(v > LEAST_INDEX)) continue;
-    const at = row + (b < 0 ? b + WIND_BINS : b >= WIND_BINS ? b - WIND_BINS : b);
-    sum[at] = (sum[at] ?? 0) + weight * v;
-    squares[at] = (squares[at] ?? 0) + weight * v * v;
+    const at = b < 0 ? b + WIND_BINS : b >= WIND_BINS ? b - WIND_BINS : b;
+    row.sum[at] = (row.sum[at] as number) + weight * v;
+    row.squares[at] = (row.squares[at] as number) + weight * v * v;
+    v *= ratio;
+    ratio *= fall;
   }
+  // Bins of one feature may run either way round north: keep them next to those already there.
+  const shift =
+    row.to < row.from ? 0 : Math.round(((row.from + row.to) / 2 - (first + last) / 2) / WIND_BINS) * WIND_BINS;
+  row.from = Math.min(row.from, first + shift);
+  row.to = Math.max(row.to, last + shift);
 }
 
 /** Share of a feature that bears its mean: one when exposure is even, small when one corner has it all. */
@@ -64,41 +80,51 @@ function shareOf(sum: number, squares: number): number {
   return squares > 0 ? Math.min(1, (sum * sum) / squares) : 0;
 }
 
-function pack(sum: Float64Array, squares: Float64Array, count: number): AngularTable {
+/** One entry for each bin that is reached, or whose next one is. */
+function addEntries(row: Row, f: number, out: TableScratch): void {
+  const last = Math.min(row.to, row.from + WIND_BINS - 2);
+  if (!(last >= row.from - 1)) return;
+  reserve(out, WIND_BINS);
+  let b = (row.from - 1 + 2 * WIND_BINS) % WIND_BINS;
+  let here = row.sum[b] as number;
+  let shareHere = shareOf(here, row.squares[b] as number);
+  for (let i = row.from - 1; i <= last; i++) {
+    const next = b + 1 === WIND_BINS ? 0 : b + 1;
+    const there = row.sum[next] as number;
+    const shareThere = shareOf(there, row.squares[next] as number);
+    if (here > LEAST_INDEX || there > LEAST_INDEX) {
+      const share = shareHere > 0 && shareThere > 0 ? (shareHere + shareThere) / 2 : shareHere || shareThere;
+      const at = 4 * out.count;
+      out.bins[out.count++] = b;
+      out.values[at] = f;
+      out.values[at + 1] = share;
+      out.values[at + 2] = here / share;
+      out.values[at + 3] = (there - here) / share;
+    }
+    b = next;
+    here = there;
+    shareHere = shareThere;
+  }
+}
+
+/** Entries in order of bin, features in order within each. */
+function pack({ count, bins, values }: TableScratch): AngularTable {
   const start = new Int32Array(WIND_BINS + 1);
-  for (let f = 0; f < count; f++) {
-    for (let b = 0; b < WIND_BINS; b++) {
-      const next = f * WIND_BINS + ((b + 1) % WIND_BINS);
-      if ((sum[f * WIND_BINS + b] ?? 0) > 0 || (sum[next] ?? 0) > 0) start[b + 1] = (start[b + 1] ?? 0) + 1;
-    }
+  for (let i = 0; i < count; i++) {
+    const b = bins[i] as number;
+    start[b + 1] = (start[b + 1] as number) + 1;
   }
-  for (let b = 0; b < WIND_BINS; b++) start[b + 1] = (start[b + 1] ?? 0) + (start[b] ?? 0);
-  const total = start[WIND_BINS] ?? 0;
-  const table: AngularTable = {
-    start,
-    feature: new Int32Array(total),
-    index: new Float32Array(total),
-    nextIndex: new Float32Array(total),
-    share: new Float32Array(total),
-    nextShare: new Float32Array(total),
-  };
+  for (let b = 0; b < WIND_BINS; b++) start[b + 1] = (start[b + 1] as number) + (start[b] as number);
+  const packed = new Float32Array(4 * count);
   const fill = start.slice(0, WIND_BINS);
-  for (let f = 0; f < count; f++) {
-    for (let b = 0; b < WIND_BINS; b++) {
-      const here = f * WIND_BINS + b;
-      const next = f * WIND_BINS + ((b + 1) % WIND_BINS);
-      const [a, z] = [sum[here] ?? 0, sum[next] ?? 0];
-      if (!(a > 0 || z > 0)) continue;
-      const e = fill[b] ?? 0;
-      fill[b] = e + 1;
-      table.feature[e] = f;
-      table.index[e] = a;
-      table.nextIndex[e] = z;
-      const [shareA, shareZ] = [shareOf(a, squares[here] ?? 0), shareOf(z, squares[next] ?? 0)];
-      // At the edge of reach only one end has a share: hold it, so that the mean is not squeezed into nothing.
-      table.share[e] = shareA > 0 ? shareA : shareZ;
-      table.nextShare[e] = shareZ > 0 ? shareZ : shareA;
-    }
+  for (let i = 0; i < count; i++) {
+    const b = bins[i] as number;
+    const to = 4 * (fill[b] as number);
+    fill[b] = (fill[b] as number) + 1;
+    packed[to] = values[4 * i] as number;
+    packed[to + 1] = values[4 * i + 1] as number;
+    packed[to + 2] = values[4 * i + 2] as number;
+    packed[to + 3] = values[4 * i + 3] as number;
   }
-  return table;
+  return { start, values: packed };
 }

@@ -12,7 +12,7 @@ export interface PlumeTable {
 }
 
 /** Widenings a table is kept for, degrees. A widening is rounded to one of them, here and wherever the plume is swept. */
-export const WIDENINGS_DEG = [0, 3, 4.5, 6, 8, 10.5, 13.5, 17.5, 23, 30, 40] as const;
+export const WIDENINGS_DEG = [0, 4, 6, 9, 13, 18, 25, 35] as const;
 
 /** Index of the nearest kept widening. */
 export function wideningLevel(deg: number): number {

@@ -6,6 +6,7 @@ import type { LocalShape, Point } from '../types';
 import { type PlumeTable, plumeTable, WIDENINGS_DEG } from './plume-table';
 import { type SampledFeature, sampleFeature } from './sample-feature';
 import { referenceStrength } from './saturate';
+import { type TableScratch, tableScratch } from './table-scratch';
 
 /** Beyond this a feature is sampled coarsely: a plume is wider there than the fine spacing. m. */
 const FAR_M = 300;
@@ -20,6 +21,7 @@ export interface ScentGround {
   far: SampledFeature[];
   plumes: Map<string, PlumeTable>;
   reference: number;
+  scratch: TableScratch;
 }
 
 export function scentGround(features: readonly { shape: LocalShape }[], settings: ScentSettings): ScentGround {
@@ -31,6 +33,7 @@ export function scentGround(features: readonly { shape: LocalShape }[], settings
     far: features.map((f) => sampleFeature(f.shape, coarse)),
     plumes: new Map(),
     reference: referenceStrength(settings),
+    scratch: tableScratch(),
   };
 }
 
@@ -51,17 +54,13 @@ export interface SourceGeometry {
 }
 
 /**
- * For each of 120 wind directions (3 degrees apart from north) the features reached and how much: index at 1 m/s and the
- * share of the feature that has it, at this direction and the next.
+ * For each of 120 wind directions (3 degrees apart from north) the features reached. Four values an entry: position in
+ * SourceGeometry.features, share of the feature that bears the exposure, index on that share at 1 m/s, and what the next
+ * direction adds to it.
  */
 export interface AngularTable {
   start: Int32Array;
-  /** Position in SourceGeometry.features. */
-  feature: Int32Array;
-  index: Float32Array;
-  nextIndex: Float32Array;
-  share: Float32Array;
-  nextShare: Float32Array;
+  values: Float32Array;
 }
 
 /** Lays out what is within the settings' reach of a source. Samples beyond reach are dropped with their weight. */

@@ -121,13 +121,13 @@ function oneDirection(
   const x = normalizeDeg(fromDeg) / BIN_DEG;
   const bin = Math.min(WIND_BINS - 1, Math.floor(x));
   const part = x - bin;
-  const { feature, values } = table;
-  const end = table.start[bin + 1] as number;
+  const { values } = table;
+  const end = 4 * (table.start[bin + 1] as number);
   let missedStep = 1;
-  for (let e = table.start[bin] as number; e < end; e++) {
-    const f = feature[e] as number;
-    const index = (values[3 * e + 1] as number) + (values[3 * e + 2] as number) * part;
-    const p = (deer[f] as number) * (values[3 * e] as number) * chanceOfExposure(index * perIndex);
+  for (let e = 4 * (table.start[bin] as number); e < end; e += 4) {
+    const f = values[e] as number;
+    const index = (values[e + 2] as number) + (values[e + 3] as number) * part;
+    const p = (deer[f] as number) * (values[e + 1] as number) * chanceOfExposure(index * perIndex);
     missed[f] = (missed[f] as number) * (1 - p);
     missedStep *= 1 - p;
     if (stepRow) stepRow[f] = (stepRow[f] as number) + weight * p;
@@ -159,9 +159,9 @@ function anyDirection(
 
 function meanOverDirections(table: AngularTable, count: number, perIndex: number): Float64Array {
   const chance = new Float64Array(count);
-  for (let e = 0; e < table.feature.length; e++) {
-    const f = table.feature[e] as number;
-    const p = (table.values[3 * e] as number) * chanceOfExposure((table.values[3 * e + 1] as number) * perIndex);
+  for (let e = 0; e < table.values.length; e += 4) {
+    const f = table.values[e] as number;
+    const p = (table.values[e + 1] as number) * chanceOfExposure((table.values[e + 2] as number) * perIndex);
     chance[f] = (chance[f] as number) + p / WIND_BINS;
   }
   return chance;
