@@ -28,7 +28,8 @@ export const closureSchema = closureFormSchema.transform((typed, ctx): ClosureVa
     if (toDay < fromDay) form.fail('toDay', 'The last day comes before the first.');
     else if (daysBetween(fromDay, toDay) >= MOST_DAYS) form.fail('toDay', `Close at most ${MOST_DAYS} days at a time.`);
   }
-  const reason = typed.reason.trim();
+  // Screens set the full stop themselves.
+  const reason = typed.reason.trim().replace(/\.+$/, '');
   if (reason === '') form.fail('reason', 'Say why: members read it.');
   return form.failed() ? z.NEVER : { standId, fromDay, toDay, reason };
 });

@@ -51,3 +51,11 @@ export async function updateClosure(
     .returning();
   return row ?? null;
 }
+
+/** A stand that goes takes its closures with it. */
+export async function removeClosuresOf(scope: ClubScope, tx: Tx, standId: string, now: number): Promise<void> {
+  await tx
+    .update(closures)
+    .set({ removedAt: now })
+    .where(and(kept(scope), eq(closures.standId, standId)));
+}

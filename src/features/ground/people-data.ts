@@ -10,6 +10,7 @@ export interface BookedSit {
   standName: string;
   memberName: string;
   day: string;
+  approachId: string | null;
   windows: 'morning' | 'evening' | 'all_day';
 }
 
@@ -26,6 +27,7 @@ export function listBookedSits(
       standName: stands.name,
       memberName: users.name,
       day: sits.day,
+      approachId: sits.approachId,
       windows: sits.windows,
     })
     .from(sits)

@@ -1,0 +1,21 @@
+import { write } from '@/db/client';
+import { newId } from '@/lib/ids';
+import type { ClubScope } from '@/server/scope';
+import { noteChange } from './note-change';
+import { insertParking, listParkings, type ParkingValues } from './parkings-data';
+import { refuseTakenName } from './refuse';
+
+export function addParking(
+  scope: ClubScope,
+  values: ParkingValues,
+  now: number,
+): Promise<{ id: string; name: string }> {
+  const id = newId('parking');
+  return write(async (tx) => {
+    refuseTakenName(await listParkings(scope, tx), values.name, 'a parking place');
+    await insertParking(scope, tx, { ...values, id });
+    const summary = `Added parking place ${values.name}.`;
+    await noteChange(scope, tx, { subject: 'parking', verb: 'added', id, summary }, now);
+    return { id, name: values.name };
+  });
+}

@@ -1,0 +1,55 @@
+import { formatDay } from '@/core/day-time';
+import type { ReadFrom } from '@/db/client';
+import { AppError } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { type BookedSit, lastChangedBy } from './people-data';
+
+/** Somebody saved the same thing after it was opened: says who. */
+export async function changedSince(
+  scope: ClubScope,
+  thing: { id: string; name: string },
+  from: ReadFrom,
+): Promise<AppError> {
+  const who = (await lastChangedBy(scope, thing.id, from)) ?? 'Somebody';
+  return new AppError(
+    'conflict',
+    `${who} changed ${thing.name} since you opened it. What you typed is still here: open ${thing.name} in another tab, compare, and type it there.`,
+  );
+}
+
+/** Names are one of a kind in a club, whatever their case. */
+export function refuseTakenName(
+  kept: { id: string; name: string }[],
+  name: string,
+  what: string,
+  ownId?: string,
+): void {
+  const taken = kept.find((row) => row.id !== ownId && row.name.toLowerCase() === name.toLowerCase());
+  if (!taken) return;
+  const message = `There is already ${what} called ${taken.name}: choose another name.`;
+  throw new AppError('conflict', message, { fields: { name: message } });
+}
+
+const WINDOW_WORDS = { morning: 'morning', evening: 'evening', all_day: 'all day' } as const;
+const MOST_NAMED = 5;
+
+/** 'Sat 7 Nov morning (Dale)', at most five and how many more. */
+export function namedSits(sits: BookedSit[]): string {
+  const named = sits
+    .slice(0, MOST_NAMED)
+    .map((s) => `${formatDay(s.day)} ${WINDOW_WORDS[s.windows]} (${s.memberName})`);
+  const more = sits.length - named.length;
+  return named.join(', ') + (more > 0 ? ` and ${more} more` : '');
+}
+
+/** The fields that differ, before and after, for the audit log. */
+export function changes(before: object, after: object): Record<string, unknown> {
+  const old = new Map(Object.entries(before));
+  const changed = Object.entries(after).filter(
+    ([key, value]) => JSON.stringify(old.get(key)) !== JSON.stringify(value),
+  );
+  return {
+    before: Object.fromEntries(changed.map(([key]) => [key, old.get(key) ?? null])),
+    after: Object.fromEntries(changed),
+  };
+}

@@ -1,0 +1,31 @@
+import { write } from '@/db/client';
+import { AppError, notFound } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { removeApproachesOf } from './approaches-data';
+import { removeClosuresOf } from './closures-data';
+import { noteChange } from './note-change';
+import { listBookedSits } from './people-data';
+import { changedSince, namedSits } from './refuse';
+import { getStand, updateStand } from './stands-data';
+
+/** Takes a stand away with its approaches and closures; past sits keep it. Refused while sits are booked there. */
+export function removeStand(
+  scope: ClubScope,
+  at: { id: string; version: number },
+  now: number,
+): Promise<{ name: string }> {
+  return write(async (tx) => {
+    const stand = await getStand(scope, at.id, tx);
+    if (!stand) throw notFound();
+    const booked = await listBookedSits(scope, { standId: at.id, now }, tx);
+    if (booked.length > 0) {
+      throw new AppError('conflict', `${stand.name} is booked: ${namedSits(booked)}. Cancel or move these sits first.`);
+    }
+    if (!(await updateStand(scope, tx, at, { removedAt: now }))) throw await changedSince(scope, stand, tx);
+    await removeApproachesOf(scope, tx, at.id, now);
+    await removeClosuresOf(scope, tx, at.id, now);
+    const summary = `Removed stand ${stand.name} with its approaches and closures.`;
+    await noteChange(scope, tx, { subject: 'stand', verb: 'removed', id: at.id, summary }, now);
+    return { name: stand.name };
+  });
+}
