@@ -1,0 +1,53 @@
+import { cookies } from 'next/headers';
+import type { ReactNode } from 'react';
+import { listMyClubs } from '@/features/accounts/reads';
+import { clubNavItems } from '@/features/clubs/club-nav';
+import { ClubSwitch } from '@/features/clubs/components/club-switch';
+import { now } from '@/server/clock';
+import { findScope } from '@/server/scope';
+import { currentUser } from '@/server/session';
+import { AppShell } from '@/ui/app-shell';
+import { TextLink } from '@/ui/button';
+import { LIGHT_COOKIE, parseLight } from '@/ui/light';
+import { Menu } from '@/ui/menu';
+import { Notice } from '@/ui/notices';
+
+interface ClubLayoutProps {
+  params: Promise<{ club: string }>;
+  children: ReactNode;
+}
+
+/** Shows the frame and decides nothing: whoever may not enter gets the bare answer of the page's own door. */
+export default async function ClubLayout({ params, children }: ClubLayoutProps) {
+  const user = await currentUser();
+  const scope = user && (await findScope((await params).club, user.id));
+  if (!user || !scope) return children;
+  const clubs = await listMyClubs(user.id, now());
+  const { slug, name } = scope.club;
+  return (
+    <AppShell
+      items={clubNavItems(slug, scope.can)}
+      home={`/clubs/${slug}`}
+      light={parseLight((await cookies()).get(LIGHT_COOKIE)?.value)}
+      club={<ClubSwitch name={name} slug={slug} clubs={clubs.map((club) => ({ slug: club.slug, name: club.name }))} />}
+      account={
+        <Menu
+          label={user.name}
+          look="quiet"
+          items={[
+            { label: 'Account and sign out', href: '/account' },
+            { label: 'My clubs', href: '/clubs' },
+          ]}
+        />
+      }
+    >
+      {user.emailVerifiedAt === null && (
+        <Notice level="caution" title="Confirm your e-mail address" className="mb-6">
+          Open the link we mailed to {user.email}, or have it sent again under{' '}
+          <TextLink href="/account">Account</TextLink>.
+        </Notice>
+      )}
+      {children}
+    </AppShell>
+  );
+}
