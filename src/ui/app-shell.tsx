@@ -25,7 +25,7 @@ export function AppShell({ items, home, light, club, account, offlineMark, child
   return (
     <div className="min-h-dvh md:grid md:grid-cols-[14rem_minmax(0,1fr)]">
       <SkipLink />
-      <div className="sticky top-0 hidden h-dvh flex-col gap-5 overflow-y-auto border-rule border-r px-5 py-6 md:flex print:hidden">
+      <header className="sticky top-0 hidden h-dvh flex-col gap-5 overflow-y-auto border-rule border-r px-5 py-6 md:flex print:hidden">
         <Link href={home} className="self-start rounded-sm no-underline" aria-label="Windrest, first page">
           <Wordmark className="text-[1.7rem]" />
         </Link>
@@ -38,7 +38,7 @@ export function AppShell({ items, home, light, club, account, offlineMark, child
           <LightSwitch light={light} />
           {account}
         </div>
-      </div>
+      </header>
 
       <div className="flex min-w-0 flex-col">
         <header className="flex min-h-14 items-center justify-between gap-3 border-rule border-b px-4 py-1.5 md:hidden print:hidden">

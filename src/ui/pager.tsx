@@ -14,7 +14,10 @@ export interface PagerProps {
 export function Pager({ page, pages, hrefFor, onPage, summary }: PagerProps) {
   if (pages <= 1 && !summary) return null;
   return (
-    <nav aria-label="Pages" className="flex flex-wrap items-center justify-between gap-3 border-rule border-t pt-3">
+    <nav
+      aria-label="More of this list"
+      className="flex flex-wrap items-center justify-between gap-3 border-rule border-t pt-3"
+    >
       <p className="text-ink-soft text-sm">{summary ?? `Page ${page} of ${pages}`}</p>
       {pages > 1 && (
         <div className="flex gap-2">

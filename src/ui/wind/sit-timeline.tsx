@@ -23,7 +23,9 @@ export function SitTimeline({ steps, formatClock, marks = [], className }: SitTi
     .filter((mark) => mark.left >= 0 && mark.left <= 1);
   return (
     <figure className={joinClasses('text-sm', className)}>
-      <div className="grid grid-cols-[3rem_minmax(0,1fr)] gap-x-2">
+      <div
+        className={joinClasses('grid grid-cols-[2.5rem_minmax(0,1fr)] gap-x-2', placed.length > 0 ? 'pt-5' : 'pt-1')}
+      >
         <div
           aria-hidden="true"
           className="flex h-28 flex-col justify-between text-right text-ink-soft text-xs leading-none"
@@ -37,10 +39,15 @@ export function SitTimeline({ steps, formatClock, marks = [], className }: SitTi
           {placed.map((mark) => (
             <div
               key={mark.label}
-              className="absolute top-0 h-28 border-ink border-l border-dotted"
+              className="absolute -top-4 h-32 border-ink border-l border-dotted"
               style={{ left: `${mark.left * 100}%` }}
             >
-              <span className="absolute top-0 left-1 whitespace-nowrap bg-paper px-0.5 text-xs leading-tight">
+              <span
+                className={joinClasses(
+                  '-top-1 absolute whitespace-nowrap text-xs leading-tight',
+                  mark.left > 0.7 ? 'right-1.5' : 'left-1',
+                )}
+              >
                 {mark.label}
               </span>
             </div>

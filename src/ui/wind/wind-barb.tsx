@@ -1,6 +1,6 @@
 import { sectorName } from '@/core/sectors';
 import { mpsToKt } from '@/core/units';
-import { barbMarks, barbParts } from './barb-parts';
+import { barbMarks, barbParts, STAFF } from './barb-parts';
 
 export interface WindBarbProps {
   /** Where the wind comes from, degrees true; null: variable. */
@@ -24,12 +24,12 @@ export function WindBarb({ fromDeg, speedMps, label, size = 40, className }: Win
   const marks = barbMarks(parts);
   const text = label ?? describeBarb(fromDeg, speedMps);
   return (
-    <svg viewBox="-21 -21 42 42" width={size} height={size} role="img" aria-label={text} className={className}>
+    <svg viewBox="-14 -14 28 28" width={size} height={size} role="img" aria-label={text} className={className}>
       <title>{text}</title>
       {parts.calm && (
         <>
-          <circle r={3} fill="none" stroke="currentColor" strokeWidth={1.5} />
-          <circle r={7} fill="none" stroke="currentColor" strokeWidth={1.5} />
+          <circle r={3} fill="none" stroke="currentColor" strokeWidth={1.2} />
+          <circle r={6.5} fill="none" stroke="currentColor" strokeWidth={1.2} />
         </>
       )}
       {!parts.calm && fromDeg === null && (
@@ -41,9 +41,9 @@ export function WindBarb({ fromDeg, speedMps, label, size = 40, className }: Win
         </>
       )}
       {!parts.calm && fromDeg !== null && (
-        <g transform={`rotate(${Math.round(fromDeg)})`}>
-          <circle r={2.5} fill="currentColor" />
-          <path d={marks.lines} stroke="currentColor" strokeWidth={1.75} strokeLinecap="round" fill="none" />
+        <g transform={`rotate(${Math.round(fromDeg)}) translate(0 ${STAFF / 2})`}>
+          <circle r={2} fill="currentColor" />
+          <path d={marks.lines} stroke="currentColor" strokeWidth={1.4} strokeLinecap="round" fill="none" />
           <path d={marks.fills} fill="currentColor" stroke="currentColor" strokeWidth={0.5} strokeLinejoin="round" />
         </g>
       )}

@@ -59,10 +59,10 @@ export function WindRose({ shares, calmShare = 0, label, size = 240, className }
       {rings.map((share) => (
         <text
           key={share}
-          x={round(radiusOf(share) * Math.sin(toRad(101.25))) + 1}
-          y={round(-radiusOf(share) * Math.cos(toRad(101.25))) + 2.5}
-          fontSize={7}
-          fill="var(--color-ink-soft)"
+          x={round(radiusOf(share) * Math.sin(toRad(113))) + 1}
+          y={round(-radiusOf(share) * Math.cos(toRad(113))) + 2.5}
+          fontSize={8.5}
+          fill="var(--color-ink)"
           stroke="var(--color-paper)"
           strokeWidth={2.5}
           paintOrder="stroke"

@@ -86,7 +86,7 @@ function StripTableRow({ row, arcs, spans, clock }: RowProps) {
   const name = settledName(row.shares);
   return (
     <tr className="border-paper border-b">
-      <th scope="row" className="pr-1 text-left font-normal">
+      <th scope="row" className="text-right font-normal">
         {clock}
       </th>
       <td className="px-2 py-0">

@@ -71,12 +71,16 @@ export function ShowWind() {
         </ol>
       </Section>
       <div className="mt-8 grid gap-x-10 gap-y-8 lg:grid-cols-2">
-        <Section title="Wind strip on a page" className="mt-0">
-          <WindStrip variant="page" arcs={ARCS} rows={ROWS} formatClock={clock} />
-        </Section>
-        <Section title="The sit by half hours" className="mt-0">
-          <SitTimeline steps={STEPS} formatClock={clock} marks={[{ at: START + 4_500_000, label: 'sunrise 6:45' }]} />
-        </Section>
+        <div>
+          <Section title="Wind strip on a page">
+            <WindStrip variant="page" arcs={ARCS} rows={ROWS} formatClock={clock} />
+          </Section>
+        </div>
+        <div>
+          <Section title="The sit by half hours">
+            <SitTimeline steps={STEPS} formatClock={clock} marks={[{ at: START + 4_500_000, label: 'sunrise 6:45' }]} />
+          </Section>
+        </div>
       </div>
       <Section title="Wind rose, barbs, bearings">
         <div className="flex flex-wrap items-center gap-8">

@@ -1,0 +1,57 @@
+import type { Metadata } from 'next';
+import { notFound } from 'next/navigation';
+import { PlainFrame } from '@/app/plain-frame';
+import { findLinks } from '@/features/mail/find-links';
+import { readKeptMail } from '@/features/mail/reads';
+import { publicPage } from '@/server/doors';
+import { TextLink } from '@/ui/button';
+import { DefinitionList, PageTitle, Section } from '@/ui/page-parts';
+
+export const metadata: Metadata = { title: 'Kept mail' };
+
+const PRE = 'whitespace-pre-wrap break-words border border-rule bg-panel p-4';
+
+export default publicPage(async ({ params }) => {
+  const mail = await readKeptMail(params.id ?? '');
+  if (!mail) notFound();
+  return (
+    <PlainFrame width="page" links={<TextLink href="/dev/mail">All kept mail</TextLink>}>
+      <PageTitle title={mail.subject} over="Kept mail" />
+      <DefinitionList
+        items={[
+          { term: 'To', detail: mail.toEmail },
+          { term: 'Message-ID', detail: <span className="break-all">{mail.messageId}</span> },
+        ]}
+      />
+      <Section title="Plain text" className="mt-6">
+        <p className={PRE}>
+          {findLinks(mail.text).map(({ kind, text }, index) =>
+            kind === 'link' ? (
+              // biome-ignore lint/suspicious/noArrayIndexKey: pieces of one text, drawn whole
+              <a key={index} href={text} className="text-moss underline">
+                {text}
+              </a>
+            ) : (
+              text
+            ),
+          )}
+        </p>
+      </Section>
+      {mail.html && (
+        <Section title="HTML">
+          <iframe
+            title="The mail as HTML"
+            sandbox="allow-popups allow-popups-to-escape-sandbox"
+            srcDoc={`<base target="_blank">${mail.html}`}
+            className="h-96 w-full border border-rule bg-paper"
+          />
+        </Section>
+      )}
+      {mail.calendar && (
+        <Section title="Calendar part">
+          <pre className={PRE}>{mail.calendar}</pre>
+        </Section>
+      )}
+    </PlainFrame>
+  );
+});
