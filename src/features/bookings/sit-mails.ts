@@ -20,21 +20,22 @@ function opening(scope: ClubScope, kind: SitMail, sit: SitDetail): string {
   const own = sit.memberId === scope.member.id;
   const who = own ? 'You' : scope.member.name;
   if (kind === 'booked') return own ? `You booked ${sit.standName}.` : `${who} booked ${sit.standName} for you.`;
-  if (kind === 'changed') return `${who} changed your sit. It now reads:`;
+  if (kind === 'changed') return `${who} changed your sit. This is how it stands now.`;
   const reason = sit.cancelReason ? ` The reason given: ${sit.cancelReason}` : '';
   return `${who} cancelled your sit at ${sit.standName}.${reason}`;
 }
 
-function facts(scope: ClubScope, sit: SitDetail): string[] {
+function facts(scope: ClubScope, sit: SitDetail): { label: string; value: string }[] {
   const way = wayInText(sit);
-  const lines = [
-    `${sit.standName}: ${dayAndWindow(sit.day, sit.windows, true)}, ${spanText(sit.startAt, sit.endAt, scope.club)} (club time).`,
-    `Weapon: ${weaponWord(sit.weapon)}.`,
-    way === null ? null : `Way in: ${way}.`,
-    sit.guests.length === 0 ? null : `Guests: ${sit.guests.map((guest) => guest.name).join(', ')}.`,
-    sit.note === '' ? null : `Note: ${sit.note}`,
+  return [
+    { label: 'Stand', value: sit.standName },
+    { label: 'When', value: dayAndWindow(sit.day, sit.windows, true) },
+    { label: 'Club time', value: spanText(sit.startAt, sit.endAt, scope.club) },
+    { label: 'Weapon', value: weaponWord(sit.weapon) },
+    ...(way === null ? [] : [{ label: 'Way in', value: way }]),
+    ...(sit.guests.length === 0 ? [] : [{ label: 'Guests', value: sit.guests.map((guest) => guest.name).join(', ') }]),
+    ...(sit.note === '' ? [] : [{ label: 'Note', value: sit.note }]),
   ];
-  return lines.filter((line) => line !== null);
 }
 
 const SUBJECTS: Record<SitMail, string> = { booked: 'Sit booked', changed: 'Sit changed', cancelled: 'Sit cancelled' };
@@ -54,8 +55,10 @@ export async function queueSitMail(
   const shown = fullEntry(sit, club, false);
   const { text, html } = composeMail({
     clubName: club.name,
-    paragraphs: [opening(scope, kind, sit), ...facts(scope, sit)],
+    paragraphs: [opening(scope, kind, sit)],
+    facts: facts(scope, sit),
     button: { label: 'Open my sits', url: `${env.appUrl}/clubs/${club.slug}/my-sits` },
+    footer: 'You get this because the sit is yours.',
   });
   await queueMail(
     tx,

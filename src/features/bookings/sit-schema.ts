@@ -6,9 +6,17 @@ import { SIT_WINDOWS } from './sit-words';
 /** Ids are told apart by the database; this only keeps nonsense out of it. */
 const id = z.string().trim().min(1, 'Choose one.').max(60, 'Choose one of the list.');
 
+/** A choice that may be left open: an empty select sends ''. */
+const optionalId = z
+  .string()
+  .trim()
+  .max(60, 'Choose one of the list.')
+  .nullish()
+  .transform((value) => value || null);
+
 const guest = z.object({
   name: z.string().trim().min(1, "Write the guest's name.").max(60, 'A name has 60 characters at most.'),
-  memberId: id.nullish().transform((value) => value ?? null),
+  memberId: optionalId,
 });
 
 const chosen = {
@@ -20,7 +28,7 @@ const chosen = {
   windows: z.enum(SIT_WINDOWS, { error: 'Choose morning, evening or all day.' }),
   weapon: z.enum(WEAPONS, { error: 'Choose a weapon.' }),
   /** null: no way in is named. */
-  approachId: id.nullish().transform((value) => value ?? null),
+  approachId: optionalId,
   guests: z.array(guest).max(10, 'Name ten guests at most.').default([]),
   note: z.string().trim().max(500, 'A note has 500 characters at most.').default(''),
 };
@@ -28,7 +36,7 @@ const chosen = {
 export const bookSitSchema = z.object({
   ...chosen,
   /** Left out: for oneself. */
-  memberId: id.nullish().transform((value) => value ?? null),
+  memberId: optionalId,
   /** One for each form opened, so that a second press cannot book twice. */
   requestKey: z.guid('Reload the page and try again.'),
 });

@@ -1,0 +1,16 @@
+import { z } from 'zod';
+
+export const FEED_SCOPES = ['own', 'club'] as const;
+export type FeedScope = (typeof FEED_SCOPES)[number];
+
+const scope = z.enum(FEED_SCOPES, { error: 'Choose my sits or the club.' });
+
+export const makeFeedSchema = z.object({
+  scope,
+  /** Stand positions in the entries: only when asked for. */
+  withPlace: z.boolean().default(false),
+});
+export type MakeFeedInput = z.output<typeof makeFeedSchema>;
+
+export const revokeFeedSchema = z.object({ scope });
+export type RevokeFeedInput = z.output<typeof revokeFeedSchema>;

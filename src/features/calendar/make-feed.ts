@@ -1,0 +1,56 @@
+import { write } from '@/db/client';
+import { env } from '@/env';
+import { newId } from '@/lib/ids';
+import { hashSecret, newSecret } from '@/lib/secrets';
+import { audit } from '@/server/audit';
+import { AppError } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { insertFeed, revokeFeeds } from './data';
+import { FEED_NAMES, FEED_PERMISSIONS } from './feed-permission';
+import type { MakeFeedInput } from './feed-schema';
+
+export interface MadeFeed {
+  /** Shown once: only a hash of its secret is kept. */
+  url: string;
+  /** An address made before has stopped working. */
+  replaced: boolean;
+}
+
+/** Makes a secret address; one made before for the same calendar stops working. */
+export async function makeFeed(scope: ClubScope, input: MakeFeedInput, now: number): Promise<MadeFeed> {
+  if (!scope.can(FEED_PERMISSIONS[input.scope])) {
+    throw new AppError(
+      'forbidden',
+      `Your role in ${scope.club.name} does not give you this calendar. Ask a club admin.`,
+    );
+  }
+  const secret = newSecret();
+  const replaced = await write(async (tx) => {
+    const before = await revokeFeeds(scope, tx, input.scope, now);
+    const id = newId('feed');
+    await insertFeed(tx, {
+      id,
+      clubId: scope.club.id,
+      memberId: scope.member.id,
+      scope: input.scope,
+      withPlace: input.withPlace,
+      secretHash: hashSecret(secret),
+      createdAt: now,
+    });
+    await audit(
+      tx,
+      {
+        clubId: scope.club.id,
+        actor: scope.actor,
+        action: before.length > 0 ? 'feed.renewed' : 'feed.made',
+        subjectType: 'feed',
+        subjectId: id,
+        summary: `${before.length > 0 ? 'Renewed' : 'Made'} a calendar address: ${FEED_NAMES[input.scope]}${input.withPlace ? ', with stand positions' : ''}.`,
+        detail: { scope: input.scope, withPlace: input.withPlace, replaced: before },
+      },
+      now,
+    );
+    return before.length > 0;
+  });
+  return { url: `${env.appUrl}/calendar/${secret}.ics`, replaced };
+}
