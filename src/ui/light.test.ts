@@ -1,0 +1,22 @@
+import { readFileSync } from 'node:fs';
+import { expect, it } from 'vitest';
+import { lightPaper, parseLight } from './light';
+
+const css = readFileSync(new URL('../app/globals.css', import.meta.url), 'utf8');
+
+it('takes anything unknown as auto', () => {
+  expect(parseLight('dim')).toBe('dim');
+  expect(parseLight(undefined)).toBe('auto');
+  expect(parseLight('"><script>')).toBe('auto');
+});
+
+it("gives the browser's frame the paper of the style sheet", () => {
+  for (const light of ['day', 'dark', 'dim'] as const) {
+    const paper = css.match(new RegExp(`\\[data-light="${light}"\\] \\{[^}]*--color-paper: (#\\w+)`))?.[1];
+    expect(lightPaper(light)).toBe(paper);
+  }
+  expect(lightPaper('auto')).toEqual([
+    { media: '(prefers-color-scheme: light)', color: lightPaper('day') },
+    { media: '(prefers-color-scheme: dark)', color: lightPaper('dark') },
+  ]);
+});
