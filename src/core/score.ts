@@ -18,7 +18,7 @@ export interface ScoreSettings {
 export const DEFAULT_SCORE: ScoreSettings = {
   promisePower: 0.5,
   quietPower: 1,
-  arcCost: 0.6,
+  arcCost: 0.4,
   staleHours: 12,
   highSpreadDeg: 32,
   fairSpreadDeg: 60,

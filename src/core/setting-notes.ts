@@ -25,7 +25,7 @@ export const HUNT_SETTING_NOTES: Record<string, { evidence: Evidence; note: stri
   },
   'approach.seenNearChance': {
     evidence: 'study',
-    note: '70 % within 100 m of people on a trail (Taylor & Knight 2003): open unhunted land, so an upper bound for woods.',
+    note: 'Under the 70 % within 100 m of people on a trail (Taylor & Knight 2003): open unhunted land, so an upper bound for woods.',
   },
   'approach.seenReachM': { evidence: 'practice', note: 'Disturbance carries 200-400 yards.' },
   'approach.maskMost': { evidence: 'our choice', note: 'Wind masks noise; only the direction of the effect is known.' },

@@ -35,8 +35,8 @@ export interface ApproachSettings {
 }
 
 /**
- * Seen and heard: 70 % within 100 m of people on a trail (Taylor & Knight 2003, Ecol. Appl., open unhunted land: an upper bound for
- * woods), nothing left at 400 m by practice. Wind masks noise: direction of effect only, no figure was found. The rest is our choice.
+ * Seen and heard: kept under the 70 % within 100 m of people on a trail (Taylor & Knight 2003, Ecol. Appl., open unhunted land: an
+ * upper bound for woods), nothing left at 400 m by practice. Wind masks noise: direction of effect only, no figure was found. The rest is our choice.
  */
 export const DEFAULT_APPROACH: ApproachSettings = {
   walkingSpeedMps: 1,
@@ -48,7 +48,7 @@ export const DEFAULT_APPROACH: ApproachSettings = {
   spacingM: 40,
   scentReachM: 400,
   passingMinutes: 15,
-  seenNearChance: 0.7,
+  seenNearChance: 0.5,
   seenReachM: 400,
   heardShare: 0.5,
   darkFactor: 0.6,
@@ -56,6 +56,6 @@ export const DEFAULT_APPROACH: ApproachSettings = {
   maskMost: 0.4,
   vehicleSeenFactor: 1.1,
   vehicleScentFactor: 0.5,
-  unmappedPer100M: 0.008,
+  unmappedPer100M: 0.005,
   beforeLightMinutes: 20,
 };

@@ -53,11 +53,11 @@ function scentChance(table: Float32Array, slot: number, wind: WalkWind): number 
   }
   if (wind.anyWeight > 0) {
     let any = 0;
-    for (let bin = 0; bin < WALK_BINS; bin += 2) {
+    for (let bin = 0; bin < WALK_BINS; bin++) {
       const exposure = table[row + bin] as number;
       if (exposure > 0) any += chanceOfExposure(exposure * wind.anyPerSpeed);
     }
-    sum += (wind.anyWeight * any) / (WALK_BINS / 2);
+    sum += (wind.anyWeight * any) / WALK_BINS;
   }
   return sum;
 }

@@ -47,7 +47,7 @@ function layOn(row: Float32Array, sight: Sight, plume: PlumeTable, scale: number
   // The wind that carries scent along a bearing comes from the other side.
   const from = normalizeDeg(sight.fromDeg + 180);
   const first = Math.ceil((from - reachDeg) / BIN_DEG);
-  const last = Math.min(first + WALK_BINS - 1, Math.floor((from + sight.widthDeg + reachDeg) / BIN_DEG));
+  const last = Math.floor((from + sight.widthDeg + reachDeg) / BIN_DEG);
   for (let b = first; b <= last; b++) {
     const past = b * BIN_DEG - from;
     const off = past < 0 ? -past : Math.max(0, past - sight.widthDeg);
