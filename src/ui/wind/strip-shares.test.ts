@@ -28,15 +28,13 @@ describe('unrollArcs', () => {
 
 describe('shareInArcs', () => {
   it('is the width of the arcs over 360 when the wind is even', () => {
+    // A width just under 360 would round to equal ends, which mean one direction.
+    const width = fc.oneof(fc.double({ min: 0, max: 359.9, noNaN: true }), fc.constant(360));
     fc.assert(
-      fc.property(
-        fc.double({ min: 0, max: 359.9, noNaN: true }),
-        fc.double({ min: 0, max: 360, noNaN: true }),
-        (from, width) => {
-          const arc = width >= 360 ? { fromDeg: 0, toDeg: 360 } : { fromDeg: from, toDeg: (from + width) % 360 };
-          expect(shareInArcs(even, [arc])).toBeCloseTo(Math.min(width, 360) / 360, 6);
-        },
-      ),
+      fc.property(fc.double({ min: 0, max: 359.9, noNaN: true }), width, (from, wide) => {
+        const arc = wide === 360 ? { fromDeg: 0, toDeg: 360 } : { fromDeg: from, toDeg: (from + wide) % 360 };
+        expect(shareInArcs(even, [arc])).toBeCloseTo(wide / 360, 6);
+      }),
     );
   });
 
