@@ -169,3 +169,20 @@ export async function listMembersForRules(scope: ClubScope, memberIds: string[],
 }
 
 export type MemberForRules = Awaited<ReturnType<typeof listMembersForRules>>[number];
+
+/** Guests with an account whom a member sponsors, by name. */
+export async function listSponsoredGuests(scope: ClubScope, sponsorId: string, from: ReadFrom) {
+  return from
+    .select({ id: memberships.id, name: users.name })
+    .from(memberships)
+    .innerJoin(users, eq(users.id, memberships.userId))
+    .where(
+      and(
+        eq(memberships.clubId, scope.club.id),
+        eq(memberships.sponsorId, sponsorId),
+        eq(memberships.role, 'guest'),
+        isNull(memberships.removedAt),
+      ),
+    )
+    .orderBy(asc(users.name));
+}

@@ -1,0 +1,115 @@
+'use client';
+
+import { useQueryClient } from '@tanstack/react-query';
+import { useState } from 'react';
+import { useWatch } from 'react-hook-form';
+import type { ActionResult } from '@/server/doors';
+import { Button } from '@/ui/button';
+import { RadioCards } from '@/ui/choices';
+import { Dialog, DialogClose } from '@/ui/dialog';
+import { FormErrorSummary, SubmitRow } from '@/ui/form';
+import { useActionForm } from '@/ui/form/use-action-form';
+import { DateInput, Select, Textarea } from '@/ui/text-inputs';
+import { useToast } from '@/ui/toast';
+import type { SitOptions } from '../reads';
+import { type ChangeSitValues, changeSitSchema } from '../sit-schema';
+import type { SavedSit, SitView } from '../sit-view';
+import { SIT_WINDOW_WORDS, SIT_WINDOWS } from '../sit-words';
+import { GuestFields } from './guest-fields';
+
+export type ChangeAction = (club: string, values: ChangeSitValues) => Promise<ActionResult<SavedSit>>;
+
+interface ChangeSitProps {
+  club: string;
+  change: ChangeAction;
+  sit: SitView;
+  options: SitOptions;
+}
+
+const WINDOW_CHOICES = SIT_WINDOWS.map((value) => ({ value, label: SIT_WINDOW_WORDS[value] }));
+
+function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & { onDone: () => void }) {
+  const toast = useToast();
+  const queries = useQueryClient();
+  const { form, register, errorOf, errors, pending, formProps } = useActionForm({
+    schema: changeSitSchema,
+    defaultValues: {
+      sitId: sit.id,
+      sequence: sit.sequence,
+      standId: sit.standId,
+      day: sit.day,
+      windows: sit.windows,
+      weapon: sit.weapon,
+      approachId: sit.approachId ?? '',
+      guests: sit.guests,
+      note: sit.note,
+    },
+    submit: (values: ChangeSitValues) => change(club, values),
+    onDone: async (saved: SavedSit) => {
+      toast({ title: 'Sit changed', text: `${saved.standName}, ${saved.whenText}, ${saved.timeText}.` });
+      onDone();
+      await queries.invalidateQueries();
+    },
+  });
+  const [standId, guests] = useWatch({ control: form.control, name: ['standId', 'guests'] });
+  const stand = options.stands.find((one) => one.id === standId);
+  const waysIn = options.waysIn.filter((way) => way.standId === standId);
+  const most = Math.min(options.guestsAtOnce, stand ? stand.seats - 1 : options.guestsAtOnce);
+
+  return (
+    <form {...formProps} className="flex flex-col gap-4">
+      <FormErrorSummary errors={errors} title="This change cannot be made" />
+      <Select
+        label="Stand"
+        options={options.stands.map((one) => ({ value: one.id, label: one.name }))}
+        error={errorOf('standId')}
+        {...register('standId', { onChange: () => form.setValue('approachId', '') })}
+      />
+      <DateInput label="Day" required error={errorOf('day')} {...register('day')} />
+      <RadioCards label="Window" across choices={WINDOW_CHOICES} error={errorOf('windows')} {...register('windows')} />
+      <Select
+        label="Weapon"
+        options={stand?.weapons ?? [{ value: sit.weapon, label: sit.weaponText }]}
+        error={errorOf('weapon')}
+        {...register('weapon')}
+      />
+      <Select
+        label="Way in"
+        optional
+        placeholder="Not said"
+        options={waysIn.map((way) => ({ value: way.id, label: way.name }))}
+        error={errorOf('approachId')}
+        {...register('approachId')}
+      />
+      <GuestFields
+        guests={guests ?? []}
+        onChange={(list) => form.setValue('guests', list, { shouldDirty: true })}
+        known={options.guests}
+        most={Math.max(0, most)}
+        errorOf={errorOf}
+      />
+      <Textarea label="Note" optional rows={2} maxLength={500} error={errorOf('note')} {...register('note')} />
+      <SubmitRow label="Save the change" pending={pending}>
+        <DialogClose>
+          <Button>Keep as it is</Button>
+        </DialogClose>
+      </SubmitRow>
+    </form>
+  );
+}
+
+export function ChangeSitDialog(props: ChangeSitProps) {
+  const [open, setOpen] = useState(false);
+  const label = `Change ${props.sit.standName}, ${props.sit.whenText}`;
+  return (
+    <Dialog
+      title="Change this sit"
+      description="The club's rules are checked again for the new place and time."
+      trigger={<Button aria-label={label}>Change</Button>}
+      open={open}
+      onOpenChange={setOpen}
+    >
+      <ChangeSitForm {...props} onDone={() => setOpen(false)} />
+    </Dialog>
+  );
+}

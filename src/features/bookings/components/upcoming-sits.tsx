@@ -1,0 +1,44 @@
+'use client';
+
+import { DefinitionList } from '@/ui/page-parts';
+import type { SitOptions } from '../reads';
+import type { SitView } from '../sit-view';
+import { type CancelAction, CancelSitDialog } from './cancel-sit-dialog';
+import { type ChangeAction, ChangeSitDialog } from './change-sit-dialog';
+
+interface UpcomingSitsProps {
+  club: string;
+  sits: SitView[];
+  options: SitOptions;
+  change: ChangeAction;
+  cancel: CancelAction;
+}
+
+function factsOf(sit: SitView) {
+  return [
+    { term: 'When', detail: sit.whenText },
+    { term: 'Club time', detail: sit.timeText },
+    { term: 'Weapon', detail: sit.weaponText },
+    ...(sit.wayIn ? [{ term: 'Way in', detail: sit.wayIn }] : []),
+    ...(sit.guests.length > 0 ? [{ term: 'Guests', detail: sit.guests.map((guest) => guest.name).join(', ') }] : []),
+    ...(sit.note ? [{ term: 'Note', detail: sit.note }] : []),
+  ];
+}
+
+export function UpcomingSits({ club, sits, options, change, cancel }: UpcomingSitsProps) {
+  return (
+    <ul className="flex flex-col gap-8">
+      {sits.map((sit) => (
+        <li key={sit.id} aria-label={`${sit.standName}, ${sit.whenText}`}>
+          <h3 className="mb-2 font-serif text-lg">{sit.standName}</h3>
+          <DefinitionList items={factsOf(sit)} />
+          <div className="mt-3 flex flex-wrap gap-2">
+            {/* A new key after each change: the form must start from what is saved. */}
+            <ChangeSitDialog key={sit.sequence} club={club} change={change} sit={sit} options={options} />
+            <CancelSitDialog club={club} cancel={cancel} sit={sit} />
+          </div>
+        </li>
+      ))}
+    </ul>
+  );
+}
