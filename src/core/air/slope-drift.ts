@@ -49,7 +49,13 @@ export function sunOnSlope(altitudeDeg: number, azimuthDeg: number, aspectDeg: n
  */
 export function slopeDrift(input: SlopeDriftInput, s: DriftSettings): SlopeDrift {
   const slope = input.slopePercent ?? s.slopeWhenUnknownPercent;
-  if (!s.modelled || input.drainBearingDeg === null || !(slope >= s.leastSlopePercent)) return NO_DRIFT;
+  if (
+    !s.modelled ||
+    input.drainBearingDeg === null ||
+    !Number.isFinite(input.drainBearingDeg) ||
+    !(slope >= s.leastSlopePercent)
+  )
+    return NO_DRIFT;
   const clear = 1 - ramp(input.cloudPercent, s.wholeBelowCloudPercent, s.goneAboveCloudPercent);
   const light = 1 - ramp(input.generalSpeedMps, s.wholeBelowMps, s.goneAboveMps);
   const sun = sunOnSlope(input.sunAltitudeDeg, input.sunAzimuthDeg, input.drainBearingDeg, slope);

@@ -2,7 +2,7 @@ import type { StabilityClass } from '../air/stability-types';
 import { briggsSigmaZ } from './briggs';
 import { NEAREST_M, sweptSigmaRad, verticalTerm } from './plume';
 
-const STEP_M = 2;
+const STEP_M = 0.5;
 const DEG = 180 / Math.PI;
 
 /** By distance: the swept plume's angular spread and its strength on the axis. */
@@ -23,7 +23,10 @@ export function wideningLevel(deg: number): number {
   return best;
 }
 
-/** Table of a class, widening and source height for receivers at `zM`, out to `reachM`. Within 1 % of sweptPlume from 10 m. */
+/**
+ * Table of a class, widening and source height for receivers at `zM`, out to `reachM`. Within 1 % of sweptPlume, or of the
+ * reference strength where that is more, from 10 m out.
+ */
 export function plumeTable(
   c: StabilityClass,
   wideningDeg: number,

@@ -41,7 +41,7 @@ export interface Nodes {
   spacing: number;
 }
 
-const REACH = 2.625;
+const REACH = 2.9;
 
 /** `count` evenly spaced points of a standard normal with weights that sum to 1, mean 0 and variance exactly 1. */
 export function normalNodes(count: number): Nodes {
