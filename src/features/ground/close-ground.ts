@@ -21,7 +21,11 @@ async function nameOf(scope: ClubScope, tx: Tx, standId: string | null): Promise
   return stand.name;
 }
 
-async function close(scope: ClubScope, values: ClosureValues, now: number): Promise<Closed> {
+/** Closes a stand, or with no stand the whole ground. A stand may stay closed until somebody opens it again. */
+export async function closeGround(scope: ClubScope, values: ClosureValues, now: number): Promise<Closed> {
+  if (values.standId !== null && !scope.can('stands.write')) {
+    throw new AppError('forbidden', 'Only a steward or an admin closes a stand; you may close the whole ground.');
+  }
   const id = newId('closure');
   const today = dayOf(now, scope.club.zone);
   if (values.toDay !== null && values.toDay < today) {
@@ -41,18 +45,4 @@ async function close(scope: ClubScope, values: ClosureValues, now: number): Prom
     await noteChange(scope, tx, { subject: 'closure', verb: 'added', id, summary, detail: { ...values } }, now);
     return { id, touched: await listBookedSits(scope, { ...values, now }, tx) };
   });
-}
-
-/** Closes one stand, with no last day until somebody opens it again. */
-export function closeStand(
-  scope: ClubScope,
-  values: ClosureValues & { standId: string },
-  now: number,
-): Promise<Closed> {
-  return close(scope, values, now);
-}
-
-/** Closes the whole ground for some days. */
-export function closeDays(scope: ClubScope, values: ClosureValues & { standId: null }, now: number): Promise<Closed> {
-  return close(scope, values, now);
 }

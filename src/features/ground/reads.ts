@@ -3,6 +3,7 @@ import { dayOf } from '@/core/day-time';
 import { WEAPONS } from '@/core/types';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
+import type { ApproachPlaces } from './approach-schema';
 import { listApproaches, listApproachesOf } from './approaches-data';
 import { listClosuresFrom } from './closures-data';
 import { listFeatures } from './features-data';
@@ -10,6 +11,7 @@ import { geometryText } from './geometry-text';
 import { listParkings } from './parkings-data';
 import { type BookedSit, listBookedSits, listHunters } from './people-data';
 import { degreesText } from './place-text';
+import { namedSits } from './refuse';
 import { getStand, listStands } from './stands-data';
 import type { ClosureLine, FeatureLine, ParkingLine, StandLine } from './view';
 import { formatClosed, formatDays, formatSize, formatWinds } from './view';
@@ -101,11 +103,21 @@ export async function readClosures(scope: ClubScope, now: number) {
   const today = dayOf(now, scope.club.zone);
   const stands = scope.can('stands.read') ? await listStands(scope) : [];
   const names = new Map(stands.map((s) => [s.id, s.name]));
-  const lines = (await listClosuresFrom(scope, today)).flatMap((c): ClosureLine[] => {
+  const [closures, sits] = await Promise.all([
+    listClosuresFrom(scope, today),
+    listBookedSits(scope, { standId: null, fromDay: today, now }),
+  ]);
+  const lines = closures.flatMap((c): ClosureLine[] => {
     const standName = c.standId === null ? null : names.get(c.standId);
     if (standName === undefined) return [];
+    const touched = sits.filter(
+      (s) =>
+        (c.standId === null || c.standId === s.standId) && c.fromDay <= s.day && (c.toDay === null || s.day <= c.toDay),
+    );
     const { id, fromDay, reason } = c;
-    return [{ id, standName, fromDay, days: formatDays(c), reason, now: fromDay <= today }];
+    return [
+      { id, standName, fromDay, days: formatDays(c), reason, now: fromDay <= today, touched: namedSits(touched) },
+    ];
   });
   return { today, lines, stands: stands.map(({ id, name }) => ({ id, name })) };
 }
@@ -116,6 +128,17 @@ export async function sitsTouchedByClosure(
   closure: { standId: string | null; fromDay: string; toDay: string | null },
   now: number,
 ): Promise<BookedSit[]> {
-  if (closure.standId !== null && !(await getStand(scope, closure.standId))) throw notFound();
+  if (closure.standId !== null && !(scope.can('stands.read') && (await getStand(scope, closure.standId))))
+    throw notFound();
   return listBookedSits(scope, { ...closure, now });
+}
+
+/** The places an approach to a stand is tied to; only what its form needs. */
+export async function readApproachPlaces(scope: ClubScope, standId: string): Promise<ApproachPlaces> {
+  const [stand, parkings] = await Promise.all([getStand(scope, standId), listParkings(scope)]);
+  if (!stand) throw notFound();
+  return {
+    stand: { name: stand.name, lat: stand.lat, lon: stand.lon },
+    parkings: parkings.map(({ id, name, lat, lon }) => ({ id, name, lat, lon })),
+  };
 }

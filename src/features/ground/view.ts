@@ -49,6 +49,8 @@ export interface ClosureLine {
   days: string;
   reason: string;
   now: boolean;
+  /** Sits booked all the same; empty when there are none. */
+  touched: string;
 }
 
 /** Arcs for people, as compass points and degrees, each once: 'NW-N · 304°–11°'. */

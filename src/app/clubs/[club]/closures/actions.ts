@@ -1,0 +1,19 @@
+'use server';
+
+import { openAgainInput } from '@/features/ground/action-inputs';
+import { closeGround } from '@/features/ground/close-ground';
+import { closureFormSchema, closureSchema } from '@/features/ground/closure-schema';
+import { openAgain } from '@/features/ground/open-again';
+import { clubAction } from '@/server/doors';
+
+export const closeAction = clubAction({
+  permission: 'closed_days.write',
+  input: closureFormSchema,
+  run: ({ scope, input, now }) => closeGround(scope, closureSchema.parse(input), now),
+});
+
+export const openAgainAction = clubAction({
+  permission: 'closed_days.write',
+  input: openAgainInput,
+  run: ({ scope, input, now }) => openAgain(scope, input.id, now),
+});

@@ -1,0 +1,64 @@
+import { FeatureFormView } from '@/features/ground/components/feature-form';
+import { RemoveButton } from '@/features/ground/components/remove-button';
+import { featureFormOf } from '@/features/ground/feature-schema';
+import { getFeature } from '@/features/ground/features-data';
+import { formClubOf } from '@/features/ground/form-club';
+import { geometryText } from '@/features/ground/geometry-text';
+import { formatSize } from '@/features/ground/view';
+import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS } from '@/features/ground/words';
+import { clubPage } from '@/server/doors';
+import { notFound } from '@/server/errors';
+import { DefinitionList, PageTitle } from '@/ui/page-parts';
+import { addFeatureAction, changeFeatureAction, removeFeatureAction } from '../../actions';
+
+export const metadata = { title: 'Feature' };
+
+export default clubPage('features.read', async ({ scope, params }) => {
+  const feature = await getFeature(scope, params.feature ?? '');
+  if (!feature) throw notFound();
+  const at = { id: feature.id, version: feature.version };
+  const canWrite = scope.can('features.write');
+  const { shape, text } = geometryText(feature.geometry);
+  return (
+    <>
+      <PageTitle
+        title={feature.name}
+        over={FEATURE_KIND_WORDS[feature.kind]}
+        actions={
+          canWrite && (
+            <RemoveButton
+              club={scope.club.slug}
+              at={at}
+              name={feature.name}
+              remove={removeFeatureAction}
+              to={`/clubs/${scope.club.slug}/ground`}
+            >
+              <p>The ranking will no longer weigh it.</p>
+            </RemoveButton>
+          )
+        }
+      />
+      {canWrite ? (
+        <FeatureFormView
+          key={feature.version}
+          club={scope.club.slug}
+          formClub={formClubOf(scope.club)}
+          values={featureFormOf(feature)}
+          at={at}
+          add={addFeatureAction}
+          change={changeFeatureAction}
+        />
+      ) : (
+        <DefinitionList
+          items={[
+            { term: 'Drawn as', detail: SHAPE_WORDS[shape] },
+            { term: 'Size', detail: formatSize(feature.geometry, scope.club, scope.club.units) || '–' },
+            { term: 'Months', detail: formatMonths(feature.months) },
+            { term: 'Latitude, longitude', detail: <span className="whitespace-pre-line">{text}</span> },
+            { term: 'Notes', detail: feature.notes || '–' },
+          ]}
+        />
+      )}
+    </>
+  );
+});

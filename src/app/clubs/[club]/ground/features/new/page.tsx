@@ -1,0 +1,22 @@
+import { FeatureFormView } from '@/features/ground/components/feature-form';
+import { emptyFeatureForm } from '@/features/ground/feature-schema';
+import { formClubOf } from '@/features/ground/form-club';
+import { clubPage } from '@/server/doors';
+import { PageTitle } from '@/ui/page-parts';
+import { addFeatureAction, changeFeatureAction } from '../../actions';
+
+export const metadata = { title: 'Add a feature' };
+
+export default clubPage('features.write', async ({ scope }) => (
+  <>
+    <PageTitle title="Add a feature" over="Ground" />
+    <FeatureFormView
+      club={scope.club.slug}
+      formClub={formClubOf(scope.club)}
+      values={emptyFeatureForm()}
+      at={null}
+      add={addFeatureAction}
+      change={changeFeatureAction}
+    />
+  </>
+));

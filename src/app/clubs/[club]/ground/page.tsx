@@ -1,0 +1,45 @@
+import { FeaturesTable, ParkingsTable } from '@/features/ground/components/ground-tables';
+import { readGround } from '@/features/ground/reads';
+import { clubPage } from '@/server/doors';
+import { ButtonLink } from '@/ui/button';
+import { EmptyState } from '@/ui/notices';
+import { PageTitle, Section } from '@/ui/page-parts';
+
+export const metadata = { title: 'Ground' };
+
+export default clubPage('features.read', async ({ scope }) => {
+  const { features, parkings } = await readGround(scope);
+  const base = `/clubs/${scope.club.slug}/ground`;
+  const canWrite = scope.can('features.write');
+  const addFeature = <ButtonLink href={`${base}/features/new`}>Add a feature</ButtonLink>;
+  const addParking = <ButtonLink href={`${base}/parking/new`}>Add a parking place</ButtonLink>;
+  return (
+    <>
+      <PageTitle title="Ground" lead="What deer use and where people leave their trucks: the ranking weighs both." />
+      <Section title="Features" actions={canWrite && features.length > 0 && addFeature}>
+        <FeaturesTable
+          club={scope.club.slug}
+          lines={features}
+          empty={
+            <EmptyState title="No features yet" action={canWrite && addFeature}>
+              {canWrite
+                ? 'Begin with bedding and food: scent and noise are weighed against them.'
+                : 'A steward adds bedding, food, water and travel lines.'}
+            </EmptyState>
+          }
+        />
+      </Section>
+      <Section title="Parking places" actions={canWrite && parkings.length > 0 && addParking}>
+        <ParkingsTable
+          club={scope.club.slug}
+          lines={parkings}
+          empty={
+            <EmptyState title="No parking places yet" action={canWrite && addParking}>
+              Approaches begin at a parking place{canWrite ? ': add one first.' : '; a steward adds them.'}
+            </EmptyState>
+          }
+        />
+      </Section>
+    </>
+  );
+});

@@ -1,0 +1,32 @@
+import { StandFormView } from '@/features/ground/components/stand-form';
+import { formClubOf } from '@/features/ground/form-club';
+import { listHunters } from '@/features/ground/people-data';
+import { standFormOf } from '@/features/ground/stand-form';
+import { getStand } from '@/features/ground/stands-data';
+import { clubPage } from '@/server/doors';
+import { notFound } from '@/server/errors';
+import { PageTitle } from '@/ui/page-parts';
+import { addStandAction, changeStandAction } from '../../actions';
+
+export const metadata = { title: 'Edit a stand' };
+
+export default clubPage('stands.write', async ({ scope, params }) => {
+  const stand = await getStand(scope, params.stand ?? '');
+  if (!stand) throw notFound();
+  return (
+    <>
+      <PageTitle title={`Edit ${stand.name}`} over="Stands" />
+      <StandFormView
+        key={stand.version}
+        club={scope.club.slug}
+        formClub={formClubOf(scope.club)}
+        restDaysDefault={scope.club.rules.restDaysDefault}
+        hunters={await listHunters(scope)}
+        values={standFormOf(stand, scope.club.units)}
+        at={{ id: stand.id, version: stand.version }}
+        add={addStandAction}
+        change={changeStandAction}
+      />
+    </>
+  );
+});

@@ -1,0 +1,92 @@
+'use client';
+
+import { WEAPONS } from '@/core/types';
+import type { Units } from '@/core/units';
+import { FieldGroup } from '@/ui/field';
+import { Section } from '@/ui/page-parts';
+import { Select, TextInput } from '@/ui/text-inputs';
+import { STAND_LIMITS, type StandForm } from '../stand-schema';
+import { SHOT_SIDE_WORDS, STAND_KIND_WORDS, WEAPON_WORDS } from '../words';
+import { choicesOf } from './choices-of';
+import type { Fields } from './form-types';
+import { HereButton } from './here-button';
+
+export function StandPlaceFields({ fields }: { fields: Fields<StandForm> }) {
+  const { register, errorOf, form } = fields;
+  return (
+    <Section title="Place" heading="margin">
+      <div className="grid gap-4 sm:grid-cols-2">
+        <TextInput label="Name" error={errorOf('name')} autoComplete="off" {...register('name')} />
+        <Select label="Kind" options={choicesOf(STAND_KIND_WORDS)} error={errorOf('kind')} {...register('kind')} />
+        <TextInput
+          label="Latitude"
+          hint="Degrees, such as 38.6051"
+          inputMode="text"
+          autoComplete="off"
+          error={errorOf('lat')}
+          {...register('lat')}
+        />
+        <TextInput
+          label="Longitude"
+          hint="West is minus, such as -83.1952"
+          autoComplete="off"
+          error={errorOf('lon')}
+          {...register('lon')}
+        />
+        <HereButton
+          onPlace={({ lat, lon }) => {
+            form.setValue('lat', lat, { shouldDirty: true });
+            form.setValue('lon', lon, { shouldDirty: true, shouldValidate: true });
+          }}
+        />
+      </div>
+    </Section>
+  );
+}
+
+export function StandSeatFields({ fields, units }: { fields: Fields<StandForm>; units: Units }) {
+  const { register, errorOf } = fields;
+  const { heightUnit, rangeUnit } = STAND_LIMITS[units];
+  return (
+    <Section title="Seat and shot" heading="margin">
+      <div className="grid gap-4 sm:grid-cols-2">
+        <TextInput
+          label="Seat height above ground"
+          inputMode="decimal"
+          unit={heightUnit}
+          error={errorOf('seatHeight')}
+          {...register('seatHeight')}
+        />
+        <TextInput label="Seats" inputMode="numeric" error={errorOf('seats')} {...register('seats')} />
+        <TextInput
+          label="Faces"
+          optional
+          hint="A compass point (NE) or degrees from true north"
+          autoComplete="off"
+          error={errorOf('facing')}
+          {...register('facing')}
+        />
+        <Select
+          label="Shot side"
+          options={choicesOf(SHOT_SIDE_WORDS)}
+          error={errorOf('shotSide')}
+          {...register('shotSide')}
+        />
+      </div>
+      <FieldGroup label="Longest shot" hint="A weapon left blank is not allowed at this stand." className="mt-5">
+        <div className="grid grid-cols-2 gap-4 lg:grid-cols-5">
+          {WEAPONS.map((weapon) => (
+            <TextInput
+              key={weapon}
+              label={WEAPON_WORDS[weapon]}
+              inputMode="decimal"
+              unit={rangeUnit}
+              error={errorOf(`shotRange.${weapon}`)}
+              {...register(`shotRange.${weapon}`)}
+            />
+          ))}
+        </div>
+      </FieldGroup>
+    </Section>
+  );
+}
