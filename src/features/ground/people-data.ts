@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, gt, gte, isNull, lte } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, gte, isNull, lte, sql } from 'drizzle-orm';
 import { can, type Role } from '@/core/permissions';
 import { type ReadFrom, reader } from '@/db/client';
 import { auditLog, memberships, sits, stands, users } from '@/db/schema';
@@ -71,7 +71,7 @@ export async function lastChangedBy(scope: ClubScope, id: string, from: ReadFrom
     .select({ name: auditLog.actorName })
     .from(auditLog)
     .where(and(eq(auditLog.clubId, scope.club.id), eq(auditLog.subjectId, id)))
-    .orderBy(desc(auditLog.at), desc(auditLog.id))
+    .orderBy(desc(auditLog.at), sql`${auditLog}.rowid desc`)
     .limit(1);
   return row?.name ?? null;
 }
