@@ -41,8 +41,11 @@ function DayTable({ club, day, cancel }: { club: string; day: BoardDay; cancel: 
             </RowHead>
             <Td label="Stand">{sit.standName}</Td>
             <Td label="When">
-              {sit.windowText}, {sit.timeText}
-              <span className="block text-ink-soft text-sm">{PHASES[sit.phase]}</span>
+              {/* One box: a stacked row lays each child of the cell in its grid. */}
+              <div>
+                {sit.windowText}, {sit.timeText}
+                <span className="block text-ink-soft text-sm">{PHASES[sit.phase]}</span>
+              </div>
             </Td>
             <Td label="Way in">{way(sit)}</Td>
             <Td label="Guests">{sit.guests.length > 0 ? sit.guests.join(', ') : 'None'}</Td>
