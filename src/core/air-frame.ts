@@ -6,7 +6,7 @@ import { WALK_BINS, type WalkWind } from './approach/walk-chance';
 import type { ScoringSettings } from './settings';
 import type { Place } from './sun';
 import type { Forecast, ScoredStand, SitWindow } from './types';
-import { type DirectionSummary, directionSummary } from './wind/histogram';
+import { type DirectionSummary, directionSummary, sitDirectionShares } from './wind/histogram';
 import type { ScenarioSet } from './wind/scenario-types';
 import { buildScenarios } from './wind/scenarios';
 import { scenariosAtStand } from './wind/stand-scenarios';
@@ -21,6 +21,7 @@ export interface SeatFrame {
   /** Wind over the whole sit at the seat. */
   sit: DirectionSummary;
   steps: DirectionSummary[];
+  shares: number[] | null;
 }
 
 /** The air of one window, shared by all stands. */
@@ -89,7 +90,8 @@ function walkWind(
 function seatFrame(stand: ScoredStand, steps: PlaceStep[], open: ScenarioSet, settings: ScoringSettings): SeatFrame {
   const air = standAir(stand, steps, settings.air);
   const set = scenariosAtStand(open, air);
-  return { air, set, sit: directionSummary(set), steps: air.map((_, t) => directionSummary(set, t)) };
+  const byStep = air.map((_, t) => directionSummary(set, t));
+  return { air, set, sit: directionSummary(set), steps: byStep, shares: sitDirectionShares(set) };
 }
 
 /**

@@ -304,6 +304,8 @@ export interface Verdict {
   pressure: number;
   /** Mean direction of the wind over the sit; null: none, or no forecast. */
   meanFromDeg?: number | null;
+  /** 72 shares of the wind over the whole sit, as in TimelineStep; null: no forecast. */
+  directionShares?: number[] | null;
   reasons: Reason[];
   counterfactuals: Counterfactual[];
   cautions: Caution[];

@@ -1,0 +1,12 @@
+import { readAsk } from '@/features/sits/ask-schema';
+import { WeekScreen } from '@/features/sits/components/week-screen';
+import { readWeek } from '@/features/sits/read-week';
+import { now } from '@/server/clock';
+import { clubPage } from '@/server/doors';
+
+export const metadata = { title: 'Week' };
+
+export default clubPage('sits.read', async ({ scope, search }) => {
+  const { weapon } = readAsk(search);
+  return <WeekScreen key={weapon} ask={{ weapon }} initial={await readWeek(scope, { weapon }, now())} />;
+});

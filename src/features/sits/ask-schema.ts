@@ -1,0 +1,32 @@
+import { z } from 'zod';
+import { isDay } from '@/core/day-time';
+import { WEAPONS, WINDOW_NAMES } from '@/core/types';
+
+export function inAskedYears(day: string): boolean {
+  return isDay(day) && day >= '2000-01-01' && day <= '2099-12-31';
+}
+
+const day = z
+  .string()
+  .refine(isDay, 'Write a day as YYYY-MM-DD.')
+  .refine(inAskedYears, 'Choose a day of this century.');
+const window = z.enum(WINDOW_NAMES, { error: 'Choose morning or evening.' });
+const weapon = z.enum(WEAPONS, { error: 'Choose one of the weapons.' });
+
+/** The query string of the ranked list; what is left out is the next window, any weapon. */
+export const sitsAskSchema = z.object({ day: day.optional(), window: window.optional(), weapon: weapon.optional() });
+export type SitsAskText = z.output<typeof sitsAskSchema>;
+
+export const weekAskSchema = z.object({ weapon: weapon.optional() });
+export type WeekAskText = z.output<typeof weekAskSchema>;
+
+/** A page's address may be typed by hand: what cannot be read in it is left out, part by part. */
+const lenient = z.object({
+  day: day.optional().catch(undefined),
+  window: window.optional().catch(undefined),
+  weapon: weapon.optional().catch(undefined),
+});
+
+export function readAsk(search: Record<string, string | string[] | undefined>): SitsAskText {
+  return lenient.parse(search);
+}

@@ -1,0 +1,33 @@
+import { Section } from '@/ui/page-parts';
+import type { BlockedRow } from '../view-types';
+import { WordMark } from './word-mark';
+
+/** Stands a rule stops, each with the rule, who or what holds it, and when it ends. */
+export function BlockedList({ rows }: { rows: BlockedRow[] }) {
+  if (rows.length === 0) return null;
+  return (
+    <Section title="Not open" note="How they would rank if they were, the best first.">
+      <ul>
+        {rows.map((row) => (
+          <li
+            key={row.standId}
+            id={row.standId}
+            className="border-rule border-b py-2.5 sm:grid sm:grid-cols-[14rem_minmax(0,1fr)] sm:gap-5"
+          >
+            <h3 className="flex flex-wrap items-baseline gap-x-2.5">
+              <span className="font-serif text-lg">{row.name}</span>
+              <WordMark word={row.word} />
+            </h3>
+            <div>
+              {row.gates.map((gate) => (
+                <p key={`${gate.code} ${gate.text}`}>
+                  {gate.text} {gate.ends && <span className="whitespace-nowrap text-ink-soft">{gate.ends}.</span>}
+                </p>
+              ))}
+            </div>
+          </li>
+        ))}
+      </ul>
+    </Section>
+  );
+}

@@ -1,0 +1,147 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { formatDay } from '@/core/day-time';
+import { Button, ButtonLink, TextLink } from '@/ui/button';
+import { EmptyState, Notice } from '@/ui/notices';
+import { PageTitle } from '@/ui/page-parts';
+import type { SitsAskText } from '../ask-schema';
+import { sitsQuery } from '../queries';
+import type { OpenRow, SitsView } from '../view-types';
+import { WINDOW_WORDS } from '../words';
+import { AlmanacHead } from './almanac-head';
+import { BlockedList } from './blocked-list';
+import { type BookActions, BookDialog, type Hunter } from './book-dialog';
+import { ForecastNote } from './forecast-note';
+import { SitRow } from './sit-row';
+import { WindowPicker } from './window-picker';
+
+export interface SitScreenProps {
+  ask: SitsAskText;
+  initial: SitsView;
+  /** Row open at first. */
+  openStandId: string | null;
+  actions: BookActions;
+  /** Members an admin may book for; null: only oneself. */
+  hunters: Hunter[] | null;
+  may: { book: boolean; addStands: boolean };
+}
+
+export function SitScreen({ ask, initial, openStandId, actions, hunters, may }: SitScreenProps) {
+  const { slug } = initial.club;
+  const query = useQuery({ ...sitsQuery(slug, ask), initialData: initial, initialDataUpdatedAt: initial.madeAt });
+  const view = query.data;
+  const [openId, setOpenId] = useState(openStandId);
+  const [booking, setBooking] = useState<OpenRow | null>(null);
+  const { window, mine } = view;
+  return (
+    <>
+      <PageTitle
+        over={view.club.name}
+        title={`${formatDay(window.day)}, ${WINDOW_WORDS[window.window]}`}
+        actions={
+          <ButtonLink look="quiet" href={`/clubs/${slug}/week`}>
+            The whole week
+          </ButtonLink>
+        }
+      />
+      <WindowPicker view={view} />
+      <AlmanacHead view={view} />
+      <div className="mt-3 grid gap-3">
+        <ForecastNote forecast={view.forecast} now={view.madeAt} />
+        {query.isError && (
+          <Notice
+            level="caution"
+            title="This list may be old"
+            actions={<Button onClick={() => query.refetch()}>Try again</Button>}
+          >
+            {query.error.message}
+          </Notice>
+        )}
+        {view.cautions.map((caution) => (
+          <Notice key={caution.text} level={caution.level === 'stop' ? 'stop' : 'caution'} title={caution.text} />
+        ))}
+        {view.over && <Notice title="This window is over">The list shows how it stood.</Notice>}
+        {mine && (
+          <Notice title={`You sit at ${mine.standName}, ${mine.windows === 'all_day' ? 'all day' : mine.windows}`}>
+            <TextLink href={`/clubs/${slug}/my-sits`}>Change or cancel it</TextLink>
+            {!view.over && ', or move to another stand below.'}
+          </Notice>
+        )}
+      </div>
+      <RankedList
+        view={view}
+        ask={ask}
+        openId={openId}
+        onToggle={(id) => setOpenId(openId === id ? null : id)}
+        onBook={may.book && !view.over ? setBooking : null}
+        addStands={may.addStands}
+      />
+      <BlockedList rows={view.blocked} />
+      {booking && (
+        <BookDialog
+          key={booking.standId}
+          row={booking}
+          view={view}
+          actions={actions}
+          hunters={hunters}
+          onClose={() => setBooking(null)}
+        />
+      )}
+    </>
+  );
+}
+
+interface RankedListProps {
+  view: SitsView;
+  ask: SitsAskText;
+  openId: string | null;
+  onToggle: (standId: string) => void;
+  onBook: ((row: OpenRow) => void) | null;
+  addStands: boolean;
+}
+
+function RankedList({ view, ask, openId, onToggle, onBook, addStands }: RankedListProps) {
+  if (view.standCount === 0) {
+    return (
+      <div className="mt-6">
+        <EmptyState
+          title="No stands yet"
+          action={
+            addStands && (
+              <ButtonLink look="primary" href={`/clubs/${view.club.slug}/stands/new`}>
+                Add the first stand
+              </ButtonLink>
+            )
+          }
+        >
+          {addStands ? 'A stand with its good winds is all a first list needs.' : 'A steward of the club adds them.'}
+        </EmptyState>
+      </div>
+    );
+  }
+  return (
+    <section aria-label="Stands by sit score" className="mt-6">
+      {view.open.length === 0 ? (
+        <EmptyState title="No stand is open in this window">
+          Each one below names the rule that stops it. Try the next window or another weapon.
+        </EmptyState>
+      ) : (
+        <ol className="border-rule-strong border-t">
+          {view.open.map((row) => (
+            <SitRow
+              key={row.standId}
+              row={row}
+              view={view}
+              ask={ask}
+              open={openId === row.standId}
+              onToggle={() => onToggle(row.standId)}
+              onBook={onBook && (() => onBook(row))}
+            />
+          ))}
+        </ol>
+      )}
+    </section>
+  );
+}

@@ -1,0 +1,106 @@
+import Link from 'next/link';
+import { formatDay } from '@/core/day-time';
+import { joinClasses } from '@/ui/join-classes';
+import { sitAddress } from '../sit-address';
+import type { WeekCell, WeekColumnView, WeekView } from '../view-types';
+import { cellText, groupByDay, isShown, shownStands, type WeekShow } from '../week-cells';
+import { WINDOW_WORDS } from '../words';
+import { MiniStrip } from './mini-strip';
+
+/** Stands down, windows across: each cell says the word, the score and where the wind lies. */
+export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
+  const days = groupByDay(view.columns);
+  return (
+    <table className="border-collapse text-sm">
+      <caption className="sr-only">Every stand in every window the forecast reaches</caption>
+      <thead>
+        <tr>
+          <th scope="col" rowSpan={2} className="sticky left-0 z-10 min-w-36 bg-paper pr-3 text-left align-bottom">
+            Stand
+          </th>
+          {days.map(({ day, columns }) => (
+            <th
+              key={day}
+              scope="colgroup"
+              colSpan={columns.length}
+              className="border-rule-strong border-l px-2 text-left font-serif text-base"
+            >
+              {formatDay(day)}
+            </th>
+          ))}
+        </tr>
+        <tr className="border-rule-strong border-b">
+          {view.columns.map(({ window }) => (
+            <th
+              key={`${window.day} ${window.window}`}
+              scope="col"
+              className={joinClasses(
+                'px-2 pb-1 text-left font-normal',
+                window.window === 'morning' && 'border-rule-strong border-l',
+              )}
+            >
+              <Link
+                className="rounded-sm underline decoration-rule-strong underline-offset-4"
+                href={sitAddress(view.club.slug, { day: window.day, window: window.window })}
+              >
+                {WINDOW_WORDS[window.window]}
+                <span className="sr-only"> of {formatDay(window.day)}</span>
+              </Link>
+            </th>
+          ))}
+        </tr>
+      </thead>
+      <tbody>
+        {shownStands(view, show).map((stand) => (
+          <tr key={stand.standId} className="border-rule border-b align-top">
+            <th scope="row" className="sticky left-0 z-10 bg-paper py-1.5 pr-3 text-left font-semibold">
+              {stand.name}
+            </th>
+            {view.columns.map((column) => (
+              <td
+                key={`${column.window.day} ${column.window.window}`}
+                className={joinClasses('p-0', column.window.window === 'morning' && 'border-rule border-l')}
+              >
+                <Cell view={view} column={column} stand={stand} show={show} />
+              </td>
+            ))}
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}
+
+interface CellProps {
+  view: WeekView;
+  column: WeekColumnView;
+  stand: WeekView['stands'][number];
+  show: WeekShow;
+}
+
+function Cell({ view, column, stand, show }: CellProps) {
+  const cell = column.cells.find((one) => one.standId === stand.standId);
+  if (!cell || !isShown(cell, show)) return null;
+  const { day, window } = column.window;
+  const ask = { day, window, ...(view.weapon ? { weapon: view.weapon } : {}), stand: stand.standId };
+  return (
+    <Link href={sitAddress(view.club.slug, ask)} className="block px-2 py-1.5 hover:bg-panel" prefetch={false}>
+      <CellWords cell={cell} />
+      <MiniStrip
+        arcs={stand.arcs[window]}
+        thousandths={cell.strip === null ? null : (view.strips[cell.strip] ?? null)}
+      />
+      <span className="sr-only">{cellText(cell)}</span>
+    </Link>
+  );
+}
+
+function CellWords({ cell }: { cell: WeekCell }) {
+  if (cell.mine) return <span className="block whitespace-nowrap font-semibold">Your sit</span>;
+  if (!cell.open) return <span className="block whitespace-nowrap text-ink-soft italic">not open</span>;
+  return (
+    <span className={joinClasses('flex justify-between gap-2', cell.word === 'Quiet' && 'font-semibold')}>
+      {cell.word} <span>{Math.round(cell.score)}</span>
+    </span>
+  );
+}

@@ -1,0 +1,9 @@
+import type { Word } from '@/core/types';
+import { Badge, type BadgeLook } from '@/ui/page-parts';
+
+const LOOKS: Record<Word, BadgeLook> = { Quiet: 'moss', Touchy: 'plain', Loud: 'clay' };
+
+/** The chance of getting in, sitting and getting out unnoticed, in one word. */
+export function WordMark({ word }: { word: Word }) {
+  return <Badge look={LOOKS[word]}>{word}</Badge>;
+}

@@ -1,0 +1,106 @@
+import { arcsFor } from '@/core/arcs';
+import { bearingDeg, distanceM } from '@/core/geometry';
+import type {
+  ApproachOption,
+  Reason,
+  ScoredApproach,
+  ScoredStand,
+  SitWindow,
+  TimelineStep,
+  Verdict,
+} from '@/core/types';
+import { cautionView, orNull, round1, round3 } from './view';
+import type { ReasonView, SitDetailView, TimelineView, WayView } from './view-types';
+import { ENTRY_WORDS } from './words';
+
+/** Ways in that are worth telling beside the best. */
+const MOST_WAYS = 6;
+
+function walkOf(approach: ScoredApproach | undefined): { walkM: number; bearingDeg: number | null } {
+  const points = approach?.points.slice(approach.vehicleToIndex) ?? [];
+  const [first, last] = [points[0], points.at(-1)];
+  if (!first || !last) return { walkM: 0, bearingDeg: null };
+  const walkM = points.slice(1).reduce((sum, point, i) => sum + distanceM(points[i] ?? point, point), 0);
+  return {
+    walkM: Math.round(walkM),
+    bearingDeg: distanceM(first, last) < 1 ? null : Math.round(bearingDeg(first, last)) % 360,
+  };
+}
+
+function wayView(way: ApproachOption, best: ApproachOption, approaches: ScoredApproach[]): WayView {
+  return {
+    approachId: way.approachId,
+    name: way.approachName,
+    parkingName: way.parkingName,
+    entry: ENTRY_WORDS[way.entry],
+    leaveBy: way.leaveBy,
+    inBy: way.inBy,
+    walkSeconds: Math.round(way.walkSeconds),
+    ...walkOf(approaches.find((approach) => approach.id === way.approachId)),
+    inChance: round3(way.inChance),
+    outChance: round3(way.outChance),
+    quiet: round1(way.quiet),
+    score: round1(way.score),
+    cost: round1(way.score - best.score),
+    worst: way.worst ? { name: way.worst.featureName, chance: round3(way.worst.chance) } : null,
+  };
+}
+
+function timelineView(step: TimelineStep): TimelineView {
+  return {
+    at: step.at,
+    arcHold: orNull(step.arcHold, round3),
+    shares: step.directionShares?.map(round3) ?? null,
+    meanFromDeg: orNull(step.meanFromDeg, Math.round),
+    windSpeedMps: orNull(step.windSpeedMps, round1),
+    gustMps: orNull(step.gustMps, round1),
+    windedChance: orNull(step.windedChance, round3),
+    sunInEyes: step.sunInEyes,
+    precipMm: orNull(step.precipMm, round1),
+    tempC: orNull(step.tempC, round1),
+    note: step.note,
+  };
+}
+
+/** A log's figures are told only to those who may see what others saw. */
+function reasonView({ code, text, change, part, evidence }: Reason, seeSightings: boolean): ReasonView {
+  const told = code === 'sightings' && !seeSightings ? 'What was seen from it in past sits' : text;
+  return { code, text: told, change: round1(change), part, evidence };
+}
+
+/** Everything there is to say of one sit. `seeSightings`: the reader may see what others saw. */
+export function shapeDetail(
+  verdict: Verdict,
+  ask: { stand: ScoredStand; window: SitWindow; approaches: ScoredApproach[]; seeSightings: boolean },
+): SitDetailView {
+  const { stand, window, approaches } = ask;
+  const best = verdict.approach;
+  const hold = verdict.arcHold;
+  return {
+    standId: stand.id,
+    name: stand.name,
+    window,
+    quiet: round1(verdict.quiet),
+    promise: round1(verdict.promise),
+    score: round1(verdict.score),
+    word: verdict.word,
+    arcs: arcsFor(stand.arcs, window.window),
+    hold: hold && {
+      share: round3(hold.shareOfTime),
+      neverLeaves: round3(hold.neverLeaves),
+      leavesAt: hold.likeliestLeavingAt,
+      worstAt: hold.worstAt,
+      worstShare: round3(hold.worstShare),
+    },
+    windedChance: orNull(verdict.windedChance, round3),
+    scent: verdict.scentByFeature.map(({ featureName, chance }) => ({ name: featureName, chance: round3(chance) })),
+    timeline: verdict.timeline.map(timelineView),
+    reasons: verdict.reasons.map((reason) => reasonView(reason, ask.seeSightings)),
+    ways: best
+      ? [best, ...verdict.approachAlternatives].slice(0, MOST_WAYS).map((way) => wayView(way, best, approaches))
+      : [],
+    counterfactuals: verdict.counterfactuals.map((one) => one.text),
+    cautions: verdict.cautions.map(cautionView),
+    confidence: verdict.confidence,
+  };
+}
