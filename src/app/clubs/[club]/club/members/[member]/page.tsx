@@ -1,0 +1,67 @@
+import type { Metadata } from 'next';
+import { ChangeMemberForm } from '@/features/clubs/components/change-member-form';
+import { RemoveMember } from '@/features/clubs/components/remove-member';
+import { WhatGoes } from '@/features/clubs/components/what-goes';
+import { readMember, readSponsors } from '@/features/clubs/read-members';
+import { planRemoval } from '@/features/clubs/removal';
+import { now } from '@/server/clock';
+import { clubPage } from '@/server/doors';
+import { notFound } from '@/server/errors';
+import { Notice } from '@/ui/notices';
+import { DefinitionList, PageTitle, Section } from '@/ui/page-parts';
+import { changeMemberAction, removeMemberAction } from '../actions';
+
+export const metadata: Metadata = { title: 'Member' };
+
+export default clubPage('members.write', async ({ scope, params }) => {
+  const at = now();
+  const member = await readMember(scope, params.member ?? '', at);
+  const plan = member && (await planRemoval(scope, member.id, at));
+  if (!member || !plan) throw notFound();
+  const { id, name, role } = member;
+  const sponsors = (await readSponsors(scope)).filter((sponsor) => sponsor.id !== id);
+  const standing = {
+    memberId: id,
+    role,
+    sponsorId: member.sponsorId ?? '',
+    guestFrom: member.guestFrom ?? '',
+    guestTo: member.guestTo ?? '',
+  };
+  const facts = [
+    { term: 'E-mail', detail: <span className="break-all">{member.email}</span> },
+    { term: 'Role', detail: member.roleWord },
+    { term: 'Joined', detail: member.joinedText },
+    ...(member.guestText ? [{ term: 'Guest days', detail: member.guestText }] : []),
+    ...(member.sponsorName ? [{ term: 'Sponsor', detail: member.sponsorName }] : []),
+  ];
+  return (
+    <>
+      <PageTitle title={member.isYou ? `${name} (you)` : name} over="Member" />
+      <DefinitionList items={facts} className="max-w-2xl" />
+      {plan.lastAdmin ? (
+        <Notice title="The only admin" className="mt-6">
+          Make another member an admin before you change or remove {name}.
+        </Notice>
+      ) : (
+        <>
+          <Section title="Role">
+            <ChangeMemberForm
+              club={scope.club.slug}
+              member={standing}
+              sponsors={sponsors}
+              action={changeMemberAction}
+            />
+          </Section>
+          <Section title="Remove from the club" note="What goes with it:">
+            <WhatGoes plan={plan} />
+            <div className="mt-4">
+              <RemoveMember club={scope.club.slug} member={{ id, name }} action={removeMemberAction}>
+                <WhatGoes plan={plan} />
+              </RemoveMember>
+            </div>
+          </Section>
+        </>
+      )}
+    </>
+  );
+});

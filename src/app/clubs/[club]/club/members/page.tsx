@@ -1,0 +1,47 @@
+import type { Metadata } from 'next';
+import { InvitationsList } from '@/features/clubs/components/invitations-list';
+import { MembersTable } from '@/features/clubs/components/members-table';
+import { readInvitations, readMembers } from '@/features/clubs/read-members';
+import { now } from '@/server/clock';
+import { clubPage } from '@/server/doors';
+import { ButtonLink } from '@/ui/button';
+import { PageTitle, Section } from '@/ui/page-parts';
+import { resendInvitationAction, revokeInvitationAction } from './actions';
+
+export const metadata: Metadata = { title: 'Members' };
+
+export default clubPage('members.read', async ({ scope }) => {
+  const at = now();
+  const base = `/clubs/${scope.club.slug}/club/members`;
+  const mayWrite = scope.can('members.write');
+  const members = await readMembers(scope, at);
+  const invitations = mayWrite ? await readInvitations(scope, at) : [];
+  const invite = (
+    <ButtonLink href={`${base}/invite`} look="primary">
+      Invite someone
+    </ButtonLink>
+  );
+  return (
+    <>
+      <PageTitle title="Members" over={scope.club.name} actions={mayWrite && invite} />
+      <MembersTable
+        rows={members.map((member) => ({ ...member, href: mayWrite ? `${base}/${member.id}` : null }))}
+        withEmail={mayWrite}
+      />
+      {mayWrite && (
+        <Section title="Open invitations" note="Not taken yet. Each link works once, for 14 days.">
+          {invitations.length === 0 ? (
+            <p className="text-ink-soft">None.</p>
+          ) : (
+            <InvitationsList
+              club={scope.club.slug}
+              rows={invitations}
+              resend={resendInvitationAction}
+              revoke={revokeInvitationAction}
+            />
+          )}
+        </Section>
+      )}
+    </>
+  );
+});

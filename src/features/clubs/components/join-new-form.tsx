@@ -1,0 +1,64 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { FormErrorSummary, SubmitRow } from '@/ui/form';
+import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
+import { TextInput } from '@/ui/text-inputs';
+import { joinNewSchema } from '../join-schema';
+
+interface Values {
+  token: string;
+  name: string;
+  password: string;
+}
+
+interface Props {
+  token: string;
+  /** As the inviter wrote it. */
+  name: string;
+  email: string;
+  clubName: string;
+  action: (values: Values) => Promise<ActionAnswer<{ slug: string }>>;
+}
+
+/** Name and password, for an invited address without an account. */
+export function JoinNewForm({ token, name, email, clubName, action }: Props) {
+  const router = useRouter();
+  const { register, errorOf, errors, pending, formProps } = useActionForm<Values, { slug: string }>({
+    schema: joinNewSchema,
+    defaultValues: { token, name, password: '' },
+    submit: (values) => action({ ...values, token }),
+    onDone: ({ slug }) => router.push(`/clubs/${slug}`),
+  });
+  return (
+    <form {...formProps} className="flex flex-col gap-5">
+      <FormErrorSummary errors={errors} />
+      <TextInput
+        label="Your name"
+        hint="As the club knows you. Members see it on the board."
+        autoComplete="name"
+        {...register('name')}
+        error={errorOf('name')}
+        required
+      />
+      <TextInput
+        label="E-mail"
+        hint="Where the invitation went; you sign in with it."
+        type="email"
+        autoComplete="username"
+        value={email}
+        readOnly
+      />
+      <TextInput
+        label="Password"
+        hint="At least 10 characters. A few plain words do well."
+        type="password"
+        autoComplete="new-password"
+        {...register('password')}
+        error={errorOf('password')}
+        required
+      />
+      <SubmitRow label={`Make an account and join ${clubName}`} pending={pending} pendingLabel="Joining…" />
+    </form>
+  );
+}

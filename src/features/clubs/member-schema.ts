@@ -1,0 +1,45 @@
+import { z } from 'zod';
+import { isDay } from '@/core/day-time';
+import { ROLES } from '@/core/permissions';
+import { emailField, nameField } from '@/features/accounts/account-schema';
+
+const id = z.string().min(1).max(60);
+
+/** Guests have a sponsor and two days; of other roles these fields are left aside. */
+const standing = {
+  role: z.enum(ROLES),
+  sponsorId: z.string().max(60),
+  guestFrom: z.string().max(20),
+  guestTo: z.string().max(20),
+};
+
+interface Standing {
+  role: (typeof ROLES)[number];
+  sponsorId: string;
+  guestFrom: string;
+  guestTo: string;
+}
+
+/** What is kept of a standing: nulls for whoever is no guest. */
+function keepStanding<T extends Standing>(typed: T, ctx: z.RefinementCtx) {
+  if (typed.role !== 'guest') return { ...typed, sponsorId: null, guestFrom: null, guestTo: null };
+  const { sponsorId, guestFrom, guestTo } = typed;
+  const fail = (path: keyof Standing, message: string) => ctx.addIssue({ code: 'custom', path: [path], message });
+  if (sponsorId === '') fail('sponsorId', 'Choose the member who answers for the guest.');
+  if (!isDay(guestFrom)) fail('guestFrom', 'Choose the first day.');
+  if (!isDay(guestTo)) fail('guestTo', 'Choose the last day.');
+  else if (isDay(guestFrom) && guestTo < guestFrom) fail('guestTo', 'The last day may not come before the first.');
+  return { ...typed, sponsorId, guestFrom, guestTo };
+}
+
+export const inviteSchema = z.object({ name: nameField, email: emailField, ...standing }).transform(keepStanding);
+export type InviteForm = z.input<typeof inviteSchema>;
+export type InviteInput = z.output<typeof inviteSchema>;
+
+export const changeMemberSchema = z.object({ memberId: id, ...standing }).transform(keepStanding);
+export type ChangeMemberForm = z.input<typeof changeMemberSchema>;
+export type ChangeMemberInput = z.output<typeof changeMemberSchema>;
+
+export const removeMemberSchema = z.object({ memberId: id });
+export const invitationIdSchema = z.object({ id });
+export const leaveSchema = z.object({});
