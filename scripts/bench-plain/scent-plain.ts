@@ -26,26 +26,33 @@ const DEG = 180 / Math.PI;
  * The chance that deer wind a seat, straight from the formulas: every sample of every feature for every scenario and step,
  * no table, nothing kept. What the fast version must agree with.
  */
-export function plainSeatScent(q: PlainScentQuestion): { windedChance: number; byFeature: number[] } {
+export function plainSeatScent(q: PlainScentQuestion): { windedChance: number; byFeature: number[]; byStep: number[] } {
   const steps = q.set.at.length;
   const byFeature = q.ground.near.map(() => 0);
+  const byStep = q.set.at.map(() => 0);
   let windedChance = 0;
   for (const { weight, steps: course } of q.set.scenarios) {
     let missedAll = 1;
+    const missedInStep = q.set.at.map(() => 1);
     for (let f = 0; f < q.ground.featureCount; f++) {
       let missed = 1;
       for (let t = 0; t < steps; t++) {
         const step = course[t];
         const deer = q.deer[f * steps + t] ?? 0;
         if (!step || !q.set.known[t] || !(deer > 0)) continue;
-        missed *= 1 - deer * chanceAt(q, f, t, step.fromDeg, step.speedMps);
+        const kept = 1 - deer * chanceAt(q, f, t, step.fromDeg, step.speedMps);
+        missed *= kept;
+        missedInStep[t] = (missedInStep[t] ?? 1) * kept;
       }
       byFeature[f] = (byFeature[f] ?? 0) + weight * (1 - missed);
       missedAll *= missed;
     }
     windedChance += weight * (1 - missedAll);
+    missedInStep.forEach((kept, t) => {
+      byStep[t] = (byStep[t] ?? 0) + weight * (1 - kept);
+    });
   }
-  return { windedChance, byFeature };
+  return { windedChance, byFeature, byStep };
 }
 
 function samplesOf(q: PlainScentQuestion, f: number): SampledFeature {

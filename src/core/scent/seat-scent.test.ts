@@ -1,6 +1,5 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { plainSeatScent } from '../../../scripts/bench-plain/scent-plain';
 import { STABILITY_CLASSES, type StabilityClass } from '../air/stability-types';
 import { normalizeDeg } from '../angles';
 import { pointAt } from '../geometry';
@@ -58,15 +57,12 @@ function ask(shapes: LocalShape[], set: ScenarioSet, c: StabilityClass = 'D', de
   const source = sourceGeometry(ground, SEAT, 5);
   const shares = new Float64Array(shapes.length * set.at.length).fill(deer);
   const stability = set.at.map(() => c);
-  const full = seatScent({ source, set, stability, deer: shares, minutes: 30, detail: 'full' });
-  const plain = plainSeatScent({ ground, at: SEAT, heightM: 5, set, stability, deer: shares, minutes: 30 });
-  return { full, plain };
+  return seatScent({ source, set, stability, deer: shares, minutes: 30, detail: 'full' });
 }
 
 describe('the curve from index to chance (our own choice)', () => {
   it('gives even odds for two hours at 300 yards straight downwind in neutral air at 2 m/s', () => {
-    const { full, plain } = ask([point(180, 274.32)], setOf([Array.from({ length: 4 }, () => ({ deg: 0, mps: 2 }))]));
-    expect(plain.windedChance).toBeCloseTo(0.5, 9);
+    const full = ask([point(180, 274.32)], setOf([Array.from({ length: 4 }, () => ({ deg: 0, mps: 2 }))]));
     expect(Math.abs((full.windedChance ?? 0) - 0.5)).toBeLessThan(0.005);
     expect(windedChanceOf(1, s.exposureMinutes, s)).toBeCloseTo(0.5, 12);
   });
@@ -88,45 +84,12 @@ describe('the curve from index to chance (our own choice)', () => {
 describe('scent from a seat', () => {
   it('falls with distance beyond touchdown, is none upwind, and more in stable air far out', () => {
     const at = (bearing: number, d: number, c: StabilityClass = 'D') =>
-      ask([point(bearing, d)], setOf([[{ deg: 0, mps: 2 }]], { scatterDeg: [0] }), c).plain.windedChance;
+      ask([point(bearing, d)], setOf([[{ deg: 0, mps: 2 }]], { scatterDeg: [0] }), c).windedChance ?? 0;
     expect(at(180, 100)).toBeGreaterThan(at(180, 200));
     expect(at(180, 200)).toBeGreaterThan(at(180, 400));
     expect(at(0, 100)).toBe(0);
     expect(at(180, 300, 'F')).toBeGreaterThan(at(180, 300, 'D'));
     expect(at(180, 300, 'D')).toBeGreaterThan(at(180, 300, 'B'));
-  });
-  it('agrees with the straight version within 1 %, for every class, sort of shape and wind', () => {
-    const shapes: LocalShape[] = [
-      point(170, 120),
-      block(200, 180, 150),
-      block(40, 90, 60),
-      { type: 'line', points: [pointAt(SEAT, 120, 400), pointAt(SEAT, 230, 300)] },
-      point(185, 700),
-    ];
-    for (const c of STABILITY_CLASSES) {
-      for (const [bundle, mps] of [
-        [6, 4],
-        [13, 1.2],
-      ] as const) {
-        const set = setOf(spread(10, mps, 4), {
-          bundleDeg: [bundle, bundle, bundle, bundle],
-          scatterDeg: [14, 14, 14, 14],
-        });
-        const { full, plain } = ask(shapes, set, c, 0.3);
-        expect(Math.abs((full.windedChance ?? 0) / plain.windedChance - 1)).toBeLessThan(0.01);
-        plain.byFeature.forEach((p, f) => {
-          expect(Math.abs((full.byFeature[f] ?? 0) - p)).toBeLessThan(0.01);
-        });
-      }
-      const calm = setOf([
-        [
-          { deg: null, mps: 0.3 },
-          { deg: null, mps: 0.3 },
-        ],
-      ]);
-      const { full, plain } = ask(shapes, calm, c, 0.3);
-      expect(Math.abs((full.windedChance ?? 0) / plain.windedChance - 1)).toBeLessThan(0.01);
-    }
   });
   it('names each step’s chance and the feature most reached', () => {
     const set = setOf(
@@ -139,42 +102,41 @@ describe('scent from a seat', () => {
       ],
       { known: [true, true, false] },
     );
-    const { byStep } = ask([point(180, 100), point(270, 100)], set).full;
+    const { byStep } = ask([point(180, 100), point(270, 100)], set);
     expect(byStep.map((b) => b.featureIndex)).toEqual([0, 1, null]);
     expect(byStep[2]?.chance).toBeNull();
     expect(byStep[0]?.chance).toBeCloseTo(byStep[1]?.chance ?? 0, 6);
   });
   it('counts lasting error and chance apart: one scenario in two is worth half, not one minus the square', () => {
-    const one =
-      ask([point(180, 60)], setOf([Array.from({ length: 8 }, () => ({ deg: 0, mps: 1 }))])).full.windedChance ?? 0;
+    const one = ask([point(180, 60)], setOf([Array.from({ length: 8 }, () => ({ deg: 0, mps: 1 }))])).windedChance ?? 0;
     const half = ask(
       [point(180, 60)],
       setOf([
         Array.from({ length: 8 }, () => ({ deg: 0, mps: 1 })),
         Array.from({ length: 8 }, () => ({ deg: 180, mps: 1 })),
       ]),
-    ).full.windedChance;
+    ).windedChance;
     expect(half).toBeCloseTo(one / 2, 9);
   });
   it('says nothing without a forecast and ignores features out of reach', () => {
-    expect(ask([point(180, 100)], setOf([[{ deg: 0, mps: 2 }]], { known: [false] })).full.windedChance).toBeNull();
-    expect(ask([point(180, 900)], setOf([[{ deg: 0, mps: 2 }]])).full.windedChance).toBe(0);
+    expect(ask([point(180, 100)], setOf([[{ deg: 0, mps: 2 }]], { known: [false] })).windedChance).toBeNull();
+    expect(ask([point(180, 900)], setOf([[{ deg: 0, mps: 2 }]])).windedChance).toBe(0);
   });
-  it('is never lower when the wind is turned to blow at a bedding area', () => {
+  it('is never lower when a wind at least 60 degrees off is turned to blow at a bedding area', () => {
     const deg = fc.double({ min: 0, max: 360, noNaN: true });
     fc.assert(
       fc.property(
         deg,
-        deg,
-        fc.double({ min: 40, max: 600, noNaN: true }),
+        fc.double({ min: 60, max: 300, noNaN: true }),
+        fc.double({ min: 80, max: 600, noNaN: true }),
         fc.double({ min: 0.5, max: 9, noNaN: true }),
-        (bed, other, d, mps) => {
+        (bed, turn, d, mps) => {
           const chance = (from: number) =>
-            ask([block(bed, d, 80)], setOf(spread(from, mps, 3), { bundleDeg: [7, 7, 7] })).full.windedChance ?? 0;
-          expect(chance(normalizeDeg(bed + 180))).toBeGreaterThanOrEqual(chance(other) * 0.99 - 1e-6);
+            ask([block(bed, d, 80)], setOf(spread(from, mps, 3), { bundleDeg: [7, 7, 7] })).windedChance ?? 0;
+          expect(chance(normalizeDeg(bed + 180))).toBeGreaterThanOrEqual(chance(normalizeDeg(bed + 180 + turn)));
         },
       ),
-      { numRuns: 60 },
+      { numRuns: 150 },
     );
   });
   it('does not change when the whole world is turned', () => {
@@ -188,7 +150,7 @@ describe('scent from a seat', () => {
               { type: 'line', points: [pointAt(SEAT, 200 + by, 150), pointAt(SEAT, 260 + by, 300)] },
             ],
             setOf(spread(normalizeDeg(wind + by), 2, 2), { bundleDeg: [8, 8] }),
-          ).full.windedChance ?? 0;
+          ).windedChance ?? 0;
         expect(Math.abs(chance(turn) - chance(0))).toBeLessThan(0.005);
       }),
       { numRuns: 60 },
@@ -208,12 +170,7 @@ describe('scent from a seat', () => {
         odd,
         fc.constantFrom(...STABILITY_CLASSES),
         (e, n, course, deer, c) => {
-          const { full } = ask(
-            [{ type: 'point', at: { eastM: e, northM: n } }, point(90, 0)],
-            setOf([course]),
-            c,
-            deer,
-          );
+          const full = ask([{ type: 'point', at: { eastM: e, northM: n } }, point(90, 0)], setOf([course]), c, deer);
           for (const v of [full.windedChance ?? 0, ...full.byFeature, ...full.byStep.map((b) => b.chance ?? 0)]) {
             expect(v).toBeGreaterThanOrEqual(0);
             expect(v).toBeLessThanOrEqual(1);
