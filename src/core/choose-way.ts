@@ -1,7 +1,7 @@
 import type { TriedWay } from './approach/try-ways';
 import { type Factors, scoreOf } from './reasons';
 import type { ScoreSettings } from './score';
-import { shareAfter, windedAfter } from './seated';
+import { shareAfter, windedIn } from './seated';
 import type { ApproachOption, ScoredFeature } from './types';
 import type { WindowFrame } from './window-frame';
 
@@ -20,7 +20,7 @@ export interface BeforeWay {
   /** How much promise falls in each step. */
   moves: number[];
   /** null: no forecast. */
-  scent: { winded: number; byStep: ArrayLike<number> } | null;
+  scent: { winded: number; exponents: Float64Array } | null;
 }
 
 const ENTRY_ORDER: ApproachOption['entry'][] = [
@@ -35,7 +35,8 @@ function weigh(tried: TriedWay, before: BeforeWay, frame: WindowFrame, s: ScoreS
   const { endAt } = frame.window;
   const { inBy } = tried.entry;
   const { scent } = before;
-  const seat = scent ? 1 - windedAfter(inBy, frame.stepAts, endAt, scent.winded, scent.byStep) : 1;
+  const left = scent ? shareAfter(inBy, frame.stepAts, endAt, scent.exponents) : 0;
+  const seat = scent ? 1 - windedIn(left, scent.winded) : 1;
   const factors: Factors = {
     quiet: { ...before.factors.quiet, seat, walkIn: 1 - tried.in.chance, walkOut: 1 - tried.out.chance },
     promise: before.factors.promise,

@@ -1,11 +1,13 @@
-import { buildWalkGround, circleOf, type WalkGround } from './approach/walk-ground';
+import { buildWalkGround, circleOf, type FeatureCircle, type WalkGround } from './approach/walk-ground';
 import { type WalkPlumes, walkPlumes } from './approach/walk-scent';
+import { distanceM } from './geometry';
 import { type NearEvent, nearEvents } from './pressure';
 import { featuresInRange, type InRange } from './promise/in-range';
 import { clubRate, shrunkRate, sightingsFactor } from './promise/sightings';
 import type { GroundInput } from './rank-input';
 import { type SourceGeometry, scentGround, sourceGeometry } from './scent/scent-ground';
-import type { ScoredApproach, ScoredStand } from './types';
+import type { ScoredApproach, ScoredFeature, ScoredStand } from './types';
+import { thinCrowded, usesOf, type WhereaboutsSettings } from './whereabouts';
 
 /** A stand with all about it that does not depend on the hour. */
 export interface StandFrame {
@@ -24,6 +26,36 @@ export interface GroundFrame {
   clubRatePerHour: number;
   stands: StandFrame[];
   plumes: WalkPlumes;
+  /** Uses of every feature in a month by time of day, thinned where features crowd. */
+  usesIn: (month: number) => number[][];
+}
+
+/** For each feature the features within so many metres of it, centre to centre, itself among them. */
+function neighbours(circles: FeatureCircle[], withinM: number): Int32Array[] {
+  return circles.map((a) => {
+    const near: number[] = [];
+    circles.forEach((b, i) => {
+      if (distanceM(a.centre, b.centre) <= withinM) near.push(i);
+    });
+    return Int32Array.from(near);
+  });
+}
+
+function usesByMonth(features: ScoredFeature[], circles: FeatureCircle[], s: WhereaboutsSettings) {
+  const near = neighbours(circles, s.crowdM);
+  const kept = new Map<number, number[][]>();
+  return (month: number): number[][] => {
+    let known = kept.get(month);
+    if (!known) {
+      known = thinCrowded(
+        features.map((f) => usesOf(f, month, s)),
+        near,
+        s,
+      );
+      kept.set(month, known);
+    }
+    return known;
+  };
 }
 
 function byStand<T extends { standId: string }>(rows: T[]): Map<string, T[]> {
@@ -62,5 +94,11 @@ export function frameGround(input: GroundInput): GroundFrame {
       seat: sourceGeometry(scent, stand.at, stand.seatHeightM),
     };
   });
-  return { input, clubRatePerHour, stands, plumes: walkPlumes(settings.scent, settings.approach) };
+  return {
+    input,
+    clubRatePerHour,
+    stands,
+    plumes: walkPlumes(settings.scent, settings.approach),
+    usesIn: usesByMonth(features, circles, settings.whereabouts),
+  };
 }

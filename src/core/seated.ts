@@ -13,19 +13,12 @@ export function shareAfter(at: number, stepAts: number[], endAt: number, weights
   return total > 0 ? after / total : 0;
 }
 
-/**
- * Chance of being winded after an instant, from the whole sit's chance and each step's: the exponent of never being winded is
- * shared out by the steps' own.
- */
-export function windedAfter(
-  at: number,
-  stepAts: number[],
-  endAt: number,
-  winded: number,
-  byStep: ArrayLike<number>,
-): number {
-  if (winded <= 0) return 0;
-  const exponents = Array.from(byStep, (p) => -Math.log1p(-Math.min(0.999999, Math.max(0, p))));
-  const share = shareAfter(at, stepAts, endAt, exponents);
-  return 1 - (1 - Math.min(0.999999, winded)) ** share;
+/** Exponents of never being winded in each step, for windedAfter. */
+export function windedExponents(byStep: ArrayLike<number>): Float64Array {
+  return Float64Array.from(byStep, (p) => -Math.log1p(-Math.min(0.999999, Math.max(0, p))));
+}
+
+/** Chance of being winded in the share of a sit's exponent that is left, from the whole sit's chance. */
+export function windedIn(share: number, winded: number): number {
+  return winded <= 0 ? 0 : 1 - (1 - Math.min(0.999999, winded)) ** share;
 }

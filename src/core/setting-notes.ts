@@ -16,6 +16,10 @@ export const HUNT_SETTING_NOTES: Record<string, { evidence: Evidence; note: stri
     note: 'The twilight pattern fades in the rut (Demarais 1989); kept small.',
   },
   'whereabouts.preRutScrapeFactor': { evidence: 'our choice', note: 'Small: most visits are after dark all the same.' },
+  'whereabouts.mostInUse': {
+    evidence: 'our choice',
+    note: 'Two groups of deer afoot within 500 m, however many places are mapped there.',
+  },
   'approach.walkingSpeedMps': { evidence: 'our choice', note: 'A quiet walk, about 2.2 miles an hour.' },
   'approach.vehicleSpeedMps': { evidence: 'our choice', note: 'A slow drive on a farm track.' },
   'approach.sourceHeightM': { evidence: 'our choice', note: 'Half the height of a person.' },

@@ -3,12 +3,13 @@ import { entriesFor } from './approach/entries';
 import type { WalkContext } from './approach/try-ways';
 import { type CautionInput, cautionsFor } from './cautions';
 import { confidenceFor } from './confidence';
-import { formatClock } from './day-time';
+import { formatClock, formatClock12 } from './day-time';
 import { type Glare, glareOf } from './glare';
 import type { GroundFrame } from './ground-frame';
 import { lightShares } from './promise/promise-factors';
 import type { Detail } from './rank-input';
 import type { Caution, Confidence, Forecast, ScoredStand, SitWindow } from './types';
+import type { Units } from './units';
 import { frameWindow, type WindowFrame } from './window-frame';
 
 const HOUR = 3_600_000;
@@ -26,6 +27,11 @@ export interface SitFrame {
   glareOf: (facingDeg: number | null) => Glare;
   clock: (at: number) => string;
   detail: Detail;
+}
+
+/** US units go with a 12-hour clock. */
+function clockText(at: number, zone: string, units: Units | undefined): string {
+  return (units ?? 'us') === 'us' ? formatClock12(at, zone) : formatClock(at, zone);
 }
 
 function cautionInput(
@@ -54,7 +60,7 @@ function cautionInput(
     staleHours: settings.score.staleHours,
     orangeRule: orangeRule ?? null,
     units: units ?? 'us',
-    clock: (at) => formatClock(at, place.zone),
+    clock: (at) => clockText(at, place.zone, units),
   };
 }
 
@@ -66,8 +72,8 @@ export function frameSits(
   now: number,
   detail: Detail,
 ): SitFrame {
-  const { place, features, settings } = ground.input;
-  const window = frameWindow(sitWindow, place, features, settings);
+  const { place, settings, units } = ground.input;
+  const window = frameWindow(sitWindow, place, ground.usesIn, settings);
   const firstIn = Math.min(
     sitWindow.startAt,
     ...entriesFor(sitWindow, window.sun, settings.approach).map((e) => e.inBy),
@@ -112,7 +118,7 @@ export function frameSits(
       glares.set(facingDeg, known);
       return known;
     },
-    clock: (at) => formatClock(at, place.zone),
+    clock: (at) => clockText(at, place.zone, units),
     detail,
   };
 }

@@ -9,6 +9,7 @@ import { arcFactor } from './quiet';
 import type { SitInput } from './rank-input';
 import { scoreOf } from './reasons';
 import { type SeatScent, seatScent } from './scent/seat-scent';
+import { windedExponents } from './seated';
 import type { SitFrame } from './sit-frame';
 import { frameSits } from './sit-frame';
 import { tellVerdict } from './tell-verdict';
@@ -98,7 +99,7 @@ export function sumSit(frame: SitFrame, stand: StandFrame): SitSums {
       seatedShare: 1,
     },
     moves,
-    scent: scent ? { winded: scent.windedChance ?? 0, byStep: scent.stepChance } : null,
+    scent: scent ? { winded: scent.windedChance ?? 0, exponents: windedExponents(scent.stepChance) } : null,
   };
   const entries = entriesFor(window, frame.window.sun, settings.approach);
   const tried = tryWays(stand.waysIn, stand.waysOut, entries, window.endAt, frame.walks);
@@ -135,6 +136,7 @@ export function judgeSit(frame: SitFrame, stand: StandFrame, gates: Gate[]): Ver
     approachAlternatives: full ? sums.ways.slice(1).map((w) => toOption(w, features)) : [],
     pressure: sums.pressure,
     meanFromDeg: frame.air?.seatOf(stand.stand).sit.meanFromDeg ?? null,
+    directionShares: frame.air?.seatOf(stand.stand).shares ?? null,
     reasons: [],
     counterfactuals: [],
     cautions: frame.cautionsOf(stand.stand),

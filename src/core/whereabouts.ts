@@ -28,6 +28,9 @@ export interface WhereaboutsSettings {
   rutTravelFactor: number;
   /** Factor on the use of scrapes before the rut. */
   preRutScrapeFactor: number;
+  /** Deer are not everywhere at once: uses of the places within `crowdM` of one another add up to no more than this. */
+  mostInUse: number;
+  crowdM: number;
 }
 
 function table(...shares: [number, number, number, number, number, number]): UseTable {
@@ -62,6 +65,8 @@ export const DEFAULT_WHEREABOUTS: WhereaboutsSettings = {
   rutMonths: [11],
   rutTravelFactor: 1.15,
   preRutScrapeFactor: 1.2,
+  mostInUse: 2,
+  crowdM: 500,
 };
 
 /**
@@ -135,6 +140,21 @@ export function usesOf(feature: ScoredFeature, month: number, settings: Whereabo
     const share = own ?? base[time] * (daylight ? rut : 1) * preRut;
     return Math.min(1, Math.max(0, Number.isFinite(share) ? share : 0));
   });
+}
+
+/**
+ * Uses thinned where places crowd: at each time of day a place keeps `mostInUse` over what the places near it add up to, when that
+ * is less than one. Mapping a ground more finely then does not fill it with deer. `near` lists each place's neighbours, itself too.
+ */
+export function thinCrowded(uses: number[][], near: Int32Array[], s: WhereaboutsSettings): number[][] {
+  return uses.map((own, f) =>
+    own.map((use, time) => {
+      if (use === 0) return 0;
+      let sum = 0;
+      for (const g of near[f] ?? []) sum += uses[g]?.[time] ?? 0;
+      return use * Math.min(1, s.mostInUse / sum);
+    }),
+  );
 }
 
 /** Chance (0-1) that deer are at a place with these six shares under these six weights. */

@@ -3,8 +3,8 @@ import { movementOf } from './promise/promise-factors';
 import type { LowSunMinute } from './promise/sun-in-eyes';
 import type { ScoringSettings } from './settings';
 import { type Place, sunPosition, sunTimes } from './sun';
-import type { ScoredFeature, SitWindow } from './types';
-import { type SunMarks, shareAt, timeWeights, usesOf } from './whereabouts';
+import type { SitWindow } from './types';
+import { type SunMarks, shareAt, timeWeights } from './whereabouts';
 
 const MIN = 60_000;
 
@@ -54,12 +54,11 @@ function lowSunMinutes(stepAts: number[], endAt: number, place: Place, belowDeg:
 export function frameWindow(
   window: SitWindow,
   place: Place,
-  features: ScoredFeature[],
+  usesIn: (month: number) => number[][],
   settings: ScoringSettings,
 ): WindowFrame {
   const sun = sunTimes(window.day, place.zone, place.lat, place.lon);
-  const month = Number(window.day.slice(5, 7));
-  const uses = features.map((f) => usesOf(f, month, settings.whereabouts));
+  const uses = usesIn(Number(window.day.slice(5, 7)));
   const sharesFor = (times: number[]) => Float64Array.from(uses, (use) => shareAt(use, times));
   const { stepMinutes } = settings.air;
   const stepAts = stepStarts(window.startAt, window.endAt, stepMinutes);
@@ -76,9 +75,9 @@ export function frameWindow(
     return known;
   };
   const shares = times.map(sharesFor);
-  const deer = new Float64Array(features.length * times.length);
+  const deer = new Float64Array(uses.length * times.length);
   shares.forEach((row, t) => {
-    for (let f = 0; f < features.length; f++) deer[f * times.length + t] = row[f] as number;
+    for (let f = 0; f < uses.length; f++) deer[f * times.length + t] = row[f] as number;
   });
   return {
     window,

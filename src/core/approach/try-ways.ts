@@ -1,7 +1,7 @@
 import type { WindowFrame } from '../window-frame';
 import type { ApproachSettings } from './approach-settings';
 import type { Entry } from './entries';
-import { type WalkChance, type WalkMoment, type WalkWind, walkChance } from './walk-chance';
+import { type WalkChance, type WalkWind, walkChance } from './walk-chance';
 import type { WalkGround } from './walk-ground';
 import { type WalkPlumes, walkTable } from './walk-scent';
 
@@ -25,9 +25,9 @@ export interface WalkContext {
 /** A walk is judged at its middle: it is shorter than deer take to move on. */
 function walkAt(way: WalkGround, middle: number, context: WalkContext): WalkChance {
   const wind = context.windAt(middle);
-  const moment: WalkMoment = { ...context.frame.momentAt(middle), wind };
+  const { dark, shares } = context.frame.momentAt(middle);
   const table = wind ? walkTable(way, wind.stability, context.plumes) : null;
-  return walkChance(way, table, moment, context.settings);
+  return walkChance(way, table, { dark, shares, wind }, context.settings);
 }
 
 /**

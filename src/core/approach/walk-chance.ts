@@ -3,12 +3,12 @@ import type { ApproachSettings } from './approach-settings';
 import { senseFactor } from './seen-heard';
 import type { WalkGround } from './walk-ground';
 
-/** Bearing bins of the walk tables: 5 degrees each. */
-export const WALK_BINS = 72;
+/** Bearing bins of the walk tables: 3 degrees each, so that a line between two is within 1 % of the curve. */
+export const WALK_BINS = 120;
 
 /** The wind at the moment of a walk: one entry a scenario with a direction, the rest as one with none. */
 export interface WalkWind {
-  /** Position among the bins, 0 to 72. */
+  /** Position among the bins, 0 to 120. */
   bins: Float64Array;
   weights: Float64Array;
   /** One over the speed at walking height, s/m, of each entry. */

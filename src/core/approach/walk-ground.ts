@@ -83,7 +83,7 @@ export interface WalkGround {
 /** Nearer than this, a deer is at the walker's feet: bearings stop meaning anything. */
 const AT_FEET_M = 10;
 
-function sightOf(source: Source, feature: ScoredFeature, circle: FeatureCircle): Sight {
+export function sightOf(source: Source, feature: ScoredFeature, circle: FeatureCircle): Sight {
   const nearest = nearestOnShape(source.at, feature.shape);
   const metres = distanceM(source.at, nearest);
   if (metres < AT_FEET_M) return { metres: AT_FEET_M, fromDeg: 0, widthDeg: 360, driven: source.driven };

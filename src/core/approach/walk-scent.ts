@@ -58,7 +58,7 @@ function layOn(row: Float32Array, sight: Sight, plume: PlumeTable, scale: number
 }
 
 /**
- * A walk's table for a stability class (0 A to 5 F): for each of its features and 72 wind directions, the exposure at the worst
+ * A walk's table for a stability class (0 A to 5 F): for each of its features and 120 wind directions, the exposure at the worst
  * point of the way in a wind of 1 m/s. Made when first asked for and kept with the walk.
  */
 export function walkTable(ground: WalkGround, stability: number, plumes: WalkPlumes): Float32Array {
