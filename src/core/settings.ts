@@ -154,6 +154,7 @@ export interface SettingNote {
 
 /** What each setting rests on, by path; a path that ends in `*` speaks for everything under it. */
 export const SETTING_NOTES: Record<string, SettingNote> = {
+  'whereabouts.crowdM': { evidence: 'our choice', note: 'Places this near one another share the same deer.' },
   'air.stepMinutes': { evidence: 'our choice', note: 'Half hours: finer than the forecast, coarse enough to read.' },
   'air.maxGapHours': { evidence: 'our choice', note: 'Longer gaps are shown as no forecast.' },
   'air.calmMps': {
