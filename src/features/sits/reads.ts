@@ -128,7 +128,7 @@ export async function readSits(
     forecast: forecastView(kept, window),
     weather: weatherLines(kept.forecast, window, club.units),
     cautions,
-    ...shapeRows(verdicts, mine?.standId ?? null, { club, stands, rows, shared: cautions }),
+    ...shapeRows(verdicts, mine?.standId ?? null, { club, startAt: window.startAt, stands, rows, shared: cautions }),
     mine,
     standCount: input.stands.length,
     madeAt: now,

@@ -39,15 +39,23 @@ function wayBrief(verdict: Verdict): WayBrief | null {
   return { approachId, name, parkingName, leaveBy, inBy, walkSeconds: Math.round(walkSeconds) };
 }
 
+/** A wind likeliest to leave in the first half hour holds until no time worth naming. */
+function withoutEarlyLeave(verdict: Verdict, startAt: number): Verdict {
+  const hold = verdict.arcHold;
+  if (!hold || hold.likeliestLeavingAt === null || hold.likeliestLeavingAt > startAt) return verdict;
+  return { ...verdict, arcHold: { ...hold, likeliestLeavingAt: null } };
+}
+
 export interface RowContext {
   club: ClubClock;
+  startAt: number;
   stands: ReadonlyMap<string, ScoredStand>;
   rows: Pick<GroundRows, 'stands' | 'approaches'>;
   shared: CautionView[];
 }
 
 function sitRow(verdict: Verdict, stand: ScoredStand, context: RowContext): SitRow {
-  const { club, rows, shared } = context;
+  const { club, rows, shared, startAt } = context;
   const known = new Set(shared.map((caution) => caution.text));
   return {
     standId: stand.id,
@@ -60,7 +68,7 @@ function sitRow(verdict: Verdict, stand: ScoredStand, context: RowContext): SitR
     arcs: arcsFor(stand.arcs, verdict.window),
     shares: verdict.directionShares?.map(round3) ?? null,
     hold: orNull(verdict.arcHold?.shareOfTime ?? null, round3),
-    sentence: sentence({ ...verdict, gates: [] }, (at) => shortClock(at, club)),
+    sentence: sentence({ ...withoutEarlyLeave(verdict, startAt), gates: [] }, (at) => shortClock(at, club)),
     confidence: verdict.confidence.level,
     cautions: verdict.cautions
       .filter(({ code, text }) => !SAID_ELSEWHERE.has(code) && !known.has(text))

@@ -17,7 +17,8 @@ function given(hours: WeatherHour[], pick: (hour: WeatherHour) => number | null)
 /** Two figures of one unit: '6-10 mph', or '6 mph' when they read the same. */
 function range(values: number[], format: (value: number) => string): string {
   const [low, high] = [format(Math.min(...values)), format(Math.max(...values))];
-  return low === high ? high : `${low.replace(/ .*$/, '')}–${high}`;
+  if (low === high) return high;
+  return `${low.replace(/ .*$/, '')}${low.startsWith('-') ? ' to ' : '–'}${high}`;
 }
 
 function windLine(hours: WeatherHour[], units: Units): string {

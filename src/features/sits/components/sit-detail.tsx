@@ -45,8 +45,13 @@ function holdText(detail: SitDetailView, view: SitsView): string | null {
   if (!hold) return null;
   const at = (instant: number) => clockText(instant, view.club);
   const percent = (share: number) => `${Math.round(share * 100)} %`;
-  const leaves =
-    hold.leavesAt === null ? 'it more likely stays than leaves' : `it likeliest leaves at ${at(hold.leavesAt)}`;
+  let leaves = 'it more likely stays than leaves';
+  if (hold.leavesAt !== null) {
+    leaves =
+      hold.leavesAt > view.window.startAt
+        ? `it likeliest leaves at ${at(hold.leavesAt)}`
+        : 'it may be out of it from the start';
+  }
   return `In a good arc for ${percent(hold.share)} of the sit; ${percent(hold.neverLeaves)} that it never leaves, and ${leaves}. Worst half hour: ${at(hold.worstAt)}, ${percent(hold.worstShare)}.`;
 }
 
