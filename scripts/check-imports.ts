@@ -18,7 +18,19 @@ const MAY_IMPORT: Record<string, string[]> = {
 };
 
 /** Left to right: a feature imports only from those before it. */
-const FEATURES = ['mail', 'accounts', 'clubs', 'ground', 'weather', 'bookings', 'sits', 'board', 'calendar'];
+const FEATURES = [
+  'mail',
+  'accounts',
+  'clubs',
+  'ground',
+  'weather',
+  'bookings',
+  'outings',
+  'sits',
+  'board',
+  'calendar',
+  'demo',
+];
 
 const VENDOR_ONLY_IN_ADAPTERS = ['openmeteo', '@openmeteo/sdk', 'flatbuffers', 'msw', 'nodemailer'];
 const CORE_MAY_USE = [

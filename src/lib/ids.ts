@@ -16,6 +16,8 @@ export const ID_PREFIXES = {
   visit: 'vis',
   sit: 'sit',
   claim: 'clm',
+  outing: 'out',
+  sitLink: 'lnk',
   feed: 'fed',
   audit: 'aud',
   mail: 'mal',

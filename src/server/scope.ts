@@ -1,4 +1,4 @@
-import type { ClubRules } from '@/core/booking/rules';
+import { type ClubRules, completeRules } from '@/core/booking/rules';
 import { dayOf } from '@/core/day-time';
 import { can, type Permission, type Role } from '@/core/permissions';
 import { type ClubRow, findClubById, findClubBySlug, findMembership } from '@/db/queries/memberships';
@@ -43,7 +43,7 @@ export interface ClubScope {
 
 function clubOf(row: ClubRow): ScopeClub {
   const { id, slug, name, lat, lon, zone, units, rules, version } = row;
-  return { id, slug, name, lat, lon, zone, units, rules, version };
+  return { id, slug, name, lat, lon, zone, units, rules: completeRules(rules), version };
 }
 
 function makeScope(club: ScopeClub, member: ScopeMember): ClubScope {

@@ -62,6 +62,21 @@ export const orangeRuleSchema = z.object({
   statedOn: day,
 });
 
+export const overdueStepsSchema = z
+  .object({
+    memberMinutes: whole('Minutes until the member is told', 0, 720),
+    officersMinutes: whole('Minutes until officers are told', 0, 720),
+    contactMinutes: whole('Minutes until the safety contact is told', 0, 720),
+  })
+  .refine((steps) => steps.memberMinutes <= steps.officersMinutes, {
+    error: 'Officers are not told before the member.',
+    path: ['officersMinutes'],
+  })
+  .refine((steps) => steps.officersMinutes <= steps.contactMinutes, {
+    error: 'The safety contact is not told before the officers.',
+    path: ['contactMinutes'],
+  });
+
 function noTwice(names: string[]): boolean {
   return new Set(names).size === names.length;
 }
@@ -94,6 +109,8 @@ export const clubRulesSchema = z
     guestDaysPerSeason: whole('Guest days', 0, 366).nullable(),
     guestsAtOnce: whole('Guests at once', 0, 20),
     backByMinutes: whole('Back-by allowance', 0, 720),
+    overdueSteps: overdueStepsSchema,
+    overdueShowsPlace: z.boolean(),
     sightingsSeenBy: z.enum(SIGHTINGS_SEEN_BY),
     calendarPrivacy: z.enum(CALENDAR_PRIVACY),
     walkUpSits: z.boolean(),

@@ -49,6 +49,13 @@ export interface OrangeRule {
   statedOn: string;
 }
 
+/** Minutes after a person counts as overdue at which each is told. */
+export interface OverdueSteps {
+  memberMinutes: number;
+  officersMinutes: number;
+  contactMinutes: number;
+}
+
 /** Everything a club decides for itself about booking. null: the club sets no such limit. */
 export interface ClubRules {
   legalLight: LegalLightRule[];
@@ -67,8 +74,11 @@ export interface ClubRules {
   passThroughM: number;
   guestDaysPerSeason: number | null;
   guestsAtOnce: number;
-  /** After the end of the window, before a sit counts as overdue. */
+  /** After the back-by time, before a person counts as overdue. */
   backByMinutes: number;
+  overdueSteps: OverdueSteps;
+  /** Whether the page a safety contact opens shows the stand's position. */
+  overdueShowsPlace: boolean;
   sightingsSeenBy: SightingsSeenBy;
   calendarPrivacy: CalendarPrivacy;
   /** A member at the gate may take a free stand whose window has begun. */
@@ -103,11 +113,18 @@ export const DEFAULT_CLUB_RULES: ClubRules = {
   guestDaysPerSeason: 5,
   guestsAtOnce: 1,
   backByMinutes: 60,
+  overdueSteps: { memberMinutes: 0, officersMinutes: 15, contactMinutes: 30 },
+  overdueShowsPlace: false,
   sightingsSeenBy: 'all',
   calendarPrivacy: 'names_and_stands',
   walkUpSits: true,
   orangeRule: null,
 };
+
+/** Rules as they were saved, with the default of each that came later. */
+export function completeRules(saved: Partial<ClubRules>): ClubRules {
+  return { ...DEFAULT_CLUB_RULES, ...saved };
+}
 
 /** The spacing that holds between two sits; a weapon not said is taken as the one with the widest. */
 export function spacingBetweenM(rules: ClubRules, a: Weapon | null, b: Weapon | null): number {

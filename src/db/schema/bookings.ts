@@ -31,7 +31,8 @@ export const sits = sqliteTable(
     approachId: text().references(() => approaches.id),
     guests: text({ mode: 'json' }).$type<SitGuest[]>().notNull(),
     note: text().notNull().default(''),
-    status: text({ enum: ['booked', 'cancelled'] }).notNull(),
+    /** lapsed: nobody signed in within the club's hold time. */
+    status: text({ enum: ['booked', 'cancelled', 'lapsed'] }).notNull(),
     cancelReason: text(),
     cancelledAt: integer(),
     /** One value for one press of the button: a second arrival gets the first one's sit. */

@@ -3,4 +3,5 @@ export * from './bookings';
 export * from './clubs';
 export * from './ground';
 export * from './operations';
+export * from './outings';
 export * from './weather';

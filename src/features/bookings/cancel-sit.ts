@@ -51,7 +51,7 @@ export async function cancelSit(scope: ClubScope, input: CancelSitInput, now: nu
     if (!own && !scope.can('sits.cancel_any')) {
       throw new AppError('forbidden', `This is ${sit.memberName}'s sit. Only they or a club admin can cancel it.`);
     }
-    if (sit.status === 'cancelled') return sit;
+    if (sit.status !== 'booked') return sit;
     if (sit.endAt <= now) {
       throw new AppError('conflict', `This sit ended at ${clockText(sit.endAt, scope.club)}: it stays on record.`);
     }

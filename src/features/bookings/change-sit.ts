@@ -15,6 +15,7 @@ function refuseChange(scope: ClubScope, sit: SitDetail, sequence: number, now: n
     throw new AppError('forbidden', `This is ${sit.memberName}'s sit. Only they or a club admin can change it.`);
   }
   if (sit.status === 'cancelled') throw new AppError('conflict', 'This sit was cancelled. Book it anew.');
+  if (sit.status === 'lapsed') throw new AppError('conflict', 'This sit lapsed, unsigned. Book it anew if it is free.');
   if (sit.endAt <= now) {
     throw new AppError(
       'conflict',

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, gt, gte, inArray, lte, or } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, gte, inArray, lte, ne, or } from 'drizzle-orm';
 import type { WindowName } from '@/core/types';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
 import { approaches, claims, memberships, parkings, sits, stands, users } from '@/db/schema';
@@ -83,7 +83,7 @@ export async function listUpcomingSits(
   return rows.map(flat);
 }
 
-/** A member's sits that have ended or were cancelled, the latest first. */
+/** A member's sits that have ended, lapsed or were cancelled, the latest first. */
 export async function listPastSits(
   scope: ClubScope,
   memberId: string,
@@ -96,7 +96,7 @@ export async function listPastSits(
       and(
         eq(sits.clubId, scope.club.id),
         eq(sits.memberId, memberId),
-        or(eq(sits.status, 'cancelled'), lte(sits.endAt, now)),
+        or(ne(sits.status, 'booked'), lte(sits.endAt, now)),
       ),
     )
     .orderBy(desc(sits.startAt))

@@ -10,7 +10,7 @@ import ical, {
 export interface CalendarSit {
   id: string;
   sequence: number;
-  status: 'booked' | 'cancelled';
+  status: 'booked' | 'cancelled' | 'lapsed';
   startAt: number;
   endAt: number;
   createdAt: number;
@@ -85,7 +85,7 @@ export function sitCalendar(calendar: {
       lastModified: new Date(sit.updatedAt),
       start: new Date(sit.startAt),
       end: new Date(sit.endAt),
-      status: sit.status === 'cancelled' ? ICalEventStatus.CANCELLED : ICalEventStatus.CONFIRMED,
+      status: sit.status === 'booked' ? ICalEventStatus.CONFIRMED : ICalEventStatus.CANCELLED,
       summary: plainLine(shown.summary),
       description: shown.description,
       location: locationOf(shown),

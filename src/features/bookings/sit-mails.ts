@@ -9,7 +9,7 @@ import { sitCalendar } from './sit-calendar';
 import { fullEntry, wayInText } from './sit-entry';
 import { dayAndWindow, spanText } from './sit-words';
 
-export type SitMail = 'booked' | 'changed' | 'cancelled';
+export type SitMail = 'booked' | 'changed' | 'cancelled' | 'lapsed';
 
 /** 'Windrest <windrest@localhost>' is the address inside the brackets. */
 function senderAddress(): string {
@@ -21,6 +21,10 @@ function opening(scope: ClubScope, kind: SitMail, sit: SitDetail): string {
   const who = own ? 'You' : scope.member.name;
   if (kind === 'booked') return own ? `You booked ${sit.standName}.` : `${who} booked ${sit.standName} for you.`;
   if (kind === 'changed') return `${who} changed your sit. This is how it stands now.`;
+  if (kind === 'lapsed') {
+    const minutes = scope.club.rules.holdMinutes ?? 0;
+    return `Your sit at ${sit.standName} has lapsed: nobody signed in within ${minutes} minutes. The stand is free again.`;
+  }
   const reason = sit.cancelReason ? ` The reason given: ${sit.cancelReason}` : '';
   return `${who} cancelled your sit at ${sit.standName}.${reason}`;
 }
@@ -38,7 +42,12 @@ function facts(scope: ClubScope, sit: SitDetail): { label: string; value: string
   ];
 }
 
-const SUBJECTS: Record<SitMail, string> = { booked: 'Sit booked', changed: 'Sit changed', cancelled: 'Sit cancelled' };
+const SUBJECTS: Record<SitMail, string> = {
+  booked: 'Sit booked',
+  changed: 'Sit changed',
+  cancelled: 'Sit cancelled',
+  lapsed: 'Sit lapsed',
+};
 
 /** Tells the member whose sit it is, with an entry for the calendar. */
 export async function queueSitMail(
@@ -50,7 +59,7 @@ export async function queueSitMail(
 ): Promise<void> {
   const { club } = scope;
   const to = { email: sit.memberEmail, name: sit.memberName };
-  const method = kind === 'cancelled' ? 'CANCEL' : 'REQUEST';
+  const method = sit.status === 'booked' ? 'REQUEST' : 'CANCEL';
   const organizer = { name: club.name, email: senderAddress() };
   const shown = fullEntry(sit, club, false);
   const { text, html } = composeMail({

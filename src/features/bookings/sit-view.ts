@@ -10,7 +10,7 @@ import { dayAndWindow, type SitWindows, spanText } from './sit-words';
 export interface SitView {
   id: string;
   sequence: number;
-  status: 'booked' | 'cancelled';
+  status: SitDetail['status'];
   standId: string;
   standName: string;
   memberId: string;

@@ -3,6 +3,7 @@ import type { SitView } from '../sit-view';
 
 function endOf(sit: SitView): string {
   if (sit.status === 'booked') return 'Ended';
+  if (sit.status === 'lapsed') return 'Lapsed, unsigned';
   return sit.cancelReason ? `Cancelled: ${sit.cancelReason}` : 'Cancelled';
 }
 
