@@ -3,7 +3,7 @@ import { write } from '@/db/client';
 import { leaseDueMail, type OutboxRow, updateMail } from '@/db/queries/outbox';
 import { now as clock } from '@/server/clock';
 import { log } from '@/server/log';
-import { waitAfter } from './back-off';
+import { MOST_ATTEMPTS, waitAfter } from './back-off';
 import { settleLeased } from './data';
 import { mailPort } from './mail-port';
 
@@ -15,6 +15,8 @@ const LONGEST_RUN_MS = 2 * MINUTE;
 
 async function trySend(port: MailPort, row: OutboxRow): Promise<MailResult> {
   if (!row.message) return { ok: false, permanent: true, message: 'The words of this mail are gone.' };
+  // Leased once more than it may be tried: each try ended with its process.
+  if (row.attempts > MOST_ATTEMPTS) return { ok: false, permanent: true, message: 'Sending it stopped the program.' };
   const { id, toEmail, toName, subject, message } = row;
   return port.send({ id, to: { email: toEmail, name: toName }, subject, ...message });
 }

@@ -1,0 +1,44 @@
+import type { Metadata } from 'next';
+import { ConfirmEmailNotice } from '@/features/accounts/components/confirm-email-notice';
+import { NameForm } from '@/features/accounts/components/name-form';
+import { PasswordForm } from '@/features/accounts/components/password-form';
+import { SessionsList } from '@/features/accounts/components/sessions-list';
+import { SignOutButton, SignOutEverywhereButton } from '@/features/accounts/components/sign-out-button';
+import { listMySessions } from '@/features/accounts/reads';
+import { now } from '@/server/clock';
+import { accountPage } from '@/server/doors';
+import { TextLink } from '@/ui/button';
+import { PageTitle, Section } from '@/ui/page-parts';
+import { resendAction } from '../verify/actions';
+import {
+  changeNameAction,
+  changePasswordAction,
+  endSessionAction,
+  signOutAction,
+  signOutEverywhereAction,
+} from './actions';
+
+export const metadata: Metadata = { title: 'Account' };
+
+export default accountPage(async ({ user }) => {
+  const sessions = await listMySessions(user, now());
+  return (
+    <>
+      <PageTitle title="Account" lead={user.email} actions={<TextLink href="/clubs">Your clubs</TextLink>} />
+      {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
+      <Section title="Name" note="Members of your clubs see it.">
+        <NameForm name={user.name} action={changeNameAction} />
+      </Section>
+      <Section title="Password">
+        <PasswordForm email={user.email} action={changePasswordAction} />
+      </Section>
+      <Section title="Signed-in browsers" note="One you do not know? Sign it out, then change your password.">
+        <SessionsList sessions={sessions} endAction={endSessionAction} />
+        <div className="mt-5 flex flex-wrap gap-3">
+          <SignOutButton action={signOutAction} />
+          <SignOutEverywhereButton action={signOutEverywhereAction} />
+        </div>
+      </Section>
+    </>
+  );
+});
