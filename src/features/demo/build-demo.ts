@@ -1,0 +1,53 @@
+import { dayOf } from '@/core/day-time';
+import { buildAudit } from './build-audit';
+import { buildClosures } from './build-closures';
+import { buildClub, buildUsers } from './build-club';
+import { buildGround } from './build-ground';
+import { buildLogs } from './build-logs';
+import { buildVisits } from './build-visits';
+import { planComingSits } from './coming-sits';
+import { DEMO_PLACE } from './demo-place';
+import type { DemoRows } from './demo-rows';
+import { demoRules } from './demo-rules';
+import { makeDice } from './dice';
+import { planPastSeason } from './past-season';
+import { MEMBERS } from './people';
+import { buildSecondClub } from './second-club';
+import { claimsOf, makePlanner } from './sit-planner';
+
+export const DEMO_SLUG = 'tansy-fork';
+
+/** The demo as rows. The same day gives the same rows, whatever the hour. */
+export function buildDemo(now: number, passwordHash: string): DemoRows {
+  const today = dayOf(now, DEMO_PLACE.zone);
+  const day = { today, dice: makeDice(`demo ${today}`) };
+  const users = buildUsers(day, passwordHash);
+  const place = { slug: DEMO_SLUG, name: 'Tansy Fork Deer Club', ...DEMO_PLACE };
+  const club = buildClub(day, { ...place, rules: demoRules(today) }, MEMBERS, users);
+  const second = buildSecondClub(day, users);
+  const ground = buildGround(day, club);
+  const closures = buildClosures(day, club, ground);
+  const planner = makePlanner(day, club, ground, closures);
+  planPastSeason(day, club, ground, planner);
+  planComingSits(day, club, ground, planner);
+  const { sits } = planner;
+  const { parkings, stands, approaches, features } = ground;
+  return {
+    users,
+    clubs: [club.row, second.row],
+    memberships: [...club.memberships, ...second.memberships],
+    parkings,
+    stands: [...stands, ...second.stands],
+    closures,
+    approaches,
+    features,
+    sits,
+    claims: claimsOf(day, sits),
+    sitLogs: buildLogs(day, ground, sits),
+    visits: buildVisits(day, club, ground),
+    auditLog: [
+      ...buildAudit(day, club, { ground, closures, sits }),
+      ...buildAudit(day, second, { ground: { ...ground, stands: second.stands }, closures: [], sits: [] }),
+    ],
+  };
+}

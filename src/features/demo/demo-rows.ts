@@ -1,0 +1,18 @@
+import type * as schema from '@/db/schema';
+
+/** The demo as rows, in the order in which they may be written. */
+export interface DemoRows {
+  users: (typeof schema.users.$inferInsert)[];
+  clubs: (typeof schema.clubs.$inferInsert)[];
+  memberships: (typeof schema.memberships.$inferInsert)[];
+  parkings: (typeof schema.parkings.$inferInsert)[];
+  stands: (typeof schema.stands.$inferInsert)[];
+  closures: (typeof schema.closures.$inferInsert)[];
+  approaches: (typeof schema.approaches.$inferInsert)[];
+  features: (typeof schema.features.$inferInsert)[];
+  sits: (typeof schema.sits.$inferInsert)[];
+  claims: (typeof schema.claims.$inferInsert)[];
+  sitLogs: (typeof schema.sitLogs.$inferInsert)[];
+  visits: (typeof schema.visits.$inferInsert)[];
+  auditLog: (typeof schema.auditLog.$inferInsert)[];
+}
