@@ -1,0 +1,71 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { FormProvider } from 'react-hook-form';
+import type { Units } from '@/core/units';
+import { Button, ButtonLink } from '@/ui/button';
+import { FormErrorSummary, SubmitRow } from '@/ui/form';
+import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
+import { useKeptDraft } from '@/ui/form/use-kept-draft';
+import { Notice } from '@/ui/notices';
+import { useToast } from '@/ui/toast';
+import { makeRulesSchema, type RulesForm as RulesValues } from '../rules-form-schema';
+import type { SavedClub } from '../save-club';
+import { RulesBooking } from './rules-booking';
+import { RulesDistances } from './rules-distances';
+import { RulesHours } from './rules-hours';
+import { RulesLegalLight } from './rules-legal-light';
+import { RulesSeasons } from './rules-seasons';
+import { RulesSharing } from './rules-sharing';
+
+interface Props {
+  club: string;
+  units: Units;
+  rules: RulesValues;
+  action: (club: string, values: RulesValues) => Promise<ActionAnswer<SavedClub>>;
+}
+
+const SCHEMAS = { us: makeRulesSchema('us'), metric: makeRulesSchema('metric') };
+
+export function RulesForm({ club, units, rules, action }: Props) {
+  const router = useRouter();
+  const toast = useToast();
+  const page = `/clubs/${club}/club/rules`;
+  const { form, errors, pending, formProps } = useActionForm<RulesValues, SavedClub>({
+    schema: SCHEMAS[units],
+    defaultValues: rules,
+    submit: (values) => action(club, values),
+    onDone: ({ changed }) => {
+      draft.drop();
+      toast({ title: changed.length === 0 ? 'Nothing was different' : `Saved: ${changed.join(', ')}` });
+      router.push(page);
+    },
+  });
+  const draft = useKeptDraft(form, `rules:${club}:${rules.version}`);
+  return (
+    <FormProvider {...form}>
+      <form {...formProps} className="flex flex-col gap-2">
+        <FormErrorSummary errors={errors} />
+        {draft.brought && (
+          <Notice
+            title="Your unsaved entries are back"
+            actions={<Button onClick={draft.startAfresh}>Start afresh</Button>}
+          >
+            They were typed in this tab before and not saved.
+          </Notice>
+        )}
+        <RulesLegalLight />
+        <RulesHours />
+        <RulesSeasons />
+        <RulesBooking />
+        <RulesDistances units={units} />
+        <RulesSharing />
+        <SubmitRow label="Save the rules" pending={pending} pendingLabel="Saving…" className="mt-8">
+          <ButtonLink href={page} look="quiet">
+            Back without saving
+          </ButtonLink>
+        </SubmitRow>
+      </form>
+    </FormProvider>
+  );
+}

@@ -1,0 +1,200 @@
+import { z } from 'zod';
+import {
+  CALENDAR_PRIVACY,
+  type ClaimAhead,
+  type ClubRules,
+  type OrangeRule,
+  SIGHTINGS_SEEN_BY,
+} from '@/core/booking/rules';
+import { clubRulesSchema } from '@/core/booking/rules-schema';
+import { isClock, isDay } from '@/core/day-time';
+import { WEAPONS, type Weapon } from '@/core/types';
+import { type Units, ydToM } from '@/core/units';
+import { formReader, type TextReader } from './read-number';
+
+const line = z.string().max(600, 'Keep it to 600 characters.');
+const fromSunFields = z.object({ minutes: line, side: z.enum(['before', 'after']) });
+
+/** What the rules form holds: text in the club's units. */
+export const rulesFormSchema = z.object({
+  version: z.number().int().min(1),
+  legalLight: z
+    .array(z.object({ name: line, minutesBeforeSunrise: line, minutesAfterSunset: line, source: line, statedOn: line }))
+    .max(20),
+  morningStart: fromSunFields,
+  morningEnd: line,
+  eveningStart: line,
+  eveningEnd: fromSunFields,
+  seasons: z
+    .array(
+      z.object({
+        id: z.string().max(40),
+        name: line,
+        weapons: z.array(z.enum(WEAPONS)).max(WEAPONS.length),
+        fromDay: line,
+        toDay: line,
+        legalLightName: line,
+      }),
+    )
+    .max(60),
+  claimAhead: z.enum(['days', 'hunt_time']),
+  claimDays: line,
+  claimHours: line,
+  maxLiveClaims: line,
+  holdMinutes: line,
+  walkUpSits: z.boolean(),
+  backByMinutes: line,
+  overdueMember: line,
+  overdueOfficers: line,
+  overdueContact: line,
+  overdueShowsPlace: z.boolean(),
+  restDays: line,
+  mostSitsPerMember: line,
+  guestDays: line,
+  guestsAtOnce: line,
+  spacing: z.object({ bow: line, crossbow: line, muzzleloader: line, shotgun: line, rifle: line }),
+  passThrough: line,
+  sightingsSeenBy: z.enum(SIGHTINGS_SEEN_BY),
+  calendarPrivacy: z.enum(CALENDAR_PRIVACY),
+  orangeText: line,
+  orangeSource: line,
+  orangeStatedOn: line,
+});
+export type RulesForm = z.output<typeof rulesFormSchema>;
+
+const whole = (label: string, min: number, max: number) => ({ label, min, max, whole: true });
+
+function readDistance(form: TextReader, path: string[], text: string, label: string, max: number, units: Units) {
+  const unit = units === 'us' ? 'yd' : 'm';
+  const value = form.needNumber(path, text, { label, min: 0, max, unit });
+  return units === 'us' ? ydToM(value) : value;
+}
+
+function readFromSun(form: TextReader, path: string, { minutes, side }: RulesForm['morningStart'], label: string) {
+  const value = form.needNumber([path, 'minutes'], minutes, whole(label, 0, 180));
+  return side === 'before' ? 0 - value : value;
+}
+
+function readClock(form: TextReader, path: string, text: string): string {
+  if (!isClock(text.trim())) form.fail([path], 'Give a time.');
+  return text.trim();
+}
+
+function readClaimAhead(form: TextReader, typed: RulesForm): ClaimAhead {
+  if (typed.claimAhead === 'days') {
+    return { kind: 'days', days: form.needNumber(['claimDays'], typed.claimDays, whole('Days ahead', 0, 365)) };
+  }
+  return { kind: 'hunt_time', hours: form.needNumber(['claimHours'], typed.claimHours, whole('Hours ahead', 1, 24)) };
+}
+
+function readLegalLight(form: TextReader, typed: RulesForm): ClubRules['legalLight'] {
+  return typed.legalLight.map((rule, i) => ({
+    name: rule.name.trim(),
+    minutesBeforeSunrise: form.needNumber(
+      ['legalLight', i, 'minutesBeforeSunrise'],
+      rule.minutesBeforeSunrise,
+      whole('Minutes before sunrise', -60, 90),
+    ),
+    minutesAfterSunset: form.needNumber(
+      ['legalLight', i, 'minutesAfterSunset'],
+      rule.minutesAfterSunset,
+      whole('Minutes after sunset', -60, 90),
+    ),
+    source: rule.source.trim(),
+    statedOn: rule.statedOn.trim(),
+  }));
+}
+
+/** All three, or none: a rule without its source and day is no record. */
+function readOrange(form: TextReader, typed: RulesForm): OrangeRule | null {
+  const text = typed.orangeText.trim();
+  const source = typed.orangeSource.trim();
+  const statedOn = typed.orangeStatedOn.trim();
+  if (text === '' && source === '' && statedOn === '') return null;
+  if (text === '') form.fail(['orangeText'], 'Write the rule, or clear its source and day.');
+  if (text.length > 500) form.fail(['orangeText'], 'Keep the rule to 500 characters.');
+  if (source === '') form.fail(['orangeSource'], 'Say where the rule is written.');
+  if (source.length > 300) form.fail(['orangeSource'], 'Keep the source to 300 characters.');
+  if (!isDay(statedOn)) form.fail(['orangeStatedOn'], 'Choose the day on which it was stated.');
+  return { text, source, statedOn };
+}
+
+function readSpacing(form: TextReader, typed: RulesForm, units: Units): ClubRules['spacingM'] {
+  const read = (weapon: Weapon) =>
+    readDistance(form, ['spacing', weapon], typed.spacing[weapon], 'Spacing', 2000, units);
+  return {
+    bow: read('bow'),
+    crossbow: read('crossbow'),
+    muzzleloader: read('muzzleloader'),
+    shotgun: read('shotgun'),
+    rifle: read('rifle'),
+  };
+}
+
+function readOverdue(form: TextReader, typed: RulesForm): ClubRules['overdueSteps'] {
+  const memberMinutes = form.needNumber(['overdueMember'], typed.overdueMember, whole('Minutes', 0, 720));
+  const officersMinutes = form.needNumber(['overdueOfficers'], typed.overdueOfficers, whole('Minutes', 0, 720));
+  const contactMinutes = form.needNumber(['overdueContact'], typed.overdueContact, whole('Minutes', 0, 720));
+  if (officersMinutes < memberMinutes) form.fail(['overdueOfficers'], 'Officers are not told before the member.');
+  if (contactMinutes < officersMinutes) form.fail(['overdueContact'], 'The contact is not told before the officers.');
+  return { memberMinutes, officersMinutes, contactMinutes };
+}
+
+function readRules(form: TextReader, typed: RulesForm, units: Units): ClubRules {
+  return {
+    legalLight: readLegalLight(form, typed),
+    windowHours: {
+      morning: {
+        startMinutesFromSunrise: readFromSun(form, 'morningStart', typed.morningStart, 'Start of the morning'),
+        endClock: readClock(form, 'morningEnd', typed.morningEnd),
+      },
+      evening: {
+        startClock: readClock(form, 'eveningStart', typed.eveningStart),
+        endMinutesFromSunset: readFromSun(form, 'eveningEnd', typed.eveningEnd, 'End of the evening'),
+      },
+    },
+    seasons: typed.seasons.map((season) => ({ ...season, legalLightName: season.legalLightName.trim() || null })),
+    claimAhead: readClaimAhead(form, typed),
+    maxLiveClaims: form.number(['maxLiveClaims'], typed.maxLiveClaims, whole('Sits booked at once', 1, 100)),
+    holdMinutes: form.number(['holdMinutes'], typed.holdMinutes, whole('Hold time', 5, 600)),
+    restDaysDefault: form.needNumber(['restDays'], typed.restDays, whole('Rest days', 0, 60)),
+    mostSitsPerMemberSeason: form.number(
+      ['mostSitsPerMember'],
+      typed.mostSitsPerMember,
+      whole('Sits a season', 1, 400),
+    ),
+    spacingM: readSpacing(form, typed, units),
+    passThroughM: readDistance(form, ['passThrough'], typed.passThrough, 'Walking distance', 1000, units),
+    guestDaysPerSeason: form.number(['guestDays'], typed.guestDays, whole('Guest days', 0, 366)),
+    guestsAtOnce: form.needNumber(['guestsAtOnce'], typed.guestsAtOnce, whole('Guests at once', 0, 20)),
+    backByMinutes: form.needNumber(['backByMinutes'], typed.backByMinutes, whole('Back-by allowance', 0, 720)),
+    overdueSteps: readOverdue(form, typed),
+    overdueShowsPlace: typed.overdueShowsPlace,
+    sightingsSeenBy: typed.sightingsSeenBy,
+    calendarPrivacy: typed.calendarPrivacy,
+    walkUpSits: typed.walkUpSits,
+    orangeRule: readOrange(form, typed),
+  };
+}
+
+/** These stand in form and store under the same names, so the stored schema's own findings fall beside their fields. */
+const SAME_NAMES = ['legalLight', 'seasons'];
+
+/** From the form in the club's units to the rules as they are stored, in metres. */
+export function makeRulesSchema(units: Units) {
+  return rulesFormSchema.transform((typed, ctx): { version: number; rules: ClubRules } => {
+    const form = formReader(ctx);
+    const rules = readRules(form, typed, units);
+    const checked = clubRulesSchema.safeParse(rules);
+    for (const issue of checked.error?.issues ?? []) {
+      if (SAME_NAMES.includes(String(issue.path[0]))) form.fail(issue.path.map(keyOf), issue.message);
+    }
+    if (form.failed() || !checked.success) {
+      if (!form.failed()) form.fail([], 'These rules cannot be saved as they are. Look at each entry again.');
+      return z.NEVER;
+    }
+    return { version: typed.version, rules: checked.data };
+  });
+}
+
+const keyOf = (key: PropertyKey): string | number => (typeof key === 'number' ? key : String(key));
