@@ -55,6 +55,7 @@ export function ClosureFormView({ club, today, stands, standId, close }: Closure
     onDone: () => {
       toast({ title: 'Closed' });
       fields.form.reset({ standId: '', fromDay: today, toDay: '', reason: '' });
+      fields.form.setFocus('fromDay');
     },
   });
   const { register, errorOf } = fields;

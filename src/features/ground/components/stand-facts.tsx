@@ -80,8 +80,8 @@ export function StandFacts({ stand, units, restDaysDefault, allowedNames }: Stan
   return (
     <Section title="Facts">
       <div className="grid gap-x-10 lg:grid-cols-2">
-        <DefinitionList items={seat} />
-        <DefinitionList items={use} className="border-t-0 lg:border-t" />
+        <DefinitionList items={seat} className="self-start" />
+        <DefinitionList items={use} className="self-start border-t-0 lg:border-t" />
       </div>
     </Section>
   );

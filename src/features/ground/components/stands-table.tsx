@@ -66,9 +66,9 @@ const COLUMNS: readonly DataColumn<Row>[] = [
 function ClosedText({ text }: { text: string }) {
   const [word = '', ...rest] = text.split(' ');
   return (
-    <>
+    <span>
       <Badge look={word === 'Closed' ? 'clay' : 'plain'}>{word}</Badge> {rest.join(' ')}
-    </>
+    </span>
   );
 }
 

@@ -7,7 +7,7 @@ import { EmptyState } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { closeAction, openAgainAction } from './actions';
 
-export const metadata = { title: 'Closures' };
+export const metadata = { title: 'Closed days' };
 
 export default clubPage('closed_days.write', async ({ scope, search }) => {
   const { today, lines, stands } = await readClosures(scope, now());
@@ -16,7 +16,7 @@ export default clubPage('closed_days.write', async ({ scope, search }) => {
   return (
     <>
       <PageTitle
-        title="Closures"
+        title="Closed days"
         lead="Nobody can book on closed days. Sits booked before stay until the member or an admin cancels them."
       />
       <Section title="Close days">

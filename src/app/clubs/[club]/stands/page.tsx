@@ -25,7 +25,7 @@ export default clubPage('stands.read', async ({ scope }) => {
         lead="Every place to sit, the winds it is good for and whether it is open."
         actions={
           <>
-            {scope.can('closed_days.write') && <ButtonLink href={`${base}/closures`}>Closures</ButtonLink>}
+            {scope.can('closed_days.write') && <ButtonLink href={`${base}/closures`}>Closed days</ButtonLink>}
             {canWrite && lines.length > 0 && addLink}
           </>
         }
