@@ -52,7 +52,7 @@ function readRanges(form: FormReader, typed: StandForm['shotRange'], units: Unit
     if (range !== null) ranges[weapon] = units === 'us' ? ydToM(range) : range;
   }
   if (WEAPONS.every((weapon) => typed[weapon].trim() === '')) {
-    form.fail('shotRange.bow', 'Give the longest shot for at least one weapon: one left blank is not allowed here.');
+    form.fail('shotRange.bow', 'At least one weapon needs its longest shot.');
   }
   return ranges;
 }
@@ -77,15 +77,18 @@ export function makeStandSchema(club: FormClub) {
   return standFormSchema.transform((typed, ctx): StandValues => {
     const form = readForm(ctx);
     const { height: max, heightUnit: unit } = STAND_LIMITS[club.units];
+    // In the form's own order, so that the list of mistakes follows it.
+    const name = form.name('name', typed.name);
+    const place = readPlace(form, club, typed);
     const height = form.needNumber('seatHeight', typed.seatHeight, { label: 'Seat height', min: 0, max, unit });
     const days = { label: 'Rest days', min: 0, max: 60, whole: true };
     const most = { label: 'Most sits', min: 1, max: 365, whole: true };
     const named = typed.whoMayHunt === 'named';
-    if (named && typed.allowedMemberIds.length === 0) form.fail('allowedMemberIds', 'Name at least one member.');
     const values: StandValues = {
-      name: form.name('name', typed.name),
+      name,
       kind: typed.kind,
-      ...readPlace(form, club, typed),
+      lat: place.lat,
+      lon: place.lon,
       seatHeightM: club.units === 'us' ? ftToM(height) : height,
       facingDeg: readBearing(form, 'facing', typed.facing),
       shotSide: typed.shotSide,
@@ -107,6 +110,7 @@ export function makeStandSchema(club: FormClub) {
       allowedMemberIds: named ? [...new Set(typed.allowedMemberIds)] : null,
       notes: typed.notes.trim(),
     };
+    if (named && typed.allowedMemberIds.length === 0) form.fail('allowedMemberIds', 'Name at least one member.');
     return form.failed() ? z.NEVER : values;
   });
 }
