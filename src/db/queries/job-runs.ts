@@ -1,4 +1,4 @@
-import { desc, eq, sql } from 'drizzle-orm';
+import { and, asc, desc, eq, isNotNull, sql } from 'drizzle-orm';
 import { reader, type Tx } from '../client';
 import { jobRuns } from '../schema';
 
@@ -41,6 +41,17 @@ export async function deleteOldRuns(tx: Tx, before: number): Promise<void> {
   await tx.delete(jobRuns).where(sql`${jobRuns.slotAt} < ${before} and ${jobRuns.finishedAt} is not null`);
 }
 
-export function listLastRuns() {
-  return reader().select().from(jobRuns).orderBy(desc(jobRuns.slotAt)).limit(200);
+/** The last runs of one job, or of those that failed. */
+export function listLastRuns(name: string, want: { most: number; failed?: boolean }): Promise<JobRunRow[]> {
+  return reader()
+    .select()
+    .from(jobRuns)
+    .where(and(eq(jobRuns.name, name), want.failed ? isNotNull(jobRuns.error) : undefined))
+    .orderBy(desc(jobRuns.slotAt))
+    .limit(want.most);
+}
+
+export async function listJobNames(): Promise<string[]> {
+  const rows = await reader().selectDistinct({ name: jobRuns.name }).from(jobRuns).orderBy(asc(jobRuns.name));
+  return rows.map((row) => row.name);
 }

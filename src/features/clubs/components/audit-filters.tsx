@@ -1,0 +1,51 @@
+import { Button, ButtonLink } from '@/ui/button';
+import { DateInput, Select, TextInput } from '@/ui/text-inputs';
+import type { AuditFilter } from '../audit-schema';
+import type { AuditPage } from '../read-audit';
+
+interface Props {
+  filter: AuditFilter;
+  /** Beside their fields, when an address was typed by hand. */
+  errors: Record<string, string>;
+  people: AuditPage['people'];
+  actions: AuditPage['actions'];
+  /** The page without a filter. */
+  page: string;
+}
+
+const choices = (list: { id: string; name: string }[]) => list.map(({ id, name }) => ({ value: id, label: name }));
+
+/** A plain form sent by GET: what is asked for stands in the address. */
+export function AuditFilters({ filter, errors, people, actions, page }: Props) {
+  return (
+    <form method="get" action={page} className="mb-6 flex flex-col gap-4">
+      <div className="grid gap-4 sm:grid-cols-2 lg:grid-cols-3">
+        <Select
+          label="Person"
+          name="person"
+          placeholder="Everyone"
+          options={choices(people)}
+          defaultValue={filter.person ?? ''}
+        />
+        <Select
+          label="What"
+          name="action"
+          placeholder="Everything"
+          options={choices(actions)}
+          defaultValue={filter.action ?? ''}
+        />
+        <TextInput label="Words" name="text" type="search" defaultValue={filter.text ?? ''} error={errors.text} />
+        <DateInput label="From day" name="from" defaultValue={filter.from ?? ''} error={errors.from} />
+        <DateInput label="To day" name="to" defaultValue={filter.to ?? ''} error={errors.to} />
+      </div>
+      <div className="flex flex-wrap gap-2">
+        <Button type="submit" look="primary">
+          Show
+        </Button>
+        <ButtonLink href={page} look="quiet">
+          Clear
+        </ButtonLink>
+      </div>
+    </form>
+  );
+}
