@@ -13,6 +13,7 @@ export const ID_PREFIXES = {
   closure: 'cls',
   approach: 'app',
   feature: 'ftr',
+  mapItem: 'map',
   visit: 'vis',
   sit: 'sit',
   claim: 'clm',

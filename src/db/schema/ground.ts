@@ -1,5 +1,6 @@
 import { index, integer, real, sqliteTable, text } from 'drizzle-orm/sqlite-core';
 import type { Geometry, Position } from 'geojson';
+import type { CropYear } from '@/core/map-layers';
 import {
   FEATURE_KINDS,
   type GoodWindArc,
@@ -116,6 +117,8 @@ export const features = sqliteTable(
     geometry: text({ mode: 'json' }).$type<Geometry>().notNull(),
     months: text({ mode: 'json' }).$type<number[]>().notNull(),
     use: text({ mode: 'json' }).$type<Partial<UseTable>>(),
+    /** What a crop field holds by year; its months then stand in place of the feature's own. */
+    rotation: text({ mode: 'json' }).$type<CropYear[]>().notNull().default([]),
     notes: text().notNull().default(''),
     version: integer().notNull().default(1),
     removedAt: integer(),

@@ -4,7 +4,8 @@ import { features } from '@/db/schema';
 import type { ClubScope } from '@/server/scope';
 
 export type FeatureRow = typeof features.$inferSelect;
-export type FeatureValues = Omit<FeatureRow, 'id' | 'clubId' | 'version' | 'removedAt'>;
+export type FeatureValues = Omit<FeatureRow, 'id' | 'clubId' | 'rotation' | 'version' | 'removedAt'> &
+  Partial<Pick<FeatureRow, 'rotation'>>;
 
 const kept = (scope: ClubScope) => and(eq(features.clubId, scope.club.id), isNull(features.removedAt));
 
