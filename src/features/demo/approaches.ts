@@ -67,7 +67,7 @@ export const APPROACHES: readonly DemoApproach[] = [
     name: 'West creek path',
     direction: 'both',
     by: [
-      [-655, -310],
+      [-668, -310],
       [-420, -205],
       [-270, -170],
     ],
@@ -90,7 +90,7 @@ export const APPROACHES: readonly DemoApproach[] = [
     name: 'Ditch from the creek',
     direction: 'both',
     by: [
-      [-655, -310],
+      [-668, -310],
       [-420, -205],
       [-250, -175],
       [-150, -20],
@@ -153,7 +153,7 @@ export const APPROACHES: readonly DemoApproach[] = [
     name: 'West fence and ford',
     direction: 'both',
     by: [
-      [-655, -310],
+      [-668, -310],
       [-440, -210],
     ],
     notes: 'Cross below the West Ford, not at it.',

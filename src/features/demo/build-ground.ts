@@ -87,7 +87,7 @@ export function buildGround(day: DemoDay, club: MadeClub): MadeGround {
     kind: feature.kind,
     geometry: geometryOf(feature.shape),
     months: feature.months ?? ALL_YEAR,
-    use: null,
+    use: feature.use ?? null,
     notes: feature.notes ?? '',
   }));
   const standIds = new Map(STANDS.map((stand, i) => [stand.key, stands[i]?.id ?? '']));

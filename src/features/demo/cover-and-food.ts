@@ -155,12 +155,12 @@ export const FOOD: readonly DemoFeature[] = [
     kind: 'crop',
     shape: {
       area: [
-        [-600, -350],
+        [-520, -350],
         [-410, -342],
         [-218, -352],
         [-222, -562],
         [-420, -568],
-        [-595, -560],
+        [-515, -560],
       ],
     },
     notes: 'Alfalfa and orchard grass, last cut in September.',

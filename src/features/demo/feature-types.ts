@@ -1,4 +1,4 @@
-import type { FeatureKind } from '@/core/types';
+import type { FeatureKind, UseTable } from '@/core/types';
 import type { Spot } from './demo-place';
 
 export interface DemoFeature {
@@ -7,5 +7,7 @@ export interface DemoFeature {
   shape: { area: readonly Spot[] } | { line: readonly Spot[] } | { point: Spot };
   /** Months 1-12; left out: all year. */
   months?: number[];
+  /** The steward's own shares in place of those of its kind. */
+  use?: UseTable;
   notes?: string;
 }

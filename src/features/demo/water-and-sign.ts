@@ -19,7 +19,9 @@ export const WATER: readonly DemoFeature[] = [
         [665, -150],
       ],
     },
-    notes: 'Knee-deep at most. Its noise covers a walk up the bed.',
+    use: { night: 0.03, dawn: 0.04, morning: 0.04, midday: 0.04, afternoon: 0.04, dusk: 0.04 },
+    notes:
+      'Knee-deep at most. Deer drink anywhere along it, so seldom at any one place; its noise covers a walk up the bed.',
   },
   {
     name: 'Timber Pool',
