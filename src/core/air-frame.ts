@@ -18,7 +18,7 @@ const MIN = 60_000;
 export interface SeatFrame {
   air: AirStep[];
   set: ScenarioSet;
-  /** Wind over the whole sit at the seat. */
+  /** Directions over the whole sit and by step; speeds in them are at the seat only where slope drift plays. */
   sit: DirectionSummary;
   steps: DirectionSummary[];
   shares: number[] | null;
@@ -77,7 +77,9 @@ function walkWind(
     }
   }
   return {
-    bins: Float64Array.from(bins),
+    low: Int32Array.from(bins, (bin) => Math.floor(bin) % WALK_BINS),
+    high: Int32Array.from(bins, (bin) => (Math.floor(bin) + 1) % WALK_BINS),
+    part: Float64Array.from(bins, (bin) => bin - Math.floor(bin)),
     weights: Float64Array.from(weights),
     perSpeed: Float64Array.from(perSpeed),
     anyWeight,
@@ -87,11 +89,28 @@ function walkWind(
   };
 }
 
-function seatFrame(stand: ScoredStand, steps: PlaceStep[], open: ScenarioSet, settings: ScoringSettings): SeatFrame {
+type Directions = Pick<SeatFrame, 'sit' | 'steps' | 'shares'>;
+
+function directionsOf(set: ScenarioSet): Directions {
+  return {
+    sit: directionSummary(set),
+    steps: set.at.map((_, t) => directionSummary(set, t)),
+    shares: sitDirectionShares(set),
+  };
+}
+
+/** Without slope drift the wind at every seat comes from where the open wind does: its directions are summed up once. */
+function seatFrame(
+  stand: ScoredStand,
+  steps: PlaceStep[],
+  open: ScenarioSet,
+  directions: () => Directions,
+  settings: ScoringSettings,
+): SeatFrame {
   const air = standAir(stand, steps, settings.air);
   const set = scenariosAtStand(open, air);
-  const byStep = air.map((_, t) => directionSummary(set, t));
-  return { air, set, sit: directionSummary(set), steps: byStep, shares: sitDirectionShares(set) };
+  const drifts = air.some((step) => step.driftWeight > 0);
+  return { air, set, ...(drifts ? directionsOf(set) : directions()) };
 }
 
 /**
@@ -117,16 +136,21 @@ export function frameAir(
   const open = sliceSet(wide, before, count, forecast.issuedAt);
   if (wide.source === 'none' || !open.known.includes(true)) return null;
   const steps = wideSteps.slice(before, before + count);
+  let openDirections: Directions | null = null;
+  const directions = () => {
+    openDirections ??= directionsOf(open);
+    return openDirections;
+  };
   const seats = new Map<string, SeatFrame>();
   const winds = new Map<number, WalkWind | null>();
   return {
     steps,
     open,
     missingShare: open.known.filter((k) => !k).length / Math.max(1, count),
-    sit: directionSummary(open),
+    sit: directions().sit,
     seatOf: (stand) => {
       const key = `${stand.seatHeightM}|${stand.shelter}|${stand.drainBearingDeg}|${stand.slopePercent}`;
-      const frame = seats.get(key) ?? seatFrame(stand, steps, open, settings);
+      const frame = seats.get(key) ?? seatFrame(stand, steps, open, directions, settings);
       seats.set(key, frame);
       return frame;
     },

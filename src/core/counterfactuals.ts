@@ -27,7 +27,7 @@ function scentIf(frame: SitFrame, sums: SitSums, fromDeg: number, k: number) {
   if (!seat) return null;
   const steps = seat.steps.map((s, t) => ({
     fromDeg: t < k ? s.meanFromDeg : fromDeg,
-    speedMps: seat.air[t]?.seatSpeedMps ?? s.speedMps ?? 0,
+    speedMps: seat.air[t]?.seatSpeedMps ?? 0,
   }));
   const scent = seatScent({
     source: sums.stand.seat,

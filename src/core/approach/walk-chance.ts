@@ -8,8 +8,10 @@ export const WALK_BINS = 120;
 
 /** The wind at the moment of a walk: one entry a scenario with a direction, the rest as one with none. */
 export interface WalkWind {
-  /** Position among the bins, 0 to 120. */
-  bins: Float64Array;
+  /** The two bins each direction lies between, and how far it is past the first, 0-1. */
+  low: Int32Array;
+  high: Int32Array;
+  part: Float64Array;
   weights: Float64Array;
   /** One over the speed at walking height, s/m, of each entry. */
   perSpeed: Float64Array;
@@ -40,15 +42,12 @@ export interface WalkChance {
 
 function scentChance(table: Float32Array, slot: number, wind: WalkWind): number {
   const row = slot * WALK_BINS;
-  const { bins, weights, perSpeed } = wind;
+  const { low, high, part, weights, perSpeed } = wind;
   let sum = 0;
-  for (let i = 0; i < bins.length; i++) {
-    const at = bins[i] as number;
-    const low = Math.floor(at);
-    const share = at - low;
-    const a = table[row + (low % WALK_BINS)] as number;
-    const b = table[row + ((low + 1) % WALK_BINS)] as number;
-    const exposure = a + (b - a) * share;
+  for (let i = 0; i < low.length; i++) {
+    const a = table[row + (low[i] as number)] as number;
+    const b = table[row + (high[i] as number)] as number;
+    const exposure = a + (b - a) * (part[i] as number);
     if (exposure > 0) sum += (weights[i] as number) * chanceOfExposure(exposure * (perSpeed[i] as number));
   }
   if (wind.anyWeight > 0) {

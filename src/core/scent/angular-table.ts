@@ -126,5 +126,5 @@ function pack({ count, bins, values }: TableScratch): AngularTable {
     packed[to + 2] = values[4 * i + 2] as number;
     packed[to + 3] = values[4 * i + 3] as number;
   }
-  return { start, values: packed };
+  return { start, values: packed, noDirection: new Map() };
 }

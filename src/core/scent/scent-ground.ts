@@ -61,6 +61,8 @@ export interface SourceGeometry {
 export interface AngularTable {
   start: Int32Array;
   values: Float32Array;
+  /** Chances for a wind of no direction by level of exposure; made when first asked for, see no-direction.ts. */
+  noDirection: Map<number, Float64Array>;
 }
 
 /** Lays out what is within the settings' reach of a source. Samples beyond reach are dropped with their weight. */

@@ -3,6 +3,7 @@ import { normalizeDeg } from '../angles';
 import { extraScatterDeg } from '../wind/scatter';
 import type { ScenarioSet } from '../wind/scenario-types';
 import { angularTable, WIND_BINS } from './angular-table';
+import { noDirectionChance } from './no-direction';
 import { wideningLevel } from './plume-table';
 import { chanceOfExposure, exposurePerIndex } from './saturate';
 import type { AngularTable, SourceGeometry } from './scent-ground';
@@ -39,8 +40,10 @@ export interface SeatScent {
 /** What one step holds for every scenario. */
 interface StepPlan {
   table: AngularTable;
-  /** Share of deer at each of the source's features. */
+  /** Share of deer at each of the source's features: the step's stretch of one array for all steps. */
   deer: Float64Array;
+  /** Where that stretch begins. */
+  row: number;
   /** Chances by source feature for a wind of no direction, by speed. */
   anyWay: { speedMps: number; chance: Float64Array } | null;
 }
@@ -58,7 +61,8 @@ export function seatScent(q: ScentQuestion): SeatScent {
   const count = source.features.length;
   const byFeature = new Float64Array(source.ground.featureCount);
   const plans: (StepPlan | null)[] = [];
-  for (let t = 0; t < to; t++) plans.push(t >= from && set.known[t] ? planStep(q, t) : null);
+  const deer = new Float64Array(to * count);
+  for (let t = 0; t < to; t++) plans.push(t >= from && set.known[t] ? planStep(q, t, deer) : null);
   const full = q.detail === 'full';
   const stepFeature = full ? new Float64Array(steps * count) : null;
   const stepChance = new Float64Array(steps);
@@ -97,21 +101,22 @@ export function seatScent(q: ScentQuestion): SeatScent {
   return { windedChance: some ? Math.min(1, Math.max(0, windedChance)) : null, byFeature, stepChance, byStep };
 }
 
-function planStep(q: ScentQuestion, t: number): StepPlan {
+function planStep(q: ScentQuestion, t: number, deer: Float64Array): StepPlan {
   const c = q.stability[t] ?? 'D';
   const widening = Math.hypot(extraScatterDeg(c, q.set.scatterDeg[t] ?? 0), q.set.bundleDeg[t] ?? 0);
   const steps = q.set.at.length;
-  const deer = new Float64Array(q.source.features.length);
-  for (let f = 0; f < deer.length; f++) {
-    const share = q.deer[(q.source.features[f] as number) * steps + t] as number;
-    deer[f] = share > 0 ? Math.min(1, share) : 0;
+  const { features } = q.source;
+  const row = t * features.length;
+  for (let f = 0; f < features.length; f++) {
+    const share = q.deer[(features[f] as number) * steps + t] as number;
+    deer[row + f] = share > 0 ? Math.min(1, share) : 0;
   }
-  return { table: angularTable(q.source, c, wideningLevel(widening)), deer, anyWay: null };
+  return { table: angularTable(q.source, c, wideningLevel(widening)), deer, row, anyWay: null };
 }
 
 /** Adds one scenario's step with a direction; answers the chance that no feature was reached. */
 function oneDirection(
-  { table, deer }: StepPlan,
+  { table, deer, row }: StepPlan,
   fromDeg: number,
   perIndex: number,
   missed: Float64Array,
@@ -127,7 +132,7 @@ function oneDirection(
   for (let e = 4 * (table.start[bin] as number); e < end; e += 4) {
     const f = values[e] as number;
     const index = (values[e + 2] as number) + (values[e + 3] as number) * part;
-    const p = (deer[f] as number) * (values[e + 1] as number) * chanceOfExposure(index * perIndex);
+    const p = (deer[row + f] as number) * (values[e + 1] as number) * chanceOfExposure(index * perIndex);
     missed[f] = (missed[f] as number) * (1 - p);
     missedStep *= 1 - p;
     if (stepRow) stepRow[f] = (stepRow[f] as number) + weight * p;
@@ -145,26 +150,17 @@ function anyDirection(
   weight: number,
 ): number {
   if (!plan.anyWay || plan.anyWay.speedMps !== speedMps) {
-    plan.anyWay = { speedMps, chance: meanOverDirections(plan.table, plan.deer.length, perIndex) };
+    const chance = plan.anyWay?.chance ?? new Float64Array(missed.length);
+    plan.anyWay = { speedMps, chance: noDirectionChance(plan.table, perIndex, chance) };
   }
   let missedStep = 1;
-  for (let f = 0; f < plan.deer.length; f++) {
-    const p = (plan.deer[f] as number) * (plan.anyWay.chance[f] as number);
+  for (let f = 0; f < missed.length; f++) {
+    const p = (plan.deer[plan.row + f] as number) * (plan.anyWay.chance[f] as number);
     missed[f] = (missed[f] as number) * (1 - p);
     missedStep *= 1 - p;
     if (stepRow) stepRow[f] = (stepRow[f] as number) + weight * p;
   }
   return missedStep;
-}
-
-function meanOverDirections(table: AngularTable, count: number, perIndex: number): Float64Array {
-  const chance = new Float64Array(count);
-  for (let e = 0; e < table.values.length; e += 4) {
-    const f = table.values[e] as number;
-    const p = (table.values[e + 1] as number) * chanceOfExposure((table.values[e + 2] as number) * perIndex);
-    chance[f] = (chance[f] as number) + p / WIND_BINS;
-  }
-  return chance;
 }
 
 function most(source: SourceGeometry, row: Float64Array): number | null {
