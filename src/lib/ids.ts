@@ -15,6 +15,8 @@ export const ID_PREFIXES = {
   feature: 'ftr',
   mapItem: 'map',
   visit: 'vis',
+  logVersion: 'lgv',
+  harvest: 'hrv',
   sit: 'sit',
   claim: 'clm',
   outing: 'out',

@@ -1,4 +1,5 @@
 import { index, integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
+import { FOLLOW_UPS, HIT_PLACES, SHOTS } from '@/core/log/follow-up';
 import { WEAPONS, WINDOW_NAMES } from '@/core/types';
 import { clubs, memberships } from './clubs';
 import { approaches, stands } from './ground';
@@ -90,6 +91,19 @@ export const sitLogs = sqliteTable('sit_logs', {
   bumpedOut: integer().notNull(),
   notes: text().notNull().default(''),
   createdAt: integer().notNull(),
+  bumpedWhere: text().notNull().default(''),
+  shot: text({ enum: SHOTS }).notNull().default('none'),
+  shotAt: integer(),
+  /** Of a hit: where, as far as the hunter could tell. */
+  hitPlace: text({ enum: HIT_PLACES }),
+  followUp: text({ enum: FOLLOW_UPS }),
+  followUpNotes: text().notNull().default(''),
+  /** Raised by each save; what it was before stands in sit_log_versions. */
+  version: integer().notNull().default(1),
+  /** Membership of who saved it last; null: the member whose sit it is. */
+  savedBy: text(),
+  /** null: never changed since it was written. */
+  updatedAt: integer(),
 });
 
 /** A secret calendar address. Only a hash of its secret is kept. */

@@ -2,6 +2,8 @@ export * from './accounts';
 export * from './bookings';
 export * from './clubs';
 export * from './ground';
+export * from './harvests';
+export * from './logs';
 export * from './map';
 export * from './operations';
 export * from './outings';
