@@ -58,6 +58,12 @@ export interface CropYear {
   months: number[];
 }
 
+/** The year whose crop stands or lies on a field on a day (YYYY-MM-DD): waste grain of the last harvest counts until March is over. */
+export function cropYearOf(day: string): number {
+  const year = Number(day.slice(0, 4));
+  return Number(day.slice(5, 7)) < 4 ? year - 1 : year;
+}
+
 /** The crop of a year; null where none is written down. */
 export function cropIn(rotation: readonly CropYear[], year: number): CropYear | null {
   return rotation.find((one) => one.year === year) ?? null;

@@ -30,6 +30,21 @@ export interface ApproachPlaces {
   parkings: (LatLon & { id: string; name: string })[];
 }
 
+/** A way tied to its ends: the parking place and the stand are added where the line does not reach them. */
+export function tieEnds(
+  centre: LatLon,
+  points: Position[],
+  ends: { stand: LatLon; parking: LatLon | undefined },
+): { points: Position[]; added: number } {
+  const { stand, parking } = ends;
+  const apart = ([lon = 0, lat = 0]: Position, at: LatLon) =>
+    distanceM(toLocal(centre, { lat, lon }), toLocal(centre, at));
+  const [first, last] = [points[0], points.at(-1)];
+  const lead = parking && (!first || apart(first, parking) > SAME_PLACE_M) ? [[parking.lon, parking.lat]] : [];
+  const end = !last || apart(last, stand) > SAME_PLACE_M ? [[stand.lon, stand.lat]] : [];
+  return { points: [...lead, ...points, ...end], added: lead.length };
+}
+
 /** From the form to what is stored: the parking place and the stand are set at the ends where the line does not reach them. */
 export function makeApproachSchema(club: FormClub, places: ApproachPlaces) {
   const { stand } = places;
@@ -50,16 +65,15 @@ export function makeApproachSchema(club: FormClub, places: ApproachPlaces) {
     if (first && last && apart(last, stand) > 2 * SAME_PLACE_M && apart(first, stand) < apart(last, stand) / 2) {
       form.fail('points', `The line begins near ${stand.name}: type it from the parking place to the stand.`);
     }
-    const lead = parking && (!first || apart(first, parking) > SAME_PLACE_M) ? [[parking.lon, parking.lat]] : [];
-    const end = !last || apart(last, stand) > SAME_PLACE_M ? [[stand.lon, stand.lat]] : [];
+    const tied = tieEnds(club, read.points, { stand, parking });
     const rule = { label: 'Driven as far as line', min: 1, max: Math.max(1, read.points.length), whole: true };
     const driven = form.number('drivenTo', typed.drivenTo, rule);
     const values: ApproachValues = {
       name,
       parkingId: parking?.id ?? null,
       direction: typed.direction,
-      points: [...lead, ...read.points, ...end],
-      vehicleToIndex: driven === null ? 0 : lead.length + driven - 1,
+      points: tied.points,
+      vehicleToIndex: driven === null ? 0 : tied.added + driven - 1,
       notes: typed.notes.trim(),
     };
     return form.failed() ? z.NEVER : values;

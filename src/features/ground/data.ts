@@ -9,6 +9,7 @@ import { listStands, type StandRow } from './stands-data';
 export * from './approaches-data';
 export * from './closures-data';
 export * from './features-data';
+export * from './map-items-data';
 export * from './parkings-data';
 export * from './people-data';
 export * from './stands-data';

@@ -2,7 +2,7 @@ import type { Tx } from '@/db/client';
 import { audit } from '@/server/audit';
 import type { ClubScope } from '@/server/scope';
 
-export type GroundSubject = 'stand' | 'approach' | 'feature' | 'parking' | 'closure';
+export type GroundSubject = 'stand' | 'approach' | 'feature' | 'parking' | 'closure' | 'map_item';
 
 /** The audit row of a change to the ground. */
 export function noteChange(

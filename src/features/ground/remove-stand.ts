@@ -1,4 +1,4 @@
-import { write } from '@/db/client';
+import { type Tx, write } from '@/db/client';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { removeApproachesOf } from './approaches-data';
@@ -9,23 +9,30 @@ import { changedSince, namedSits } from './refuse';
 import { getStand, updateStand } from './stands-data';
 
 /** Takes a stand away with its approaches and closures; past sits keep it. Refused while sits are booked there. */
+export async function removeStandIn(
+  scope: ClubScope,
+  tx: Tx,
+  at: { id: string; version: number },
+  now: number,
+): Promise<{ name: string }> {
+  const stand = await getStand(scope, at.id, tx);
+  if (!stand) throw notFound();
+  const booked = await listBookedSits(scope, { standId: at.id, now }, tx);
+  if (booked.length > 0) {
+    throw new AppError('conflict', `${stand.name} is booked: ${namedSits(booked)}. Cancel or move these sits first.`);
+  }
+  if (!(await updateStand(scope, tx, at, { removedAt: now }))) throw await changedSince(scope, stand, tx);
+  await removeApproachesOf(scope, tx, at.id, now);
+  await removeClosuresOf(scope, tx, at.id, now);
+  const summary = `Removed stand ${stand.name} with its approaches and closures.`;
+  await noteChange(scope, tx, { subject: 'stand', verb: 'removed', id: at.id, summary }, now);
+  return { name: stand.name };
+}
+
 export function removeStand(
   scope: ClubScope,
   at: { id: string; version: number },
   now: number,
 ): Promise<{ name: string }> {
-  return write(async (tx) => {
-    const stand = await getStand(scope, at.id, tx);
-    if (!stand) throw notFound();
-    const booked = await listBookedSits(scope, { standId: at.id, now }, tx);
-    if (booked.length > 0) {
-      throw new AppError('conflict', `${stand.name} is booked: ${namedSits(booked)}. Cancel or move these sits first.`);
-    }
-    if (!(await updateStand(scope, tx, at, { removedAt: now }))) throw await changedSince(scope, stand, tx);
-    await removeApproachesOf(scope, tx, at.id, now);
-    await removeClosuresOf(scope, tx, at.id, now);
-    const summary = `Removed stand ${stand.name} with its approaches and closures.`;
-    await noteChange(scope, tx, { subject: 'stand', verb: 'removed', id: at.id, summary }, now);
-    return { name: stand.name };
-  });
+  return write((tx) => removeStandIn(scope, tx, at, now));
 }

@@ -1,11 +1,13 @@
 import { huntingYear } from '@/core/booking/hunting-year';
 import { addDays } from '@/core/day-time';
 import { toLocal } from '@/core/geometry';
+import { cropYearOf } from '@/core/map-layers';
 import type { GroundInput } from '@/core/rank-input';
 import { DEFAULT_SETTINGS } from '@/core/settings';
 import type { PressureEvent, StandSightings, Weapon } from '@/core/types';
 import { type ReadFrom, reader } from '@/db/client';
 import { type GroundRows, loadGround } from '@/features/ground/data';
+import { featuresInYear } from '@/features/ground/features-in-year';
 import { groundToCore } from '@/features/ground/to-core';
 import type { ClubScope } from '@/server/scope';
 import { listSitEvents, listVisitEvents, sumSightings } from './data';
@@ -68,7 +70,8 @@ export async function loadScoring(
 ): Promise<Scoring> {
   const { club } = scope;
   const rows = await loadGround(scope, from);
-  const ground = groundToCore(club, rows);
+  const features = featuresInYear(rows.features, cropYearOf(ask.day));
+  const ground = groundToCore(club, { ...rows, features });
   return {
     rows,
     input: {
