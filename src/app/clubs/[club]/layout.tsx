@@ -1,5 +1,6 @@
 import { cookies } from 'next/headers';
 import type { ReactNode } from 'react';
+import { ConfirmEmailNotice } from '@/features/accounts/components/confirm-email-notice';
 import { listMyClubs } from '@/features/accounts/reads';
 import { clubNavItems } from '@/features/clubs/club-nav';
 import { ClubSwitch } from '@/features/clubs/components/club-switch';
@@ -7,10 +8,9 @@ import { now } from '@/server/clock';
 import { findScope } from '@/server/scope';
 import { currentUser } from '@/server/session';
 import { AppShell } from '@/ui/app-shell';
-import { TextLink } from '@/ui/button';
 import { LIGHT_COOKIE, parseLight } from '@/ui/light';
 import { Menu } from '@/ui/menu';
-import { Notice } from '@/ui/notices';
+import { resendAction } from '../../(account)/verify/actions';
 
 interface ClubLayoutProps {
   params: Promise<{ club: string }>;
@@ -41,12 +41,7 @@ export default async function ClubLayout({ params, children }: ClubLayoutProps) 
         />
       }
     >
-      {user.emailVerifiedAt === null && (
-        <Notice level="caution" title="Confirm your e-mail address" className="mb-6">
-          Open the link we mailed to {user.email}, or have it sent again under{' '}
-          <TextLink href="/account">Account</TextLink>.
-        </Notice>
-      )}
+      {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
       {children}
     </AppShell>
   );
