@@ -1,6 +1,6 @@
 import { stepStarts } from './air/interpolate';
 import { type PlaceStep, placeAir } from './air/place-air';
-import { stabilityIndex } from './air/stability-types';
+import { type StabilityClass, stabilityIndex } from './air/stability-types';
 import { type AirStep, standAir } from './air/stand-air';
 import { WALK_BINS, type WalkWind } from './approach/walk-chance';
 import type { ScoringSettings } from './settings';
@@ -18,6 +18,7 @@ const MIN = 60_000;
 export interface SeatFrame {
   air: AirStep[];
   set: ScenarioSet;
+  stability: StabilityClass[];
   /** Directions over the whole sit and by step; speeds in them are at the seat only where slope drift plays. */
   sit: DirectionSummary;
   steps: DirectionSummary[];
@@ -110,7 +111,8 @@ function seatFrame(
   const air = standAir(stand, steps, settings.air);
   const set = scenariosAtStand(open, air);
   const drifts = air.some((step) => step.driftWeight > 0);
-  return { air, set, ...(drifts ? directionsOf(set) : directions()) };
+  const stability = air.map((step) => step.stability);
+  return { air, set, stability, ...(drifts ? directionsOf(set) : directions()) };
 }
 
 /**

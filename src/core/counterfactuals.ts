@@ -32,7 +32,7 @@ function scentIf(frame: SitFrame, sums: SitSums, fromDeg: number, k: number) {
   const scent = seatScent({
     source: sums.stand.seat,
     set: { ...seat.set, scenarios: [{ weight: 1, steps }] },
-    stability: seat.air.map((step) => step.stability),
+    stability: seat.stability,
     deer: frame.window.deer,
     minutes: frame.ground.input.settings.air.stepMinutes,
     detail: 'list',

@@ -1,12 +1,12 @@
-import { type AirFrame, frameAir } from './air-frame';
-import { entriesFor } from './approach/entries';
+import { type AirFrame, frameAir, type SeatFrame } from './air-frame';
+import { type Entry, entriesFor } from './approach/entries';
 import type { WalkContext } from './approach/try-ways';
 import { type CautionInput, cautionsFor } from './cautions';
 import { confidenceFor } from './confidence';
 import { formatClock, formatClock12 } from './day-time';
 import { type Glare, glareOf } from './glare';
 import type { GroundFrame } from './ground-frame';
-import { lightShares } from './promise/promise-factors';
+import { lightShares, type PromiseStep } from './promise/promise-factors';
 import type { Detail } from './rank-input';
 import type { Caution, Confidence, Forecast, ScoredStand, SitWindow } from './types';
 import type { Units } from './units';
@@ -23,6 +23,9 @@ export interface SitFrame {
   walks: WalkContext;
   confidence: Confidence;
   light: { day: number; twilight: number };
+  /** Times of going in worth trying. */
+  entries: Entry[];
+  promiseStepsOf: (stand: ScoredStand) => PromiseStep[];
   cautionsOf: (stand: ScoredStand) => Caution[];
   glareOf: (facingDeg: number | null) => Glare;
   clock: (at: number) => string;
@@ -64,6 +67,20 @@ function cautionInput(
   };
 }
 
+function promiseSteps(window: WindowFrame, seat: SeatFrame | null): PromiseStep[] {
+  return window.stepAts.map((_, t) => {
+    const air = seat?.air[t];
+    return {
+      times: window.times[t] as number[],
+      shares: window.shares[t] as Float64Array,
+      seatSpeedMps: air?.seatSpeedMps ?? null,
+      precipMm: air?.precipMm ?? null,
+      cloudPercent: air?.cloudPercent ?? null,
+      meanFromDeg: seat?.steps[t]?.meanFromDeg ?? null,
+    };
+  });
+}
+
 /** Lays out what all stands share in one window. `now` (UTC ms) is what the forecast's age is counted to. */
 export function frameSits(
   ground: GroundFrame,
@@ -74,10 +91,8 @@ export function frameSits(
 ): SitFrame {
   const { place, settings, units } = ground.input;
   const window = frameWindow(sitWindow, place, ground.usesIn, settings);
-  const firstIn = Math.min(
-    sitWindow.startAt,
-    ...entriesFor(sitWindow, window.sun, settings.approach).map((e) => e.inBy),
-  );
+  const entries = entriesFor(sitWindow, window.sun, settings.approach);
+  const firstIn = Math.min(sitWindow.startAt, ...entries.map((e) => e.inBy));
   const air = frameAir(sitWindow, firstIn - HOUR, sitWindow.endAt + HOUR, forecast, place, settings);
   const trust = air && forecast ? { issuedAt: forecast.issuedAt, air } : null;
   const confidence = confidenceFor(
@@ -92,8 +107,7 @@ export function frameSits(
   );
   const cautions = new Map<string, Caution[]>();
   const glares = new Map<number | null, Glare>();
-  const noAir = { seatSpeedMps: null, precipMm: null, cloudPercent: null, meanFromDeg: null };
-  const steps = window.times.map((times, t) => ({ times, shares: window.shares[t] as Float64Array, ...noAir }));
+  const kept = new Map<SeatFrame | null, PromiseStep[]>();
   return {
     ground,
     window,
@@ -105,7 +119,14 @@ export function frameSits(
       settings: settings.approach,
     },
     confidence,
-    light: lightShares(steps, window.moves),
+    light: lightShares(promiseSteps(window, null), window.moves),
+    entries,
+    promiseStepsOf: (stand) => {
+      const seat = air?.seatOf(stand) ?? null;
+      const known = kept.get(seat) ?? promiseSteps(window, seat);
+      kept.set(seat, known);
+      return known;
+    },
     cautionsOf: (stand) => {
       const key = `${stand.kind}|${stand.seatHeightM > 1}`;
       const known =

@@ -1,4 +1,3 @@
-import { entriesFor } from './approach/entries';
 import { tryWays } from './approach/try-ways';
 import { arcsFor, coveredDeg } from './arcs';
 import { type BeforeWay, toOption, type WeighedWay, weighWays } from './choose-way';
@@ -40,28 +39,13 @@ function arcSums(frame: SitFrame, stand: StandFrame): SitSums['arcs'] {
   return { known: true, share: hold?.summary?.shareOfTime ?? coveredDeg(arcs) / 360, hold };
 }
 
-function promiseSteps(frame: SitFrame, stand: StandFrame): PromiseStep[] {
-  const seat = frame.air?.seatOf(stand.stand) ?? null;
-  return frame.window.stepAts.map((_, t) => {
-    const air = seat?.air[t];
-    return {
-      times: frame.window.times[t] as number[],
-      shares: frame.window.shares[t] as Float64Array,
-      seatSpeedMps: air?.seatSpeedMps ?? null,
-      precipMm: air?.precipMm ?? null,
-      cloudPercent: air?.cloudPercent ?? null,
-      meanFromDeg: seat?.steps[t]?.meanFromDeg ?? null,
-    };
-  });
-}
-
 function scentSums(frame: SitFrame, stand: StandFrame): SeatScent | null {
   const seat = frame.air?.seatOf(stand.stand) ?? null;
   if (!seat) return null;
   const scent = seatScent({
     source: stand.seat,
     set: seat.set,
-    stability: seat.air.map((step) => step.stability),
+    stability: seat.stability,
     deer: frame.window.deer,
     minutes: frame.ground.input.settings.air.stepMinutes,
     detail: frame.detail,
@@ -75,7 +59,7 @@ export function sumSit(frame: SitFrame, stand: StandFrame): SitSums {
   const { window } = frame.window;
   const arcs = arcSums(frame, stand);
   const scent = scentSums(frame, stand);
-  const steps = promiseSteps(frame, stand);
+  const steps = frame.promiseStepsOf(stand.stand);
   const glare = frame.glareOf(stand.stand.facingDeg);
   const suitability = stand.stand.suitability[window.window];
   const { moves } = frame.window;
@@ -101,8 +85,7 @@ export function sumSit(frame: SitFrame, stand: StandFrame): SitSums {
     moves,
     scent: scent ? { winded: scent.windedChance ?? 0, exponents: windedExponents(scent.stepChance) } : null,
   };
-  const entries = entriesFor(window, frame.window.sun, settings.approach);
-  const tried = tryWays(stand.waysIn, stand.waysOut, entries, window.endAt, frame.walks);
+  const tried = tryWays(stand.waysIn, stand.waysOut, frame.entries, window.endAt, frame.walks);
   const ways = weighWays(tried, before, frame.window, settings.score);
   const best = ways[0] ?? { factors: before.factors, ...scoreOf(before.factors, settings.score) };
   return { stand, arcs, scent, steps, glare, pressure, before, ways, best };

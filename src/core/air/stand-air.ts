@@ -1,4 +1,4 @@
-import { windFromVector, windVector } from '../angles';
+import { toRad, windFromVector } from '../angles';
 import type { AirSettings } from '../settings';
 import type { ScoredStand } from '../types';
 import type { PlaceStep } from './place-air';
@@ -75,8 +75,8 @@ export function addDrift(
   if (drift.driftFromDeg === null || !(added > 0)) return { fromDeg, speedMps };
   if (fromDeg === null)
     return added > speedMps ? { fromDeg: drift.driftFromDeg, speedMps: added } : { fromDeg, speedMps };
-  const wind = windVector(fromDeg, speedMps);
-  const slope = windVector(drift.driftFromDeg, added);
-  const sum = windFromVector(wind.east + slope.east, wind.north + slope.north);
+  const [wind, slope] = [toRad(fromDeg), toRad(drift.driftFromDeg)];
+  const east = -speedMps * Math.sin(wind) - added * Math.sin(slope);
+  const sum = windFromVector(east, -speedMps * Math.cos(wind) - added * Math.cos(slope));
   return { fromDeg: sum.fromDeg, speedMps: sum.speed };
 }

@@ -9,44 +9,56 @@ const BIN_DEG = 360 / DIRECTION_BINS;
 
 /** What the scenarios of one step add up to: 72 shares that sum to 1; null: no forecast there. */
 export function directionShares(set: ScenarioSet, t: number): number[] | null {
-  if (!set.known[t] || set.scenarios.length === 0) return null;
-  const bins = new Array<number>(DIRECTION_BINS).fill(0);
-  const sigma = Math.hypot(set.scatterDeg[t] ?? 0, set.bundleDeg[t] ?? 0);
-  for (const { weight, steps } of set.scenarios) {
-    const from = steps[t]?.fromDeg ?? null;
-    if (from === null || sigma > 200)
-      for (let i = 0; i < DIRECTION_BINS; i++) bins[i] = (bins[i] ?? 0) + weight / DIRECTION_BINS;
-    else addNormal(bins, from, sigma, weight);
-  }
-  const total = bins.reduce((a, b) => a + b, 0);
-  return bins.map((b) => b / total);
-}
-
-function addNormal(bins: number[], from: number, sigma: number, weight: number): void {
-  if (sigma < 1e-6) {
-    const i = Math.floor(normalizeDeg(from) / BIN_DEG) % DIRECTION_BINS;
-    bins[i] = (bins[i] ?? 0) + weight;
-    return;
-  }
-  const first = Math.floor((from - 6 * sigma) / BIN_DEG);
-  const last = Math.ceil((from + 6 * sigma) / BIN_DEG);
-  let below = tableCdf((first * BIN_DEG - from) / sigma);
-  for (let b = first; b <= last; b++) {
-    const upTo = tableCdf(((b + 1) * BIN_DEG - from) / sigma);
-    const i = ((b % DIRECTION_BINS) + DIRECTION_BINS) % DIRECTION_BINS;
-    bins[i] = (bins[i] ?? 0) + weight * (upTo - below);
-    below = upTo;
-  }
+  const bins = new Float64Array(DIRECTION_BINS);
+  return addStep(bins, set, t) ? toShares(bins) : null;
 }
 
 /** The mean of the steps' shares over the sit; null: no step has a forecast. */
 export function sitDirectionShares(set: ScenarioSet): number[] | null {
-  const steps = set.at.map((_, t) => directionShares(set, t)).filter((s): s is number[] => s !== null);
-  if (steps.length === 0) return null;
-  return Array.from(
-    { length: DIRECTION_BINS },
-    (_, i) => steps.reduce((sum, s) => sum + (s[i] ?? 0), 0) / steps.length,
-  );
+  const bins = new Float64Array(DIRECTION_BINS);
+  let some = false;
+  for (let t = 0; t < set.at.length; t++) some = addStep(bins, set, t) || some;
+  return some ? toShares(bins) : null;
+}
+
+function toShares(bins: Float64Array): number[] {
+  let total = 0;
+  for (const bin of bins) total += bin;
+  return Array.from(bins, (bin) => bin / total);
+}
+
+/** Adds one step's scenarios, all of them together a weight of 1; false where there is no forecast. */
+function addStep(bins: Float64Array, set: ScenarioSet, t: number): boolean {
+  if (!set.known[t] || set.scenarios.length === 0) return false;
+  const sigma = Math.hypot(set.scatterDeg[t] ?? 0, set.bundleDeg[t] ?? 0);
+  for (const { weight, steps } of set.scenarios) {
+    const from = steps[t]?.fromDeg ?? null;
+    if (from === null || sigma > 200) {
+      for (let i = 0; i < DIRECTION_BINS; i++) bins[i] = (bins[i] as number) + weight / DIRECTION_BINS;
+    } else addNormal(bins, from, sigma, weight);
+  }
+  return true;
+}
+
+/** Beyond this many standard deviations lies less than 1 in 10,000, left out. */
+const REACH_SIGMA = 4;
+
+function addNormal(bins: Float64Array, from: number, sigma: number, weight: number): void {
+  let i = Math.floor(normalizeDeg(from) / BIN_DEG) % DIRECTION_BINS;
+  if (sigma < 1e-6) {
+    bins[i] = (bins[i] as number) + weight;
+    return;
+  }
+  const first = Math.floor((from - REACH_SIGMA * sigma) / BIN_DEG);
+  const last = Math.ceil((from + REACH_SIGMA * sigma) / BIN_DEG);
+  i = ((first % DIRECTION_BINS) + DIRECTION_BINS) % DIRECTION_BINS;
+  let below = tableCdf((first * BIN_DEG - from) / sigma);
+  for (let b = first; b <= last; b++) {
+    const upTo = tableCdf(((b + 1) * BIN_DEG - from) / sigma);
+    bins[i] = (bins[i] as number) + weight * (upTo - below);
+    below = upTo;
+    i = i + 1 === DIRECTION_BINS ? 0 : i + 1;
+  }
 }
 
 export interface DirectionSummary {
