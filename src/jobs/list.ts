@@ -2,6 +2,9 @@ import { write } from '@/db/client';
 import { deleteOldRuns } from '@/db/queries/job-runs';
 import { deleteOldRates } from '@/db/queries/rate-limits';
 import { sendDueMail } from '@/features/mail/send-due-mail';
+import { lapseUnsigned } from '@/features/outings/lapse-unsigned';
+import { deleteOldLinks } from '@/features/outings/links-data';
+import { tellOverdue } from '@/features/outings/tell-overdue';
 import { refreshAllForecasts } from '@/features/weather/refresh-all';
 
 export interface Job {
@@ -16,7 +19,24 @@ const SECOND = 1000;
 const MINUTE = 60 * SECOND;
 const DAY = 24 * 60 * MINUTE;
 
+/** Run one after the other these go from the most urgent; what they queue is mailed in the same round. */
 export const JOBS: readonly Job[] = [
+  {
+    name: 'tell-overdue',
+    everyMs: MINUTE,
+    run: async (now) => {
+      const { told } = await tellOverdue(now);
+      return `${told} steps taken`;
+    },
+  },
+  {
+    name: 'lapse-unsigned',
+    everyMs: MINUTE,
+    run: async (now) => {
+      const { lapsed } = await lapseUnsigned(now);
+      return `${lapsed} lapsed`;
+    },
+  },
   {
     name: 'send-mail',
     everyMs: 5 * SECOND,
@@ -40,8 +60,9 @@ export const JOBS: readonly Job[] = [
       await write(async (tx) => {
         await deleteOldRates(tx, now - DAY);
         await deleteOldRuns(tx, now - 2 * DAY);
+        await deleteOldLinks(tx, now - 30 * DAY);
       });
-      return 'old counts and runs removed';
+      return 'old counts, runs and links removed';
     },
   },
 ];

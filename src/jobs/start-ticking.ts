@@ -1,23 +1,27 @@
 import { log } from '@/server/log';
-import { runDueJobs } from './run-due-jobs';
+import { JOBS, type Job } from './list';
+import { runDueJob } from './run-due-jobs';
 
 const TICK_MS = 2_000;
 const holder = globalThis as { windrestJobs?: NodeJS.Timeout };
 
-/** Looks for due jobs every two seconds in this process. Calling it twice starts one clock. */
+/** Looks every two seconds for due jobs in this process, each by itself: a slow one holds up no other. */
 export function startTicking(): void {
   if (holder.windrestJobs) return;
-  let busy = false;
-  holder.windrestJobs = setInterval(async () => {
-    if (busy) return;
-    busy = true;
+  const busy = new Set<string>();
+  const look = async (job: Job) => {
+    if (busy.has(job.name)) return;
+    busy.add(job.name);
     try {
-      await runDueJobs(Date.now());
+      await runDueJob(job, Date.now());
     } catch (error) {
-      log.error({ err: error }, 'jobs could not run');
+      log.error({ job: job.name, err: error }, 'a job could not run');
     } finally {
-      busy = false;
+      busy.delete(job.name);
     }
+  };
+  holder.windrestJobs = setInterval(() => {
+    for (const job of JOBS) void look(job);
   }, TICK_MS);
   holder.windrestJobs.unref();
 }

@@ -1,4 +1,4 @@
-import { write } from '@/db/client';
+import { type Tx, write } from '@/db/client';
 import { newId } from '@/lib/ids';
 import { audit } from '@/server/audit';
 import { AppError } from '@/server/errors';
@@ -10,56 +10,59 @@ import { queueSitMail } from './sit-mails';
 import type { BookSitInput } from './sit-schema';
 import { dayAndWindow, windowsHeld } from './sit-words';
 
-/**
- * Books a sit: rules, claims, audit row and mail in one transaction. The same request key a second time gives the sit the
- * first made.
- */
-export async function bookSit(scope: ClubScope, input: BookSitInput, now: number): Promise<SitDetail> {
+/** Books a sit inside a change of which it is a part. */
+export async function bookSitIn(tx: Tx, scope: ClubScope, input: BookSitInput, now: number): Promise<SitDetail> {
   const { memberId: forId, requestKey, ...chosen } = input;
   const memberId = forId ?? scope.member.id;
   if (memberId !== scope.member.id && !scope.can('sits.book_for_others')) {
     throw new AppError('forbidden', 'Only a club admin books for another member.');
   }
-  return write(async (tx) => {
-    const before = await findSitByRequest(scope, requestKey, tx);
-    if (before) {
-      if (before.bookedBy === scope.member.id) return before;
-      throw new AppError('conflict', 'This form was sent before by somebody else. Reload the page and try again.');
-    }
-    const checked = await checkSit(scope, tx, { ...chosen, memberId }, { now, exceptSitId: null });
-    refuseIfAny(checked.refusals);
-    const { startAt, endAt, standName, memberName } = checked;
-    const row = {
-      ...chosen,
-      id: newId('sit'),
+  const before = await findSitByRequest(scope, requestKey, tx);
+  if (before) {
+    if (before.bookedBy === scope.member.id) return before;
+    throw new AppError('conflict', 'This form was sent before by somebody else. Reload the page and try again.');
+  }
+  const checked = await checkSit(scope, tx, { ...chosen, memberId }, { now, exceptSitId: null });
+  refuseIfAny(checked.refusals);
+  const { startAt, endAt, standName, memberName } = checked;
+  const row = {
+    ...chosen,
+    id: newId('sit'),
+    clubId: scope.club.id,
+    memberId,
+    startAt,
+    endAt,
+    status: 'booked' as const,
+    requestKey,
+    bookedBy: scope.member.id,
+    createdAt: now,
+    updatedAt: now,
+  };
+  await insertSit(tx, row);
+  await claimWindows(scope, tx, row, windowsHeld(row.windows));
+  await audit(
+    tx,
+    {
       clubId: scope.club.id,
-      memberId,
-      startAt,
-      endAt,
-      status: 'booked' as const,
-      requestKey,
-      bookedBy: scope.member.id,
-      createdAt: now,
-      updatedAt: now,
-    };
-    await insertSit(tx, row);
-    await claimWindows(scope, tx, row, windowsHeld(row.windows));
-    await audit(
-      tx,
-      {
-        clubId: scope.club.id,
-        actor: scope.actor,
-        action: 'sit.booked',
-        subjectType: 'sit',
-        subjectId: row.id,
-        summary: `Booked ${standName} for ${memberName}: ${dayAndWindow(row.day, row.windows, true)}.`,
-        detail: { ...chosen, memberId, startAt, endAt },
-      },
-      now,
-    );
-    const sit = await findSit(scope, row.id, tx);
-    if (!sit) throw new AppError('internal', 'The sit could not be saved. Try again.', { log: `no row for ${row.id}` });
-    await queueSitMail(tx, scope, 'booked', sit, now);
-    return sit;
-  });
+      actor: scope.actor,
+      action: 'sit.booked',
+      subjectType: 'sit',
+      subjectId: row.id,
+      summary: `Booked ${standName} for ${memberName}: ${dayAndWindow(row.day, row.windows, true)}.`,
+      detail: { ...chosen, memberId, startAt, endAt },
+    },
+    now,
+  );
+  const sit = await findSit(scope, row.id, tx);
+  if (!sit) throw new AppError('internal', 'The sit could not be saved. Try again.', { log: `no row for ${row.id}` });
+  await queueSitMail(tx, scope, 'booked', sit, now);
+  return sit;
+}
+
+/**
+ * Books a sit: rules, claims, audit row and mail in one transaction. The same request key a second time gives the sit the
+ * first made.
+ */
+export async function bookSit(scope: ClubScope, input: BookSitInput, now: number): Promise<SitDetail> {
+  return write((tx) => bookSitIn(tx, scope, input, now));
 }

@@ -2,7 +2,7 @@ import { type Tx, write } from '@/db/client';
 import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
-import { deleteClaims, findSit, type SitDetail, updateSit } from './data';
+import { deleteClaims, findSigning, findSit, type SitDetail, updateSit } from './data';
 import { queueSitMail } from './sit-mails';
 import type { CancelSitInput } from './sit-schema';
 import { clockText, dayAndWindow } from './sit-words';
@@ -42,6 +42,14 @@ export async function cancelSitIn(
   return after;
 }
 
+/** A sit that somebody has signed in for has happened: it keeps its rest and its place on record. */
+export async function refuseIfSigned(scope: ClubScope, sit: SitDetail, tx: Tx): Promise<void> {
+  const signing = await findSigning(scope, sit.id, tx);
+  if (signing === 'none') return;
+  const how = signing === 'in' ? 'is signed in there: sign out on the board' : 'has sat there: it stays on record';
+  throw new AppError('conflict', `${sit.memberName} ${how}.`);
+}
+
 /** One's own, or with the permission anybody's and then with a reason. Cancelling twice changes nothing. */
 export async function cancelSit(scope: ClubScope, input: CancelSitInput, now: number): Promise<SitDetail> {
   return write(async (tx) => {
@@ -55,6 +63,7 @@ export async function cancelSit(scope: ClubScope, input: CancelSitInput, now: nu
     if (sit.endAt <= now) {
       throw new AppError('conflict', `This sit ended at ${clockText(sit.endAt, scope.club)}: it stays on record.`);
     }
+    await refuseIfSigned(scope, sit, tx);
     if (!own && input.reason === '') {
       const message = `Say why: ${sit.memberName} is told the reason.`;
       throw new AppError('invalid', message, { fields: { reason: message } });

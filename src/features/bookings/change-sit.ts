@@ -3,6 +3,7 @@ import { write } from '@/db/client';
 import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
+import { refuseIfSigned } from './cancel-sit';
 import { checkSit, refuseIfAny } from './check-sit';
 import { claimWindows } from './claim-windows';
 import { deleteClaims, findSit, type SitDetail, updateSit } from './data';
@@ -40,6 +41,7 @@ export async function changeSit(scope: ClubScope, input: ChangeSitInput, now: nu
     const changed = [...HELD, ...WORDS].filter((name) => !isDeepStrictEqual(sit[name], chosen[name]));
     if (changed.length === 0) return sit;
     const moved = HELD.some((name) => changed.includes(name));
+    if (moved) await refuseIfSigned(scope, sit, tx);
     const checked = await checkSit(scope, tx, { ...chosen, memberId: sit.memberId }, { now, exceptSitId: sit.id });
     const asksAnew = moved || changed.includes('weapon');
     const guests = changed.includes('guests');

@@ -1,7 +1,7 @@
 import { and, asc, desc, eq, gt, gte, inArray, lte, ne, or } from 'drizzle-orm';
 import type { WindowName } from '@/core/types';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
-import { approaches, claims, memberships, parkings, sits, stands, users } from '@/db/schema';
+import { approaches, claims, memberships, outings, parkings, sits, stands, users } from '@/db/schema';
 import { newId } from '@/lib/ids';
 import type { ClubScope } from '@/server/scope';
 
@@ -121,6 +121,16 @@ export async function listSitsSince(
     )
     .orderBy(asc(sits.startAt), asc(sits.id));
   return rows.map(flat);
+}
+
+/** Whether somebody has signed in for the sit, and whether they are still signed in. */
+export async function findSigning(scope: ClubScope, sitId: string, from: ReadFrom): Promise<'none' | 'in' | 'out'> {
+  const rows = await from
+    .select({ signedOutAt: outings.signedOutAt })
+    .from(outings)
+    .where(and(eq(outings.clubId, scope.club.id), eq(outings.sitId, sitId)));
+  if (rows.length === 0) return 'none';
+  return rows.some((row) => row.signedOutAt === null) ? 'in' : 'out';
 }
 
 export async function insertSit(tx: Tx, row: NewSit): Promise<void> {

@@ -1,0 +1,51 @@
+import { z } from 'zod';
+import { isClock } from '@/core/day-time';
+import { WEAPONS } from '@/core/types';
+
+const id = z.string().trim().min(1, 'Choose one.').max(60, 'Choose one of the list.');
+const optionalId = z
+  .string()
+  .trim()
+  .max(60, 'Choose one of the list.')
+  .nullish()
+  .transform((value) => value || null);
+
+const onTheGround = {
+  approachId: optionalId,
+  parkingId: optionalId,
+  vehicle: z.string().trim().max(80, 'Use at most 80 characters: colour, make, plate.').default(''),
+  /** A time of the club's clock: the next time it comes. */
+  backBy: z.string().trim().refine(isClock, 'Give a time.'),
+  contactOff: z.boolean().default(false),
+};
+
+export const signInSitSchema = z.object({ sitId: id, ...onTheGround });
+export type SignInSitInput = z.output<typeof signInSitSchema>;
+export type SignInSitValues = z.input<typeof signInSitSchema>;
+
+export const walkUpSchema = z.object({
+  standId: id,
+  weapon: z.enum(WEAPONS, { error: 'Choose a weapon.' }),
+  /** One for each form opened, so that a second press cannot book twice. */
+  requestKey: z.guid('Reload the page and try again.'),
+  ...onTheGround,
+});
+export type WalkUpInput = z.output<typeof walkUpSchema>;
+export type WalkUpValues = z.input<typeof walkUpSchema>;
+
+export const signOutSitSchema = z.object({ outingId: id });
+export type SignOutSitInput = z.output<typeof signOutSitSchema>;
+
+/** Minutes by which a back-by time may be moved at once. */
+export const MOVE_CHOICES = ['30', '60', '120', '240'] as const;
+
+export const moveBackBySchema = z.object({
+  outingId: id,
+  minutes: z.enum(MOVE_CHOICES, { error: 'Choose how much later.' }),
+  tracking: z.boolean().default(false),
+});
+export type MoveBackByInput = z.output<typeof moveBackBySchema>;
+export type MoveBackByValues = z.input<typeof moveBackBySchema>;
+
+export const sitLinkSchema = z.object({ outingId: id });
+export type SitLinkInput = z.output<typeof sitLinkSchema>;
