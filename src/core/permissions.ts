@@ -26,7 +26,12 @@ export const PERMISSIONS = [
   'mail.read',
   'log.read',
   'log.write',
+  'log.read_all',
+  'log.write_any',
   'visits.write',
+  'harvest.read',
+  'harvest.write',
+  'harvest.write_any',
   'jobs.read',
 ] as const;
 export type Permission = (typeof PERMISSIONS)[number];
@@ -41,6 +46,9 @@ const MEMBER = [
   'feeds.own',
   'log.read',
   'log.write',
+  'visits.write',
+  'harvest.read',
+  'harvest.write',
 ] as const satisfies readonly Permission[];
 
 export const PERMISSIONS_BY_ROLE: Record<Role, readonly Permission[]> = {
@@ -53,12 +61,14 @@ export const PERMISSIONS_BY_ROLE: Record<Role, readonly Permission[]> = {
     'approaches.write',
     'closed_days.write',
     'board.sign_for_others',
-    'visits.write',
+    'log.read_all',
+    'log.write_any',
+    'harvest.write_any',
     'feeds.club',
   ],
   member: MEMBER,
   /** Books only inside the dates of the invitation (access-window.ts) and never sees where features lie. */
-  guest: ['club.read', 'sits.read', 'sits.book', 'board.read'],
+  guest: ['club.read', 'sits.read', 'sits.book', 'board.read', 'log.write'],
   landowner: ['club.read', 'board.read', 'closed_days.write'],
 };
 

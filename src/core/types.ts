@@ -253,7 +253,16 @@ export interface ApproachOption {
 }
 
 export interface Caution {
-  code: 'wind_raised' | 'wind_stay_down' | 'thunder' | 'cold' | 'harness' | 'orange' | 'no_forecast' | 'stale_forecast';
+  code:
+    | 'wind_raised'
+    | 'wind_stay_down'
+    | 'thunder'
+    | 'cold'
+    | 'harness'
+    | 'orange'
+    | 'no_forecast'
+    | 'stale_forecast'
+    | 'quota_met';
   text: string;
   level: 'note' | 'caution' | 'stop';
 }

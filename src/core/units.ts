@@ -9,6 +9,8 @@ const M_PER_MI = 1609.344;
 const MPS_PER_MPH = M_PER_MI / 3600;
 const MPS_PER_KT = 1852 / 3600;
 const MM_PER_IN = 25.4;
+/** Avoirdupois pound, exact (International Yard and Pound, 1959). */
+const KG_PER_LB = 0.45359237;
 const M2_PER_ACRE = 43560 * M_PER_FT * M_PER_FT;
 /** Conventional inch of mercury at 0 degrees C (NIST SP 811, appendix B). */
 const HPA_PER_INHG = 33.86389;
@@ -29,6 +31,8 @@ export const fToC = (f: number): number => ((f - 32) * 5) / 9;
 export const cToF = (c: number): number => (c * 9) / 5 + 32;
 export const inToMm = (inches: number): number => inches * MM_PER_IN;
 export const mmToIn = (mm: number): number => mm / MM_PER_IN;
+export const lbToKg = (lb: number): number => lb * KG_PER_LB;
+export const kgToLb = (kg: number): number => kg / KG_PER_LB;
 export const inHgToHpa = (inHg: number): number => inHg * HPA_PER_INHG;
 export const hPaToInHg = (hPa: number): number => hPa / HPA_PER_INHG;
 export const acreToM2 = (acre: number): number => acre * M2_PER_ACRE;
@@ -59,6 +63,11 @@ export function formatSpeed(mps: number, units: Units): string {
 /** Degrees C for people: whole degrees F or C. */
 export function formatTemp(c: number, units: Units): string {
   return units === 'us' ? `${whole(cToF(c))} °F` : `${whole(c)} °C`;
+}
+
+/** Kilograms for people: whole pounds, or kilograms to a tenth. */
+export function formatWeight(kg: number, units: Units): string {
+  return units === 'us' ? `${whole(kgToLb(kg))} lb` : `${kg.toFixed(1)} kg`;
 }
 
 /** Square metres for people: acres or hectares to a tenth. */

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { isClock, isDay } from '../day-time';
+import { QUOTA_DEER, QUOTA_PER } from '../harvest/harvest-types';
 import { WEAPONS } from '../types';
 import { CALENDAR_PRIVACY, type ClubRules, SIGHTINGS_SEEN_BY } from './rules';
 
@@ -62,6 +63,18 @@ export const orangeRuleSchema = z.object({
   statedOn: day,
 });
 
+export const harvestQuotaSchema = z.object({
+  deer: z.enum(QUOTA_DEER),
+  per: z.enum(QUOTA_PER),
+  most: whole('Deer', 0, 1000),
+});
+
+export const stateHarvestRuleSchema = z.object({
+  text: text('The rule', 2000),
+  source: text('Where the rule is written', 300),
+  statedOn: day,
+});
+
 export const overdueStepsSchema = z
   .object({
     memberMinutes: whole('Minutes until the member is told', 0, 720),
@@ -115,6 +128,14 @@ export const clubRulesSchema = z
     calendarPrivacy: z.enum(CALENDAR_PRIVACY),
     walkUpSits: z.boolean(),
     orangeRule: orangeRuleSchema.nullable(),
+    harvestQuotas: z
+      .array(harvestQuotaSchema)
+      .max(20)
+      .refine(
+        (quotas) => noTwice(quotas.map(({ deer, per }) => `${deer} ${per}`)),
+        'Two quotas are for the same deer and the same people.',
+      ),
+    stateHarvestRule: stateHarvestRuleSchema.nullable(),
   })
   .superRefine((rules, ctx) => {
     const names = rules.legalLight.map((r) => r.name);

@@ -1,3 +1,4 @@
+import type { HarvestQuota } from '../harvest/harvest-types';
 import { WEAPONS, type Weapon } from '../types';
 import { ydToM } from '../units';
 
@@ -49,6 +50,9 @@ export interface OrangeRule {
   statedOn: string;
 }
 
+/** What the state allows of deer, in the club's own words. */
+export type StateHarvestRule = OrangeRule;
+
 /** Minutes after a person counts as overdue at which each is told. */
 export interface OverdueSteps {
   memberMinutes: number;
@@ -84,6 +88,9 @@ export interface ClubRules {
   /** A member at the gate may take a free stand whose window has begun. */
   walkUpSits: boolean;
   orangeRule: OrangeRule | null;
+  /** Most deer a season, 1 July to 30 June. They caution and never refuse. */
+  harvestQuotas: HarvestQuota[];
+  stateHarvestRule: StateHarvestRule | null;
 }
 
 /** 300 yd is the spacing found most often in clubs' posted rules, whatever the weapon (practice). */
@@ -119,6 +126,8 @@ export const DEFAULT_CLUB_RULES: ClubRules = {
   calendarPrivacy: 'names_and_stands',
   walkUpSits: true,
   orangeRule: null,
+  harvestQuotas: [],
+  stateHarvestRule: null,
 };
 
 /** Rules as they were saved, with the default of each that came later. */

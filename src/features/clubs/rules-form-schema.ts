@@ -1,16 +1,11 @@
 import { z } from 'zod';
-import {
-  CALENDAR_PRIVACY,
-  type ClaimAhead,
-  type ClubRules,
-  type OrangeRule,
-  SIGHTINGS_SEEN_BY,
-} from '@/core/booking/rules';
+import { CALENDAR_PRIVACY, type ClaimAhead, type ClubRules, SIGHTINGS_SEEN_BY } from '@/core/booking/rules';
 import { clubRulesSchema } from '@/core/booking/rules-schema';
-import { isClock, isDay } from '@/core/day-time';
+import { isClock } from '@/core/day-time';
 import { WEAPONS, type Weapon } from '@/core/types';
 import { type Units, ydToM } from '@/core/units';
 import { formReader, type TextReader } from './read-number';
+import { harvestRuleFields, readHarvestRules, readStated } from './rules-harvest-form';
 
 const line = z.string().max(600, 'Keep it to 600 characters.');
 const fromSunFields = z.object({ minutes: line, side: z.enum(['before', 'after']) });
@@ -59,6 +54,7 @@ export const rulesFormSchema = z.object({
   orangeText: line,
   orangeSource: line,
   orangeStatedOn: line,
+  ...harvestRuleFields,
 });
 export type RulesForm = z.output<typeof rulesFormSchema>;
 
@@ -103,20 +99,6 @@ function readLegalLight(form: TextReader, typed: RulesForm): ClubRules['legalLig
     source: rule.source.trim(),
     statedOn: rule.statedOn.trim(),
   }));
-}
-
-/** All three, or none: a rule without its source and day is no record. */
-function readOrange(form: TextReader, typed: RulesForm): OrangeRule | null {
-  const text = typed.orangeText.trim();
-  const source = typed.orangeSource.trim();
-  const statedOn = typed.orangeStatedOn.trim();
-  if (text === '' && source === '' && statedOn === '') return null;
-  if (text === '') form.fail(['orangeText'], 'Write the rule, or clear its source and day.');
-  if (text.length > 500) form.fail(['orangeText'], 'Keep the rule to 500 characters.');
-  if (source === '') form.fail(['orangeSource'], 'Say where the rule is written.');
-  if (source.length > 300) form.fail(['orangeSource'], 'Keep the source to 300 characters.');
-  if (!isDay(statedOn)) form.fail(['orangeStatedOn'], 'Choose the day on which it was stated.');
-  return { text, source, statedOn };
 }
 
 function readSpacing(form: TextReader, typed: RulesForm, units: Units): ClubRules['spacingM'] {
@@ -173,12 +155,18 @@ function readRules(form: TextReader, typed: RulesForm, units: Units): ClubRules 
     sightingsSeenBy: typed.sightingsSeenBy,
     calendarPrivacy: typed.calendarPrivacy,
     walkUpSits: typed.walkUpSits,
-    orangeRule: readOrange(form, typed),
+    orangeRule: readStated(
+      form,
+      { text: typed.orangeText, source: typed.orangeSource, statedOn: typed.orangeStatedOn },
+      { text: 'orangeText', source: 'orangeSource', statedOn: 'orangeStatedOn' },
+      500,
+    ),
+    ...readHarvestRules(form, typed),
   };
 }
 
 /** These stand in form and store under the same names, so the stored schema's own findings fall beside their fields. */
-const SAME_NAMES = ['legalLight', 'seasons'];
+const SAME_NAMES = ['legalLight', 'seasons', 'harvestQuotas'];
 
 /** From the form in the club's units to the rules as they are stored, in metres. */
 export function makeRulesSchema(units: Units) {

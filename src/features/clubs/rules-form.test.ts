@@ -34,6 +34,15 @@ const FULL: ClubRules = {
   guestDaysPerSeason: null,
   walkUpSits: false,
   orangeRule: { text: '500 square inches above the waist', source: 'State digest, p. 14', statedOn: '2026-08-01' },
+  harvestQuotas: [
+    { deer: 'antlered', per: 'member', most: 1 },
+    { deer: 'any', per: 'club', most: 0 },
+  ],
+  stateHarvestRule: {
+    text: 'Two deer a licence year.\nReport within 24 hours.',
+    source: 'Digest',
+    statedOn: '2026-08-01',
+  },
 };
 
 const read = (form: RulesForm, units: 'us' | 'metric' = 'us') => makeRulesSchema(units).safeParse(form);
@@ -41,6 +50,23 @@ const problems = (change: Partial<RulesForm>, rules = DEFAULT_CLUB_RULES) => {
   const parsed = read({ ...rulesToForm(rules, 'us', 1), ...change });
   return parsed.success ? [] : parsed.error.issues.map((issue) => `${issue.path.join('.')}: ${issue.message}`);
 };
+
+describe('harvest rules of the form', () => {
+  const quota = { deer: 'any' as const, per: 'club' as const, most: '2' };
+
+  it('need a count, and one quota for the same deer and people', () => {
+    expect(problems({ harvestQuotas: [{ ...quota, most: '' }] })).toEqual(['harvestQuotas.0.most: Deer is needed.']);
+    expect(problems({ harvestQuotas: [{ ...quota, most: '1.5' }] })[0]).toContain('whole number from 0 to 1000');
+    expect(problems({ harvestQuotas: [quota, quota] })[0]).toContain('same deer and the same people');
+  });
+
+  it('take the state rule whole or not at all', () => {
+    expect(problems({ stateRuleText: 'Two deer.' }).map((p) => p.split(':')[0])).toEqual([
+      'stateRuleSource',
+      'stateRuleStatedOn',
+    ]);
+  });
+});
 
 describe('the rules form', () => {
   it.each([

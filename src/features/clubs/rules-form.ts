@@ -3,6 +3,7 @@ import { WEAPONS, type Weapon } from '@/core/types';
 import { mToYd, type Units } from '@/core/units';
 import { numberText } from './read-number';
 import type { RulesForm } from './rules-form-schema';
+import { harvestRulesToForm } from './rules-harvest-form';
 
 /** A distance as typed: yards or metres, to a hundredth. */
 export function distanceText(m: number, units: Units): string {
@@ -60,5 +61,6 @@ export function rulesToForm(rules: ClubRules, units: Units, version: number): Ru
     orangeText: orangeRule?.text ?? '',
     orangeSource: orangeRule?.source ?? '',
     orangeStatedOn: orangeRule?.statedOn ?? '',
+    ...harvestRulesToForm(rules),
   };
 }

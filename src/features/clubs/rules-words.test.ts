@@ -62,6 +62,8 @@ describe('rules in words', () => {
       { sightingsSeenBy: 'officers' },
       { calendarPrivacy: 'busy_only' },
       { walkUpSits: false },
+      { harvestQuotas: [{ deer: 'antlered', per: 'member', most: 1 }] },
+      { stateHarvestRule: { text: 'Two deer.', source: 'Digest', statedOn: '2026-08-01' } },
       { orangeRule: { text: 'Orange in gun season.', source: 'Digest', statedOn: '2026-08-01' } },
       { seasons: [{ id: 'a', name: 'Archery', weapons: ['bow'], fromDay: '2026-09-12', toDay: '2026-12-31' }] },
       {

@@ -1,6 +1,7 @@
 import type { CalendarPrivacy, ClubRules, SightingsSeenBy } from '@/core/booking/rules';
 import { weaponWord } from '@/core/booking/seasons';
 import { formatDay } from '@/core/day-time';
+import { quotaText } from '@/core/harvest/quotas';
 import { WEAPONS } from '@/core/types';
 import { mToYd, type Units } from '@/core/units';
 import type { RuleLine } from './place-words';
@@ -158,6 +159,18 @@ function shareLines({ sightingsSeenBy, calendarPrivacy, orangeRule }: ClubRules)
   ];
 }
 
+function harvestLines({ harvestQuotas, stateHarvestRule }: ClubRules): RuleLine[] {
+  const quotas = harvestQuotas.map((quota) => ({ label: 'Quota', text: `${quotaText(quota)}, a season` }));
+  return [
+    ...(quotas.length === 0 ? [{ label: 'Quota', text: 'None is set' }] : quotas),
+    {
+      label: "The state's rules for deer",
+      text:
+        stateHarvestRule === null ? 'None are written down.' : `${stateHarvestRule.text} ${stated(stateHarvestRule)}`,
+    },
+  ];
+}
+
 /** All rules of a club in words, in the club's units, in the order of the form. */
 export function describeRules(rules: ClubRules, units: Units): RuleGroup[] {
   return [
@@ -168,6 +181,7 @@ export function describeRules(rules: ClubRules, units: Units): RuleGroup[] {
     { title: 'Rest, limits and guests', lines: limitLines(rules) },
     { title: 'Distances', lines: distanceLines(rules, units) },
     { title: 'Who sees what, and orange', lines: shareLines(rules) },
+    { title: 'Harvest', lines: harvestLines(rules) },
   ];
 }
 

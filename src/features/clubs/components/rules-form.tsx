@@ -13,6 +13,7 @@ import { makeRulesSchema, type RulesForm as RulesValues } from '../rules-form-sc
 import type { SavedClub } from '../save-club';
 import { RulesBooking } from './rules-booking';
 import { RulesDistances } from './rules-distances';
+import { RulesHarvest } from './rules-harvest';
 import { RulesHours } from './rules-hours';
 import { RulesLegalLight } from './rules-legal-light';
 import { RulesSeasons } from './rules-seasons';
@@ -60,6 +61,7 @@ export function RulesForm({ club, units, rules, action }: Props) {
         <RulesBooking />
         <RulesDistances units={units} />
         <RulesSharing />
+        <RulesHarvest />
         <SubmitRow label="Save the rules" pending={pending} pendingLabel="Saving…" className="mt-8">
           <ButtonLink href={page} look="quiet">
             Back without saving

@@ -7,7 +7,16 @@ import { DateInput, Textarea, TextInput } from '@/ui/text-inputs';
 import { PRIVACY_WORDS, SIGHTINGS_WORDS } from '../rules-words';
 import { useRulesFields } from './use-rules-fields';
 
-const SIGHTINGS = SIGHTINGS_SEEN_BY.map((value) => ({ value, label: SIGHTINGS_WORDS[value] }));
+const SIGHTINGS_NOTES: Record<(typeof SIGHTINGS_SEEN_BY)[number], string> = {
+  all: 'Counts stand in the tables as soon as they are written.',
+  officers: 'A member sees their own.',
+  after_season: 'Until the last season of the year is over each sees their own; officers see only that a log exists.',
+};
+const SIGHTINGS = SIGHTINGS_SEEN_BY.map((value) => ({
+  value,
+  label: SIGHTINGS_WORDS[value],
+  note: SIGHTINGS_NOTES[value],
+}));
 const PRIVACY = CALENDAR_PRIVACY.map((value) => ({ value, label: PRIVACY_WORDS[value] }));
 
 export function RulesSharing() {
