@@ -27,6 +27,11 @@ const url = (protocols: string[]) =>
     }
   });
 
+const tiles = url(['http:', 'https:']).superRefine((text, ctx) => {
+  if (text === undefined || ['{z}', '{x}', '{y}'].every((part) => text.includes(part))) return;
+  ctx.addIssue({ code: 'custom', message: `is "${text}"; write an address that holds {z}, {x} and {y}` });
+});
+
 export const environmentSchema = z.object({
   NODE_ENV: optional,
   PORT: optional.transform((text, ctx) => {
@@ -49,6 +54,8 @@ export const environmentSchema = z.object({
   WEATHER_API_KEY: optional,
   SMTP_URL: url(['smtp:', 'smtps:']),
   MAIL_FROM: optional,
+  IMAGERY_URL: tiles,
+  IMAGERY_ATTRIBUTION: optional,
   DEV_PAGES: flag(false),
   RUN_JOBS: flag(true),
   LOG_LEVEL: optional,
@@ -77,6 +84,8 @@ export function readEnvironment(source: Record<string, string | undefined>) {
     /** None: the fake keeps every message in the database. */
     smtpUrl: set.SMTP_URL,
     mailFrom: set.MAIL_FROM ?? 'Windrest <windrest@localhost>',
+    /** Tiles under the map; none: the map is drawn from the club's own data alone. */
+    imagery: set.IMAGERY_URL ? { url: set.IMAGERY_URL, attribution: set.IMAGERY_ATTRIBUTION ?? '' } : null,
     /** Pages under /dev: the kept mail and the parts of the look. */
     devPages: set.DEV_PAGES || !production,
     runJobs: set.RUN_JOBS,

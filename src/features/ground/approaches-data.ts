@@ -50,7 +50,7 @@ export async function updateApproach(
   scope: ClubScope,
   tx: Tx,
   at: { id: string; version: number },
-  set: Partial<ApproachValues & { removedAt: number }>,
+  set: Partial<ApproachValues & { standId: string; removedAt: number }>,
 ): Promise<ApproachRow | null> {
   const [row] = await tx
     .update(approaches)

@@ -9,6 +9,8 @@ import { featureFormSchema, makeFeatureSchema } from '@/features/ground/feature-
 import { makeParkingSchema, parkingFormSchema } from '@/features/ground/parking-schema';
 import { removeFeature } from '@/features/ground/remove-feature';
 import { removeParking } from '@/features/ground/remove-parking';
+import { drawingInput } from '@/features/map/drawing-schema';
+import { saveDrawing } from '@/features/map/save-drawing';
 import { clubAction } from '@/server/doors';
 
 export const addFeatureAction = clubAction({
@@ -45,4 +47,10 @@ export const removeParkingAction = clubAction({
   permission: 'features.write',
   input: atVersion,
   run: ({ scope, input, now }) => removeParking(scope, input, now),
+});
+
+export const saveDrawingAction = clubAction({
+  permission: 'features.write',
+  input: drawingInput,
+  run: ({ scope, input, now }) => saveDrawing(scope, input, now),
 });

@@ -1,0 +1,45 @@
+import { updateApproach, updateFeature, updateMapItem } from '@/features/ground/data';
+import { noteChange } from '@/features/ground/note-change';
+import { removeParkingIn } from '@/features/ground/remove-parking';
+import { removeStandIn } from '@/features/ground/remove-stand';
+import type { DrawingChange } from './drawing-schema';
+import type { Saving } from './set-drawn';
+import { LAYER_WORDS } from './words';
+
+/** Takes a thing off the map. What is gone already stays gone. */
+export async function removeDrawn(saving: Saving, change: Extract<DrawingChange, { op: 'remove' }>): Promise<void> {
+  const { scope, tx, rows, now } = saving;
+  const { id, version } = change;
+  const at = { id, version };
+  switch (change.kind) {
+    case 'stand':
+      if (rows.stands.some((row) => row.id === id)) await removeStandIn(scope, tx, at, now);
+      return;
+    case 'parking':
+      if (rows.parkings.some((row) => row.id === id)) await removeParkingIn(scope, tx, at, now);
+      return;
+    case 'approach': {
+      const row = await updateApproach(scope, tx, at, { removedAt: now });
+      if (!row) return;
+      const stand = rows.stands.find((one) => one.id === row.standId)?.name;
+      const summary = `Removed approach ${row.name}${stand ? ` to ${stand}` : ''}.`;
+      return noteChange(scope, tx, { subject: 'approach', verb: 'removed', id, summary }, now);
+    }
+    case 'feature': {
+      const row = await updateFeature(scope, tx, at, { removedAt: now });
+      if (!row) return;
+      return noteChange(
+        scope,
+        tx,
+        { subject: 'feature', verb: 'removed', id, summary: `Removed feature ${row.name}.` },
+        now,
+      );
+    }
+    case 'item': {
+      const row = await updateMapItem(scope, tx, at, { removedAt: now });
+      if (!row) return;
+      const summary = `Removed ${LAYER_WORDS[row.layer].toLowerCase()}${row.name ? ` ${row.name}` : ''} from the map.`;
+      return noteChange(scope, tx, { subject: 'map_item', verb: 'removed', id, summary }, now);
+    }
+  }
+}
