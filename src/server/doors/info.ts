@@ -1,10 +1,13 @@
+import type { z } from 'zod';
 import type { Permission } from '@/core/permissions';
 
-/** Who may come through a door; the access matrix test reads it. */
+/** Who may come through a door and what it takes; the tests that walk all doors read it. */
 export interface DoorInfo {
   kind: 'page' | 'action' | 'route';
   who: 'anyone' | 'account' | 'club';
   permission: Permission | null;
+  /** Shape of the body or the query; null for a page. */
+  takes: z.ZodType | null;
 }
 
 export interface Door {

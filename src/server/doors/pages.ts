@@ -48,15 +48,15 @@ export function clubPage(
   render: (ctx: { scope: ClubScope; user: CurrentUser } & Asked) => Promise<ReactNode>,
 ) {
   const page = (props: PageProps) => open(props, ({ params }) => requireScope(params.club, permission), render);
-  return withInfo(page, { kind: 'page', who: 'club', permission });
+  return withInfo(page, { kind: 'page', who: 'club', permission, takes: null });
 }
 
 export function accountPage(render: (ctx: { user: CurrentUser } & Asked) => Promise<ReactNode>) {
   const page = (props: PageProps) => open(props, async () => ({ user: await requireUser() }), render);
-  return withInfo(page, { kind: 'page', who: 'account', permission: null });
+  return withInfo(page, { kind: 'page', who: 'account', permission: null, takes: null });
 }
 
 export function publicPage(render: (ctx: { user: CurrentUser | null } & Asked) => Promise<ReactNode>) {
   const page = (props: PageProps) => open(props, async () => ({ user: await currentUser() }), render);
-  return withInfo(page, { kind: 'page', who: 'anyone', permission: null });
+  return withInfo(page, { kind: 'page', who: 'anyone', permission: null, takes: null });
 }

@@ -8,6 +8,7 @@ import type { ClubScope } from '../scope';
 import { type CurrentUser, currentUser } from '../session';
 import { requireScope, requireUser } from './enter';
 import { type Params, withInfo } from './info';
+import { plainIssue } from './plain-issue';
 
 interface Context {
   params: Promise<Params>;
@@ -32,7 +33,7 @@ async function answer<C, S extends z.ZodType>(
   try {
     const params = await context.params;
     const entered = await enter(params);
-    const query = route.query.parse(Object.fromEntries(url.searchParams));
+    const query = route.query.parse(Object.fromEntries(url.searchParams), { error: plainIssue });
     const result = await route.run({ ...entered, query, params, request, now: now() });
     return result instanceof Response ? result : Response.json(result, { headers: PRIVATE });
   } catch (error) {
@@ -48,17 +49,17 @@ export function clubRoute<S extends z.ZodType>(
 ) {
   const handle = (request: Request, context: Context) =>
     answer(route, (params) => requireScope(params.club, permission), request, context);
-  return withInfo(handle, { kind: 'route', who: 'club', permission });
+  return withInfo(handle, { kind: 'route', who: 'club', permission, takes: route.query });
 }
 
 export function accountRoute<S extends z.ZodType>(route: Route<{ user: CurrentUser }, S>) {
   const handle = (request: Request, context: Context) =>
     answer(route, async () => ({ user: await requireUser() }), request, context);
-  return withInfo(handle, { kind: 'route', who: 'account', permission: null });
+  return withInfo(handle, { kind: 'route', who: 'account', permission: null, takes: route.query });
 }
 
 export function publicRoute<S extends z.ZodType>(route: Route<{ user: CurrentUser | null }, S>) {
   const handle = (request: Request, context: Context) =>
     answer(route, async () => ({ user: await currentUser() }), request, context);
-  return withInfo(handle, { kind: 'route', who: 'anyone', permission: null });
+  return withInfo(handle, { kind: 'route', who: 'anyone', permission: null, takes: route.query });
 }
