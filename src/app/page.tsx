@@ -12,7 +12,7 @@ export default publicPage(async ({ user }) => {
     redirect(clubs.length === 1 ? `/clubs/${clubs[0]?.slug}` : '/clubs');
   }
   return (
-    <PlainFrame width="page" links={<ButtonLink href="/sign-in">Sign in</ButtonLink>}>
+    <PlainFrame width="page">
       <PageTitle
         title="Sit where the deer never know"
         lead="Windrest is for deer-hunting clubs, leases and family land. Each day it tells each member where a sit alerts no deer, and who else is in the woods."
