@@ -27,6 +27,8 @@ const FEATURES = [
   'weather',
   'bookings',
   'outings',
+  'logs',
+  'harvest',
   'sits',
   'moment',
   'board',

@@ -1,6 +1,7 @@
 import { write } from '@/db/client';
 import { deleteOldRuns } from '@/db/queries/job-runs';
 import { deleteOldRates } from '@/db/queries/rate-limits';
+import { remindLogs } from '@/features/logs/remind-logs';
 import { sendDueMail } from '@/features/mail/send-due-mail';
 import { lapseUnsigned } from '@/features/outings/lapse-unsigned';
 import { deleteOldLinks } from '@/features/outings/links-data';
@@ -35,6 +36,14 @@ export const JOBS: readonly Job[] = [
     run: async (now) => {
       const { lapsed } = await lapseUnsigned(now);
       return `${lapsed} lapsed`;
+    },
+  },
+  {
+    name: 'remind-logs',
+    everyMs: 60 * MINUTE,
+    run: async (now) => {
+      const { reminded } = await remindLogs(now);
+      return `${reminded} reminded`;
     },
   },
   {

@@ -5,6 +5,7 @@ import {
   CalendarX,
   ClipboardList,
   Map as MapSign,
+  NotebookPen,
   TreePine,
   Users,
 } from 'lucide-react';
@@ -23,6 +24,7 @@ const SCREENS: Screen[] = [
   { path: 'sit', label: 'Sit', icon: <Armchair />, needs: 'sits.read' },
   { path: 'board', label: 'Board', icon: <ClipboardList />, needs: 'board.read' },
   { path: 'my-sits', label: 'My sits', icon: <CalendarCheck />, needs: 'sits.book' },
+  { path: 'log', label: 'Log', icon: <NotebookPen />, needs: 'log.write' },
   { path: 'stands', label: 'Stands', icon: <TreePine />, needs: 'stands.read' },
   { path: 'ground', label: 'Ground', icon: <MapSign />, needs: 'features.read' },
   { path: 'closures', label: 'Closed days', icon: <CalendarX />, needs: 'closed_days.write' },

@@ -1,4 +1,4 @@
-import { and, desc, eq, isNotNull, isNull } from 'drizzle-orm';
+import { and, desc, eq, inArray, isNotNull, isNull } from 'drizzle-orm';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
 import { keptMail, outbox } from '@/db/schema';
 import type { ClubScope } from '@/server/scope';
@@ -16,6 +16,13 @@ export async function settleLeased(tx: Tx, id: string, leaseUntil: number, set: 
 
 export async function insertKept(tx: Tx, row: typeof keptMail.$inferInsert): Promise<void> {
   await tx.insert(keptMail).values(row);
+}
+
+/** Those of some dedupe keys that were queued before. */
+export async function hasMail(keys: string[], from: ReadFrom = reader()): Promise<Set<string>> {
+  if (keys.length === 0) return new Set();
+  const rows = await from.select({ key: outbox.dedupeKey }).from(outbox).where(inArray(outbox.dedupeKey, keys));
+  return new Set(rows.map((row) => row.key));
 }
 
 /** Without the words: they may hold secret links. */

@@ -13,10 +13,12 @@ describe('maySeeSightings', () => {
     expect(maySeeSightings('landowner', rules('all'), '2026-11-07')).toBe(false);
   });
 
-  it('is for officers under any rule, and for members as the rule says', () => {
-    for (const rule of ['all', 'officers', 'after_season'] as const) {
+  it('is for officers and members as the rule says', () => {
+    for (const rule of ['all', 'officers'] as const) {
       expect(maySeeSightings('steward', rules(rule), '2026-11-07')).toBe(true);
     }
+    expect(maySeeSightings('admin', rules('after_season'), '2026-11-07')).toBe(false);
+    expect(maySeeSightings('admin', rules('after_season'), '2026-12-01')).toBe(true);
     expect(maySeeSightings('member', rules('all'), '2026-11-07')).toBe(true);
     expect(maySeeSightings('member', rules('officers'), '2027-05-01')).toBe(false);
   });
@@ -27,5 +29,10 @@ describe('maySeeSightings', () => {
     expect(maySeeSightings('member', rules('after_season', [season, late]), '2027-01-09')).toBe(false);
     expect(maySeeSightings('member', rules('after_season', [season, late]), '2027-01-10')).toBe(true);
     expect(maySeeSightings('member', rules('after_season', []), '2027-01-10')).toBe(false);
+  });
+
+  it('has opened years gone by, whatever dates stand in the rules now', () => {
+    expect(maySeeSightings('member', rules('after_season', []), '2026-11-07', '2025-11-07')).toBe(true);
+    expect(maySeeSightings('member', rules('officers'), '2026-11-07', '2025-11-07')).toBe(false);
   });
 });

@@ -1,0 +1,53 @@
+import { LogFormView } from '@/features/logs/components/log-form';
+import { LogHistory } from '@/features/logs/components/log-history';
+import { readLog } from '@/features/logs/reads';
+import { now } from '@/server/clock';
+import { clubPage } from '@/server/doors';
+import { ButtonLink } from '@/ui/button';
+import { PageTitle, Section } from '@/ui/page-parts';
+import { saveLogAction } from '../actions';
+
+export const metadata = { title: 'Log of a sit' };
+
+export default clubPage('log.write', async ({ scope, params }) => {
+  const { slug } = scope.club;
+  const log = await readLog(scope, params.sit ?? '', now());
+  const lines = [...(log.written ? [log.written] : []), ...log.history];
+  const past = lines.length > 0 && (
+    <Section
+      title={log.history.length > 0 ? 'As saved, each time' : 'As saved'}
+      note="A change keeps what stood before."
+    >
+      <LogHistory lines={lines} />
+    </Section>
+  );
+  return (
+    <>
+      <PageTitle
+        over={`${log.memberName ? `${log.memberName}, ` : ''}${log.whenText}`}
+        title={log.standName}
+        lead={`Sit from ${log.timeText}.`}
+        actions={
+          !log.form && (
+            <ButtonLink look="quiet" href={`/clubs/${slug}/log`}>
+              Back to the logs
+            </ButtonLink>
+          )
+        }
+      />
+      {log.form && (
+        <LogFormView
+          key={log.form.version}
+          club={slug}
+          values={log.form}
+          day={log.day}
+          zone={log.zone}
+          units={log.units}
+          harvest={scope.can('harvest.write')}
+          save={saveLogAction}
+        />
+      )}
+      {past}
+    </>
+  );
+});

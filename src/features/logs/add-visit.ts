@@ -1,0 +1,53 @@
+import { localToUtc } from '@/core/day-time';
+import { write } from '@/db/client';
+import { momentText } from '@/features/clubs/audit-words';
+import { newId } from '@/lib/ids';
+import { audit } from '@/server/audit';
+import { AppError } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { resolvePlace } from './visit-places';
+import { VISIT_WORDS, type VisitInput } from './visit-schema';
+import { findSameVisit, insertVisit } from './visits-data';
+
+const DAY_MS = 86_400_000;
+const AHEAD_MS = 15 * 60_000;
+/** An older visit weighs nothing any more and is more likely a slip. */
+const OLDEST_MS = 366 * DAY_MS;
+
+const wrong = (field: string, message: string) => new AppError('invalid', message, { fields: { [field]: message } });
+
+/** Writes down a visit; the same one sent twice is kept once. */
+export async function addVisit(
+  scope: ClubScope,
+  input: VisitInput,
+  now: number,
+): Promise<{ id: string; name: string }> {
+  const { kind, bumped, notes } = input;
+  const at = localToUtc(input.day, input.clock, scope.club.zone);
+  if (at > now + AHEAD_MS) throw wrong('day', 'This is still to come. Write a visit down afterwards.');
+  if (at < now - OLDEST_MS) throw wrong('day', 'This is more than a year ago: choose a later day.');
+  return write(async (tx) => {
+    const place = await resolvePlace(scope, input.place, tx);
+    if (!place) throw wrong('place', 'This place is no longer there. Choose another.');
+    const { lat, lon, standId, name } = place;
+    const row = { kind, at, lat, lon, standId, memberId: scope.member.id, bumped, notes };
+    const same = await findSameVisit(scope, row, tx);
+    if (same) return { id: same.id, name };
+    const id = newId('visit');
+    await insertVisit(tx, { ...row, id, clubId: scope.club.id, createdAt: now });
+    await audit(
+      tx,
+      {
+        clubId: scope.club.id,
+        actor: scope.actor,
+        action: 'visit.added',
+        subjectType: 'visit',
+        subjectId: id,
+        summary: `${VISIT_WORDS[kind]} at ${name}, ${momentText(at, scope.club)}.`,
+        detail: { kind, standId, bumped },
+      },
+      now,
+    );
+    return { id, name };
+  });
+}

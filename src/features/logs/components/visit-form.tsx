@@ -1,0 +1,99 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { useMemo } from 'react';
+import { useController, useWatch } from 'react-hook-form';
+import { HereButton } from '@/features/ground/components/here-button';
+import type { FormClub } from '@/features/ground/form-club';
+import type { ActionResult } from '@/server/doors';
+import { ButtonLink } from '@/ui/button';
+import { FormErrorSummary, SubmitRow } from '@/ui/form';
+import { useActionForm } from '@/ui/form/use-action-form';
+import { Stepper } from '@/ui/stepper';
+import { DateInput, Select, Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
+import { useToast } from '@/ui/toast';
+import type { PlaceChoices } from '../visit-places';
+import { makeVisitSchema, VISIT_KINDS, VISIT_WORDS, type VisitForm } from '../visit-schema';
+
+export interface VisitFormProps {
+  club: string;
+  formClub: FormClub;
+  values: VisitForm;
+  places: PlaceChoices;
+  add: (club: string, values: VisitForm) => Promise<ActionResult<{ id: string; name: string }>>;
+}
+
+const KINDS = VISIT_KINDS.map((value) => ({ value, label: VISIT_WORDS[value] }));
+
+export function VisitFormView({ club, formClub, values, places, add }: VisitFormProps) {
+  const router = useRouter();
+  const toast = useToast();
+  const back = `/clubs/${club}/log`;
+  const schema = useMemo(() => makeVisitSchema(formClub), [formClub]);
+  const { form, register, errorOf, errors, pending, formProps } = useActionForm({
+    schema,
+    defaultValues: values,
+    submit: (typed: VisitForm) => add(club, typed),
+    onDone: (saved) => {
+      toast({ title: 'Visit written down', text: saved.name });
+      router.push(back);
+    },
+  });
+  const place = useWatch({ control: form.control, name: 'place' });
+  const { field: bumped } = useController({ control: form.control, name: 'bumped' });
+  const groups = [
+    { label: 'Stands', options: places.stands },
+    { label: 'Features', options: places.features },
+    { label: 'Parking', options: places.parkings },
+  ].filter((group) => group.options.length > 0);
+  return (
+    <form {...formProps} className="flex max-w-2xl flex-col gap-5">
+      <FormErrorSummary errors={errors} />
+      <Select label="What" options={KINDS} {...register('kind')} error={errorOf('kind')} />
+      <div className="grid grid-cols-2 gap-4">
+        <DateInput label="Day" {...register('day')} error={errorOf('day')} />
+        <TimeInput label="Time" {...register('clock')} error={errorOf('clock')} />
+      </div>
+      <Select label="Where" placeholder="Choose a place" {...register('place')} error={errorOf('place')}>
+        {groups.map((group) => (
+          <optgroup key={group.label} label={group.label}>
+            {group.options.map((option) => (
+              <option key={option.value} value={option.value}>
+                {option.label}
+              </option>
+            ))}
+          </optgroup>
+        ))}
+        <option value="point">Another place, by its position</option>
+      </Select>
+      {place === 'point' && (
+        <div className="flex flex-col gap-4">
+          <div className="grid gap-4 sm:grid-cols-2">
+            <TextInput label="Latitude" inputMode="decimal" {...register('lat')} error={errorOf('lat')} />
+            <TextInput label="Longitude" inputMode="decimal" {...register('lon')} error={errorOf('lon')} />
+          </div>
+          <HereButton
+            onPlace={({ lat, lon }) => {
+              form.setValue('lat', lat, { shouldDirty: true });
+              form.setValue('lon', lon, { shouldDirty: true });
+            }}
+          />
+        </div>
+      )}
+      <Stepper
+        label="Deer bumped"
+        name={bumped.name}
+        value={bumped.value}
+        onChange={bumped.onChange}
+        onBlur={bumped.onBlur}
+        error={errorOf('bumped')}
+      />
+      <Textarea label="Notes" optional rows={2} {...register('notes')} error={errorOf('notes')} />
+      <SubmitRow label="Save visit" pending={pending} pendingLabel="Saving…">
+        <ButtonLink href={back} look="quiet">
+          Back without saving
+        </ButtonLink>
+      </SubmitRow>
+    </form>
+  );
+}

@@ -1,0 +1,128 @@
+import { isDeepStrictEqual } from 'node:util';
+import { localToUtc } from '@/core/day-time';
+import { write } from '@/db/client';
+import type { SitLogSnapshot } from '@/db/schema';
+import { dayAndWindow } from '@/features/bookings/sit-words';
+import { audit } from '@/server/audit';
+import { AppError, notFound } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { mayWriteLog } from './log-access';
+import type { LogInput } from './log-schema';
+import {
+  findLoggable,
+  findMemberName,
+  insertLog,
+  keepVersion,
+  type LoggableSit,
+  type LogRow,
+  updateLog,
+} from './logs-data';
+
+/** A phone's clock may run ahead of the server's by a little. */
+const AHEAD_MS = 15 * 60_000;
+
+type LogFacts = Omit<SitLogSnapshot, 'version' | 'savedBy' | 'updatedAt'>;
+
+function factsOf(sit: LoggableSit, input: LogInput, zone: string): LogFacts {
+  const { sitId: _, version: __, startClock, endClock, shotClock, ...rest } = input;
+  const at = (clock: string) => localToUtc(sit.day, clock, zone);
+  const hit = rest.shot === 'hit';
+  const bumped = rest.bumpedIn + rest.bumpedSitting + rest.bumpedOut > 0;
+  return {
+    ...rest,
+    startAt: at(startClock),
+    endAt: at(endClock),
+    bumpedWhere: bumped ? rest.bumpedWhere : '',
+    shotAt: rest.shot === 'none' ? null : at(shotClock),
+    hitPlace: hit ? rest.hitPlace : null,
+    followUp: hit ? rest.followUp : null,
+    followUpNotes: hit ? rest.followUpNotes : '',
+  };
+}
+
+function snapshotOf({ sitId: _, clubId: __, createdAt: ___, ...log }: LogRow): SitLogSnapshot {
+  return log;
+}
+
+function sameFacts(log: LogRow, facts: LogFacts): boolean {
+  const { version: _, savedBy: __, updatedAt: ___, ...was } = snapshotOf(log);
+  return isDeepStrictEqual(was, facts);
+}
+
+function refuse(scope: ClubScope, sit: LoggableSit, facts: LogFacts, now: number): void {
+  if (!mayWriteLog(scope, sit, now)) {
+    throw new AppError('forbidden', `This is ${sit.memberName}'s sit: only they or an officer write its log.`);
+  }
+  if (sit.status !== 'booked') {
+    const what = sit.status === 'lapsed' ? 'lapsed, unsigned' : 'was cancelled';
+    throw new AppError('conflict', `This sit ${what}: it has no log.`);
+  }
+  if (sit.startAt > now) throw new AppError('conflict', 'This sit has not begun yet. Write its log afterwards.');
+  const late = (at: number | null) => at !== null && at > now + AHEAD_MS;
+  const message = 'This is still to come.';
+  if (late(facts.endAt)) throw new AppError('invalid', message, { fields: { endClock: message } });
+  if (late(facts.shotAt)) throw new AppError('invalid', message, { fields: { shotClock: message } });
+}
+
+export interface SavedLog {
+  sitId: string;
+  version: number;
+  standName: string;
+  /** A deer was recovered: its harvest sheet comes next. */
+  recovered: boolean;
+}
+
+/**
+ * Writes the log of a sit, or changes it and keeps what it said before. The audit row says that it was done and never what
+ * was seen: the club's rule may keep that from those who read the audit log.
+ */
+export async function saveLog(scope: ClubScope, input: LogInput, now: number): Promise<SavedLog> {
+  return write(async (tx) => {
+    const sit = await findLoggable(scope, input.sitId, tx);
+    if (!sit) throw notFound();
+    const facts = factsOf(sit, input, scope.club.zone);
+    refuse(scope, sit, facts, now);
+    const saved = (version: number): SavedLog => ({
+      sitId: sit.id,
+      version,
+      standName: sit.standName,
+      recovered: facts.followUp === 'recovered',
+    });
+    const before = sit.log;
+    if (before && sameFacts(before, facts)) return saved(before.version);
+    if ((before?.version ?? 0) !== input.version) {
+      const by = before
+        ? ((await findMemberName(scope, before.savedBy ?? sit.memberId, tx)) ?? 'Somebody')
+        : 'Somebody';
+      throw new AppError(
+        'conflict',
+        `${by} saved this log after you opened it. What you typed is still here: open the log in another tab and compare.`,
+      );
+    }
+    const version = input.version + 1;
+    if (before) {
+      const savedBy = before.savedBy ?? sit.memberId;
+      const savedAt = before.updatedAt ?? before.createdAt;
+      await keepVersion(scope, tx, { sitId: sit.id, savedBy, savedAt, log: snapshotOf(before) });
+      await updateLog(scope, tx, sit.id, { ...facts, version, savedBy: scope.member.id, updatedAt: now });
+    } else {
+      const row = { ...facts, sitId: sit.id, clubId: scope.club.id, version, savedBy: scope.member.id, createdAt: now };
+      await insertLog(tx, row);
+    }
+    const verb = before ? 'changed' : 'written';
+    await audit(
+      tx,
+      {
+        clubId: scope.club.id,
+        actor: scope.actor,
+        action: `log.${verb}`,
+        subjectType: 'sit',
+        subjectId: sit.id,
+        summary: `${before ? 'Changed' : 'Wrote'} the log of ${sit.memberName}'s sit at ${sit.standName}: ${dayAndWindow(sit.day, sit.windows, true)}.`,
+        detail: { version },
+      },
+      now,
+    );
+    return saved(version);
+  });
+}
