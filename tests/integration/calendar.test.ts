@@ -208,7 +208,7 @@ describe('the board', () => {
       {
         day: '2026-11-04',
         title: 'Today',
-        sits: [{ standName: 'Oak Ladder', memberName: 'Ann Roe', phase: 'to_come', mine: false }],
+        sits: [{ standName: 'Oak Ladder', memberName: 'Ann Roe', state: 'due', mine: false }],
       },
       {
         day: '2026-11-05',
@@ -222,14 +222,14 @@ describe('the board', () => {
     expect(JSON.parse((await board(ann)).text).days[0].sits[0].mine).toBe(true);
   });
 
-  it('says by the clock whether a sit is to come, on or over', async () => {
+  it('says by the clock whether an unsigned sit is due, late or over', async () => {
     const sit = await book(ann, oak, { day: '2026-11-04', windows: 'evening' });
-    const phase = async () => JSON.parse((await board(ann)).text).days[0].sits[0].phase;
+    const state = async () => JSON.parse((await board(ann)).text).days[0].sits[0].state;
     try {
       setClock(() => sit.startAt);
-      expect(await phase()).toBe('now');
+      expect(await state()).toBe('late');
       setClock(() => sit.endAt);
-      expect(await phase()).toBe('over');
+      expect(await state()).toBe('unsigned');
     } finally {
       setClock(() => TEST_NOW);
     }

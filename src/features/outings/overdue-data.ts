@@ -1,7 +1,7 @@
 import { and, asc, eq, inArray, isNull } from 'drizzle-orm';
 import { PERMISSIONS_BY_ROLE, ROLES } from '@/core/permissions';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
-import { memberships, overdueSteps, users } from '@/db/schema';
+import { memberships, OVERDUE_STEPS, overdueSteps, users } from '@/db/schema';
 import type { ClubScope } from '@/server/scope';
 
 export type OverdueStepRow = typeof overdueSteps.$inferSelect;
@@ -21,11 +21,13 @@ export async function insertStep(tx: Tx, row: typeof overdueSteps.$inferInsert):
 /** The steps taken for some outings, for every back-by time they had. */
 export async function listSteps(outingIds: string[], from: ReadFrom = reader()): Promise<OverdueStepRow[]> {
   if (outingIds.length === 0) return [];
-  return from
+  const rows = await from
     .select()
     .from(overdueSteps)
     .where(inArray(overdueSteps.outingId, outingIds))
     .orderBy(asc(overdueSteps.at), asc(overdueSteps.id));
+  // Steps taken at the same instant: in the order they are meant to come.
+  return rows.sort((a, b) => a.at - b.at || OVERDUE_STEPS.indexOf(a.step) - OVERDUE_STEPS.indexOf(b.step));
 }
 
 /** Who signs for others in the club, by name. */

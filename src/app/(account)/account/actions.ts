@@ -9,6 +9,8 @@ import {
 import { changeName } from '@/features/accounts/change-name';
 import { changePassword } from '@/features/accounts/change-password';
 import { endAllSessions, endOneSession } from '@/features/accounts/end-sessions';
+import { saveContactSchema, switchContactSchema } from '@/features/outings/contact-schema';
+import { removeContact, saveContact, switchContact } from '@/features/outings/save-contact';
 import { accountAction } from '@/server/doors';
 import { endSession, forgetSessionCookie, requestSource } from '@/server/session';
 
@@ -49,6 +51,27 @@ export const signOutEverywhereAction = accountAction({
   run: async ({ user, now }) => {
     await endAllSessions(user, now);
     await forgetSessionCookie();
+    return null;
+  },
+});
+
+export const saveContactAction = accountAction({
+  input: saveContactSchema,
+  run: ({ user, input, now }) => saveContact(user, input, now),
+});
+
+export const switchContactAction = accountAction({
+  input: switchContactSchema,
+  run: async ({ user, input, now }) => {
+    await switchContact(user, input, now);
+    return null;
+  },
+});
+
+export const removeContactAction = accountAction({
+  input: nothingSchema,
+  run: async ({ user, now }) => {
+    await removeContact(user, now);
     return null;
   },
 });

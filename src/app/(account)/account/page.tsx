@@ -5,6 +5,8 @@ import { PasswordForm } from '@/features/accounts/components/password-form';
 import { SessionsList } from '@/features/accounts/components/sessions-list';
 import { SignOutButton, SignOutEverywhereButton } from '@/features/accounts/components/sign-out-button';
 import { listMySessions } from '@/features/accounts/reads';
+import { ContactForm } from '@/features/outings/components/contact-form';
+import { readContact } from '@/features/outings/read-contact';
 import { now } from '@/server/clock';
 import { accountPage } from '@/server/doors';
 import { TextLink } from '@/ui/button';
@@ -14,20 +16,34 @@ import {
   changeNameAction,
   changePasswordAction,
   endSessionAction,
+  removeContactAction,
+  saveContactAction,
   signOutAction,
   signOutEverywhereAction,
+  switchContactAction,
 } from './actions';
 
 export const metadata: Metadata = { title: 'Account' };
 
 export default accountPage(async ({ user }) => {
   const sessions = await listMySessions(user, now());
+  const contact = await readContact(user.id, now());
   return (
     <>
       <PageTitle title="Account" lead={user.email} actions={<TextLink href="/clubs">Your clubs</TextLink>} />
       {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
       <Section title="Name" note="Members of your clubs see it.">
         <NameForm name={user.name} action={changeNameAction} />
+      </Section>
+      <Section
+        title="Safety contact"
+        note="Somebody at home who is mailed when you have not signed out in time, in any of your clubs."
+      >
+        <ContactForm
+          key={contact?.email}
+          contact={contact}
+          actions={{ save: saveContactAction, switchOff: switchContactAction, remove: removeContactAction }}
+        />
       </Section>
       <Section title="Password">
         <PasswordForm email={user.email} action={changePasswordAction} />

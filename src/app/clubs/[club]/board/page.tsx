@@ -1,5 +1,5 @@
 import type { Metadata } from 'next';
-import { BoardDays } from '@/features/board/components/board-days';
+import { BoardView } from '@/features/board/components/board-view';
 import { readBoard } from '@/features/board/reads';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
@@ -7,8 +7,25 @@ import { ButtonLink } from '@/ui/button';
 import { Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { cancelSitAction } from '../sit/actions';
+import {
+  moveBackByAction,
+  revokeSitLinksAction,
+  shareSitAction,
+  signInSitAction,
+  signOutSitAction,
+  walkUpAction,
+} from './actions';
 
 export const metadata: Metadata = { title: 'Board' };
+
+const ACTIONS = {
+  signIn: signInSitAction,
+  signOut: signOutSitAction,
+  move: moveBackByAction,
+  walkUp: walkUpAction,
+  share: shareSitAction,
+  revoke: revokeSitLinksAction,
+};
 
 export default clubPage('board.read', async ({ scope }) => {
   const { slug, name } = scope.club;
@@ -17,16 +34,17 @@ export default clubPage('board.read', async ({ scope }) => {
       <PageTitle
         over={name}
         title="Board"
-        lead="Who is booked where, today and tomorrow, by the club's clock."
+        lead="Who is on the ground, and who is booked where today and tomorrow, by the club's clock."
         actions={scope.can('sits.book') && <ButtonLink href={`/clubs/${slug}/my-sits`}>My sits</ButtonLink>}
       />
       <Notice level="caution" title="Windrest is no rescue service" className="mb-8">
-        The board shows what was booked, not who is safely home. Tell someone where you sit and when you will be back,
-        and call the emergency number when somebody is missing.
+        It mails those the club and the member have named, and sends nobody. Tell someone where you sit and when you
+        will be back, and call the emergency number when somebody is missing.
       </Notice>
-      <BoardDays
+      <BoardView
         club={slug}
         initial={await readBoard(scope, now())}
+        actions={scope.can('sits.book') ? ACTIONS : null}
         cancel={scope.can('sits.cancel_any') ? cancelSitAction : null}
       />
     </>

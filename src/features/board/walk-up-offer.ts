@@ -1,0 +1,23 @@
+import type { SitWindow } from '@/core/types';
+import { dayAndWindow, spanText } from '@/features/bookings/sit-words';
+import { walkUpWindow } from '@/features/outings/walk-up';
+import type { ClubScope } from '@/server/scope';
+import type { BoardSit } from './reads';
+
+export function windowText(scope: ClubScope, window: SitWindow): string {
+  return `${dayAndWindow(window.day, window.window)}, ${spanText(window.startAt, window.endAt, scope.club)}`;
+}
+
+/** The window a free stand may be taken for at the gate; null: none is near, the club has no walk-ups, or the reader has a sit. */
+export function walkUpOffer(scope: ClubScope, sits: BoardSit[], now: number): string | null {
+  if (!scope.can('sits.book')) return null;
+  const window = walkUpWindow(scope, now);
+  if (!window || (window.startAt <= now && !scope.club.rules.walkUpSits)) return null;
+  const held = sits.some(
+    (sit) =>
+      sit.mine &&
+      (sit.outing !== null ||
+        (sit.day === window.day && (sit.windowText === 'all day' || sit.windowText === window.window))),
+  );
+  return held ? null : windowText(scope, window);
+}
