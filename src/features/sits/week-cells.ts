@@ -3,7 +3,7 @@ import type { WeekCell, WeekColumnView, WeekView } from './view-types';
 export const WEEK_SHOWS = ['all', 'open', 'mine'] as const;
 export type WeekShow = (typeof WEEK_SHOWS)[number];
 
-export const WEEK_SHOW_LABELS: Record<WeekShow, string> = { all: 'All', open: 'Open', mine: 'Mine' };
+export const WEEK_SHOW_LABELS: Record<WeekShow, string> = { all: 'All stands', open: 'Open stands', mine: 'My sits' };
 
 export function isShown(cell: WeekCell, show: WeekShow): boolean {
   return show === 'all' || (show === 'open' ? cell.open && !cell.mine : cell.mine);

@@ -10,12 +10,11 @@ import type { SitsAskText } from '../ask-schema';
 import { sitsQuery } from '../queries';
 import type { OpenRow, SitsView } from '../view-types';
 import { WINDOW_WORDS } from '../words';
-import { AlmanacHead } from './almanac-head';
 import { BlockedList } from './blocked-list';
 import { type BookActions, BookDialog, type Hunter } from './book-dialog';
 import { ForecastNote } from './forecast-note';
+import { SitHead } from './sit-head';
 import { SitRow } from './sit-row';
-import { WindowPicker } from './window-picker';
 
 export interface SitScreenProps {
   ask: SitsAskText;
@@ -46,8 +45,7 @@ export function SitScreen({ ask, initial, openStandId, actions, hunters, may }: 
           </ButtonLink>
         }
       />
-      <WindowPicker view={view} />
-      <AlmanacHead view={view} />
+      <SitHead view={view} />
       <div className="mt-3 grid gap-3">
         <ForecastNote forecast={view.forecast} now={view.madeAt} />
         {query.isError && (
@@ -122,7 +120,7 @@ function RankedList({ view, ask, openId, onToggle, onBook, addStands }: RankedLi
     );
   }
   return (
-    <section aria-label="Stands by sit score" className="mt-6">
+    <section aria-label="Stands by sit score" className="mt-4 sm:mt-6">
       {view.open.length === 0 ? (
         <EmptyState title="No stand is open in this window">
           Each one below names the rule that stops it. Try the next window or another weapon.

@@ -4,7 +4,6 @@ import { useQuery } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { Button, ButtonLink } from '@/ui/button';
-import { RadioCards } from '@/ui/choices';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { Select } from '@/ui/text-inputs';
@@ -35,14 +34,12 @@ export function WeekScreen({ ask, initial }: { ask: WeekAskText; initial: WeekVi
           </ButtonLink>
         }
       />
-      <div className="grid gap-4 sm:flex sm:items-end sm:gap-6 print:hidden">
-        <RadioCards
+      <div className="grid grid-cols-2 items-end gap-3 sm:flex sm:gap-6 print:hidden">
+        <Select
           label="Show"
-          name="show"
-          across
           value={show}
           onChange={({ target }) => setShow(WEEK_SHOWS.find((one) => one === target.value) ?? 'all')}
-          choices={WEEK_SHOWS.map((value) => ({ value, label: WEEK_SHOW_LABELS[value] }))}
+          options={WEEK_SHOWS.map((value) => ({ value, label: WEEK_SHOW_LABELS[value] }))}
         />
         <Select
           key={view.weapon}
@@ -76,7 +73,10 @@ export function WeekScreen({ ask, initial }: { ask: WeekAskText; initial: WeekVi
           <div className="mt-6 sm:hidden print:hidden">
             <WeekDays view={view} show={show} />
           </div>
-          <section aria-label="Stands and windows" className="mt-6 hidden overflow-x-auto pb-3 sm:block print:block">
+          <section
+            aria-label="Stands and windows"
+            className="relative mt-6 hidden overflow-x-auto pb-3 sm:block print:block print:overflow-visible"
+          >
             <WeekTable view={view} show={show} />
           </section>
           <p className="mt-2 hidden text-ink-soft text-sm sm:block">

@@ -25,69 +25,74 @@ function after({ day, window }: Step): Step {
 
 const label = ({ day, window }: Step) => `${formatDay(day)}, ${WINDOW_WORDS[window]}`;
 
+const addressOf = (view: SitsView, step: Step, weapon: Weapon | null = view.weapon) =>
+  sitAddress(view.club.slug, { day: step.day, window: step.window, ...(weapon ? { weapon } : {}) });
+
+/** To the windows before and after. */
+export function WindowSteps({ view }: { view: SitsView }) {
+  const [earlier, later] = [before(view.window), after(view.window)];
+  return (
+    <nav aria-label="Windows" className="flex items-stretch justify-between gap-2 print:hidden">
+      <ButtonLink look="quiet" href={addressOf(view, earlier)} rel="prev" className="-ml-2 justify-start text-left">
+        <span aria-hidden="true">‹</span> {label(earlier)}
+      </ButtonLink>
+      <ButtonLink look="quiet" href={addressOf(view, later)} rel="next" className="-mr-2 justify-end text-right">
+        {label(later)} <span aria-hidden="true">›</span>
+      </ButtonLink>
+    </nav>
+  );
+}
+
 /** Day, window and weapon. A plain form, so that it works before its script has come. */
-export function WindowPicker({ view }: { view: SitsView }) {
+export function ChooseWindow({ view }: { view: SitsView }) {
   const router = useRouter();
   const { window, club, weapon } = view;
-  const to = (step: Step, arm: Weapon | null = weapon) =>
-    sitAddress(club.slug, { ...step, ...(arm ? { weapon: arm } : {}) });
-  const [earlier, later] = [before(window), after(window)];
-
   return (
-    <nav aria-label="Day and window" className="print:hidden">
-      <div className="flex items-stretch justify-between gap-2">
-        <ButtonLink look="quiet" href={to(earlier)} rel="prev" className="-ml-2 justify-start text-left">
-          <span aria-hidden="true">‹</span> {label(earlier)}
-        </ButtonLink>
-        <ButtonLink look="quiet" href={to(later)} rel="next" className="-mr-2 justify-end text-right">
-          {label(later)} <span aria-hidden="true">›</span>
-        </ButtonLink>
-      </div>
-      <form
-        method="get"
-        action={`/clubs/${club.slug}/sit`}
-        className="mt-2 grid grid-cols-2 items-end gap-3 sm:flex sm:flex-wrap"
-      >
-        <DateInput
-          key={window.day}
-          label="Day"
-          name="day"
-          defaultValue={window.day}
-          onChange={({ target }) => {
-            if (inAskedYears(target.value)) router.push(to({ day: target.value, window: window.window }));
-          }}
-        />
-        <Select
-          key={`${window.window}-window`}
-          label="Window"
-          name="window"
-          defaultValue={window.window}
-          options={WINDOW_NAMES.map((value) => ({ value, label: WINDOW_WORDS[value] }))}
-          onChange={({ target }) => {
-            const chosen = WINDOW_NAMES.find((name) => name === target.value);
-            if (chosen) router.push(to({ day: window.day, window: chosen }));
-          }}
-        />
-        <Select
-          key={`${weapon}-weapon`}
-          label="Weapon"
-          name="weapon"
-          defaultValue={weapon ?? ''}
-          fieldClassName="max-sm:col-span-2"
-          options={[
-            { value: '', label: 'Any weapon' },
-            ...view.weapons.map((value) => ({ value, label: WEAPON_LABELS[value] })),
-          ]}
-          onChange={({ target }) => {
-            router.push(to(window, view.weapons.find((one) => one === target.value) ?? null));
-          }}
-        />
-        <noscript>
-          <button type="submit" className={buttonClasses('plain')}>
-            Show
-          </button>
-        </noscript>
-      </form>
-    </nav>
+    <form
+      method="get"
+      action={`/clubs/${club.slug}/sit`}
+      aria-label="Day, window and weapon"
+      className="mt-2 grid grid-cols-2 items-end gap-3 sm:flex sm:flex-wrap print:hidden"
+    >
+      <DateInput
+        key={window.day}
+        label="Day"
+        name="day"
+        defaultValue={window.day}
+        onChange={({ target }) => {
+          if (inAskedYears(target.value)) router.push(addressOf(view, { ...window, day: target.value }));
+        }}
+      />
+      <Select
+        key={`${window.window}-window`}
+        label="Window"
+        name="window"
+        defaultValue={window.window}
+        options={WINDOW_NAMES.map((value) => ({ value, label: WINDOW_WORDS[value] }))}
+        onChange={({ target }) => {
+          const chosen = WINDOW_NAMES.find((name) => name === target.value);
+          if (chosen) router.push(addressOf(view, { ...window, window: chosen }));
+        }}
+      />
+      <Select
+        key={`${weapon}-weapon`}
+        label="Weapon"
+        name="weapon"
+        defaultValue={weapon ?? ''}
+        fieldClassName="max-sm:col-span-2"
+        options={[
+          { value: '', label: 'Any weapon' },
+          ...view.weapons.map((value) => ({ value, label: WEAPON_LABELS[value] })),
+        ]}
+        onChange={({ target }) => {
+          router.push(addressOf(view, window, view.weapons.find((one) => one === target.value) ?? null));
+        }}
+      />
+      <noscript>
+        <button type="submit" className={buttonClasses('plain')}>
+          Show
+        </button>
+      </noscript>
+    </form>
   );
 }
