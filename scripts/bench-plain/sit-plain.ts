@@ -17,7 +17,6 @@ import { scoreOf } from '../../src/core/reasons';
 import type { ScentGround } from '../../src/core/scent/scent-ground';
 import { shareAfter, windedExponents, windedIn } from '../../src/core/seated';
 import type { Forecast, ScoredStand, SitWindow } from '../../src/core/types';
-import { directionSummary } from '../../src/core/wind/histogram';
 import type { ScenarioSet } from '../../src/core/wind/scenario-types';
 import { buildScenarios } from '../../src/core/wind/scenarios';
 import { scenariosAtStand } from '../../src/core/wind/stand-scenarios';
@@ -100,7 +99,7 @@ export function plainSit(
     seatSpeedMps: air[t]?.seatSpeedMps ?? null,
     precipMm: air[t]?.precipMm ?? null,
     cloudPercent: air[t]?.cloudPercent ?? null,
-    meanFromDeg: directionSummary(seat, t).meanFromDeg,
+    fromDeg: air[t]?.seatFromDeg ?? null,
   }));
   const near = nearEvents(stand.at, world.events, settings.pressure);
   const pressure = pressureLeft(near, window.startAt, settings.pressure);

@@ -21,7 +21,7 @@ export interface SeatFrame {
   stability: StabilityClass[];
   /** Directions over the whole sit and by step; speeds in them are at the seat only where slope drift plays. */
   sit: DirectionSummary;
-  steps: DirectionSummary[];
+  steps: () => DirectionSummary[];
   shares: number[] | null;
 }
 
@@ -93,9 +93,13 @@ function walkWind(
 type Directions = Pick<SeatFrame, 'sit' | 'steps' | 'shares'>;
 
 function directionsOf(set: ScenarioSet): Directions {
+  let steps: DirectionSummary[] | null = null;
   return {
     sit: directionSummary(set),
-    steps: set.at.map((_, t) => directionSummary(set, t)),
+    steps: () => {
+      steps ??= set.at.map((_, t) => directionSummary(set, t));
+      return steps;
+    },
     shares: sitDirectionShares(set),
   };
 }

@@ -25,7 +25,7 @@ interface Turned {
 function scentIf(frame: SitFrame, sums: SitSums, fromDeg: number, k: number) {
   const seat = frame.air?.seatOf(sums.stand.stand);
   if (!seat) return null;
-  const steps = seat.steps.map((s, t) => ({
+  const steps = seat.steps().map((s, t) => ({
     fromDeg: t < k ? s.meanFromDeg : fromDeg,
     speedMps: seat.air[t]?.seatSpeedMps ?? 0,
   }));

@@ -76,7 +76,7 @@ function promiseSteps(window: WindowFrame, seat: SeatFrame | null): PromiseStep[
       seatSpeedMps: air?.seatSpeedMps ?? null,
       precipMm: air?.precipMm ?? null,
       cloudPercent: air?.cloudPercent ?? null,
-      meanFromDeg: seat?.steps[t]?.meanFromDeg ?? null,
+      fromDeg: air?.seatFromDeg ?? null,
     };
   });
 }

@@ -13,13 +13,18 @@ export interface WeekColumn {
 
 /**
  * All stands in all windows in one call that shares work; the same verdicts as rankSits gives one by one at this detail.
- * Windows the forecast does not reach are ranked without one.
+ * Windows the forecast does not reach are ranked without one. Stand by stand, so that a stand's tables stay at hand.
  */
 export function rankWeek(input: WeekInput, prepared: GroundFrame = frameGround(input)): WeekColumn[] {
   const compare = compareVerdicts(namesOf(input.stands));
-  return input.windows.map((window) => {
-    const frame = frameSits(prepared, window, input.forecast, input.now, input.detail ?? 'list');
-    const verdicts = prepared.stands.map((stand) => judgeSit(frame, stand, input.gatesFor(stand.stand.id, window)));
-    return { window, verdicts: verdicts.sort(compare) };
-  });
+  const columns = input.windows.map((window) => ({
+    frame: frameSits(prepared, window, input.forecast, input.now, input.detail ?? 'list'),
+    verdicts: [] as Verdict[],
+  }));
+  for (const stand of prepared.stands) {
+    for (const { frame, verdicts } of columns) {
+      verdicts.push(judgeSit(frame, stand, input.gatesFor(stand.stand.id, frame.window.window)));
+    }
+  }
+  return columns.map(({ frame, verdicts }) => ({ window: frame.window.window, verdicts: verdicts.sort(compare) }));
 }

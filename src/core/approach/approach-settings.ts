@@ -47,7 +47,7 @@ export const DEFAULT_APPROACH: ApproachSettings = {
   unknownWayChance: 0.15,
   spacingM: 40,
   scentReachM: 400,
-  passingMinutes: 15,
+  passingMinutes: 40,
   seenNearChance: 0.5,
   seenReachM: 400,
   heardShare: 0.5,

@@ -1,7 +1,7 @@
 import { chanceOfExposure } from '../scent/saturate';
 import type { ApproachSettings } from './approach-settings';
 import { senseFactor } from './seen-heard';
-import type { WalkGround } from './walk-ground';
+import type { WalkGround, WalkSlot } from './walk-ground';
 
 /** Bearing bins of the walk tables: 3 degrees each, so that a line between two is within 1 % of the curve. */
 export const WALK_BINS = 120;
@@ -40,6 +40,9 @@ export interface WalkChance {
   worst: { feature: number; chance: number } | null;
 }
 
+/** Places deer use less than this are passed over. */
+const LEAST_SHARE = 0.005;
+
 function scentChance(table: Float32Array, slot: number, wind: WalkWind): number {
   const row = slot * WALK_BINS;
   const { low, high, part, weights, perSpeed } = wind;
@@ -73,14 +76,20 @@ export function walkChance(
 ): WalkChance {
   const sense = s.seenNearChance * senseFactor(moment.dark, moment.wind?.speedMps ?? null, s);
   let unnoticed = (1 - s.unmappedPer100M) ** (ground.walkedM / 100);
-  let worst: WalkChance['worst'] = null;
-  ground.slots.forEach((slot, i) => {
+  let worst = -1;
+  let most = 0;
+  const { slots } = ground;
+  for (let i = 0; i < slots.length; i++) {
+    const slot = slots[i] as WalkSlot;
     const share = moment.shares[slot.feature] as number;
-    if (share < 0.005) return;
+    if (share < LEAST_SHARE) continue;
     const scent = table && moment.wind ? scentChance(table, i, moment.wind) : 0;
     const part = share * (1 - (1 - scent) * (1 - sense * slot.seen));
     unnoticed *= 1 - part;
-    if (part > 0 && (worst === null || part > worst.chance)) worst = { feature: slot.feature, chance: part };
-  });
-  return { chance: 1 - unnoticed, worst };
+    if (part > most) {
+      worst = slot.feature;
+      most = part;
+    }
+  }
+  return { chance: 1 - unnoticed, worst: worst < 0 ? null : { feature: worst, chance: most } };
 }

@@ -15,7 +15,7 @@ export interface PromiseStep {
   seatSpeedMps: number | null;
   precipMm: number | null;
   cloudPercent: number | null;
-  meanFromDeg: number | null;
+  fromDeg: number | null;
 }
 
 /** Factors that make up promise; 1 is no effect. */
@@ -63,7 +63,7 @@ function featureUse(steps: PromiseStep[], moves: number[], inRange: InRange[], s
     for (const { feature, share, lineDeg } of inRange) {
       const use = (step.shares[feature] as number) * share;
       none *= 1 - use;
-      const across = lineDeg === null ? 1 : crosswindFactor(crosswindShare(step.meanFromDeg, lineDeg), s);
+      const across = lineDeg === null ? 1 : crosswindFactor(crosswindShare(step.fromDeg, lineDeg), s);
       noneCrossed *= 1 - Math.min(1, use * across);
     }
     plain += move * (1 - none);

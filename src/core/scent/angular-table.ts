@@ -116,15 +116,16 @@ function pack({ count, bins, values }: TableScratch): AngularTable {
   }
   for (let b = 0; b < WIND_BINS; b++) start[b + 1] = (start[b + 1] as number) + (start[b] as number);
   const packed = new Float32Array(4 * count);
+  const places = new Int32Array(packed.buffer);
   const fill = start.slice(0, WIND_BINS);
   for (let i = 0; i < count; i++) {
     const b = bins[i] as number;
     const to = 4 * (fill[b] as number);
     fill[b] = (fill[b] as number) + 1;
-    packed[to] = values[4 * i] as number;
+    places[to] = values[4 * i] as number;
     packed[to + 1] = values[4 * i + 1] as number;
     packed[to + 2] = values[4 * i + 2] as number;
     packed[to + 3] = values[4 * i + 3] as number;
   }
-  return { start, values: packed, noDirection: new Map() };
+  return { start, values: packed, places, noDirection: new Map() };
 }

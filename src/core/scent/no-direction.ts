@@ -17,9 +17,9 @@ function levelOf(table: AngularTable, count: number, level: number): Float64Arra
 /** Each feature's chance as its mean over all directions, worked out in full. */
 export function meanOverDirections(table: AngularTable, count: number, perIndex: number): Float64Array {
   const chance = new Float64Array(count);
-  const { values } = table;
+  const { values, places } = table;
   for (let e = 0; e < values.length; e += 4) {
-    const f = values[e] as number;
+    const f = places[e] as number;
     const p = (values[e + 1] as number) * chanceOfExposure((values[e + 2] as number) * perIndex);
     chance[f] = (chance[f] as number) + p / WIND_BINS;
   }

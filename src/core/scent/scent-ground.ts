@@ -61,6 +61,8 @@ export interface SourceGeometry {
 export interface AngularTable {
   start: Int32Array;
   values: Float32Array;
+  /** The same memory read as whole numbers: the first of each four is one. */
+  places: Int32Array;
   /** Chances for a wind of no direction by level of exposure; made when first asked for, see no-direction.ts. */
   noDirection: Map<number, Float64Array>;
 }

@@ -126,11 +126,11 @@ function oneDirection(
   const x = normalizeDeg(fromDeg) / BIN_DEG;
   const bin = Math.min(WIND_BINS - 1, Math.floor(x));
   const part = x - bin;
-  const { values } = table;
+  const { values, places } = table;
   const end = 4 * (table.start[bin + 1] as number);
   let missedStep = 1;
   for (let e = 4 * (table.start[bin] as number); e < end; e += 4) {
-    const f = values[e] as number;
+    const f = places[e] as number;
     const index = (values[e + 2] as number) + (values[e + 3] as number) * part;
     const p = (deer[row + f] as number) * (values[e + 1] as number) * chanceOfExposure(index * perIndex);
     missed[f] = (missed[f] as number) * (1 - p);
