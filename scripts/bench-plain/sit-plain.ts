@@ -15,7 +15,7 @@ import { arcFactor } from '../../src/core/quiet';
 import type { WeekInput } from '../../src/core/rank-input';
 import { scoreOf } from '../../src/core/reasons';
 import type { ScentGround } from '../../src/core/scent/scent-ground';
-import { shareAfter, windedExponents, windedIn } from '../../src/core/seated';
+import { shareAfter, shareBefore, windedExponents, windedIn } from '../../src/core/seated';
 import type { Forecast, ScoredStand, SitWindow } from '../../src/core/types';
 import type { ScenarioSet } from '../../src/core/wind/scenario-types';
 import { buildScenarios } from '../../src/core/wind/scenarios';
@@ -130,7 +130,7 @@ export function plainSit(
   const exponents = windedExponents(byStep);
   const tried = entries.map((entry) => {
     const inChance = walkAt(entry.inBy - seconds * 500);
-    const left = shareAfter(entry.inBy, frame.stepAts, window.endAt, exponents);
+    const left = shareAfter(entry.inBy, frame.stepAts, window.endAt, exponents) + shareBefore(entry.inBy, window);
     const quiet = {
       seat: 1 - windedIn(left, windedChance),
       arc: arcFactor(shareOfTime, settings.score),

@@ -1,7 +1,7 @@
 import type { TriedWay } from './approach/try-ways';
 import { type Factors, scoreOf } from './reasons';
 import type { ScoreSettings } from './score';
-import { shareAfter, windedIn } from './seated';
+import { shareAfter, shareBefore, windedIn } from './seated';
 import type { ApproachOption, ScoredFeature } from './types';
 import type { WindowFrame } from './window-frame';
 
@@ -35,7 +35,7 @@ function weigh(tried: TriedWay, before: BeforeWay, frame: WindowFrame, s: ScoreS
   const { endAt } = frame.window;
   const { inBy } = tried.entry;
   const { scent } = before;
-  const left = scent ? shareAfter(inBy, frame.stepAts, endAt, scent.exponents) : 0;
+  const left = scent ? shareAfter(inBy, frame.stepAts, endAt, scent.exponents) + shareBefore(inBy, frame.window) : 0;
   const seat = scent ? 1 - windedIn(left, scent.winded) : 1;
   const factors: Factors = {
     quiet: { ...before.factors.quiet, seat, walkIn: 1 - tried.in.chance, walkOut: 1 - tried.out.chance },

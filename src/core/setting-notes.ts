@@ -18,7 +18,7 @@ export const HUNT_SETTING_NOTES: Record<string, { evidence: Evidence; note: stri
   'whereabouts.preRutScrapeFactor': { evidence: 'our choice', note: 'Small: most visits are after dark all the same.' },
   'whereabouts.mostInUse': {
     evidence: 'our choice',
-    note: 'Two groups of deer afoot within 500 m, however many places are mapped there.',
+    note: 'One or two groups of deer within 500 m, however many places are mapped there.',
   },
   'approach.walkingSpeedMps': { evidence: 'our choice', note: 'A quiet walk, about 2.2 miles an hour.' },
   'approach.vehicleSpeedMps': { evidence: 'our choice', note: 'A slow drive on a farm track.' },
@@ -29,7 +29,7 @@ export const HUNT_SETTING_NOTES: Record<string, { evidence: Evidence; note: stri
   },
   'approach.seenNearChance': {
     evidence: 'study',
-    note: 'Under the 70 % within 100 m of people on a trail (Taylor & Knight 2003): open unhunted land, so an upper bound for woods.',
+    note: 'Well under the 70 % within 100 m of people on a trail (Taylor & Knight 2003): open unhunted land is an upper bound for woods.',
   },
   'approach.seenReachM': { evidence: 'practice', note: 'Disturbance carries 200-400 yards.' },
   'approach.maskMost': { evidence: 'our choice', note: 'Wind masks noise; only the direction of the effect is known.' },

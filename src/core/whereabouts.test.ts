@@ -73,6 +73,20 @@ describe('where deer are', () => {
     expect(rut).toBeLessThan(1.3);
   });
 
+  it('does not fill a ground with deer by mapping it more finely', () => {
+    const uses = Array.from({ length: 12 }, () => usesOf(feature('bedding'), 12, DEFAULT_WHEREABOUTS));
+    const all = Int32Array.from(uses.keys());
+    const thinned = thinCrowded(
+      uses,
+      uses.map(() => all),
+      DEFAULT_WHEREABOUTS,
+    );
+    const middaySum = thinned.reduce((sum, use) => sum + (use[3] ?? 0), 0);
+    expect(middaySum).toBeCloseTo(DEFAULT_WHEREABOUTS.mostInUse, 12);
+    const [alone] = thinCrowded(uses.slice(0, 1), [Int32Array.of(0)], DEFAULT_WHEREABOUTS);
+    expect(alone).toEqual(uses[0]);
+  });
+
   it('says midday under a midnight sun and night in a polar night', () => {
     const none = { rise: null, set: null, civilDawn: null, civilDusk: null };
     expect(timeOfDay(noon, { ...none, polar: 'up_all_day' })).toBe('midday');

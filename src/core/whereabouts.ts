@@ -65,7 +65,7 @@ export const DEFAULT_WHEREABOUTS: WhereaboutsSettings = {
   rutMonths: [11],
   rutTravelFactor: 1.15,
   preRutScrapeFactor: 1.2,
-  mostInUse: 2,
+  mostInUse: 1.5,
   crowdM: 500,
 };
 

@@ -9,7 +9,7 @@ describe('being seen or heard on the way', () => {
   it('stays under the 70 % within 100 m of hikers on trails in open, unhunted land (Taylor & Knight 2003)', () => {
     for (const metres of [0, 25, 50, 75, 100]) {
       expect(chance(metres)).toBeLessThanOrEqual(0.7);
-      expect(chance(metres)).toBeGreaterThan(0.2);
+      expect(chance(metres)).toBeGreaterThan(0.15);
     }
   });
 
