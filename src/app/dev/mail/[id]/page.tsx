@@ -11,6 +11,15 @@ export const metadata: Metadata = { title: 'Kept mail' };
 
 const PRE = 'whitespace-pre-wrap break-words border border-rule bg-panel p-4';
 
+/** A plain link: what it opens is no page of the app. */
+function HtmlLink({ id }: { id: string }) {
+  return (
+    <a href={`/dev/mail/${id}/html`} className="text-moss underline">
+      Read it as HTML
+    </a>
+  );
+}
+
 export default publicPage(async ({ params }) => {
   const mail = await readKeptMail(params.id ?? '');
   if (!mail) notFound();
@@ -20,6 +29,7 @@ export default publicPage(async ({ params }) => {
       <DefinitionList
         items={[
           { term: 'To', detail: mail.toEmail },
+          ...(mail.html ? [{ term: 'HTML', detail: <HtmlLink id={mail.id} /> }] : []),
           { term: 'Message-ID', detail: <span className="break-all">{mail.messageId}</span> },
         ]}
       />
@@ -37,16 +47,6 @@ export default publicPage(async ({ params }) => {
           )}
         </p>
       </Section>
-      {mail.html && (
-        <Section title="HTML">
-          <iframe
-            title="The mail as HTML"
-            sandbox="allow-popups allow-popups-to-escape-sandbox"
-            srcDoc={`<base target="_blank">${mail.html}`}
-            className="h-96 w-full border border-rule bg-paper"
-          />
-        </Section>
-      )}
       {mail.calendar && (
         <Section title="Calendar part">
           <pre className={PRE}>{mail.calendar}</pre>
