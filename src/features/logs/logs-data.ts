@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, gt, gte, isNull, lte, max, min, or } from 'drizzle-orm';
+import { and, asc, desc, eq, gt, gte, isNotNull, isNull, lte, max, min, or } from 'drizzle-orm';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
 import { memberships, outings, type SitLogSnapshot, sitLogs, sitLogVersions, sits, stands, users } from '@/db/schema';
 import { newId } from '@/lib/ids';
@@ -110,7 +110,7 @@ export async function listLogged(
         booked(scope),
         gte(sits.day, ask.fromDay),
         lte(sits.day, ask.toDay),
-        gt(sitLogs.createdAt, 0),
+        isNotNull(sitLogs.sitId),
         ask.own ? ownSits(scope.member.id) : undefined,
       ),
     )

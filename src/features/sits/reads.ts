@@ -7,6 +7,7 @@ import type { Detail } from '@/core/rank-input';
 import { sunTimes } from '@/core/sun';
 import { type SitWindow, type Verdict, WEAPONS, type Weapon, type WindowName } from '@/core/types';
 import { nextWindow, sitWindow } from '@/core/windows';
+import { readQuotaCautions } from '@/features/harvest/quota-cautions';
 import { maySeeSightings } from '@/features/logs/see-sightings';
 import type { KeptForecast } from '@/features/weather/get-forecast';
 import { notFound } from '@/server/errors';
@@ -115,7 +116,8 @@ export async function readSits(
   const { club } = scope;
   const { window, weapon, kept, scoring, mine, verdicts } = await rank(scope, { ...ask, detail: 'list' }, now, options);
   const { input, rows } = scoring;
-  const cautions = sharedCautions(verdicts);
+  const shared = sharedCautions(verdicts);
+  const quotas = options.rules === 'leave_out' ? [] : await readQuotaCautions(scope, window.day);
   const stands = new Map(input.stands.map((stand) => [stand.id, stand]));
   return {
     club: clubView(club),
@@ -127,8 +129,8 @@ export async function readSits(
     light: lightOf(club, window.day, weapon),
     forecast: forecastView(kept, window),
     weather: weatherLines(kept.forecast, window, club.units),
-    cautions,
-    ...shapeRows(verdicts, mine?.standId ?? null, { club, startAt: window.startAt, stands, rows, shared: cautions }),
+    cautions: [...quotas, ...shared],
+    ...shapeRows(verdicts, mine?.standId ?? null, { club, startAt: window.startAt, stands, rows, shared }),
     mine,
     standCount: input.stands.length,
     madeAt: now,

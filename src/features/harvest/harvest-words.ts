@@ -1,0 +1,32 @@
+import type { AgeClass, AgeMethod, Sex } from '@/core/harvest/harvest-types';
+
+export const AGE_WORDS: Record<AgeClass, string> = {
+  fawn: 'Fawn',
+  '1.5': '1½ years',
+  '2.5': '2½ years',
+  '3.5': '3½ years',
+  '4.5': '4½ years',
+  '5.5_plus': '5½ years or more',
+};
+
+export const AGE_METHOD_WORDS: Record<AgeMethod, string> = {
+  teeth: 'Teeth: replacement and wear',
+  tooth_rings: 'Rings of a tooth, counted by a laboratory',
+  body: 'Looks of the body',
+};
+
+export const DEER_KINDS = ['antlered_buck', 'other_buck', 'doe'] as const;
+export type DeerKind = (typeof DEER_KINDS)[number];
+
+export const DEER_KIND_WORDS: Record<DeerKind, string> = {
+  antlered_buck: 'Antlered buck',
+  other_buck: 'Buck without antlers',
+  doe: 'Doe',
+};
+
+export const SEX_WORDS: Record<Sex, string> = { buck: 'Bucks', doe: 'Does' };
+
+export function deerKind(deer: { sex: Sex; antlered: boolean }): DeerKind {
+  if (deer.sex === 'doe') return 'doe';
+  return deer.antlered ? 'antlered_buck' : 'other_buck';
+}

@@ -1,0 +1,50 @@
+import { formatWeight, mmToIn, type Units } from '@/core/units';
+import { momentText } from '@/features/clubs/audit-words';
+import { WEAPON_WORDS } from '@/features/ground/words';
+import type { ClubScope } from '@/server/scope';
+import { AGE_WORDS, DEER_KIND_WORDS, deerKind } from './harvest-words';
+import type { HarvestRow, Sheet } from './harvests-data';
+
+export interface SheetLine {
+  id: string;
+  whenText: string;
+  hunter: string;
+  deer: string;
+  age: string;
+  weight: string;
+  antlers: string;
+  where: string;
+  weapon: string;
+}
+
+function hunterText({ sheet, memberName }: Sheet): string {
+  return sheet.guestName === '' ? memberName : `${sheet.guestName}, guest of ${memberName}`;
+}
+
+export const lengthWords = (mm: number, units: Units) =>
+  units === 'us' ? `${Number(mmToIn(mm).toFixed(2))} in` : `${Number((mm / 10).toFixed(1))} cm`;
+
+function antlersText(row: HarvestRow, units: Units): string {
+  const { pointsLeft, pointsRight, insideSpreadMm } = row;
+  const parts = [
+    (pointsLeft !== null || pointsRight !== null) && `${pointsLeft ?? '?'} and ${pointsRight ?? '?'} points`,
+    insideSpreadMm !== null && `${lengthWords(insideSpreadMm, units)} inside`,
+  ].filter((part) => part !== false);
+  return parts.join(', ');
+}
+
+export function sheetLine(scope: ClubScope, one: Sheet): SheetLine {
+  const { sheet, standName } = one;
+  const { club } = scope;
+  return {
+    id: sheet.id,
+    whenText: momentText(sheet.takenAt, club),
+    hunter: hunterText(one),
+    deer: DEER_KIND_WORDS[deerKind(sheet)],
+    age: sheet.age === null ? '' : AGE_WORDS[sheet.age],
+    weight: sheet.dressedKg === null ? '' : formatWeight(sheet.dressedKg, club.units),
+    antlers: antlersText(sheet, club.units),
+    where: standName ?? sheet.place,
+    weapon: WEAPON_WORDS[sheet.weapon],
+  };
+}
