@@ -3,6 +3,7 @@ import { buildAudit } from './build-audit';
 import { buildClosures } from './build-closures';
 import { buildClub, buildUsers } from './build-club';
 import { buildGround } from './build-ground';
+import { buildLand } from './build-land';
 import { buildLogs } from './build-logs';
 import { buildVisits } from './build-visits';
 import { planComingSits } from './coming-sits';
@@ -49,5 +50,6 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
       ...buildAudit(day, club, { ground, closures, sits }),
       ...buildAudit(day, second, { ground: { ...ground, stands: second.stands }, closures: [], sits: [] }),
     ],
+    mapItems: buildLand(day, club),
   };
 }

@@ -1,10 +1,11 @@
+import { cropYearOf } from '@/core/map-layers';
 import { ftToM } from '@/core/units';
 import { APPROACHES } from './approaches';
 import type { MadeClub } from './build-club';
 import { type DemoDay, momentOf } from './demo-day';
 import { latLonOf, positionOf } from './demo-place';
 import type { DemoRows } from './demo-rows';
-import { ALL_YEAR, FEATURES, geometryOf } from './features';
+import { ALL_YEAR, drawnOf, FEATURES } from './features';
 import { PARKINGS } from './parkings';
 import type { DemoStand } from './stand-types';
 import { STANDS } from './stands';
@@ -85,8 +86,12 @@ export function buildGround(day: DemoDay, club: MadeClub): MadeGround {
     clubId,
     name: feature.name,
     kind: feature.kind,
-    geometry: geometryOf(feature.shape),
+    geometry: drawnOf(feature.shape),
     months: feature.months ?? ALL_YEAR,
+    rotation: (feature.rotation ?? []).map(({ yearsAgo, ...crop }) => ({
+      ...crop,
+      year: cropYearOf(day.today) - yearsAgo,
+    })),
     use: feature.use ?? null,
     notes: feature.notes ?? '',
   }));

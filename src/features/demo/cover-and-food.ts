@@ -148,6 +148,11 @@ export const FOOD: readonly DemoFeature[] = [
       ],
     },
     months: [7, 8, 9, 10, 11, 12],
+    rotation: [
+      { yearsAgo: -1, crop: 'Soybeans', months: [6, 7, 8, 9, 10, 11] },
+      { yearsAgo: 0, crop: 'Corn', months: [7, 8, 9, 10, 11, 12, 1, 2] },
+      { yearsAgo: 1, crop: 'Soybeans', months: [6, 7, 8, 9, 10, 11] },
+    ],
     notes: 'Standing until the neighbour combines it; waste grain after.',
   },
   {

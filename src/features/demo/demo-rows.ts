@@ -10,6 +10,7 @@ export interface DemoRows {
   closures: (typeof schema.closures.$inferInsert)[];
   approaches: (typeof schema.approaches.$inferInsert)[];
   features: (typeof schema.features.$inferInsert)[];
+  mapItems: (typeof schema.mapItems.$inferInsert)[];
   sits: (typeof schema.sits.$inferInsert)[];
   claims: (typeof schema.claims.$inferInsert)[];
   sitLogs: (typeof schema.sitLogs.$inferInsert)[];

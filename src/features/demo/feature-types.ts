@@ -9,5 +9,7 @@ export interface DemoFeature {
   months?: number[];
   /** The steward's own shares in place of those of its kind. */
   use?: UseTable;
+  /** Crops of this year and those before it. */
+  rotation?: { yearsAgo: number; crop: string; months: number[] }[];
   notes?: string;
 }

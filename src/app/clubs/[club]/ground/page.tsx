@@ -1,14 +1,21 @@
 import { FeaturesTable, ParkingsTable } from '@/features/ground/components/ground-tables';
 import { readGround } from '@/features/ground/reads';
+import { readMap } from '@/features/map/read-map';
+import { GroundMap } from '@/features/moment/components/ground-map';
+import { windowToPick } from '@/features/sits/reads';
+import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { EmptyState } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
+import { saveDrawingAction } from './actions';
 
 export const metadata = { title: 'Ground' };
 
-export default clubPage('features.read', async ({ scope }) => {
-  const { features, parkings } = await readGround(scope);
+export default clubPage('features.read', async ({ scope, search }) => {
+  const at = now();
+  const [{ features, parkings }, map] = await Promise.all([readGround(scope), readMap(scope, at)]);
+  const { day, window } = windowToPick(at, scope.club);
   const base = `/clubs/${scope.club.slug}/ground`;
   const canWrite = scope.can('features.write');
   const addFeature = <ButtonLink href={`${base}/features/new`}>Add a feature</ButtonLink>;
@@ -16,6 +23,13 @@ export default clubPage('features.read', async ({ scope }) => {
   return (
     <>
       <PageTitle title="Ground" lead="What deer use and where people leave their trucks: the ranking weighs both." />
+      <GroundMap
+        initial={map}
+        zone={scope.club.zone}
+        save={saveDrawingAction}
+        selectedId={typeof search.select === 'string' ? search.select : null}
+        next={{ day, window }}
+      />
       <Section title="Features" actions={canWrite && features.length > 0 && addFeature}>
         <FeaturesTable
           club={scope.club.slug}

@@ -1,0 +1,60 @@
+'use client';
+
+import { useState } from 'react';
+import type { GoodWindArc } from '@/core/types';
+import { ARC_FIELDS, arcText, readArcs } from '@/features/ground/arc-text';
+import { Button } from '@/ui/button';
+import { TextInput } from '@/ui/text-inputs';
+
+const LABELS = {
+  arcsBoth: 'Good winds',
+  arcsMorning: 'Morning only',
+  arcsEvening: 'Evening only',
+} as const;
+
+/** A quarter to begin with, about the wind that most often blows: it is there to be turned. */
+const FIRST_ARC: GoodWindArc = { fromDeg: 270, toDeg: 0, window: null };
+
+/** A stand's winds in words; the same as turning the brackets by hand. */
+export function ArcFields({
+  arcs,
+  onChange,
+}: {
+  arcs: readonly GoodWindArc[];
+  onChange: (arcs: GoodWindArc[], field: string) => void;
+}) {
+  const [typed, setTyped] = useState<{ name: string; text: string } | null>(null);
+  return (
+    <fieldset className="grid gap-3">
+      <legend className="sr-only">Good winds</legend>
+      {ARC_FIELDS.map(({ name, window }) => {
+        const text = typed?.name === name ? typed.text : arcText(arcs, window);
+        const read = readArcs(text, window);
+        return (
+          <TextInput
+            key={name}
+            label={LABELS[name]}
+            hint={name === 'arcsBoth' ? 'Where the wind may come from: NW-N, or 310-20' : undefined}
+            optional={name !== 'arcsBoth'}
+            autoComplete="off"
+            autoCapitalize="characters"
+            spellCheck={false}
+            value={text}
+            error={read.ok ? undefined : read.message}
+            onChange={({ target }) => {
+              setTyped({ name, text: target.value });
+              const next = readArcs(target.value, window);
+              if (next.ok) onChange([...arcs.filter((arc) => arc.window !== window), ...next.arcs], name);
+            }}
+            onBlur={() => setTyped(null)}
+          />
+        );
+      })}
+      {arcs.length === 0 ? (
+        <Button onClick={() => onChange([FIRST_ARC], 'first')}>Set winds by hand on the map</Button>
+      ) : (
+        <p className="text-ink-soft text-sm">Or drag the round handles beside the stand.</p>
+      )}
+    </fieldset>
+  );
+}

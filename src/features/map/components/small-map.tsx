@@ -1,0 +1,80 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import dynamic from 'next/dynamic';
+import { useMemo } from 'react';
+import { Button } from '@/ui/button';
+import { ErrorState, Loading } from '@/ui/notices';
+import { factsOf } from '../facts';
+import { mapQuery } from '../queries';
+import type { MapThing } from '../thing';
+import { nameOf } from '../words';
+
+const MapCanvas = dynamic(() => import('./map-canvas').then((part) => part.MapCanvas), {
+  ssr: false,
+  loading: () => <Loading label="Unfolding the map" />,
+});
+
+/** Kinds that help a person find the way; the rest of the ground would only crowd a small map. */
+function aboutStand(things: readonly MapThing[], standId: string): MapThing[] {
+  const ways = things.filter((thing) => thing.kind === 'approach' && thing.standId === standId);
+  const gates = new Set(ways.flatMap((way) => (way.kind === 'approach' && way.parkingId ? [way.parkingId] : [])));
+  const near = things.filter(
+    (thing) => thing.kind === 'item' || thing.kind === 'feature' || thing.id === standId || gates.has(thing.id),
+  );
+  return [...near, ...ways];
+}
+
+export interface SmallMapProps {
+  club: string;
+  standId: string;
+  /** A way to be marked among those of the stand. */
+  approachId?: string | null;
+}
+
+/** The ground about one stand with its ways in. Its code and its data come only when it is shown. */
+export function SmallMap({ club, standId, approachId = null }: SmallMapProps) {
+  const query = useQuery(mapQuery(club));
+  const view = query.data;
+  const things = useMemo(() => (view ? aboutStand(view.things, standId) : []), [view, standId]);
+  const framed = useMemo(() => things.filter((thing) => thing.kind !== 'item' && thing.kind !== 'feature'), [things]);
+  if (query.isError) {
+    return (
+      <ErrorState title="The map could not be read" action={<Button onClick={() => query.refetch()}>Try again</Button>}>
+        {query.error.message}
+      </ErrorState>
+    );
+  }
+  if (!view) return <Loading label="Unfolding the map" />;
+  const stand = things.find((thing) => thing.id === standId);
+  const ways = things.filter((thing) => thing.kind === 'approach');
+  return (
+    <figure>
+      <MapCanvas
+        compact
+        view={view}
+        things={things}
+        frame={framed}
+        label={`Map of the way to ${stand ? nameOf(stand) : 'the stand'}`}
+        className="relative h-72 sm:h-80"
+        selectedId={approachId ?? standId}
+      />
+      <figcaption className="mt-1 text-sm">
+        {ways.length === 0 && <p className="text-ink-soft">No way in is drawn.</p>}
+        <ul>
+          {ways.map((way) => (
+            <li key={way.id}>
+              <span className="font-semibold">{nameOf(way)}</span>{' '}
+              <span className="text-ink-soft">
+                {factsOf(way, view.things, view.club)
+                  .filter(({ term }) => term === 'Size' || term === 'From')
+                  .map(({ detail }) => detail)
+                  .join(', from ')}
+              </span>
+            </li>
+          ))}
+        </ul>
+      </figcaption>
+    </figure>
+  );
+}

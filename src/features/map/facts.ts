@@ -1,0 +1,89 @@
+import { arcsFor } from '@/core/arcs';
+import { formatDistance } from '@/core/units';
+import { formatBearing } from '@/features/ground/bearing-text';
+import { degreesText } from '@/features/ground/place-text';
+import { formatArcs, formatWinds } from '@/features/ground/view';
+import { DIRECTION_WORDS, formatMonths } from '@/features/ground/words';
+import { sizeOf, sizeText } from './drawing/measure';
+import type { MapClub, MapThing } from './thing';
+import { whatOf } from './words';
+
+export interface Fact {
+  term: string;
+  detail: string;
+}
+
+function standName(things: readonly MapThing[], id: string | null): string {
+  return things.find((thing) => thing.id === id)?.name ?? '';
+}
+
+/** Everything the map shows of a thing, in words. */
+export function factsOf(thing: MapThing, things: readonly MapThing[], club: MapClub): Fact[] {
+  const size = sizeText(club, thing.geometry, club.units);
+  const facts: Fact[] = [{ term: 'Kind', detail: whatOf(thing) }];
+  if (thing.geometry.type === 'Point') {
+    const [lon = 0, lat = 0] = thing.geometry.coordinates;
+    facts.push({ term: 'Latitude, longitude', detail: `${degreesText(lat)}, ${degreesText(lon)}` });
+  } else facts.push({ term: 'Size', detail: size });
+  switch (thing.kind) {
+    case 'stand':
+      facts.push(
+        { term: 'Good winds, morning', detail: formatArcs(arcsFor(thing.arcs, 'morning')) },
+        { term: 'Good winds, evening', detail: formatArcs(arcsFor(thing.arcs, 'evening')) },
+      );
+      if (thing.closed) facts.push({ term: 'Open', detail: thing.closed });
+      break;
+    case 'approach':
+      facts.push(
+        { term: 'Leads to', detail: standName(things, thing.standId) || 'No stand' },
+        { term: 'From', detail: standName(things, thing.parkingId) || 'No parking place' },
+        { term: 'Walked', detail: DIRECTION_WORDS[thing.direction] },
+      );
+      break;
+    case 'feature':
+      facts.push({ term: 'Months', detail: formatMonths(thing.months) });
+      if (thing.crop) facts.push({ term: 'Crop this year', detail: thing.crop });
+      break;
+    case 'item':
+      if (thing.props.cutYear) facts.push({ term: 'Timber cut', detail: String(thing.props.cutYear) });
+      if (thing.props.sector) {
+        const { fromDeg, toDeg, reachM } = thing.props.sector;
+        facts.push({
+          term: 'No shooting',
+          detail: `${formatBearing(fromDeg)} to ${formatBearing(toDeg)}, ${formatDistance(reachM, club.units)}`,
+        });
+      }
+      break;
+  }
+  return facts;
+}
+
+/** The same in a few words, for a row of the list. */
+export function briefOf(thing: MapThing, things: readonly MapThing[], club: MapClub): string {
+  const size = sizeOf(club, thing.geometry).lengthM > 0 ? sizeText(club, thing.geometry, club.units).split(',')[0] : '';
+  const parts: (string | undefined)[] = [];
+  switch (thing.kind) {
+    case 'stand':
+      parts.push(whatOf(thing), thing.arcs.length > 0 ? formatWinds(thing.arcs) : 'no winds set', thing.closed);
+      break;
+    case 'parking':
+      break;
+    case 'approach': {
+      const from = standName(things, thing.parkingId);
+      parts.push(`to ${standName(things, thing.standId) || 'no stand'}`, from && `from ${from}`, size);
+      break;
+    }
+    case 'feature':
+      parts.push(
+        whatOf(thing),
+        thing.crop ?? undefined,
+        size,
+        thing.months.length < 12 ? formatMonths(thing.months) : '',
+      );
+      break;
+    case 'item':
+      parts.push(thing.name ? whatOf(thing) : '', thing.props.cutYear ? `cut ${thing.props.cutYear}` : '', size);
+      break;
+  }
+  return parts.filter(Boolean).join(', ');
+}

@@ -1,0 +1,77 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import dynamic from 'next/dynamic';
+import { useMemo, useState } from 'react';
+import type { WindowName } from '@/core/types';
+import type { SaveDrawing } from '@/features/map/components/use-save-drawing';
+import type { MapOverlay } from '@/features/map/overlay';
+import { mapQuery } from '@/features/map/queries';
+import type { MapView } from '@/features/map/thing';
+import { EmptyState, Loading } from '@/ui/notices';
+import type { MomentAsk } from '../ask-moment';
+import type { MomentView } from '../moment-types';
+import { momentAsked } from '../queries';
+import { weightOf } from '../stretch-view';
+import { MomentPanel } from './moment-panel';
+
+const MapScreen = dynamic(() => import('@/features/map/components/map-screen').then((part) => part.MapScreen), {
+  ssr: false,
+  loading: () => <Loading label="Unfolding the map" />,
+});
+
+export interface GroundMapProps {
+  initial: MapView;
+  zone: string;
+  save: SaveDrawing;
+  selectedId: string | null;
+  /** The window that comes next. */
+  next: { day: string; window: WindowName };
+}
+
+function overlayOf(view: MomentView): MapOverlay {
+  return {
+    bands: view.bands.map(({ area }) => area),
+    stretches: view.way?.stretches.map(({ from, to, chance }) => ({ from, to, weight: weightOf(chance) })) ?? [],
+    sun: view.sun.altitudeDeg > -6 ? { at: view.stand.at, azimuthDeg: view.sun.azimuthDeg } : null,
+    sitters: view.sitters.map(({ at, name }) => ({ at, name })),
+  };
+}
+
+/** The club's map with what a moment lays over it. The map's own code comes when this is first shown. */
+export function GroundMap({ initial, zone, save, selectedId, next }: GroundMapProps) {
+  const { slug, units } = initial.club;
+  const map = useQuery({ ...mapQuery(slug), initialData: initial, initialDataUpdatedAt: initial.madeAt });
+  const stands = useMemo(
+    () => map.data.things.flatMap((thing) => (thing.kind === 'stand' ? [{ id: thing.id, name: thing.name }] : [])),
+    [map.data],
+  );
+  const [open, setOpen] = useState(false);
+  const [asked, setAsked] = useState<MomentAsk>({ ...next, stand: '', step: 0 });
+  const ask = stands.some(({ id }) => id === asked.stand) ? asked : { ...asked, stand: stands[0]?.id ?? '' };
+  const query = useQuery({ ...momentAsked(slug, ask), enabled: open && ask.stand !== '' });
+  const view = query.data;
+  const overlay = useMemo(() => (view ? overlayOf(view) : null), [view]);
+  const panel =
+    stands.length === 0 ? (
+      <EmptyState title="No stands yet">Draw a stand first: a moment is looked at from its seat.</EmptyState>
+    ) : (
+      <MomentPanel
+        ask={ask}
+        stands={stands}
+        club={{ zone, units }}
+        view={view}
+        error={query.isError ? query.error.message : null}
+        onAsk={setAsked}
+        onRetry={() => void query.refetch()}
+      />
+    );
+  return (
+    <MapScreen
+      initial={initial}
+      save={save}
+      selectedId={selectedId}
+      moment={{ label: 'For a moment', panel, overlay, open, onOpen: setOpen }}
+    />
+  );
+}
