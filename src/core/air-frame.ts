@@ -21,7 +21,7 @@ export interface SeatFrame {
   stability: StabilityClass[];
   /** Directions over the whole sit and by step; speeds in them are at the seat only where slope drift plays. */
   sit: DirectionSummary;
-  steps: () => DirectionSummary[];
+  readonly steps: DirectionSummary[];
   shares: number[] | null;
 }
 
@@ -96,7 +96,7 @@ function directionsOf(set: ScenarioSet): Directions {
   let steps: DirectionSummary[] | null = null;
   return {
     sit: directionSummary(set),
-    steps: () => {
+    get steps() {
       steps ??= set.at.map((_, t) => directionSummary(set, t));
       return steps;
     },
@@ -116,7 +116,18 @@ function seatFrame(
   const set = scenariosAtStand(open, air);
   const drifts = air.some((step) => step.driftWeight > 0);
   const stability = air.map((step) => step.stability);
-  return { air, set, stability, ...(drifts ? directionsOf(set) : directions()) };
+  const own = drifts ? directionsOf(set) : directions();
+  return {
+    air,
+    set,
+    stability,
+    sit: own.sit,
+    shares: own.shares,
+    // Worked out when first read: a ranked list has no use for it.
+    get steps() {
+      return own.steps;
+    },
+  };
 }
 
 /**

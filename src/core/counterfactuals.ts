@@ -25,7 +25,7 @@ interface Turned {
 function scentIf(frame: SitFrame, sums: SitSums, fromDeg: number, k: number) {
   const seat = frame.air?.seatOf(sums.stand.stand);
   if (!seat) return null;
-  const steps = seat.steps().map((s, t) => ({
+  const steps = seat.steps.map((s, t) => ({
     fromDeg: t < k ? s.meanFromDeg : fromDeg,
     speedMps: seat.air[t]?.seatSpeedMps ?? 0,
   }));
@@ -70,7 +70,7 @@ function whatIfWind(frame: SitFrame, sums: SitSums): Counterfactual[] {
     const lead = `If the wind ${turn < 0 ? 'backs' : 'veers'} to ${sectorName(to)}${after}`;
     const then = scentIf(frame, sums, to, k);
     const reached = then ? features[then.top] : undefined;
-    if (then && reached && then.topChance >= 0.15 && then.chance >= asItIs + 0.1) {
+    if (then && reached && then.topChance >= 0.08 && then.chance >= asItIs + 0.05) {
       found.push({ code: 'wind_scent', text: `${lead}, scent reaches ${reached.name}`, weight: likely * then.chance });
     } else if (arcs.length > 0 && anyArcContains(arcs, mean) && !anyArcContains(arcs, to)) {
       found.push({ code: 'wind_arc', text: `${lead}, it leaves the good winds of this stand`, weight: likely * 0.1 });

@@ -16,7 +16,7 @@ export interface ReasonFacts {
   arcShare: number | null;
   arcsKnown: boolean;
   forecast: boolean;
-  topScent: { name: string; chance: number } | null;
+  topScent: { name: string } | null;
   windedChance: number | null;
   /** null: no way in is drawn. */
   wayName: string | null;
@@ -59,9 +59,8 @@ function quietDrafts(f: Factors, x: ReasonFacts): Draft[] {
     add('arc', text, 'practice', swap({ arc: 1 }));
   }
   if (x.windedChance !== null) {
-    const text = x.topScent
-      ? `Scent from the seat may reach ${x.topScent.name} (${percent(x.topScent.chance)})`
-      : 'Scent from the seat reaches no mapped place';
+    const most = x.topScent ? `, most of it at ${x.topScent.name}` : '';
+    const text = `Scent from the seat may reach deer: ${percent(x.windedChance)}${most}`;
     add('seat_scent', text, 'standard', swap({ seat: 1 }));
   }
   if (x.wayName) {
@@ -92,7 +91,8 @@ function promiseDrafts(f: Factors, x: ReasonFacts, usableBase: number): Draft[] 
     drafts.push({ code, text, evidence, without, part });
   add('suitability', `The steward rates it ${x.suitability} for this window`, 'practice', swap({ base: usableBase }));
   const near = x.featuresInRange.slice(0, 3).join(', ');
-  add('features', near ? `In range: ${near}` : 'Nothing deer use is in range', 'practice', swap({ features: 1 }));
+  const lead = f.promise.features >= 1 ? 'In range' : 'In range, little in use then';
+  add('features', near ? `${lead}: ${near}` : 'Nothing deer use is in range', 'practice', swap({ features: 1 }));
   add('crosswind', 'How the wind lies to the travel line in range', 'practice', swap({ crosswind: 1 }));
   add('sun', `Low sun in the eyes${x.sunSpan ? ` ${x.sunSpan}` : ''}`, 'practice', swap({ sun: 1 }));
   add('rain', 'Rain during the sit', 'our choice', swap({ rain: 1 }));

@@ -12,7 +12,10 @@ function windPart(verdict: Verdict, clock: Clock): string {
     return from === null ? 'Wind light and variable' : `${sectorName(from)} wind, no good winds set`;
   }
   const share = `${Math.round(hold.shareOfTime * 100)} %`;
-  const until = hold.likeliestLeavingAt === null ? '' : ` until ${clock(hold.likeliestLeavingAt)}`;
+  const leaves = hold.likeliestLeavingAt;
+  // A wind that is as likely out of its arcs from the start does not hold until anything.
+  const holds = leaves !== null && hold.shareOfTime >= 0.6 && leaves > (verdict.timeline[0]?.at ?? 0);
+  const until = holds ? ` until ${clock(leaves)}` : '';
   if (from === null) return `Wind light and variable, ${share} in its arcs`;
   if (hold.shareOfTime < 0.25) return `${sectorName(from)} is the wrong wind (${share})`;
   return `${sectorName(from)} holds ${share}${until}`;

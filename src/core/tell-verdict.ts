@@ -42,7 +42,7 @@ function factsOf(frame: SitFrame, sums: SitSums, verdict: Verdict): ReasonFacts 
     arcShare: sums.arcs.share,
     arcsKnown: sums.arcs.known,
     forecast: frame.air !== null,
-    topScent: top ? { name: top.featureName, chance: top.chance } : null,
+    topScent: top ? { name: top.featureName } : null,
     windedChance: verdict.windedChance,
     wayName: first?.way.approach.name ?? null,
     outName: first?.outName ?? null,

@@ -20,7 +20,7 @@ function noteOf(step: Pick<TimelineStep, 'windedChance' | 'arcHold'>, drift: str
 export function timelineOf(frame: SitFrame, sums: SitSums): TimelineStep[] {
   const { features, settings } = frame.ground.input;
   const seat = frame.air?.seatOf(sums.stand.stand) ?? null;
-  const directions = seat?.steps() ?? null;
+  const directions = seat?.steps ?? null;
   return frame.window.stepAts.map((at, t) => {
     const air = seat?.air[t];
     const scent = sums.scent?.byStep[t];

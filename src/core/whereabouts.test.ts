@@ -1,6 +1,14 @@
 import { describe, expect, it } from 'vitest';
 import type { FeatureKind, ScoredFeature } from './types';
-import { DEFAULT_WHEREABOUTS, type SunMarks, shareAt, timeOfDay, timeWeights, usesOf } from './whereabouts';
+import {
+  DEFAULT_WHEREABOUTS,
+  type SunMarks,
+  shareAt,
+  thinCrowded,
+  timeOfDay,
+  timeWeights,
+  usesOf,
+} from './whereabouts';
 
 const HOUR = 3_600_000;
 const noon = Date.UTC(2023, 10, 11, 17);
