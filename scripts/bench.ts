@@ -76,7 +76,7 @@ function main(): void {
   console.log(
     `Node ${process.version}; 100 stands x ${world.windows.length} windows, 300 features, 200 approach points`,
   );
-  console.log('Medians of processor time, the collector'"'"'s helper threads counted; the work itself is on one thread.\n');
+  console.log('Medians of processor time, helper threads of garbage collection counted; the work is on one thread.\n');
   for (let i = 0; i < 4; i++) rankWeek(world, prepareGround(world));
   const prepare = times(7, () => prepareGround(world));
   const fresh = times(7, () => rankWeek(world, prepareGround(world)));
