@@ -68,7 +68,7 @@ export const PERMISSIONS_BY_ROLE: Record<Role, readonly Permission[]> = {
   ],
   member: MEMBER,
   /** Books only inside the dates of the invitation (access-window.ts) and never sees where features lie. */
-  guest: ['club.read', 'sits.read', 'sits.book', 'board.read', 'log.write'],
+  guest: ['club.read', 'sits.read', 'sits.book', 'board.read'],
   landowner: ['club.read', 'board.read', 'closed_days.write'],
 };
 

@@ -3,6 +3,7 @@ import { reader, write } from '@/db/client';
 import * as schema from '@/db/schema';
 import { DEMO_SLUG } from '@/features/demo/build-demo';
 import { seedDemo } from '@/features/demo/seed-demo';
+import { refreshAllForecasts } from '@/features/weather/refresh-all';
 import { setClock } from '@/server/clock';
 import { startSession } from '@/server/session';
 import { inRequest, newBrowser, type TestRequest } from './request';
@@ -66,6 +67,8 @@ async function realParams(): Promise<Record<string, string>> {
     .select()
     .from(schema.memberships)
     .where(eq(schema.memberships.clubId, club?.id ?? ''));
+  const [log] = await from.select().from(schema.sitLogs).limit(1);
+  const [harvest] = await from.select().from(schema.harvests).limit(1);
   return {
     club: DEMO_SLUG,
     stand: approach?.standId ?? '',
@@ -73,6 +76,8 @@ async function realParams(): Promise<Record<string, string>> {
     feature: feature?.id ?? '',
     parking: parking?.id ?? '',
     member: member?.id ?? '',
+    sit: log?.sitId ?? '',
+    harvest: harvest?.id ?? '',
     id: 'none',
     token: 'none',
     secret: 'none.ics',
@@ -83,6 +88,7 @@ async function realParams(): Promise<Record<string, string>> {
 export async function openDemo(): Promise<DemoVisitors> {
   setClock(() => DEMO_NOW);
   await seedDemo('file:demo.db', DEMO_NOW);
+  await refreshAllForecasts(DEMO_NOW);
   await write((tx) =>
     tx.insert(schema.users).values({
       id: 'usr_stranger',

@@ -2,6 +2,7 @@ import { count, eq, getTableColumns } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { addDays, dayOf, daysBetween } from '@/core/day-time';
 import { distanceM, insideRings, toLocal } from '@/core/geometry';
+import { quotaStates } from '@/core/harvest/quotas';
 import { ROLES } from '@/core/permissions';
 import { FEATURE_KINDS, STAND_KINDS, type WindowName } from '@/core/types';
 import { m2ToAcre } from '@/core/units';
@@ -50,9 +51,12 @@ const tables = {
   closures: schema.closures,
   approaches: schema.approaches,
   features: schema.features,
+  mapItems: schema.mapItems,
   sits: schema.sits,
   claims: schema.claims,
   sitLogs: schema.sitLogs,
+  sitLogVersions: schema.sitLogVersions,
+  harvests: schema.harvests,
   visits: schema.visits,
   auditLog: schema.auditLog,
 };
@@ -228,6 +232,25 @@ describe.each(DAYS)('the demo made at %d', (now) => {
       expect(log.endAt).toBeGreaterThan(log.startAt);
       expect(log.startAt).toBeGreaterThanOrEqual(ended.get(log.sitId)?.startAt ?? Number.POSITIVE_INFINITY);
     }
+  });
+
+  it('has deer taken from sits whose logs tell of the shot, within most of the quotas', () => {
+    expect(rows.harvests.length).toBeGreaterThanOrEqual(4);
+    const logs = new Map(rows.sitLogs.map((log) => [log.sitId, log]));
+    for (const sheet of rows.harvests) {
+      const log = logs.get(sheet.sitId ?? '');
+      expect(log).toMatchObject({ shot: 'hit', shotAt: sheet.takenAt, followUp: 'recovered' });
+      expect(sheet.antlered ? log?.antleredBucks : log?.does).toBeGreaterThan(0);
+      expect(sheet.createdAt).toBeLessThan(now);
+    }
+    const quotas = rows.clubs[0]?.rules.harvestQuotas ?? [];
+    const taken = rows.harvests.map((sheet) => ({ ...sheet, byGuest: sheet.guestName !== '' }));
+    const [member] = taken.filter((sheet) => sheet.antlered);
+    const states = quotaStates(quotas, taken, member?.memberId ?? null);
+    expect(states.some((state) => state.met)).toBe(true);
+    expect(states.every((state) => state.taken <= state.quota.most)).toBe(true);
+    const [before] = rows.sitLogVersions;
+    expect(logs.get(before?.sitId ?? '')?.version).toBe(2);
   });
 
   it('comes out the same at any hour of a day and otherwise on another', () => {

@@ -51,5 +51,5 @@ it('says a quota, and that it is met, in words', () => {
   const [state] = quotaStates([ONE_BUCK], [deer('ann', { antlered: true })], 'ann');
   if (!state) throw new Error('no state');
   expect(metText(state, 'own')).toBe('Your limit of 1 antlered deer this season is met (1 taken).');
-  expect(metText(state, 'sponsor')).toContain("Your sponsor's limit");
+  expect(metText(state, 'sponsor')).toContain('Your deer count on your sponsor, whose limit of 1 antlered deer');
 });

@@ -61,7 +61,7 @@ export function quotaStates(
 export type CountOwner = 'own' | 'sponsor';
 
 const OWNER_WORDS: Record<Exclude<QuotaPer, 'club'>, Record<CountOwner, string>> = {
-  member: { own: 'Your limit', sponsor: "Your sponsor's limit, on which your deer count," },
+  member: { own: 'Your limit', sponsor: 'Your deer count on your sponsor, whose limit' },
   member_guests: { own: 'The limit for your guests', sponsor: "The limit for your sponsor's guests" },
 };
 

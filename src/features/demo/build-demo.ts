@@ -3,6 +3,7 @@ import { buildAudit } from './build-audit';
 import { buildClosures } from './build-closures';
 import { buildClub, buildUsers } from './build-club';
 import { buildGround } from './build-ground';
+import { buildHarvests, buildLogVersions } from './build-harvests';
 import { buildLand } from './build-land';
 import { buildLogs } from './build-logs';
 import { buildVisits } from './build-visits';
@@ -32,6 +33,10 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
   planPastSeason(day, club, ground, planner);
   planComingSits(day, club, ground, planner);
   const { sits } = planner;
+  const sitLogs = buildLogs(day, ground, sits);
+  const taken = { today, dice: makeDice(`harvest ${today}`) };
+  const harvests = buildHarvests(taken, club, sitLogs, sits);
+  const sitLogVersions = buildLogVersions(taken, sitLogs, sits);
   const { parkings, stands, approaches, features } = ground;
   return {
     users,
@@ -44,7 +49,9 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
     features,
     sits,
     claims: claimsOf(day, sits),
-    sitLogs: buildLogs(day, ground, sits),
+    sitLogs,
+    sitLogVersions,
+    harvests,
     visits: buildVisits(day, club, ground),
     auditLog: [
       ...buildAudit(day, club, { ground, closures, sits }),

@@ -26,6 +26,8 @@ export async function insertDemo(tx: Tx, rows: DemoRows): Promise<void> {
   await insertAll(tx, schema.sits, rows.sits);
   await insertAll(tx, schema.claims, rows.claims);
   await insertAll(tx, schema.sitLogs, rows.sitLogs);
+  await insertAll(tx, schema.sitLogVersions, rows.sitLogVersions);
+  await insertAll(tx, schema.harvests, rows.harvests);
   await insertAll(tx, schema.visits, rows.visits);
   await insertAll(tx, schema.auditLog, rows.auditLog);
 }

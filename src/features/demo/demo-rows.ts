@@ -14,6 +14,8 @@ export interface DemoRows {
   sits: (typeof schema.sits.$inferInsert)[];
   claims: (typeof schema.claims.$inferInsert)[];
   sitLogs: (typeof schema.sitLogs.$inferInsert)[];
+  sitLogVersions: (typeof schema.sitLogVersions.$inferInsert)[];
+  harvests: (typeof schema.harvests.$inferInsert)[];
   visits: (typeof schema.visits.$inferInsert)[];
   auditLog: (typeof schema.auditLog.$inferInsert)[];
 }

@@ -47,5 +47,15 @@ export function demoRules(today: string): ClubRules {
       source: SOURCE,
       statedOn,
     },
+    harvestQuotas: [
+      { deer: 'antlered', per: 'member', most: 1 },
+      { deer: 'antlerless', per: 'club', most: 6 },
+      { deer: 'any', per: 'member_guests', most: 2 },
+    ],
+    stateHarvestRule: {
+      text: 'Antlered deer: as the licence says. Antlerless deer: in the weeks and numbers the digest gives for the county.\nTag a deer before it is moved and report it by the end of the next day.',
+      source: SOURCE,
+      statedOn,
+    },
   };
 }

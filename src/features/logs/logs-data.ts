@@ -28,7 +28,6 @@ function selectSits(from: ReadFrom) {
       memberEmail: users.email,
       memberRole: memberships.role,
       sponsorId: memberships.sponsorId,
-      guestTo: memberships.guestTo,
       log: sitLogs,
     })
     .from(sits)
@@ -175,11 +174,12 @@ export function listVersions(scope: ClubScope, sitId: string, from: ReadFrom = r
     .orderBy(desc(sitLogVersions.version));
 }
 
-export async function findMemberName(scope: ClubScope, memberId: string, from: ReadFrom = reader()) {
+/** Somebody who is or was in the club. */
+export async function findPerson(scope: ClubScope, memberId: string, from: ReadFrom = reader()) {
   const [row] = await from
-    .select({ name: users.name })
+    .select({ name: users.name, email: users.email, removedAt: memberships.removedAt })
     .from(memberships)
     .innerJoin(users, eq(users.id, memberships.userId))
     .where(and(eq(memberships.clubId, scope.club.id), eq(memberships.id, memberId)));
-  return row?.name ?? null;
+  return row ?? null;
 }

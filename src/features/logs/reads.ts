@@ -10,8 +10,8 @@ import type { LogForm } from './log-schema';
 import { bumpsText, countsText, shotText } from './log-words';
 import {
   findLoggable,
-  findMemberName,
   findOutingSpan,
+  findPerson,
   type LoggableSit,
   listEnded,
   listLogged,
@@ -136,7 +136,7 @@ export async function readLogScreen(scope: ClubScope, now: number): Promise<LogS
     })),
     mine: logged.map((sit) => logLine(club, sit, sit.log)),
     club: scope.can('log.write_any') ? await readClubLogs(scope, now) : null,
-    visits: scope.can('log.read') ? await listVisitLines(scope, now) : [],
+    visits: await listVisitLines(scope, now),
   };
 }
 
@@ -182,7 +182,7 @@ export async function readLog(scope: ClubScope, sitId: string, now: number): Pro
   });
   const { log } = sit;
   const versions = log ? await listVersions(scope, sitId) : [];
-  const saver = log ? ((await findMemberName(scope, log.savedBy ?? sit.memberId)) ?? sit.memberName) : '';
+  const saver = log ? ((await findPerson(scope, log.savedBy ?? sit.memberId))?.name ?? sit.memberName) : '';
   const blank = () => findOutingSpan(scope, sitId).then((span) => newLogForm(sit, span, now, club.zone));
   const form = log ? logFormOf(sit, log, club.zone) : await blank();
   return {

@@ -1,4 +1,4 @@
-import { dayOf, formatClock } from '@/core/day-time';
+import { formatClock } from '@/core/day-time';
 import { type ReadFrom, reader, type Tx, write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';
 import { env } from '@/env';
@@ -7,7 +7,7 @@ import { composeMail } from '@/features/mail/compose';
 import { hasMail } from '@/features/mail/data';
 import { queueMail } from '@/server/outbox';
 import { type ClubScope, systemScopeById } from '@/server/scope';
-import { type LoggableSit, listUnlogged } from './logs-data';
+import { findPerson, type LoggableSit, listUnlogged } from './logs-data';
 
 const HOUR_MS = 3_600_000;
 /** Most write their log on the way home; the others are asked once after a night's sleep (our choice). */
@@ -20,14 +20,24 @@ const TO_CLOCK = '20:30';
 
 const keyOf = (sit: LoggableSit) => `log.missing:${sit.id}`;
 
+/** The member, or for a guest's sit the member who answers for them: guests write no logs. */
+async function reminded(tx: Tx, scope: ClubScope, sit: LoggableSit): Promise<{ name: string; email: string } | null> {
+  if (sit.memberRole !== 'guest') return { name: sit.memberName, email: sit.memberEmail };
+  const sponsor = sit.sponsorId === null ? null : await findPerson(scope, sit.sponsorId, tx);
+  return sponsor && sponsor.removedAt === null ? { name: sponsor.name, email: sponsor.email } : null;
+}
+
 async function remind(tx: Tx, scope: ClubScope, sit: LoggableSit, now: number): Promise<boolean> {
   const { club } = scope;
+  const to = await reminded(tx, scope, sit);
+  if (!to) return false;
+  const whose = to.name === sit.memberName ? 'Your sit' : `The sit of your guest ${sit.memberName}`;
   const when = dayAndWindow(sit.day, sit.windows, true);
   const { text, html } = composeMail({
     clubName: club.name,
     paragraphs: [
-      `Hello ${sit.memberName},`,
-      `Your sit at ${sit.standName} has no log yet. It takes twenty seconds, and a sit in which nothing was seen counts as much as any other.`,
+      `Hello ${to.name},`,
+      `${whose} at ${sit.standName} has no log yet. It takes twenty seconds, and a sit in which nothing was seen counts as much as any other.`,
     ],
     facts: [
       { label: 'Stand', value: sit.standName },
@@ -37,7 +47,6 @@ async function remind(tx: Tx, scope: ClubScope, sit: LoggableSit, now: number): 
     button: { label: 'Write the log', url: `${env.appUrl}/clubs/${club.slug}/log/${sit.id}` },
     footer: 'You get this once for each sit without a log.',
   });
-  const to = { email: sit.memberEmail, name: sit.memberName };
   const subject = `No log yet: ${sit.standName}, ${dayAndWindow(sit.day, sit.windows)}`;
   return queueMail(tx, { clubId: club.id, kind: 'log.missing', dedupeKey: keyOf(sit), to, subject, text, html }, now);
 }
@@ -45,9 +54,7 @@ async function remind(tx: Tx, scope: ClubScope, sit: LoggableSit, now: number): 
 async function listUnreminded(scope: ClubScope, now: number, from: ReadFrom): Promise<LoggableSit[]> {
   const unlogged = await listUnlogged(scope, { from: now - UNTIL_MS, until: now - AFTER_MS }, from);
   const known = await hasMail(unlogged.map(keyOf), from);
-  const today = dayOf(now, scope.club.zone);
-  const stillIn = (sit: LoggableSit) => sit.guestTo === null || sit.guestTo >= today;
-  return unlogged.filter((sit) => stillIn(sit) && !known.has(keyOf(sit)));
+  return unlogged.filter((sit) => !known.has(keyOf(sit)));
 }
 
 /** Asks once, by mail and by day, for each log that is missing. The mail's key keeps it to once in any number of processes. */

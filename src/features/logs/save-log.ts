@@ -10,7 +10,7 @@ import { mayWriteLog } from './log-access';
 import type { LogInput } from './log-schema';
 import {
   findLoggable,
-  findMemberName,
+  findPerson,
   insertLog,
   keepVersion,
   type LoggableSit,
@@ -92,7 +92,7 @@ export async function saveLog(scope: ClubScope, input: LogInput, now: number): P
     if (before && sameFacts(before, facts)) return saved(before.version);
     if ((before?.version ?? 0) !== input.version) {
       const by = before
-        ? ((await findMemberName(scope, before.savedBy ?? sit.memberId, tx)) ?? 'Somebody')
+        ? ((await findPerson(scope, before.savedBy ?? sit.memberId, tx))?.name ?? 'Somebody')
         : 'Somebody';
       throw new AppError(
         'conflict',

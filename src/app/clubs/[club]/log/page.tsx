@@ -26,11 +26,9 @@ export default clubPage('log.write', async ({ scope }) => {
         actions={
           <>
             {addVisit}
-            {scope.can('log.read') && (
-              <ButtonLink look="quiet" href={`/clubs/${slug}/season/sightings`}>
-                The season's figures
-              </ButtonLink>
-            )}
+            <ButtonLink look="quiet" href={`/clubs/${slug}/season/sightings`}>
+              The season's figures
+            </ButtonLink>
           </>
         }
       />
@@ -60,17 +58,15 @@ export default clubPage('log.write', async ({ scope }) => {
           )}
         </Section>
       )}
-      {scope.can('log.read') && (
-        <Section title="Other visits" note="Camera checks, work, walks and drives press on the deer as sits do.">
-          {visits.length === 0 ? (
-            <EmptyState title="No visit in the last month" action={addVisit}>
-              Write down what was done on the ground, so that the list of stands knows of it.
-            </EmptyState>
-          ) : (
-            <VisitList club={slug} lines={visits} remove={removeVisitAction} />
-          )}
-        </Section>
-      )}
+      <Section title="Other visits" note="Camera checks, work, walks and drives press on the deer as sits do.">
+        {visits.length === 0 ? (
+          <EmptyState title="No visit in the last month" action={addVisit}>
+            Write down what was done on the ground, so that the list of stands knows of it.
+          </EmptyState>
+        ) : (
+          <VisitList club={slug} lines={visits} remove={removeVisitAction} />
+        )}
+      </Section>
     </>
   );
 });
