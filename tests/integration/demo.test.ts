@@ -57,6 +57,8 @@ const tables = {
   sitLogs: schema.sitLogs,
   sitLogVersions: schema.sitLogVersions,
   harvests: schema.harvests,
+  outings: schema.outings,
+  safetyContacts: schema.safetyContacts,
   visits: schema.visits,
   auditLog: schema.auditLog,
 };
@@ -253,9 +255,21 @@ describe.each(DAYS)('the demo made at %d', (now) => {
     expect(logs.get(before?.sitId ?? '')?.version).toBe(2);
   });
 
-  it('comes out the same at any hour of a day and otherwise on another', () => {
+  it('has whoever sits now on the ground, once a member, and nobody for a sit that does not stand', () => {
+    const stand = new Set(rows.sits.filter(({ status }) => status === 'booked').map(({ id }) => id));
+    const open = rows.outings.filter(({ signedOutAt }) => signedOutAt === null);
+    expect(rows.outings.length).toBeGreaterThan(40);
+    expect(rows.outings.every(({ sitId }) => stand.has(sitId))).toBe(true);
+    expect(new Set(open.map(({ memberId }) => memberId)).size).toBe(open.length);
+    expect(rows.outings.every(({ signedInAt, signedOutAt }) => signedInAt <= now && (signedOutAt ?? now) <= now)).toBe(
+      true,
+    );
+    expect(rows.outings.some(({ tracking }) => tracking)).toBe(true);
+  });
+
+  it('comes out the same at any hour of a day, but for who is on the ground, and otherwise on another', () => {
     const later = buildDemo(now + 3_600_000, 'hash');
-    expect(later).toEqual(rows);
+    expect({ ...later, outings: rows.outings }).toEqual(rows);
     expect(buildDemo(now + 86_400_000, 'hash').sits[0]?.id).not.toBe(rows.sits[0]?.id);
   });
 });

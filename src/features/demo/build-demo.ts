@@ -6,6 +6,7 @@ import { buildGround } from './build-ground';
 import { buildHarvests, buildLogVersions } from './build-harvests';
 import { buildLand } from './build-land';
 import { buildLogs } from './build-logs';
+import { buildContacts, buildOutings } from './build-outings';
 import { buildVisits } from './build-visits';
 import { planComingSits } from './coming-sits';
 import { DEMO_PLACE } from './demo-place';
@@ -19,7 +20,7 @@ import { claimsOf, makePlanner } from './sit-planner';
 
 export const DEMO_SLUG = 'tansy-fork';
 
-/** The demo as rows. The same day gives the same rows, whatever the hour. */
+/** The demo as rows. The same day gives the same rows, whatever the hour; only who is on the ground goes by the hour. */
 export function buildDemo(now: number, passwordHash: string): DemoRows {
   const today = dayOf(now, DEMO_PLACE.zone);
   const day = { today, dice: makeDice(`demo ${today}`) };
@@ -49,6 +50,8 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
     features,
     sits,
     claims: claimsOf(day, sits),
+    outings: buildOutings(club, ground, sits, now),
+    safetyContacts: buildContacts(club),
     sitLogs,
     sitLogVersions,
     harvests,

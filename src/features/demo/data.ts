@@ -25,6 +25,8 @@ export async function insertDemo(tx: Tx, rows: DemoRows): Promise<void> {
   await insertAll(tx, schema.mapItems, rows.mapItems);
   await insertAll(tx, schema.sits, rows.sits);
   await insertAll(tx, schema.claims, rows.claims);
+  await insertAll(tx, schema.outings, rows.outings);
+  await insertAll(tx, schema.safetyContacts, rows.safetyContacts);
   await insertAll(tx, schema.sitLogs, rows.sitLogs);
   await insertAll(tx, schema.sitLogVersions, rows.sitLogVersions);
   await insertAll(tx, schema.harvests, rows.harvests);

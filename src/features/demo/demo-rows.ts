@@ -13,6 +13,8 @@ export interface DemoRows {
   mapItems: (typeof schema.mapItems.$inferInsert)[];
   sits: (typeof schema.sits.$inferInsert)[];
   claims: (typeof schema.claims.$inferInsert)[];
+  outings: (typeof schema.outings.$inferInsert)[];
+  safetyContacts: (typeof schema.safetyContacts.$inferInsert)[];
   sitLogs: (typeof schema.sitLogs.$inferInsert)[];
   sitLogVersions: (typeof schema.sitLogVersions.$inferInsert)[];
   harvests: (typeof schema.harvests.$inferInsert)[];
