@@ -13,7 +13,7 @@ export const ROLE_NOTES: Record<Role, string> = {
   admin: 'Everything, with members, rules and the audit log.',
   steward: 'Keeps stands, ground and closures, and hunts.',
   member: 'Sees the ground, books and hunts.',
-  guest: 'Hunts between two days, and a named member answers for it. Never sees where deer features lie.',
+  guest: 'Hunts between two days, and a named member answers for them. Never sees where deer features lie.',
   landowner: 'Sees the board and closes days. Does not hunt.',
 };
 

@@ -13,7 +13,7 @@ export function AuditTable({ lines }: { lines: AuditLine[] }) {
       <TBody>
         {lines.map((line) => (
           <Tr key={line.id}>
-            <RowHead className="font-normal sm:whitespace-nowrap">{line.when}</RowHead>
+            <RowHead className="font-normal! sm:whitespace-nowrap">{line.when}</RowHead>
             <Td label="Who">{line.who}</Td>
             <Td label="What">{line.what}</Td>
             <Td label="In words" className="min-w-0">

@@ -16,7 +16,7 @@ export function JobRuns({ caption, runs }: { caption: string; runs: JobRunLine[]
       <TBody>
         {runs.map((run) => (
           <Tr key={run.id}>
-            <RowHead className="font-normal sm:whitespace-nowrap">{run.when}</RowHead>
+            <RowHead className="font-normal! sm:whitespace-nowrap">{run.when}</RowHead>
             <Td label="State">
               <Badge look={LOOKS[run.state]}>{run.state}</Badge>
             </Td>

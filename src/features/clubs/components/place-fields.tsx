@@ -121,6 +121,7 @@ export function PlaceFields({ zones, withSlug = false }: Props) {
             options={zoneChoices(zones, zone).map((one) => ({ value: one, label: one.replaceAll('_', ' ') }))}
             fieldClassName="max-w-sm"
             {...register('zone')}
+            value={zone}
             error={errors.zone?.message}
             required
           />

@@ -44,7 +44,7 @@ export default clubPage('members.write', async ({ scope, params }) => {
         </Notice>
       ) : (
         <>
-          <Section title="Role">
+          <Section title="Change the role">
             <ChangeMemberForm
               club={scope.club.slug}
               member={standing}
