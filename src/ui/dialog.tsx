@@ -2,7 +2,7 @@
 
 import { X } from 'lucide-react';
 import * as RadixDialog from 'radix-ui/dialog';
-import type { ReactNode } from 'react';
+import { type ReactNode, useRef } from 'react';
 import { joinClasses } from './join-classes';
 
 export const VEIL_CLASSES = 'fixed inset-0 z-40 bg-veil';
@@ -23,6 +23,7 @@ export interface DialogProps {
 }
 
 export function Dialog({ title, description, trigger, open, onOpenChange, className, children }: DialogProps) {
+  const before = useRef<Element | null>(null);
   return (
     <RadixDialog.Root open={open} onOpenChange={onOpenChange}>
       {trigger && <RadixDialog.Trigger asChild>{trigger}</RadixDialog.Trigger>}
@@ -30,6 +31,15 @@ export function Dialog({ title, description, trigger, open, onOpenChange, classN
         <RadixDialog.Overlay className={VEIL_CLASSES} />
         <RadixDialog.Content
           className={joinClasses(SHEET_CLASSES, className)}
+          onOpenAutoFocus={() => {
+            before.current = document.activeElement;
+          }}
+          onCloseAutoFocus={(event) => {
+            // Without a trigger of its own the dialog would leave focus at the top of the page.
+            if (trigger || !(before.current instanceof HTMLElement)) return;
+            event.preventDefault();
+            before.current.focus();
+          }}
           {...(description ? {} : { 'aria-describedby': undefined })}
         >
           <div className="double-rule mb-4 flex items-start justify-between gap-4 pb-2">

@@ -4,10 +4,11 @@ import { useQuery } from '@tanstack/react-query';
 import { Button } from '@/ui/button';
 import { ErrorState, Loading } from '@/ui/notices';
 import { SitTimeline } from '@/ui/wind/sit-timeline';
+import { mergeRows, type StripRow } from '@/ui/wind/strip-shares';
 import { WindStrip } from '@/ui/wind/wind-strip';
 import type { SitsAskText } from '../ask-schema';
 import { sitDetailQuery } from '../queries';
-import type { SitDetailView, SitsView } from '../view-types';
+import type { SitDetailView, SitsView, TimelineView } from '../view-types';
 import { clockText, shortClock } from '../words';
 import { DetailPart } from './detail-part';
 import { ReasonList } from './reason-list';
@@ -53,6 +54,12 @@ function holdText(detail: SitDetailView, view: SitsView): string | null {
         : 'it may be out of it from the start';
   }
   return `In a good arc for ${percent(hold.share)} of the sit; ${percent(hold.neverLeaves)} that it never leaves, and ${leaves}. Worst half hour: ${at(hold.worstAt)}, ${percent(hold.worstShare)}.`;
+}
+
+/** A row an hour: the mean of its two half hours. */
+function hourRows(steps: TimelineView[]): StripRow[] {
+  const rows = steps.map(({ at, shares, arcHold }): StripRow => ({ at, shares, hold: arcHold }));
+  return rows.flatMap((row, i) => (i % 2 === 0 ? [mergeRows(rows.slice(i, i + 2)) ?? row] : []));
 }
 
 function marksOf(view: SitsView) {
@@ -102,12 +109,7 @@ function DetailBody({ detail, view }: { detail: SitDetailView; view: SitsView })
       {known && (
         <DetailPart title="Where the wind will be" className="min-w-0">
           {hold && <p className="mb-2">{hold}</p>}
-          <WindStrip
-            variant="page"
-            arcs={detail.arcs}
-            rows={hours.map(({ at, shares, arcHold }) => ({ at, shares, hold: arcHold }))}
-            formatClock={short}
-          />
+          <WindStrip variant="page" arcs={detail.arcs} rows={hourRows(detail.timeline)} formatClock={short} />
           <WindByHour hours={hours} club={view.club} />
         </DetailPart>
       )}

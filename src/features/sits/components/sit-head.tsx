@@ -1,7 +1,7 @@
 'use client';
 
 import { useId, useState } from 'react';
-import { Button } from '@/ui/button';
+import { Button, ButtonLink } from '@/ui/button';
 import type { SitsView } from '../view-types';
 import { AlmanacHead, AlmanacLine } from './almanac-head';
 import { ChooseWindow, WindowSteps } from './window-picker';
@@ -14,15 +14,20 @@ export function SitHead({ view }: { view: SitsView }) {
     <>
       <WindowSteps view={view} />
       <AlmanacLine view={view} />
-      <Button
-        look="quiet"
-        className="-ml-2 sm:hidden print:hidden"
-        aria-expanded={unfolded}
-        aria-controls={id}
-        onClick={() => setUnfolded(!unfolded)}
-      >
-        {unfolded ? 'Less' : 'Another day or weapon; sun and moon'}
-      </Button>
+      <div className="flex justify-between sm:hidden print:hidden">
+        <Button
+          look="quiet"
+          className="-ml-2"
+          aria-expanded={unfolded}
+          aria-controls={id}
+          onClick={() => setUnfolded(!unfolded)}
+        >
+          {unfolded ? 'Fold' : 'Day, weapon, moon'}
+        </Button>
+        <ButtonLink look="quiet" className="-mr-2" href={`/clubs/${view.club.slug}/week`}>
+          The whole week
+        </ButtonLink>
+      </div>
       <div id={id} className={unfolded ? undefined : 'max-sm:hidden'}>
         <ChooseWindow view={view} />
         <AlmanacHead view={view} />

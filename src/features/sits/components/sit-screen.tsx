@@ -37,10 +37,10 @@ export function SitScreen({ ask, initial, openStandId, actions, hunters, may }: 
   return (
     <>
       <PageTitle
-        over={view.club.name}
+        over={<span className="max-sm:hidden">{view.club.name}</span>}
         title={`${formatDay(window.day)}, ${WINDOW_WORDS[window.window]}`}
         actions={
-          <ButtonLink look="quiet" href={`/clubs/${slug}/week`}>
+          <ButtonLink look="quiet" className="max-sm:hidden" href={`/clubs/${slug}/week`}>
             The whole week
           </ButtonLink>
         }

@@ -25,7 +25,7 @@ export function WeekScreen({ ask, initial }: { ask: WeekAskText; initial: WeekVi
   return (
     <>
       <PageTitle
-        over={view.club.name}
+        over={<span className="max-sm:hidden">{view.club.name}</span>}
         title="Week"
         lead="Every stand in every window the forecast reaches."
         actions={
