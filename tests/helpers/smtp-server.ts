@@ -8,8 +8,8 @@ export interface TestSmtp {
   close: () => Promise<void>;
 }
 
-/** A real mail server on a free port that keeps what it is given. */
-export async function serveSmtp(): Promise<TestSmtp> {
+/** A real mail server on a free port that keeps what it is given. `onMail` runs before the sender is told that it arrived. */
+export async function serveSmtp(onMail: (mail: ParsedMail) => void = () => undefined): Promise<TestSmtp> {
   const mails: ParsedMail[] = [];
   const server = new SMTPServer({
     authOptional: true,
@@ -17,6 +17,7 @@ export async function serveSmtp(): Promise<TestSmtp> {
     onData: (stream, _session, done) => {
       simpleParser(stream).then((mail) => {
         mails.push(mail);
+        onMail(mail);
         done();
       }, done);
     },
