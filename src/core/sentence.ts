@@ -21,11 +21,16 @@ function windPart(verdict: Verdict, clock: Clock): string {
   return `${sectorName(from)} holds ${share}${until}`;
 }
 
-/** One plain line for a list: "NW holds 84 % until 10; walk in by Creek Gate, in by 6:05". A gate comes first where there is one. */
-export function sentence(verdict: Verdict, clock: Clock): string {
+/**
+ * One plain line for a list: "NW holds 84 % until 10; walk in by Creek Gate, in by 6:05". A gate comes first where there is
+ * one. `now` (UTC ms) is given while the sit can still be walked to: a way whose time has passed is then called too late.
+ */
+export function sentence(verdict: Verdict, clock: Clock, now: number | null = null): string {
   const gate = verdict.gates[0];
   if (gate) return gate.text;
   const way = verdict.approach;
-  const walk = way ? `walk in by ${way.approachName}, in by ${clock(way.inBy)}` : 'no way in is drawn for it';
+  let walk = 'no way in is drawn for it';
+  if (way) walk = `walk in by ${way.approachName}, in by ${clock(way.inBy)}`;
+  if (way && now !== null && way.leaveBy < now) walk = `too late to walk in, it was to be in by ${clock(way.inBy)}`;
   return `${windPart(verdict, clock)}; ${walk}`;
 }

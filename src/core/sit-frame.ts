@@ -30,6 +30,8 @@ export interface SitFrame {
   glareOf: (facingDeg: number | null) => Glare;
   clock: (at: number) => string;
   detail: Detail;
+  /** UTC ms at which the sit is judged. */
+  now: number;
 }
 
 /** US units go with a 12-hour clock. */
@@ -112,6 +114,7 @@ export function frameSits(
     ground,
     window,
     air,
+    now,
     walks: {
       frame: window,
       windAt: (at) => air?.walkWindAt(at) ?? null,

@@ -50,6 +50,22 @@ describe('a verdict', () => {
     expect(sentence(one({ ...base, approaches: [] }), clock)).toContain('no way in is drawn');
   });
 
+  it('recommends no way in whose time has passed, while another is left; then says that it is too late', () => {
+    const window = windowOf('morning');
+    const first = one({ ...base, now: window.startAt - 6 * 3_600_000 });
+    const leaveBy = first.approach?.leaveBy ?? 0;
+    expect(first.approach?.entry).toBe('before_light');
+    expect(one({ ...base, now: leaveBy }).approach).toEqual(first.approach);
+    const later = one({ ...base, now: leaveBy + 60_000 });
+    expect(later.approach?.leaveBy).toBeGreaterThan(leaveBy);
+    expect(later.approachAlternatives.every((way) => way.leaveBy > leaveBy)).toBe(true);
+    expect(later.score).toBeLessThanOrEqual(first.score);
+    const last = window.endAt - 60_000;
+    const late = one({ ...base, now: last });
+    expect(sentence(late, clock, last)).toMatch(/; too late to walk in, it was to be in by \d\d:\d\d$/);
+    expect(one({ ...base, now: window.endAt }).approach).toEqual(first.approach);
+  });
+
   it('warns of the turn of the wind that brings scent to the beds', () => {
     // From the west the scent goes east; the beds lie north, so a wind that backs to the south reaches them.
     const v = one({ ...base, forecast: makeForecast(windowOf('morning'), 250, 3) });

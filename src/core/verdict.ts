@@ -1,4 +1,4 @@
-import { tryWays } from './approach/try-ways';
+import { type TriedWay, tryWays } from './approach/try-ways';
 import { arcsFor, coveredDeg } from './arcs';
 import { type BeforeWay, toOption, type WeighedWay, weighWays } from './choose-way';
 import { frameGround, type StandFrame } from './ground-frame';
@@ -53,6 +53,13 @@ function scentSums(frame: SitFrame, stand: StandFrame): SeatScent | null {
   return scent.windedChance === null ? null : scent;
 }
 
+/** Ways in that can still be walked: once it is too late for all of them, or the window is over, all of them as they were. */
+function waysLeft(tried: TriedWay[], endAt: number, now: number): TriedWay[] {
+  if (endAt <= now) return tried;
+  const left = tried.filter(({ way, entry }) => entry.inBy - way.seconds * 1000 >= now);
+  return left.length > 0 ? left : tried;
+}
+
 /** The sums for one stand in one window. */
 export function sumSit(frame: SitFrame, stand: StandFrame): SitSums {
   const { settings } = frame.ground.input;
@@ -86,7 +93,7 @@ export function sumSit(frame: SitFrame, stand: StandFrame): SitSums {
     scent: scent ? { winded: scent.windedChance ?? 0, exponents: windedExponents(scent.stepChance) } : null,
   };
   const tried = tryWays(stand.waysIn, stand.waysOut, frame.entries, window.endAt, frame.walks);
-  const ways = weighWays(tried, before, frame.window, settings.score);
+  const ways = weighWays(waysLeft(tried, window.endAt, frame.now), before, frame.window, settings.score);
   const best = ways[0] ?? { factors: before.factors, ...scoreOf(before.factors, settings.score) };
   return { stand, arcs, scent, steps, glare, pressure, before, ways, best };
 }

@@ -13,21 +13,28 @@ import { cautionView, orNull, round1, round3 } from './view';
 import type { ReasonView, SitDetailView, TimelineView, WayView } from './view-types';
 import { ENTRY_WORDS } from './words';
 
+const wholeDeg = (deg: number) => ((Math.round(deg) % 360) + 360) % 360;
+
 /** Ways in that are worth telling beside the best. */
 const MOST_WAYS = 6;
 
-function walkOf(approach: ScoredApproach | undefined): { walkM: number; bearingDeg: number | null } {
+function walkOf(
+  approach: ScoredApproach | undefined,
+  declinationDeg: number | null,
+): Pick<WayView, 'walkM' | 'bearingDeg' | 'magneticDeg'> {
   const points = approach?.points.slice(approach.vehicleToIndex) ?? [];
   const [first, last] = [points[0], points.at(-1)];
-  if (!first || !last) return { walkM: 0, bearingDeg: null };
+  if (!first || !last) return { walkM: 0, bearingDeg: null, magneticDeg: null };
   const walkM = points.slice(1).reduce((sum, point, i) => sum + distanceM(points[i] ?? point, point), 0);
+  const toward = distanceM(first, last) < 1 ? null : bearingDeg(first, last);
   return {
     walkM: Math.round(walkM),
-    bearingDeg: distanceM(first, last) < 1 ? null : Math.round(bearingDeg(first, last)) % 360,
+    bearingDeg: orNull(toward, wholeDeg),
+    magneticDeg: toward === null || declinationDeg === null ? null : wholeDeg(toward - declinationDeg),
   };
 }
 
-function wayView(way: ApproachOption, best: ApproachOption, approaches: ScoredApproach[]): WayView {
+function wayView(way: ApproachOption, best: ApproachOption, ask: DetailAsk): WayView {
   return {
     approachId: way.approachId,
     name: way.approachName,
@@ -36,7 +43,11 @@ function wayView(way: ApproachOption, best: ApproachOption, approaches: ScoredAp
     leaveBy: way.leaveBy,
     inBy: way.inBy,
     walkSeconds: Math.round(way.walkSeconds),
-    ...walkOf(approaches.find((approach) => approach.id === way.approachId)),
+    passed: way.leaveBy < ask.now && ask.window.endAt > ask.now,
+    ...walkOf(
+      ask.approaches.find((approach) => approach.id === way.approachId),
+      ask.declinationDeg,
+    ),
     inChance: round3(way.inChance),
     outChance: round3(way.outChance),
     quiet: round1(way.quiet),
@@ -68,12 +79,20 @@ function reasonView({ code, text, change, part, evidence }: Reason, seeSightings
   return { code, text: told, change: round1(change), part, evidence };
 }
 
-/** Everything there is to say of one sit. `seeSightings`: the reader may see what others saw. */
-export function shapeDetail(
-  verdict: Verdict,
-  ask: { stand: ScoredStand; window: SitWindow; approaches: ScoredApproach[]; seeSightings: boolean },
-): SitDetailView {
-  const { stand, window, approaches } = ask;
+export interface DetailAsk {
+  stand: ScoredStand;
+  window: SitWindow;
+  approaches: ScoredApproach[];
+  /** The reader may see what others saw. */
+  seeSightings: boolean;
+  /** Degrees that magnetic north lies east of true north; null: not known. */
+  declinationDeg: number | null;
+  now: number;
+}
+
+/** Everything there is to say of one sit. */
+export function shapeDetail(verdict: Verdict, ask: DetailAsk): Omit<SitDetailView, 'mayMap'> {
+  const { stand, window } = ask;
   const best = verdict.approach;
   const hold = verdict.arcHold;
   return {
@@ -96,9 +115,7 @@ export function shapeDetail(
     scent: verdict.scentByFeature.map(({ featureName, chance }) => ({ name: featureName, chance: round3(chance) })),
     timeline: verdict.timeline.map(timelineView),
     reasons: verdict.reasons.map((reason) => reasonView(reason, ask.seeSightings)),
-    ways: best
-      ? [best, ...verdict.approachAlternatives].slice(0, MOST_WAYS).map((way) => wayView(way, best, approaches))
-      : [],
+    ways: best ? [best, ...verdict.approachAlternatives].slice(0, MOST_WAYS).map((way) => wayView(way, best, ask)) : [],
     counterfactuals: verdict.counterfactuals.map((one) => one.text),
     cautions: verdict.cautions.map(cautionView),
     confidence: verdict.confidence,

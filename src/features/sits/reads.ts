@@ -9,6 +9,7 @@ import { type SitWindow, type Verdict, WEAPONS, type Weapon, type WindowName } f
 import { nextWindow, sitWindow } from '@/core/windows';
 import { readQuotaCautions } from '@/features/harvest/quota-cautions';
 import { maySeeSightings } from '@/features/logs/see-sightings';
+import { declinationDeg } from '@/features/map/magnetic';
 import type { KeptForecast } from '@/features/weather/get-forecast';
 import { notFound } from '@/server/errors';
 import type { ClubScope, ScopeClub } from '@/server/scope';
@@ -130,7 +131,7 @@ export async function readSits(
     forecast: forecastView(kept, window),
     weather: weatherLines(kept.forecast, window, club.units),
     cautions: [...quotas, ...shared],
-    ...shapeRows(verdicts, mine?.standId ?? null, { club, startAt: window.startAt, stands, rows, shared }),
+    ...shapeRows(verdicts, mine?.standId ?? null, { club, window, now, stands, rows, shared }),
     mine,
     standCount: input.stands.length,
     madeAt: now,
@@ -150,10 +151,13 @@ export async function readSitDetail(
   const verdict = verdicts[0];
   if (!stand || !verdict) throw notFound();
   const { club, member } = scope;
-  return shapeDetail(verdict, {
+  const shaped = shapeDetail(verdict, {
     stand,
     window,
     approaches: scoring.input.approaches,
     seeSightings: maySeeSightings(member.role, club.rules, dayOf(now, club.zone)),
+    declinationDeg: declinationDeg(club, window.startAt),
+    now,
   });
+  return { ...shaped, mayMap: scope.can('features.read') };
 }

@@ -160,6 +160,10 @@ export interface WayView extends WayBrief {
   walkM: number;
   /** Straight from where the walk begins to the stand, degrees true; null where the way has no length. */
   bearingDeg: number | null;
+  /** The same by compass. */
+  magneticDeg: number | null;
+  /** Too late to leave for it, though the window goes on. */
+  passed: boolean;
   inChance: number;
   outChance: number;
   quiet: number;
@@ -189,6 +193,8 @@ export interface SitDetailView {
   counterfactuals: string[];
   cautions: CautionView[];
   confidence: Confidence;
+  /** The reader may know what lies where: a map may be opened. */
+  mayMap: boolean;
 }
 
 export interface WeekCell {

@@ -77,7 +77,8 @@ function verdict(standId: string, more: Partial<Verdict> = {}): Verdict {
 }
 
 const stands = new Map(['a', 'b', 'c'].map((id) => [id, stand(id)]));
-const context = { club, startAt: START, stands, rows: { stands: [], approaches: [] }, shared: [] };
+const window = { startAt: START, endAt: START + 4 * 3_600_000 };
+const context = { club, window, now: START - 3_600_000, stands, rows: { stands: [], approaches: [] }, shared: [] };
 
 describe('shapeRows', () => {
   it('ranks open rows from 1, says the sentence in the club’s clock, and marks one’s own', () => {
@@ -152,7 +153,7 @@ describe('hideFeatures', () => {
 });
 
 describe('shapeDetail', () => {
-  const window = { day: '2026-11-07', window: 'morning' as const, startAt: START, endAt: START + 4 * 3_600_000 };
+  const sitWindow = { day: '2026-11-07', window: 'morning' as const, ...window };
   const approach = {
     id: 'a1',
     name: 'Creek Gate',
@@ -167,12 +168,32 @@ describe('shapeDetail', () => {
     ],
     vehicleToIndex: 1,
   };
-  const ask = { stand: stand('a'), window, approaches: [approach], seeSightings: false };
+  const ask = {
+    stand: stand('a'),
+    window: sitWindow,
+    approaches: [approach],
+    seeSightings: false,
+    declinationDeg: -10.4,
+    now: START - 3_600_000,
+  };
 
   it('walks from where the driving ends: length along the line, bearing straight to the stand', () => {
     const { ways } = shapeDetail(verdict('a'), ask);
     // 300 m east then 400 m north: 700 m walked; straight it is atan2(300, 400) = 36.87 degrees.
-    expect(ways[0]).toMatchObject({ walkM: 700, bearingDeg: 37, cost: 0, entry: 'in before light' });
+    expect(ways[0]).toMatchObject({ walkM: 700, bearingDeg: 37, cost: 0, entry: 'in before light', passed: false });
+  });
+
+  it('gives the compass bearing: true less declination, west of north being below nought', () => {
+    // 36.87 + 10.4 = 47.27; with 40 east it is 356.87, a little west of magnetic north.
+    const magnetic = (declinationDeg: number | null) =>
+      shapeDetail(verdict('a'), { ...ask, declinationDeg }).ways[0]?.magneticDeg;
+    expect([magnetic(-10.4), magnetic(40), magnetic(null)]).toEqual([47, 357, null]);
+  });
+
+  it('says that a way is too late from the minute one had to leave, until the window ends', () => {
+    const passed = (now: number) => shapeDetail(verdict('a'), { ...ask, now }).ways[0]?.passed;
+    const leaveBy = START - 30 * 60_000;
+    expect([leaveBy, leaveBy + 1, window.endAt - 1, window.endAt].map(passed)).toEqual([false, true, true, false]);
   });
 
   it('tells what each other way costs against the best', () => {

@@ -48,14 +48,15 @@ function withoutEarlyLeave(verdict: Verdict, startAt: number): Verdict {
 
 export interface RowContext {
   club: ClubClock;
-  startAt: number;
+  window: { startAt: number; endAt: number };
+  now: number;
   stands: ReadonlyMap<string, ScoredStand>;
   rows: Pick<GroundRows, 'stands' | 'approaches'>;
   shared: CautionView[];
 }
 
 function sitRow(verdict: Verdict, stand: ScoredStand, context: RowContext): SitRow {
-  const { club, rows, shared, startAt } = context;
+  const { club, rows, shared, window, now } = context;
   const known = new Set(shared.map((caution) => caution.text));
   return {
     standId: stand.id,
@@ -68,7 +69,11 @@ function sitRow(verdict: Verdict, stand: ScoredStand, context: RowContext): SitR
     arcs: arcsFor(stand.arcs, verdict.window),
     shares: verdict.directionShares?.map(round3) ?? null,
     hold: orNull(verdict.arcHold?.shareOfTime ?? null, round3),
-    sentence: sentence({ ...withoutEarlyLeave(verdict, startAt), gates: [] }, (at) => shortClock(at, club)),
+    sentence: sentence(
+      { ...withoutEarlyLeave(verdict, window.startAt), gates: [] },
+      (at) => shortClock(at, club),
+      window.endAt > now ? now : null,
+    ),
     confidence: verdict.confidence.level,
     cautions: verdict.cautions
       .filter(({ code, text }) => !SAID_ELSEWHERE.has(code) && !known.has(text))

@@ -9,8 +9,14 @@ const percent = (share: number) => `${Math.round(share * 100)} %`;
 function walkText(way: WayView, club: ClubView): string {
   const parts = [minutesText(way.walkSeconds)];
   if (way.walkM > 0) parts.push(formatDistance(way.walkM, club.units));
-  if (way.bearingDeg !== null) parts.push(`toward ${sectorName(way.bearingDeg)}, ${way.bearingDeg}° true`);
+  if (way.bearingDeg !== null) parts.push(`toward ${sectorName(way.bearingDeg)}, ${bearings(way)}`);
   return parts.join(', ');
+}
+
+function bearings(way: WayView): string {
+  return way.magneticDeg === null
+    ? `${way.bearingDeg}° true`
+    : `${way.bearingDeg}° true (${way.magneticDeg}° by compass)`;
 }
 
 function costText(way: WayView): string {
@@ -39,13 +45,14 @@ export function WaysIn({ ways, club }: { ways: WayView[]; club: ClubView }) {
             <span className="font-semibold">{best.name}</span>
             {best.parkingName && ` from ${best.parkingName}`}, {best.entry}
           </p>
+          {best.passed && <p className="font-semibold text-clay">It is too late to walk in by it unheard.</p>}
           <p>
             Leave by <b>{clock(best.leaveBy)}</b>, in by <b>{clock(best.inBy)}</b>
           </p>
           <p>Walk {walkText(best, club)}</p>
           <p className="text-ink-soft text-sm">
             Chance of alerting deer: walking in {percent(best.inChance)}, walking out {percent(best.outChance)}
-            {best.worst && `, most of it at ${best.worst.name}`}. Bearings are from true north.
+            {best.worst && `, most of it at ${best.worst.name}`}.
           </p>
         </div>
       </div>
