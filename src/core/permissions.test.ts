@@ -29,7 +29,12 @@ describe('the permission table', () => {
     expect(can('guest', 'features.read')).toBe(false);
     expect(can('guest', 'stands.read')).toBe(false);
     expect(can('guest', 'board.read')).toBe(true);
-    expect([...PERMISSIONS_BY_ROLE.landowner].sort()).toEqual(['board.read', 'closed_days.write', 'club.read']);
+    expect([...PERMISSIONS_BY_ROLE.landowner].sort()).toEqual([
+      'board.read',
+      'closed_days.write',
+      'club.read',
+      'notices.own',
+    ]);
   });
 
   it('lets a steward do all a member may, and work the ground', () => {

@@ -14,6 +14,7 @@ export const PERMISSIONS = [
   'features.read',
   'features.write',
   'approaches.write',
+  'ground.export',
   'sits.read',
   'sits.book',
   'sits.book_for_others',
@@ -33,6 +34,10 @@ export const PERMISSIONS = [
   'harvest.write',
   'harvest.write_any',
   'jobs.read',
+  'chores.read',
+  'chores.write',
+  'inspections.write',
+  'notices.own',
 ] as const;
 export type Permission = (typeof PERMISSIONS)[number];
 
@@ -49,6 +54,8 @@ const MEMBER = [
   'visits.write',
   'harvest.read',
   'harvest.write',
+  'chores.read',
+  'notices.own',
 ] as const satisfies readonly Permission[];
 
 export const PERMISSIONS_BY_ROLE: Record<Role, readonly Permission[]> = {
@@ -59,17 +66,20 @@ export const PERMISSIONS_BY_ROLE: Record<Role, readonly Permission[]> = {
     'stands.write',
     'features.write',
     'approaches.write',
+    'ground.export',
     'closed_days.write',
     'board.sign_for_others',
     'log.read_all',
     'log.write_any',
     'harvest.write_any',
     'feeds.club',
+    'chores.write',
+    'inspections.write',
   ],
   member: MEMBER,
   /** Books only inside the dates of the invitation (access-window.ts) and never sees where features lie. */
-  guest: ['club.read', 'sits.read', 'sits.book', 'board.read'],
-  landowner: ['club.read', 'board.read', 'closed_days.write'],
+  guest: ['club.read', 'sits.read', 'sits.book', 'board.read', 'notices.own'],
+  landowner: ['club.read', 'board.read', 'closed_days.write', 'notices.own'],
 };
 
 /** Whether a role holds a permission. */

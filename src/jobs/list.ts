@@ -1,6 +1,7 @@
 import { write } from '@/db/client';
 import { deleteOldRuns } from '@/db/queries/job-runs';
 import { deleteOldRates } from '@/db/queries/rate-limits';
+import { remindUpkeep } from '@/features/chores/remind-upkeep';
 import { remindLogs } from '@/features/logs/remind-logs';
 import { sendDueMail } from '@/features/mail/send-due-mail';
 import { lapseUnsigned } from '@/features/outings/lapse-unsigned';
@@ -43,6 +44,14 @@ export const JOBS: readonly Job[] = [
     everyMs: 60 * MINUTE,
     run: async (now) => {
       const { reminded } = await remindLogs(now);
+      return `${reminded} reminded`;
+    },
+  },
+  {
+    name: 'remind-upkeep',
+    everyMs: 60 * MINUTE,
+    run: async (now) => {
+      const { reminded } = await remindUpkeep(now);
       return `${reminded} reminded`;
     },
   },

@@ -15,6 +15,8 @@ export interface QueuedMail {
   html?: string | null;
   calendar?: OutboxMessage['calendar'];
   headers?: Record<string, string>;
+  /** Not to be sent before this instant: quiet hours. */
+  notBefore?: number;
 }
 
 /** Queues a mail in the same transaction as the change it tells of; the mail job sends it. */
@@ -33,7 +35,7 @@ export async function queueMail(tx: Tx, mail: QueuedMail, at: number): Promise<b
       calendar: mail.calendar ?? null,
       headers: mail.headers ?? {},
     },
-    nextAttemptAt: at,
+    nextAttemptAt: Math.max(at, mail.notBefore ?? at),
     createdAt: at,
   });
 }

@@ -69,6 +69,8 @@ async function realParams(): Promise<Record<string, string>> {
     .where(eq(schema.memberships.clubId, club?.id ?? ''));
   const [log] = await from.select().from(schema.sitLogs).limit(1);
   const [harvest] = await from.select().from(schema.harvests).limit(1);
+  const [chore] = await from.select().from(schema.chores).limit(1);
+  const [workDay] = await from.select().from(schema.workDays).limit(1);
   return {
     club: DEMO_SLUG,
     stand: approach?.standId ?? '',
@@ -78,6 +80,8 @@ async function realParams(): Promise<Record<string, string>> {
     member: member?.id ?? '',
     sit: log?.sitId ?? '',
     harvest: harvest?.id ?? '',
+    chore: chore?.id ?? '',
+    workday: workDay?.id ?? '',
     id: 'none',
     token: 'none',
     secret: 'none.ics',

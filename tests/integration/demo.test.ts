@@ -60,6 +60,10 @@ const tables = {
   outings: schema.outings,
   safetyContacts: schema.safetyContacts,
   visits: schema.visits,
+  chores: schema.chores,
+  inspections: schema.inspections,
+  workDays: schema.workDays,
+  workDayMembers: schema.workDayMembers,
   auditLog: schema.auditLog,
 };
 

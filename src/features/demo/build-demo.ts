@@ -7,6 +7,7 @@ import { buildHarvests, buildLogVersions } from './build-harvests';
 import { buildLand } from './build-land';
 import { buildLogs } from './build-logs';
 import { buildContacts, buildOutings } from './build-outings';
+import { buildUpkeep } from './build-upkeep';
 import { buildVisits } from './build-visits';
 import { planComingSits } from './coming-sits';
 import { DEMO_PLACE } from './demo-place';
@@ -56,6 +57,7 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
     sitLogVersions,
     harvests,
     visits: buildVisits(day, club, ground),
+    ...buildUpkeep({ today, dice: makeDice(`upkeep ${today}`) }, club, ground, closures),
     auditLog: [
       ...buildAudit(day, club, { ground, closures, sits }),
       ...buildAudit(day, second, { ground: { ...ground, stands: second.stands }, closures: [], sits: [] }),

@@ -31,6 +31,10 @@ export async function insertDemo(tx: Tx, rows: DemoRows): Promise<void> {
   await insertAll(tx, schema.sitLogVersions, rows.sitLogVersions);
   await insertAll(tx, schema.harvests, rows.harvests);
   await insertAll(tx, schema.visits, rows.visits);
+  await insertAll(tx, schema.chores, rows.chores);
+  await insertAll(tx, schema.inspections, rows.inspections);
+  await insertAll(tx, schema.workDays, rows.workDays);
+  await insertAll(tx, schema.workDayMembers, rows.workDayMembers);
   await insertAll(tx, schema.auditLog, rows.auditLog);
 }
 

@@ -19,5 +19,9 @@ export interface DemoRows {
   sitLogVersions: (typeof schema.sitLogVersions.$inferInsert)[];
   harvests: (typeof schema.harvests.$inferInsert)[];
   visits: (typeof schema.visits.$inferInsert)[];
+  chores: (typeof schema.chores.$inferInsert)[];
+  inspections: (typeof schema.inspections.$inferInsert)[];
+  workDays: (typeof schema.workDays.$inferInsert)[];
+  workDayMembers: (typeof schema.workDayMembers.$inferInsert)[];
   auditLog: (typeof schema.auditLog.$inferInsert)[];
 }

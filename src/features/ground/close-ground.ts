@@ -21,12 +21,27 @@ async function nameOf(scope: ClubScope, tx: Tx, standId: string | null): Promise
   return stand.name;
 }
 
+/** Closes ground inside a change of which it is a part; `name` is what it is called. */
+export async function closeGroundIn(
+  tx: Tx,
+  scope: ClubScope,
+  values: ClosureValues,
+  name: string,
+  now: number,
+): Promise<Closed> {
+  const id = newId('closure');
+  await insertClosure(scope, tx, { ...values, id, createdAt: now });
+  const until = values.toDay === null ? 'until opened again' : `to ${formatDay(values.toDay, true)}`;
+  const summary = `Closed ${name} from ${formatDay(values.fromDay, true)} ${until}: ${values.reason}`;
+  await noteChange(scope, tx, { subject: 'closure', verb: 'added', id, summary, detail: { ...values } }, now);
+  return { id, touched: await listBookedSits(scope, { ...values, now }, tx) };
+}
+
 /** Closes a stand, or with no stand the whole ground. A stand may stay closed until somebody opens it again. */
 export async function closeGround(scope: ClubScope, values: ClosureValues, now: number): Promise<Closed> {
   if (values.standId !== null && !scope.can('stands.write')) {
     throw new AppError('forbidden', 'Only a steward or an admin closes a stand; you may close the whole ground.');
   }
-  const id = newId('closure');
   const today = dayOf(now, scope.club.zone);
   if (values.toDay !== null && values.toDay < today) {
     const message = 'These days are past: choose a last day from today on.';
@@ -37,12 +52,5 @@ export async function closeGround(scope: ClubScope, values: ClosureValues, now: 
     const message = 'Choose a first day within the last year.';
     throw new AppError('invalid', message, { fields: { fromDay: message } });
   }
-  return write(async (tx) => {
-    const name = await nameOf(scope, tx, values.standId);
-    await insertClosure(scope, tx, { ...values, id, createdAt: now });
-    const until = values.toDay === null ? 'until opened again' : `to ${formatDay(values.toDay, true)}`;
-    const summary = `Closed ${name} from ${formatDay(values.fromDay, true)} ${until}: ${values.reason}`;
-    await noteChange(scope, tx, { subject: 'closure', verb: 'added', id, summary, detail: { ...values } }, now);
-    return { id, touched: await listBookedSits(scope, { ...values, now }, tx) };
-  });
+  return write(async (tx) => closeGroundIn(tx, scope, values, await nameOf(scope, tx, values.standId), now));
 }

@@ -49,7 +49,7 @@ export interface VisitInput {
   notes: string;
 }
 
-function placeOf(text: string): { of: PlaceKind; id: string } | null {
+export function placeOf(text: string): { of: PlaceKind; id: string } | null {
   const [of = '', id = ''] = text.split(':');
   const kind = PLACE_KINDS.find((one) => one === of);
   return kind && id !== '' ? { of: kind, id } : null;

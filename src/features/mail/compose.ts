@@ -9,6 +9,8 @@ export interface MailParts {
   clubName: string | null;
   /** Why the reader gets this; stands above the name at the foot. */
   footer?: string;
+  /** Small links under it: to stop such mail, to choose. */
+  footLinks?: { label: string; url: string }[];
 }
 
 const ENTITIES: Record<string, string> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;', "'": '&#39;' };
@@ -23,13 +25,13 @@ function foot({ clubName, footer }: MailParts): string[] {
 }
 
 function plain(parts: MailParts): string {
-  const { paragraphs, facts = [], button, after = [] } = parts;
+  const { paragraphs, facts = [], button, after = [], footLinks: links = [] } = parts;
   const blocks = [
     ...paragraphs,
     ...(facts.length > 0 ? [facts.map(({ label, value }) => `${label}: ${value}`).join('\n')] : []),
     ...(button ? [`${button.label}:\n${button.url}`] : []),
     ...after,
-    `-- \n${foot(parts).join('\n')}`,
+    `-- \n${[...foot(parts), ...links.map(({ label, url }) => `${label}: ${url}`)].join('\n')}`,
   ];
   return `${blocks.join('\n\n')}\n`;
 }
@@ -39,10 +41,12 @@ const BUTTON =
   'display:inline-block;padding:12px 20px;background:#3f5138;color:#ffffff;font:bold 16px sans-serif;text-decoration:none';
 const FOOT = 'margin-top:28px;padding-top:12px;border-top:1px solid #b9b09c;color:#5c564a;font-size:14px';
 
+const smallLink = ({ label, url }: { label: string; url: string }) =>
+  `<a style="color:#5c564a" href="${escapeHtml(url)}">${escapeHtml(label)}</a>`;
 const paragraph = (text: string) => `<p>${escapeHtml(text).replace(/\n/g, '<br>')}</p>`;
 
 function rich(parts: MailParts): string {
-  const { paragraphs, facts = [], button, after = [] } = parts;
+  const { paragraphs, facts = [], button, after = [], footLinks: links = [] } = parts;
   const rows = facts.map(
     ({ label, value }) =>
       `<tr><th align="left" style="padding:2px 16px 2px 0;font-weight:normal;color:#5c564a">${escapeHtml(label)}</th>` +
@@ -53,17 +57,17 @@ function rich(parts: MailParts): string {
     ...paragraphs.map(paragraph),
     ...(rows.length > 0 ? [`<table style="border-collapse:collapse">${rows.join('')}</table>`] : []),
     ...(button ? [`<p><a style="${BUTTON}" href="${escapeHtml(button.url)}">${escapeHtml(button.label)}</a></p>`] : []),
-    ...(button ? [`<p style="font-size:14px">Or open ${escapeHtml(button.url)}</p>`] : []),
+    ...(button ? [`<p style="font-size:14px;word-break:break-all">Or open ${escapeHtml(button.url)}</p>`] : []),
     ...after.map(paragraph),
-    `<p style="${FOOT}">${foot(parts).map(escapeHtml).join('<br>')}</p>`,
+    `<p style="${FOOT}">${[...foot(parts).map(escapeHtml), ...links.map(smallLink)].join('<br>')}</p>`,
     '</div></body></html>',
   ].join('\n');
 }
 
-/** The same words as plain text and as simple HTML. A button's address must be http or https. */
+/** The same words as plain text and as simple HTML. Every address must be http or https. */
 export function composeMail(parts: MailParts): { text: string; html: string } {
-  if (parts.button && !/^https?:\/\//.test(parts.button.url)) {
-    throw new Error(`A mail links to ${parts.button.url}, which is no web address.`);
+  for (const { url } of [...(parts.button ? [parts.button] : []), ...(parts.footLinks ?? [])]) {
+    if (!/^https?:\/\//.test(url)) throw new Error(`A mail links to ${url}, which is no web address.`);
   }
   return { text: plain(parts), html: rich(parts) };
 }

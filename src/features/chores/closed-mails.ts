@@ -1,0 +1,42 @@
+import type { Tx } from '@/db/client';
+import { env } from '@/env';
+import { dayAndWindow } from '@/features/bookings/sit-words';
+import { composeMail } from '@/features/mail/compose';
+import { queueMail } from '@/server/outbox';
+import type { ClubScope } from '@/server/scope';
+import { listBookedAt } from './inspections-data';
+
+/** Tells everyone booked at a stand that an inspection has closed it; gives how many sits. */
+export async function mailClosed(
+  tx: Tx,
+  scope: ClubScope,
+  closed: { stand: { id: string; name: string }; reason: string; closureId: string; day: string },
+  now: number,
+): Promise<number> {
+  const { club } = scope;
+  const { stand, reason, closureId, day } = closed;
+  const booked = await listBookedAt(scope, stand.id, { day, now }, tx);
+  for (const sit of booked) {
+    const when = dayAndWindow(sit.day, sit.windows, true);
+    const { text, html } = composeMail({
+      clubName: club.name,
+      paragraphs: [
+        `Hello ${sit.memberName},`,
+        `${stand.name} was closed by an inspection, and you are booked there. Do not climb or sit there until a steward opens it again.`,
+      ],
+      facts: [
+        { label: 'Stand', value: stand.name },
+        { label: 'Your sit', value: when },
+        { label: 'Why', value: reason },
+      ],
+      button: { label: 'Move or cancel the sit', url: `${env.appUrl}/clubs/${club.slug}/my-sits` },
+      footer: 'You get this because the sit is yours.',
+    });
+    const kind = 'stand.closed';
+    const dedupeKey = `${kind}:${closureId}:${sit.id}`;
+    const to = { email: sit.memberEmail, name: sit.memberName };
+    const subject = `Stand closed: ${stand.name}, ${dayAndWindow(sit.day, sit.windows)}`;
+    await queueMail(tx, { clubId: club.id, kind, dedupeKey, to, subject, text, html }, now);
+  }
+  return booked.length;
+}

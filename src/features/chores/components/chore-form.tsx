@@ -1,0 +1,95 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { useMemo } from 'react';
+import { useWatch } from 'react-hook-form';
+import { HereButton } from '@/features/ground/components/here-button';
+import type { FormClub } from '@/features/ground/form-club';
+import type { PlaceChoices } from '@/features/logs/visit-places';
+import type { ActionResult } from '@/server/doors';
+import { ButtonLink } from '@/ui/button';
+import { FormErrorSummary, SubmitRow } from '@/ui/form';
+import { useActionForm } from '@/ui/form/use-action-form';
+import { DateInput, Select, Textarea, TextInput } from '@/ui/text-inputs';
+import { useToast } from '@/ui/toast';
+import { type ChoreForm, makeChoreSchema } from '../chore-schema';
+
+export interface ChoreFormProps {
+  club: string;
+  formClub: FormClub;
+  values: ChoreForm;
+  people: { value: string; label: string }[];
+  places: PlaceChoices;
+  /** Set: changes that chore in place of adding one. */
+  at: { id: string; version: number } | null;
+  add: (club: string, values: ChoreForm) => Promise<ActionResult<{ id: string }>>;
+  change: (club: string, values: ChoreForm & { id: string; version: number }) => Promise<ActionResult<{ id: string }>>;
+}
+
+export function ChoreFormView({ club, formClub, values, people, places, at, add, change }: ChoreFormProps) {
+  const router = useRouter();
+  const toast = useToast();
+  const back = `/clubs/${club}/chores`;
+  const schema = useMemo(() => makeChoreSchema(formClub), [formClub]);
+  const { form, register, errorOf, errors, pending, formProps } = useActionForm({
+    schema,
+    defaultValues: values,
+    submit: (typed: ChoreForm) => (at ? change(club, { ...typed, ...at }) : add(club, typed)),
+    onDone: () => {
+      toast({ title: at ? 'Chore changed' : 'Chore added' });
+      router.push(back);
+    },
+  });
+  const place = useWatch({ control: form.control, name: 'place' });
+  const groups = [
+    { label: 'Stands', options: places.stands },
+    { label: 'Features', options: places.features },
+    { label: 'Parking', options: places.parkings },
+  ].filter((group) => group.options.length > 0);
+  return (
+    <form {...formProps} className="grid max-w-2xl gap-5">
+      <FormErrorSummary errors={errors} />
+      <TextInput label="What is to be done" {...register('title')} error={errorOf('title')} />
+      <Select
+        label="Who"
+        placeholder="Whoever takes it"
+        options={people}
+        {...register('assigneeId')}
+        error={errorOf('assigneeId')}
+      />
+      <Select label="Where" placeholder="No one place" {...register('place')} error={errorOf('place')}>
+        {groups.map((group) => (
+          <optgroup key={group.label} label={group.label}>
+            {group.options.map((option) => (
+              <option key={option.value} value={option.value}>
+                {option.label}
+              </option>
+            ))}
+          </optgroup>
+        ))}
+        <option value="point">Another place, by its position</option>
+      </Select>
+      {place === 'point' && (
+        <div className="flex flex-col gap-4">
+          <div className="grid gap-4 sm:grid-cols-2">
+            <TextInput label="Latitude" inputMode="decimal" {...register('lat')} error={errorOf('lat')} />
+            <TextInput label="Longitude" inputMode="decimal" {...register('lon')} error={errorOf('lon')} />
+          </div>
+          <HereButton
+            onPlace={({ lat, lon }) => {
+              form.setValue('lat', lat, { shouldDirty: true });
+              form.setValue('lon', lon, { shouldDirty: true });
+            }}
+          />
+        </div>
+      )}
+      <DateInput label="Due" optional {...register('dueOn')} error={errorOf('dueOn')} />
+      <Textarea label="Notes" optional rows={3} {...register('notes')} error={errorOf('notes')} />
+      <SubmitRow label={at ? 'Save chore' : 'Add chore'} pending={pending} pendingLabel="Saving…">
+        <ButtonLink href={back} look="quiet">
+          Back without saving
+        </ButtonLink>
+      </SubmitRow>
+    </form>
+  );
+}

@@ -1,0 +1,104 @@
+import { z } from 'zod';
+import { STAND_KINDS } from '@/core/types';
+import {
+  INSPECTION_ITEMS,
+  INSPECTION_RESULTS,
+  type InspectionAnswers,
+  type InspectionItem,
+  type InspectionResult,
+  ITEM_ANSWERS,
+  itemsFor,
+  mildestResult,
+  resultFits,
+} from '@/core/upkeep/inspection';
+import { LINE_MAX, NOTES_MAX, readForm } from '@/features/ground/read-form';
+
+const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+
+export const inspectionFormSchema = z.object({
+  standId: z.string().min(1).max(40),
+  /** The stand's kind when the form was made: it decides what is on the list. */
+  kind: z.enum(STAND_KINDS),
+  day: line,
+  /** '' : not answered yet. */
+  answers: z.partialRecord(z.enum(INSPECTION_ITEMS), z.enum(['', ...ITEM_ANSWERS]).nullish()),
+  result: z.enum(['', ...INSPECTION_RESULTS]).nullish(),
+  notes: z.string().trim().max(NOTES_MAX, `Keep the notes to ${NOTES_MAX} characters.`),
+  strapFittedOn: line,
+  strapYears: line,
+  nextDueOn: line,
+});
+export type InspectionForm = z.output<typeof inspectionFormSchema>;
+
+export interface InspectionInput {
+  standId: string;
+  day: string;
+  answers: InspectionAnswers;
+  result: InspectionResult;
+  notes: string;
+  strapFittedOn: string | null;
+  strapYears: number | null;
+  nextDueOn: string;
+}
+
+const TOO_MILD: Record<InspectionResult, string> = {
+  pass: '',
+  fix_first: 'Something is marked to fix: the stand cannot pass yet.',
+  closed: 'Something is marked unsafe: the result must be closed.',
+};
+
+export const inspectionSchema = inspectionFormSchema.transform((typed, ctx): InspectionInput => {
+  const form = readForm(ctx);
+  const answers: InspectionAnswers = {};
+  for (const item of itemsFor(typed.kind)) {
+    const answer = typed.answers[item];
+    if (answer) answers[item] = answer;
+    else form.fail(`answers.${item}`, 'Choose one.');
+  }
+  const day = form.day('day', typed.day);
+  const nextDueOn = form.day('nextDueOn', typed.nextDueOn);
+  if (!form.failed() && nextDueOn <= day) form.fail('nextDueOn', 'The next look comes after this one.');
+  const strapFittedOn = typed.strapFittedOn.trim() === '' ? null : form.day('strapFittedOn', typed.strapFittedOn);
+  if (strapFittedOn !== null && !form.failed() && strapFittedOn > day) {
+    form.fail('strapFittedOn', 'The strap was fitted on or before the day of this look.');
+  }
+  const strapYears = form.number('strapYears', typed.strapYears, { label: 'Years', min: 0.25, max: 20 });
+  const result = typed.result || null;
+  if (result === null) form.fail('result', 'Choose a result.');
+  else if (!resultFits(result, answers)) form.fail('result', TOO_MILD[mildestResult(answers)]);
+  if (result !== null && result !== 'pass' && typed.notes === '') form.fail('notes', 'Say what is wrong.');
+  if (form.failed() || result === null) return z.NEVER;
+  return { standId: typed.standId, day, answers, result, notes: typed.notes, strapFittedOn, strapYears, nextDueOn };
+});
+
+export const ITEM_WORDS: Record<InspectionItem, { label: string; hint: string }> = {
+  tree: { label: 'Tree', hint: 'Alive, sound, has not outgrown the stand' },
+  straps: { label: 'Straps, chains and cables', hint: 'Dated; not faded, chewed or grown in' },
+  ratchets: { label: 'Ratchets', hint: 'Hold under load, let go when asked' },
+  bolts: { label: 'Bolts, welds, rust', hint: 'Tight, whole, no flaking' },
+  seat: { label: 'Seat', hint: 'Whole and dry' },
+  ladder: { label: 'Ladder joints', hint: 'Pinned; stands firm' },
+  platform: { label: 'Platform', hint: 'Level, carries weight, no give' },
+  lifeline: { label: 'Lifeline', hint: 'There, dated, from the ground to the seat' },
+  steps: { label: 'Steps', hint: 'None loose or missing' },
+  blind: { label: 'Roof, door, floor', hint: 'Tight; no wasps' },
+  noise: { label: 'Noise', hint: 'Nothing creaks or knocks' },
+  name_tag: { label: 'Name tag', hint: 'There and readable' },
+  lanes: { label: 'Shooting lanes', hint: 'Clear' },
+  path: { label: 'Path', hint: 'Quiet underfoot, marked' },
+  weight_label: { label: 'Weight label', hint: 'There and readable' },
+  haul_rope: { label: 'Haul rope', hint: 'There and sound' },
+};
+
+export const ANSWER_WORDS: Record<(typeof ITEM_ANSWERS)[number], string> = {
+  good: 'Good',
+  fix: 'Fix',
+  unsafe: 'Unsafe',
+  none: 'Has none',
+};
+
+export const RESULT_WORDS: Record<InspectionResult, string> = {
+  pass: 'Pass',
+  fix_first: 'Fix first',
+  closed: 'Closed',
+};

@@ -1,0 +1,79 @@
+import { addDays, dayOf } from '@/core/day-time';
+import { itemsFor } from '@/core/upkeep/inspection';
+import { write } from '@/db/client';
+import { closeGroundIn } from '@/features/ground/close-ground';
+import { listClosuresFrom } from '@/features/ground/closures-data';
+import { getStand } from '@/features/ground/stands-data';
+import { newId } from '@/lib/ids';
+import { AppError, notFound } from '@/server/errors';
+import type { ClubScope } from '@/server/scope';
+import { mailClosed } from './closed-mails';
+import type { InspectionInput } from './inspection-schema';
+import { RESULT_WORDS } from './inspection-schema';
+import { insertInspection } from './inspections-data';
+import { noteUpkeep } from './note-upkeep';
+import { addChoreIn } from './save-chore';
+
+/** A chore to mend a stand is due in so many days. Our choice. */
+const MEND_DAYS = 14;
+const REASON_MAX = 160;
+
+export interface SavedInspection {
+  standName: string;
+  /** Booked sits whose members were told that the stand is closed. */
+  told: number;
+  /** A chore was made to mend it. */
+  chore: boolean;
+}
+
+const firstLine = (text: string) => text.split('\n')[0]?.replace(/\.+$/, '').slice(0, REASON_MAX) ?? '';
+
+/**
+ * Keeps an inspection. Closed shuts the stand at once and tells those booked there; fix first and closed make a chore. All
+ * of it is one change.
+ */
+export async function saveInspection(scope: ClubScope, input: InspectionInput, now: number): Promise<SavedInspection> {
+  const today = dayOf(now, scope.club.zone);
+  if (input.day > today || input.day < addDays(today, -366)) {
+    const message = input.day > today ? 'This day is still to come.' : 'Choose a day within the last year.';
+    throw new AppError('invalid', message, { fields: { day: message } });
+  }
+  return write(async (tx) => {
+    const stand = await getStand(scope, input.standId, tx);
+    if (!stand) throw notFound();
+    if (itemsFor(stand.kind).some((item) => input.answers[item] === undefined)) {
+      throw new AppError('conflict', `${stand.name} has become another kind of stand. Reload the page.`);
+    }
+    const id = newId('inspection');
+    const reason = firstLine(input.notes);
+    let closureId: string | null = null;
+    let told = 0;
+    if (input.result === 'closed') {
+      const open = (await listClosuresFrom(scope, today, tx)).find(
+        (closure) => closure.standId === stand.id && closure.toDay === null && closure.fromDay <= today,
+      );
+      const values = { standId: stand.id, fromDay: today, toDay: null, reason: `Inspection: ${reason}` };
+      closureId = open?.id ?? (await closeGroundIn(tx, scope, values, stand.name, now)).id;
+      told = await mailClosed(tx, scope, { stand, reason, closureId, day: today }, now);
+    }
+    await insertInspection(tx, {
+      ...input,
+      id,
+      clubId: scope.club.id,
+      byMemberId: scope.member.id,
+      closureId,
+      createdAt: now,
+    });
+    const chore = input.result !== 'pass';
+    if (chore) {
+      const place = { of: 'stand' as const, id: stand.id };
+      const title = `Mend ${stand.name}`;
+      const dueOn = addDays(today, MEND_DAYS);
+      await addChoreIn(tx, scope, { title, notes: input.notes, assigneeId: null, place, dueOn }, now);
+    }
+    const summary = `Inspected ${stand.name}: ${RESULT_WORDS[input.result].toLowerCase()}${reason ? `, ${reason}` : ''}.`;
+    const detail = { result: input.result, answers: input.answers, closureId };
+    await noteUpkeep(scope, tx, { subject: 'inspection', verb: 'added', id, summary, detail }, now);
+    return { standName: stand.name, told, chore };
+  });
+}
