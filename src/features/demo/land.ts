@@ -43,7 +43,7 @@ export const LAND: readonly DemoLand[] = [
   },
   {
     layer: 'wood',
-    name: 'The old cut',
+    name: '',
     shape: {
       area: [
         [300, 430],
@@ -70,7 +70,7 @@ export const LAND: readonly DemoLand[] = [
   },
   {
     layer: 'crop',
-    name: 'Corn bottom',
+    name: '',
     shape: {
       area: [
         [100, -325],
@@ -84,7 +84,7 @@ export const LAND: readonly DemoLand[] = [
   },
   {
     layer: 'crop',
-    name: 'Hay bottom',
+    name: '',
     shape: {
       area: [
         [-612, -338],
@@ -111,7 +111,7 @@ export const LAND: readonly DemoLand[] = [
   },
   {
     layer: 'water',
-    name: 'Barn Pond',
+    name: '',
     shape: {
       area: [
         [448, -275],

@@ -14,7 +14,7 @@ export function addFeature(
   const id = newId('feature');
   return write(async (tx) => {
     refuseTakenName(await listFeatures(scope, tx), values.name, 'a feature');
-    await insertFeature(scope, tx, { ...values, use: null, id });
+    await insertFeature(scope, tx, { ...values, id });
     const summary = `Added feature ${values.name}.`;
     await noteChange(scope, tx, { subject: 'feature', verb: 'added', id, summary }, now);
     return { id, name: values.name };

@@ -14,19 +14,22 @@ import type { FormClub } from '../form-club';
 import { FEATURE_KIND_WORDS, MONTH_CHOICES, SHAPE_WORDS } from '../words';
 import { choicesOf } from './choices-of';
 import { DraftNotice } from './draft-notice';
+import { CropFields, FeatureUseFields } from './feature-use-fields';
 import type { ClubCall, Saved } from './form-types';
 
 export interface FeatureFormProps {
   club: string;
   formClub: FormClub;
   values: FeatureForm;
+  /** The year of the crops that stand now. */
+  year: number;
   /** null: a new feature. */
   at: { id: string; version: number } | null;
   add: ClubCall<FeatureForm, Saved>;
   change: ClubCall<FeatureForm & { id: string; version: number }, Saved>;
 }
 
-export function FeatureFormView({ club, formClub, values, at, add, change }: FeatureFormProps) {
+export function FeatureFormView({ club, formClub, values, year, at, add, change }: FeatureFormProps) {
   const router = useRouter();
   const toast = useToast();
   const schema = useMemo(() => makeFeatureSchema(formClub), [formClub]);
@@ -73,6 +76,8 @@ export function FeatureFormView({ club, formClub, values, at, add, change }: Fea
         error={errorOf('months')}
         {...register('months')}
       />
+      <CropFields fields={fields} year={year} />
+      <FeatureUseFields fields={fields} />
       <Textarea label="Notes" optional error={errorOf('notes')} {...register('notes')} />
       <SubmitRow label="Save feature" pending={fields.pending} pendingLabel="Saving…">
         <ButtonLink href={back} look="quiet">

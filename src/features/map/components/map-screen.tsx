@@ -55,15 +55,13 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
     () => (shown.size === EVERYTHING.size ? things : things.filter((thing) => shown.has(groupOf(thing)))),
     [things, shown],
   );
+  const turnable = doing.mode === 'look' && !moment?.open;
   const turning = useMemo(
     () =>
-      selected?.kind === 'stand' &&
-      selected.geometry.type === 'Point' &&
-      doing.mode === 'look' &&
-      mayChange(selected, view.may)
+      selected?.kind === 'stand' && selected.geometry.type === 'Point' && turnable && mayChange(selected, view.may)
         ? { at: selected.geometry.coordinates, arcs: selected.arcs }
         : null,
-    [selected, doing.mode, view.may],
+    [selected, turnable, view.may],
   );
   const momentOverlay = moment?.open ? moment.overlay : null;
   const overlay = useMemo<MapOverlay>(

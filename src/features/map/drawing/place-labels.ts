@@ -74,10 +74,11 @@ function* spots({ x, y, width, height, clear, centred }: LabelWish): Generator<[
   yield [x - gap - width, y + gap];
 }
 
-/** Labels that lie on no other label and no mark; one that fits nowhere is left out. */
+/** Labels that lie on no other label and no mark, whole on the screen where its size is given; one that fits nowhere is left out. */
 export function placeLabels(
   wishes: readonly LabelWish[],
   marks: readonly { x: number; y: number; clear: number }[],
+  screen?: { width: number; height: number },
 ): PlacedLabel[] {
   const taken = new Taken();
   for (const { x, y, clear } of marks)
@@ -86,6 +87,7 @@ export function placeLabels(
   for (const wish of wishes) {
     for (const [left, top] of spots(wish)) {
       const box = { left, top, right: left + wish.width, bottom: top + wish.height };
+      if (screen && (left < 0 || top < 0 || box.right > screen.width || box.bottom > screen.height)) continue;
       if (!taken.free(box)) continue;
       taken.add(box);
       placed.push({ id: wish.id, left, top });

@@ -10,6 +10,9 @@ export function latLng([lon = 0, lat = 0]: Position): L.LatLng {
   return L.latLng(lat, lon);
 }
 
+/** Nearer than this, every stand shows its winds. */
+export const CLOSE_ZOOM = 15;
+
 /** An empty map of paper. Nothing is asked of any server. */
 export function makeMap(container: HTMLElement, centre: LatLon, compact: boolean): L.Map {
   const map = L.map(container, {
@@ -17,12 +20,17 @@ export function makeMap(container: HTMLElement, centre: LatLon, compact: boolean
     zoom: 15,
     minZoom: 8,
     maxZoom: 21,
-    zoomSnap: 0.5,
+    zoomSnap: 0.25,
+    zoomDelta: 0.5,
     attributionControl: false,
     // A page with a map in it must scroll past the map.
     scrollWheelZoom: !compact,
     zoomAnimation: !window.matchMedia('(prefers-reduced-motion: reduce)').matches,
   });
+  // From afar the marks shrink and only the chosen stand keeps its brackets.
+  const far = () => container.classList.toggle('m-far', map.getZoom() < CLOSE_ZOOM);
+  map.on('zoomend', far);
+  map.whenReady(far);
   for (const [name, z] of Object.entries(PANES)) map.createPane(name).style.zIndex = String(z);
   const labels = map.getPane('labels');
   labels?.classList.add('m-labels');

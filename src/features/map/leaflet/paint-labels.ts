@@ -1,7 +1,7 @@
 import L from 'leaflet';
 import { type LabelWish, placeLabels } from '../drawing/place-labels';
 import type { MapThing } from '../thing';
-import { boundsOf } from './make-map';
+import { boundsOf, CLOSE_ZOOM } from './make-map';
 
 const HEIGHT_PX = 15;
 const STAND_CLEAR_PX = 13;
@@ -19,6 +19,10 @@ function rankOf(thing: MapThing, selectedId: string | null): number {
 function classOf(thing: MapThing): string {
   if (thing.kind === 'item') return 'm-label m-label-land';
   return thing.kind === 'feature' ? 'm-label m-label-feature' : 'm-label';
+}
+
+function bracketed(thing: MapThing, zoom: number): boolean {
+  return thing.kind === 'stand' && thing.arcs.length > 0 && zoom >= CLOSE_ZOOM;
 }
 
 /** Words beside the marks, chosen anew after each move so that none lies on another. */
@@ -45,7 +49,7 @@ export function paintLabels(map: L.Map) {
     if (thing.geometry.type === 'Point') {
       const [lon = 0, lat = 0] = thing.geometry.coordinates;
       const { x, y } = map.latLngToContainerPoint([lat, lon]);
-      return { ...size, x, y, clear: thing.kind === 'stand' && thing.arcs.length > 0 ? 26 : MARK_CLEAR_PX };
+      return { ...size, x, y, clear: bracketed(thing, zoom) ? 26 : MARK_CLEAR_PX };
     }
     if (thing.geometry.type === 'LineString') {
       const middle = thing.geometry.coordinates[Math.floor(thing.geometry.coordinates.length / 2)];
@@ -81,7 +85,7 @@ export function paintLabels(map: L.Map) {
       });
     const byId = new Map(things.map((thing) => [thing.id, thing]));
     pane.replaceChildren(
-      ...placeLabels(wishes, marks).flatMap(({ id, left, top }) => {
+      ...placeLabels(wishes, marks, { width, height }).flatMap(({ id, left, top }) => {
         const thing = byId.get(id);
         if (!thing) return [];
         const label = document.createElement('div');

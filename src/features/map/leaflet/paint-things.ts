@@ -16,12 +16,11 @@ export const DENSE = 1200;
 const BRACKET_PX = { both: 22, morning: 19, evening: 26 } as const;
 
 function bracketsOf(stand: StandThing): string {
-  return stand.arcs
-    .map((arc) => {
-      const d = bracketPath(arc, BRACKET_PX[arc.window ?? 'both'], 7);
-      return `<path class="m-bracket-halo" d="${d}"/><path class="m-bracket" d="${d}"/>`;
-    })
-    .join('');
+  const paths = stand.arcs.map((arc) => {
+    const d = bracketPath(arc, BRACKET_PX[arc.window ?? 'both'], 7);
+    return `<path class="m-bracket-halo" d="${d}"/><path class="m-bracket" d="${d}"/>`;
+  });
+  return `<g class="m-bracket-set">${paths.join('')}</g>`;
 }
 
 /** What a screen reader says of a mark. */

@@ -12,6 +12,7 @@ import type { SitDetailView, SitsView, TimelineView } from '../view-types';
 import { clockText, shortClock } from '../words';
 import { DetailPart } from './detail-part';
 import { ReasonList } from './reason-list';
+import { WalkMap } from './walk-map';
 import { WaysIn } from './ways-in';
 import { WindByHour } from './wind-by-hour';
 
@@ -97,6 +98,9 @@ function DetailBody({ detail, view }: { detail: SitDetailView; view: SitsView })
       )}
       <DetailPart title="Way in">
         <WaysIn ways={detail.ways} club={view.club} />
+        {detail.mayMap && (
+          <WalkMap club={view.club.slug} standId={detail.standId} approachId={detail.ways[0]?.approachId ?? null} />
+        )}
       </DetailPart>
       <DetailPart title="Why this score">
         <ReasonList reasons={detail.reasons} />

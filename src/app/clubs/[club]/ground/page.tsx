@@ -22,7 +22,16 @@ export default clubPage('features.read', async ({ scope, search }) => {
   const addParking = <ButtonLink href={`${base}/parking/new`}>Add a parking place</ButtonLink>;
   return (
     <>
-      <PageTitle title="Ground" lead="What deer use and where people leave their trucks: the ranking weighs both." />
+      <PageTitle
+        title="Ground"
+        lead="What deer use and where people leave their trucks: the ranking weighs both."
+        actions={
+          <>
+            {canWrite && <ButtonLink href={`${base}/import`}>Bring in a file</ButtonLink>}
+            {scope.can('ground.export') && <ButtonLink href={`${base}/export`}>Take it out</ButtonLink>}
+          </>
+        }
+      />
       <GroundMap
         initial={map}
         zone={scope.club.zone}

@@ -5,6 +5,7 @@ import { formClubOf } from '@/features/ground/form-club';
 import { readStand } from '@/features/ground/reads';
 import { namedSits } from '@/features/ground/refuse';
 import { STAND_KIND_WORDS } from '@/features/ground/words';
+import { SmallMap } from '@/features/map/components/small-map';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -61,6 +62,16 @@ export default clubPage('stands.read', async ({ scope, params }) => {
         restDaysDefault={scope.club.rules.restDaysDefault}
         allowedNames={allowedNames}
       />
+      {scope.can('features.read') && (
+        <Section
+          title="Map"
+          actions={
+            canWrite && <ButtonLink href={`${base}/ground?select=${stand.id}`}>Draw on the club's map</ButtonLink>
+          }
+        >
+          <SmallMap club={scope.club.slug} standId={stand.id} />
+        </Section>
+      )}
       <StandApproaches
         club={scope.club.slug}
         formClub={formClubOf(scope.club)}

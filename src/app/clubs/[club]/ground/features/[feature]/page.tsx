@@ -1,3 +1,5 @@
+import { dayOf } from '@/core/day-time';
+import { cropYearOf } from '@/core/map-layers';
 import { FeatureFormView } from '@/features/ground/components/feature-form';
 import { RemoveButton } from '@/features/ground/components/remove-button';
 import { featureFormOf } from '@/features/ground/feature-schema';
@@ -6,6 +8,7 @@ import { formClubOf } from '@/features/ground/form-club';
 import { geometryText } from '@/features/ground/geometry-text';
 import { formatSize } from '@/features/ground/view';
 import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS } from '@/features/ground/words';
+import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { notFound } from '@/server/errors';
 import { DefinitionList, PageTitle } from '@/ui/page-parts';
@@ -18,6 +21,7 @@ export default clubPage('features.read', async ({ scope, params }) => {
   if (!feature) throw notFound();
   const at = { id: feature.id, version: feature.version };
   const canWrite = scope.can('features.write');
+  const year = cropYearOf(dayOf(now(), scope.club.zone));
   const { shape, text } = geometryText(feature.geometry);
   return (
     <>
@@ -44,6 +48,7 @@ export default clubPage('features.read', async ({ scope, params }) => {
           club={scope.club.slug}
           formClub={formClubOf(scope.club)}
           values={featureFormOf(feature)}
+          year={year}
           at={at}
           add={addFeatureAction}
           change={changeFeatureAction}
@@ -54,6 +59,10 @@ export default clubPage('features.read', async ({ scope, params }) => {
             { term: 'Drawn as', detail: SHAPE_WORDS[shape] },
             { term: 'Size', detail: formatSize(feature.geometry, scope.club, scope.club.units) || '–' },
             { term: 'Months', detail: formatMonths(feature.months) },
+            ...feature.rotation.map((one) => ({
+              term: `Crop of ${one.year}`,
+              detail: `${one.crop}, ${formatMonths(one.months)}`,
+            })),
             { term: 'Latitude, longitude', detail: <span className="whitespace-pre-line">{text}</span> },
             { term: 'Notes', detail: feature.notes || '–' },
           ]}

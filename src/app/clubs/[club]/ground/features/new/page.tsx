@@ -1,6 +1,9 @@
+import { dayOf } from '@/core/day-time';
+import { cropYearOf } from '@/core/map-layers';
 import { FeatureFormView } from '@/features/ground/components/feature-form';
 import { emptyFeatureForm } from '@/features/ground/feature-schema';
 import { formClubOf } from '@/features/ground/form-club';
+import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { PageTitle } from '@/ui/page-parts';
 import { addFeatureAction, changeFeatureAction } from '../../actions';
@@ -14,6 +17,7 @@ export default clubPage('features.write', async ({ scope }) => (
       club={scope.club.slug}
       formClub={formClubOf(scope.club)}
       values={emptyFeatureForm()}
+      year={cropYearOf(dayOf(now(), scope.club.zone))}
       at={null}
       add={addFeatureAction}
       change={changeFeatureAction}

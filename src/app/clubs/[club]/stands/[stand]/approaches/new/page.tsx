@@ -2,7 +2,9 @@ import { emptyApproachForm } from '@/features/ground/approach-schema';
 import { ApproachFormView } from '@/features/ground/components/approach-form';
 import { formClubOf } from '@/features/ground/form-club';
 import { readApproachPlaces } from '@/features/ground/reads';
+import { SmallMap } from '@/features/map/components/small-map';
 import { clubPage } from '@/server/doors';
+import { ButtonLink } from '@/ui/button';
 import { PageTitle } from '@/ui/page-parts';
 import { addApproachAction, changeApproachAction } from '../actions';
 
@@ -13,7 +15,16 @@ export default clubPage('approaches.write', async ({ scope, params }) => {
   const places = await readApproachPlaces(scope, standId);
   return (
     <>
-      <PageTitle title="Add an approach" over={places.stand.name} />
+      <PageTitle
+        title="Add an approach"
+        over={places.stand.name}
+        actions={
+          <ButtonLink href={`/clubs/${scope.club.slug}/ground?select=${standId}`}>Draw it on the map</ButtonLink>
+        }
+      />
+      <div className="mb-6 max-w-2xl">
+        <SmallMap club={scope.club.slug} standId={standId} />
+      </div>
       <ApproachFormView
         club={scope.club.slug}
         formClub={formClubOf(scope.club)}

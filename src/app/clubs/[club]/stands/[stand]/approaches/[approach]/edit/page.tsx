@@ -3,8 +3,10 @@ import { getApproach } from '@/features/ground/approaches-data';
 import { ApproachFormView } from '@/features/ground/components/approach-form';
 import { formClubOf } from '@/features/ground/form-club';
 import { readApproachPlaces } from '@/features/ground/reads';
+import { SmallMap } from '@/features/map/components/small-map';
 import { clubPage } from '@/server/doors';
 import { notFound } from '@/server/errors';
+import { ButtonLink } from '@/ui/button';
 import { PageTitle } from '@/ui/page-parts';
 import { addApproachAction, changeApproachAction } from '../../actions';
 
@@ -16,7 +18,16 @@ export default clubPage('approaches.write', async ({ scope, params }) => {
   const places = await readApproachPlaces(scope, approach.standId);
   return (
     <>
-      <PageTitle title={`Edit ${approach.name}`} over={places.stand.name} />
+      <PageTitle
+        title={`Edit ${approach.name}`}
+        over={places.stand.name}
+        actions={
+          <ButtonLink href={`/clubs/${scope.club.slug}/ground?select=${approach.id}`}>Draw it on the map</ButtonLink>
+        }
+      />
+      <div className="mb-6 max-w-2xl">
+        <SmallMap club={scope.club.slug} standId={approach.standId} approachId={approach.id} />
+      </div>
       <ApproachFormView
         key={approach.version}
         club={scope.club.slug}
