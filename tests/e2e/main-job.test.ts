@@ -81,6 +81,7 @@ describe('from sign-up to a booked sit in the calendar', () => {
     await page.getByRole('button', { name: 'Make the account' }).click();
     await page.getByText('We wrote to').waitFor();
     await followMailLink(page, /confirm/i, people.admin.email);
+    await page.getByLabel('Password').fill(PASSWORD);
     await page.getByRole('button', { name: 'Confirm and sign in' }).click();
     await page.waitForURL(/\/clubs/);
     expect(await axeFindings(page)).toEqual([]);

@@ -66,7 +66,10 @@ async function makeAccount(): Promise<{ email: string; browser: TestRequest }> {
   const browser = browserFrom();
   await signUp(email, browser);
   const token = await linkTo(email, 'account.verify');
-  expect(await inRequest(browser, () => verifyAction({ token }))).toEqual({ ok: true, data: { to: '/clubs' } });
+  expect(await inRequest(browser, () => verifyAction({ token, password: PASSWORD }))).toEqual({
+    ok: true,
+    data: { to: '/clubs' },
+  });
   return { email, browser };
 }
 
@@ -84,7 +87,9 @@ describe('signing up', () => {
     expect(await signUp(email, browser)).toEqual({ ok: true, data: { email } });
     expect(await whoIs(browser)).toBeNull();
     const token = await linkTo(email, 'account.verify');
-    const answers = await Promise.all([1, 2, 3].map(() => inRequest(browser, () => verifyAction({ token }))));
+    const answers = await Promise.all(
+      [1, 2, 3].map(() => inRequest(browser, () => verifyAction({ token, password: PASSWORD }))),
+    );
     expect(answers.filter((answer) => answer.ok)).toHaveLength(1);
     expect(await whoIs(browser)).toMatchObject({ email, emailVerifiedAt: at });
   });
@@ -121,14 +126,27 @@ describe('signing up', () => {
     await signUp(email, browser);
     const old = await linkTo(email, 'account.verify');
     at = START + 48 * HOUR + 1;
-    expect(await inRequest(browser, () => verifyAction({ token: old }))).toMatchObject({ ok: false });
+    expect(await inRequest(browser, () => verifyAction({ token: old, password: PASSWORD }))).toMatchObject({
+      ok: false,
+    });
     expect(await signIn(email, PASSWORD, browser)).toEqual({ ok: true, data: { to: '/verify' } });
     const user = await whoIs(browser);
     expect(() => user && requireVerified(user)).toThrow('Confirm your own e-mail address');
     expect(await inRequest(browser, () => resendAction({}))).toEqual({ ok: true, data: { email } });
     const token = await linkTo(email, 'account.verify');
     expect(token).not.toBe(old);
-    expect((await inRequest(browser, () => verifyAction({ token }))).ok).toBe(true);
+    expect((await inRequest(browser, () => verifyAction({ token, password: PASSWORD }))).ok).toBe(true);
+  });
+
+  it('confirms nothing for the owner of an address who did not make the account, and keeps the link', async () => {
+    const email = newEmail();
+    await signUp(email, browserFrom(), 'password of a stranger');
+    const token = await linkTo(email, 'account.verify');
+    const owner = browserFrom();
+    const confirm = (password: string) => inRequest(owner, () => verifyAction({ token, password }));
+    expect(await confirm(PASSWORD)).toMatchObject({ ok: false, error: { fields: { password: /not the password/ } } });
+    expect(await whoIs(owner)).toBeNull();
+    expect(await confirm('password of a stranger')).toEqual({ ok: true, data: { to: '/clubs' } });
   });
 
   it('keeps neither a password nor a link readable in the database', async () => {

@@ -49,7 +49,8 @@ export type ForgotInput = z.output<typeof forgotSchema>;
 export const resetSchema = z.object({ token: secretField, password: newPasswordField });
 export type ResetInput = z.output<typeof resetSchema>;
 
-export const verifySchema = z.object({ token: secretField });
+export const verifySchema = z.object({ token: secretField, password: givenPassword });
+export type VerifyInput = z.output<typeof verifySchema>;
 
 export const changeNameSchema = z.object({ name: nameField });
 export type ChangeNameInput = z.output<typeof changeNameSchema>;

@@ -1,12 +1,26 @@
 import { write } from '@/db/client';
 import { deleteUserSessions } from '@/db/queries/sessions';
 import { hashSecret } from '@/lib/secrets';
+import { AppError } from '@/server/errors';
+import { passwordMatches } from '@/server/passwords';
+import type { VerifyInput } from './account-schema';
 import { auditAccount } from './audit-account';
 import { spentLink } from './check-password';
-import { findUserById, spendToken, updateUser } from './data';
+import { findTokenOwner, findUserById, spendToken, updateUser } from './data';
 
-/** Confirms an address by its link. Sessions begun before the proof end: whoever began them had not shown who they are. */
-export async function verifyEmail(token: string, now: number): Promise<{ userId: string }> {
+const NOT_THE_PASSWORD =
+  'That is not the password this account was made with. If somebody else made it, choose your own by "Password forgotten".';
+
+/**
+ * Confirms an address by its link and the password: the link shows who reads the mail, the password who made the account.
+ * Asking for both keeps a stranger from having an account confirmed for him. A wrong password does not use the link up.
+ */
+export async function verifyEmail({ token, password }: VerifyInput, now: number): Promise<{ userId: string }> {
+  const owner = await findTokenOwner(hashSecret(token), 'verify_email', now);
+  if (!owner) throw spentLink();
+  if (!(await passwordMatches(owner.passwordHash, password))) {
+    throw new AppError('invalid', NOT_THE_PASSWORD, { fields: { password: NOT_THE_PASSWORD } });
+  }
   return write(async (tx) => {
     const userId = await spendToken(tx, hashSecret(token), 'verify_email', now);
     const user = userId ? await findUserById(userId, tx) : null;

@@ -5,7 +5,7 @@ import { now } from '../clock';
 import { HTTP_STATUS } from '../errors';
 import { mapError } from '../map-error';
 import type { ClubScope } from '../scope';
-import { type CurrentUser, currentUser } from '../session';
+import type { CurrentUser } from '../session';
 import { requireScope, requireUser } from './enter';
 import { type Params, withInfo } from './info';
 import { plainIssue } from './plain-issue';
@@ -58,8 +58,8 @@ export function accountRoute<S extends z.ZodType>(route: Route<{ user: CurrentUs
   return withInfo(handle, { kind: 'route', who: 'account', permission: null, takes: route.query });
 }
 
-export function publicRoute<S extends z.ZodType>(route: Route<{ user: CurrentUser | null }, S>) {
-  const handle = (request: Request, context: Context) =>
-    answer(route, async () => ({ user: await currentUser() }), request, context);
+/** Asks nobody who they are: such a route answers even when sessions cannot be read. */
+export function publicRoute<S extends z.ZodType>(route: Route<object, S>) {
+  const handle = (request: Request, context: Context) => answer(route, async () => ({}), request, context);
   return withInfo(handle, { kind: 'route', who: 'anyone', permission: null, takes: route.query });
 }

@@ -9,7 +9,7 @@ import { requestSource, startSession } from '@/server/session';
 export const verifyAction = publicAction({
   input: verifySchema,
   run: async ({ input, now }) => {
-    const { userId } = await verifyEmail(input.token, now);
+    const { userId } = await verifyEmail(input, now);
     await startSession(userId);
     return { to: '/clubs' };
   },
