@@ -2,7 +2,7 @@ import type { Metadata, Viewport } from 'next';
 import localFont from 'next/font/local';
 import { cookies } from 'next/headers';
 import type { ReactNode } from 'react';
-import { LIGHT_COOKIE, lightPaper, parseLight } from '@/ui/light';
+import { LIGHT_COOKIE, lightPaper, parseLight, SUN_COOKIE, shownLight } from '@/ui/light';
 import { Providers } from '@/ui/providers';
 import './globals.css';
 
@@ -27,7 +27,8 @@ export const metadata: Metadata = {
 };
 
 async function readLight() {
-  return parseLight((await cookies()).get(LIGHT_COOKIE)?.value);
+  const jar = await cookies();
+  return shownLight(parseLight(jar.get(LIGHT_COOKIE)?.value), jar.get(SUN_COOKIE)?.value);
 }
 
 export async function generateViewport(): Promise<Viewport> {

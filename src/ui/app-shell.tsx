@@ -1,5 +1,6 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
+import { KeyboardMap } from './keyboard-map';
 import type { Light } from './light';
 import { LightSwitch } from './light-switch';
 import { BottomBar, type NavItem, RailLinks } from './nav-links';
@@ -35,6 +36,7 @@ export function AppShell({ items, home, light, club, account, offlineMark, child
         </nav>
         <div className="mt-auto flex flex-col items-start gap-1">
           {offlineMark}
+          <KeyboardMap items={items.map(({ href, label }) => ({ href, label }))} />
           <LightSwitch light={light} />
           {account}
         </div>

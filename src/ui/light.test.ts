@@ -1,6 +1,6 @@
 import { readFileSync } from 'node:fs';
 import { expect, it } from 'vitest';
-import { lightPaper, parseLight } from './light';
+import { lightPaper, parseLight, shownLight } from './light';
 
 const css = readFileSync(new URL('../app/globals.css', import.meta.url), 'utf8');
 
@@ -8,6 +8,13 @@ it('takes anything unknown as auto', () => {
   expect(parseLight('dim')).toBe('dim');
   expect(parseLight(undefined)).toBe('auto');
   expect(parseLight('"><script>')).toBe('auto');
+});
+
+it('follows the sun only where auto is chosen, and the device where the sun is not known', () => {
+  expect(shownLight('auto', 'dark')).toBe('dark');
+  expect(shownLight('dim', 'day')).toBe('dim');
+  expect(shownLight('auto', undefined)).toBe('auto');
+  expect(shownLight('auto', '"><script>')).toBe('auto');
 });
 
 it("gives the browser's frame the paper of the style sheet", () => {

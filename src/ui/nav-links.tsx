@@ -3,10 +3,11 @@
 import { Menu as MenuSign } from 'lucide-react';
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
-import { type ReactNode, useState } from 'react';
+import type { ReactNode } from 'react';
 import { findCurrent } from './current-path';
-import { Dialog } from './dialog';
 import { joinClasses } from './join-classes';
+import { LazyPart, makeLazy } from './lazy-part';
+import type { MoreSheetProps } from './more-sheet';
 
 export interface NavItem {
   href: string;
@@ -47,6 +48,8 @@ export function RailLinks({ items }: { items: readonly NavItem[] }) {
 const CELL =
   'flex min-h-14 w-full flex-col items-center justify-center gap-0.5 border-transparent border-t-[3px] px-1 pb-1 text-ink-soft text-xs no-underline aria-[current=page]:border-moss aria-[current=page]:font-semibold aria-[current=page]:text-ink';
 
+const lazyMore = makeLazy<MoreSheetProps>(() => import('./more-sheet').then((parts) => parts.MoreSheet));
+
 export interface BottomBarProps {
   items: readonly NavItem[];
   /** How many stand on the bar; the rest go under More. */
@@ -57,10 +60,10 @@ export interface BottomBarProps {
 
 export function BottomBar({ items, onBar = 4, foot }: BottomBarProps) {
   const current = useCurrent(items);
-  const [open, setOpen] = useState(false);
   const first = items.slice(0, onBar);
   const rest = items.slice(onBar);
   const inRest = rest.some((item) => item.href === current);
+  const triggerClass = joinClasses(CELL, inRest && 'border-moss! text-ink');
   return (
     <ul className="grid auto-cols-fr grid-flow-col">
       {first.map((item) => (
@@ -73,42 +76,16 @@ export function BottomBar({ items, onBar = 4, foot }: BottomBarProps) {
       ))}
       {(rest.length > 0 || foot) && (
         <li>
-          <Dialog
-            title="More"
-            open={open}
-            onOpenChange={setOpen}
-            trigger={
-              <button type="button" className={joinClasses(CELL, inRest && 'border-moss! text-ink')}>
+          <LazyPart
+            of={lazyMore}
+            part={{ items: rest, current, foot, triggerClass }}
+            closed={({ ahead, open }) => (
+              <button type="button" {...ahead} aria-haspopup="dialog" className={triggerClass} onClick={open}>
                 <MenuSign aria-hidden="true" />
                 More
               </button>
-            }
-          >
-            <nav aria-label="More pages">
-              <ul className="divide-y divide-rule">
-                {rest.map((item) => (
-                  <li key={item.href}>
-                    <Link
-                      href={item.href}
-                      onClick={() => setOpen(false)}
-                      aria-current={item.href === current ? 'page' : undefined}
-                      className="flex min-h-12 items-center gap-3 font-serif text-lg no-underline aria-[current=page]:font-semibold"
-                    >
-                      <span aria-hidden="true" className="text-ink-soft">
-                        {item.icon}
-                      </span>
-                      {item.label}
-                    </Link>
-                  </li>
-                ))}
-              </ul>
-            </nav>
-            {foot && (
-              <div className="mt-3 flex flex-wrap items-center justify-between gap-2 border-rule-strong border-t pt-3">
-                {foot}
-              </div>
             )}
-          </Dialog>
+          />
         </li>
       )}
     </ul>

@@ -3,30 +3,9 @@
 import { ChevronDown } from 'lucide-react';
 import Link from 'next/link';
 import * as Dropdown from 'radix-ui/dropdown-menu';
-import type { ReactNode } from 'react';
-import { Button, type ButtonLook } from './button';
+import { Button } from './button';
 import { joinClasses } from './join-classes';
-
-export interface MenuItem {
-  label: ReactNode;
-  /** Leads to a page; or give `onSelect`. */
-  href?: string;
-  onSelect?: () => void;
-  danger?: boolean;
-  disabled?: boolean;
-  /** Marks the one in use, as the club now shown. */
-  current?: boolean;
-}
-
-export interface MenuProps {
-  label: ReactNode;
-  /** Name for a screen reader when the label is only a sign. */
-  name?: string;
-  items: readonly MenuItem[];
-  look?: ButtonLook;
-  align?: 'start' | 'end';
-  className?: string;
-}
+import type { MenuItem, MenuProps } from './menu';
 
 const ITEM_CLASSES =
   'flex min-h-11 w-full items-center gap-3 px-4 py-2 no-underline outline-none data-highlighted:bg-sunk data-disabled:text-ink-soft';
@@ -34,9 +13,10 @@ const ITEM_CLASSES =
 export const MENU_CLASSES =
   'z-50 max-h-[70dvh] min-w-52 overflow-y-auto border border-rule-strong bg-panel py-1 text-ink';
 
-export function Menu({ label, name, items, look = 'plain', align = 'start', className }: MenuProps) {
+/** The menu itself, open as soon as it is there: see Menu. */
+export function OpenMenu({ label, name, items, look = 'plain', align = 'start', className }: MenuProps) {
   return (
-    <Dropdown.Root modal={false}>
+    <Dropdown.Root modal={false} defaultOpen>
       <Dropdown.Trigger asChild>
         <Button look={look} aria-label={name} className={className}>
           {label}

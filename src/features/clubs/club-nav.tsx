@@ -2,6 +2,7 @@ import {
   Armchair,
   CalendarCheck,
   CalendarDays,
+  CalendarRange,
   CalendarX,
   ChartNoAxesColumn,
   ClipboardList,
@@ -24,9 +25,10 @@ interface Screen {
 /** In the order of the rail; the first four a person may open stand on the phone's bar. */
 const SCREENS: Screen[] = [
   { path: 'sit', label: 'Sit', icon: <Armchair />, needs: 'sits.read' },
+  { path: 'week', label: 'Week', icon: <CalendarRange />, needs: 'sits.read' },
   { path: 'board', label: 'Board', icon: <ClipboardList />, needs: 'board.read' },
-  { path: 'my-sits', label: 'My sits', icon: <CalendarCheck />, needs: 'sits.book' },
   { path: 'log', label: 'Log', icon: <NotebookPen />, needs: 'log.write' },
+  { path: 'my-sits', label: 'My sits', icon: <CalendarCheck />, needs: 'sits.book' },
   { path: 'season', label: 'Season', icon: <ChartNoAxesColumn />, needs: 'log.read' },
   { path: 'chores', label: 'Chores', icon: <Hammer />, needs: 'chores.read' },
   { path: 'stands', label: 'Stands', icon: <TreePine />, needs: 'stands.read' },

@@ -1,10 +1,7 @@
 import { z } from 'zod';
 import { isDay } from '@/core/day-time';
 import { WEAPONS, WINDOW_NAMES } from '@/core/types';
-
-export function inAskedYears(day: string): boolean {
-  return isDay(day) && day >= '2000-01-01' && day <= '2099-12-31';
-}
+import { inAskedYears } from './asked-years';
 
 const day = z
   .string()

@@ -1,5 +1,6 @@
 import { cookies } from 'next/headers';
 import type { ReactNode } from 'react';
+import { lightBySun } from '@/core/sun-light';
 import { ConfirmEmailNotice } from '@/features/accounts/components/confirm-email-notice';
 import { listMyClubs } from '@/features/accounts/reads';
 import { clubNavItems } from '@/features/clubs/club-nav';
@@ -8,8 +9,10 @@ import { now } from '@/server/clock';
 import { findScope } from '@/server/scope';
 import { currentUser } from '@/server/session';
 import { AppShell } from '@/ui/app-shell';
+import { FollowSun } from '@/ui/follow-sun';
 import { LIGHT_COOKIE, parseLight } from '@/ui/light';
 import { Menu } from '@/ui/menu';
+import { ZoneNote } from '@/ui/zone-note';
 import { resendAction } from '../../(account)/verify/actions';
 
 interface ClubLayoutProps {
@@ -23,7 +26,7 @@ export default async function ClubLayout({ params, children }: ClubLayoutProps) 
   const scope = user && (await findScope((await params).club, user.id));
   if (!user || !scope) return children;
   const clubs = await listMyClubs(user.id, now());
-  const { slug, name } = scope.club;
+  const { slug, name, zone } = scope.club;
   return (
     <AppShell
       items={clubNavItems(slug, scope.can)}
@@ -41,6 +44,8 @@ export default async function ClubLayout({ params, children }: ClubLayoutProps) 
         />
       }
     >
+      <FollowSun changes={lightBySun(now(), scope.club)} />
+      <ZoneNote zone={zone} />
       {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
       {children}
     </AppShell>

@@ -5,7 +5,6 @@ import { useState } from 'react';
 import { useFieldArray } from 'react-hook-form';
 import { formatDay } from '@/core/day-time';
 import { type BookSitValues, bookSitSchema, type ChangeSitValues } from '@/features/bookings/sit-schema';
-import type { ActionResult } from '@/server/doors';
 import { Button } from '@/ui/button';
 import { RadioCards } from '@/ui/choices';
 import { Dialog } from '@/ui/dialog';
@@ -14,26 +13,12 @@ import { useActionForm } from '@/ui/form/use-action-form';
 import { Notice } from '@/ui/notices';
 import { Select, Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
+import type { BookActions, Hunter } from '../book-actions';
 import { sitsKey } from '../queries';
 import { newRequestKey } from '../request-key';
 import type { OpenRow, SitsView } from '../view-types';
 import { clockText, WEAPON_LABELS, WINDOW_WORDS } from '../words';
 import { GuestFields } from './guest-fields';
-
-interface Saved {
-  standName: string;
-  whenText: string;
-}
-
-export interface BookActions {
-  book: (club: string, values: BookSitValues) => Promise<ActionResult<Saved>>;
-  change: (club: string, values: ChangeSitValues) => Promise<ActionResult<Saved>>;
-}
-
-export interface Hunter {
-  id: string;
-  name: string;
-}
 
 interface BookDialogProps {
   row: OpenRow;

@@ -7,7 +7,7 @@ import { Badge } from '@/ui/page-parts';
 import { WindStrip } from '@/ui/wind/wind-strip';
 import type { SitsAskText } from '../ask-schema';
 import type { OpenRow, SitsView } from '../view-types';
-import { SitDetail } from './sit-detail';
+import { fetchBookDialog, fetchSitDetail, LazySitDetail } from './load-parts';
 import { WordMark } from './word-mark';
 
 interface SitRowProps {
@@ -39,9 +39,12 @@ export function SitRow({ row, view, ask, open, onToggle, onBook }: SitRowProps) 
           <h3 className="flex flex-wrap items-baseline gap-x-2.5 gap-y-1">
             <button
               type="button"
+              data-row
               aria-expanded={open}
               aria-controls={panelId}
               onClick={onToggle}
+              onPointerEnter={fetchSitDetail}
+              onFocus={fetchSitDetail}
               className="text-left font-serif text-lg leading-snug after:absolute after:inset-0 after:content-['']"
             >
               <span className="sr-only">{row.rank}. </span>
@@ -65,7 +68,12 @@ export function SitRow({ row, view, ask, open, onToggle, onBook }: SitRowProps) 
         </div>
         <div className="relative z-10 col-start-3 row-start-1 sm:col-start-4 sm:justify-self-end">
           {onBook && !row.mine && (
-            <Button look={row.rank === 1 && !view.mine ? 'primary' : 'plain'} onClick={onBook}>
+            <Button
+              look={row.rank === 1 && !view.mine ? 'primary' : 'plain'}
+              onClick={onBook}
+              onPointerEnter={fetchBookDialog}
+              onFocus={fetchBookDialog}
+            >
               {view.mine ? 'Move here' : 'Book'}
               <span className="sr-only">{view.mine ? `: ${row.name}` : ` ${row.name}`}</span>
             </Button>
@@ -81,7 +89,7 @@ export function SitRow({ row, view, ask, open, onToggle, onBook }: SitRowProps) 
         </div>
       </div>
       <div id={panelId} hidden={!open}>
-        {open && <SitDetail view={view} standId={row.standId} ask={ask} />}
+        {open && <LazySitDetail view={view} standId={row.standId} ask={ask} />}
       </div>
     </li>
   );

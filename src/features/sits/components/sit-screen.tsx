@@ -7,12 +7,13 @@ import { Button, ButtonLink, TextLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import type { SitsAskText } from '../ask-schema';
+import type { BookActions, Hunter } from '../book-actions';
 import { sitsQuery } from '../queries';
 import type { OpenRow, SitsView } from '../view-types';
 import { WINDOW_WORDS } from '../words';
 import { BlockedList } from './blocked-list';
-import { type BookActions, BookDialog, type Hunter } from './book-dialog';
 import { ForecastNote } from './forecast-note';
+import { LazyBookDialog } from './load-parts';
 import { SitHead } from './sit-head';
 import { SitRow } from './sit-row';
 
@@ -78,7 +79,7 @@ export function SitScreen({ ask, initial, openStandId, actions, hunters, may }: 
       />
       <BlockedList rows={view.blocked} />
       {booking && (
-        <BookDialog
+        <LazyBookDialog
           key={booking.standId}
           row={booking}
           view={view}

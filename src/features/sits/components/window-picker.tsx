@@ -5,7 +5,7 @@ import { addDays, formatDay } from '@/core/day-time';
 import { type Weapon, WINDOW_NAMES, type WindowName } from '@/core/types';
 import { ButtonLink, buttonClasses } from '@/ui/button';
 import { DateInput, Select } from '@/ui/text-inputs';
-import { inAskedYears } from '../ask-schema';
+import { inAskedYears } from '../asked-years';
 import { sitAddress } from '../sit-address';
 import type { SitsView } from '../view-types';
 import { WEAPON_LABELS, WINDOW_WORDS } from '../words';
