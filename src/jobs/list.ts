@@ -4,6 +4,13 @@ import { deleteOldRates } from '@/db/queries/rate-limits';
 import { remindUpkeep } from '@/features/chores/remind-upkeep';
 import { remindLogs } from '@/features/logs/remind-logs';
 import { sendDueMail } from '@/features/mail/send-due-mail';
+import { deleteOldNoticeLinks } from '@/features/notices/choices-data';
+import { deleteOldOutlooks } from '@/features/notices/outlooks-data';
+import { remindEvening } from '@/features/notices/remind-evening';
+import { sendWeekly } from '@/features/notices/send-weekly';
+import { tellRested } from '@/features/notices/tell-rested';
+import { tellRulesChanged } from '@/features/notices/tell-rules-changed';
+import { tellWindTurned } from '@/features/notices/tell-wind-turned';
 import { lapseUnsigned } from '@/features/outings/lapse-unsigned';
 import { deleteOldLinks } from '@/features/outings/links-data';
 import { tellOverdue } from '@/features/outings/tell-overdue';
@@ -56,6 +63,46 @@ export const JOBS: readonly Job[] = [
     },
   },
   {
+    name: 'remind-evening',
+    everyMs: 10 * MINUTE,
+    run: async (now) => {
+      const { reminded } = await remindEvening(now);
+      return `${reminded} reminded`;
+    },
+  },
+  {
+    name: 'tell-rested',
+    everyMs: 30 * MINUTE,
+    run: async (now) => {
+      const { told } = await tellRested(now);
+      return `${told} told`;
+    },
+  },
+  {
+    name: 'tell-rules-changed',
+    everyMs: 10 * MINUTE,
+    run: async (now) => {
+      const { told } = await tellRulesChanged(now);
+      return `${told} told`;
+    },
+  },
+  {
+    name: 'send-weekly',
+    everyMs: 30 * MINUTE,
+    run: async (now) => {
+      const { sent } = await sendWeekly(now);
+      return `${sent} sent`;
+    },
+  },
+  {
+    name: 'tell-wind-turned',
+    everyMs: 10 * MINUTE,
+    run: async (now) => {
+      const { told } = await tellWindTurned(now);
+      return `${told} told`;
+    },
+  },
+  {
     name: 'send-mail',
     everyMs: 5 * SECOND,
     run: async (now) => {
@@ -79,6 +126,8 @@ export const JOBS: readonly Job[] = [
         await deleteOldRates(tx, now - DAY);
         await deleteOldRuns(tx, now - 2 * DAY);
         await deleteOldLinks(tx, now - 30 * DAY);
+        await deleteOldNoticeLinks(tx, now - 365 * DAY);
+        await deleteOldOutlooks(tx, now - 30 * DAY);
       });
       return 'old counts, runs and links removed';
     },

@@ -40,6 +40,9 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   'api/clubs/[club]/sits/[stand]/route.ts': { GET: 'sits.read' },
   'api/clubs/[club]/sits/route.ts': { GET: 'sits.read' },
   'api/clubs/[club]/week/route.ts': { GET: 'sits.read' },
+  'api/unsubscribe/[secret]/route.ts': { GET: 'anyone', POST: 'anyone' },
+  'unsubscribe/[token]/actions.ts': { unsubscribeAction: 'anyone' },
+  'unsubscribe/[token]/page.tsx': { default: 'anyone' },
   'api/health/route.ts': { GET: 'anyone' },
   'calendar/[secret]/route.ts': { GET: 'anyone' },
   'clubs/[club]/board/actions.ts': {
@@ -119,6 +122,10 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   'clubs/[club]/log/page.tsx': { default: 'log.write' },
   'clubs/[club]/log/visits/new/page.tsx': { default: 'visits.write' },
   'clubs/[club]/my-sits/page.tsx': { default: 'sits.book' },
+  'clubs/[club]/notices/actions.ts': { saveChoicesAction: 'notices.own' },
+  'clubs/[club]/notices/page.tsx': { default: 'notices.own' },
+  'clubs/[club]/notices/swap/[sit]/actions.ts': { swapSitAction: 'sits.book' },
+  'clubs/[club]/notices/swap/[sit]/page.tsx': { default: 'sits.book' },
   'clubs/[club]/page.tsx': { default: 'club.read' },
   'clubs/[club]/season/harvest/[harvest]/page.tsx': { default: 'harvest.read' },
   'clubs/[club]/season/harvest/actions.ts': {

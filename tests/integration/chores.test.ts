@@ -1,8 +1,10 @@
 import { eq } from 'drizzle-orm';
+import ical from 'ical.js';
 import { beforeEach, describe, expect, it } from 'vitest';
 import {
   addChoreAction,
   addWorkDayAction,
+  cancelWorkDayAction,
   creditWorkDayAction,
   finishChoreAction,
   joinWorkDayAction,
@@ -13,6 +15,8 @@ import { type InspectionAnswers, itemsFor } from '@/core/upkeep/inspection';
 import { reader } from '@/db/client';
 import { auditLog, chores, closures, outbox, visits } from '@/db/schema';
 import { loadGates } from '@/features/bookings/load-gates';
+import { makeFeed } from '@/features/calendar/make-feed';
+import { readFeed } from '@/features/calendar/read-feed';
 import { EMPTY_CHORE } from '@/features/chores/chore-schema';
 import { readChores, readStandUpkeep } from '@/features/chores/reads';
 import { remindUpkeep } from '@/features/chores/remind-upkeep';
@@ -219,6 +223,34 @@ describe('work days', () => {
       { name: 'Ada Steward', hours: 0 },
     ]);
     expect(pastDays).toMatchObject([{ hours: 4, over: true }]);
+  });
+});
+
+describe('the calendar feed', () => {
+  it('holds work days, and as cancelled those called off, as an independent parser reads them', async () => {
+    const day = {
+      title: 'Work day',
+      day: '2026-11-14',
+      startClock: '08:00',
+      endClock: '12:00',
+      meet: 'the barn',
+      notes: '',
+    };
+    const made = await inRequest(steward.browser, () => addWorkDayAction(club.slug, day));
+    const { url } = await makeFeed(dale.scope, { scope: 'own', withPlace: false }, TEST_NOW);
+    const secret = /calendar\/([^.]+)\.ics/.exec(url)?.[1] ?? '';
+    const event = async () => {
+      const { body } = await readFeed(secret, TEST_NOW);
+      const found = new ical.Component(ical.parse(body)).getFirstSubcomponent('vevent');
+      const value = (name: string) => String(found?.getFirstPropertyValue(name));
+      return [value('summary'), value('dtstart'), value('status'), value('sequence'), value('location')];
+    };
+    const summary = `Work day, ${dale.scope.club.name}`;
+    // 8:00 EST is 13:00 UTC.
+    expect(await event()).toEqual([summary, '2026-11-14T13:00:00Z', 'CONFIRMED', '0', 'the barn']);
+    const id = made.ok ? made.data.id : '';
+    await inRequest(steward.browser, () => cancelWorkDayAction(club.slug, { id }));
+    expect((await event()).slice(2, 4)).toEqual(['CANCELLED', '1']);
   });
 });
 

@@ -2,7 +2,8 @@ import { createHash } from 'node:crypto';
 import { addDays, dayOf } from '@/core/day-time';
 import { can } from '@/core/permissions';
 import { listSitsSince } from '@/features/bookings/data';
-import { sitCalendar } from '@/features/bookings/sit-calendar';
+import { type CalendarEntry, sitCalendar } from '@/features/bookings/sit-calendar';
+import { listWorkDaysSince, type WorkDayRow } from '@/features/chores/work-days-data';
 import { hashSecret } from '@/lib/secrets';
 import { notFound } from '@/server/errors';
 import { systemScopeById } from '@/server/scope';
@@ -13,6 +14,20 @@ import { FEED_NAMES, FEED_PERMISSIONS } from './feed-permission';
 /** Cancelled sits stay this long, so that a calendar that looks seldom still learns of them. */
 const DAYS_BACK = 120;
 const REFRESH_SECONDS = 30 * 60;
+
+/** A work day as an entry beside the sits. */
+function workDayEntry(row: WorkDayRow, club: { name: string }): CalendarEntry {
+  const { meet, notes } = row;
+  return {
+    sit: { ...row, status: row.cancelledAt === null ? 'booked' : 'cancelled' },
+    shown: {
+      summary: `${row.title}, ${club.name}`,
+      description: [meet && `Meet at ${meet}`, notes].filter(Boolean).join('\n'),
+      location: meet || null,
+      place: null,
+    },
+  };
+}
 
 export interface FeedBody {
   body: string;
@@ -28,12 +43,16 @@ export async function readFeed(secret: string, now: number): Promise<FeedBody> {
   const { club } = scope;
   const fromDay = addDays(dayOf(now, club.zone), -DAYS_BACK);
   const sits = await listSitsSince(scope, fromDay, feed.scope === 'own' ? feed.memberId : null);
+  const workDays = can(found.role, 'chores.read') ? await listWorkDaysSince(scope, fromDay) : [];
   const reader = { memberId: feed.memberId, privacy: club.rules.calendarPrivacy, withPlace: feed.withPlace };
   const body = sitCalendar({
     name: `${club.name}: ${FEED_NAMES[feed.scope]}`,
     method: 'PUBLISH',
     refreshSeconds: REFRESH_SECONDS,
-    entries: sits.map((sit) => ({ sit, shown: entryFor(sit, club, reader) })),
+    entries: [
+      ...sits.map((sit) => ({ sit, shown: entryFor(sit, club, reader) })),
+      ...workDays.map((row) => workDayEntry(row, club)),
+    ],
   });
   return { body, etag: `"${createHash('sha256').update(body).digest('base64url').slice(0, 27)}"` };
 }

@@ -1,5 +1,6 @@
 import {
   Armchair,
+  BellRing,
   CalendarCheck,
   CalendarDays,
   CalendarRange,
@@ -35,6 +36,7 @@ const SCREENS: Screen[] = [
   { path: 'ground', label: 'Ground', icon: <MapSign />, needs: 'features.read' },
   { path: 'closures', label: 'Closed days', icon: <CalendarX />, needs: 'closed_days.write' },
   { path: 'calendar', label: 'Calendar', icon: <CalendarDays />, needs: 'feeds.own' },
+  { path: 'notices', label: 'Notices', icon: <BellRing />, needs: 'notices.own' },
   { path: 'club', label: 'Club', icon: <Users />, needs: 'club.read' },
 ];
 

@@ -1,0 +1,100 @@
+import { legalLightRuleOf } from '@/core/booking/seasons';
+import { addDays, dayOf, formatClock } from '@/core/day-time';
+import { legalLight } from '@/core/legal-light';
+import { sentence } from '@/core/sentence';
+import { sunTimes } from '@/core/sun';
+import type { ApproachOption, Verdict } from '@/core/types';
+import { reader, write } from '@/db/client';
+import { listClubs } from '@/db/queries/memberships';
+import { env } from '@/env';
+import { listBookedSits, type SitDetail } from '@/features/bookings/data';
+import { clockText, dayAndWindow, spanText } from '@/features/bookings/sit-words';
+import { hasMail } from '@/features/mail/data';
+import { legalLightText, minutesText } from '@/features/sits/words';
+import { getForecast } from '@/features/weather/get-forecast';
+import { type ClubScope, findScope, systemScopeById } from '@/server/scope';
+import { listNoticePeople } from './choices-data';
+import { judgeSit } from './judge-sits';
+import { type NoticeMail, queueNotice, wanting } from './queue-notice';
+
+/** The club's clock between which the evening's mail is made. Our choice. */
+const FROM_CLOCK = '18:00';
+const TO_CLOCK = '22:00';
+
+const keyOf = (sit: SitDetail) => `notice.evening_before:${sit.id}:${sit.day}`;
+
+/** By the way the member named, else by the best there is. */
+function wayOf(sit: SitDetail, verdict: Verdict | undefined): ApproachOption | null {
+  if (!verdict?.approach) return null;
+  const all = [verdict.approach, ...verdict.approachAlternatives];
+  return all.find(({ approachId }) => approachId === sit.approachId) ?? verdict.approach;
+}
+
+function factsOf(scope: ClubScope, sit: SitDetail, verdict: Verdict | undefined): { label: string; value: string }[] {
+  const { club } = scope;
+  const clock = (at: number) => clockText(at, club);
+  const way = wayOf(sit, verdict);
+  const sun = sunTimes(sit.day, club.zone, club.lat, club.lon);
+  const rule = legalLightRuleOf(club.rules, sit.day, sit.weapon);
+  const light = rule ? legalLight(rule, sit.day, club) : null;
+  const from = way?.parkingName ?? sit.parkingName;
+  return [
+    { label: 'Stand', value: sit.standName },
+    { label: 'When', value: `${dayAndWindow(sit.day, sit.windows, true)}, ${spanText(sit.startAt, sit.endAt, club)}` },
+    ...(way
+      ? [
+          { label: 'Leave by', value: `${clock(way.leaveBy)}${from ? ` from ${from}` : ''}` },
+          { label: 'Way in', value: `${way.approachName}, ${minutesText(way.walkSeconds)}; in by ${clock(way.inBy)}` },
+        ]
+      : [{ label: 'Way in', value: 'none is drawn for this stand' }]),
+    ...(verdict ? [{ label: 'Wind', value: sentence({ ...verdict, gates: [], approach: way }, clock) }] : []),
+    ...(sun.rise !== null && sun.set !== null
+      ? [{ label: 'Sun', value: `up ${clock(sun.rise)}, down ${clock(sun.set)}` }]
+      : []),
+    ...(rule && light
+      ? [{ label: 'Light', value: `${clock(light.startAt)} to ${clock(light.endAt)}. ${legalLightText(rule)}` }]
+      : []),
+  ];
+}
+
+function mailOf(scope: ClubScope, sit: SitDetail, verdicts: Verdict[]): NoticeMail {
+  const first = verdicts[0];
+  const cautions = (first?.cautions ?? []).filter(({ level }) => level !== 'note').map(({ text }) => text);
+  return {
+    kind: 'evening_before',
+    dedupeKey: keyOf(sit),
+    subject: `Tomorrow: ${sit.standName}, ${dayAndWindow(sit.day, sit.windows)}`,
+    paragraphs: [`You sit at ${sit.standName} tomorrow.`],
+    facts: factsOf(scope, sit, first),
+    button: { label: 'Open my sits', url: `${env.appUrl}/clubs/${scope.club.slug}/my-sits` },
+    after: [
+      ...cautions,
+      'Harness on from ground to ground. Sign in on the board, and tell somebody at home when you will be back.',
+    ],
+  };
+}
+
+/** In the evening, tells each member who sits tomorrow when to leave, by which way, and in what wind: once a sit. */
+export async function remindEvening(now: number): Promise<{ reminded: number }> {
+  let reminded = 0;
+  for (const club of await listClubs()) {
+    const clock = formatClock(now, club.zone);
+    if (clock < FROM_CLOCK || clock >= TO_CLOCK) continue;
+    const scope = await systemScopeById(club.id);
+    const today = dayOf(now, club.zone);
+    const day = addDays(today, 1);
+    const sits = await listBookedSits(scope, { fromDay: day, toDay: day });
+    const known = await hasMail(sits.map(keyOf), reader());
+    const people = wanting(await listNoticePeople(scope), 'evening_before', today);
+    const kept = await getForecast(scope.club, now);
+    for (const sit of sits.filter((one) => !known.has(keyOf(one)))) {
+      const person = people.find(({ memberId }) => memberId === sit.memberId);
+      // Through the member's own eyes: a guest is told no feature's name.
+      const own = person && (await findScope(club.slug, person.userId));
+      if (!person || !own) continue;
+      const mail = mailOf(scope, sit, await judgeSit(own, sit, kept, now, 'full'));
+      if (await write((tx) => queueNotice(tx, scope, person, mail, now))) reminded += 1;
+    }
+  }
+  return { reminded };
+}
