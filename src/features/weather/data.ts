@@ -9,6 +9,15 @@ export async function findForecastRow(placeKey: string, from: ReadFrom = reader(
   return row ?? null;
 }
 
+/** What tells one kept forecast from the next, without its hours. */
+export async function findForecastMark(placeKey: string, from: ReadFrom = reader()) {
+  const [row] = await from
+    .select({ fetchedAt: forecasts.fetchedAt, issuedAt: forecasts.issuedAt, lastError: forecasts.lastError })
+    .from(forecasts)
+    .where(eq(forecasts.placeKey, placeKey));
+  return row ?? null;
+}
+
 export type ClaimSet = Pick<ForecastRow, 'nextFetchAt' | 'leaseUntil' | 'leaseBy' | 'lastTriedAt'>;
 
 export async function claimForecastRow(tx: Tx, placeKey: string, set: ClaimSet): Promise<void> {

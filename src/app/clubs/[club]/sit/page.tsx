@@ -1,7 +1,7 @@
 import { listHunters } from '@/features/ground/data';
 import { readAsk } from '@/features/sits/ask-schema';
 import { SitScreen } from '@/features/sits/components/sit-screen';
-import { readSits } from '@/features/sits/reads';
+import { readKeptSits } from '@/features/sits/kept-reads';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { bookSitAction, changeSitAction } from './actions';
@@ -10,7 +10,7 @@ export const metadata = { title: 'Sit' };
 
 export default clubPage('sits.read', async ({ scope, search }) => {
   const ask = readAsk(search);
-  const initial = await readSits(scope, ask, now());
+  const initial = await readKeptSits(scope, ask, now());
   const hunters = scope.can('sits.book_for_others') ? await listHunters(scope) : null;
   const { day, window } = initial.window;
   return (

@@ -1,6 +1,6 @@
 import { readAsk } from '@/features/sits/ask-schema';
 import { WeekScreen } from '@/features/sits/components/week-screen';
-import { readWeek } from '@/features/sits/read-week';
+import { readKeptWeek } from '@/features/sits/kept-reads';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 
@@ -8,5 +8,5 @@ export const metadata = { title: 'Week' };
 
 export default clubPage('sits.read', async ({ scope, search }) => {
   const { weapon } = readAsk(search);
-  return <WeekScreen key={weapon} ask={{ weapon }} initial={await readWeek(scope, { weapon }, now())} />;
+  return <WeekScreen key={weapon} ask={{ weapon }} initial={await readKeptWeek(scope, { weapon }, now())} />;
 });

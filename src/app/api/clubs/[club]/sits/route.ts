@@ -1,8 +1,8 @@
 import { sitsAskSchema } from '@/features/sits/ask-schema';
-import { readSits } from '@/features/sits/reads';
+import { readKeptSits } from '@/features/sits/kept-reads';
 import { clubRoute } from '@/server/doors';
 
 export const GET = clubRoute('sits.read', {
   query: sitsAskSchema,
-  run: ({ scope, query, now }) => readSits(scope, query, now),
+  run: ({ scope, query, now }) => readKeptSits(scope, query, now),
 });

@@ -1,8 +1,8 @@
 import { weekAskSchema } from '@/features/sits/ask-schema';
-import { readWeek } from '@/features/sits/read-week';
+import { readKeptWeek } from '@/features/sits/kept-reads';
 import { clubRoute } from '@/server/doors';
 
 export const GET = clubRoute('sits.read', {
   query: weekAskSchema,
-  run: ({ scope, query, now }) => readWeek(scope, query, now),
+  run: ({ scope, query, now }) => readKeptWeek(scope, query, now),
 });
