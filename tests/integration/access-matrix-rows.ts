@@ -53,6 +53,7 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
     shareSitAction: 'sits.book',
     revokeSitLinksAction: 'sits.book',
   },
+  'clubs/[club]/board/gate-sheet/page.tsx': { default: 'board.read' },
   'clubs/[club]/board/page.tsx': { default: 'board.read' },
   'clubs/[club]/calendar/actions.ts': { makeFeedAction: 'feeds.own', revokeFeedAction: 'feeds.own' },
   'clubs/[club]/calendar/page.tsx': { default: 'feeds.own' },

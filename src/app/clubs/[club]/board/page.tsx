@@ -35,11 +35,18 @@ export default clubPage('board.read', async ({ scope }) => {
         over={name}
         title="Board"
         lead="Who is on the ground, and who is booked where today and tomorrow, by the club's clock."
-        actions={scope.can('sits.book') && <ButtonLink href={`/clubs/${slug}/my-sits`}>My sits</ButtonLink>}
+        actions={
+          <>
+            {scope.can('sits.book') && <ButtonLink href={`/clubs/${slug}/my-sits`}>My sits</ButtonLink>}
+            <ButtonLink look="quiet" href={`/clubs/${slug}/board/gate-sheet`}>
+              Gate sheet
+            </ButtonLink>
+          </>
+        }
       />
-      <Notice level="caution" title="Windrest is no rescue service" className="mb-8">
-        It mails those the club and the member have named, and sends nobody. Tell someone where you sit and when you
-        will be back, and call the emergency number when somebody is missing.
+      <Notice level="caution" title="Windrest is no rescue service" className="mb-6">
+        It mails those the club and the member have named, and sends nobody. When somebody is missing, call the
+        emergency number.
       </Notice>
       <BoardView
         club={slug}
