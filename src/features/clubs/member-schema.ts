@@ -32,7 +32,9 @@ function keepStanding<T extends Standing>(typed: T, ctx: z.RefinementCtx) {
   return { ...typed, sponsorId, guestFrom, guestTo };
 }
 
-export const inviteSchema = z.object({ name: nameField, email: emailField, ...standing }).transform(keepStanding);
+const invitedName = z.string().trim().min(1, 'Write the name of the person you invite.').pipe(nameField);
+
+export const inviteSchema = z.object({ name: invitedName, email: emailField, ...standing }).transform(keepStanding);
 export type InviteForm = z.input<typeof inviteSchema>;
 export type InviteInput = z.output<typeof inviteSchema>;
 

@@ -18,7 +18,9 @@ export function JobRuns({ caption, runs }: { caption: string; runs: JobRunLine[]
           <Tr key={run.id}>
             <RowHead className="font-normal! sm:whitespace-nowrap">{run.when}</RowHead>
             <Td label="State">
-              <Badge look={LOOKS[run.state]}>{run.state}</Badge>
+              <span>
+                <Badge look={LOOKS[run.state]}>{run.state}</Badge>
+              </span>
             </Td>
             <Td label="Tries" align="right">
               {run.attempts}
