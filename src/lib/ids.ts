@@ -29,6 +29,7 @@ export const ID_PREFIXES = {
   feed: 'fed',
   audit: 'aud',
   mail: 'mal',
+  adjustment: 'adj',
 } as const;
 
 export type IdKind = keyof typeof ID_PREFIXES;
