@@ -1,0 +1,36 @@
+import { findCrossings, findUpwindWays } from './find-approach-faults';
+import { findBesideApproach } from './find-beside-approach';
+import { findCrowdedScrapes } from './find-crowded-scrapes';
+import { findOffLines } from './find-off-lines';
+import { findOffShot } from './find-off-shot';
+import { findCameraSun, findSeatSun } from './find-sun';
+import { findUnhuntable } from './find-unhuntable';
+import { FINDING_CODES, type Finding, type SetupInput } from './setup-types';
+
+/**
+ * Faults of a club's ground: what draws deer off the shot, onto the walk or away from the line they should travel, ways that
+ * give the sit away, and sun in eyes and cameras. Distances in metres, bearings in degrees true. Rules and distances are
+ * practice (settings). In order of rule, then stand, then name; the same input gives the same findings. Never throws.
+ */
+export function checkSetup(input: SetupInput): Finding[] {
+  const offShot = findOffShot(input);
+  // A place already found off the shot of a seat is not told a second time.
+  const told = new Set(offShot.map((f) => f.subject.id));
+  const found = [
+    ...offShot,
+    ...findBesideApproach(input),
+    ...findUnhuntable(input).filter((f) => !told.has(f.subject.id)),
+    ...findCrowdedScrapes(input),
+    ...findOffLines(input),
+    ...findCrossings(input),
+    ...findUpwindWays(input),
+    ...findSeatSun(input),
+    ...findCameraSun(input),
+  ];
+  // A feature of several parts is told once.
+  const once = [...new Map(found.map((f) => [f.key, f])).values()];
+  const name = (f: Finding) => `${f.stand?.name ?? ''} ${f.subject.name}`;
+  return once.sort(
+    (a, b) => FINDING_CODES.indexOf(a.code) - FINDING_CODES.indexOf(b.code) || name(a).localeCompare(name(b)),
+  );
+}

@@ -1,0 +1,162 @@
+import { apartDeg, normalizeDeg } from '../angles';
+import { formatClock, formatClock12, localToUtc, monthOf } from '../day-time';
+import { sunInEyes } from '../promise/sun-in-eyes';
+import { sectorName } from '../sectors';
+import { sunPosition } from '../sun';
+
+import { makeFinding, standFacts } from './make-finding';
+import type { Finding, SetupInput } from './setup-types';
+import { windowsHunted } from './shot-of';
+
+const STEP_MS = 5 * 60_000;
+/** Sun in the eyes less than this (0-1) troubles nobody. */
+const TROUBLES = 0.3;
+const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
+
+interface Moment {
+  at: number;
+  altitudeDeg: number;
+  azimuthDeg: number;
+}
+
+/** The low sun of some spans, one list a day. */
+function lowSun(spans: { startAt: number; endAt: number }[], input: SetupInput, upToDeg: number): Moment[][] {
+  return spans.map(({ startAt, endAt }) => {
+    const out: Moment[] = [];
+    for (let at = startAt; at < endAt; at += STEP_MS) {
+      const sun = sunPosition(at, input.place.lat, input.place.lon);
+      if (sun.altitudeDeg > -0.3 && sun.altitudeDeg < upToDeg) out.push({ at, ...sun });
+    }
+    return out;
+  });
+}
+
+interface SunSpell {
+  /** Indexes of the days troubled. */
+  days: number[];
+  moments: Moment[];
+  most: number;
+}
+
+function spell(days: Moment[][], blinds: (m: Moment) => boolean, least: number): SunSpell {
+  const found = days.map((moments) => moments.filter(blinds));
+  const troubled = found.map((m, i) => ({ i, minutes: m.length * 5 })).filter(({ minutes }) => minutes >= least);
+  return {
+    days: troubled.map(({ i }) => i),
+    moments: troubled.flatMap(({ i }) => found[i] ?? []),
+    most: Math.max(0, ...troubled.map(({ minutes }) => minutes)),
+  };
+}
+
+function nearestFree(facingDeg: number, free: (deg: number) => boolean): number | null {
+  for (let turn = 5; turn <= 180; turn += 5) {
+    for (const deg of [normalizeDeg(facingDeg - turn), normalizeDeg(facingDeg + turn)]) if (free(deg)) return deg;
+  }
+  return null;
+}
+
+function whenText(moments: Moment[], days: string[], input: SetupInput): string {
+  const clocks = moments.map((m) => formatClock(m.at, input.place.zone)).sort();
+  const first = moments.find((m) => formatClock(m.at, input.place.zone) === clocks[0]);
+  const last = moments.find((m) => formatClock(m.at, input.place.zone) === clocks.at(-1));
+  const clock = (at: number) =>
+    input.units === 'us' ? formatClock12(at, input.place.zone) : formatClock(at, input.place.zone);
+  const months = days.map((day) => MONTHS[monthOf(day) - 1] ?? '');
+  return `${first ? clock(first.at) : ''} to ${last ? clock(last.at) : ''} in ${months.join(', ')}`;
+}
+
+/** Seats that look into the low sun in a window they are hunted in. */
+export function findSeatSun(input: SetupInput): Finding[] {
+  const { promise } = input.scoring;
+  const low = (['morning', 'evening'] as const).map((name) => {
+    const windows = input.windows.filter(({ window }) => window === name);
+    return { name, windows, days: lowSun(windows, input, promise.sunAltitudeDeg) };
+  });
+  const blinds = (deg: number) => (m: Moment) => sunInEyes(deg, m.altitudeDeg, m.azimuthDeg, promise) >= TROUBLES;
+  return input.stands.flatMap((stand) => {
+    const facing = stand.facingDeg;
+    if (facing === null) return [];
+    const hunted = low.filter(({ name }) => windowsHunted(stand).includes(name));
+    const spells = hunted.map((one) => ({ ...one, spell: spell(one.days, blinds(facing), input.settings.sunMinutes) }));
+    const worst = spells.filter((s) => s.spell.most > 0).sort((a, b) => b.spell.most - a.spell.most)[0];
+    if (!worst) return [];
+    const free = (deg: number) =>
+      hunted.every((one) => spell(one.days, blinds(deg), input.settings.sunMinutes).days.length === 0);
+    const better = nearestFree(facing, free);
+    const when = whenText(
+      worst.spell.moments,
+      worst.spell.days.map((i) => worst.windows[i]?.day ?? ''),
+      input,
+    );
+    const turned = better === null ? '' : ` Facing ${Math.round(better)}° (${sectorName(better)}) avoids it.`;
+    return [
+      makeFinding(
+        {
+          code: 'seat_sun',
+          subject: { of: 'stand', id: stand.id, name: stand.name },
+          stand: { id: stand.id, name: stand.name },
+          at: stand.at,
+          distanceM: null,
+          bearingDeg: facing,
+          text: `${stand.name} faces the low sun on clear ${worst.name}s, ${when}`,
+          why: `The sitter is blinded and lit up for as long as ${worst.spell.most} minutes of a ${worst.name}.${turned}`,
+          acts: [
+            ...(better === null
+              ? []
+              : [
+                  {
+                    act: 'turn' as const,
+                    text: `Turn ${stand.name} to face ${Math.round(better)}° (${sectorName(better)})`,
+                  },
+                ]),
+            { act: 'block', text: `Brush in ${stand.name} against the ${worst.name} sun` },
+          ],
+          trial:
+            better === null ? null : { change: 'facing', standId: stand.id, facingDeg: better, window: worst.name },
+        },
+        [standFacts(stand)],
+      ),
+    ];
+  });
+}
+
+const wholeDays = (days: string[], zone: string) =>
+  days.map((day) => ({ startAt: localToUtc(day, '00:00', zone), endAt: localToUtc(day, '23:59', zone) }));
+
+/** Cameras that look into the low sun: which hours and months, and the bearing nearest theirs that avoids it. */
+export function findCameraSun(input: SetupInput): Finding[] {
+  const { settings } = input;
+  const days = lowSun(wholeDays(input.days, input.place.zone), input, settings.cameraSunDeg);
+  const blinds = (deg: number) => (m: Moment) => apartDeg(deg, m.azimuthDeg) < settings.cameraTurnDeg;
+  return input.cameras.flatMap((camera) => {
+    const facing = camera.facingDeg;
+    if (facing === null) return [];
+    const found = spell(days, blinds(facing), settings.sunMinutes);
+    if (found.days.length === 0) return [];
+    const better = nearestFree(facing, (deg) => spell(days, blinds(deg), settings.sunMinutes).days.length === 0);
+    const name = camera.name || 'A camera';
+    const when = whenText(
+      found.moments,
+      found.days.map((i) => input.days[i] ?? ''),
+      input,
+    );
+    const to = better === null ? 'another way' : `${Math.round(better)}° (${sectorName(better)})`;
+    return [
+      makeFinding(
+        {
+          code: 'camera_sun',
+          subject: { of: 'camera', id: camera.id, name },
+          stand: null,
+          at: camera.at,
+          distanceM: null,
+          bearingDeg: facing,
+          text: `${name} looks into the low sun, ${when}`,
+          why: `Pictures wash out and the sun sets it off. Facing ${to} keeps it out of the picture.`,
+          acts: [{ act: 'turn', text: `Turn ${name} to face ${to}` }],
+          trial: null,
+        },
+        [camera.id, Math.round(camera.at.eastM), Math.round(camera.at.northM), facing],
+      ),
+    ];
+  });
+}

@@ -1,0 +1,64 @@
+import type { ScoredFeature, ScoredStand } from '../types';
+import { away, featureFacts, makeFinding, standFacts } from './make-finding';
+import type { Finding, SetupInput } from './setup-types';
+import { canShoot, carries, isAttraction, type Shot, shotOf, windowsHunted, windsHunted } from './shot-of';
+
+interface InShot {
+  stand: ScoredStand;
+  shot: Shot;
+}
+
+function huntable({ stand, shot }: InShot, scentDeg: number): boolean {
+  if (shot.metres < 5) return true;
+  return windowsHunted(stand).some((window) =>
+    windsHunted(stand, window).some((point) => !carries(point * 22.5, shot.bearing, scentDeg)),
+  );
+}
+
+function tell(feature: ScoredFeature, nearest: InShot, shots: InShot[], input: SetupInput): Finding {
+  const { stand, shot } = nearest;
+  const far = away(shot.metres, shot.bearing, input.units);
+  const reached = shots.length > 0;
+  const names = shots.map((s) => s.stand.name).join(', ');
+  const text = reached
+    ? `${feature.name} can be hunted on no wind: ${names} ${shots.length === 1 ? 'reaches' : 'reach'} it only with scent blowing to it`
+    : `${feature.name} is in shot from no stand; the nearest, ${stand.name}, has it ${far}`;
+  return makeFinding(
+    {
+      code: 'unhuntable',
+      subject: { of: 'feature', id: feature.id, name: feature.name },
+      stand: { id: stand.id, name: stand.name },
+      at: shot.nearest,
+      distanceM: shot.metres,
+      bearingDeg: shot.bearing,
+      text,
+      why: reached
+        ? 'Every good wind of the stands that reach it carries scent from the seat to where the deer come.'
+        : 'What draws deer where nobody can sit draws them away from where somebody does.',
+      acts: [
+        { act: 'move_seat', text: `Hang a seat off ${feature.name}, crosswind of it` },
+        ...(feature.kind === 'scrape' || feature.kind === 'water'
+          ? [{ act: 'take_away' as const, text: `Take away ${feature.name}` }]
+          : []),
+      ],
+      trial: reached ? { change: 'without_features', standId: stand.id, featureIds: [feature.id], window: null } : null,
+    },
+    [featureFacts(feature), ...(reached ? shots : [nearest]).map((s) => standFacts(s.stand))],
+  );
+}
+
+/** Attractions that no stand can hunt on any of its winds. */
+export function findUnhuntable(input: SetupInput): Finding[] {
+  const { stands, settings } = input;
+  const hunted = stands.filter((stand) => windowsHunted(stand).length > 0);
+  if (hunted.length === 0) return [];
+  return input.features.filter(isAttraction).flatMap((feature) => {
+    const all = hunted
+      .map((stand) => ({ stand, shot: shotOf(stand, feature.shape, input) }))
+      .sort((a, b) => a.shot.metres - b.shot.metres || a.stand.id.localeCompare(b.stand.id));
+    const shots = all.filter(({ shot }) => canShoot(shot));
+    if (shots.some((one) => huntable(one, settings.scentDeg))) return [];
+    const nearest = shots[0] ?? all[0];
+    return nearest ? [tell(feature, nearest, shots, input)] : [];
+  });
+}
