@@ -24,6 +24,7 @@ const FEATURES = [
   'clubs',
   'ground',
   'map',
+  'exchange',
   'weather',
   'bookings',
   'outings',

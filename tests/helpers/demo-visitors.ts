@@ -71,8 +71,10 @@ async function realParams(): Promise<Record<string, string>> {
   const [harvest] = await from.select().from(schema.harvests).limit(1);
   const [chore] = await from.select().from(schema.chores).limit(1);
   const [workDay] = await from.select().from(schema.workDays).limit(1);
+  const [imported] = await from.select().from(schema.imports).limit(1);
   return {
     club: DEMO_SLUG,
+    import: imported?.id ?? '',
     stand: approach?.standId ?? '',
     approach: approach?.id ?? '',
     feature: feature?.id ?? '',

@@ -4,6 +4,7 @@ import { buildClosures } from './build-closures';
 import { buildClub, buildUsers } from './build-club';
 import { buildGround } from './build-ground';
 import { buildHarvests, buildLogVersions } from './build-harvests';
+import { buildImports } from './build-imports';
 import { buildLand } from './build-land';
 import { buildLogs } from './build-logs';
 import { buildContacts, buildOutings } from './build-outings';
@@ -63,5 +64,6 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
       ...buildAudit(day, second, { ground: { ...ground, stands: second.stands }, closures: [], sits: [] }),
     ],
     mapItems: buildLand(day, club),
+    imports: buildImports({ today, dice: makeDice(`imports ${today}`) }, club),
   };
 }

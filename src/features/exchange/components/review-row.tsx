@@ -1,0 +1,79 @@
+import type { Units } from '@/core/units';
+import { CONTROL_CLASSES } from '@/ui/field';
+import { Td, Tr } from '@/ui/table';
+import { fateText } from '../fate';
+import { choicesFor } from '../kind-values';
+import type { ReviewRow } from '../review';
+import type { Judged } from './use-review';
+
+const SHAPE_WORDS = { point: 'Point', line: 'Line', area: 'Area' } as const;
+
+interface ReviewRowProps {
+  judged: Judged;
+  units: Units;
+  disabled: boolean;
+  onKind: (row: ReviewRow, kind: string) => void;
+  onTaken: (row: ReviewRow, kind: string, taken: boolean) => void;
+}
+
+export function ReviewTableRow({ judged, units, disabled, onKind, onTaken }: ReviewRowProps) {
+  const { row, choice, fate } = judged;
+  const name = row.name || `Row ${row.row}`;
+  const may = fate === 'ready' || fate === 'twin';
+  return (
+    <Tr>
+      <Td label="Add">
+        <input
+          type="checkbox"
+          aria-label={`Add ${name}, row ${row.row}`}
+          className="tick size-5"
+          checked={choice.taken && may}
+          disabled={disabled || !may}
+          onChange={({ target }) => onTaken(row, choice.kind, target.checked)}
+        />
+      </Td>
+      <Td label="Name">
+        <span className="break-words font-serif font-semibold">{name}</span>
+        {row.notes && (
+          <span className="block max-w-prose truncate text-ink-soft text-sm">{row.notes.slice(0, 120)}</span>
+        )}
+      </Td>
+      <Td label="Shape">
+        {row.shape === null ? '–' : SHAPE_WORDS[row.shape]}
+        {row.size.points > 1 && <span className="text-ink-soft">, {row.size.points} points</span>}
+      </Td>
+      <Td label="What it is">
+        {row.shape === null ? (
+          '–'
+        ) : (
+          <select
+            aria-label={`What ${name}, row ${row.row}, is`}
+            className={CONTROL_CLASSES}
+            value={choice.kind}
+            disabled={disabled}
+            onChange={({ target }) => onKind(row, target.value)}
+          >
+            <option value="">Choose</option>
+            {choicesFor(row.shape).map((group) => (
+              <optgroup key={group.label} label={group.label}>
+                {group.options.map(({ value, label }) => (
+                  <option key={value} value={value}>
+                    {label}
+                  </option>
+                ))}
+              </optgroup>
+            ))}
+          </select>
+        )}
+      </Td>
+      <Td label="What becomes of it">
+        <span className={fate === 'ready' ? '' : 'font-semibold'}>{fateText(row, choice.kind, units)}</span>
+        {row.remarks.map((remark) => (
+          <span key={remark} className="block text-ink-soft text-sm">
+            {remark}
+          </span>
+        ))}
+      </Td>
+    </Tr>
+  );
+}

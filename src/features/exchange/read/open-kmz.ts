@@ -1,0 +1,52 @@
+import { Unzip, UnzipInflate } from 'fflate';
+import { FileProblem } from './file-problem';
+import { MOST_ENTRIES, MOST_UNPACK_RATIO, MOST_UNPACKED_BYTES } from './limits';
+
+const STEP = 64 * 1024;
+const FREE_BYTES = 1024 * 1024;
+
+interface Unpacked {
+  chunks: Uint8Array[];
+  done: boolean;
+}
+
+/**
+ * Every KML of an archive: some programs put one layer to a file. Only these are unpacked, a piece at a time, and counted
+ * as they come: what the archive says of its own sizes is not believed.
+ */
+export function openKmz(bytes: Uint8Array): Uint8Array[] {
+  const found: Unpacked[] = [];
+  let length = 0;
+  let entries = 0;
+  let problem: string | null = null;
+  const most = Math.min(MOST_UNPACKED_BYTES, Math.max(FREE_BYTES, bytes.length * MOST_UNPACK_RATIO));
+  const unzip = new Unzip((entry) => {
+    entries += 1;
+    if (entries > MOST_ENTRIES) problem ??= `The archive holds more than ${MOST_ENTRIES} files.`;
+    if (problem || !/\.kml$/i.test(entry.name)) return;
+    const own: Unpacked = { chunks: [], done: false };
+    found.push(own);
+    entry.ondata = (error, chunk, final) => {
+      if (error) problem ??= 'The archive is damaged: its KML cannot be unpacked. Export it again.';
+      if (problem) return;
+      length += chunk.length;
+      if (length > most)
+        problem = 'The archive unpacks to far more than a map needs, so it was not opened any further.';
+      else own.chunks.push(chunk);
+      own.done ||= final;
+    };
+    entry.start();
+  });
+  unzip.register(UnzipInflate);
+  try {
+    for (let at = 0; at < bytes.length && !problem; at += STEP) {
+      unzip.push(bytes.subarray(at, at + STEP), at + STEP >= bytes.length);
+    }
+  } catch {
+    problem ??= 'The archive is damaged: export it again.';
+  }
+  if (problem) throw new FileProblem(problem);
+  if (found.length === 0) throw new FileProblem('The archive holds no KML: choose a KMZ file.');
+  if (found.some(({ done }) => !done)) throw new FileProblem('The archive is cut short: export it again.');
+  return found.map(({ chunks }) => Buffer.concat(chunks));
+}
