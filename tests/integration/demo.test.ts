@@ -52,6 +52,7 @@ const tables = {
   approaches: schema.approaches,
   features: schema.features,
   mapItems: schema.mapItems,
+  imports: schema.imports,
   sits: schema.sits,
   claims: schema.claims,
   sitLogs: schema.sitLogs,
