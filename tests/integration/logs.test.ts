@@ -146,7 +146,7 @@ describe('what others learn of a log', () => {
       own: '1 buck',
       member: '1 buck',
       officer: '1 buck',
-      line: { logged: true, counts: '1 buck', mayWrite: true },
+      line: { logged: true, counts: '1 buck', mayOpen: true },
     });
   });
 
@@ -165,7 +165,7 @@ describe('what others learn of a log', () => {
       own: '1 buck',
       member: 'not_found',
       officer: 'not_found',
-      line: { logged: true, counts: null, mayWrite: false },
+      line: { logged: true, counts: null, mayOpen: false },
     });
     const december = Date.UTC(2026, 11, 1, 15);
     expect(await screenOf(rules, december)).toMatchObject({ own: '1 buck', member: '1 buck', officer: '1 buck' });

@@ -28,7 +28,7 @@ function antlersText(row: HarvestRow, units: Units): string {
   const { pointsLeft, pointsRight, insideSpreadMm } = row;
   const parts = [
     (pointsLeft !== null || pointsRight !== null) && `${pointsLeft ?? '?'} and ${pointsRight ?? '?'} points`,
-    insideSpreadMm !== null && `${lengthWords(insideSpreadMm, units)} inside`,
+    insideSpreadMm !== null && `inside spread ${lengthWords(insideSpreadMm, units)}`,
   ].filter((part) => part !== false);
   return parts.join(', ');
 }

@@ -59,7 +59,7 @@ export interface ClubLogLine {
   logged: boolean;
   /** null: kept from this reader by the club's rule. */
   counts: string | null;
-  mayWrite: boolean;
+  mayOpen: boolean;
 }
 
 export interface LogScreen {
@@ -113,7 +113,7 @@ async function readClubLogs(scope: ClubScope, now: number): Promise<ClubLogLine[
     ...head(sit),
     logged: sit.log !== null,
     counts: sit.log && maySeeLog(scope, sit, now) ? countsText(sit.log) : null,
-    mayWrite: mayWriteLog(scope, sit, now),
+    mayOpen: sit.log ? maySeeLog(scope, sit, now) : mayWriteLog(scope, sit, now),
   }));
 }
 

@@ -22,6 +22,7 @@ export function AllLogs({ logs }: { logs: LogLine[] }) {
       columns={COLUMNS}
       rowId={(line) => line.sitId}
       filterLabel="Find a log"
+      pageSize={12}
     />
   );
 }

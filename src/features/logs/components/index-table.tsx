@@ -18,14 +18,12 @@ const COLUMNS: Column[] = [
   { head: 'Unknown', of: ({ unknownShare }) => unknownShare, as: 'percent' },
 ];
 
-function FigureCell({ figure, as, label }: { figure: Figure; as: 'number' | 'percent'; label: string }) {
+function FigureCell({ figure, as }: { figure: Figure; as: 'number' | 'percent' }) {
   return (
-    <Td label={label} align="right" className="max-sm:text-left">
+    <Td align="right">
       <span className={figure.known ? 'whitespace-nowrap' : 'text-ink-soft text-sm'}>{figureText(figure, as)}</span>
       {figure.known && (
-        <span className="ml-2 whitespace-nowrap text-ink-soft text-xs sm:ml-0 sm:block">
-          {intervalText(figure, as)}
-        </span>
+        <span className="block whitespace-nowrap text-ink-soft text-xs">{intervalText(figure, as)}</span>
       )}
     </Td>
   );
@@ -37,43 +35,43 @@ interface IndexTableProps {
   groups: IndexGroup[];
 }
 
-/** The indices of some groups of sits; the 95 % interval stands small beside each. */
+/**
+ * The indices of some groups of sits; the 95 % interval stands small below each. Figures are read down a column, so on a
+ * phone the table keeps its columns and is moved sideways under the names.
+ */
 export function IndexTable({ caption, head, groups }: IndexTableProps) {
   return (
-    <Table caption={caption}>
-      <THead>
-        <Th>{head}</Th>
-        <Th align="right">Sits</Th>
-        <Th align="right">Hours</Th>
-        {COLUMNS.map((column) => (
-          <Th key={column.head} align="right">
-            {column.head}
-          </Th>
-        ))}
-        <Th align="right">Sits with a bump</Th>
-      </THead>
-      <TBody>
-        {groups.map(({ key, label, indices }) => (
-          <Tr key={key}>
-            <RowHead className="first-letter:uppercase">{label}</RowHead>
-            <Td label="Sits" align="right" className="max-sm:text-left">
-              {indices.sits}
-            </Td>
-            <Td label="Hours" align="right" className="max-sm:text-left">
-              {indices.hours.toFixed(1)}
-            </Td>
-            {COLUMNS.map(({ head: name, of, as = 'number' }) => (
-              <FigureCell key={name} label={name} figure={of(indices)} as={as} />
-            ))}
-            <Td label="Sits with a bump" align="right" className="max-sm:text-left">
-              {indices.bumpedSits}
-              <span className="ml-2 text-ink-soft text-xs sm:ml-0 sm:block">
-                {figureText(indices.bumpedShare, 'percent')}
-              </span>
-            </Td>
-          </Tr>
-        ))}
-      </TBody>
-    </Table>
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: a box that scrolls must be reached by keyboard
+    <section aria-label={caption} tabIndex={0} className="overflow-x-auto">
+      <Table caption={caption} stack={false}>
+        <THead>
+          <Th>{head}</Th>
+          <Th align="right">Sits</Th>
+          <Th align="right">Hours</Th>
+          {COLUMNS.map((column) => (
+            <Th key={column.head} align="right">
+              {column.head}
+            </Th>
+          ))}
+          <Th align="right">Sits with a bump</Th>
+        </THead>
+        <TBody>
+          {groups.map(({ key, label, indices }) => (
+            <Tr key={key}>
+              <RowHead className="sticky left-0 min-w-28 bg-paper first-letter:uppercase">{label}</RowHead>
+              <Td align="right">{indices.sits}</Td>
+              <Td align="right">{indices.hours.toFixed(1)}</Td>
+              {COLUMNS.map(({ head: name, of, as = 'number' }) => (
+                <FigureCell key={name} figure={of(indices)} as={as} />
+              ))}
+              <Td align="right">
+                {indices.bumpedSits}
+                <span className="block text-ink-soft text-xs">{figureText(indices.bumpedShare, 'percent')}</span>
+              </Td>
+            </Tr>
+          ))}
+        </TBody>
+      </Table>
+    </section>
   );
 }

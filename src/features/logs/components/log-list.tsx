@@ -1,9 +1,21 @@
-import { ButtonLink } from '@/ui/button';
+import { TextLink } from '@/ui/button';
 import { Badge } from '@/ui/page-parts';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { ClubLogLine, LogLine } from '../reads';
 
-const hrefOf = (club: string, sitId: string) => `/clubs/${club}/log/${sitId}`;
+interface LogLinkProps {
+  club: string;
+  line: { sitId: string; standName: string; whenText: string; memberName: string };
+}
+
+function LogLink({ club, line }: LogLinkProps) {
+  return (
+    <TextLink href={`/clubs/${club}/log/${line.sitId}`} className="inline-block py-1">
+      {line.standName}
+      <span className="sr-only">{`, log of ${line.memberName}, ${line.whenText}`}</span>
+    </TextLink>
+  );
+}
 
 /** One's own logs. */
 export function LogList({ club, lines }: { club: string; lines: LogLine[] }) {
@@ -15,24 +27,18 @@ export function LogList({ club, lines }: { club: string; lines: LogLine[] }) {
         <Th>Deer</Th>
         <Th>Bumped</Th>
         <Th>Shot</Th>
-        <Th>
-          <span className="sr-only">Change</span>
-        </Th>
       </THead>
       <TBody>
         {lines.map((line) => (
           <Tr key={line.sitId}>
-            <RowHead>{line.standName}</RowHead>
+            <RowHead>
+              <LogLink club={club} line={line} />
+            </RowHead>
             <Td label="When">{line.whenText}</Td>
             <Td label="Deer">{line.counts}</Td>
             <Td label="Bumped">{line.bumps || 'None'}</Td>
             <Td label="Shot">
               {line.shot || 'None'} {line.open && <Badge look="clay">Follow-up open</Badge>}
-            </Td>
-            <Td>
-              <ButtonLink look="quiet" href={hrefOf(club, line.sitId)}>
-                Open<span className="sr-only"> the log of {`${line.standName}, ${line.whenText}`}</span>
-              </ButtonLink>
             </Td>
           </Tr>
         ))}
@@ -51,29 +57,15 @@ export function ClubLogList({ club, lines }: { club: string; lines: ClubLogLine[
         <Th>Member</Th>
         <Th>Log</Th>
         <Th>Deer</Th>
-        <Th>
-          <span className="sr-only">Open</span>
-        </Th>
       </THead>
       <TBody>
         {lines.map((line) => (
           <Tr key={line.sitId}>
-            <RowHead>{line.standName}</RowHead>
+            <RowHead>{line.mayOpen ? <LogLink club={club} line={line} /> : line.standName}</RowHead>
             <Td label="When">{line.whenText}</Td>
             <Td label="Member">{line.memberName}</Td>
             <Td label="Log">{line.logged ? 'Written' : <Badge look="clay">Missing</Badge>}</Td>
             <Td label="Deer">{line.counts ?? (line.logged ? 'Kept by the club’s rule' : '–')}</Td>
-            <Td>
-              {line.mayWrite && (
-                <ButtonLink look="quiet" href={hrefOf(club, line.sitId)}>
-                  {line.logged ? 'Open' : 'Write'}
-                  <span className="sr-only">
-                    {' '}
-                    the log of {`${line.memberName}, ${line.standName}, ${line.whenText}`}
-                  </span>
-                </ButtonLink>
-              )}
-            </Td>
           </Tr>
         ))}
       </TBody>

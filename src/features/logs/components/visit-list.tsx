@@ -50,7 +50,7 @@ export function VisitList({ club, lines, remove }: VisitListProps) {
                   confirmLabel="Take it out"
                   danger
                   trigger={
-                    <Button look="quiet">
+                    <Button look="quiet" className="-my-2 whitespace-nowrap">
                       Take out<span className="sr-only"> {`${line.kind}, ${line.where}, ${line.whenText}`}</span>
                     </Button>
                   }
