@@ -56,7 +56,7 @@ export function LogFormView({ club, values, day, zone, units, harvest, save }: L
             title="Your unsaved counts are back"
             actions={<Button onClick={draft.startAfresh}>Start afresh</Button>}
           >
-            They were typed on this device before and not saved.
+            They were typed in this tab before and not saved.
           </Notice>
         )}
         <FieldGroup label="Deer seen" hint="Every deer, every sit. Unknown when you are not sure. None counts too.">
