@@ -24,7 +24,7 @@ export interface AppShellProps {
 /** Frame of every club page: a bar at the foot of a phone, a rail at the side of a desk. */
 export function AppShell({ items, home, light, club, account, offlineMark, children }: AppShellProps) {
   return (
-    <div className="min-h-dvh md:grid md:grid-cols-[14rem_minmax(0,1fr)]">
+    <div className="min-h-dvh md:grid md:grid-cols-[14rem_minmax(0,1fr)] print:block">
       <SkipLink />
       <header className="sticky top-0 hidden h-dvh flex-col gap-5 overflow-y-auto border-rule border-r px-5 py-6 md:flex print:hidden">
         <Link href={home} className="self-start rounded-sm no-underline" aria-label="Windrest, first page">

@@ -4,7 +4,7 @@ import type { GateSheet } from '../gate-sheet/read-gate-sheet';
 import { SketchMap } from './sketch-map';
 
 const WALK_UPS = 5;
-const CELL = 'border border-black px-1.5 py-1 align-top';
+const CELL = 'border border-ink px-1.5 py-1 align-top';
 const HEAD = `${CELL} text-left font-semibold text-[0.7rem] uppercase tracking-wide`;
 
 function Part({ title, children }: { title: string; children: ReactNode }) {
@@ -97,9 +97,9 @@ function WindTable({ winds }: { winds: GateSheet['winds'] }) {
         <caption className="sr-only">Wind by hour at the club</caption>
         <thead>
           <tr>
-            <th className="w-10 border border-black px-0.5 py-0.5 text-left">Hour</th>
+            <th className="w-10 border border-ink px-0.5 py-0.5 text-left">Hour</th>
             {winds.map(({ at, clock }) => (
-              <th key={at} className="border border-black px-0.5 py-0.5">
+              <th key={at} className="border border-ink px-0.5 py-0.5">
                 {clock}
               </th>
             ))}
@@ -107,22 +107,22 @@ function WindTable({ winds }: { winds: GateSheet['winds'] }) {
         </thead>
         <tbody>
           <tr>
-            <th scope="row" className="border border-black px-0.5 text-left">
+            <th scope="row" className="border border-ink px-0.5 text-left">
               Barb
             </th>
             {winds.map(({ at, fromDeg, speedMps, wind }) => (
-              <td key={at} className="border border-black">
+              <td key={at} className="border border-ink">
                 <WindBarb fromDeg={fromDeg} speedMps={speedMps} label={wind} size={26} className="mx-auto" />
               </td>
             ))}
           </tr>
           {rows.map(({ label, of }) => (
             <tr key={label}>
-              <th scope="row" className="border border-black px-0.5 text-left">
+              <th scope="row" className="border border-ink px-0.5 text-left">
                 {label}
               </th>
               {winds.map((wind) => (
-                <td key={wind.at} className="border border-black px-0.5 py-0.5">
+                <td key={wind.at} className="border border-ink px-0.5 py-0.5">
                   {of(wind)}
                 </td>
               ))}
@@ -140,14 +140,14 @@ const STATE = { free: '', booked: ' (booked)', closed: ' (closed)' } as const;
 export function GateSheetView({ sheet }: { sheet: GateSheet }) {
   const { ground } = sheet;
   return (
-    <article className="bg-white p-3 text-black print:p-0">
-      <header className="flex flex-wrap items-baseline justify-between gap-x-6 border-black border-b-2 pb-1">
+    <article className="text-ink">
+      <header className="flex flex-wrap items-baseline justify-between gap-x-6 border-ink border-b-2 pb-1">
         <p className="font-semibold font-serif text-2xl">{sheet.dayText}</p>
         <p>
           {sheet.clubName}. {sheet.madeText}
         </p>
       </header>
-      <p className="mt-2 border-2 border-black px-2 py-1 font-semibold text-sm">
+      <p className="mt-2 border-2 border-ink px-2 py-1 font-semibold text-sm">
         This sheet and Windrest are no rescue service. When somebody is missing or hurt, call the emergency number.
       </p>
       <Part title="Who is where">

@@ -8,16 +8,18 @@ const LINES = {
 } as const;
 
 const R = 9;
+/** Follows the light on a screen, and is white on paper. */
+const PAPER = 'var(--color-paper)';
 
 function StandMark({ x, y, stand }: { x: number; y: number; stand: GateStand }) {
   const booked = stand.state === 'booked';
   return (
     <g transform={`translate(${x} ${y})`}>
-      <circle r={R} fill={booked ? 'black' : 'white'} stroke="black" strokeWidth={1.4} />
-      <text y={3.6} fontSize={10.5} fontWeight={700} textAnchor="middle" fill={booked ? 'white' : 'black'}>
+      <circle r={R} fill={booked ? 'currentColor' : PAPER} stroke="currentColor" strokeWidth={1.4} />
+      <text y={3.6} fontSize={10.5} fontWeight={700} textAnchor="middle" fill={booked ? PAPER : 'currentColor'}>
         {stand.number}
       </text>
-      {stand.state === 'closed' && <path d="M-9-9L9 9M-9 9L9-9" stroke="black" strokeWidth={1.6} />}
+      {stand.state === 'closed' && <path d="M-9-9L9 9M-9 9L9-9" stroke="currentColor" strokeWidth={1.6} />}
     </g>
   );
 }
@@ -32,24 +34,25 @@ export function SketchMap({ sketch, stands }: { sketch: Sketch; stands: GateStan
       viewBox={`0 0 ${width} ${height + 26}`}
       role="img"
       aria-label={label}
-      className="h-auto w-full border border-black bg-white text-black"
+      className="h-auto w-full border border-ink bg-paper text-ink"
     >
       <title>{label}</title>
       {sketch.lines.map(({ kind, path }) => (
-        <path key={path} d={path} fill="none" stroke="black" strokeLinejoin="round" {...LINES[kind]} />
+        <path key={path} d={path} fill="none" stroke="currentColor" strokeLinejoin="round" {...LINES[kind]} />
       ))}
       {sketch.parkings.map(({ name, x, y, side }) => (
         <g key={name} transform={`translate(${x} ${y})`}>
-          <rect x={-7} y={-7} width={14} height={14} fill="white" stroke="black" strokeWidth={1.4} />
-          <text y={4} fontSize={11} fontWeight={700} textAnchor="middle">
+          <rect x={-7} y={-7} width={14} height={14} fill={PAPER} stroke="currentColor" strokeWidth={1.4} />
+          <text y={4} fontSize={11} fontWeight={700} textAnchor="middle" fill="currentColor">
             P
           </text>
           <text
             x={side === 'right' ? 11 : -11}
             y={4}
             fontSize={11}
+            fill="currentColor"
             textAnchor={side === 'right' ? 'start' : 'end'}
-            stroke="white"
+            stroke={PAPER}
             strokeWidth={3}
             paintOrder="stroke"
           >
@@ -62,15 +65,15 @@ export function SketchMap({ sketch, stands }: { sketch: Sketch; stands: GateStan
         return stand && <StandMark key={id} x={x} y={y} stand={stand} />;
       })}
       <g transform={`translate(22 ${height + 6})`}>
-        <path d="M0 8V-12M-4-6L0-13L4-6" stroke="black" strokeWidth={1.5} fill="none" />
-        <text x={7} y={0} fontSize={11} fontWeight={700}>
+        <path d="M0 8V-12M-4-6L0-13L4-6" stroke="currentColor" strokeWidth={1.5} fill="none" />
+        <text x={7} y={0} fontSize={11} fontWeight={700} fill="currentColor">
           N
         </text>
       </g>
       {scale && (
         <g transform={`translate(${width - scale.length - 20} ${height + 10})`}>
-          <path d={`M0-5V0H${scale.length}V-5`} stroke="black" strokeWidth={1.4} fill="none" />
-          <text x={scale.length / 2} y={-5} fontSize={11} textAnchor="middle">
+          <path d={`M0-5V0H${scale.length}V-5`} stroke="currentColor" strokeWidth={1.4} fill="none" />
+          <text x={scale.length / 2} y={-5} fontSize={11} textAnchor="middle" fill="currentColor">
             {scale.label}
           </text>
         </g>

@@ -1,7 +1,7 @@
 'use client';
 
 import { useRouter } from 'next/navigation';
-import { INSPECTION_RESULTS, ITEM_ANSWERS, itemsFor } from '@/core/upkeep/inspection';
+import { INSPECTION_RESULTS, itemsFor } from '@/core/upkeep/inspection';
 import type { ActionResult } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { RadioCards } from '@/ui/choices';
@@ -9,8 +9,9 @@ import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { DateInput, Textarea, TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
-import { ANSWER_WORDS, type InspectionForm, ITEM_WORDS, inspectionSchema, RESULT_WORDS } from '../inspection-schema';
+import { type InspectionForm, inspectionSchema, RESULT_WORDS } from '../inspection-schema';
 import type { SavedInspection } from '../save-inspection';
+import { AnswerField } from './answer-field';
 
 export interface InspectionFormProps {
   club: string;
@@ -50,15 +51,7 @@ export function InspectionFormView({ club, values, save }: InspectionFormProps) 
       <DateInput label="Day of the look" {...register('day')} error={errorOf('day')} />
       <div className="grid gap-5">
         {items.map((item) => (
-          <RadioCards
-            key={item}
-            across
-            label={ITEM_WORDS[item].label}
-            hint={ITEM_WORDS[item].hint}
-            choices={ITEM_ANSWERS.map((value) => ({ value, label: ANSWER_WORDS[value] }))}
-            {...register(`answers.${item}`)}
-            error={errorOf(`answers.${item}`)}
-          />
+          <AnswerField key={item} item={item} error={errorOf(`answers.${item}`)} {...register(`answers.${item}`)} />
         ))}
       </div>
       {items.includes('straps') && (

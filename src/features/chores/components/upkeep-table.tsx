@@ -30,14 +30,18 @@ export function UpkeepTable({ club, lines }: { club: string; lines: UpkeepLine[]
               <TextLink href={`/clubs/${club}/chores/stands/${line.standId}`}>{line.name}</TextLink>
             </RowHead>
             <Td label="Result">
-              {line.result ? <Badge look={LOOKS[line.result]}>{line.resultText}</Badge> : line.resultText}
+              <span>{line.result ? <Badge look={LOOKS[line.result]}>{line.resultText}</Badge> : line.resultText}</span>
             </Td>
             <Td label="Last look">{line.lastText}</Td>
             <Td label="Next due">
-              {line.nextText} <State state={line.nextState} />
+              <span>
+                {line.nextText} <State state={line.nextState} />
+              </span>
             </Td>
             <Td label="Main strap">
-              {line.strapText} <State state={line.strapState} />
+              <span>
+                {line.strapText} <State state={line.strapState} />
+              </span>
             </Td>
           </Tr>
         ))}

@@ -71,7 +71,7 @@ export default clubPage('chores.read', async ({ scope }) => {
         )}
       </Section>
       <Section title="Hours" note={`Credited for chores and work days ${yearText}.`}>
-        <Table caption="Hours by member" captionHidden>
+        <Table caption="Hours by member" captionHidden stack={false} className="max-w-md">
           <THead>
             <Th>Member</Th>
             <Th align="right">Hours</Th>
