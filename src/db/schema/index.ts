@@ -12,6 +12,8 @@ export * from './notices';
 export * from './operations';
 export * from './outings';
 export * from './photos';
+export * from './sent-requests';
 export * from './setup';
+export * from './starts';
 export * from './terrain';
 export * from './weather';

@@ -2,9 +2,11 @@ import { localToUtc } from '@/core/day-time';
 import { write } from '@/db/client';
 import { momentText } from '@/features/clubs/audit-words';
 import { newId } from '@/lib/ids';
+import type { Sent } from '@/lib/sent-schema';
 import { audit } from '@/server/audit';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
+import { foundSent, noteSent } from '@/server/sent-requests';
 import { resolvePlace } from './visit-places';
 import { VISIT_WORDS, type VisitInput } from './visit-schema';
 import { findSameVisit, insertVisit } from './visits-data';
@@ -21,6 +23,7 @@ export async function addVisit(
   scope: ClubScope,
   input: VisitInput,
   now: number,
+  sent?: Sent,
 ): Promise<{ id: string; name: string }> {
   const { kind, bumped, notes } = input;
   const at = localToUtc(input.day, input.clock, scope.club.zone);
@@ -31,10 +34,13 @@ export async function addVisit(
     if (!place) throw wrong('place', 'This place is no longer there. Choose another.');
     const { lat, lon, standId, name } = place;
     const row = { kind, at, lat, lon, standId, memberId: scope.member.id, bumped, notes };
+    const before = await foundSent(tx, scope, sent, 'visit');
+    if (before) return { id: before, name };
     const same = await findSameVisit(scope, row, tx);
     if (same) return { id: same.id, name };
     const id = newId('visit');
     await insertVisit(tx, { ...row, id, clubId: scope.club.id, createdAt: now });
+    await noteSent(tx, scope, sent, { kind: 'visit', subjectId: id }, now);
     await audit(
       tx,
       {

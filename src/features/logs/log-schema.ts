@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { isClock } from '@/core/day-time';
 import { FOLLOW_UPS, HIT_PLACES, SHOTS } from '@/core/log/follow-up';
+import { sentSchema } from '@/lib/sent-schema';
 
 const MOST_DEER = 200;
 const count = z
@@ -18,6 +19,7 @@ export const BUMP_FIELDS = ['bumpedIn', 'bumpedSitting', 'bumpedOut'] as const;
 export const logFormSchema = z
   .object({
     sitId: z.string().min(1).max(40),
+    sent: sentSchema.optional(),
     /** The log's version when the form was opened; 0: there was none. */
     version: z.int().min(0),
     startClock: clock,

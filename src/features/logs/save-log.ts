@@ -6,6 +6,7 @@ import { dayAndWindow } from '@/features/bookings/sit-words';
 import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
+import { foundSent, noteSent } from '@/server/sent-requests';
 import { mayWriteLog } from './log-access';
 import type { LogInput } from './log-schema';
 import {
@@ -24,7 +25,7 @@ const AHEAD_MS = 15 * 60_000;
 type LogFacts = Omit<SitLogSnapshot, 'version' | 'savedBy' | 'updatedAt'>;
 
 function factsOf(sit: LoggableSit, input: LogInput, zone: string): LogFacts {
-  const { sitId: _, version: __, startClock, endClock, shotClock, ...rest } = input;
+  const { sitId: _, version: __, sent: ___, startClock, endClock, shotClock, ...rest } = input;
   const at = (clock: string) => localToUtc(sit.day, clock, zone);
   const hit = rest.shot === 'hit';
   const bumped = rest.bumpedIn + rest.bumpedSitting + rest.bumpedOut > 0;
@@ -89,6 +90,7 @@ export async function saveLog(scope: ClubScope, input: LogInput, now: number): P
       recovered: facts.followUp === 'recovered',
     });
     const before = sit.log;
+    if (before && (await foundSent(tx, scope, input.sent, 'log')) === sit.id) return saved(before.version);
     if (before && sameFacts(before, facts)) return saved(before.version);
     if ((before?.version ?? 0) !== input.version) {
       const by = before
@@ -109,6 +111,7 @@ export async function saveLog(scope: ClubScope, input: LogInput, now: number): P
       const row = { ...facts, sitId: sit.id, clubId: scope.club.id, version, savedBy: scope.member.id, createdAt: now };
       await insertLog(tx, row);
     }
+    await noteSent(tx, scope, input.sent, { kind: 'log', subjectId: sit.id }, now);
     const verb = before ? 'changed' : 'written';
     await audit(
       tx,

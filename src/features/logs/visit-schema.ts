@@ -5,6 +5,7 @@ import type { PressureKind } from '@/core/types';
 import type { FormClub } from '@/features/ground/form-club';
 import { degreesText, readPlace } from '@/features/ground/place-text';
 import { LINE_MAX, readForm } from '@/features/ground/read-form';
+import { sentSchema } from '@/lib/sent-schema';
 
 /** Everything people do on the ground but sit. */
 export const VISIT_KINDS = ['camera_check', 'work', 'walk_through', 'drive', 'bump'] as const satisfies PressureKind[];
@@ -28,6 +29,7 @@ export type VisitPlace = { of: PlaceKind; id: string } | ({ of: 'point' } & LatL
 const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
 
 export const visitFormSchema = z.object({
+  sent: sentSchema.optional(),
   kind: z.enum(VISIT_KINDS, { error: 'Choose what was done.' }),
   day: line,
   clock: line,

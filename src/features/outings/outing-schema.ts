@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { isClock } from '@/core/day-time';
 import { WEAPONS } from '@/core/types';
+import { sentSchema } from '@/lib/sent-schema';
 
 const id = z.string().trim().min(1, 'Choose one.').max(60, 'Choose one of the list.');
 const optionalId = z
@@ -19,7 +20,7 @@ const onTheGround = {
   contactOff: z.boolean().default(false),
 };
 
-export const signInSitSchema = z.object({ sitId: id, ...onTheGround });
+export const signInSitSchema = z.object({ sitId: id, ...onTheGround, sent: sentSchema.optional() });
 export type SignInSitInput = z.output<typeof signInSitSchema>;
 export type SignInSitValues = z.input<typeof signInSitSchema>;
 
@@ -33,7 +34,10 @@ export const walkUpSchema = z.object({
 export type WalkUpInput = z.output<typeof walkUpSchema>;
 export type WalkUpValues = z.input<typeof walkUpSchema>;
 
-export const signOutSitSchema = z.object({ outingId: id });
+/** By the time on the ground, or by its sit where the signing in has not been sent yet. */
+export const signOutSitSchema = z
+  .object({ outingId: id.optional(), sitId: id.optional(), sent: sentSchema.optional() })
+  .refine((of) => of.outingId !== undefined || of.sitId !== undefined, 'Reload the page and try again.');
 export type SignOutSitInput = z.output<typeof signOutSitSchema>;
 
 /** Minutes by which a back-by time may be moved at once. */

@@ -77,6 +77,7 @@ export async function switchContact(member: Member, input: SwitchContactInput, n
 
 export async function removeContact(member: Member, now: number): Promise<void> {
   await write(async (tx) => {
+    if (!(await findContact(member.id, tx))) return;
     await deleteContact(tx, member.id);
     await auditAccount(tx, member, 'contact_removed', `${member.name} removed their safety contact.`, now);
   });

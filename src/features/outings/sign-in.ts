@@ -7,6 +7,7 @@ import { getParking } from '@/features/ground/parkings-data';
 import { newId } from '@/lib/ids';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
+import { foundSent, noteSent, pressedAt } from '@/server/sent-requests';
 import { auditOuting } from './audit-outing';
 import { findOpenOuting, findOuting, insertOuting, type OutingDetail } from './data';
 import type { SignInSitInput } from './outing-schema';
@@ -26,7 +27,19 @@ export function signInProblem(scope: ClubScope, sit: SitDetail, now: number): st
   return now < opensAt ? `Signing in opens at ${clockText(opensAt, club)}: sign in when you come to the gate.` : null;
 }
 
-async function checkPlaces(scope: ClubScope, tx: Tx, standId: string, input: Omit<SignInSitInput, 'sitId'>) {
+const SOON_MS = 2 * 60_000;
+
+/** For the audit log: that it was pressed without signal. */
+export function sentLater(scope: ClubScope, at: number, now: number): string {
+  return now - at < SOON_MS ? '' : ` Pressed at ${clockText(at, scope.club)} and sent later.`;
+}
+
+async function checkPlaces(
+  scope: ClubScope,
+  tx: Tx,
+  standId: string,
+  input: Pick<SignInSitInput, 'approachId' | 'parkingId'>,
+) {
   if (input.approachId !== null) {
     const way = (await listApproachesOf(scope, standId, tx)).find(({ id }) => id === input.approachId);
     if (!way || way.direction === 'out') throw invalid('approachId', 'This is no way in to the stand. Choose another.');
@@ -36,13 +49,17 @@ async function checkPlaces(scope: ClubScope, tx: Tx, standId: string, input: Omi
   }
 }
 
-/** Signs in for a sit inside a change of which it is a part. A second press gives the first one's outing. */
+/**
+ * Signs in for a sit inside a change of which it is a part. A second press gives the first one's outing. `at` is when it was
+ * pressed: earlier than now where there was no signal at the gate.
+ */
 export async function signInIn(
   tx: Tx,
   scope: ClubScope,
   sit: SitDetail,
-  input: Omit<SignInSitInput, 'sitId'>,
+  input: Omit<SignInSitInput, 'sitId' | 'sent'>,
   now: number,
+  at = now,
 ): Promise<OutingDetail> {
   const before = await findOpenOuting(scope, sit.memberId, tx);
   if (before?.sitId === sit.id) return before;
@@ -50,11 +67,11 @@ export async function signInIn(
     const who = sit.memberId === scope.member.id ? 'You are' : `${sit.memberName} is`;
     throw new AppError('conflict', `${who} still signed in at ${before.standName}. Sign out there first.`);
   }
-  const problem = signInProblem(scope, sit, now);
+  const problem = signInProblem(scope, sit, at);
   if (problem) throw new AppError('conflict', problem);
   await checkPlaces(scope, tx, sit.standId, input);
   const id = newId('outing');
-  const backBy = nextClock(input.backBy, now, scope.club.zone);
+  const backBy = nextClock(input.backBy, at, scope.club.zone);
   await insertOuting(tx, {
     id,
     clubId: scope.club.id,
@@ -64,15 +81,15 @@ export async function signInIn(
     parkingId: input.parkingId,
     vehicle: input.vehicle,
     contactOff: input.contactOff,
-    signedInAt: now,
+    signedInAt: at,
     signedInBy: scope.member.id,
     backBy,
     firstBackBy: backBy,
-    lastSignAt: now,
+    lastSignAt: at,
   });
   const when = dayAndWindow(sit.day, sit.windows, true);
   const back = clockText(backBy, scope.club);
-  const summary = `Signed in ${sit.memberName} at ${sit.standName}, ${when}; back by ${back}.`;
+  const summary = `Signed in ${sit.memberName} at ${sit.standName}, ${when}; back by ${back}.${sentLater(scope, at, now)}`;
   await auditOuting(tx, scope, 'signed_in', { id, summary, detail: { ...input, sitId: sit.id, backBy } }, now);
   const made = await findOuting(scope, id, tx);
   if (!made) throw new AppError('internal', 'Signing in was not saved. Try again.', { log: `no row for ${id}` });
@@ -86,11 +103,16 @@ export function refuseStranger(scope: ClubScope, of: { memberId: string; memberN
 }
 
 export async function signIn(scope: ClubScope, input: SignInSitInput, now: number): Promise<OutingDetail> {
-  const { sitId, ...given } = input;
+  const { sitId, sent, ...given } = input;
   return write(async (tx) => {
     const sit = await findSit(scope, sitId, tx);
     if (!sit) throw notFound();
     refuseStranger(scope, sit, 'sign in for this sit');
-    return signInIn(tx, scope, sit, given, now);
+    const before = await foundSent(tx, scope, sent, 'sign_in');
+    const known = before && (await findOuting(scope, before, tx));
+    if (known) return known;
+    const outing = await signInIn(tx, scope, sit, given, now, pressedAt(sent, now));
+    await noteSent(tx, scope, sent, { kind: 'sign_in', subjectId: outing.id }, now);
+    return outing;
   });
 }

@@ -18,7 +18,8 @@ export const saveLogAction = clubAction({
 export const addVisitAction = clubAction({
   permission: 'visits.write',
   input: visitFormSchema,
-  run: ({ scope, input, now }) => addVisit(scope, makeVisitSchema(formClubOf(scope.club)).parse(input), now),
+  run: ({ scope, input, now }) =>
+    addVisit(scope, makeVisitSchema(formClubOf(scope.club)).parse(input), now, input.sent),
 });
 
 export const removeVisitAction = clubAction({
