@@ -51,7 +51,13 @@ export const environmentSchema = z.object({
   }),
   WEATHER_FORECAST_URL: url(['http:', 'https:']),
   WEATHER_ENSEMBLE_URL: url(['http:', 'https:']),
+  WEATHER_ARCHIVE_URL: url(['http:', 'https:']),
   WEATHER_API_KEY: optional,
+  ELEVATION: optional.superRefine((text, ctx) => {
+    if (text === undefined || text === 'fake' || text === 'hosted') return;
+    ctx.addIssue({ code: 'custom', message: `is "${text}"; write fake or hosted` });
+  }),
+  ELEVATION_URL: url(['http:', 'https:']),
   SMTP_URL: url(['smtp:', 'smtps:']),
   MAIL_FROM: optional,
   IMAGERY_URL: tiles,
@@ -80,7 +86,10 @@ export function readEnvironment(source: Record<string, string | undefined>) {
     weather: set.WEATHER ?? 'fake',
     weatherForecastUrl: set.WEATHER_FORECAST_URL,
     weatherEnsembleUrl: set.WEATHER_ENSEMBLE_URL,
+    weatherArchiveUrl: set.WEATHER_ARCHIVE_URL,
     weatherApiKey: set.WEATHER_API_KEY,
+    elevation: set.ELEVATION ?? 'fake',
+    elevationUrl: set.ELEVATION_URL,
     /** None: the fake keeps every message in the database. */
     smtpUrl: set.SMTP_URL,
     mailFrom: set.MAIL_FROM ?? 'Windrest <windrest@localhost>',

@@ -54,7 +54,7 @@ export function StandFormView(props: StandFormProps) {
       <StandSeatFields fields={fields} units={formClub.units} />
       <StandWindFields fields={fields} />
       <StandUseFields fields={fields} restDaysDefault={restDaysDefault} />
-      <StandAirFields fields={fields} />
+      <StandAirFields fields={fields} club={club} units={formClub.units} />
       <StandWhoFields fields={fields} hunters={hunters} />
       <SubmitRow label="Save stand" pending={fields.pending} pendingLabel="Saving…" className="mt-6">
         <ButtonLink href={back} look="quiet">

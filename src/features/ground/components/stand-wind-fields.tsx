@@ -2,10 +2,13 @@
 
 import { useWatch } from 'react-hook-form';
 import { arcsFor } from '@/core/arcs';
+import type { Units } from '@/core/units';
+import { SlopeOffer } from '@/features/terrain/components/slope-offer';
 import { Section } from '@/ui/page-parts';
 import { Select, TextInput } from '@/ui/text-inputs';
 import { ARC_FIELDS, readArcs } from '../arc-text';
-import { formatBearing, parseBearing } from '../bearing-text';
+import { bearingText, formatBearing, parseBearing } from '../bearing-text';
+import { parseDegrees } from '../place-text';
 import type { StandForm } from '../stand-schema';
 import { formatArcs } from '../view';
 import { SHELTER_WORDS } from '../words';
@@ -65,8 +68,16 @@ export function StandWindFields({ fields }: { fields: Fields<StandForm> }) {
   );
 }
 
-export function StandAirFields({ fields }: { fields: Fields<StandForm> }) {
+interface StandAirFieldsProps {
+  fields: Fields<StandForm>;
+  club: string;
+  units: Units;
+}
+
+export function StandAirFields({ fields, club, units }: StandAirFieldsProps) {
   const { register, errorOf, form } = fields;
+  const [latText, lonText] = useWatch({ control: form.control, name: ['lat', 'lon'] });
+  const [lat, lon] = [parseDegrees(latText, 'lat'), parseDegrees(lonText, 'lon')];
   const drain = parseBearing(useWatch({ control: form.control, name: 'drainBearing' }));
   const read = drain.ok && drain.deg !== null ? `Read as ${formatBearing(drain.deg)}. ` : '';
   return (
@@ -97,6 +108,16 @@ export function StandAirFields({ fields }: { fields: Fields<StandForm> }) {
           {...register('slopePercent')}
         />
       </div>
+      <SlopeOffer
+        club={club}
+        units={units}
+        at={lat === null || lon === null ? null : { lat, lon }}
+        onTake={(slope) => {
+          const options = { shouldDirty: true, shouldValidate: true };
+          form.setValue('slopePercent', String(slope.slopePercent), options);
+          form.setValue('drainBearing', bearingText(slope.drainBearingDeg), options);
+        }}
+      />
     </Section>
   );
 }

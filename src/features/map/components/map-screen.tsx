@@ -3,6 +3,8 @@
 import { useQuery } from '@tanstack/react-query';
 import { Maximize2, Redo2, Ruler, Undo2 } from 'lucide-react';
 import { type ReactNode, useMemo, useState } from 'react';
+import { ContourWords } from '@/features/terrain/components/contour-words';
+import { contoursQuery } from '@/features/terrain/queries';
 import { Button } from '@/ui/button';
 import { Checkbox } from '@/ui/choices';
 import { Notice } from '@/ui/notices';
@@ -48,6 +50,8 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
   const saving = useSaveDrawing(slug, state, save, editor.renamed);
   const [shown, setShown] = useState(EVERYTHING);
   const [imagery, setImagery] = useState(false);
+  const [hills, setHills] = useState(false);
+  const contours = useQuery({ ...contoursQuery(slug), enabled: hills });
   const { things, changes } = state;
   const { selected, doing } = editor;
   const may = view.may.stands || view.may.features || view.may.approaches;
@@ -67,10 +71,11 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
   const overlay = useMemo<MapOverlay>(
     () => ({
       ...momentOverlay,
+      ...(hills && contours.data ? { contours: contours.data.lines } : {}),
       here: editor.here,
       ...(doing.mode === 'measure' ? { measured: [...editor.measured] } : {}),
     }),
-    [momentOverlay, editor.here, editor.measured, doing.mode],
+    [momentOverlay, hills, contours.data, editor.here, editor.measured, doing.mode],
   );
 
   const list = (
@@ -158,6 +163,7 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
             )}
           </>
         )}
+        <Checkbox label="Contours" checked={hills} onChange={({ target }) => setHills(target.checked)} />
         {view.imagery && (
           <Checkbox
             label="Photographs from above"
@@ -169,6 +175,7 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
       <div className="grid gap-4 lg:grid-cols-[minmax(0,1fr)_23rem]">
         <div className="grid content-start gap-2">
           <MapDoing view={view} editor={editor} things={things} />
+          {hills && <ContourWords view={contours.data} error={contours.isError ? contours.error.message : null} />}
           <MapCanvas
             ref={editor.map}
             view={view}

@@ -1,0 +1,58 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import { useState } from 'react';
+import { sectorName } from '@/core/sectors';
+import { formatHeight, type Units } from '@/core/units';
+import { Button } from '@/ui/button';
+import { Notice } from '@/ui/notices';
+import { slopeQuery } from '../queries';
+import type { SlopeView } from '../read-slope';
+
+interface SlopeOfferProps {
+  club: string;
+  units: Units;
+  /** null: no place is typed yet. */
+  at: { lat: number; lon: number } | null;
+  onTake: (slope: SlopeView) => void;
+}
+
+/** What heights of the ground say of a place; nothing is set until it is taken. */
+export function SlopeOffer({ club, units, at, onTake }: SlopeOfferProps) {
+  const [asked, setAsked] = useState<{ lat: number; lon: number } | null>(null);
+  const query = useQuery({ ...slopeQuery(club, asked ?? { lat: 0, lon: 0 }), enabled: asked !== null });
+  const stale = asked !== null && (asked.lat !== at?.lat || asked.lon !== at?.lon);
+  const found = asked !== null && !stale ? query.data : undefined;
+  return (
+    <div className="mt-3 grid gap-2" aria-live="polite">
+      <div>
+        <Button
+          disabled={at === null}
+          pending={asked !== null && query.isFetching}
+          pendingLabel="Reading the ground…"
+          onClick={() => {
+            setAsked(at);
+            if (query.isError) void query.refetch();
+          }}
+        >
+          Read slope and drain off the terrain
+        </Button>
+      </div>
+      {at === null && <p className="text-ink-soft text-sm">Type the place above first.</p>}
+      {query.isError && asked !== null && !stale && <Notice level="caution" title={query.error.message} />}
+      {found && (
+        <Notice
+          title={
+            found.drainBearingDeg === null
+              ? `Nearly level: ${found.slopePercent} % slope`
+              : `${found.slopePercent} % slope, draining ${sectorName(found.drainBearingDeg)} (${found.drainBearingDeg}°)`
+          }
+          actions={<Button onClick={() => onTake(found)}>Take these</Button>}
+        >
+          At {formatHeight(found.heightM, units)}, by {found.source}. Heights this far apart miss small draws and
+          benches: what you know of the ground is better.
+        </Notice>
+      )}
+    </div>
+  );
+}
