@@ -42,6 +42,7 @@ function countedPort(answer: () => WeatherResult | Promise<WeatherResult>) {
       asked.push(place);
       return answer();
     },
+    history: () => Promise.reject(new Error('No past hours are asked for here.')),
   };
   return { port, asked };
 }

@@ -30,8 +30,22 @@ const hourSchema = z.object({
 
 const memberHourSchema = hourSchema.pick({ at: true, windFromDeg: true, windSpeedMps: true });
 
-/** The frame of an answer: the right place, whole hours, from before now to well after it. */
-function frameSchema(place: WeatherPlace, now: number) {
+/** What hours an answer must begin and end at, UTC ms. */
+export interface AnswerSpan {
+  startsAt: (at: number) => boolean;
+  endsAt: (at: number) => boolean;
+}
+
+/** From before now to well after it. */
+function forecastSpan(now: number): AnswerSpan {
+  return {
+    startsAt: (at) => at <= now + HOUR_S * 1000 && at > now - 7 * DAY_MS,
+    endsAt: (at) => at >= now + DAY_MS && at < now + 40 * DAY_MS,
+  };
+}
+
+/** The frame of an answer: the right place, whole hours, the time asked for. */
+function frameSchema(place: WeatherPlace, span: AnswerSpan) {
   const lonReach = MOST_OFF_DEG / Math.max(0.05, Math.cos((place.lat * Math.PI) / 180));
   return z.object({
     lat: z.number().refine((lat) => Math.abs(lat - place.lat) <= MOST_OFF_DEG, 'is for another place'),
@@ -43,22 +57,24 @@ function frameSchema(place: WeatherPlace, now: number) {
     startS: z
       .int()
       .multipleOf(HOUR_S)
-      .refine(
-        (start) => start * 1000 <= now + HOUR_S * 1000 && start * 1000 > now - 7 * DAY_MS,
-        'starts at no time near now',
-      ),
+      .refine((start) => span.startsAt(start * 1000), 'starts at no time near the one asked for'),
     endS: z
       .int()
       .multipleOf(HOUR_S)
-      .refine((end) => end * 1000 >= now + DAY_MS && end * 1000 < now + 40 * DAY_MS, 'ends at no time asked for'),
+      .refine((end) => span.endsAt(end * 1000), 'ends at no time asked for'),
   });
 }
 
 export type Checked<T> = { ok: true; value: T } | { ok: false; problem: string };
 
 /** Hours of a plain forecast; refused when the frame, a unit or a value is wrong or most hours have no wind. */
-export function checkHours(answer: DecodedAnswer | null, place: WeatherPlace, now: number): Checked<WeatherHour[]> {
-  const framed = checkFrame(answer, place, now);
+export function checkHours(
+  answer: DecodedAnswer | null,
+  place: WeatherPlace,
+  now: number,
+  span: AnswerSpan = forecastSpan(now),
+): Checked<WeatherHour[]> {
+  const framed = checkFrame(answer, place, span);
   if (!framed.ok) return framed;
   const { instants, variables } = framed.value;
   const column = (variable: Variable, unit: Unit) => findColumn(variables, variable, unit, 0, instants.length);
@@ -100,7 +116,7 @@ export function checkMembers(
   now: number,
   at: number[],
 ): Checked<EnsembleMember[]> {
-  const framed = checkFrame(answer, place, now);
+  const framed = checkFrame(answer, place, forecastSpan(now));
   if (!framed.ok) return framed;
   const { instants, variables } = framed.value;
   const indexOf = new Map(instants.map((instant, index) => [instant, index]));
@@ -118,9 +134,9 @@ export function checkMembers(
   return parsed(z.array(z.object({ id: z.string(), hours: z.array(memberHourSchema) })), members);
 }
 
-function checkFrame(answer: DecodedAnswer | null, place: WeatherPlace, now: number) {
+function checkFrame(answer: DecodedAnswer | null, place: WeatherPlace, span: AnswerSpan) {
   if (!answer) return { ok: false, problem: 'holds no hours' } as const;
-  const frame = frameSchema(place, now).safeParse(answer);
+  const frame = frameSchema(place, span).safeParse(answer);
   if (!frame.success) return { ok: false, problem: firstProblem(frame.error) } as const;
   const { startS, endS } = frame.data;
   const instants = Array.from({ length: (endS - startS) / HOUR_S }, (_, index) => (startS + index * HOUR_S) * 1000);

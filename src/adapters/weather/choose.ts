@@ -1,5 +1,5 @@
 import { makeHostedWeather } from './hosted';
-import { type WeatherPort, weatherFailure } from './port';
+import { type WeatherPort, type WeatherResult, weatherFailure } from './port';
 import { makeReplayWeather } from './replay';
 
 export interface WeatherSettings {
@@ -7,6 +7,7 @@ export interface WeatherSettings {
   weather: string;
   weatherForecastUrl?: string | undefined;
   weatherEnsembleUrl?: string | undefined;
+  weatherArchiveUrl?: string | undefined;
   weatherApiKey?: string | undefined;
 }
 
@@ -30,6 +31,7 @@ function hosted(settings: WeatherSettings, now: () => number): WeatherPort {
   return makeHostedWeather({
     forecastUrl: settings.weatherForecastUrl ?? `https://${customer}api.open-meteo.com/v1/forecast`,
     ensembleUrl: settings.weatherEnsembleUrl ?? `https://${customer}ensemble-api.open-meteo.com/v1/ensemble`,
+    archiveUrl: settings.weatherArchiveUrl ?? `https://${customer}archive-api.open-meteo.com/v1/archive`,
     apiKey: settings.weatherApiKey,
     source: 'hosted',
     label: 'Open-Meteo',
@@ -39,24 +41,28 @@ function hosted(settings: WeatherSettings, now: () => number): WeatherPort {
 
 /** The hosted adapter pointed at made weather on this machine, whose server starts with the first request. */
 function fake(now: () => number): WeatherPort {
-  return {
-    source: 'fake',
-    forecast: async (place, signal) => {
-      let url: string;
-      try {
-        const { serveFakeWeather } = await import('./fake/serve');
-        url = await serveFakeWeather(now);
-      } catch {
-        return weatherFailure('unavailable', 'The made weather could not be started on this machine.');
-      }
-      const port = makeHostedWeather({
+  const ask = async (request: (port: WeatherPort) => Promise<WeatherResult>): Promise<WeatherResult> => {
+    let url: string;
+    try {
+      const { serveFakeWeather } = await import('./fake/serve');
+      url = await serveFakeWeather(now);
+    } catch {
+      return weatherFailure('unavailable', 'The made weather could not be started on this machine.');
+    }
+    return request(
+      makeHostedWeather({
         forecastUrl: `${url}/v1/forecast`,
         ensembleUrl: `${url}/v1/ensemble`,
+        archiveUrl: `${url}/v1/archive`,
         source: 'fake',
         label: 'Made weather (no real forecast)',
         now,
-      });
-      return port.forecast(place, signal);
-    },
+      }),
+    );
+  };
+  return {
+    source: 'fake',
+    forecast: (place, signal) => ask((port) => port.forecast(place, signal)),
+    history: (place, days, signal) => ask((port) => port.history(place, days, signal)),
   };
 }

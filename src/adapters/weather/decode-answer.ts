@@ -3,7 +3,7 @@ import type { WeatherApiResponse } from '@openmeteo/sdk/weather-api-response.js'
 
 /** More than any request here asks for; a cut or foreign body can claim millions. */
 const MOST_VARIABLES = 2000;
-const MOST_VALUES = 24 * 120;
+const MOST_VALUES = 24 * 400;
 
 export interface DecodedVariable {
   variable: number;

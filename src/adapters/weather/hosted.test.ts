@@ -23,6 +23,7 @@ const port = (over: { timeLimitMs?: number } = {}) =>
   makeHostedWeather({
     forecastUrl: 'https://weather.test/v1/forecast',
     ensembleUrl: 'https://members.test/v1/ensemble',
+    archiveUrl: 'https://past.test/v1/archive',
     apiKey: KEY,
     source: 'hosted',
     label: 'Test weather',
@@ -68,6 +69,30 @@ describe('the hosted weather through the SDK', () => {
       expect(apartDeg(last?.windFromDeg ?? 0, made.windFromDeg)).toBeLessThan(0.001);
       expect(last?.windSpeedMps).toBeCloseTo(made.windSpeedMps, 2);
     }
+  });
+
+  it('gives the hours of past days from the archive alone, both days inside', async () => {
+    const asked: string[] = [];
+    serve({ onRequest: (kind, url) => asked.push(`${kind} ${url.searchParams.get('start_date')}`) });
+    const result = await port().history(PLACE, { fromDay: '2024-09-01', toDay: '2025-01-31' });
+    if (!result.ok) throw new Error(result.message);
+    const { hours, members, source } = result.forecast;
+    expect(asked).toEqual(['archive 2024-09-01']);
+    expect([members, source]).toEqual([[], 'Test weather, past hours']);
+    expect(hours).toHaveLength(153 * 24);
+    expect(hours[0]?.at).toBe(Date.UTC(2024, 8, 1));
+    const [first] = hours;
+    const made = makeForecast(PLACE, first?.at ?? 0, first?.at ?? 0);
+    expect(apartDeg(first?.windFromDeg ?? 0, made.windFromDeg)).toBeLessThan(0.001);
+  });
+
+  it('says so when the archive fails or is for another place', async () => {
+    const days = { fromDay: '2024-09-01', toDay: '2024-09-30' };
+    serve({ archive: 'wrong_place' });
+    expect(await port().history(PLACE, days)).toMatchObject({ ok: false, reason: 'bad_answer' });
+    server.resetHandlers();
+    serve({ archive: 'limit' });
+    expect(await port().history(PLACE, days)).toMatchObject({ ok: false, reason: 'limit' });
   });
 
   it('asks each service once, for metres per second, with the key', async () => {

@@ -2,12 +2,20 @@ import { fetchWeatherApi } from 'openmeteo';
 import type { EnsembleMember } from '@/core/types';
 import { checkHours, checkMembers } from './check-answer';
 import { type DecodedAnswer, decodeAnswer } from './decode-answer';
-import { type WeatherFailure, type WeatherPlace, type WeatherPort, type WeatherResult, weatherFailure } from './port';
+import {
+  type PastDays,
+  type WeatherFailure,
+  type WeatherPlace,
+  type WeatherPort,
+  type WeatherResult,
+  weatherFailure,
+} from './port';
 
 export interface HostedWeatherOptions {
   /** Whole addresses of the two services, such as https://host/v1/forecast. */
   forecastUrl: string;
   ensembleUrl: string;
+  archiveUrl: string;
   apiKey?: string | undefined;
   /** The setting this port goes by. */
   source: string;
@@ -69,6 +77,21 @@ export function makeHostedWeather(options: HostedWeatherOptions): WeatherPort {
         },
       };
     },
+    history: async (place, days, signal): Promise<WeatherResult> => {
+      const limit = AbortSignal.timeout(options.timeLimitMs ?? TIME_LIMIT_MS);
+      const within = signal ? AbortSignal.any([signal, limit]) : limit;
+      const answered = await ask(options.archiveUrl, archiveQuery(place, days, options.apiKey), within);
+      if (!answered.ok) return answered;
+      const fetchedAt = options.now();
+      const from = Date.parse(`${days.fromDay}T00:00:00Z`);
+      const until = Date.parse(`${days.toDay}T00:00:00Z`) + DAY_MS;
+      const span = { startsAt: (at: number) => at === from, endsAt: (at: number) => at === until };
+      const hours = checkHours(answered.answer, place, fetchedAt, span);
+      if (!hours.ok)
+        return weatherFailure('bad_answer', `The weather archive's answer cannot be used: ${hours.problem}.`);
+      const source = `${options.label}, past hours`;
+      return { ok: true, forecast: { issuedAt: fetchedAt, fetchedAt, source, hours: hours.value, members: [] } };
+    },
   };
 }
 
@@ -108,6 +131,12 @@ function placeQuery(place: WeatherPlace, apiKey: string | undefined): Record<str
 
 function forecastQuery(place: WeatherPlace, apiKey: string | undefined): Record<string, string> {
   return { ...placeQuery(place, apiKey), hourly: FORECAST_VARIABLES.join(','), current: 'temperature_2m' };
+}
+
+/** The archive knows no days back or ahead, only dates. */
+function archiveQuery(place: WeatherPlace, days: PastDays, apiKey: string | undefined): Record<string, string> {
+  const { past_days: _, forecast_days: __, ...at } = placeQuery(place, apiKey);
+  return { ...at, hourly: FORECAST_VARIABLES.join(','), start_date: days.fromDay, end_date: days.toDay };
 }
 
 function ensembleQuery(place: WeatherPlace, apiKey: string | undefined): Record<string, string> {

@@ -30,24 +30,26 @@ export function replayForecast(
 
 /** A file of hourly observations in place of a weather service: the same hours at every place. */
 export function makeReplayWeather(options: ReplayOptions): WeatherPort {
+  const play: WeatherPort['forecast'] = async (_place, signal) => {
+    let text: string;
+    try {
+      text = await readFile(options.file, { encoding: 'utf8', ...(signal ? { signal } : {}) });
+    } catch {
+      return weatherFailure('unavailable', `The file ${options.file} cannot be read.`);
+    }
+    const { hours, problems } = parseReplayCsv(text);
+    if (hours.length === 0) {
+      const first = problems[0];
+      const why = first ? ` Line ${first.line}: ${first.message}` : '';
+      return weatherFailure('bad_answer', `The file ${options.file} holds no hours.${why}`);
+    }
+    const { fromAt, toAt } = options;
+    const label = `Replay of ${options.file.split(/[\\/]/).at(-1)}`;
+    return { ok: true, forecast: replayForecast(hours, { issuedAt: options.issuedAt(), label, fromAt, toAt }) };
+  };
   return {
     source: `replay:${options.file}`,
-    forecast: async (_place, signal) => {
-      let text: string;
-      try {
-        text = await readFile(options.file, { encoding: 'utf8', ...(signal ? { signal } : {}) });
-      } catch {
-        return weatherFailure('unavailable', `The file ${options.file} cannot be read.`);
-      }
-      const { hours, problems } = parseReplayCsv(text);
-      if (hours.length === 0) {
-        const first = problems[0];
-        const why = first ? ` Line ${first.line}: ${first.message}` : '';
-        return weatherFailure('bad_answer', `The file ${options.file} holds no hours.${why}`);
-      }
-      const { fromAt, toAt } = options;
-      const label = `Replay of ${options.file.split(/[\\/]/).at(-1)}`;
-      return { ok: true, forecast: replayForecast(hours, { issuedAt: options.issuedAt(), label, fromAt, toAt }) };
-    },
+    forecast: play,
+    history: (place, _days, signal) => play(place, signal),
   };
 }

@@ -21,22 +21,23 @@ export interface FakeWeatherOptions {
   now: () => number;
   forecast?: WeatherTrouble;
   ensemble?: WeatherTrouble;
+  archive?: WeatherTrouble;
   /** Told of each request before it is answered. */
-  onRequest?: (kind: 'forecast' | 'ensemble', url: URL) => void;
+  onRequest?: (kind: 'forecast' | 'ensemble' | 'archive', url: URL) => void;
 }
 
 /** Answers to the weather SDK's own requests, in its own binary form, from made weather. */
 export function makeWeatherHandlers(options: FakeWeatherOptions) {
-  const answer = (kind: 'forecast' | 'ensemble') => (info: { request: Request }) => {
+  const answer = (kind: 'forecast' | 'ensemble' | 'archive') => (info: { request: Request }) => {
     const url = new URL(info.request.url);
     options.onRequest?.(kind, url);
     return respond(kind, url.searchParams, options.now(), options[kind]);
   };
-  return [http.get('*/v1/forecast', answer('forecast')), http.get('*/v1/ensemble', answer('ensemble'))];
+  return (['forecast', 'ensemble', 'archive'] as const).map((kind) => http.get(`*/v1/${kind}`, answer(kind)));
 }
 
 function respond(
-  kind: 'forecast' | 'ensemble',
+  kind: 'forecast' | 'ensemble' | 'archive',
   query: URLSearchParams,
   now: number,
   trouble?: WeatherTrouble,
@@ -83,19 +84,28 @@ function makeHourly(
   const days = (name: string, most: number, fallback: number) =>
     Math.min(most, Math.max(0, Math.trunc(Number(query.get(name) ?? fallback)) || 0));
   const today = Math.floor(now / 1000 / DAY_S) * DAY_S;
-  const start = today - days('past_days', 92, 0) * DAY_S;
-  const end = today + days('forecast_days', 16, 7) * DAY_S;
+  const dated = datesOf(query);
+  const start = dated?.start ?? today - days('past_days', 92, 0) * DAY_S;
+  const end = dated?.end ?? today + days('forecast_days', 16, 7) * DAY_S;
   const instants = Array.from({ length: (end - start) / HOUR_S }, (_, index) => (start + index * HOUR_S) * 1000);
   const speedUnit = query.get('wind_speed_unit') ?? 'kmh';
-  const issuedAt = latestRun(now);
+  // What is past was not forecast: it is made as it then was.
+  const runOf = (at: number) => (dated ? at : latestRun(now));
   const byMember = Array.from({ length: members + 1 }, (_, member) =>
-    instants.map((at) => makeForecast(place, issuedAt, at, member)),
+    instants.map((at) => makeForecast(place, runOf(at), at, member)),
   );
   const variables = names.flatMap((name) => {
     const served = SERVED[name];
     return served ? byMember.map((made, member) => encodeVariable(served, made, member, speedUnit)) : [];
   });
   return { start, end, intervalS: HOUR_S, variables };
+}
+
+/** Days asked for by their dates, as the archive is. */
+function datesOf(query: URLSearchParams): { start: number; end: number } | null {
+  const at = (name: string) => Date.parse(`${query.get(name) ?? ''}T00:00:00Z`) / 1000;
+  const [start, end] = [at('start_date'), at('end_date') + DAY_S];
+  return end > start && end - start <= 400 * DAY_S ? { start, end } : null;
 }
 
 function refuse(status: number, reason: string): Response {

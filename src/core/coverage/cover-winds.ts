@@ -1,0 +1,131 @@
+import { anyArcContains, arcsFor } from '../arcs';
+import { monthOf } from '../day-time';
+import { sectorOf } from '../sectors';
+import { type Arc, type ScoredStand, type SitWindow, type WeatherHour, WINDOW_NAMES, type WindowName } from '../types';
+
+export type CoveringStand = Pick<ScoredStand, 'id' | 'name' | 'arcs' | 'suitability'>;
+
+export interface CoverageInput {
+  stands: CoveringStand[];
+  /** Observed hours, in any order. 10 m wind: no slope drift is added. */
+  hours: WeatherHour[];
+  windows: SitWindow[];
+  /** A stand or arc that is not there yet; null: none. */
+  trial: CoveringStand | null;
+}
+
+/** Hours of wind by compass point (16 from N clockwise) in one window of one month. */
+export interface CoverageCell {
+  window: WindowName;
+  /** 1-12; null: the whole season. */
+  month: number | null;
+  /** All hours with a speed, those without a direction (calm, variable) among them. */
+  hours: number;
+  noDirection: number;
+  /** Hours from each point; those some stand has in a good arc; those only the trial has. */
+  blew: number[];
+  covered: number[];
+  trialOnly: number[];
+}
+
+export interface StandCoverage {
+  standId: string;
+  name: string;
+  trial: boolean;
+  hours: Record<WindowName, number>;
+  /** Hours that no other stand covers; the trial is no other stand to those that stand. */
+  alone: number;
+}
+
+export interface Coverage {
+  cells: CoverageCell[];
+  stands: StandCoverage[];
+}
+
+const emptyCell = (window: WindowName, month: number | null): CoverageCell => {
+  const zeros = () => Array.from({ length: 16 }, () => 0);
+  return { window, month, hours: 0, noDirection: 0, blew: zeros(), covered: zeros(), trialOnly: zeros() };
+};
+
+function add(list: number[], index: number): void {
+  list[index] = (list[index] ?? 0) + 1;
+}
+
+/** Good arcs of a stand in a window; none where it is to be avoided. */
+function huntedArcs(stand: CoveringStand, window: WindowName): Arc[] {
+  return stand.suitability[window] === 'avoid' ? [] : arcsFor(stand.arcs, window);
+}
+
+/**
+ * Which winds of a season a club's stands cover, counted hour by hour: an hour counts in a window that holds its instant (the
+ * start in, the end out) and is covered by a stand with its direction in a good arc of that window. Calm and variable hours
+ * are counted apart and covered by none. Cells by window and month, in order, then the whole season by window. Never throws.
+ */
+export function coverWinds({ stands, hours, windows, trial }: CoverageInput): Coverage {
+  const all = trial ? [...stands, trial] : stands;
+  const rows = all.map(
+    (stand): StandCoverage => ({
+      standId: stand.id,
+      name: stand.name,
+      trial: stand === trial,
+      hours: { morning: 0, evening: 0 },
+      alone: 0,
+    }),
+  );
+  const arcs = Object.fromEntries(
+    WINDOW_NAMES.map((window) => [window, all.map((stand) => huntedArcs(stand, window))]),
+  ) as Record<WindowName, Arc[][]>;
+  const cells = new Map<string, CoverageCell>();
+  const cellOf = (window: WindowName, month: number | null) => {
+    const key = `${month === null ? 1 : 0}|${month}|${window}`;
+    const cell = cells.get(key) ?? emptyCell(window, month);
+    cells.set(key, cell);
+    return cell;
+  };
+  const known = hours
+    .filter((hour) => Number.isFinite(hour.at) && hour.windSpeedMps !== null)
+    .sort((a, b) => a.at - b.at);
+  let first = 0;
+  for (const window of [...windows].sort((a, b) => a.startAt - b.startAt)) {
+    while (first < known.length && (known[first] as WeatherHour).at < window.startAt) first++;
+    const counted = [cellOf(window.window, monthOf(window.day)), cellOf(window.window, null)];
+    for (let i = first; i < known.length && (known[i] as WeatherHour).at < window.endAt; i++) {
+      const { windFromDeg, windSpeedMps } = known[i] as WeatherHour;
+      for (const cell of counted) cell.hours++;
+      if (windFromDeg === null || windSpeedMps === 0) {
+        for (const cell of counted) cell.noDirection++;
+        continue;
+      }
+      const by = rows.filter((_, s) => anyArcContains(arcs[window.window][s] ?? [], windFromDeg));
+      const standing = by.filter((row) => !row.trial);
+      for (const row of by) row.hours[window.window]++;
+      if (standing.length === 1 && standing[0]) standing[0].alone++;
+      if (standing.length === 0 && by[0]) by[0].alone++;
+      const point = sectorOf(windFromDeg);
+      for (const cell of counted) {
+        add(cell.blew, point);
+        if (standing.length > 0) add(cell.covered, point);
+        else if (by.length > 0) add(cell.trialOnly, point);
+      }
+    }
+  }
+  const order = (cell: CoverageCell) => (cell.month === null ? 99 : (cell.month + 5) % 12);
+  const list = [...cells.values()].sort(
+    (a, b) => order(a) - order(b) || WINDOW_NAMES.indexOf(a.window) - WINDOW_NAMES.indexOf(b.window),
+  );
+  return { cells: list, stands: rows };
+}
+
+const sum = (list: number[]) => list.reduce((a, b) => a + b, 0);
+
+/** Shares (0-1) of a cell's hours with a direction that are covered, and that a trial would add; null: there are none. */
+export function coveredShares(cell: CoverageCell): { covered: number; added: number } | null {
+  const directed = sum(cell.blew);
+  return directed > 0 ? { covered: sum(cell.covered) / directed, added: sum(cell.trialOnly) / directed } : null;
+}
+
+/** Shares of the wind by compass point that sum to 1; every point alike where no wind is known. */
+export function windShares(cell: CoverageCell | undefined): number[] {
+  const directed = cell ? sum(cell.blew) : 0;
+  return Array.from({ length: 16 }, (_, i) => (cell && directed > 0 ? (cell.blew[i] ?? 0) / directed : 1 / 16));
+}
