@@ -49,6 +49,8 @@ export interface MapItemProps {
   /** Year in which timber was cut. */
   cutYear?: number;
   sector?: NoShootSector;
+  /** Direction a camera looks, clockwise from true north. */
+  facingDeg?: number;
 }
 
 /** What stands in a field in one year, and the months in which deer use it then. */

@@ -137,6 +137,12 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   'clubs/[club]/season/harvest/new/page.tsx': { default: 'harvest.write' },
   'clubs/[club]/season/harvest/page.tsx': { default: 'harvest.read' },
   'clubs/[club]/season/page.tsx': { default: 'log.read' },
+  'clubs/[club]/season/setup/actions.ts': {
+    acceptFindingAction: 'features.write',
+    dismissFindingAction: 'features.write',
+    reopenFindingAction: 'features.write',
+  },
+  'clubs/[club]/season/setup/page.tsx': { default: 'features.read' },
   'clubs/[club]/season/sightings/page.tsx': { default: 'log.read' },
   'clubs/[club]/sit/actions.ts': {
     bookSitAction: 'sits.book',

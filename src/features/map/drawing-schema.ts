@@ -50,6 +50,7 @@ export const drawingChange = z.union([
     props: z.object({
       cutYear: z.number().int().min(1900).max(2200).optional(),
       sector: z.object({ fromDeg: deg, toDeg: deg, reachM: z.number().min(1).max(5000) }).optional(),
+      facingDeg: deg.optional(),
     }),
   }),
 ]);

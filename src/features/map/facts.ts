@@ -46,6 +46,9 @@ export function factsOf(thing: MapThing, things: readonly MapThing[], club: MapC
       break;
     case 'item':
       if (thing.props.cutYear) facts.push({ term: 'Timber cut', detail: String(thing.props.cutYear) });
+      if (thing.props.facingDeg !== undefined) {
+        facts.push({ term: 'Looks', detail: formatBearing(thing.props.facingDeg) });
+      }
       if (thing.props.sector) {
         const { fromDeg, toDeg, reachM } = thing.props.sector;
         facts.push({

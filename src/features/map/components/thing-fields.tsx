@@ -168,6 +168,23 @@ function ItemFields({ thing, club, onChange }: { thing: ItemThing } & Pick<Field
           }}
         />
       )}
+      {thing.what === 'camera' && (
+        <NumberInput
+          label="Looks toward"
+          optional
+          unit="°"
+          hint="From true north, clockwise"
+          min={0}
+          max={360}
+          defaultValue={thing.props.facingDeg ?? ''}
+          onChange={({ target }) => {
+            const facingDeg = Number(target.value);
+            const { facingDeg: _, ...rest } = thing.props;
+            if (target.value !== '' && !(facingDeg >= 0 && facingDeg <= 360)) return;
+            onChange({ ...thing, props: target.value === '' ? rest : { ...rest, facingDeg } }, `facing:${thing.id}`);
+          }}
+        />
+      )}
       {thing.what === 'no_shoot' && sector && (
         <div className="grid grid-cols-3 gap-2">
           <NumberInput

@@ -7,6 +7,7 @@ import { currentUser } from '@/server/session';
 const PAGES: { path: string; label: string; needs: Permission }[] = [
   { path: '/sightings', label: 'Sightings', needs: 'log.read' },
   { path: '/harvest', label: 'Harvest', needs: 'harvest.read' },
+  { path: '/setup', label: 'Set-up check', needs: 'features.read' },
 ];
 
 interface Props {

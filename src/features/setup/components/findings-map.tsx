@@ -1,0 +1,51 @@
+'use client';
+
+import { useQuery } from '@tanstack/react-query';
+import dynamic from 'next/dynamic';
+import { useMemo, useState } from 'react';
+import { mapQuery } from '@/features/map/queries';
+import { Button } from '@/ui/button';
+import { ErrorState, Loading } from '@/ui/notices';
+import type { FindingView } from '../reads';
+
+const MapCanvas = dynamic(() => import('@/features/map/components/map-canvas').then((part) => part.MapCanvas), {
+  ssr: false,
+  loading: () => <Loading label="Unfolding the map" />,
+});
+
+export interface FindingsMapProps {
+  club: string;
+  findings: Pick<FindingView, 'at'>[];
+}
+
+/** The findings by their numbers on the ground; its code and data come when it is asked for. */
+export function FindingsMap(props: FindingsMapProps) {
+  const [open, setOpen] = useState(false);
+  if (!open) return <Button onClick={() => setOpen(true)}>Show them on the map</Button>;
+  return <NumberedMap {...props} />;
+}
+
+function NumberedMap({ club, findings }: FindingsMapProps) {
+  const query = useQuery(mapQuery(club));
+  const overlay = useMemo(
+    () => ({ sitters: findings.map(({ at }, i) => ({ at: [at.lon, at.lat], name: String(i + 1) })) }),
+    [findings],
+  );
+  if (query.isError) {
+    return (
+      <ErrorState title="The map could not be read" action={<Button onClick={() => query.refetch()}>Try again</Button>}>
+        {query.error.message}
+      </ErrorState>
+    );
+  }
+  if (!query.data) return <Loading label="Unfolding the map" />;
+  return (
+    <MapCanvas
+      view={query.data}
+      things={query.data.things}
+      overlay={overlay}
+      label="Map of the findings, by the numbers of the list"
+      className="relative h-96 sm:h-[32rem]"
+    />
+  );
+}
