@@ -1,6 +1,7 @@
 import { type ClubRules, completeRules } from '@/core/booking/rules';
 import { dayOf } from '@/core/day-time';
 import { can, type Permission, type Role } from '@/core/permissions';
+import type { Units } from '@/core/units';
 import { type ClubRow, findClubById, findClubBySlug, findMembership } from '@/db/queries/memberships';
 import type { Actor } from './audit';
 import { now } from './clock';
@@ -15,7 +16,10 @@ export interface ScopeClub {
   lat: number;
   lon: number;
   zone: string;
-  units: 'us' | 'metric';
+  /** What this reader sees: their own choice, else the club's. Forms show and read the same. */
+  units: Units;
+  /** The club's own setting. */
+  clubUnits: Units;
   rules: ClubRules;
   version: number;
 }
@@ -41,9 +45,9 @@ export interface ClubScope {
   can(permission: Permission): boolean;
 }
 
-function clubOf(row: ClubRow): ScopeClub {
-  const { id, slug, name, lat, lon, zone, units, rules, version } = row;
-  return { id, slug, name, lat, lon, zone, units, rules: completeRules(rules), version };
+function clubOf(row: ClubRow, units: Units | null = null): ScopeClub {
+  const { id, slug, name, lat, lon, zone, units: clubUnits, rules, version } = row;
+  return { id, slug, name, lat, lon, zone, units: units ?? clubUnits, clubUnits, rules: completeRules(rules), version };
 }
 
 function makeScope(club: ScopeClub, member: ScopeMember): ClubScope {
@@ -62,7 +66,7 @@ export async function findScope(slug: string, userId: string): Promise<ClubScope
   if (!row) return null;
   const { club, membership, user } = row;
   if (membership.role === 'guest' && membership.guestTo && dayOf(now(), club.zone) > membership.guestTo) return null;
-  return makeScope(clubOf(club), {
+  return makeScope(clubOf(club, user.units), {
     id: membership.id,
     userId,
     name: user.name,

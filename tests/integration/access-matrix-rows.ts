@@ -8,6 +8,7 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   '(account)/account/actions.ts': {
     changeNameAction: 'account',
     changePasswordAction: 'account',
+    changeUnitsAction: 'account',
     endSessionAction: 'account',
     signOutAction: 'account',
     signOutEverywhereAction: 'account',

@@ -7,7 +7,11 @@ export type MembershipRow = typeof memberships.$inferSelect;
 
 export async function findMembership(slug: string, userId: string, from: ReadFrom = reader()) {
   const [row] = await from
-    .select({ club: clubs, membership: memberships, user: { name: users.name, email: users.email } })
+    .select({
+      club: clubs,
+      membership: memberships,
+      user: { name: users.name, email: users.email, units: users.units },
+    })
     .from(memberships)
     .innerJoin(clubs, eq(clubs.id, memberships.clubId))
     .innerJoin(users, eq(users.id, memberships.userId))

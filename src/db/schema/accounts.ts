@@ -1,4 +1,5 @@
 import { index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import { UNIT_SYSTEMS } from '@/core/units';
 
 export const users = sqliteTable('users', {
   id: text().primaryKey(),
@@ -8,6 +9,8 @@ export const users = sqliteTable('users', {
   passwordHash: text().notNull(),
   emailVerifiedAt: integer(),
   createdAt: integer().notNull(),
+  /** How figures are shown to this person in every club; null: as the club has it. */
+  units: text({ enum: UNIT_SYSTEMS }),
 });
 
 export const sessions = sqliteTable(

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { UNIT_SYSTEMS } from '@/core/units';
 import { LONGEST_PASSWORD, passwordProblem } from './password-rules';
 
 export const nameField = z
@@ -59,5 +60,11 @@ export const changePasswordSchema = z.object({ current: givenPassword, password:
 export type ChangePasswordInput = z.output<typeof changePasswordSchema>;
 
 export const endSessionSchema = z.object({ id: z.string().min(1).max(100) });
+
+/** club: as each club has it. */
+export const changeUnitsSchema = z.object({
+  units: z.enum([...UNIT_SYSTEMS, 'club'], { error: "Choose the club's units or your own." }),
+});
+export type ChangeUnitsInput = z.output<typeof changeUnitsSchema>;
 
 export const nothingSchema = z.object({});

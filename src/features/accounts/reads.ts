@@ -1,11 +1,17 @@
 import { formatDistance } from 'date-fns';
 import { dayOf } from '@/core/day-time';
+import type { Units } from '@/core/units';
 import { listClubsOf } from '@/db/queries/memberships';
 import { listSessions } from '@/db/queries/sessions';
 import { hashSecret } from '@/lib/secrets';
 import type { CurrentUser } from '@/server/session';
 import { browserName } from './browser-name';
-import { findTokenOwner, type TokenPurpose } from './data';
+import { findTokenOwner, findUserById, type TokenPurpose } from './data';
+
+/** How figures are shown to this person: their own choice, or as each club has it. */
+export async function readMyUnits(user: Pick<CurrentUser, 'id'>): Promise<Units | 'club'> {
+  return (await findUserById(user.id))?.units ?? 'club';
+}
 
 /** The person's signed-in browsers, newest first. The id is the stored hash, no key to anything. */
 export async function listMySessions(user: CurrentUser, now: number) {

@@ -3,11 +3,13 @@
 import {
   changeNameSchema,
   changePasswordSchema,
+  changeUnitsSchema,
   endSessionSchema,
   nothingSchema,
 } from '@/features/accounts/account-schema';
 import { changeName } from '@/features/accounts/change-name';
 import { changePassword } from '@/features/accounts/change-password';
+import { changeUnits } from '@/features/accounts/change-units';
 import { endAllSessions, endOneSession } from '@/features/accounts/end-sessions';
 import { saveContactSchema, switchContactSchema } from '@/features/outings/contact-schema';
 import { removeContact, saveContact, switchContact } from '@/features/outings/save-contact';
@@ -18,6 +20,14 @@ export const changeNameAction = accountAction({
   input: changeNameSchema,
   run: async ({ user, input, now }) => {
     await changeName(user, input, now);
+    return null;
+  },
+});
+
+export const changeUnitsAction = accountAction({
+  input: changeUnitsSchema,
+  run: async ({ user, input, now }) => {
+    await changeUnits(user, input, now);
     return null;
   },
 });

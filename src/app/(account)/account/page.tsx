@@ -4,7 +4,8 @@ import { NameForm } from '@/features/accounts/components/name-form';
 import { PasswordForm } from '@/features/accounts/components/password-form';
 import { SessionsList } from '@/features/accounts/components/sessions-list';
 import { SignOutButton, SignOutEverywhereButton } from '@/features/accounts/components/sign-out-button';
-import { listMySessions } from '@/features/accounts/reads';
+import { UnitsForm } from '@/features/accounts/components/units-form';
+import { listMySessions, readMyUnits } from '@/features/accounts/reads';
 import { ContactForm } from '@/features/outings/components/contact-form';
 import { readContact } from '@/features/outings/read-contact';
 import { now } from '@/server/clock';
@@ -15,6 +16,7 @@ import { resendAction } from '../verify/actions';
 import {
   changeNameAction,
   changePasswordAction,
+  changeUnitsAction,
   endSessionAction,
   removeContactAction,
   saveContactAction,
@@ -34,6 +36,9 @@ export default accountPage(async ({ user }) => {
       {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
       <Section title="Name" note="Members of your clubs see it.">
         <NameForm name={user.name} action={changeNameAction} />
+      </Section>
+      <Section title="Units" note="How figures are shown to you, in every club. What others see stays as it is.">
+        <UnitsForm units={await readMyUnits(user)} action={changeUnitsAction} />
       </Section>
       <Section
         title="Safety contact"

@@ -29,7 +29,8 @@ export default clubPage('club.read', async ({ scope }) => {
     ...(you.sponsorName ? [{ term: 'Sponsor', detail: you.sponsorName }] : []),
   ];
   // Whoever may not see the stands is not told where the ground lies.
-  const place = scope.can('stands.read') ? placeLines(club) : placeLines(club).filter((line) => line.label !== 'Place');
+  const lines = placeLines({ ...club, units: club.clubUnits });
+  const place = scope.can('stands.read') ? lines : lines.filter((line) => line.label !== 'Place');
   return (
     <>
       <PageTitle title={club.name} actions={<ButtonLink href={`${base}/club/rules`}>Club rules</ButtonLink>} />

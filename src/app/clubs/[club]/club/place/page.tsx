@@ -7,7 +7,7 @@ import { savePlaceAction } from './actions';
 export const metadata: Metadata = { title: 'Name, place and units' };
 
 export default clubPage('rules.write', async ({ scope }) => {
-  const { slug, name, lat, lon, zone, units, version } = scope.club;
+  const { slug, name, lat, lon, zone, clubUnits: units, version } = scope.club;
   return (
     <>
       <PageTitle

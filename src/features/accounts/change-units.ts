@@ -1,0 +1,18 @@
+import { write } from '@/db/client';
+import type { ChangeUnitsInput } from './account-schema';
+import { auditAccount } from './audit-account';
+import { updateUser } from './data';
+
+const SAID = { us: 'in US units', metric: 'in metric units', club: 'as each club has them' } as const;
+
+/** How figures are shown to one person; what is stored and what others see stays as it is. */
+export async function changeUnits(
+  user: { id: string; name: string },
+  { units }: ChangeUnitsInput,
+  now: number,
+): Promise<void> {
+  await write(async (tx) => {
+    await updateUser(tx, user.id, { units: units === 'club' ? null : units });
+    await auditAccount(tx, user, 'units_chosen', `${user.name} now sees figures ${SAID[units]}.`, now);
+  });
+}
