@@ -103,7 +103,7 @@ export function Badge({ look = 'plain', children }: { look?: BadgeLook; children
   return (
     <span
       className={joinClasses(
-        'inline-block whitespace-nowrap rounded-sm border px-1.5 font-semibold text-sm leading-snug',
+        'inline-block justify-self-start whitespace-nowrap rounded-sm border px-1.5 font-semibold text-sm leading-snug',
         BADGE_LOOKS[look],
       )}
     >

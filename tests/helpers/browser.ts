@@ -48,11 +48,21 @@ export async function newVisitor(browser: Browser, baseURL: string, size = PHONE
 
 /** Serious and critical findings of axe on the page as it stands, in words. */
 export async function axeFindings(page: Page): Promise<string[]> {
+  return (await allAxeFindings(page))
+    .filter(({ impact }) => impact === 'serious' || impact === 'critical')
+    .map(({ text }) => text);
+}
+
+/** All findings of axe, of whatever weight; `rules` looks at those alone. */
+export async function allAxeFindings(page: Page, rules?: string[]): Promise<{ impact: string; text: string }[]> {
   await page.waitForFunction(() => document.title !== '');
-  const { violations } = await new AxeBuilder({ page }).analyze();
-  return violations
-    .filter((v) => v.impact === 'serious' || v.impact === 'critical')
-    .map((v) => `${v.id}: ${v.help}: ${v.nodes.map((n) => n.target.join(' ')).join(', ')}`);
+  const builder = new AxeBuilder({ page });
+  if (rules) builder.withRules(rules);
+  const { violations } = await builder.analyze();
+  return violations.map((v) => ({
+    impact: v.impact ?? 'unknown',
+    text: `${v.id}: ${v.help}: ${v.nodes.map((n) => n.target.join(' ')).join(', ')}`,
+  }));
 }
 
 /** Kept when SCREENSHOTS names a folder. */

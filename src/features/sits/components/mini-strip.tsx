@@ -9,7 +9,13 @@ const xOf = (deg: number) => (deg / 360) * WIDTH;
 export function MiniStrip({ arcs, thousandths }: { arcs: Arc[]; thousandths: number[] | null }) {
   const shares = thousandths?.map((one) => one / 1000);
   return (
-    <svg viewBox={`0 0 ${WIDTH} 13`} width={WIDTH} height={13} aria-hidden="true" className="block">
+    <svg
+      viewBox={`0 0 ${WIDTH} 13`}
+      width={WIDTH}
+      height={13}
+      aria-hidden="true"
+      className="block print:h-auto print:w-full"
+    >
       {shares ? (
         shadePaths(shares, xOf, 0, 8).map(({ level, opacity, d }) => (
           <path key={level} d={d} fill="var(--color-ink)" fillOpacity={opacity} />

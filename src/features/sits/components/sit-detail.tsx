@@ -10,8 +10,10 @@ import type { SitsAskText } from '../ask-schema';
 import { sitDetailQuery } from '../queries';
 import type { SitDetailView, SitsView, TimelineView } from '../view-types';
 import { clockText, shortClock } from '../words';
+import { CompareChoice } from './compare-choice';
 import { DetailPart } from './detail-part';
 import { ReasonList } from './reason-list';
+import { ShareSit } from './share-sit';
 import { WalkMap } from './walk-map';
 import { WaysIn } from './ways-in';
 import { WindByHour } from './wind-by-hour';
@@ -26,7 +28,7 @@ interface SitDetailProps {
 export function SitDetail({ view, standId, ask }: SitDetailProps) {
   const { day, window } = view.window;
   const query = useQuery(sitDetailQuery(view.club.slug, standId, { ...ask, day, window }));
-  if (query.data) return <DetailBody detail={query.data} view={view} />;
+  if (query.data) return <DetailBody detail={query.data} view={view} ask={ask} />;
   if (query.isError) {
     return (
       <div className="pb-4">
@@ -71,7 +73,7 @@ function marksOf(view: SitsView) {
   ];
 }
 
-function DetailBody({ detail, view }: { detail: SitDetailView; view: SitsView }) {
+function DetailBody({ detail, view, ask }: { detail: SitDetailView; view: SitsView; ask: SitsAskText }) {
   const short = (at: number) => shortClock(at, view.club);
   const hold = holdText(detail, view);
   const known = detail.timeline.some((step) => step.shares !== null);
@@ -131,6 +133,10 @@ function DetailBody({ detail, view }: { detail: SitDetailView; view: SitsView })
           <span className="font-semibold">{SURE[detail.confidence.level]}</span> {detail.confidence.text}.
         </p>
       </DetailPart>
+      <div className="flex flex-wrap items-end gap-4 lg:col-span-2 print:hidden">
+        <CompareChoice view={view} ask={ask} standId={detail.standId} />
+        <ShareSit view={view} standId={detail.standId} />
+      </div>
     </div>
   );
 }

@@ -1,7 +1,7 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
-import { useState } from 'react';
+import { useEffect, useState } from 'react';
 import { formatDay } from '@/core/day-time';
 import { Button, ButtonLink, TextLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
@@ -11,6 +11,7 @@ import type { BookActions, Hunter } from '../book-actions';
 import { sitsQuery } from '../queries';
 import type { OpenRow, SitsView } from '../view-types';
 import { WINDOW_WORDS } from '../words';
+import { BackToWindow } from './back-to-window';
 import { BlockedList } from './blocked-list';
 import { ForecastNote } from './forecast-note';
 import { LazyBookDialog } from './load-parts';
@@ -26,15 +27,20 @@ export interface SitScreenProps {
   /** Members an admin may book for; null: only oneself. */
   hunters: Hunter[] | null;
   may: { book: boolean; addStands: boolean };
+  /** The address names no window: the next one is shown. */
+  isNext: boolean;
 }
 
-export function SitScreen({ ask, initial, openStandId, actions, hunters, may }: SitScreenProps) {
+export function SitScreen({ ask, initial, openStandId, actions, hunters, may, isNext }: SitScreenProps) {
   const { slug } = initial.club;
   const query = useQuery({ ...sitsQuery(slug, ask), initialData: initial, initialDataUpdatedAt: initial.madeAt });
   const view = query.data;
   const [openId, setOpenId] = useState(openStandId);
   const [booking, setBooking] = useState<OpenRow | null>(null);
   const { window, mine } = view;
+  useEffect(() => {
+    if (openStandId) document.getElementById(openStandId)?.scrollIntoView({ block: 'start' });
+  }, [openStandId]);
   return (
     <>
       <PageTitle
@@ -48,6 +54,7 @@ export function SitScreen({ ask, initial, openStandId, actions, hunters, may }: 
       />
       <SitHead view={view} />
       <div className="mt-3 grid gap-3">
+        <BackToWindow view={view} isNext={isNext} />
         <ForecastNote forecast={view.forecast} now={view.madeAt} />
         {query.isError && (
           <Notice

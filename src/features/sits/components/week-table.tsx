@@ -1,21 +1,32 @@
 import Link from 'next/link';
 import { formatDay } from '@/core/day-time';
+import { Button } from '@/ui/button';
 import { joinClasses } from '@/ui/join-classes';
+import { useMoreRows } from '@/ui/use-more-rows';
 import { sitAddress } from '../sit-address';
 import type { WeekCell, WeekColumnView, WeekView } from '../view-types';
 import { cellText, groupByDay, isShown, shownStands, type WeekShow } from '../week-cells';
 import { WINDOW_WORDS } from '../words';
 import { MiniStrip } from './mini-strip';
 
+/** A screen or three of them: more would be slow to draw on a phone. */
+const ROWS_AT_ONCE = 60;
+
 /** Stands down, windows across: each cell says the word, the score and where the wind lies. */
 export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
   const days = groupByDay(view.columns);
+  const stands = shownStands(view, show);
+  const { shown, foot, showAll } = useMoreRows(stands.length, ROWS_AT_ONCE);
   return (
-    <table className="border-collapse text-sm">
+    <table className="week-table border-collapse text-sm">
       <caption className="sr-only">Every stand in every window the forecast reaches</caption>
       <thead>
         <tr>
-          <th scope="col" rowSpan={2} className="sticky left-0 z-10 min-w-36 bg-paper pr-3 text-left align-bottom">
+          <th
+            scope="col"
+            rowSpan={2}
+            className="sticky left-0 z-10 min-w-36 bg-paper print:min-w-0 pr-3 text-left align-bottom"
+          >
             Stand
           </th>
           {days.map(({ day, columns }) => (
@@ -51,7 +62,7 @@ export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
         </tr>
       </thead>
       <tbody>
-        {shownStands(view, show).map((stand) => (
+        {stands.slice(0, shown).map((stand) => (
           <tr key={stand.standId} className="border-rule border-b align-top">
             <th scope="row" className="sticky left-0 z-10 bg-paper py-1.5 pr-3 text-left font-semibold">
               {stand.name}
@@ -67,6 +78,15 @@ export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
           </tr>
         ))}
       </tbody>
+      {shown < stands.length && (
+        <tfoot ref={foot}>
+          <tr>
+            <td colSpan={1 + view.columns.length} className="py-3">
+              <Button onClick={showAll}>Show all {stands.length} stands</Button>
+            </td>
+          </tr>
+        </tfoot>
+      )}
     </table>
   );
 }
@@ -84,7 +104,11 @@ function Cell({ view, column, stand, show }: CellProps) {
   const { day, window } = column.window;
   const ask = { day, window, ...(view.weapon ? { weapon: view.weapon } : {}), stand: stand.standId };
   return (
-    <Link href={sitAddress(view.club.slug, ask)} className="block px-2 py-1.5 hover:bg-panel" prefetch={false}>
+    <Link
+      href={sitAddress(view.club.slug, ask)}
+      className="block px-2 py-1.5 no-underline hover:bg-panel"
+      prefetch={false}
+    >
       <CellWords cell={cell} />
       <MiniStrip
         arcs={stand.arcs[window]}

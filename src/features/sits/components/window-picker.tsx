@@ -6,6 +6,7 @@ import { type Weapon, WINDOW_NAMES, type WindowName } from '@/core/types';
 import { ButtonLink, buttonClasses } from '@/ui/button';
 import { DateInput, Select } from '@/ui/text-inputs';
 import { inAskedYears } from '../asked-years';
+import { keepWeapon } from '../remember';
 import { sitAddress } from '../sit-address';
 import type { SitsView } from '../view-types';
 import { WEAPON_LABELS, WINDOW_WORDS } from '../words';
@@ -85,7 +86,9 @@ export function ChooseWindow({ view }: { view: SitsView }) {
           ...view.weapons.map((value) => ({ value, label: WEAPON_LABELS[value] })),
         ]}
         onChange={({ target }) => {
-          router.push(addressOf(view, window, view.weapons.find((one) => one === target.value) ?? null));
+          const chosen = view.weapons.find((one) => one === target.value) ?? null;
+          keepWeapon(chosen);
+          router.push(addressOf(view, window, chosen));
         }}
       />
       <noscript>
