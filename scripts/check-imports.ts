@@ -35,6 +35,7 @@ const FEATURES = [
   'sits',
   'coverage',
   'setup',
+  'movement',
   'learning',
   'moment',
   'board',

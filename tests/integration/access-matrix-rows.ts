@@ -144,6 +144,8 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
     reopenFindingAction: 'features.write',
   },
   'clubs/[club]/season/setup/page.tsx': { default: 'features.read' },
+  'clubs/[club]/season/coverage/page.tsx': { default: 'features.read' },
+  'clubs/[club]/season/movement/page.tsx': { default: 'features.read' },
   'clubs/[club]/season/sightings/page.tsx': { default: 'log.read' },
   'clubs/[club]/sit/actions.ts': {
     bookSitAction: 'sits.book',

@@ -92,3 +92,17 @@ export function weighFinding(
   const measure = trial.change === 'facing' ? 'promise' : 'quiet';
   return { ...sit, measure, before: before[measure], after: after[measure] };
 }
+
+/** A stand on the commonest wind it is hunted on, by the scoring core; null: no window to judge it in. */
+export function judgeUsual(
+  stand: ScoredStand,
+  ground: GroundInput,
+  windows: SitWindow[],
+  winds: UsualWinds | null,
+): { window: WindowName; windFromDeg: number; quiet: number; promise: number } | null {
+  const sit = usualSit(stand, winds, null);
+  const named = windows.filter((w) => w.window === sit.window);
+  const window = named[Math.floor(named.length / 2)];
+  const verdict = window && judge({ ...ground, stands: [stand] }, window, sit.windFromDeg);
+  return verdict ? { ...sit, quiet: verdict.quiet, promise: verdict.promise } : null;
+}

@@ -8,6 +8,8 @@ const PAGES: { path: string; label: string; needs: Permission }[] = [
   { path: '/sightings', label: 'Sightings', needs: 'log.read' },
   { path: '/harvest', label: 'Harvest', needs: 'harvest.read' },
   { path: '/setup', label: 'Set-up check', needs: 'features.read' },
+  { path: '/coverage', label: 'Wind coverage', needs: 'features.read' },
+  { path: '/movement', label: 'Movement', needs: 'features.read' },
 ];
 
 interface Props {

@@ -1,0 +1,178 @@
+import { bearingDeg, distanceM, distanceToShapeM, lengthM } from '../geometry';
+import { sectorName } from '../sectors';
+import type { ScoringSettings } from '../settings';
+import { DEFAULT_SETUP, type SetupSettings } from '../setup-check/setup-settings';
+import { along, canShoot, carries, shotOf, windowsHunted, windsHunted } from '../setup-check/shot-of';
+import type { FeatureKind, Point, ScoredFeature, ScoredStand, WindowName } from '../types';
+import { ydToM } from '../units';
+
+export interface MovementInput {
+  features: ScoredFeature[];
+  stands: ScoredStand[];
+  scoring: ScoringSettings;
+  setup?: SetupSettings;
+  settings?: MovementSettings;
+}
+
+export interface MovementSettings {
+  /** A feature this near a line is a stop on it, m. Practice. */
+  stopWithinM: number;
+  /** A stretch that no stand reaches counts as a gap from this length, m. Our choice. */
+  gapFromM: number;
+}
+
+export const DEFAULT_MOVEMENT: MovementSettings = { stopWithinM: ydToM(65), gapFromM: ydToM(100) };
+
+export interface Stop {
+  /** null: an end of the line at which nothing is drawn. */
+  featureId: string | null;
+  name: string;
+  kind: FeatureKind | null;
+  /** Metres along the line from its first point, and off it. */
+  alongM: number;
+  offM: number;
+}
+
+export interface Server {
+  standId: string;
+  name: string;
+  windows: {
+    window: WindowName /** Compass points 0-15 it is hunted on that keep its scent off the leg. */;
+    winds: number[];
+  }[];
+}
+
+export interface Leg {
+  from: Stop;
+  to: Stop;
+  lengthM: number;
+  stands: Server[];
+}
+
+export interface MovementLine {
+  id: string;
+  name: string;
+  lengthM: number;
+  stops: Stop[];
+  legs: Leg[];
+  /** Stretches no stand reaches, named by the stops they lie between. */
+  gaps: { fromM: number; toM: number; between: string }[];
+  /** Deer's way in each window: 1 from the first point to the last, -1 back; null: the line joins no bed to no food. */
+  way: Record<WindowName, 1 | -1 | null>;
+}
+
+const FOOD: ReadonlySet<FeatureKind> = new Set(['food_plot', 'crop', 'mast']);
+const BEDS: ReadonlySet<FeatureKind> = new Set(['bedding', 'sanctuary']);
+const STEP_M = 5;
+
+interface Station {
+  p: Point;
+  alongM: number;
+}
+
+function stationsOf(points: Point[]): Station[] {
+  const steps = along(points, STEP_M);
+  let gone = 0;
+  return steps.map((p, i) => {
+    if (i > 0) gone += distanceM(steps[i - 1] as Point, p);
+    return { p, alongM: gone };
+  });
+}
+
+function stopsOf(line: ScoredFeature, stations: Station[], input: MovementInput): Stop[] {
+  const { stopWithinM } = input.settings ?? DEFAULT_MOVEMENT;
+  const found = input.features.flatMap((feature): Stop[] => {
+    if (feature.id === line.id || feature.kind === 'travel_line' || feature.kind === 'rub_line') return [];
+    const near = stations
+      .map((s) => ({ s, offM: distanceToShapeM(s.p, feature.shape) }))
+      .reduce<{ s: Station; offM: number } | null>((best, one) => (best && best.offM <= one.offM ? best : one), null);
+    if (!near || near.offM > stopWithinM) return [];
+    const { id, name, kind } = feature;
+    return [{ featureId: id, name, kind, alongM: near.s.alongM, offM: near.offM }];
+  });
+  const stops = found.sort((a, b) => a.alongM - b.alongM || a.name.localeCompare(b.name));
+  const [first, last] = [stations[0], stations.at(-1)];
+  if (!first || !last) return stops;
+  const end = (at: Station, from: Point): Stop => ({
+    featureId: null,
+    name: `its ${sectorName(bearingDeg(from, at.p))} end`,
+    kind: null,
+    alongM: at.alongM,
+    offM: 0,
+  });
+  const lead = (stops[0]?.alongM ?? Number.POSITIVE_INFINITY) > stopWithinM ? [end(first, last.p)] : [];
+  const left = last.alongM - (stops.at(-1)?.alongM ?? Number.NEGATIVE_INFINITY);
+  return [...lead, ...stops, ...(left > stopWithinM ? [end(last, first.p)] : [])];
+}
+
+function serversOf(stretch: Station[], input: MovementInput, setup: SetupSettings): Server[] {
+  return input.stands.flatMap((stand: ScoredStand) => {
+    const shots = stretch.map(({ p }) =>
+      shotOf(stand, { type: 'point', at: p }, { settings: setup, scoring: input.scoring }),
+    );
+    const shot = shots.filter(canShoot).sort((a, b) => a.metres - b.metres)[0];
+    if (!shot) return [];
+    const windows = windowsHunted(stand).map((window) => ({
+      window,
+      winds: windsHunted(stand, window).filter((w) => !carries(w * 22.5, shot.bearing, setup.scentDeg)),
+    }));
+    const served = windows.filter(({ winds }) => winds.length > 0);
+    return served.length > 0 ? [{ standId: stand.id, name: stand.name, windows: served }] : [];
+  });
+}
+
+function gapsOf(stations: Station[], stops: Stop[], input: MovementInput, setup: SetupSettings): MovementLine['gaps'] {
+  const { gapFromM } = input.settings ?? DEFAULT_MOVEMENT;
+  const open = stations.map((s) => serversOf([s], input, setup).length === 0);
+  const gaps: MovementLine['gaps'] = [];
+  for (let i = 0; i < stations.length; i++) {
+    if (!open[i]) continue;
+    let k = i;
+    while (open[k + 1]) k++;
+    const [fromM, toM] = [stations[i]?.alongM ?? 0, stations[k]?.alongM ?? 0];
+    i = k;
+    if (toM - fromM < gapFromM) continue;
+    const before = stops.filter((s) => s.alongM <= fromM + STEP_M).at(-1) ?? stops[0];
+    const after = stops.find((s) => s.alongM >= toM - STEP_M) ?? stops.at(-1);
+    gaps.push({ fromM, toM, between: `${before?.name ?? ''} and ${after?.name ?? ''}` });
+  }
+  return gaps;
+}
+
+const mean = (list: number[]) => list.reduce((a, b) => a + b, 0) / list.length;
+
+function wayOf(stops: Stop[], length: number): MovementLine['way'] {
+  const at = (kinds: ReadonlySet<FeatureKind>) => stops.filter((s) => s.kind && kinds.has(s.kind)).map((s) => s.alongM);
+  const [beds, food] = [at(BEDS), at(FOOD)];
+  if (beds.length === 0 && food.length === 0) return { morning: null, evening: null };
+  const bedsAt = beds.length > 0 ? mean(beds) : length - mean(food);
+  const foodAt = food.length > 0 ? mean(food) : length - mean(beds);
+  if (bedsAt === foodAt) return { morning: null, evening: null };
+  const morning = bedsAt > foodAt ? 1 : -1;
+  return { morning, evening: morning === 1 ? -1 : 1 };
+}
+
+/**
+ * Lines deer travel as chains of the features on them: stops in order with metres along the line, the stands that reach each
+ * leg by window and wind, gaps no stand reaches, and the deer's way (from food to beds in the morning, back in the evening;
+ * with only one of the two on a line, toward or from that end). Practice. Lines in order of name. Never throws.
+ */
+export function chainMovement(input: MovementInput): MovementLine[] {
+  const setup = input.setup ?? DEFAULT_SETUP;
+  const lines = input.features.filter((f) => f.kind === 'travel_line' && f.shape.type === 'line');
+  return lines
+    .flatMap((line): MovementLine[] => {
+      if (line.shape.type !== 'line' || line.shape.points.length < 2) return [];
+      const stations = stationsOf(line.shape.points);
+      const stops = stopsOf(line, stations, input);
+      const legs = stops.slice(1).map((to, i): Leg => {
+        const from = stops[i] as Stop;
+        const stretch = stations.filter((s) => s.alongM >= from.alongM && s.alongM <= to.alongM);
+        return { from, to, lengthM: to.alongM - from.alongM, stands: serversOf(stretch, input, setup) };
+      });
+      const length = lengthM(line.shape.points);
+      const gaps = gapsOf(stations, stops, input, setup);
+      return [{ id: line.id, name: line.name, lengthM: length, stops, legs, gaps, way: wayOf(stops, length) }];
+    })
+    .sort((a, b) => a.name.localeCompare(b.name));
+}
