@@ -30,6 +30,7 @@ const FEATURES = [
   'bookings',
   'outings',
   'logs',
+  'photos',
   'harvest',
   'chores',
   'sits',
@@ -41,10 +42,19 @@ const FEATURES = [
   'board',
   'calendar',
   'notices',
+  'offline',
+  'onboarding',
   'demo',
 ];
 
-const VENDOR_ONLY_IN_ADAPTERS = ['openmeteo', '@openmeteo/sdk', 'flatbuffers', 'msw', 'nodemailer'];
+const VENDOR_ONLY_IN_ADAPTERS = [
+  'openmeteo',
+  '@openmeteo/sdk',
+  'flatbuffers',
+  'msw',
+  'nodemailer',
+  '@aws-sdk/client-s3',
+];
 const CORE_MAY_USE = [
   'suncalc',
   'zod',

@@ -58,6 +58,12 @@ export const environmentSchema = z.object({
     ctx.addIssue({ code: 'custom', message: `is "${text}"; write fake or hosted` });
   }),
   ELEVATION_URL: url(['http:', 'https:']),
+  FILES_FOLDER: optional,
+  FILES_BUCKET: optional,
+  FILES_ENDPOINT: url(['http:', 'https:']),
+  FILES_REGION: optional,
+  FILES_ACCESS_KEY: optional,
+  FILES_SECRET_KEY: optional,
   SMTP_URL: url(['smtp:', 'smtps:']),
   MAIL_FROM: optional,
   IMAGERY_URL: tiles,
@@ -66,6 +72,13 @@ export const environmentSchema = z.object({
   RUN_JOBS: flag(true),
   LOG_LEVEL: optional,
 });
+
+/** Files lie beside a database that is a file, else under data. */
+function besideDatabase(databaseUrl: string | undefined): string {
+  const file = databaseUrl?.startsWith('file:') ? databaseUrl.slice('file:'.length).split('?')[0] : undefined;
+  const folder = file?.includes('/') ? file.slice(0, file.lastIndexOf('/')) : 'data';
+  return `${folder}/files`;
+}
 
 export class EnvironmentError extends Error {}
 
@@ -90,6 +103,17 @@ export function readEnvironment(source: Record<string, string | undefined>) {
     weatherApiKey: set.WEATHER_API_KEY,
     elevation: set.ELEVATION ?? 'fake',
     elevationUrl: set.ELEVATION_URL,
+    filesFolder: set.FILES_FOLDER ?? besideDatabase(set.DATABASE_URL),
+    /** None: files lie in the folder above. */
+    s3: set.FILES_BUCKET
+      ? {
+          bucket: set.FILES_BUCKET,
+          endpoint: set.FILES_ENDPOINT,
+          region: set.FILES_REGION ?? 'us-east-1',
+          accessKeyId: set.FILES_ACCESS_KEY ?? '',
+          secretAccessKey: set.FILES_SECRET_KEY ?? '',
+        }
+      : null,
     /** None: the fake keeps every message in the database. */
     smtpUrl: set.SMTP_URL,
     mailFrom: set.MAIL_FROM ?? 'Windrest <windrest@localhost>',

@@ -2,6 +2,7 @@ import { write } from '@/db/client';
 import { deleteOldRuns } from '@/db/queries/job-runs';
 import { deleteOldRates } from '@/db/queries/rate-limits';
 import { remindUpkeep } from '@/features/chores/remind-upkeep';
+import { deleteOldImports } from '@/features/exchange/imports-data';
 import { remindLogs } from '@/features/logs/remind-logs';
 import { sendDueMail } from '@/features/mail/send-due-mail';
 import { deleteOldNoticeLinks } from '@/features/notices/choices-data';
@@ -14,6 +15,7 @@ import { tellWindTurned } from '@/features/notices/tell-wind-turned';
 import { lapseUnsigned } from '@/features/outings/lapse-unsigned';
 import { deleteOldLinks } from '@/features/outings/links-data';
 import { tellOverdue } from '@/features/outings/tell-overdue';
+import { removeOrphans } from '@/features/photos/remove-orphans';
 import { refreshAllForecasts } from '@/features/weather/refresh-all';
 
 export interface Job {
@@ -119,6 +121,14 @@ export const JOBS: readonly Job[] = [
     },
   },
   {
+    name: 'remove-orphans',
+    everyMs: DAY,
+    run: async (now) => {
+      const { files, photos } = await removeOrphans(now);
+      return `${files} files without a photo and ${photos} photos of what is gone removed`;
+    },
+  },
+  {
     name: 'tidy',
     everyMs: DAY,
     run: async (now) => {
@@ -126,10 +136,11 @@ export const JOBS: readonly Job[] = [
         await deleteOldRates(tx, now - DAY);
         await deleteOldRuns(tx, now - 2 * DAY);
         await deleteOldLinks(tx, now - 30 * DAY);
+        await deleteOldImports(tx, now - 30 * DAY);
         await deleteOldNoticeLinks(tx, now - 365 * DAY);
         await deleteOldOutlooks(tx, now - 30 * DAY);
       });
-      return 'old counts, runs and links removed';
+      return 'old counts, runs, links and unused imports removed';
     },
   },
 ];

@@ -3,9 +3,11 @@ import { reader, write } from '@/db/client';
 import * as schema from '@/db/schema';
 import { DEMO_SLUG } from '@/features/demo/build-demo';
 import { seedDemo } from '@/features/demo/seed-demo';
+import { keepFilesIn, photoKey } from '@/features/photos/files';
 import { refreshAllForecasts } from '@/features/weather/refresh-all';
 import { setClock } from '@/server/clock';
 import { startSession } from '@/server/session';
+import { makeMemoryFiles } from './memory-files';
 import { inRequest, newBrowser, type TestRequest } from './request';
 
 export const DEMO_NOW = Date.UTC(2026, 10, 4, 15);
@@ -90,6 +92,20 @@ async function realParams(): Promise<Record<string, string>> {
   };
 }
 
+/** A photo of a stand of the demo, in files of this process's own. */
+async function addPhoto({ stand, member }: Record<string, string>): Promise<string> {
+  const [club] = await reader().select().from(schema.clubs).where(eq(schema.clubs.slug, DEMO_SLUG));
+  const files = makeMemoryFiles();
+  keepFilesIn(files);
+  const [id, clubId] = ['pho_demo', club?.id ?? ''];
+  for (const size of ['full', 'thumb'] as const)
+    await files.put(photoKey(clubId, id, size), Uint8Array.of(1), 'image/jpeg');
+  const subject = { subjectType: 'stand' as const, subjectId: stand ?? '' };
+  const facts = { width: 4, height: 3, bytes: 1, byMemberId: member ?? '', createdAt: DEMO_NOW };
+  await write((tx) => tx.insert(schema.photos).values({ id, clubId, ...subject, ...facts }));
+  return id;
+}
+
 /** The demo club at a fixed hour, with a signed-in browser for each kind of visitor. */
 export async function openDemo(): Promise<DemoVisitors> {
   setClock(() => DEMO_NOW);
@@ -108,6 +124,8 @@ export async function openDemo(): Promise<DemoVisitors> {
   const lastWeek = { guestFrom: '2026-10-20', guestTo: '2026-11-03' };
   await changeMembership('hollis', { role: 'guest', ...lastWeek });
   await changeMembership('dell', { removedAt: DEMO_NOW - 86_400_000 });
+  const params = await realParams();
+  const photo = await addPhoto(params);
   const signedIn = async (key: string | null) => (key === null ? newBrowser() : signIn(key));
   return {
     slug: DEMO_SLUG,
@@ -123,6 +141,6 @@ export async function openDemo(): Promise<DemoVisitors> {
       stranger: await signedIn(VISITORS.stranger),
       'signed out': await signedIn(VISITORS['signed out']),
     },
-    params: await realParams(),
+    params: { ...params, photo },
   };
 }

@@ -1,9 +1,6 @@
 import { index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core';
 import { clubs } from './clubs';
 
-export const PHOTO_SUBJECTS = ['stand', 'feature', 'sit'] as const;
-export type PhotoSubject = (typeof PHOTO_SUBJECTS)[number];
-
 /** Photos of stands, features and sits; the picture itself lies in the files under the photo's id. */
 export const photos = sqliteTable(
   'photos',
@@ -12,7 +9,7 @@ export const photos = sqliteTable(
     clubId: text()
       .notNull()
       .references(() => clubs.id),
-    subjectType: text({ enum: PHOTO_SUBJECTS }).notNull(),
+    subjectType: text({ enum: ['stand', 'feature', 'sit'] }).notNull(),
     subjectId: text().notNull(),
     caption: text().notNull().default(''),
     width: integer().notNull(),

@@ -18,7 +18,7 @@ export function detectFormat(bytes: Uint8Array): FileFormat {
   }
   if (head.startsWith('{') || head.startsWith('[')) return 'geojson';
   if (!head.startsWith('<')) return 'csv';
-  if (/<(\w+:)?gpx[\s>]/i.test(head)) return 'gpx';
-  if (/<(\w+:)?kml[\s>]/i.test(head)) return 'kml';
+  if (/<(\w+:)?gpx[\s/>]/i.test(head)) return 'gpx';
+  if (/<(\w+:)?kml[\s/>]/i.test(head)) return 'kml';
   throw new FileProblem('This is XML, but neither GPX nor KML: export it again in one of those.');
 }

@@ -1,10 +1,13 @@
 import { LogFormView } from '@/features/logs/components/log-form';
 import { LogHistory } from '@/features/logs/components/log-history';
 import { readLog } from '@/features/logs/reads';
+import { PhotoSection } from '@/features/photos/components/photo-section';
+import { readPhotos } from '@/features/photos/read-photos';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { PageTitle, Section } from '@/ui/page-parts';
+import { captionPhotoAction, removePhotoAction } from '../../photos/actions';
 import { saveLogAction } from '../actions';
 
 export const metadata = { title: 'Log of a sit' };
@@ -48,6 +51,12 @@ export default clubPage('log.write', async ({ scope, params }) => {
         />
       )}
       {past}
+      <PhotoSection
+        club={slug}
+        view={await readPhotos(scope, { subject: 'sit', id: params.sit ?? '' }, now())}
+        caption={captionPhotoAction}
+        remove={removePhotoAction}
+      />
     </>
   );
 });

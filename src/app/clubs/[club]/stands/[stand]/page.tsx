@@ -6,11 +6,14 @@ import { readStand } from '@/features/ground/reads';
 import { namedSits } from '@/features/ground/refuse';
 import { STAND_KIND_WORDS } from '@/features/ground/words';
 import { SmallMap } from '@/features/map/components/small-map';
+import { PhotoSection } from '@/features/photos/components/photo-section';
+import { readPhotos } from '@/features/photos/read-photos';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { Notice } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
+import { captionPhotoAction, removePhotoAction } from '../../photos/actions';
 import { removeStandAction } from '../actions';
 import { removeApproachAction } from './approaches/actions';
 
@@ -86,6 +89,12 @@ export default clubPage('stands.read', async ({ scope, params }) => {
           <p className="max-w-prose whitespace-pre-line">{stand.notes}</p>
         </Section>
       )}
+      <PhotoSection
+        club={scope.club.slug}
+        view={await readPhotos(scope, { subject: 'stand', id: stand.id }, now())}
+        caption={captionPhotoAction}
+        remove={removePhotoAction}
+      />
     </>
   );
 });

@@ -8,10 +8,13 @@ import { formClubOf } from '@/features/ground/form-club';
 import { geometryText } from '@/features/ground/geometry-text';
 import { formatSize } from '@/features/ground/view';
 import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS } from '@/features/ground/words';
+import { PhotoSection } from '@/features/photos/components/photo-section';
+import { readPhotos } from '@/features/photos/read-photos';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { notFound } from '@/server/errors';
 import { DefinitionList, PageTitle } from '@/ui/page-parts';
+import { captionPhotoAction, removePhotoAction } from '../../../photos/actions';
 import { addFeatureAction, changeFeatureAction, removeFeatureAction } from '../../actions';
 
 export const metadata = { title: 'Feature' };
@@ -68,6 +71,12 @@ export default clubPage('features.read', async ({ scope, params }) => {
           ]}
         />
       )}
+      <PhotoSection
+        club={scope.club.slug}
+        view={await readPhotos(scope, { subject: 'feature', id: feature.id }, now())}
+        caption={captionPhotoAction}
+        remove={removePhotoAction}
+      />
     </>
   );
 });
