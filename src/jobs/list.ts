@@ -4,7 +4,6 @@ import { deleteOldRates } from '@/db/queries/rate-limits';
 import { remindUpkeep } from '@/features/chores/remind-upkeep';
 import { deleteOldImports } from '@/features/exchange/imports-data';
 import { remindLogs } from '@/features/logs/remind-logs';
-import { sendDueMail } from '@/features/mail/send-due-mail';
 import { deleteOldNoticeLinks } from '@/features/notices/choices-data';
 import { deleteOldOutlooks } from '@/features/notices/outlooks-data';
 import { remindEvening } from '@/features/notices/remind-evening';
@@ -12,42 +11,15 @@ import { sendWeekly } from '@/features/notices/send-weekly';
 import { tellRested } from '@/features/notices/tell-rested';
 import { tellRulesChanged } from '@/features/notices/tell-rules-changed';
 import { tellWindTurned } from '@/features/notices/tell-wind-turned';
-import { lapseUnsigned } from '@/features/outings/lapse-unsigned';
 import { deleteOldLinks } from '@/features/outings/links-data';
-import { tellOverdue } from '@/features/outings/tell-overdue';
 import { removeOrphans } from '@/features/photos/remove-orphans';
 import { refreshAllForecasts } from '@/features/weather/refresh-all';
-
-export interface Job {
-  name: string;
-  /** One run for each slot of this length, counted from the epoch. */
-  everyMs: number;
-  /** Says in a few words what it did. */
-  run: (now: number) => Promise<string>;
-}
-
-const SECOND = 1000;
-const MINUTE = 60 * SECOND;
-const DAY = 24 * 60 * MINUTE;
+import { DAY, type Job, MINUTE } from './job';
+import { BOARD_JOBS, MAIL_JOB } from './urgent-jobs';
 
 /** Run one after the other these go from the most urgent; what they queue is mailed in the same round. */
 export const JOBS: readonly Job[] = [
-  {
-    name: 'tell-overdue',
-    everyMs: MINUTE,
-    run: async (now) => {
-      const { told } = await tellOverdue(now);
-      return `${told} steps taken`;
-    },
-  },
-  {
-    name: 'lapse-unsigned',
-    everyMs: MINUTE,
-    run: async (now) => {
-      const { lapsed } = await lapseUnsigned(now);
-      return `${lapsed} lapsed`;
-    },
-  },
+  ...BOARD_JOBS,
   {
     name: 'remind-logs',
     everyMs: 60 * MINUTE,
@@ -104,14 +76,7 @@ export const JOBS: readonly Job[] = [
       return `${told} told`;
     },
   },
-  {
-    name: 'send-mail',
-    everyMs: 5 * SECOND,
-    run: async (now) => {
-      const { sent, failed } = await sendDueMail(now);
-      return `${sent} sent, ${failed} failed`;
-    },
-  },
+  MAIL_JOB,
   {
     name: 'refresh-forecasts',
     everyMs: 10 * MINUTE,
@@ -136,9 +101,9 @@ export const JOBS: readonly Job[] = [
         await deleteOldRates(tx, now - DAY);
         await deleteOldRuns(tx, now - 2 * DAY);
         await deleteOldLinks(tx, now - 30 * DAY);
-        await deleteOldImports(tx, now - 30 * DAY);
         await deleteOldNoticeLinks(tx, now - 365 * DAY);
         await deleteOldOutlooks(tx, now - 30 * DAY);
+        await deleteOldImports(tx, now - 30 * DAY);
       });
       return 'old counts, runs, links and unused imports removed';
     },
