@@ -53,6 +53,9 @@ export function geometryFor(saving: Saving, change: SetChange, name: string): Dr
     if (change.version === 0) throw new AppError('invalid', `${name} is drawn nowhere: draw it or remove it.`);
     return undefined;
   }
+  if (geometry.type === 'Polygon' && geometry.coordinates.some((ring) => ring.length < 4)) {
+    throw new AppError('invalid', `${name}: an area needs three corners or more.`);
+  }
   const read = parseGeometry(SHAPES[geometry.type] ?? 'area', JSON.stringify(geometry), saving.scope.club);
   if (!read.ok) throw new AppError('invalid', `${name}: ${read.message}`);
   return read.geometry;

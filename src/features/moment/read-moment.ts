@@ -7,6 +7,7 @@ import { sitWindow } from '@/core/windows';
 import { listBookedSits } from '@/features/ground/people-data';
 import { loadForecast } from '@/features/sits/load-forecast';
 import { loadScoring } from '@/features/sits/load-scoring';
+import type { ReadOptions } from '@/features/sits/reads';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import type { MomentAsk } from './ask-moment';
@@ -19,14 +20,19 @@ const CELL_M = 20;
 const MOST_M = 640;
 
 /** Everything the map lays over the ground for one half hour of one sit. */
-export async function readMoment(scope: ClubScope, ask: MomentAsk, now: number): Promise<MomentView> {
+export async function readMoment(
+  scope: ClubScope,
+  ask: MomentAsk,
+  now: number,
+  options: Pick<ReadOptions, 'forecast'> = {},
+): Promise<MomentView> {
   const { club } = scope;
   const window = sitWindow(ask.day, ask.window, club.rules, club);
   const { input, rows } = await loadScoring(scope, { day: ask.day, until: window.startAt, weapon: null }, now);
   const row = rows.stands.find((stand) => stand.id === ask.stand);
   if (!row) throw notFound();
   const stands = input.stands.filter((stand) => stand.id === row.id);
-  const { forecast } = await loadForecast(scope, now);
+  const { forecast } = options.forecast ?? (await loadForecast(scope, now));
   const ground = frameGround({ ...input, stands });
   const [stand] = ground.stands;
   if (!stand) throw notFound();

@@ -137,6 +137,7 @@ export function makeDrawTool(map: L.Map, inks: Inks, events: DrawEvents) {
   }
 
   function begin(): void {
+    map.getContainer().classList.add('m-drawing');
     if (!draw.enabled) draw.start();
     draw.clear();
     holes = [];
@@ -170,6 +171,7 @@ export function makeDrawTool(map: L.Map, inks: Inks, events: DrawEvents) {
     },
     stop(): void {
       running = null;
+      map.getContainer().classList.remove('m-drawing');
       if (draw.enabled) draw.stop();
     },
   };
