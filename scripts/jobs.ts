@@ -1,10 +1,11 @@
 import { setTimeout as wait } from 'node:timers/promises';
 import { closeDatabase } from '@/db/client';
+import { JOBS } from '@/jobs/list';
 import { runDueJobs } from '@/jobs/run-due-jobs';
 
 /** npm run jobs: once. npm run jobs -- --watch: until stopped. */
 async function once(): Promise<void> {
-  for (const { id, result, error } of await runDueJobs(Date.now())) console.log(`${id}  ${error ?? result}`);
+  for (const { id, result, error } of await runDueJobs(Date.now(), JOBS)) console.log(`${id}  ${error ?? result}`);
 }
 
 let going = process.argv.includes('--watch');

@@ -3,6 +3,7 @@ import { deleteOldRuns } from '@/db/queries/job-runs';
 import { deleteOldRates } from '@/db/queries/rate-limits';
 import { remindUpkeep } from '@/features/chores/remind-upkeep';
 import { deleteOldImports } from '@/features/exchange/imports-data';
+import { keepPredictions } from '@/features/learning/keep-predictions';
 import { remindLogs } from '@/features/logs/remind-logs';
 import { deleteOldNoticeLinks } from '@/features/notices/choices-data';
 import { deleteOldOutlooks } from '@/features/notices/outlooks-data';
@@ -20,6 +21,14 @@ import { BOARD_JOBS, MAIL_JOB } from './urgent-jobs';
 /** Run one after the other these go from the most urgent; what they queue is mailed in the same round. */
 export const JOBS: readonly Job[] = [
   ...BOARD_JOBS,
+  {
+    name: 'keep-predictions',
+    everyMs: 10 * MINUTE,
+    run: async (now) => {
+      const { kept } = await keepPredictions(now);
+      return `${kept} kept`;
+    },
+  },
   {
     name: 'remind-logs',
     everyMs: 60 * MINUTE,

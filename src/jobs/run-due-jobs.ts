@@ -1,7 +1,7 @@
 import { write } from '@/db/client';
 import { finishSlot, leaseSlot, slotIsTaken } from '@/db/queries/job-runs';
 import { log } from '@/server/log';
-import { JOBS, type Job } from './list';
+import type { Job } from './job';
 
 /** No run takes longer; of a process that was ended, another takes over after it. */
 const LEASE_MS = 5 * 60_000;
@@ -34,8 +34,8 @@ export async function runDueJob(job: Job, now: number): Promise<JobOutcome | nul
   }
 }
 
-/** Runs every job that is due, one after the other; what ran, with its result. One that cannot run stops no other. */
-export async function runDueJobs(now: number, jobs: readonly Job[] = JOBS): Promise<JobOutcome[]> {
+/** Runs every one of the jobs that is due, one after the other; what ran, with its result. One that cannot run stops no other. */
+export async function runDueJobs(now: number, jobs: readonly Job[]): Promise<JobOutcome[]> {
   const outcomes: JobOutcome[] = [];
   for (const job of jobs) {
     try {

@@ -1,5 +1,6 @@
 import { log } from '@/server/log';
-import { JOBS, type Job } from './list';
+import type { Job } from './job';
+import { JOBS } from './list';
 import { runDueJob } from './run-due-jobs';
 
 const TICK_MS = 2_000;

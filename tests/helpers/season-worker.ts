@@ -12,8 +12,8 @@ import { signInSitSchema, walkUpSchema } from '@/features/outings/outing-schema'
 import { signIn } from '@/features/outings/sign-in';
 import { signOut } from '@/features/outings/sign-out';
 import { walkUp } from '@/features/outings/walk-up';
-import { JOBS } from '@/jobs/list';
 import { runDueJobs } from '@/jobs/run-due-jobs';
+import { BOARD_JOBS, MAIL_JOB } from '@/jobs/urgent-jobs';
 import { setClock } from '@/server/clock';
 import { AppError } from '@/server/errors';
 import { type ClubScope, findScope } from '@/server/scope';
@@ -27,7 +27,7 @@ export interface SeasonOrder {
 
 const HOUR = 3_600_000;
 const order: SeasonOrder = JSON.parse(process.argv[2] ?? '{}');
-const jobs = JOBS.filter((job) => job.name !== 'refresh-forecasts');
+const jobs = [...BOARD_JOBS, MAIL_JOB];
 const tally: Record<string, number> = {};
 const say = (line: string) => process.stdout.write(`${line}\n`);
 

@@ -2,7 +2,7 @@ import { eq } from 'drizzle-orm';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { reader, write } from '@/db/client';
 import { jobRuns } from '@/db/schema';
-import type { Job } from '@/jobs/list';
+import type { Job } from '@/jobs/job';
 import { runDueJob, runDueJobs } from '@/jobs/run-due-jobs';
 
 const MINUTE = 60_000;
