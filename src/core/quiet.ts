@@ -8,6 +8,8 @@ export interface QuietFactors {
   walkOut: number;
   /** 1 or more. */
   pressurePower: number;
+  /** Share (-1 to 1) the club's own log adds for the stand, once an admin has applied it; left out: none. */
+  learned?: number;
 }
 
 /**
@@ -21,5 +23,5 @@ export function arcFactor(share: number | null, s: ScoreSettings): number {
 /** Quiet, 0-1. */
 export function quietOf(f: QuietFactors): number {
   const q = (f.seat * f.arc * f.walkIn * f.walkOut) ** f.pressurePower;
-  return Math.min(1, Math.max(0, q));
+  return Math.min(1, Math.max(0, q + (f.learned ?? 0)));
 }

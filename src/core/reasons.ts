@@ -80,6 +80,11 @@ function quietDrafts(f: Factors, x: ReasonFacts): Draft[] {
     const text = `Deer near here were disturbed lately (${x.recentEvents} ${x.recentEvents === 1 ? 'time' : 'times'}): they are alerted sooner`;
     add('pressure_quiet', text, 'study', swap({ pressurePower: 1 }));
   }
+  if (f.quiet.learned) {
+    const way = f.quiet.learned > 0 ? 'quieter' : 'louder';
+    const points = Math.abs(Math.round(f.quiet.learned * 100));
+    add('learned', `Sits here have gone ${way} than the sums say: ${points} points`, 'club log', swap({ learned: 0 }));
+  }
   return drafts;
 }
 

@@ -87,6 +87,8 @@ export interface ScoredStand {
   drainBearingDeg: number | null;
   /** Slope at the stand in percent; null: unknown (the core assumes a gentle hill when a drain bearing is given). */
   slopePercent: number | null;
+  /** Points of quiet (0-100) added by what the club's log has taught; left out: none. */
+  quietShift?: number;
 }
 
 /** Share (0-1) of deer that use a kind of place at each time of day; see whereabouts.ts. */

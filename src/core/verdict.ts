@@ -81,6 +81,7 @@ export function sumSit(frame: SitFrame, stand: StandFrame): SitSums {
         walkIn: unknownWay,
         walkOut: unknownWay,
         pressurePower: pressureOnQuiet(pressure, settings.pressure),
+        ...(stand.stand.quietShift ? { learned: stand.stand.quietShift / 100 } : {}),
       },
       promise: {
         ...promiseFactors(steps, moves, suitability, stand.inRange, glare.byStep, settings.promise),

@@ -161,6 +161,11 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
     reopenFindingAction: 'features.write',
   },
   'clubs/[club]/season/setup/page.tsx': { default: 'features.read' },
+  'clubs/[club]/season/learning/actions.ts': {
+    applyAdjustmentAction: 'rules.write',
+    undoAdjustmentAction: 'rules.write',
+  },
+  'clubs/[club]/season/learning/page.tsx': { default: 'log.read_all' },
   'clubs/[club]/season/sightings/page.tsx': { default: 'log.read' },
   'clubs/[club]/sit/actions.ts': {
     bookSitAction: 'sits.book',

@@ -1,6 +1,6 @@
 import { and, eq, gte, inArray, isNull, lte, sql } from 'drizzle-orm';
 import { type ReadFrom, reader } from '@/db/client';
-import { sitLogs, sits, stands, visits } from '@/db/schema';
+import { sitLogs, sits, standAdjustments, stands, visits } from '@/db/schema';
 import type { ClubScope } from '@/server/scope';
 
 /** Sits that stand between two instants, with the place of their stand and the deer bumped where a log says so. */
@@ -112,3 +112,12 @@ export async function findOwnSit(
   return row ?? null;
 }
 export type OwnSitRow = NonNullable<Awaited<ReturnType<typeof findOwnSit>>>;
+
+/** Points of quiet that hold for a stand by what the club's log has taught. */
+export async function listQuietShifts(scope: ClubScope, from: ReadFrom = reader()): Promise<Map<string, number>> {
+  const rows = await from
+    .select({ standId: standAdjustments.standId, points: standAdjustments.points })
+    .from(standAdjustments)
+    .where(and(eq(standAdjustments.clubId, scope.club.id), isNull(standAdjustments.endedAt)));
+  return new Map(rows.map(({ standId, points }) => [standId, points]));
+}

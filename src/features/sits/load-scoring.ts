@@ -10,7 +10,7 @@ import { type GroundRows, loadGround } from '@/features/ground/data';
 import { featuresInYear } from '@/features/ground/features-in-year';
 import { groundToCore } from '@/features/ground/to-core';
 import type { ClubScope } from '@/server/scope';
-import { listSitEvents, listVisitEvents, sumSightings } from './data';
+import { listQuietShifts, listSitEvents, listVisitEvents, sumSightings } from './data';
 import { hideFeatures } from './hide-features';
 
 const DAY_MS = 86_400_000;
@@ -72,11 +72,15 @@ export async function loadScoring(
   const rows = await loadGround(scope, from);
   const features = featuresInYear(rows.features, cropYearOf(ask.day));
   const ground = groundToCore(club, { ...rows, features });
+  const shifts = await listQuietShifts(scope, from);
   return {
     rows,
     input: {
       place: { lat: club.lat, lon: club.lon, zone: club.zone },
-      stands: ground.stands,
+      stands: ground.stands.map((stand) => {
+        const quietShift = shifts.get(stand.id);
+        return quietShift === undefined ? stand : { ...stand, quietShift };
+      }),
       approaches: ground.approaches,
       features: scope.can('features.read') ? ground.features : hideFeatures(ground.features),
       events: await loadEvents(scope, ask.until, now, from),

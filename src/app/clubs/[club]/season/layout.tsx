@@ -10,6 +10,7 @@ const PAGES: { path: string; label: string; needs: Permission }[] = [
   { path: '/setup', label: 'Set-up check', needs: 'features.read' },
   { path: '/coverage', label: 'Wind coverage', needs: 'features.read' },
   { path: '/movement', label: 'Movement', needs: 'features.read' },
+  { path: '/learning', label: 'Learning', needs: 'log.read_all' },
 ];
 
 interface Props {
