@@ -8,6 +8,7 @@ import { buildImports } from './build-imports';
 import { buildLand } from './build-land';
 import { buildLogs } from './build-logs';
 import { buildContacts, buildOutings } from './build-outings';
+import { buildPredictions } from './build-predictions';
 import { buildUpkeep } from './build-upkeep';
 import { buildVisits } from './build-visits';
 import { planComingSits } from './coming-sits';
@@ -55,6 +56,7 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
     outings: buildOutings(club, ground, sits, now),
     safetyContacts: buildContacts(club),
     sitLogs,
+    sitPredictions: buildPredictions({ today, dice: makeDice(`predictions ${today}`) }, sitLogs, sits),
     sitLogVersions,
     harvests,
     visits: buildVisits(day, club, ground),

@@ -29,6 +29,7 @@ export async function insertDemo(tx: Tx, rows: DemoRows): Promise<void> {
   await insertAll(tx, schema.outings, rows.outings);
   await insertAll(tx, schema.safetyContacts, rows.safetyContacts);
   await insertAll(tx, schema.sitLogs, rows.sitLogs);
+  await insertAll(tx, schema.sitPredictions, rows.sitPredictions);
   await insertAll(tx, schema.sitLogVersions, rows.sitLogVersions);
   await insertAll(tx, schema.harvests, rows.harvests);
   await insertAll(tx, schema.visits, rows.visits);

@@ -17,6 +17,7 @@ export interface DemoRows {
   outings: (typeof schema.outings.$inferInsert)[];
   safetyContacts: (typeof schema.safetyContacts.$inferInsert)[];
   sitLogs: (typeof schema.sitLogs.$inferInsert)[];
+  sitPredictions: (typeof schema.sitPredictions.$inferInsert)[];
   sitLogVersions: (typeof schema.sitLogVersions.$inferInsert)[];
   harvests: (typeof schema.harvests.$inferInsert)[];
   visits: (typeof schema.visits.$inferInsert)[];
