@@ -56,6 +56,7 @@ const tables = {
   sits: schema.sits,
   claims: schema.claims,
   sitLogs: schema.sitLogs,
+  sitPredictions: schema.sitPredictions,
   sitLogVersions: schema.sitLogVersions,
   harvests: schema.harvests,
   outings: schema.outings,
