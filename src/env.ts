@@ -69,6 +69,7 @@ export const environmentSchema = z.object({
   IMAGERY_URL: tiles,
   IMAGERY_ATTRIBUTION: optional,
   DEV_PAGES: flag(false),
+  DEMO_SIGN_IN: flag(false),
   RUN_JOBS: flag(true),
   LOG_LEVEL: optional,
 });
@@ -89,6 +90,9 @@ export function readEnvironment(source: Record<string, string | undefined>) {
     throw new EnvironmentError(`These settings cannot be used:\n${lines.join('\n')}\nSee .env.example.`);
   }
   const set = parsed.data;
+  if (set.FILES_BUCKET && !(set.FILES_ACCESS_KEY && set.FILES_SECRET_KEY)) {
+    throw new EnvironmentError('FILES_BUCKET needs FILES_ACCESS_KEY and FILES_SECRET_KEY as well.\nSee .env.example.');
+  }
   const production = set.NODE_ENV === 'production';
   return {
     production,
@@ -121,6 +125,8 @@ export function readEnvironment(source: Record<string, string | undefined>) {
     imagery: set.IMAGERY_URL ? { url: set.IMAGERY_URL, attribution: set.IMAGERY_ATTRIBUTION ?? '' } : null,
     /** Pages under /dev: the kept mail and the parts of the look. */
     devPages: set.DEV_PAGES || !production,
+    /** The first page lets anyone into the demo club as one of its members. */
+    demoSignIn: set.DEMO_SIGN_IN,
     runJobs: set.RUN_JOBS,
     logLevel: set.LOG_LEVEL ?? (set.NODE_ENV === 'test' ? 'silent' : 'info'),
   };

@@ -154,6 +154,11 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   'clubs/[club]/season/harvest/page.tsx': { default: 'harvest.read' },
   'clubs/[club]/season/page.tsx': { default: 'log.read' },
   'clubs/[club]/season/coverage/page.tsx': { default: 'features.read' },
+  'clubs/[club]/season/learning/actions.ts': {
+    applyAdjustmentAction: 'rules.write',
+    undoAdjustmentAction: 'rules.write',
+  },
+  'clubs/[club]/season/learning/page.tsx': { default: 'log.read_all' },
   'clubs/[club]/season/movement/page.tsx': { default: 'features.read' },
   'clubs/[club]/season/setup/actions.ts': {
     acceptFindingAction: 'features.write',
@@ -161,11 +166,6 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
     reopenFindingAction: 'features.write',
   },
   'clubs/[club]/season/setup/page.tsx': { default: 'features.read' },
-  'clubs/[club]/season/learning/actions.ts': {
-    applyAdjustmentAction: 'rules.write',
-    undoAdjustmentAction: 'rules.write',
-  },
-  'clubs/[club]/season/learning/page.tsx': { default: 'log.read_all' },
   'clubs/[club]/season/sightings/page.tsx': { default: 'log.read' },
   'clubs/[club]/sit/actions.ts': {
     bookSitAction: 'sits.book',

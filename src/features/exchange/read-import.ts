@@ -29,9 +29,14 @@ export function mapClubOf({ club }: ClubScope): MapClub {
   return { slug, name, lat, lon, units };
 }
 
-function looksSwapped(row: ImportRow, club: MapClub): boolean {
-  const fitting = (swapped: boolean) => row.things.filter((thing) => checkRow(thing, swapped, club).ok).length;
-  return fitting(!row.swapped) > fitting(row.swapped);
+/** Whether the other way round more rows would lie on the club's ground; only those that do not now are tried. */
+function looksSwapped(row: ImportRow, rows: ReviewRow[], club: MapClub): boolean {
+  const off = rows.filter(({ problem }) => problem !== null);
+  const better = off.filter(({ row: number }) => {
+    const thing = row.things[number - 1];
+    return thing !== undefined && checkRow(thing, !row.swapped, club).ok;
+  });
+  return better.length > rows.length - off.length;
 }
 
 /** One file as it was read, with what would become of every row of it now. */
@@ -40,6 +45,7 @@ export async function readImport(scope: ClubScope, id: string): Promise<ImportVi
   if (!row) throw notFound();
   const club = mapClubOf(scope);
   const open = row.state === 'read';
+  const rows = open ? reviewThings(row.things, row.swapped, { club, things: await mapThings(scope) }) : [];
   return {
     id: row.id,
     version: row.version,
@@ -47,8 +53,8 @@ export async function readImport(scope: ClubScope, id: string): Promise<ImportVi
     state: row.state,
     remarks: row.remarks,
     swapped: row.swapped,
-    looksSwapped: open && looksSwapped(row, club),
-    rows: open ? reviewThings(row.things, row.swapped, { club, things: await mapThings(scope) }) : [],
+    looksSwapped: open && looksSwapped(row, rows, club),
+    rows,
     made: row.made,
   };
 }
