@@ -51,7 +51,7 @@ describe('the Sit screen', () => {
     const known = page.getByRole('main').getByRole('heading', { level: 3 });
     expect(await known.count()).toBeGreaterThan(10);
     expect(await page.getByRole('heading', { level: 1 }).textContent()).toBe(`${AHEAD}, morning`);
-    await page.getByLabel('Window').selectOption('evening');
+    await page.getByLabel('Window', { exact: true }).selectOption('evening');
     await page.getByRole('button', { name: 'Show' }).click();
     await page.getByRole('heading', { level: 1, name: `${AHEAD}, evening` }).waitFor();
     await page.context().close();
@@ -98,16 +98,16 @@ describe('the Sit screen', () => {
     const { page } = desk;
     await page.goto(`${SIT}?day=${DAY}&window=morning`);
     await page.getByRole('heading', { level: 1, name: `${AHEAD}, morning` }).waitFor();
-    await page.getByLabel('Weapon').selectOption('bow');
+    await page.getByLabel('Weapon', { exact: true }).selectOption('bow');
     await page.waitForURL(/weapon=bow/);
     await page.goto(SIT);
-    expect(await page.getByLabel('Weapon').inputValue()).toBe('bow');
+    expect(await page.getByLabel('Weapon', { exact: true }).inputValue()).toBe('bow');
     await page.getByRole('link', { name: `Back to ${AHEAD}, morning` }).click();
     await page.waitForURL(new RegExp(`day=${DAY}`));
-    await page.getByLabel('Weapon').selectOption('');
+    await page.getByLabel('Weapon', { exact: true }).selectOption('');
     await page.waitForURL((url) => !url.search.includes('weapon'));
     await page.goto(SIT);
-    expect(await page.getByLabel('Weapon').inputValue()).toBe('');
+    expect(await page.getByLabel('Weapon', { exact: true }).inputValue()).toBe('');
   });
 
   it('names the zone to a reader whose clock differs, and to no other', async () => {

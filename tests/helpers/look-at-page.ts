@@ -22,14 +22,18 @@ async function inLight(page: Page, light: 'day' | 'dark' | 'dim'): Promise<void>
   }, light);
 }
 
-/** Everything axe and a ruler find wrong with the page as it stands, in the three lights and at three widths. */
-export async function lookAtPage(page: Page): Promise<string[]> {
+/**
+ * Everything axe and a ruler find wrong with the page as it stands, in the three lights and at three widths. `brief`: on a
+ * phone only, for people who see less of a page that another was shown in full.
+ */
+export async function lookAtPage(page: Page, brief: boolean): Promise<string[]> {
   const found: string[] = [];
   const note = (where: string, texts: string[]) => found.push(...texts.map((text) => `${where}: ${text}`));
   for (const size of [PHONE, DESKTOP]) {
     await page.setViewportSize(size);
     const wide = await overflow(page);
     if (wide) note(`${size.width} px`, [wide]);
+    if (brief && size !== PHONE) continue;
     await inLight(page, 'day');
     note(`${size.width} px, day`, texts(await allAxeFindings(page)));
     // Light changes colours alone: one rule looks at them.
