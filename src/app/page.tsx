@@ -1,9 +1,12 @@
 import { redirect } from 'next/navigation';
+import { env } from '@/env';
 import { listMyClubs } from '@/features/accounts/reads';
+import { TryDemoButton } from '@/features/demo/components/try-demo-button';
 import { now } from '@/server/clock';
 import { publicPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { PageTitle, Section } from '@/ui/page-parts';
+import { demoSignInAction } from './actions';
 import { PlainFrame } from './plain-frame';
 
 export default publicPage(async ({ user }) => {
@@ -22,6 +25,7 @@ export default publicPage(async ({ user }) => {
           Make an account
         </ButtonLink>
         <ButtonLink href="/sign-in">Sign in</ButtonLink>
+        {env.demoSignIn && <TryDemoButton action={demoSignInAction} />}
       </div>
       <Section title="A quiet stand first" heading="margin" className="mt-10">
         <p className="max-w-prose">

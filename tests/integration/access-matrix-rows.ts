@@ -29,6 +29,7 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   '(account)/verify/[token]/page.tsx': { default: 'anyone' },
   '(account)/verify/actions.ts': { verifyAction: 'anyone', resendAction: 'account' },
   '(account)/verify/page.tsx': { default: 'account' },
+  'actions.ts': { demoSignInAction: 'anyone' },
   'api/clubs/[club]/audit/route.ts': { GET: 'audit.read' },
   'api/clubs/[club]/board/route.ts': { GET: 'board.read' },
   'api/clubs/[club]/board/walk-up/route.ts': { GET: 'sits.book' },
@@ -107,6 +108,11 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   'clubs/[club]/club/rules/edit/actions.ts': { saveRulesAction: 'rules.write' },
   'clubs/[club]/club/rules/edit/page.tsx': { default: 'rules.write' },
   'clubs/[club]/club/rules/page.tsx': { default: 'club.read' },
+  'clubs/[club]/first-steps/actions.ts': {
+    laySamplesAction: 'rules.write',
+    removeSamplesAction: 'rules.write',
+    hideFirstStepsAction: 'rules.write',
+  },
   'clubs/[club]/ground/actions.ts': {
     addFeatureAction: 'features.write',
     changeFeatureAction: 'features.write',

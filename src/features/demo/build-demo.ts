@@ -12,7 +12,7 @@ import { buildPredictions } from './build-predictions';
 import { buildUpkeep } from './build-upkeep';
 import { buildVisits } from './build-visits';
 import { planComingSits } from './coming-sits';
-import { DEMO_PLACE } from './demo-place';
+import { DEMO_PLACE, DEMO_SLUG } from './demo-place';
 import type { DemoRows } from './demo-rows';
 import { demoRules } from './demo-rules';
 import { makeDice } from './dice';
@@ -21,7 +21,7 @@ import { MEMBERS } from './people';
 import { buildSecondClub } from './second-club';
 import { claimsOf, makePlanner } from './sit-planner';
 
-export const DEMO_SLUG = 'tansy-fork';
+export { DEMO_SLUG };
 
 /** The demo as rows. The same day gives the same rows, whatever the hour; only who is on the ground goes by the hour. */
 export function buildDemo(now: number, passwordHash: string): DemoRows {

@@ -49,7 +49,12 @@ export async function hasUsersOrClubs(from: Reader | Tx): Promise<boolean> {
 /** The roles of a club's members by their address; empty when there is no such club. */
 export async function listSignIns(from: Reader | Tx, slug: string) {
   return from
-    .select({ email: schema.users.email, name: schema.users.name, role: schema.memberships.role })
+    .select({
+      userId: schema.users.id,
+      email: schema.users.email,
+      name: schema.users.name,
+      role: schema.memberships.role,
+    })
     .from(schema.memberships)
     .innerJoin(schema.users, eq(schema.users.id, schema.memberships.userId))
     .innerJoin(schema.clubs, eq(schema.clubs.id, schema.memberships.clubId))

@@ -24,3 +24,6 @@ export function positionOf(spot: Spot, centre: LatLon = DEMO_PLACE): Position {
   const { lat, lon } = latLonOf(spot, centre);
   return [lon, lat];
 }
+
+/** Of the demo club's address. */
+export const DEMO_SLUG = 'tansy-fork';

@@ -1,0 +1,25 @@
+import { write } from '@/db/client';
+import { audit } from '@/server/audit';
+import type { ClubScope } from '@/server/scope';
+import { insertHidden, stepsAreHidden } from './data';
+
+/** Puts the first steps away for the whole club. */
+export async function hideFirstSteps(scope: ClubScope, now: number): Promise<{ hidden: true }> {
+  return write(async (tx) => {
+    if (await stepsAreHidden(scope, tx)) return { hidden: true };
+    await insertHidden(scope, tx, now);
+    await audit(
+      tx,
+      {
+        clubId: scope.club.id,
+        actor: scope.actor,
+        action: 'club.first_steps_hidden',
+        subjectType: 'club',
+        subjectId: scope.club.id,
+        summary: `${scope.member.name} put the first steps away.`,
+      },
+      now,
+    );
+    return { hidden: true };
+  });
+}
