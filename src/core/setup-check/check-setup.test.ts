@@ -17,7 +17,7 @@ import type { ScoredApproach, ScoredFeature, ScoredStand } from '../types';
 import { checkSetup } from './check-setup';
 import { DEFAULT_SETUP } from './setup-settings';
 import type { Finding, SetupInput } from './setup-types';
-import { weighFinding } from './weigh-finding';
+import { makeWeigher } from './weigh-finding';
 
 const DAYS = ['2023-09-15', '2023-10-15', '2023-11-15', '2023-12-15', '2024-01-15'];
 const WINDOWS = DAYS.flatMap((day) => [windowOf('morning', day), windowOf('evening', day)]);
@@ -196,22 +196,29 @@ describe('other faults', () => {
 describe('weighing a finding by the core', () => {
   const { stands, features, approaches } = PLANTED;
   const ground = makeInput({ stands, features, approaches });
+  const weigh = makeWeigher(ground, WINDOWS, null);
   const find = (code: string) => checkSetup(setup(PLANTED)).find((f) => f.code === code) as Finding;
 
   it('gains quiet by taking away what scent reaches, on a wind of the stand', () => {
-    const effect = weighFinding(find('unhuntable'), ground, WINDOWS, null);
+    const effect = weigh(find('unhuntable'));
     expect(effect?.windFromDeg).toBe(180);
     expect(effect?.measure).toBe('quiet');
     expect(effect && effect.after - effect.before).toBeGreaterThan(1);
   });
 
   it('gains promise by turning a seat from the sun', () => {
-    const effect = weighFinding(find('seat_sun'), ground, WINDOWS, null);
+    const effect = weigh(find('seat_sun'));
     expect(effect?.measure).toBe('promise');
     expect(effect && effect.after - effect.before).toBeGreaterThan(0.5);
   });
 
+  it('remembers a stand as it is without changing what comes out', () => {
+    const [first, again] = [weigh(find('unhuntable')), weigh(find('unhuntable'))];
+    expect(again).toEqual(first);
+    expect(makeWeigher(ground, WINDOWS, null)(find('unhuntable'))).toEqual(first);
+  });
+
   it('has nothing to hold a way against where it is the only one', () => {
-    expect(weighFinding(find('approach_crosses'), ground, WINDOWS, null)).toBeNull();
+    expect(weigh(find('approach_crosses'))).toBeNull();
   });
 });

@@ -99,7 +99,7 @@ export function findSeatSun(input: SetupInput): Finding[] {
           distanceM: null,
           bearingDeg: facing,
           text: `${stand.name} faces the low sun on clear ${worst.name}s, ${when}`,
-          why: `The sitter is blinded and lit up for as long as ${worst.spell.most} minutes of a ${worst.name}.${turned}`,
+          why: `The sitter is blinded and lit up for as long as ${worst.spell.most} minutes of ${worst.name === 'evening' ? 'an evening' : 'a morning'}.${turned}`,
           acts: [
             ...(better === null
               ? []

@@ -51,7 +51,7 @@ export const DEFAULT_SETUP: SetupSettings = {
   offLinesM: ydToM(100),
   bedsWithinM: ydToM(200),
   upwindShare: 0.5,
-  sunMinutes: 30,
+  sunMinutes: 45,
   cameraTurnDeg: 30,
   cameraSunDeg: 25,
 };

@@ -65,32 +65,35 @@ function judge(ground: GroundInput, window: SitWindow, windFromDeg: number): Ver
 /**
  * What mending a finding gains on the commonest wind its stand is hunted on, by the scoring core: quiet (0-100), or promise where
  * the seat is turned. A fault of a way is held against the stand's other ways. null: nothing to compare with. Events and
- * sightings of `ground` count on both sides alike.
+ * sightings of `ground` count on both sides alike. A weigher remembers each stand as it is, for the next of its findings.
  */
-export function weighFinding(
-  finding: Pick<Finding, 'trial'>,
-  ground: GroundInput,
-  windows: SitWindow[],
-  winds: UsualWinds | null,
-): SetupEffect | null {
-  const { trial } = finding;
-  const stand = ground.stands.find((s) => s.id === trial?.standId);
-  if (!trial || !stand) return null;
-  const mended = changed(ground, trial);
-  const sit = usualSit(stand, winds, trial.window);
-  const named = windows.filter((w) => w.window === sit.window);
-  const window = named[Math.floor(named.length / 2)];
-  if (!mended || !window) return null;
-  const only = { ...ground, stands: [stand] };
-  const asItIs =
-    trial.change === 'without_approach'
-      ? { ...only, approaches: ground.approaches.filter((a) => a.id === trial.approachId) }
-      : only;
-  const before = judge(asItIs, window, sit.windFromDeg);
-  const after = judge(mended, window, sit.windFromDeg);
-  if (!before || !after) return null;
-  const measure = trial.change === 'facing' ? 'promise' : 'quiet';
-  return { ...sit, measure, before: before[measure], after: after[measure] };
+export function makeWeigher(ground: GroundInput, windows: SitWindow[], winds: UsualWinds | null) {
+  const known = new Map<string, Verdict | null>();
+  return ({ trial }: Pick<Finding, 'trial'>): SetupEffect | null => {
+    const stand = ground.stands.find((s) => s.id === trial?.standId);
+    if (!trial || !stand) return null;
+    const mended = changed(ground, trial);
+    const sit = usualSit(stand, winds, trial.window);
+    const window = middleOf(windows, sit.window);
+    if (!mended || !window) return null;
+    const byWay = trial.change === 'without_approach' ? trial.approachId : null;
+    const key = JSON.stringify([stand.id, sit, byWay]);
+    let before = known.get(key);
+    if (before === undefined) {
+      const approaches = byWay === null ? ground.approaches : ground.approaches.filter((a) => a.id === byWay);
+      before = judge({ ...ground, stands: [stand], approaches }, window, sit.windFromDeg);
+      known.set(key, before);
+    }
+    const after = judge(mended, window, sit.windFromDeg);
+    if (!before || !after) return null;
+    const measure = trial.change === 'facing' ? 'promise' : 'quiet';
+    return { ...sit, measure, before: before[measure], after: after[measure] };
+  };
+}
+
+function middleOf(windows: SitWindow[], name: WindowName): SitWindow | undefined {
+  const named = windows.filter((w) => w.window === name);
+  return named[Math.floor(named.length / 2)];
 }
 
 /** A stand on the commonest wind it is hunted on, by the scoring core; null: no window to judge it in. */
@@ -101,8 +104,7 @@ export function judgeUsual(
   winds: UsualWinds | null,
 ): { window: WindowName; windFromDeg: number; quiet: number; promise: number } | null {
   const sit = usualSit(stand, winds, null);
-  const named = windows.filter((w) => w.window === sit.window);
-  const window = named[Math.floor(named.length / 2)];
+  const window = middleOf(windows, sit.window);
   const verdict = window && judge({ ...ground, stands: [stand] }, window, sit.windFromDeg);
   return verdict ? { ...sit, quiet: verdict.quiet, promise: verdict.promise } : null;
 }

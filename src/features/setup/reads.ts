@@ -3,7 +3,7 @@ import { fromLocal, type LatLon } from '@/core/geometry';
 import { sectorName } from '@/core/sectors';
 import { checkSetup } from '@/core/setup-check/check-setup';
 import type { Finding, FindingCode, SetupEffect } from '@/core/setup-check/setup-types';
-import { weighFinding } from '@/core/setup-check/weigh-finding';
+import { makeWeigher } from '@/core/setup-check/weigh-finding';
 import type { ClubScope } from '@/server/scope';
 import { type LoadedSetup, loadSetup } from './load-setup';
 import { listSetupAnswers } from './setup-data';
@@ -16,6 +16,8 @@ export interface FindingView {
   why: string;
   /** "Without it, quiet 58 -> 71 on NW mornings". */
   effect: string | null;
+  /** Points it gains; 0: none, or not known. */
+  gain: number;
   evidence: string;
   acts: string[];
   stand: { id: string; name: string } | null;
@@ -39,7 +41,7 @@ const CHANGED = {
 
 export function effectText(finding: Pick<Finding, 'trial'>, effect: SetupEffect): string | null {
   const [before, after] = [Math.round(effect.before), Math.round(effect.after)];
-  if (!finding.trial || before === after) return null;
+  if (!finding.trial || after <= before) return null;
   const when = `${sectorName(effect.windFromDeg)} ${effect.window}s`;
   return `${CHANGED[finding.trial.change]}, ${effect.measure} ${before} → ${after} on ${when}`;
 }
@@ -49,8 +51,9 @@ export async function readSetup(scope: ClubScope, now: number): Promise<SetupVie
   const loaded = await loadSetup(scope, now);
   const answers = await listSetupAnswers(scope);
   const { club } = scope;
+  const weigh = makeWeigher(loaded.ground, loaded.input.windows, loaded.input.winds);
   const views = checkSetup(loaded.input).map((finding): FindingView => {
-    const effect = weighFinding(finding, loaded.ground, loaded.input.windows, loaded.input.winds);
+    const effect = weigh(finding);
     const row = answers.get(finding.key);
     const answer = row && row.print === finding.print ? row : null;
     return {
@@ -60,6 +63,7 @@ export async function readSetup(scope: ClubScope, now: number): Promise<SetupVie
       text: finding.text,
       why: finding.why,
       effect: effect && effectText(finding, effect),
+      gain: effect ? Math.max(0, Math.round(effect.after) - Math.round(effect.before)) : 0,
       evidence: finding.evidence,
       acts: finding.acts.map(({ text }) => text),
       stand: finding.stand,
@@ -74,6 +78,8 @@ export async function readSetup(scope: ClubScope, now: number): Promise<SetupVie
       },
     };
   });
+  // What costs most stands first; what costs alike keeps the order of the rules.
+  views.sort((a, b) => b.gain - a.gain);
   return {
     open: views.filter((view) => !view.answer),
     answered: views.filter((view) => view.answer),

@@ -1,19 +1,23 @@
+import { chooseFindings } from '@/features/setup/choose-findings';
 import { AnswerFinding, ReopenFinding } from '@/features/setup/components/answer-dialogs';
 import { FindingCard } from '@/features/setup/components/finding-card';
 import { FindingsMap } from '@/features/setup/components/findings-map';
 import { readSetup } from '@/features/setup/reads';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
-import { ButtonLink, TextLink } from '@/ui/button';
+import { Button, ButtonLink, TextLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
+import { Select } from '@/ui/text-inputs';
 import { acceptFindingAction, dismissFindingAction, reopenFindingAction } from './actions';
 
 export const metadata = { title: 'Set-up check' };
 
-export default clubPage('features.read', async ({ scope }) => {
+export default clubPage('features.read', async ({ scope, search }) => {
   const { slug, name, rules } = scope.club;
-  const { open, answered, windsFrom, counts } = await readSetup(scope, now());
+  const { open: all, answered, windsFrom, counts } = await readSetup(scope, now());
+  const chosen = chooseFindings(all, search);
+  const { open } = chosen;
   const may = scope.can('features.write');
   const common = { club: slug, mayOpenChores: scope.can('chores.read') };
   const state = rules.stateHarvestRule;
@@ -45,13 +49,19 @@ export default clubPage('features.read', async ({ scope }) => {
               : ''
           }`}
         >
-          {open.length === 0 ? (
+          {all.length === 0 ? (
             <EmptyState title="Nothing found">
               Every attraction is in shot on some wind, the walks keep clear, and nobody looks into the sun.
             </EmptyState>
           ) : (
             <>
+              <form method="get" className="mb-4 flex flex-wrap items-end gap-4">
+                <Select label="Stand" name="stand" defaultValue={chosen.stand} options={chosen.stands} />
+                <Select label="What" name="what" defaultValue={chosen.what} options={chosen.kinds} />
+                <Button type="submit">Show</Button>
+              </form>
               <FindingsMap club={slug} findings={open.map(({ at }) => ({ at }))} />
+              {open.length === 0 && <p className="mt-4 text-ink-soft">Nothing of this kind at this stand.</p>}
               <ol className="mt-4">
                 {open.map((finding, index) => (
                   <FindingCard key={finding.key} {...common} finding={finding} number={index + 1}>
