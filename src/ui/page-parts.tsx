@@ -19,7 +19,7 @@ export function PageTitle({ title, over, lead, actions }: PageTitleProps) {
         <h1 className="font-serif text-2xl sm:text-3xl">{title}</h1>
         {lead && <p className="mt-1.5 max-w-prose text-ink-soft">{lead}</p>}
       </div>
-      {actions && <div className="flex flex-wrap items-center gap-2">{actions}</div>}
+      {actions && <div className="flex flex-wrap items-center gap-2 print:hidden">{actions}</div>}
     </header>
   );
 }

@@ -71,10 +71,10 @@ function Group({ label, rows, selectedId, onSelect }: GroupProps) {
   if (rows.length === 0) return null;
   const shown = all ? rows : rows.slice(0, FIRST);
   return (
-    <section aria-label={label} className="mt-4">
-      <h3 className="small-caps border-rule border-b text-ink-soft">
+    <div className="mt-4">
+      <h2 className="small-caps border-rule border-b text-base text-ink-soft">
         {label} <span className="text-sm">({rows.length})</span>
-      </h3>
+      </h2>
       <ul>
         {shown.map(({ thing, name, brief }) => (
           <li key={thing.id} className="border-rule border-b">
@@ -99,6 +99,6 @@ function Group({ label, rows, selectedId, onSelect }: GroupProps) {
           Show all {rows.length}
         </Button>
       )}
-    </section>
+    </div>
   );
 }

@@ -57,9 +57,9 @@ export function ThingCard(props: ThingCardProps) {
   return (
     <section aria-label={`Chosen: ${nameOf(thing)}`} className="border-clay border-l-4 bg-panel p-3">
       <div className="flex items-start justify-between gap-2">
-        <h3 className="font-serif text-lg leading-snug">
+        <h2 className="font-serif text-lg leading-snug">
           {nameOf(thing)} <span className="block text-ink-soft text-sm">{KIND_WORDS[thing.kind]}</span>
-        </h3>
+        </h2>
         <Button look="quiet" onClick={onClose} aria-label="Let go of it">
           <X aria-hidden="true" className="size-5" />
         </Button>

@@ -128,7 +128,10 @@ function RankedList({ view, ask, openId, onToggle, onBook, addStands }: RankedLi
     );
   }
   return (
-    <section aria-label="Stands by sit score" className="mt-4 sm:mt-6">
+    <section aria-labelledby="ranked" className="mt-4 sm:mt-6">
+      <h2 id="ranked" className="sr-only">
+        Stands by sit score
+      </h2>
       {view.open.length === 0 ? (
         <EmptyState title="No stand is open in this window">
           Each one below names the rule that stops it. Try the next window or another weapon.
