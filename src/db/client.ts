@@ -21,7 +21,8 @@ interface Held {
   tail: Promise<unknown>;
 }
 
-const MOST_TRIES = 80;
+/** How long a write waits for other processes before it gives up. */
+const LONGEST_WAIT_MS = 30_000;
 const READER_BUSY_MS = 250;
 
 /** Kept here because a development reload makes this module anew. */
@@ -55,14 +56,15 @@ export function reader(): Reader {
 }
 
 async function attempt<T>(db: Held, work: (tx: Tx) => Promise<T>): Promise<T> {
+  const start = Date.now();
   for (let tries = 1; ; tries++) {
     try {
       return await inTransaction.run(true, () => db.writer.transaction(work));
     } catch (error) {
-      if (!isBusy(error) || tries >= MOST_TRIES) throw error;
+      if (!isBusy(error) || Date.now() - start > LONGEST_WAIT_MS) throw error;
       // A connection that met BUSY inside a transaction cannot commit again.
       db.writerClient.reconnect();
-      await wait(2 + Math.random() * Math.min(100, 4 * tries));
+      await wait(1 + Math.random() * Math.min(50, 2 * tries));
     }
   }
 }

@@ -1,4 +1,4 @@
-import { model } from 'geomagnetism';
+import geomagnetism from 'geomagnetism';
 import type { LatLon } from '@/core/geometry';
 
 /**
@@ -7,7 +7,7 @@ import type { LatLon } from '@/core/geometry';
  */
 export function declinationDeg(at: LatLon, now: number): number | null {
   try {
-    return model(new Date(now)).point([at.lat, at.lon]).decl;
+    return geomagnetism.model(new Date(now)).point([at.lat, at.lon]).decl;
   } catch {
     return null;
   }
