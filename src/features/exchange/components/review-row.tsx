@@ -33,14 +33,18 @@ export function ReviewTableRow({ judged, units, disabled, onKind, onTaken }: Rev
         />
       </Td>
       <Td label="Name">
-        <span className="break-words font-serif font-semibold">{name}</span>
-        {row.notes && (
-          <span className="block max-w-prose truncate text-ink-soft text-sm">{row.notes.slice(0, 120)}</span>
-        )}
+        <div className="min-w-0">
+          <span className="break-words font-serif font-semibold">{name}</span>
+          {row.notes && (
+            <span className="block max-w-prose truncate text-ink-soft text-sm">{row.notes.slice(0, 120)}</span>
+          )}
+        </div>
       </Td>
       <Td label="Shape">
-        {row.shape === null ? '–' : SHAPE_WORDS[row.shape]}
-        {row.size.points > 1 && <span className="text-ink-soft">, {row.size.points} points</span>}
+        <div className="min-w-0">
+          {row.shape === null ? '–' : SHAPE_WORDS[row.shape]}
+          {row.size.points > 1 && <span className="text-ink-soft">, {row.size.points} points</span>}
+        </div>
       </Td>
       <Td label="What it is">
         {row.shape === null ? (
@@ -67,12 +71,14 @@ export function ReviewTableRow({ judged, units, disabled, onKind, onTaken }: Rev
         )}
       </Td>
       <Td label="What becomes of it">
-        <span className={fate === 'ready' ? '' : 'font-semibold'}>{fateText(row, choice.kind, units)}</span>
-        {row.remarks.map((remark) => (
-          <span key={remark} className="block text-ink-soft text-sm">
-            {remark}
-          </span>
-        ))}
+        <div className="min-w-0">
+          <span className={fate === 'ready' ? '' : 'font-semibold'}>{fateText(row, choice.kind, units)}</span>
+          {row.remarks.map((remark) => (
+            <span key={remark} className="block text-ink-soft text-sm">
+              {remark}
+            </span>
+          ))}
+        </div>
       </Td>
     </Tr>
   );
