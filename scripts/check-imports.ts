@@ -54,6 +54,7 @@ const VENDOR_ONLY_IN_ADAPTERS = [
   'msw',
   'nodemailer',
   '@aws-sdk/client-s3',
+  'highs',
 ];
 const CORE_MAY_USE = [
   'suncalc',
