@@ -81,6 +81,8 @@ export function MapCanvas(props: MapCanvasProps) {
   const [parts, setParts] = useState<Parts | null>(null);
   const light = useLight();
   const draw = useRef<DrawTool | null>(null);
+  // The tap that ends a shape is heard once more as a click, when the tool is already laid down.
+  const spent = useRef(false);
   // Leaflet's handlers live longer than a render: they read what holds now.
   const now = useRef(props);
   now.current = props;
@@ -91,6 +93,7 @@ export function MapCanvas(props: MapCanvasProps) {
     if (!element) return;
     const map = makeMap(element, club, props.compact ?? false);
     const tap = (id: string, at: L.LatLng) => {
+      if (spent.current) return true;
       const { tool: current = LOOK, onSelect, onMeasure, things: list } = now.current;
       if (current.mode === 'look') {
         onSelect?.(id);
@@ -108,7 +111,12 @@ export function MapCanvas(props: MapCanvasProps) {
       overlay: paintOverlay(map),
       handles: arcHandles(map, (arcs) => now.current.onTurn?.(arcs)),
     };
+    const fresh = () => {
+      spent.current = false;
+    };
+    element.addEventListener('pointerdown', fresh, true);
     map.on('click', ({ latlng }) => {
+      if (spent.current) return;
       const { tool: current = LOOK, onSelect, onMeasure } = now.current;
       if (current.mode === 'look') onSelect?.(null);
       else if (current.mode === 'measure') onMeasure?.([latlng.lng, latlng.lat]);
@@ -120,6 +128,7 @@ export function MapCanvas(props: MapCanvasProps) {
     setParts(made);
     return () => {
       watcher.disconnect();
+      element.removeEventListener('pointerdown', fresh, true);
       setParts(null);
       for (const part of [made.things, made.labels, made.overlay, made.handles]) part.destroy();
       map.remove();
@@ -154,7 +163,10 @@ export function MapCanvas(props: MapCanvasProps) {
         return snapTo(index, at, reach);
       },
       onProgress: (geometry) => now.current.onProgress?.(geometry),
-      onDrawn: (geometry) => now.current.onDrawn?.(geometry),
+      onDrawn: (geometry) => {
+        spent.current = true;
+        now.current.onDrawn?.(geometry);
+      },
       onReshaped: (geometry) => now.current.onReshaped?.(geometry),
     });
     draw.current = made;
