@@ -1,10 +1,16 @@
 import { cookies } from 'next/headers';
 import type { ReactNode } from 'react';
+import { dayOf, formatDay } from '@/core/day-time';
 import { lightBySun } from '@/core/sun-light';
+import { env } from '@/env';
 import { ConfirmEmailNotice } from '@/features/accounts/components/confirm-email-notice';
 import { listMyClubs } from '@/features/accounts/reads';
+import { clockText } from '@/features/bookings/sit-words';
 import { clubNavItems } from '@/features/clubs/club-nav';
 import { ClubSwitch } from '@/features/clubs/components/club-switch';
+import { WaitingPanel } from '@/features/offline/components/waiting-panel';
+import { pagesToKeep } from '@/features/offline/keep-list';
+import { hashSecret } from '@/lib/secrets';
 import { now } from '@/server/clock';
 import { findScope } from '@/server/scope';
 import { currentUser } from '@/server/session';
@@ -12,8 +18,15 @@ import { AppShell } from '@/ui/app-shell';
 import { FollowSun } from '@/ui/follow-sun';
 import { LIGHT_COOKIE, parseLight } from '@/ui/light';
 import { Menu } from '@/ui/menu';
+import { KeptAccount } from '@/ui/offline/account';
+import { KeepPages } from '@/ui/offline/keep-pages';
+import { OfflineMark } from '@/ui/offline/offline-mark';
 import { ZoneNote } from '@/ui/zone-note';
 import { resendAction } from '../../(account)/verify/actions';
+import { signInSitAction, signOutSitAction } from './board/actions';
+import { addVisitAction, saveLogAction } from './log/actions';
+
+const WAITING = { signIn: signInSitAction, signOut: signOutSitAction, log: saveLogAction, visit: addVisitAction };
 
 interface ClubLayoutProps {
   params: Promise<{ club: string }>;
@@ -26,28 +39,36 @@ export default async function ClubLayout({ params, children }: ClubLayoutProps) 
   const scope = user && (await findScope((await params).club, user.id));
   if (!user || !scope) return children;
   const clubs = await listMyClubs(user.id, now());
-  const { slug, name, zone } = scope.club;
+  const { slug, name, zone, units } = scope.club;
+  const at = now();
   return (
-    <AppShell
-      items={clubNavItems(slug, scope.can)}
-      home={`/clubs/${slug}`}
-      light={parseLight((await cookies()).get(LIGHT_COOKIE)?.value)}
-      club={<ClubSwitch name={name} slug={slug} clubs={clubs.map((club) => ({ slug: club.slug, name: club.name }))} />}
-      account={
-        <Menu
-          label={user.name}
-          look="quiet"
-          items={[
-            { label: 'Account and sign out', href: '/account' },
-            { label: 'My clubs', href: '/clubs' },
-          ]}
-        />
-      }
-    >
-      <FollowSun changes={lightBySun(now(), scope.club)} />
-      <ZoneNote zone={zone} />
-      {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
-      {children}
-    </AppShell>
+    <KeptAccount account={hashSecret(user.id).slice(0, 16)}>
+      <AppShell
+        items={clubNavItems(slug, scope.can)}
+        home={`/clubs/${slug}`}
+        light={parseLight((await cookies()).get(LIGHT_COOKIE)?.value)}
+        club={
+          <ClubSwitch name={name} slug={slug} clubs={clubs.map((club) => ({ slug: club.slug, name: club.name }))} />
+        }
+        offlineMark={<OfflineMark asOf={`${formatDay(dayOf(at, zone))}, ${clockText(at, scope.club)}`} />}
+        account={
+          <Menu
+            label={user.name}
+            look="quiet"
+            items={[
+              { label: 'Account and sign out', href: '/account' },
+              { label: 'My clubs', href: '/clubs' },
+            ]}
+          />
+        }
+      >
+        <FollowSun changes={lightBySun(at, scope.club)} />
+        <ZoneNote zone={zone} />
+        {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
+        <WaitingPanel zone={zone} units={units} actions={WAITING} />
+        {children}
+      </AppShell>
+      {env.production && <KeepPages pages={pagesToKeep(slug, scope.can)} />}
+    </KeptAccount>
   );
 }

@@ -1,6 +1,8 @@
 'use client';
 
 import { type CancelAction, CancelSitDialog } from '@/features/bookings/components/cancel-sit-dialog';
+import { useWaiting } from '@/ui/offline/use-offline';
+import type { WaitingItem } from '@/ui/offline/waiting-store';
 import { Badge, type BadgeLook } from '@/ui/page-parts';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { Board, BoardSit } from '../reads';
@@ -31,9 +33,29 @@ const LOOKS: Record<BoardSit['state'], BadgeLook> = {
 const wayOf = ({ wayIn, parking, vehicle }: BoardSit) =>
   [wayIn ?? 'Way not said', ...(parking ? [`parked at ${parking}`] : []), ...(vehicle ? [vehicle] : [])].join(', ');
 
+/** The last press for a sit that waits on this device. */
+function keptSign(waiting: WaitingItem[], sitId: string): string | undefined {
+  return waiting
+    .filter(
+      ({ refused, kind, values }) =>
+        refused === null && kind.startsWith('sign_') && 'sitId' in values && values.sitId === sitId,
+    )
+    .at(-1)?.kind;
+}
+
 function Doings({ sit, club, board, actions, cancel }: BoardRowProps & { sit: BoardSit }) {
   const { outing } = sit;
   const open = sit.state === 'due' || sit.state === 'late';
+  const kept = keptSign(useWaiting(), sit.id);
+  if (kept === 'sign_out') return <Badge look="clay">Signed out here, not sent yet</Badge>;
+  if (kept === 'sign_in' && actions) {
+    return (
+      <div className="flex flex-wrap items-center gap-2">
+        <Badge look="clay">Signed in here, not sent yet</Badge>
+        <SignOutButton club={club} sit={sit} outingId={null} signOut={actions.signOut} />
+      </div>
+    );
+  }
   return (
     <div className="flex flex-wrap gap-2">
       {actions && sit.signIn && (

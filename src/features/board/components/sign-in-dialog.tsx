@@ -7,9 +7,11 @@ import { Button } from '@/ui/button';
 import { Dialog, DialogClose } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
+import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-offline';
 import { useToast } from '@/ui/toast';
 import { boardKey } from '../queries';
 import type { Board, BoardSit, SignInStart } from '../reads';
+import type { SavedOuting } from '../saved-outing';
 import type { BoardActions } from './board-actions';
 import { EMPTY_IS_NULL, GroundFields } from './ground-fields';
 
@@ -24,6 +26,7 @@ interface Props {
 function SignInForm({ club, sit, start, board, signIn, onDone }: Props & { onDone: () => void }) {
   const toast = useToast();
   const queries = useQueryClient();
+  const sendOrKeep = useSendOrKeep();
   const { register, errorOf, errors, pending, formProps } = useActionForm({
     schema: signInSitSchema,
     defaultValues: {
@@ -34,11 +37,15 @@ function SignInForm({ club, sit, start, board, signIn, onDone }: Props & { onDon
       backBy: start.backBy,
       contactOff: false,
     },
-    submit: (values: SignInSitValues) => signIn(club, values),
-    onDone: async (saved) => {
-      toast({ title: 'Signed in', text: `${saved.memberName} at ${saved.standName}, back by ${saved.backByText}.` });
+    submit: (values: SignInSitValues) => {
+      const label = sit.mine ? `Sign in at ${sit.standName}` : `Sign in ${sit.memberName} at ${sit.standName}`;
+      return sendOrKeep({ kind: 'sign_in', club, label, values, send: (all) => signIn(club, all) });
+    },
+    onDone: async (saved: SavedOuting | null) => {
+      const text = saved && `${saved.memberName} at ${saved.standName}, back by ${saved.backByText}.`;
+      toast(text ? { title: 'Signed in', text } : KEPT_TOAST);
       onDone();
-      await queries.invalidateQueries({ queryKey: boardKey(club) });
+      if (saved) await queries.invalidateQueries({ queryKey: boardKey(club) });
     },
   });
   return (

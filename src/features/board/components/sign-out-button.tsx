@@ -3,6 +3,7 @@
 import { useQueryClient } from '@tanstack/react-query';
 import { Button } from '@/ui/button';
 import { ConfirmDialog } from '@/ui/confirm-dialog';
+import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-offline';
 import { useToast } from '@/ui/toast';
 import { boardKey } from '../queries';
 import type { BoardSit } from '../reads';
@@ -13,13 +14,16 @@ const LOST = 'The server could not be reached. Try again, or call an officer.';
 interface Props {
   club: string;
   sit: BoardSit;
-  outingId: string;
+  /** null: signed in without signal and not sent yet. */
+  outingId: string | null;
   signOut: BoardActions['signOut'];
 }
 
 export function SignOutButton({ club, sit, outingId, signOut }: Props) {
   const toast = useToast();
   const queries = useQueryClient();
+  const sendOrKeep = useSendOrKeep();
+  const label = sit.mine ? `Sign out from ${sit.standName}` : `Sign out ${sit.memberName} from ${sit.standName}`;
   return (
     <ConfirmDialog
       title={sit.mine ? `Sign out from ${sit.standName}?` : `Sign out ${sit.memberName}?`}
@@ -31,9 +35,12 @@ export function SignOutButton({ club, sit, outingId, signOut }: Props) {
         </Button>
       }
       onConfirm={async () => {
-        const answer = await signOut(club, { outingId }).catch(() => null);
+        const values = outingId === null ? { sitId: sit.id } : { outingId };
+        const press = { kind: 'sign_out', club, label, values: { ...values, sitId: sit.id } };
+        const answer = await sendOrKeep({ ...press, send: (all) => signOut(club, all) }).catch(() => null);
         if (!answer) return LOST;
         if (!answer.ok) return answer.error.message;
+        if (!answer.data) return toast(KEPT_TOAST);
         toast({ title: 'Signed out', text: `${sit.memberName}, ${sit.standName}.` });
         await queries.invalidateQueries({ queryKey: boardKey(club) });
       }}

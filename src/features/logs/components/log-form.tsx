@@ -9,6 +9,7 @@ import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { useKeptDraft } from '@/ui/form/use-kept-draft';
 import { Notice } from '@/ui/notices';
+import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-offline';
 import { Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { BUMP_FIELDS, COUNT_FIELDS, type LogForm, logFormSchema } from '../log-schema';
@@ -34,13 +35,20 @@ export interface LogFormProps {
 export function LogFormView({ club, values, day, zone, units, harvest, save }: LogFormProps) {
   const router = useRouter();
   const toast = useToast();
+  const sendOrKeep = useSendOrKeep();
   const back = `/clubs/${club}/log`;
-  const { form, register, errorOf, errors, pending, formProps } = useActionForm<LogForm, SavedLog>({
+  const { form, register, errorOf, errors, pending, formProps } = useActionForm<LogForm, SavedLog | null>({
     schema: logFormSchema,
     defaultValues: values,
-    submit: (typed) => save(club, typed),
+    submit: (typed) =>
+      sendOrKeep({ kind: 'log', club, label: `Log of ${day}`, values: typed, send: (all) => save(club, all) }),
     onDone: (saved) => {
       draft.drop();
+      if (!saved) {
+        toast(KEPT_TOAST);
+        router.push(back);
+        return;
+      }
       toast({ title: `Log of ${saved.standName} saved` });
       router.push(saved.recovered && harvest ? `/clubs/${club}/season/harvest/new?sit=${saved.sitId}` : back);
     },

@@ -9,6 +9,7 @@ import type { ActionResult } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
+import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-offline';
 import { Stepper } from '@/ui/stepper';
 import { DateInput, Select, Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
@@ -28,14 +29,18 @@ const KINDS = VISIT_KINDS.map((value) => ({ value, label: VISIT_WORDS[value] }))
 export function VisitFormView({ club, formClub, values, places, add }: VisitFormProps) {
   const router = useRouter();
   const toast = useToast();
+  const sendOrKeep = useSendOrKeep();
   const back = `/clubs/${club}/log`;
   const schema = useMemo(() => makeVisitSchema(formClub), [formClub]);
   const { form, register, errorOf, errors, pending, formProps } = useActionForm({
     schema,
     defaultValues: values,
-    submit: (typed: VisitForm) => add(club, typed),
-    onDone: (saved) => {
-      toast({ title: 'Visit written down', text: saved.name });
+    submit: (typed: VisitForm) => {
+      const label = `${VISIT_WORDS[typed.kind]}, ${typed.day} ${typed.clock}`;
+      return sendOrKeep({ kind: 'visit', club, label, values: typed, send: (all) => add(club, all) });
+    },
+    onDone: (saved: { name: string } | null) => {
+      toast(saved ? { title: 'Visit written down', text: saved.name } : KEPT_TOAST);
       router.push(back);
     },
   });

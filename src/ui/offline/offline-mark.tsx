@@ -1,0 +1,27 @@
+'use client';
+
+import { CloudOff } from 'lucide-react';
+import { useEffect, useState } from 'react';
+import { useOnline } from './use-offline';
+
+/** Says that there is no signal, or that this page is a kept copy, and of when it is. */
+export function OfflineMark({ asOf }: { asOf: string }) {
+  const online = useOnline();
+  const [keptAsOf, setKeptAsOf] = useState<string | null>(null);
+  // The worker marks a copy it shows; a page fetched anew carries another time.
+  // biome-ignore lint/correctness/useExhaustiveDependencies: only what the page was when it was opened
+  useEffect(() => {
+    if (document.documentElement.dataset.kept !== undefined) setKeptAsOf(asOf);
+  }, []);
+  const old = keptAsOf === asOf;
+  if (online && !old) return null;
+  return (
+    <p role="status" className="flex items-center gap-1.5 border border-rule-strong px-2 py-1 text-xs leading-tight">
+      <CloudOff aria-hidden className="size-4 shrink-0" />
+      <span>
+        <strong className="font-semibold">{online ? 'Kept copy' : 'No signal'}</strong>, as of{' '}
+        <span className="whitespace-nowrap">{asOf}</span>
+      </span>
+    </p>
+  );
+}
