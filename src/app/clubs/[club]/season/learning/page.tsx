@@ -76,8 +76,10 @@ export default clubPage('log.read_all', async ({ scope }) => {
                         {one.predicted}
                       </Td>
                       <Td label="Asks for" align="right">
-                        {signed(one.points)}
-                        {!one.sure && <span className="text-ink-soft"> (unsure)</span>}
+                        <span>
+                          {signed(one.points)}
+                          {!one.sure && <span className="text-ink-soft"> (unsure)</span>}
+                        </span>
                       </Td>
                       <Td label="95 % interval" align="right">
                         {signed(one.low)} to {signed(one.high)}

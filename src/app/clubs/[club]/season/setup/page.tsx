@@ -14,13 +14,12 @@ import { acceptFindingAction, dismissFindingAction, reopenFindingAction } from '
 export const metadata = { title: 'Set-up check' };
 
 export default clubPage('features.read', async ({ scope, search }) => {
-  const { slug, name, rules } = scope.club;
+  const { slug, name } = scope.club;
   const { open: all, answered, windsFrom, counts } = await readSetup(scope, now());
   const chosen = chooseFindings(all, search);
   const { open } = chosen;
   const may = scope.can('features.write');
   const common = { club: slug, mayOpenChores: scope.can('chores.read') };
-  const state = rules.stateHarvestRule;
   return (
     <>
       <PageTitle
@@ -31,7 +30,6 @@ export default clubPage('features.read', async ({ scope, search }) => {
       <Notice title="Ask before you cut, dig or bait" className="mb-6">
         Mock scrapes, water, bait and cutting may be limited by the state or the landowner. Nothing here says that a
         piece of work is allowed.
-        {state && ` The club’s rule: ${state.text} (${state.source}, ${state.statedOn}).`}
       </Notice>
       {counts.stands === 0 || counts.features === 0 ? (
         <EmptyState
