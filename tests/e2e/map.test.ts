@@ -81,6 +81,7 @@ interface Ground {
   map: Locator;
   /** Taps the map at shares of its width and height. */
   tap: (x: number, y: number) => Promise<void>;
+  drag: (from: [number, number], to: [number, number]) => Promise<void>;
   draw: (kind: string) => Promise<void>;
   list: (group: string) => Locator;
   name: Locator;
@@ -90,6 +91,11 @@ async function openGround({ page }: Visitor, club: string, touch: boolean): Prom
   await page.goto(`/clubs/${club}/ground`);
   const map = page.getByRole('application', { name: /^Map of/ });
   await map.waitFor();
+  const spotOf = async (x: number, y: number): Promise<[number, number]> => {
+    const box = await map.boundingBox();
+    if (!box) throw new Error('The map has no size.');
+    return [box.x + box.width * x, box.y + box.height * y];
+  };
   const middle = () => map.evaluate((element) => element.scrollIntoView({ block: 'center' }));
   return {
     page,
@@ -102,10 +108,14 @@ async function openGround({ page }: Visitor, club: string, touch: boolean): Prom
       await page.getByRole('button', { name: 'Cancel' }).waitFor();
       await middle();
     },
+    drag: async (from, to) => {
+      await page.mouse.move(...(await spotOf(...from)));
+      await page.mouse.down();
+      await page.mouse.move(...(await spotOf(...to)), { steps: 8 });
+      await page.mouse.up();
+    },
     tap: async (x, y) => {
-      const box = await map.boundingBox();
-      if (!box) throw new Error('The map has no size.');
-      const at = [box.x + box.width * x, box.y + box.height * y] as const;
+      const at = await spotOf(x, y);
       if (touch) await page.touchscreen.tap(...at);
       else await page.mouse.click(...at);
     },
@@ -258,6 +268,18 @@ describe('a new steward draws the ground', () => {
       ],
       'North Wood',
     );
+    const size = () => page.locator('[data-size]').textContent();
+    await page.getByRole('button', { name: 'Reshape or move' }).click();
+    await page.getByRole('button', { name: 'Done' }).waitFor();
+    await ground.map.evaluate((element) => element.scrollIntoView({ block: 'center' }));
+    const before = await size();
+    await ground.drag([0.6, 0.6], [0.7, 0.7]);
+    await expect.poll(size).not.toBe(before);
+    await page.getByRole('button', { name: 'Take out this corner' }).click();
+    await page.getByRole('button', { name: 'Done' }).click();
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await page.getByRole('button', { name: 'Undo' }).click();
+    await ground.list('Land').filter({ hasText: 'North Wood' }).click();
     await page.getByRole('button', { name: 'Split' }).click();
     await ground.map.evaluate((element) => element.scrollIntoView({ block: 'center' }));
     await ground.tap(0.45, 0.2);

@@ -25,7 +25,7 @@ import { useLight } from './use-light';
 export type MapTool =
   | { mode: 'look' }
   | { mode: 'draw'; shape: DrawnShape }
-  | { mode: 'reshape'; id: string }
+  | { mode: 'reshape'; id: string; round: number }
   | { mode: 'measure' };
 
 export interface MapHandle {
@@ -147,6 +147,7 @@ export function MapCanvas(props: MapCanvasProps) {
   useEffect(() => parts?.handles.update(turning ? latLng(turning.at) : null, turning?.arcs ?? []), [parts, turning]);
 
   const shape = tool.mode === 'draw' ? tool.shape : null;
+  const round = tool.mode === 'reshape' ? tool.round : 0;
   // biome-ignore lint/correctness/useExhaustiveDependencies: the tool is taken up anew only when it changes
   useEffect(() => {
     if (!parts || !host.current || (shape === null && hiddenId === null)) return;
@@ -181,7 +182,7 @@ export function MapCanvas(props: MapCanvasProps) {
       draw.current = null;
       made.stop();
     };
-  }, [parts, shape, hiddenId, light]);
+  }, [parts, shape, hiddenId, round, light]);
 
   const imageryUrl = props.imagery ? view.imagery?.url : undefined;
   useEffect(() => {

@@ -31,7 +31,7 @@ const HOW = {
 
 /** The bar over the map for whatever the hand is doing. */
 export function MapDoing({ view, editor, things }: { view: MapView; editor: MapEditor; things: readonly MapThing[] }) {
-  const { doing, progress } = editor;
+  const { doing, progress, corner } = editor;
   const { club } = view;
   const bar = {
     club,
@@ -66,9 +66,10 @@ export function MapDoing({ view, editor, things }: { view: MapView; editor: MapE
       const how =
         thing?.geometry.type === 'Point'
           ? 'drag it'
-          : 'drag its corners, or the whole of it; a right click takes a corner away';
+          : 'drag its corners, or the small dots between them, or the whole of it';
       return (
         <DrawBar club={club} shape={progress} title={`${thing ? nameOf(thing) : 'Reshape'}: ${how}.`}>
+          {corner && <Button onClick={() => editor.takeOut(corner)}>Take out this corner</Button>}
           <Button look="primary" onClick={editor.stop}>
             Done
           </Button>

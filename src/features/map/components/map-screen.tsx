@@ -87,7 +87,7 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
             things={things}
             view={view}
             onChange={editor.put}
-            onReshape={() => editor.begin({ mode: 'reshape', id: selected.id })}
+            onReshape={() => editor.begin({ mode: 'reshape', id: selected.id, round: 0 })}
             onSplit={() =>
               editor.begin({
                 mode: 'split',

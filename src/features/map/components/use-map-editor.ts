@@ -5,6 +5,7 @@ import { useEffect, useMemo, useRef, useState } from 'react';
 import type { DrawnShape } from '@/core/map-layers';
 import type { GoodWindArc } from '@/core/types';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
+import { touchedCorner, withoutCorner } from '../drawing/corners';
 import { addThing, removeThing, replaceThing, setThings } from '../drawing/drawing';
 import { followMove } from '../drawing/follow';
 import { freshName, makeThing, type NewKind } from '../drawing/kinds';
@@ -21,7 +22,8 @@ export type Doing =
   | { mode: 'look' }
   | { mode: 'add'; kind: NewKind; shape: DrawnShape }
   | { mode: 'here'; kind: NewKind }
-  | { mode: 'reshape'; id: string }
+  /** Taken up anew with each round: the shape was changed by other means than the hand. */
+  | { mode: 'reshape'; id: string; round: number }
   | { mode: 'split'; id: string; shape: DrawnShape }
   | { mode: 'measure' };
 
@@ -34,7 +36,7 @@ function toolOf(doing: Doing): MapTool {
     case 'split':
       return { mode: 'draw', shape: doing.shape === 'area' ? 'line' : 'point' };
     case 'reshape':
-      return { mode: 'reshape', id: doing.id };
+      return { mode: 'reshape', id: doing.id, round: doing.round };
     case 'measure':
       return { mode: 'measure' };
     default:
@@ -57,6 +59,7 @@ export function useMapEditor(
   const [measured, setMeasured] = useState<readonly Position[]>([]);
   const [here, setHere] = useState<Here | null>(null);
   const [problem, setProblem] = useState<string | null>(null);
+  const [corner, setCorner] = useState<Position | null>(null);
   const selected = things.find((thing) => thing.id === selectedId) ?? null;
   const tool = useMemo(() => toolOf(doing), [doing]);
 
@@ -64,6 +67,7 @@ export function useMapEditor(
     setProgress(null);
     setProblem(null);
     setHere(null);
+    setCorner(null);
     setDoing(next);
   }
 
@@ -160,7 +164,22 @@ export function useMapEditor(
     },
     reshaped(geometry: DrawnGeometry): void {
       const thing = doing.mode === 'reshape' ? things.find((one) => one.id === doing.id) : undefined;
-      if (thing) put({ ...thing, geometry }, null);
+      if (!thing) return;
+      setCorner(isDrawn(thing.geometry) ? touchedCorner(thing.geometry, geometry) : null);
+      put({ ...thing, geometry }, null);
+    },
+    /** The corner of the shape in hand that was moved last. */
+    corner,
+    takeOut(at: Position): void {
+      if (doing.mode !== 'reshape') return;
+      const thing = things.find((one) => one.id === doing.id);
+      const geometry = thing && isDrawn(thing.geometry) ? withoutCorner(thing.geometry, at) : null;
+      if (!thing || !geometry) {
+        setProblem('No more corners can go.');
+        return;
+      }
+      put({ ...thing, geometry }, null);
+      begin({ ...doing, round: doing.round + 1 });
     },
     turn(arcs: GoodWindArc[]): void {
       if (selected?.kind === 'stand') put({ ...selected, arcs }, `turn:${selected.id}`);
