@@ -49,6 +49,7 @@ async function followMailLink(page: Page, subject: RegExp, to: string): Promise<
 
 async function joinFromMail({ page }: Visitor, person: { name: string; email: string }): Promise<void> {
   await followMailLink(page, /invite|invitation|join/i, person.email);
+  await page.locator('form[data-ready]').first().waitFor();
   await page.getByLabel('Your name').fill(person.name);
   await page.getByLabel('Password').fill(PASSWORD);
   await page.getByRole('button', { name: /Make an account and join/ }).click();
