@@ -34,6 +34,7 @@ const FEATURES = [
   'harvest',
   'chores',
   'sits',
+  'draws',
   'coverage',
   'setup',
   'movement',

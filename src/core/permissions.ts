@@ -38,6 +38,8 @@ export const PERMISSIONS = [
   'chores.write',
   'inspections.write',
   'notices.own',
+  'draws.enter',
+  'draws.write',
 ] as const;
 export type Permission = (typeof PERMISSIONS)[number];
 
@@ -56,6 +58,7 @@ const MEMBER = [
   'harvest.write',
   'chores.read',
   'notices.own',
+  'draws.enter',
 ] as const satisfies readonly Permission[];
 
 export const PERMISSIONS_BY_ROLE: Record<Role, readonly Permission[]> = {

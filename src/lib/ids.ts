@@ -30,6 +30,7 @@ export const ID_PREFIXES = {
   audit: 'aud',
   mail: 'mal',
   adjustment: 'adj',
+  draw: 'drw',
 } as const;
 
 export type IdKind = keyof typeof ID_PREFIXES;

@@ -73,6 +73,7 @@ async function realParams(): Promise<Record<string, string>> {
   const [harvest] = await from.select().from(schema.harvests).limit(1);
   const [chore] = await from.select().from(schema.chores).limit(1);
   const [workDay] = await from.select().from(schema.workDays).limit(1);
+  const [draw] = await from.select().from(schema.draws).limit(1);
   const [imported] = await from.select().from(schema.imports).limit(1);
   return {
     club: DEMO_SLUG,
@@ -86,6 +87,7 @@ async function realParams(): Promise<Record<string, string>> {
     harvest: harvest?.id ?? '',
     chore: chore?.id ?? '',
     workday: workDay?.id ?? '',
+    draw: draw?.id ?? '',
     id: 'none',
     token: 'none',
     secret: 'none.ics',

@@ -24,6 +24,7 @@ const THINGS: Record<string, string> = {
   member: 'select id from memberships where removed_at is null and club_id = :club order by id limit 1',
   harvest: 'select id from harvests where club_id = :club order by id limit 1',
   chore: 'select id from chores where club_id = :club order by id limit 1',
+  draw: 'select id from draws where club_id = :club order by id limit 1',
   import: 'select id from imports where club_id = :club order by id limit 1',
   workday: 'select id from work_days where club_id = :club order by id limit 1',
   // A sit of the person who looks, since a log is written by who sat.

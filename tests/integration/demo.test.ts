@@ -64,6 +64,8 @@ const tables = {
   visits: schema.visits,
   chores: schema.chores,
   inspections: schema.inspections,
+  draws: schema.draws,
+  drawEntries: schema.drawEntries,
   workDays: schema.workDays,
   workDayMembers: schema.workDayMembers,
   auditLog: schema.auditLog,

@@ -2,6 +2,7 @@ export * from './accounts';
 export * from './bookings';
 export * from './chores';
 export * from './clubs';
+export * from './draws';
 export * from './ground';
 export * from './harvests';
 export * from './imports';

@@ -10,13 +10,19 @@ import { queueSitMail } from './sit-mails';
 import type { BookSitInput } from './sit-schema';
 import { dayAndWindow, windowsHeld } from './sit-words';
 
-/** Books a sit inside a change of which it is a part. */
+/** Books a sit inside a change of which it is a part, for oneself or, with the permission, for another. */
 export async function bookSitIn(tx: Tx, scope: ClubScope, input: BookSitInput, now: number): Promise<SitDetail> {
-  const { memberId: forId, requestKey, ...chosen } = input;
-  const memberId = forId ?? scope.member.id;
+  const memberId = input.memberId ?? scope.member.id;
   if (memberId !== scope.member.id && !scope.can('sits.book_for_others')) {
     throw new AppError('forbidden', 'Only a club admin books for another member.');
   }
+  return placeSitIn(tx, scope, input, now);
+}
+
+/** The same for whoever the caller has found may have it: a draw, a swap both have agreed to. */
+export async function placeSitIn(tx: Tx, scope: ClubScope, input: BookSitInput, now: number): Promise<SitDetail> {
+  const { memberId: forId, requestKey, ...chosen } = input;
+  const memberId = forId ?? scope.member.id;
   const before = await findSitByRequest(scope, requestKey, tx);
   if (before) {
     if (before.bookedBy === scope.member.id) return before;

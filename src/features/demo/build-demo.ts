@@ -2,6 +2,7 @@ import { dayOf } from '@/core/day-time';
 import { buildAudit } from './build-audit';
 import { buildClosures } from './build-closures';
 import { buildClub, buildUsers } from './build-club';
+import { buildDraws } from './build-draws';
 import { buildGround } from './build-ground';
 import { buildHarvests, buildLogVersions } from './build-harvests';
 import { buildImports } from './build-imports';
@@ -61,6 +62,7 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
     harvests,
     visits: buildVisits(day, club, ground),
     ...buildUpkeep({ today, dice: makeDice(`upkeep ${today}`) }, club, ground, closures),
+    ...buildDraws({ today, dice: makeDice(`draws ${today}`) }, club, ground),
     auditLog: [
       ...buildAudit(day, club, { ground, closures, sits }),
       ...buildAudit(day, second, { ground: { ...ground, stands: second.stands }, closures: [], sits: [] }),

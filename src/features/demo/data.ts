@@ -35,6 +35,8 @@ export async function insertDemo(tx: Tx, rows: DemoRows): Promise<void> {
   await insertAll(tx, schema.visits, rows.visits);
   await insertAll(tx, schema.chores, rows.chores);
   await insertAll(tx, schema.inspections, rows.inspections);
+  await insertAll(tx, schema.draws, rows.draws);
+  await insertAll(tx, schema.drawEntries, rows.drawEntries);
   await insertAll(tx, schema.workDays, rows.workDays);
   await insertAll(tx, schema.workDayMembers, rows.workDayMembers);
   await insertAll(tx, schema.auditLog, rows.auditLog);

@@ -23,6 +23,8 @@ export interface DemoRows {
   visits: (typeof schema.visits.$inferInsert)[];
   chores: (typeof schema.chores.$inferInsert)[];
   inspections: (typeof schema.inspections.$inferInsert)[];
+  draws: (typeof schema.draws.$inferInsert)[];
+  drawEntries: (typeof schema.drawEntries.$inferInsert)[];
   workDays: (typeof schema.workDays.$inferInsert)[];
   workDayMembers: (typeof schema.workDayMembers.$inferInsert)[];
   auditLog: (typeof schema.auditLog.$inferInsert)[];
