@@ -44,7 +44,7 @@ try {
         }, light);
         const name =
           path
-            .replace('/clubs/[club]', '')
+            .replace('/clubs/[club]/', '')
             .replace(/[^\w-]+/g, '-')
             .replace(/^-|-$/g, '') || 'first';
         await page.screenshot({ path: join(folder, `${name}.${size.width}.${light}.png`), fullPage: true });
