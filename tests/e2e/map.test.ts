@@ -101,7 +101,7 @@ async function openGround({ page }: Visitor, club: string, touch: boolean): Prom
     page,
     map,
     name: page.getByRole('textbox', { name: 'Name' }),
-    list: (group) => page.getByRole('region', { name: group, exact: true }).getByRole('button'),
+    list: (group) => page.getByRole('list', { name: group, exact: true }).getByRole('button'),
     draw: async (kind) => {
       await page.getByLabel('Add', { exact: true }).selectOption(kind);
       await page.getByRole('button', { name: 'Draw it' }).click();
@@ -153,8 +153,8 @@ async function drawTheGround(visitor: Visitor, club: string, touch: boolean): Pr
   const { page } = ground;
   await page.getByText('Nothing is drawn yet.').waitFor();
   const round = await drawLine(ground, 'item:boundary', [
-    [0.1, 0.15],
-    [0.9, 0.15],
+    [0.3, 0.12],
+    [0.9, 0.2],
     [0.9, 0.9],
     [0.1, 0.9],
   ]);
@@ -387,7 +387,7 @@ describe('what the map asks of the machine', () => {
     await open.click();
     await page.getByRole('application', { name: 'Map of the way to Beech Ladder' }).waitFor();
     await expect.poll(() => loaded.length).toBeGreaterThan(0);
-    await page.getByText('Along the ditch').first().waitFor();
+    await page.getByRole('figure').getByText('Along the ditch').waitFor();
     expect(await axeFindings(page)).toEqual([]);
     await keepPicture(page, 'sit-walk-map');
     expect(phone.troubles).toEqual([]);

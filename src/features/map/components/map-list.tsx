@@ -75,7 +75,7 @@ function Group({ label, rows, selectedId, onSelect }: GroupProps) {
       <h2 className="small-caps border-rule border-b text-base text-ink-soft">
         {label} <span className="text-sm">({rows.length})</span>
       </h2>
-      <ul>
+      <ul aria-label={label}>
         {shown.map(({ thing, name, brief }) => (
           <li key={thing.id} className="border-rule border-b">
             <button
