@@ -212,7 +212,7 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   'clubs/[club]/week/page.tsx': { default: 'sits.read' },
   'clubs/new/actions.ts': { createClubAction: 'account' },
   'clubs/new/page.tsx': { default: 'account' },
-  'dev/bare-sits/[club]/route.ts': { GET: 'anyone' },
+  'dev/bare-sits/[club]/route.ts': { GET: 'features.read' },
   'dev/mail/[id]/html/route.ts': { GET: 'anyone' },
   'dev/mail/[id]/page.tsx': { default: 'anyone' },
   'dev/mail/page.tsx': { default: 'anyone' },

@@ -1,15 +1,14 @@
 import { z } from 'zod';
 import { env } from '@/env';
 import { readBareRows } from '@/features/sits/read-bare-rows';
-import { publicRoute } from '@/server/doors';
+import { clubRoute } from '@/server/doors';
 import { notFound } from '@/server/errors';
-import { systemScopeBySlug } from '@/server/scope';
 
 /** For the bench alone: the rows of the sits read with nothing made of them, to measure the read against. */
-export const GET = publicRoute({
+export const GET = clubRoute('features.read', {
   query: z.object({}),
-  run: async ({ params, now }) => {
+  run: ({ scope, now }) => {
     if (!env.devPages) throw notFound();
-    return readBareRows(await systemScopeBySlug(params.club ?? ''), now);
+    return readBareRows(scope, now);
   },
 });
