@@ -1,12 +1,13 @@
 import { createServer, type Server } from 'node:http';
 import type { AddressInfo } from 'node:net';
-import type { Browser, Locator, Page } from 'playwright-core';
+import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } from '../helpers/browser';
+import { drawLine, drawPoint, type Ground, openGround, saveGround } from '../helpers/draw-ground';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { makeAccount, startClub } from '../helpers/start-club';
 
-const PASSWORD = 'a long walk by the creek';
-const person = { name: 'Wilma Hask', email: 'wilma@example.org' };
+const person = { name: 'Wilma Hask', email: 'wilma@example.org', password: 'a long walk by the creek' };
 
 /** One grey pixel, the same for every tile. */
 const TILE = Buffer.from(
@@ -41,111 +42,6 @@ afterAll(async () => {
   await app?.stop();
   tiles?.close();
 });
-
-/** The newest kept mail that lets a new account in; the mail job may take a moment. */
-async function confirmByMail(page: Page): Promise<void> {
-  const row = page
-    .getByRole('row')
-    .filter({ hasText: person.email })
-    .getByRole('link', { name: /confirm/i });
-  await expect
-    .poll(
-      async () => {
-        await page.goto('/dev/mail');
-        return row.count();
-      },
-      { timeout: 60_000 },
-    )
-    .toBeGreaterThan(0);
-  await row.first().click();
-  await page.getByRole('heading', { name: 'Plain text' }).waitFor();
-  await page.locator('a[href^="http"]').filter({ hasText: '/' }).first().click();
-  await page.getByLabel('Password').fill(PASSWORD);
-  await page.getByRole('button', { name: 'Confirm and sign in' }).click();
-  await page.waitForURL(/\/clubs/);
-}
-
-async function startClub(page: Page, name: string): Promise<void> {
-  await page.goto('/clubs/new');
-  await page.getByLabel('Name of the club').fill(name);
-  await page.getByLabel('Latitude').fill('41.2');
-  await page.getByLabel('Longitude').fill('-77.3');
-  await page.getByLabel('Longitude').blur();
-  await expect.poll(() => page.getByLabel('Time zone').inputValue()).toBe('America/New_York');
-  await page.getByRole('button', { name: 'Start the club' }).click();
-  await page.waitForURL(new RegExp(`/clubs/${name.toLowerCase().replaceAll(' ', '-')}`));
-}
-
-interface Ground {
-  page: Page;
-  map: Locator;
-  /** Taps the map at shares of its width and height. */
-  tap: (x: number, y: number) => Promise<void>;
-  drag: (from: [number, number], to: [number, number]) => Promise<void>;
-  draw: (kind: string) => Promise<void>;
-  list: (group: string) => Locator;
-  name: Locator;
-}
-
-async function openGround({ page }: Visitor, club: string, touch: boolean): Promise<Ground> {
-  await page.goto(`/clubs/${club}/ground`);
-  const map = page.getByRole('application', { name: /^Map of/ });
-  await map.waitFor();
-  const spotOf = async (x: number, y: number): Promise<[number, number]> => {
-    const box = await map.boundingBox();
-    if (!box) throw new Error('The map has no size.');
-    return [box.x + box.width * x, box.y + box.height * y];
-  };
-  const middle = () => map.evaluate((element) => element.scrollIntoView({ block: 'center' }));
-  return {
-    page,
-    map,
-    name: page.getByRole('textbox', { name: 'Name' }),
-    list: (group) => page.getByRole('list', { name: group, exact: true }).getByRole('button'),
-    draw: async (kind) => {
-      await page.getByLabel('Add', { exact: true }).selectOption(kind);
-      await page.getByRole('button', { name: 'Draw it' }).click();
-      await page.getByRole('button', { name: 'Cancel' }).waitFor();
-      await middle();
-    },
-    drag: async (from, to) => {
-      await page.mouse.move(...(await spotOf(...from)));
-      await page.mouse.down();
-      await page.mouse.move(...(await spotOf(...to)), { steps: 8 });
-      await page.mouse.up();
-    },
-    tap: async (x, y) => {
-      const at = await spotOf(x, y);
-      if (touch) await page.touchscreen.tap(...at);
-      else await page.mouse.click(...at);
-    },
-  };
-}
-
-async function drawPoint(ground: Ground, kind: string, at: [number, number], name: string): Promise<void> {
-  await ground.draw(kind);
-  await ground.tap(...at);
-  await ground.name.waitFor();
-  await ground.name.fill(name);
-}
-
-async function drawLine(ground: Ground, kind: string, points: [number, number][], name?: string): Promise<string> {
-  await ground.draw(kind);
-  for (const point of points) await ground.tap(...point);
-  const size = (await ground.page.locator('[data-size]').textContent()) ?? '';
-  await ground.page.getByRole('button', { name: 'Finish' }).click();
-  await ground.name.waitFor();
-  if (name) await ground.name.fill(name);
-  return size;
-}
-
-const save = async ({ page }: Ground) => {
-  await page.getByRole('button', { name: /^Save (one change|\d+ changes)$/ }).click();
-  await page
-    .getByText(/(changes are|change is) saved/)
-    .first()
-    .waitFor();
-};
 
 /** Everything a new steward does on the first evening. */
 async function drawTheGround(visitor: Visitor, club: string, touch: boolean): Promise<Ground> {
@@ -203,13 +99,7 @@ async function drawTheGround(visitor: Visitor, club: string, touch: boolean): Pr
 describe('a new steward draws the ground', () => {
   it('makes an account and two clubs', async () => {
     const { page } = desktop;
-    await page.goto('/sign-up');
-    await page.getByLabel('Your name').fill(person.name);
-    await page.getByLabel('E-mail').fill(person.email);
-    await page.getByLabel('Password').fill(PASSWORD);
-    await page.getByRole('button', { name: 'Make the account' }).click();
-    await page.getByText('We wrote to').waitFor();
-    await confirmByMail(page);
+    await makeAccount(page, person);
     await startClub(page, 'Desk Hollow');
     await startClub(page, 'Thumb Hollow');
     for (const { context } of [desktop, phone]) {
@@ -232,7 +122,7 @@ describe('a new steward draws the ground', () => {
     await page.mouse.move(stand.x + stand.width / 2, stand.y + stand.height / 2 + 60, { steps: 8 });
     await page.mouse.up();
     await expect.poll(() => page.getByLabel('Good winds', { exact: true }).inputValue()).toMatch(/^1(79|80|81)-0$/);
-    await save(ground);
+    await saveGround(ground);
     expect(await axeFindings(page)).toEqual([]);
     await keepPicture(page, 'map-desktop');
   });
@@ -242,11 +132,11 @@ describe('a new steward draws the ground', () => {
     await page.goto('/sign-in');
     await page.locator('form[data-ready]').waitFor();
     await page.getByLabel('E-mail').fill(person.email);
-    await page.getByLabel('Password').fill(PASSWORD);
+    await page.getByLabel('Password').fill(person.password);
     await page.getByRole('button', { name: 'Sign in' }).click();
     await page.waitForURL(/\/clubs/);
     const ground = await drawTheGround(phone, 'thumb-hollow', true);
-    await save(ground);
+    await saveGround(ground);
     expect(await axeFindings(page)).toEqual([]);
     await keepPicture(page, 'map-phone');
     await page.goto('/clubs/thumb-hollow/stands');
@@ -293,7 +183,7 @@ describe('a new steward draws the ground', () => {
     await page.reload();
     await page.getByText('What you drew here before has been brought back.').waitFor();
     await expect.poll(() => ground.list('Land').filter({ hasText: 'North Wood' }).count()).toBe(2);
-    await save(ground);
+    await saveGround(ground);
     await ground.list('Land').filter({ hasText: 'Boundary' }).click();
     await page.getByRole('button', { name: 'Remove' }).click();
     expect(await ground.list('Land').filter({ hasText: 'Boundary' }).count()).toBe(0);
@@ -309,7 +199,7 @@ describe('a new steward draws the ground', () => {
     await page.getByLabel('Place', { exact: true }).fill('41.2011, -77.3');
     await page.getByRole('button', { name: 'Add it there' }).press('Enter');
     await ground.name.fill('Ford camera');
-    await save(ground);
+    await saveGround(ground);
     await page.getByRole('button', { name: 'Measure' }).press('Enter');
     await page.getByLabel('From', { exact: true }).selectOption({ label: 'Spring Hang-On' });
     await page.getByLabel('To', { exact: true }).selectOption({ label: 'Ford camera' });
@@ -328,7 +218,7 @@ describe('a new steward draws the ground', () => {
       await ground.list('Stands').filter({ hasText: 'Beech' }).click();
       await ground.name.fill(name);
     }
-    await save(there);
+    await saveGround(there);
     await here.page.getByRole('button', { name: 'Save one change' }).click();
     await here.page.getByText('Wilma Hask changed stand Beech Corner').waitFor();
     expect(await axeFindings(here.page)).toEqual([]);

@@ -1,22 +1,15 @@
 import { eq } from 'drizzle-orm';
-import type { Position } from 'geojson';
 import { beforeAll, beforeEach, describe, expect, it } from 'vitest';
-import { GET as momentRoute } from '@/app/api/clubs/[club]/map/moment/route';
-import { GET as mapRoute } from '@/app/api/clubs/[club]/map/route';
 import { saveDrawingAction } from '@/app/clubs/[club]/ground/actions';
-import { fromLocal } from '@/core/geometry';
 import { reader } from '@/db/client';
 import { auditLog } from '@/db/schema';
 import type { DrawingChange } from '@/features/map/drawing-schema';
 import { loadDrawn } from '@/features/map/drawn-rows';
-import type { MapView } from '@/features/map/thing';
-import { readMoment } from '@/features/moment/read-moment';
 import { setClock } from '@/server/clock';
 import type { ActionResult } from '@/server/doors';
-import { book } from '../helpers/book';
-import { addMember, makeClub, TEST_NOW, TEST_PLACE, type TestClub, type TestMember } from '../helpers/make-club';
+import { DRAWN, newBed, newStand, newWay, newWood, point, spot } from '../helpers/drawn-things';
+import { addMember, makeClub, TEST_NOW, type TestClub, type TestMember } from '../helpers/make-club';
 import { inRequest } from '../helpers/request';
-import { steady } from '../helpers/sits-club';
 
 let club: TestClub;
 let steward: TestMember;
@@ -29,11 +22,6 @@ beforeEach(async () => {
   other = await addMember(club, 'admin', { name: 'Ada Fenn' });
 });
 
-const spot = (eastM: number, northM: number): Position => {
-  const { lat, lon } = fromLocal(TEST_PLACE, { eastM, northM });
-  return [lon, lat];
-};
-const point = (eastM: number, northM: number) => ({ type: 'Point' as const, coordinates: spot(eastM, northM) });
 const save = (who: TestMember, ...changes: DrawingChange[]) =>
   inRequest(who.browser, () => saveDrawingAction(club.slug, { changes }));
 const stored = () => loadDrawn(steward.scope, reader());
@@ -48,57 +36,7 @@ function refused<T>(result: ActionResult<T>) {
   return result.error;
 }
 
-const newStand: DrawingChange = {
-  op: 'set',
-  kind: 'stand',
-  id: 'new-1',
-  version: 0,
-  name: 'Creek Bend',
-  geometry: point(100, 200),
-  what: 'ladder',
-  arcs: [{ fromDeg: 270, toDeg: 330, window: null }],
-};
-const newParking: DrawingChange = {
-  op: 'set',
-  kind: 'parking',
-  id: 'new-2',
-  version: 0,
-  name: 'Gate',
-  geometry: point(-300, -100),
-};
-const newWay: DrawingChange = {
-  op: 'set',
-  kind: 'approach',
-  id: 'new-3',
-  version: 0,
-  name: 'Ditch',
-  geometry: { type: 'LineString', coordinates: [spot(-250, -100), spot(0, 0), spot(60, 150)] },
-  standId: 'new-1',
-  parkingId: 'new-2',
-  direction: 'both',
-  vehicleToIndex: 1,
-};
-const newWood: DrawingChange = {
-  op: 'set',
-  kind: 'item',
-  id: 'new-4',
-  version: 0,
-  name: '',
-  geometry: { type: 'Polygon', coordinates: [[spot(0, 0), spot(50, 0), spot(50, 80), spot(0, 0)]] },
-  what: 'wood',
-  props: { cutYear: 2018 },
-};
-const newBed: DrawingChange = {
-  op: 'set',
-  kind: 'feature',
-  id: 'new-5',
-  version: 0,
-  name: 'Laurel',
-  geometry: point(220, 260),
-  what: 'bedding',
-};
-
-const drawAll = async () => saved(await save(steward, newWay, newStand, newWood, newParking, newBed)).ids;
+const drawAll = async () => saved(await save(steward, ...DRAWN)).ids;
 
 describe('saving a drawing', () => {
   it('saves things that name one another, whatever their order, each with an audit row', async () => {
@@ -250,47 +188,6 @@ describe('saving a drawing', () => {
     club = mine;
     const member = await addMember(club, 'member');
     expect(refused(await save(member, { ...newBed, id: 'new-8' })).code).toBe('forbidden');
-  });
-});
-
-describe('reading the map', () => {
-  const read = async (who: TestMember, path: string, route: typeof mapRoute | typeof momentRoute) => {
-    const request = new Request(`http://127.0.0.1/api/clubs/${club.slug}/${path}`);
-    return inRequest(who.browser, () => route(request, { params: Promise.resolve({ club: club.slug }) }));
-  };
-
-  it('gives members all that is drawn, and guests nothing of it', async () => {
-    await drawAll();
-    const view: MapView = await (await read(steward, 'map', mapRoute)).json();
-    expect(view.things.map(({ kind }) => kind)).toEqual(['item', 'feature', 'approach', 'parking', 'stand']);
-    expect(view.may).toEqual({ stands: true, features: true, approaches: true });
-    expect(view.imagery).toBeNull();
-    // Near Atlanta magnetic north lies some five degrees west (NOAA's declination map; value from memory).
-    expect(view.declinationDeg).toBeGreaterThan(-7);
-    expect(view.declinationDeg).toBeLessThan(-4);
-    const guest = await addMember(club, 'guest', { guestFrom: '2026-11-01', guestTo: '2026-11-30' });
-    expect((await read(guest, 'map', mapRoute)).status).toBe(403);
-  });
-
-  it('lays a moment over it: scent from the core, the walk in pieces, and who sits', async () => {
-    const ids = await drawAll();
-    const sitter = await addMember(club, 'member', { name: 'Moss Hale' });
-    const stand = ids['new-1'] ?? '';
-    await book(sitter, stand, { day: '2026-11-06', windows: 'morning' });
-    const ask = { stand, day: '2026-11-06', window: 'morning' as const, step: 2 };
-    const view = await readMoment(steward.scope, ask, TEST_NOW, { forecast: steady(270) });
-    expect(view.step).toBe(2);
-    expect(view.wind?.speedMps).toBeGreaterThan(0);
-    expect(view.bands.length).toBeGreaterThan(0);
-    const levels = view.bands.map(({ level }) => level);
-    expect(levels).toEqual(levels.toSorted((a, b) => a - b));
-    expect(view.way?.stretches.length).toBeGreaterThan(5);
-    for (const { chance } of view.way?.stretches ?? [])
-      expect(chance).toBeLessThanOrEqual((view.way?.inChance ?? 0) + 1e-9);
-    expect(view.sitters).toMatchObject([{ standName: 'Creek Bend', name: 'Moss Hale' }]);
-    const status = async (query: string) => (await read(steward, `map/moment?${query}`, momentRoute)).status;
-    expect(await status('stand=std_none&day=2026-11-06&window=morning')).toBe(404);
-    expect(await status(`stand=${stand}&day=2026-13-06&window=morning`)).toBe(400);
   });
 
   it('tells in the audit log what differs, before and after', async () => {
