@@ -9,6 +9,7 @@ import { deleteOldNoticeLinks } from '@/features/notices/choices-data';
 import { deleteOldOutlooks } from '@/features/notices/outlooks-data';
 import { remindEvening } from '@/features/notices/remind-evening';
 import { sendWeekly } from '@/features/notices/send-weekly';
+import { tellDraws } from '@/features/notices/tell-draws';
 import { tellRested } from '@/features/notices/tell-rested';
 import { tellRulesChanged } from '@/features/notices/tell-rules-changed';
 import { tellWindTurned } from '@/features/notices/tell-wind-turned';
@@ -66,6 +67,14 @@ export const JOBS: readonly Job[] = [
     everyMs: 10 * MINUTE,
     run: async (now) => {
       const { told } = await tellRulesChanged(now);
+      return `${told} told`;
+    },
+  },
+  {
+    name: 'tell-draws',
+    everyMs: 10 * MINUTE,
+    run: async (now) => {
+      const { told } = await tellDraws(now);
       return `${told} told`;
     },
   },

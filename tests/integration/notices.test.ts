@@ -297,7 +297,7 @@ describe('stopping mail', () => {
     expect((await press(secret)).status).toBe(204);
     expect((await press(secret)).status).toBe(204);
     const { kinds } = await findChoices(ann.scope, ann.id);
-    expect(kinds).toEqual(['evening_before', 'rules_changed']);
+    expect(kinds).toEqual(['evening_before', 'rules_changed', 'draw_changed']);
     expect(await readNoticeLink(secret)).toMatchObject({ kind: 'wind_turned', stopped: true });
   });
 

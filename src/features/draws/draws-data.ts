@@ -36,7 +36,7 @@ export async function updateDraw(scope: ClubScope, tx: Tx, id: string, set: Part
 /** Entries of people still in the club, by name, with what became of their sits. */
 export function listEntries(scope: ClubScope, drawId: string, from: ReadFrom = reader()) {
   return from
-    .select({ entry: drawEntries, name: users.name, sitStatus: sits.status })
+    .select({ entry: drawEntries, userId: users.id, name: users.name, sitStatus: sits.status })
     .from(drawEntries)
     .innerJoin(memberships, eq(memberships.id, drawEntries.memberId))
     .innerJoin(users, eq(users.id, memberships.userId))

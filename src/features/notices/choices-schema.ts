@@ -42,6 +42,10 @@ export const KIND_WORDS: Record<NoticeKind, { label: string; note: string }> = {
   },
   rest_over: { label: 'A stand has had its rest', note: 'In the morning, once for each stand.' },
   rules_changed: { label: "The club's rules change", note: 'What it said before and says now.' },
+  draw_changed: {
+    label: 'A draw opens, is published or called off',
+    note: 'What I drew and why, and when a swap is offered to me.',
+  },
   weekly: {
     label: 'A letter each Thursday',
     note: 'My sits, closed stands, my chores and work days of the week ahead.',
@@ -54,5 +58,6 @@ export const KIND_PHRASES: Record<NoticeKind, string> = {
   evening_before: 'the evening before a sit',
   rest_over: 'stands that have had their rest',
   rules_changed: "changes of the club's rules",
+  draw_changed: 'draws of stands',
   weekly: 'the week ahead',
 };

@@ -5,6 +5,7 @@ const NEEDS: Partial<Record<NoticeKind, Permission>> = {
   wind_turned: 'sits.book',
   evening_before: 'sits.book',
   rest_over: 'stands.read',
+  draw_changed: 'draws.enter',
 };
 
 /** Kinds of notice that can ever reach a role. */
