@@ -16,9 +16,12 @@ async function overflow(page: Page): Promise<string> {
   });
 }
 
+/** Changes the light and waits until the new colours are drawn: colours half way are nobody's fault. */
 async function inLight(page: Page, light: 'day' | 'dark' | 'dim'): Promise<void> {
-  await page.evaluate((name) => {
+  await page.evaluate(async (name) => {
     document.documentElement.dataset.light = name;
+    for (const _ of [1, 2]) await new Promise((drawn) => requestAnimationFrame(drawn));
+    await Promise.allSettled(document.getAnimations().map((moving) => moving.finished));
   }, light);
 }
 
