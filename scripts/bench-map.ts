@@ -47,7 +47,10 @@ try {
   const { page } = await newVisitor(browser, app.url, { width: 1280, height: 800 });
   await signInDemo(page, 'abel');
   const began = performance.now();
-  await page.goto('/clubs/tansy-fork/ground');
+  await page.goto('/clubs/tansy-fork/ground', { waitUntil: 'commit' });
+  console.log(`The server answers after ${Math.round(performance.now() - began)} ms`);
+  await page.waitForLoadState('domcontentloaded');
+  console.log(`The page is there after ${Math.round(performance.now() - began)} ms`);
   await page.locator('.m-map canvas').first().waitFor();
   console.log(`Map of ${FEATURES} features on the screen after ${Math.round(performance.now() - began)} ms`);
   // As text: the tool that runs this file would weave helpers of its own into a function.

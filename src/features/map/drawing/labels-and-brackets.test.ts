@@ -33,6 +33,21 @@ describe('labels', () => {
     );
   });
 
+  it('write what is chosen even on a mark, but on no other word', () => {
+    const marks = Array.from({ length: 400 }, (_, i) => ({ x: (i % 20) * 20, y: Math.floor(i / 20) * 20, clear: 10 }));
+    const wish = { x: 200, y: 200, width: 80, height: 16, clear: 6 };
+    expect(placeLabels([{ ...wish, id: 'a' }], marks)).toEqual([]);
+    const both = placeLabels(
+      [
+        { ...wish, id: 'a', must: true },
+        { ...wish, id: 'b', must: true },
+      ],
+      marks,
+    );
+    expect(both.map(({ id }) => id)).toEqual(['a', 'b']);
+    expect(both[0]).not.toEqual({ ...both[1], id: 'a' });
+  });
+
   it('give the first in the list the first choice, and leave out what fits nowhere', () => {
     const crowd = Array.from({ length: 30 }, (_, i) => ({
       id: String(i),

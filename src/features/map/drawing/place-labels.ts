@@ -9,6 +9,8 @@ export interface LabelWish {
   clear: number;
   /** Over the spot itself, as in the middle of a field. */
   centred?: boolean;
+  /** Written even where it lies on a mark: what a person has chosen. */
+  must?: boolean;
 }
 
 export interface PlacedLabel {
@@ -26,6 +28,8 @@ interface Box {
 }
 
 const CELL = 64;
+
+const apart = (a: Box, b: Box) => a.left >= b.right || b.left >= a.right || a.top >= b.bottom || b.top >= a.bottom;
 
 /** Boxes by the squares of the screen they touch: a label is held only against its neighbours. */
 class Taken {
@@ -48,8 +52,7 @@ class Taken {
   free(box: Box): boolean {
     for (const key of this.keys(box)) {
       for (const other of this.cells.get(key) ?? []) {
-        if (box.left < other.right && other.left < box.right && box.top < other.bottom && other.top < box.bottom)
-          return false;
+        if (!apart(box, other)) return false;
       }
     }
     return true;
@@ -84,15 +87,19 @@ export function placeLabels(
   for (const { x, y, clear } of marks)
     taken.add({ left: x - clear, top: y - clear, right: x + clear, bottom: y + clear });
   const placed: PlacedLabel[] = [];
+  const written: Box[] = [];
   for (const wish of wishes) {
-    for (const [left, top] of spots(wish)) {
-      const box = { left, top, right: left + wish.width, bottom: top + wish.height };
-      if (screen && (left < 0 || top < 0 || box.right > screen.width || box.bottom > screen.height)) continue;
-      if (!taken.free(box)) continue;
-      taken.add(box);
-      placed.push({ id: wish.id, left, top });
-      break;
-    }
+    const boxes = [...spots(wish)]
+      .map(([left, top]): Box => ({ left, top, right: left + wish.width, bottom: top + wish.height }))
+      .filter(
+        (box) => !screen || (box.left >= 0 && box.top >= 0 && box.right <= screen.width && box.bottom <= screen.height),
+      );
+    const words = (box: Box) => written.every((other) => apart(box, other));
+    const box = boxes.find((one) => taken.free(one)) ?? (wish.must ? boxes.find(words) : undefined);
+    if (!box) continue;
+    taken.add(box);
+    written.push(box);
+    placed.push({ id: wish.id, left: box.left, top: box.top });
   }
   return placed;
 }

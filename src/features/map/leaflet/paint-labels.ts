@@ -45,7 +45,7 @@ export function paintLabels(map: L.Map) {
   function wishOf(thing: MapThing, zoom: number): LabelWish | null {
     const text = thing.kind === 'feature' && thing.crop ? `${thing.name}: ${thing.crop}` : thing.name;
     if (text === '' || (thing.kind === 'approach' && zoom < WAYS_FROM_ZOOM)) return null;
-    const size = { id: thing.id, width: widthOf(text), height: HEIGHT_PX };
+    const size = { id: thing.id, width: widthOf(text), height: HEIGHT_PX, must: thing.id === selectedId };
     if (thing.geometry.type === 'Point') {
       const [lon = 0, lat = 0] = thing.geometry.coordinates;
       const { x, y } = map.latLngToContainerPoint([lat, lon]);

@@ -67,6 +67,8 @@ interface Painted {
   thing: MapThing;
   dense: boolean;
   group: L.LayerGroup;
+  /** How it was dressed last: only what differs is dressed again. */
+  dress: string;
 }
 
 export interface PainterEvents {
@@ -142,7 +144,11 @@ export function paintThings(map: L.Map, centre: LatLon, events: PainterEvents, l
     return group.addTo(map);
   }
 
-  function mark({ thing, group, dense }: Painted, selected: boolean, faint: boolean, inks: Inks) {
+  function mark(one: Painted, selected: boolean, faint: boolean, inks: Inks) {
+    const { thing, group, dense } = one;
+    const dress = `${selected} ${faint} ${dense ? inks.ink : ''}`;
+    if (one.dress === dress) return;
+    one.dress = dress;
     group.eachLayer((layer) => {
       const element = layer instanceof L.Path || layer instanceof L.Marker ? layer.getElement() : null;
       if (element && !element.classList.contains('m-hit')) {
@@ -168,7 +174,13 @@ export function paintThings(map: L.Map, centre: LatLon, events: PainterEvents, l
         painted.delete(id);
       }
       for (const thing of shown.values()) {
-        if (!painted.has(thing.id)) painted.set(thing.id, { thing, dense, group: draw(thing, dense, state.inks) });
+        if (!painted.has(thing.id))
+          painted.set(thing.id, {
+            thing,
+            dense,
+            group: draw(thing, dense, state.inks),
+            dress: `false false ${dense ? state.inks.ink : ''}`,
+          });
       }
       for (const one of painted.values())
         mark(one, one.thing.id === state.selectedId, state.faint.has(one.thing.id), state.inks);
