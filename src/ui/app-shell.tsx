@@ -26,7 +26,7 @@ export function AppShell({ items, home, light, club, account, offlineMark, child
   return (
     <div className="min-h-dvh md:grid md:grid-cols-[14rem_minmax(0,1fr)] print:block">
       <SkipLink />
-      <header className="sticky top-0 hidden h-dvh flex-col gap-4 overflow-y-auto border-rule border-r px-5 py-5 md:flex print:hidden">
+      <header className="sticky top-0 hidden h-dvh flex-col gap-3 overflow-y-auto border-rule border-r px-5 py-4 md:flex print:hidden">
         <Link href={home} className="self-start rounded-sm no-underline" aria-label="Windrest, first page">
           <Wordmark className="text-[1.7rem]" />
         </Link>

@@ -31,7 +31,7 @@ export function RailLinks({ items }: { items: readonly NavItem[] }) {
           <Link
             href={item.href}
             aria-current={item.href === current ? 'page' : undefined}
-            className="group flex min-h-10 items-center gap-2 py-1 pl-2 font-serif no-underline hover:bg-sunk aria-[current=page]:font-semibold"
+            className="group flex min-h-9 items-center gap-2 py-0.5 pl-2 font-serif no-underline hover:bg-sunk aria-[current=page]:font-semibold"
           >
             <span
               aria-hidden="true"
