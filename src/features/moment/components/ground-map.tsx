@@ -21,7 +21,8 @@ const MapScreen = dynamic(() => import('@/features/map/components/map-screen').t
 });
 
 export interface GroundMapProps {
-  initial: MapView;
+  /** The map as JSON text: a page that carries thousands of shapes as parts of its own tree takes seconds to write. */
+  packed: string;
   zone: string;
   save: SaveDrawing;
   selectedId: string | null;
@@ -39,7 +40,8 @@ function overlayOf(view: MomentView): MapOverlay {
 }
 
 /** The club's map with what a moment lays over it. The map's own code comes when this is first shown. */
-export function GroundMap({ initial, zone, save, selectedId, next }: GroundMapProps) {
+export function GroundMap({ packed, zone, save, selectedId, next }: GroundMapProps) {
+  const [initial] = useState((): MapView => JSON.parse(packed));
   const { slug, units } = initial.club;
   const map = useQuery({ ...mapQuery(slug), initialData: initial, initialDataUpdatedAt: initial.madeAt });
   const stands = useMemo(

@@ -33,7 +33,7 @@ export default clubPage('features.read', async ({ scope, search }) => {
         }
       />
       <GroundMap
-        initial={map}
+        packed={JSON.stringify(map)}
         zone={scope.club.zone}
         save={saveDrawingAction}
         selectedId={typeof search.select === 'string' ? search.select : null}
