@@ -5,15 +5,15 @@ import { join } from 'node:path';
 import { type Client, createClient } from '@libsql/client';
 import { closeDatabase, useDatabase as pointAt } from '@/db/client';
 
-/** Counts that a refused call may raise: how often somebody has tried. */
-const COUNTERS = ['rate_limits'];
+/** What a refused call may leave: how often somebody has tried, and weather fetched to judge by. Neither is of the body. */
+const NOT_OF_THE_BODY = ['rate_limits', 'forecasts'];
 
 export interface SnapshotDatabase {
   /** Points the process at a fresh copy of the database as it was. */
   reset(): Promise<void>;
   /** Changes whenever another connection commits. */
   version(): Promise<number>;
-  /** A digest of every row but the counters of tries. */
+  /** A digest of every row but those of NOT_OF_THE_BODY. */
   digest(): Promise<string>;
   close(): Promise<void>;
 }
@@ -53,7 +53,7 @@ export async function keepDatabase(url: string): Promise<SnapshotDatabase> {
       const tables = await own().execute("SELECT name FROM sqlite_schema WHERE type = 'table' ORDER BY name");
       const hash = createHash('sha256');
       for (const { name } of tables.rows) {
-        if (COUNTERS.includes(String(name))) continue;
+        if (NOT_OF_THE_BODY.includes(String(name))) continue;
         const { rows } = await own().execute(`SELECT * FROM "${name}" ORDER BY rowid`);
         hash.update(`${name} ${JSON.stringify(rows)}`);
       }
