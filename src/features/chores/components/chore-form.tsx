@@ -3,8 +3,8 @@
 import { useRouter } from 'next/navigation';
 import { useMemo } from 'react';
 import { useWatch } from 'react-hook-form';
-import { HereButton } from '@/features/ground/components/here-button';
 import type { FormClub } from '@/features/ground/form-club';
+import { PlaceChoice } from '@/features/logs/components/place-choice';
 import type { PlaceChoices } from '@/features/logs/visit-places';
 import type { ActionResult } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -57,32 +57,17 @@ export function ChoreFormView({ club, formClub, values, people, places, at, add,
         {...register('assigneeId')}
         error={errorOf('assigneeId')}
       />
-      <Select label="Where" placeholder="No one place" {...register('place')} error={errorOf('place')}>
-        {groups.map((group) => (
-          <optgroup key={group.label} label={group.label}>
-            {group.options.map((option) => (
-              <option key={option.value} value={option.value}>
-                {option.label}
-              </option>
-            ))}
-          </optgroup>
-        ))}
-        <option value="point">Another place, by its position</option>
-      </Select>
-      {place === 'point' && (
-        <div className="flex flex-col gap-4">
-          <div className="grid gap-4 sm:grid-cols-2">
-            <TextInput label="Latitude" inputMode="decimal" {...register('lat')} error={errorOf('lat')} />
-            <TextInput label="Longitude" inputMode="decimal" {...register('lon')} error={errorOf('lon')} />
-          </div>
-          <HereButton
-            onPlace={({ lat, lon }) => {
-              form.setValue('lat', lat, { shouldDirty: true });
-              form.setValue('lon', lon, { shouldDirty: true });
-            }}
-          />
-        </div>
-      )}
+      <PlaceChoice
+        placeholder="No one place"
+        groups={groups}
+        byPosition={place === 'point'}
+        fields={{ place: register('place'), lat: register('lat'), lon: register('lon') }}
+        errorOf={errorOf}
+        onHere={({ lat, lon }) => {
+          form.setValue('lat', lat, { shouldDirty: true });
+          form.setValue('lon', lon, { shouldDirty: true });
+        }}
+      />
       <DateInput label="Due" optional {...register('dueOn')} error={errorOf('dueOn')} />
       <Textarea label="Notes" optional rows={3} {...register('notes')} error={errorOf('notes')} />
       <SubmitRow label={at ? 'Save chore' : 'Add chore'} pending={pending} pendingLabel="Saving…">

@@ -3,7 +3,6 @@
 import { useRouter } from 'next/navigation';
 import { useMemo } from 'react';
 import { useController, useWatch } from 'react-hook-form';
-import { HereButton } from '@/features/ground/components/here-button';
 import type { FormClub } from '@/features/ground/form-club';
 import type { ActionResult } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -11,10 +10,11 @@ import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-offline';
 import { Stepper } from '@/ui/stepper';
-import { DateInput, Select, Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
+import { DateInput, Select, Textarea, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { PlaceChoices } from '../visit-places';
 import { makeVisitSchema, VISIT_KINDS, VISIT_WORDS, type VisitForm } from '../visit-schema';
+import { PlaceChoice } from './place-choice';
 
 export interface VisitFormProps {
   club: string;
@@ -59,32 +59,17 @@ export function VisitFormView({ club, formClub, values, places, add }: VisitForm
         <DateInput label="Day" {...register('day')} error={errorOf('day')} />
         <TimeInput label="Time" {...register('clock')} error={errorOf('clock')} />
       </div>
-      <Select label="Where" placeholder="Choose a place" {...register('place')} error={errorOf('place')}>
-        {groups.map((group) => (
-          <optgroup key={group.label} label={group.label}>
-            {group.options.map((option) => (
-              <option key={option.value} value={option.value}>
-                {option.label}
-              </option>
-            ))}
-          </optgroup>
-        ))}
-        <option value="point">Another place, by its position</option>
-      </Select>
-      {place === 'point' && (
-        <div className="flex flex-col gap-4">
-          <div className="grid gap-4 sm:grid-cols-2">
-            <TextInput label="Latitude" inputMode="decimal" {...register('lat')} error={errorOf('lat')} />
-            <TextInput label="Longitude" inputMode="decimal" {...register('lon')} error={errorOf('lon')} />
-          </div>
-          <HereButton
-            onPlace={({ lat, lon }) => {
-              form.setValue('lat', lat, { shouldDirty: true });
-              form.setValue('lon', lon, { shouldDirty: true });
-            }}
-          />
-        </div>
-      )}
+      <PlaceChoice
+        placeholder="Choose a place"
+        groups={groups}
+        byPosition={place === 'point'}
+        fields={{ place: register('place'), lat: register('lat'), lon: register('lon') }}
+        errorOf={errorOf}
+        onHere={({ lat, lon }) => {
+          form.setValue('lat', lat, { shouldDirty: true });
+          form.setValue('lon', lon, { shouldDirty: true });
+        }}
+      />
       <Stepper
         label="Deer bumped"
         name={bumped.name}
