@@ -17,7 +17,7 @@ export const BOTTOM_STANDS: readonly DemoStand[] = [
     morning: 'prime',
     evening: 'usable',
     drain: { bearingDeg: 180, slopePercent: 4 },
-    notes: 'The safe morning place: water in the timber, off the end of the plot.',
+    notes: 'Water in the timber: deer come by in daylight. The walk past Fence Gap is what it costs.',
   },
   {
     key: 'hourglass',
