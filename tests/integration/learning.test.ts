@@ -78,6 +78,9 @@ describe('predictions kept for the log', () => {
     expect(a.kept + b.kept).toBe(1);
     const [row] = await reader().select().from(sitPredictions).where(eq(sitPredictions.clubId, made.club.id));
     expect(row).toMatchObject({ standId: made.west, adjustedBy: 0, at: TEST_NOW });
+    expect(Math.abs((row?.windFromDeg ?? Number.NaN) - 270)).toBeLessThan(5);
+    expect(row?.score).toBeGreaterThan(0);
+    expect(row?.score).toBeLessThanOrEqual(100);
     expect(row?.quiet).toBeGreaterThan(0);
     expect(await keepPredictions(TEST_NOW, forecastOf)).toEqual({ kept: 0 });
   });

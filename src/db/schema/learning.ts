@@ -20,6 +20,10 @@ export const sitPredictions = sqliteTable(
     quiet: real().notNull(),
     /** Points of that adjustment; 0: none. */
     adjustedBy: real().notNull().default(0),
+    /** Sit score of the same window, 0-100; null: kept before scores were. */
+    score: real(),
+    /** Mean direction the wind was to come from in it; null: none, or kept before winds were. */
+    windFromDeg: real(),
     at: integer().notNull(),
   },
   (t) => [index('sit_predictions_by_club').on(t.clubId, t.at)],

@@ -19,11 +19,11 @@ export type ForecastOf = (scope: ClubScope, now: number) => Promise<KeptForecast
 
 const keptForecast: ForecastOf = ({ club: { lat, lon } }, now) => getForecast({ lat, lon }, now);
 
-/** The quiet of a sit, of its louder window, and the adjustment in it; null: the forecast does not reach it. */
+/** What is thought of a sit in its louder window, and the adjustment in it; null: the forecast does not reach it. */
 async function predict(scope: ClubScope, sit: UnpredictedSit, kept: KeptForecast) {
   const { club } = scope;
   const held = windowsHeld(sit.windows);
-  const found: { quiet: number; adjustedBy: number }[] = [];
+  const found: { quiet: number; adjustedBy: number; score: number; windFromDeg: number | null }[] = [];
   for (const name of WINDOW_NAMES.filter((one) => held.includes(one))) {
     const window = sitWindow(sit.day, name, club.rules, club);
     const now = window.startAt - SET_OUT_MS;
@@ -40,7 +40,10 @@ async function predict(scope: ClubScope, sit: UnpredictedSit, kept: KeptForecast
       detail: 'list',
     });
     if (!verdict?.arcHold && verdict?.windedChance === null) return null;
-    if (verdict) found.push({ quiet: verdict.quiet, adjustedBy: stands[0]?.quietShift ?? 0 });
+    if (verdict) {
+      const { quiet, score, meanFromDeg: windFromDeg = null } = verdict;
+      found.push({ quiet, adjustedBy: stands[0]?.quietShift ?? 0, score, windFromDeg });
+    }
   }
   return found.sort((a, b) => a.quiet - b.quiet)[0] ?? null;
 }
