@@ -8,6 +8,7 @@ import { log } from '@/server/log';
 import { claimForecastRow, findForecastRow, finishForecastRow } from './data';
 import { packForecast } from './pack-forecast';
 import { placeKey, roundPlace } from './place-key';
+import { WEATHER_WORDS } from './words';
 
 const HOUR_MS = 3_600_000;
 /** One request a place an hour, whoever asks; after failures the wait doubles up to this. */
@@ -87,6 +88,6 @@ async function ask(port: WeatherPort, place: WeatherPlace, signal?: AbortSignal)
     return await port.forecast(roundPlace(place), signal);
   } catch (error) {
     log.error({ err: error }, 'the weather port threw');
-    return weatherFailure('unavailable', 'The weather cannot be read.');
+    return weatherFailure('unavailable', WEATHER_WORDS.cannotBeRead);
   }
 }

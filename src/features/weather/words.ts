@@ -1,0 +1,3 @@
+export const WEATHER_WORDS = {
+  cannotBeRead: 'The weather cannot be read.',
+} as const;
