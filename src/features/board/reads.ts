@@ -7,11 +7,11 @@ import { type ApproachRow, listApproaches } from '@/features/ground/approaches-d
 import { listParkings } from '@/features/ground/parkings-data';
 import { listLastVehicles, listOpenOutings, listOutingsOf, type OutingDetail } from '@/features/outings/data';
 import { listLinkedOutings } from '@/features/outings/links-data';
-import { backByText, clockBeside, lastSignText, STATE_WORDS } from '@/features/outings/outing-words';
 import { listSteps, type OverdueStepRow } from '@/features/outings/overdue-data';
 import { readContact } from '@/features/outings/read-contact';
 import { signInProblem } from '@/features/outings/sign-in';
 import { expectedBackBy } from '@/features/outings/walk-out';
+import { backByText, clockBeside, lastSignText, STATE_WORDS } from '@/features/outings/words/outing';
 import type { ClubScope } from '@/server/scope';
 import { walkUpOffer } from './walk-up-offer';
 

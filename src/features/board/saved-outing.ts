@@ -1,5 +1,5 @@
 import type { OutingDetail } from '@/features/outings/data';
-import { clockBeside } from '@/features/outings/outing-words';
+import { clockBeside } from '@/features/outings/words/outing';
 import type { ClubScope } from '@/server/scope';
 
 /** What an action answers: enough to say what was done. */

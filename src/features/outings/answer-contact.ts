@@ -8,9 +8,9 @@ import type { AnswerContactInput } from './contact-schema';
 import { findContactBySecret, findMemberOfContact, updateContact } from './contacts-data';
 import { findLiveLink } from './links-data';
 import { findUserOfMember } from './overdue-data';
+import { CONTACT_AUDIT, CONTACT_ERRORS } from './words/contact';
 
-const dead = () =>
-  new AppError('not_found', 'This link no longer works. Ask the person who named you to have it sent again.');
+const dead = () => new AppError('not_found', CONTACT_ERRORS.dead);
 
 /** By the link that asked, or by that of an overdue mail. */
 async function findAsked(secret: string, now: number, from: ReadFrom) {
@@ -37,7 +37,7 @@ export async function answerContact(input: AnswerContactInput, now: number): Pro
       ...(agreed ? {} : { expiresAt: Math.max(contact.expiresAt, now + 24 * 3_600_000) }),
     });
     await mailContactAnswer(tx, member, contact, agreed, now);
-    const summary = `The safety contact of ${member.name} ${agreed ? 'agreed' : 'said no'}.`;
+    const summary = CONTACT_AUDIT.answered(member.name, agreed);
     await audit(
       tx,
       {

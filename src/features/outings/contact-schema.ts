@@ -1,13 +1,14 @@
 import { z } from 'zod';
 import { emailField } from '@/features/accounts/account-schema';
+import { CONTACT_ERRORS } from './words/contact';
 
 export const saveContactSchema = z.object({
   name: z
     .string()
     .trim()
-    .min(1, 'Write the name of the person to tell.')
-    .max(60, 'Use at most 60 characters.')
-    .refine((name) => !/[\p{Cc}\p{Cf}<>]/u.test(name), 'Use letters, digits and plain signs only.'),
+    .min(1, CONTACT_ERRORS.name)
+    .max(60, CONTACT_ERRORS.nameLong)
+    .refine((name) => !/[\p{Cc}\p{Cf}<>]/u.test(name), CONTACT_ERRORS.nameSigns),
   email: emailField,
 });
 export type SaveContactInput = z.output<typeof saveContactSchema>;
@@ -16,7 +17,7 @@ export const switchContactSchema = z.object({ off: z.boolean() });
 export type SwitchContactInput = z.output<typeof switchContactSchema>;
 
 export const answerContactSchema = z.object({
-  secret: z.string().regex(/^[\w-]{20,60}$/, 'This link is not whole. Open it from the mail again.'),
-  answer: z.enum(['yes', 'no'], { error: 'Answer yes or no.' }),
+  secret: z.string().regex(/^[\w-]{20,60}$/, CONTACT_ERRORS.secret),
+  answer: z.enum(['yes', 'no'], { error: CONTACT_ERRORS.answer }),
 });
 export type AnswerContactInput = z.output<typeof answerContactSchema>;

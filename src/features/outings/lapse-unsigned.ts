@@ -8,6 +8,7 @@ import { dayAndWindow } from '@/features/bookings/sit-words';
 import { audit } from '@/server/audit';
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { listOutingsOf, listUnsignedSits } from './data';
+import { OUTING_AUDIT } from './words/sign';
 
 /** Lapses a sit if it still stands unsigned past its hold: claims freed, record kept, member told, in one change. */
 async function lapseSit(scope: ClubScope, sitId: string, now: number): Promise<boolean> {
@@ -27,7 +28,7 @@ async function lapseSit(scope: ClubScope, sitId: string, now: number): Promise<b
         action: 'sit.lapsed',
         subjectType: 'sit',
         subjectId: sit.id,
-        summary: `The sit of ${sit.memberName} at ${sit.standName} lapsed, unsigned: ${dayAndWindow(sit.day, sit.windows, true)}.`,
+        summary: OUTING_AUDIT.lapsed(sit.memberName, sit.standName, dayAndWindow(sit.day, sit.windows, true)),
         detail: { standId: sit.standId, memberId: sit.memberId, holdMinutes: scope.club.rules.holdMinutes },
       },
       now,

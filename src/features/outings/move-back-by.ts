@@ -7,6 +7,7 @@ import { findOuting, type OutingDetail, updateOpenOuting } from './data';
 import type { MoveBackByInput } from './outing-schema';
 import { refuseStranger } from './sign-in';
 import { queueStandDown } from './stand-down';
+import { OUTING_AUDIT, SIGN_IN_ERRORS, STRANGER_ERRORS } from './words/sign';
 
 const ROUND_MS = 5 * 60_000;
 
@@ -20,10 +21,10 @@ export async function moveBackBy(scope: ClubScope, input: MoveBackByInput, now: 
   return write(async (tx) => {
     const outing = await findOuting(scope, input.outingId, tx);
     if (!outing) throw notFound();
-    refuseStranger(scope, outing, 'move the back-by time');
+    refuseStranger(scope, outing, STRANGER_ERRORS.move);
     if (outing.signedOutAt !== null) {
       const at = clockText(outing.signedOutAt, scope.club);
-      throw new AppError('conflict', `${outing.memberName} signed out at ${at}.`);
+      throw new AppError('conflict', SIGN_IN_ERRORS.signedOut(outing.memberName, at));
     }
     const backBy = laterBackBy(outing.backBy, Number(input.minutes), now);
     const set = { backBy, tracking: input.tracking, moves: outing.moves + 1, lastSignAt: now };
@@ -31,8 +32,8 @@ export async function moveBackBy(scope: ClubScope, input: MoveBackByInput, now: 
     const after = { ...outing, ...set };
     const from = clockText(outing.backBy, scope.club);
     const to = clockText(backBy, scope.club);
-    const why = input.tracking ? ': tracking a deer' : '';
-    const summary = `Moved the back-by time of ${outing.memberName} at ${outing.standName} from ${from} to ${to}${why}.`;
+    const { memberName: member, standName: stand } = outing;
+    const summary = OUTING_AUDIT.moved({ member, stand, from, to, tracking: input.tracking });
     await auditOuting(
       tx,
       scope,

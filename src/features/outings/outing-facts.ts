@@ -1,6 +1,7 @@
 import { dayAndWindow } from '@/features/bookings/sit-words';
 import type { OutingDetail } from './data';
-import { backByText, clockAndDay, lastSignText } from './outing-words';
+import { backByText, clockAndDay, lastSignText } from './words/outing';
+import { OUTING_FACTS } from './words/sign';
 
 interface Club {
   zone: string;
@@ -9,18 +10,19 @@ interface Club {
 
 /** What somebody looking for a person needs, most useful first. No position. */
 export function outingFacts(outing: OutingDetail, club: Club): { label: string; value: string }[] {
+  const words = OUTING_FACTS;
   const say = (at: number) => clockAndDay(at, club);
   return [
-    { label: 'Stand', value: outing.standName },
-    { label: 'Way in', value: outing.approachName ?? 'Not said' },
-    { label: 'Parked at', value: outing.parkingName ?? 'Not said' },
-    { label: 'Vehicle', value: outing.vehicle || 'Not said' },
+    { label: words.stand, value: outing.standName },
+    { label: words.wayIn, value: outing.approachName ?? words.notSaid },
+    { label: words.parking, value: outing.parkingName ?? words.notSaid },
+    { label: words.vehicle, value: outing.vehicle || words.notSaid },
     ...(outing.guests.length > 0
-      ? [{ label: 'With', value: outing.guests.map((guest) => guest.name).join(', ') }]
+      ? [{ label: words.guests, value: outing.guests.map((guest) => guest.name).join(', ') }]
       : []),
-    { label: 'Sit', value: dayAndWindow(outing.day, outing.windows, true) },
-    { label: 'Signed in', value: say(outing.signedInAt) },
-    { label: 'Back by', value: backByText(outing, say) },
-    { label: 'Last sign', value: lastSignText(outing, say) },
+    { label: words.sit, value: dayAndWindow(outing.day, outing.windows, true) },
+    { label: words.signedIn, value: say(outing.signedInAt) },
+    { label: words.backBy, value: backByText(outing, say) },
+    { label: words.lastSign, value: lastSignText(outing, say) },
   ];
 }

@@ -6,10 +6,8 @@ import { queueMail } from '@/server/outbox';
 import type { ClubScope } from '@/server/scope';
 import type { OutingDetail } from './data';
 import { outingFacts } from './outing-facts';
-import { clockAndDay } from './outing-words';
-
-const NO_RESCUE =
-  'Windrest is no rescue service, and this mail sends nobody. When somebody may be hurt, call the emergency number.';
+import { clockAndDay } from './words/outing';
+import { OVERDUE_MAIL } from './words/overdue';
 
 export interface OverdueReader {
   /** Of the membership, or 'contact': one mail a step and reader. */
@@ -33,36 +31,32 @@ function wordsFor(scope: ClubScope, step: OverdueStep, outing: OutingDetail, mor
   const { memberName, standName } = outing;
   const back = clockAndDay(outing.backBy, scope.club);
   if (step === 'member') {
+    const words = OVERDUE_MAIL.member;
     return {
-      subject: `Are you out? Back by ${back}`,
-      opening: `You said you would be back from ${standName} by ${back}, and have not signed out.`,
-      button: { label: 'Sign out, or move the time', url: boardUrl(scope) },
-      after: ['If nobody hears from you, the club officers and then your safety contact are told.'],
-      footer: 'You get this because you are signed in on the board.',
+      subject: words.subject(back),
+      opening: words.opening(standName, back),
+      button: { label: words.button, url: boardUrl(scope) },
+      after: [words.after],
+      footer: words.footer,
     };
   }
   if (step === 'officers') {
+    const words = OVERDUE_MAIL.officers;
     return {
-      subject: `Overdue: ${memberName} at ${standName}`,
-      opening: `${memberName} was to be back by ${back} and has not signed out.`,
-      button: { label: 'Open the board', url: boardUrl(scope) },
-      after: [
-        'Most often a sign-out was forgotten: call first, then look for the vehicle where it was parked.',
-        more,
-        'On the board you can sign them out once you know that they are safe. It never closes by itself.',
-      ],
-      footer: `You get this because you are an officer of ${scope.club.name}.`,
+      subject: words.subject(memberName, standName),
+      opening: words.opening(memberName, back),
+      button: { label: words.button, url: boardUrl(scope) },
+      after: [words.call, more, words.signOut],
+      footer: words.footer(scope.club.name),
     };
   }
+  const words = OVERDUE_MAIL.contact;
   return {
-    subject: `Overdue: ${memberName}, ${scope.club.name}`,
-    opening: `${memberName} named you to be told: they were to be back from a deer stand by ${back} and have not signed out. The club's officers have been told.`,
-    button: { label: 'See where they went', url: more },
-    after: [
-      'Most often a sign-out was forgotten: call them first.',
-      'The link needs no account and works for three days. Whoever has it can open the page: pass it only to those who help.',
-    ],
-    footer: `You get this because you agreed to be the safety contact of ${memberName}. The page lets you stop.`,
+    subject: words.subject(memberName, scope.club.name),
+    opening: words.opening(memberName, back),
+    button: { label: words.button, url: more },
+    after: [words.call, words.link],
+    footer: words.footer(memberName),
   };
 }
 
@@ -80,7 +74,7 @@ export async function queueOverdueMail(
     paragraphs: [opening],
     facts: outingFacts(outing, scope.club),
     button,
-    after: [...after.filter((line) => line !== ''), NO_RESCUE],
+    after: [...after.filter((line) => line !== ''), OVERDUE_MAIL.noRescue],
     footer,
   });
   await queueMail(

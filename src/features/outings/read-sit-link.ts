@@ -5,8 +5,9 @@ import { findContact } from './contacts-data';
 import { findOuting } from './data';
 import { findLiveLink } from './links-data';
 import { outingFacts } from './outing-facts';
-import { clockAndDay, STATE_WORDS } from './outing-words';
 import { listSteps } from './overdue-data';
+import { clockAndDay, STATE_WORDS } from './words/outing';
+import { SIT_LINK_WORDS } from './words/overdue';
 
 export interface SharedSit {
   clubName: string;
@@ -22,8 +23,6 @@ export interface SharedSit {
   /** The reader came by the mail to a safety contact, and may stop being one. */
   mayStop: boolean;
 }
-
-const TOLD = { member: 'The member was', officers: 'Club officers were', contact: 'The safety contact was' } as const;
 
 /** The page behind a secret address; null when it is unknown, too old or turned off. */
 export async function readSitLink(secret: string, now: number): Promise<SharedSit | null> {
@@ -43,12 +42,14 @@ export async function readSitLink(secret: string, now: number): Promise<SharedSi
     memberName: outing.memberName,
     state,
     stateText:
-      outing.signedOutAt === null ? STATE_WORDS[state] : `Signed out at ${clockAndDay(outing.signedOutAt, club)}`,
+      outing.signedOutAt === null
+        ? STATE_WORDS[state]
+        : SIT_LINK_WORDS.signedOut(clockAndDay(outing.signedOutAt, club)),
     facts: out ? [] : outingFacts(outing, club),
     place: overdueShowsPlace && !out ? { lat: outing.standLat, lon: outing.standLon } : null,
     told: steps
       .filter((row) => row.outcome === 'mailed')
-      .map((row) => `${TOLD[row.step]} told at ${clockAndDay(row.at, club)}.`),
+      .map((row) => SIT_LINK_WORDS.told[row.step](clockAndDay(row.at, club))),
     mayStop: contact?.consentedAt != null,
   };
 }

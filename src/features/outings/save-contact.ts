@@ -6,6 +6,7 @@ import { type RateRule, takeRate } from '@/server/rate-limit';
 import { mailContactAsk } from './contact-mails';
 import type { SaveContactInput, SwitchContactInput } from './contact-schema';
 import { type ContactRow, deleteContact, findContact, saveContactRow, updateContact } from './contacts-data';
+import { CONTACT_AUDIT, CONTACT_ERRORS } from './words/contact';
 
 interface Member {
   id: string;
@@ -23,11 +24,11 @@ const invalid = (message: string) => new AppError('invalid', message, { fields: 
 
 function refuse(member: Member, input: SaveContactInput, before: ContactRow | null): void {
   if (member.emailVerifiedAt === null) {
-    throw new AppError('conflict', 'Confirm your own e-mail address first: your contact is asked in your name.');
+    throw new AppError('conflict', CONTACT_ERRORS.unconfirmed);
   }
-  if (input.email === member.email) throw invalid('This is your own address. Name somebody else.');
+  if (input.email === member.email) throw invalid(CONTACT_ERRORS.yourself);
   if (before?.declinedAt && before.email === input.email) {
-    throw invalid(`${before.name} said no. Talk to them, or name somebody else.`);
+    throw invalid(CONTACT_ERRORS.declined(before.name));
   }
 }
 
@@ -60,7 +61,7 @@ export async function saveContact(member: Member, input: SaveContactInput, now: 
       off: false,
     });
     await mailContactAsk(tx, member, input, secret, now);
-    await auditAccount(tx, member, 'contact_named', `${member.name} named a safety contact, who was asked.`, now);
+    await auditAccount(tx, member, 'contact_named', CONTACT_AUDIT.named(member.name), now);
     return { asked: true };
   });
 }
@@ -68,10 +69,9 @@ export async function saveContact(member: Member, input: SaveContactInput, now: 
 /** The member's own switch: off, nobody is told until it is on again. */
 export async function switchContact(member: Member, input: SwitchContactInput, now: number): Promise<void> {
   await write(async (tx) => {
-    if (!(await findContact(member.id, tx))) throw new AppError('conflict', 'You have named no safety contact.');
+    if (!(await findContact(member.id, tx))) throw new AppError('conflict', CONTACT_ERRORS.none);
     await updateContact(tx, member.id, { off: input.off });
-    const how = input.off ? 'off' : 'on';
-    await auditAccount(tx, member, 'contact_switched', `${member.name} switched their safety contact ${how}.`, now);
+    await auditAccount(tx, member, 'contact_switched', CONTACT_AUDIT.switched(member.name, input.off), now);
   });
 }
 
@@ -79,6 +79,6 @@ export async function removeContact(member: Member, now: number): Promise<void> 
   await write(async (tx) => {
     if (!(await findContact(member.id, tx))) return;
     await deleteContact(tx, member.id);
-    await auditAccount(tx, member, 'contact_removed', `${member.name} removed their safety contact.`, now);
+    await auditAccount(tx, member, 'contact_removed', CONTACT_AUDIT.removed(member.name), now);
   });
 }

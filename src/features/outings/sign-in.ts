@@ -11,6 +11,7 @@ import { foundSent, noteSent, pressedAt } from '@/server/sent-requests';
 import { auditOuting } from './audit-outing';
 import { findOpenOuting, findOuting, insertOuting, type OutingDetail } from './data';
 import type { SignInSitInput } from './outing-schema';
+import { OUTING_AUDIT, SIGN_IN_ERRORS, STRANGER_ERRORS } from './words/sign';
 
 /** Nobody signs in earlier than this before the window: a sit of tomorrow is not somebody on the ground. Our choice. */
 export const OPENS_BEFORE_MS = 6 * 3_600_000;
@@ -20,18 +21,18 @@ const invalid = (field: string, message: string) => new AppError('invalid', mess
 /** Why nobody may sign in for a sit now; null: they may. */
 export function signInProblem(scope: ClubScope, sit: SitDetail, now: number): string | null {
   const { club } = scope;
-  if (sit.status === 'cancelled') return 'This sit was cancelled. Book it anew.';
-  if (sit.status === 'lapsed') return 'This sit has lapsed, unsigned. Take the stand as a walk-up if it is still free.';
-  if (sit.endAt <= now) return `This sit ended at ${clockText(sit.endAt, club)}.`;
+  if (sit.status === 'cancelled') return SIGN_IN_ERRORS.cancelled;
+  if (sit.status === 'lapsed') return SIGN_IN_ERRORS.lapsed;
+  if (sit.endAt <= now) return SIGN_IN_ERRORS.ended(clockText(sit.endAt, club));
   const opensAt = sit.startAt - OPENS_BEFORE_MS;
-  return now < opensAt ? `Signing in opens at ${clockText(opensAt, club)}: sign in when you come to the gate.` : null;
+  return now < opensAt ? SIGN_IN_ERRORS.early(clockText(opensAt, club)) : null;
 }
 
 const SOON_MS = 2 * 60_000;
 
-/** For the audit log: that it was pressed without signal. */
-export function sentLater(scope: ClubScope, at: number, now: number): string {
-  return now - at < SOON_MS ? '' : ` Pressed at ${clockText(at, scope.club)} and sent later.`;
+/** For the audit log: when it was pressed, where there was no signal to send it; null: it was sent at once. */
+export function sentLater(scope: ClubScope, at: number, now: number): string | null {
+  return now - at < SOON_MS ? null : clockText(at, scope.club);
 }
 
 async function checkPlaces(
@@ -42,10 +43,10 @@ async function checkPlaces(
 ) {
   if (input.approachId !== null) {
     const way = (await listApproachesOf(scope, standId, tx)).find(({ id }) => id === input.approachId);
-    if (!way || way.direction === 'out') throw invalid('approachId', 'This is no way in to the stand. Choose another.');
+    if (!way || way.direction === 'out') throw invalid('approachId', SIGN_IN_ERRORS.way);
   }
   if (input.parkingId !== null && !(await getParking(scope, input.parkingId, tx))) {
-    throw invalid('parkingId', 'This parking place is no longer there. Choose another.');
+    throw invalid('parkingId', SIGN_IN_ERRORS.parking);
   }
 }
 
@@ -64,8 +65,12 @@ export async function signInIn(
   const before = await findOpenOuting(scope, sit.memberId, tx);
   if (before?.sitId === sit.id) return before;
   if (before) {
-    const who = sit.memberId === scope.member.id ? 'You are' : `${sit.memberName} is`;
-    throw new AppError('conflict', `${who} still signed in at ${before.standName}. Sign out there first.`);
+    const { stillIn } = SIGN_IN_ERRORS;
+    const own = sit.memberId === scope.member.id;
+    throw new AppError(
+      'conflict',
+      own ? stillIn.you(before.standName) : stillIn.member(sit.memberName, before.standName),
+    );
   }
   const problem = signInProblem(scope, sit, at);
   if (problem) throw new AppError('conflict', problem);
@@ -87,19 +92,27 @@ export async function signInIn(
     firstBackBy: backBy,
     lastSignAt: at,
   });
-  const when = dayAndWindow(sit.day, sit.windows, true);
-  const back = clockText(backBy, scope.club);
-  const summary = `Signed in ${sit.memberName} at ${sit.standName}, ${when}; back by ${back}.${sentLater(scope, at, now)}`;
+  const summary = OUTING_AUDIT.signedIn({
+    member: sit.memberName,
+    stand: sit.standName,
+    when: dayAndWindow(sit.day, sit.windows, true),
+    back: clockText(backBy, scope.club),
+    later: sentLater(scope, at, now),
+  });
   await auditOuting(tx, scope, 'signed_in', { id, summary, detail: { ...input, sitId: sit.id, backBy } }, now);
   const made = await findOuting(scope, id, tx);
-  if (!made) throw new AppError('internal', 'Signing in was not saved. Try again.', { log: `no row for ${id}` });
+  if (!made) throw new AppError('internal', SIGN_IN_ERRORS.notSaved, { log: `no row for ${id}` });
   return made;
 }
 
 /** One's own, or with the permission anybody's. */
-export function refuseStranger(scope: ClubScope, of: { memberId: string; memberName: string }, what: string): void {
+export function refuseStranger(
+  scope: ClubScope,
+  of: { memberId: string; memberName: string },
+  error: (member: string) => string,
+): void {
   if (of.memberId === scope.member.id || scope.can('board.sign_for_others')) return;
-  throw new AppError('forbidden', `Only ${of.memberName} or an officer can ${what}.`);
+  throw new AppError('forbidden', error(of.memberName));
 }
 
 export async function signIn(scope: ClubScope, input: SignInSitInput, now: number): Promise<OutingDetail> {
@@ -107,7 +120,7 @@ export async function signIn(scope: ClubScope, input: SignInSitInput, now: numbe
   return write(async (tx) => {
     const sit = await findSit(scope, sitId, tx);
     if (!sit) throw notFound();
-    refuseStranger(scope, sit, 'sign in for this sit');
+    refuseStranger(scope, sit, STRANGER_ERRORS.signIn);
     const before = await foundSent(tx, scope, sent, 'sign_in');
     const known = before && (await findOuting(scope, before, tx));
     if (known) return known;

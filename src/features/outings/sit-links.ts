@@ -9,6 +9,7 @@ import { findOuting, type OutingDetail } from './data';
 import { insertSitLink, revokeLinksOf } from './links-data';
 import type { SitLinkInput } from './outing-schema';
 import { refuseStranger } from './sign-in';
+import { LINK_ERRORS, OUTING_AUDIT, STRANGER_ERRORS } from './words/sign';
 
 const LASTS_MS = 72 * 3_600_000;
 
@@ -37,11 +38,11 @@ export async function shareSit(scope: ClubScope, input: SitLinkInput, now: numbe
     const outing = await findOuting(scope, input.outingId, tx);
     if (!outing) throw notFound();
     if (outing.memberId !== scope.member.id) {
-      throw new AppError('forbidden', `Only ${outing.memberName} gives out a link to this sit.`);
+      throw new AppError('forbidden', LINK_ERRORS.notYours(outing.memberName));
     }
-    if (outing.signedOutAt !== null) throw new AppError('conflict', 'You have signed out: there is nothing to share.');
+    if (outing.signedOutAt !== null) throw new AppError('conflict', LINK_ERRORS.signedOut);
     const url = await makeLink(tx, outing, 'shared', now);
-    const summary = `${scope.actor.name} made a link to their sit at ${outing.standName} for somebody at home.`;
+    const summary = OUTING_AUDIT.linked(scope.actor.name, outing.standName);
     await auditOuting(tx, scope, 'linked', { id: outing.id, summary }, now);
     return { url };
   });
@@ -52,10 +53,10 @@ export async function revokeSitLinks(scope: ClubScope, input: SitLinkInput, now:
   return write(async (tx) => {
     const outing = await findOuting(scope, input.outingId, tx);
     if (!outing) throw notFound();
-    refuseStranger(scope, outing, 'turn these links off');
+    refuseStranger(scope, outing, STRANGER_ERRORS.revoke);
     const revoked = await revokeLinksOf(scope, tx, outing.id, now);
     if (revoked > 0) {
-      const summary = `Turned off ${revoked} ${revoked === 1 ? 'link' : 'links'} to the sit of ${outing.memberName} at ${outing.standName}.`;
+      const summary = OUTING_AUDIT.unlinked(revoked, outing.memberName, outing.standName);
       await auditOuting(tx, scope, 'unlinked', { id: outing.id, summary }, now);
     }
     return { revoked };

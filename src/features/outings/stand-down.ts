@@ -5,9 +5,10 @@ import { queueMail } from '@/server/outbox';
 import type { ClubScope } from '@/server/scope';
 import { findContact } from './contacts-data';
 import type { OutingDetail } from './data';
-import { backByText, clockAndDay } from './outing-words';
 import { listOfficers, listSteps, type OverdueStepRow } from './overdue-data';
 import type { OverdueReader } from './overdue-mails';
+import { backByText, clockAndDay } from './words/outing';
+import { STAND_DOWN_MAIL } from './words/overdue';
 
 async function toldBy(
   tx: Tx,
@@ -39,21 +40,22 @@ export async function queueStandDown(
 ): Promise<void> {
   const all = await listSteps([outing.id], tx);
   const steps = kind === 'out' ? all : all.filter((row) => row.moves === outing.moves - 1);
+  const words = STAND_DOWN_MAIL;
   const { club } = scope;
   const say = (at: number) => clockAndDay(at, club);
   const { memberName, standName } = outing;
   const news =
     kind === 'out'
-      ? `${memberName} has been signed out from ${standName} at ${say(now)}${outing.signedOutBy === outing.memberId ? '' : `, by ${scope.member.name}`}. Nothing more is to be done.`
-      : `${memberName} is still at ${standName} and is now to be back by ${backByText(outing, say)}. You are told again if that passes.`;
+      ? words.out(memberName, standName, say(now), outing.signedOutBy === outing.memberId ? null : scope.member.name)
+      : words.moved(memberName, standName, backByText(outing, say));
   for (const to of await toldBy(tx, scope, outing, steps)) {
     const { text, html } = composeMail({
       clubName: club.name,
       paragraphs: [news],
       ...(to.key === 'contact'
         ? {}
-        : { button: { label: 'Open the board', url: `${env.appUrl}/clubs/${club.slug}/board` } }),
-      footer: 'You get this because you were told that they were overdue.',
+        : { button: { label: words.button, url: `${env.appUrl}/clubs/${club.slug}/board` } }),
+      footer: words.footer,
     });
     await queueMail(
       tx,
@@ -62,7 +64,7 @@ export async function queueStandDown(
         kind: `overdue.${kind}`,
         dedupeKey: `overdue.${kind}:${outing.id}:${outing.moves}:${to.key}`,
         to: { name: to.name, email: to.email },
-        subject: kind === 'out' ? `Signed out: ${memberName}` : `New time: ${memberName}`,
+        subject: kind === 'out' ? words.outSubject(memberName) : words.movedSubject(memberName),
         text,
         html,
       },

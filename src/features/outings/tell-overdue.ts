@@ -5,10 +5,11 @@ import { type ClubScope, systemScopeById } from '@/server/scope';
 import { auditOuting } from './audit-outing';
 import { type ContactRow, findContact } from './contacts-data';
 import { findOuting, listPastBackBy, type OutingDetail } from './data';
-import { clockBeside } from './outing-words';
 import { insertStep, listOfficers, listSteps, type OverdueStepRow } from './overdue-data';
 import { type OverdueReader, queueOverdueMail } from './overdue-mails';
 import { contactLink } from './sit-links';
+import { clockBeside } from './words/outing';
+import { CONTACT_FORECAST, overdueAudit } from './words/overdue';
 
 const stepId = (outing: { id: string; moves: number }, step: OverdueStep) => `${outing.id}:${outing.moves}:${step}`;
 
@@ -22,12 +23,10 @@ function contactOutcome(outing: OutingDetail, contact: ContactRow | null): Outco
 /** What officers need to know of the last step. */
 function contactForecast(scope: ClubScope, outing: OutingDetail, contact: ContactRow | null, now: number): string {
   const outcome = contactOutcome(outing, contact);
-  if (outcome === 'no_consent') return 'They have no safety contact who agreed to be told: nobody at home is mailed.';
-  if (outcome === 'off') return 'They asked that their safety contact is not told this time: nobody at home is mailed.';
+  if (outcome === 'no_consent') return CONTACT_FORECAST.noConsent;
+  if (outcome === 'off') return CONTACT_FORECAST.off;
   const at = overdueStepTimes(outing.backBy, scope.club.rules).find(({ step }) => step === 'contact')?.at ?? now;
-  return at <= now
-    ? 'Their safety contact is told now.'
-    : `Their safety contact is told at ${clockBeside(at, now, scope.club)}.`;
+  return at <= now ? CONTACT_FORECAST.now : CONTACT_FORECAST.at(clockBeside(at, now, scope.club));
 }
 
 interface Telling {
@@ -76,7 +75,7 @@ async function takeStep(scope: ClubScope, of: { id: string; moves: number }, ste
     const row = { id, clubId: scope.club.id, outingId: outing.id, step, moves: outing.moves, outcome, at: now };
     if (!(await insertStep(tx, row))) return false;
     for (const to of readers) await queueOverdueMail(tx, scope, { step, stepId: id, outing, to, more }, now);
-    const summary = `${outing.memberName} is overdue at ${outing.standName}; step ${step}: ${outcome.replace('_', ' ')}.`;
+    const summary = overdueAudit(outing.memberName, outing.standName, step, outcome);
     const detail = { step, outcome, told: readers.map((to) => to.name), backBy: outing.backBy };
     await auditOuting(tx, scope, 'told', { id: outing.id, summary, detail }, now);
     return true;

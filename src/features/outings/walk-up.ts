@@ -8,6 +8,7 @@ import type { ClubScope } from '@/server/scope';
 import type { OutingDetail } from './data';
 import type { WalkUpInput } from './outing-schema';
 import { OPENS_BEFORE_MS, signInIn } from './sign-in';
+import { SIGN_IN_ERRORS } from './words/sign';
 
 /** The window a member at the gate would sit in: the one going on, or the next when it is near; null: none is near. */
 export function walkUpWindow(scope: ClubScope, now: number): SitWindow | null {
@@ -22,7 +23,7 @@ export async function walkUp(scope: ClubScope, input: WalkUpInput, now: number):
   if (!window) {
     const next = nextWindow(now, scope.club.rules, scope.club);
     const opens = clockText(next.startAt - OPENS_BEFORE_MS, scope.club);
-    throw new AppError('conflict', `No window is near. Walk-ups open at ${opens}; until then book on the Sit page.`);
+    throw new AppError('conflict', SIGN_IN_ERRORS.noWindow(opens));
   }
   return write(async (tx) => {
     const sit = await bookSitIn(

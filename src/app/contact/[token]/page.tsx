@@ -2,14 +2,17 @@ import type { Metadata } from 'next';
 import { PlainFrame } from '@/app/plain-frame';
 import { readContactAsk } from '@/features/outings/answer-contact';
 import { ContactAnswer } from '@/features/outings/components/contact-answer';
+import { CONTACT_PAGE_WORDS } from '@/features/outings/words/contact';
 import { now } from '@/server/clock';
 import { publicPage } from '@/server/doors';
 import { Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { answerContactAction } from './actions';
 
+const words = CONTACT_PAGE_WORDS;
+
 export const metadata: Metadata = {
-  title: 'Safety contact',
+  title: words.title,
   referrer: 'no-referrer',
   robots: { index: false, follow: false },
 };
@@ -20,28 +23,21 @@ export default publicPage(async ({ params }) => {
   if (!ask) {
     return (
       <PlainFrame>
-        <PageTitle title="This link does not work" />
-        <p className="max-w-prose">
-          It is older than 14 days, somebody else was asked since, or it is not whole. Open the newest mail again, or
-          ask whoever named you to have it sent once more.
-        </p>
+        <PageTitle title={words.deadTitle} />
+        <p className="max-w-prose">{words.deadText}</p>
       </PlainFrame>
     );
   }
   return (
     <PlainFrame>
-      <PageTitle title={`${ask.memberName} asks you`} lead={`${ask.contactName}, be their safety contact?`} />
+      <PageTitle title={words.asks(ask.memberName)} lead={words.lead(ask.contactName)} />
       <div className="mb-5 max-w-prose space-y-3">
-        <p>
-          When {ask.memberName} signs in at a deer stand, they say by when they will be back. If they have not signed
-          out some time after that, and the club's officers have been told, you get one e-mail: where they sat, where
-          they parked, their vehicle, and when they were to be back.
-        </p>
-        <p>You may stop at any time, here or from any such mail.</p>
+        <p>{words.what(ask.memberName)}</p>
+        <p>{words.stop}</p>
       </div>
       <ContactAnswer secret={secret} memberName={ask.memberName} answered={ask.answer} action={answerContactAction} />
-      <Notice level="caution" title="Windrest is no rescue service" className="mt-8">
-        It tells you, and sends nobody. When somebody may be hurt, call the emergency number.
+      <Notice level="caution" title={words.noRescueTitle} className="mt-8">
+        {words.noRescue}
       </Notice>
     </PlainFrame>
   );

@@ -2,14 +2,17 @@ import type { Metadata } from 'next';
 import { PlainFrame } from '@/app/plain-frame';
 import { ContactAnswer } from '@/features/outings/components/contact-answer';
 import { readSitLink, type SharedSit } from '@/features/outings/read-sit-link';
+import { SIT_LINK_WORDS } from '@/features/outings/words/overdue';
 import { now } from '@/server/clock';
 import { publicPage } from '@/server/doors';
 import { Notice } from '@/ui/notices';
 import { Badge, DefinitionList, PageTitle, Section } from '@/ui/page-parts';
 import { answerContactAction } from '../../contact/[token]/actions';
 
+const words = SIT_LINK_WORDS;
+
 export const metadata: Metadata = {
-  title: 'A sit',
+  title: words.title,
   referrer: 'no-referrer',
   robots: { index: false, follow: false },
 };
@@ -17,11 +20,8 @@ export const metadata: Metadata = {
 function DeadLink() {
   return (
     <>
-      <PageTitle title="This link does not work" />
-      <p className="max-w-prose">
-        It has run out, was turned off, or is not whole. Ask whoever sent it for a new one. When somebody is missing,
-        call them, then the emergency number.
-      </p>
+      <PageTitle title={words.deadTitle} />
+      <p className="max-w-prose">{words.deadText}</p>
     </>
   );
 }
@@ -30,7 +30,7 @@ function Facts({ sit }: { sit: SharedSit }) {
   const { place } = sit;
   const items = [
     ...sit.facts.map(({ label, value }) => ({ term: label, detail: value })),
-    ...(place ? [{ term: 'Position', detail: `${place.lat.toFixed(5)}, ${place.lon.toFixed(5)}` }] : []),
+    ...(place ? [{ term: words.position, detail: `${place.lat.toFixed(5)}, ${place.lon.toFixed(5)}` }] : []),
   ];
   return <DefinitionList items={items} />;
 }
@@ -53,13 +53,12 @@ export default publicPage(async ({ params }) => {
         lead={<Badge look={sit.state === 'overdue' ? 'clay' : 'strong'}>{sit.stateText}</Badge>}
       />
       {sit.state === 'out' ? (
-        <p>Nothing more is to be done.</p>
+        <p>{words.nothingToDo}</p>
       ) : (
         <>
           {sit.state === 'overdue' && (
-            <Notice level="stop" title="What to do" className="mb-6">
-              Call them first: most often a sign-out was forgotten. Then ask the club, or look for the vehicle where it
-              was parked. When they may be hurt, call the emergency number and read out what stands here.
+            <Notice level="stop" title={words.whatToDo} className="mb-6">
+              {words.whatToDoText}
             </Notice>
           )}
           <Facts sit={sit} />
@@ -70,11 +69,11 @@ export default publicPage(async ({ params }) => {
           ))}
         </>
       )}
-      <Notice level="caution" title="Windrest is no rescue service" className="mt-8">
-        This page says what was written on the club's board, and sends nobody. Open it again to see what is new.
+      <Notice level="caution" title={words.noRescueTitle} className="mt-8">
+        {words.noRescue}
       </Notice>
       {sit.mayStop && (
-        <Section title="Not for you any more?" className="mt-8">
+        <Section title={words.stopTitle} className="mt-8">
           <ContactAnswer
             secret={secret}
             memberName={sit.memberName}

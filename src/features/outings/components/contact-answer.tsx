@@ -4,13 +4,14 @@ import { useState } from 'react';
 import { Button } from '@/ui/button';
 import type { ActionAnswer } from '@/ui/form/use-action-form';
 import { Notice } from '@/ui/notices';
+import { CONTACT_ANSWER_WORDS } from '../words/contact';
 
 export type AnswerAction = (values: {
   secret: string;
   answer: 'yes' | 'no';
 }) => Promise<ActionAnswer<{ agreed: boolean }>>;
 
-const LOST = 'The server could not be reached. Try again.';
+const words = CONTACT_ANSWER_WORDS;
 
 interface Props {
   secret: string;
@@ -31,30 +32,30 @@ export function ContactAnswer({ secret, memberName, answered, action, onlyStop }
     setPending(true);
     const result = await action({ secret, answer: next }).catch(() => null);
     setPending(false);
-    setError(result?.ok ? undefined : (result?.error.message ?? LOST));
+    setError(result?.ok ? undefined : (result?.error.message ?? words.lost));
     if (result?.ok) setAnswer(next);
   }
 
   return (
     <div className="grid gap-4">
       <p role="status" className="font-semibold">
-        {answer === 'yes' && `You are the safety contact of ${memberName}.`}
-        {answer === 'no' && `You said no. You hear nothing more about ${memberName} from here.`}
+        {answer === 'yes' && words.agreed(memberName)}
+        {answer === 'no' && words.declined(memberName)}
       </p>
       <div className="flex flex-wrap gap-3">
         {answer !== 'yes' && !onlyStop && (
           <Button look="primary" pending={pending} onClick={() => say('yes')}>
-            Yes, tell me
+            {words.yes}
           </Button>
         )}
         {answer !== 'no' && (
           <Button pending={pending} onClick={() => say('no')}>
-            {answer === 'yes' ? 'Stop being the contact' : 'No'}
+            {answer === 'yes' ? words.stop : words.no}
           </Button>
         )}
       </div>
       {error && (
-        <Notice level="caution" live title="Not saved">
+        <Notice level="caution" live title={words.notSaved}>
           {error}
         </Notice>
       )}

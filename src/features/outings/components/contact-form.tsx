@@ -10,7 +10,8 @@ import { Badge } from '@/ui/page-parts';
 import { TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { saveContactSchema } from '../contact-schema';
-import type { ContactState, ContactView } from '../read-contact';
+import type { ContactView } from '../read-contact';
+import { CONTACT_FORM_WORDS, CONTACT_STATES } from '../words/contact';
 
 export interface ContactActions {
   save: (values: { name: string; email: string }) => Promise<ActionAnswer<{ asked: boolean }>>;
@@ -18,14 +19,7 @@ export interface ContactActions {
   remove: (values: Record<string, never>) => Promise<ActionAnswer<null>>;
 }
 
-const LOST = 'The server could not be reached. Try again.';
-
-const STATES: Record<ContactState, string> = {
-  asked: 'Asked, no answer yet',
-  expired: 'Did not answer in 14 days',
-  agreed: 'Agreed',
-  declined: 'Said no',
-};
+const words = CONTACT_FORM_WORDS;
 
 function Standing({ contact, actions }: { contact: ContactView; actions: ContactActions }) {
   const toast = useToast();
@@ -36,38 +30,38 @@ function Standing({ contact, actions }: { contact: ContactView; actions: Contact
     setPending(true);
     const answer = await actions.switchOff({ off: !contact.off }).catch(() => null);
     setPending(false);
-    setError(answer?.ok ? undefined : (answer?.error.message ?? LOST));
-    if (answer?.ok) toast({ title: contact.off ? 'They are told again' : 'They are not told any more' });
+    setError(answer?.ok ? undefined : (answer?.error.message ?? words.lost));
+    if (answer?.ok) toast({ title: contact.off ? words.switchedOn : words.switchedOff });
   }
 
   return (
     <div className="mb-5 grid gap-3">
       <p>
         {contact.name} ({contact.email}){' '}
-        <Badge look={contact.state === 'agreed' ? 'moss' : 'plain'}>{STATES[contact.state]}</Badge>{' '}
-        {contact.off && <Badge look="clay">Switched off</Badge>}
+        <Badge look={contact.state === 'agreed' ? 'moss' : 'plain'}>{CONTACT_STATES[contact.state]}</Badge>{' '}
+        {contact.off && <Badge look="clay">{words.off}</Badge>}
       </p>
-      {contact.state === 'expired' && <p>Save them again to ask once more.</p>}
+      {contact.state === 'expired' && <p>{words.askAgain}</p>}
       <div className="flex flex-wrap gap-3">
         <Button pending={pending} onClick={flip}>
-          {contact.off ? 'Switch on again' : 'Switch off for now'}
+          {contact.off ? words.switchOn : words.switchOff}
         </Button>
         <ConfirmDialog
-          title="Remove your safety contact?"
-          confirmLabel="Remove"
+          title={words.removeTitle}
+          confirmLabel={words.remove}
           danger
-          trigger={<Button look="quiet">Remove</Button>}
+          trigger={<Button look="quiet">{words.remove}</Button>}
           onConfirm={async () => {
             const answer = await actions.remove({}).catch(() => null);
-            if (!answer?.ok) return answer?.error.message ?? LOST;
-            toast({ title: 'Safety contact removed' });
+            if (!answer?.ok) return answer?.error.message ?? words.lost;
+            toast({ title: words.removed });
           }}
         >
-          <p>Nobody at home is told when you are overdue, until you name somebody who agrees.</p>
+          <p>{words.removeText}</p>
         </ConfirmDialog>
       </div>
       {error && (
-        <Notice level="caution" live title="Not saved">
+        <Notice level="caution" live title={words.notSaved}>
           {error}
         </Notice>
       )}
@@ -82,25 +76,24 @@ export function ContactForm({ contact, actions }: { contact: ContactView | null;
     schema: saveContactSchema,
     defaultValues: { name: contact?.name ?? '', email: contact?.email ?? '' },
     submit: actions.save,
-    onDone: ({ asked }) =>
-      toast(asked ? { title: 'Asked', text: 'They get a mail and answer there.' } : { title: 'Saved' }),
+    onDone: ({ asked }) => toast(asked ? { title: words.asked, text: words.askedText } : { title: words.saved }),
   });
   return (
     <>
       {contact && <Standing contact={contact} actions={actions} />}
       <form {...formProps} className="flex flex-col gap-5">
         <FormErrorSummary errors={errors} />
-        <TextInput label="Their name" {...register('name')} error={errorOf('name')} autoComplete="off" required />
+        <TextInput label={words.name} {...register('name')} error={errorOf('name')} autoComplete="off" required />
         <TextInput
-          label="Their e-mail address"
-          hint="They are asked first, and told nothing until they agree."
+          label={words.email}
+          hint={words.emailHint}
           type="email"
           {...register('email')}
           error={errorOf('email')}
           autoComplete="off"
           required
         />
-        <SubmitRow label={contact ? 'Save the contact' : 'Ask them'} look="plain" pending={pending} />
+        <SubmitRow label={contact ? words.save : words.ask} look="plain" pending={pending} />
       </form>
     </>
   );
