@@ -1,4 +1,4 @@
-import { findCrossings, findUpwindWays } from './find-approach-faults';
+import { findApproachFaults } from './find-approach-faults';
 import { findBesideApproach } from './find-beside-approach';
 import { findCrowdedScrapes } from './find-crowded-scrapes';
 import { findOffLines } from './find-off-lines';
@@ -7,23 +7,29 @@ import { findCameraSun, findSeatSun } from './find-sun';
 import { findUnhuntable } from './find-unhuntable';
 import { FINDING_CODES, type Finding, type SetupInput } from './setup-types';
 
+/** A place told by one rule is not told again by the next. */
+function firstOfEach(...rules: Finding[][]): Finding[] {
+  const told = new Set<string>();
+  return rules.flatMap((found) => {
+    const fresh = found.filter((f) => !told.has(f.subject.id));
+    for (const f of fresh) told.add(f.subject.id);
+    return fresh;
+  });
+}
+
 /**
  * Faults of a club's ground: what draws deer off the shot, onto the walk or away from the line they should travel, ways that
  * give the sit away, and sun in eyes and cameras. Distances in metres, bearings in degrees true. Rules and distances are
  * practice (settings). In order of rule, then stand, then name; the same input gives the same findings. Never throws.
  */
 export function checkSetup(input: SetupInput): Finding[] {
-  const offShot = findOffShot(input);
-  // A place already found off the shot of a seat is not told a second time.
-  const told = new Set(offShot.map((f) => f.subject.id));
+  const ways = findApproachFaults(input);
+  const toldWays = new Set(ways.map((f) => f.subject.id));
   const found = [
-    ...offShot,
-    ...findBesideApproach(input),
-    ...findUnhuntable(input).filter((f) => !told.has(f.subject.id)),
+    ...firstOfEach(findOffShot(input), findUnhuntable(input), findOffLines(input)),
+    ...findBesideApproach(input, toldWays),
     ...findCrowdedScrapes(input),
-    ...findOffLines(input),
-    ...findCrossings(input),
-    ...findUpwindWays(input),
+    ...ways,
     ...findSeatSun(input),
     ...findCameraSun(input),
   ];

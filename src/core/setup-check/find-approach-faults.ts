@@ -1,6 +1,8 @@
-import { bearingDeg, distanceM, nearestOnShape } from '../geometry';
-import type { Point, ScoredApproach, ScoredFeature, ScoredStand } from '../types';
-import { approachFacts, away, featureFacts, makeFinding, standFacts } from './make-finding';
+import { monthOf } from '../day-time';
+import { bearingDeg, distanceM, distanceToShapeM, nearestOnShape } from '../geometry';
+import { type Point, type ScoredApproach, type ScoredFeature, type ScoredStand, TIMES_OF_DAY } from '../types';
+import { usesOf } from '../whereabouts';
+import { approachFacts, away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import { carries, footPath, isBed, isLine, standOf, windowsHunted, windsHunted } from './shot-of';
 
@@ -15,66 +17,63 @@ function meet(a: Point, b: Point, c: Point, d: Point): Point | null {
   return t >= 0 && t <= 1 && u >= 0 && u <= 1 ? { eastM: a.eastM + t * rx, northM: a.northM + t * ry } : null;
 }
 
-function crossing(path: Point[], line: Point[]): Point | null {
-  for (let i = 1; i < path.length; i++) {
-    for (let k = 1; k < line.length; k++) {
-      const at = meet(path[i - 1] as Point, path[i] as Point, line[k - 1] as Point, line[k] as Point);
-      if (at) return at;
-    }
-  }
-  return null;
-}
-
-type Fault = Pick<Finding, 'code' | 'at' | 'text' | 'why' | 'acts'>;
-
-function tell(approach: ScoredApproach, stand: ScoredStand, feature: ScoredFeature, fault: Fault): Finding {
-  const found = makeFinding(
-    {
-      ...fault,
-      subject: { of: 'approach', id: approach.id, name: approach.name },
-      stand: { id: stand.id, name: stand.name },
-      distanceM: distanceM(stand.at, fault.at),
-      bearingDeg: bearingDeg(stand.at, fault.at),
-      trial: { change: 'without_approach', standId: stand.id, approachId: approach.id, window: null },
-    },
-    [featureFacts(feature), approachFacts(approach), standFacts(stand)],
+function meetings(path: Point[], line: Point[]): Point[] {
+  return path.slice(1).flatMap((to, i) =>
+    line.slice(1).flatMap((end, k) => {
+      const at = meet(path[i] as Point, to, line[k] as Point, end);
+      return at ? [at] : [];
+    }),
   );
-  return { ...found, key: `${found.key}:${feature.id}` };
 }
 
-/** Ways on foot that cross a line deer travel. */
-export function findCrossings(input: SetupInput): Finding[] {
-  return input.approaches.flatMap((approach) => {
-    const stand = standOf(input, approach.standId);
-    if (!stand || windowsHunted(stand).length === 0) return [];
-    const path = approach.points.slice(approach.vehicleToIndex);
-    return input.features.filter(isLine).flatMap((line) => {
-      const at = line.shape.type === 'line' ? crossing(path, line.shape.points) : null;
-      if (!at) return [];
-      const far = away(distanceM(stand.at, at), bearingDeg(stand.at, at), input.units);
-      return [
-        tell(approach, stand, line, {
-          code: 'approach_crosses',
-          at,
-          text: `${approach.name} crosses ${line.name} ${far} of ${stand.name}`,
-          why: 'Ground scent stays where a person crosses: deer that come along the line later stop at it or turn.',
-          acts: [
-            { act: 'new_way', text: `Lay ${approach.name} so that it does not cross ${line.name}` },
-            { act: 'move', text: `Lead ${line.name} round ${approach.name} with brush or a fence gap` },
-          ],
-        }),
-      ];
-    });
+interface Crossing {
+  line: ScoredFeature;
+  at: Point;
+}
+interface Windward {
+  bed: ScoredFeature;
+  share: number;
+  at: Point;
+}
+interface WayFaults {
+  approach: ScoredApproach;
+  stand: ScoredStand;
+  crossings: Crossing[];
+  beds: Windward[];
+}
+
+/** Whether deer come along a line, in a window the stand is hunted in, often enough that a track across it matters. */
+function isTravelled(line: ScoredFeature, stand: ScoredStand, { days, scoring, settings }: SetupInput): boolean {
+  const times = windowsHunted(stand).flatMap((w) =>
+    w === 'morning' ? (['dawn', 'morning'] as const) : (['afternoon', 'dusk'] as const),
+  );
+  return days.some((day) => {
+    const uses = usesOf(line, monthOf(day), scoring.whereabouts);
+    return times.some((time) => (uses[TIMES_OF_DAY.indexOf(time)] ?? 0) >= settings.leastUse);
   });
 }
 
-/** Share of the winds a stand is hunted on, as usual as they are, that carry a walk's scent to a bed, and where most. */
-function upwindShare(stand: ScoredStand, path: Point[], bed: ScoredFeature, input: SetupInput) {
+/** The first dry place at which a way on foot crosses each line deer travel. */
+function crossingsOf(approach: ScoredApproach, stand: ScoredStand, input: SetupInput): Crossing[] {
+  const path = approach.points.slice(approach.vehicleToIndex);
+  const waters = input.features.filter(({ kind }) => kind === 'water');
+  const isWet = (p: Point) => waters.some((water) => distanceToShapeM(p, water.shape) <= input.settings.wadeM);
+  return input.features.filter(isLine).flatMap((line) => {
+    if (line.shape.type !== 'line' || !isTravelled(line, stand, input)) return [];
+    const at = meetings(path, line.shape.points).find((p) => !isWet(p));
+    return at ? [{ line, at }] : [];
+  });
+}
+
+/** Share of the winds a stand is hunted on, as usual as they are, that carry a walk's scent to a bed, and where it is nearest. */
+function windward(stand: ScoredStand, path: Point[], bed: ScoredFeature, input: SetupInput): Windward[] {
   const { settings, winds } = input;
   const near = path
     .map((p) => ({ p, to: nearestOnShape(p, bed.shape) }))
     .map(({ p, to }) => ({ p, metres: distanceM(p, to), bearing: bearingDeg(p, to) }))
     .filter(({ metres }) => metres <= settings.bedsWithinM);
+  const nearest = [...near].sort((a, b) => a.metres - b.metres)[0];
+  if (!nearest) return [];
   let [hunted, carried] = [0, 0];
   for (const window of windowsHunted(stand)) {
     for (const point of windsHunted(stand, window)) {
@@ -83,31 +82,104 @@ function upwindShare(stand: ScoredStand, path: Point[], bed: ScoredFeature, inpu
       if (near.some((n) => n.metres < 1 || carries(point * 22.5, n.bearing, settings.scentDeg))) carried += weight;
     }
   }
-  const at = [...near].sort((a, b) => a.metres - b.metres)[0]?.p ?? null;
-  return { share: hunted > 0 ? carried / hunted : 0, at };
+  const share = hunted > 0 ? carried / hunted : 0;
+  return share >= settings.upwindShare ? [{ bed, share, at: nearest.p }] : [];
 }
 
-/** Ways on foot that run upwind of bedding on most of the winds their stand is hunted on. */
-export function findUpwindWays(input: SetupInput): Finding[] {
-  return input.approaches.flatMap((approach) => {
+function actsOf({ approach, stand, crossings, beds }: WayFaults, input: SetupInput): Finding['acts'] {
+  const others = input.approaches.filter((a) => a.standId === stand.id && a.id !== approach.id);
+  const [bed, line] = [beds[0]?.bed, crossings[0]?.line];
+  const clear = bed ? `stays downwind of ${bed.name}` : `does not cross ${line?.name ?? 'the line'}`;
+  return [
+    ...others.map((other): Finding['acts'][number] => ({
+      act: 'other_time',
+      text: `Give up ${approach.name} and walk to ${stand.name} by ${other.name}`,
+      work: null,
+    })),
+    { act: 'new_way', text: `Lay ${approach.name} so that it ${clear}`, work: 'cutting' },
+    bed
+      ? {
+          act: 'move_seat',
+          text: `Hunt ${stand.name} only on winds that keep the walk off ${bed.name}`,
+          work: null,
+        }
+      : {
+          act: 'move',
+          text: `Lead ${line?.name ?? 'the line'} round ${approach.name} with brush or a fence gap`,
+          work: 'cutting',
+        },
+  ];
+}
+
+/** Ways that cross the same lines at one place are told together, in the name of the stand nearest to it. */
+function tell(group: WayFaults[], input: SetupInput): Finding {
+  const first = group[0] as WayFaults;
+  const { approach, stand, crossings, beds } = first;
+  const worst = [...beds].sort((a, b) => b.share - a.share)[0];
+  const at = worst?.at ?? (crossings[0] as Crossing).at;
+  const [metres, bearing] = [distanceM(stand.at, at), bearingDeg(stand.at, at)];
+  const over = listText(crossings.map(({ line }) => line.name));
+  const crosses = over ? `crosses ${over}` : '';
+  const upwind = worst
+    ? `runs upwind of ${listText(beds.map(({ bed }) => bed.name))} on ${Math.round(worst.share * 100)} % of the winds ${stand.name} is hunted on`
+    : '';
+  const others = listText(group.slice(1).map((w) => `${w.approach.name} to ${w.stand.name}`));
+  const why = [
+    worst && 'Scent of the walk goes into the beds before the sit begins, whatever the seat itself does.',
+    over && 'Ground scent stays where a person crosses: deer that come along the line later stop at it or turn.',
+    others && `So does ${others}, at the same place.`,
+  ];
+  const found = makeFinding(
+    {
+      code: worst ? 'approach_upwind' : 'approach_crosses',
+      subject: { of: 'approach', id: approach.id, name: approach.name },
+      stand: { id: stand.id, name: stand.name },
+      also: group.slice(1).flatMap((w) => (w.stand.id === stand.id ? [] : [{ id: w.stand.id, name: w.stand.name }])),
+      at,
+      distanceM: metres,
+      bearingDeg: bearing,
+      text: worst
+        ? [`${approach.name} ${upwind}`, crosses].filter(Boolean).join(', and ')
+        : `${approach.name} ${crosses} ${away(metres, bearing, input.units)} of ${stand.name}`,
+      why: why.filter(Boolean).join(' '),
+      acts: actsOf(first, input),
+      trial: { change: 'without_approach', standId: stand.id, approachId: approach.id, window: null },
+    },
+    group.map((w) => [
+      approachFacts(w.approach),
+      standFacts(w.stand),
+      w.crossings.map(({ line }) => featureFacts(line)),
+      w.beds.map(({ bed }) => featureFacts(bed)),
+    ]),
+  );
+  return { ...found, key: `${found.code}:${group.map((w) => w.approach.id).join(':')}` };
+}
+
+function isSamePlace(a: WayFaults, b: WayFaults, withinM: number): boolean {
+  if (a.beds.length > 0 || b.beds.length > 0 || a.crossings.length !== b.crossings.length) return false;
+  return a.crossings.every((c) => b.crossings.some((d) => d.line.id === c.line.id && distanceM(c.at, d.at) <= withinM));
+}
+
+/**
+ * Ways on foot that cross lines while deer travel them, but in water, or that run upwind of bedding on most of the winds their stand
+ * is hunted on: one finding a way, or one for all that cross at one place.
+ */
+export function findApproachFaults(input: SetupInput): Finding[] {
+  const faults = input.approaches.flatMap((approach): WayFaults[] => {
     const stand = standOf(input, approach.standId);
     if (!stand || windowsHunted(stand).length === 0) return [];
     const path = footPath(approach, 0);
-    return input.features.filter(isBed).flatMap((bed) => {
-      const { share, at } = upwindShare(stand, path, bed, input);
-      if (!at || share < input.settings.upwindShare) return [];
-      return [
-        tell(approach, stand, bed, {
-          code: 'approach_upwind',
-          at,
-          text: `${approach.name} runs upwind of ${bed.name} on ${Math.round(share * 100)} % of the winds ${stand.name} is hunted on`,
-          why: 'Scent of the walk goes into the beds before the sit begins, whatever the seat itself does.',
-          acts: [
-            { act: 'new_way', text: `Lay ${approach.name} downwind of ${bed.name}` },
-            { act: 'move_seat', text: `Hunt ${stand.name} only on winds that keep the walk off ${bed.name}` },
-          ],
-        }),
-      ];
-    });
+    const beds = input.features.filter(isBed).flatMap((bed) => windward(stand, path, bed, input));
+    const crossings = crossingsOf(approach, stand, input);
+    return beds.length + crossings.length > 0 ? [{ approach, stand, crossings, beds }] : [];
   });
+  const far = ({ stand, crossings }: WayFaults) => distanceM(stand.at, crossings[0]?.at ?? stand.at);
+  const left = faults.sort((a, b) => far(a) - far(b) || a.approach.id.localeCompare(b.approach.id));
+  const groups: WayFaults[][] = [];
+  for (const one of left) {
+    const group = groups.find((g) => isSamePlace(g[0] as WayFaults, one, input.settings.besideM));
+    if (group) group.push(one);
+    else groups.push([one]);
+  }
+  return groups.map((group) => tell(group, input));
 }

@@ -1,16 +1,26 @@
 import { monthOf } from '../day-time';
 import { bearingDeg, distanceM, distanceToShapeM, nearestOnShape } from '../geometry';
-import { type ScoredFeature, TIMES_OF_DAY, type TimeOfDay, type WindowName } from '../types';
+import {
+  type Point,
+  type ScoredApproach,
+  type ScoredFeature,
+  type ScoredStand,
+  TIMES_OF_DAY,
+  type TimeOfDay,
+  type WindowName,
+} from '../types';
 import { formatDistance } from '../units';
 import { usesOf } from '../whereabouts';
-import { approachFacts, away, featureFacts, makeFinding } from './make-finding';
+import { approachFacts, away, featureFacts, listText, makeFinding } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
-import { footPath, isAttraction, standOf, windowsHunted } from './shot-of';
+import { footPath, isAttraction, isMovable, standOf, windowsHunted, workOn } from './shot-of';
 
-/** When a way is walked for each window: in, then out. */
-const WALKED: Record<WindowName, { in: TimeOfDay[]; out: TimeOfDay[] }> = {
-  morning: { in: ['night', 'dawn'], out: ['midday'] },
-  evening: { in: ['afternoon'], out: ['dusk', 'night'] },
+type Leg = 'in' | 'out';
+
+/** When a way is walked for each window, and the later time at which it may be walked in instead. */
+const WALKED: Record<WindowName, { in: TimeOfDay[]; out: TimeOfDay[]; later: TimeOfDay }> = {
+  morning: { in: ['night', 'dawn'], out: ['midday'], later: 'morning' },
+  evening: { in: ['afternoon'], out: ['dusk', 'night'], later: 'midday' },
 };
 const SPOKEN: Record<TimeOfDay, string> = {
   night: 'in the dark',
@@ -20,74 +30,145 @@ const SPOKEN: Record<TimeOfDay, string> = {
   afternoon: 'in the afternoon',
   dusk: 'at last light',
 };
+const LATER: Record<WindowName, string> = { morning: 'half an hour after daybreak', evening: 'at midday' };
 
-interface Worst {
+/** A way that passes a place at a time when deer are at it. */
+interface Pass {
+  approach: ScoredApproach;
+  stand: ScoredStand;
+  feature: ScoredFeature;
+  gapM: number;
+  at: Point;
   window: WindowName;
-  leg: 'in' | 'out';
+  leg: Leg;
   time: TimeOfDay;
   use: number;
 }
 
-function worstTime(feature: ScoredFeature, windows: WindowName[], direction: string, input: SetupInput): Worst | null {
-  let worst: Worst | null = null;
-  for (const month of new Set(input.days.map(monthOf))) {
-    const uses = usesOf(feature, month, input.scoring.whereabouts);
-    for (const window of windows) {
-      for (const leg of ['in', 'out'] as const) {
-        if (direction !== 'both' && direction !== leg) continue;
-        for (const time of WALKED[window][leg]) {
-          const use = uses[TIMES_OF_DAY.indexOf(time)] ?? 0;
-          if (!worst || use > worst.use) worst = { window, leg, time, use };
-        }
-      }
-    }
-  }
-  return worst;
+const goes = ({ direction }: ScoredApproach, leg: Leg) => direction === 'both' || direction === leg;
+
+/** The most deer use a place at a time of day, over the months hunted; 0-1. */
+function mostUse(feature: ScoredFeature, time: TimeOfDay, { days, scoring }: SetupInput): number {
+  const months = [...new Set(days.map(monthOf))];
+  return Math.max(
+    0,
+    ...months.map((month) => usesOf(feature, month, scoring.whereabouts)[TIMES_OF_DAY.indexOf(time)] ?? 0),
+  );
 }
 
-/** Attractions beside a walk at a time when deer are at them. The last of the walk is left out: it must come near what the seat is for. */
-export function findBesideApproach(input: SetupInput): Finding[] {
-  const { settings, units } = input;
-  return input.approaches.flatMap((approach) => {
-    const stand = standOf(input, approach.standId);
-    const windows = stand ? windowsHunted(stand) : [];
-    const path = footPath(approach, settings.seatMarginM);
-    if (!stand || windows.length === 0 || path.length === 0) return [];
-    return input.features.filter(isAttraction).flatMap((feature) => {
-      const gaps = path.map((p) => distanceToShapeM(p, feature.shape));
-      const least = Math.min(...gaps);
-      if (least > settings.besideM) return [];
-      const worst = worstTime(feature, windows, approach.direction, input);
-      if (!worst || worst.use < settings.leastUse) return [];
-      const at = nearestOnShape(path[gaps.indexOf(least)] ?? stand.at, feature.shape);
-      const [metres, bearing] = [distanceM(stand.at, at), bearingDeg(stand.at, at)];
-      const movable = feature.kind === 'scrape' || feature.kind === 'water';
-      return [
-        makeFinding(
-          {
-            code: 'beside_approach',
-            subject: { of: 'feature', id: feature.id, name: feature.name },
-            stand: { id: stand.id, name: stand.name },
+function passesOf(approach: ScoredApproach, stand: ScoredStand, feature: ScoredFeature, input: SetupInput): Pass[] {
+  const { besideM, seatMarginM, leastUse } = input.settings;
+  const path = footPath(approach, seatMarginM);
+  const gaps = path.map((p) => distanceToShapeM(p, feature.shape));
+  const gapM = Math.min(Number.POSITIVE_INFINITY, ...gaps);
+  if (gapM > besideM) return [];
+  const at = nearestOnShape(path[gaps.indexOf(gapM)] ?? stand.at, feature.shape);
+  return windowsHunted(stand).flatMap((window) =>
+    (['in', 'out'] as const)
+      .filter((leg) => goes(approach, leg))
+      .flatMap((leg) =>
+        WALKED[window][leg]
+          .map((time) => ({
+            approach,
+            stand,
+            feature,
+            gapM,
             at,
-            distanceM: metres,
-            bearingDeg: bearing,
-            text: `${feature.name} lies ${least < 1 ? 'on' : `${formatDistance(least, units)} from`} the walk ${worst.leg} by ${approach.name} to ${stand.name}, ${away(metres, bearing, units)} of the seat`,
-            why: `The walk ${worst.leg} for the ${worst.window} passes it ${SPOKEN[worst.time]}, when deer are there ${Math.round(worst.use * 100)} times in a hundred.`,
-            acts: [
-              { act: 'new_way', text: `Lay ${approach.name} round ${feature.name}` },
-              ...(movable ? [{ act: 'move' as const, text: `Move ${feature.name} off ${approach.name}` }] : []),
-              { act: 'block', text: `Screen ${approach.name} from ${feature.name}` },
-            ],
-            trial: {
-              change: 'without_features',
-              standId: stand.id,
-              featureIds: [feature.id],
-              window: worst.window,
-            },
-          },
-          [featureFacts(feature), approachFacts(approach), stand.suitability],
-        ),
-      ];
-    });
+            window,
+            leg,
+            time,
+            use: mostUse(feature, time, input),
+          }))
+          .filter(({ use }) => use >= leastUse),
+      ),
+  );
+}
+
+/** Another way of the stand, walked for the same, that passes nothing deer are at then. */
+function otherWay({ approach, stand, window, leg }: Pass, passes: Pass[], input: SetupInput): ScoredApproach | null {
+  const busy = (a: ScoredApproach) =>
+    passes.some((p) => p.approach.id === a.id && p.window === window && p.leg === leg);
+  return (
+    input.approaches.find((a) => a.standId === stand.id && a.id !== approach.id && goes(a, leg) && !busy(a)) ?? null
+  );
+}
+
+function mayWait({ feature, window, leg }: Pass, input: SetupInput): boolean {
+  return leg === 'in' && mostUse(feature, WALKED[window].later, input) < input.settings.leastUse;
+}
+
+function actsOf(pass: Pass, passes: Pass[], input: SetupInput): Finding['acts'] {
+  const { approach, feature, stand, window } = pass;
+  const other = otherWay(pass, passes, input);
+  const acts: Finding['acts'] = [];
+  if (other) {
+    acts.push({ act: 'new_way', text: `Walk ${pass.leg} to ${stand.name} by ${other.name} instead`, work: null });
+  }
+  if (mayWait(pass, input)) {
+    acts.push({ act: 'other_time', text: `Walk in past ${feature.name} only ${LATER[window]}`, work: null });
+  }
+  if (isMovable(feature)) {
+    acts.push({ act: 'move', text: `Move ${feature.name} off ${approach.name}`, work: workOn(feature) });
+  }
+  acts.push({ act: 'new_way', text: `Lay ${approach.name} round ${feature.name}`, work: 'cutting' });
+  acts.push({ act: 'block', text: `Screen ${approach.name} from ${feature.name}`, work: 'planting' });
+  return acts;
+}
+
+function tell(feature: ScoredFeature, all: Pass[], passes: Pass[], input: SetupInput): Finding {
+  const { units } = input;
+  const ranked = [...all].sort(
+    (a, b) => b.use - a.use || a.gapM - b.gapM || a.approach.id.localeCompare(b.approach.id),
+  );
+  const worst = ranked[0] as Pass;
+  const { stand, approach, gapM, leg, window, use, time } = worst;
+  const ways = [...new Map(ranked.map((p) => [p.approach.id, p])).values()];
+  const [metres, bearing] = [distanceM(stand.at, worst.at), bearingDeg(stand.at, worst.at)];
+  const near = gapM < 1 ? 'on' : `${formatDistance(gapM, units)} from`;
+  const where = `${away(metres, bearing, units)} of the seat`;
+  const others = listText(ways.slice(1).map((w) => `${w.approach.name} to ${w.stand.name}`));
+  const also = [...new Map(ways.map((w) => [w.stand.id, { id: w.stand.id, name: w.stand.name }])).values()];
+  const other = otherWay(worst, passes, input);
+  const found = makeFinding(
+    {
+      code: 'beside_approach',
+      subject: { of: 'feature', id: feature.id, name: feature.name },
+      stand: { id: stand.id, name: stand.name },
+      also: also.filter(({ id }) => id !== stand.id),
+      at: worst.at,
+      distanceM: metres,
+      bearingDeg: bearing,
+      text: `${feature.name} lies ${near} the walk ${leg} by ${approach.name} to ${stand.name}, ${where}`,
+      why: `The walk ${leg} for the ${window} passes it ${SPOKEN[time]}, when deer are there ${Math.round(use * 100)} times in a hundred.${others ? ` So does ${others}.` : ''}`,
+      acts: actsOf(worst, passes, input),
+      trial:
+        other && !isMovable(feature)
+          ? { change: 'without_approach', standId: stand.id, approachId: approach.id, window }
+          : { change: 'without_features', standId: stand.id, featureIds: [feature.id], window },
+    },
+    [featureFacts(feature), ...ways.map((w) => [approachFacts(w.approach), w.stand.suitability])],
+  );
+  return { ...found, key: `beside_approach:${feature.id}` };
+}
+
+/**
+ * Attractions beside walks at a time when deer are at them, each told once with all its walks. The last of a walk is left out: it
+ * must come near what the seat is for. What cannot be moved counts only where another way or another time would pass it by; ways
+ * told for a graver fault (`toldWays`) are not told again for it.
+ */
+export function findBesideApproach(input: SetupInput, toldWays: ReadonlySet<string> = new Set()): Finding[] {
+  const attractions = input.features.filter(isAttraction);
+  const passes = input.approaches.flatMap((approach) => {
+    const stand = standOf(input, approach.standId);
+    return stand ? attractions.flatMap((feature) => passesOf(approach, stand, feature, input)) : [];
+  });
+  return attractions.flatMap((feature) => {
+    const counted = passes.filter(
+      (pass) =>
+        pass.feature.id === feature.id &&
+        (isMovable(feature) ||
+          (!toldWays.has(pass.approach.id) && (otherWay(pass, passes, input) !== null || mayWait(pass, input)))),
+    );
+    return counted.length > 0 ? [tell(feature, counted, passes, input)] : [];
   });
 }

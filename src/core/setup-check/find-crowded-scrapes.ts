@@ -1,7 +1,7 @@
 import { bearingDeg, distanceM, nearestOnShape } from '../geometry';
 import type { Point, ScoredFeature, ScoredStand } from '../types';
 import { formatDistance } from '../units';
-import { away, featureFacts, makeFinding, standFacts } from './make-finding';
+import { away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import { canShoot, footPath, gapM, isLine, shotOf, windowsHunted } from './shot-of';
 
@@ -107,7 +107,8 @@ export function findCrowdedScrapes(input: SetupInput): Finding[] {
             acts: [
               {
                 act: 'keep_one',
-                text: `Keep ${scrape.name} and take away ${rest.map((r) => r.scrape.name).join(', ')}`,
+                text: `Keep ${scrape.name} and take away ${listText(rest.map((r) => r.scrape.name))}`,
+                work: 'mock_scrape',
               },
             ],
             trial: stand && {

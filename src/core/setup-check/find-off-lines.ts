@@ -2,16 +2,19 @@ import { bearingDeg, distanceM, nearestOnShape } from '../geometry';
 import { formatDistance } from '../units';
 import { featureFacts, makeFinding } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
-import { gapM, isAttraction, isLine } from './shot-of';
+import { gapM, isAttraction, isLine, isMovable, workOn } from './shot-of';
 
-/** Attractions that lie off every line of movement, on a ground that has lines drawn. */
+/** Attractions off every line of movement, themselves and all in their opening, on a ground that has lines drawn. */
 export function findOffLines(input: SetupInput): Finding[] {
   const { settings, units } = input;
   const lines = input.features.filter(isLine);
   if (lines.length === 0) return [];
-  return input.features.filter(isAttraction).flatMap((feature) => {
+  const attractions = input.features.filter(isAttraction);
+  const onLine = attractions.filter((f) => lines.some((line) => gapM(f.shape, line.shape) <= settings.offLinesM));
+  return attractions.flatMap((feature) => {
+    if (onLine.some((f) => gapM(feature.shape, f.shape) <= settings.openingM)) return [];
     const near = lines.map((line) => ({ line, gap: gapM(feature.shape, line.shape) })).sort((a, b) => a.gap - b.gap)[0];
-    if (!near || near.gap <= settings.offLinesM) return [];
+    if (!near) return [];
     const origin = near.line.shape.type === 'point' ? near.line.shape.at : { eastM: 0, northM: 0 };
     const at = nearestOnShape(origin, feature.shape);
     const seat = [...input.stands].sort((a, b) => distanceM(a.at, at) - distanceM(b.at, at))[0];
@@ -27,8 +30,13 @@ export function findOffLines(input: SetupInput): Finding[] {
           text: `${feature.name} is off every line of movement: the nearest, ${near.line.name}, is ${formatDistance(near.gap, units)} away`,
           why: 'Deer leave the line they should travel to reach it, by a way nobody has drawn or sits on.',
           acts: [
-            { act: 'move', text: `Move ${feature.name} to ${near.line.name}, or draw the line deer take to it` },
-            ...(feature.kind === 'scrape' ? [{ act: 'take_away' as const, text: `Take away ${feature.name}` }] : []),
+            ...(isMovable(feature)
+              ? [{ act: 'move' as const, text: `Move ${feature.name} to ${near.line.name}`, work: workOn(feature) }]
+              : []),
+            { act: 'draw_line', text: `Draw the line deer take to ${feature.name}`, work: null },
+            ...(isMovable(feature)
+              ? [{ act: 'take_away' as const, text: `Take away ${feature.name}`, work: workOn(feature) }]
+              : []),
           ],
           trial: null,
         },

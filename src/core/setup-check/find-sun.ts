@@ -3,10 +3,11 @@ import { formatClock, formatClock12, localToUtc, monthOf } from '../day-time';
 import { sunInEyes } from '../promise/sun-in-eyes';
 import { sectorName } from '../sectors';
 import { sunPosition } from '../sun';
+import type { ScoredStand } from '../types';
 
 import { makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
-import { windowsHunted } from './shot-of';
+import { canShoot, isAttraction, isLine, shotOf, windowsHunted } from './shot-of';
 
 const STEP_MS = 5 * 60_000;
 /** Sun in the eyes less than this (0-1) troubles nobody. */
@@ -38,15 +39,21 @@ interface SunSpell {
   most: number;
 }
 
-function spell(days: Moment[][], blinds: (m: Moment) => boolean, least: number): SunSpell {
+function spell(days: Moment[][], blinds: (m: Moment) => boolean, settings: SetupInput['settings']): SunSpell {
   const found = days.map((moments) => moments.filter(blinds));
-  const troubled = found.map((m, i) => ({ i, minutes: m.length * 5 })).filter(({ minutes }) => minutes >= least);
+  const long = found
+    .map((m, i) => ({ i, minutes: m.length * 5 }))
+    .filter(({ minutes }) => minutes >= settings.sunMinutes);
+  const troubled = long.length >= Math.min(settings.sunMonths, days.length) ? long : [];
   return {
     days: troubled.map(({ i }) => i),
     moments: troubled.flatMap(({ i }) => found[i] ?? []),
     most: Math.max(0, ...troubled.map(({ minutes }) => minutes)),
   };
 }
+
+/** What is turned to is to be free of the sun in every month. */
+const anyMonth = (settings: SetupInput['settings']) => ({ ...settings, sunMonths: 1 });
 
 function nearestFree(facingDeg: number, free: (deg: number) => boolean): number | null {
   for (let turn = 5; turn <= 180; turn += 5) {
@@ -65,7 +72,13 @@ function whenText(moments: Moment[], days: string[], input: SetupInput): string 
   return `${first ? clock(first.at) : ''} to ${last ? clock(last.at) : ''} in ${months.join(', ')}`;
 }
 
-/** Seats that look into the low sun in a window they are hunted in. */
+/** Whether a seat turned to a direction still has in shot all that draws deer to it now. */
+function keepsInShot(stand: ScoredStand, input: SetupInput): (deg: number) => boolean {
+  const worth = input.features.filter((f) => (isAttraction(f) || isLine(f)) && canShoot(shotOf(stand, f.shape, input)));
+  return (facingDeg) => worth.every((f) => canShoot(shotOf({ ...stand, facingDeg }, f.shape, input)));
+}
+
+/** Seats that look into the low sun in a window they are hunted in. Dense wood screens it off. */
 export function findSeatSun(input: SetupInput): Finding[] {
   const { promise } = input.scoring;
   const low = (['morning', 'evening'] as const).map((name) => {
@@ -75,13 +88,14 @@ export function findSeatSun(input: SetupInput): Finding[] {
   const blinds = (deg: number) => (m: Moment) => sunInEyes(deg, m.altitudeDeg, m.azimuthDeg, promise) >= TROUBLES;
   return input.stands.flatMap((stand) => {
     const facing = stand.facingDeg;
-    if (facing === null) return [];
+    if (facing === null || stand.shelter === 'dense_wood') return [];
     const hunted = low.filter(({ name }) => windowsHunted(stand).includes(name));
-    const spells = hunted.map((one) => ({ ...one, spell: spell(one.days, blinds(facing), input.settings.sunMinutes) }));
+    const spells = hunted.map((one) => ({ ...one, spell: spell(one.days, blinds(facing), input.settings) }));
     const worst = spells.filter((s) => s.spell.most > 0).sort((a, b) => b.spell.most - a.spell.most)[0];
     if (!worst) return [];
+    const keeps = keepsInShot(stand, input);
     const free = (deg: number) =>
-      hunted.every((one) => spell(one.days, blinds(deg), input.settings.sunMinutes).days.length === 0);
+      keeps(deg) && hunted.every((one) => spell(one.days, blinds(deg), anyMonth(input.settings)).days.length === 0);
     const better = nearestFree(facing, free);
     const when = whenText(
       worst.spell.moments,
@@ -107,9 +121,10 @@ export function findSeatSun(input: SetupInput): Finding[] {
                   {
                     act: 'turn' as const,
                     text: `Turn ${stand.name} to face ${Math.round(better)}° (${sectorName(better)})`,
+                    work: null,
                   },
                 ]),
-            { act: 'block', text: `Brush in ${stand.name} against the ${worst.name} sun` },
+            { act: 'block', text: `Brush in ${stand.name} against the ${worst.name} sun`, work: 'cutting' },
           ],
           trial:
             better === null ? null : { change: 'facing', standId: stand.id, facingDeg: better, window: worst.name },
@@ -131,9 +146,9 @@ export function findCameraSun(input: SetupInput): Finding[] {
   return input.cameras.flatMap((camera) => {
     const facing = camera.facingDeg;
     if (facing === null) return [];
-    const found = spell(days, blinds(facing), settings.sunMinutes);
+    const found = spell(days, blinds(facing), settings);
     if (found.days.length === 0) return [];
-    const better = nearestFree(facing, (deg) => spell(days, blinds(deg), settings.sunMinutes).days.length === 0);
+    const better = nearestFree(facing, (deg) => spell(days, blinds(deg), anyMonth(settings)).days.length === 0);
     const name = camera.name || 'A camera';
     const when = whenText(
       found.moments,
@@ -152,7 +167,7 @@ export function findCameraSun(input: SetupInput): Finding[] {
           bearingDeg: facing,
           text: `${name} looks into the low sun, ${when}`,
           why: `Pictures wash out and the sun sets it off. Facing ${to} keeps it out of the picture.`,
-          acts: [{ act: 'turn', text: `Turn ${name} to face ${to}` }],
+          acts: [{ act: 'turn', text: `Turn ${name} to face ${to}`, work: null }],
           trial: null,
         },
         [camera.id, Math.round(camera.at.eastM), Math.round(camera.at.northM), facing],

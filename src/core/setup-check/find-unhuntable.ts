@@ -1,7 +1,18 @@
 import type { ScoredFeature, ScoredStand } from '../types';
 import { away, featureFacts, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
-import { canShoot, carries, isAttraction, type Shot, shotOf, windowsHunted, windsHunted } from './shot-of';
+import {
+  canShoot,
+  carries,
+  isAttraction,
+  isMade,
+  isMovable,
+  type Shot,
+  shotOf,
+  windowsHunted,
+  windsHunted,
+  workOn,
+} from './shot-of';
 
 interface InShot {
   stand: ScoredStand;
@@ -36,9 +47,9 @@ function tell(feature: ScoredFeature, nearest: InShot, shots: InShot[], input: S
         ? 'Every good wind of the stands that reach it carries scent from the seat to where the deer come.'
         : 'What draws deer where nobody can sit draws them away from where somebody does.',
       acts: [
-        { act: 'move_seat', text: `Hang a seat off ${feature.name}, crosswind of it` },
-        ...(feature.kind === 'scrape' || feature.kind === 'water'
-          ? [{ act: 'take_away' as const, text: `Take away ${feature.name}` }]
+        { act: 'move_seat', text: `Hang a seat off ${feature.name}, crosswind of it`, work: 'cutting' },
+        ...(isMovable(feature)
+          ? [{ act: 'take_away' as const, text: `Take away ${feature.name}`, work: workOn(feature) }]
           : []),
       ],
       trial: reached ? { change: 'without_features', standId: stand.id, featureIds: [feature.id], window: null } : null,
@@ -47,7 +58,7 @@ function tell(feature: ScoredFeature, nearest: InShot, shots: InShot[], input: S
   );
 }
 
-/** Attractions that no stand can hunt on any of its winds. */
+/** Attractions in shot of stands on none of their winds, and what a club made that is in shot of no stand at all. */
 export function findUnhuntable(input: SetupInput): Finding[] {
   const { stands, settings } = input;
   const hunted = stands.filter((stand) => windowsHunted(stand).length > 0);
@@ -58,6 +69,7 @@ export function findUnhuntable(input: SetupInput): Finding[] {
       .sort((a, b) => a.shot.metres - b.shot.metres || a.stand.id.localeCompare(b.stand.id));
     const shots = all.filter(({ shot }) => canShoot(shot));
     if (shots.some((one) => huntable(one, settings.scentDeg))) return [];
+    if (shots.length === 0 && !isMade(feature)) return [];
     const nearest = shots[0] ?? all[0];
     return nearest ? [tell(feature, nearest, shots, input)] : [];
   });

@@ -41,7 +41,15 @@ export function away(metres: number, bearing: number, units: Units): string {
 }
 
 /** A finding with its key and print; `facts` are what it rests on. */
-export function makeFinding(found: Omit<Finding, 'key' | 'print' | 'evidence'>, facts: unknown[]): Finding {
+export function makeFinding(
+  found: Omit<Finding, 'key' | 'print' | 'evidence' | 'also'> & { also?: Finding['also'] },
+  facts: unknown[],
+): Finding {
   const key = [found.code, found.subject.id, found.stand?.id ?? ''].join(':');
-  return { ...found, key, print: printOf(facts), evidence: 'practice' };
+  return { also: [], ...found, key, print: printOf(facts), evidence: 'practice' };
+}
+
+/** 'A', 'A and B', 'A, B and C'. */
+export function listText(names: string[]): string {
+  return names.length < 2 ? (names[0] ?? '') : `${names.slice(0, -1).join(', ')} and ${names.at(-1)}`;
 }

@@ -29,8 +29,12 @@ export interface SetupSettings {
   bedsWithinM: number;
   /** Share of the winds a stand is hunted on that may carry the walk to a bed, 0-1. */
   upwindShare: number;
+  /** A way this near water crosses a line in it: no ground scent stays, m. */
+  wadeM: number;
   /** Minutes of low sun in a window, or in a camera's day, that may pass. */
   sunMinutes: number;
+  /** Months hunted, of five, in which they are passed before it counts. */
+  sunMonths: number;
   /** Turn from the sun inside which a camera looks into it, degrees, and the sun's height up to which it does. */
   cameraTurnDeg: number;
   cameraSunDeg: number;
@@ -51,7 +55,9 @@ export const DEFAULT_SETUP: SetupSettings = {
   offLinesM: ydToM(100),
   bedsWithinM: ydToM(200),
   upwindShare: 0.5,
+  wadeM: ydToM(15),
   sunMinutes: 45,
+  sunMonths: 3,
   cameraTurnDeg: 30,
   cameraSunDeg: 25,
 };

@@ -1,3 +1,4 @@
+import type { GroundWork } from '../ground-work';
 import type { ScoringSettings } from '../settings';
 import type { Place } from '../sun';
 import type { Evidence, Point, ScoredApproach, ScoredFeature, ScoredStand, SitWindow, WindowName } from '../types';
@@ -45,7 +46,18 @@ export interface SetupInput {
   units: Units;
 }
 
-export const SETUP_ACTS = ['take_away', 'move', 'block', 'trim', 'keep_one', 'turn', 'move_seat', 'new_way'] as const;
+export const SETUP_ACTS = [
+  'take_away',
+  'move',
+  'block',
+  'trim',
+  'keep_one',
+  'turn',
+  'move_seat',
+  'new_way',
+  'other_time',
+  'draw_line',
+] as const;
 export type SetupAct = (typeof SETUP_ACTS)[number];
 
 /** What may be changed to see what a finding costs. */
@@ -63,6 +75,8 @@ export interface Finding {
   /** The thing at fault. */
   subject: { of: 'stand' | 'approach' | 'feature' | 'camera'; id: string; name: string };
   stand: { id: string; name: string } | null;
+  /** Other stands it touches. */
+  also: { id: string; name: string }[];
   at: Point;
   /** From the seat (of a camera or a stand itself: null), metres and degrees true. */
   distanceM: number | null;
@@ -70,7 +84,8 @@ export interface Finding {
   text: string;
   why: string;
   evidence: Evidence;
-  acts: { act: SetupAct; text: string }[];
+  /** `work` is the kind of work it takes that may be limited; null: none of them. */
+  acts: { act: SetupAct; text: string; work: GroundWork | null }[];
   trial: SetupTrial | null;
 }
 

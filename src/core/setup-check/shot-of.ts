@@ -1,6 +1,7 @@
 import { apartDeg, downwindDeg } from '../angles';
 import { anyArcContains, arcsFor } from '../arcs';
 import { bearingDeg, distanceM, distanceToShapeM, lengthM, nearestOnShape } from '../geometry';
+import type { GroundWork } from '../ground-work';
 import { shotRangeM, shotSideShare } from '../promise/in-range';
 import {
   type FeatureKind,
@@ -22,6 +23,16 @@ const BEDS: ReadonlySet<FeatureKind> = new Set(['bedding', 'sanctuary']);
 /** A creek drawn as a line is met all along it and can be moved by nobody. */
 export const isAttraction = (f: ScoredFeature) =>
   ATTRACTIONS.has(f.kind) && !(f.kind === 'water' && f.shape.type === 'line');
+/** What a club can take up and put elsewhere: a scrape it laid, a hole it dug or filled. An oak, a field and a pond stay where they are. */
+export const isMovable = (f: ScoredFeature) => f.kind === 'scrape' || (f.kind === 'water' && f.shape.type === 'point');
+/** The kind of work it is to lay, move or take away a place deer come to. */
+export function workOn(f: ScoredFeature): GroundWork | null {
+  if (f.kind === 'scrape') return 'mock_scrape';
+  if (f.kind === 'water') return 'water';
+  return f.kind === 'food_plot' ? 'planting' : null;
+}
+/** What a club made for deer to come to. */
+export const isMade = (f: ScoredFeature) => isMovable(f) || f.kind === 'food_plot';
 export const isLine = (f: ScoredFeature) => LINES.has(f.kind);
 export const isBed = (f: ScoredFeature) => BEDS.has(f.kind);
 
