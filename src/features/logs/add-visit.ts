@@ -8,8 +8,9 @@ import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { foundSent, noteSent } from '@/server/sent-requests';
 import { resolvePlace } from './visit-places';
-import { VISIT_WORDS, type VisitInput } from './visit-schema';
+import type { VisitInput } from './visit-schema';
 import { findSameVisit, insertVisit } from './visits-data';
+import { VISIT_AUDIT, VISIT_ERRORS } from './words/visits';
 
 const DAY_MS = 86_400_000;
 const AHEAD_MS = 15 * 60_000;
@@ -27,11 +28,11 @@ export async function addVisit(
 ): Promise<{ id: string; name: string }> {
   const { kind, bumped, notes } = input;
   const at = localToUtc(input.day, input.clock, scope.club.zone);
-  if (at > now + AHEAD_MS) throw wrong('day', 'This is still to come. Write a visit down afterwards.');
-  if (at < now - OLDEST_MS) throw wrong('day', 'This is more than a year ago: choose a later day.');
+  if (at > now + AHEAD_MS) throw wrong('day', VISIT_ERRORS.toCome);
+  if (at < now - OLDEST_MS) throw wrong('day', VISIT_ERRORS.old);
   return write(async (tx) => {
     const place = await resolvePlace(scope, input.place, tx);
-    if (!place) throw wrong('place', 'This place is no longer there. Choose another.');
+    if (!place) throw wrong('place', VISIT_ERRORS.gone);
     const { lat, lon, standId, name } = place;
     const row = { kind, at, lat, lon, standId, memberId: scope.member.id, bumped, notes };
     const before = await foundSent(tx, scope, sent, 'visit');
@@ -49,7 +50,7 @@ export async function addVisit(
         action: 'visit.added',
         subjectType: 'visit',
         subjectId: id,
-        summary: `${VISIT_WORDS[kind]} at ${name}, ${momentText(at, scope.club)}.`,
+        summary: VISIT_AUDIT.added(kind, name, momentText(at, scope.club)),
         detail: { kind, standId, bumped },
       },
       now,

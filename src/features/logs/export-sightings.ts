@@ -7,28 +7,12 @@ import { audit } from '@/server/audit';
 import type { ClubScope } from '@/server/scope';
 import { type IndexGroup, listSightings, readSightings } from './sightings-reads';
 import type { SightingsAsk } from './sightings-schema';
-
-const LOG_HEADINGS = [
-  'day',
-  'window',
-  'stand',
-  'member',
-  'from (club time)',
-  'to (club time)',
-  'hours',
-  'antlered bucks',
-  'does',
-  'fawns',
-  'unknown',
-  'bumped in',
-  'bumped from the seat',
-  'bumped out',
-  'bumped where',
-  'shot',
-  'hit',
-  'follow-up',
-  'notes',
-];
+import {
+  TABLE_FILE_GROUPS as GROUPS,
+  LOG_FILE_HEADINGS,
+  SIGHTINGS_AUDIT,
+  TABLE_FILE_HEADINGS,
+} from './words/sightings';
 
 async function logRows(scope: ClubScope, ask: SightingsAsk, now: number): Promise<string[][]> {
   const { zone } = scope.club;
@@ -49,39 +33,14 @@ async function logRows(scope: ClubScope, ask: SightingsAsk, now: number): Promis
     log.followUp ?? '',
     log.notes,
   ]);
-  return [LOG_HEADINGS, ...rows];
+  return [LOG_FILE_HEADINGS, ...rows];
 }
-
-const FIGURES = [
-  'deer/h',
-  'bucks/h',
-  'does/h',
-  'fawns/h',
-  'unknown/h',
-  'does per buck',
-  'fawns per doe',
-  'unknown share',
-];
-const TABLE_HEADINGS = [
-  'group',
-  'name',
-  'sits',
-  'sits without deer',
-  'hours',
-  'deer',
-  'antlered bucks',
-  'does',
-  'fawns',
-  'unknown',
-  'sits with a bump',
-  ...[...FIGURES, 'bumped share'].flatMap((name) => [name, `${name}, 95 % from`, `${name}, 95 % to`]),
-];
 
 /** A figure that cannot be given is blank in a file. */
 const cells = (figure: Figure) =>
   figure.known ? [figure.value, figure.low, figure.high].map((value) => value.toFixed(3)) : ['', '', ''];
 
-function tableRow(group: string, { label, indices }: IndexGroup): string[] {
+export function tableRow(group: string, { label, indices }: IndexGroup): string[] {
   const { sits, zeroSits, hours, seen, perHour, doesPerBuck, fawnsPerDoe, unknownShare, bumpedSits, bumpedShare } =
     indices;
   return [
@@ -99,11 +58,11 @@ function tableRow(group: string, { label, indices }: IndexGroup): string[] {
 async function tableRows(scope: ClubScope, ask: SightingsAsk, now: number): Promise<string[][]> {
   const { total, byStand, byWindow, byMonth } = await readSightings(scope, ask, now);
   return [
-    TABLE_HEADINGS,
-    tableRow('season', { key: 'all', label: 'all', indices: total }),
-    ...byStand.map((group) => tableRow('stand', group)),
-    ...byWindow.map((group) => tableRow('window', group)),
-    ...byMonth.map((group) => tableRow('month', group)),
+    TABLE_FILE_HEADINGS,
+    tableRow(GROUPS.season, { key: 'all', label: GROUPS.all, indices: total }),
+    ...byStand.map((group) => tableRow(GROUPS.stand, group)),
+    ...byWindow.map((group) => tableRow(GROUPS.window, group)),
+    ...byMonth.map((group) => tableRow(GROUPS.month, group)),
   ];
 }
 
@@ -125,7 +84,7 @@ export async function exportSightings(
         action: 'sightings.exported',
         subjectType: 'season',
         subjectId: String(year.year),
-        summary: `Took ${whose === 'own' ? 'their own' : "the club's"} sightings of ${year.label} out as a file.`,
+        summary: SIGHTINGS_AUDIT.exported(year.label, own),
         detail: { what: ask.what, whose },
       },
       now,

@@ -2,15 +2,13 @@ import { z } from 'zod';
 import { isClock } from '@/core/day-time';
 import { FOLLOW_UPS, HIT_PLACES, SHOTS } from '@/core/log/follow-up';
 import { sentSchema } from '@/lib/sent-schema';
+import { LOG_FIELD_ERRORS as ERRORS } from './words/form';
 
 const MOST_DEER = 200;
-const count = z
-  .int('Give a whole number.')
-  .min(0, 'There cannot be fewer than none.')
-  .max(MOST_DEER, `At most ${MOST_DEER}.`);
-const clock = z.string().refine(isClock, 'Give a time.');
+const count = z.int(ERRORS.whole).min(0, ERRORS.negative).max(MOST_DEER, ERRORS.most(MOST_DEER));
+const clock = z.string().refine(isClock, ERRORS.time);
 const notChosen = z.union([z.literal(''), z.null()]).transform(() => null);
-const words = (most: number) => z.string().trim().max(most, `Keep it to ${most} characters.`);
+const words = (most: number) => z.string().trim().max(most, ERRORS.long(most));
 
 export const COUNT_FIELDS = ['antleredBucks', 'does', 'fawns', 'unknown'] as const;
 export const BUMP_FIELDS = ['bumpedIn', 'bumpedSitting', 'bumpedOut'] as const;
@@ -32,7 +30,7 @@ export const logFormSchema = z
     bumpedSitting: count,
     bumpedOut: count,
     bumpedWhere: words(200),
-    shot: z.enum(SHOTS, { error: 'Choose what came of it.' }),
+    shot: z.enum(SHOTS, { error: ERRORS.shot }),
     shotClock: z.string().max(5),
     hitPlace: z.enum(HIT_PLACES).or(notChosen),
     followUp: z.enum(FOLLOW_UPS).or(notChosen),
@@ -42,13 +40,13 @@ export const logFormSchema = z
   .superRefine((log, ctx) => {
     const fail = (field: string, message: string) => ctx.addIssue({ code: 'custom', path: [field], message });
     if (isClock(log.startClock) && isClock(log.endClock) && log.endClock <= log.startClock) {
-      fail('endClock', 'The end comes after the start.');
+      fail('endClock', ERRORS.endFirst);
     }
     if (log.shot === 'none') return;
-    if (!isClock(log.shotClock)) fail('shotClock', 'Give the time of the shot.');
+    if (!isClock(log.shotClock)) fail('shotClock', ERRORS.shotTime);
     if (log.shot === 'missed') return;
-    if (log.hitPlace === null) fail('hitPlace', 'Choose where, or that you are not sure.');
-    if (log.followUp === null) fail('followUp', 'Choose how it stands.');
+    if (log.hitPlace === null) fail('hitPlace', ERRORS.hit);
+    if (log.followUp === null) fail('followUp', ERRORS.followUp);
   });
 export type LogInput = z.output<typeof logFormSchema>;
 export type LogForm = z.input<typeof logFormSchema>;

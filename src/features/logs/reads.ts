@@ -7,7 +7,6 @@ import type { ClubScope, ScopeClub } from '@/server/scope';
 import { maySeeLog, mayWriteLog } from './log-access';
 import { logFormOf, newLogForm } from './log-form';
 import type { LogForm } from './log-schema';
-import { bumpsText, countsText, shotText } from './log-words';
 import {
   findLoggable,
   findOutingSpan,
@@ -19,6 +18,9 @@ import {
   listWaiting,
 } from './logs-data';
 import { listVisitLines, type VisitLine } from './visits-reads';
+import { LOG_ERRORS } from './words/form';
+import { bumpsText, countsText, shotText } from './words/log';
+import { LOG_HISTORY_WORDS } from './words/screen';
 
 const DAY_MS = 86_400_000;
 /** A sit older than this is no longer asked about; it can still be opened and logged. */
@@ -173,11 +175,11 @@ export async function readLog(scope: ClubScope, sitId: string, now: number): Pro
   const mayWrite = mayWriteLog(scope, sit, now);
   if (sit.log ? !maySeeLog(scope, sit, now) : !mayWrite) throw notFound();
   if (sit.startAt > now) {
-    throw new AppError('not_found', `This sit begins at ${clockText(sit.startAt, club)}. Write its log afterwards.`);
+    throw new AppError('not_found', LOG_ERRORS.beginsAt(clockText(sit.startAt, club)));
   }
   const historyLine = (version: number, name: string, at: number, log: LogFacts): HistoryLine => ({
     version,
-    savedText: `${name}, ${momentText(at, club)}`,
+    savedText: LOG_HISTORY_WORDS.saved(name, momentText(at, club)),
     line: logLine(club, sit, log),
   });
   const { log } = sit;

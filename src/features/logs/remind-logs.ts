@@ -8,6 +8,7 @@ import { hasMail } from '@/features/mail/data';
 import { queueMail } from '@/server/outbox';
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { findPerson, type LoggableSit, listUnlogged } from './logs-data';
+import { LOG_REMINDER_MAIL } from './words/screen';
 
 const HOUR_MS = 3_600_000;
 /** Most write their log on the way home; the others are asked once after a night's sleep (our choice). */
@@ -31,23 +32,21 @@ async function remind(tx: Tx, scope: ClubScope, sit: LoggableSit, now: number): 
   const { club } = scope;
   const to = await reminded(tx, scope, sit);
   if (!to) return false;
-  const whose = to.name === sit.memberName ? 'Your sit' : `The sit of your guest ${sit.memberName}`;
+  const words = LOG_REMINDER_MAIL;
+  const guest = to.name === sit.memberName ? null : sit.memberName;
   const when = dayAndWindow(sit.day, sit.windows, true);
   const { text, html } = composeMail({
     clubName: club.name,
-    paragraphs: [
-      `Hello ${to.name},`,
-      `${whose} at ${sit.standName} has no log yet. It takes twenty seconds, and a sit in which nothing was seen counts as much as any other.`,
-    ],
+    paragraphs: [words.hello(to.name), words.opening(sit.standName, guest)],
     facts: [
-      { label: 'Stand', value: sit.standName },
-      { label: 'When', value: when },
-      { label: 'Club time', value: spanText(sit.startAt, sit.endAt, club) },
+      { label: words.stand, value: sit.standName },
+      { label: words.when, value: when },
+      { label: words.clubTime, value: spanText(sit.startAt, sit.endAt, club) },
     ],
-    button: { label: 'Write the log', url: `${env.appUrl}/clubs/${club.slug}/log/${sit.id}` },
-    footer: 'You get this once for each sit without a log.',
+    button: { label: words.button, url: `${env.appUrl}/clubs/${club.slug}/log/${sit.id}` },
+    footer: words.footer,
   });
-  const subject = `No log yet: ${sit.standName}, ${dayAndWindow(sit.day, sit.windows)}`;
+  const subject = words.subject(sit.standName, dayAndWindow(sit.day, sit.windows));
   return queueMail(tx, { clubId: club.id, kind: 'log.missing', dedupeKey: keyOf(sit), to, subject, text, html }, now);
 }
 

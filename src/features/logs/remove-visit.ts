@@ -3,8 +3,8 @@ import { momentText } from '@/features/clubs/audit-words';
 import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
-import { VISIT_WORDS } from './visit-schema';
 import { findVisit, markVisitRemoved } from './visits-data';
+import { VISIT_AUDIT, VISIT_ERRORS } from './words/visits';
 
 /** Takes a visit out of the count of pressure; its row stays. */
 export async function removeVisit(scope: ClubScope, id: string, now: number): Promise<{ id: string }> {
@@ -12,7 +12,7 @@ export async function removeVisit(scope: ClubScope, id: string, now: number): Pr
     const visit = await findVisit(scope, id, tx);
     if (!visit) throw notFound();
     if (visit.memberId !== scope.member.id && !scope.can('log.write_any')) {
-      throw new AppError('forbidden', 'Only who wrote this visit down, or an officer, can take it out.');
+      throw new AppError('forbidden', VISIT_ERRORS.notYours);
     }
     await markVisitRemoved(scope, tx, id, now);
     await audit(
@@ -23,7 +23,7 @@ export async function removeVisit(scope: ClubScope, id: string, now: number): Pr
         action: 'visit.removed',
         subjectType: 'visit',
         subjectId: id,
-        summary: `Took out a visit: ${VISIT_WORDS[visit.kind].toLowerCase()}, ${momentText(visit.at, scope.club)}.`,
+        summary: VISIT_AUDIT.removed(visit.kind, momentText(visit.at, scope.club)),
       },
       now,
     );

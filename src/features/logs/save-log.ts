@@ -18,6 +18,7 @@ import {
   type LogRow,
   updateLog,
 } from './logs-data';
+import { LOG_AUDIT, LOG_ERRORS } from './words/form';
 
 /** A phone's clock may run ahead of the server's by a little. */
 const AHEAD_MS = 15 * 60_000;
@@ -52,15 +53,14 @@ function sameFacts(log: LogRow, facts: LogFacts): boolean {
 
 function refuse(scope: ClubScope, sit: LoggableSit, facts: LogFacts, now: number): void {
   if (!mayWriteLog(scope, sit, now)) {
-    throw new AppError('forbidden', `This is ${sit.memberName}'s sit: only they or an officer write its log.`);
+    throw new AppError('forbidden', LOG_ERRORS.notYours(sit.memberName));
   }
   if (sit.status !== 'booked') {
-    const what = sit.status === 'lapsed' ? 'lapsed, unsigned' : 'was cancelled';
-    throw new AppError('conflict', `This sit ${what}: it has no log.`);
+    throw new AppError('conflict', sit.status === 'lapsed' ? LOG_ERRORS.lapsed : LOG_ERRORS.cancelled);
   }
-  if (sit.startAt > now) throw new AppError('conflict', 'This sit has not begun yet. Write its log afterwards.');
+  if (sit.startAt > now) throw new AppError('conflict', LOG_ERRORS.notBegun);
   const late = (at: number | null) => at !== null && at > now + AHEAD_MS;
-  const message = 'This is still to come.';
+  const message = LOG_ERRORS.toCome;
   if (late(facts.endAt)) throw new AppError('invalid', message, { fields: { endClock: message } });
   if (late(facts.shotAt)) throw new AppError('invalid', message, { fields: { shotClock: message } });
 }
@@ -93,13 +93,8 @@ export async function saveLog(scope: ClubScope, input: LogInput, now: number): P
     if (before && (await foundSent(tx, scope, input.sent, 'log')) === sit.id) return saved(before.version);
     if (before && sameFacts(before, facts)) return saved(before.version);
     if ((before?.version ?? 0) !== input.version) {
-      const by = before
-        ? ((await findPerson(scope, before.savedBy ?? sit.memberId, tx))?.name ?? 'Somebody')
-        : 'Somebody';
-      throw new AppError(
-        'conflict',
-        `${by} saved this log after you opened it. What you typed is still here: open the log in another tab and compare.`,
-      );
+      const by = before && (await findPerson(scope, before.savedBy ?? sit.memberId, tx));
+      throw new AppError('conflict', LOG_ERRORS.changed(by?.name ?? null));
     }
     const version = input.version + 1;
     if (before) {
@@ -121,7 +116,7 @@ export async function saveLog(scope: ClubScope, input: LogInput, now: number): P
         action: `log.${verb}`,
         subjectType: 'sit',
         subjectId: sit.id,
-        summary: `${before ? 'Changed' : 'Wrote'} the log of ${sit.memberName}'s sit at ${sit.standName}: ${dayAndWindow(sit.day, sit.windows, true)}.`,
+        summary: LOG_AUDIT[verb](sit.memberName, sit.standName, dayAndWindow(sit.day, sit.windows, true)),
         detail: { version },
       },
       now,

@@ -7,9 +7,9 @@ import { type LogLine, logLine } from './reads';
 import { type SeasonYear, seasonYear, seasonYears, yearOf } from './season-years';
 import { maySeeSightings } from './see-sightings';
 import type { SightingsAsk } from './sightings-schema';
+import { monthText } from './words/sightings';
 
 const HOUR_MS = 3_600_000;
-const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
 
 export interface IndexGroup {
   key: string;
@@ -34,10 +34,10 @@ export interface Sightings {
   logs: LogLine[];
 }
 
-type CountedSit = LoggedSit & SitCount;
+export type CountedSit = LoggedSit & SitCount;
 
 /** A logged sit as the indices count it. */
-function countOf(sit: LoggedSit): CountedSit {
+export function countOf(sit: LoggedSit): CountedSit {
   const { log } = sit;
   return {
     ...sit,
@@ -52,7 +52,7 @@ function countOf(sit: LoggedSit): CountedSit {
 
 const rateOf = ({ indices }: IndexGroup) => (indices.perHour.all.known ? indices.perHour.all.value : -1);
 
-function standGroups(sits: CountedSit[]): IndexGroup[] {
+export function standGroups(sits: CountedSit[]): IndexGroup[] {
   const names = new Map(sits.map((sit) => [sit.standId, sit.standName]));
   return [...indicesBy(sits, (sit) => sit.standId)]
     .map(([key, indices]) => ({ key, label: names.get(key) ?? '', indices }))
@@ -67,12 +67,12 @@ function windowGroups(sits: CountedSit[]): IndexGroup[] {
   });
 }
 
-function monthGroups(sits: CountedSit[]): IndexGroup[] {
+export function monthGroups(sits: CountedSit[]): IndexGroup[] {
   return [...indicesBy(sits, (sit) => sit.day.slice(0, 7))]
     .sort(([a], [b]) => a.localeCompare(b))
     .map(([key, indices]) => ({
       key,
-      label: `${MONTHS[Number(key.slice(5, 7)) - 1]} ${key.slice(0, 4)}`,
+      label: monthText(key),
       indices,
     }));
 }

@@ -6,6 +6,7 @@ import { getParking, listParkings } from '@/features/ground/parkings-data';
 import { getStand, listStands } from '@/features/ground/stands-data';
 import type { ClubScope } from '@/server/scope';
 import type { VisitPlace } from './visit-schema';
+import { OWN_PLACE } from './words/visits';
 
 export interface PlaceChoices {
   stands: { value: string; label: string }[];
@@ -37,7 +38,7 @@ export interface ResolvedPlace extends LatLon {
 
 /** Where a visit was; null when the place is no longer there. */
 export async function resolvePlace(scope: ClubScope, place: VisitPlace, tx: Tx): Promise<ResolvedPlace | null> {
-  if (place.of === 'point') return { lat: place.lat, lon: place.lon, standId: null, name: 'a place of its own' };
+  if (place.of === 'point') return { lat: place.lat, lon: place.lon, standId: null, name: OWN_PLACE };
   if (place.of === 'stand') {
     const stand = await getStand(scope, place.id, tx);
     return stand && { lat: stand.lat, lon: stand.lon, standId: stand.id, name: stand.name };

@@ -6,19 +6,11 @@ import type { FormClub } from '@/features/ground/form-club';
 import { degreesText, readPlace } from '@/features/ground/place-text';
 import { LINE_MAX, readForm } from '@/features/ground/read-form';
 import { sentSchema } from '@/lib/sent-schema';
+import { VISIT_ERRORS } from './words/visits';
 
 /** Everything people do on the ground but sit. */
 export const VISIT_KINDS = ['camera_check', 'work', 'walk_through', 'drive', 'bump'] as const satisfies PressureKind[];
 export type VisitKind = (typeof VISIT_KINDS)[number];
-
-export const VISIT_WORDS: Record<PressureKind, string> = {
-  camera_check: 'Camera check',
-  work: 'Work',
-  walk_through: 'Walk-through',
-  drive: 'Drive',
-  bump: 'Deer bumped, on no errand',
-  sit: 'Sit',
-};
 
 const PLACE_KINDS = ['stand', 'parking', 'feature'] as const;
 export type PlaceKind = (typeof PLACE_KINDS)[number];
@@ -26,19 +18,19 @@ export type PlaceKind = (typeof PLACE_KINDS)[number];
 /** A place of the club, or a point of its own. */
 export type VisitPlace = { of: PlaceKind; id: string } | ({ of: 'point' } & LatLon);
 
-const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const line = z.string().max(LINE_MAX, VISIT_ERRORS.long(LINE_MAX));
 
 export const visitFormSchema = z.object({
   sent: sentSchema.optional(),
-  kind: z.enum(VISIT_KINDS, { error: 'Choose what was done.' }),
+  kind: z.enum(VISIT_KINDS, { error: VISIT_ERRORS.kind }),
   day: line,
   clock: line,
   /** 'stand:ID', 'parking:ID', 'feature:ID' or 'point'. */
   place: line,
   lat: line,
   lon: line,
-  bumped: z.int('Give a whole number.').min(0, 'There cannot be fewer than none.').max(200, 'At most 200.'),
-  notes: z.string().trim().max(500, 'Keep the notes to 500 characters.'),
+  bumped: z.int(VISIT_ERRORS.whole).min(0, VISIT_ERRORS.negative).max(200, VISIT_ERRORS.most(200)),
+  notes: z.string().trim().max(500, VISIT_ERRORS.notes),
 });
 export type VisitForm = z.output<typeof visitFormSchema>;
 
@@ -62,11 +54,11 @@ export function makeVisitSchema(club: FormClub) {
     const form = readForm(ctx);
     const day = form.day('day', typed.day);
     const clock = typed.clock.trim();
-    if (!isClock(clock)) form.fail('clock', 'Give a time.');
+    if (!isClock(clock)) form.fail('clock', VISIT_ERRORS.time);
     const named = placeOf(typed.place);
     const place: VisitPlace | null =
       typed.place === 'point' ? { of: 'point', ...readPlace(form, club, { lat: typed.lat, lon: typed.lon }) } : named;
-    if (!place) form.fail('place', 'Choose where it was.');
+    if (!place) form.fail('place', VISIT_ERRORS.where);
     if (form.failed() || !place) return z.NEVER;
     return { kind: typed.kind, day, clock, place, bumped: typed.bumped, notes: typed.notes };
   });

@@ -3,8 +3,8 @@ import { formatDistance } from '@/core/units';
 import { momentText } from '@/features/clubs/audit-words';
 import { listStands } from '@/features/ground/stands-data';
 import type { ClubScope } from '@/server/scope';
-import { VISIT_WORDS } from './visit-schema';
 import { listVisits } from './visits-data';
+import { VISIT_LIST_WORDS, VISIT_WORDS } from './words/visits';
 
 const DAY_MS = 86_400_000;
 const SHOWN_DAYS = 30;
@@ -29,14 +29,16 @@ export async function listVisitLines(scope: ClubScope, now: number): Promise<Vis
   const nearest = (lat: number, lon: number) => {
     const at = toLocal(club, { lat, lon });
     const [first] = stands.map((stand) => ({ name: stand.name, m: distanceM(at, stand.at) })).sort((a, b) => a.m - b.m);
-    return first ? `${formatDistance(first.m, club.units)} from ${first.name}` : 'On the ground';
+    return first
+      ? VISIT_LIST_WORDS.from(formatDistance(first.m, club.units), first.name)
+      : VISIT_LIST_WORDS.onTheGround;
   };
   return rows.map(({ visit, standName, memberName }) => ({
     id: visit.id,
     kind: VISIT_WORDS[visit.kind],
     whenText: momentText(visit.at, club),
     where: standName ?? nearest(visit.lat, visit.lon),
-    memberName: memberName ?? 'Somebody who has left',
+    memberName: memberName ?? VISIT_LIST_WORDS.hasLeft,
     bumped: visit.bumped,
     notes: visit.notes,
     mayRemove: visit.memberId === member.id || scope.can('log.write_any'),

@@ -2,26 +2,29 @@
 
 import { type DataColumn, DataTable } from '@/ui/data-table';
 import type { LogLine } from '../reads';
+import { ALL_LOGS_WORDS } from '../words/sightings';
+
+const words = ALL_LOGS_WORDS;
 
 const COLUMNS: DataColumn<LogLine>[] = [
-  { id: 'stand', header: 'Stand', value: (line) => line.standName },
-  { id: 'when', header: 'When', value: (line) => line.whenText, sortable: false },
-  { id: 'member', header: 'Member', value: (line) => line.memberName },
-  { id: 'deer', header: 'Deer', value: (line) => line.counts, sortable: false },
-  { id: 'bumped', header: 'Bumped', value: (line) => line.bumps || 'None', sortable: false },
-  { id: 'shot', header: 'Shot', value: (line) => line.shot || 'None', sortable: false },
-  { id: 'notes', header: 'Notes', value: (line) => line.notes || '–', sortable: false },
+  { id: 'stand', header: words.stand, value: (line) => line.standName },
+  { id: 'when', header: words.when, value: (line) => line.whenText, sortable: false },
+  { id: 'member', header: words.member, value: (line) => line.memberName },
+  { id: 'deer', header: words.deer, value: (line) => line.counts, sortable: false },
+  { id: 'bumped', header: words.bumped, value: (line) => line.bumps || words.none, sortable: false },
+  { id: 'shot', header: words.shot, value: (line) => line.shot || words.none, sortable: false },
+  { id: 'notes', header: words.notes, value: (line) => line.notes || '–', sortable: false },
 ];
 
 export function AllLogs({ logs }: { logs: LogLine[] }) {
   return (
     <DataTable
-      caption="Logs of the season, the latest first"
+      caption={words.caption}
       captionHidden
       rows={logs}
       columns={COLUMNS}
       rowId={(line) => line.sitId}
-      filterLabel="Find a log"
+      filterLabel={words.find}
       pageSize={12}
     />
   );

@@ -1,6 +1,9 @@
 import { type Figure, figureText, type Indices, intervalText } from '@/core/indices';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { IndexGroup } from '../sightings-reads';
+import { INDEX_TABLE_WORDS } from '../words/sightings';
+
+const words = INDEX_TABLE_WORDS;
 
 interface Column {
   head: string;
@@ -9,13 +12,13 @@ interface Column {
 }
 
 const COLUMNS: Column[] = [
-  { head: 'Deer/h', of: ({ perHour }) => perHour.all },
-  { head: 'Bucks/h', of: ({ perHour }) => perHour.bucks },
-  { head: 'Does/h', of: ({ perHour }) => perHour.does },
-  { head: 'Fawns/h', of: ({ perHour }) => perHour.fawns },
-  { head: 'Does per buck', of: ({ doesPerBuck }) => doesPerBuck },
-  { head: 'Fawns per doe', of: ({ fawnsPerDoe }) => fawnsPerDoe },
-  { head: 'Unknown', of: ({ unknownShare }) => unknownShare, as: 'percent' },
+  { head: words.deer, of: ({ perHour }) => perHour.all },
+  { head: words.bucks, of: ({ perHour }) => perHour.bucks },
+  { head: words.does, of: ({ perHour }) => perHour.does },
+  { head: words.fawns, of: ({ perHour }) => perHour.fawns },
+  { head: words.doesPerBuck, of: ({ doesPerBuck }) => doesPerBuck },
+  { head: words.fawnsPerDoe, of: ({ fawnsPerDoe }) => fawnsPerDoe },
+  { head: words.unknown, of: ({ unknownShare }) => unknownShare, as: 'percent' },
 ];
 
 function FigureCell({ figure, as }: { figure: Figure; as: 'number' | 'percent' }) {
@@ -46,14 +49,14 @@ export function IndexTable({ caption, head, groups }: IndexTableProps) {
       <Table caption={caption} stack={false}>
         <THead>
           <Th>{head}</Th>
-          <Th align="right">Sits</Th>
-          <Th align="right">Hours</Th>
+          <Th align="right">{words.sits}</Th>
+          <Th align="right">{words.hours}</Th>
           {COLUMNS.map((column) => (
             <Th key={column.head} align="right">
               {column.head}
             </Th>
           ))}
-          <Th align="right">Sits with a bump</Th>
+          <Th align="right">{words.bumped}</Th>
         </THead>
         <TBody>
           {groups.map(({ key, label, indices }) => (

@@ -14,11 +14,11 @@ import { Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { BUMP_FIELDS, COUNT_FIELDS, type LogForm, logFormSchema } from '../log-schema';
 import type { SavedLog } from '../save-log';
+import { BUMP_WORDS, COUNT_WORDS, LOG_FORM_WORDS } from '../words/form';
 import { CountField } from './count-field';
 import { ShotFields } from './shot-fields';
 
-const COUNT_LABELS = { antleredBucks: 'Antlered bucks', does: 'Does', fawns: 'Fawns', unknown: 'Unknown' };
-const BUMP_LABELS = { bumpedIn: 'On the way in', bumpedSitting: 'From the seat', bumpedOut: 'On the way out' };
+const words = LOG_FORM_WORDS;
 
 export interface LogFormProps {
   club: string;
@@ -41,7 +41,7 @@ export function LogFormView({ club, values, day, zone, units, harvest, save }: L
     schema: logFormSchema,
     defaultValues: values,
     submit: (typed) =>
-      sendOrKeep({ kind: 'log', club, label: `Log of ${day}`, values: typed, send: (all) => save(club, all) }),
+      sendOrKeep({ kind: 'log', club, label: words.kept(day), values: typed, send: (all) => save(club, all) }),
     onDone: (saved) => {
       draft.drop();
       if (!saved) {
@@ -49,7 +49,7 @@ export function LogFormView({ club, values, day, zone, units, harvest, save }: L
         router.push(back);
         return;
       }
-      toast({ title: `Log of ${saved.standName} saved` });
+      toast({ title: words.saved(saved.standName) });
       router.push(saved.recovered && harvest ? `/clubs/${club}/season/harvest/new?sit=${saved.sitId}` : back);
     },
   });
@@ -60,33 +60,27 @@ export function LogFormView({ club, values, day, zone, units, harvest, save }: L
       <form {...formProps} className="flex max-w-2xl flex-col gap-6">
         <FormErrorSummary errors={errors} />
         {draft.brought && (
-          <Notice
-            title="Your unsaved counts are back"
-            actions={<Button onClick={draft.startAfresh}>Start afresh</Button>}
-          >
-            They were typed in this tab before and not saved.
+          <Notice title={words.backTitle} actions={<Button onClick={draft.startAfresh}>{words.startAfresh}</Button>}>
+            {words.backText}
           </Notice>
         )}
-        <FieldGroup label="Deer seen" hint="Every deer, every sit. Unknown when you are not sure. None counts too.">
+        <FieldGroup label={words.seen} hint={words.seenHint}>
           {COUNT_FIELDS.map((name) => (
-            <CountField key={name} control={form.control} name={name} label={COUNT_LABELS[name]} big />
+            <CountField key={name} control={form.control} name={name} label={COUNT_WORDS[name]} big />
           ))}
         </FieldGroup>
         <div className="grid grid-cols-2 gap-4">
-          <TimeInput label="From" {...register('startClock')} error={errorOf('startClock')} />
-          <TimeInput label="To" {...register('endClock')} error={errorOf('endClock')} />
+          <TimeInput label={words.from} {...register('startClock')} error={errorOf('startClock')} />
+          <TimeInput label={words.to} {...register('endClock')} error={errorOf('endClock')} />
         </div>
-        <FieldGroup
-          label="Deer bumped"
-          hint="That blew, ran or left because of you. It tells the club which stand to rest."
-        >
+        <FieldGroup label={words.bumped} hint={words.bumpedHint}>
           {BUMP_FIELDS.map((name) => (
-            <CountField key={name} control={form.control} name={name} label={BUMP_LABELS[name]} />
+            <CountField key={name} control={form.control} name={name} label={BUMP_WORDS[name]} />
           ))}
         </FieldGroup>
         {bumped && (
           <TextInput
-            label="Where they were bumped"
+            label={words.bumpedWhere}
             optional
             autoComplete="off"
             {...register('bumpedWhere')}
@@ -94,15 +88,15 @@ export function LogFormView({ club, values, day, zone, units, harvest, save }: L
           />
         )}
         <ShotFields day={day} zone={zone} units={units} />
-        <Textarea label="Notes" optional rows={3} {...register('notes')} error={errorOf('notes')} />
+        <Textarea label={words.notes} optional rows={3} {...register('notes')} error={errorOf('notes')} />
         <SubmitRow
-          label="Save log"
+          label={words.save}
           pending={pending}
-          pendingLabel="Saving…"
+          pendingLabel={words.saving}
           className="sticky bottom-[calc(3.6rem+env(safe-area-inset-bottom))] z-20 bg-paper py-3 md:static"
         >
           <ButtonLink href={back} look="quiet">
-            Back without saving
+            {words.back}
           </ButtonLink>
         </SubmitRow>
       </form>

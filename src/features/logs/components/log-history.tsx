@@ -1,27 +1,30 @@
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { HistoryLine } from '../reads';
+import { LOG_HISTORY_WORDS } from '../words/screen';
+
+const words = LOG_HISTORY_WORDS;
 
 /** What the log says and said before, the latest first. */
 export function LogHistory({ lines }: { lines: HistoryLine[] }) {
   return (
-    <Table caption="Each time the log was saved, the latest first" captionHidden>
+    <Table caption={words.caption} captionHidden>
       <THead>
-        <Th>Saved by</Th>
-        <Th>Hours</Th>
-        <Th>Deer</Th>
-        <Th>Bumped</Th>
-        <Th>Shot</Th>
-        <Th>Notes</Th>
+        <Th>{words.savedBy}</Th>
+        <Th>{words.hours}</Th>
+        <Th>{words.deer}</Th>
+        <Th>{words.bumped}</Th>
+        <Th>{words.shot}</Th>
+        <Th>{words.notes}</Th>
       </THead>
       <TBody>
         {lines.map(({ version, savedText, line }) => (
           <Tr key={version}>
             <RowHead>{savedText}</RowHead>
-            <Td label="Hours">{line.timeText}</Td>
-            <Td label="Deer">{line.counts}</Td>
-            <Td label="Bumped">{line.bumps || 'None'}</Td>
-            <Td label="Shot">{line.shot || 'None'}</Td>
-            <Td label="Notes">{line.notes || '–'}</Td>
+            <Td label={words.hours}>{line.timeText}</Td>
+            <Td label={words.deer}>{line.counts}</Td>
+            <Td label={words.bumped}>{line.bumps || words.none}</Td>
+            <Td label={words.shot}>{line.shot || words.none}</Td>
+            <Td label={words.notes}>{line.notes || '–'}</Td>
           </Tr>
         ))}
       </TBody>

@@ -2,6 +2,9 @@ import { TextLink } from '@/ui/button';
 import { Badge } from '@/ui/page-parts';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { ClubLogLine, LogLine } from '../reads';
+import { LOG_LIST_WORDS } from '../words/screen';
+
+const words = LOG_LIST_WORDS;
 
 interface LogLinkProps {
   club: string;
@@ -12,7 +15,7 @@ function LogLink({ club, line }: LogLinkProps) {
   return (
     <TextLink href={`/clubs/${club}/log/${line.sitId}`} className="inline-block py-1">
       {line.standName}
-      <span className="sr-only">{`, log of ${line.memberName}, ${line.whenText}`}</span>
+      <span className="sr-only">{words.linkOf(line.memberName, line.whenText)}</span>
     </TextLink>
   );
 }
@@ -20,13 +23,13 @@ function LogLink({ club, line }: LogLinkProps) {
 /** One's own logs. */
 export function LogList({ club, lines }: { club: string; lines: LogLine[] }) {
   return (
-    <Table caption="Your logs of the last year, the latest first" captionHidden>
+    <Table caption={words.own} captionHidden>
       <THead>
-        <Th>Stand</Th>
-        <Th>When</Th>
-        <Th>Deer</Th>
-        <Th>Bumped</Th>
-        <Th>Shot</Th>
+        <Th>{words.stand}</Th>
+        <Th>{words.when}</Th>
+        <Th>{words.deer}</Th>
+        <Th>{words.bumped}</Th>
+        <Th>{words.shot}</Th>
       </THead>
       <TBody>
         {lines.map((line) => (
@@ -34,11 +37,11 @@ export function LogList({ club, lines }: { club: string; lines: LogLine[] }) {
             <RowHead>
               <LogLink club={club} line={line} />
             </RowHead>
-            <Td label="When">{line.whenText}</Td>
-            <Td label="Deer">{line.counts}</Td>
-            <Td label="Bumped">{line.bumps || 'None'}</Td>
-            <Td label="Shot">
-              {line.shot || 'None'} {line.open && <Badge look="clay">Follow-up open</Badge>}
+            <Td label={words.when}>{line.whenText}</Td>
+            <Td label={words.deer}>{line.counts}</Td>
+            <Td label={words.bumped}>{line.bumps || words.none}</Td>
+            <Td label={words.shot}>
+              {line.shot || words.none} {line.open && <Badge look="clay">{words.open}</Badge>}
             </Td>
           </Tr>
         ))}
@@ -50,22 +53,22 @@ export function LogList({ club, lines }: { club: string; lines: LogLine[] }) {
 /** For officers: who has written a log, and what it says where the club's rule shows it. */
 export function ClubLogList({ club, lines }: { club: string; lines: ClubLogLine[] }) {
   return (
-    <Table caption="Sits of the club in the last two weeks, the latest first" captionHidden>
+    <Table caption={words.club} captionHidden>
       <THead>
-        <Th>Stand</Th>
-        <Th>When</Th>
-        <Th>Member</Th>
-        <Th>Log</Th>
-        <Th>Deer</Th>
+        <Th>{words.stand}</Th>
+        <Th>{words.when}</Th>
+        <Th>{words.member}</Th>
+        <Th>{words.log}</Th>
+        <Th>{words.deer}</Th>
       </THead>
       <TBody>
         {lines.map((line) => (
           <Tr key={line.sitId}>
             <RowHead>{line.mayOpen ? <LogLink club={club} line={line} /> : line.standName}</RowHead>
-            <Td label="When">{line.whenText}</Td>
-            <Td label="Member">{line.memberName}</Td>
-            <Td label="Log">{line.logged ? 'Written' : <Badge look="clay">Missing</Badge>}</Td>
-            <Td label="Deer">{line.counts ?? (line.logged ? 'Kept by the club’s rule' : '–')}</Td>
+            <Td label={words.when}>{line.whenText}</Td>
+            <Td label={words.member}>{line.memberName}</Td>
+            <Td label={words.log}>{line.logged ? words.written : <Badge look="clay">{words.missing}</Badge>}</Td>
+            <Td label={words.deer}>{line.counts ?? (line.logged ? words.kept : '–')}</Td>
           </Tr>
         ))}
       </TBody>

@@ -3,6 +3,9 @@
 import type { UseFormRegisterReturn } from 'react-hook-form';
 import { HereButton } from '@/features/ground/components/here-button';
 import { Select, TextInput } from '@/ui/text-inputs';
+import { PLACE_CHOICE_WORDS } from '../words/visits';
+
+const words = PLACE_CHOICE_WORDS;
 
 interface PlaceChoiceProps {
   placeholder: string;
@@ -18,7 +21,7 @@ interface PlaceChoiceProps {
 export function PlaceChoice({ placeholder, groups, byPosition, fields, errorOf, onHere }: PlaceChoiceProps) {
   return (
     <>
-      <Select label="Where" placeholder={placeholder} {...fields.place} error={errorOf('place')}>
+      <Select label={words.where} placeholder={placeholder} {...fields.place} error={errorOf('place')}>
         {groups.map((group) => (
           <optgroup key={group.label} label={group.label}>
             {group.options.map((option) => (
@@ -28,13 +31,13 @@ export function PlaceChoice({ placeholder, groups, byPosition, fields, errorOf, 
             ))}
           </optgroup>
         ))}
-        <option value="point">Another place, by its position</option>
+        <option value="point">{words.byPosition}</option>
       </Select>
       {byPosition && (
         <div className="flex flex-col gap-4">
           <div className="grid gap-4 sm:grid-cols-2">
-            <TextInput label="Latitude" inputMode="decimal" {...fields.lat} error={errorOf('lat')} />
-            <TextInput label="Longitude" inputMode="decimal" {...fields.lon} error={errorOf('lon')} />
+            <TextInput label={words.lat} inputMode="decimal" {...fields.lat} error={errorOf('lat')} />
+            <TextInput label={words.lon} inputMode="decimal" {...fields.lon} error={errorOf('lon')} />
           </div>
           <HereButton onPlace={onHere} />
         </div>

@@ -8,7 +8,10 @@ import { RadioCards } from '@/ui/choices';
 import { Notice } from '@/ui/notices';
 import { Textarea, TimeInput } from '@/ui/text-inputs';
 import type { LogForm } from '../log-schema';
-import { FOLLOW_WORDS, HIT_WORDS, SHOT_WORDS, WAIT_ADVICE } from '../log-words';
+import { SHOT_FORM_WORDS } from '../words/form';
+import { FOLLOW_WORDS, HIT_WORDS, SHOT_WORDS, WAIT_ADVICE } from '../words/log';
+
+const words = SHOT_FORM_WORDS;
 
 interface ShotFieldsProps {
   day: string;
@@ -25,16 +28,16 @@ export function ShotFields({ day, zone, units }: ShotFieldsProps) {
   return (
     <div className="flex flex-col gap-5">
       <RadioCards
-        label="Shot"
+        label={words.shot}
         across
         {...field('shot')}
         choices={SHOTS.map((value) => ({ value, label: SHOT_WORDS[value] }))}
       />
-      {shot !== 'none' && <TimeInput label="Time of the shot" {...field('shotClock')} />}
+      {shot !== 'none' && <TimeInput label={words.time} {...field('shotClock')} />}
       {shot === 'hit' && (
         <>
           <RadioCards
-            label="Where it was hit"
+            label={words.hit}
             across
             {...field('hitPlace')}
             choices={HIT_PLACES.map((value) => ({ value, label: HIT_WORDS[value] }))}
@@ -43,12 +46,12 @@ export function ShotFields({ day, zone, units }: ShotFieldsProps) {
             <p>{WAIT_ADVICE}</p>
           </Notice>
           <RadioCards
-            label="How it stands"
+            label={words.followUp}
             across
             {...field('followUp')}
             choices={FOLLOW_UPS.map((value) => ({ value, label: FOLLOW_WORDS[value] }))}
           />
-          <Textarea label="Where it stood, was last seen and was found" optional rows={2} {...field('followUpNotes')} />
+          <Textarea label={words.followUpNotes} optional rows={2} {...field('followUpNotes')} />
         </>
       )}
     </div>
@@ -61,11 +64,9 @@ function waitTitle(
   place: (typeof HIT_PLACES)[number] | undefined,
   club: { zone: string; units: 'us' | 'metric' },
 ): string {
-  if (!place) return 'Wait before you follow';
-  if (!isClock(clock)) return place === 'heart_lungs' ? 'Wait 30 minutes' : 'Wait 4 to 6 hours';
+  if (!place) return words.wait;
+  if (!isClock(clock)) return place === 'heart_lungs' ? words.waitShort : words.waitLong;
   const { earliest, latest } = followFrom(localToUtc(day, clock, club.zone), place);
   const from = clockText(earliest, club);
-  return earliest === latest
-    ? `Follow from ${from}`
-    : `Follow from ${from} at the earliest, better ${clockText(latest, club)}`;
+  return earliest === latest ? words.followFrom(from) : words.followBetween(from, clockText(latest, club));
 }

@@ -13,7 +13,8 @@ import { Stepper } from '@/ui/stepper';
 import { DateInput, Select, Textarea, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { PlaceChoices } from '../visit-places';
-import { makeVisitSchema, VISIT_KINDS, VISIT_WORDS, type VisitForm } from '../visit-schema';
+import { makeVisitSchema, VISIT_KINDS, type VisitForm } from '../visit-schema';
+import { VISIT_FORM_WORDS, VISIT_WORDS } from '../words/visits';
 import { PlaceChoice } from './place-choice';
 
 export interface VisitFormProps {
@@ -24,6 +25,7 @@ export interface VisitFormProps {
   add: (club: string, values: VisitForm) => Promise<ActionResult<{ id: string; name: string }>>;
 }
 
+const words = VISIT_FORM_WORDS;
 const KINDS = VISIT_KINDS.map((value) => ({ value, label: VISIT_WORDS[value] }));
 
 export function VisitFormView({ club, formClub, values, places, add }: VisitFormProps) {
@@ -36,31 +38,31 @@ export function VisitFormView({ club, formClub, values, places, add }: VisitForm
     schema,
     defaultValues: values,
     submit: (typed: VisitForm) => {
-      const label = `${VISIT_WORDS[typed.kind]}, ${typed.day} ${typed.clock}`;
+      const label = words.kept(typed.kind, typed.day, typed.clock);
       return sendOrKeep({ kind: 'visit', club, label, values: typed, send: (all) => add(club, all) });
     },
     onDone: (saved: { name: string } | null) => {
-      toast(saved ? { title: 'Visit written down', text: saved.name } : KEPT_TOAST);
+      toast(saved ? { title: words.saved, text: saved.name } : KEPT_TOAST);
       router.push(back);
     },
   });
   const place = useWatch({ control: form.control, name: 'place' });
   const { field: bumped } = useController({ control: form.control, name: 'bumped' });
   const groups = [
-    { label: 'Stands', options: places.stands },
-    { label: 'Features', options: places.features },
-    { label: 'Parking', options: places.parkings },
+    { label: words.stands, options: places.stands },
+    { label: words.features, options: places.features },
+    { label: words.parking, options: places.parkings },
   ].filter((group) => group.options.length > 0);
   return (
     <form {...formProps} className="flex max-w-2xl flex-col gap-5">
       <FormErrorSummary errors={errors} />
-      <Select label="What" options={KINDS} {...register('kind')} error={errorOf('kind')} />
+      <Select label={words.what} options={KINDS} {...register('kind')} error={errorOf('kind')} />
       <div className="grid grid-cols-2 gap-4">
-        <DateInput label="Day" {...register('day')} error={errorOf('day')} />
-        <TimeInput label="Time" {...register('clock')} error={errorOf('clock')} />
+        <DateInput label={words.day} {...register('day')} error={errorOf('day')} />
+        <TimeInput label={words.time} {...register('clock')} error={errorOf('clock')} />
       </div>
       <PlaceChoice
-        placeholder="Choose a place"
+        placeholder={words.choosePlace}
         groups={groups}
         byPosition={place === 'point'}
         fields={{ place: register('place'), lat: register('lat'), lon: register('lon') }}
@@ -71,17 +73,17 @@ export function VisitFormView({ club, formClub, values, places, add }: VisitForm
         }}
       />
       <Stepper
-        label="Deer bumped"
+        label={words.bumped}
         name={bumped.name}
         value={bumped.value}
         onChange={bumped.onChange}
         onBlur={bumped.onBlur}
         error={errorOf('bumped')}
       />
-      <Textarea label="Notes" optional rows={2} {...register('notes')} error={errorOf('notes')} />
-      <SubmitRow label="Save visit" pending={pending} pendingLabel="Saving…">
+      <Textarea label={words.notes} optional rows={2} {...register('notes')} error={errorOf('notes')} />
+      <SubmitRow label={words.save} pending={pending} pendingLabel={words.saving}>
         <ButtonLink href={back} look="quiet">
-          Back without saving
+          {words.back}
         </ButtonLink>
       </SubmitRow>
     </form>

@@ -6,6 +6,9 @@ import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import { useToast } from '@/ui/toast';
 import type { VisitLine } from '../visits-reads';
+import { VISIT_LIST_WORDS } from '../words/visits';
+
+const words = VISIT_LIST_WORDS;
 
 export interface VisitListProps {
   club: string;
@@ -17,46 +20,47 @@ export function VisitList({ club, lines, remove }: VisitListProps) {
   const toast = useToast();
   async function takeOut(line: VisitLine) {
     const answer = await remove(club, { id: line.id }).catch(() => null);
-    if (!answer) return 'The server could not be reached. Try again.';
+    if (!answer) return words.lost;
     if (!answer.ok) return answer.error.message;
-    toast({ title: 'The visit is taken out' });
+    toast({ title: words.takenOut });
   }
   return (
-    <Table caption="Visits of the last month, the latest first" captionHidden>
+    <Table caption={words.caption} captionHidden>
       <THead>
-        <Th>What</Th>
-        <Th>Where</Th>
-        <Th>When</Th>
-        <Th>Who</Th>
-        <Th>Bumped</Th>
-        <Th>Notes</Th>
+        <Th>{words.what}</Th>
+        <Th>{words.where}</Th>
+        <Th>{words.when}</Th>
+        <Th>{words.who}</Th>
+        <Th>{words.bumped}</Th>
+        <Th>{words.notes}</Th>
         <Th>
-          <span className="sr-only">Take out</span>
+          <span className="sr-only">{words.takeOut}</span>
         </Th>
       </THead>
       <TBody>
         {lines.map((line) => (
           <Tr key={line.id}>
             <RowHead>{line.kind}</RowHead>
-            <Td label="Where">{line.where}</Td>
-            <Td label="When">{line.whenText}</Td>
-            <Td label="Who">{line.memberName}</Td>
-            <Td label="Bumped">{line.bumped > 0 ? `${line.bumped} deer` : 'None'}</Td>
-            <Td label="Notes">{line.notes || '–'}</Td>
+            <Td label={words.where}>{line.where}</Td>
+            <Td label={words.when}>{line.whenText}</Td>
+            <Td label={words.who}>{line.memberName}</Td>
+            <Td label={words.bumped}>{words.deer(line.bumped)}</Td>
+            <Td label={words.notes}>{line.notes || '–'}</Td>
             <Td>
               {line.mayRemove && (
                 <ConfirmDialog
-                  title="Take this visit out?"
-                  confirmLabel="Take it out"
+                  title={words.confirmTitle}
+                  confirmLabel={words.confirm}
                   danger
                   trigger={
                     <Button look="quiet" className="-my-2 whitespace-nowrap">
-                      Take out<span className="sr-only"> {`${line.kind}, ${line.where}, ${line.whenText}`}</span>
+                      {words.takeOut}
+                      <span className="sr-only">{words.takeOutOf(line.kind, line.where, line.whenText)}</span>
                     </Button>
                   }
                   onConfirm={() => takeOut(line)}
                 >
-                  <p>It no longer counts as pressure. The audit log keeps that it was written.</p>
+                  <p>{words.confirmText}</p>
                 </ConfirmDialog>
               )}
             </Td>

@@ -1,5 +1,6 @@
 import { ButtonLink } from '@/ui/button';
 import type { WaitingLine } from '../reads';
+import { WAITING_WORDS } from '../words/screen';
 
 /** Sits without a log, one press from its form. */
 export function WaitingList({ club, lines }: { club: string; lines: WaitingLine[] }) {
@@ -9,13 +10,11 @@ export function WaitingList({ club, lines }: { club: string; lines: WaitingLine[
         <li key={line.sitId} className="flex items-center justify-between gap-4 border-rule border-b py-3">
           <div className="min-w-0">
             <p className="font-serif text-lg leading-snug">{line.standName}</p>
-            <p className="text-ink-soft">
-              {line.memberName && `${line.memberName}: `}
-              {line.whenText}, {line.timeText}
-            </p>
+            <p className="text-ink-soft">{WAITING_WORDS.when(line.memberName, line.whenText, line.timeText)}</p>
           </div>
           <ButtonLink href={`/clubs/${club}/log/${line.sitId}`} look="primary" className="shrink-0">
-            Write log<span className="sr-only"> of {line.standName}</span>
+            {WAITING_WORDS.write}
+            <span className="sr-only">{WAITING_WORDS.of(line.standName)}</span>
           </ButtonLink>
         </li>
       ))}

@@ -2,6 +2,7 @@ import { ClubLogList, LogList } from '@/features/logs/components/log-list';
 import { VisitList } from '@/features/logs/components/visit-list';
 import { WaitingList } from '@/features/logs/components/waiting-list';
 import { readLogScreen } from '@/features/logs/reads';
+import { LOG_PAGE_WORDS } from '@/features/logs/words/screen';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -9,59 +10,56 @@ import { EmptyState } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { removeVisitAction } from './actions';
 
-export const metadata = { title: 'Log' };
+const words = LOG_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('log.write', async ({ scope }) => {
   const { slug, name } = scope.club;
   const { waiting, mine, club, visits } = await readLogScreen(scope, now());
   const addVisit = scope.can('visits.write') && (
-    <ButtonLink href={`/clubs/${slug}/log/visits/new`}>Write down a visit</ButtonLink>
+    <ButtonLink href={`/clubs/${slug}/log/visits/new`}>{words.addVisit}</ButtonLink>
   );
   return (
     <>
       <PageTitle
         over={name}
-        title="Log"
-        lead="What each sit saw, none included: it tells the club which stands are alive and which need rest."
+        title={words.title}
+        lead={words.lead}
         actions={
           <>
             {addVisit}
             <ButtonLink look="quiet" href={`/clubs/${slug}/season/sightings`}>
-              The season's figures
+              {words.figures}
             </ButtonLink>
           </>
         }
       />
-      <Section title="Waiting for a log">
+      <Section title={words.waiting}>
         {waiting.length === 0 ? (
-          <EmptyState title="Nothing waits">A sit is listed here from its start until its log is written.</EmptyState>
+          <EmptyState title={words.nothingWaits}>{words.nothingWaitsText}</EmptyState>
         ) : (
           <WaitingList club={slug} lines={waiting} />
         )}
       </Section>
       {mine.length > 0 && (
-        <Section title="Written" note="Open a log to read or change it. What it said before is kept.">
+        <Section title={words.written} note={words.writtenNote}>
           <LogList club={slug} lines={mine} />
         </Section>
       )}
       {club && (
-        <Section
-          title="The club's logs"
-          note="Officers see that a log exists. What it says is shown as the club's rule allows."
-        >
+        <Section title={words.club} note={words.clubNote}>
           {club.length === 0 ? (
-            <EmptyState title="No sit in the last two weeks">
-              Sits of the club are listed here once they end.
-            </EmptyState>
+            <EmptyState title={words.clubEmpty}>{words.clubEmptyText}</EmptyState>
           ) : (
             <ClubLogList club={slug} lines={club} />
           )}
         </Section>
       )}
-      <Section title="Other visits" note="Camera checks, work, walks and drives press on the deer as sits do.">
+      <Section title={words.visits} note={words.visitsNote}>
         {visits.length === 0 ? (
-          <EmptyState title="No visit in the last month" action={addVisit}>
-            Write down what was done on the ground, so that the list of stands knows of it.
+          <EmptyState title={words.visitsEmpty} action={addVisit}>
+            {words.visitsEmptyText}
           </EmptyState>
         ) : (
           <VisitList club={slug} lines={visits} remove={removeVisitAction} />

@@ -1,16 +1,17 @@
 import type { ReactNode } from 'react';
 import type { Permission } from '@/core/permissions';
 import { ClubTabs } from '@/features/clubs/components/club-tabs';
+import { SEASON_WORDS } from '@/features/logs/words/sightings';
 import { findScope } from '@/server/scope';
 import { currentUser } from '@/server/session';
 
 const PAGES: { path: string; label: string; needs: Permission }[] = [
-  { path: '/sightings', label: 'Sightings', needs: 'log.read' },
-  { path: '/harvest', label: 'Harvest', needs: 'harvest.read' },
-  { path: '/setup', label: 'Set-up check', needs: 'features.read' },
-  { path: '/coverage', label: 'Wind coverage', needs: 'features.read' },
-  { path: '/movement', label: 'Movement', needs: 'features.read' },
-  { path: '/learning', label: 'Learning', needs: 'log.read_all' },
+  { path: '/sightings', label: SEASON_WORDS.sightings, needs: 'log.read' },
+  { path: '/harvest', label: SEASON_WORDS.harvest, needs: 'harvest.read' },
+  { path: '/setup', label: SEASON_WORDS.setup, needs: 'features.read' },
+  { path: '/coverage', label: SEASON_WORDS.coverage, needs: 'features.read' },
+  { path: '/movement', label: SEASON_WORDS.movement, needs: 'features.read' },
+  { path: '/learning', label: SEASON_WORDS.learning, needs: 'log.read_all' },
 ];
 
 interface Props {
@@ -28,7 +29,7 @@ export default async function SeasonLayout({ params, children }: Props) {
   return (
     <>
       <ClubTabs
-        label="About the season"
+        label={SEASON_WORDS.tabs}
         items={items.map(({ path, label }) => ({ href: `/clubs/${club}/season${path}`, label }))}
       />
       {children}

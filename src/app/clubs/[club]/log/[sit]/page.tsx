@@ -1,6 +1,7 @@
 import { LogFormView } from '@/features/logs/components/log-form';
 import { LogHistory } from '@/features/logs/components/log-history';
 import { readLog } from '@/features/logs/reads';
+import { SIT_LOG_PAGE_WORDS } from '@/features/logs/words/screen';
 import { PhotoSection } from '@/features/photos/components/photo-section';
 import { readPhotos } from '@/features/photos/read-photos';
 import { now } from '@/server/clock';
@@ -10,30 +11,29 @@ import { PageTitle, Section } from '@/ui/page-parts';
 import { captionPhotoAction, removePhotoAction } from '../../photos/actions';
 import { saveLogAction } from '../actions';
 
-export const metadata = { title: 'Log of a sit' };
+const words = SIT_LOG_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('log.write', async ({ scope, params }) => {
   const { slug } = scope.club;
   const log = await readLog(scope, params.sit ?? '', now());
   const lines = [...(log.written ? [log.written] : []), ...log.history];
   const past = lines.length > 0 && (
-    <Section
-      title={log.history.length > 0 ? 'As saved, each time' : 'As saved'}
-      note="A change keeps what stood before."
-    >
+    <Section title={log.history.length > 0 ? words.asSavedEachTime : words.asSaved} note={words.asSavedNote}>
       <LogHistory lines={lines} />
     </Section>
   );
   return (
     <>
       <PageTitle
-        over={`${log.memberName ? `${log.memberName}, ` : ''}${log.whenText}`}
+        over={words.over(log.memberName, log.whenText)}
         title={log.standName}
-        lead={`Sit from ${log.timeText}.`}
+        lead={words.lead(log.timeText)}
         actions={
           !log.form && (
             <ButtonLink look="quiet" href={`/clubs/${slug}/log`}>
-              Back to the logs
+              {words.back}
             </ButtonLink>
           )
         }

@@ -4,6 +4,7 @@ import { IndexTable } from '@/features/logs/components/index-table';
 import { SeasonFigures } from '@/features/logs/components/season-figures';
 import { type IndexGroup, readSightings } from '@/features/logs/sightings-reads';
 import { readSightingsAsk } from '@/features/logs/sightings-schema';
+import { SIGHTINGS_PAGE_WORDS } from '@/features/logs/words/sightings';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { Button, ButtonLink } from '@/ui/button';
@@ -12,13 +13,15 @@ import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { Select } from '@/ui/text-inputs';
 
-export const metadata = { title: 'Sightings' };
+const words = SIGHTINGS_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 function rows(groups: IndexGroup[], of: (group: IndexGroup) => Figure) {
   return groups.map((group) => {
     const figure = of(group);
     const { key, label, indices } = group;
-    const note = `${indices.hours.toFixed(0)} h`;
+    const note = words.hours(indices.hours);
     return { key, label, note, range: figure.known ? figure : null, text: figureText(figure) };
   });
 }
@@ -32,23 +35,23 @@ export default clubPage('log.read', async ({ scope, search }) => {
   const page = `/clubs/${slug}/season/sightings`;
   const file = (what: string) => `/api/clubs/${slug}/sightings?year=${year.year}&whose=${whose}&what=${what}`;
   const whoseOptions = [
-    ...(kept ? [] : [{ value: 'club', label: 'The whole club' }]),
-    { value: 'own', label: 'Mine and my guests’' },
+    ...(kept ? [] : [{ value: 'club', label: words.wholeClub }]),
+    { value: 'own', label: words.own },
   ];
   return (
     <>
       <PageTitle
         over={name}
-        title={`Sightings ${year.label}`}
-        lead="What members count from their stands. An index to compare stands and years by, not a census."
+        title={words.titleOf(year.label)}
+        lead={words.lead}
         actions={
           total.sits > 0 && (
             <>
               <ButtonLink href={file('tables')} prefetch={false}>
-                Tables as CSV
+                {words.tables}
               </ButtonLink>
               <ButtonLink href={file('logs')} prefetch={false}>
-                Logs as CSV
+                {words.logs}
               </ButtonLink>
             </>
           )
@@ -56,57 +59,53 @@ export default clubPage('log.read', async ({ scope, search }) => {
       />
       <form method="get" action={page} className="mb-6 flex flex-wrap items-end gap-4">
         <Select
-          label="Season"
+          label={words.season}
           name="year"
           defaultValue={String(year.year)}
           options={years.map((one) => ({ value: String(one.year), label: one.label }))}
         />
-        <Select label="Whose sits" name="whose" defaultValue={whose} options={whoseOptions} />
-        <Button type="submit">Show</Button>
+        <Select label={words.whose} name="whose" defaultValue={whose} options={whoseOptions} />
+        <Button type="submit">{words.show}</Button>
       </form>
       {kept && (
-        <Notice title="Only your own sits are counted here" className="mb-6">
-          The club keeps sightings{' '}
-          {scope.club.rules.sightingsSeenBy === 'officers' ? 'for its officers' : 'until the season is over'}.
+        <Notice title={words.keptTitle} className="mb-6">
+          {scope.club.rules.sightingsSeenBy === 'officers' ? words.keptForOfficers : words.keptUntilOver}
         </Notice>
       )}
       {total.sits === 0 ? (
         <EmptyState
-          title="No log yet"
-          action={scope.can('log.write') && <ButtonLink href={`/clubs/${slug}/log`}>Write a log</ButtonLink>}
+          title={words.empty}
+          action={scope.can('log.write') && <ButtonLink href={`/clubs/${slug}/log`}>{words.write}</ButtonLink>}
         >
-          Once sits have logs, deer an hour are worked out here by stand, window and month.
+          {words.emptyText}
         </EmptyState>
       ) : (
         <>
-          <Section
-            title="The season so far"
-            note="Sums over sums: deer over hours sat, sits without a deer too. In brackets the 95 % interval, as if each deer came alone; deer come in groups, so the truth is less sure."
-          >
+          <Section title={words.soFar} note={words.soFarNote}>
             <SeasonFigures indices={total} unlogged={view.unlogged} />
           </Section>
-          <Section title="By stand">
+          <Section title={words.byStand}>
             <RangeChart
-              title="Deer an hour by stand."
-              unit="deer an hour"
+              title={words.byStandChart}
+              unit={words.unit}
               rows={rows(view.byStand, deerPerHour)}
               className="mb-6"
             />
-            <IndexTable caption="Figures by stand, the most deer an hour first" head="Stand" groups={view.byStand} />
+            <IndexTable caption={words.byStandCaption} head={words.stand} groups={view.byStand} />
           </Section>
-          <Section title="By window">
-            <IndexTable caption="Figures by window of the day" head="Window" groups={view.byWindow} />
+          <Section title={words.byWindow}>
+            <IndexTable caption={words.byWindowCaption} head={words.window} groups={view.byWindow} />
           </Section>
-          <Section title="By month">
+          <Section title={words.byMonth}>
             <RangeChart
-              title="Deer an hour by month."
-              unit="deer an hour"
+              title={words.byMonthChart}
+              unit={words.unit}
               rows={rows(view.byMonth, deerPerHour)}
               className="mb-6"
             />
-            <IndexTable caption="Figures by month" head="Month" groups={view.byMonth} />
+            <IndexTable caption={words.byMonthCaption} head={words.month} groups={view.byMonth} />
           </Section>
-          <Section title="Logs">
+          <Section title={words.logList}>
             <AllLogs logs={view.logs} />
           </Section>
         </>

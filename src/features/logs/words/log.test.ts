@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { bumpsText, countsText, shotText } from './log-words';
+import { bumpsText, countsText, shotText } from './log';
 
 it('counts deer in words', () => {
   expect(countsText({ antleredBucks: 1, does: 2, fawns: 0, unknown: 1 })).toBe('1 buck, 2 does, 1 unknown');
