@@ -63,6 +63,15 @@ export const orangeRuleSchema = z.object({
   statedOn: day,
 });
 
+const workRule = orangeRuleSchema.nullable();
+export const workRulesSchema = z.object({
+  mock_scrape: workRule,
+  water: workRule,
+  bait: workRule,
+  cutting: workRule,
+  planting: workRule,
+});
+
 export const harvestQuotaSchema = z.object({
   deer: z.enum(QUOTA_DEER),
   per: z.enum(QUOTA_PER),
@@ -136,6 +145,7 @@ export const clubRulesSchema = z
         'Two quotas are for the same deer and the same people.',
       ),
     stateHarvestRule: stateHarvestRuleSchema.nullable(),
+    workRules: workRulesSchema,
   })
   .superRefine((rules, ctx) => {
     const names = rules.legalLight.map((r) => r.name);

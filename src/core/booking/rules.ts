@@ -1,3 +1,4 @@
+import type { GroundWork } from '../ground-work';
 import type { HarvestQuota } from '../harvest/harvest-types';
 import { WEAPONS, type Weapon } from '../types';
 import { ydToM } from '../units';
@@ -50,6 +51,9 @@ export interface OrangeRule {
   statedOn: string;
 }
 
+/** What the state or the landowner says of a kind of work on the ground, in the club's own words. */
+export type WorkRule = OrangeRule;
+
 /** What the state allows of deer, in the club's own words. */
 export type StateHarvestRule = OrangeRule;
 
@@ -91,6 +95,7 @@ export interface ClubRules {
   /** Most deer a season, 1 July to 30 June. They caution and never refuse. */
   harvestQuotas: HarvestQuota[];
   stateHarvestRule: StateHarvestRule | null;
+  workRules: Record<GroundWork, WorkRule | null>;
 }
 
 /** 300 yd is the spacing found most often in clubs' posted rules, whatever the weapon (practice). */
@@ -128,6 +133,7 @@ export const DEFAULT_CLUB_RULES: ClubRules = {
   orangeRule: null,
   harvestQuotas: [],
   stateHarvestRule: null,
+  workRules: { mock_scrape: null, water: null, bait: null, cutting: null, planting: null },
 };
 
 /** Rules as they were saved, with the default of each that came later. */

@@ -6,6 +6,7 @@ import { WEAPONS, type Weapon } from '@/core/types';
 import { type Units, ydToM } from '@/core/units';
 import { formReader, type TextReader } from './read-number';
 import { harvestRuleFields, readHarvestRules, readStated } from './rules-harvest-form';
+import { readWorkRules, workRuleFields } from './rules-work-form';
 
 const line = z.string().max(600, 'Keep it to 600 characters.');
 const fromSunFields = z.object({ minutes: line, side: z.enum(['before', 'after']) });
@@ -55,6 +56,7 @@ export const rulesFormSchema = z.object({
   orangeSource: line,
   orangeStatedOn: line,
   ...harvestRuleFields,
+  ...workRuleFields,
 });
 export type RulesForm = z.output<typeof rulesFormSchema>;
 
@@ -162,6 +164,7 @@ function readRules(form: TextReader, typed: RulesForm, units: Units): ClubRules 
       500,
     ),
     ...readHarvestRules(form, typed),
+    workRules: readWorkRules(form, typed.workRules),
   };
 }
 

@@ -43,6 +43,10 @@ const FULL: ClubRules = {
     source: 'Digest',
     statedOn: '2026-08-01',
   },
+  workRules: {
+    ...DEFAULT_CLUB_RULES.workRules,
+    bait: { text: 'None within 200 yards.', source: 'Digest, p. 20', statedOn: '2026-08-01' },
+  },
 };
 
 const read = (form: RulesForm, units: 'us' | 'metric' = 'us') => makeRulesSchema(units).safeParse(form);
@@ -50,6 +54,17 @@ const problems = (change: Partial<RulesForm>, rules = DEFAULT_CLUB_RULES) => {
   const parsed = read({ ...rulesToForm(rules, 'us', 1), ...change });
   return parsed.success ? [] : parsed.error.issues.map((issue) => `${issue.path.join('.')}: ${issue.message}`);
 };
+
+describe('rules for work on the ground', () => {
+  it('need their source and day, each beside its own field', () => {
+    const { workRules } = rulesToForm(DEFAULT_CLUB_RULES, 'us', 1);
+    const bait = { text: 'None.', source: ' ', statedOn: '' };
+    expect(problems({ workRules: { ...workRules, bait } })).toEqual([
+      'workRules.bait.source: Say where the rule is written.',
+      'workRules.bait.statedOn: Choose the day on which it was stated.',
+    ]);
+  });
+});
 
 describe('harvest rules of the form', () => {
   const quota = { deer: 'any' as const, per: 'club' as const, most: '2' };

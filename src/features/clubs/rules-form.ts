@@ -4,6 +4,7 @@ import { mToYd, type Units } from '@/core/units';
 import { numberText } from './read-number';
 import type { RulesForm } from './rules-form-schema';
 import { harvestRulesToForm } from './rules-harvest-form';
+import { workRulesToForm } from './rules-work-form';
 
 /** A distance as typed: yards or metres, to a hundredth. */
 export function distanceText(m: number, units: Units): string {
@@ -62,5 +63,6 @@ export function rulesToForm(rules: ClubRules, units: Units, version: number): Ru
     orangeSource: orangeRule?.source ?? '',
     orangeStatedOn: orangeRule?.statedOn ?? '',
     ...harvestRulesToForm(rules),
+    ...workRulesToForm(rules),
   };
 }

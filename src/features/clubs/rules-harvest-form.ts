@@ -24,17 +24,17 @@ interface StatedFields {
   statedOn: string;
 }
 
-/** All three, or none: a rule without its source and day is no record. `at` names the fields of the form. */
+/** All three, or none: a rule without its source and day is no record. `at` names the fields of the form, by dotted path. */
 export function readStated(form: TextReader, typed: StatedFields, at: StatedFields, most: number): OrangeRule | null {
   const text = typed.text.trim();
   const source = typed.source.trim();
   const statedOn = typed.statedOn.trim();
   if (text === '' && source === '' && statedOn === '') return null;
-  if (text === '') form.fail([at.text], 'Write the rule, or clear its source and day.');
-  if (text.length > most) form.fail([at.text], `Keep the rule to ${most} characters.`);
-  if (source === '') form.fail([at.source], 'Say where the rule is written.');
-  if (source.length > 300) form.fail([at.source], 'Keep the source to 300 characters.');
-  if (!isDay(statedOn)) form.fail([at.statedOn], 'Choose the day on which it was stated.');
+  if (text === '') form.fail(at.text.split('.'), 'Write the rule, or clear its source and day.');
+  if (text.length > most) form.fail(at.text.split('.'), `Keep the rule to ${most} characters.`);
+  if (source === '') form.fail(at.source.split('.'), 'Say where the rule is written.');
+  if (source.length > 300) form.fail(at.source.split('.'), 'Keep the source to 300 characters.');
+  if (!isDay(statedOn)) form.fail(at.statedOn.split('.'), 'Choose the day on which it was stated.');
   return { text, source, statedOn };
 }
 

@@ -1,11 +1,13 @@
 import type { CalendarPrivacy, ClubRules, SightingsSeenBy } from '@/core/booking/rules';
 import { weaponWord } from '@/core/booking/seasons';
 import { formatDay } from '@/core/day-time';
+import { GROUND_WORKS } from '@/core/ground-work';
 import { quotaText } from '@/core/harvest/quotas';
 import { WEAPONS } from '@/core/types';
 import { mToYd, type Units } from '@/core/units';
 import type { RuleLine } from './place-words';
 import { numberText } from './read-number';
+import { WORK_RULE_WORDS, WORK_WORDS } from './words/ground-work';
 
 export interface RuleGroup {
   title: string;
@@ -171,6 +173,13 @@ function harvestLines({ harvestQuotas, stateHarvestRule }: ClubRules): RuleLine[
   ];
 }
 
+function workLines({ workRules }: ClubRules): RuleLine[] {
+  return GROUND_WORKS.map((work) => {
+    const rule = workRules[work];
+    return { label: WORK_WORDS[work], text: rule === null ? WORK_RULE_WORDS.none : `${rule.text} ${stated(rule)}` };
+  });
+}
+
 /** All rules of a club in words, in the club's units, in the order of the form. */
 export function describeRules(rules: ClubRules, units: Units): RuleGroup[] {
   return [
@@ -182,6 +191,7 @@ export function describeRules(rules: ClubRules, units: Units): RuleGroup[] {
     { title: 'Distances', lines: distanceLines(rules, units) },
     { title: 'Who sees what, and orange', lines: shareLines(rules) },
     { title: 'Harvest', lines: harvestLines(rules) },
+    { title: WORK_RULE_WORDS.group, lines: workLines(rules) },
   ];
 }
 

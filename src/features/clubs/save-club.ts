@@ -1,4 +1,4 @@
-import type { ClubRules } from '@/core/booking/rules';
+import { type ClubRules, completeRules } from '@/core/booking/rules';
 import { type Tx, write } from '@/db/client';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
@@ -69,7 +69,7 @@ export async function saveRules(
         set: { rules },
         action: 'club.rules_changed',
         did: 'changed the rules',
-        lines: (club) => describeRules(club.rules, club.units).flatMap((group) => group.lines),
+        lines: (club) => describeRules(completeRules(club.rules), club.units).flatMap((group) => group.lines),
       },
       now,
     ),

@@ -57,5 +57,18 @@ export function demoRules(today: string): ClubRules {
       source: SOURCE,
       statedOn,
     },
+    workRules: {
+      ...DEFAULT_CLUB_RULES.workRules,
+      mock_scrape: {
+        text: 'Scrapes may be laid with soil and a licking branch. Bottled scent only as the digest lists it.',
+        source: SOURCE,
+        statedOn,
+      },
+      cutting: {
+        text: 'Brush and limbs under four inches. Ask the landowner before any tree that would make a log.',
+        source: 'Lease, paragraph 7',
+        statedOn,
+      },
+    },
   };
 }

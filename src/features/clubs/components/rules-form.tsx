@@ -18,6 +18,7 @@ import { RulesHours } from './rules-hours';
 import { RulesLegalLight } from './rules-legal-light';
 import { RulesSeasons } from './rules-seasons';
 import { RulesSharing } from './rules-sharing';
+import { RulesWork } from './rules-work';
 
 interface Props {
   club: string;
@@ -62,6 +63,7 @@ export function RulesForm({ club, units, rules, action }: Props) {
         <RulesDistances units={units} />
         <RulesSharing />
         <RulesHarvest />
+        <RulesWork />
         <SubmitRow label="Save the rules" pending={pending} pendingLabel="Saving…" className="mt-8">
           <ButtonLink href={page} look="quiet">
             Back without saving
