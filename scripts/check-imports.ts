@@ -39,6 +39,7 @@ const FEATURES = [
   'setup',
   'movement',
   'learning',
+  'report',
   'moment',
   'board',
   'calendar',
