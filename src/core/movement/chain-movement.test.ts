@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { at, box, makeFeature, makeStand } from '../../../tests/helpers/small-ground';
 import { DEFAULT_SETTINGS } from '../settings';
+import { DEFAULT_SETUP } from '../setup-check/setup-settings';
 import type { ScoredFeature, ScoredStand } from '../types';
 import { chainMovement, type MovementInput } from './chain-movement';
 
@@ -30,6 +31,7 @@ const chain = (over: Partial<MovementInput> = {}) =>
     features: FEATURES,
     stands: [seat('Oak', 200), seat('Corner', 580)],
     scoring: DEFAULT_SETTINGS,
+    setup: DEFAULT_SETUP,
     ...over,
   });
 

@@ -1,27 +1,16 @@
 import { bearingDeg, distanceM, distanceToShapeM, lengthM } from '../geometry';
 import { sectorName } from '../sectors';
 import type { ScoringSettings } from '../settings';
-import { DEFAULT_SETUP, type SetupSettings } from '../setup-check/setup-settings';
+import type { SetupSettings } from '../setup-check/setup-settings';
 import { along, canShoot, carries, shotOf, windowsHunted, windsHunted } from '../setup-check/shot-of';
 import type { FeatureKind, Point, ScoredFeature, ScoredStand, WindowName } from '../types';
-import { ydToM } from '../units';
 
 export interface MovementInput {
   features: ScoredFeature[];
   stands: ScoredStand[];
   scoring: ScoringSettings;
-  setup?: SetupSettings;
-  settings?: MovementSettings;
+  setup: SetupSettings;
 }
-
-export interface MovementSettings {
-  /** A feature this near a line is a stop on it, m. Practice. */
-  stopWithinM: number;
-  /** A stretch that no stand reaches counts as a gap from this length, m. Our choice. */
-  gapFromM: number;
-}
-
-export const DEFAULT_MOVEMENT: MovementSettings = { stopWithinM: ydToM(65), gapFromM: ydToM(100) };
 
 export interface Stop {
   /** null: an end of the line at which nothing is drawn. */
@@ -80,7 +69,7 @@ function stationsOf(points: Point[]): Station[] {
 }
 
 function stopsOf(line: ScoredFeature, stations: Station[], input: MovementInput): Stop[] {
-  const { stopWithinM } = input.settings ?? DEFAULT_MOVEMENT;
+  const { stopWithinM } = input.setup;
   const found = input.features.flatMap((feature): Stop[] => {
     if (feature.id === line.id || feature.kind === 'travel_line' || feature.kind === 'rub_line') return [];
     const near = stations
@@ -105,7 +94,8 @@ function stopsOf(line: ScoredFeature, stations: Station[], input: MovementInput)
   return [...lead, ...stops, ...(left > stopWithinM ? [end(last, first.p)] : [])];
 }
 
-function serversOf(stretch: Station[], input: MovementInput, setup: SetupSettings): Server[] {
+function serversOf(stretch: Station[], input: MovementInput): Server[] {
+  const { setup } = input;
   return input.stands.flatMap((stand: ScoredStand) => {
     const shots = stretch.map(({ p }) =>
       shotOf(stand, { type: 'point', at: p }, { settings: setup, scoring: input.scoring }),
@@ -121,9 +111,9 @@ function serversOf(stretch: Station[], input: MovementInput, setup: SetupSetting
   });
 }
 
-function gapsOf(stations: Station[], stops: Stop[], input: MovementInput, setup: SetupSettings): MovementLine['gaps'] {
-  const { gapFromM } = input.settings ?? DEFAULT_MOVEMENT;
-  const open = stations.map((s) => serversOf([s], input, setup).length === 0);
+function gapsOf(stations: Station[], stops: Stop[], input: MovementInput): MovementLine['gaps'] {
+  const { gapFromM } = input.setup;
+  const open = stations.map((s) => serversOf([s], input).length === 0);
   const gaps: MovementLine['gaps'] = [];
   for (let i = 0; i < stations.length; i++) {
     if (!open[i]) continue;
@@ -158,7 +148,6 @@ function wayOf(stops: Stop[], length: number): MovementLine['way'] {
  * with only one of the two on a line, toward or from that end). Practice. Lines in order of name. Never throws.
  */
 export function chainMovement(input: MovementInput): MovementLine[] {
-  const setup = input.setup ?? DEFAULT_SETUP;
   const lines = input.features.filter((f) => f.kind === 'travel_line' && f.shape.type === 'line');
   return lines
     .flatMap((line): MovementLine[] => {
@@ -168,10 +157,10 @@ export function chainMovement(input: MovementInput): MovementLine[] {
       const legs = stops.slice(1).map((to, i): Leg => {
         const from = stops[i] as Stop;
         const stretch = stations.filter((s) => s.alongM >= from.alongM && s.alongM <= to.alongM);
-        return { from, to, lengthM: to.alongM - from.alongM, stands: serversOf(stretch, input, setup) };
+        return { from, to, lengthM: to.alongM - from.alongM, stands: serversOf(stretch, input) };
       });
       const length = lengthM(line.shape.points);
-      const gaps = gapsOf(stations, stops, input, setup);
+      const gaps = gapsOf(stations, stops, input);
       return [{ id: line.id, name: line.name, lengthM: length, stops, legs, gaps, way: wayOf(stops, length) }];
     })
     .sort((a, b) => a.name.localeCompare(b.name));

@@ -1,6 +1,6 @@
 import { ydToM } from '../units';
 
-/** Distances and shares at which a set-up counts as faulty. All practice; a club may set its own. */
+/** Distances and shares by which a set-up counts as faulty and lines of movement are read. All practice; a club may set its own. */
 export interface SetupSettings {
   /** An attraction nearer the seat than this pulls deer about it, m. */
   pullWithinM: number;
@@ -38,6 +38,10 @@ export interface SetupSettings {
   /** Turn from the sun inside which a camera looks into it, degrees, and the sun's height up to which it does. */
   cameraTurnDeg: number;
   cameraSunDeg: number;
+  /** A feature this near a line of movement is a stop on it, m. */
+  stopWithinM: number;
+  /** A stretch of a line that no stand reaches counts as a gap from this length, m. */
+  gapFromM: number;
 }
 
 export const DEFAULT_SETUP: SetupSettings = {
@@ -60,4 +64,51 @@ export const DEFAULT_SETUP: SetupSettings = {
   sunMonths: 3,
   cameraTurnDeg: 30,
   cameraSunDeg: 25,
+  stopWithinM: ydToM(65),
+  gapFromM: ydToM(100),
 };
+
+export interface SettingBounds {
+  /** What it measures: metres, degrees, a share 0-1, minutes, or months of the five hunted. */
+  of: 'distance' | 'turn' | 'share' | 'minutes' | 'months';
+  least: number;
+  most: number;
+}
+
+const far = (least: number, most: number): SettingBounds => ({
+  of: 'distance',
+  least: ydToM(least),
+  most: ydToM(most),
+});
+const turn = (least: number, most: number): SettingBounds => ({ of: 'turn', least, most });
+
+/** Between what a club may set each. Our choice: wide enough for any ground, narrow enough to keep a slip of the hand out. */
+export const SETUP_BOUNDS: Record<keyof SetupSettings, SettingBounds> = {
+  pullWithinM: far(20, 300),
+  behindDeg: turn(90, 180),
+  besideM: far(5, 200),
+  seatMarginM: far(0, 200),
+  leastUse: { of: 'share', least: 0.05, most: 1 },
+  scentDeg: turn(5, 90),
+  openingM: far(5, 300),
+  onLineM: far(2, 100),
+  scrapeFromM: far(0, 100),
+  scrapeToM: far(5, 150),
+  noiseM: far(0, 50),
+  offLinesM: far(20, 500),
+  bedsWithinM: far(20, 600),
+  upwindShare: { of: 'share', least: 0.05, most: 1 },
+  wadeM: far(0, 50),
+  sunMinutes: { of: 'minutes', least: 5, most: 240 },
+  sunMonths: { of: 'months', least: 1, most: 5 },
+  cameraTurnDeg: turn(5, 90),
+  cameraSunDeg: turn(5, 60),
+  stopWithinM: far(5, 300),
+  gapFromM: far(20, 1000),
+};
+export const SETUP_KEYS = Object.keys(SETUP_BOUNDS) as (keyof SetupSettings)[];
+
+/** A club's own settings with the default of each it left. */
+export function completeSetup(saved: Partial<SetupSettings>): SetupSettings {
+  return { ...DEFAULT_SETUP, ...saved };
+}

@@ -1,4 +1,5 @@
 import { integer, primaryKey, sqliteTable, text } from 'drizzle-orm/sqlite-core';
+import type { SetupSettings } from '@/core/setup-check/setup-settings';
 import { chores } from './chores';
 import { clubs, memberships } from './clubs';
 
@@ -23,3 +24,13 @@ export const setupAnswers = sqliteTable(
   },
   (t) => [primaryKey({ columns: [t.clubId, t.findingKey] })],
 );
+
+/** What a club set of the distances and shares of the set-up check in place of the defaults. */
+export const setupSettings = sqliteTable('setup_settings', {
+  clubId: text()
+    .primaryKey()
+    .references(() => clubs.id),
+  settings: text({ mode: 'json' }).$type<Partial<SetupSettings>>().notNull(),
+  /** Raised by each save, so two stewards cannot overwrite each other unseen. */
+  version: integer().notNull(),
+});
