@@ -1,11 +1,12 @@
 import type { ReactNode } from 'react';
+import { SPENT_LINK_WORDS } from '@/features/accounts/words/pages';
 import { ErrorState } from '@/ui/notices';
 
 /** In place of the form, when a mailed link cannot be used. */
 export function SpentLink({ children, action }: { children: ReactNode; action: ReactNode }) {
   return (
-    <ErrorState title="This link no longer works" action={action}>
-      It was used already, is too old, or a newer one has been sent. {children}
+    <ErrorState title={SPENT_LINK_WORDS.title} action={action}>
+      {SPENT_LINK_WORDS.why} {children}
     </ErrorState>
   );
 }

@@ -4,6 +4,7 @@ import { composeMail, type MailParts } from '@/features/mail/compose';
 import { newId } from '@/lib/ids';
 import { queueMail } from '@/server/outbox';
 import { issueLink } from './issue-link';
+import { ACCOUNT_MAILS } from './words/mails';
 
 interface Reader {
   id: string;
@@ -19,59 +20,53 @@ async function queue(tx: Tx, kind: string, key: string, to: Reader, subject: str
   await queueMail(tx, { clubId: null, kind, dedupeKey: `${kind}:${key}`, to: person, subject, text, html }, now);
 }
 
-const NOT_YOU = 'If this was not you, leave this mail alone: nothing happens.';
+const NOT_YOU = ACCOUNT_MAILS.notYou;
 
 export async function mailVerifyLink(tx: Tx, user: Reader, now: number): Promise<void> {
   const { tokenId, url } = await issueLink(tx, user.id, 'verify_email', now);
   const words = {
-    paragraphs: [`Hello ${user.name},`, 'One step is left: confirm that this e-mail address is yours.'],
-    button: { label: 'Confirm and sign in', url },
-    after: ['The link works once, for 48 hours.', NOT_YOU],
+    paragraphs: [ACCOUNT_MAILS.hello(user.name), ACCOUNT_MAILS.verifyOpening],
+    button: { label: ACCOUNT_MAILS.verifyButton, url },
+    after: [ACCOUNT_MAILS.verifyLasts, NOT_YOU],
   };
-  await queue(tx, 'account.verify', tokenId, user, 'Confirm your e-mail address', words, now);
+  await queue(tx, 'account.verify', tokenId, user, ACCOUNT_MAILS.verifySubject, words, now);
 }
 
 /** To the owner of an address that somebody signed up with again. */
 export async function mailAccountExists(tx: Tx, user: Reader, now: number): Promise<void> {
   const words = {
-    paragraphs: [
-      `Hello ${user.name},`,
-      'Somebody, perhaps you, asked for a new account with this e-mail address. You already have one: sign in with it.',
-    ],
-    button: { label: 'Sign in', url: `${env.appUrl}/sign-in` },
-    after: [`Password forgotten? Choose a new one at ${env.appUrl}/forgot`, NOT_YOU],
+    paragraphs: [ACCOUNT_MAILS.hello(user.name), ACCOUNT_MAILS.existsOpening],
+    button: { label: ACCOUNT_MAILS.existsButton, url: `${env.appUrl}/sign-in` },
+    after: [ACCOUNT_MAILS.existsForgotten(env.appUrl), NOT_YOU],
   };
-  await queue(tx, 'account.exists', newId('mail'), user, 'You already have an account', words, now);
+  await queue(tx, 'account.exists', newId('mail'), user, ACCOUNT_MAILS.existsSubject, words, now);
 }
 
 /** The same for an address never confirmed: its owner chooses the password, whoever signed up first. */
 export async function mailFinishAccount(tx: Tx, user: Reader, now: number): Promise<void> {
   const { tokenId, url } = await issueLink(tx, user.id, 'reset_password', now);
   const words = {
-    paragraphs: [
-      'Hello,',
-      'An account with this e-mail address was begun earlier and never finished. Choose a password to finish it.',
-    ],
-    button: { label: 'Choose a password', url },
-    after: ['The link works once, for one hour.', NOT_YOU],
+    paragraphs: ['Hello,', ACCOUNT_MAILS.finishOpening],
+    button: { label: ACCOUNT_MAILS.finishButton, url },
+    after: [ACCOUNT_MAILS.finishLasts, NOT_YOU],
   };
-  await queue(tx, 'account.finish', tokenId, user, 'Finish your account', words, now);
+  await queue(tx, 'account.finish', tokenId, user, ACCOUNT_MAILS.finishSubject, words, now);
 }
 
 export async function mailResetLink(tx: Tx, user: Reader, now: number): Promise<void> {
   const { tokenId, url } = await issueLink(tx, user.id, 'reset_password', now);
   const words = {
-    paragraphs: [`Hello ${user.name},`, 'Here is the link to choose a new password.'],
-    button: { label: 'Choose a new password', url },
-    after: ['The link works once, for one hour. Choosing a new password signs you out everywhere.', NOT_YOU],
+    paragraphs: [ACCOUNT_MAILS.hello(user.name), ACCOUNT_MAILS.resetOpening],
+    button: { label: ACCOUNT_MAILS.resetButton, url },
+    after: [ACCOUNT_MAILS.resetLasts, NOT_YOU],
   };
-  await queue(tx, 'account.reset', tokenId, user, 'Choose a new password', words, now);
+  await queue(tx, 'account.reset', tokenId, user, ACCOUNT_MAILS.resetButton, words, now);
 }
 
 export async function mailPasswordChanged(tx: Tx, user: Reader, now: number): Promise<void> {
   const words = {
-    paragraphs: [`Hello ${user.name},`, 'Your password was changed, and other browsers were signed out.'],
-    button: { label: 'This was not me: choose a new password', url: `${env.appUrl}/forgot` },
+    paragraphs: [ACCOUNT_MAILS.hello(user.name), ACCOUNT_MAILS.changedOpening],
+    button: { label: ACCOUNT_MAILS.changedButton, url: `${env.appUrl}/forgot` },
   };
-  await queue(tx, 'account.password_changed', newId('mail'), user, 'Your password was changed', words, now);
+  await queue(tx, 'account.password_changed', newId('mail'), user, ACCOUNT_MAILS.changedSubject, words, now);
 }

@@ -1,28 +1,29 @@
 import { z } from 'zod';
 import { UNIT_SYSTEMS } from '@/core/units';
 import { LONGEST_PASSWORD, passwordProblem } from './password-rules';
+import { FIELD_ERRORS } from './words/errors';
 
 export const nameField = z
   .string()
   .trim()
-  .min(1, 'Write the name your club knows you by.')
-  .max(60, 'Use at most 60 characters.')
-  .refine((name) => !/[\p{Cc}\p{Cf}<>]/u.test(name), 'Use letters, digits and plain signs only.');
+  .min(1, FIELD_ERRORS.name)
+  .max(60, FIELD_ERRORS.nameLong)
+  .refine((name) => !/[\p{Cc}\p{Cf}<>]/u.test(name), FIELD_ERRORS.nameSigns);
 
 export const emailField = z
   .string()
   .trim()
   .toLowerCase()
-  .max(254, 'That is too long for an e-mail address.')
-  .pipe(z.email('Write an e-mail address, such as name@example.com.'));
+  .max(254, FIELD_ERRORS.emailLong)
+  .pipe(z.email(FIELD_ERRORS.email));
 
 /** A password as it is asked for, whatever it was when it was set. */
-const givenPassword = z.string().min(1, 'Write your password.').max(1000, 'That is too long for a password.');
+const givenPassword = z.string().min(1, FIELD_ERRORS.password).max(1000, FIELD_ERRORS.passwordLong);
 
 /** A new password; its rules need its owner's name and address too. */
-export const newPasswordField = z.string().max(1000, `Use at most ${LONGEST_PASSWORD} characters.`);
+export const newPasswordField = z.string().max(1000, FIELD_ERRORS.newPasswordLong(LONGEST_PASSWORD));
 
-const secretField = z.string().regex(/^[\w-]{20,60}$/, 'This link is not whole. Open it from the mail again.');
+const secretField = z.string().regex(/^[\w-]{20,60}$/, FIELD_ERRORS.link);
 
 type Check = (value: { name: string; email: string; password: string }, ctx: z.RefinementCtx) => void;
 
@@ -63,7 +64,7 @@ export const endSessionSchema = z.object({ id: z.string().min(1).max(100) });
 
 /** club: as each club has it. */
 export const changeUnitsSchema = z.object({
-  units: z.enum([...UNIT_SYSTEMS, 'club'], { error: "Choose the club's units or your own." }),
+  units: z.enum([...UNIT_SYSTEMS, 'club'], { error: FIELD_ERRORS.units }),
 });
 export type ChangeUnitsInput = z.output<typeof changeUnitsSchema>;
 

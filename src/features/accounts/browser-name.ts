@@ -1,20 +1,22 @@
+import { BROWSER_WORDS } from './words/forms';
+
 /** First match wins: others' names are part of most browsers' own. */
 const BROWSERS: [RegExp, string][] = [
-  [/\bEdgA?\/|\bEdgiOS\//, 'Edge'],
-  [/\bOPR\/|\bOpera\b/, 'Opera'],
-  [/\bSamsungBrowser\//, 'Samsung Internet'],
-  [/\bFirefox\/|\bFxiOS\//, 'Firefox'],
-  [/\bHeadlessChrome\/|\bChrome\/|\bChromium\/|\bCriOS\//, 'Chrome'],
-  [/\bSafari\//, 'Safari'],
+  [/\bEdgA?\/|\bEdgiOS\//, BROWSER_WORDS.edge],
+  [/\bOPR\/|\bOpera\b/, BROWSER_WORDS.opera],
+  [/\bSamsungBrowser\//, BROWSER_WORDS.samsungInternet],
+  [/\bFirefox\/|\bFxiOS\//, BROWSER_WORDS.firefox],
+  [/\bHeadlessChrome\/|\bChrome\/|\bChromium\/|\bCriOS\//, BROWSER_WORDS.chrome],
+  [/\bSafari\//, BROWSER_WORDS.safari],
 ];
 const SYSTEMS: [RegExp, string][] = [
   [/\biPhone\b/, 'iPhone'],
   [/\biPad\b/, 'iPad'],
-  [/\bAndroid\b/, 'Android'],
-  [/\bWindows\b/, 'Windows'],
+  [/\bAndroid\b/, BROWSER_WORDS.android],
+  [/\bWindows\b/, BROWSER_WORDS.windows],
   [/\bCrOS\b/, 'ChromeOS'],
-  [/\bMacintosh\b/, 'Mac'],
-  [/\bLinux\b/, 'Linux'],
+  [/\bMacintosh\b/, BROWSER_WORDS.mac],
+  [/\bLinux\b/, BROWSER_WORDS.linux],
 ];
 
 const first = (table: [RegExp, string][], text: string) => table.find(([pattern]) => pattern.test(text))?.[1];
@@ -23,6 +25,5 @@ const first = (table: [RegExp, string][], text: string) => table.find(([pattern]
 export function browserName(userAgent: string): string {
   const browser = first(BROWSERS, userAgent);
   const system = first(SYSTEMS, userAgent);
-  if (!browser && !system) return 'A browser we do not know';
-  return `${browser ?? 'A browser'} on ${system ?? 'a device we do not know'}`;
+  return BROWSER_WORDS.browserOn(browser, system);
 }

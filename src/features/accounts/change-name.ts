@@ -2,6 +2,7 @@ import { write } from '@/db/client';
 import type { ChangeNameInput } from './account-schema';
 import { auditAccount } from './audit-account';
 import { updateUser } from './data';
+import { ACCOUNT_AUDIT } from './words/audit';
 
 export async function changeName(
   user: { id: string; name: string },
@@ -10,6 +11,6 @@ export async function changeName(
 ): Promise<void> {
   await write(async (tx) => {
     await updateUser(tx, user.id, { name: input.name });
-    await auditAccount(tx, user, 'renamed', `${user.name} is now called ${input.name}.`, now);
+    await auditAccount(tx, user, 'renamed', ACCOUNT_AUDIT.nameChanged(user.name, input.name), now);
   });
 }

@@ -11,6 +11,8 @@ import { auditAccount } from './audit-account';
 import { requireGoodPassword } from './check-password';
 import { findUserById, spendOlderTokens, updateUser } from './data';
 import { signInRateKey, takeSignInRate } from './rates';
+import { ACCOUNT_AUDIT } from './words/audit';
+import { ACCOUNT_ERRORS } from './words/errors';
 
 /** Needs the password that holds now; every other browser is signed out. */
 export async function changePassword(
@@ -23,7 +25,7 @@ export async function changePassword(
   await takeSignInRate(user.email, source.address, now);
   const row = await findUserById(user.id);
   if (!(await passwordMatches(row?.passwordHash ?? null, input.current))) {
-    const message = 'This is not your password now.';
+    const message = ACCOUNT_ERRORS.wrongPassword;
     throw new AppError('invalid', message, { fields: { current: message } });
   }
   const passwordHash = await hashPassword(input.password);
@@ -33,6 +35,6 @@ export async function changePassword(
     await deleteUserSessions(tx, user.id, hashSecret(user.sessionId));
     await clearRate(tx, signInRateKey(user.email));
     await mailPasswordChanged(tx, user, now);
-    await auditAccount(tx, user, 'password_changed', `${user.name} changed the password.`, now);
+    await auditAccount(tx, user, 'password_changed', ACCOUNT_AUDIT.passwordChanged(user.name), now);
   });
 }

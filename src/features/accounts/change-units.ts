@@ -2,8 +2,7 @@ import { write } from '@/db/client';
 import type { ChangeUnitsInput } from './account-schema';
 import { auditAccount } from './audit-account';
 import { updateUser } from './data';
-
-const SAID = { us: 'in US units', metric: 'in metric units', club: 'as each club has them' } as const;
+import { ACCOUNT_AUDIT } from './words/audit';
 
 /** How figures are shown to one person; what is stored and what others see stays as it is. */
 export async function changeUnits(
@@ -13,6 +12,6 @@ export async function changeUnits(
 ): Promise<void> {
   await write(async (tx) => {
     await updateUser(tx, user.id, { units: units === 'club' ? null : units });
-    await auditAccount(tx, user, 'units_chosen', `${user.name} now sees figures ${SAID[units]}.`, now);
+    await auditAccount(tx, user, 'units_chosen', ACCOUNT_AUDIT.unitsChosen[units](user.name), now);
   });
 }

@@ -1,5 +1,6 @@
 import { AppError } from '@/server/errors';
 import { passwordProblem } from './password-rules';
+import { ACCOUNT_ERRORS } from './words/errors';
 
 /** Refuses a new password that its owner's name or address gives away; the form shows why beside the field. */
 export function requireGoodPassword(password: string, owner: { email: string; name: string }): void {
@@ -7,5 +8,4 @@ export function requireGoodPassword(password: string, owner: { email: string; na
   if (problem) throw new AppError('invalid', problem, { fields: { password: problem } });
 }
 
-export const spentLink = () =>
-  new AppError('invalid', 'This link was used already or is too old. Ask for a new one, and open the newest mail.');
+export const spentLink = () => new AppError('invalid', ACCOUNT_ERRORS.spentLink);

@@ -4,6 +4,8 @@ import { AppError } from '@/server/errors';
 import { auditAccount } from './audit-account';
 import { addUserRow } from './create-account';
 import { findUserByEmail, updateUser } from './data';
+import { ACCOUNT_AUDIT } from './words/audit';
+import { ACCOUNT_ERRORS } from './words/errors';
 
 /**
  * For a person whose e-mail address is proven by the link they came with (an invitation). Hash the password before the
@@ -17,12 +19,12 @@ export async function createAccountRow(
   const known = await findUserByEmail(account.email, tx);
   if (!known) return addUserRow(tx, account, now, now);
   if (known.emailVerifiedAt !== null) {
-    throw new AppError('conflict', 'You already have an account with this e-mail address. Sign in, then join.');
+    throw new AppError('conflict', ACCOUNT_ERRORS.accountExists);
   }
   const { name, passwordHash } = account;
   await updateUser(tx, known.id, { name, passwordHash, emailVerifiedAt: now });
   await deleteUserSessions(tx, known.id);
-  await auditAccount(tx, { id: known.id, name }, 'verified', `${name} confirmed the e-mail address.`, now);
+  await auditAccount(tx, { id: known.id, name }, 'verified', ACCOUNT_AUDIT.emailConfirmed(name), now);
   return { id: known.id };
 }
 

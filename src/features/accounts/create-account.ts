@@ -6,6 +6,7 @@ import type { SignUpInput } from './account-schema';
 import { auditAccount } from './audit-account';
 import { findUserByEmail, insertUser } from './data';
 import { takeMailRate } from './rates';
+import { ACCOUNT_AUDIT } from './words/audit';
 
 interface NewAccount {
   name: string;
@@ -16,7 +17,7 @@ interface NewAccount {
 export async function addUserRow(tx: Tx, account: NewAccount, emailVerifiedAt: number | null, now: number) {
   const user = { id: newId('user'), ...account, emailVerifiedAt, createdAt: now };
   await insertUser(tx, user);
-  await auditAccount(tx, user, 'created', `${user.name} made an account.`, now);
+  await auditAccount(tx, user, 'created', ACCOUNT_AUDIT.made(user.name), now);
   return user;
 }
 

@@ -2,6 +2,7 @@ import { write } from '@/db/client';
 import { AppError } from '@/server/errors';
 import { mailVerifyLink } from './account-mails';
 import { takeMailRate } from './rates';
+import { ACCOUNT_ERRORS } from './words/errors';
 
 interface SignedIn {
   id: string;
@@ -11,7 +12,7 @@ interface SignedIn {
 }
 
 export async function resendVerify(user: SignedIn, source: { address: string }, now: number): Promise<void> {
-  if (user.emailVerifiedAt !== null) throw new AppError('conflict', 'Your e-mail address is confirmed already.');
+  if (user.emailVerifiedAt !== null) throw new AppError('conflict', ACCOUNT_ERRORS.emailConfirmed);
   await takeMailRate(user.email, source.address, now);
   await write((tx) => mailVerifyLink(tx, user, now));
 }
@@ -19,8 +20,5 @@ export async function resendVerify(user: SignedIn, source: { address: string }, 
 /** Before anything that makes the club write to others. */
 export function requireVerified(user: { emailVerifiedAt: number | null }): void {
   if (user.emailVerifiedAt !== null) return;
-  throw new AppError(
-    'forbidden',
-    'Confirm your own e-mail address before you invite others: open the link we mailed you, or have it sent again under Account.',
-  );
+  throw new AppError('forbidden', ACCOUNT_ERRORS.confirmFirst);
 }

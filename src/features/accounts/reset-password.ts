@@ -7,6 +7,7 @@ import type { ResetInput } from './account-schema';
 import { auditAccount } from './audit-account';
 import { requireGoodPassword, spentLink } from './check-password';
 import { findTokenOwner, findUserById, spendOlderTokens, spendToken, updateUser } from './data';
+import { ACCOUNT_AUDIT } from './words/audit';
 
 /** Sets a new password by a mailed link, which also proves the address. Every session of the account ends. */
 export async function resetPassword(input: ResetInput, now: number): Promise<{ userId: string }> {
@@ -23,7 +24,7 @@ export async function resetPassword(input: ResetInput, now: number): Promise<{ u
     await spendOlderTokens(tx, user.id, 'verify_email', now);
     await deleteUserSessions(tx, user.id);
     await mailPasswordChanged(tx, user, now);
-    await auditAccount(tx, user, 'password_reset', `${user.name} chose a new password by mail.`, now);
+    await auditAccount(tx, user, 'password_reset', ACCOUNT_AUDIT.passwordReset(user.name), now);
     return { userId: user.id };
   });
 }

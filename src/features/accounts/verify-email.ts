@@ -7,9 +7,10 @@ import type { VerifyInput } from './account-schema';
 import { auditAccount } from './audit-account';
 import { spentLink } from './check-password';
 import { findTokenOwner, findUserById, spendToken, updateUser } from './data';
+import { ACCOUNT_AUDIT } from './words/audit';
+import { ACCOUNT_ERRORS } from './words/errors';
 
-const NOT_THE_PASSWORD =
-  'That is not the password this account was made with. If somebody else made it, choose your own by "Password forgotten".';
+const NOT_THE_PASSWORD = ACCOUNT_ERRORS.otherPassword;
 
 /**
  * Confirms an address by its link and the password: the link shows who reads the mail, the password who made the account.
@@ -27,7 +28,7 @@ export async function verifyEmail({ token, password }: VerifyInput, now: number)
     if (!user) throw spentLink();
     await updateUser(tx, user.id, { emailVerifiedAt: user.emailVerifiedAt ?? now });
     await deleteUserSessions(tx, user.id);
-    await auditAccount(tx, user, 'verified', `${user.name} confirmed the e-mail address.`, now);
+    await auditAccount(tx, user, 'verified', ACCOUNT_AUDIT.emailConfirmed(user.name), now);
     return { userId: user.id };
   });
 }

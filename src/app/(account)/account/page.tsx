@@ -6,6 +6,7 @@ import { SessionsList } from '@/features/accounts/components/sessions-list';
 import { SignOutButton, SignOutEverywhereButton } from '@/features/accounts/components/sign-out-button';
 import { UnitsForm } from '@/features/accounts/components/units-form';
 import { listMySessions, readMyUnits } from '@/features/accounts/reads';
+import { ACCOUNT_PAGE_WORDS } from '@/features/accounts/words/pages';
 import { ContactForm } from '@/features/outings/components/contact-form';
 import { readContact } from '@/features/outings/read-contact';
 import { now } from '@/server/clock';
@@ -25,35 +26,36 @@ import {
   switchContactAction,
 } from './actions';
 
-export const metadata: Metadata = { title: 'Account' };
+export const metadata: Metadata = { title: ACCOUNT_PAGE_WORDS.title };
 
 export default accountPage(async ({ user }) => {
   const sessions = await listMySessions(user, now());
   const contact = await readContact(user.id, now());
   return (
     <>
-      <PageTitle title="Account" lead={user.email} actions={<TextLink href="/clubs">Your clubs</TextLink>} />
+      <PageTitle
+        title={ACCOUNT_PAGE_WORDS.title}
+        lead={user.email}
+        actions={<TextLink href="/clubs">{ACCOUNT_PAGE_WORDS.yourClubs}</TextLink>}
+      />
       {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
-      <Section title="Name" note="Members of your clubs see it.">
+      <Section title={ACCOUNT_PAGE_WORDS.name} note={ACCOUNT_PAGE_WORDS.nameNote}>
         <NameForm name={user.name} action={changeNameAction} />
       </Section>
-      <Section title="Units" note="How figures are shown to you, in every club. What others see stays as it is.">
+      <Section title={ACCOUNT_PAGE_WORDS.units} note={ACCOUNT_PAGE_WORDS.unitsNote}>
         <UnitsForm units={await readMyUnits(user)} action={changeUnitsAction} />
       </Section>
-      <Section
-        title="Safety contact"
-        note="Somebody at home who is mailed when you have not signed out in time, in any of your clubs."
-      >
+      <Section title={ACCOUNT_PAGE_WORDS.safetyContact} note={ACCOUNT_PAGE_WORDS.safetyContactNote}>
         <ContactForm
           key={contact?.email}
           contact={contact}
           actions={{ save: saveContactAction, switchOff: switchContactAction, remove: removeContactAction }}
         />
       </Section>
-      <Section title="Password">
+      <Section title={ACCOUNT_PAGE_WORDS.password}>
         <PasswordForm email={user.email} action={changePasswordAction} />
       </Section>
-      <Section title="Signed-in browsers" note="One you do not know? Sign it out, then change your password.">
+      <Section title={ACCOUNT_PAGE_WORDS.signedInBrowsers} note={ACCOUNT_PAGE_WORDS.signedInBrowsersNote}>
         <SessionsList sessions={sessions} endAction={endSessionAction} />
         <div className="mt-5 flex flex-wrap gap-3">
           <SignOutButton action={signOutAction} />

@@ -3,6 +3,8 @@ import Link from 'next/link';
 import { ConfirmEmailNotice } from '@/features/accounts/components/confirm-email-notice';
 import { SignOutButton } from '@/features/accounts/components/sign-out-button';
 import { listMyClubs } from '@/features/accounts/reads';
+import { CLUBS_PAGE_WORDS } from '@/features/accounts/words/pages';
+import { ROLE_WORDS } from '@/features/clubs/role-words';
 import { now } from '@/server/clock';
 import { accountPage } from '@/server/doors';
 import { ButtonLink, TextLink } from '@/ui/button';
@@ -11,25 +13,22 @@ import { PageTitle } from '@/ui/page-parts';
 import { signOutAction } from '../account/actions';
 import { resendAction } from '../verify/actions';
 
-export const metadata: Metadata = { title: 'Your clubs' };
-
-const ROLE_WORDS = { admin: 'Admin', steward: 'Steward', member: 'Member', guest: 'Guest', landowner: 'Landowner' };
+export const metadata: Metadata = { title: CLUBS_PAGE_WORDS.title };
 
 export default accountPage(async ({ user }) => {
   const clubs = await listMyClubs(user.id, now());
   const start = (
     <ButtonLink href="/clubs/new" look="primary">
-      Start a club
+      {CLUBS_PAGE_WORDS.start}
     </ButtonLink>
   );
   return (
     <>
-      <PageTitle title="Your clubs" over={user.name} actions={clubs.length > 0 && start} />
+      <PageTitle title={CLUBS_PAGE_WORDS.title} over={user.name} actions={clubs.length > 0 && start} />
       {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
       {clubs.length === 0 ? (
-        <EmptyState title="You are in no club yet" action={start}>
-          Start one for your club, lease or family land. If your club is here already, ask its admin for an invitation
-          and open the link in that mail.
+        <EmptyState title={CLUBS_PAGE_WORDS.none} action={start}>
+          {CLUBS_PAGE_WORDS.noneText}
         </EmptyState>
       ) : (
         <ul className="divide-y divide-rule border-rule border-y">
@@ -47,7 +46,7 @@ export default accountPage(async ({ user }) => {
         </ul>
       )}
       <div className="mt-8 flex flex-wrap items-center gap-4">
-        <TextLink href="/account">Account</TextLink>
+        <TextLink href="/account">{CLUBS_PAGE_WORDS.account}</TextLink>
         <SignOutButton action={signOutAction} look="quiet" />
       </div>
     </>

@@ -4,8 +4,9 @@ import { useRouter } from 'next/navigation';
 import { TextLink } from '@/ui/button';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
-import { TextInput } from '@/ui/text-inputs';
 import { verifySchema } from '../account-schema';
+import { CONFIRM_EMAIL_WORDS } from '../words/forms';
+import { CurrentPasswordInput } from './account-fields';
 
 interface Props {
   token: string;
@@ -23,18 +24,14 @@ export function ConfirmEmailForm({ token, action }: Props) {
   });
   return (
     <form {...formProps} className="flex flex-col gap-5">
-      <FormErrorSummary errors={errors} title="That did not work" />
-      <TextInput
-        label="Password"
-        hint="The one you chose when you made the account."
-        type="password"
-        autoComplete="current-password"
+      <FormErrorSummary errors={errors} title={CONFIRM_EMAIL_WORDS.failed} />
+      <CurrentPasswordInput
+        hint={CONFIRM_EMAIL_WORDS.passwordHint}
         {...register('password')}
         error={errorOf('password')}
-        required
       />
-      <SubmitRow label="Confirm and sign in" pending={pending}>
-        <TextLink href="/forgot">Password forgotten</TextLink>
+      <SubmitRow label={CONFIRM_EMAIL_WORDS.confirm} pending={pending}>
+        <TextLink href="/forgot">{CONFIRM_EMAIL_WORDS.passwordForgotten}</TextLink>
       </SubmitRow>
     </form>
   );

@@ -1,4 +1,5 @@
 import { Notice } from '@/ui/notices';
+import { CONFIRM_EMAIL_NOTICE } from '../words/forms';
 import { ResendButton } from './resend-button';
 
 interface Props {
@@ -9,10 +10,11 @@ interface Props {
 /** Stands on the pages of an account whose address is not confirmed. */
 export function ConfirmEmailNotice({ email, action }: Props) {
   return (
-    <Notice level="caution" title="Confirm your e-mail address" className="mb-6">
+    <Notice level="caution" title={CONFIRM_EMAIL_NOTICE.title} className="mb-6">
       <p className="mb-2">
-        Open the link we mailed to <strong className="break-words">{email}</strong>. Until then you cannot invite
-        anyone.
+        {CONFIRM_EMAIL_NOTICE.beforeEmail}
+        <strong className="break-words">{email}</strong>
+        {CONFIRM_EMAIL_NOTICE.afterEmail}
       </p>
       <ResendButton action={action} />
     </Notice>

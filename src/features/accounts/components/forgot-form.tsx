@@ -4,8 +4,9 @@ import { type ReactNode, useState } from 'react';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { Notice } from '@/ui/notices';
-import { TextInput } from '@/ui/text-inputs';
 import { forgotSchema } from '../account-schema';
+import { FORGOT_WORDS } from '../words/forms';
+import { EmailInput } from './account-fields';
 
 interface Props {
   mailHint: ReactNode;
@@ -22,10 +23,11 @@ export function ForgotForm({ mailHint, action }: Props) {
   });
   if (sentTo) {
     return (
-      <Notice title="Check your mail" live>
+      <Notice title={FORGOT_WORDS.sentTitle} live>
         <p>
-          If there is an account with <strong className="break-words">{sentTo}</strong>, a link to choose a new password
-          is on its way. It works once, for one hour.
+          {FORGOT_WORDS.sentBeforeEmail}
+          <strong className="break-words">{sentTo}</strong>
+          {FORGOT_WORDS.sentAfterEmail}
         </p>
         {mailHint}
       </Notice>
@@ -34,15 +36,8 @@ export function ForgotForm({ mailHint, action }: Props) {
   return (
     <form {...formProps} className="flex flex-col gap-5">
       <FormErrorSummary errors={errors} />
-      <TextInput
-        label="E-mail of your account"
-        type="email"
-        autoComplete="username"
-        {...register('email')}
-        error={errorOf('email')}
-        required
-      />
-      <SubmitRow label="Send the link" pending={pending} />
+      <EmailInput label={FORGOT_WORDS.email} {...register('email')} error={errorOf('email')} />
+      <SubmitRow label={FORGOT_WORDS.send} pending={pending} />
     </form>
   );
 }

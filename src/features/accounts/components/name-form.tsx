@@ -5,6 +5,7 @@ import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { changeNameSchema } from '../account-schema';
+import { NAME_WORDS } from '../words/forms';
 
 interface Props {
   name: string;
@@ -17,13 +18,13 @@ export function NameForm({ name, action }: Props) {
     schema: changeNameSchema,
     defaultValues: { name },
     submit: action,
-    onDone: () => toast({ title: 'Name saved' }),
+    onDone: () => toast({ title: NAME_WORDS.saved }),
   });
   return (
     <form {...formProps} className="flex flex-col gap-5">
       <FormErrorSummary errors={errors} />
-      <TextInput label="Your name" autoComplete="name" {...register('name')} error={errorOf('name')} required />
-      <SubmitRow label="Save the name" look="plain" pending={pending} />
+      <TextInput label={NAME_WORDS.name} autoComplete="name" {...register('name')} error={errorOf('name')} required />
+      <SubmitRow label={NAME_WORDS.save} look="plain" pending={pending} />
     </form>
   );
 }

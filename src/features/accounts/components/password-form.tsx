@@ -2,9 +2,10 @@
 
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
-import { TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { changePasswordSchema } from '../account-schema';
+import { ACCOUNT_FIELD_WORDS, PASSWORD_WORDS } from '../words/forms';
+import { CurrentPasswordInput, NewPasswordInput } from './account-fields';
 
 interface Props {
   email: string;
@@ -19,31 +20,16 @@ export function PasswordForm({ email, action }: Props) {
     submit: action,
     onDone: () => {
       form.reset();
-      toast({ title: 'Password changed', text: 'Your other browsers were signed out.' });
+      toast({ title: PASSWORD_WORDS.changed, text: PASSWORD_WORDS.changedText });
     },
   });
   return (
     <form {...formProps} className="flex flex-col gap-5">
       <FormErrorSummary errors={errors} />
       <input type="email" autoComplete="username" defaultValue={email} hidden readOnly />
-      <TextInput
-        label="Password now"
-        type="password"
-        autoComplete="current-password"
-        {...register('current')}
-        error={errorOf('current')}
-        required
-      />
-      <TextInput
-        label="New password"
-        hint="At least 10 characters. A few plain words do well."
-        type="password"
-        autoComplete="new-password"
-        {...register('password')}
-        error={errorOf('password')}
-        required
-      />
-      <SubmitRow label="Change the password" look="plain" pending={pending} />
+      <CurrentPasswordInput label={PASSWORD_WORDS.current} {...register('current')} error={errorOf('current')} />
+      <NewPasswordInput label={ACCOUNT_FIELD_WORDS.newPassword} {...register('password')} error={errorOf('password')} />
+      <SubmitRow label={PASSWORD_WORDS.change} look="plain" pending={pending} />
     </form>
   );
 }

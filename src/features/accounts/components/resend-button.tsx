@@ -3,6 +3,7 @@
 import { useState } from 'react';
 import { Button } from '@/ui/button';
 import type { ActionAnswer } from '@/ui/form/use-action-form';
+import { RESEND_WORDS } from '../words/forms';
 
 interface Props {
   action: (values: Record<string, never>) => Promise<ActionAnswer<{ email: string }>>;
@@ -16,14 +17,14 @@ export function ResendButton({ action }: Props) {
     setPending(true);
     const answer = await action({}).catch(() => null);
     setPending(false);
-    if (!answer) setSaid('The server could not be reached. Try again.');
-    else setSaid(answer.ok ? `Sent to ${answer.data.email}. Only the newest link works.` : answer.error.message);
+    if (!answer) setSaid(RESEND_WORDS.lost);
+    else setSaid(answer.ok ? RESEND_WORDS.sent(answer.data.email) : answer.error.message);
   }
 
   return (
     <div className="flex flex-wrap items-center gap-3">
-      <Button onClick={send} pending={pending} pendingLabel="Sending…">
-        Send the link again
+      <Button onClick={send} pending={pending} pendingLabel={RESEND_WORDS.sending}>
+        {RESEND_WORDS.send}
       </Button>
       <p role="status">{said}</p>
     </div>

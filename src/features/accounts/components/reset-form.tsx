@@ -3,8 +3,9 @@
 import { useRouter } from 'next/navigation';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
-import { TextInput } from '@/ui/text-inputs';
 import { resetSchema } from '../account-schema';
+import { ACCOUNT_FIELD_WORDS, RESET_WORDS } from '../words/forms';
+import { NewPasswordInput } from './account-fields';
 
 interface Props {
   token: string;
@@ -25,16 +26,8 @@ export function ResetForm({ token, email, action }: Props) {
       <FormErrorSummary errors={errors} />
       {/* Lets a password keeper know whose password this is. */}
       <input type="email" autoComplete="username" defaultValue={email} hidden readOnly />
-      <TextInput
-        label="New password"
-        hint="At least 10 characters. A few plain words do well."
-        type="password"
-        autoComplete="new-password"
-        {...register('password')}
-        error={errorOf('password')}
-        required
-      />
-      <SubmitRow label="Set it and sign in" pending={pending} />
+      <NewPasswordInput label={ACCOUNT_FIELD_WORDS.newPassword} {...register('password')} error={errorOf('password')} />
+      <SubmitRow label={RESET_WORDS.set} pending={pending} />
     </form>
   );
 }

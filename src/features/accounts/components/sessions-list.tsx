@@ -5,6 +5,7 @@ import { ConfirmDialog } from '@/ui/confirm-dialog';
 import type { ActionAnswer } from '@/ui/form/use-action-form';
 import { Badge } from '@/ui/page-parts';
 import type { SessionView } from '../reads';
+import { SESSIONS_WORDS } from '../words/forms';
 
 interface Props {
   sessions: SessionView[];
@@ -14,7 +15,7 @@ interface Props {
 export function SessionsList({ sessions, endAction }: Props) {
   async function end(id: string) {
     const answer = await endAction({ id }).catch(() => null);
-    if (!answer) return 'The server could not be reached. Try again.';
+    if (!answer) return SESSIONS_WORDS.lost;
     if (!answer.ok) return answer.error.message;
   }
 
@@ -24,21 +25,21 @@ export function SessionsList({ sessions, endAction }: Props) {
         <li key={id} className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2 py-3">
           <div className="min-w-0">
             <p className="font-semibold">
-              {browser} {here && <Badge look="moss">This one</Badge>}
+              {browser} {here && <Badge look="moss">{SESSIONS_WORDS.here}</Badge>}
             </p>
-            <p className="break-words text-ink-soft text-sm">
-              Signed in {since}, from {address}
-            </p>
+            <p className="break-words text-ink-soft text-sm">{SESSIONS_WORDS.signedIn(since, address)}</p>
           </div>
           {!here && (
             <ConfirmDialog
-              title={`Sign ${browser} out?`}
-              confirmLabel="Sign it out"
-              keepLabel="Leave it"
-              trigger={<Button aria-label={`Sign out ${browser}, signed in ${since}`}>Sign out</Button>}
+              title={SESSIONS_WORDS.title(browser)}
+              confirmLabel={SESSIONS_WORDS.confirm}
+              keepLabel={SESSIONS_WORDS.keep}
+              trigger={
+                <Button aria-label={SESSIONS_WORDS.signOutLabel(browser, since)}>{SESSIONS_WORDS.signOut}</Button>
+              }
               onConfirm={() => end(id)}
             >
-              Whoever uses it has to sign in again with the password.
+              {SESSIONS_WORDS.text}
             </ConfirmDialog>
           )}
         </li>

@@ -7,10 +7,9 @@ import type { ActionAnswer } from '@/ui/form/use-action-form';
 import { forgetKept } from '@/ui/offline/forget-kept';
 import { waitingStore } from '@/ui/offline/waiting-store';
 import { useToast } from '@/ui/toast';
+import { SIGN_OUT_WORDS } from '../words/forms';
 
 export type SignOutAction = (values: Record<string, never>) => Promise<ActionAnswer<null>>;
-
-const LOST = 'The server could not be reached. You are still signed in: try again.';
 
 /** Everything kept on the device goes first; a page loaded anew leaves nothing in the tab's memory. */
 async function leaveDevice(): Promise<void> {
@@ -27,7 +26,7 @@ export function SignOutButton({ action, look = 'plain' }: { action: SignOutActio
     setPending(true);
     const answer = await action({}).catch(() => null);
     if (answer) await leaveDevice();
-    else toast({ title: LOST, level: 'caution' });
+    else toast({ title: SIGN_OUT_WORDS.lost, level: 'caution' });
     setPending(false);
   }
 
@@ -39,21 +38,20 @@ export function SignOutButton({ action, look = 'plain' }: { action: SignOutActio
 
   return (
     <>
-      <Button look={look} onClick={ask} pending={pending} pendingLabel="Signing out…">
-        Sign out
+      <Button look={look} onClick={ask} pending={pending} pendingLabel={SIGN_OUT_WORDS.signingOut}>
+        {SIGN_OUT_WORDS.signOut}
       </Button>
       {waiting > 0 && (
         <ConfirmDialog
-          title="Sign out and lose what waits?"
-          confirmLabel="Sign out and lose it"
-          keepLabel="Stay signed in"
+          title={SIGN_OUT_WORDS.loseTitle}
+          confirmLabel={SIGN_OUT_WORDS.lose}
+          keepLabel={SIGN_OUT_WORDS.stay}
           danger
           open
           onOpenChange={(open) => !open && setWaiting(0)}
           onConfirm={leave}
         >
-          {waiting === 1 ? 'One press has' : `${waiting} presses have`} not been sent yet. Open a page of the club where
-          there is a signal and it is sent; signing out drops it.
+          {SIGN_OUT_WORDS.waits(waiting)}
         </ConfirmDialog>
       )}
     </>
@@ -63,19 +61,19 @@ export function SignOutButton({ action, look = 'plain' }: { action: SignOutActio
 export function SignOutEverywhereButton({ action }: { action: SignOutAction }) {
   async function leave() {
     const answer = await action({}).catch(() => null);
-    if (!answer) return LOST;
+    if (!answer) return SIGN_OUT_WORDS.lost;
     if (!answer.ok) return answer.error.message;
     await leaveDevice();
   }
   return (
     <ConfirmDialog
-      title="Sign out everywhere?"
-      confirmLabel="Sign out everywhere"
-      keepLabel="Stay signed in"
-      trigger={<Button>Sign out everywhere</Button>}
+      title={SIGN_OUT_WORDS.everywhereTitle}
+      confirmLabel={SIGN_OUT_WORDS.everywhere}
+      keepLabel={SIGN_OUT_WORDS.stay}
+      trigger={<Button>{SIGN_OUT_WORDS.everywhere}</Button>}
       onConfirm={leave}
     >
-      Every browser with your account, this one too, has to sign in again.
+      {SIGN_OUT_WORDS.everywhereText}
     </ConfirmDialog>
   );
 }

@@ -4,8 +4,9 @@ import { type ReactNode, useState } from 'react';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { Notice } from '@/ui/notices';
-import { TextInput } from '@/ui/text-inputs';
 import { signUpSchema } from '../account-schema';
+import { SIGN_UP_WORDS } from '../words/forms';
+import { EmailInput, NameInput, NewPasswordInput } from './account-fields';
 
 interface Props {
   /** Where to find the mail, said after the form is sent. */
@@ -23,10 +24,11 @@ export function SignUpForm({ mailHint, action }: Props) {
   });
   if (sentTo) {
     return (
-      <Notice title="Check your mail" live>
+      <Notice title={SIGN_UP_WORDS.sentTitle} live>
         <p>
-          We wrote to <strong className="break-words">{sentTo}</strong>. Open the link in that mail to finish and sign
-          in.
+          {SIGN_UP_WORDS.sentBeforeEmail}
+          <strong className="break-words">{sentTo}</strong>
+          {SIGN_UP_WORDS.sentAfterEmail}
         </p>
         {mailHint}
       </Notice>
@@ -35,32 +37,10 @@ export function SignUpForm({ mailHint, action }: Props) {
   return (
     <form {...formProps} className="flex flex-col gap-5">
       <FormErrorSummary errors={errors} />
-      <TextInput
-        label="Your name"
-        hint="As the club knows you. Members see it on the board."
-        autoComplete="name"
-        {...register('name')}
-        error={errorOf('name')}
-        required
-      />
-      <TextInput
-        label="E-mail"
-        type="email"
-        autoComplete="username"
-        {...register('email')}
-        error={errorOf('email')}
-        required
-      />
-      <TextInput
-        label="Password"
-        hint="At least 10 characters. A few plain words do well."
-        type="password"
-        autoComplete="new-password"
-        {...register('password')}
-        error={errorOf('password')}
-        required
-      />
-      <SubmitRow label="Make the account" pending={pending} />
+      <NameInput {...register('name')} error={errorOf('name')} />
+      <EmailInput {...register('email')} error={errorOf('email')} />
+      <NewPasswordInput {...register('password')} error={errorOf('password')} />
+      <SubmitRow label={SIGN_UP_WORDS.make} pending={pending} />
     </form>
   );
 }

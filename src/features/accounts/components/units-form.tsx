@@ -5,6 +5,7 @@ import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { useToast } from '@/ui/toast';
 import { type ChangeUnitsInput, changeUnitsSchema } from '../account-schema';
+import { UNITS_WORDS } from '../words/forms';
 
 interface Props {
   units: ChangeUnitsInput['units'];
@@ -12,9 +13,9 @@ interface Props {
 }
 
 const CHOICES = [
-  { value: 'club', label: 'As the club has it' },
-  { value: 'us', label: 'US', note: 'yards, feet, mph, °F, 12-hour clock' },
-  { value: 'metric', label: 'Metric', note: 'metres, km/h, °C, 24-hour clock' },
+  { value: 'club', label: UNITS_WORDS.club },
+  { value: 'us', label: UNITS_WORDS.us, note: UNITS_WORDS.usNote },
+  { value: 'metric', label: UNITS_WORDS.metric, note: UNITS_WORDS.metricNote },
 ];
 
 export function UnitsForm({ units, action }: Props) {
@@ -23,19 +24,19 @@ export function UnitsForm({ units, action }: Props) {
     schema: changeUnitsSchema,
     defaultValues: { units },
     submit: action,
-    onDone: () => toast({ title: 'Units saved' }),
+    onDone: () => toast({ title: UNITS_WORDS.saved }),
   });
   return (
     <form {...formProps} className="flex flex-col gap-5">
       <FormErrorSummary errors={errors} />
       <RadioCards
-        label="Figures and clock"
+        label={UNITS_WORDS.units}
         {...register('units')}
         defaultValue={units}
         choices={CHOICES}
         error={errorOf('units')}
       />
-      <SubmitRow label="Save the units" look="plain" pending={pending} />
+      <SubmitRow label={UNITS_WORDS.save} look="plain" pending={pending} />
     </form>
   );
 }

@@ -1,9 +1,9 @@
 'use client';
 
 import { useRouter } from 'next/navigation';
+import { EmailInput, NameInput, NewPasswordInput } from '@/features/accounts/components/account-fields';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
-import { TextInput } from '@/ui/text-inputs';
 import { joinNewSchema } from '../join-schema';
 
 interface Values {
@@ -33,31 +33,9 @@ export function JoinNewForm({ token, name, email, clubName, action }: Props) {
   return (
     <form {...formProps} className="flex flex-col gap-5">
       <FormErrorSummary errors={errors} />
-      <TextInput
-        label="Your name"
-        hint="As the club knows you. Members see it on the board."
-        autoComplete="name"
-        {...register('name')}
-        error={errorOf('name')}
-        required
-      />
-      <TextInput
-        label="E-mail"
-        hint="Where the invitation went; you sign in with it."
-        type="email"
-        autoComplete="username"
-        value={email}
-        readOnly
-      />
-      <TextInput
-        label="Password"
-        hint="At least 10 characters. A few plain words do well."
-        type="password"
-        autoComplete="new-password"
-        {...register('password')}
-        error={errorOf('password')}
-        required
-      />
+      <NameInput {...register('name')} error={errorOf('name')} />
+      <EmailInput hint="Where the invitation went; you sign in with it." value={email} readOnly required={false} />
+      <NewPasswordInput {...register('password')} error={errorOf('password')} />
       <SubmitRow label={`Make an account and join ${clubName}`} pending={pending} pendingLabel="Joining…" />
     </form>
   );
