@@ -7,6 +7,7 @@ import type { ClubScope } from '@/server/scope';
 import { mayWriteFor } from './harvest-access';
 import type { HarvestInput } from './harvest-schema';
 import { findHunter, type HarvestRow } from './harvests-data';
+import { HARVEST_ERRORS } from './words/sheet';
 
 const AHEAD_MS = 15 * 60_000;
 
@@ -20,9 +21,9 @@ export type SheetValues = Omit<
 /** Whose count the deer goes on: a guest's on the sponsor. */
 async function countedOn(scope: ClubScope, tx: Tx, input: HarvestInput) {
   const hunter = await findHunter(scope, input.hunterId, tx);
-  if (!hunter) throw wrong('hunterId', 'This person is not in the club. Choose another.');
+  if (!hunter) throw wrong('hunterId', HARVEST_ERRORS.notInClub);
   if (!mayWriteFor(scope, hunter)) {
-    throw new AppError('forbidden', `Only ${hunter.name}, who answers for them, or an officer writes their sheet.`);
+    throw new AppError('forbidden', HARVEST_ERRORS.notYours(hunter.name));
   }
   if (hunter.role !== 'guest') {
     return {
@@ -32,9 +33,8 @@ async function countedOn(scope: ClubScope, tx: Tx, input: HarvestInput) {
       hunterName: input.guestName || hunter.name,
     };
   }
-  if (input.guestName !== '') throw wrong('guestName', `${hunter.name} is a guest already: leave this blank.`);
-  if (hunter.sponsorId === null)
-    throw wrong('hunterId', `${hunter.name} has no sponsor. Choose the member who answers.`);
+  if (input.guestName !== '') throw wrong('guestName', HARVEST_ERRORS.guestTwice(hunter.name));
+  if (hunter.sponsorId === null) throw wrong('hunterId', HARVEST_ERRORS.noSponsor(hunter.name));
   return { memberId: hunter.sponsorId, guestId: hunter.id, guestName: hunter.name, hunterName: hunter.name };
 }
 
@@ -50,12 +50,12 @@ export async function checkSheet(
   const { zone } = scope.club;
   const takenAt = localToUtc(input.day, clock, zone);
   if (takenAt > now + AHEAD_MS) {
-    throw wrong(input.day > dayOf(now, zone) ? 'day' : 'clock', 'This is still to come.');
+    throw wrong(input.day > dayOf(now, zone) ? 'day' : 'clock', HARVEST_ERRORS.toCome);
   }
   const { hunterName, ...counted } = await countedOn(scope, tx, input);
   const sameStand = input.standId === (before?.standId ?? null);
   if (input.standId !== null && !sameStand && !(await getStand(scope, input.standId, tx))) {
-    throw wrong('standId', 'This stand is not in use. Choose another, or name the place.');
+    throw wrong('standId', HARVEST_ERRORS.stand);
   }
   // A link from a log: dropped without a word where it does not hold.
   const sit = input.sitId === null ? null : await findLoggable(scope, input.sitId, tx);

@@ -6,32 +6,11 @@ import { toCsv } from '@/lib/csv';
 import { audit } from '@/server/audit';
 import type { ClubScope } from '@/server/scope';
 import { listSheets, type Sheet } from './harvests-data';
-
-const HEADINGS = [
-  'day',
-  'club time',
-  'on the count of',
-  'guest',
-  'sex',
-  'antlered',
-  'age',
-  'age method',
-  'dressed weight (kg)',
-  'live weight (kg)',
-  'points left',
-  'points right',
-  'inside spread (mm)',
-  'main beam left (mm)',
-  'main beam right (mm)',
-  'in milk',
-  'stand',
-  'place',
-  'weapon',
-  'notes',
-];
+import { HARVEST_FILE_HEADINGS, HARVEST_FILE_WORDS } from './words/season';
+import { HARVEST_AUDIT } from './words/sheet';
 
 const number = (value: number | null, decimals = 1) => (value === null ? '' : String(Number(value.toFixed(decimals))));
-const yesNo = (value: boolean | null) => (value === null ? '' : value ? 'yes' : 'no');
+const yesNo = (value: boolean | null) => (value === null ? '' : value ? HARVEST_FILE_WORDS.yes : HARVEST_FILE_WORDS.no);
 
 function cells({ sheet, memberName, standName }: Sheet, zone: string): string[] {
   return [
@@ -75,12 +54,12 @@ export async function exportHarvest(
         action: 'harvest.exported',
         subjectType: 'season',
         subjectId: String(year),
-        summary: `Took ${found.length} harvest sheets of ${season.label} out as a file.`,
+        summary: HARVEST_AUDIT.exported(found.length, season.label),
       },
       now,
     );
     return found;
   });
   const rows = sheets.map((sheet) => cells(sheet, scope.club.zone));
-  return { name: `harvest-${scope.club.slug}-${season.label}.csv`, csv: toCsv([HEADINGS, ...rows]) };
+  return { name: `harvest-${scope.club.slug}-${season.label}.csv`, csv: toCsv([HARVEST_FILE_HEADINGS, ...rows]) };
 }

@@ -4,26 +4,27 @@ import { AGE_CLASSES, AGE_METHODS } from '@/core/harvest/harvest-types';
 import { WEAPONS } from '@/core/types';
 import { inToMm, kgToLb, lbToKg, mmToIn, type Units } from '@/core/units';
 import { type FormReader, LINE_MAX, numberText, readForm } from '@/features/ground/read-form';
-import { DEER_KINDS, deerKind } from './harvest-words';
+import { DEER_KINDS, deerKind } from './deer-kind';
 import type { HarvestRow } from './harvests-data';
+import { HARVEST_FIELD_ERRORS as ERRORS, HARVEST_NUMBERS as NUMBERS } from './words/sheet';
 
-const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const line = z.string().max(LINE_MAX, ERRORS.long(LINE_MAX));
 const orNone = <T extends z.ZodType>(choice: T) => choice.or(z.literal('')).or(z.null().transform(() => '' as const));
 
 /** The sheet as its form holds it: text in the club's units. */
 export const harvestFormSchema = z.object({
   /** One for each form opened, so that a second press cannot count a deer twice. */
-  requestKey: z.guid('Reload the page and try again.'),
+  requestKey: z.guid(ERRORS.reload),
   /** Membership of who took it; of a guest without an account, of the member who answers for them. */
-  hunterId: z.string().min(1, 'Choose who took it.').max(40),
+  hunterId: z.string().min(1, ERRORS.hunter).max(40),
   guestName: line,
   sitId: z.string().max(40),
   day: line,
   clock: line,
   standId: z.string().max(40),
   place: line,
-  weapon: z.enum(WEAPONS, { error: 'Choose a weapon.' }),
-  deer: z.enum(DEER_KINDS, { error: 'Choose what it was.' }),
+  weapon: z.enum(WEAPONS, { error: ERRORS.weapon }),
+  deer: z.enum(DEER_KINDS, { error: ERRORS.deer }),
   age: orNone(z.enum(AGE_CLASSES)),
   ageMethod: orNone(z.enum(AGE_METHODS)),
   dressed: line,
@@ -34,7 +35,7 @@ export const harvestFormSchema = z.object({
   mainBeamLeft: line,
   mainBeamRight: line,
   lactating: orNone(z.enum(['yes', 'no'])),
-  notes: z.string().max(1000, 'Keep the notes to 1000 characters.'),
+  notes: z.string().max(1000, ERRORS.notes(1000)),
 });
 export type HarvestForm = z.input<typeof harvestFormSchema>;
 
@@ -95,11 +96,11 @@ function readAntlers(form: FormReader, typed: z.output<typeof harvestFormSchema>
   const none = typed.deer !== 'antlered_buck';
   const text = (value: string) => (none ? '' : value);
   return {
-    pointsLeft: form.number('pointsLeft', text(typed.pointsLeft), { label: 'Points', ...points }),
-    pointsRight: form.number('pointsRight', text(typed.pointsRight), { label: 'Points', ...points }),
-    insideSpreadMm: readLength(form, 'insideSpread', text(typed.insideSpread), 'Inside spread', units),
-    mainBeamLeftMm: readLength(form, 'mainBeamLeft', text(typed.mainBeamLeft), 'Main beam', units),
-    mainBeamRightMm: readLength(form, 'mainBeamRight', text(typed.mainBeamRight), 'Main beam', units),
+    pointsLeft: form.number('pointsLeft', text(typed.pointsLeft), { label: NUMBERS.points, ...points }),
+    pointsRight: form.number('pointsRight', text(typed.pointsRight), { label: NUMBERS.points, ...points }),
+    insideSpreadMm: readLength(form, 'insideSpread', text(typed.insideSpread), NUMBERS.spread, units),
+    mainBeamLeftMm: readLength(form, 'mainBeamLeft', text(typed.mainBeamLeft), NUMBERS.beam, units),
+    mainBeamRightMm: readLength(form, 'mainBeamRight', text(typed.mainBeamRight), NUMBERS.beam, units),
   };
 }
 
@@ -108,12 +109,12 @@ export function makeHarvestSchema(units: Units) {
     const form = readForm(ctx);
     const day = form.day('day', typed.day);
     const clock = typed.clock.trim();
-    if (!isClock(clock)) form.fail('clock', 'Give a time.');
-    if (typed.age !== '' && typed.ageMethod === '') form.fail('ageMethod', 'Say how the age was estimated.');
-    const dressedKg = readWeight(form, 'dressed', typed.dressed, 'Dressed weight', units);
-    const liveKg = readWeight(form, 'live', typed.live, 'Live weight', units);
+    if (!isClock(clock)) form.fail('clock', ERRORS.time);
+    if (typed.age !== '' && typed.ageMethod === '') form.fail('ageMethod', ERRORS.method);
+    const dressedKg = readWeight(form, 'dressed', typed.dressed, NUMBERS.dressed, units);
+    const liveKg = readWeight(form, 'live', typed.live, NUMBERS.live, units);
     if (dressedKg !== null && liveKg !== null && dressedKg >= liveKg) {
-      form.fail('dressed', 'A dressed deer weighs less than it did alive: are the two swapped?');
+      form.fail('dressed', ERRORS.swapped);
     }
     const antlers = readAntlers(form, typed, units);
     if (form.failed()) return z.NEVER;

@@ -8,10 +8,12 @@ import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { checkSheet, type SheetValues } from './check-sheet';
+import { deerKind } from './deer-kind';
 import { mayChange } from './harvest-access';
 import type { HarvestInput } from './harvest-schema';
-import { DEER_KIND_WORDS, deerKind } from './harvest-words';
 import { findSheet, findSheetByRequest, insertSheet, listCounted, type Sheet, updateSheet } from './harvests-data';
+import { DEER_KIND_WORDS } from './words/deer';
+import { HARVEST_AUDIT, HARVEST_ERRORS, SHEET_WORDS } from './words/sheet';
 
 export interface SavedHarvest {
   id: string;
@@ -58,7 +60,7 @@ export async function addHarvest(scope: ClubScope, input: HarvestInput, now: num
     const before = await findSheetByRequest(scope, input.requestKey, tx);
     if (before) {
       if (before.sheet.writtenBy === scope.member.id) return saved(scope, tx, before.sheet.id, before.sheet);
-      throw new AppError('conflict', 'This form was sent before by somebody else. Reload the page and try again.');
+      throw new AppError('conflict', HARVEST_ERRORS.sentBefore);
     }
     const { values, hunterName } = await checkSheet(scope, tx, input, null, now);
     const id = newId('harvest');
@@ -71,7 +73,7 @@ export async function addHarvest(scope: ClubScope, input: HarvestInput, now: num
       writtenBy: scope.member.id,
       createdAt: now,
     });
-    const summary = `Harvest of ${hunterName}: ${nameOf(values)}.`;
+    const summary = HARVEST_AUDIT.added(hunterName, nameOf(values));
     await note(scope, tx, { verb: 'added', id, summary, detail: values }, now);
     return saved(scope, tx, id, values);
   });
@@ -81,7 +83,7 @@ async function findChangeable(scope: ClubScope, tx: Tx, id: string): Promise<She
   const found = await findSheet(scope, id, tx);
   if (!found) throw notFound();
   if (mayChange(scope, found)) return found;
-  throw new AppError('forbidden', `This deer is on ${found.memberName}'s count: only they or an officer change it.`);
+  throw new AppError('forbidden', HARVEST_ERRORS.othersCount(found.memberName));
 }
 
 /** Changes a sheet; the audit row keeps what each changed field said before. */
@@ -95,9 +97,9 @@ export async function changeHarvest(
     const { sheet } = await findChangeable(scope, tx, at.id);
     const { values, hunterName } = await checkSheet(scope, tx, input, sheet, now);
     if (!(await updateSheet(scope, tx, at, values))) {
-      throw await changedSince(scope, { id: at.id, name: 'this sheet' }, tx);
+      throw await changedSince(scope, { id: at.id, name: SHEET_WORDS.thisSheet }, tx);
     }
-    const summary = `Changed the harvest sheet of ${hunterName}: ${nameOf(values)}.`;
+    const summary = HARVEST_AUDIT.changed(hunterName, nameOf(values));
     await note(scope, tx, { verb: 'changed', id: at.id, summary, detail: changes(sheet, values) }, now);
     return saved(scope, tx, at.id, values);
   });
@@ -112,10 +114,10 @@ export async function removeHarvest(
   return write(async (tx) => {
     const { sheet, memberName } = await findChangeable(scope, tx, at.id);
     if (!(await updateSheet(scope, tx, at, { removedAt: now }))) {
-      throw await changedSince(scope, { id: at.id, name: 'this sheet' }, tx);
+      throw await changedSince(scope, { id: at.id, name: SHEET_WORDS.thisSheet }, tx);
     }
     const name = nameOf(sheet);
-    const summary = `Took out a harvest sheet: ${name}, on the count of ${memberName}.`;
+    const summary = HARVEST_AUDIT.removed(name, memberName);
     await note(scope, tx, { verb: 'removed', id: at.id, summary }, now);
     return { name };
   });

@@ -2,8 +2,10 @@ import { formatWeight, mmToIn, type Units } from '@/core/units';
 import { momentText } from '@/features/clubs/audit-words';
 import { WEAPON_WORDS } from '@/features/ground/words';
 import type { ClubScope } from '@/server/scope';
-import { AGE_WORDS, DEER_KIND_WORDS, deerKind } from './harvest-words';
+import { deerKind } from './deer-kind';
 import type { HarvestRow, Sheet } from './harvests-data';
+import { AGE_WORDS, DEER_KIND_WORDS } from './words/deer';
+import { SHEET_WORDS } from './words/sheet';
 
 export interface SheetLine {
   id: string;
@@ -18,7 +20,7 @@ export interface SheetLine {
 }
 
 function hunterText({ sheet, memberName }: Sheet): string {
-  return sheet.guestName === '' ? memberName : `${sheet.guestName}, guest of ${memberName}`;
+  return sheet.guestName === '' ? memberName : SHEET_WORDS.guestOf(sheet.guestName, memberName);
 }
 
 export const lengthWords = (mm: number, units: Units) =>
@@ -27,8 +29,8 @@ export const lengthWords = (mm: number, units: Units) =>
 function antlersText(row: HarvestRow, units: Units): string {
   const { pointsLeft, pointsRight, insideSpreadMm } = row;
   const parts = [
-    (pointsLeft !== null || pointsRight !== null) && `${pointsLeft ?? '?'} and ${pointsRight ?? '?'} points`,
-    insideSpreadMm !== null && `inside spread ${lengthWords(insideSpreadMm, units)}`,
+    (pointsLeft !== null || pointsRight !== null) && SHEET_WORDS.points(pointsLeft, pointsRight),
+    insideSpreadMm !== null && SHEET_WORDS.spread(lengthWords(insideSpreadMm, units)),
   ].filter((part) => part !== false);
   return parts.join(', ');
 }

@@ -10,9 +10,12 @@ import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { mayChange, mayWriteFor } from './harvest-access';
 import { emptyHarvestForm, type HarvestForm, harvestFormOf } from './harvest-schema';
-import { AGE_METHOD_WORDS } from './harvest-words';
 import { findSheet, listHunters, type Sheet } from './harvests-data';
 import { lengthWords, sheetLine } from './sheet-line';
+import { AGE_METHOD_WORDS } from './words/deer';
+import { HUNTER_CHOICE, SHEET_WORDS } from './words/sheet';
+
+const words = SHEET_WORDS;
 
 export interface HarvestFormChoices {
   hunters: { value: string; label: string }[];
@@ -37,7 +40,7 @@ export async function readHarvestChoices(scope: ClubScope, kept?: Kept): Promise
   return {
     hunters: hunters.map(({ id, name, role }) => ({
       value: id,
-      label: id === me ? `${name} (you)` : role === 'guest' ? `${name} (guest)` : name,
+      label: id === me ? HUNTER_CHOICE.you(name) : role === 'guest' ? HUNTER_CHOICE.guest(name) : name,
     })),
     stands: stands.map(({ id, name }) => ({ value: id, label: name })),
     units: scope.club.units,
@@ -76,7 +79,7 @@ export interface HarvestSheetView {
 async function readChange(scope: ClubScope, { sheet, memberName, standName }: Sheet) {
   const { club } = scope;
   const hunter = { id: sheet.guestId ?? sheet.memberId, name: sheet.guestId === null ? memberName : sheet.guestName };
-  const stand = sheet.standId === null ? null : { id: sheet.standId, name: standName ?? 'A stand' };
+  const stand = sheet.standId === null ? null : { id: sheet.standId, name: standName ?? HUNTER_CHOICE.goneStand };
   return {
     form: harvestFormOf(sheet, formatClock(sheet.takenAt, club.zone), club.units),
     choices: await readHarvestChoices(scope, { hunter, stand }),
@@ -91,27 +94,27 @@ export async function readHarvestSheet(scope: ClubScope, id: string): Promise<Ha
   const { club } = scope;
   const line = sheetLine(scope, found);
   const beam = (mm: number | null) => (mm === null ? '–' : lengthWords(mm, club.units));
-  const method = sheet.ageMethod === null ? '' : ` (${AGE_METHOD_WORDS[sheet.ageMethod].toLowerCase()})`;
+  const age = sheet.ageMethod === null ? line.age : words.ageBy(line.age, AGE_METHOD_WORDS[sheet.ageMethod]);
   const antlers = [
-    { term: 'Antlers', detail: line.antlers || '–' },
-    { term: 'Main beams, left and right', detail: `${beam(sheet.mainBeamLeftMm)}, ${beam(sheet.mainBeamRightMm)}` },
+    { term: words.antlers, detail: line.antlers || '–' },
+    { term: words.beams, detail: `${beam(sheet.mainBeamLeftMm)}, ${beam(sheet.mainBeamRightMm)}` },
   ];
-  const milk = sheet.lactating === null ? 'Not looked at' : sheet.lactating ? 'Yes' : 'No';
+  const milk = sheet.lactating === null ? words.notLookedAt : sheet.lactating ? words.yes : words.no;
   return {
     id,
     version: sheet.version,
     title: line.deer,
     facts: [
-      { term: 'Taken by', detail: line.hunter },
-      { term: 'When', detail: line.whenText },
-      { term: 'Where', detail: line.where || '–' },
-      { term: 'Weapon', detail: line.weapon },
-      { term: 'Age', detail: line.age === '' ? 'Not estimated' : line.age + method },
-      { term: 'Dressed weight', detail: line.weight || '–' },
-      { term: 'Live weight', detail: sheet.liveKg === null ? '–' : formatWeight(sheet.liveKg, club.units) },
+      { term: words.hunter, detail: line.hunter },
+      { term: words.when, detail: line.whenText },
+      { term: words.where, detail: line.where || '–' },
+      { term: words.weapon, detail: line.weapon },
+      { term: words.age, detail: line.age === '' ? words.notEstimated : age },
+      { term: words.dressed, detail: line.weight || '–' },
+      { term: words.live, detail: sheet.liveKg === null ? '–' : formatWeight(sheet.liveKg, club.units) },
       ...(sheet.antlered ? antlers : []),
-      ...(sheet.sex === 'doe' ? [{ term: 'In milk', detail: milk }] : []),
-      { term: 'Notes', detail: sheet.notes || '–' },
+      ...(sheet.sex === 'doe' ? [{ term: words.inMilk, detail: milk }] : []),
+      { term: words.notes, detail: sheet.notes || '–' },
     ],
     change: mayChange(scope, found) ? await readChange(scope, found) : null,
   };

@@ -6,23 +6,26 @@ import type { Units } from '@/core/units';
 import { RadioCards } from '@/ui/choices';
 import { FieldGroup } from '@/ui/field';
 import { NumberInput, Select } from '@/ui/text-inputs';
+import { DEER_KINDS } from '../deer-kind';
 import type { HarvestForm } from '../harvest-schema';
-import { AGE_METHOD_WORDS, AGE_WORDS, DEER_KIND_WORDS, DEER_KINDS } from '../harvest-words';
+import { AGE_METHOD_WORDS, AGE_WORDS, DEER_KIND_WORDS } from '../words/deer';
+import { DEER_FORM_WORDS } from '../words/sheet';
 import { useHarvestFields } from './use-harvest-fields';
 
+const words = DEER_FORM_WORDS;
 const KINDS = DEER_KINDS.map((value) => ({ value, label: DEER_KIND_WORDS[value] }));
 const AGES = [
-  { value: '', label: 'Not estimated' },
+  { value: '', label: words.notEstimated },
   ...AGE_CLASSES.map((value) => ({ value, label: AGE_WORDS[value] })),
 ];
 const METHODS = [
-  { value: '', label: 'Choose how' },
+  { value: '', label: words.chooseMethod },
   ...AGE_METHODS.map((value) => ({ value, label: AGE_METHOD_WORDS[value] })),
 ];
 const MILK = [
-  { value: '', label: 'Not looked at' },
-  { value: 'yes', label: 'In milk' },
-  { value: 'no', label: 'Dry' },
+  { value: '', label: words.notLookedAt },
+  { value: 'yes', label: words.inMilk },
+  { value: 'no', label: words.dry },
 ];
 
 /** What the deer was: kind, age, weights, antlers or milk. */
@@ -34,33 +37,27 @@ export function DeerFields({ units }: { units: Units }) {
   const length = units === 'us' ? 'in' : 'cm';
   return (
     <>
-      <RadioCards label="Deer" across choices={KINDS} {...field('deer')} />
+      <RadioCards label={words.deer} across choices={KINDS} {...field('deer')} />
       <div className="grid gap-4 sm:grid-cols-2">
-        <Select label="Estimated age" options={AGES} {...field('age')} />
-        {age !== '' && <Select label="Estimated by" options={METHODS} {...field('ageMethod')} />}
+        <Select label={words.age} options={AGES} {...field('age')} />
+        {age !== '' && <Select label={words.method} options={METHODS} {...field('ageMethod')} />}
       </div>
       <div className="grid gap-4 sm:grid-cols-2">
-        <NumberInput
-          label="Dressed weight"
-          optional
-          hint="Field dressed. Never the live weight."
-          unit={weight}
-          {...field('dressed')}
-        />
-        <NumberInput label="Live weight" optional hint="Only if weighed whole." unit={weight} {...field('live')} />
+        <NumberInput label={words.dressed} optional hint={words.dressedHint} unit={weight} {...field('dressed')} />
+        <NumberInput label={words.live} optional hint={words.liveHint} unit={weight} {...field('live')} />
       </div>
       {deer === 'antlered_buck' && (
-        <FieldGroup label="Antlers">
+        <FieldGroup label={words.antlers}>
           <div className="grid grid-cols-2 gap-4">
-            <NumberInput label="Points, left" optional step="1" {...field('pointsLeft')} />
-            <NumberInput label="Points, right" optional step="1" {...field('pointsRight')} />
-            <NumberInput label="Main beam, left" optional unit={length} {...field('mainBeamLeft')} />
-            <NumberInput label="Main beam, right" optional unit={length} {...field('mainBeamRight')} />
-            <NumberInput label="Inside spread" optional unit={length} {...field('insideSpread')} />
+            <NumberInput label={words.pointsLeft} optional step="1" {...field('pointsLeft')} />
+            <NumberInput label={words.pointsRight} optional step="1" {...field('pointsRight')} />
+            <NumberInput label={words.mainBeamLeft} optional unit={length} {...field('mainBeamLeft')} />
+            <NumberInput label={words.mainBeamRight} optional unit={length} {...field('mainBeamRight')} />
+            <NumberInput label={words.insideSpread} optional unit={length} {...field('insideSpread')} />
           </div>
         </FieldGroup>
       )}
-      {deer === 'doe' && <RadioCards label="Milk" across choices={MILK} {...field('lactating')} />}
+      {deer === 'doe' && <RadioCards label={words.milk} across choices={MILK} {...field('lactating')} />}
     </>
   );
 }

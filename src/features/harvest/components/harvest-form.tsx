@@ -13,8 +13,11 @@ import { useToast } from '@/ui/toast';
 import { type HarvestForm, makeHarvestSchema } from '../harvest-schema';
 import type { SavedHarvest } from '../save-harvest';
 import type { HarvestFormChoices } from '../sheet-reads';
+import { HARVEST_FORM_WORDS } from '../words/sheet';
 import { DeerFields } from './deer-fields';
 import { TakenFields } from './taken-fields';
+
+const words = HARVEST_FORM_WORDS;
 
 export interface HarvestFormProps {
   club: string;
@@ -37,8 +40,8 @@ export function HarvestFormView({ club, values, choices, at, add, change }: Harv
     submit: (typed) => (at ? change(club, { ...typed, ...at }) : add(club, typed)),
     onDone: (saved) => {
       draft.drop();
-      toast({ title: 'Harvest sheet saved', text: saved.name });
-      if (saved.met.length > 0) toast({ title: 'A quota is met', text: saved.met.join(' '), level: 'caution' });
+      toast({ title: words.saved, text: saved.name });
+      if (saved.met.length > 0) toast({ title: words.met, text: saved.met.join(' '), level: 'caution' });
       router.push(back);
     },
   });
@@ -48,18 +51,15 @@ export function HarvestFormView({ club, values, choices, at, add, change }: Harv
       <form {...formProps} className="flex max-w-2xl flex-col gap-5">
         <FormErrorSummary errors={errors} />
         {draft.brought && (
-          <Notice
-            title="Your unsaved sheet is back"
-            actions={<Button onClick={draft.startAfresh}>Start afresh</Button>}
-          >
-            It was typed in this tab before and not saved.
+          <Notice title={words.backTitle} actions={<Button onClick={draft.startAfresh}>{words.startAfresh}</Button>}>
+            {words.backText}
           </Notice>
         )}
         <DeerFields units={choices.units} />
         <TakenFields choices={choices} />
-        <SubmitRow label="Save sheet" pending={pending} pendingLabel="Saving…">
+        <SubmitRow label={words.save} pending={pending} pendingLabel={words.saving}>
           <ButtonLink href={back} look="quiet">
-            Back without saving
+            {words.back}
           </ButtonLink>
         </SubmitRow>
       </form>

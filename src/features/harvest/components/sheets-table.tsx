@@ -1,18 +1,21 @@
 import { TextLink } from '@/ui/button';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { SheetLine } from '../sheet-line';
+import { SHEETS_TABLE_WORDS } from '../words/season';
+
+const words = SHEETS_TABLE_WORDS;
 
 export function SheetsTable({ club, sheets }: { club: string; sheets: SheetLine[] }) {
   return (
-    <Table caption="Harvest sheets of the season, the latest first" captionHidden>
+    <Table caption={words.caption} captionHidden>
       <THead>
-        <Th>Deer</Th>
-        <Th>Taken by</Th>
-        <Th>When</Th>
-        <Th>Where</Th>
-        <Th>Age</Th>
-        <Th align="right">Dressed</Th>
-        <Th>Antlers</Th>
+        <Th>{words.deer}</Th>
+        <Th>{words.hunter}</Th>
+        <Th>{words.when}</Th>
+        <Th>{words.where}</Th>
+        <Th>{words.age}</Th>
+        <Th align="right">{words.dressed}</Th>
+        <Th>{words.antlers}</Th>
       </THead>
       <TBody>
         {sheets.map((sheet) => (
@@ -23,14 +26,14 @@ export function SheetsTable({ club, sheets }: { club: string; sheets: SheetLine[
                 <span className="sr-only">{`, ${sheet.whenText}`}</span>
               </TextLink>
             </RowHead>
-            <Td label="Taken by">{sheet.hunter}</Td>
-            <Td label="When">{sheet.whenText}</Td>
-            <Td label="Where">{sheet.where || '–'}</Td>
-            <Td label="Age">{sheet.age || '–'}</Td>
-            <Td label="Dressed" align="right" className="max-sm:text-left">
+            <Td label={words.hunter}>{sheet.hunter}</Td>
+            <Td label={words.when}>{sheet.whenText}</Td>
+            <Td label={words.where}>{sheet.where || '–'}</Td>
+            <Td label={words.age}>{sheet.age || '–'}</Td>
+            <Td label={words.dressed} align="right" className="max-sm:text-left">
               {sheet.weight || '–'}
             </Td>
-            <Td label="Antlers">{sheet.antlers || '–'}</Td>
+            <Td label={words.antlers}>{sheet.antlers || '–'}</Td>
           </Tr>
         ))}
       </TBody>

@@ -4,8 +4,10 @@ import { WEAPONS } from '@/core/types';
 import { WEAPON_WORDS } from '@/features/ground/words';
 import { DateInput, Select, Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
 import type { HarvestFormChoices } from '../sheet-reads';
+import { TAKEN_FORM_WORDS } from '../words/sheet';
 import { useHarvestFields } from './use-harvest-fields';
 
+const words = TAKEN_FORM_WORDS;
 const WEAPON_OPTIONS = WEAPONS.map((value) => ({ value, label: WEAPON_WORDS[value] }));
 
 /** Who took it, when, where and with what. */
@@ -13,33 +15,22 @@ export function TakenFields({ choices }: { choices: HarvestFormChoices }) {
   const field = useHarvestFields();
   return (
     <>
-      <Select
-        label="Taken by"
-        hint="A guest's deer counts on the member who answers for them."
-        options={choices.hunters}
-        {...field('hunterId')}
-      />
-      <TextInput
-        label="Guest without an account"
-        hint="The guest's name, if it was their deer. It counts on the member above."
-        optional
-        autoComplete="off"
-        {...field('guestName')}
-      />
+      <Select label={words.hunter} hint={words.hunterHint} options={choices.hunters} {...field('hunterId')} />
+      <TextInput label={words.guest} hint={words.guestHint} optional autoComplete="off" {...field('guestName')} />
       <div className="grid grid-cols-2 gap-4">
-        <DateInput label="Day" {...field('day')} />
-        <TimeInput label="Time" {...field('clock')} />
+        <DateInput label={words.day} {...field('day')} />
+        <TimeInput label={words.time} {...field('clock')} />
       </div>
-      <Select label="Weapon" options={WEAPON_OPTIONS} {...field('weapon')} />
+      <Select label={words.weapon} options={WEAPON_OPTIONS} {...field('weapon')} />
       <div className="grid gap-4 sm:grid-cols-2">
         <Select
-          label="Stand"
-          options={[{ value: '', label: 'Not from a stand' }, ...choices.stands]}
+          label={words.stand}
+          options={[{ value: '', label: words.noStand }, ...choices.stands]}
           {...field('standId')}
         />
-        <TextInput label="Place in words" optional autoComplete="off" {...field('place')} />
+        <TextInput label={words.place} optional autoComplete="off" {...field('place')} />
       </div>
-      <Textarea label="Notes" optional rows={3} {...field('notes')} />
+      <Textarea label={words.notes} optional rows={3} {...field('notes')} />
     </>
   );
 }

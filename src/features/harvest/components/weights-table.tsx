@@ -2,7 +2,10 @@ import type { HarvestSummary } from '@/core/harvest/summary';
 import { figureText, intervalText } from '@/core/indices';
 import { formatWeight, type Units } from '@/core/units';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
-import { AGE_WORDS, SEX_WORDS } from '../harvest-words';
+import { AGE_WORDS, SEX_WORDS } from '../words/deer';
+import { WEIGHTS_TABLE_WORDS } from '../words/season';
+
+const words = WEIGHTS_TABLE_WORDS;
 
 /** Deer by sex and age with mean dressed weights, and the share of does in milk. */
 export function WeightsTable({ summary, units }: { summary: HarvestSummary; units: Units }) {
@@ -10,26 +13,26 @@ export function WeightsTable({ summary, units }: { summary: HarvestSummary; unit
   const share = intervalText(lactation.share, 'percent');
   return (
     <>
-      <Table caption="Deer by sex and age" captionHidden>
+      <Table caption={words.caption} captionHidden>
         <THead>
-          <Th>Sex</Th>
-          <Th>Age</Th>
-          <Th align="right">Deer</Th>
-          <Th align="right">Mean dressed weight</Th>
-          <Th align="right">Weighed dressed</Th>
+          <Th>{words.sex}</Th>
+          <Th>{words.age}</Th>
+          <Th align="right">{words.deer}</Th>
+          <Th align="right">{words.dressed}</Th>
+          <Th align="right">{words.weighed}</Th>
         </THead>
         <TBody>
           {groups.map((group) => (
             <Tr key={`${group.sex} ${group.age}`}>
               <RowHead>{SEX_WORDS[group.sex]}</RowHead>
-              <Td label="Age">{group.age === null ? 'Not estimated' : AGE_WORDS[group.age]}</Td>
-              <Td label="Deer" align="right" className="max-sm:text-left">
+              <Td label={words.age}>{group.age === null ? words.notEstimated : AGE_WORDS[group.age]}</Td>
+              <Td label={words.deer} align="right" className="max-sm:text-left">
                 {group.count}
               </Td>
-              <Td label="Mean dressed weight" align="right" className="max-sm:text-left">
+              <Td label={words.dressed} align="right" className="max-sm:text-left">
                 {group.dressedKg === null ? '–' : formatWeight(group.dressedKg, units)}
               </Td>
-              <Td label="Weighed dressed" align="right" className="max-sm:text-left">
+              <Td label={words.weighed} align="right" className="max-sm:text-left">
                 {group.weighed}
               </Td>
             </Tr>
@@ -38,8 +41,8 @@ export function WeightsTable({ summary, units }: { summary: HarvestSummary; unit
       </Table>
       <p className="mt-3 text-ink-soft">
         {lactation.looked === 0
-          ? 'No grown doe was looked at for milk.'
-          : `In milk: ${lactation.yes} of ${lactation.looked} grown does looked at, ${figureText(lactation.share, 'percent')} (95 % interval ${share}).`}
+          ? words.noMilk
+          : words.milk(lactation.yes, lactation.looked, figureText(lactation.share, 'percent'), share)}
       </p>
     </>
   );

@@ -3,6 +3,7 @@ import { MemberCounts, QuotaTable } from '@/features/harvest/components/quota-ta
 import { SheetsTable } from '@/features/harvest/components/sheets-table';
 import { WeightsTable } from '@/features/harvest/components/weights-table';
 import { readHarvest } from '@/features/harvest/reads';
+import { HARVEST_PAGE_WORDS } from '@/features/harvest/words/season';
 import { readSightingsAsk } from '@/features/logs/sightings-schema';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
@@ -11,7 +12,9 @@ import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { Select } from '@/ui/text-inputs';
 
-export const metadata = { title: 'Harvest' };
+const words = HARVEST_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('harvest.read', async ({ scope, search }) => {
   const { slug, name, rules, units } = scope.club;
@@ -21,20 +24,20 @@ export default clubPage('harvest.read', async ({ scope, search }) => {
   const state = rules.stateHarvestRule;
   const write = scope.can('harvest.write') && (
     <ButtonLink look="primary" href={`${page}/new`}>
-      Write a harvest sheet
+      {words.write}
     </ButtonLink>
   );
   return (
     <>
       <PageTitle
         over={name}
-        title={`Harvest ${year.label}`}
+        title={words.titleOf(year.label)}
         actions={
           <>
             {write}
             {sheets.length > 0 && (
               <ButtonLink href={`/api/clubs/${slug}/harvest?year=${year.year}`} prefetch={false}>
-                Sheets as CSV
+                {words.csv}
               </ButtonLink>
             )}
           </>
@@ -42,56 +45,56 @@ export default clubPage('harvest.read', async ({ scope, search }) => {
       />
       <form method="get" action={page} className="mb-6 flex flex-wrap items-end gap-4">
         <Select
-          label="Season"
+          label={words.season}
           name="year"
           defaultValue={String(year.year)}
           options={years.map((one) => ({ value: String(one.year), label: one.label }))}
         />
-        <Button type="submit">Show</Button>
+        <Button type="submit">{words.show}</Button>
       </form>
-      <Section title="Quotas" note="The club's own. They caution before a booking and refuse nothing.">
+      <Section title={words.quotas} note={words.quotasNote}>
         {quotas.length === 0 ? (
           <EmptyState
-            title="The club has set no quota"
+            title={words.noQuota}
             action={
               scope.can('rules.write') && (
-                <ButtonLink href={`/clubs/${slug}/club/rules/edit`}>Set quotas in the rules</ButtonLink>
+                <ButtonLink href={`/clubs/${slug}/club/rules/edit`}>{words.setQuotas}</ButtonLink>
               )
             }
           >
-            A quota may hold for the club, for each member, or for the guests of a member.
+            {words.noQuotaText}
           </EmptyState>
         ) : (
           <QuotaTable quotas={quotas} />
         )}
-        <Notice title="State law decides" className="mt-4">
+        <Notice title={words.law} className="mt-4">
           {state === null ? (
-            <p>The club has not written the state's rules for deer down. Look them up before you hunt.</p>
+            <p>{words.noLaw}</p>
           ) : (
             <>
               <p className="whitespace-pre-line">{state.text}</p>
               <p className="mt-1 text-ink-soft text-sm">
-                As the club wrote it down from {state.source} on {formatDay(state.statedOn, true)}.
+                {words.lawSource(state.source, formatDay(state.statedOn, true))}
               </p>
             </>
           )}
         </Notice>
       </Section>
       {sheets.length === 0 ? (
-        <Section title="Sheets">
-          <EmptyState title="No deer is written down for this season" action={write}>
-            Each deer gets a sheet: sex, age, dressed weight, antlers or milk.
+        <Section title={words.sheets}>
+          <EmptyState title={words.noSheet} action={write}>
+            {words.noSheetText}
           </EmptyState>
         </Section>
       ) : (
         <>
-          <Section title="By member">
+          <Section title={words.byMember}>
             <MemberCounts members={members} />
           </Section>
-          <Section title="By sex and age" note="Dressed weights only: live weights are never mixed in.">
+          <Section title={words.bySexAndAge} note={words.bySexAndAgeNote}>
             <WeightsTable summary={summary} units={units} />
           </Section>
-          <Section title="Sheets">
+          <Section title={words.sheets}>
             <SheetsTable club={slug} sheets={sheets} />
           </Section>
         </>

@@ -1,11 +1,14 @@
 import { RemoveButton } from '@/features/ground/components/remove-button';
 import { HarvestFormView } from '@/features/harvest/components/harvest-form';
 import { readHarvestSheet } from '@/features/harvest/sheet-reads';
+import { SHEET_WORDS } from '@/features/harvest/words/sheet';
 import { clubPage } from '@/server/doors';
 import { DefinitionList, PageTitle, Section } from '@/ui/page-parts';
 import { addHarvestAction, changeHarvestAction, removeHarvestAction } from '../actions';
 
-export const metadata = { title: 'Harvest sheet' };
+const words = SHEET_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('harvest.read', async ({ scope, params }) => {
   const { slug, name } = scope.club;
@@ -20,11 +23,11 @@ export default clubPage('harvest.read', async ({ scope, params }) => {
             <RemoveButton
               club={slug}
               at={{ id, version }}
-              name="this sheet"
+              name={words.thisSheet}
               remove={removeHarvestAction}
               to={`/clubs/${slug}/season/harvest`}
             >
-              <p>The deer no longer counts toward any quota. The audit log keeps that it was written.</p>
+              <p>{words.removeText}</p>
             </RemoveButton>
           )
         }
@@ -37,7 +40,7 @@ export default clubPage('harvest.read', async ({ scope, params }) => {
         }))}
       />
       {change && (
-        <Section title="Change the sheet" className="mt-10">
+        <Section title={words.change} className="mt-10">
           <HarvestFormView
             key={version}
             club={slug}

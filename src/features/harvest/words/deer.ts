@@ -1,4 +1,5 @@
 import type { AgeClass, AgeMethod, Sex } from '@/core/harvest/harvest-types';
+import type { DeerKind } from '../deer-kind';
 
 export const AGE_WORDS: Record<AgeClass, string> = {
   fawn: 'Fawn',
@@ -15,9 +16,6 @@ export const AGE_METHOD_WORDS: Record<AgeMethod, string> = {
   body: 'Looks of the body',
 };
 
-export const DEER_KINDS = ['antlered_buck', 'other_buck', 'doe'] as const;
-export type DeerKind = (typeof DEER_KINDS)[number];
-
 export const DEER_KIND_WORDS: Record<DeerKind, string> = {
   antlered_buck: 'Antlered buck',
   other_buck: 'Buck without antlers',
@@ -25,8 +23,3 @@ export const DEER_KIND_WORDS: Record<DeerKind, string> = {
 };
 
 export const SEX_WORDS: Record<Sex, string> = { buck: 'Bucks', doe: 'Does' };
-
-export function deerKind(deer: { sex: Sex; antlered: boolean }): DeerKind {
-  if (deer.sex === 'doe') return 'doe';
-  return deer.antlered ? 'antlered_buck' : 'other_buck';
-}
