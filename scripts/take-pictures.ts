@@ -2,6 +2,7 @@ import { mkdirSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join, resolve } from 'node:path';
 import { parseArgs } from 'node:util';
+import { LIGHT_COOKIE } from '@/ui/light';
 import { DESKTOP, launchBrowser, newVisitor, PHONE } from '../tests/helpers/browser';
 import { fillerOf, listPages } from '../tests/helpers/list-pages';
 import { serveApp } from '../tests/helpers/serve-app';
@@ -9,7 +10,7 @@ import { signInDemo } from '../tests/helpers/sign-in-demo';
 
 /**
  * A picture of every page of the demo club on a phone and a desk in each light, from the built app.
- * npm run pictures -- [--into FOLDER] [--only TEXT] [--as nora] [--lights day,dark,dim] [--url http://127.0.0.1:3000 --database file:...]
+ * npm run pictures -- [--into FOLDER] [--only TEXT] [--as nora|nobody] [--lights day,dark,dim] [--url http://127.0.0.1:3000 --database file:...]
  */
 const { values } = parseArgs({
   options: {
@@ -33,10 +34,13 @@ try {
   for (const size of [PHONE, DESKTOP]) {
     const { page, context } = await newVisitor(browser, url, size);
     await page.emulateMedia({ reducedMotion: 'reduce' });
-    await signInDemo(page, values.as);
+    // A chosen light, so that the sun does not change it while a picture is taken.
+    await context.addCookies([{ name: LIGHT_COOKIE, value: 'day', url }]);
+    if (values.as !== 'nobody') await signInDemo(page, values.as);
     for (const path of listPages().filter((one) => one.includes(values.only))) {
       const address = addressOf(path);
       if (!address || (await page.goto(address))?.status() !== 200) continue;
+      await page.waitForLoadState('networkidle');
       await page.evaluate(() => document.fonts.ready);
       for (const light of values.lights.split(',')) {
         await page.evaluate((name) => {
