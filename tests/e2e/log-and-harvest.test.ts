@@ -137,8 +137,7 @@ describe('the log of a sit, on a phone', () => {
 
   it('shows the sit among the season’s figures', async () => {
     const { page } = member;
-    await page.goto(`${CLUB}/season`);
-    await page.waitForURL(/\/season\/sightings/);
+    await page.goto(`${CLUB}/season/sightings`);
     await page.getByRole('heading', { name: 'By stand' }).waitFor();
     await page.getByText('Behind the seat').first().waitFor();
     await looksRight(page, 'sightings-phone');

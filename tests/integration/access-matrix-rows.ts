@@ -42,6 +42,7 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   'api/clubs/[club]/map/route.ts': { GET: 'features.read' },
   'api/clubs/[club]/photos/[photo]/route.ts': { GET: 'stands.read' },
   'api/clubs/[club]/photos/route.ts': { POST: 'log.write' },
+  'api/clubs/[club]/report/route.ts': { GET: 'report.read' },
   'api/clubs/[club]/sightings/route.ts': { GET: 'log.read' },
   'api/clubs/[club]/sits/[stand]/route.ts': { GET: 'sits.read' },
   'api/clubs/[club]/sits/route.ts': { GET: 'sits.read' },
@@ -158,7 +159,7 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   },
   'clubs/[club]/season/harvest/new/page.tsx': { default: 'harvest.write' },
   'clubs/[club]/season/harvest/page.tsx': { default: 'harvest.read' },
-  'clubs/[club]/season/page.tsx': { default: 'log.read' },
+  'clubs/[club]/season/page.tsx': { default: 'report.read' },
   'clubs/[club]/season/coverage/page.tsx': { default: 'features.read' },
   'clubs/[club]/season/learning/actions.ts': {
     applyAdjustmentAction: 'rules.write',
@@ -172,6 +173,8 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
     reopenFindingAction: 'features.write',
   },
   'clubs/[club]/season/setup/page.tsx': { default: 'features.read' },
+  'clubs/[club]/season/setup/settings/actions.ts': { saveSetupSettingsAction: 'features.write' },
+  'clubs/[club]/season/setup/settings/page.tsx': { default: 'features.write' },
   'clubs/[club]/season/sightings/page.tsx': { default: 'log.read' },
   'clubs/[club]/sit/actions.ts': {
     bookSitAction: 'sits.book',

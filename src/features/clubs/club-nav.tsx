@@ -31,7 +31,7 @@ const SCREENS: Screen[] = [
   { path: 'board', label: 'Board', icon: <ClipboardList />, needs: 'board.read' },
   { path: 'log', label: 'Log', icon: <NotebookPen />, needs: 'log.write' },
   { path: 'my-sits', label: 'My sits', icon: <CalendarCheck />, needs: 'sits.book' },
-  { path: 'season', label: 'Season', icon: <ChartNoAxesColumn />, needs: 'log.read' },
+  { path: 'season', label: 'Season', icon: <ChartNoAxesColumn />, needs: 'report.read' },
   { path: 'draws', label: 'Draws', icon: <Dices />, needs: 'draws.enter' },
   { path: 'chores', label: 'Chores', icon: <Hammer />, needs: 'chores.read' },
   { path: 'stands', label: 'Stands', icon: <TreePine />, needs: 'stands.read' },

@@ -1,6 +1,6 @@
 export const SEASON_WORDS = {
-  title: 'Season',
   tabs: 'About the season',
+  report: 'Report',
   sightings: 'Sightings',
   harvest: 'Harvest',
   setup: 'Set-up check',

@@ -6,6 +6,7 @@ import { findScope } from '@/server/scope';
 import { currentUser } from '@/server/session';
 
 const PAGES: { path: string; label: string; needs: Permission }[] = [
+  { path: '', label: SEASON_WORDS.report, needs: 'report.read' },
   { path: '/sightings', label: SEASON_WORDS.sightings, needs: 'log.read' },
   { path: '/harvest', label: SEASON_WORDS.harvest, needs: 'harvest.read' },
   { path: '/setup', label: SEASON_WORDS.setup, needs: 'features.read' },

@@ -1,0 +1,147 @@
+import { figureText, intervalText } from '@/core/indices';
+import type { BumpCount } from '@/core/report/bumps';
+import { RangeChart } from '@/ui/charts/range-chart';
+import { Section } from '@/ui/page-parts';
+import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import type { BumpsPart } from '../parts/bumps';
+import { BUMPS_WORDS as words } from '../words/bumps';
+import { PART_TITLES } from '../words/page';
+import { CsvLink } from './csv-link';
+import type { PartProps } from './part-props';
+
+export function BumpsSection({ club, report }: PartProps) {
+  const { bumps } = report;
+  if (bumps.all.sits === 0) {
+    return (
+      <Section id="bumps" title={PART_TITLES.bumps} note={words.note}>
+        <p className="text-ink-soft">{words.empty}</p>
+      </Section>
+    );
+  }
+  return (
+    <Section
+      id="bumps"
+      title={PART_TITLES.bumps}
+      note={`${words.note} ${words.few}`}
+      actions={<CsvLink club={club} report={report} part="bumps" title={PART_TITLES.bumps} />}
+    >
+      <RangeChart
+        title={words.chart}
+        unit={words.unit}
+        rows={bumps.rows.map(({ standId, name, count }) => ({
+          key: standId,
+          label: name,
+          range: count.share.known ? count.share : null,
+          text: figureText(count.share, 'percent'),
+          note: words.sits(count.sits),
+        }))}
+        className="mb-6"
+      />
+      <StandsTable bumps={bumps} />
+      <div className="mt-6 grid gap-x-10 gap-y-6 lg:grid-cols-2">
+        {bumps.winds.length > 0 && (
+          <CountTable
+            caption={words.byWind}
+            head={words.wind}
+            rows={bumps.winds.map(({ wind, count }) => ({ name: wind, count }))}
+          />
+        )}
+        {bumps.inArc.sits + bumps.outOfArc.sits > 0 && (
+          <CountTable
+            caption={words.byArc}
+            head={words.arc}
+            rows={[
+              { name: words.inArc, count: bumps.inArc },
+              { name: words.outOfArc, count: bumps.outOfArc },
+            ]}
+          />
+        )}
+      </div>
+      {bumps.noWind > 0 && <p className="mt-3 max-w-prose text-ink-soft text-sm">{words.noWind(bumps.noWind)}</p>}
+    </Section>
+  );
+}
+
+/** The cells after the name: how many, and their share with its interval. */
+function CountCells({ count }: { count: BumpCount }) {
+  return (
+    <>
+      <Td label={words.logged} align="right">
+        {count.sits}
+      </Td>
+      <Td label={words.bumped} align="right">
+        {count.bumped}
+      </Td>
+      <Td label={words.clean} align="right">
+        {count.sits - count.bumped}
+      </Td>
+      <Td label={words.share} align="right">
+        {figureText(count.share, 'percent')}
+      </Td>
+      <Td label={words.interval} align="right">
+        {intervalText(count.share, 'percent')}
+      </Td>
+    </>
+  );
+}
+
+function CountHeads({ head }: { head: string }) {
+  return (
+    <>
+      <Th>{head}</Th>
+      <Th align="right">{words.logged}</Th>
+      <Th align="right">{words.bumped}</Th>
+      <Th align="right">{words.clean}</Th>
+      <Th align="right">{words.share}</Th>
+      <Th align="right">{words.interval}</Th>
+    </>
+  );
+}
+
+function CountTable({
+  caption,
+  head,
+  rows,
+}: {
+  caption: string;
+  head: string;
+  rows: { name: string; count: BumpCount }[];
+}) {
+  return (
+    <Table caption={caption}>
+      <THead>
+        <CountHeads head={head} />
+      </THead>
+      <TBody>
+        {rows.map(({ name, count }) => (
+          <Tr key={name}>
+            <RowHead>{name}</RowHead>
+            <CountCells count={count} />
+          </Tr>
+        ))}
+      </TBody>
+    </Table>
+  );
+}
+
+function StandsTable({ bumps }: { bumps: BumpsPart }) {
+  return (
+    <Table caption={words.byStand}>
+      <THead>
+        <CountHeads head={words.stand} />
+        <Th>{words.winds}</Th>
+      </THead>
+      <TBody>
+        {bumps.rows.map(({ standId, name, count, winds }) => (
+          <Tr key={standId}>
+            <RowHead>{name}</RowHead>
+            <CountCells count={count} />
+            <Td label={words.winds} className="text-sm">
+              {winds.map(({ wind, count: own }) => words.windLine(wind, own.bumped, own.sits)).join(', ')}
+            </Td>
+          </Tr>
+        ))}
+      </TBody>
+    </Table>
+  );
+}

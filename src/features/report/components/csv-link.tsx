@@ -1,0 +1,20 @@
+import { ButtonLink } from '@/ui/button';
+import { reportAddress } from '../report-address';
+import type { ReportPart } from '../report-schema';
+import { REPORT_PAGE_WORDS as words } from '../words/page';
+import type { PartProps } from './part-props';
+
+/** Takes one part out as a file. On paper there is nothing to press. */
+export function CsvLink({ club, report, part, title }: PartProps & { part: ReportPart; title: string }) {
+  return (
+    <span className="print:hidden">
+      <ButtonLink
+        href={reportAddress(`/api/clubs/${club}/report`, report.period, { part })}
+        prefetch={false}
+        aria-label={words.csvOf(title)}
+      >
+        {words.csv}
+      </ButtonLink>
+    </span>
+  );
+}

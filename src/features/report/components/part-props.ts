@@ -1,0 +1,7 @@
+import type { Report } from '../reads';
+
+export interface PartProps {
+  /** Slug, for addresses. */
+  club: string;
+  report: Report;
+}
