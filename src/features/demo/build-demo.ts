@@ -57,7 +57,7 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
     outings: buildOutings(club, ground, sits, now),
     safetyContacts: buildContacts(club),
     sitLogs,
-    sitPredictions: buildPredictions({ today, dice: makeDice(`predictions ${today}`) }, sitLogs, sits),
+    sitPredictions: buildPredictions({ today, dice: makeDice(`predictions ${today}`) }, ground, sitLogs, sits),
     sitLogVersions,
     harvests,
     visits: buildVisits(day, club, ground),
