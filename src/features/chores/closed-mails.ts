@@ -5,6 +5,7 @@ import { composeMail } from '@/features/mail/compose';
 import { queueMail } from '@/server/outbox';
 import type { ClubScope } from '@/server/scope';
 import { listBookedAt } from './inspections-data';
+import { STAND_CLOSED_MAIL } from './words/inspections';
 
 /** Tells everyone booked at a stand that an inspection has closed it; gives how many sits. */
 export async function mailClosed(
@@ -13,6 +14,7 @@ export async function mailClosed(
   closed: { stand: { id: string; name: string }; reason: string; closureId: string; day: string },
   now: number,
 ): Promise<number> {
+  const words = STAND_CLOSED_MAIL;
   const { club } = scope;
   const { stand, reason, closureId, day } = closed;
   const booked = await listBookedAt(scope, stand.id, { day, now }, tx);
@@ -20,22 +22,19 @@ export async function mailClosed(
     const when = dayAndWindow(sit.day, sit.windows, true);
     const { text, html } = composeMail({
       clubName: club.name,
-      paragraphs: [
-        `Hello ${sit.memberName},`,
-        `${stand.name} was closed by an inspection, and you are booked there. Do not climb or sit there until a steward opens it again.`,
-      ],
+      paragraphs: [words.hello(sit.memberName), words.opening(stand.name)],
       facts: [
-        { label: 'Stand', value: stand.name },
-        { label: 'Your sit', value: when },
-        { label: 'Why', value: reason },
+        { label: words.stand, value: stand.name },
+        { label: words.sit, value: when },
+        { label: words.why, value: reason },
       ],
-      button: { label: 'Move or cancel the sit', url: `${env.appUrl}/clubs/${club.slug}/my-sits` },
-      footer: 'You get this because the sit is yours.',
+      button: { label: words.button, url: `${env.appUrl}/clubs/${club.slug}/my-sits` },
+      footer: words.footer,
     });
     const kind = 'stand.closed';
     const dedupeKey = `${kind}:${closureId}:${sit.id}`;
     const to = { email: sit.memberEmail, name: sit.memberName };
-    const subject = `Stand closed: ${stand.name}, ${dayAndWindow(sit.day, sit.windows)}`;
+    const subject = words.subject(stand.name, dayAndWindow(sit.day, sit.windows));
     await queueMail(tx, { clubId: club.id, kind, dedupeKey, to, subject, text, html }, now);
   }
   return booked.length;

@@ -7,6 +7,7 @@ import type { ClubScope } from '@/server/scope';
 import type { FinishChoreInput } from './chore-schema';
 import { findChore, updateChore } from './chores-data';
 import { noteUpkeep } from './note-upkeep';
+import { CHORE_AUDIT, CHORE_ERRORS } from './words/chores';
 
 /** Work presses on the deer for some days; an older visit weighs nothing. */
 const VISIT_DAYS = 21;
@@ -22,7 +23,7 @@ export async function finishChore(
 ): Promise<{ id: string; title: string }> {
   const today = dayOf(now, scope.club.zone);
   if (input.doneOn > today || input.doneOn < addDays(today, -366)) {
-    const message = input.doneOn > today ? 'This day is still to come.' : 'Choose a day within the last year.';
+    const message = input.doneOn > today ? CHORE_ERRORS.toCome : CHORE_ERRORS.old;
     throw new AppError('invalid', message, { fields: { doneOn: message } });
   }
   return write(async (tx) => {
@@ -30,11 +31,11 @@ export async function finishChore(
     if (!chore) throw notFound();
     const { id, title } = chore;
     if (chore.doneOn !== null) {
-      throw new AppError('conflict', `${chore.doerName ?? 'Somebody'} has marked this chore done.`);
+      throw new AppError('conflict', CHORE_ERRORS.markedDone(chore.doerName));
     }
     const mine = chore.assigneeId === null || chore.assigneeId === scope.member.id;
     if (!mine && !scope.can('chores.write')) {
-      throw new AppError('forbidden', `This is ${chore.assigneeName ?? 'another member'}'s chore.`);
+      throw new AppError('forbidden', CHORE_ERRORS.others(chore.assigneeName));
     }
     const doneBy = chore.assigneeId ?? scope.member.id;
     await updateChore(scope, tx, chore, { doneOn: input.doneOn, doneBy, hours: input.hours });
@@ -53,7 +54,7 @@ export async function finishChore(
       });
     }
     const who = chore.assigneeId === null ? scope.member.name : (chore.assigneeName ?? scope.member.name);
-    const summary = `${title}: done by ${who}, ${input.hours} h.`;
+    const summary = CHORE_AUDIT.done(title, who, input.hours);
     await noteUpkeep(scope, tx, { subject: 'chore', verb: 'done', id, summary, detail: { ...input, doneBy } }, now);
     return { id, title };
   });

@@ -12,8 +12,9 @@ import {
   resultFits,
 } from '@/core/upkeep/inspection';
 import { LINE_MAX, NOTES_MAX, readForm } from '@/features/ground/read-form';
+import { INSPECTION_FIELD_ERRORS as ERRORS } from './words/inspections';
 
-const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const line = z.string().max(LINE_MAX, ERRORS.long(LINE_MAX));
 
 export const inspectionFormSchema = z.object({
   standId: z.string().min(1).max(40),
@@ -23,7 +24,7 @@ export const inspectionFormSchema = z.object({
   /** '' : not answered yet. */
   answers: z.partialRecord(z.enum(INSPECTION_ITEMS), z.enum(['', ...ITEM_ANSWERS]).nullish()),
   result: z.enum(['', ...INSPECTION_RESULTS]).nullish(),
-  notes: z.string().trim().max(NOTES_MAX, `Keep the notes to ${NOTES_MAX} characters.`),
+  notes: z.string().trim().max(NOTES_MAX, ERRORS.notesLong(NOTES_MAX)),
   strapFittedOn: line,
   strapYears: line,
   nextDueOn: line,
@@ -41,32 +42,26 @@ export interface InspectionInput {
   nextDueOn: string;
 }
 
-const TOO_MILD: Record<InspectionResult, string> = {
-  pass: '',
-  fix_first: 'Something is marked to fix: the stand cannot pass yet.',
-  closed: 'Something is marked unsafe: the result must be closed.',
-};
-
 export const inspectionSchema = inspectionFormSchema.transform((typed, ctx): InspectionInput => {
   const form = readForm(ctx);
   const answers: InspectionAnswers = {};
   for (const item of itemsFor(typed.kind)) {
     const answer = typed.answers[item];
     if (answer) answers[item] = answer;
-    else form.fail(`answers.${item}`, 'Choose one.');
+    else form.fail(`answers.${item}`, ERRORS.answer);
   }
   const day = form.day('day', typed.day);
   const nextDueOn = form.day('nextDueOn', typed.nextDueOn);
-  if (!form.failed() && nextDueOn <= day) form.fail('nextDueOn', 'The next look comes after this one.');
+  if (!form.failed() && nextDueOn <= day) form.fail('nextDueOn', ERRORS.next);
   const strapFittedOn = typed.strapFittedOn.trim() === '' ? null : form.day('strapFittedOn', typed.strapFittedOn);
   if (strapFittedOn !== null && !form.failed() && strapFittedOn > day) {
-    form.fail('strapFittedOn', 'The strap was fitted on or before the day of this look.');
+    form.fail('strapFittedOn', ERRORS.strap);
   }
-  const strapYears = form.number('strapYears', typed.strapYears, { label: 'Years', min: 0.25, max: 20 });
+  const strapYears = form.number('strapYears', typed.strapYears, { label: ERRORS.years, min: 0.25, max: 20 });
   const result = typed.result || null;
-  if (result === null) form.fail('result', 'Choose a result.');
-  else if (!resultFits(result, answers)) form.fail('result', TOO_MILD[mildestResult(answers)]);
-  if (result !== null && result !== 'pass' && typed.notes === '') form.fail('notes', 'Say what is wrong.');
+  if (result === null) form.fail('result', ERRORS.result);
+  else if (!resultFits(result, answers)) form.fail('result', ERRORS.tooMild[mildestResult(answers)]);
+  if (result !== null && result !== 'pass' && typed.notes === '') form.fail('notes', ERRORS.notes);
   if (form.failed() || result === null) return z.NEVER;
   return { standId: typed.standId, day, answers, result, notes: typed.notes, strapFittedOn, strapYears, nextDueOn };
 });

@@ -18,8 +18,10 @@ import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import type { ChangeChoreForm } from './chore-schema';
 import { type ChoreDetail, findChore, listDoneChores, listOpenChores, listPeople, sumHours } from './chores-data';
-import { ANSWER_WORDS, type InspectionForm, ITEM_WORDS, RESULT_WORDS } from './inspection-schema';
+import type { InspectionForm } from './inspection-schema';
 import { type InspectionDetail, lastInspections, listInspectionsOf } from './inspections-data';
+import { CHORE_LIST_WORDS } from './words/chores';
+import { ANSWER_WORDS, ITEM_WORDS, RESULT_WORDS, STRAP_WORDS, UPKEEP_TABLE_WORDS as TABLE } from './words/inspections';
 import type { ChangeWorkDayForm } from './work-day-schema';
 import { findWorkDay, listComing, listPastWorkDays, listWorkDays, type WorkDayRow } from './work-days-data';
 
@@ -73,7 +75,8 @@ export interface ChoresScreen {
   pastDays: WorkDayLine[];
   upkeep: UpkeepLine[];
   hours: { name: string; hours: number }[];
-  yearText: string;
+  /** '1 Jul 2026': hours are summed from here. */
+  since: string;
 }
 
 function choreLine(scope: ClubScope, chore: ChoreDetail, today: string): ChoreLine {
@@ -88,7 +91,7 @@ function choreLine(scope: ClubScope, chore: ChoreDetail, today: string): ChoreLi
     free: chore.assigneeId === null,
     due: dueOn && formatDay(dueOn, true),
     state: dueOn === null ? 'fine' : dueState(dueOn, today),
-    done: doneOn && `${formatDay(doneOn, true)}, ${chore.doerName ?? 'a former member'}, ${numberText(chore.hours)} h`,
+    done: doneOn && CHORE_LIST_WORDS.done(formatDay(doneOn, true), chore.doerName, numberText(chore.hours)),
   };
 }
 
@@ -110,11 +113,15 @@ function workDayLine(scope: ClubScope, row: WorkDayRow, all: Coming, now: number
   };
 }
 
-export function strapText(due: StrapDue | null, today: string): string {
-  if (!due) return 'No date';
-  const why = due.by === 'maker' ? `maker's ${numberText(due.years)} y` : 'usual 2 y';
-  const over = dueState(due.lastDay, today) === 'over';
-  return `${over ? 'Over since' : 'Good to'} ${formatDay(due.lastDay, true)} (${why})`;
+/** By whose reckoning a strap is good so long. */
+export function strapReason(due: StrapDue): string {
+  return due.by === 'maker' ? STRAP_WORDS.byMaker(numberText(due.years)) : STRAP_WORDS.usual;
+}
+
+function strapText(due: StrapDue | null, today: string): string {
+  if (!due) return STRAP_WORDS.noDate;
+  const say = dueState(due.lastDay, today) === 'over' ? STRAP_WORDS.over : STRAP_WORDS.good;
+  return say(formatDay(due.lastDay, true), strapReason(due));
 }
 
 export function upkeepLine(stand: StandRow, last: InspectionDetail | undefined, today: string): UpkeepLine {
@@ -124,11 +131,11 @@ export function upkeepLine(stand: StandRow, last: InspectionDetail | undefined, 
     standId: stand.id,
     name: stand.name,
     result: last?.result ?? null,
-    resultText: last ? RESULT_WORDS[last.result] : 'Never looked at',
-    lastText: last ? `${formatDay(last.day, true)}, ${last.byName}` : '–',
-    nextText: last ? formatDay(last.nextDueOn, true) : 'Now',
+    resultText: last ? RESULT_WORDS[last.result] : TABLE.never,
+    lastText: last ? TABLE.lastBy(formatDay(last.day, true), last.byName) : '–',
+    nextText: last ? formatDay(last.nextDueOn, true) : TABLE.now,
     nextState: last ? dueState(last.nextDueOn, today) : 'over',
-    strapText: hasStrap ? strapText(strap, today) : 'Has none',
+    strapText: hasStrap ? strapText(strap, today) : TABLE.noStrap,
     strapState: hasStrap && strap ? dueState(strap.lastDay, today) : 'fine',
   };
 }
@@ -160,7 +167,7 @@ export async function readChores(scope: ClubScope, now: number): Promise<ChoresS
       .filter(({ role, id }) => can(role, 'chores.read') || sums.has(id))
       .map(({ id, name }) => ({ name, hours: sums.get(id) ?? 0 }))
       .sort((a, b) => b.hours - a.hours || a.name.localeCompare(b.name)),
-    yearText: `since ${formatDay(year.fromDay, true)}`,
+    since: formatDay(year.fromDay, true),
   };
 }
 

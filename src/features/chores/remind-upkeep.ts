@@ -11,7 +11,8 @@ import { queueMail } from '@/server/outbox';
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { listOpenChores, listPeople } from './chores-data';
 import { lastInspections } from './inspections-data';
-import { strapText } from './reads';
+import { strapReason } from './reads';
+import { UPKEEP_MAIL } from './words/chores';
 
 /** Hours of the club's clock in which a reminder may arrive. */
 const FROM_CLOCK = '08:00';
@@ -36,6 +37,7 @@ interface Reminder {
 
 /** Straps and looks that come due or are over. */
 async function dueAtStands(scope: ClubScope, today: string, from: ReadFrom): Promise<string[]> {
+  const words = UPKEEP_MAIL.stands;
   const last = await lastInspections(scope, from);
   return (await listStands(scope, from)).flatMap((stand) => {
     const row = last.get(stand.id);
@@ -43,11 +45,11 @@ async function dueAtStands(scope: ClubScope, today: string, from: ReadFrom): Pro
     const lines: string[] = [];
     const due = strapDue({ fittedOn: row.strapFittedOn, makerYears: row.strapYears });
     if (due && itemsFor(stand.kind).includes('straps') && dueState(due.lastDay, today) !== 'fine') {
-      const text = strapText(due, today);
-      lines.push(`${stand.name}: main strap, ${text.charAt(0).toLowerCase()}${text.slice(1)}`);
+      const say = dueState(due.lastDay, today) === 'over' ? words.strapOver : words.strapSoon;
+      lines.push(say(stand.name, formatDay(due.lastDay, true), strapReason(due)));
     }
     if (dueState(row.nextDueOn, today) !== 'fine') {
-      lines.push(`${stand.name}: next look by ${formatDay(row.nextDueOn, true)}`);
+      lines.push(words.look(stand.name, formatDay(row.nextDueOn, true)));
     }
     return lines;
   });
@@ -63,13 +65,14 @@ async function ofStands(scope: ClubScope, today: string, from: ReadFrom): Promis
     key: `upkeep.due:${id}:${week}`,
     kind: 'upkeep.due',
     to: { name, email },
-    subject: `Stands to look after: ${lines.length} due`,
-    opening: "These come due or are over. The maker's instructions come before any usual time.",
+    subject: UPKEEP_MAIL.stands.subject(lines.length),
+    opening: UPKEEP_MAIL.stands.opening,
     lines,
   }));
 }
 
 async function ofChores(scope: ClubScope, today: string, from: ReadFrom): Promise<Reminder[]> {
+  const words = UPKEEP_MAIL.chore;
   return (await listOpenChores(scope, from)).flatMap((chore): Reminder[] => {
     const { id, title, dueOn, assigneeId, assigneeName, assigneeEmail, placeName } = chore;
     if (dueOn === null || assigneeName === null || assigneeEmail === null) return [];
@@ -79,9 +82,9 @@ async function ofChores(scope: ClubScope, today: string, from: ReadFrom): Promis
         key: `chore.due:${id}:${assigneeId}:${dueOn}`,
         kind: 'chore.due',
         to: { name: assigneeName, email: assigneeEmail },
-        subject: `Chore due ${formatDay(dueOn)}: ${title}`,
-        opening: `You have taken on a chore that is due ${formatDay(dueOn, true)}.`,
-        lines: [placeName ? `${title}, ${placeName}` : title],
+        subject: words.subject(formatDay(dueOn), title),
+        opening: words.opening(formatDay(dueOn, true)),
+        lines: [words.line(title, placeName)],
       },
     ];
   });
@@ -101,9 +104,9 @@ async function send(tx: Tx, scope: ClubScope, mail: Reminder, now: number): Prom
   const { club } = scope;
   const { text, html } = composeMail({
     clubName: club.name,
-    paragraphs: [`Hello ${mail.to.name},`, mail.opening, mail.lines.join('\n')],
-    button: { label: 'Open the chores', url: `${env.appUrl}/clubs/${club.slug}/chores` },
-    footer: mail.kind === 'chore.due' ? 'You get this because the chore is yours.' : 'You get this as an officer.',
+    paragraphs: [UPKEEP_MAIL.hello(mail.to.name), mail.opening, mail.lines.join('\n')],
+    button: { label: UPKEEP_MAIL.button, url: `${env.appUrl}/clubs/${club.slug}/chores` },
+    footer: mail.kind === 'chore.due' ? UPKEEP_MAIL.chore.footer : UPKEEP_MAIL.stands.footer,
   });
   const { key: dedupeKey, kind, to, subject } = mail;
   return queueMail(tx, { clubId: club.id, kind, dedupeKey, to, subject, text, html }, now);

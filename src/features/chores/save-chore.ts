@@ -8,6 +8,7 @@ import type { ClubScope } from '@/server/scope';
 import type { ChoreInput } from './chore-schema';
 import { findChore, insertChore, listPeople, updateChore } from './chores-data';
 import { noteUpkeep } from './note-upkeep';
+import { BY_POSITION, CHORE_AUDIT, CHORE_ERRORS } from './words/chores';
 
 const wrong = (field: string, message: string) => new AppError('invalid', message, { fields: { [field]: message } });
 
@@ -16,17 +17,17 @@ async function valuesOf(scope: ClubScope, tx: Tx, input: ChoreInput) {
   if (assigneeId !== null) {
     const person = (await listPeople(scope, tx)).find(({ id }) => id === assigneeId);
     if (!person || !can(person.role, 'chores.read')) {
-      throw wrong('assigneeId', 'This person is no member who does chores. Choose another.');
+      throw wrong('assigneeId', CHORE_ERRORS.assignee);
     }
   }
   if (input.place === null) {
     return { title, notes, assigneeId, dueOn, place: '', placeName: '', lat: null, lon: null };
   }
   const found = await resolvePlace(scope, input.place, tx);
-  if (!found) throw wrong('place', 'This place is no longer there. Choose another.');
+  if (!found) throw wrong('place', CHORE_ERRORS.placeGone);
   const point = input.place.of === 'point';
   const place = input.place.of === 'point' ? 'point' : `${input.place.of}:${input.place.id}`;
-  const placeName = point ? 'By position' : found.name;
+  const placeName = point ? BY_POSITION : found.name;
   return { title, notes, assigneeId, dueOn, place, placeName, lat: found.lat, lon: found.lon };
 }
 
@@ -35,7 +36,7 @@ export async function addChoreIn(tx: Tx, scope: ClubScope, input: ChoreInput, no
   const id = newId('chore');
   const values = await valuesOf(scope, tx, input);
   await insertChore(tx, { ...values, id, clubId: scope.club.id, createdBy: scope.member.id, createdAt: now });
-  await noteUpkeep(scope, tx, { subject: 'chore', verb: 'added', id, summary: `Added a chore: ${values.title}.` }, now);
+  await noteUpkeep(scope, tx, { subject: 'chore', verb: 'added', id, summary: CHORE_AUDIT.added(values.title) }, now);
   return { id };
 }
 
@@ -52,11 +53,11 @@ export async function changeChore(
   return write(async (tx) => {
     const chore = await findChore(scope, at.id, tx);
     if (!chore) throw notFound();
-    if (chore.doneOn !== null) throw new AppError('conflict', 'This chore is done: it stays on record as it is.');
+    if (chore.doneOn !== null) throw new AppError('conflict', CHORE_ERRORS.done);
     if (!(await updateChore(scope, tx, at, await valuesOf(scope, tx, input)))) {
       throw await changedSince(scope, { id: chore.id, name: chore.title }, tx);
     }
-    const summary = `Changed the chore ${input.title}.`;
+    const summary = CHORE_AUDIT.changed(input.title);
     await noteUpkeep(scope, tx, { subject: 'chore', verb: 'changed', id: at.id, summary }, now);
     return { id: at.id };
   });
@@ -69,12 +70,12 @@ export async function takeChore(scope: ClubScope, id: string, now: number): Prom
     if (!chore) throw notFound();
     const { title, version } = chore;
     if (chore.assigneeId === scope.member.id) return { id, title };
-    if (chore.doneOn !== null) throw new AppError('conflict', 'This chore is done already.');
+    if (chore.doneOn !== null) throw new AppError('conflict', CHORE_ERRORS.doneAlready);
     if (chore.assigneeId !== null) {
-      throw new AppError('conflict', `${chore.assigneeName ?? 'Somebody'} has this chore.`);
+      throw new AppError('conflict', CHORE_ERRORS.taken(chore.assigneeName));
     }
     await updateChore(scope, tx, { id, version }, { assigneeId: scope.member.id });
-    const summary = `${scope.member.name} took the chore ${title}.`;
+    const summary = CHORE_AUDIT.taken(scope.member.name, title);
     await noteUpkeep(scope, tx, { subject: 'chore', verb: 'taken', id, summary }, now);
     return { id, title };
   });
@@ -84,9 +85,9 @@ export async function removeChore(scope: ClubScope, id: string, now: number): Pr
   return write(async (tx) => {
     const chore = await findChore(scope, id, tx);
     if (!chore) throw notFound();
-    if (chore.doneOn !== null) throw new AppError('conflict', 'This chore is done: its hours stay on record.');
+    if (chore.doneOn !== null) throw new AppError('conflict', CHORE_ERRORS.hoursStay);
     await updateChore(scope, tx, chore, { removedAt: now });
-    const summary = `Took out the chore ${chore.title}.`;
+    const summary = CHORE_AUDIT.removed(chore.title);
     await noteUpkeep(scope, tx, { subject: 'chore', verb: 'removed', id, summary }, now);
     return { id };
   });

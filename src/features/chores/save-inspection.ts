@@ -9,10 +9,10 @@ import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { mailClosed } from './closed-mails';
 import type { InspectionInput } from './inspection-schema';
-import { RESULT_WORDS } from './inspection-schema';
 import { insertInspection } from './inspections-data';
 import { noteUpkeep } from './note-upkeep';
 import { addChoreIn } from './save-chore';
+import { INSPECTION_ERRORS, INSPECTION_LEAVES } from './words/inspections';
 
 /** A chore to mend a stand is due in so many days. Our choice. */
 const MEND_DAYS = 14;
@@ -35,14 +35,14 @@ const firstLine = (text: string) => text.split('\n')[0]?.replace(/\.+$/, '').sli
 export async function saveInspection(scope: ClubScope, input: InspectionInput, now: number): Promise<SavedInspection> {
   const today = dayOf(now, scope.club.zone);
   if (input.day > today || input.day < addDays(today, -366)) {
-    const message = input.day > today ? 'This day is still to come.' : 'Choose a day within the last year.';
+    const message = input.day > today ? INSPECTION_ERRORS.toCome : INSPECTION_ERRORS.old;
     throw new AppError('invalid', message, { fields: { day: message } });
   }
   return write(async (tx) => {
     const stand = await getStand(scope, input.standId, tx);
     if (!stand) throw notFound();
     if (itemsFor(stand.kind).some((item) => input.answers[item] === undefined)) {
-      throw new AppError('conflict', `${stand.name} has become another kind of stand. Reload the page.`);
+      throw new AppError('conflict', INSPECTION_ERRORS.otherKind(stand.name));
     }
     const id = newId('inspection');
     const reason = firstLine(input.notes);
@@ -52,7 +52,7 @@ export async function saveInspection(scope: ClubScope, input: InspectionInput, n
       const open = (await listClosuresFrom(scope, today, tx)).find(
         (closure) => closure.standId === stand.id && closure.toDay === null && closure.fromDay <= today,
       );
-      const values = { standId: stand.id, fromDay: today, toDay: null, reason: `Inspection: ${reason}` };
+      const values = { standId: stand.id, fromDay: today, toDay: null, reason: INSPECTION_LEAVES.closure(reason) };
       closureId = open?.id ?? (await closeGroundIn(tx, scope, values, stand.name, now)).id;
       told = await mailClosed(tx, scope, { stand, reason, closureId, day: today }, now);
     }
@@ -67,11 +67,11 @@ export async function saveInspection(scope: ClubScope, input: InspectionInput, n
     const chore = input.result !== 'pass';
     if (chore) {
       const place = { of: 'stand' as const, id: stand.id };
-      const title = `Mend ${stand.name}`;
+      const title = INSPECTION_LEAVES.chore(stand.name);
       const dueOn = addDays(today, MEND_DAYS);
       await addChoreIn(tx, scope, { title, notes: input.notes, assigneeId: null, place, dueOn }, now);
     }
-    const summary = `Inspected ${stand.name}: ${RESULT_WORDS[input.result].toLowerCase()}${reason ? `, ${reason}` : ''}.`;
+    const summary = INSPECTION_LEAVES.audit(stand.name, input.result, reason);
     const detail = { result: input.result, answers: input.answers, closureId };
     await noteUpkeep(scope, tx, { subject: 'inspection', verb: 'added', id, summary, detail }, now);
     return { standName: stand.name, told, chore };

@@ -7,6 +7,7 @@ import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { listPeople } from './chores-data';
 import { noteUpkeep } from './note-upkeep';
+import { WORK_DAY_AUDIT, WORK_DAY_ERRORS } from './words/work-days';
 import type { CreditInput, WorkDayInput } from './work-day-schema';
 import {
   deleteComing,
@@ -23,7 +24,7 @@ function valuesOf(scope: ClubScope, input: WorkDayInput, now: number) {
   const { zone } = scope.club;
   const today = dayOf(now, zone);
   if (day < addDays(today, -366) || day > addDays(today, 731)) {
-    const message = 'Choose a day within the last year or the next two.';
+    const message = WORK_DAY_ERRORS.day;
     throw new AppError('invalid', message, { fields: { day: message } });
   }
   return {
@@ -40,7 +41,7 @@ function valuesOf(scope: ClubScope, input: WorkDayInput, now: number) {
 async function need(scope: ClubScope, tx: Tx, id: string): Promise<WorkDayRow> {
   const row = await findWorkDay(scope, id, tx);
   if (!row) throw notFound();
-  if (row.cancelledAt !== null) throw new AppError('conflict', 'This work day was called off.');
+  if (row.cancelledAt !== null) throw new AppError('conflict', WORK_DAY_ERRORS.calledOff);
   return row;
 }
 
@@ -51,7 +52,7 @@ export async function addWorkDay(scope: ClubScope, input: WorkDayInput, now: num
   return write(async (tx) => {
     const id = newId('workDay');
     await insertWorkDay(tx, { ...values, id, clubId: scope.club.id, createdAt: now });
-    const summary = `Set a work day: ${named(values)}.`;
+    const summary = WORK_DAY_AUDIT.set(named(values));
     await noteUpkeep(scope, tx, { subject: 'work_day', verb: 'added', id, summary }, now);
     return { id };
   });
@@ -67,7 +68,7 @@ export async function changeWorkDay(
     const row = await need(scope, tx, input.id);
     if (row.sequence !== input.sequence) throw await changedSince(scope, { id: row.id, name: row.title }, tx);
     await updateWorkDay(scope, tx, row.id, { ...values, sequence: row.sequence + 1 });
-    const summary = `Changed the work day ${named(row)}: now ${named(values)}.`;
+    const summary = WORK_DAY_AUDIT.changed(named(row), named(values));
     await noteUpkeep(scope, tx, { subject: 'work_day', verb: 'changed', id: row.id, summary }, now);
     return { id: row.id };
   });
@@ -83,7 +84,7 @@ export async function cancelWorkDay(scope: ClubScope, id: string, now: number): 
     await noteUpkeep(
       scope,
       tx,
-      { subject: 'work_day', verb: 'cancelled', id, summary: `Called off ${named(row)}.` },
+      { subject: 'work_day', verb: 'cancelled', id, summary: WORK_DAY_AUDIT.calledOff(named(row)) },
       now,
     );
     return { id };
@@ -98,7 +99,7 @@ export async function joinWorkDay(
 ): Promise<{ comes: boolean }> {
   return write(async (tx) => {
     const row = await need(scope, tx, input.id);
-    if (row.endAt <= now) throw new AppError('conflict', 'This work day is over. An officer credits the hours.');
+    if (row.endAt <= now) throw new AppError('conflict', WORK_DAY_ERRORS.over);
     const memberId = scope.member.id;
     if (input.comes) {
       await putComing(tx, { clubId: scope.club.id, workDayId: row.id, memberId, hours: null, at: now });
@@ -113,13 +114,13 @@ export async function joinWorkDay(
 export async function creditWorkDay(scope: ClubScope, input: CreditInput, now: number): Promise<{ credited: number }> {
   return write(async (tx) => {
     const row = await need(scope, tx, input.id);
-    if (row.startAt > now) throw new AppError('conflict', 'This work day is still to come.');
+    if (row.startAt > now) throw new AppError('conflict', WORK_DAY_ERRORS.toCome);
     const workers = (await listPeople(scope, tx)).filter(({ role }) => can(role, 'chores.read'));
     const before = (await listComing(scope, tx)).filter(({ workDayId }) => workDayId === row.id);
     let credited = 0;
     for (const { memberId, hours } of input.members) {
       if (!workers.some(({ id }) => id === memberId)) {
-        throw new AppError('invalid', 'Somebody on the list is no longer a member. Reload the page.');
+        throw new AppError('invalid', WORK_DAY_ERRORS.noMember);
       }
       if (hours === null) {
         if (before.some((one) => one.memberId === memberId)) await deleteComing(scope, tx, row.id, memberId);
@@ -128,7 +129,7 @@ export async function creditWorkDay(scope: ClubScope, input: CreditInput, now: n
       await putComing(tx, { clubId: scope.club.id, workDayId: row.id, memberId, hours, at: now });
       credited += 1;
     }
-    const summary = `Credited the hours of ${named(row)} to ${credited} ${credited === 1 ? 'member' : 'members'}.`;
+    const summary = WORK_DAY_AUDIT.credited(named(row), credited);
     await noteUpkeep(
       scope,
       tx,

@@ -2,8 +2,9 @@ import { z } from 'zod';
 import { isClock } from '@/core/day-time';
 import { LINE_MAX, NAME_MAX, NOTES_MAX, readForm } from '@/features/ground/read-form';
 import { MOST_HOURS } from './chore-schema';
+import { WORK_DAY_FIELD_ERRORS as ERRORS, NEW_WORK_DAY } from './words/work-days';
 
-const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const line = z.string().max(LINE_MAX, ERRORS.long(LINE_MAX));
 const id = z.string().min(1).max(40);
 
 export const workDayFormSchema = z.object({
@@ -12,7 +13,7 @@ export const workDayFormSchema = z.object({
   startClock: line,
   endClock: line,
   meet: line,
-  notes: z.string().trim().max(NOTES_MAX, `Keep the notes to ${NOTES_MAX} characters.`),
+  notes: z.string().trim().max(NOTES_MAX, ERRORS.notes(NOTES_MAX)),
 });
 export type WorkDayForm = z.output<typeof workDayFormSchema>;
 
@@ -21,13 +22,13 @@ export type WorkDayInput = WorkDayForm;
 function readWorkDay(typed: WorkDayForm, ctx: z.RefinementCtx): WorkDayInput {
   const form = readForm(ctx);
   const title = typed.title.trim().replace(/\s+/g, ' ');
-  if (title === '') form.fail('title', 'Give it a name.');
-  else if (title.length > NAME_MAX) form.fail('title', `Keep the name to ${NAME_MAX} characters.`);
+  if (title === '') form.fail('title', ERRORS.name);
+  else if (title.length > NAME_MAX) form.fail('title', ERRORS.nameLong(NAME_MAX));
   const day = form.day('day', typed.day);
   const [startClock, endClock] = [typed.startClock.trim(), typed.endClock.trim()];
-  if (!isClock(startClock)) form.fail('startClock', 'Give a time.');
-  if (!isClock(endClock)) form.fail('endClock', 'Give a time.');
-  else if (endClock <= startClock) form.fail('endClock', 'It ends after it begins, on the same day.');
+  if (!isClock(startClock)) form.fail('startClock', ERRORS.time);
+  if (!isClock(endClock)) form.fail('endClock', ERRORS.time);
+  else if (endClock <= startClock) form.fail('endClock', ERRORS.endFirst);
   const { meet, notes } = typed;
   return form.failed() ? z.NEVER : { title, day, startClock, endClock, meet: meet.trim(), notes };
 }
@@ -43,7 +44,7 @@ export const changeWorkDaySchema = changeWorkDayFormSchema.transform((typed, ctx
 export type ChangeWorkDayForm = z.output<typeof changeWorkDayFormSchema>;
 
 export const EMPTY_WORK_DAY: WorkDayForm = {
-  title: 'Work day',
+  title: NEW_WORK_DAY,
   day: '',
   startClock: '08:00',
   endClock: '12:00',
@@ -68,7 +69,7 @@ export interface CreditInput {
 
 export const creditSchema = creditFormSchema.transform((typed, ctx): CreditInput => {
   const form = readForm(ctx);
-  const rule = { label: 'Hours', min: 0, max: MOST_HOURS, unit: 'h' };
+  const rule = { label: ERRORS.hours, min: 0, max: MOST_HOURS, unit: 'h' };
   const members = typed.members.map(({ memberId, hours }, index) => ({
     memberId,
     hours: form.number(`members.${index}.hours`, hours, rule),

@@ -1,7 +1,7 @@
 import type { ComponentProps } from 'react';
 import { type InspectionItem, ITEM_ANSWERS } from '@/core/upkeep/inspection';
 import { FieldGroup } from '@/ui/field';
-import { ANSWER_WORDS, ITEM_WORDS } from '../inspection-schema';
+import { ANSWER_WORDS, ITEM_WORDS } from '../words/inspections';
 
 export interface AnswerFieldProps extends Omit<ComponentProps<'input'>, 'type' | 'value' | 'children'> {
   item: InspectionItem;

@@ -13,6 +13,9 @@ import { useActionForm } from '@/ui/form/use-action-form';
 import { DateInput, Select, Textarea, TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { type ChoreForm, makeChoreSchema } from '../chore-schema';
+import { CHORE_FORM_WORDS } from '../words/chores';
+
+const words = CHORE_FORM_WORDS;
 
 export interface ChoreFormProps {
   club: string;
@@ -36,29 +39,29 @@ export function ChoreFormView({ club, formClub, values, people, places, at, add,
     defaultValues: values,
     submit: (typed: ChoreForm) => (at ? change(club, { ...typed, ...at }) : add(club, typed)),
     onDone: () => {
-      toast({ title: at ? 'Chore changed' : 'Chore added' });
+      toast({ title: at ? words.changed : words.added });
       router.push(back);
     },
   });
   const place = useWatch({ control: form.control, name: 'place' });
   const groups = [
-    { label: 'Stands', options: places.stands },
-    { label: 'Features', options: places.features },
-    { label: 'Parking', options: places.parkings },
+    { label: words.stands, options: places.stands },
+    { label: words.features, options: places.features },
+    { label: words.parking, options: places.parkings },
   ].filter((group) => group.options.length > 0);
   return (
     <form {...formProps} className="grid max-w-2xl gap-5">
       <FormErrorSummary errors={errors} />
-      <TextInput label="What is to be done" {...register('title')} error={errorOf('title')} />
+      <TextInput label={words.what} {...register('title')} error={errorOf('title')} />
       <Select
-        label="Who"
-        placeholder="Whoever takes it"
+        label={words.who}
+        placeholder={words.whoever}
         options={people}
         {...register('assigneeId')}
         error={errorOf('assigneeId')}
       />
       <PlaceChoice
-        placeholder="No one place"
+        placeholder={words.noPlace}
         groups={groups}
         byPosition={place === 'point'}
         fields={{ place: register('place'), lat: register('lat'), lon: register('lon') }}
@@ -68,11 +71,11 @@ export function ChoreFormView({ club, formClub, values, people, places, at, add,
           form.setValue('lon', lon, { shouldDirty: true });
         }}
       />
-      <DateInput label="Due" optional {...register('dueOn')} error={errorOf('dueOn')} />
-      <Textarea label="Notes" optional rows={3} {...register('notes')} error={errorOf('notes')} />
-      <SubmitRow label={at ? 'Save chore' : 'Add chore'} pending={pending} pendingLabel="Saving…">
+      <DateInput label={words.due} optional {...register('dueOn')} error={errorOf('dueOn')} />
+      <Textarea label={words.notes} optional rows={3} {...register('notes')} error={errorOf('notes')} />
+      <SubmitRow label={at ? words.save : words.add} pending={pending} pendingLabel={words.saving}>
         <ButtonLink href={back} look="quiet">
-          Back without saving
+          {words.back}
         </ButtonLink>
       </SubmitRow>
     </form>

@@ -6,7 +6,10 @@ import { Button, TextLink } from '@/ui/button';
 import { Badge } from '@/ui/page-parts';
 import { useToast } from '@/ui/toast';
 import type { ChoreLine } from '../reads';
+import { CHORE_LIST_WORDS } from '../words/chores';
 import { type FinishAction, FinishChore } from './finish-chore-dialog';
+
+const words = CHORE_LIST_WORDS;
 
 type Take = (club: string, values: { id: string }) => Promise<ActionResult<{ id: string; title: string }>>;
 
@@ -31,15 +34,13 @@ export function ChoreList({ club, lines, today, mayWrite, take, finish }: ChoreL
               {mayWrite ? <TextLink href={`/clubs/${club}/chores/${line.id}`}>{line.title}</TextLink> : line.title}
             </p>
             <p className="text-ink-soft">
-              {[line.assignee ?? 'Nobody has it yet', line.place, line.due && `due ${line.due}`]
-                .filter(Boolean)
-                .join(' · ')}
+              {[line.assignee ?? words.nobody, line.place, line.due && words.due(line.due)].filter(Boolean).join(' · ')}
             </p>
             {line.notes && <p className="max-w-prose whitespace-pre-line">{line.notes}</p>}
             <p className="mt-1 flex gap-2 empty:hidden">
-              {line.state === 'over' && <Badge look="clay">Past its day</Badge>}
-              {line.state === 'soon' && <Badge>Due soon</Badge>}
-              {line.mine && <Badge look="moss">Yours</Badge>}
+              {line.state === 'over' && <Badge look="clay">{words.over}</Badge>}
+              {line.state === 'soon' && <Badge>{words.soon}</Badge>}
+              {line.mine && <Badge look="moss">{words.yours}</Badge>}
             </p>
           </div>
           <div className="flex shrink-0 gap-2">
@@ -61,12 +62,13 @@ function TakeButton({ club, line, take }: { club: string; line: ChoreLine; take:
     setPending(true);
     const answer = await take(club, { id: line.id }).catch(() => null);
     setPending(false);
-    if (answer?.ok) toast({ title: 'It is yours', text: answer.data.title });
-    else toast({ title: answer?.error.message ?? 'The server could not be reached. Try again.', level: 'caution' });
+    if (answer?.ok) toast({ title: words.taken, text: answer.data.title });
+    else toast({ title: answer?.error.message ?? words.lost, level: 'caution' });
   }
   return (
-    <Button pending={pending} pendingLabel="Taking…" onClick={() => void press()}>
-      Take it<span className="sr-only">: {line.title}</span>
+    <Button pending={pending} pendingLabel={words.taking} onClick={() => void press()}>
+      {words.take}
+      <span className="sr-only">{words.of(line.title)}</span>
     </Button>
   );
 }

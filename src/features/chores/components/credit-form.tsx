@@ -7,7 +7,10 @@ import { useActionForm } from '@/ui/form/use-action-form';
 import { TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { WorkDayScreen } from '../reads';
+import { CREDIT_FORM_WORDS } from '../words/work-days';
 import { type CreditForm, creditSchema } from '../work-day-schema';
+
+const words = CREDIT_FORM_WORDS;
 
 export interface CreditFormProps {
   club: string;
@@ -25,7 +28,7 @@ export function CreditFormView({ club, id, members, credit }: CreditFormProps) {
     defaultValues: { id, members: members.map(({ memberId, hours }) => ({ memberId, hours })) },
     submit: (typed: CreditForm) => credit(club, typed),
     onDone: ({ credited }) => {
-      toast({ title: `Hours of ${credited} credited` });
+      toast({ title: words.credited(credited) });
       router.push(`/clubs/${club}/chores`);
     },
   });
@@ -37,7 +40,7 @@ export function CreditFormView({ club, id, members, credit }: CreditFormProps) {
           <TextInput
             key={member.memberId}
             label={member.name}
-            hint={member.comes ? 'Said to come' : undefined}
+            hint={member.comes ? words.saidToCome : undefined}
             unit="h"
             inputMode="decimal"
             className="max-w-28"
@@ -46,7 +49,7 @@ export function CreditFormView({ club, id, members, credit }: CreditFormProps) {
           />
         ))}
       </div>
-      <SubmitRow label="Credit hours" pending={pending} pendingLabel="Saving…" />
+      <SubmitRow label={words.credit} pending={pending} pendingLabel={words.saving} />
     </form>
   );
 }

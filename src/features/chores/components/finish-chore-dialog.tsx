@@ -10,6 +10,9 @@ import { DateInput, TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { type FinishChoreForm, finishChoreSchema } from '../chore-schema';
 import type { ChoreLine } from '../reads';
+import { FINISH_WORDS } from '../words/chores';
+
+const words = FINISH_WORDS;
 
 export type FinishAction = (
   club: string,
@@ -28,17 +31,14 @@ export function FinishChore({ club, line, today, finish }: FinishChoreProps) {
   const [open, setOpen] = useState(false);
   return (
     <Dialog
-      title={`Done: ${line.title}`}
-      description={
-        line.place
-          ? 'The hours are credited. Work at a place is also written down as a visit, so that the list of stands knows of it.'
-          : 'The hours are credited.'
-      }
+      title={words.title(line.title)}
+      description={line.place ? words.textAtPlace : words.text}
       open={open}
       onOpenChange={setOpen}
       trigger={
         <Button look={line.mine ? 'primary' : 'plain'}>
-          Mark done<span className="sr-only">: {line.title}</span>
+          {words.mark}
+          <span className="sr-only">{words.of(line.title)}</span>
         </Button>
       }
     >
@@ -54,23 +54,23 @@ function FinishForm({ club, line, today, finish, close }: FinishChoreProps & { c
     defaultValues: { id: line.id, doneOn: today, hours: '' },
     submit: (typed: FinishChoreForm) => finish(club, typed),
     onDone: ({ title }) => {
-      toast({ title: 'Done', text: title });
+      toast({ title: words.done, text: title });
       close();
     },
   });
   return (
     <form {...formProps} className="grid gap-5">
       <FormErrorSummary errors={errors} />
-      <DateInput label="Done on" max={today} {...register('doneOn')} error={errorOf('doneOn')} />
+      <DateInput label={words.doneOn} max={today} {...register('doneOn')} error={errorOf('doneOn')} />
       <TextInput
-        label="Hours"
+        label={words.hours}
         unit="h"
         inputMode="decimal"
         className="max-w-28"
         {...register('hours')}
         error={errorOf('hours')}
       />
-      <SubmitRow label="Mark done" pending={pending} pendingLabel="Saving…" />
+      <SubmitRow label={words.mark} pending={pending} pendingLabel={words.saving} />
     </form>
   );
 }

@@ -9,8 +9,9 @@ import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { DateInput, Textarea, TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
-import { type InspectionForm, inspectionSchema, RESULT_WORDS } from '../inspection-schema';
+import { type InspectionForm, inspectionSchema } from '../inspection-schema';
 import type { SavedInspection } from '../save-inspection';
+import { INSPECTION_FORM_WORDS, RESULT_NOTES, RESULT_WORDS } from '../words/inspections';
 import { AnswerField } from './answer-field';
 
 export interface InspectionFormProps {
@@ -19,16 +20,11 @@ export interface InspectionFormProps {
   save: (club: string, values: InspectionForm) => Promise<ActionResult<SavedInspection>>;
 }
 
-const RESULT_NOTES = {
-  pass: 'Nothing to mend.',
-  fix_first: 'A chore is made to mend it. The stand stays open: say in the notes what to mind.',
-  closed: 'Shut at once. Members booked there are told by mail, and a chore is made.',
-};
+const words = INSPECTION_FORM_WORDS;
 const RESULTS = INSPECTION_RESULTS.map((value) => ({ value, label: RESULT_WORDS[value], note: RESULT_NOTES[value] }));
 
 function toldText({ told, chore }: SavedInspection): string {
-  const mailed = told > 0 ? `${told} booked ${told === 1 ? 'sit' : 'sits'}: members told by mail. ` : '';
-  return `${mailed}${chore ? 'A chore was made to mend it.' : ''}`.trim();
+  return [told > 0 && words.told(told), chore && words.chore].filter(Boolean).join(' ');
 }
 
 export function InspectionFormView({ club, values, save }: InspectionFormProps) {
@@ -40,7 +36,7 @@ export function InspectionFormView({ club, values, save }: InspectionFormProps) 
     defaultValues: values,
     submit: (typed: InspectionForm) => save(club, typed),
     onDone: (saved) => {
-      toast({ title: `${saved.standName} inspected`, text: toldText(saved) });
+      toast({ title: words.saved(saved.standName), text: toldText(saved) });
       router.push(back);
     },
   });
@@ -48,7 +44,7 @@ export function InspectionFormView({ club, values, save }: InspectionFormProps) 
   return (
     <form {...formProps} className="grid max-w-3xl gap-6">
       <FormErrorSummary errors={errors} />
-      <DateInput label="Day of the look" {...register('day')} error={errorOf('day')} />
+      <DateInput label={words.day} {...register('day')} error={errorOf('day')} />
       <div className="grid gap-5">
         {items.map((item) => (
           <AnswerField key={item} item={item} error={errorOf(`answers.${item}`)} {...register(`answers.${item}`)} />
@@ -56,15 +52,10 @@ export function InspectionFormView({ club, values, save }: InspectionFormProps) 
       </div>
       {items.includes('straps') && (
         <div className="grid gap-5 sm:grid-cols-2">
-          <DateInput
-            label="Main strap fitted on"
-            optional
-            {...register('strapFittedOn')}
-            error={errorOf('strapFittedOn')}
-          />
+          <DateInput label={words.strap} optional {...register('strapFittedOn')} error={errorOf('strapFittedOn')} />
           <TextInput
-            label="Maker's years"
-            hint="As its instructions say. Blank: two years, which is usual practice and no standard."
+            label={words.years}
+            hint={words.yearsHint}
             optional
             unit="y"
             inputMode="decimal"
@@ -74,18 +65,12 @@ export function InspectionFormView({ club, values, save }: InspectionFormProps) 
           />
         </div>
       )}
-      <RadioCards label="Result" choices={RESULTS} {...register('result')} error={errorOf('result')} />
-      <Textarea
-        label="Notes"
-        hint="What was found. Needed when the stand does not pass; its first line stands beside the closure."
-        rows={3}
-        {...register('notes')}
-        error={errorOf('notes')}
-      />
-      <DateInput label="Next look due" {...register('nextDueOn')} error={errorOf('nextDueOn')} />
-      <SubmitRow label="Save inspection" pending={pending} pendingLabel="Saving…">
+      <RadioCards label={words.result} choices={RESULTS} {...register('result')} error={errorOf('result')} />
+      <Textarea label={words.notes} hint={words.notesHint} rows={3} {...register('notes')} error={errorOf('notes')} />
+      <DateInput label={words.next} {...register('nextDueOn')} error={errorOf('nextDueOn')} />
+      <SubmitRow label={words.save} pending={pending} pendingLabel={words.saving}>
         <ButtonLink href={back} look="quiet">
-          Back without saving
+          {words.back}
         </ButtonLink>
       </SubmitRow>
     </form>

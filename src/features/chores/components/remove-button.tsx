@@ -6,6 +6,7 @@ import type { ActionResult } from '@/server/doors';
 import { Button } from '@/ui/button';
 import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { useToast } from '@/ui/toast';
+import { REMOVE_WORDS } from '../words/chores';
 
 export interface RemoveButtonProps {
   club: string;
@@ -23,7 +24,7 @@ export function RemoveButton({ club, id, label, title, done, children, remove }:
   const toast = useToast();
   async function confirm() {
     const answer = await remove(club, { id }).catch(() => null);
-    if (!answer) return 'The server could not be reached. Try again.';
+    if (!answer) return REMOVE_WORDS.lost;
     if (!answer.ok) return answer.error.message;
     toast({ title: done });
     router.push(`/clubs/${club}/chores`);

@@ -3,8 +3,10 @@ import { TextLink } from '@/ui/button';
 import { Badge } from '@/ui/page-parts';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { UpkeepLine } from '../reads';
+import { UPKEEP_TABLE_WORDS } from '../words/inspections';
 
-const STATE_WORDS: Record<DueState, string | null> = { over: 'Over', soon: 'Soon', fine: null };
+const words = UPKEEP_TABLE_WORDS;
+const STATE_WORDS: Record<DueState, string | null> = { over: words.over, soon: words.soon, fine: null };
 const LOOKS = { pass: 'moss', fix_first: 'plain', closed: 'clay' } as const;
 
 function State({ state }: { state: DueState }) {
@@ -15,13 +17,13 @@ function State({ state }: { state: DueState }) {
 /** Every stand with its last look, the next, and its strap. */
 export function UpkeepTable({ club, lines }: { club: string; lines: UpkeepLine[] }) {
   return (
-    <Table caption="Inspections and straps, what is due first" captionHidden>
+    <Table caption={words.caption} captionHidden>
       <THead>
-        <Th>Stand</Th>
-        <Th>Result</Th>
-        <Th>Last look</Th>
-        <Th>Next due</Th>
-        <Th>Main strap</Th>
+        <Th>{words.stand}</Th>
+        <Th>{words.result}</Th>
+        <Th>{words.last}</Th>
+        <Th>{words.next}</Th>
+        <Th>{words.strap}</Th>
       </THead>
       <TBody>
         {lines.map((line) => (
@@ -29,16 +31,16 @@ export function UpkeepTable({ club, lines }: { club: string; lines: UpkeepLine[]
             <RowHead>
               <TextLink href={`/clubs/${club}/chores/stands/${line.standId}`}>{line.name}</TextLink>
             </RowHead>
-            <Td label="Result">
+            <Td label={words.result}>
               <span>{line.result ? <Badge look={LOOKS[line.result]}>{line.resultText}</Badge> : line.resultText}</span>
             </Td>
-            <Td label="Last look">{line.lastText}</Td>
-            <Td label="Next due">
+            <Td label={words.last}>{line.lastText}</Td>
+            <Td label={words.next}>
               <span>
                 {line.nextText} <State state={line.nextState} />
               </span>
             </Td>
-            <Td label="Main strap">
+            <Td label={words.strap}>
               <span>
                 {line.strapText} <State state={line.strapState} />
               </span>

@@ -7,7 +7,10 @@ import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { DateInput, Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
+import { WORK_DAY_FORM_WORDS } from '../words/work-days';
 import { type WorkDayForm, workDaySchema } from '../work-day-schema';
+
+const words = WORK_DAY_FORM_WORDS;
 
 export interface WorkDayFormProps {
   club: string;
@@ -30,24 +33,24 @@ export function WorkDayFormView({ club, values, at, add, change }: WorkDayFormPr
     defaultValues: values,
     submit: (typed: WorkDayForm) => (at ? change(club, { ...typed, ...at }) : add(club, typed)),
     onDone: () => {
-      toast({ title: at ? 'Work day changed' : 'Work day set' });
+      toast({ title: at ? words.changed : words.set });
       router.push(back);
     },
   });
   return (
     <form {...formProps} className="grid max-w-2xl gap-5">
       <FormErrorSummary errors={errors} />
-      <TextInput label="Name" {...register('title')} error={errorOf('title')} />
-      <DateInput label="Day" {...register('day')} error={errorOf('day')} />
+      <TextInput label={words.name} {...register('title')} error={errorOf('title')} />
+      <DateInput label={words.day} {...register('day')} error={errorOf('day')} />
       <div className="grid grid-cols-2 gap-4">
-        <TimeInput label="From" {...register('startClock')} error={errorOf('startClock')} />
-        <TimeInput label="To" {...register('endClock')} error={errorOf('endClock')} />
+        <TimeInput label={words.from} {...register('startClock')} error={errorOf('startClock')} />
+        <TimeInput label={words.to} {...register('endClock')} error={errorOf('endClock')} />
       </div>
-      <TextInput label="Meet at" optional {...register('meet')} error={errorOf('meet')} />
-      <Textarea label="Notes" optional rows={3} {...register('notes')} error={errorOf('notes')} />
-      <SubmitRow label={at ? 'Save work day' : 'Set work day'} pending={pending} pendingLabel="Saving…">
+      <TextInput label={words.meet} optional {...register('meet')} error={errorOf('meet')} />
+      <Textarea label={words.notes} optional rows={3} {...register('notes')} error={errorOf('notes')} />
+      <SubmitRow label={at ? words.save : words.add} pending={pending} pendingLabel={words.saving}>
         <ButtonLink href={back} look="quiet">
-          Back without saving
+          {words.back}
         </ButtonLink>
       </SubmitRow>
     </form>

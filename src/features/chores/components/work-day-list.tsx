@@ -5,6 +5,7 @@ import type { ActionResult } from '@/server/doors';
 import { Button, TextLink } from '@/ui/button';
 import { useToast } from '@/ui/toast';
 import type { WorkDayLine } from '../reads';
+import { WORK_DAY_LIST_WORDS } from '../words/work-days';
 
 type Join = (club: string, values: { id: string; comes: boolean }) => Promise<ActionResult<{ comes: boolean }>>;
 
@@ -15,7 +16,7 @@ export interface WorkDayListProps {
   join: Join;
 }
 
-const named = (names: string[]) => (names.length === 0 ? 'Nobody has said so yet' : names.join(', '));
+const words = WORK_DAY_LIST_WORDS;
 
 export function WorkDayList({ club, lines, mayWrite, join }: WorkDayListProps) {
   return (
@@ -31,10 +32,10 @@ export function WorkDayList({ club, lines, mayWrite, join }: WorkDayListProps) {
               )}
             </p>
             <p className="text-ink-soft">
-              {[line.dayText, line.timeText, line.meet && `meet at ${line.meet}`].filter(Boolean).join(' · ')}
+              {[line.dayText, line.timeText, line.meet && words.meet(line.meet)].filter(Boolean).join(' · ')}
             </p>
             {line.notes && <p className="max-w-prose whitespace-pre-line">{line.notes}</p>}
-            <p>{line.over ? `${line.hours} h credited` : `Coming: ${named(line.coming)}`}</p>
+            <p>{line.over ? words.credited(line.hours) : words.coming(line.coming)}</p>
           </div>
           {!line.over && <JoinButton club={club} line={line} join={join} />}
         </li>
@@ -50,13 +51,13 @@ function JoinButton({ club, line, join }: { club: string; line: WorkDayLine; joi
     setPending(true);
     const answer = await join(club, { id: line.id, comes: !line.comes }).catch(() => null);
     setPending(false);
-    if (answer?.ok) toast({ title: answer.data.comes ? 'You are on the list' : 'You are off the list' });
-    else toast({ title: answer?.error.message ?? 'The server could not be reached. Try again.', level: 'caution' });
+    if (answer?.ok) toast({ title: answer.data.comes ? words.comes : words.comesNot });
+    else toast({ title: answer?.error.message ?? words.lost, level: 'caution' });
   }
   return (
-    <Button pending={pending} pendingLabel="Saving…" onClick={() => void press()}>
-      {line.comes ? 'I cannot come' : 'I come'}
-      <span className="sr-only">: {`${line.title}, ${line.dayText}`}</span>
+    <Button pending={pending} pendingLabel={words.saving} onClick={() => void press()}>
+      {line.comes ? words.notCome : words.come}
+      <span className="sr-only">{words.of(line.title, line.dayText)}</span>
     </Button>
   );
 }

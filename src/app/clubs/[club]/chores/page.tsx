@@ -3,6 +3,7 @@ import { ChoreList } from '@/features/chores/components/chore-list';
 import { UpkeepTable } from '@/features/chores/components/upkeep-table';
 import { WorkDayList } from '@/features/chores/components/work-day-list';
 import { readChores } from '@/features/chores/reads';
+import { CHORES_PAGE_WORDS } from '@/features/chores/words/chores';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -11,22 +12,24 @@ import { PageTitle, Section } from '@/ui/page-parts';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import { finishChoreAction, joinWorkDayAction, takeChoreAction } from './actions';
 
-export const metadata = { title: 'Chores' };
+const words = CHORES_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('chores.read', async ({ scope }) => {
   const { slug, name, zone } = scope.club;
   const at = now();
-  const { chores, done, workDays, pastDays, upkeep, hours, yearText } = await readChores(scope, at);
+  const { chores, done, workDays, pastDays, upkeep, hours, since } = await readChores(scope, at);
   const mayWrite = scope.can('chores.write');
-  const add = mayWrite && <ButtonLink href={`/clubs/${slug}/chores/new`}>Add a chore</ButtonLink>;
-  const setDay = mayWrite && <ButtonLink href={`/clubs/${slug}/chores/work-days/new`}>Set a work day</ButtonLink>;
+  const add = mayWrite && <ButtonLink href={`/clubs/${slug}/chores/new`}>{words.add}</ButtonLink>;
+  const setDay = mayWrite && <ButtonLink href={`/clubs/${slug}/chores/work-days/new`}>{words.setDay}</ButtonLink>;
   const lists = { club: slug, mayWrite };
   return (
     <>
       <PageTitle
         over={name}
-        title="Chores"
-        lead="What the ground and the stands need, who does it, and the hours it has taken."
+        title={words.title}
+        lead={words.lead}
         actions={
           mayWrite && (
             <>
@@ -36,10 +39,10 @@ export default clubPage('chores.read', async ({ scope }) => {
           )
         }
       />
-      <Section title="To do">
+      <Section title={words.toDo}>
         {chores.length === 0 ? (
-          <EmptyState title="Nothing to do" action={add}>
-            A chore stands here until somebody marks it done.
+          <EmptyState title={words.nothing} action={add}>
+            {words.nothingText}
           </EmptyState>
         ) : (
           <ChoreList
@@ -51,36 +54,33 @@ export default clubPage('chores.read', async ({ scope }) => {
           />
         )}
       </Section>
-      <Section title="Work days" note="They stand in the calendar feeds too.">
+      <Section title={words.workDays} note={words.workDaysNote}>
         {workDays.length === 0 ? (
-          <EmptyState title="None is set" action={setDay}>
-            Members see a work day here, and say whether they come.
+          <EmptyState title={words.noWorkDay} action={setDay}>
+            {words.noWorkDayText}
           </EmptyState>
         ) : (
           <WorkDayList {...lists} lines={workDays} join={joinWorkDayAction} />
         )}
       </Section>
-      <Section
-        title="Inspections"
-        note="Two years on a main strap is usual practice and no standard: the maker's instructions come first."
-      >
+      <Section title={words.inspections} note={words.inspectionsNote}>
         {upkeep.length === 0 ? (
-          <EmptyState title="No stands yet">Add stands, and each is listed here with its last look.</EmptyState>
+          <EmptyState title={words.noStand}>{words.noStandText}</EmptyState>
         ) : (
           <UpkeepTable club={slug} lines={upkeep} />
         )}
       </Section>
-      <Section title="Hours" note={`Credited for chores and work days ${yearText}.`}>
-        <Table caption="Hours by member" captionHidden stack={false} className="max-w-md">
+      <Section title={words.hours} note={words.hoursNote(since)}>
+        <Table caption={words.hoursCaption} captionHidden stack={false} className="max-w-md">
           <THead>
-            <Th>Member</Th>
-            <Th align="right">Hours</Th>
+            <Th>{words.member}</Th>
+            <Th align="right">{words.hours}</Th>
           </THead>
           <TBody>
             {hours.map((line) => (
               <Tr key={line.name}>
                 <RowHead>{line.name}</RowHead>
-                <Td label="Hours" align="right">
+                <Td label={words.hours} align="right">
                   {line.hours}
                 </Td>
               </Tr>
@@ -89,7 +89,7 @@ export default clubPage('chores.read', async ({ scope }) => {
         </Table>
       </Section>
       {(done.length > 0 || pastDays.length > 0) && (
-        <Section title="Done lately">
+        <Section title={words.doneLately}>
           {pastDays.length > 0 && <WorkDayList {...lists} lines={pastDays} join={joinWorkDayAction} />}
           <ul className="divide-y divide-rule">
             {done.map((line) => (

@@ -1,6 +1,7 @@
 import { ChoreFormView } from '@/features/chores/components/chore-form';
 import { RemoveButton } from '@/features/chores/components/remove-button';
 import { listWorkers, readChoreForm } from '@/features/chores/reads';
+import { CHORE_PAGE_WORDS } from '@/features/chores/words/chores';
 import { formClubOf } from '@/features/ground/form-club';
 import { listPlaceChoices } from '@/features/logs/visit-places';
 import { now } from '@/server/clock';
@@ -9,7 +10,9 @@ import { ButtonLink } from '@/ui/button';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { addChoreAction, changeChoreAction, removeChoreAction } from '../actions';
 
-export const metadata = { title: 'Chore' };
+const words = CHORE_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('chores.write', async ({ scope, params }) => {
   const { slug, name } = scope.club;
@@ -17,8 +20,8 @@ export default clubPage('chores.write', async ({ scope, params }) => {
   if (line.done !== null) {
     return (
       <>
-        <PageTitle over={name} title={line.title} lead={`Done ${line.done}.`} />
-        <ButtonLink href={`/clubs/${slug}/chores`}>Back to the chores</ButtonLink>
+        <PageTitle over={name} title={line.title} lead={words.done(line.done)} />
+        <ButtonLink href={`/clubs/${slug}/chores`}>{words.back}</ButtonLink>
       </>
     );
   }
@@ -36,16 +39,16 @@ export default clubPage('chores.write', async ({ scope, params }) => {
         add={addChoreAction}
         change={changeChoreAction}
       />
-      <Section title="Take it out">
+      <Section title={words.takeOutTitle}>
         <RemoveButton
           club={slug}
           id={id}
-          label="Take out"
-          title="Take this chore out?"
-          done="The chore is taken out"
+          label={words.takeOut}
+          title={words.takeOutQuestion}
+          done={words.takenOut}
           remove={removeChoreAction}
         >
-          <p>It is gone from the list. The audit log keeps that it was there.</p>
+          <p>{words.takeOutText}</p>
         </RemoveButton>
       </Section>
     </>

@@ -1,11 +1,14 @@
 import { readStandUpkeep } from '@/features/chores/reads';
+import { STAND_UPKEEP_WORDS } from '@/features/chores/words/inspections';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { Badge, DefinitionList, PageTitle, Section } from '@/ui/page-parts';
 
-export const metadata = { title: 'Inspections' };
+const words = STAND_UPKEEP_WORDS;
+
+export const metadata = { title: words.title };
 
 const LOOKS = { pass: 'moss', fix_first: 'plain', closed: 'clay' } as const;
 
@@ -14,39 +17,39 @@ export default clubPage('chores.read', async ({ scope, params }) => {
   const { line, history } = await readStandUpkeep(scope, params.stand ?? '', now());
   const inspect = scope.can('inspections.write') && (
     <ButtonLink look="primary" href={`/clubs/${slug}/chores/stands/${line.standId}/inspect`}>
-      Inspect it now
+      {words.inspect}
     </ButtonLink>
   );
   return (
     <>
       <PageTitle
         over={name}
-        title={`Inspections of ${line.name}`}
+        title={words.titleOf(line.name)}
         actions={
           <>
             {inspect}
             <ButtonLink look="quiet" href={`/clubs/${slug}/stands/${line.standId}`}>
-              The stand
+              {words.stand}
             </ButtonLink>
           </>
         }
       />
       {history.some((one) => one.closureOpen) && (
-        <Notice level="stop" title="Closed by an inspection" className="mb-6">
-          It stays closed until a steward opens it again under Closed days.
+        <Notice level="stop" title={words.closed} className="mb-6">
+          {words.closedText}
         </Notice>
       )}
       <DefinitionList
         items={[
-          { term: 'Last result', detail: line.resultText },
-          { term: 'Next look due', detail: line.nextText },
-          { term: 'Main strap', detail: line.strapText },
+          { term: words.last, detail: line.resultText },
+          { term: words.next, detail: line.nextText },
+          { term: words.strap, detail: line.strapText },
         ]}
       />
-      <Section title="History">
+      <Section title={words.history}>
         {history.length === 0 ? (
-          <EmptyState title="Nobody has looked it over yet" action={inspect}>
-            The list takes some ten minutes at the stand.
+          <EmptyState title={words.empty} action={inspect}>
+            {words.emptyText}
           </EmptyState>
         ) : (
           <ul className="divide-y divide-rule">
@@ -57,9 +60,7 @@ export default clubPage('chores.read', async ({ scope, params }) => {
                   <Badge look={LOOKS[one.result]}>{one.resultText}</Badge>
                   <span className="text-ink-soft">{one.byName}</span>
                 </p>
-                {one.found.length > 0 && (
-                  <p>{one.found.map(({ label, answer }) => `${label}: ${answer.toLowerCase()}`).join('; ')}</p>
-                )}
+                {one.found.length > 0 && <p>{words.found(one.found)}</p>}
                 {one.notes && <p className="max-w-prose whitespace-pre-line">{one.notes}</p>}
               </li>
             ))}

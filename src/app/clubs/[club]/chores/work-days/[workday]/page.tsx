@@ -2,25 +2,28 @@ import { CreditFormView } from '@/features/chores/components/credit-form';
 import { RemoveButton } from '@/features/chores/components/remove-button';
 import { WorkDayFormView } from '@/features/chores/components/work-day-form';
 import { readWorkDay } from '@/features/chores/reads';
+import { WORK_DAY_PAGE_WORDS } from '@/features/chores/words/work-days';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { addWorkDayAction, cancelWorkDayAction, changeWorkDayAction, creditWorkDayAction } from '../../actions';
 
-export const metadata = { title: 'Work day' };
+const words = WORK_DAY_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('chores.write', async ({ scope, params }) => {
   const { slug, name } = scope.club;
   const { line, values, cancelled, started, members } = await readWorkDay(scope, params.workday ?? '', now());
   const { id, sequence, ...typed } = values;
-  const title = <PageTitle over={name} title={line.title} lead={`${line.dayText}, ${line.timeText}`} />;
+  const title = <PageTitle over={name} title={line.title} lead={words.lead(line.dayText, line.timeText)} />;
   if (cancelled) {
     return (
       <>
         {title}
-        <p className="mb-5">This work day was called off.</p>
-        <ButtonLink href={`/clubs/${slug}/chores`}>Back to the chores</ButtonLink>
+        <p className="mb-5">{words.calledOff}</p>
+        <ButtonLink href={`/clubs/${slug}/chores`}>{words.back}</ButtonLink>
       </>
     );
   }
@@ -28,11 +31,11 @@ export default clubPage('chores.write', async ({ scope, params }) => {
     <>
       {title}
       {started && (
-        <Section title="Hours" note="Blank: was not there.">
+        <Section title={words.hours} note={words.hoursNote}>
           <CreditFormView club={slug} id={id} members={members} credit={creditWorkDayAction} />
         </Section>
       )}
-      <Section title="Change">
+      <Section title={words.change}>
         <WorkDayFormView
           club={slug}
           values={typed}
@@ -41,16 +44,16 @@ export default clubPage('chores.write', async ({ scope, params }) => {
           change={changeWorkDayAction}
         />
       </Section>
-      <Section title="Call it off">
+      <Section title={words.callOff}>
         <RemoveButton
           club={slug}
           id={id}
-          label="Call it off"
-          title="Call this work day off?"
-          done="The work day is called off"
+          label={words.callOff}
+          title={words.callOffQuestion}
+          done={words.callOffDone}
           remove={cancelWorkDayAction}
         >
-          <p>Calendar feeds show it as cancelled.</p>
+          <p>{words.callOffText}</p>
         </RemoveButton>
       </Section>
     </>

@@ -1,18 +1,15 @@
 import { WorkDayFormView } from '@/features/chores/components/work-day-form';
+import { WORK_DAY_PAGE_WORDS } from '@/features/chores/words/work-days';
 import { EMPTY_WORK_DAY } from '@/features/chores/work-day-schema';
 import { clubPage } from '@/server/doors';
 import { PageTitle } from '@/ui/page-parts';
 import { addWorkDayAction, changeWorkDayAction } from '../../actions';
 
-export const metadata = { title: 'Set a work day' };
+export const metadata = { title: WORK_DAY_PAGE_WORDS.setTitle };
 
 export default clubPage('chores.write', async ({ scope }) => (
   <>
-    <PageTitle
-      over={scope.club.name}
-      title="Set a work day"
-      lead="It appears on the Chores page and in every member's calendar feed."
-    />
+    <PageTitle over={scope.club.name} title={WORK_DAY_PAGE_WORDS.setTitle} lead={WORK_DAY_PAGE_WORDS.setLead} />
     <WorkDayFormView
       club={scope.club.slug}
       values={EMPTY_WORK_DAY}

@@ -1,20 +1,23 @@
 import { InspectionFormView } from '@/features/chores/components/inspection-form';
 import { readStandUpkeep } from '@/features/chores/reads';
+import { INSPECT_PAGE_WORDS } from '@/features/chores/words/inspections';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { saveInspectionAction } from '../../../actions';
 
-export const metadata = { title: 'Inspect a stand' };
+const words = INSPECT_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('inspections.write', async ({ scope, params }) => {
   const { line, form } = await readStandUpkeep(scope, params.stand ?? '', now());
   return (
     <>
-      <PageTitle over={scope.club.name} title={`Inspect ${line.name}`} />
-      <Notice level="caution" title="Harness on from ground to ground" className="mb-6">
-        Look the straps and the tree over from below before you climb. The maker's instructions come before this list.
+      <PageTitle over={scope.club.name} title={words.titleOf(line.name)} />
+      <Notice level="caution" title={words.harness} className="mb-6">
+        {words.harnessText}
       </Notice>
       <InspectionFormView club={scope.club.slug} values={form} save={saveInspectionAction} />
     </>
