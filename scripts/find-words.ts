@@ -22,7 +22,7 @@ const READ_WHOLE =
 const READ_MOSTLY =
   /^(heading|legend|caption|subject|subtitle|detail|description|summary|empty|note|said|text|term|children|\w+(Text|Title|Note|Hint))$/;
 const FOR_MACHINES =
-  /^(className|\w*ClassName|style|d|transform|points|viewBox|preserveAspectRatio|log|href|data-.*|autoComplete|accept|sizes|type)$/;
+  /^(className|\w*ClassName|style|d|transform|points|viewBox|preserveAspectRatio|log|href|data-.*|autoComplete|accept|sizes|type|prodId|[A-Z]\w*-[\w-]*)$/;
 /** Calls whose texts are for us: the log, faults of the program, class names, rules of the browser. */
 const CALLS_FOR_US =
   /^(log\.\w+|console\.\w+|(\w*\.)?sql|joinClasses|Error|RangeError|TypeError|URL|RegExp|Intl\.\w+|matchMedia|.*\.querySelector\w*|.*\.closest)$/;
@@ -47,12 +47,12 @@ const isClasses = (text: string) =>
       (token) => /^[a-z!*[-][\w:[\]()./%!&>*=,#'-]*$/.test(token) && (/[-:[/\d]/.test(token) || BARE_CLASS.test(token)),
     );
 
-/** Values of `Evidence` in core. */
-const CODES = new Set(['our choice', 'club log']);
+/** Values of `Evidence` in core, and the one name that no language changes. */
+const NO_TEXT = new Set(['our choice', 'club log', 'Windrest']);
 
-/** Two words, or one with a capital. */
+/** Two words, or one with a capital; neither markup nor a run of style rules. */
 function looksRead(text: string): boolean {
-  if (CODES.has(text)) return false;
+  if (/^\s*<|^[a-z-]+:\S+;/.test(text)) return false;
   if (/^[A-Z][a-z]+(…|[.!?])?$/.test(text.trim())) return true;
   return /[\p{L}\d,;:)]\s+[\p{L}(]/u.test(text) && /\p{L}{2}/u.test(text) && !isClasses(text);
 }
@@ -60,7 +60,8 @@ function looksRead(text: string): boolean {
 /** Whether a template has words beside its values: ' min late' is one, 'rotate(' is none. */
 function templateReads(node: SyntaxNode): boolean {
   const parts = (node.quasis as { value: { cooked: string } }[]).map((q) => q.value.cooked);
-  if (isClasses(parts.join('x-')) || parts.every((part) => /^[/?#&=\w:.@%-]*$/.test(part))) return false;
+  if (parts[0]?.startsWith('<') || isClasses(parts.join('x-')) || parts.every((part) => /^[/?#&=\w:.@%-]*$/.test(part)))
+    return false;
   const word = /(^|\s|[(,;])\p{L}{2,}[,.;:!?']?(\s|$)|\p{L}{2,}[,.;:!?]?\s|\s\p{L}{2,}|^\p{L}{2,}$/u;
   return parts.some((part) => word.test(part));
 }
@@ -111,7 +112,7 @@ export function eachText(path: string, source: string, see: (node: SyntaxNode, t
       return;
     }
     if (node.type === 'Literal') {
-      if (typeof value !== 'string' || outer === 'none') return;
+      if (typeof value !== 'string' || outer === 'none' || NO_TEXT.has(value)) return;
       const reads = outer === 'look' ? looksRead(value) : /\p{L}{2}/u.test(value);
       if (reads && !(outer === 'most' && /^[a-z_-]+$/.test(value))) see(node, value);
       return;

@@ -1,9 +1,11 @@
 import { beforeEach, describe, expect, it } from 'vitest';
 import { changeUnitsAction } from '@/app/(account)/account/actions';
 import { readMyUnits } from '@/features/accounts/reads';
+import { bookSit } from '@/features/bookings/book-sit';
 import { readSits } from '@/features/sits/reads';
 import { findScope } from '@/server/scope';
-import { addMember, makeClub, TEST_NOW, type TestClub, type TestMember } from '../helpers/make-club';
+import { bookingRows, wanted } from '../helpers/book';
+import { addMember, addStand, makeClub, TEST_NOW, type TestClub, type TestMember } from '../helpers/make-club';
 import { inRequest } from '../helpers/request';
 import { MORNING, steady } from '../helpers/sits-club';
 
@@ -39,5 +41,19 @@ describe('units of one’s own', () => {
     expect(await readMyUnits({ id: ann.userId })).toBe('club');
     const answer = await choose('furlongs');
     expect(answer).toMatchObject({ ok: false, error: { code: 'invalid' } });
+  });
+
+  it('are those of the reader in a mail of a sit, whoever booked it, and the zone is named', async () => {
+    const standId = await addStand(club, { name: 'Oak Ladder' });
+    await choose('metric');
+    const scope = await findScope(club.slug, ann.userId);
+    if (!scope) throw new Error('Ann is no member.');
+    await bookSit(scope, wanted(standId, { memberId: bert.id }), TEST_NOW);
+    await bookSit(scope, wanted(standId, { windows: 'evening' }), TEST_NOW);
+    const { mail } = await bookingRows(club.id);
+    const clubTime = (name: string) =>
+      /^Club time: (.*)$/m.exec(mail.find((one) => one.toName === name)?.message?.text ?? '')?.[1];
+    expect(clubTime('Bert Hale')).toMatch(/^\d{1,2}:\d\d AM to \d{1,2}:\d\d AM \(America\/New York\)$/);
+    expect(clubTime('Ann Roe')).toMatch(/^\d\d:\d\d to \d\d:\d\d \(America\/New York\)$/);
   });
 });

@@ -9,12 +9,14 @@ import { findSit, findSitByRequest, insertSit, type SitDetail } from './data';
 import { queueSitMail } from './sit-mails';
 import type { BookSitInput } from './sit-schema';
 import { dayAndWindow, windowsHeld } from './sit-words';
+import { SIT_AUDIT } from './words/audit';
+import { SIT_ERRORS } from './words/errors';
 
 /** Books a sit inside a change of which it is a part, for oneself or, with the permission, for another. */
 export async function bookSitIn(tx: Tx, scope: ClubScope, input: BookSitInput, now: number): Promise<SitDetail> {
   const memberId = input.memberId ?? scope.member.id;
   if (memberId !== scope.member.id && !scope.can('sits.book_for_others')) {
-    throw new AppError('forbidden', 'Only a club admin books for another member.');
+    throw new AppError('forbidden', SIT_ERRORS.onlyAdminBooks);
   }
   return placeSitIn(tx, scope, input, now);
 }
@@ -26,7 +28,7 @@ export async function placeSitIn(tx: Tx, scope: ClubScope, input: BookSitInput, 
   const before = await findSitByRequest(scope, requestKey, tx);
   if (before) {
     if (before.bookedBy === scope.member.id) return before;
-    throw new AppError('conflict', 'This form was sent before by somebody else. Reload the page and try again.');
+    throw new AppError('conflict', SIT_ERRORS.sentBefore);
   }
   const checked = await checkSit(scope, tx, { ...chosen, memberId }, { now, exceptSitId: null });
   refuseIfAny(checked.refusals);
@@ -54,13 +56,13 @@ export async function placeSitIn(tx: Tx, scope: ClubScope, input: BookSitInput, 
       action: 'sit.booked',
       subjectType: 'sit',
       subjectId: row.id,
-      summary: `Booked ${standName} for ${memberName}: ${dayAndWindow(row.day, row.windows, true)}.`,
+      summary: SIT_AUDIT.booked(standName, memberName, dayAndWindow(row.day, row.windows, true)),
       detail: { ...chosen, memberId, startAt, endAt },
     },
     now,
   );
   const sit = await findSit(scope, row.id, tx);
-  if (!sit) throw new AppError('internal', 'The sit could not be saved. Try again.', { log: `no row for ${row.id}` });
+  if (!sit) throw new AppError('internal', SIT_ERRORS.notSaved, { log: `no row for ${row.id}` });
   await queueSitMail(tx, scope, 'booked', sit, now);
   return sit;
 }

@@ -22,6 +22,7 @@ import {
   type MemberForRules,
 } from './rules-data';
 import { windowsHeld } from './sit-words';
+import { SIT_ERRORS } from './words/errors';
 
 export interface ContextInput {
   day: string;
@@ -80,7 +81,7 @@ async function loadGuestParties(scope: ClubScope, host: string, input: ContextIn
 /** The member who answers for guests: a guest's sponsor, else the member. */
 export function hostOf(member: MemberForRules): { id: string; name: string } | null {
   if (member.role !== 'guest') return { id: member.id, name: member.name };
-  return member.sponsorId === null ? null : { id: member.sponsorId, name: member.sponsorName ?? 'The sponsor' };
+  return member.sponsorId === null ? null : { id: member.sponsorId, name: member.sponsorName ?? SIT_ERRORS.sponsor };
 }
 
 export async function loadBookingContext(
@@ -141,7 +142,7 @@ export async function loadBookingContext(
   };
 }
 
-const NOBODY: Pick<MemberForRules, 'id' | 'name' | 'role'> = { id: '', name: 'A member', role: 'member' };
+const NOBODY: Pick<MemberForRules, 'id' | 'name' | 'role'> = { id: '', name: SIT_ERRORS.member, role: 'member' };
 
 /** Every rule that forbids the sit at one stand of the context; empty when it may be booked. */
 export function gatesFor(
@@ -151,7 +152,7 @@ export function gatesFor(
 ): Gate[] {
   const { club, input, rules, member } = context;
   const stand = context.stands.get(standId);
-  if (!stand) return [{ code: 'closed', text: 'This stand is no longer in use.', endsOn: null }];
+  if (!stand) return [{ code: 'closed', text: SIT_ERRORS.standGone, endsOn: null }];
   const host = member ? hostOf(member) : null;
   const byGuest = member?.role === 'guest';
   const people = byGuest ? [member.id, ...hunt.guests] : hunt.guests;

@@ -6,6 +6,8 @@ import { deleteClaims, findSigning, findSit, type SitDetail, updateSit } from '.
 import { queueSitMail } from './sit-mails';
 import type { CancelSitInput } from './sit-schema';
 import { clockText, dayAndWindow } from './sit-words';
+import { SIT_AUDIT } from './words/audit';
+import { SIT_ERRORS } from './words/errors';
 
 /** Frees the claims and keeps the record, inside a change of which it is a part (a member removed, a day closed). */
 export async function cancelSitIn(
@@ -32,7 +34,7 @@ export async function cancelSitIn(
       action: 'sit.cancelled',
       subjectType: 'sit',
       subjectId: sit.id,
-      summary: `Cancelled the sit of ${sit.memberName} at ${sit.standName}: ${dayAndWindow(sit.day, sit.windows, true)}.`,
+      summary: SIT_AUDIT.cancelled(sit.memberName, sit.standName, dayAndWindow(sit.day, sit.windows, true)),
       detail: { reason, standId: sit.standId, memberId: sit.memberId, day: sit.day, windows: sit.windows },
     },
     now,
@@ -46,8 +48,7 @@ export async function cancelSitIn(
 export async function refuseIfSigned(scope: ClubScope, sit: SitDetail, tx: Tx): Promise<void> {
   const signing = await findSigning(scope, sit.id, tx);
   if (signing === 'none') return;
-  const how = signing === 'in' ? 'is signed in there: sign out on the board' : 'has sat there: it stays on record';
-  throw new AppError('conflict', `${sit.memberName} ${how}.`);
+  throw new AppError('conflict', SIT_ERRORS[signing === 'in' ? 'signedInThere' : 'hasSatThere'](sit.memberName));
 }
 
 /** One's own, or with the permission anybody's and then with a reason. Cancelling twice changes nothing. */
@@ -57,15 +58,15 @@ export async function cancelSit(scope: ClubScope, input: CancelSitInput, now: nu
     if (!sit) throw notFound();
     const own = sit.memberId === scope.member.id;
     if (!own && !scope.can('sits.cancel_any')) {
-      throw new AppError('forbidden', `This is ${sit.memberName}'s sit. Only they or a club admin can cancel it.`);
+      throw new AppError('forbidden', SIT_ERRORS.cancelOnlyOwn(sit.memberName));
     }
     if (sit.status !== 'booked') return sit;
     if (sit.endAt <= now) {
-      throw new AppError('conflict', `This sit ended at ${clockText(sit.endAt, scope.club)}: it stays on record.`);
+      throw new AppError('conflict', SIT_ERRORS.cancelEnded(clockText(sit.endAt, scope.club)));
     }
     await refuseIfSigned(scope, sit, tx);
     if (!own && input.reason === '') {
-      const message = `Say why: ${sit.memberName} is told the reason.`;
+      const message = SIT_ERRORS.sayWhy(sit.memberName);
       throw new AppError('invalid', message, { fields: { reason: message } });
     }
     return cancelSitIn(tx, scope, sit, input.reason === '' ? null : input.reason, now);

@@ -10,21 +10,20 @@ import { deleteClaims, findSit, type SitDetail, updateSit } from './data';
 import { queueSitMail } from './sit-mails';
 import type { ChangeSitInput } from './sit-schema';
 import { clockText, dayAndWindow, windowsHeld } from './sit-words';
+import { SIT_AUDIT } from './words/audit';
+import { SIT_ERRORS } from './words/errors';
 
 function refuseChange(scope: ClubScope, sit: SitDetail, sequence: number, now: number): void {
   if (sit.memberId !== scope.member.id && !scope.can('sits.book_for_others')) {
-    throw new AppError('forbidden', `This is ${sit.memberName}'s sit. Only they or a club admin can change it.`);
+    throw new AppError('forbidden', SIT_ERRORS.changeOnlyOwn(sit.memberName));
   }
-  if (sit.status === 'cancelled') throw new AppError('conflict', 'This sit was cancelled. Book it anew.');
-  if (sit.status === 'lapsed') throw new AppError('conflict', 'This sit lapsed, unsigned. Book it anew if it is free.');
+  if (sit.status === 'cancelled') throw new AppError('conflict', SIT_ERRORS.cancelled);
+  if (sit.status === 'lapsed') throw new AppError('conflict', SIT_ERRORS.lapsed);
   if (sit.endAt <= now) {
-    throw new AppError(
-      'conflict',
-      `This sit ended at ${clockText(sit.endAt, scope.club)}: it stays on record as it is.`,
-    );
+    throw new AppError('conflict', SIT_ERRORS.changeEnded(clockText(sit.endAt, scope.club)));
   }
   if (sit.sequence !== sequence) {
-    throw new AppError('conflict', 'This sit was changed after you opened it. Reload the page to see it as it is now.');
+    throw new AppError('conflict', SIT_ERRORS.changedSince);
   }
 }
 
@@ -61,7 +60,13 @@ export async function changeSit(scope: ClubScope, input: ChangeSitInput, now: nu
         action: 'sit.changed',
         subjectType: 'sit',
         subjectId: sit.id,
-        summary: `Changed the sit of ${sit.memberName} at ${sit.standName}, ${dayAndWindow(sit.day, sit.windows, true)}: now ${checked.standName}, ${dayAndWindow(chosen.day, chosen.windows, true)}.`,
+        summary: SIT_AUDIT.changed(
+          sit.memberName,
+          sit.standName,
+          dayAndWindow(sit.day, sit.windows, true),
+          checked.standName,
+          dayAndWindow(chosen.day, chosen.windows, true),
+        ),
         detail: {
           before: Object.fromEntries(changed.map((name) => [name, sit[name]])),
           after: Object.fromEntries(changed.map((name) => [name, chosen[name]])),

@@ -9,6 +9,7 @@ import { guestMemberGates } from './guest-member-gates';
 import { guestKey } from './guest-parties';
 import { listMembersForRules } from './rules-data';
 import { type SitWindows, windowsHeld } from './sit-words';
+import { SIT_ERRORS } from './words/errors';
 
 export interface WantedSit {
   memberId: string;
@@ -44,19 +45,18 @@ function seatRefusals(context: BookingContext, wanted: WantedSit, standName: str
   const seats = context.seats.get(wanted.standId) ?? 1;
   const people = wanted.guests.length + 1;
   if (wanted.guests.length === 0 || people <= seats) return [];
-  const has = `${seats} ${seats === 1 ? 'seat' : 'seats'}`;
-  return [{ about: 'guests', text: `${standName} has ${has}, and this sit needs ${people}.` }];
+  return [{ about: 'guests', text: SIT_ERRORS.seats(standName, seats, people) }];
 }
 
 /** Guests with an account: in the club, and within the dates of their invitation. */
 async function guestRefusals(scope: ClubScope, tx: Tx, wanted: WantedSit): Promise<Refusal[]> {
   const ids = wanted.guests.flatMap((guest) => guest.memberId ?? []);
   if (new Set(wanted.guests.map(guestKey)).size < wanted.guests.length) {
-    throw invalid('guests', 'A guest is named twice.');
+    throw invalid('guests', SIT_ERRORS.guestNamedTwice);
   }
-  if (ids.includes(wanted.memberId)) throw invalid('guests', 'Nobody can be their own guest.');
+  if (ids.includes(wanted.memberId)) throw invalid('guests', SIT_ERRORS.ownGuest);
   const found = await listMembersForRules(scope, ids, tx);
-  if (found.length < ids.length) throw invalid('guests', 'A guest is no longer in the club. Name them by hand.');
+  if (found.length < ids.length) throw invalid('guests', SIT_ERRORS.guestGone);
   return found
     .flatMap((member) => guestMemberGates(member, wanted.day))
     .map((gate) => ({ about: 'guests', text: gate.text }));
@@ -73,10 +73,10 @@ export async function checkSit(
   const windows = windowsHeld(wanted.windows);
   const context = await loadBookingContext(scope, { day, windows, memberId, standIds: [standId], ...more }, tx);
   const stand = context.stands.get(standId);
-  if (!stand) throw invalid('standId', 'This stand is not in use. Choose another.');
-  if (!context.member) throw invalid('memberId', 'This person is not a member of the club.');
+  if (!stand) throw invalid('standId', SIT_ERRORS.standNotInUse);
+  if (!context.member) throw invalid('memberId', SIT_ERRORS.notMember);
   if (wanted.approachId !== null && !context.waysIn.some((way) => way.id === wanted.approachId)) {
-    throw invalid('approachId', `This is no way in to ${stand.name}. Choose another.`);
+    throw invalid('approachId', SIT_ERRORS.noWay(stand.name));
   }
   const gates = gatesFor(context, standId, { weapon: wanted.weapon, guests: wanted.guests.map(guestKey) });
   return {
@@ -99,9 +99,5 @@ export function refuseIfAny(refusals: Refusal[]): void {
 
 /** What a person is told when the index of claims, and no rule, stopped a sit. */
 export function claimConflict(holders: { standName: string; memberName: string }[], day: string): AppError {
-  const held = holders.map(({ standName, memberName }) => `${memberName} has ${standName}`).join(', ');
-  return new AppError(
-    'conflict',
-    `The stand is taken on ${formatDay(day)}: ${held || 'somebody was a moment quicker'}.`,
-  );
+  return new AppError('conflict', SIT_ERRORS.taken(formatDay(day), holders));
 }

@@ -17,6 +17,8 @@ function selectSits(from: ReadFrom) {
       standLon: stands.lon,
       memberName: users.name,
       memberEmail: users.email,
+      /** null: as the club has it. */
+      memberUnits: users.units,
       approachName: approaches.name,
       parkingName: parkings.name,
     })

@@ -7,7 +7,8 @@ import type { ClubScope } from '@/server/scope';
 import type { SitDetail } from './data';
 import { sitCalendar } from './sit-calendar';
 import { fullEntry, wayInText } from './sit-entry';
-import { dayAndWindow, spanText } from './sit-words';
+import { dayAndWindow, spanText, zoneText } from './sit-words';
+import { SIT_MAIL_WORDS } from './words/mails';
 
 export type SitMail = 'booked' | 'changed' | 'cancelled' | 'lapsed';
 
@@ -17,37 +18,30 @@ function senderAddress(): string {
 }
 
 function opening(scope: ClubScope, kind: SitMail, sit: SitDetail): string {
-  const own = sit.memberId === scope.member.id;
-  const who = own ? 'You' : scope.member.name;
-  if (kind === 'booked') return own ? `You booked ${sit.standName}.` : `${who} booked ${sit.standName} for you.`;
-  if (kind === 'changed') return `${who} changed your sit. This is how it stands now.`;
-  if (kind === 'lapsed') {
-    const minutes = scope.club.rules.holdMinutes ?? 0;
-    return `Your sit at ${sit.standName} has lapsed: nobody signed in within ${minutes} minutes. The stand is free again.`;
-  }
-  const reason = sit.cancelReason ? ` The reason given: ${sit.cancelReason}` : '';
-  return `${who} cancelled your sit at ${sit.standName}.${reason}`;
+  const by = sit.memberId === scope.member.id ? null : scope.member.name;
+  if (kind === 'lapsed') return SIT_MAIL_WORDS.lapsed(sit.standName, scope.club.rules.holdMinutes ?? 0);
+  if (kind === 'cancelled') return SIT_MAIL_WORDS.cancelled(by, sit.standName, sit.cancelReason);
+  return SIT_MAIL_WORDS[kind](by, sit.standName);
 }
+
+/** Whoever reads the mail has units of their own, which whoever caused it need not share. */
+const readersClub = ({ club }: ClubScope, sit: SitDetail) => ({ ...club, units: sit.memberUnits ?? club.clubUnits });
 
 function facts(scope: ClubScope, sit: SitDetail): { label: string; value: string }[] {
   const way = wayInText(sit);
+  const span = spanText(sit.startAt, sit.endAt, readersClub(scope, sit));
   return [
-    { label: 'Stand', value: sit.standName },
-    { label: 'When', value: dayAndWindow(sit.day, sit.windows, true) },
-    { label: 'Club time', value: spanText(sit.startAt, sit.endAt, scope.club) },
-    { label: 'Weapon', value: weaponWord(sit.weapon) },
-    ...(way === null ? [] : [{ label: 'Way in', value: way }]),
-    ...(sit.guests.length === 0 ? [] : [{ label: 'Guests', value: sit.guests.map((guest) => guest.name).join(', ') }]),
-    ...(sit.note === '' ? [] : [{ label: 'Note', value: sit.note }]),
+    { label: SIT_MAIL_WORDS.stand, value: sit.standName },
+    { label: SIT_MAIL_WORDS.when, value: dayAndWindow(sit.day, sit.windows, true) },
+    { label: SIT_MAIL_WORDS.clubTime, value: `${span} (${zoneText(scope.club.zone)})` },
+    { label: SIT_MAIL_WORDS.weapon, value: weaponWord(sit.weapon) },
+    ...(way === null ? [] : [{ label: SIT_MAIL_WORDS.wayIn, value: way }]),
+    ...(sit.guests.length === 0
+      ? []
+      : [{ label: SIT_MAIL_WORDS.guests, value: sit.guests.map((guest) => guest.name).join(', ') }]),
+    ...(sit.note === '' ? [] : [{ label: SIT_MAIL_WORDS.note, value: sit.note }]),
   ];
 }
-
-const SUBJECTS: Record<SitMail, string> = {
-  booked: 'Sit booked',
-  changed: 'Sit changed',
-  cancelled: 'Sit cancelled',
-  lapsed: 'Sit lapsed',
-};
 
 /** Tells the member whose sit it is, with an entry for the calendar. */
 export async function queueSitMail(
@@ -66,8 +60,8 @@ export async function queueSitMail(
     clubName: club.name,
     paragraphs: [opening(scope, kind, sit)],
     facts: facts(scope, sit),
-    button: { label: 'Open my sits', url: `${env.appUrl}/clubs/${club.slug}/my-sits` },
-    footer: 'You get this because the sit is yours.',
+    button: { label: SIT_MAIL_WORDS.button, url: `${env.appUrl}/clubs/${club.slug}/my-sits` },
+    footer: SIT_MAIL_WORDS.footer,
   });
   await queueMail(
     tx,
@@ -76,7 +70,7 @@ export async function queueSitMail(
       kind: `sit.${kind}`,
       dedupeKey: `sit.${kind}:${sit.id}:${sit.sequence}`,
       to,
-      subject: `${SUBJECTS[kind]}: ${sit.standName}, ${dayAndWindow(sit.day, sit.windows)}`,
+      subject: SIT_MAIL_WORDS.subjects[kind](sit.standName, dayAndWindow(sit.day, sit.windows)),
       text,
       html,
       calendar: {

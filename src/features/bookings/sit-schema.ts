@@ -2,20 +2,21 @@ import { z } from 'zod';
 import { isDay } from '@/core/day-time';
 import { WEAPONS } from '@/core/types';
 import { SIT_WINDOWS } from './sit-words';
+import { SIT_FIELD_ERRORS } from './words/errors';
 
 /** Ids are told apart by the database; this only keeps nonsense out of it. */
-const id = z.string().trim().min(1, 'Choose one.').max(60, 'Choose one of the list.');
+const id = z.string().trim().min(1, SIT_FIELD_ERRORS.chooseOne).max(60, SIT_FIELD_ERRORS.notListed);
 
 /** A choice that may be left open: an empty select sends ''. */
 const optionalId = z
   .string()
   .trim()
-  .max(60, 'Choose one of the list.')
+  .max(60, SIT_FIELD_ERRORS.notListed)
   .nullish()
   .transform((value) => value || null);
 
 const guest = z.object({
-  name: z.string().trim().min(1, "Write the guest's name.").max(60, 'A name has 60 characters at most.'),
+  name: z.string().trim().min(1, SIT_FIELD_ERRORS.guestName).max(60, SIT_FIELD_ERRORS.nameLong),
   memberId: optionalId,
 });
 
@@ -23,14 +24,14 @@ const chosen = {
   standId: id,
   day: z
     .string()
-    .refine(isDay, 'Write a day as YYYY-MM-DD.')
-    .refine((day) => !isDay(day) || (day >= '2000-01-01' && day <= '2099-12-31'), 'Choose a day of this century.'),
-  windows: z.enum(SIT_WINDOWS, { error: 'Choose morning, evening or all day.' }),
-  weapon: z.enum(WEAPONS, { error: 'Choose a weapon.' }),
+    .refine(isDay, SIT_FIELD_ERRORS.day)
+    .refine((day) => !isDay(day) || (day >= '2000-01-01' && day <= '2099-12-31'), SIT_FIELD_ERRORS.dayFar),
+  windows: z.enum(SIT_WINDOWS, { error: SIT_FIELD_ERRORS.windows }),
+  weapon: z.enum(WEAPONS, { error: SIT_FIELD_ERRORS.weapon }),
   /** null: no way in is named. */
   approachId: optionalId,
-  guests: z.array(guest).max(10, 'Name ten guests at most.').default([]),
-  note: z.string().trim().max(500, 'A note has 500 characters at most.').default(''),
+  guests: z.array(guest).max(10, SIT_FIELD_ERRORS.guests).default([]),
+  note: z.string().trim().max(500, SIT_FIELD_ERRORS.noteLong).default(''),
 };
 
 export const bookSitSchema = z.object({
@@ -38,7 +39,7 @@ export const bookSitSchema = z.object({
   /** Left out: for oneself. */
   memberId: optionalId,
   /** One for each form opened, so that a second press cannot book twice. */
-  requestKey: z.guid('Reload the page and try again.'),
+  requestKey: z.guid(SIT_FIELD_ERRORS.reload),
 });
 export type BookSitInput = z.output<typeof bookSitSchema>;
 export type BookSitValues = z.input<typeof bookSitSchema>;
@@ -47,14 +48,14 @@ export const changeSitSchema = z.object({
   ...chosen,
   sitId: id,
   /** The sit's sequence when the form was opened. */
-  sequence: z.int('Reload the page and try again.').min(0),
+  sequence: z.int(SIT_FIELD_ERRORS.reload).min(0),
 });
 export type ChangeSitInput = z.output<typeof changeSitSchema>;
 export type ChangeSitValues = z.input<typeof changeSitSchema>;
 
 export const cancelSitSchema = z.object({
   sitId: id,
-  reason: z.string().trim().max(200, 'A reason has 200 characters at most.').default(''),
+  reason: z.string().trim().max(200, SIT_FIELD_ERRORS.reasonLong).default(''),
 });
 export type CancelSitInput = z.output<typeof cancelSitSchema>;
 export type CancelSitValues = z.input<typeof cancelSitSchema>;

@@ -11,6 +11,7 @@ import { Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { type CancelSitValues, cancelSitSchema } from '../sit-schema';
 import type { SavedSit } from '../sit-view';
+import { CANCEL_SIT_WORDS } from '../words/screens';
 
 export type CancelAction = (club: string, values: CancelSitValues) => Promise<ActionResult<SavedSit>>;
 
@@ -30,7 +31,7 @@ function CancelSitForm({ club, cancel, sit, memberName, onDone }: CancelSitProps
     defaultValues: { sitId: sit.id, reason: '' },
     submit: (values: CancelSitValues) => cancel(club, values),
     onDone: async () => {
-      toast({ title: 'Sit cancelled', text: `${sit.standName}, ${sit.whenText}, is free again.` });
+      toast({ title: CANCEL_SIT_WORDS.done, text: CANCEL_SIT_WORDS.doneText(sit.standName, sit.whenText) });
       onDone();
       await queries.invalidateQueries();
     },
@@ -38,21 +39,18 @@ function CancelSitForm({ club, cancel, sit, memberName, onDone }: CancelSitProps
   return (
     <form {...formProps} className="flex flex-col gap-4">
       <FormErrorSummary errors={errors} />
-      <p>
-        {sit.standName}, {sit.whenText}. The stand is free again at once. The sit stays on record as cancelled
-        {memberName ? `, and ${memberName} is told by e-mail.` : '.'}
-      </p>
+      <p>{CANCEL_SIT_WORDS.what(sit.standName, sit.whenText, memberName)}</p>
       <Textarea
-        label="Reason"
+        label={CANCEL_SIT_WORDS.reason}
         optional={!memberName}
         rows={2}
         maxLength={200}
         error={errorOf('reason')}
         {...register('reason')}
       />
-      <SubmitRow label="Cancel the sit" look="danger" pending={pending}>
+      <SubmitRow label={CANCEL_SIT_WORDS.cancelSit} look="danger" pending={pending}>
         <DialogClose>
-          <Button>Keep the sit</Button>
+          <Button>{CANCEL_SIT_WORDS.keep}</Button>
         </DialogClose>
       </SubmitRow>
     </form>
@@ -61,11 +59,11 @@ function CancelSitForm({ club, cancel, sit, memberName, onDone }: CancelSitProps
 
 export function CancelSitDialog({ trigger, ...props }: CancelSitProps & { trigger?: ReactNode }) {
   const [open, setOpen] = useState(false);
-  const label = `Cancel ${props.sit.standName}, ${props.sit.whenText}`;
+  const label = CANCEL_SIT_WORDS.cancelLabel(props.sit.standName, props.sit.whenText);
   return (
     <Dialog
-      title={props.memberName ? `Cancel the sit of ${props.memberName}` : 'Cancel this sit'}
-      trigger={trigger ?? <Button aria-label={label}>Cancel</Button>}
+      title={props.memberName ? CANCEL_SIT_WORDS.cancelSit2(props.memberName) : CANCEL_SIT_WORDS.title}
+      trigger={trigger ?? <Button aria-label={label}>{CANCEL_SIT_WORDS.cancel}</Button>}
       open={open}
       onOpenChange={setOpen}
     >

@@ -15,6 +15,7 @@ import type { SitOptions } from '../reads';
 import { type ChangeSitValues, changeSitSchema } from '../sit-schema';
 import type { SavedSit, SitView } from '../sit-view';
 import { SIT_WINDOW_WORDS, SIT_WINDOWS } from '../sit-words';
+import { CHANGE_SIT_WORDS } from '../words/screens';
 import { GuestFields } from './guest-fields';
 
 export type ChangeAction = (club: string, values: ChangeSitValues) => Promise<ActionResult<SavedSit>>;
@@ -46,7 +47,7 @@ function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & 
     },
     submit: (values: ChangeSitValues) => change(club, values),
     onDone: async (saved: SavedSit) => {
-      toast({ title: 'Sit changed', text: `${saved.standName}, ${saved.whenText}, ${saved.timeText}.` });
+      toast({ title: CHANGE_SIT_WORDS.done, text: `${saved.standName}, ${saved.whenText}, ${saved.timeText}.` });
       onDone();
       await queries.invalidateQueries();
     },
@@ -58,25 +59,31 @@ function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & 
 
   return (
     <form {...formProps} className="flex flex-col gap-4">
-      <FormErrorSummary errors={errors} title="This change cannot be made" />
+      <FormErrorSummary errors={errors} title={CHANGE_SIT_WORDS.failed} />
       <Select
-        label="Stand"
+        label={CHANGE_SIT_WORDS.standId}
         options={options.stands.map((one) => ({ value: one.id, label: one.name }))}
         error={errorOf('standId')}
         {...register('standId', { onChange: () => form.setValue('approachId', '') })}
       />
-      <DateInput label="Day" required error={errorOf('day')} {...register('day')} />
-      <RadioCards label="Window" across choices={WINDOW_CHOICES} error={errorOf('windows')} {...register('windows')} />
+      <DateInput label={CHANGE_SIT_WORDS.day} required error={errorOf('day')} {...register('day')} />
+      <RadioCards
+        label={CHANGE_SIT_WORDS.windows}
+        across
+        choices={WINDOW_CHOICES}
+        error={errorOf('windows')}
+        {...register('windows')}
+      />
       <Select
-        label="Weapon"
+        label={CHANGE_SIT_WORDS.weapon}
         options={stand?.weapons ?? [{ value: sit.weapon, label: sit.weaponText }]}
         error={errorOf('weapon')}
         {...register('weapon')}
       />
       <Select
-        label="Way in"
+        label={CHANGE_SIT_WORDS.approachId}
         optional
-        placeholder="Not said"
+        placeholder={CHANGE_SIT_WORDS.approachIdPlaceholder}
         options={waysIn.map((way) => ({ value: way.id, label: way.name }))}
         error={errorOf('approachId')}
         {...register('approachId')}
@@ -88,10 +95,17 @@ function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & 
         most={Math.max(0, most)}
         errorOf={errorOf}
       />
-      <Textarea label="Note" optional rows={2} maxLength={500} error={errorOf('note')} {...register('note')} />
-      <SubmitRow label="Save the change" pending={pending}>
+      <Textarea
+        label={CHANGE_SIT_WORDS.note}
+        optional
+        rows={2}
+        maxLength={500}
+        error={errorOf('note')}
+        {...register('note')}
+      />
+      <SubmitRow label={CHANGE_SIT_WORDS.save} pending={pending}>
         <DialogClose>
-          <Button>Keep as it is</Button>
+          <Button>{CHANGE_SIT_WORDS.keep}</Button>
         </DialogClose>
       </SubmitRow>
     </form>
@@ -100,12 +114,12 @@ function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & 
 
 export function ChangeSitDialog(props: ChangeSitProps) {
   const [open, setOpen] = useState(false);
-  const label = `Change ${props.sit.standName}, ${props.sit.whenText}`;
+  const label = CHANGE_SIT_WORDS.changeLabel(props.sit.standName, props.sit.whenText);
   return (
     <Dialog
-      title="Change this sit"
-      description="The club's rules are checked again for the new place and time."
-      trigger={<Button aria-label={label}>Change</Button>}
+      title={CHANGE_SIT_WORDS.title}
+      description={CHANGE_SIT_WORDS.description}
+      trigger={<Button aria-label={label}>{CHANGE_SIT_WORDS.change}</Button>}
       open={open}
       onOpenChange={setOpen}
     >

@@ -4,6 +4,7 @@ import { useId } from 'react';
 import { Button } from '@/ui/button';
 import { FieldGroup } from '@/ui/field';
 import { TextInput } from '@/ui/text-inputs';
+import { GUEST_WORDS } from '../words/screens';
 
 export interface GuestValue {
   name: string;
@@ -28,7 +29,7 @@ export function GuestFields({ guests, onChange, known, most, errorOf }: GuestFie
   const replace = (at: number, name: string) => onChange(guests.map((guest, n) => (n === at ? named(name) : guest)));
 
   return (
-    <FieldGroup label="Guests" optional hint={`At most ${most} at once.`} error={errorOf('guests')}>
+    <FieldGroup label={GUEST_WORDS.guests} optional hint={GUEST_WORDS.guestsHint(most)} error={errorOf('guests')}>
       <datalist id={listId}>
         {known.map((guest) => (
           <option key={guest.id} value={guest.name} />
@@ -39,7 +40,7 @@ export function GuestFields({ guests, onChange, known, most, errorOf }: GuestFie
         <div key={at} className="flex flex-wrap items-end gap-2">
           <TextInput
             name={`guests.${at}.name`}
-            label={`Name of guest ${at + 1}`}
+            label={GUEST_WORDS.name(at + 1)}
             list={listId}
             maxLength={60}
             value={guest.name}
@@ -49,16 +50,16 @@ export function GuestFields({ guests, onChange, known, most, errorOf }: GuestFie
           />
           <Button
             look="quiet"
-            aria-label={`Remove guest ${at + 1}`}
+            aria-label={GUEST_WORDS.removeLabel(at + 1)}
             onClick={() => onChange(guests.filter((_, n) => n !== at))}
           >
-            Remove
+            {GUEST_WORDS.remove}
           </Button>
         </div>
       ))}
       {guests.length < most && (
         <div>
-          <Button onClick={() => onChange([...guests, { name: '', memberId: null }])}>Add a guest</Button>
+          <Button onClick={() => onChange([...guests, { name: '', memberId: null }])}>{GUEST_WORDS.add}</Button>
         </div>
       )}
     </FieldGroup>

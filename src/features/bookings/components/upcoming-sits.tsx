@@ -3,6 +3,7 @@
 import { DefinitionList } from '@/ui/page-parts';
 import type { SitOptions } from '../reads';
 import type { SitView } from '../sit-view';
+import { UPCOMING_SITS_WORDS } from '../words/screens';
 import { type CancelAction, CancelSitDialog } from './cancel-sit-dialog';
 import { type ChangeAction, ChangeSitDialog } from './change-sit-dialog';
 
@@ -16,12 +17,14 @@ interface UpcomingSitsProps {
 
 function factsOf(sit: SitView) {
   return [
-    { term: 'When', detail: sit.whenText },
-    { term: 'Club time', detail: sit.timeText },
-    { term: 'Weapon', detail: sit.weaponText },
-    ...(sit.wayIn ? [{ term: 'Way in', detail: sit.wayIn }] : []),
-    ...(sit.guests.length > 0 ? [{ term: 'Guests', detail: sit.guests.map((guest) => guest.name).join(', ') }] : []),
-    ...(sit.note ? [{ term: 'Note', detail: sit.note }] : []),
+    { term: UPCOMING_SITS_WORDS.when, detail: sit.whenText },
+    { term: UPCOMING_SITS_WORDS.clubTime, detail: sit.timeText },
+    { term: UPCOMING_SITS_WORDS.weapon, detail: sit.weaponText },
+    ...(sit.wayIn ? [{ term: UPCOMING_SITS_WORDS.wayIn, detail: sit.wayIn }] : []),
+    ...(sit.guests.length > 0
+      ? [{ term: UPCOMING_SITS_WORDS.guests, detail: sit.guests.map((guest) => guest.name).join(', ') }]
+      : []),
+    ...(sit.note ? [{ term: UPCOMING_SITS_WORDS.note, detail: sit.note }] : []),
   ];
 }
 

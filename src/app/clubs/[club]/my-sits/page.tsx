@@ -2,6 +2,7 @@ import type { Metadata } from 'next';
 import { PastSits } from '@/features/bookings/components/past-sits';
 import { UpcomingSits } from '@/features/bookings/components/upcoming-sits';
 import { readMySits, readSitOptions } from '@/features/bookings/reads';
+import { MY_SITS_PAGE_WORDS } from '@/features/bookings/words/screens';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -9,22 +10,22 @@ import { EmptyState } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { cancelSitAction, changeSitAction } from '../sit/actions';
 
-export const metadata: Metadata = { title: 'My sits' };
+export const metadata: Metadata = { title: MY_SITS_PAGE_WORDS.title };
 
 export default clubPage('sits.book', async ({ scope }) => {
   const { slug, name } = scope.club;
   const { upcoming, past } = await readMySits(scope, now());
-  const book = <ButtonLink href={`/clubs/${slug}/sit`}>Find a stand</ButtonLink>;
+  const book = <ButtonLink href={`/clubs/${slug}/sit`}>{MY_SITS_PAGE_WORDS.find}</ButtonLink>;
   const calendar = scope.can('feeds.own') && (
     <ButtonLink look="quiet" href={`/clubs/${slug}/calendar`}>
-      Put them in my calendar
+      {MY_SITS_PAGE_WORDS.calendar}
     </ButtonLink>
   );
   return (
     <>
       <PageTitle
         over={name}
-        title="My sits"
+        title={MY_SITS_PAGE_WORDS.title}
         actions={
           <>
             {book}
@@ -32,9 +33,9 @@ export default clubPage('sits.book', async ({ scope }) => {
           </>
         }
       />
-      <Section title="To come">
+      <Section title={MY_SITS_PAGE_WORDS.toCome}>
         {upcoming.length === 0 ? (
-          <EmptyState title="You hold no sit">Choose a day on the list of stands and book one.</EmptyState>
+          <EmptyState title={MY_SITS_PAGE_WORDS.none}>{MY_SITS_PAGE_WORDS.noneText}</EmptyState>
         ) : (
           <UpcomingSits
             club={slug}
@@ -46,7 +47,7 @@ export default clubPage('sits.book', async ({ scope }) => {
         )}
       </Section>
       {past.length > 0 && (
-        <Section title="Past" note="Ended and cancelled sits stay on record.">
+        <Section title={MY_SITS_PAGE_WORDS.past} note={MY_SITS_PAGE_WORDS.pastNote}>
           <PastSits sits={past} />
         </Section>
       )}
