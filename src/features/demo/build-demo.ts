@@ -10,6 +10,7 @@ import { buildLand } from './build-land';
 import { buildLogs } from './build-logs';
 import { buildContacts, buildOutings } from './build-outings';
 import { buildPredictions } from './build-predictions';
+import { buildSetupAnswers } from './build-setup-answers';
 import { buildUpkeep } from './build-upkeep';
 import { buildVisits } from './build-visits';
 import { planComingSits } from './coming-sits';
@@ -43,6 +44,7 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
   const harvests = buildHarvests(taken, club, sitLogs, sits);
   const sitLogVersions = buildLogVersions(taken, sitLogs, sits);
   const { parkings, stands, approaches, features } = ground;
+  const mapItems = buildLand({ today, dice: makeDice(`land ${today}`) }, club);
   return {
     users,
     clubs: [club.row, second.row],
@@ -67,7 +69,8 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
       ...buildAudit(day, club, { ground, closures, sits }),
       ...buildAudit(day, second, { ground: { ...ground, stands: second.stands }, closures: [], sits: [] }),
     ],
-    mapItems: buildLand(day, club),
+    mapItems,
+    setupAnswers: buildSetupAnswers(day, club, ground, mapItems),
     imports: buildImports({ today, dice: makeDice(`imports ${today}`) }, club),
   };
 }

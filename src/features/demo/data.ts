@@ -23,6 +23,7 @@ export async function insertDemo(tx: Tx, rows: DemoRows): Promise<void> {
   await insertAll(tx, schema.approaches, rows.approaches);
   await insertAll(tx, schema.features, rows.features);
   await insertAll(tx, schema.mapItems, rows.mapItems);
+  await insertAll(tx, schema.setupAnswers, rows.setupAnswers);
   await insertAll(tx, schema.imports, rows.imports);
   await insertAll(tx, schema.sits, rows.sits);
   await insertAll(tx, schema.claims, rows.claims);

@@ -11,6 +11,7 @@ export interface DemoRows {
   approaches: (typeof schema.approaches.$inferInsert)[];
   features: (typeof schema.features.$inferInsert)[];
   mapItems: (typeof schema.mapItems.$inferInsert)[];
+  setupAnswers: (typeof schema.setupAnswers.$inferInsert)[];
   imports: (typeof schema.imports.$inferInsert)[];
   sits: (typeof schema.sits.$inferInsert)[];
   claims: (typeof schema.claims.$inferInsert)[];

@@ -30,7 +30,18 @@ export const WATER: readonly DemoFeature[] = [
     notes: "Dug into the timber off the plot's east end: the last drink before dark, the first after light.",
   },
   { name: 'Bench Seep', kind: 'water', shape: { point: [-165, 262] } },
-  { name: 'Barn Pond', kind: 'water', shape: { point: [470, -285] } },
+  {
+    name: 'Barn Pond',
+    kind: 'water',
+    shape: {
+      area: [
+        [458, -292],
+        [474, -298],
+        [484, -284],
+        [470, -274],
+      ],
+    },
+  },
 ];
 
 /** One scrape for each opening; rubs along the lines bucks keep to. */

@@ -3,11 +3,13 @@ import { cropYearOf } from '@/core/map-layers';
 import { chainMovement, type MovementLine, type Stop } from '@/core/movement/chain-movement';
 import { SECTOR_NAMES } from '@/core/sectors';
 import { DEFAULT_SETTINGS } from '@/core/settings';
+import { completeSetup } from '@/core/setup-check/setup-settings';
 import type { WindowName } from '@/core/types';
 import { formatDistance, type Units } from '@/core/units';
 import { loadGround } from '@/features/ground/data';
 import { featuresInYear } from '@/features/ground/features-in-year';
 import { groundToCore } from '@/features/ground/to-core';
+import { getSetupSettings } from '@/features/setup/settings-data';
 import type { ClubScope } from '@/server/scope';
 
 export interface LineView {
@@ -80,8 +82,9 @@ export async function readMovement(scope: ClubScope, now: number): Promise<{ lin
   const today = dayOf(now, club.zone);
   const rows = await loadGround(scope);
   const core = groundToCore(club, { ...rows, features: featuresInYear(rows.features, cropYearOf(today)) });
+  const { own } = await getSetupSettings(scope);
   const month = monthOf(today);
   const features = core.features.filter((f) => f.months.includes(month));
-  const lines = chainMovement({ features, stands: core.stands, scoring: DEFAULT_SETTINGS });
+  const lines = chainMovement({ features, stands: core.stands, scoring: DEFAULT_SETTINGS, setup: completeSetup(own) });
   return { lines: lines.map((line) => lineView(line, club.units)), month };
 }

@@ -1,24 +1,25 @@
 import { fromLocal } from '@/core/geometry';
-import { checkSetup } from '@/core/setup-check/check-setup';
 import type { Finding } from '@/core/setup-check/setup-types';
 import { type Tx, write } from '@/db/client';
 import { addChoreIn } from '@/features/chores/save-chore';
-import { NAME_MAX } from '@/features/ground/read-form';
+import { NAME_MAX, NOTES_MAX } from '@/features/ground/read-form';
 import type { VisitPlace } from '@/features/logs/visit-schema';
 import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
-import { loadSetup } from './load-setup';
+import { checkClub } from './check-club';
 import { deleteSetupAnswer, listSetupAnswers, putSetupAnswer } from './setup-data';
 import type { AcceptFinding, DismissFinding } from './setup-schema';
+import { RECORD_WORDS as W } from './words/answers';
+import { workText } from './work-rules';
 
 /** The finding as it is now: one that went, or whose ground changed since it was read, is not answered blindly. */
 async function needFinding(scope: ClubScope, at: { key: string; print: string }, now: number): Promise<Finding> {
-  const { input } = await loadSetup(scope, now);
-  const finding = checkSetup(input).find(({ key }) => key === at.key);
-  if (!finding) throw new AppError('conflict', 'This finding is gone: the ground has changed. Look at the list again.');
+  const { findings } = await checkClub(scope, now);
+  const finding = findings.find(({ key }) => key === at.key);
+  if (!finding) throw new AppError('conflict', W.gone);
   if (finding.print !== at.print) {
-    throw new AppError('conflict', 'The ground has changed since you opened this page. Look at the finding again.');
+    throw new AppError('conflict', W.changed);
   }
   return finding;
 }
@@ -26,7 +27,7 @@ async function needFinding(scope: ClubScope, at: { key: string; print: string },
 async function refuseAnswered(scope: ClubScope, finding: Finding, tx: Tx): Promise<void> {
   const held = (await listSetupAnswers(scope, tx)).get(finding.key);
   if (held && held.print === finding.print) {
-    throw new AppError('conflict', `${held.byName} has answered this finding already.`);
+    throw new AppError('conflict', W.answeredBy(held.byName));
   }
 }
 
@@ -49,13 +50,13 @@ export async function acceptFinding(scope: ClubScope, input: AcceptFinding, now:
   return write(async (tx) => {
     await refuseAnswered(scope, finding, tx);
     const title = act.text.slice(0, NAME_MAX * 2);
-    const notes = `From the set-up check: ${finding.text}. ${finding.why}`;
+    const notes = W.choreNotes(finding.text, finding.why, workText(scope.club.rules, act.work)).slice(0, NOTES_MAX);
     const place = placeOf(scope, finding);
     const { id } = await addChoreIn(tx, scope, { title, notes, assigneeId: null, place, dueOn: null }, now);
     const { key: findingKey, print, text } = finding;
     const by = { byMemberId: scope.member.id, at: now };
     await putSetupAnswer(scope, tx, { findingKey, print, text, answer: 'chore', reason: '', choreId: id, ...by });
-    await note(scope, tx, { key: findingKey, verb: 'accepted', summary: `Made a chore of a finding: ${text}.` }, now);
+    await note(scope, tx, { key: findingKey, verb: 'accepted', summary: W.accepted(text) }, now);
     return { choreId: id };
   });
 }
@@ -69,7 +70,7 @@ export async function dismissFinding(scope: ClubScope, input: DismissFinding, no
     const by = { byMemberId: scope.member.id, at: now };
     const { reason } = input;
     await putSetupAnswer(scope, tx, { findingKey, print, text, answer: 'dismissed', reason, choreId: null, ...by });
-    await note(scope, tx, { key: findingKey, verb: 'dismissed', summary: `Left a finding: ${text}. ${reason}` }, now);
+    await note(scope, tx, { key: findingKey, verb: 'dismissed', summary: W.dismissed(text, reason) }, now);
     return { key: findingKey };
   });
 }
@@ -80,7 +81,7 @@ export async function reopenFinding(scope: ClubScope, key: string, now: number):
     const held = (await listSetupAnswers(scope, tx)).get(key);
     if (!held) throw notFound();
     await deleteSetupAnswer(scope, tx, key);
-    await note(scope, tx, { key, verb: 'reopened', summary: `Took a finding up again: ${held.text}.` }, now);
+    await note(scope, tx, { key, verb: 'reopened', summary: W.reopened(held.text) }, now);
     return { key };
   });
 }

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { ANSWER_WORDS } from './words/answers';
 
 const key = z.string().min(1).max(200);
 const print = z.string().min(1).max(16);
@@ -14,7 +15,7 @@ export type AcceptFinding = z.output<typeof acceptFindingSchema>;
 export const dismissFindingSchema = z.object({
   key,
   print,
-  reason: z.string().trim().min(1, 'Say why it can stay as it is.').max(300, 'Keep it to 300 characters.'),
+  reason: z.string().trim().min(1, ANSWER_WORDS.reasonNeeded).max(300, ANSWER_WORDS.reasonLong),
 });
 export type DismissFinding = z.output<typeof dismissFindingSchema>;
 

@@ -12,6 +12,7 @@ import { Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { FindingView } from '../reads';
 import { type AcceptFinding, type DismissFinding, dismissFindingSchema } from '../setup-schema';
+import { ACCEPT_WORDS as A, DISMISS_WORDS as D, ANSWER_WORDS as W } from '../words/answers';
 
 export interface AnswerProps {
   club: string;
@@ -19,8 +20,6 @@ export interface AnswerProps {
   accept: (club: string, values: AcceptFinding) => Promise<ActionResult<{ choreId: string }>>;
   dismiss: (club: string, values: DismissFinding) => Promise<ActionResult<{ key: string }>>;
 }
-
-const LOST = 'The server could not be reached. Try again.';
 
 /** Makes a chore of the finding, or leaves it with a reason. */
 export function AnswerFinding(props: AnswerProps) {
@@ -38,25 +37,30 @@ function AcceptDialog({ club, finding, accept }: AnswerProps) {
   async function confirm() {
     const values = { key: finding.key, print: finding.print, act: Number(chosen) };
     const answer = await accept(club, values).catch(() => null);
-    if (!answer) return LOST;
+    if (!answer) return W.lost;
     if (!answer.ok) return answer.error.message;
-    toast({ title: 'A chore was made', text: finding.acts[Number(chosen)] ?? '' });
+    toast({ title: A.made, text: finding.acts[Number(chosen)]?.text ?? '' });
   }
   return (
     <ConfirmDialog
-      title="Make a chore of it"
-      confirmLabel="Make the chore"
+      title={A.title}
+      confirmLabel={A.confirm}
       trigger={
         <Button>
-          Make a chore<span className="sr-only">: {finding.text}</span>
+          {A.open}
+          <span className="sr-only">: {finding.text}</span>
         </Button>
       }
       onConfirm={confirm}
     >
       <RadioCards
-        label="What is to be done"
+        label={A.what}
         name={`act-${finding.key}`}
-        choices={finding.acts.map((label, index) => ({ value: String(index), label }))}
+        choices={finding.acts.map(({ text, rule }, index) => ({
+          value: String(index),
+          label: text,
+          note: rule || undefined,
+        }))}
         value={chosen}
         onChange={(event) => setChosen(event.currentTarget.value)}
       />
@@ -68,13 +72,14 @@ function DismissDialog(props: AnswerProps) {
   const [open, setOpen] = useState(false);
   return (
     <Dialog
-      title="Leave it as it is"
-      description="It comes back when the ground it rests on changes."
+      title={D.title}
+      description={D.text}
       open={open}
       onOpenChange={setOpen}
       trigger={
         <Button look="quiet">
-          Leave it<span className="sr-only">: {props.finding.text}</span>
+          {D.open}
+          <span className="sr-only">: {props.finding.text}</span>
         </Button>
       }
     >
@@ -90,15 +95,15 @@ function DismissForm({ club, finding, dismiss, close }: AnswerProps & { close: (
     defaultValues: { key: finding.key, print: finding.print, reason: '' },
     submit: (typed: DismissFinding) => dismiss(club, typed),
     onDone: () => {
-      toast({ title: 'Left as it is' });
+      toast({ title: D.done });
       close();
     },
   });
   return (
     <form {...formProps} className="grid gap-5">
       <FormErrorSummary errors={errors} />
-      <Textarea label="Why it can stay" {...register('reason')} error={errorOf('reason')} />
-      <SubmitRow label="Leave it" pending={pending} pendingLabel="Saving…" />
+      <Textarea label={D.why} {...register('reason')} error={errorOf('reason')} />
+      <SubmitRow label={D.save} pending={pending} pendingLabel={D.saving} />
     </form>
   );
 }
@@ -116,11 +121,12 @@ export function ReopenFinding({ club, finding, reopen }: ReopenProps) {
     setPending(true);
     const answer = await reopen(club, { key: finding.key }).catch(() => null);
     setPending(false);
-    toast(answer?.ok ? { title: 'Back on the list' } : { title: answer?.error.message ?? LOST, level: 'caution' });
+    toast(answer?.ok ? { title: W.back } : { title: answer?.error.message ?? W.lost, level: 'caution' });
   }
   return (
     <Button look="quiet" pending={pending} onClick={() => void run()}>
-      Take it up again<span className="sr-only">: {finding.text}</span>
+      {W.takeUp}
+      <span className="sr-only">: {finding.text}</span>
     </Button>
   );
 }

@@ -7,10 +7,11 @@ import { mapQuery } from '@/features/map/queries';
 import { Button } from '@/ui/button';
 import { ErrorState, Loading } from '@/ui/notices';
 import type { FindingView } from '../reads';
+import { MAP_WORDS as W } from '../words/findings';
 
 const MapCanvas = dynamic(() => import('@/features/map/components/map-canvas').then((part) => part.MapCanvas), {
   ssr: false,
-  loading: () => <Loading label="Unfolding the map" />,
+  loading: () => <Loading label={W.loading} />,
 });
 
 export interface FindingsMapProps {
@@ -21,7 +22,7 @@ export interface FindingsMapProps {
 /** The findings by their numbers on the ground; its code and data come when it is asked for. */
 export function FindingsMap(props: FindingsMapProps) {
   const [open, setOpen] = useState(false);
-  if (!open) return <Button onClick={() => setOpen(true)}>Show them on the map</Button>;
+  if (!open) return <Button onClick={() => setOpen(true)}>{W.open}</Button>;
   return <NumberedMap {...props} />;
 }
 
@@ -33,18 +34,18 @@ function NumberedMap({ club, findings }: FindingsMapProps) {
   );
   if (query.isError) {
     return (
-      <ErrorState title="The map could not be read" action={<Button onClick={() => query.refetch()}>Try again</Button>}>
+      <ErrorState title={W.failed} action={<Button onClick={() => query.refetch()}>{W.again}</Button>}>
         {query.error.message}
       </ErrorState>
     );
   }
-  if (!query.data) return <Loading label="Unfolding the map" />;
+  if (!query.data) return <Loading label={W.loading} />;
   return (
     <MapCanvas
       view={query.data}
       things={query.data.things}
       overlay={overlay}
-      label="Map of the findings, by the numbers of the list"
+      label={W.label}
       className="relative h-96 sm:h-[32rem]"
     />
   );
