@@ -53,6 +53,7 @@ const tables = {
   features: schema.features,
   mapItems: schema.mapItems,
   imports: schema.imports,
+  setupAnswers: schema.setupAnswers,
   sits: schema.sits,
   claims: schema.claims,
   sitLogs: schema.sitLogs,
