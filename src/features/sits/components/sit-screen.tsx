@@ -3,7 +3,7 @@
 import { useQuery } from '@tanstack/react-query';
 import { useEffect, useState } from 'react';
 import { formatDay } from '@/core/day-time';
-import { Button, ButtonLink, TextLink } from '@/ui/button';
+import { Button, ButtonLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import type { SitsAskText } from '../ask-schema';
@@ -70,9 +70,11 @@ export function SitScreen({ ask, initial, openStandId, actions, hunters, may, is
         ))}
         {view.over && <Notice title="This window is over">The list shows how it stood.</Notice>}
         {mine && (
-          <Notice title={`You sit at ${mine.standName}, ${mine.windows === 'all_day' ? 'all day' : mine.windows}`}>
-            <TextLink href={`/clubs/${slug}/my-sits`}>Change or cancel it</TextLink>
-            {!view.over && ', or move to another stand below.'}
+          <Notice
+            title={`You sit at ${mine.standName}, ${mine.windows === 'all_day' ? 'all day' : mine.windows}`}
+            actions={<ButtonLink href={`/clubs/${slug}/my-sits`}>Change or cancel it</ButtonLink>}
+          >
+            {!view.over && 'Or move to another stand below.'}
           </Notice>
         )}
       </div>
