@@ -51,15 +51,17 @@ export interface CheckboxGroupProps extends FieldText, InputShare {
   /** Chosen at first; for a controlled group give `value` and `onChange`. */
   defaultValue?: readonly string[];
   value?: readonly string[];
+  /** One under another, for choices that explain themselves; default side by side where there is room. */
+  stacked?: boolean;
   className?: string;
 }
 
 /** Several of a short list. Spread `register('name')` in: every box gets it and the form's value is a list. */
 export function CheckboxGroup(props: CheckboxGroupProps) {
-  const { label, hint, error, optional, choices, defaultValue, value, className, ...input } = props;
+  const { label, hint, error, optional, choices, defaultValue, value, stacked, className, ...input } = props;
   return (
     <FieldGroup label={label} hint={hint} error={error} optional={optional} className={className}>
-      <div className="flex flex-wrap gap-x-6">
+      <div className={stacked ? 'grid' : 'flex flex-wrap gap-x-6'}>
         {choices.map((choice) => (
           <label key={choice.value} className="flex min-h-11 items-start gap-3 py-2">
             <input
