@@ -112,11 +112,15 @@ export interface TdProps extends ComponentProps<'td'> {
   align?: 'left' | 'right';
 }
 
+/** Where there is nothing to say. A card leaves it out: only a column needs the place. */
+const NOTHING = '–';
+
 export function Td({ label, align = 'left', className, ...rest }: TdProps) {
   return (
     <td
       {...ROLE.cell}
       data-label={label}
+      data-nothing={rest.children === NOTHING || undefined}
       {...rest}
       className={joinClasses('px-2 py-2 first:pl-0 last:pr-0', align === 'right' && 'text-right', className)}
     />
