@@ -1,3 +1,4 @@
+import { SERVER_ERRORS } from '@/server/words';
 /** The closed list of what can go wrong for a person. */
 export const ERROR_CODES = [
   'signed_out',
@@ -38,7 +39,7 @@ export class AppError extends Error {
   }
 }
 
-export const notFound = () => new AppError('not_found', 'There is nothing here, or it is not open to you.');
+export const notFound = () => new AppError('not_found', SERVER_ERRORS.notFound);
 
 /** What a person is told of any error. */
 export interface ErrorBody {

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { isBusy, isUniqueViolation } from '@/db/errors';
+import { SERVER_ERRORS } from '@/server/words';
 import { AppError, type ErrorBody, type FieldErrors } from './errors';
 import { log } from './log';
 
@@ -20,21 +21,21 @@ export function mapError(error: unknown, where: string): ErrorBody {
   }
   if (error instanceof z.ZodError) {
     const fields = fieldsOf(error);
-    const first = Object.values(fields)[0] ?? 'Look at the form again.';
+    const first = Object.values(fields)[0] ?? SERVER_ERRORS.form;
     return {
       code: 'invalid',
-      message: Object.keys(fields).length > 1 ? 'Some entries need another look.' : first,
+      message: Object.keys(fields).length > 1 ? SERVER_ERRORS.entries : first,
       fields,
     };
   }
   if (isUniqueViolation(error)) {
     log.warn({ where, err: error }, 'unique violation');
-    return { code: 'conflict', message: 'Somebody was a moment quicker. Reload the page and try again.' };
+    return { code: 'conflict', message: SERVER_ERRORS.quicker };
   }
   if (isBusy(error)) {
     log.error({ where, err: error }, 'database busy');
-    return { code: 'unavailable', message: 'Many people are saving at once. Try again in a moment.' };
+    return { code: 'unavailable', message: SERVER_ERRORS.busy };
   }
   log.error({ where, err: error }, 'unexpected error');
-  return { code: 'internal', message: 'Something went wrong on our side. Nothing was saved; try again.' };
+  return { code: 'internal', message: SERVER_ERRORS.internal };
 }

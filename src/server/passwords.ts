@@ -11,7 +11,7 @@ export function hashPassword(password: string): Promise<string> {
 let decoy: Promise<string> | undefined;
 
 export async function passwordMatches(stored: string | null, password: string): Promise<boolean> {
-  decoy ??= hashPassword('nobody has this password');
+  decoy ??= hashPassword('nobody-has-this-password');
   const matches = await verify(stored ?? (await decoy), password.normalize('NFKC'));
   return stored !== null && matches;
 }

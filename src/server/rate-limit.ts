@@ -1,6 +1,7 @@
 import { write } from '@/db/client';
 import { countRate } from '@/db/queries/rate-limits';
 import { AppError } from './errors';
+import { SERVER_ERRORS } from './words';
 
 export interface RateRule {
   /** What is counted, such as `sign-in`. */
@@ -20,7 +21,7 @@ export async function takeRate(rule: RateRule, subjects: string[], now: number):
   if (over.length === 0) return;
   const until = Math.max(...over.map((c) => c.windowStartAt + rule.windowMs));
   const minutes = Math.max(1, Math.ceil((until - now) / 60_000));
-  throw new AppError('limit', `Too many tries. Wait ${minutes} minute${minutes === 1 ? '' : 's'} and try again.`, {
+  throw new AppError('limit', SERVER_ERRORS.tooManyTries(minutes), {
     log: `${rule.name} over ${rule.most}`,
   });
 }

@@ -1,6 +1,7 @@
 import type { Tx } from '@/db/client';
 import { findSentRequest, insertSentRequest } from '@/db/queries/sent-requests';
 import type { Sent } from '@/lib/sent-schema';
+import { SERVER_ERRORS } from '@/server/words';
 import { AppError } from './errors';
 import type { ClubScope } from './scope';
 
@@ -35,7 +36,7 @@ export async function noteSent(
 export function pressedAt(sent: Sent | undefined, now: number): number {
   if (!sent) return now;
   if (sent.at < now - DAY_MS) {
-    throw new AppError('conflict', 'This was pressed more than a day ago. Ask an officer to set the board right.');
+    throw new AppError('conflict', SERVER_ERRORS.pressedLongAgo);
   }
   return Math.min(sent.at, now);
 }

@@ -30,6 +30,7 @@ const SIT: SitDetail = {
   standLon: -84.00213,
   memberName: 'Dale Ruck',
   memberEmail: 'dale@example.test',
+  memberUnits: null,
   approachName: 'Creek way',
   parkingName: 'North gate',
 };

@@ -3,6 +3,7 @@ import type { SitDetail } from '@/features/bookings/data';
 import type { EntryText } from '@/features/bookings/sit-calendar';
 import { fullEntry } from '@/features/bookings/sit-entry';
 import { SIT_WINDOW_WORDS } from '@/features/bookings/sit-words';
+import { CALENDAR_ENTRY_WORDS } from './words';
 
 interface Reader {
   memberId: string;
@@ -14,12 +15,13 @@ interface Reader {
 export function entryFor(sit: SitDetail, club: { name: string }, reader: Reader): EntryText {
   if (sit.memberId === reader.memberId) return fullEntry(sit, club, reader.withPlace);
   const description = SIT_WINDOW_WORDS[sit.windows];
-  if (reader.privacy === 'busy_only') return { summary: 'A sit is booked', description, location: null, place: null };
+  if (reader.privacy === 'busy_only')
+    return { summary: CALENDAR_ENTRY_WORDS.booked, description, location: null, place: null };
   if (reader.privacy === 'names_only') {
-    return { summary: `Sit: ${sit.memberName}`, description, location: null, place: null };
+    return { summary: CALENDAR_ENTRY_WORDS.sitOf(sit.memberName), description, location: null, place: null };
   }
   return {
-    summary: `Sit: ${sit.memberName}, ${sit.standName}`,
+    summary: CALENDAR_ENTRY_WORDS.sitOfAt(sit.memberName, sit.standName),
     description,
     location: `${sit.standName}, ${club.name}`,
     place: reader.withPlace ? { lat: sit.standLat, lon: sit.standLon } : null,

@@ -1,9 +1,10 @@
 import { z } from 'zod';
+import { CALENDAR_ERRORS } from './words';
 
 export const FEED_SCOPES = ['own', 'club'] as const;
 export type FeedScope = (typeof FEED_SCOPES)[number];
 
-const scope = z.enum(FEED_SCOPES, { error: 'Choose my sits or the club.' });
+const scope = z.enum(FEED_SCOPES, { error: CALENDAR_ERRORS.scope });
 
 export const makeFeedSchema = z.object({
   scope,

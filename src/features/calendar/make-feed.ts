@@ -6,8 +6,9 @@ import { audit } from '@/server/audit';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { insertFeed, revokeFeeds } from './data';
-import { FEED_NAMES, FEED_PERMISSIONS } from './feed-permission';
+import { FEED_PERMISSIONS } from './feed-permission';
 import type { MakeFeedInput } from './feed-schema';
+import { CALENDAR_AUDIT, CALENDAR_ERRORS, FEED_NAMES } from './words';
 
 export interface MadeFeed {
   /** Shown once: only a hash of its secret is kept. */
@@ -19,10 +20,7 @@ export interface MadeFeed {
 /** Makes a secret address; one made before for the same calendar stops working. */
 export async function makeFeed(scope: ClubScope, input: MakeFeedInput, now: number): Promise<MadeFeed> {
   if (!scope.can(FEED_PERMISSIONS[input.scope])) {
-    throw new AppError(
-      'forbidden',
-      `Your role in ${scope.club.name} does not give you this calendar. Ask a club admin.`,
-    );
+    throw new AppError('forbidden', CALENDAR_ERRORS.notYours(scope.club.name));
   }
   const secret = newSecret();
   const replaced = await write(async (tx) => {
@@ -45,7 +43,7 @@ export async function makeFeed(scope: ClubScope, input: MakeFeedInput, now: numb
         action: before.length > 0 ? 'feed.renewed' : 'feed.made',
         subjectType: 'feed',
         subjectId: id,
-        summary: `${before.length > 0 ? 'Renewed' : 'Made'} a calendar address: ${FEED_NAMES[input.scope]}${input.withPlace ? ', with stand positions' : ''}.`,
+        summary: CALENDAR_AUDIT.made(FEED_NAMES[input.scope], before.length > 0, input.withPlace),
         detail: { scope: input.scope, withPlace: input.withPlace, replaced: before },
       },
       now,

@@ -9,7 +9,8 @@ import { notFound } from '@/server/errors';
 import { systemScopeById } from '@/server/scope';
 import { findLiveFeed } from './data';
 import { entryFor } from './entry-for';
-import { FEED_NAMES, FEED_PERMISSIONS } from './feed-permission';
+import { FEED_PERMISSIONS } from './feed-permission';
+import { CALENDAR_ENTRY_WORDS, FEED_NAMES } from './words';
 
 /** Cancelled sits stay this long, so that a calendar that looks seldom still learns of them. */
 const DAYS_BACK = 120;
@@ -22,7 +23,7 @@ function workDayEntry(row: WorkDayRow, club: { name: string }): CalendarEntry {
     sit: { ...row, status: row.cancelledAt === null ? 'booked' : 'cancelled' },
     shown: {
       summary: `${row.title}, ${club.name}`,
-      description: [meet && `Meet at ${meet}`, notes].filter(Boolean).join('\n'),
+      description: [meet && CALENDAR_ENTRY_WORDS.meetAt(meet), notes].filter(Boolean).join('\n'),
       location: meet || null,
       place: null,
     },

@@ -3,8 +3,8 @@ import { audit } from '@/server/audit';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { revokeFeeds } from './data';
-import { FEED_NAMES } from './feed-permission';
 import type { RevokeFeedInput } from './feed-schema';
+import { CALENDAR_AUDIT, FEED_NAMES } from './words';
 
 /** Turns the address off for good. */
 export async function revokeFeed(scope: ClubScope, input: RevokeFeedInput, now: number): Promise<{ revoked: number }> {
@@ -20,7 +20,7 @@ export async function revokeFeed(scope: ClubScope, input: RevokeFeedInput, now: 
           action: 'feed.revoked',
           subjectType: 'feed',
           subjectId: id,
-          summary: `Turned off a calendar address: ${FEED_NAMES[input.scope]}.`,
+          summary: CALENDAR_AUDIT.turnedOff(FEED_NAMES[input.scope]),
           detail: { scope: input.scope },
         },
         now,

@@ -8,6 +8,7 @@ import { noteChange } from './note-change';
 import { listParkings } from './parkings-data';
 import { refuseTakenName } from './refuse';
 import { getStand } from './stands-data';
+import { TAKEN_NAMES } from './words/errors';
 
 /** Read here and not before: the line is tied to the stand and the parking place as they are now. */
 export function addApproach(
@@ -21,7 +22,7 @@ export function addApproach(
     const stand = await getStand(scope, standId, tx);
     if (!stand) throw notFound();
     const values = makeApproachSchema(scope.club, { stand, parkings: await listParkings(scope, tx) }).parse(typed);
-    refuseTakenName(await listApproachesOf(scope, standId, tx), values.name, 'an approach to this stand');
+    refuseTakenName(await listApproachesOf(scope, standId, tx), values.name, TAKEN_NAMES.approach);
     await insertApproach(scope, tx, { ...values, id, standId });
     const summary = `Added approach ${values.name} to ${stand.name}.`;
     await noteChange(scope, tx, { subject: 'approach', verb: 'added', id, summary }, now);

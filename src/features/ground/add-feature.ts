@@ -5,6 +5,7 @@ import type { FeatureFormValues } from './feature-schema';
 import { insertFeature, listFeatures } from './features-data';
 import { noteChange } from './note-change';
 import { refuseTakenName } from './refuse';
+import { TAKEN_NAMES } from './words/errors';
 
 export function addFeature(
   scope: ClubScope,
@@ -13,7 +14,7 @@ export function addFeature(
 ): Promise<{ id: string; name: string }> {
   const id = newId('feature');
   return write(async (tx) => {
-    refuseTakenName(await listFeatures(scope, tx), values.name, 'a feature');
+    refuseTakenName(await listFeatures(scope, tx), values.name, TAKEN_NAMES.feature);
     await insertFeature(scope, tx, { ...values, id });
     const summary = `Added feature ${values.name}.`;
     await noteChange(scope, tx, { subject: 'feature', verb: 'added', id, summary }, now);

@@ -4,6 +4,7 @@ import type { ClubScope } from '@/server/scope';
 import { noteChange } from './note-change';
 import { insertParking, listParkings, type ParkingValues } from './parkings-data';
 import { refuseTakenName } from './refuse';
+import { TAKEN_NAMES } from './words/errors';
 
 export function addParking(
   scope: ClubScope,
@@ -12,7 +13,7 @@ export function addParking(
 ): Promise<{ id: string; name: string }> {
   const id = newId('parking');
   return write(async (tx) => {
-    refuseTakenName(await listParkings(scope, tx), values.name, 'a parking place');
+    refuseTakenName(await listParkings(scope, tx), values.name, TAKEN_NAMES.parking);
     await insertParking(scope, tx, { ...values, id });
     const summary = `Added parking place ${values.name}.`;
     await noteChange(scope, tx, { subject: 'parking', verb: 'added', id, summary }, now);

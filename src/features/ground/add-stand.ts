@@ -5,11 +5,12 @@ import { refuseUnknownMembers } from './known-members';
 import { noteChange } from './note-change';
 import { refuseTakenName } from './refuse';
 import { insertStand, listStands, type StandValues } from './stands-data';
+import { TAKEN_NAMES } from './words/errors';
 
 export function addStand(scope: ClubScope, values: StandValues, now: number): Promise<{ id: string; name: string }> {
   const id = newId('stand');
   return write(async (tx) => {
-    refuseTakenName(await listStands(scope, tx), values.name, 'a stand');
+    refuseTakenName(await listStands(scope, tx), values.name, TAKEN_NAMES.stand);
     await refuseUnknownMembers(scope, values.allowedMemberIds, tx);
     await insertStand(scope, tx, { ...values, id, createdAt: now });
     await noteChange(scope, tx, { subject: 'stand', verb: 'added', id, summary: `Added stand ${values.name}.` }, now);

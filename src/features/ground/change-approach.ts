@@ -7,6 +7,7 @@ import { noteChange } from './note-change';
 import { listParkings } from './parkings-data';
 import { changedSince, changes, refuseTakenName } from './refuse';
 import { getStand } from './stands-data';
+import { TAKEN_NAMES } from './words/errors';
 
 export function changeApproach(
   scope: ClubScope,
@@ -19,7 +20,7 @@ export function changeApproach(
     const stand = before && (await getStand(scope, before.standId, tx));
     if (!stand) throw notFound();
     const values = makeApproachSchema(scope.club, { stand, parkings: await listParkings(scope, tx) }).parse(typed);
-    refuseTakenName(await listApproachesOf(scope, stand.id, tx), values.name, 'an approach to this stand', at.id);
+    refuseTakenName(await listApproachesOf(scope, stand.id, tx), values.name, TAKEN_NAMES.approach, at.id);
     if (!(await updateApproach(scope, tx, at, values))) throw await changedSince(scope, before, tx);
     const detail = changes(before, values);
     const summary = `Changed approach ${values.name} to ${stand.name}.`;

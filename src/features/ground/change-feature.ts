@@ -5,6 +5,7 @@ import type { FeatureFormValues } from './feature-schema';
 import { getFeature, listFeatures, updateFeature } from './features-data';
 import { noteChange } from './note-change';
 import { changedSince, changes, refuseTakenName } from './refuse';
+import { TAKEN_NAMES } from './words/errors';
 
 export function changeFeature(
   scope: ClubScope,
@@ -15,7 +16,7 @@ export function changeFeature(
   return write(async (tx) => {
     const before = await getFeature(scope, at.id, tx);
     if (!before) throw notFound();
-    refuseTakenName(await listFeatures(scope, tx), values.name, 'a feature', at.id);
+    refuseTakenName(await listFeatures(scope, tx), values.name, TAKEN_NAMES.feature, at.id);
     if (!(await updateFeature(scope, tx, at, values))) throw await changedSince(scope, before, tx);
     const detail = changes(before, values);
     const summary = `Changed feature ${values.name}.`;

@@ -4,6 +4,7 @@ import type { ClubScope } from '@/server/scope';
 import { noteChange } from './note-change';
 import { getParking, listParkings, type ParkingValues, updateParking } from './parkings-data';
 import { changedSince, changes, refuseTakenName } from './refuse';
+import { TAKEN_NAMES } from './words/errors';
 
 export function changeParking(
   scope: ClubScope,
@@ -14,7 +15,7 @@ export function changeParking(
   return write(async (tx) => {
     const before = await getParking(scope, at.id, tx);
     if (!before) throw notFound();
-    refuseTakenName(await listParkings(scope, tx), values.name, 'a parking place', at.id);
+    refuseTakenName(await listParkings(scope, tx), values.name, TAKEN_NAMES.parking, at.id);
     if (!(await updateParking(scope, tx, at, values))) throw await changedSince(scope, before, tx);
     const detail = changes(before, values);
     const summary = `Changed parking place ${values.name}.`;

@@ -5,6 +5,7 @@ import { refuseUnknownMembers } from './known-members';
 import { noteChange } from './note-change';
 import { changedSince, changes, refuseTakenName } from './refuse';
 import { getStand, listStands, type StandValues, updateStand } from './stands-data';
+import { TAKEN_NAMES } from './words/errors';
 
 export function changeStand(
   scope: ClubScope,
@@ -15,7 +16,7 @@ export function changeStand(
   return write(async (tx) => {
     const before = await getStand(scope, at.id, tx);
     if (!before) throw notFound();
-    refuseTakenName(await listStands(scope, tx), values.name, 'a stand', at.id);
+    refuseTakenName(await listStands(scope, tx), values.name, TAKEN_NAMES.stand, at.id);
     await refuseUnknownMembers(scope, values.allowedMemberIds, tx);
     if (!(await updateStand(scope, tx, at, values))) throw await changedSince(scope, before, tx);
     const detail = changes(before, values);

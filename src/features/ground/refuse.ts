@@ -21,12 +21,12 @@ export async function changedSince(
 export function refuseTakenName(
   kept: { id: string; name: string }[],
   name: string,
-  what: string,
+  refusal: (name: string) => string,
   ownId?: string,
 ): void {
   const taken = kept.find((row) => row.id !== ownId && row.name.toLowerCase() === name.toLowerCase());
   if (!taken) return;
-  const message = `There is already ${what} called ${taken.name}: choose another name.`;
+  const message = refusal(taken.name);
   throw new AppError('conflict', message, { fields: { name: message } });
 }
 

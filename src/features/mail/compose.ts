@@ -1,3 +1,5 @@
+import { MAIL_FRAME_WORDS } from './words';
+
 export interface MailParts {
   paragraphs: string[];
   /** Rows of a small table: stand, window, back by. */
@@ -20,7 +22,7 @@ export function escapeHtml(text: string): string {
 }
 
 function foot({ clubName, footer }: MailParts): string[] {
-  const name = clubName ? `${clubName}, by Windrest` : 'Windrest';
+  const name = clubName ? MAIL_FRAME_WORDS.by(clubName) : 'Windrest';
   return footer ? [footer, name] : [name];
 }
 
@@ -57,7 +59,9 @@ function rich(parts: MailParts): string {
     ...paragraphs.map(paragraph),
     ...(rows.length > 0 ? [`<table style="border-collapse:collapse">${rows.join('')}</table>`] : []),
     ...(button ? [`<p><a style="${BUTTON}" href="${escapeHtml(button.url)}">${escapeHtml(button.label)}</a></p>`] : []),
-    ...(button ? [`<p style="font-size:14px;word-break:break-all">Or open ${escapeHtml(button.url)}</p>`] : []),
+    ...(button
+      ? [`<p style="font-size:14px;word-break:break-all">${escapeHtml(MAIL_FRAME_WORDS.orOpen(button.url))}</p>`]
+      : []),
     ...after.map(paragraph),
     `<p style="${FOOT}">${[...foot(parts).map(escapeHtml), ...links.map(smallLink)].join('<br>')}</p>`,
     '</div></body></html>',

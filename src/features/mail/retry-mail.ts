@@ -4,6 +4,7 @@ import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { reviveDead } from './data';
 import type { RetryMailInput } from './retry-mail-schema';
+import { MAIL_AUDIT } from './words';
 
 /** Puts a mail that was given up back in the line, as new. */
 export async function retryMail(scope: ClubScope, input: RetryMailInput, now: number): Promise<{ toName: string }> {
@@ -18,7 +19,7 @@ export async function retryMail(scope: ClubScope, input: RetryMailInput, now: nu
         action: 'mail.retried',
         subjectType: 'mail',
         subjectId: input.id,
-        summary: `${scope.actor.name} had the mail "${row.subject}" to ${row.toName} sent again.`,
+        summary: MAIL_AUDIT.retried(scope.actor.name, row.subject, row.toName),
       },
       now,
     );

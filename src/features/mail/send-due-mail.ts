@@ -6,6 +6,7 @@ import { log } from '@/server/log';
 import { MOST_ATTEMPTS, waitAfter } from './back-off';
 import { settleLeased } from './data';
 import { mailPort } from './mail-port';
+import { MAIL_ERRORS } from './words';
 
 const MINUTE = 60_000;
 /** A batch at its slowest (ten timeouts of some 40 s) still ends inside its lease. */
@@ -14,9 +15,9 @@ const LEASE_MS = 10 * MINUTE;
 const LONGEST_RUN_MS = 2 * MINUTE;
 
 async function trySend(port: MailPort, row: OutboxRow): Promise<MailResult> {
-  if (!row.message) return { ok: false, permanent: true, message: 'The words of this mail are gone.' };
+  if (!row.message) return { ok: false, permanent: true, message: MAIL_ERRORS.noWords };
   // Leased once more than it may be tried: each try ended with its process.
-  if (row.attempts > MOST_ATTEMPTS) return { ok: false, permanent: true, message: 'Sending it stopped the program.' };
+  if (row.attempts > MOST_ATTEMPTS) return { ok: false, permanent: true, message: MAIL_ERRORS.stoppedProgram };
   const { id, toEmail, toName, subject, message } = row;
   return port.send({ id, to: { email: toEmail, name: toName }, subject, ...message });
 }

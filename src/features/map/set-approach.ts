@@ -1,6 +1,7 @@
 import { tieEnds } from '@/features/ground/approach-schema';
 import { insertApproach, updateApproach } from '@/features/ground/data';
 import { refuseTakenName } from '@/features/ground/refuse';
+import { TAKEN_NAMES } from '@/features/ground/words/errors';
 import { newId } from '@/lib/ids';
 import { AppError } from '@/server/errors';
 import type { SetChange } from './drawing-schema';
@@ -19,7 +20,7 @@ export async function setApproach(saving: Saving, change: Extract<SetChange, { k
   if (parkingId !== null && !parking)
     throw new AppError('invalid', `${name}: its parking place is gone. Choose another.`);
   const ofStand = others(saving, rows.approaches).filter((one) => one.standId === standId);
-  refuseTakenName(ofStand, name, `an approach to ${stand.name}`, change.id);
+  refuseTakenName(ofStand, name, (taken) => TAKEN_NAMES.approachTo(stand.name, taken), change.id);
   const geometry = geometryFor(saving, change, name);
   const points = geometry?.type === 'LineString' ? geometry.coordinates : (before?.points ?? []);
   const tied = tieEnds(scope.club, points, { stand, parking });

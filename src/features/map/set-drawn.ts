@@ -15,6 +15,7 @@ import { type DrawnGeometry, parseGeometry } from '@/features/ground/geometry-te
 import { type GroundSubject, noteChange } from '@/features/ground/note-change';
 import { NAME_MAX } from '@/features/ground/read-form';
 import { changes, refuseTakenName } from '@/features/ground/refuse';
+import { TAKEN_NAMES } from '@/features/ground/words/errors';
 import { newId } from '@/lib/ids';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
@@ -112,7 +113,7 @@ export async function setStand(saving: Saving, change: Of<'stand'>): Promise<voi
   const { scope, tx, rows, now } = saving;
   const name = nameFor(change, 'each stand');
   const before = rowOf(rows.stands, change);
-  refuseTakenName(others(saving, rows.stands), name, 'a stand', change.id);
+  refuseTakenName(others(saving, rows.stands), name, TAKEN_NAMES.stand, change.id);
   const values = { name, kind: change.what, arcs: change.arcs, ...placeFor(saving, change, name) };
   const id = before?.id ?? newId('stand');
   const note = { subject: 'stand' as const, id, what: `stand ${name}`, before, values };
@@ -133,7 +134,7 @@ export async function setParking(saving: Saving, change: Of<'parking'>): Promise
   const { scope, tx, rows } = saving;
   const name = nameFor(change, 'each parking place');
   const before = rowOf(rows.parkings, change);
-  refuseTakenName(others(saving, rows.parkings), name, 'a parking place', change.id);
+  refuseTakenName(others(saving, rows.parkings), name, TAKEN_NAMES.parking, change.id);
   const values = { name, ...placeFor(saving, change, name) };
   const id = before?.id ?? newId('parking');
   const note = { subject: 'parking' as const, id, what: `parking place ${name}`, before, values };
@@ -153,7 +154,7 @@ export async function setFeature(saving: Saving, change: Of<'feature'>): Promise
   const { scope, tx, rows } = saving;
   const name = nameFor(change, 'each feature');
   const before = rowOf(rows.features, change);
-  refuseTakenName(others(saving, rows.features), name, 'a feature', change.id);
+  refuseTakenName(others(saving, rows.features), name, TAKEN_NAMES.feature, change.id);
   const geometry = geometryFor(saving, change, name);
   const values = { name, kind: change.what, ...(geometry ? { geometry } : {}) };
   const id = before?.id ?? newId('feature');

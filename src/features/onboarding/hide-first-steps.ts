@@ -2,6 +2,7 @@ import { write } from '@/db/client';
 import { audit } from '@/server/audit';
 import type { ClubScope } from '@/server/scope';
 import { insertHidden, stepsAreHidden } from './data';
+import { ONBOARDING_AUDIT } from './words';
 
 /** Puts the first steps away for the whole club. */
 export async function hideFirstSteps(scope: ClubScope, now: number): Promise<{ hidden: true }> {
@@ -16,7 +17,7 @@ export async function hideFirstSteps(scope: ClubScope, now: number): Promise<{ h
         action: 'club.first_steps_hidden',
         subjectType: 'club',
         subjectId: scope.club.id,
-        summary: `${scope.member.name} put the first steps away.`,
+        summary: ONBOARDING_AUDIT.hidden(scope.member.name),
       },
       now,
     );

@@ -5,6 +5,7 @@ import { listApproaches } from '@/features/ground/approaches-data';
 import { listStands } from '@/features/ground/stands-data';
 import type { ClubScope } from '@/server/scope';
 import { listSamples, stepsAreHidden } from './data';
+import { FIRST_STEPS } from './words';
 
 export interface FirstStep {
   title: string;
@@ -37,46 +38,46 @@ export async function readFirstSteps(scope: ClubScope): Promise<FirstSteps | nul
   const first = stands[0] ? `${club}/stands/${stands[0].id}` : null;
   const steps: FirstStep[] = [
     {
-      title: 'The place',
-      why: 'Sun, forecast and clock are those of this point.',
+      title: FIRST_STEPS.place,
+      why: FIRST_STEPS.placeWhy,
       done: true,
       href: `${club}/club/place`,
-      doing: 'Look at it',
+      doing: FIRST_STEPS.placeDoing,
     },
     {
-      title: 'The first stand',
-      why: 'Where it stands, how high, and how far a shot carries.',
+      title: FIRST_STEPS.stand,
+      why: FIRST_STEPS.standWhy,
       done: stands.length > 0,
       href: `${club}/stands/new`,
-      doing: 'Add a stand',
+      doing: FIRST_STEPS.standDoing,
     },
     {
-      title: 'Its good winds',
-      why: 'The directions a wind may come from there. Without them every wind counts the same.',
+      title: FIRST_STEPS.winds,
+      why: FIRST_STEPS.windsWhy,
       done: stands.some(({ arcs }) => arcs.length > 0),
       href: first ? `${first}/edit` : `${club}/stands/new`,
-      doing: 'Set the winds',
+      doing: FIRST_STEPS.windsDoing,
     },
     {
-      title: 'A way in',
-      why: 'From the gate to the stand: your scent drifts along it, and the list says when to leave.',
+      title: FIRST_STEPS.way,
+      why: FIRST_STEPS.wayWhy,
       done: ways.length > 0,
       href: first ? `${first}/approaches/new` : `${club}/stands/new`,
-      doing: 'Draw a way in',
+      doing: FIRST_STEPS.wayDoing,
     },
     {
-      title: 'The others',
-      why: 'A stand is booked for all only when all book here.',
+      title: FIRST_STEPS.others,
+      why: FIRST_STEPS.othersWhy,
       done: others,
       href: `${club}/club/members/invite`,
-      doing: 'Invite a member',
+      doing: FIRST_STEPS.othersDoing,
     },
     {
-      title: 'The first sit',
-      why: 'Take the first of the list, and the rest see that it is taken.',
+      title: FIRST_STEPS.sit,
+      why: FIRST_STEPS.sitWhy,
       done: sits.length > 0,
       href: `${club}/sit`,
-      doing: 'Look at the list',
+      doing: FIRST_STEPS.sitDoing,
     },
   ];
   return samples.size === 0 && steps.every(({ done }) => done) ? null : { steps, samples: samples.size > 0 };

@@ -2,18 +2,19 @@ import { fromLocal, type LatLon, pointAt } from '@/core/geometry';
 import type { ApproachValues } from '@/features/ground/approaches-data';
 import type { ParkingValues } from '@/features/ground/parkings-data';
 import type { StandValues } from '@/features/ground/stands-data';
+import { SAMPLE_WORDS } from './words';
 
 export interface SampleGround {
   parking: ParkingValues;
   stands: { stand: StandValues; approach: Omit<ApproachValues, 'parkingId'> }[];
 }
 
-const NOTES = 'Laid as a sample to show what a list looks like. Take it away when you have stands of your own.';
+const NOTES = SAMPLE_WORDS.notes;
 
 /** Distance and bearing from the gate, and what sets one sample apart from the next. All of it our own invention. */
 const STANDS = [
   {
-    name: 'Sample: ridge ladder',
+    name: SAMPLE_WORDS.ridgeLadder,
     bearing: 20,
     metres: 420,
     shelter: 'open_wood',
@@ -22,7 +23,7 @@ const STANDS = [
     evening: 'usable',
   },
   {
-    name: 'Sample: field box',
+    name: SAMPLE_WORDS.fieldBox,
     bearing: 95,
     metres: 360,
     shelter: 'open',
@@ -31,7 +32,7 @@ const STANDS = [
     evening: 'prime',
   },
   {
-    name: 'Sample: creek climber',
+    name: SAMPLE_WORDS.creekClimber,
     bearing: 250,
     metres: 510,
     shelter: 'dense_wood',
@@ -46,7 +47,7 @@ export function sampleGround(place: LatLon): SampleGround {
   const gate = { eastM: 0, northM: 0 };
   const lonLat = (at: LatLon): [number, number] => [at.lon, at.lat];
   return {
-    parking: { name: 'Sample: gate', lat: place.lat, lon: place.lon, notes: NOTES },
+    parking: { name: SAMPLE_WORDS.gate, lat: place.lat, lon: place.lon, notes: NOTES },
     stands: STANDS.map(({ name, bearing, metres, shelter, arcs, morning, evening }) => {
       const at = fromLocal(place, pointAt(gate, bearing, metres));
       // Bowed, as a way in that keeps off the straight line is.
@@ -73,7 +74,7 @@ export function sampleGround(place: LatLon): SampleGround {
           notes: NOTES,
         },
         approach: {
-          name: 'Sample path',
+          name: SAMPLE_WORDS.path,
           direction: 'both',
           points: [lonLat(place), lonLat(bend), lonLat(at)],
           vehicleToIndex: 0,

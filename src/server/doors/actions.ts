@@ -41,16 +41,16 @@ export function clubAction<S extends z.ZodType, T>(
   action: Action<{ scope: ClubScope; user: CurrentUser }, S, T> & { permission: Permission },
 ) {
   const run = (club: string, raw: z.input<S>) =>
-    pass(`action ${action.permission}`, () => requireScope(club, action.permission), action, raw);
+    pass(`action:${action.permission}`, () => requireScope(club, action.permission), action, raw);
   return withInfo(run, { kind: 'action', who: 'club', permission: action.permission, takes: action.input });
 }
 
 export function accountAction<S extends z.ZodType, T>(action: Action<{ user: CurrentUser }, S, T>) {
-  const run = (raw: z.input<S>) => pass('action account', async () => ({ user: await requireUser() }), action, raw);
+  const run = (raw: z.input<S>) => pass('action:account', async () => ({ user: await requireUser() }), action, raw);
   return withInfo(run, { kind: 'action', who: 'account', permission: null, takes: action.input });
 }
 
 export function publicAction<S extends z.ZodType, T>(action: Action<{ user: CurrentUser | null }, S, T>) {
-  const run = (raw: z.input<S>) => pass('action public', async () => ({ user: await currentUser() }), action, raw);
+  const run = (raw: z.input<S>) => pass('action:public', async () => ({ user: await currentUser() }), action, raw);
   return withInfo(run, { kind: 'action', who: 'anyone', permission: null, takes: action.input });
 }

@@ -1,11 +1,12 @@
 import type { Permission } from '@/core/permissions';
+import { SERVER_ERRORS } from '@/server/words';
 import { AppError, notFound } from '../errors';
 import { type ClubScope, findScope } from '../scope';
 import { type CurrentUser, currentUser } from '../session';
 
 export async function requireUser(): Promise<CurrentUser> {
   const user = await currentUser();
-  if (!user) throw new AppError('signed_out', 'Sign in to go on.');
+  if (!user) throw new AppError('signed_out', SERVER_ERRORS.signIn);
   return user;
 }
 
@@ -19,7 +20,7 @@ export async function requireScope(
   const scope = await findScope(slug, user.id);
   if (!scope) throw notFound();
   if (!scope.can(permission)) {
-    throw new AppError('forbidden', `Your role in ${scope.club.name} does not allow this. Ask a club admin.`);
+    throw new AppError('forbidden', SERVER_ERRORS.forbidden(scope.club.name));
   }
   return { user, scope };
 }

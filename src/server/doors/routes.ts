@@ -38,7 +38,7 @@ async function answer<C, S extends z.ZodType>(
     return result instanceof Response ? result : Response.json(result, { headers: PRIVATE });
   } catch (error) {
     unstable_rethrow(error);
-    const body = mapError(error, `route ${url.pathname}`);
+    const body = mapError(error, `route:${url.pathname}`);
     return Response.json({ error: body }, { status: HTTP_STATUS[body.code], headers: PRIVATE });
   }
 }

@@ -12,6 +12,7 @@ import { useToast } from '@/ui/toast';
 import type { FeedScope } from '../feed-schema';
 import type { MadeFeed } from '../make-feed';
 import type { FeedView } from '../reads';
+import { CALENDAR_FEED_WORDS } from '../words';
 
 interface FeedActions {
   club: string;
@@ -24,8 +25,6 @@ interface FeedText {
   note: string;
 }
 
-const LOST = 'The server could not be reached. Try again.';
-
 function Feed({ club, make, revoke, feed, text }: FeedActions & { feed: FeedView; text: FeedText }) {
   const toast = useToast();
   const [withPlace, setWithPlace] = useState(feed.withPlace);
@@ -37,17 +36,17 @@ function Feed({ club, make, revoke, feed, text }: FeedActions & { feed: FeedView
     setPending(true);
     const answer = await make(club, { scope: feed.scope, withPlace }).catch(() => null);
     setPending(false);
-    if (!answer?.ok) return answer?.error.message ?? LOST;
+    if (!answer?.ok) return answer?.error.message ?? CALENDAR_FEED_WORDS.lost;
     setUrl(answer.data.url);
-    toast({ title: answer.data.replaced ? 'New address made; the old one is off' : 'Address made' });
+    toast({ title: answer.data.replaced ? CALENDAR_FEED_WORDS.renewed : CALENDAR_FEED_WORDS.made });
     return undefined;
   }
 
   async function turnOff(): Promise<string | undefined> {
     const answer = await revoke(club, { scope: feed.scope }).catch(() => null);
-    if (!answer?.ok) return answer?.error.message ?? LOST;
+    if (!answer?.ok) return answer?.error.message ?? CALENDAR_FEED_WORDS.lost;
     setUrl(undefined);
-    toast({ title: 'Address turned off' });
+    toast({ title: CALENDAR_FEED_WORDS.turnedOff });
     return undefined;
   }
 
@@ -55,52 +54,45 @@ function Feed({ club, make, revoke, feed, text }: FeedActions & { feed: FeedView
     <Section title={text.title} note={text.note} heading="margin">
       <div className="flex flex-col gap-4">
         <p>
-          {feed.madeOn === null
-            ? 'No address is in use.'
-            : `An address made on ${feed.madeOn} is in use, ${feed.withPlace ? 'with' : 'without'} stand positions.`}
+          {feed.madeOn === null ? CALENDAR_FEED_WORDS.none : CALENDAR_FEED_WORDS.inUse(feed.madeOn, feed.withPlace)}
         </p>
         {problem && (
-          <Notice level="caution" live title="That did not work">
+          <Notice level="caution" live title={CALENDAR_FEED_WORDS.failed}>
             {problem}
           </Notice>
         )}
         {url && (
-          <CopyField
-            label="Address for your calendar"
-            hint="Shown only now. In your calendar, add a calendar by its address and paste this."
-            value={url}
-            secret
-          />
+          <CopyField label={CALENDAR_FEED_WORDS.address} hint={CALENDAR_FEED_WORDS.addressHint} value={url} secret />
         )}
         <Checkbox
-          label="Put stand positions in the entries"
-          hint="Stand places are secrets: whoever sees your calendar sees them too."
+          label={CALENDAR_FEED_WORDS.withPlace}
+          hint={CALENDAR_FEED_WORDS.withPlaceHint}
           checked={withPlace}
           onChange={(event) => setWithPlace(event.currentTarget.checked)}
         />
         <div className="flex flex-wrap gap-2">
           {feed.madeOn === null ? (
             <Button look="primary" pending={pending} onClick={async () => setProblem(await makeAddress())}>
-              Make an address
+              {CALENDAR_FEED_WORDS.make}
             </Button>
           ) : (
             <>
               <ConfirmDialog
-                title="Make a new address?"
-                confirmLabel="Make a new address"
-                trigger={<Button>Make a new address</Button>}
+                title={CALENDAR_FEED_WORDS.renewTitle}
+                confirmLabel={CALENDAR_FEED_WORDS.renew}
+                trigger={<Button>{CALENDAR_FEED_WORDS.renew}</Button>}
                 onConfirm={makeAddress}
               >
-                The address in use stops working at once. Calendars that hold it need the new one.
+                {CALENDAR_FEED_WORDS.renewText}
               </ConfirmDialog>
               <ConfirmDialog
-                title="Turn the address off?"
-                confirmLabel="Turn it off"
+                title={CALENDAR_FEED_WORDS.turnOffTitle}
+                confirmLabel={CALENDAR_FEED_WORDS.turnOff}
                 danger
-                trigger={<Button look="quiet">Turn it off</Button>}
+                trigger={<Button look="quiet">{CALENDAR_FEED_WORDS.turnOff}</Button>}
                 onConfirm={turnOff}
               >
-                Calendars that hold it are told nothing more of any sit.
+                {CALENDAR_FEED_WORDS.turnOffText}
               </ConfirmDialog>
             </>
           )}

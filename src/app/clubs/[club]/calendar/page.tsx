@@ -1,29 +1,25 @@
 import type { Metadata } from 'next';
 import type { CalendarPrivacy } from '@/core/booking/rules';
 import { CalendarFeeds } from '@/features/calendar/components/calendar-feeds';
-import { FEED_NAMES } from '@/features/calendar/feed-permission';
 import { readFeeds } from '@/features/calendar/reads';
+import { CALENDAR_PAGE_WORDS, CALENDAR_PRIVACY_WORDS, FEED_NAMES } from '@/features/calendar/words';
 import { clubPage } from '@/server/doors';
 import { PageTitle } from '@/ui/page-parts';
 import { makeFeedAction, revokeFeedAction } from './actions';
 
-export const metadata: Metadata = { title: 'Calendar' };
+export const metadata: Metadata = { title: CALENDAR_PAGE_WORDS.title };
 
 const PRIVACY_TEXT: Record<CalendarPrivacy, string> = {
-  names_and_stands: "By the club's rule it shows who sits and at which stand.",
-  names_only: "By the club's rule it shows who sits, and stands only for your own sits.",
-  busy_only: "By the club's rule it shows that a sit is booked, and names only for your own.",
+  names_and_stands: CALENDAR_PRIVACY_WORDS.namesAndStands,
+  names_only: CALENDAR_PRIVACY_WORDS.namesOnly,
+  busy_only: CALENDAR_PRIVACY_WORDS.busyOnly,
 };
 
 export default clubPage('feeds.own', async ({ scope }) => {
   const { slug, name, rules } = scope.club;
   return (
     <>
-      <PageTitle
-        over={name}
-        title="Calendar"
-        lead="An address that a calendar on a phone or a computer can follow. Whoever has the address can read it without a password: give it to nobody, and turn it off when it is no longer needed."
-      />
+      <PageTitle over={name} title={CALENDAR_PAGE_WORDS.title} lead={CALENDAR_PAGE_WORDS.lead} />
       <CalendarFeeds
         club={slug}
         feeds={await readFeeds(scope)}
@@ -32,9 +28,9 @@ export default clubPage('feeds.own', async ({ scope }) => {
         texts={{
           own: {
             title: FEED_NAMES.own,
-            note: 'Your sits with way in, guests and note. Cancelled ones show as cancelled.',
+            note: CALENDAR_PAGE_WORDS.ownNote,
           },
-          club: { title: FEED_NAMES.club, note: `Every sit of the club. ${PRIVACY_TEXT[rules.calendarPrivacy]}` },
+          club: { title: FEED_NAMES.club, note: CALENDAR_PAGE_WORDS.clubNote(PRIVACY_TEXT[rules.calendarPrivacy]) },
         }}
       />
     </>
