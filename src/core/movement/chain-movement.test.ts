@@ -32,6 +32,7 @@ const chain = (over: Partial<MovementInput> = {}) =>
     stands: [seat('Oak', 200), seat('Corner', 580)],
     scoring: DEFAULT_SETTINGS,
     setup: DEFAULT_SETUP,
+    month: 10,
     ...over,
   });
 
@@ -47,6 +48,31 @@ describe('lines of movement', () => {
     expect(found?.legs.map((leg) => [leg.from.name, leg.to.name, Math.round(leg.lengthM)])).toEqual([
       ['Beds', 'Scrape', 200],
       ['Scrape', 'Plot', 390],
+    ]);
+  });
+
+  it('hold the ground of each leg and gap, and where a stand reaches a leg', () => {
+    const [found] = chain();
+    const rounded = (points: { eastM: number; northM: number }[] = []) =>
+      points.map(({ eastM, northM }) => [Math.round(eastM), Math.round(northM)]);
+    expect(found?.legs.map((leg) => rounded(leg.points))).toEqual([
+      [
+        [0, 0],
+        [200, 0],
+      ],
+      [
+        [200, 0],
+        [590, 0],
+      ],
+    ]);
+    expect(rounded(found?.gaps[1]?.points)).toEqual([
+      [225, 0],
+      [555, 0],
+    ]);
+    const oak = found?.legs[0]?.stands[0];
+    expect(rounded(oak ? [oak.at, oak.aim] : [])).toEqual([
+      [200, -15],
+      [200, 0],
     ]);
   });
 

@@ -4,12 +4,16 @@ import type { ScoringSettings } from '../settings';
 import type { SetupSettings } from '../setup-check/setup-settings';
 import { along, canShoot, carries, shotOf, windowsHunted, windsHunted } from '../setup-check/shot-of';
 import type { FeatureKind, Point, ScoredFeature, ScoredStand, WindowName } from '../types';
+import { usesOf } from '../whereabouts';
+import { stretchOf } from './stretch';
 
 export interface MovementInput {
   features: ScoredFeature[];
   stands: ScoredStand[];
   scoring: ScoringSettings;
   setup: SetupSettings;
+  /** 1-12: what is used then lies on the lines. */
+  month: number;
 }
 
 export interface Stop {
@@ -25,6 +29,9 @@ export interface Stop {
 export interface Server {
   standId: string;
   name: string;
+  /** The seat, and the place on the leg nearest to it that is in shot. */
+  at: Point;
+  aim: Point;
   windows: {
     window: WindowName /** Compass points 0-15 it is hunted on that keep its scent off the leg. */;
     winds: number[];
@@ -35,6 +42,7 @@ export interface Leg {
   from: Stop;
   to: Stop;
   lengthM: number;
+  points: Point[];
   stands: Server[];
 }
 
@@ -45,9 +53,11 @@ export interface MovementLine {
   stops: Stop[];
   legs: Leg[];
   /** Stretches no stand reaches, named by the stops they lie between. */
-  gaps: { fromM: number; toM: number; between: string }[];
+  gaps: { fromM: number; toM: number; between: string; points: Point[] }[];
   /** Deer's way in each window: 1 from the first point to the last, -1 back; null: the line joins no bed to no food. */
   way: Record<WindowName, 1 | -1 | null>;
+  /** Chance of deer on it at each of TIMES_OF_DAY this month, 0-1. */
+  uses: number[];
 }
 
 const FOOD: ReadonlySet<FeatureKind> = new Set(['food_plot', 'crop', 'mast']);
@@ -107,11 +117,12 @@ function serversOf(stretch: Station[], input: MovementInput): Server[] {
       winds: windsHunted(stand, window).filter((w) => !carries(w * 22.5, shot.bearing, setup.scentDeg)),
     }));
     const served = windows.filter(({ winds }) => winds.length > 0);
-    return served.length > 0 ? [{ standId: stand.id, name: stand.name, windows: served }] : [];
+    if (served.length === 0) return [];
+    return [{ standId: stand.id, name: stand.name, at: stand.at, aim: shot.nearest, windows: served }];
   });
 }
 
-function gapsOf(stations: Station[], stops: Stop[], input: MovementInput): MovementLine['gaps'] {
+function gapsOf(line: Point[], stations: Station[], stops: Stop[], input: MovementInput): MovementLine['gaps'] {
   const { gapFromM } = input.setup;
   const open = stations.map((s) => serversOf([s], input).length === 0);
   const gaps: MovementLine['gaps'] = [];
@@ -124,7 +135,12 @@ function gapsOf(stations: Station[], stops: Stop[], input: MovementInput): Movem
     if (toM - fromM < gapFromM) continue;
     const before = stops.filter((s) => s.alongM <= fromM + STEP_M).at(-1) ?? stops[0];
     const after = stops.find((s) => s.alongM >= toM - STEP_M) ?? stops.at(-1);
-    gaps.push({ fromM, toM, between: `${before?.name ?? ''} and ${after?.name ?? ''}` });
+    gaps.push({
+      fromM,
+      toM,
+      between: `${before?.name ?? ''} and ${after?.name ?? ''}`,
+      points: stretchOf(line, fromM, toM),
+    });
   }
   return gaps;
 }
@@ -152,16 +168,25 @@ export function chainMovement(input: MovementInput): MovementLine[] {
   return lines
     .flatMap((line): MovementLine[] => {
       if (line.shape.type !== 'line' || line.shape.points.length < 2) return [];
-      const stations = stationsOf(line.shape.points);
+      const { points } = line.shape;
+      const stations = stationsOf(points);
       const stops = stopsOf(line, stations, input);
       const legs = stops.slice(1).map((to, i): Leg => {
         const from = stops[i] as Stop;
         const stretch = stations.filter((s) => s.alongM >= from.alongM && s.alongM <= to.alongM);
-        return { from, to, lengthM: to.alongM - from.alongM, stands: serversOf(stretch, input) };
+        return {
+          from,
+          to,
+          lengthM: to.alongM - from.alongM,
+          points: stretchOf(points, from.alongM, to.alongM),
+          stands: serversOf(stretch, input),
+        };
       });
-      const length = lengthM(line.shape.points);
-      const gaps = gapsOf(stations, stops, input);
-      return [{ id: line.id, name: line.name, lengthM: length, stops, legs, gaps, way: wayOf(stops, length) }];
+      const length = lengthM(points);
+      const gaps = gapsOf(points, stations, stops, input);
+      const { id, name } = line;
+      const uses = usesOf(line, input.month, input.scoring.whereabouts);
+      return [{ id, name, lengthM: length, stops, legs, gaps, way: wayOf(stops, length), uses }];
     })
     .sort((a, b) => a.name.localeCompare(b.name));
 }

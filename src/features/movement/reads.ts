@@ -1,16 +1,30 @@
+import type { Position } from 'geojson';
 import { dayOf, monthOf } from '@/core/day-time';
+import { fromLocal } from '@/core/geometry';
 import { cropYearOf } from '@/core/map-layers';
 import { chainMovement, type MovementLine, type Stop } from '@/core/movement/chain-movement';
 import { SECTOR_NAMES } from '@/core/sectors';
 import { DEFAULT_SETTINGS } from '@/core/settings';
 import { completeSetup } from '@/core/setup-check/setup-settings';
-import type { WindowName } from '@/core/types';
-import { formatDistance, type Units } from '@/core/units';
+import { type Point, TIMES_OF_DAY, type TimeOfDay } from '@/core/types';
+import { formatDistance } from '@/core/units';
 import { loadGround } from '@/features/ground/data';
 import { featuresInYear } from '@/features/ground/features-in-year';
 import { groundToCore } from '@/features/ground/to-core';
 import { getSetupSettings } from '@/features/setup/settings-data';
 import type { ClubScope } from '@/server/scope';
+import { TIME_WORDS, MOVEMENT_WORDS as W, WHEN_WORDS } from './words';
+
+export interface LegView {
+  /** Runs through all lines: the same number stands on the map. */
+  number: number;
+  key: string;
+  from: string;
+  to: string;
+  length: string;
+  path: Position[];
+  stands: { id: string; name: string; when: string; at: Position; aim: Position }[];
+}
 
 export interface LineView {
   id: string;
@@ -18,19 +32,16 @@ export interface LineView {
   length: string;
   /** Deer's way, for people; null: not known. */
   way: string | null;
-  legs: {
-    key: string;
-    from: string;
-    to: string;
-    length: string;
-    stands: { id: string; name: string; when: string }[];
-  }[];
-  gaps: string[];
+  /** 1: along the line as it is drawn, in the morning; -1: against it; null: not known. Evenings are the other way. */
+  morning: 1 | -1 | null;
+  times: { time: TimeOfDay; name: string; way: string; percent: number }[];
+  legs: LegView[];
+  gaps: { text: string; path: Position[] }[];
 }
 
 /** Points that lie side by side as spans: 'NW-NE', 'S'. */
 export function windSpans(points: number[]): string {
-  if (points.length === 16) return 'any wind';
+  if (points.length === 16) return WHEN_WORDS.anyWind;
   const held = new Set(points);
   const starts = points.filter((p) => !held.has((p + 15) % 16));
   return starts
@@ -42,37 +53,69 @@ export function windSpans(points: number[]): string {
     .join(', ');
 }
 
-const WINDOW_WORDS: Record<WindowName, string> = { morning: 'mornings', evening: 'evenings' };
-
 function whenText(windows: MovementLine['legs'][number]['stands'][number]['windows']): string {
   const texts = windows.map(({ window, winds }) => ({ window, winds: windSpans(winds) }));
   const [first, second] = texts;
-  if (first && second && first.winds === second.winds) return `mornings and evenings on ${first.winds}`;
-  return texts.map(({ window, winds }) => `${WINDOW_WORDS[window]} on ${winds}`).join('; ');
+  if (first && second && first.winds === second.winds) return WHEN_WORDS.both(first.winds);
+  return texts.map(({ window, winds }) => WHEN_WORDS.one(window, winds)).join('; ');
 }
 
-function wayText({ way, stops }: MovementLine): string | null {
+/** Where deer come from and go to in the morning; null: not known. */
+function endsOf({ way, stops }: MovementLine): { from: Stop; to: Stop } | null {
   const [first, last] = [stops[0], stops.at(-1)];
   if (way.morning === null || !first || !last) return null;
-  const ends = (forward: boolean): [Stop, Stop] => (forward ? [first, last] : [last, first]);
-  const [from, to] = ends(way.morning === 1);
-  return `Mornings from ${from.name} to ${to.name}, evenings the other way.`;
+  return way.morning === 1 ? { from: first, to: last } : { from: last, to: first };
 }
 
-function lineView(line: MovementLine, units: Units): LineView {
+/** At first light and in the morning to the beds, in the afternoon and at last light to the food; between, either way. */
+const TOWARD: Partial<Record<TimeOfDay, 'from' | 'to'>> = {
+  dawn: 'to',
+  morning: 'to',
+  afternoon: 'from',
+  dusk: 'from',
+};
+
+function timesOf(line: MovementLine): LineView['times'] {
+  const ends = endsOf(line);
+  return TIMES_OF_DAY.map((time, i) => {
+    const toward = TOWARD[time];
+    const way = ends && toward ? TIME_WORDS.to(ends[toward].name) : TIME_WORDS.either;
+    return { time, name: TIME_WORDS.names[time], way, percent: Math.round((line.uses[i] ?? 0) * 100) };
+  });
+}
+
+function lineView(line: MovementLine, { club }: ClubScope, firstLeg: number): LineView {
+  const position = (p: Point): Position => {
+    const { lat, lon } = fromLocal(club, p);
+    return [lon, lat];
+  };
+  const ends = endsOf(line);
   return {
     id: line.id,
     name: line.name,
-    length: formatDistance(line.lengthM, units),
-    way: wayText(line),
-    legs: line.legs.map((leg) => ({
+    length: formatDistance(line.lengthM, club.units),
+    way: ends && W.way(ends.from.name, ends.to.name),
+    morning: line.way.morning,
+    times: timesOf(line),
+    legs: line.legs.map((leg, i) => ({
+      number: firstLeg + i,
       key: `${leg.from.name}|${leg.to.name}|${leg.from.alongM}`,
       from: leg.from.name,
       to: leg.to.name,
-      length: formatDistance(leg.lengthM, units),
-      stands: leg.stands.map(({ standId, name, windows }) => ({ id: standId, name, when: whenText(windows) })),
+      length: formatDistance(leg.lengthM, club.units),
+      path: leg.points.map(position),
+      stands: leg.stands.map(({ standId, name, windows, at, aim }) => ({
+        id: standId,
+        name,
+        when: whenText(windows),
+        at: position(at),
+        aim: position(aim),
+      })),
     })),
-    gaps: line.gaps.map((gap) => `${formatDistance(gap.toM - gap.fromM, units)} between ${gap.between}`),
+    gaps: line.gaps.map((gap) => ({
+      text: W.gap(formatDistance(gap.toM - gap.fromM, club.units), gap.between),
+      path: gap.points.map(position),
+    })),
   };
 }
 
@@ -80,11 +123,22 @@ function lineView(line: MovementLine, units: Units): LineView {
 export async function readMovement(scope: ClubScope, now: number): Promise<{ lines: LineView[]; month: number }> {
   const { club } = scope;
   const today = dayOf(now, club.zone);
-  const rows = await loadGround(scope);
+  const [rows, { own }] = await Promise.all([loadGround(scope), getSetupSettings(scope)]);
   const core = groundToCore(club, { ...rows, features: featuresInYear(rows.features, cropYearOf(today)) });
-  const { own } = await getSetupSettings(scope);
   const month = monthOf(today);
   const features = core.features.filter((f) => f.months.includes(month));
-  const lines = chainMovement({ features, stands: core.stands, scoring: DEFAULT_SETTINGS, setup: completeSetup(own) });
-  return { lines: lines.map((line) => lineView(line, club.units)), month };
+  const lines = chainMovement({
+    features,
+    stands: core.stands,
+    scoring: DEFAULT_SETTINGS,
+    setup: completeSetup(own),
+    month,
+  });
+  let number = 1;
+  const views = lines.map((line) => {
+    const view = lineView(line, scope, number);
+    number += line.legs.length;
+    return view;
+  });
+  return { lines: views, month };
 }

@@ -2,6 +2,7 @@ import L from 'leaflet';
 import { toRad } from '@/core/angles';
 import type { MapOverlay } from '../overlay';
 import { latLng } from './make-map';
+import { paintLines } from './paint-lines';
 
 /** Lightest to heaviest line of a walk, px. */
 const THIN_PX = 3;
@@ -60,6 +61,7 @@ export function paintOverlay(map: L.Map) {
         line.setStyle({ weight: THIN_PX + (THICK_PX - THIN_PX) * Math.min(1, Math.max(0, weight)) });
         group.addLayer(line);
       }
+      paintLines(group, overlay, into('ways'));
       if (overlay.sun) group.addLayer(sun(latLng(overlay.sun.at), overlay.sun.azimuthDeg));
       for (const sitter of overlay.sitters ?? []) group.addLayer(badge(sitter.name, latLng(sitter.at)));
       if (overlay.here) {
