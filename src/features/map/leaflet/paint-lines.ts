@@ -26,10 +26,11 @@ function legMark({ name, path, way }: NonNullable<MapOverlay['legs']>[number]): 
   body.className = 'm-leg-mark';
   if (way !== null) {
     const deg = way === 1 ? middle.deg : middle.deg + 180;
-    body.innerHTML = `<svg width="44" height="44" viewBox="-22 -22 44 44" aria-hidden="true">
+    body.innerHTML = `<svg class="m-leg-turn" width="44" height="44" viewBox="-22 -22 44 44" aria-hidden="true">
       <path class="m-leg-arrow" transform="rotate(${deg.toFixed(1)})" d="M0 -21L7 -9H-7Z"/></svg>`;
   }
   const text = document.createElement('span');
+  text.className = 'm-leg-number';
   text.textContent = name;
   body.append(text);
   const icon = L.divIcon({ className: '', html: body, iconSize: [0, 0] });
