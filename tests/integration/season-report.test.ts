@@ -198,6 +198,7 @@ describe('the report of the demo club', () => {
     const long = await readReport(scope, readReportAsk({ from: '2020-01-01' }), DEMO_NOW);
     expect(long.period).toMatchObject({ fromDay: '2020-01-01', toDay: '2021-02-03' });
     expect((await readReport(scope, readReportAsk({ season: '2011' }), DEMO_NOW)).sits).toBe(0);
+    expect(readReportAsk({ season: '', from: '', to: '2026-02-30' })).toEqual(WHOLE);
   });
 
   it('shows officers every member, a member the own line alone, and the same figure to both', async () => {

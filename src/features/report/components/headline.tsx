@@ -1,6 +1,6 @@
 import { fairnessWords } from '@/core/draw/fairness';
 import { figureText, intervalText } from '@/core/indices';
-import { numberText } from '@/features/ground/read-form';
+import { numberText } from '@/features/clubs/read-number';
 import { type Definition, DefinitionList } from '@/ui/page-parts';
 import type { Report } from '../reads';
 import { HEADLINE_WORDS as words } from '../words/page';

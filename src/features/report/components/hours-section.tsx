@@ -1,4 +1,4 @@
-import { numberText } from '@/features/ground/read-form';
+import { numberText } from '@/features/clubs/read-number';
 import { ButtonLink } from '@/ui/button';
 import { Section } from '@/ui/page-parts';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
