@@ -11,8 +11,8 @@ import {
   usualNextDue,
 } from '@/core/upkeep/inspection';
 import { spanText } from '@/features/bookings/sit-words';
+import { numberText } from '@/features/clubs/read-number';
 import { degreesText } from '@/features/ground/place-text';
-import { numberText } from '@/features/ground/read-form';
 import { getStand, listStands, type StandRow } from '@/features/ground/stands-data';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';

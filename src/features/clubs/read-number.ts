@@ -1,4 +1,5 @@
 import type { z } from 'zod';
+import { FORM_ERRORS } from './words/field-errors';
 
 export interface NumberRule {
   /** Begins the message: 'Rest days'. */
@@ -26,20 +27,21 @@ export function numberText(value: number | null, decimals = 2): string {
   return value === null ? '' : String(Number(value.toFixed(decimals)) + 0);
 }
 
-/** Reads text fields one by one; each mistake stands beside its field and none hides the next. */
+type Path = string | (string | number)[];
+
+/** Reads text fields one by one; each mistake stands beside its field and none hides the next. A path may be dotted. */
 export function formReader(ctx: z.RefinementCtx) {
   let failed = false;
-  const fail = (path: (string | number)[], message: string) => {
+  const fail = (path: Path, message: string) => {
     failed = true;
-    ctx.addIssue({ code: 'custom', path, message });
+    ctx.addIssue({ code: 'custom', path: typeof path === 'string' ? path.split('.') : path, message });
   };
-  const readNumber = (path: (string | number)[], text: string, rule: NumberRule): number | null => {
+  const number = (path: Path, text: string, rule: NumberRule): number | null => {
     if (text.trim() === '') return null;
     const value = parseNumber(text);
-    const { label, min, max, whole, unit } = rule;
+    const { min, max, whole } = rule;
     if (value === null || value < min || value > max || (whole && !Number.isInteger(value))) {
-      const kind = whole ? 'a whole number' : 'a number';
-      fail(path, `${label}: type ${kind} from ${min} to ${max}${unit ? ` ${unit}` : ''}.`);
+      fail(path, FORM_ERRORS.number(rule));
       return null;
     }
     return value;
@@ -48,11 +50,11 @@ export function formReader(ctx: z.RefinementCtx) {
     failed: () => failed,
     fail,
     /** Blank is null: no such limit. */
-    number: readNumber,
+    number,
     /** Blank is a mistake. */
-    needNumber(path: (string | number)[], text: string, rule: NumberRule): number {
-      if (text.trim() === '') fail(path, `${rule.label} is needed.`);
-      return readNumber(path, text, rule) ?? 0;
+    needNumber(path: Path, text: string, rule: NumberRule): number {
+      if (text.trim() === '') fail(path, FORM_ERRORS.needed(rule.label));
+      return number(path, text, rule) ?? 0;
     },
   };
 }

@@ -2,7 +2,7 @@ import { arcWidthDeg } from '@/core/arcs';
 import { parseArcs } from '@/core/parse-arcs';
 import { SECTORS } from '@/core/sectors';
 import type { Arc, GoodWindArc, WindowName } from '@/core/types';
-import { numberText } from './read-form';
+import { numberText } from '@/features/clubs/read-number';
 
 /** Form fields for good winds, and the window each stands for. */
 export const ARC_FIELDS = [

@@ -1,6 +1,6 @@
 import { normalizeDeg } from '@/core/angles';
 import { findSector, SECTORS, sectorName } from '@/core/sectors';
-import { numberText, parseNumber } from './read-form';
+import { numberText, parseNumber } from '@/features/clubs/read-number';
 
 export type ParsedBearing = { ok: true; deg: number | null } | { ok: false; message: string };
 

@@ -1,10 +1,11 @@
 import { z } from 'zod';
 import type { CropYear } from '@/core/map-layers';
 import { FEATURE_KINDS, TIMES_OF_DAY, type UseTable } from '@/core/types';
+import { numberText } from '@/features/clubs/read-number';
 import type { FeatureRow } from './features-data';
 import type { FormClub } from './form-club';
 import { type DrawnGeometry, geometryText, parseGeometry, SHAPES } from './geometry-text';
-import { type FormReader, LINE_MAX, NOTES_MAX, numberText, readForm } from './read-form';
+import { type FormReader, LINE_MAX, NOTES_MAX, readForm } from './read-form';
 
 /** GeoJSON of the most points kept, with room to spare. */
 const PLACES_MAX = 60_000;

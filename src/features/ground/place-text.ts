@@ -1,5 +1,6 @@
 import { distanceM, type LatLon, toLocal } from '@/core/geometry';
-import { type FormReader, numberText, parseNumber } from './read-form';
+import { numberText, parseNumber } from '@/features/clubs/read-number';
+import type { FormReader } from './read-form';
 
 /** Ground further from the club than this is a slip of the hand. */
 const FARTHEST_M = 100_000;

@@ -1,9 +1,9 @@
 import type { Weapon } from '@/core/types';
 import { mToFt, mToYd, type Units } from '@/core/units';
+import { numberText } from '@/features/clubs/read-number';
 import { arcText } from './arc-text';
 import { bearingText } from './bearing-text';
 import { degreesText } from './place-text';
-import { numberText } from './read-form';
 import type { StandForm } from './stand-schema';
 import type { StandValues } from './stands-data';
 

@@ -1,11 +1,11 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { SECTOR_NAMES } from '@/core/sectors';
+import { numberText, parseNumber } from '@/features/clubs/read-number';
 import { arcText, readArcs } from './arc-text';
 import { bearingText, formatBearing, parseBearing } from './bearing-text';
 import { geometryText, parseGeometry, parsePoints, pointsText } from './geometry-text';
 import { farFromClub, parseDegrees } from './place-text';
-import { numberText, parseNumber } from './read-form';
 
 const club = { lat: 38.6, lon: -83.2 };
 const place = fc.tuple(

@@ -6,3 +6,9 @@ export const TAKEN_NAMES = {
   approachTo: (stand: string, name: string) =>
     `There is already an approach to ${stand} called ${name}: choose another name.`,
 } as const;
+
+export const FIELD_ERRORS = {
+  name: 'Give it a name.',
+  nameLong: (most: number) => `Keep the name to ${most} characters.`,
+  day: 'Choose a day.',
+} as const;
