@@ -1,5 +1,7 @@
 import { z } from 'zod';
 import { MOST_THINGS } from './read/limits';
+import { EXPORT_ERRORS } from './words/export';
+import { IMPORT_ERRORS } from './words/import';
 
 const id = z.string().min(1).max(40);
 const version = z.number().int().min(1).max(1e9);
@@ -10,7 +12,7 @@ export const saveImportInput = z.object({
   version,
   rows: z
     .array(z.object({ row: z.number().int().min(1).max(MOST_THINGS), kind: z.string().min(1).max(40) }))
-    .min(1, 'Choose at least one row to add.')
+    .min(1, IMPORT_ERRORS.noRow)
     .max(MOST_THINGS),
 });
 export type SaveImport = z.output<typeof saveImportInput>;
@@ -31,7 +33,7 @@ export const exportQuery = z.object({
     .string()
     .max(100)
     .transform((text) => text.split(','))
-    .pipe(z.array(z.enum(EXPORT_LAYERS)).min(1, 'Choose at least one layer.').max(EXPORT_LAYERS.length)),
+    .pipe(z.array(z.enum(EXPORT_LAYERS)).min(1, EXPORT_ERRORS.noLayer).max(EXPORT_LAYERS.length)),
 });
 export type ExportAsk = z.output<typeof exportQuery>;
 

@@ -1,3 +1,4 @@
+import type { Geometry } from 'geojson';
 import { dayOf } from '@/core/day-time';
 import { type ReadFrom, reader, write } from '@/db/client';
 import { listMapItems, loadGround } from '@/features/ground/data';
@@ -6,7 +7,8 @@ import { LAYER_WORDS } from '@/features/map/words';
 import { audit } from '@/server/audit';
 import type { ClubScope } from '@/server/scope';
 import type { ExportAsk, ExportFormat, ExportLayer } from './exchange-schema';
-import { type Exported, LAYER_TITLES } from './write/exported';
+import { EXPORT_AUDIT, exportedApproach } from './words/export';
+import type { Exported } from './write/exported';
 import { writeCsv } from './write/write-csv';
 import { writeGeoJson } from './write/write-geojson';
 import { writeGpx } from './write/write-gpx';
@@ -22,8 +24,8 @@ const TYPES: Record<ExportFormat, string> = {
 
 const WRITERS = { gpx: writeGpx, kml: writeKml, kmz: writeKmz, geojson: writeGeoJson, csv: writeCsv };
 
-const drawn = (geometry: { type: string }): geometry is DrawnGeometry =>
-  ['Point', 'LineString', 'Polygon'].includes(geometry.type);
+const drawn = (geometry: Geometry): geometry is DrawnGeometry =>
+  geometry.type === 'Point' || geometry.type === 'LineString' || geometry.type === 'Polygon';
 
 /** Everything on the ground that may leave, layer by layer. */
 export async function listExported(scope: ClubScope, from: ReadFrom): Promise<Exported[]> {
@@ -42,7 +44,7 @@ export async function listExported(scope: ClubScope, from: ReadFrom): Promise<Ex
     ...stands.map((row) => one('stands', `stand:${row.kind}`, row, point(row))),
     ...parkings.map((row) => one('parking', 'parking', row, point(row))),
     ...approaches.map((row) => {
-      const name = `${row.name} to ${standNames.get(row.standId) ?? 'a stand'}`;
+      const name = exportedApproach(row.name, standNames.get(row.standId) ?? null);
       return one('approaches', 'approach', { name, notes: row.notes }, { type: 'LineString', coordinates: row.points });
     }),
     ...features.flatMap((row) =>
@@ -64,7 +66,7 @@ export interface ExportedFile {
 export async function exportGround(scope: ClubScope, ask: ExportAsk, now: number): Promise<ExportedFile> {
   const { format } = ask;
   const layers = new Set(ask.layers);
-  const titles = [...layers].map((layer) => LAYER_TITLES[layer].toLowerCase()).join(', ');
+
   const things = await write(async (tx) => {
     const chosen = (await listExported(scope, tx)).filter(({ layer }) => layers.has(layer));
     const found = format === 'csv' ? chosen.filter(({ geometry }) => geometry.type === 'Point') : chosen;
@@ -76,7 +78,7 @@ export async function exportGround(scope: ClubScope, ask: ExportAsk, now: number
         action: 'ground.exported',
         subjectType: 'ground',
         subjectId: scope.club.id,
-        summary: `Took ${found.length} things of the ground out as ${format.toUpperCase()}: ${titles}.`,
+        summary: EXPORT_AUDIT.taken(found.length, format, [...layers]),
       },
       now,
     );

@@ -1,6 +1,7 @@
 import { formatDistance, type Units } from '@/core/units';
 import { kindOf } from './kind-values';
 import type { ReviewRow, Twin } from './review';
+import { FATE_SENTENCES } from './words/import';
 
 export type Fate = 'ready' | 'choose' | 'twin' | 'cannot';
 
@@ -16,14 +17,17 @@ export function fateOf(row: ReviewRow, kind: string): Fate {
   return twinsAs(row, kind).length > 0 ? 'twin' : 'ready';
 }
 
+function twinText(twin: Twin, units: Units): string {
+  const away = formatDistance(twin.apartM, units);
+  return twin.row === null ? FATE_SENTENCES.onMap(twin.name, away) : FATE_SENTENCES.inFile(twin.row, twin.name, away);
+}
+
 /** One sentence for the row's fate. */
 export function fateText(row: ReviewRow, kind: string, units: Units): string {
   const fate = fateOf(row, kind);
-  if (fate === 'cannot') return `Cannot be taken: ${row.problem}`;
+  if (fate === 'cannot') return FATE_SENTENCES.cannot(row.problem ?? '');
   const [twin] = twinsAs(row, kind);
-  const near = twin
-    ? `${twin.row === null ? `${twin.name} is there already` : `Row ${twin.row}, ${twin.name}, is the same`}, ${formatDistance(twin.apartM, units)} away.`
-    : '';
-  if (fate === 'choose') return ['Choose what it is.', near].filter(Boolean).join(' ');
-  return fate === 'twin' ? near : 'Will be added.';
+  const near = twin && twinText(twin, units);
+  if (fate === 'choose') return near ? FATE_SENTENCES.chooseNear(near) : FATE_SENTENCES.choose;
+  return near ?? FATE_SENTENCES.ready;
 }

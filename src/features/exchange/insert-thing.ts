@@ -12,6 +12,7 @@ import { newId } from '@/lib/ids';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { FreshNames } from './fresh-names';
+import { IMPORT_ERRORS, PLAIN_NAMES } from './words/import';
 
 /** What a way's end may lie off the stand or the parking place it belongs to. */
 const TIE_M = 60;
@@ -74,7 +75,7 @@ export class Taking {
     const { scope, tx, now } = this;
     const [lon = 0, lat = 0] = thing.geometry.type === 'Point' ? thing.geometry.coordinates : [];
     const id = newId(kind.kind);
-    const name = this.names[kind.kind].take(thing.name, kind.kind === 'stand' ? 'Stand' : 'Parking');
+    const name = this.names[kind.kind].take(thing.name, PLAIN_NAMES[kind.kind]);
     const base = { id, version: 1, name, geometry: thing.geometry };
     if (kind.kind === 'stand') {
       const values = { ...drawnStandDefaults(kind.what), kind: kind.what, arcs: [], notes: thing.notes };
@@ -99,14 +100,13 @@ export class Taking {
     };
     const stand = place(tied.standId);
     if (!stand || tied.standId === null) {
-      const what = `Row ${thing.row}${thing.name ? `, ${thing.name},` : ''} leads to no stand`;
-      throw new AppError('invalid', `${what}: none lies near its ends. Take it as a trail, or add its stand as well.`);
+      throw new AppError('invalid', IMPORT_ERRORS.noStand(thing.row, thing.name));
     }
     const parking = place(tied.parkingId);
     const names = this.ways.get(tied.standId) ?? new FreshNames([]);
     this.ways.set(tied.standId, names);
     const id = newId('approach');
-    const name = names.take(thing.name, parking ? `From ${parking.name}` : 'Approach');
+    const name = names.take(thing.name, parking ? PLAIN_NAMES.approachFrom(parking.name) : PLAIN_NAMES.approach);
     await insertApproach(scope, tx, {
       id,
       name,

@@ -6,6 +6,8 @@ import { nameOf } from '@/features/map/words';
 import { guessKind } from './guess-kind';
 import { kindOf } from './kind-values';
 import { type Measured, measure, NearIndex, sameWithinM } from './near';
+import { THING_PROBLEMS } from './words/files';
+import { REVIEW_ROW_WORDS } from './words/import';
 
 /** Something that lies where a row of the file lies. */
 export interface Twin {
@@ -48,8 +50,7 @@ export type Checked = { ok: true; geometry: DrawnGeometry } | { ok: false; messa
 
 /** A row's shape as the club's ground can hold it, or why it cannot. */
 export function checkRow(thing: ImportedThing, swapped: boolean, club: { lat: number; lon: number }): Checked {
-  if (thing.problem || !thing.geometry)
-    return { ok: false, message: thing.problem ?? 'It has no place on the ground.' };
+  if (thing.problem || !thing.geometry) return { ok: false, message: thing.problem ?? THING_PROBLEMS.noPlace };
   const geometry = swapped ? swapPlaces(thing.geometry) : thing.geometry;
   const read = parseGeometry(shapeOf(geometry), JSON.stringify(geometry), club);
   return read.ok ? { ok: true, geometry: read.geometry } : { ok: false, message: read.message };
@@ -102,7 +103,7 @@ export function reviewThings(
       if (apartM !== null) twins.push({ name: other.name, family: other.family, apartM, row: other.row });
     }
     const family = kindOf(kind)?.kind ?? '';
-    index.add({ measured, name: name || `row ${i + 1}`, family, row: i + 1 });
+    index.add({ measured, name: name || REVIEW_ROW_WORDS.rowAsName(i + 1), family, row: i + 1 });
     twins.sort((a, b) => a.apartM - b.apartM);
     return {
       ...base,

@@ -12,7 +12,7 @@ import { getImport, type ImportRow, updateImport } from './imports-data';
 import { type Taken, Taking } from './insert-thing';
 import { fitsShape, kindLabel, kindOf } from './kind-values';
 import { checkRow, shapeOf } from './review';
-import { CHANGED_SINCE } from './swap-import';
+import { IMPORT_AUDIT, IMPORT_ERRORS } from './words/import';
 
 const NEEDS: Record<NewKind['kind'], Permission> = {
   stand: 'stands.write',
@@ -32,23 +32,20 @@ const SUBJECTS = {
 
 function takenRows(scope: ClubScope, row: ImportRow, choices: SaveImport['rows']): Taken[] {
   if (new Set(choices.map((choice) => choice.row)).size !== choices.length) {
-    throw new AppError('invalid', 'One row was chosen twice: open the file again.');
+    throw new AppError('invalid', IMPORT_ERRORS.twice);
   }
   return choices.map(({ row: number, kind: value }) => {
     const thing = row.things[number - 1];
     const kind = kindOf(value);
-    if (!thing || !kind) throw new AppError('invalid', `Row ${number} is not in the file, or its kind is not known.`);
+    if (!thing || !kind) throw new AppError('invalid', IMPORT_ERRORS.unknown(number));
     if (!scope.can(NEEDS[kind.kind])) {
-      throw new AppError('forbidden', `Your role in ${scope.club.name} does not allow you to add all of these.`);
+      throw new AppError('forbidden', IMPORT_ERRORS.role(scope.club.name));
     }
     const checked = checkRow(thing, row.swapped, scope.club);
-    if (!checked.ok) throw new AppError('invalid', `Row ${number} cannot be taken: ${checked.message}`);
+    if (!checked.ok) throw new AppError('invalid', IMPORT_ERRORS.cannot(number, checked.message));
     const label = kindLabel(value);
     if (!fitsShape(value, shapeOf(checked.geometry))) {
-      throw new AppError(
-        'invalid',
-        `Row ${number} is no ${label.toLowerCase()}: it has the wrong shape. Choose another kind.`,
-      );
+      throw new AppError('invalid', IMPORT_ERRORS.shape(number, label));
     }
     return { row: number, name: thing.name, notes: thing.notes, geometry: checked.geometry, kind, label };
   });
@@ -71,7 +68,7 @@ export function saveImport(scope: ClubScope, input: SaveImport, now: number): Pr
   return write(async (tx) => {
     const row = await getImport(scope, input.id, tx);
     if (!row) throw notFound();
-    if (row.state !== 'read') throw new AppError('conflict', CHANGED_SINCE);
+    if (row.state !== 'read') throw new AppError('conflict', IMPORT_ERRORS.changedSince);
     const taken = takenRows(scope, row, input.rows);
     const taking = await beginTaking(scope, tx, now);
     for (const kind of ORDER) {
@@ -80,10 +77,10 @@ export function saveImport(scope: ClubScope, input: SaveImport, now: number): Pr
     const { made } = taking;
     for (const { kind, id, name } of made) {
       const subject = SUBJECTS[kind];
-      await noteChange(scope, tx, { subject, verb: 'added', id, summary: `Added ${name} from ${row.fileName}.` }, now);
+      await noteChange(scope, tx, { subject, verb: 'added', id, summary: IMPORT_AUDIT.added(name, row.fileName) }, now);
     }
     if (!(await updateImport(scope, tx, input, { state: 'saved', made, savedAt: now }))) {
-      throw new AppError('conflict', CHANGED_SINCE);
+      throw new AppError('conflict', IMPORT_ERRORS.changedSince);
     }
     await audit(
       tx,
@@ -93,7 +90,7 @@ export function saveImport(scope: ClubScope, input: SaveImport, now: number): Pr
         action: 'import.saved',
         subjectType: 'import',
         subjectId: row.id,
-        summary: `Added ${made.length} of ${row.things.length} things from ${row.fileName} to the ground.`,
+        summary: IMPORT_AUDIT.saved(made.length, row.things.length, row.fileName),
       },
       now,
     );

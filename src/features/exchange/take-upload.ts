@@ -6,6 +6,7 @@ import type { ClubScope } from '@/server/scope';
 import { insertImport } from './imports-data';
 import { MOST_BYTES } from './read/limits';
 import { readMapFile } from './read/read-file';
+import { FILE_PROBLEMS } from './words/files';
 
 /** Reads a file and keeps what it holds for looking over. Nothing of the ground changes yet. */
 export async function takeUpload(
@@ -13,7 +14,7 @@ export async function takeUpload(
   upload: { name: string; request: Request },
   now: number,
 ): Promise<{ id: string }> {
-  const tooMuch = `The file is over ${MOST_BYTES / 1024 / 1024} MB: split it, or leave out what is not needed.`;
+  const tooMuch = FILE_PROBLEMS.bytes(MOST_BYTES / 1024 / 1024);
   const bytes = await readBody(upload.request, MOST_BYTES, tooMuch);
   const read = readMapFile(bytes);
   if (!read.ok) throw new AppError('invalid', read.message);

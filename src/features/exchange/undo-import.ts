@@ -8,7 +8,7 @@ import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import type { AtImport } from './exchange-schema';
 import { getImport, updateImport } from './imports-data';
-import { CHANGED_SINCE } from './swap-import';
+import { IMPORT_AUDIT, IMPORT_ERRORS } from './words/import';
 
 const ORDER: MadeThing['kind'][] = ['approach', 'stand', 'feature', 'item', 'parking'];
 const TABLES = {
@@ -24,7 +24,7 @@ export function undoImport(scope: ClubScope, at: AtImport, now: number): Promise
   return write(async (tx) => {
     const row = await getImport(scope, at.id, tx);
     if (!row) throw notFound();
-    if (row.state !== 'saved') throw new AppError('conflict', CHANGED_SINCE);
+    if (row.state !== 'saved') throw new AppError('conflict', IMPORT_ERRORS.changedSince);
     const saving: Saving = { scope, tx, now, rows: await loadDrawn(scope, tx), removed: new Set(), ids: {} };
     const own = new Set(row.made.map(({ id }) => id));
     const built = saving.rows.approaches
@@ -51,9 +51,9 @@ export function undoImport(scope: ClubScope, at: AtImport, now: number): Promise
       }
     }
     if (!(await updateImport(scope, tx, at, { state: 'undone', undoneAt: now }))) {
-      throw new AppError('conflict', CHANGED_SINCE);
+      throw new AppError('conflict', IMPORT_ERRORS.changedSince);
     }
-    const stay = kept.length > 0 ? ` Kept what was changed or used since: ${kept.join(', ')}.` : '';
+
     await audit(
       tx,
       {
@@ -62,7 +62,7 @@ export function undoImport(scope: ClubScope, at: AtImport, now: number): Promise
         action: 'import.undone',
         subjectType: 'import',
         subjectId: row.id,
-        summary: `Took away ${removed} things that came from ${row.fileName}.${stay.slice(0, 400)}`,
+        summary: IMPORT_AUDIT.undone(removed, row.fileName, kept),
       },
       now,
     );

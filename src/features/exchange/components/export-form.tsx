@@ -5,15 +5,9 @@ import { ButtonLink } from '@/ui/button';
 import { CheckboxGroup, RadioCards } from '@/ui/choices';
 import { Notice } from '@/ui/notices';
 import { EXPORT_FORMATS, EXPORT_LAYERS, type ExportFormat, type ExportLayer } from '../exchange-schema';
-import { LAYER_TITLES } from '../write/exported';
+import { EXPORT_FORM_WORDS, FORMAT_WORDS, LAYER_TITLES } from '../words/export';
 
-const FORMAT_NOTES: Record<ExportFormat, { label: string; note: string }> = {
-  gpx: { label: 'GPX', note: 'For handheld receivers and phones; areas become closed tracks' },
-  kml: { label: 'KML', note: 'For globes and map programs' },
-  kmz: { label: 'KMZ', note: 'The same as KML, packed small' },
-  geojson: { label: 'GeoJSON', note: 'For map programs and your own tools' },
-  csv: { label: 'CSV', note: 'A table of the points; lines and areas are left out' },
-};
+const words = EXPORT_FORM_WORDS;
 
 interface ExportFormProps {
   club: string;
@@ -29,7 +23,7 @@ export function ExportForm({ club, counts }: ExportFormProps) {
   return (
     <div className="grid max-w-2xl gap-5">
       <CheckboxGroup
-        label="What to take out"
+        label={words.what}
         choices={EXPORT_LAYERS.map((value) => ({ value, label: LAYER_TITLES[value], note: String(counts[value].all) }))}
         value={chosen}
         onChange={({ target }) => {
@@ -42,19 +36,19 @@ export function ExportForm({ club, counts }: ExportFormProps) {
         }}
       />
       <RadioCards
-        label="As"
+        label={words.as}
         name="format"
         value={format}
-        choices={EXPORT_FORMATS.map((value) => ({ value, ...FORMAT_NOTES[value] }))}
+        choices={EXPORT_FORMATS.map((value) => ({ value, ...FORMAT_WORDS[value] }))}
         onChange={({ target }) => {
           const next = EXPORT_FORMATS.find((one) => one === target.value);
           if (next) setFormat(next);
         }}
       />
-      <Notice>Places of stands and cameras are secrets. That you took them out is written in the audit log.</Notice>
+      <Notice>{words.secrets}</Notice>
       <div>
         {number === 0 ? (
-          <p>There is nothing to take out in this way.</p>
+          <p>{words.nothing}</p>
         ) : (
           <ButtonLink
             look="primary"
@@ -62,7 +56,7 @@ export function ExportForm({ club, counts }: ExportFormProps) {
             prefetch={false}
             download
           >
-            Take out {number === 1 ? 'one thing' : `${number} things`}
+            {words.take(number)}
           </ButtonLink>
         )}
       </div>

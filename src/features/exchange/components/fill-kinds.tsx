@@ -5,8 +5,9 @@ import type { DrawnShape } from '@/core/map-layers';
 import { Button } from '@/ui/button';
 import { Select } from '@/ui/text-inputs';
 import { choicesFor } from '../kind-values';
+import { FILL_WORDS } from '../words/import';
 
-const MANY = { point: 'points', line: 'lines', area: 'areas' } as const;
+const words = FILL_WORDS;
 
 interface FillKindsProps {
   shape: DrawnShape;
@@ -18,17 +19,17 @@ interface FillKindsProps {
 /** One kind for everything of a shape that has none. */
 export function FillKinds({ shape, count, disabled, onFill }: FillKindsProps) {
   const [kind, setKind] = useState('');
-  const what = count === 1 ? `the one ${shape}` : `all ${count} ${MANY[shape]}`;
+
   return (
     <div className="flex flex-wrap items-end gap-2">
       <Select
-        label={`Take ${what} without a kind as`}
-        placeholder="Choose"
+        label={words.label(shape, count)}
+        placeholder={words.choose}
         value={kind}
         disabled={disabled}
         onChange={({ target }) => setKind(target.value)}
       >
-        <option value="">Choose</option>
+        <option value="">{words.choose}</option>
         {choicesFor(shape).map((group) => (
           <optgroup key={group.label} label={group.label}>
             {group.options.map(({ value, label }) => (
@@ -40,7 +41,7 @@ export function FillKinds({ shape, count, disabled, onFill }: FillKindsProps) {
         ))}
       </Select>
       <Button disabled={disabled || kind === ''} onClick={() => onFill(kind)}>
-        Set {MANY[shape]}
+        {words.set[shape]}
       </Button>
     </div>
   );

@@ -1,6 +1,9 @@
 import { TextLink } from '@/ui/button';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { ImportLine } from '../imports-data';
+import { IMPORT_LIST_WORDS } from '../words/import';
+
+const words = IMPORT_LIST_WORDS;
 
 interface ImportListProps {
   club: string;
@@ -8,20 +11,18 @@ interface ImportListProps {
 }
 
 function stateText({ state, made }: ImportLine): string {
-  if (state === 'read') return 'Waits to be looked over';
-  const many = made.length === 1 ? 'One thing added' : `${made.length} things added`;
-  return state === 'saved' ? many : `${many}, then undone`;
+  return state === 'read' ? words.waits : words[state](made.length);
 }
 
 /** The latest files, each with a way back to it. */
 export function ImportList({ club, lines }: ImportListProps) {
   return (
-    <Table caption="Files read before" captionHidden>
+    <Table caption={words.caption} captionHidden>
       <THead>
-        <Th>File</Th>
-        <Th>Read</Th>
-        <Th>By</Th>
-        <Th>What came of it</Th>
+        <Th>{words.file}</Th>
+        <Th>{words.read}</Th>
+        <Th>{words.by}</Th>
+        <Th>{words.outcome}</Th>
       </THead>
       <TBody>
         {lines.map((line) => (
@@ -29,9 +30,9 @@ export function ImportList({ club, lines }: ImportListProps) {
             <RowHead>
               <TextLink href={`/clubs/${club}/ground/import/${line.id}`}>{line.fileName}</TextLink>
             </RowHead>
-            <Td label="Read">{line.at}</Td>
-            <Td label="By">{line.memberName}</Td>
-            <Td label="What came of it">{stateText(line)}</Td>
+            <Td label={words.read}>{line.at}</Td>
+            <Td label={words.by}>{line.memberName}</Td>
+            <Td label={words.outcome}>{stateText(line)}</Td>
           </Tr>
         ))}
       </TBody>

@@ -14,19 +14,17 @@ import { useToast } from '@/ui/toast';
 import type { AtImport, SaveImport } from '../exchange-schema';
 import type { Fate } from '../fate';
 import type { ImportView } from '../read-import';
+import { FATE_WORDS, REVIEW_ROW_WORDS, REVIEW_WORDS } from '../words/import';
 import { FillKinds } from './fill-kinds';
 import { ReviewTableRow } from './review-row';
 import { useReview } from './use-review';
 
+const row = REVIEW_ROW_WORDS;
 const PAGE = 50;
 const SHAPES: DrawnShape[] = ['point', 'line', 'area'];
-const LOST = 'The server could not be reached. Your choices are still here: try again.';
-const SHOWN: { value: Fate; label: string }[] = [
-  { value: 'ready', label: 'Will be added' },
-  { value: 'choose', label: 'Kind not known' },
-  { value: 'twin', label: 'There already' },
-  { value: 'cannot', label: 'Cannot be taken' },
-];
+const words = REVIEW_WORDS;
+const FATES: Fate[] = ['ready', 'choose', 'twin', 'cannot'];
+const SHOWN = FATES.map((value) => ({ value, label: FATE_WORDS[value] }));
 
 interface ImportReviewProps {
   club: string;
@@ -57,7 +55,7 @@ export function ImportReview({ club, units, view, save, swap }: ImportReviewProp
     setProblem(null);
     const answer = await call().catch(() => null);
     setBusy(null);
-    if (!answer) setProblem(LOST);
+    if (!answer) setProblem(words.lost);
     else if (!answer.ok) setProblem(answer.error.message);
     else then(answer.data);
   }
@@ -67,11 +65,11 @@ export function ImportReview({ club, units, view, save, swap }: ImportReviewProp
       {view.looksSwapped && (
         <Notice
           level="caution"
-          title="Latitude and longitude look swapped"
+          title={words.swappedTitle}
           actions={
             <Button
               pending={busy === 'swap'}
-              pendingLabel="Swapping…"
+              pendingLabel={words.swapping}
               onClick={() =>
                 run(
                   'swap',
@@ -80,17 +78,17 @@ export function ImportReview({ club, units, view, save, swap }: ImportReviewProp
                 )
               }
             >
-              Swap them
+              {words.swap}
             </Button>
           }
         >
-          As they stand the places lie far from the club; the other way round they lie on it.
+          {words.swappedText}
         </Notice>
       )}
       {view.remarks.map((remark) => (
         <Notice key={remark}>{remark}</Notice>
       ))}
-      <p>{SHOWN.map(({ value, label }) => `${label}: ${count(value)}`).join(' · ')}</p>
+      <p>{words.counts(SHOWN.map(({ value, label }) => ({ label, count: count(value) })))}</p>
       {SHAPES.map((shape) => {
         const open = judged.filter(({ row, fate }) => fate === 'choose' && row.shape === shape).length;
         return (
@@ -107,28 +105,28 @@ export function ImportReview({ club, units, view, save, swap }: ImportReviewProp
       })}
       <div className="flex flex-wrap items-end gap-2">
         <Select
-          label="Show"
+          label={words.show}
           value={only}
           onChange={({ target }) => {
             setOnly(target.value);
             setPage(1);
           }}
-          options={[{ value: '', label: 'All rows' }, ...SHOWN]}
+          options={[{ value: '', label: words.allRows }, ...SHOWN]}
         />
         <Button disabled={busy !== null} onClick={() => review.takeAll(true)}>
-          Tick all that can be added
+          {words.tickAll}
         </Button>
         <Button disabled={busy !== null} onClick={() => review.takeAll(false)}>
-          Tick none
+          {words.tickNone}
         </Button>
       </div>
-      <Table caption={`Rows of ${view.fileName}`} captionHidden>
+      <Table caption={words.caption(view.fileName)} captionHidden>
         <THead>
-          <Th>Add</Th>
-          <Th>Name</Th>
-          <Th>Shape</Th>
-          <Th>What it is</Th>
-          <Th>What becomes of it</Th>
+          <Th>{row.add}</Th>
+          <Th>{row.name}</Th>
+          <Th>{row.shape}</Th>
+          <Th>{row.kind}</Th>
+          <Th>{row.fate}</Th>
         </THead>
         <TBody>
           {seen.slice((at - 1) * PAGE, at * PAGE).map((one) => (
@@ -143,9 +141,9 @@ export function ImportReview({ club, units, view, save, swap }: ImportReviewProp
           ))}
         </TBody>
       </Table>
-      {pages > 1 && <Pager page={at} pages={pages} onPage={setPage} summary={`${seen.length} rows`} />}
+      {pages > 1 && <Pager page={at} pages={pages} onPage={setPage} summary={words.rows(seen.length)} />}
       {problem && (
-        <Notice live level="caution" title="Nothing was added">
+        <Notice live level="caution" title={words.notAdded}>
           {problem}
         </Notice>
       )}
@@ -154,20 +152,20 @@ export function ImportReview({ club, units, view, save, swap }: ImportReviewProp
           look="primary"
           disabled={taken.length === 0}
           pending={busy === 'save'}
-          pendingLabel="Adding…"
+          pendingLabel={words.adding}
           onClick={() =>
             run(
               'save',
               () =>
                 save(club, { ...here, rows: taken.map(({ row, choice }) => ({ row: row.row, kind: choice.kind })) }),
               ({ added }) => {
-                toast({ title: `${added} added to the ground` });
+                toast({ title: words.added(added) });
                 router.refresh();
               },
             )
           }
         >
-          {taken.length === 0 ? 'Nothing is ticked' : `Add ${taken.length} to the ground`}
+          {taken.length === 0 ? words.nothingTicked : words.add(taken.length)}
         </Button>
       </div>
     </div>

@@ -4,9 +4,10 @@ import { Td, Tr } from '@/ui/table';
 import { fateText } from '../fate';
 import { choicesFor } from '../kind-values';
 import type { ReviewRow } from '../review';
+import { REVIEW_ROW_WORDS } from '../words/import';
 import type { Judged } from './use-review';
 
-const SHAPE_WORDS = { point: 'Point', line: 'Line', area: 'Area' } as const;
+const words = REVIEW_ROW_WORDS;
 
 interface ReviewRowProps {
   judged: Judged;
@@ -18,21 +19,21 @@ interface ReviewRowProps {
 
 export function ReviewTableRow({ judged, units, disabled, onKind, onTaken }: ReviewRowProps) {
   const { row, choice, fate } = judged;
-  const name = row.name || `Row ${row.row}`;
+  const name = row.name || words.row(row.row);
   const may = fate === 'ready' || fate === 'twin';
   return (
     <Tr>
-      <Td label="Add">
+      <Td label={words.add}>
         <input
           type="checkbox"
-          aria-label={`Add ${name}, row ${row.row}`}
+          aria-label={words.addRow(name, row.row)}
           className="tick size-5"
           checked={choice.taken && may}
           disabled={disabled || !may}
           onChange={({ target }) => onTaken(row, choice.kind, target.checked)}
         />
       </Td>
-      <Td label="Name">
+      <Td label={words.name}>
         <div className="min-w-0">
           <span className="break-words font-serif font-semibold">{name}</span>
           {row.notes && (
@@ -40,24 +41,24 @@ export function ReviewTableRow({ judged, units, disabled, onKind, onTaken }: Rev
           )}
         </div>
       </Td>
-      <Td label="Shape">
+      <Td label={words.shape}>
         <div className="min-w-0">
-          {row.shape === null ? '–' : SHAPE_WORDS[row.shape]}
-          {row.size.points > 1 && <span className="text-ink-soft">, {row.size.points} points</span>}
+          {row.shape === null ? '–' : words.shapes[row.shape]}
+          {row.size.points > 1 && <span className="text-ink-soft">{words.points(row.size.points)}</span>}
         </div>
       </Td>
-      <Td label="What it is">
+      <Td label={words.kind}>
         {row.shape === null ? (
           '–'
         ) : (
           <select
-            aria-label={`What ${name}, row ${row.row}, is`}
+            aria-label={words.kindOf(name, row.row)}
             className={CONTROL_CLASSES}
             value={choice.kind}
             disabled={disabled}
             onChange={({ target }) => onKind(row, target.value)}
           >
-            <option value="">Choose</option>
+            <option value="">{words.choose}</option>
             {choicesFor(row.shape).map((group) => (
               <optgroup key={group.label} label={group.label}>
                 {group.options.map(({ value, label }) => (
@@ -70,7 +71,7 @@ export function ReviewTableRow({ judged, units, disabled, onKind, onTaken }: Rev
           </select>
         )}
       </Td>
-      <Td label="What becomes of it">
+      <Td label={words.fate}>
         <div className="min-w-0">
           <span className={fate === 'ready' ? '' : 'font-semibold'}>{fateText(row, choice.kind, units)}</span>
           {row.remarks.map((remark) => (

@@ -6,6 +6,9 @@ import { Button } from '@/ui/button';
 import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { useToast } from '@/ui/toast';
 import type { AtImport } from '../exchange-schema';
+import { UNDO_WORDS } from '../words/import';
+
+const words = UNDO_WORDS;
 
 interface UndoImportProps {
   club: string;
@@ -19,26 +22,23 @@ export function UndoImport({ club, at, count, undo }: UndoImportProps) {
   const toast = useToast();
   return (
     <ConfirmDialog
-      title="Undo this import?"
-      confirmLabel="Undo the import"
+      title={words.title}
+      confirmLabel={words.undo}
       danger
-      trigger={<Button>Undo the import</Button>}
+      trigger={<Button>{words.undo}</Button>}
       onConfirm={async () => {
         const answer = await undo(club, at).catch(() => null);
-        if (!answer) return 'The server could not be reached. Try again.';
+        if (!answer) return words.lost;
         if (!answer.ok) return answer.error.message;
         const { removed, kept } = answer.data;
         toast({
-          title: `${removed} taken away again`,
-          ...(kept.length > 0 ? { text: `Kept, because changed or used since: ${kept.join(', ')}` } : {}),
+          title: words.undone(removed),
+          ...(kept.length > 0 ? { text: words.kept(kept) } : {}),
         });
         router.refresh();
       }}
     >
-      <p>
-        Takes away the {count} things this file added. What has been changed, booked or built upon since stays where it
-        is.
-      </p>
+      <p>{words.text(count)}</p>
     </ConfirmDialog>
   );
 }

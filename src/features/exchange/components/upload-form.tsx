@@ -7,9 +7,14 @@ import { Button } from '@/ui/button';
 import { Field } from '@/ui/field';
 import { Notice } from '@/ui/notices';
 import { ProgressBar } from '@/ui/progress-bar';
+import { FILE_PROBLEMS } from '../words/files';
+import { UPLOAD_WORDS } from '../words/import';
+
+const words = UPLOAD_WORDS;
 
 /** Sends a file of a map to be read, and opens what was found in it. */
 export function UploadForm({ club, mostBytes }: { club: string; mostBytes: number }) {
+  const megabytes = mostBytes / 1024 / 1024;
   const router = useRouter();
   const formId = useId();
   const [sent, setSent] = useState<number | null>(null);
@@ -18,7 +23,7 @@ export function UploadForm({ club, mostBytes }: { club: string; mostBytes: numbe
   async function send(file: File) {
     setProblem(null);
     if (file.size > mostBytes) {
-      setProblem(`The file is over ${mostBytes / 1024 / 1024} MB: split it, or leave out what is not needed.`);
+      setProblem(FILE_PROBLEMS.bytes(megabytes));
       return;
     }
     setSent(0);
@@ -41,10 +46,10 @@ export function UploadForm({ club, mostBytes }: { club: string; mostBytes: numbe
         event.preventDefault();
         const file = new FormData(event.currentTarget).get('file');
         if (file instanceof File && file.size > 0) void send(file);
-        else setProblem('Choose a file first; an empty one has nothing to add.');
+        else setProblem(words.choose);
       }}
     >
-      <Field label="File" hint="GPX, KML, KMZ, GeoJSON, or a CSV table with lat and lon columns; up to 50 MB">
+      <Field label={words.file} hint={words.hint(megabytes)}>
         {(control) => (
           <input
             {...control}
@@ -57,21 +62,19 @@ export function UploadForm({ club, mostBytes }: { club: string; mostBytes: numbe
         )}
       </Field>
       {problem && (
-        <Notice live level="caution" title="This file was not read">
+        <Notice live level="caution" title={words.notRead}>
           {problem}
         </Notice>
       )}
-      {sent !== null && (
-        <ProgressBar label={sent < 1 ? 'Sending the file' : 'Reading the file'} share={sent < 1 ? sent : null} />
-      )}
+      {sent !== null && <ProgressBar label={sent < 1 ? words.sending : words.reading} share={sent < 1 ? sent : null} />}
       <div>
         <Button
           type="submit"
           look="primary"
           pending={sent !== null}
-          pendingLabel={sent !== null && sent < 1 ? 'Sending…' : 'Reading…'}
+          pendingLabel={sent !== null && sent < 1 ? words.sendingShort : words.readingShort}
         >
-          Read the file
+          {words.read}
         </Button>
       </div>
     </form>

@@ -17,7 +17,3 @@ export function textOf(element: Element, name: string): string {
   }
   return '';
 }
-
-export function tellBroken(line: number | null, what: string): string {
-  return `${line === null ? '' : `Line ${line}: `}${what}`;
-}

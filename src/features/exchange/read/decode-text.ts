@@ -1,3 +1,4 @@
+import { FILE_PROBLEMS, FILE_REMARKS } from '../words/files';
 import { FileProblem, lineAt } from './file-problem';
 
 const MARKS: { bytes: number[]; encoding: string }[] = [
@@ -37,16 +38,17 @@ export function decodeText(bytes: Uint8Array, kind: 'xml' | 'json' | 'csv'): Dec
   try {
     decoder = new TextDecoder(encoding, { fatal: true });
   } catch {
-    throw new FileProblem(`Line 1 says the text is "${encoding.slice(0, 40)}", which is not known. Save it as UTF-8.`);
+    throw new FileProblem(FILE_PROBLEMS.encoding(encoding.slice(0, 40)));
   }
   try {
     return { text: decoder.decode(bytes), remarks: [] };
   } catch {
     if (kind === 'csv' && encoding === 'utf-8') {
-      const remark = 'The text is not UTF-8: it was read as Windows Western. Look whether the names are right.';
-      return { text: new TextDecoder('windows-1252').decode(bytes), remarks: [remark] };
+      return { text: new TextDecoder('windows-1252').decode(bytes), remarks: [FILE_REMARKS.western] };
     }
-    const line = encoding.toLowerCase() === 'utf-8' ? `Line ${firstBadLine(bytes)} holds` : 'The file holds';
-    throw new FileProblem(`${line} bytes that are no ${encoding.toUpperCase()} text. Save it as UTF-8 and try again.`);
+    const name = encoding.toUpperCase();
+    throw new FileProblem(
+      name === 'UTF-8' ? FILE_PROBLEMS.badBytesOn(firstBadLine(bytes), name) : FILE_PROBLEMS.badBytes(name),
+    );
   }
 }

@@ -1,9 +1,10 @@
+import { FILE_PROBLEMS } from '../words/files';
 import { FileProblem } from './file-problem';
 import type { FileFormat } from './raw-thing';
 
 /** What a file is by what it holds: its name and what the browser calls it count for nothing. */
 export function detectFormat(bytes: Uint8Array): FileFormat {
-  if (bytes.length === 0) throw new FileProblem('The file is empty: choose another.');
+  if (bytes.length === 0) throw new FileProblem(FILE_PROBLEMS.empty);
   if (bytes[0] === 0x50 && bytes[1] === 0x4b && bytes[2] === 3 && bytes[3] === 4) return 'kmz';
   const wide = (bytes[0] === 0xff && bytes[1] === 0xfe) || (bytes[0] === 0x3c && bytes[1] === 0);
   const wideBig = (bytes[0] === 0xfe && bytes[1] === 0xff) || (bytes[0] === 0 && bytes[1] === 0x3c);
@@ -12,13 +13,13 @@ export function detectFormat(bytes: Uint8Array): FileFormat {
     .decode(bytes.subarray(0, 8192))
     .replace(/^\ufeff/, '')
     .trimStart();
-  if (head === '') throw new FileProblem('The file holds nothing but blanks: choose another.');
+  if (head === '') throw new FileProblem(FILE_PROBLEMS.blank);
   if (/(?![\t\n\v\f\r])\p{Cc}/u.test(head)) {
-    throw new FileProblem('This is no file of a map that can be read here: choose GPX, KML, KMZ, GeoJSON or CSV.');
+    throw new FileProblem(FILE_PROBLEMS.noMap);
   }
   if (head.startsWith('{') || head.startsWith('[')) return 'geojson';
   if (!head.startsWith('<')) return 'csv';
   if (/<(\w+:)?gpx[\s/>]/i.test(head)) return 'gpx';
   if (/<(\w+:)?kml[\s/>]/i.test(head)) return 'kml';
-  throw new FileProblem('This is XML, but neither GPX nor KML: export it again in one of those.');
+  throw new FileProblem(FILE_PROBLEMS.otherXml);
 }

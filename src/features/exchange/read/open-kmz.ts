@@ -1,4 +1,5 @@
 import { Unzip, UnzipInflate } from 'fflate';
+import { FILE_PROBLEMS } from '../words/files';
 import { FileProblem } from './file-problem';
 import { MOST_ENTRIES, MOST_UNPACK_RATIO, MOST_UNPACKED_BYTES } from './limits';
 
@@ -22,16 +23,15 @@ export function openKmz(bytes: Uint8Array): Uint8Array[] {
   const most = Math.min(MOST_UNPACKED_BYTES, Math.max(FREE_BYTES, bytes.length * MOST_UNPACK_RATIO));
   const unzip = new Unzip((entry) => {
     entries += 1;
-    if (entries > MOST_ENTRIES) problem ??= `The archive holds more than ${MOST_ENTRIES} files.`;
+    if (entries > MOST_ENTRIES) problem ??= FILE_PROBLEMS.entries(MOST_ENTRIES);
     if (problem || !/\.kml$/i.test(entry.name)) return;
     const own: Unpacked = { chunks: [], done: false };
     found.push(own);
     entry.ondata = (error, chunk, final) => {
-      if (error) problem ??= 'The archive is damaged: its KML cannot be unpacked. Export it again.';
+      if (error) problem ??= FILE_PROBLEMS.damagedKml;
       if (problem) return;
       length += chunk.length;
-      if (length > most)
-        problem = 'The archive unpacks to far more than a map needs, so it was not opened any further.';
+      if (length > most) problem = FILE_PROBLEMS.unpacked;
       else own.chunks.push(chunk);
       own.done ||= final;
     };
@@ -43,10 +43,10 @@ export function openKmz(bytes: Uint8Array): Uint8Array[] {
       unzip.push(bytes.subarray(at, at + STEP), at + STEP >= bytes.length);
     }
   } catch {
-    problem ??= 'The archive is damaged: export it again.';
+    problem ??= FILE_PROBLEMS.damaged;
   }
   if (problem) throw new FileProblem(problem);
-  if (found.length === 0) throw new FileProblem('The archive holds no KML: choose a KMZ file.');
-  if (found.some(({ done }) => !done)) throw new FileProblem('The archive is cut short: export it again.');
+  if (found.length === 0) throw new FileProblem(FILE_PROBLEMS.noKml);
+  if (found.some(({ done }) => !done)) throw new FileProblem(FILE_PROBLEMS.cutShort);
   return found.map(({ chunks }) => Buffer.concat(chunks));
 }

@@ -1,4 +1,5 @@
 import { DOMParser, type Document, ParseError } from '@xmldom/xmldom';
+import { FILE_PROBLEMS } from '../words/files';
 import { FileProblem, lineAt } from './file-problem';
 import { MOST_ELEMENTS } from './limits';
 
@@ -31,14 +32,10 @@ function countElements(text: string): number {
 export function parseXml(text: string): Document {
   const declared = findDeclaration(text);
   if (declared >= 0) {
-    throw new FileProblem(
-      `Line ${lineAt(text, declared)} declares a document type or entities, which no map file needs. It was not read.`,
-    );
+    throw new FileProblem(FILE_PROBLEMS.declared(lineAt(text, declared)));
   }
   if (countElements(text) > MOST_ELEMENTS) {
-    throw new FileProblem(
-      'The file holds more points than are read at once: split it, or thin its tracks, and try again.',
-    );
+    throw new FileProblem(FILE_PROBLEMS.elements);
   }
 
   try {
@@ -49,7 +46,6 @@ export function parseXml(text: string): Document {
     }).parseFromString(text, 'text/xml');
   } catch (error) {
     const line = error instanceof ParseError ? error.locator?.lineNumber : undefined;
-    const at = line && line > 0 ? `Line ${line}: t` : 'T';
-    throw new FileProblem(`${at}he XML is broken there, or cut short. Export it again.`);
+    throw new FileProblem(line && line > 0 ? FILE_PROBLEMS.brokenXmlOn(line) : FILE_PROBLEMS.brokenXml);
   }
 }

@@ -1,5 +1,6 @@
 import Papa from 'papaparse';
 import { parseDegrees } from '@/features/ground/place-text';
+import { FILE_PROBLEMS, THING_PROBLEMS } from '../words/files';
 import { FileProblem } from './file-problem';
 import { LONGEST_LINE, MOST_THINGS } from './limits';
 import type { RawFile, RawThing } from './raw-thing';
@@ -29,9 +30,7 @@ function refuseLongLines(text: string): void {
     const end = text.indexOf('\n', start);
     const length = (end < 0 ? text.length : end) - start;
     if (length > LONGEST_LINE) {
-      throw new FileProblem(
-        `Line ${line} is ${length} characters long; a line of a table has at most ${LONGEST_LINE}.`,
-      );
+      throw new FileProblem(FILE_PROBLEMS.longLine(line, length, LONGEST_LINE));
     }
     if (end < 0) return;
     start = end + 1;
@@ -51,9 +50,11 @@ function readRow(cells: string[], at: Partial<Record<Column, number>>, line: num
     parseDegrees(lon, 'lon') ?? parseDegrees(lon, 'lat'),
   ];
   if (north === null || east === null) {
-    const [axis, value] = north === null ? ['latitude', lat] : ['longitude', lon];
-    const problem = value === '' ? `has no ${axis}.` : `"${value.slice(0, 30)}" is no ${axis}.`;
-    return { ...said, geometry: null, problem: `Line ${line}: ${value === '' ? 'it ' : ''}${problem}` };
+    const problem =
+      north === null
+        ? THING_PROBLEMS.noLatitude(line, lat.slice(0, 30))
+        : THING_PROBLEMS.noLongitude(line, lon.slice(0, 30));
+    return { ...said, geometry: null, problem };
   }
   return { ...said, geometry: { type: 'Point', coordinates: [east, north] } };
 }
@@ -79,14 +80,14 @@ export function readCsv(text: string): RawFile {
       line += countLines(text, cursor, meta.cursor);
       cursor = meta.cursor;
       if (data.every((cell) => cell.trim() === '')) return;
-      if (errors.some(({ type }) => type === 'Quotes')) problem = `Line ${begins}: a quotation mark is not closed.`;
+      if (errors.some(({ type }) => type === 'Quotes')) problem = FILE_PROBLEMS.openQuote(begins);
       if (!columns) {
         columns = findColumns(data);
         if (columns.lat === undefined || columns.lon === undefined) {
-          problem = `Line ${begins} has no headings for latitude and longitude: name two columns lat and lon.`;
+          problem = FILE_PROBLEMS.noHeadings(begins);
         }
       } else if (things.length >= MOST_THINGS) {
-        problem = `The table has more than ${MOST_THINGS} rows: split it.`;
+        problem = FILE_PROBLEMS.rows(MOST_THINGS);
       } else {
         things.push(readRow(data, columns, begins));
       }

@@ -114,7 +114,7 @@ describe('attacks and damage', () => {
     const huge = zipSync({ 'doc.kml': new Uint8Array(120 * 1024 * 1024) }, { level: 9 });
     expect(huge.length).toBeLessThan(200_000);
     expect(refusal(huge)).toContain('far more than a map needs');
-  });
+  }, 60_000);
 
   it('does not believe the sizes that an archive gives of itself', () => {
     const lying = zipSync({ 'doc.kml': new Uint8Array(120 * 1024 * 1024) }, { level: 9 });
@@ -122,7 +122,7 @@ describe('attacks and damage', () => {
     // Uncompressed size in the local header (APPNOTE.TXT 4.3.7).
     view.setUint32(22, 100, true);
     expect(refusal(lying)).toMatch(/far more than a map needs|damaged/);
-  });
+  }, 60_000);
 
   it('says when an archive has no KML, or is cut short', () => {
     expect(refusal(zipSync({ 'a.txt': strToU8('x') }))).toContain('no KML');

@@ -1,4 +1,5 @@
 import type { ImportedThing } from '@/db/schema';
+import { FILE_PROBLEMS, FILE_REMARKS } from '../words/files';
 import { decodeText } from './decode-text';
 import { detectFormat } from './detect-format';
 import { FileProblem } from './file-problem';
@@ -23,10 +24,8 @@ function readAs(format: FileFormat, text: string): RawFile {
   if (format !== 'gpx') return readKml(parseXml(text));
   const bare = withoutReadings(text);
   const { things, remarks } = readGpx(parseXml(bare.text));
-  return { things, remarks: bare.heights ? [...remarks, NO_HEIGHTS] : remarks };
+  return { things, remarks: bare.heights ? [...remarks, FILE_REMARKS.heights] : remarks };
 }
-
-const NO_HEIGHTS = 'Heights in the file are left out: the map is flat.';
 
 /** What a file of a map holds, whatever it is called; or in plain words why it cannot be read. */
 export function readMapFile(bytes: Uint8Array): ReadFile {
@@ -38,9 +37,9 @@ export function readMapFile(bytes: Uint8Array): ReadFile {
       return { things: raw.things, remarks: [...remarks, ...raw.remarks] };
     });
     const { things, heights } = toThings(parts.flatMap((part) => part.things));
-    if (things.length === 0) throw new FileProblem('There is nothing in the file that could be put on a map.');
+    if (things.length === 0) throw new FileProblem(FILE_PROBLEMS.nothing);
     const all = new Set(parts.flatMap((part) => part.remarks));
-    if (heights) all.add(NO_HEIGHTS);
+    if (heights) all.add(FILE_REMARKS.heights);
     return { ok: true, format, things, remarks: [...all] };
   } catch (error) {
     if (error instanceof FileProblem) return { ok: false, message: error.message };

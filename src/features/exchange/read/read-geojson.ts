@@ -1,5 +1,6 @@
 import type { Geometry } from 'geojson';
 import { z } from 'zod';
+import { FILE_PROBLEMS, THING_PROBLEMS } from '../words/files';
 import { FileProblem, lineAt } from './file-problem';
 import { MOST_THINGS } from './limits';
 import type { RawFile, RawThing } from './raw-thing';
@@ -36,13 +37,12 @@ function parseJson(text: string): unknown {
   } catch (error) {
     const stray = /[:[,]\s*-?(NaN|Infinity|nan|inf)\b/.exec(text);
     if (stray) {
-      throw new FileProblem(
-        `Line ${lineAt(text, stray.index)} holds ${stray[1]}, which is no number a place can have.`,
-      );
+      throw new FileProblem(FILE_PROBLEMS.strayNumber(lineAt(text, stray.index), stray[1] ?? ''));
     }
     const position = /position (\d+)/.exec(error instanceof Error ? error.message : '')?.[1];
-    const at = position === undefined ? 'The file' : `From line ${lineAt(text, Number(position))} on it`;
-    throw new FileProblem(`${at} is no JSON: it may be cut short. Export it again.`);
+    throw new FileProblem(
+      position === undefined ? FILE_PROBLEMS.noJson : FILE_PROBLEMS.noJsonFrom(lineAt(text, Number(position))),
+    );
   }
 }
 
@@ -51,9 +51,7 @@ const WORLD = /(CRS84|EPSG:+4326|EPSG:+4979|CRS83|EPSG:+4269)$/i;
 function refuseOtherSystem(value: unknown): void {
   const name = named.safeParse(value).data?.crs.properties.name;
   if (name === undefined || WORLD.test(name)) return;
-  throw new FileProblem(
-    `The file measures places in "${name.slice(0, 40)}": export it again in degrees (WGS 84, EPSG:4326).`,
-  );
+  throw new FileProblem(FILE_PROBLEMS.otherSystem(name.slice(0, 40)));
 }
 
 const text = (value: unknown): string =>
@@ -71,7 +69,7 @@ function pick(properties: Record<string, unknown>, names: string[]): string {
 function readFeature(value: unknown, number: number): RawThing {
   const parsed = feature.safeParse(value);
   if (!parsed.success) {
-    return { name: '', notes: '', told: '', geometry: null, problem: `Feature ${number} is no GeoJSON feature.` };
+    return { name: '', notes: '', told: '', geometry: null, problem: THING_PROBLEMS.noFeature(number) };
   }
   const properties = parsed.data.properties ?? {};
   const said = {
@@ -86,7 +84,7 @@ function readFeature(value: unknown, number: number): RawThing {
       .join(' '),
   };
   const shape = geometry.safeParse(parsed.data.geometry);
-  if (!shape.success) return { ...said, geometry: null, problem: `Feature ${number} has no shape that can be read.` };
+  if (!shape.success) return { ...said, geometry: null, problem: THING_PROBLEMS.noShape(number) };
   // Nulls among the numbers are found with everything else that is no place.
   return { ...said, geometry: shape.data as Geometry };
 }
@@ -98,9 +96,7 @@ export function readGeoJson(text: string): RawFile {
   const many = collection.safeParse(value);
   if (many.success) {
     if (many.data.features.length > MOST_THINGS) {
-      throw new FileProblem(
-        `The file holds ${many.data.features.length} features; at most ${MOST_THINGS} are read at once: split it.`,
-      );
+      throw new FileProblem(FILE_PROBLEMS.features(many.data.features.length, MOST_THINGS));
     }
     return { things: many.data.features.map((one, i) => readFeature(one, i + 1)), remarks: [] };
   }
@@ -109,5 +105,5 @@ export function readGeoJson(text: string): RawFile {
   if (geometry.safeParse(value).success) {
     return { things: [readFeature({ type: 'Feature', properties: {}, geometry: value }, 1)], remarks: [] };
   }
-  throw new FileProblem('This is JSON, but no GeoJSON: a FeatureCollection is looked for.');
+  throw new FileProblem(FILE_PROBLEMS.noGeoJson);
 }

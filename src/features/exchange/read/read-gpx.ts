@@ -1,7 +1,8 @@
 import { gpx } from '@tmcw/togeojson';
 import type { Document, Element } from '@xmldom/xmldom';
 import type { Geometry, Position } from 'geojson';
-import { isDegrees, lineOf, tellBroken, textOf } from './broken-parts';
+import { FILE_PROBLEMS, THING_PROBLEMS } from '../words/files';
+import { isDegrees, lineOf, textOf } from './broken-parts';
 import { FileProblem } from './file-problem';
 import type { RawFile, RawThing } from './raw-thing';
 
@@ -19,11 +20,10 @@ function takeBroken(document: Document): RawThing[] {
     for (const part of Array.from(document.getElementsByTagName(kind))) {
       const point = brokenPoint(part, kind);
       if (!point) continue;
-      const [lat, lon] = [point.getAttribute('lat') ?? 'nothing', point.getAttribute('lon') ?? 'nothing'];
-      const problem = tellBroken(
-        lineOf(point),
-        `latitude "${lat.slice(0, 20)}", longitude "${lon.slice(0, 20)}" is no place.`,
+      const [lat, lon] = [point.getAttribute('lat'), point.getAttribute('lon')].map(
+        (text) => text?.slice(0, 20) ?? null,
       );
+      const problem = THING_PROBLEMS.badPoint(lineOf(point), lat ?? null, lon ?? null);
       broken.push({ name: textOf(part, 'name'), notes: '', told: '', geometry: null, problem });
       part.parentNode?.removeChild(part);
     }
@@ -61,7 +61,7 @@ function asArea(geometry: Geometry | null, told: string): Geometry | null {
 
 /** Waypoints, routes and tracks of GPX 1.1 (and 1.0, which names them alike). */
 export function readGpx(document: Document): RawFile {
-  if (document.documentElement?.localName !== 'gpx') throw new FileProblem('Line 1: the outermost element is not gpx.');
+  if (document.documentElement?.localName !== 'gpx') throw new FileProblem(FILE_PROBLEMS.gpxRoot);
   const broken = takeBroken(document);
   const things = gpx(document).features.map(({ geometry, properties }): RawThing => {
     const { name, desc, cmt, sym, type } = properties ?? {};

@@ -1,6 +1,7 @@
 import { kml } from '@tmcw/togeojson';
 import type { Document, Element } from '@xmldom/xmldom';
-import { isDegrees, lineOf, tellBroken, textOf } from './broken-parts';
+import { FILE_PROBLEMS, FILE_REMARKS, THING_PROBLEMS } from '../words/files';
+import { isDegrees, lineOf, textOf } from './broken-parts';
 import { FileProblem } from './file-problem';
 import type { RawFile, RawThing } from './raw-thing';
 
@@ -24,7 +25,7 @@ function takeBroken(document: Document): RawThing[] {
   for (const placemark of Array.from(document.getElementsByTagName('Placemark'))) {
     const found = brokenPlace(placemark);
     if (!found) continue;
-    const problem = tellBroken(lineOf(found.element), `"${found.tuple.slice(0, 40)}" is no longitude, latitude.`);
+    const problem = THING_PROBLEMS.badTuple(lineOf(found.element), found.tuple.slice(0, 40));
     broken.push({ name: textOf(placemark, 'name'), notes: '', told: '', geometry: null, problem });
     placemark.parentNode?.removeChild(placemark);
   }
@@ -47,10 +48,10 @@ function plainText(value: unknown): string {
 
 /** Placemarks of KML, in whatever folders they lie. */
 export function readKml(document: Document): RawFile {
-  if (document.documentElement?.localName !== 'kml') throw new FileProblem('Line 1: the outermost element is not kml.');
+  if (document.documentElement?.localName !== 'kml') throw new FileProblem(FILE_PROBLEMS.kmlRoot);
   const remarks: string[] = [];
   if (Array.from(document.getElementsByTagName('href')).some((link) => /^\s*https?:/i.test(link.textContent ?? ''))) {
-    remarks.push('Links to other places in it were not followed.');
+    remarks.push(FILE_REMARKS.links);
   }
   const broken = takeBroken(document);
   const things = kml(document).features.map(({ geometry, properties }): RawThing => {

@@ -3,6 +3,7 @@ import type { Geometry, LineString, Point, Polygon, Position } from 'geojson';
 import type { ImportedThing } from '@/db/schema';
 import { MOST_POINTS } from '@/features/ground/geometry-text';
 import { NAME_MAX, NOTES_MAX } from '@/features/ground/read-form';
+import { FILE_PROBLEMS, THING_PROBLEMS, THING_REMARKS } from '../words/files';
 import { FileProblem } from './file-problem';
 import { MOST_PLACES, MOST_THINGS } from './limits';
 import type { RawThing } from './raw-thing';
@@ -38,16 +39,15 @@ const isNumber = (value: unknown): value is number => typeof value === 'number' 
 
 function findWrong(shape: Shape): string | null {
   const places = placesOf(shape);
-  if (places.length === 0) return 'It has no places.';
+  if (places.length === 0) return THING_PROBLEMS.noPlaces;
   for (const [i, [lon, lat]] of places.entries()) {
-    if (!isNumber(lon) || !isNumber(lat)) return `Place ${i + 1} of it is no pair of numbers.`;
+    if (!isNumber(lon) || !isNumber(lat)) return THING_PROBLEMS.noNumbers(i + 1);
     if (Math.abs(lon) > 180 || Math.abs(lat) > 180) {
-      return `Place ${i + 1} of it, ${lon}, ${lat}, is not in degrees: export the file as WGS 84.`;
+      return THING_PROBLEMS.noDegrees(i + 1, lon, lat);
     }
   }
-  if (shape.type === 'LineString' && places.length < 2) return 'It is a line of one place.';
-  if (shape.type === 'Polygon' && shape.coordinates.some((ring) => ring.length < 4))
-    return 'It is an area of too few corners.';
+  if (shape.type === 'LineString' && places.length < 2) return THING_PROBLEMS.shortLine;
+  if (shape.type === 'Polygon' && shape.coordinates.some((ring) => ring.length < 4)) return THING_PROBLEMS.shortArea;
   return null;
 }
 
@@ -84,7 +84,7 @@ function shorten(shape: Shape): { shape: Shape; remark: string | null } | null {
     if (after <= MOST_POINTS) {
       return {
         shape: thinned,
-        remark: `Thinned from ${before} points to ${after}, none more than ${tolerance} m off.`,
+        remark: THING_REMARKS.thinned(before, after, tolerance),
       };
     }
   }
@@ -106,16 +106,16 @@ function toThing(raw: RawThing, part: Shape | null, suffix: string): ImportedThi
     problem: raw.problem ?? null,
     remarks: [],
   };
-  if (name.length + suffix.length > NAME_MAX) thing.remarks.push('The name was shortened.');
-  if (raw.notes.trim().length > NOTES_MAX) thing.remarks.push('The notes were shortened.');
-  if (thing.problem || !part) return { ...thing, problem: thing.problem ?? 'It has no place on the ground.' };
+  if (name.length + suffix.length > NAME_MAX) thing.remarks.push(THING_REMARKS.shortName);
+  if (raw.notes.trim().length > NOTES_MAX) thing.remarks.push(THING_REMARKS.shortNotes);
+  if (thing.problem || !part) return { ...thing, problem: thing.problem ?? THING_PROBLEMS.noPlace };
   const wrong = findWrong(part);
   if (wrong) return { ...thing, problem: wrong };
   const fitted = shorten(flatten(part));
   if (!fitted) {
     return {
       ...thing,
-      problem: `It has ${placesOf(part).length} points and cannot be thinned to ${MOST_POINTS}: split it.`,
+      problem: THING_PROBLEMS.tooLong(placesOf(part).length, MOST_POINTS),
     };
   }
   if (fitted.remark) thing.remarks.push(fitted.remark);
@@ -135,10 +135,9 @@ export function toThings(raws: RawThing[]): { things: ImportedThing[]; heights: 
         places += own.length;
         heights ||= own.some((p) => p.length > 2);
       }
-      if (places > MOST_PLACES) throw new FileProblem(`The file holds more than ${MOST_PLACES} points: split it.`);
+      if (places > MOST_PLACES) throw new FileProblem(FILE_PROBLEMS.points(MOST_PLACES));
       things.push(toThing(raw, part, parts.length > 1 ? ` ${i + 1}` : ''));
-      if (things.length > MOST_THINGS)
-        throw new FileProblem(`The file holds more than ${MOST_THINGS} things: split it.`);
+      if (things.length > MOST_THINGS) throw new FileProblem(FILE_PROBLEMS.things(MOST_THINGS));
     }
   }
   return { things, heights };

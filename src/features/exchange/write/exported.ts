@@ -19,14 +19,6 @@ export interface ExportedMap {
   things: Exported[];
 }
 
-export const LAYER_TITLES: Record<ExportLayer, string> = {
-  stands: 'Stands',
-  parking: 'Parking places',
-  approaches: 'Approaches',
-  features: 'What deer use',
-  land: 'Land',
-};
-
 /** Without control characters and what else XML 1.0 has no place for. */
 export function plain(text: string): string {
   return text.replace(/(?![\t\n\r])\p{Cc}|[\ufffe\uffff]/gu, '');

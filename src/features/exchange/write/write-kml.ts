@@ -1,7 +1,8 @@
 import { strToU8, zipSync } from 'fflate';
 import type { Position } from 'geojson';
 import { EXPORT_LAYERS } from '../exchange-schema';
-import { degrees, type Exported, type ExportedMap, LAYER_TITLES, xml } from './exported';
+import { LAYER_TITLES } from '../words/export';
+import { degrees, type Exported, type ExportedMap, xml } from './exported';
 
 const places = (line: Position[]) =>
   `<coordinates>${line.map(([lon, lat]) => `${degrees(lon)},${degrees(lat)}`).join(' ')}</coordinates>`;

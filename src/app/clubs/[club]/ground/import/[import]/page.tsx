@@ -1,19 +1,17 @@
 import { ImportReview } from '@/features/exchange/components/import-review';
 import { UndoImport } from '@/features/exchange/components/undo-import';
 import { readImport } from '@/features/exchange/read-import';
+import { REVIEW_PAGE_WORDS } from '@/features/exchange/words/import';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { EmptyState } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { saveImportAction, swapImportAction, undoImportAction } from '../actions';
 
-export const metadata = { title: 'Look over a file' };
+const words = REVIEW_PAGE_WORDS;
+const MOST_NAMES = 30;
 
-const LEADS = {
-  read: 'Nothing is added yet. Tick what you want, and say what it is.',
-  saved: 'What this file added is on the ground.',
-  undone: 'What this file added was taken away again.',
-};
+export const metadata = { title: words.title };
 
 export default clubPage('features.write', async ({ scope, params }) => {
   const view = await readImport(scope, params.import ?? '');
@@ -21,15 +19,15 @@ export default clubPage('features.write', async ({ scope, params }) => {
   const at = { id: view.id, version: view.version };
   const ground = (
     <ButtonLink look={view.state === 'read' ? 'plain' : 'primary'} href={`/clubs/${slug}/ground`}>
-      Go to the ground
+      {words.ground}
     </ButtonLink>
   );
   return (
     <>
       <PageTitle
         title={view.fileName}
-        over="Bring in a file"
-        lead={LEADS[view.state]}
+        over={words.over}
+        lead={words.leads[view.state]}
         actions={
           view.state === 'saved' && <UndoImport club={slug} at={at} count={view.made.length} undo={undoImportAction} />
         }
@@ -44,12 +42,11 @@ export default clubPage('features.write', async ({ scope, params }) => {
           swap={swapImportAction}
         />
       ) : (
-        <EmptyState title={view.made.length === 1 ? 'One thing' : `${view.made.length} things`} action={ground}>
-          {view.made
-            .slice(0, 30)
-            .map(({ name }) => name)
-            .join(', ')}
-          {view.made.length > 30 && ` and ${view.made.length - 30} more`}
+        <EmptyState title={words.things(view.made.length)} action={ground}>
+          {words.names(
+            view.made.slice(0, MOST_NAMES).map(({ name }) => name),
+            view.made.length - MOST_NAMES,
+          )}
         </EmptyState>
       )}
     </>
