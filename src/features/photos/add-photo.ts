@@ -9,6 +9,7 @@ import { files, photoKey } from './files';
 import { rightsTo } from './photo-access';
 import { type AddPhoto, MOST_PHOTO_BYTES, MOST_PHOTOS } from './photo-schema';
 import { preparePhoto } from './prepare-photo';
+import { PHOTO_AUDIT, PHOTO_ERRORS } from './words';
 
 /** Keeps a photo of a stand, a feature or a sit, made anew and without its position. */
 export async function addPhoto(
@@ -20,8 +21,8 @@ export async function addPhoto(
   const subject = { subject: ask.subject, id: ask.id };
   const rights = await rightsTo(scope, subject, now, reader());
   if (!rights) throw notFound();
-  if (!rights.add) throw new AppError('forbidden', `You may look at photos of ${rights.name}, but not add any.`);
-  const tooMuch = `A photo may be ${MOST_PHOTO_BYTES / 1024 / 1024} MB at most: save it smaller and try again.`;
+  if (!rights.add) throw new AppError('forbidden', PHOTO_ERRORS.mayNotAdd(rights.name));
+  const tooMuch = PHOTO_ERRORS.tooBig(MOST_PHOTO_BYTES / 1024 / 1024);
   const prepared = await preparePhoto(await readBody(request, MOST_PHOTO_BYTES, tooMuch));
   if (!prepared.ok) throw new AppError('invalid', prepared.message);
   const { full, thumb, width, height, takenAt } = prepared.photo;
@@ -33,7 +34,7 @@ export async function addPhoto(
   try {
     await write(async (tx) => {
       if ((await countPhotos(scope, subject, tx)) >= MOST_PHOTOS) {
-        throw new AppError('limit', `There are ${MOST_PHOTOS} photos of ${rights.name} already: remove one first.`);
+        throw new AppError('limit', PHOTO_ERRORS.tooMany(MOST_PHOTOS, rights.name));
       }
       await insertPhoto(scope, tx, {
         id,
@@ -55,7 +56,7 @@ export async function addPhoto(
           action: 'photo.added',
           subjectType: ask.subject,
           subjectId: ask.id,
-          summary: `Added a photo of ${rights.name}.`,
+          summary: PHOTO_AUDIT.added(rights.name),
         },
         now,
       );

@@ -5,6 +5,7 @@ import type { ClubScope } from '@/server/scope';
 import { getPhoto, type PhotoRow, updatePhoto } from './data';
 import { files, photoKey } from './files';
 import { mayChangePhoto, rightsTo, type SubjectRights } from './photo-access';
+import { PHOTO_AUDIT, PHOTO_ERRORS } from './words';
 
 async function openPhoto(
   scope: ClubScope,
@@ -16,7 +17,7 @@ async function openPhoto(
   const rights = photo && (await rightsTo(scope, { subject: photo.subjectType, id: photo.subjectId }, now, tx));
   if (!photo || !rights) throw notFound();
   if (!mayChangePhoto(scope, rights, photo)) {
-    throw new AppError('forbidden', 'Only whoever added a photo, or a steward, may change or remove it.');
+    throw new AppError('forbidden', PHOTO_ERRORS.notYours);
   }
   return { photo, rights };
 }
@@ -46,7 +47,7 @@ export async function removePhoto(scope: ClubScope, input: { id: string }, now: 
         action: 'photo.removed',
         subjectType: photo.subjectType,
         subjectId: photo.subjectId,
-        summary: `Removed a photo of ${rights.name}.`,
+        summary: PHOTO_AUDIT.removed(rights.name),
       },
       now,
     );

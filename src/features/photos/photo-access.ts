@@ -5,6 +5,7 @@ import { maySeeLog, mayWriteLog } from '@/features/logs/log-access';
 import { findLoggable } from '@/features/logs/logs-data';
 import type { ClubScope } from '@/server/scope';
 import type { PhotoRow, Subject } from './data';
+import { sitAsSubject } from './words';
 
 export interface SubjectRights {
   name: string;
@@ -30,7 +31,7 @@ export async function rightsTo(
   if (sit?.status !== 'booked' || sit.startAt > now) return null;
   const write = mayWriteLog(scope, sit, now);
   if (!write && !maySeeLog(scope, sit, now)) return null;
-  return { name: `the sit at ${sit.standName}`, add: write };
+  return { name: sitAsSubject(sit.standName), add: write };
 }
 
 /** Whoever added it, and whoever may add others and answers for the ground. */

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { PHOTO_ERRORS } from './words';
 
 export const PHOTO_SUBJECTS = ['stand', 'feature', 'sit'] as const;
 export type PhotoSubject = (typeof PHOTO_SUBJECTS)[number];
@@ -18,7 +19,7 @@ export const photoQuery = z.object({ size: z.enum(['full', 'thumb']) });
 export const CAPTION_MAX = 200;
 export const captionInput = z.object({
   id,
-  caption: z.string().trim().max(CAPTION_MAX, `Keep it to ${CAPTION_MAX} characters.`),
+  caption: z.string().trim().max(CAPTION_MAX, PHOTO_ERRORS.caption(CAPTION_MAX)),
 });
 export const atPhoto = z.object({ id });
 

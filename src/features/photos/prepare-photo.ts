@@ -1,5 +1,6 @@
 import readExif from 'exif-reader';
 import sharp from 'sharp';
+import { PHOTO_ERRORS } from './words';
 
 /** Longest side of what is kept, and of the small one in a list. */
 const FULL_PX = 2048;
@@ -35,11 +36,8 @@ function takenAt(exif: Buffer | undefined): string | null {
  * the file held, its position above all. What it is called and what type was claimed count for nothing.
  */
 export async function preparePhoto(bytes: Uint8Array): Promise<Prepared> {
-  const notOne = {
-    ok: false,
-    message: 'This is no photo that can be read: choose a JPEG, PNG, WebP or HEIC.',
-  } as const;
-  if (bytes.length === 0) return { ok: false, message: 'The file is empty: choose another.' };
+  const notOne = { ok: false, message: PHOTO_ERRORS.noPhoto } as const;
+  if (bytes.length === 0) return { ok: false, message: PHOTO_ERRORS.empty };
   try {
     const source = sharp(bytes, { limitInputPixels: MOST_PIXELS, failOn: 'error' });
     const meta = await source.metadata();
@@ -59,6 +57,6 @@ export async function preparePhoto(bytes: Uint8Array): Promise<Prepared> {
     return { ok: true, photo: { full: full.data, thumb, width, height, takenAt: takenAt(meta.exif) } };
   } catch (error) {
     const tooBig = error instanceof Error && /pixel limit/i.test(error.message);
-    return tooBig ? { ok: false, message: 'The photo has too many pixels: save it smaller and try again.' } : notOne;
+    return tooBig ? { ok: false, message: PHOTO_ERRORS.tooManyPixels } : notOne;
   }
 }

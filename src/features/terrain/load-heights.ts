@@ -3,6 +3,7 @@ import type { HeightGrid } from '@/core/terrain/height-grid';
 import { write } from '@/db/client';
 import { keepTiles, listTiles } from './data';
 import { type Bounds, joinTiles, keyOf, postsOf, spanOf, type TileAt, tilesOf } from './tiles';
+import { HEIGHT_ERRORS } from './words';
 
 /** Requests under way at once, and in all for one answer. */
 const AT_ONCE = 4;
@@ -34,8 +35,7 @@ async function fetchTiles(port: ElevationPort, missing: TileAt[]): Promise<Fetch
 export async function loadHeights(port: ElevationPort, bounds: Bounds, now: number): Promise<Loaded> {
   const span = spanOf(bounds);
   const wanted = tilesOf(span);
-  if (wanted.length > MOST_TILES)
-    return { ok: false, message: 'That is more ground than heights are asked for at once.' };
+  if (wanted.length > MOST_TILES) return { ok: false, message: HEIGHT_ERRORS.tooMuch };
   const held = new Map((await listTiles(port.source, span)).map((tile) => [keyOf(tile), tile.heights]));
   const missing = wanted.filter((at) => !held.has(keyOf(at)));
   if (missing.length > 0) {

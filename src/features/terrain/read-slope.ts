@@ -6,6 +6,7 @@ import { env } from '@/env';
 import { AppError } from '@/server/errors';
 import { loadHeights } from './load-heights';
 import type { Bounds } from './tiles';
+import { HEIGHT_ERRORS } from './words';
 
 /** As far as the heights stand apart: nearer ones would only repeat what lies between the same posts. */
 const REACH_M = 90;
@@ -41,11 +42,10 @@ export async function readSlope(
   port: ElevationPort = chooseElevation(env),
 ): Promise<SlopeView> {
   const loaded = await loadHeights(port, boundsAround([at], PAD_M), now);
-  if (!loaded.ok) throw new AppError('unavailable', `${loaded.message} Type the slope yourself, or try again later.`);
+  if (!loaded.ok) throw new AppError('unavailable', HEIGHT_ERRORS.noSlope(loaded.message));
   const slope = slopeAt(loaded.grid, at, REACH_M);
   const heightM = heightAt(loaded.grid, at);
-  if (!slope || heightM === null)
-    throw new AppError('unavailable', 'No heights are known there: type the slope yourself.');
+  if (!slope || heightM === null) throw new AppError('unavailable', HEIGHT_ERRORS.unknown);
   return {
     heightM,
     slopePercent: Math.round(slope.percent),

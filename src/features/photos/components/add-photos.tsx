@@ -11,6 +11,9 @@ import { ProgressBar } from '@/ui/progress-bar';
 import { useToast } from '@/ui/toast';
 import type { Subject } from '../data';
 import { MOST_PHOTO_BYTES } from '../photo-schema';
+import { ADD_PHOTOS_WORDS } from '../words';
+
+const words = ADD_PHOTOS_WORDS;
 
 interface Sending {
   at: number;
@@ -37,18 +40,18 @@ export function AddPhotos({ club, subject }: { club: string; subject: Subject })
       const query = new URLSearchParams({ subject: subject.subject, id: subject.id, time: keepTime ? 'keep' : 'drop' });
       const answer =
         file.size > MOST_PHOTO_BYTES
-          ? { ok: false as const, message: `A photo may be ${MOST_PHOTO_BYTES / 1024 / 1024} MB at most.` }
+          ? { ok: false as const, message: words.tooBig(MOST_PHOTO_BYTES / 1024 / 1024) }
           : await sendFile<{ id: string }>(`/api/clubs/${club}/photos?${query}`, file, (share) =>
               setSending({ ...step, share }),
             );
       if (answer.ok) added += 1;
-      else refused.push(`${file.name}: ${answer.message}`);
+      else refused.push(words.refused(file.name, answer.message));
     }
     setSending(null);
     setProblems(refused);
     if (added > 0) {
       form.current?.reset();
-      toast({ title: added === 1 ? 'The photo is added' : `${added} photos are added` });
+      toast({ title: words.added(added) });
       router.refresh();
     }
   }
@@ -64,10 +67,10 @@ export function AddPhotos({ club, subject }: { club: string; subject: Subject })
           .getAll('photos')
           .filter((one): one is File => one instanceof File && one.size > 0);
         if (chosen.length > 0) void send(chosen);
-        else setProblems(['Choose one photo or several first.']);
+        else setProblems([words.chooseFirst]);
       }}
     >
-      <Field label="Add photos" hint="Off the phone or a trail camera; several at once">
+      <Field label={words.add} hint={words.addHint}>
         {(control) => (
           <input
             {...control}
@@ -81,14 +84,14 @@ export function AddPhotos({ club, subject }: { club: string; subject: Subject })
         )}
       </Field>
       <Checkbox
-        label="Keep the time each was taken"
+        label={words.keepTime}
         checked={keepTime}
         disabled={sending !== null}
         onChange={({ target }) => setKeepTime(target.checked)}
       />
       {sending && (
         <ProgressBar
-          label={`Photo ${sending.at} of ${sending.of}: ${sending.name}`}
+          label={words.progress(sending.at, sending.of, sending.name)}
           share={sending.share < 1 ? sending.share : null}
         />
       )}
@@ -96,8 +99,8 @@ export function AddPhotos({ club, subject }: { club: string; subject: Subject })
         <Notice key={problem} live level="caution" title={problem} />
       ))}
       <div>
-        <Button type="submit" pending={sending !== null} pendingLabel="Sending…">
-          Send
+        <Button type="submit" pending={sending !== null} pendingLabel={words.sending}>
+          {words.send}
         </Button>
       </div>
     </form>

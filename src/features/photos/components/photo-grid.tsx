@@ -8,6 +8,7 @@ import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { Dialog } from '@/ui/dialog';
 import { TextInput } from '@/ui/text-inputs';
 import type { PhotoView } from '../read-photos';
+import { PHOTO_WORDS } from '../words';
 
 interface PhotoGridProps {
   club: string;
@@ -16,10 +17,10 @@ interface PhotoGridProps {
   remove: ClubCall<{ id: string }, { id: string }>;
 }
 
-const LOST = 'The server could not be reached. Try again.';
+const words = PHOTO_WORDS;
 
 function said(photo: PhotoView, number: number): string {
-  return photo.caption || `Photo ${number} by ${photo.byName}`;
+  return photo.caption || words.unnamed(number, photo.byName);
 }
 
 function CaptionForm({ club, photo, caption }: { club: string; photo: PhotoView; caption: PhotoGridProps['caption'] }) {
@@ -36,20 +37,20 @@ function CaptionForm({ club, photo, caption }: { club: string; photo: PhotoView;
         setPending(true);
         const answer = await caption(club, { id: photo.id, caption: text }).catch(() => null);
         setPending(false);
-        setProblem(answer?.ok ? undefined : (answer?.error.message ?? LOST));
+        setProblem(answer?.ok ? undefined : (answer?.error.message ?? words.lost));
         if (answer?.ok) router.refresh();
       }}
     >
       <TextInput
-        label="What it shows"
+        label={words.caption}
         optional
         fieldClassName="grow"
         value={text}
         error={problem}
         onChange={({ target }) => setText(target.value)}
       />
-      <Button type="submit" pending={pending} pendingLabel="Saving…">
-        Save
+      <Button type="submit" pending={pending} pendingLabel={words.saving}>
+        {words.save}
       </Button>
     </form>
   );
@@ -61,19 +62,19 @@ export function PhotoGrid({ club, photos, caption, remove }: PhotoGridProps) {
   return (
     <ul className="grid grid-cols-2 gap-3 sm:grid-cols-3 lg:grid-cols-4">
       {photos.map((photo, i) => {
-        const words = said(photo, i + 1);
-        const facts = [photo.takenAt && `taken ${photo.takenAt}`, `by ${photo.byName}`].filter(Boolean).join(', ');
+        const name = said(photo, i + 1);
+        const facts = words.facts(photo.takenAt, photo.byName);
         return (
           <li key={photo.id} className="grid content-start gap-1">
             <Dialog
-              title={words}
+              title={name}
               description={facts}
               trigger={
-                <button type="button" className="block w-full border border-rule bg-sunk" aria-label={`Open ${words}`}>
+                <button type="button" className="block w-full border border-rule bg-sunk" aria-label={words.open(name)}>
                   {/* biome-ignore lint/performance/noImgElement: pictures behind a door are not for a shared image cache */}
                   <img
                     src={address(photo.id, 'thumb')}
-                    alt={words}
+                    alt={name}
                     width={photo.width}
                     height={photo.height}
                     loading="lazy"
@@ -86,7 +87,7 @@ export function PhotoGrid({ club, photos, caption, remove }: PhotoGridProps) {
                 {/* biome-ignore lint/performance/noImgElement: pictures behind a door are not for a shared image cache */}
                 <img
                   src={address(photo.id, 'full')}
-                  alt={words}
+                  alt={name}
                   width={photo.width}
                   height={photo.height}
                   className="max-h-[60dvh] w-full object-contain"
@@ -94,18 +95,18 @@ export function PhotoGrid({ club, photos, caption, remove }: PhotoGridProps) {
                 {photo.mayChange && <CaptionForm club={club} photo={photo} caption={caption} />}
                 {photo.mayChange && (
                   <ConfirmDialog
-                    title="Remove this photo?"
-                    confirmLabel="Remove the photo"
+                    title={words.removeTitle}
+                    confirmLabel={words.removeConfirm}
                     danger
-                    trigger={<Button>Remove</Button>}
+                    trigger={<Button>{words.remove}</Button>}
                     onConfirm={async () => {
                       const answer = await remove(club, { id: photo.id }).catch(() => null);
-                      if (!answer) return LOST;
+                      if (!answer) return words.lost;
                       if (!answer.ok) return answer.error.message;
                       router.refresh();
                     }}
                   >
-                    <p>It is gone for everyone and cannot be brought back.</p>
+                    <p>{words.removeText}</p>
                   </ConfirmDialog>
                 )}
               </div>

@@ -1,6 +1,7 @@
 import type { ClubCall } from '@/features/ground/components/form-types';
 import { Section } from '@/ui/page-parts';
 import type { PhotosView } from '../read-photos';
+import { PHOTOS_WORDS } from '../words';
 import { AddPhotos } from './add-photos';
 import { PhotoGrid } from './photo-grid';
 
@@ -16,13 +17,10 @@ interface PhotoSectionProps {
 export function PhotoSection({ club, view, caption, remove }: PhotoSectionProps) {
   if (!view || (view.photos.length === 0 && !view.mayAdd)) return null;
   return (
-    <Section
-      title="Photos"
-      note={view.mayAdd ? 'Kept without their position. Only members of the club see them.' : undefined}
-    >
+    <Section title={PHOTOS_WORDS.title} note={view.mayAdd ? PHOTOS_WORDS.note : undefined}>
       <div className="grid gap-4">
         {view.photos.length === 0 ? (
-          <p className="text-ink-soft">No photos yet.</p>
+          <p className="text-ink-soft">{PHOTOS_WORDS.none}</p>
         ) : (
           <PhotoGrid club={club} photos={view.photos} caption={caption} remove={remove} />
         )}

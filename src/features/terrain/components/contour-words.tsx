@@ -1,14 +1,14 @@
 import { Notice } from '@/ui/notices';
 import type { ContoursView } from '../read-contours';
+import { CONTOUR_WORDS } from '../words';
 
 /** What the lines on the map say, in words. */
 export function ContourWords({ view, error }: { view: ContoursView | undefined; error: string | null }) {
   if (error) return <Notice level="caution" live title={error} />;
-  if (!view) return <p className="text-ink-soft text-sm">Reading the ground…</p>;
-  const { interval, lowest, highest, unit, source } = view;
+  if (!view) return <p className="text-ink-soft text-sm">{CONTOUR_WORDS.reading}</p>;
   return (
     <p className="text-ink-soft text-sm" aria-live="polite">
-      A contour every {interval} {unit}; the ground lies between {lowest} and {highest} {unit}. Heights by {source}.
+      {CONTOUR_WORDS.said(view)}
     </p>
   );
 }

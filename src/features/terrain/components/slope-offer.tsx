@@ -8,6 +8,9 @@ import { Button } from '@/ui/button';
 import { Notice } from '@/ui/notices';
 import { slopeQuery } from '../queries';
 import type { SlopeView } from '../read-slope';
+import { SLOPE_WORDS } from '../words';
+
+const words = SLOPE_WORDS;
 
 interface SlopeOfferProps {
   club: string;
@@ -29,28 +32,27 @@ export function SlopeOffer({ club, units, at, onTake }: SlopeOfferProps) {
         <Button
           disabled={at === null}
           pending={asked !== null && query.isFetching}
-          pendingLabel="Reading the ground…"
+          pendingLabel={words.reading}
           onClick={() => {
             setAsked(at);
             if (query.isError) void query.refetch();
           }}
         >
-          Read slope and drain off the terrain
+          {words.read}
         </Button>
       </div>
-      {at === null && <p className="text-ink-soft text-sm">Type the place above first.</p>}
+      {at === null && <p className="text-ink-soft text-sm">{words.placeFirst}</p>}
       {query.isError && asked !== null && !stale && <Notice level="caution" title={query.error.message} />}
       {found && (
         <Notice
           title={
             found.drainBearingDeg === null
-              ? `Nearly level: ${found.slopePercent} % slope`
-              : `${found.slopePercent} % slope, draining ${sectorName(found.drainBearingDeg)} (${found.drainBearingDeg}°)`
+              ? words.level(found.slopePercent)
+              : words.slope(found.slopePercent, sectorName(found.drainBearingDeg), found.drainBearingDeg)
           }
-          actions={<Button onClick={() => onTake(found)}>Take these</Button>}
+          actions={<Button onClick={() => onTake(found)}>{words.take}</Button>}
         >
-          At {formatHeight(found.heightM, units)}, by {found.source}. Heights this far apart miss small draws and
-          benches: what you know of the ground is better.
+          {words.note(formatHeight(found.heightM, units), found.source)}
         </Notice>
       )}
     </div>
