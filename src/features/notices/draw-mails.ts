@@ -9,6 +9,7 @@ import type { ClubScope } from '@/server/scope';
 import type { NoticePerson } from './choices-data';
 import type { DrawEvent } from './draw-events-data';
 import type { NoticeMail } from './queue-notice';
+import { DRAW_MAILS } from './words/mails';
 
 /** Quiet hours hold nothing past two hours before entries close or the sit begins. */
 const BEFORE_MS = 2 * 3_600_000;
@@ -23,6 +24,8 @@ export type DrawMail = { person: NoticePerson; mail: NoticeMail };
 
 const whenOf = (draw: DrawRow, withYear = false) => dayAndWindow(draw.day, draw.windows, withYear);
 
+const { opened, calledOff, published, swap } = DRAW_MAILS;
+
 function frame(scope: ClubScope, draw: DrawRow, key: string, label: string) {
   return {
     kind: 'draw_changed' as const,
@@ -34,19 +37,19 @@ function frame(scope: ClubScope, draw: DrawRow, key: string, label: string) {
 function openedMails(scope: ClubScope, { event, draw, people }: DrawMailsAsk, now: number): DrawMail[] {
   if (draw.state !== 'open' || now >= draw.closesAt) return [];
   const { club } = scope;
-  const closes = `${formatDay(dayOf(draw.closesAt, club.zone), true)}, ${clockText(draw.closesAt, club)}`;
+  const closes = opened.closesAt(formatDay(dayOf(draw.closesAt, club.zone), true), clockText(draw.closesAt, club));
   return people
     .filter(({ userId }) => userId !== event.actorUserId)
     .map((person) => ({
       person,
       mail: {
-        ...frame(scope, draw, `${event.id}:${person.memberId}`, 'Enter the draw'),
-        subject: `Draw open: ${whenOf(draw)}`,
-        paragraphs: [`${event.actorName} opened the draw for ${whenOf(draw, true)}.`],
+        ...frame(scope, draw, `${event.id}:${person.memberId}`, opened.button),
+        subject: opened.subject(whenOf(draw)),
+        paragraphs: [opened.opening(event.actorName, whenOf(draw, true))],
         facts: [
-          { label: 'Stands', value: String(draw.standIds.length) },
-          { label: 'Entries close', value: closes },
-          ...(draw.note === '' ? [] : [{ label: 'Note', value: draw.note }]),
+          { label: opened.stands, value: String(draw.standIds.length) },
+          { label: opened.closes, value: closes },
+          ...(draw.note === '' ? [] : [{ label: opened.note, value: draw.note }]),
         ],
         latest: draw.closesAt - BEFORE_MS,
       },
@@ -59,12 +62,9 @@ function calledOffMails(scope: ClubScope, { event, draw, people }: DrawMailsAsk)
     .map((person) => ({
       person,
       mail: {
-        ...frame(scope, draw, `${event.id}:${person.memberId}`, 'See the draw'),
-        subject: `Draw called off: ${whenOf(draw)}`,
-        paragraphs: [
-          `${event.actorName} called off the draw for ${whenOf(draw, true)}.`,
-          "Nothing is booked by it, and nobody's points change.",
-        ],
+        ...frame(scope, draw, `${event.id}:${person.memberId}`, calledOff.button),
+        subject: calledOff.subject(whenOf(draw)),
+        paragraphs: [calledOff.opening(event.actorName, whenOf(draw, true)), calledOff.after],
       },
     }));
 }
@@ -76,18 +76,18 @@ async function publishedMails(scope: ClubScope, ask: DrawMailsAsk, from: ReadFro
     const person = people.find(({ memberId }) => memberId === entry.memberId);
     if (!person) continue;
     const stand = entry.standId === null ? null : await getStand(scope, entry.standId, from);
-    const name = stand?.name ?? 'a stand no longer in use';
+    const drawn = entry.standId === null ? null : (stand?.name ?? published.goneStand);
     const sit = entry.sitId === null ? null : await findSit(scope, entry.sitId, from);
     const gone = entry.standId !== null && sit?.status !== 'booked';
     mails.push({
       person,
       mail: {
-        ...frame(scope, draw, `${event.id}:${person.memberId}`, 'See the draw'),
-        subject: entry.standId === null ? `No stand drawn: ${whenOf(draw)}` : `Drawn: ${name}, ${whenOf(draw)}`,
+        ...frame(scope, draw, `${event.id}:${person.memberId}`, published.button),
+        subject: published.subject(drawn, whenOf(draw)),
         paragraphs: [
-          `The draw for ${whenOf(draw, true)} is published.`,
-          entry.standId === null ? 'You drew no stand.' : `Your stand: ${name}.`,
-          ...(gone ? ['That sit has been given up since.'] : []),
+          published.opening(whenOf(draw, true)),
+          published.outcome(drawn),
+          ...(gone ? [published.givenUp] : []),
           ...(entry.reasons ?? []),
         ],
         ...(sit ? { latest: sit.startAt - BEFORE_MS } : {}),
@@ -109,11 +109,16 @@ async function swapMails(scope: ClubScope, ask: DrawMailsAsk, from: ReadFrom, no
   const own = await findSit(scope, asked.entry.sitId, from);
   if (theirs?.status !== 'booked' || own?.status !== 'booked' || own.endAt <= now) return [];
   const mail = {
-    ...frame(scope, draw, `swap:${theirs.id}:${own.id}:${person.memberId}`, 'See the offer'),
-    subject: `Swap offered: ${theirs.standName} for ${own.standName}, ${whenOf(draw)}`,
+    ...frame(scope, draw, `swap:${theirs.id}:${own.id}:${person.memberId}`, swap.button),
+    subject: swap.subject(theirs.standName, own.standName, whenOf(draw)),
     paragraphs: [
-      `${offer.name} offers you ${theirs.standName} for your ${own.standName}, ${whenOf(draw, true)}.`,
-      'If you take it, both sits change hands at once, under every rule. If you do nothing, nothing changes.',
+      swap.opening({
+        member: offer.name,
+        theirs: theirs.standName,
+        own: own.standName,
+        when: whenOf(draw, true),
+      }),
+      swap.after,
     ],
     latest: own.startAt - BEFORE_MS,
   };

@@ -7,7 +7,7 @@ import { hashSecret, newSecret } from '@/lib/secrets';
 import { queueMail } from '@/server/outbox';
 import type { ClubScope } from '@/server/scope';
 import { insertNoticeLink, type NoticePerson } from './choices-data';
-import { KIND_PHRASES } from './choices-schema';
+import { NOTICE_MAIL } from './words/mails';
 
 export interface NoticeMail extends Pick<MailParts, 'paragraphs' | 'facts' | 'button' | 'after'> {
   kind: NoticeKind;
@@ -33,12 +33,12 @@ export async function queueNotice(
   const secret = newSecret();
   const { text, html } = composeMail({
     ...parts,
-    paragraphs: [`Hello ${person.name},`, ...paragraphs],
+    paragraphs: [NOTICE_MAIL.hello(person.name), ...paragraphs],
     clubName: club.name,
-    footer: `You get this because you chose mail about ${KIND_PHRASES[kind]}.`,
+    footer: NOTICE_MAIL.footer(kind),
     footLinks: [
-      { label: 'Stop this kind of mail', url: `${env.appUrl}/unsubscribe/${secret}` },
-      { label: 'Choose what you are told', url: `${env.appUrl}/clubs/${club.slug}/notices` },
+      { label: NOTICE_MAIL.stop, url: `${env.appUrl}/unsubscribe/${secret}` },
+      { label: NOTICE_MAIL.choose, url: `${env.appUrl}/clubs/${club.slug}/notices` },
     ],
   });
   const ends = afterQuiet(now, person.choices, club.zone);

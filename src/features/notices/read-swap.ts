@@ -3,7 +3,7 @@ import { type SitView, sitView } from '@/features/bookings/sit-view';
 import { loadForecast } from '@/features/sits/load-forecast';
 import type { ClubScope } from '@/server/scope';
 import { findAlternatives, judgeSit, worthOf } from './judge-sits';
-import { worthText } from './outlook-words';
+import { worthText } from './words/worth';
 
 const MOST = 3;
 

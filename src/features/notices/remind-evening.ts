@@ -16,10 +16,13 @@ import { type ClubScope, findScope, systemScopeById } from '@/server/scope';
 import { listNoticePeople } from './choices-data';
 import { judgeSit } from './judge-sits';
 import { type NoticeMail, queueNotice, wanting } from './queue-notice';
+import { EVENING_MAIL } from './words/mails';
 
 /** The club's clock between which the evening's mail is made. Our choice. */
 const FROM_CLOCK = '18:00';
 const TO_CLOCK = '22:00';
+
+const words = EVENING_MAIL;
 
 const keyOf = (sit: SitDetail) => `notice.evening_before:${sit.id}:${sit.day}`;
 
@@ -39,20 +42,23 @@ function factsOf(scope: ClubScope, sit: SitDetail, verdict: Verdict | undefined)
   const light = rule ? legalLight(rule, sit.day, club) : null;
   const from = way?.parkingName ?? sit.parkingName;
   return [
-    { label: 'Stand', value: sit.standName },
-    { label: 'When', value: `${dayAndWindow(sit.day, sit.windows, true)}, ${spanText(sit.startAt, sit.endAt, club)}` },
+    { label: words.stand, value: sit.standName },
+    {
+      label: words.when,
+      value: words.whenOf(dayAndWindow(sit.day, sit.windows, true), spanText(sit.startAt, sit.endAt, club)),
+    },
     ...(way
       ? [
-          { label: 'Leave by', value: `${clock(way.leaveBy)}${from ? ` from ${from}` : ''}` },
-          { label: 'Way in', value: `${way.approachName}, ${minutesText(way.walkSeconds)}; in by ${clock(way.inBy)}` },
+          { label: words.leaveBy, value: words.leaveByFrom(clock(way.leaveBy), from) },
+          { label: words.wayIn, value: words.wayInOf(way.approachName, minutesText(way.walkSeconds), clock(way.inBy)) },
         ]
-      : [{ label: 'Way in', value: 'none is drawn for this stand' }]),
-    ...(verdict ? [{ label: 'Wind', value: sentence({ ...verdict, gates: [], approach: way }, clock) }] : []),
+      : [{ label: words.wayIn, value: words.noWay }]),
+    ...(verdict ? [{ label: words.wind, value: sentence({ ...verdict, gates: [], approach: way }, clock) }] : []),
     ...(sun.rise !== null && sun.set !== null
-      ? [{ label: 'Sun', value: `up ${clock(sun.rise)}, down ${clock(sun.set)}` }]
+      ? [{ label: words.sun, value: words.sunOf(clock(sun.rise), clock(sun.set)) }]
       : []),
     ...(rule && light
-      ? [{ label: 'Light', value: `${clock(light.startAt)} to ${clock(light.endAt)}. ${legalLightText(rule)}` }]
+      ? [{ label: words.light, value: words.lightOf(clock(light.startAt), clock(light.endAt), legalLightText(rule)) }]
       : []),
   ];
 }
@@ -63,14 +69,11 @@ function mailOf(scope: ClubScope, sit: SitDetail, verdicts: Verdict[]): NoticeMa
   return {
     kind: 'evening_before',
     dedupeKey: keyOf(sit),
-    subject: `Tomorrow: ${sit.standName}, ${dayAndWindow(sit.day, sit.windows)}`,
-    paragraphs: [`You sit at ${sit.standName} tomorrow.`],
+    subject: words.subject(sit.standName, dayAndWindow(sit.day, sit.windows)),
+    paragraphs: [words.opening(sit.standName)],
     facts: factsOf(scope, sit, first),
-    button: { label: 'Open my sits', url: `${env.appUrl}/clubs/${scope.club.slug}/my-sits` },
-    after: [
-      ...cautions,
-      'Harness on from ground to ground. Sign in on the board, and tell somebody at home when you will be back.',
-    ],
+    button: { label: words.button, url: `${env.appUrl}/clubs/${scope.club.slug}/my-sits` },
+    after: [...cautions, words.safety],
   };
 }
 

@@ -12,6 +12,7 @@ import { listStands } from '@/features/ground/stands-data';
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { listNoticePeople, type NoticePerson } from './choices-data';
 import { queueNotice, wanting } from './queue-notice';
+import { WEEKLY_MAIL } from './words/mails';
 
 /** Before the busiest days: Thursday from six in the evening, by the club's clock. Our choice. */
 const WEEKDAY = 4;
@@ -38,16 +39,15 @@ async function loadWeek(scope: ClubScope, today: string, from: ReadFrom) {
 
 type Week = Awaited<ReturnType<typeof loadWeek>>;
 
-const block = (title: string, lines: string[], none: string) =>
-  `${title}\n${lines.length > 0 ? lines.join('\n') : none}`;
+const words = WEEKLY_MAIL;
+const { block } = words;
 
 function paragraphsFor(scope: ClubScope, person: NoticePerson, week: Week): string[] {
   const { club } = scope;
   const mine = week.sits.filter(({ memberId }) => memberId === person.memberId);
   const closed = week.closures.map(({ standId, fromDay, toDay, reason }) => {
-    const what = standId === null ? 'The whole ground' : (week.stands.get(standId) ?? 'A stand');
-    const until = toDay === null ? 'until opened again' : `to ${formatDay(toDay)}`;
-    return `${what}: ${formatDay(fromDay)} ${until}, ${reason}`;
+    const what = standId === null ? words.wholeGround : (week.stands.get(standId) ?? words.goneStand);
+    return words.closure({ what, from: formatDay(fromDay), to: toDay && formatDay(toDay), reason });
   });
   const doesChores = can(person.role, 'chores.read');
   const chores = week.chores.filter(({ assigneeId }) => assigneeId === person.memberId);
@@ -56,30 +56,29 @@ function paragraphsFor(scope: ClubScope, person: NoticePerson, week: Week): stri
     ...(can(person.role, 'sits.book')
       ? [
           block(
-            'Your sits',
-            mine.map(
-              (sit) =>
-                `${sit.standName}: ${dayAndWindow(sit.day, sit.windows)}, ${spanText(sit.startAt, sit.endAt, club)}`,
+            words.sits,
+            mine.map((sit) =>
+              words.sit(sit.standName, dayAndWindow(sit.day, sit.windows), spanText(sit.startAt, sit.endAt, club)),
             ),
-            'You have none booked.',
+            words.noSits,
           ),
         ]
       : []),
-    `The club has ${week.sits.length} ${week.sits.length === 1 ? 'sit' : 'sits'} booked in the week ahead.`,
-    block('Closed', closed, 'Nothing is closed.'),
+    words.clubSits(week.sits.length),
+    block(words.closed, closed, words.noClosed),
     ...(doesChores
       ? [
           block(
-            'Your chores',
-            chores.map(({ title, dueOn }) => `${title}${dueOn ? `, due ${formatDay(dueOn)}` : ''}`),
-            free > 0 ? `None is yours; ${free} wait for somebody.` : 'None.',
+            words.chores,
+            chores.map(({ title, dueOn }) => words.chore(title, dueOn && formatDay(dueOn))),
+            words.noChores(free),
           ),
           block(
-            'Work days',
-            week.workDays.map(
-              (row) => `${row.title}: ${formatDay(row.day)}, ${spanText(row.startAt, row.endAt, club)}`,
+            words.workDays,
+            week.workDays.map((row) =>
+              words.workDay(row.title, formatDay(row.day), spanText(row.startAt, row.endAt, club)),
             ),
-            'None is set.',
+            words.noWorkDays,
           ),
         ]
       : []),
@@ -103,9 +102,9 @@ export async function sendWeekly(now: number): Promise<{ sent: number }> {
         const mail = {
           kind: 'weekly' as const,
           dedupeKey: `notice.weekly:${person.memberId}:${today}`,
-          subject: `The week ahead at ${club.name}`,
+          subject: words.subject(club.name),
           paragraphs: paragraphsFor(scope, person, week),
-          button: { label: 'Open the club', url: `${env.appUrl}/clubs/${club.slug}` },
+          button: { label: words.button, url: `${env.appUrl}/clubs/${club.slug}` },
         };
         if (await queueNotice(tx, scope, person, mail, now)) count += 1;
       }

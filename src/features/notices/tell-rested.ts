@@ -9,6 +9,7 @@ import { type ClubScope, systemScopeById } from '@/server/scope';
 import { listNoticePeople } from './choices-data';
 import { lastSitDays } from './outlooks-data';
 import { queueNotice, wanting } from './queue-notice';
+import { RESTED_MAIL } from './words/mails';
 
 /** Hours of the club's clock in which it may be told. */
 const FROM_CLOCK = '07:00';
@@ -45,9 +46,9 @@ export async function tellRested(now: number): Promise<{ told: number }> {
         const mail = {
           kind: 'rest_over' as const,
           dedupeKey: `notice.rest_over:${person.memberId}:${today}`,
-          subject: `Rested: ${names.join(', ')}`,
-          paragraphs: [`${names.join(', ')}: the rest after the last sit is over, from ${formatDay(today)} on.`],
-          button: { label: 'See the list', url: `${env.appUrl}/clubs/${club.slug}/sit` },
+          subject: RESTED_MAIL.subject(names),
+          paragraphs: [RESTED_MAIL.opening(names, formatDay(today))],
+          button: { label: RESTED_MAIL.button, url: `${env.appUrl}/clubs/${club.slug}/sit` },
         };
         if (await queueNotice(tx, scope, person, mail, now)) count += 1;
       }

@@ -8,6 +8,7 @@ import { systemScopeById } from '@/server/scope';
 import { listNoticePeople } from './choices-data';
 import { listRuleChanges } from './outlooks-data';
 import { queueNotice, wanting } from './queue-notice';
+import { RULES_MAIL } from './words/mails';
 
 /** A change older than this is known by now, or was made before the member chose to be told. */
 const SINCE_MS = 48 * 3_600_000;
@@ -15,8 +16,6 @@ const SINCE_MS = 48 * 3_600_000;
 const changedLines = z.object({
   changed: z.array(z.object({ label: z.string(), before: z.string().nullable(), after: z.string().nullable() })),
 });
-
-const said = (text: string | null) => text ?? 'nothing';
 
 /** Tells every member once of each change of the club's rules, but for whoever made it. */
 export async function tellRulesChanged(now: number): Promise<{ told: number }> {
@@ -41,14 +40,9 @@ export async function tellRulesChanged(now: number): Promise<{ told: number }> {
           const mail = {
             kind: 'rules_changed' as const,
             dedupeKey: keyOf(person.memberId),
-            subject: `Rules changed: ${lines.data.changed.map(({ label }) => label).join(', ')}`.slice(0, 180),
-            paragraphs: [
-              `${change.actorName} changed the rules of ${club.name}.`,
-              ...lines.data.changed.map(
-                ({ label, before, after }) => `${label}\nbefore: ${said(before)}\nnow: ${said(after)}`,
-              ),
-            ],
-            button: { label: 'Read the rules', url: `${env.appUrl}/clubs/${club.slug}/club/rules` },
+            subject: RULES_MAIL.subject(lines.data.changed.map(({ label }) => label)).slice(0, 180),
+            paragraphs: [RULES_MAIL.opening(change.actorName, club.name), ...lines.data.changed.map(RULES_MAIL.change)],
+            button: { label: RULES_MAIL.button, url: `${env.appUrl}/clubs/${club.slug}/club/rules` },
           };
           if (await queueNotice(tx, scope, person, mail, now)) count += 1;
         }

@@ -9,9 +9,10 @@ import { getForecast, type KeptForecast } from '@/features/weather/get-forecast'
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { listNoticePeople, type NoticePerson } from './choices-data';
 import { type Alternative, findAlternatives, judgeSit, type SitWorth, worthOf } from './judge-sits';
-import { worthText } from './outlook-words';
 import { findOutlook, listOutlooks, type OutlookRow, putOutlook } from './outlooks-data';
 import { type NoticeMail, queueNotice, wanting } from './queue-notice';
+import { WIND_TURNED_MAIL } from './words/mails';
+import { worthText } from './words/worth';
 
 /** A forecast further ahead is still guesswork. Our choice. */
 const DAYS_AHEAD = 7;
@@ -32,26 +33,27 @@ function mailOf(
   best: Alternative | null,
 ): NoticeMail {
   const { club } = scope;
+  const words = WIND_TURNED_MAIL;
   const when = dayAndWindow(sit.day, sit.windows, true);
   return {
     kind: 'wind_turned',
     dedupeKey: `notice.wind_turned:${sit.id}:${before.told + 1}`,
-    subject: `Wind turned: ${sit.standName}, ${dayAndWindow(sit.day, sit.windows)}`,
-    paragraphs: [`A newer forecast has turned against your sit at ${sit.standName}.`],
+    subject: words.subject(sit.standName, dayAndWindow(sit.day, sit.windows)),
+    paragraphs: [words.opening(sit.standName)],
     facts: [
-      { label: 'Your sit', value: `${when}, ${spanText(sit.startAt, sit.endAt, club)}` },
-      { label: 'Before', value: worthText(before) },
-      { label: 'Now', value: worthText(after) },
+      { label: words.sit, value: words.sitOf(when, spanText(sit.startAt, sit.endAt, club)) },
+      { label: words.before, value: worthText(before) },
+      { label: words.now, value: worthText(after) },
       {
-        label: 'Best free in its place',
-        value: best ? `${best.name}: ${worthText(best)}` : 'no free stand is quieter',
+        label: words.best,
+        value: best ? words.bestOf(best.name, worthText(best)) : words.noBest,
       },
     ],
     button: {
-      label: best ? `See it, and move to ${best.name}` : 'See the sit',
+      label: words.button(best?.name ?? null),
       url: `${env.appUrl}/clubs/${club.slug}/notices/swap/${sit.id}`,
     },
-    after: ['Moving is checked like any booking: somebody may be quicker. You may also cancel there.'],
+    after: [words.after],
     latest: sit.startAt - BEFORE_START_MS,
   };
 }

@@ -1,15 +1,17 @@
 import type { Metadata } from 'next';
 import { PlainFrame } from '@/app/plain-frame';
-import { KIND_PHRASES } from '@/features/notices/choices-schema';
 import { UnsubscribeButton } from '@/features/notices/components/unsubscribe-button';
 import { readNoticeLink } from '@/features/notices/unsubscribe';
+import { KIND_PHRASES, UNSUBSCRIBE_WORDS } from '@/features/notices/words/choices';
 import { publicPage } from '@/server/doors';
 import { TextLink } from '@/ui/button';
 import { PageTitle } from '@/ui/page-parts';
 import { unsubscribeAction } from './actions';
 
+const words = UNSUBSCRIBE_WORDS;
+
 export const metadata: Metadata = {
-  title: 'Stop mail',
+  title: words.title,
   referrer: 'no-referrer',
   robots: { index: false, follow: false },
 };
@@ -20,20 +22,14 @@ export default publicPage(async ({ params }) => {
   if (!link) {
     return (
       <PlainFrame>
-        <PageTitle title="This link does not work" />
-        <p className="max-w-prose">
-          It is older than a year or not whole. Sign in and open Notices in your club to choose what you are told.
-        </p>
+        <PageTitle title={words.deadTitle} />
+        <p className="max-w-prose">{words.deadText}</p>
       </PlainFrame>
     );
   }
   return (
     <PlainFrame>
-      <PageTitle
-        over={link.clubName}
-        title="Stop this mail?"
-        lead={`Mail about ${KIND_PHRASES[link.kind]}. Everything else you chose still comes.`}
-      />
+      <PageTitle over={link.clubName} title={words.question} lead={words.lead(link.kind)} />
       <UnsubscribeButton
         secret={secret}
         phrase={KIND_PHRASES[link.kind]}
@@ -41,7 +37,7 @@ export default publicPage(async ({ params }) => {
         action={unsubscribeAction}
       />
       <p className="mt-6">
-        <TextLink href={`/clubs/${link.slug}/notices`}>Choose what you are told</TextLink>
+        <TextLink href={`/clubs/${link.slug}/notices`}>{words.choose}</TextLink>
       </p>
     </PlainFrame>
   );

@@ -7,7 +7,8 @@ import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { Select, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
-import { type ChoicesForm, choicesSchema, KIND_WORDS } from '../choices-schema';
+import { type ChoicesForm, choicesSchema } from '../choices-schema';
+import { CHOICES_FORM_WORDS, KIND_WORDS } from '../words/choices';
 
 export interface ChoicesFormProps {
   club: string;
@@ -17,7 +18,8 @@ export interface ChoicesFormProps {
   save: (club: string, values: ChoicesForm) => Promise<ActionResult<{ kinds: number }>>;
 }
 
-const POINTS = WIND_POINTS.map((points) => ({ value: String(points), label: `${points} points` }));
+const words = CHOICES_FORM_WORDS;
+const POINTS = WIND_POINTS.map((points) => ({ value: String(points), label: words.points(points) }));
 
 export function ChoicesFormView({ club, values, kinds, save }: ChoicesFormProps) {
   const toast = useToast();
@@ -25,22 +27,23 @@ export function ChoicesFormView({ club, values, kinds, save }: ChoicesFormProps)
     schema: choicesSchema,
     defaultValues: values,
     submit: (typed) => save(club, typed),
-    onDone: () => toast({ title: 'Your choice is kept' }),
+    onDone: () => toast({ title: words.kept }),
   });
   const offered = NOTICE_KINDS.filter((kind) => kinds.includes(kind));
   return (
     <form {...formProps} className="grid max-w-2xl gap-6">
       <FormErrorSummary errors={errors} />
       <CheckboxGroup
-        label="Mail me when"
+        label={words.kinds}
+        stacked
         choices={offered.map((value) => ({ value, ...KIND_WORDS[value] }))}
         {...register('kinds')}
         error={errorOf('kinds')}
       />
       {kinds.includes('wind_turned') && (
         <Select
-          label="The wind counts as turned when quiet falls by"
-          hint="Or when the wind leaves the stand's good winds, however little quiet falls."
+          label={words.windPoints}
+          hint={words.windPointsHint}
           options={POINTS}
           className="max-w-48"
           {...register('windPoints')}
@@ -48,14 +51,11 @@ export function ChoicesFormView({ club, values, kinds, save }: ChoicesFormProps)
         />
       )}
       <div className="grid gap-4 sm:grid-cols-2">
-        <TimeInput label="Nothing after" {...register('quietFrom')} error={errorOf('quietFrom')} />
-        <TimeInput label="And not before" {...register('quietTo')} error={errorOf('quietTo')} />
+        <TimeInput label={words.quietFrom} {...register('quietFrom')} error={errorOf('quietFrom')} />
+        <TimeInput label={words.quietTo} {...register('quietTo')} error={errorOf('quietTo')} />
       </div>
-      <p className="text-ink-soft text-sm">
-        What falls in these hours waits until they end. A wind that turns comes two hours before the sit at the latest.
-        The same time twice: no quiet hours.
-      </p>
-      <SubmitRow label="Save" pending={pending} pendingLabel="Saving…" />
+      <p className="text-ink-soft text-sm">{words.quietNote}</p>
+      <SubmitRow label={words.save} pending={pending} pendingLabel={words.saving} />
     </form>
   );
 }

@@ -9,6 +9,9 @@ import { Notice } from '@/ui/notices';
 import { useToast } from '@/ui/toast';
 import type { SwapView } from '../read-swap';
 import type { SwapSitInput } from '../swap-schema';
+import { SWAP_LIST_WORDS } from '../words/swap';
+
+const words = SWAP_LIST_WORDS;
 
 export interface SwapListProps {
   club: string;
@@ -28,15 +31,15 @@ export function SwapList({ club, view, swap }: SwapListProps) {
     setPending(standId);
     const answer = await swap(club, { sitId: sit.id, sequence: sit.sequence, standId, approachId }).catch(() => null);
     setPending(undefined);
-    if (!answer?.ok) return setError(answer?.error.message ?? 'The server could not be reached. Try again.');
-    toast({ title: `Moved to ${answer.data.standName}`, text: answer.data.whenText });
+    if (!answer?.ok) return setError(answer?.error.message ?? words.lost);
+    toast({ title: words.moved(answer.data.standName), text: answer.data.whenText });
     router.push(`/clubs/${club}/my-sits`);
   }
 
   return (
     <>
       {error && (
-        <Notice level="caution" live title="Not moved" className="mb-4">
+        <Notice level="caution" live title={words.notMoved} className="mb-4">
           {error}
         </Notice>
       )}
@@ -46,18 +49,16 @@ export function SwapList({ club, view, swap }: SwapListProps) {
             <div>
               <p className="font-semibold font-serif text-lg">{choice.name}</p>
               <p>{choice.text}</p>
-              <p className="text-ink-soft">
-                {choice.approachName ? `Walk in by ${choice.approachName}` : 'No way in is drawn for it'}
-              </p>
+              <p className="text-ink-soft">{words.wayIn(choice.approachName)}</p>
             </div>
             <Button
               look={index === 0 ? 'primary' : 'plain'}
               pending={pending === choice.standId}
-              pendingLabel="Moving…"
+              pendingLabel={words.moving}
               disabled={pending !== undefined}
               onClick={() => void move(choice.standId, choice.approachId)}
             >
-              Move to {choice.name}
+              {words.move(choice.name)}
             </Button>
           </li>
         ))}

@@ -4,6 +4,9 @@ import { useState } from 'react';
 import { Button } from '@/ui/button';
 import type { ActionAnswer } from '@/ui/form/use-action-form';
 import { Notice } from '@/ui/notices';
+import { UNSUBSCRIBE_BUTTON_WORDS } from '../words/choices';
+
+const words = UNSUBSCRIBE_BUTTON_WORDS;
 
 export interface UnsubscribeButtonProps {
   secret: string;
@@ -22,22 +25,22 @@ export function UnsubscribeButton({ secret, phrase, stopped, action }: Unsubscri
     setPending(true);
     const answer = await action({ secret }).catch(() => null);
     setPending(false);
-    setError(answer?.ok ? undefined : (answer?.error.message ?? 'The server could not be reached. Try again.'));
+    setError(answer?.ok ? undefined : (answer?.error.message ?? words.lost));
     if (answer?.ok) setDone(true);
   }
 
   return (
     <div className="grid justify-items-start gap-4">
       <p role="status" className="font-semibold">
-        {done && `You get no more mail about ${phrase}.`}
+        {done && words.stopped(phrase)}
       </p>
       {!done && (
-        <Button look="primary" pending={pending} pendingLabel="Stopping…" onClick={() => void press()}>
-          Stop this mail
+        <Button look="primary" pending={pending} pendingLabel={words.stopping} onClick={() => void press()}>
+          {words.stop}
         </Button>
       )}
       {error && (
-        <Notice level="caution" live title="Not stopped">
+        <Notice level="caution" live title={words.notStopped}>
           {error}
         </Notice>
       )}

@@ -1,5 +1,6 @@
 import { SwapList } from '@/features/notices/components/swap-list';
 import { readSwap } from '@/features/notices/read-swap';
+import { SWAP_PAGE_WORDS } from '@/features/notices/words/swap';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -7,16 +8,18 @@ import { EmptyState } from '@/ui/notices';
 import { DefinitionList, PageTitle, Section } from '@/ui/page-parts';
 import { swapSitAction } from './actions';
 
-export const metadata = { title: 'Move a sit' };
+const words = SWAP_PAGE_WORDS;
+
+export const metadata = { title: words.title };
 
 export default clubPage('sits.book', async ({ scope, params }) => {
   const { slug, name } = scope.club;
   const view = await readSwap(scope, params.sit ?? '', now());
-  const mySits = <ButtonLink href={`/clubs/${slug}/my-sits`}>My sits</ButtonLink>;
+  const mySits = <ButtonLink href={`/clubs/${slug}/my-sits`}>{words.mySits}</ButtonLink>;
   if (!view) {
     return (
       <>
-        <PageTitle over={name} title="Not your sit" lead="A sit is moved by the member whose it is." />
+        <PageTitle over={name} title={words.notYours} lead={words.notYoursText} />
         {mySits}
       </>
     );
@@ -24,19 +27,16 @@ export default clubPage('sits.book', async ({ scope, params }) => {
   const { sit } = view;
   return (
     <>
-      <PageTitle over={name} title={`Your sit at ${sit.standName}`} lead={`${sit.whenText}, ${sit.timeText}`} />
-      {view.now && <DefinitionList items={[{ term: 'By the newest forecast', detail: view.now }]} />}
-      <Section
-        title="Free and quieter"
-        note="Moving keeps day, window, weapon and guests, and is checked like any booking."
-      >
+      <PageTitle over={name} title={words.titleOf(sit.standName)} lead={words.lead(sit.whenText, sit.timeText)} />
+      {view.now && <DefinitionList items={[{ term: words.now, detail: view.now }]} />}
+      <Section title={words.free} note={words.freeNote}>
         {!view.open ? (
-          <EmptyState title="This sit can no longer be moved" action={mySits}>
-            It has begun, was cancelled or has lapsed.
+          <EmptyState title={words.over} action={mySits}>
+            {words.overText}
           </EmptyState>
         ) : view.choices.length === 0 ? (
-          <EmptyState title="No free stand is quieter" action={mySits}>
-            Keep the sit, or cancel it and leave the ground to rest.
+          <EmptyState title={words.none} action={mySits}>
+            {words.noneText}
           </EmptyState>
         ) : (
           <SwapList club={slug} view={view} swap={swapSitAction} />
@@ -45,7 +45,7 @@ export default clubPage('sits.book', async ({ scope, params }) => {
       {view.open && view.choices.length > 0 && (
         <p className="mt-4">
           <ButtonLink look="quiet" href={`/clubs/${slug}/my-sits`}>
-            Keep or cancel it in my sits
+            {words.keep}
           </ButtonLink>
         </p>
       )}

@@ -1,5 +1,5 @@
 import { sectorName } from '@/core/sectors';
-import type { SitWorth } from './judge-sits';
+import type { SitWorth } from '../judge-sits';
 
 /** 'NW, in its good winds 84 % of the sit; quiet 78' */
 export function worthText({ quiet, hold, windFromDeg }: Pick<SitWorth, 'quiet' | 'hold' | 'windFromDeg'>): string {
