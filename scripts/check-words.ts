@@ -12,6 +12,8 @@ const WORDS_MAY_STAND = [
   /\/words\/[\w-]+\.ts$/,
   // Numbers, units and dates are formatted in one place each; the source of a constant stands beside it.
   /^src\/core\/(units|day-time|settings|setting-notes)\.ts$/,
+  // Names of columns as other programs write them, and markup.
+  /^src\/features\/exchange\/(read\/read-csv|write\/write-gpx)\.ts$/,
 ];
 
 interface Override {

@@ -25,7 +25,7 @@ const FOR_MACHINES =
   /^(className|\w*ClassName|style|d|transform|points|viewBox|preserveAspectRatio|log|href|data-.*|autoComplete|accept|sizes|type|prodId|[A-Z]\w*-[\w-]*)$/;
 /** Calls whose texts are for us: the log, faults of the program, class names, rules of the browser. */
 const CALLS_FOR_US =
-  /^(log\.\w+|console\.\w+|(\w*\.)?sql|joinClasses|Error|RangeError|TypeError|URL|RegExp|Intl\.\w+|matchMedia|.*\.querySelector\w*|.*\.closest)$/;
+  /^(log\.\w+|console\.\w+|(\w*\.)?sql|joinClasses|Error|RangeError|TypeError|URL|RegExp|Intl\.\w+|matchMedia|.*\.querySelector\w*|.*\.getElementsBy\w+|.*\.closest|z\.literal)$/;
 const BARE_CLASS =
   /^(absolute|block|border|capitalize|container|contents|fixed|flex|grid|group|hidden|inline|invisible|italic|outline|peer|relative|rounded|static|sticky|table|truncate|underline|uppercase|lowercase|transition|shadow)$/;
 
@@ -50,9 +50,9 @@ const isClasses = (text: string) =>
 /** Values of `Evidence` in core, and the one name that no language changes. */
 const NO_TEXT = new Set(['our choice', 'club log', 'Windrest']);
 
-/** Two words, or one with a capital; neither markup nor a run of style rules. */
+/** Two words, or one with a capital; neither markup, a run of style rules nor a media type. */
 function looksRead(text: string): boolean {
-  if (/^\s*<|^[a-z-]+:\S+;/.test(text)) return false;
+  if (/^\s*<|^[a-z-]+:\S+;|^\w+\/[\w+.-]+(; charset=\S+)?$/.test(text)) return false;
   if (/^[A-Z][a-z]+(…|[.!?])?$/.test(text.trim())) return true;
   return /[\p{L}\d,;:)]\s+[\p{L}(]/u.test(text) && /\p{L}{2}/u.test(text) && !isClasses(text);
 }
@@ -114,7 +114,7 @@ export function eachText(path: string, source: string, see: (node: SyntaxNode, t
     if (node.type === 'Literal') {
       if (typeof value !== 'string' || outer === 'none' || NO_TEXT.has(value)) return;
       const reads = outer === 'look' ? looksRead(value) : /\p{L}{2}/u.test(value);
-      if (reads && !(outer === 'most' && /^[a-z_-]+$/.test(value))) see(node, value);
+      if (reads && !(outer === 'most' && /^[a-z][\w-]*$/.test(value))) see(node, value);
       return;
     }
     if (node.type === 'TemplateLiteral' && outer !== 'none' && templateReads(node)) {

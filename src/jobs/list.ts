@@ -18,6 +18,7 @@ import { removeOrphans } from '@/features/photos/remove-orphans';
 import { refreshAllForecasts } from '@/features/weather/refresh-all';
 import { DAY, type Job, MINUTE } from './job';
 import { BOARD_JOBS, MAIL_JOB } from './urgent-jobs';
+import { JOB_RESULTS } from './words';
 
 /** Run one after the other these go from the most urgent; what they queue is mailed in the same round. */
 export const JOBS: readonly Job[] = [
@@ -27,7 +28,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 10 * MINUTE,
     run: async (now) => {
       const { kept } = await keepPredictions(now);
-      return `${kept} kept`;
+      return JOB_RESULTS.kept(kept);
     },
   },
   {
@@ -35,7 +36,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 60 * MINUTE,
     run: async (now) => {
       const { reminded } = await remindLogs(now);
-      return `${reminded} reminded`;
+      return JOB_RESULTS.reminded(reminded);
     },
   },
   {
@@ -43,7 +44,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 60 * MINUTE,
     run: async (now) => {
       const { reminded } = await remindUpkeep(now);
-      return `${reminded} reminded`;
+      return JOB_RESULTS.reminded(reminded);
     },
   },
   {
@@ -51,7 +52,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 10 * MINUTE,
     run: async (now) => {
       const { reminded } = await remindEvening(now);
-      return `${reminded} reminded`;
+      return JOB_RESULTS.reminded(reminded);
     },
   },
   {
@@ -59,7 +60,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 30 * MINUTE,
     run: async (now) => {
       const { told } = await tellRested(now);
-      return `${told} told`;
+      return JOB_RESULTS.told(told);
     },
   },
   {
@@ -67,7 +68,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 10 * MINUTE,
     run: async (now) => {
       const { told } = await tellRulesChanged(now);
-      return `${told} told`;
+      return JOB_RESULTS.told(told);
     },
   },
   {
@@ -75,7 +76,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 10 * MINUTE,
     run: async (now) => {
       const { told } = await tellDraws(now);
-      return `${told} told`;
+      return JOB_RESULTS.told(told);
     },
   },
   {
@@ -83,7 +84,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 30 * MINUTE,
     run: async (now) => {
       const { sent } = await sendWeekly(now);
-      return `${sent} sent`;
+      return JOB_RESULTS.sent(sent);
     },
   },
   {
@@ -91,7 +92,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 10 * MINUTE,
     run: async (now) => {
       const { told } = await tellWindTurned(now);
-      return `${told} told`;
+      return JOB_RESULTS.told(told);
     },
   },
   MAIL_JOB,
@@ -100,7 +101,7 @@ export const JOBS: readonly Job[] = [
     everyMs: 10 * MINUTE,
     run: async (now) => {
       const { refreshed, failed } = await refreshAllForecasts(now);
-      return `${refreshed} refreshed, ${failed} failed`;
+      return JOB_RESULTS.refreshed(refreshed, failed);
     },
   },
   {
@@ -108,7 +109,7 @@ export const JOBS: readonly Job[] = [
     everyMs: DAY,
     run: async (now) => {
       const { files, photos } = await removeOrphans(now);
-      return `${files} files without a photo and ${photos} photos of what is gone removed`;
+      return JOB_RESULTS.orphans(files, photos);
     },
   },
   {
@@ -123,7 +124,7 @@ export const JOBS: readonly Job[] = [
         await deleteOldOutlooks(tx, now - 30 * DAY);
         await deleteOldImports(tx, now - 30 * DAY);
       });
-      return 'old counts, runs, links and unused imports removed';
+      return JOB_RESULTS.tidied;
     },
   },
 ];

@@ -2,6 +2,7 @@ import { sendDueMail } from '@/features/mail/send-due-mail';
 import { lapseUnsigned } from '@/features/outings/lapse-unsigned';
 import { tellOverdue } from '@/features/outings/tell-overdue';
 import { type Job, MINUTE, SECOND } from './job';
+import { JOB_RESULTS } from './words';
 
 /** Those that somebody on the ground, or at the gate, waits for. */
 export const BOARD_JOBS: readonly Job[] = [
@@ -10,7 +11,7 @@ export const BOARD_JOBS: readonly Job[] = [
     everyMs: MINUTE,
     run: async (now) => {
       const { told } = await tellOverdue(now);
-      return `${told} steps taken`;
+      return JOB_RESULTS.steps(told);
     },
   },
   {
@@ -18,7 +19,7 @@ export const BOARD_JOBS: readonly Job[] = [
     everyMs: MINUTE,
     run: async (now) => {
       const { lapsed } = await lapseUnsigned(now);
-      return `${lapsed} lapsed`;
+      return JOB_RESULTS.lapsed(lapsed);
     },
   },
 ];
@@ -28,6 +29,6 @@ export const MAIL_JOB: Job = {
   everyMs: 5 * SECOND,
   run: async (now) => {
     const { sent, failed } = await sendDueMail(now);
-    return `${sent} sent, ${failed} failed`;
+    return JOB_RESULTS.mailed(sent, failed);
   },
 };

@@ -4,7 +4,6 @@ import {
   INSPECTION_ITEMS,
   INSPECTION_RESULTS,
   type InspectionAnswers,
-  type InspectionItem,
   type InspectionResult,
   ITEM_ANSWERS,
   itemsFor,
@@ -65,35 +64,3 @@ export const inspectionSchema = inspectionFormSchema.transform((typed, ctx): Ins
   if (form.failed() || result === null) return z.NEVER;
   return { standId: typed.standId, day, answers, result, notes: typed.notes, strapFittedOn, strapYears, nextDueOn };
 });
-
-export const ITEM_WORDS: Record<InspectionItem, { label: string; hint: string }> = {
-  tree: { label: 'Tree', hint: 'Alive, sound, has not outgrown the stand' },
-  straps: { label: 'Straps, chains and cables', hint: 'Dated; not faded, chewed or grown in' },
-  ratchets: { label: 'Ratchets', hint: 'Hold under load, let go when asked' },
-  bolts: { label: 'Bolts, welds, rust', hint: 'Tight, whole, no flaking' },
-  seat: { label: 'Seat', hint: 'Whole and dry' },
-  ladder: { label: 'Ladder joints', hint: 'Pinned; stands firm' },
-  platform: { label: 'Platform', hint: 'Level, carries weight, no give' },
-  lifeline: { label: 'Lifeline', hint: 'There, dated, from the ground to the seat' },
-  steps: { label: 'Steps', hint: 'None loose or missing' },
-  blind: { label: 'Roof, door, floor', hint: 'Tight; no wasps' },
-  noise: { label: 'Noise', hint: 'Nothing creaks or knocks' },
-  name_tag: { label: 'Name tag', hint: 'There and readable' },
-  lanes: { label: 'Shooting lanes', hint: 'Clear' },
-  path: { label: 'Path', hint: 'Quiet underfoot, marked' },
-  weight_label: { label: 'Weight label', hint: 'There and readable' },
-  haul_rope: { label: 'Haul rope', hint: 'There and sound' },
-};
-
-export const ANSWER_WORDS: Record<(typeof ITEM_ANSWERS)[number], string> = {
-  good: 'Good',
-  fix: 'Fix',
-  unsafe: 'Unsafe',
-  none: 'Has none',
-};
-
-export const RESULT_WORDS: Record<InspectionResult, string> = {
-  pass: 'Pass',
-  fix_first: 'Fix first',
-  closed: 'Closed',
-};

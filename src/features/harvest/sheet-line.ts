@@ -1,11 +1,11 @@
-import { formatWeight, mmToIn, type Units } from '@/core/units';
+import { formatWeight, type Units } from '@/core/units';
 import { momentText } from '@/features/clubs/audit-words';
 import { WEAPON_WORDS } from '@/features/ground/words';
 import type { ClubScope } from '@/server/scope';
 import { deerKind } from './deer-kind';
 import type { HarvestRow, Sheet } from './harvests-data';
 import { AGE_WORDS, DEER_KIND_WORDS } from './words/deer';
-import { SHEET_WORDS } from './words/sheet';
+import { lengthWords, SHEET_WORDS } from './words/sheet';
 
 export interface SheetLine {
   id: string;
@@ -22,9 +22,6 @@ export interface SheetLine {
 function hunterText({ sheet, memberName }: Sheet): string {
   return sheet.guestName === '' ? memberName : SHEET_WORDS.guestOf(sheet.guestName, memberName);
 }
-
-export const lengthWords = (mm: number, units: Units) =>
-  units === 'us' ? `${Number(mmToIn(mm).toFixed(2))} in` : `${Number((mm / 10).toFixed(1))} cm`;
 
 function antlersText(row: HarvestRow, units: Units): string {
   const { pointsLeft, pointsRight, insideSpreadMm } = row;

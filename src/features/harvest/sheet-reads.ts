@@ -11,9 +11,9 @@ import type { ClubScope } from '@/server/scope';
 import { mayChange, mayWriteFor } from './harvest-access';
 import { emptyHarvestForm, type HarvestForm, harvestFormOf } from './harvest-schema';
 import { findSheet, listHunters, type Sheet } from './harvests-data';
-import { lengthWords, sheetLine } from './sheet-line';
+import { sheetLine } from './sheet-line';
 import { AGE_METHOD_WORDS } from './words/deer';
-import { HUNTER_CHOICE, SHEET_WORDS } from './words/sheet';
+import { HUNTER_CHOICE, lengthWords, SHEET_WORDS } from './words/sheet';
 
 const words = SHEET_WORDS;
 

@@ -8,6 +8,7 @@ import type { ClubScope } from '@/server/scope';
 import { endAdjustments, insertAdjustment } from './learning-data';
 import type { ApplyAdjustment } from './learning-schema';
 import { loadOutcomes, wholePoints } from './reads';
+import { ADJUSTMENT_AUDIT, ADJUSTMENT_ERRORS } from './words';
 
 function note(scope: ClubScope, tx: Tx, at: { standId: string; verb: string; summary: string }, now: number) {
   const entry = { clubId: scope.club.id, actor: scope.actor, subjectType: 'stand', subjectId: at.standId };
@@ -21,12 +22,11 @@ export async function applyAdjustment(scope: ClubScope, input: ApplyAdjustment, 
     if (!stand) throw notFound();
     const outcomes = await loadOutcomes(scope, tx);
     const found = proposeAdjustments(outcomes).find(({ standId }) => standId === stand.id);
-    if (!found) throw new AppError('conflict', `${stand.name} has too few sits with a log to learn from.`);
+    if (!found) throw new AppError('conflict', ADJUSTMENT_ERRORS.fewSits(stand.name));
     if (wholePoints(found) !== input.points || found.sits !== input.sits) {
-      throw new AppError('conflict', 'More sits were logged since you opened this page. Look at the proposal again.');
+      throw new AppError('conflict', ADJUSTMENT_ERRORS.moreSits);
     }
-    if (input.points === 0)
-      throw new AppError('conflict', `${stand.name} goes as the sums say: there is nothing to apply.`);
+    if (input.points === 0) throw new AppError('conflict', ADJUSTMENT_ERRORS.nothing(stand.name));
     await endAdjustments(scope, tx, stand.id, { by: scope.member.id, at: now });
     const id = newId('adjustment');
     await insertAdjustment(tx, {
@@ -40,7 +40,7 @@ export async function applyAdjustment(scope: ClubScope, input: ApplyAdjustment, 
       appliedBy: scope.member.id,
       appliedAt: now,
     });
-    const summary = `${stand.name} counts ${input.points} points of quiet from its log of ${found.sits} sits.`;
+    const summary = ADJUSTMENT_AUDIT.applied(stand.name, input.points, found.sits);
     await note(scope, tx, { standId: stand.id, verb: 'applied', summary }, now);
     return { id };
   });
@@ -52,8 +52,8 @@ export async function undoAdjustment(scope: ClubScope, standId: string, now: num
     const stand = await getStand(scope, standId, tx);
     if (!stand) throw notFound();
     const ended = await endAdjustments(scope, tx, standId, { by: scope.member.id, at: now });
-    if (ended.length === 0) throw new AppError('conflict', `Nothing is applied to ${stand.name}.`);
-    const summary = `${stand.name} counts by the sums alone again.`;
+    if (ended.length === 0) throw new AppError('conflict', ADJUSTMENT_ERRORS.notApplied(stand.name));
+    const summary = ADJUSTMENT_AUDIT.undone(stand.name);
     await note(scope, tx, { standId, verb: 'undone', summary }, now);
     return { standId };
   });

@@ -6,6 +6,7 @@ import type { ReadFrom } from '@/db/client';
 import { listStands } from '@/features/ground/data';
 import type { ClubScope } from '@/server/scope';
 import { listAdjustments, listOutcomes } from './learning-data';
+import { adjustmentText } from './words';
 
 export async function loadOutcomes(scope: ClubScope, from?: ReadFrom): Promise<SitOutcome[]> {
   const rows = await listOutcomes(scope, from);
@@ -45,8 +46,6 @@ export interface LearningView {
   }[];
 }
 
-const signed = (points: number) => (points > 0 ? `+${points}` : String(points));
-
 /** Predictions held against the log, and what the log asks of each stand. */
 export async function readLearning(scope: ClubScope): Promise<LearningView> {
   const { zone } = scope.club;
@@ -78,14 +77,22 @@ export async function readLearning(scope: ClubScope): Promise<LearningView> {
       }))
       .sort((a, b) => Math.abs(b.points) - Math.abs(a.points) || a.standName.localeCompare(b.standName)),
     history: adjustments.map(({ row, standName, appliedByName, endedByName }) => {
-      const end = row.endedAt === null ? '' : ` Ended by ${endedByName ?? 'an admin'}, ${on(row.endedAt)}.`;
+      const ended = row.endedAt === null ? null : { by: endedByName, on: on(row.endedAt) };
       return {
         id: row.id,
         standId: row.standId,
         standName,
         points: row.points,
         sits: row.sits,
-        text: `${signed(row.points)} points (${signed(Math.round(row.lowPoints))} to ${signed(Math.round(row.highPoints))}) from ${row.sits} sits, applied by ${appliedByName ?? 'an admin'}, ${on(row.appliedAt)}.${end}`,
+        text: adjustmentText({
+          points: row.points,
+          low: Math.round(row.lowPoints),
+          high: Math.round(row.highPoints),
+          sits: row.sits,
+          by: appliedByName,
+          on: on(row.appliedAt),
+          ended,
+        }),
         holds: row.endedAt === null,
       };
     }),

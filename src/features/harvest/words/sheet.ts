@@ -1,3 +1,5 @@
+import { mmToIn, type Units } from '@/core/units';
+
 export const DEER_FORM_WORDS = {
   deer: 'Deer',
   age: 'Estimated age',
@@ -50,6 +52,10 @@ export const HUNTER_CHOICE = {
   guest: (name: string) => `${name} (guest)`,
   goneStand: 'A stand',
 } as const;
+
+/** '17.5 in', '44.5 cm' */
+export const lengthWords = (mm: number, units: Units) =>
+  units === 'us' ? `${Number(mmToIn(mm).toFixed(2))} in` : `${Number((mm / 10).toFixed(1))} cm`;
 
 export const NEW_SHEET_WORDS = {
   title: 'New harvest sheet',

@@ -6,8 +6,7 @@ import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { useToast } from '@/ui/toast';
 import type { ApplyAdjustment } from '../learning-schema';
 import type { ProposalView } from '../reads';
-
-const LOST = 'The server could not be reached. Try again.';
+import { APPLY_WORDS, UNDO_WORDS } from '../words';
 
 export interface ApplyProps {
   club: string;
@@ -20,23 +19,23 @@ export function ApplyButton({ club, proposal, apply }: ApplyProps) {
   const { standId, standName, points, sits } = proposal;
   async function confirm() {
     const answer = await apply(club, { standId, points, sits }).catch(() => null);
-    if (!answer) return LOST;
+    if (!answer) return APPLY_WORDS.lost;
     if (!answer.ok) return answer.error.message;
-    toast({ title: `${standName} counts ${points > 0 ? `+${points}` : points} points` });
+    toast({ title: APPLY_WORDS.applied(points, standName) });
   }
   return (
     <ConfirmDialog
-      title={`Apply ${points > 0 ? `+${points}` : points} points to ${standName}`}
-      confirmLabel="Apply"
+      title={APPLY_WORDS.title(points, standName)}
+      confirmLabel={APPLY_WORDS.apply}
       trigger={
         <Button>
-          Apply<span className="sr-only"> to {standName}</span>
+          {APPLY_WORDS.apply}
+          <span className="sr-only">{APPLY_WORDS.applyTo(standName)}</span>
         </Button>
       }
       onConfirm={confirm}
     >
-      From now on the list adds these points to the quiet of every sit there, and says so among its reasons. It can be
-      undone at any time.
+      {APPLY_WORDS.text}
     </ConfirmDialog>
   );
 }
@@ -51,22 +50,23 @@ export function UndoButton({ club, stand, undo }: UndoProps) {
   const toast = useToast();
   async function confirm() {
     const answer = await undo(club, { standId: stand.id }).catch(() => null);
-    if (!answer) return LOST;
+    if (!answer) return UNDO_WORDS.lost;
     if (!answer.ok) return answer.error.message;
-    toast({ title: `${stand.name} counts by the sums alone` });
+    toast({ title: UNDO_WORDS.undone(stand.name) });
   }
   return (
     <ConfirmDialog
-      title={`Undo what is applied to ${stand.name}`}
-      confirmLabel="Undo it"
+      title={UNDO_WORDS.title(stand.name)}
+      confirmLabel={UNDO_WORDS.confirm}
       trigger={
         <Button look="quiet">
-          Undo<span className="sr-only"> for {stand.name}</span>
+          {UNDO_WORDS.undo}
+          <span className="sr-only">{UNDO_WORDS.undoFor(stand.name)}</span>
         </Button>
       }
       onConfirm={confirm}
     >
-      The list goes by the sums alone again. The record keeps that it was applied.
+      {UNDO_WORDS.text}
     </ConfirmDialog>
   );
 }
