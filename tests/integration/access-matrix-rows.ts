@@ -34,6 +34,7 @@ export const ACCESS_ROWS: Record<string, Record<string, Entry>> = {
   'api/clubs/[club]/board/route.ts': { GET: 'board.read' },
   'api/clubs/[club]/board/walk-up/route.ts': { GET: 'sits.book' },
   'api/clubs/[club]/closures/touched/route.ts': { GET: 'closed_days.write' },
+  'api/clubs/[club]/coverage/seat/route.ts': { GET: 'features.read' },
   'api/clubs/[club]/ground/export/route.ts': { GET: 'ground.export' },
   'api/clubs/[club]/ground/import/route.ts': { POST: 'features.write' },
   'api/clubs/[club]/harvest/route.ts': { GET: 'harvest.read' },

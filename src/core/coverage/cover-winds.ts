@@ -10,8 +10,15 @@ export interface CoverageInput {
   /** Observed hours, in any order. 10 m wind: no slope drift is added. */
   hours: WeatherHour[];
   windows: SitWindow[];
-  /** A stand or arc that is not there yet; null: none. */
-  trial: CoveringStand | null;
+}
+
+/** One hour with a direction in a window, and whether some stand has it in a good arc. */
+export interface CountedWind {
+  window: WindowName;
+  /** 1-12. */
+  month: number;
+  fromDeg: number;
+  covered: boolean;
 }
 
 /** Hours of wind by compass point (16 from N clockwise) in one window of one month. */
@@ -22,29 +29,28 @@ export interface CoverageCell {
   /** All hours with a speed, those without a direction (calm, variable) among them. */
   hours: number;
   noDirection: number;
-  /** Hours from each point; those some stand has in a good arc; those only the trial has. */
+  /** Hours from each point, and those some stand has in a good arc. */
   blew: number[];
   covered: number[];
-  trialOnly: number[];
 }
 
 export interface StandCoverage {
   standId: string;
   name: string;
-  trial: boolean;
   hours: Record<WindowName, number>;
-  /** Hours that no other stand covers; the trial is no other stand to those that stand. */
+  /** Hours that no other stand covers. */
   alone: number;
 }
 
 export interface Coverage {
   cells: CoverageCell[];
   stands: StandCoverage[];
+  winds: CountedWind[];
 }
 
 const emptyCell = (window: WindowName, month: number | null): CoverageCell => {
   const zeros = () => Array.from({ length: 16 }, () => 0);
-  return { window, month, hours: 0, noDirection: 0, blew: zeros(), covered: zeros(), trialOnly: zeros() };
+  return { window, month, hours: 0, noDirection: 0, blew: zeros(), covered: zeros() };
 };
 
 function add(list: number[], index: number): void {
@@ -52,7 +58,7 @@ function add(list: number[], index: number): void {
 }
 
 /** Good arcs of a stand in a window; none where it is to be avoided. */
-function huntedArcs(stand: CoveringStand, window: WindowName): Arc[] {
+export function huntedArcs(stand: Pick<CoveringStand, 'arcs' | 'suitability'>, window: WindowName): Arc[] {
   return stand.suitability[window] === 'avoid' ? [] : arcsFor(stand.arcs, window);
 }
 
@@ -61,19 +67,17 @@ function huntedArcs(stand: CoveringStand, window: WindowName): Arc[] {
  * start in, the end out) and is covered by a stand with its direction in a good arc of that window. Calm and variable hours
  * are counted apart and covered by none. Cells by window and month, in order, then the whole season by window. Never throws.
  */
-export function coverWinds({ stands, hours, windows, trial }: CoverageInput): Coverage {
-  const all = trial ? [...stands, trial] : stands;
-  const rows = all.map(
+export function coverWinds({ stands, hours, windows }: CoverageInput): Coverage {
+  const rows = stands.map(
     (stand): StandCoverage => ({
       standId: stand.id,
       name: stand.name,
-      trial: stand === trial,
       hours: { morning: 0, evening: 0 },
       alone: 0,
     }),
   );
   const arcs = Object.fromEntries(
-    WINDOW_NAMES.map((window) => [window, all.map((stand) => huntedArcs(stand, window))]),
+    WINDOW_NAMES.map((window) => [window, stands.map((stand) => huntedArcs(stand, window))]),
   ) as Record<WindowName, Arc[][]>;
   const cells = new Map<string, CoverageCell>();
   const cellOf = (window: WindowName, month: number | null) => {
@@ -85,6 +89,7 @@ export function coverWinds({ stands, hours, windows, trial }: CoverageInput): Co
   const known = hours
     .filter((hour) => Number.isFinite(hour.at) && hour.windSpeedMps !== null)
     .sort((a, b) => a.at - b.at);
+  const winds: CountedWind[] = [];
   let first = 0;
   for (const window of [...windows].sort((a, b) => a.startAt - b.startAt)) {
     while (first < known.length && (known[first] as WeatherHour).at < window.startAt) first++;
@@ -97,15 +102,14 @@ export function coverWinds({ stands, hours, windows, trial }: CoverageInput): Co
         continue;
       }
       const by = rows.filter((_, s) => anyArcContains(arcs[window.window][s] ?? [], windFromDeg));
-      const standing = by.filter((row) => !row.trial);
       for (const row of by) row.hours[window.window]++;
-      if (standing.length === 1 && standing[0]) standing[0].alone++;
-      if (standing.length === 0 && by[0]) by[0].alone++;
+      if (by.length === 1 && by[0]) by[0].alone++;
+      const month = monthOf(window.day);
+      winds.push({ window: window.window, month, fromDeg: windFromDeg, covered: by.length > 0 });
       const point = sectorOf(windFromDeg);
       for (const cell of counted) {
         add(cell.blew, point);
-        if (standing.length > 0) add(cell.covered, point);
-        else if (by.length > 0) add(cell.trialOnly, point);
+        if (by.length > 0) add(cell.covered, point);
       }
     }
   }
@@ -113,15 +117,15 @@ export function coverWinds({ stands, hours, windows, trial }: CoverageInput): Co
   const list = [...cells.values()].sort(
     (a, b) => order(a) - order(b) || WINDOW_NAMES.indexOf(a.window) - WINDOW_NAMES.indexOf(b.window),
   );
-  return { cells: list, stands: rows };
+  return { cells: list, stands: rows, winds };
 }
 
 const sum = (list: number[]) => list.reduce((a, b) => a + b, 0);
 
-/** Shares (0-1) of a cell's hours with a direction that are covered, and that a trial would add; null: there are none. */
-export function coveredShares(cell: CoverageCell): { covered: number; added: number } | null {
+/** Share (0-1) of a cell's hours with a direction that is covered; null: there are none. */
+export function coveredShare(cell: CoverageCell): number | null {
   const directed = sum(cell.blew);
-  return directed > 0 ? { covered: sum(cell.covered) / directed, added: sum(cell.trialOnly) / directed } : null;
+  return directed > 0 ? sum(cell.covered) / directed : null;
 }
 
 /** Shares of the wind by compass point that sum to 1; every point alike where no wind is known. */

@@ -5,6 +5,7 @@ import type { WeatherHour } from '@/core/types';
 import { getForecast } from '@/features/weather/get-forecast';
 import { currentWeather, refreshForecast } from '@/features/weather/refresh-forecast';
 import type { ClubScope } from '@/server/scope';
+import { COVERAGE_WORDS } from './words';
 
 export interface SeasonHours {
   hours: WeatherHour[];
@@ -61,6 +62,6 @@ export async function loadSeasonHours(
     source: kept.forecast?.source ?? weather.source,
     fromDay: first === undefined ? null : dayOf(first, zone),
     toDay: last === undefined ? null : dayOf(last, zone),
-    error: hours.length > 0 ? null : (kept.error ?? 'The hours of last season are being fetched. Look again soon.'),
+    error: hours.length > 0 ? null : (kept.error ?? COVERAGE_WORDS.fetching),
   };
 }

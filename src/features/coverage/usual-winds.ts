@@ -21,5 +21,5 @@ export function sharesOf({ cells }: Coverage): Record<WindowName, number[]> {
 /** How usual each wind is in each window of a season; null: no hours are known. */
 export function usualWinds(season: SeasonHours, club: ScopeClub): Record<WindowName, number[]> | null {
   if (season.hours.length === 0) return null;
-  return sharesOf(coverWinds({ stands: [], hours: season.hours, windows: windowsOf(season, club), trial: null }));
+  return sharesOf(coverWinds({ stands: [], hours: season.hours, windows: windowsOf(season, club) }));
 }

@@ -1,9 +1,9 @@
 import type { PointShare } from '../reads';
-
-const percent = (share: number) => `${(share * 100).toFixed(share > 0 && share < 0.1 ? 1 : 0)} %`;
+import { shareText } from '../share-text';
+import { BARS_WORDS as W } from '../words';
 
 /** One bar a compass point: solid what stands cover, hatched what a trial would add, open what nobody covers. */
-export function PointBars({ points, label, trial }: { points: PointShare[]; label: string; trial: boolean }) {
+export function PointBars({ points, label, trial = false }: { points: PointShare[]; label: string; trial?: boolean }) {
   const most = Math.max(0.01, ...points.map(({ share }) => share));
   const width = (share: number) => `${(100 * share) / most}%`;
   return (
@@ -11,7 +11,6 @@ export function PointBars({ points, label, trial }: { points: PointShare[]; labe
       <ul className="grid gap-1">
         {points.map((point) => {
           const open = Math.max(0, point.share - point.covered - point.added);
-          const added = point.added > 0 ? `, ${percent(point.added)} by the trial` : '';
           return (
             <li key={point.name} className="grid grid-cols-[3rem_minmax(0,1fr)_4rem] items-center gap-2 text-sm">
               <span className="font-semibold">{point.name}</span>
@@ -23,19 +22,17 @@ export function PointBars({ points, label, trial }: { points: PointShare[]; labe
                 />
                 <span className={open > 0 ? 'border border-ink' : ''} style={{ width: width(open) }} />
               </span>
-              <span className="text-right">
-                {percent(point.share)}
+              <span className="text-right tabular-nums">
+                {shareText(point.share)}
                 <span className="sr-only">
-                  : {percent(point.covered)} covered{added}, {percent(open)} uncovered
+                  {W.said(shareText(point.covered), point.added > 0 ? shareText(point.added) : '', shareText(open))}
                 </span>
               </span>
             </li>
           );
         })}
       </ul>
-      <figcaption className="mt-2 text-ink-soft text-sm">
-        Solid: some stand has this wind in a good arc. {trial && 'Hatched: only the trial has. '}Open: nobody.
-      </figcaption>
+      <figcaption className="mt-2 text-ink-soft text-sm">{trial ? W.legendTrial : W.legend}</figcaption>
     </figure>
   );
 }

@@ -2,59 +2,84 @@
 
 import { useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
-import { useRouter, useSearchParams } from 'next/navigation';
-import { useMemo, useState } from 'react';
+import { useMemo } from 'react';
+import type { GoodWindArc } from '@/core/types';
 import { mapQuery } from '@/features/map/queries';
+import type { StandThing } from '@/features/map/thing';
 import { Button } from '@/ui/button';
 import { ErrorState, Loading } from '@/ui/notices';
+import { TRIAL_MAP_WORDS as W } from '../words';
 
 const MapCanvas = dynamic(() => import('@/features/map/components/map-canvas').then((part) => part.MapCanvas), {
   ssr: false,
-  loading: () => <Loading label="Unfolding the map" />,
+  loading: () => <Loading label={W.loading} />,
 });
 
 const MEASURE = { mode: 'measure' } as const;
 
-/** Drops the trial stand on the map; its place then stands in the address. */
-export function TrialMap({ club, at }: { club: string; at: { lat: number; lon: number } | null }) {
-  const [open, setOpen] = useState(at !== null);
-  if (!open) return <Button onClick={() => setOpen(true)}>Place it on the map</Button>;
-  return <PlaceIt club={club} at={at} />;
+export interface Seat {
+  lat: number;
+  lon: number;
 }
 
-function PlaceIt({ club, at }: { club: string; at: { lat: number; lon: number } | null }) {
+export interface TrialMapProps {
+  club: string;
+  at: Seat | null;
+  arcs: readonly GoodWindArc[];
+  onPlace: (at: Seat) => void;
+  onTurn: (arcs: GoodWindArc[]) => void;
+}
+
+/** The ground with the trial stand on it: tapped into place, dragged, and its winds turned by hand. */
+export function TrialMap({ club, at, arcs, onPlace, onTurn }: TrialMapProps) {
   const query = useQuery(mapQuery(club));
-  const router = useRouter();
-  const search = useSearchParams();
-  const overlay = useMemo(() => ({ sitters: at ? [{ at: [at.lon, at.lat], name: 'Trial' }] : [] }), [at]);
+  const view = query.data;
+  const trial = useMemo<StandThing | null>(
+    () =>
+      at && {
+        kind: 'stand',
+        id: 'trial',
+        version: 0,
+        name: W.name,
+        geometry: { type: 'Point', coordinates: [at.lon, at.lat] },
+        what: 'hang_on',
+        arcs: [...arcs],
+        closed: '',
+      },
+    [at, arcs],
+  );
+  const things = useMemo(() => {
+    const ground = view?.things.filter(({ kind }) => kind !== 'approach') ?? [];
+    return trial ? [...ground, trial] : ground;
+  }, [view, trial]);
+  const seat = useMemo(() => at && { at: [at.lon, at.lat], label: W.seat }, [at]);
+  const turning = useMemo(() => at && { at: [at.lon, at.lat], arcs }, [at, arcs]);
   if (query.isError) {
     return (
-      <ErrorState title="The map could not be read" action={<Button onClick={() => query.refetch()}>Try again</Button>}>
+      <ErrorState title={W.failed} action={<Button onClick={() => query.refetch()}>{W.again}</Button>}>
         {query.error.message}
       </ErrorState>
     );
   }
-  if (!query.data) return <Loading label="Unfolding the map" />;
+  if (!view) return <Loading label={W.loading} />;
+  const place = ([lon = 0, lat = 0]: number[]) => onPlace({ lat, lon });
   return (
     <figure>
       <MapCanvas
         compact
-        view={query.data}
-        things={query.data.things}
-        overlay={overlay}
+        view={view}
+        things={things}
+        selectedId={trial?.id ?? null}
         tool={MEASURE}
-        onMeasure={([lon = 0, lat = 0]) => {
-          const next = new URLSearchParams(search);
-          next.set('lat', lat.toFixed(6));
-          next.set('lon', lon.toFixed(6));
-          router.replace(`?${next}`, { scroll: false });
-        }}
-        label="Map to place the trial stand on"
-        className="relative h-80 sm:h-96"
+        seat={seat}
+        turning={turning}
+        onMeasure={place}
+        onSeat={place}
+        onTurn={onTurn}
+        label={W.label}
+        className="relative h-96 sm:h-[30rem]"
       />
-      <figcaption className="mt-1 text-ink-soft text-sm">
-        Tap where the seat would be, or type its latitude and longitude.
-      </figcaption>
+      <figcaption className="mt-1 max-w-prose text-ink-soft text-sm">{W.caption}</figcaption>
     </figure>
   );
 }

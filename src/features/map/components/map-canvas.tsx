@@ -15,6 +15,7 @@ import { paintLabels } from '../leaflet/paint-labels';
 import { paintOverlay } from '../leaflet/paint-overlay';
 import { readInks } from '../leaflet/paint-style';
 import { paintThings } from '../leaflet/paint-things';
+import { seatHandle } from '../leaflet/seat-handle';
 import type { MapOverlay } from '../overlay';
 import type { MapThing, MapView } from '../thing';
 import { MapPatterns } from './map-patterns';
@@ -51,6 +52,9 @@ export interface MapCanvasProps {
   imagery?: boolean;
   /** The stand whose arcs may be turned by hand. */
   turning?: { at: Position; arcs: readonly GoodWindArc[] } | null;
+  /** A seat that may be moved by hand. */
+  seat?: { at: Position; label: string } | null;
+  onSeat?: (at: Position) => void;
   onSelect?: (id: string | null) => void;
   onDrawn?: (geometry: DrawnGeometry) => void;
   onReshaped?: (geometry: DrawnGeometry) => void;
@@ -71,11 +75,21 @@ interface Parts {
   labels: ReturnType<typeof paintLabels>;
   overlay: ReturnType<typeof paintOverlay>;
   handles: ReturnType<typeof arcHandles>;
+  seat: ReturnType<typeof seatHandle>;
 }
 
 /** The map itself. Everything it shows is given to it; what is done on it is told by its events. */
 export function MapCanvas(props: MapCanvasProps) {
-  const { view, things, tool = LOOK, selectedId = null, faint = NOTHING, overlay = null, turning = null } = props;
+  const {
+    view,
+    things,
+    tool = LOOK,
+    selectedId = null,
+    faint = NOTHING,
+    overlay = null,
+    turning = null,
+    seat = null,
+  } = props;
   const { club } = view;
   const host = useRef<HTMLDivElement>(null);
   const [parts, setParts] = useState<Parts | null>(null);
@@ -110,6 +124,7 @@ export function MapCanvas(props: MapCanvasProps) {
       labels: paintLabels(map),
       overlay: paintOverlay(map),
       handles: arcHandles(map, (arcs) => now.current.onTurn?.(arcs)),
+      seat: seatHandle(map, ({ lng, lat }) => now.current.onSeat?.([lng, lat])),
     };
     const fresh = () => {
       spent.current = false;
@@ -130,7 +145,7 @@ export function MapCanvas(props: MapCanvasProps) {
       watcher.disconnect();
       element.removeEventListener('pointerdown', fresh, true);
       setParts(null);
-      for (const part of [made.things, made.labels, made.overlay, made.handles]) part.destroy();
+      for (const part of [made.things, made.labels, made.overlay, made.handles, made.seat]) part.destroy();
       map.remove();
     };
   }, [club.slug]);
@@ -145,6 +160,8 @@ export function MapCanvas(props: MapCanvasProps) {
 
   useEffect(() => parts?.overlay.update(overlay), [parts, overlay]);
   useEffect(() => parts?.handles.update(turning ? latLng(turning.at) : null, turning?.arcs ?? []), [parts, turning]);
+
+  useEffect(() => parts?.seat.update(seat && { at: latLng(seat.at), label: seat.label }), [parts, seat]);
 
   const shape = tool.mode === 'draw' ? tool.shape : null;
   const round = tool.mode === 'reshape' ? tool.round : 0;
