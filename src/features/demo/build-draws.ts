@@ -4,7 +4,7 @@ import type { MadeGround } from './build-ground';
 import { type DemoDay, daysFrom, momentOf } from './demo-day';
 import type { DemoRows } from './demo-rows';
 
-/** A draw for the Saturday everybody wants, with the wishes that have come in so far. */
+/** A draw for the weekend everybody wants, with the wishes that have come in so far. */
 export function buildDraws(day: DemoDay, club: MadeClub, ground: MadeGround): Pick<DemoRows, 'draws' | 'drawEntries'> {
   const clubId = club.row.id;
   const standIds = ground.stands.slice(0, 8).map((stand) => stand.id);
@@ -13,8 +13,12 @@ export function buildDraws(day: DemoDay, club: MadeClub, ground: MadeGround): Pi
   const draw = {
     id: day.dice.id('draw'),
     clubId,
-    day: daysFrom(day, 13),
-    windows: 'morning' as const,
+    day: daysFrom(day, 12),
+    slots: [
+      { day: daysFrom(day, 12), windows: 'morning' as const },
+      { day: daysFrom(day, 12), windows: 'evening' as const },
+      { day: daysFrom(day, 13), windows: 'morning' as const },
+    ],
     standIds,
     closesAt: momentOf(day, 10, '17:00'),
     pointRules: DEFAULT_POINT_RULES,
@@ -29,6 +33,7 @@ export function buildDraws(day: DemoDay, club: MadeClub, ground: MadeGround): Pi
     clubId,
     memberId: member.id,
     weapon: 'bow' as const,
+    slots: index === 3 ? [0] : [0, 1, 2],
     choices: day.dice.shuffle(standIds).slice(0, 3),
     anyByScore: index % 2 === 0,
     at: opened + (index + 1) * 3_600_000,
