@@ -5,6 +5,7 @@ import { closeDatabase } from '@/db/client';
 import { env } from '@/env';
 import { readHindcast } from '@/features/sits/read-hindcast';
 import { systemScopeBySlug } from '@/server/scope';
+import { needDatabase } from './need-database';
 
 const HELP = `A season of observed wind over a club's stands: how often each could be sat, and which winds none covers.
 
@@ -23,6 +24,7 @@ try {
     console.log(HELP);
     process.exitCode = values.help ? 0 : 1;
   } else {
+    await needDatabase();
     const scope = await systemScopeBySlug(values.club);
     const view = await readHindcast(scope, Date.now(), chooseWeather({ ...env, weather: values.weather }));
     console.log(

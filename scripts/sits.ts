@@ -10,6 +10,7 @@ import { forecastFrom } from '@/features/sits/load-forecast';
 import { printSits } from '@/features/sits/print-sits';
 import { askedWindow, type ReadOptions, readSits } from '@/features/sits/reads';
 import { systemScopeBySlug } from '@/server/scope';
+import { needDatabase } from './need-database';
 
 const HELP = `The ranked list of a window, as the Sit screen reads it.
 
@@ -55,6 +56,7 @@ async function main(): Promise<void> {
   });
   if (values.help) return console.log(HELP);
   if (values['list-clubs']) {
+    await needDatabase();
     const clubs = await listClubs();
     for (const club of clubs) console.log(`${club.slug}  ${club.name}  ${club.zone}`);
     if (clubs.length === 0) console.log('No clubs yet. npm run db:seed makes the demo club.');
@@ -68,6 +70,7 @@ async function main(): Promise<void> {
   }
   const window = oneOf('window', values.window, WINDOW_NAMES);
   const ask = { day: values.day, window, weapon: oneOf('weapon', values.weapon, WEAPONS) };
+  await needDatabase();
   const scope = await systemScopeBySlug(values.club);
   const replay = weather.startsWith('replay:');
   if (replay && !ask.day) throw new Usage('A replay needs --day.');
