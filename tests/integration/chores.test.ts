@@ -11,6 +11,7 @@ import {
   saveInspectionAction,
   takeChoreAction,
 } from '@/app/clubs/[club]/chores/actions';
+import { closeAction } from '@/app/clubs/[club]/closures/actions';
 import { type InspectionAnswers, itemsFor } from '@/core/upkeep/inspection';
 import { reader } from '@/db/client';
 import { auditLog, chores, closures, outbox, visits } from '@/db/schema';
@@ -18,8 +19,9 @@ import { loadGates } from '@/features/bookings/load-gates';
 import { makeFeed } from '@/features/calendar/make-feed';
 import { readFeed } from '@/features/calendar/read-feed';
 import { EMPTY_CHORE } from '@/features/chores/chore-schema';
-import { readChores, readStandUpkeep } from '@/features/chores/reads';
+import { readChores } from '@/features/chores/reads';
 import { remindUpkeep } from '@/features/chores/remind-upkeep';
+import { readStandUpkeep } from '@/features/chores/upkeep-reads';
 import { setClock } from '@/server/clock';
 import { book } from '../helpers/book';
 import { addMember, addStand, makeClub, TEST_NOW, type TestClub, type TestMember } from '../helpers/make-club';
@@ -59,6 +61,7 @@ const inspect = (more: Record<string, unknown> = {}) =>
       strapFittedOn: '',
       strapYears: '',
       nextDueOn: '2027-11-04',
+      reopen: false,
       ...more,
     }),
   );
@@ -128,6 +131,49 @@ describe('inspections', () => {
     await inspect(shut);
     expect(await inspect(shut)).toMatchObject({ ok: true });
     expect(await reader().select().from(closures).where(eq(closures.clubId, club.id))).toHaveLength(1);
+  });
+
+  const openClosures = async () => {
+    const rows = await reader().select().from(closures).where(eq(closures.clubId, club.id));
+    return rows.filter(({ removedAt, toDay }) => removedAt === null && toDay === null).map(({ reason }) => reason);
+  };
+  const unsafe = { answers: answersOf({ tree: 'unsafe' }), result: 'closed', notes: 'Tree dead at the top' };
+
+  it('a pass after it opens what it closed when asked to, on record, and nothing by itself', async () => {
+    await inspect(unsafe);
+    expect((await readStandUpkeep(steward.scope, stand, TEST_NOW)).closedBy).toMatchObject({
+      dayText: 'Wed 4 Nov 2026',
+      reason: 'Inspection: Tree dead at the top',
+    });
+    expect(await inspect()).toMatchObject({ ok: true, data: { opened: false } });
+    expect(await openClosures()).toHaveLength(1);
+    expect(await inspect({ reopen: true })).toMatchObject({ ok: true, data: { opened: true } });
+    expect(await openClosures()).toEqual([]);
+    const after = await readStandUpkeep(steward.scope, stand, TEST_NOW);
+    expect(after).toMatchObject({ closed: false, closedBy: null });
+    const audits = await reader().select().from(auditLog).where(eq(auditLog.clubId, club.id));
+    const opened = audits.find(({ action }) => action === 'closure.opened');
+    expect(opened).toMatchObject({ actorName: 'Ada Steward', summary: 'Opened Oak Ladder again from 2026-11-04.' });
+    expect(audits.filter(({ action }) => action === 'inspection.added').at(-1)?.detail).toMatchObject({
+      opened: opened?.subjectId,
+    });
+    expect(await inspect({ reopen: true })).toMatchObject({ ok: true, data: { opened: false } });
+  });
+
+  it('a pass opens no closure that stood before the inspection, and only a pass opens one', async () => {
+    const form = { standId: stand, fromDay: TODAY, toDay: '', reason: 'The neighbour fells trees' };
+    await inRequest(steward.browser, () => closeAction(club.slug, form));
+    setClock(() => TEST_NOW + 60_000);
+    await inspect(unsafe);
+    expect((await readStandUpkeep(steward.scope, stand, TEST_NOW)).closed).toBe(true);
+    expect(await inspect({ reopen: true })).toMatchObject({ ok: true, data: { opened: false } });
+    expect(await openClosures()).toEqual(['The neighbour fells trees']);
+
+    const other = await addStand(club, { name: 'Ash Ladder' });
+    await inspect({ ...unsafe, standId: other });
+    const fix = { answers: answersOf({ seat: 'fix' }), result: 'fix_first', notes: 'Seat torn', reopen: true };
+    expect(await inspect({ ...fix, standId: other })).toMatchObject({ ok: true, data: { opened: false } });
+    expect(await openClosures()).toHaveLength(2);
   });
 
   it.each([

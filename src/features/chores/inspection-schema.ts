@@ -27,6 +27,8 @@ export const inspectionFormSchema = z.object({
   strapFittedOn: line,
   strapYears: line,
   nextDueOn: line,
+  /** Of a pass: opens what an inspection closed. */
+  reopen: z.boolean(),
 });
 export type InspectionForm = z.output<typeof inspectionFormSchema>;
 
@@ -39,6 +41,7 @@ export interface InspectionInput {
   strapFittedOn: string | null;
   strapYears: number | null;
   nextDueOn: string;
+  reopen: boolean;
 }
 
 export const inspectionSchema = inspectionFormSchema.transform((typed, ctx): InspectionInput => {
@@ -62,5 +65,7 @@ export const inspectionSchema = inspectionFormSchema.transform((typed, ctx): Ins
   else if (!resultFits(result, answers)) form.fail('result', ERRORS.tooMild[mildestResult(answers)]);
   if (result !== null && result !== 'pass' && typed.notes === '') form.fail('notes', ERRORS.notes);
   if (form.failed() || result === null) return z.NEVER;
-  return { standId: typed.standId, day, answers, result, notes: typed.notes, strapFittedOn, strapYears, nextDueOn };
+  const { standId, notes } = typed;
+  const reopen = typed.reopen && result === 'pass';
+  return { standId, day, answers, result, notes, strapFittedOn, strapYears, nextDueOn, reopen };
 });

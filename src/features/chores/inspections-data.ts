@@ -4,7 +4,13 @@ import { closures, inspections, memberships, sits, users } from '@/db/schema';
 import type { ClubScope } from '@/server/scope';
 
 export type InspectionRow = typeof inspections.$inferSelect;
-export type InspectionDetail = InspectionRow & { byName: string; closureOpen: boolean };
+export type InspectionDetail = InspectionRow & {
+  byName: string;
+  closureOpen: boolean;
+  /** The closure was made by this inspection and still holds; one that stood before is not its own. */
+  closedByIt: boolean;
+  closureReason: string | null;
+};
 
 const select = (from: ReadFrom) =>
   from
@@ -14,17 +20,20 @@ const select = (from: ReadFrom) =>
       closureId: closures.id,
       removedAt: closures.removedAt,
       toDay: closures.toDay,
+      closedAt: closures.createdAt,
+      closureReason: closures.reason,
     })
     .from(inspections)
     .innerJoin(memberships, eq(memberships.id, inspections.byMemberId))
     .innerJoin(users, eq(users.id, memberships.userId))
     .leftJoin(closures, eq(closures.id, inspections.closureId));
 
-const flat = (row: Awaited<ReturnType<typeof select>>[number]): InspectionDetail => ({
-  ...row.inspection,
-  byName: row.byName,
-  closureOpen: row.closureId !== null && row.removedAt === null && row.toDay === null,
-});
+function flat(row: Awaited<ReturnType<typeof select>>[number]): InspectionDetail {
+  const { inspection, byName, closureReason } = row;
+  const closureOpen = row.closureId !== null && row.removedAt === null && row.toDay === null;
+  const closedByIt = closureOpen && row.closedAt === inspection.createdAt;
+  return { ...inspection, byName, closureOpen, closedByIt, closureReason };
+}
 
 const latestFirst = [desc(inspections.day), desc(inspections.createdAt), sql`${inspections}.rowid desc`];
 

@@ -1,27 +1,18 @@
 import { huntingYear } from '@/core/booking/hunting-year';
 import { dayOf, formatClock, formatDay } from '@/core/day-time';
 import { can } from '@/core/permissions';
-import {
-  type DueState,
-  dueState,
-  type InspectionResult,
-  itemsFor,
-  type StrapDue,
-  strapDue,
-  usualNextDue,
-} from '@/core/upkeep/inspection';
+import { type DueState, dueState } from '@/core/upkeep/inspection';
 import { spanText } from '@/features/bookings/sit-words';
 import { numberText } from '@/features/clubs/read-number';
 import { degreesText } from '@/features/ground/place-text';
-import { getStand, listStands, type StandRow } from '@/features/ground/stands-data';
+import { listStands } from '@/features/ground/stands-data';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import type { ChangeChoreForm } from './chore-schema';
 import { type ChoreDetail, findChore, listDoneChores, listOpenChores, listPeople, sumHours } from './chores-data';
-import type { InspectionForm } from './inspection-schema';
-import { type InspectionDetail, lastInspections, listInspectionsOf } from './inspections-data';
+import { lastInspections } from './inspections-data';
+import { type UpkeepLine, upkeepLine } from './upkeep-reads';
 import { CHORE_LIST_WORDS } from './words/chores';
-import { ANSWER_WORDS, ITEM_WORDS, RESULT_WORDS, STRAP_WORDS, UPKEEP_TABLE_WORDS as TABLE } from './words/inspections';
 import type { ChangeWorkDayForm } from './work-day-schema';
 import { findWorkDay, listComing, listPastWorkDays, listWorkDays, type WorkDayRow } from './work-days-data';
 
@@ -54,18 +45,6 @@ export interface WorkDayLine {
   comes: boolean;
   over: boolean;
   hours: number;
-}
-
-export interface UpkeepLine {
-  standId: string;
-  name: string;
-  result: InspectionResult | null;
-  resultText: string;
-  lastText: string;
-  nextText: string;
-  nextState: DueState;
-  strapText: string;
-  strapState: DueState;
 }
 
 export interface ChoresScreen {
@@ -110,33 +89,6 @@ function workDayLine(scope: ClubScope, row: WorkDayRow, all: Coming, now: number
     comes: coming.some(({ memberId }) => memberId === scope.member.id),
     over: row.endAt <= now,
     hours: coming.reduce((sum, { hours }) => sum + (hours ?? 0), 0),
-  };
-}
-
-/** By whose reckoning a strap is good so long. */
-export function strapReason(due: StrapDue): string {
-  return due.by === 'maker' ? STRAP_WORDS.byMaker(numberText(due.years)) : STRAP_WORDS.usual;
-}
-
-function strapText(due: StrapDue | null, today: string): string {
-  if (!due) return STRAP_WORDS.noDate;
-  const say = dueState(due.lastDay, today) === 'over' ? STRAP_WORDS.over : STRAP_WORDS.good;
-  return say(formatDay(due.lastDay, true), strapReason(due));
-}
-
-export function upkeepLine(stand: StandRow, last: InspectionDetail | undefined, today: string): UpkeepLine {
-  const strap = last ? strapDue({ fittedOn: last.strapFittedOn, makerYears: last.strapYears }) : null;
-  const hasStrap = itemsFor(stand.kind).includes('straps');
-  return {
-    standId: stand.id,
-    name: stand.name,
-    result: last?.result ?? null,
-    resultText: last ? RESULT_WORDS[last.result] : TABLE.never,
-    lastText: last ? TABLE.lastBy(formatDay(last.day, true), last.byName) : '–',
-    nextText: last ? formatDay(last.nextDueOn, true) : TABLE.now,
-    nextState: last ? dueState(last.nextDueOn, today) : 'over',
-    strapText: hasStrap ? strapText(strap, today) : TABLE.noStrap,
-    strapState: hasStrap && strap ? dueState(strap.lastDay, today) : 'fine',
   };
 }
 
@@ -199,60 +151,6 @@ export async function readChoreForm(
 export async function listWorkers(scope: ClubScope): Promise<{ value: string; label: string }[]> {
   const people = await listPeople(scope);
   return people.filter(({ role }) => can(role, 'chores.read')).map(({ id, name }) => ({ value: id, label: name }));
-}
-
-export interface InspectionView {
-  id: string;
-  dayText: string;
-  byName: string;
-  result: InspectionResult;
-  resultText: string;
-  notes: string;
-  closureOpen: boolean;
-  /** What was not good. */
-  found: { label: string; answer: string }[];
-}
-
-export interface StandUpkeep {
-  line: UpkeepLine;
-  history: InspectionView[];
-  form: InspectionForm;
-}
-
-export async function readStandUpkeep(scope: ClubScope, standId: string, now: number): Promise<StandUpkeep> {
-  const stand = await getStand(scope, standId);
-  if (!stand) throw notFound();
-  const today = dayOf(now, scope.club.zone);
-  const rows = await listInspectionsOf(scope, standId);
-  const last = rows[0];
-  return {
-    line: upkeepLine(stand, last, today),
-    history: rows.map((row) => ({
-      id: row.id,
-      dayText: formatDay(row.day, true),
-      byName: row.byName,
-      result: row.result,
-      resultText: RESULT_WORDS[row.result],
-      notes: row.notes,
-      closureOpen: row.closureOpen,
-      found: itemsFor(stand.kind).flatMap((item) => {
-        const answer = row.answers[item];
-        if (answer !== 'fix' && answer !== 'unsafe') return [];
-        return [{ label: ITEM_WORDS[item].label, answer: ANSWER_WORDS[answer] }];
-      }),
-    })),
-    form: {
-      standId,
-      kind: stand.kind,
-      day: today,
-      answers: {},
-      result: '',
-      notes: '',
-      strapFittedOn: last?.strapFittedOn ?? '',
-      strapYears: numberText(last?.strapYears ?? null),
-      nextDueOn: usualNextDue(today),
-    },
-  };
 }
 
 export interface WorkDayScreen {

@@ -11,7 +11,7 @@ import { queueMail } from '@/server/outbox';
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { listOpenChores, listPeople } from './chores-data';
 import { lastInspections } from './inspections-data';
-import { strapReason } from './reads';
+import { strapReason } from './upkeep-reads';
 import { UPKEEP_MAIL } from './words/chores';
 
 /** Hours of the club's clock in which a reminder may arrive. */

@@ -3,13 +3,14 @@ import { itemsFor } from '@/core/upkeep/inspection';
 import { write } from '@/db/client';
 import { closeGroundIn } from '@/features/ground/close-ground';
 import { listClosuresFrom } from '@/features/ground/closures-data';
+import { openAgainIn } from '@/features/ground/open-again';
 import { getStand } from '@/features/ground/stands-data';
 import { newId } from '@/lib/ids';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { mailClosed } from './closed-mails';
 import type { InspectionInput } from './inspection-schema';
-import { insertInspection } from './inspections-data';
+import { insertInspection, listInspectionsOf } from './inspections-data';
 import { noteUpkeep } from './note-upkeep';
 import { addChoreIn } from './save-chore';
 import { INSPECTION_ERRORS, INSPECTION_LEAVES } from './words/inspections';
@@ -24,15 +25,21 @@ export interface SavedInspection {
   told: number;
   /** A chore was made to mend it. */
   chore: boolean;
+  /** What an inspection had closed was opened again. */
+  opened: boolean;
 }
 
 const firstLine = (text: string) => text.split('\n')[0]?.replace(/\.+$/, '').slice(0, REASON_MAX) ?? '';
 
 /**
- * Keeps an inspection. Closed shuts the stand at once and tells those booked there; fix first and closed make a chore. All
- * of it is one change.
+ * Keeps an inspection. Closed shuts the stand at once and tells those booked there; fix first and closed make a chore; a
+ * pass opens what an earlier inspection closed, where that is asked for. All of it is one change.
  */
-export async function saveInspection(scope: ClubScope, input: InspectionInput, now: number): Promise<SavedInspection> {
+export async function saveInspection(
+  scope: ClubScope,
+  { reopen, ...input }: InspectionInput,
+  now: number,
+): Promise<SavedInspection> {
   const today = dayOf(now, scope.club.zone);
   if (input.day > today || input.day < addDays(today, -366)) {
     const message = input.day > today ? INSPECTION_ERRORS.toCome : INSPECTION_ERRORS.old;
@@ -56,6 +63,8 @@ export async function saveInspection(scope: ClubScope, input: InspectionInput, n
       closureId = open?.id ?? (await closeGroundIn(tx, scope, values, stand.name, now)).id;
       told = await mailClosed(tx, scope, { stand, reason, closureId, day: today }, now);
     }
+    const closing = reopen ? (await listInspectionsOf(scope, stand.id, tx)).find((one) => one.closedByIt) : undefined;
+    if (closing?.closureId) await openAgainIn(tx, scope, closing.closureId, now);
     await insertInspection(tx, {
       ...input,
       id,
@@ -72,8 +81,9 @@ export async function saveInspection(scope: ClubScope, input: InspectionInput, n
       await addChoreIn(tx, scope, { title, notes: input.notes, assigneeId: null, place, dueOn }, now);
     }
     const summary = INSPECTION_LEAVES.audit(stand.name, input.result, reason);
-    const detail = { result: input.result, answers: input.answers, closureId };
+    const opened = closing?.closureId ?? null;
+    const detail = { result: input.result, answers: input.answers, closureId, opened };
     await noteUpkeep(scope, tx, { subject: 'inspection', verb: 'added', id, summary, detail }, now);
-    return { standName: stand.name, told, chore };
+    return { standName: stand.name, told, chore, opened: opened !== null };
   });
 }

@@ -2,7 +2,7 @@ import type { DueState } from '@/core/upkeep/inspection';
 import { TextLink } from '@/ui/button';
 import { Badge } from '@/ui/page-parts';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
-import type { UpkeepLine } from '../reads';
+import type { UpkeepLine } from '../upkeep-reads';
 import { UPKEEP_TABLE_WORDS } from '../words/inspections';
 
 const words = UPKEEP_TABLE_WORDS;

@@ -53,6 +53,9 @@ export const INSPECTION_FORM_WORDS = {
   saved: (stand: string) => `${stand} inspected`,
   told: (sits: number) => `${sits} booked ${sits === 1 ? 'sit' : 'sits'}: members told by mail.`,
   chore: 'A chore was made to mend it.',
+  reopen: 'Open the stand again',
+  reopenHint: (day: string, reason: string) => `Closed by the inspection of ${day}. ${reason}.`,
+  opened: 'The stand is open again.',
 } as const;
 
 export const UPKEEP_TABLE_WORDS = {
@@ -85,6 +88,7 @@ export const STAND_UPKEEP_WORDS = {
   stand: 'The stand',
   closed: 'Closed by an inspection',
   closedText: 'It stays closed until a steward opens it again under Closed days.',
+  passedText: 'It has passed since. It stays closed until it is opened again.',
   last: 'Last result',
   next: 'Next look due',
   strap: 'Main strap',

@@ -1,10 +1,12 @@
-import { readStandUpkeep } from '@/features/chores/reads';
+import { readStandUpkeep } from '@/features/chores/upkeep-reads';
 import { STAND_UPKEEP_WORDS } from '@/features/chores/words/inspections';
+import { OpenAgainButton } from '@/features/ground/components/open-again-button';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { Badge, DefinitionList, PageTitle, Section } from '@/ui/page-parts';
+import { openAgainAction } from '../../../closures/actions';
 
 const words = STAND_UPKEEP_WORDS;
 
@@ -14,7 +16,8 @@ const LOOKS = { pass: 'moss', fix_first: 'plain', closed: 'clay' } as const;
 
 export default clubPage('chores.read', async ({ scope, params }) => {
   const { slug, name } = scope.club;
-  const { line, history } = await readStandUpkeep(scope, params.stand ?? '', now());
+  const { line, history, closed, closedBy } = await readStandUpkeep(scope, params.stand ?? '', now());
+  const passed = line.result === 'pass' && closedBy;
   const inspect = scope.can('inspections.write') && (
     <ButtonLink look="primary" href={`/clubs/${slug}/chores/stands/${line.standId}/inspect`}>
       {words.inspect}
@@ -34,9 +37,19 @@ export default clubPage('chores.read', async ({ scope, params }) => {
           </>
         }
       />
-      {history.some((one) => one.closureOpen) && (
-        <Notice level="stop" title={words.closed} className="mb-6">
-          {words.closedText}
+      {closed && (
+        <Notice
+          level="stop"
+          title={words.closed}
+          className="mb-6"
+          actions={
+            passed &&
+            scope.can('stands.write') && (
+              <OpenAgainButton club={slug} id={closedBy.closureId} what={line.name} openAgain={openAgainAction} />
+            )
+          }
+        >
+          {passed ? words.passedText : words.closedText}
         </Notice>
       )}
       <DefinitionList
