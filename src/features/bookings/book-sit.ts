@@ -6,6 +6,7 @@ import type { ClubScope } from '@/server/scope';
 import { checkSit, refuseIfAny } from './check-sit';
 import { claimWindows } from './claim-windows';
 import { findSit, findSitByRequest, insertSit, type SitDetail } from './data';
+import { queueGuestMails } from './guest-mails';
 import { queueSitMail } from './sit-mails';
 import type { BookSitInput } from './sit-schema';
 import { dayAndWindow, windowsHeld } from './sit-words';
@@ -64,6 +65,7 @@ export async function placeSitIn(tx: Tx, scope: ClubScope, input: BookSitInput, 
   const sit = await findSit(scope, row.id, tx);
   if (!sit) throw new AppError('internal', SIT_ERRORS.notSaved, { log: `no row for ${row.id}` });
   await queueSitMail(tx, scope, 'booked', sit, now);
+  await queueGuestMails(tx, scope, 'booked', sit, null, now);
   return sit;
 }
 

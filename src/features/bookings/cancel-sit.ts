@@ -3,6 +3,7 @@ import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { deleteClaims, findSigning, findSit, type SitDetail, updateSit } from './data';
+import { queueGuestMails } from './guest-mails';
 import { queueSitMail } from './sit-mails';
 import type { CancelSitInput } from './sit-schema';
 import { clockText, dayAndWindow } from './sit-words';
@@ -41,6 +42,7 @@ export async function cancelSitIn(
   );
   const after = { ...sit, ...set };
   await queueSitMail(tx, scope, 'cancelled', after, now);
+  await queueGuestMails(tx, scope, 'cancelled', after, null, now);
   return after;
 }
 

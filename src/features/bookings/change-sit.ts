@@ -7,6 +7,7 @@ import { refuseIfSigned } from './cancel-sit';
 import { checkSit, refuseIfAny } from './check-sit';
 import { claimWindows } from './claim-windows';
 import { deleteClaims, findSit, type SitDetail, updateSit } from './data';
+import { queueGuestMails } from './guest-mails';
 import { queueSitMail } from './sit-mails';
 import type { ChangeSitInput } from './sit-schema';
 import { clockText, dayAndWindow, windowsHeld } from './sit-words';
@@ -77,6 +78,7 @@ export async function changeSit(scope: ClubScope, input: ChangeSitInput, now: nu
     const after = await findSit(scope, sit.id, tx);
     if (!after) throw notFound();
     await queueSitMail(tx, scope, 'changed', after, now);
+    await queueGuestMails(tx, scope, 'changed', after, sit, now);
     return after;
   });
 }

@@ -1,4 +1,5 @@
 import { weaponWord } from '@/core/booking/seasons';
+import type { Units } from '@/core/units';
 import type { Tx } from '@/db/client';
 import { env } from '@/env';
 import { composeMail } from '@/features/mail/compose';
@@ -25,11 +26,12 @@ function opening(scope: ClubScope, kind: SitMail, sit: SitDetail): string {
 }
 
 /** Whoever reads the mail has units of their own, which whoever caused it need not share. */
-const readersClub = ({ club }: ClubScope, sit: SitDetail) => ({ ...club, units: sit.memberUnits ?? club.clubUnits });
+export const readersClub = ({ club }: ClubScope, units: Units | null) => ({ ...club, units: units ?? club.clubUnits });
 
-function facts(scope: ClubScope, sit: SitDetail): { label: string; value: string }[] {
+/** What a mail of a sit says of it, whoever reads it. */
+export function sitFacts(scope: ClubScope, sit: SitDetail, units: Units | null): { label: string; value: string }[] {
   const way = wayInText(sit);
-  const span = spanText(sit.startAt, sit.endAt, readersClub(scope, sit));
+  const span = spanText(sit.startAt, sit.endAt, readersClub(scope, units));
   return [
     { label: SIT_MAIL_WORDS.stand, value: sit.standName },
     { label: SIT_MAIL_WORDS.when, value: dayAndWindow(sit.day, sit.windows, true) },
@@ -39,8 +41,16 @@ function facts(scope: ClubScope, sit: SitDetail): { label: string; value: string
     ...(sit.guests.length === 0
       ? []
       : [{ label: SIT_MAIL_WORDS.guests, value: sit.guests.map((guest) => guest.name).join(', ') }]),
-    ...(sit.note === '' ? [] : [{ label: SIT_MAIL_WORDS.note, value: sit.note }]),
   ];
+}
+
+/** The entry for the calendar of whoever is told: taken out of it where the sit no longer stands for them. */
+export function sitEntry(scope: ClubScope, sit: SitDetail, attendee: { name: string; email: string }) {
+  const { club } = scope;
+  const method = sit.status === 'booked' ? ('REQUEST' as const) : ('CANCEL' as const);
+  const organizer = { name: club.name, email: senderAddress() };
+  const entries = [{ sit, shown: fullEntry(sit, club, false), organizer, attendee }];
+  return { method, content: sitCalendar({ name: club.name, method, entries }) };
 }
 
 /** Tells the member whose sit it is, with an entry for the calendar. */
@@ -53,13 +63,13 @@ export async function queueSitMail(
 ): Promise<void> {
   const { club } = scope;
   const to = { email: sit.memberEmail, name: sit.memberName };
-  const method = sit.status === 'booked' ? 'REQUEST' : 'CANCEL';
-  const organizer = { name: club.name, email: senderAddress() };
-  const shown = fullEntry(sit, club, false);
   const { text, html } = composeMail({
     clubName: club.name,
     paragraphs: [opening(scope, kind, sit)],
-    facts: facts(scope, sit),
+    facts: [
+      ...sitFacts(scope, sit, sit.memberUnits),
+      ...(sit.note === '' ? [] : [{ label: SIT_MAIL_WORDS.note, value: sit.note }]),
+    ],
     button: { label: SIT_MAIL_WORDS.button, url: `${env.appUrl}/clubs/${club.slug}/my-sits` },
     footer: SIT_MAIL_WORDS.footer,
   });
@@ -73,10 +83,7 @@ export async function queueSitMail(
       subject: SIT_MAIL_WORDS.subjects[kind](sit.standName, dayAndWindow(sit.day, sit.windows)),
       text,
       html,
-      calendar: {
-        method,
-        content: sitCalendar({ name: club.name, method, entries: [{ sit, shown, organizer, attendee: to }] }),
-      },
+      calendar: sitEntry(scope, sit, to),
     },
     now,
   );

@@ -3,6 +3,7 @@ import { lapsesAt } from '@/core/outing/board-state';
 import { write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';
 import { deleteClaims, findSit, updateSit } from '@/features/bookings/data';
+import { queueGuestMails } from '@/features/bookings/guest-mails';
 import { queueSitMail } from '@/features/bookings/sit-mails';
 import { dayAndWindow } from '@/features/bookings/sit-words';
 import { audit } from '@/server/audit';
@@ -34,6 +35,7 @@ async function lapseSit(scope: ClubScope, sitId: string, now: number): Promise<b
       now,
     );
     await queueSitMail(tx, scope, 'lapsed', { ...sit, ...set }, now);
+    await queueGuestMails(tx, scope, 'lapsed', { ...sit, ...set }, null, now);
     return true;
   });
 }

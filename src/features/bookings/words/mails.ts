@@ -23,3 +23,39 @@ export const SIT_MAIL_WORDS = {
   button: 'Open my sits',
   footer: 'You get this because the sit is yours.',
 } as const;
+
+interface GuestSit {
+  by: string;
+  host: string;
+  stand: string;
+}
+
+/** To a guest with an account, of the sit of the member who takes them along. */
+export const GUEST_MAIL_WORDS = {
+  subjects: {
+    booked: (stand: string, when: string) => `You come along: ${stand}, ${when}`,
+    changed: (stand: string, when: string) => `Sit changed: ${stand}, ${when}`,
+    cancelled: (stand: string, when: string) => `Sit cancelled: ${stand}, ${when}`,
+    lapsed: (stand: string, when: string) => `Sit lapsed: ${stand}, ${when}`,
+    left_out: (stand: string, when: string) => `You are off the sit: ${stand}, ${when}`,
+  },
+  booked: ({ by, host, stand }: GuestSit) =>
+    by === host
+      ? `${host} takes you along to ${stand} as a guest.`
+      : `${by} booked ${stand} for ${host}, with you as a guest.`,
+  changed: ({ by, host }: GuestSit) =>
+    by === host
+      ? `${host} changed the sit you come along on. This is how it stands now.`
+      : `${by} changed the sit of ${host} you come along on. This is how it stands now.`,
+  cancelled: ({ by, host, stand }: GuestSit, reason: string | null) =>
+    `${by === host ? `${host} cancelled the sit` : `${by} cancelled the sit of ${host}`} at ${stand} you were to come along on.${reason ? ` The reason given: ${reason}` : ''}`,
+  lapsed: ({ host, stand }: GuestSit, minutes: number) =>
+    `The sit of ${host} at ${stand} has lapsed: nobody signed in within ${minutes} minutes. You are not expected there.`,
+  left_out: ({ by, host, stand }: GuestSit) =>
+    by === host
+      ? `${host} goes to ${stand} without you: you are no longer a guest of that sit.`
+      : `${by} took you off the sit of ${host} at ${stand}.`,
+  host: 'Host',
+  button: 'Open the board',
+  footer: (host: string) => `You get this because ${host} named you as a guest.`,
+} as const;

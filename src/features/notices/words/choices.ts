@@ -36,7 +36,7 @@ export const NOTICES_PAGE_WORDS = {
   lead: (club: string, email: string) => `What ${club} mails you, and when. It goes to ${email}.`,
   always: 'What always comes',
   alwaysText:
-    'Your own bookings, changes and cancellations, a stand closed under a sit of yours, and everything about being overdue. These do not wait for quiet hours.',
+    'Your own bookings, changes and cancellations, those of sits you are a guest of, days or a stand closed under a sit of yours, and everything about being overdue. These do not wait for quiet hours.',
 } as const;
 
 export const CHOICES_FORM_WORDS = {
