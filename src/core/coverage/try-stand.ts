@@ -12,6 +12,8 @@ export interface TrialGain {
   /** What stands cover already, and what the trial would add to it. */
   covered: number;
   added: number;
+  /** Compass points 0-15 of which the trial has some hour. */
+  winds: ReadonlySet<number>;
   /** By compass point, 16 from N clockwise. */
   points: { share: number; covered: number; added: number }[];
   /** Only months with such hours, in order of the season from July. */
@@ -47,6 +49,7 @@ export function tryStand(
     return [
       {
         window,
+        winds: new Set(own.filter((_, i) => isIn[i]).map(({ fromDeg }) => sectorOf(fromDeg))),
         hours: isIn.filter(Boolean).length,
         alone,
         covered: own.filter(({ covered }) => covered).length / own.length,

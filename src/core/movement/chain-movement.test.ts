@@ -51,6 +51,15 @@ describe('lines of movement', () => {
     ]);
   });
 
+  it('take what lies at one place of a line as one stop', () => {
+    const ford = makeFeature('Ford', 'crossing', point(205, -5));
+    expect(chain({ features: [...FEATURES, ford] })[0]?.stops.map((s) => s.name)).toEqual([
+      'Beds',
+      'Scrape and Ford',
+      'Plot',
+    ]);
+  });
+
   it('hold the ground of each leg and gap, and where a stand reaches a leg', () => {
     const [found] = chain();
     const rounded = (points: { eastM: number; northM: number }[] = []) =>

@@ -63,6 +63,7 @@ export interface MovementLine {
 const FOOD: ReadonlySet<FeatureKind> = new Set(['food_plot', 'crop', 'mast']);
 const BEDS: ReadonlySet<FeatureKind> = new Set(['bedding', 'sanctuary']);
 const STEP_M = 5;
+const SAME_PLACE_M = 15;
 
 interface Station {
   p: Point;
@@ -145,6 +146,18 @@ function gapsOf(line: Point[], stations: Station[], stops: Stop[], input: Moveme
   return gaps;
 }
 
+/** Stops at one place of a line count as one: a ford lies in its creek. */
+function joinStops(stops: Stop[]): Stop[] {
+  const joined: Stop[] = [];
+  for (const stop of stops) {
+    const last = joined.at(-1);
+    if (last && stop.alongM - last.alongM < SAME_PLACE_M) {
+      joined[joined.length - 1] = { ...last, name: `${last.name} and ${stop.name}` };
+    } else joined.push(stop);
+  }
+  return joined;
+}
+
 const mean = (list: number[]) => list.reduce((a, b) => a + b, 0) / list.length;
 
 function wayOf(stops: Stop[], length: number): MovementLine['way'] {
@@ -170,7 +183,8 @@ export function chainMovement(input: MovementInput): MovementLine[] {
       if (line.shape.type !== 'line' || line.shape.points.length < 2) return [];
       const { points } = line.shape;
       const stations = stationsOf(points);
-      const stops = stopsOf(line, stations, input);
+      const all = stopsOf(line, stations, input);
+      const stops = joinStops(all);
       const legs = stops.slice(1).map((to, i): Leg => {
         const from = stops[i] as Stop;
         const stretch = stations.filter((s) => s.alongM >= from.alongM && s.alongM <= to.alongM);
@@ -186,7 +200,7 @@ export function chainMovement(input: MovementInput): MovementLine[] {
       const gaps = gapsOf(points, stations, stops, input);
       const { id, name } = line;
       const uses = usesOf(line, input.month, input.scoring.whereabouts);
-      return [{ id, name, lengthM: length, stops, legs, gaps, way: wayOf(stops, length), uses }];
+      return [{ id, name, lengthM: length, stops, legs, gaps, way: wayOf(all, length), uses }];
     })
     .sort((a, b) => a.name.localeCompare(b.name));
 }

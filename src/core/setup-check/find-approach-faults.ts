@@ -40,6 +40,8 @@ interface WayFaults {
   stand: ScoredStand;
   crossings: Crossing[];
   beds: Windward[];
+  /** Beds in reach of the walk, whatever the wind. */
+  near: ScoredFeature[];
 }
 
 /** Whether deer come along a line, in a window the stand is hunted in, often enough that a track across it matters. */
@@ -149,10 +151,11 @@ function tell(group: WayFaults[], input: SetupInput): Finding {
       approachFacts(w.approach),
       standFacts(w.stand),
       w.crossings.map(({ line }) => featureFacts(line)),
-      w.beds.map(({ bed }) => featureFacts(bed)),
+      w.near.map(featureFacts),
     ]),
   );
-  return { ...found, key: `${found.code}:${group.map((w) => w.approach.id).join(':')}` };
+  // Neither key nor print may hang on the season's winds: an answer holds until the ground changes.
+  return { ...found, key: `way:${group.map((w) => w.approach.id).join(':')}` };
 }
 
 function isSamePlace(a: WayFaults, b: WayFaults, withinM: number): boolean {
@@ -171,7 +174,10 @@ export function findApproachFaults(input: SetupInput): Finding[] {
     const path = footPath(approach, 0);
     const beds = input.features.filter(isBed).flatMap((bed) => windward(stand, path, bed, input));
     const crossings = crossingsOf(approach, stand, input);
-    return beds.length + crossings.length > 0 ? [{ approach, stand, crossings, beds }] : [];
+    const near = input.features.filter(
+      (f) => isBed(f) && path.some((p) => distanceToShapeM(p, f.shape) <= input.settings.bedsWithinM),
+    );
+    return beds.length + crossings.length > 0 ? [{ approach, stand, crossings, beds, near }] : [];
   });
   const far = ({ stand, crossings }: WayFaults) => distanceM(stand.at, crossings[0]?.at ?? stand.at);
   const left = faults.sort((a, b) => far(a) - far(b) || a.approach.id.localeCompare(b.approach.id));

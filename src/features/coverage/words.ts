@@ -32,6 +32,7 @@ export const COVERAGE_WORDS = {
     `${hours} hours. ${covered} of the wind is covered. Calm or variable for ${calm} of the hours: no arc covers those.`,
   byPoint: (window: WindowName) => `${WINDOW_TITLES[window]} by compass point`,
   byMonth: (window: WindowName) => `${WINDOW_TITLES[window]} by month`,
+  openMonths: 'By month',
   month: 'Month',
   hours: 'Hours',
   covered: 'Covered',
@@ -79,6 +80,7 @@ export const TRIAL_WORDS = {
   seatLooking: 'Looking at its seat…',
   seatFailed: 'Its seat could not be looked at.',
   tryAgain: 'Try again',
+  withTrial: (window: WindowName) => `${WINDOW_TITLES[window]} with the trial`,
   addsByMonth: 'What the trial adds, by month',
   month: 'Month',
 } as const;

@@ -119,7 +119,7 @@ export const HILL_STANDS: readonly DemoStand[] = [
     shotRangeM: CLOSE,
     shelter: 'dense_wood',
     seats: 1,
-    arcs: [good(40, 165)],
+    arcs: [good(45, 95)],
     morning: 'usable',
     evening: 'usable',
     drain: { bearingDeg: 195, slopePercent: 24 },

@@ -34,7 +34,8 @@ export interface LineView {
   way: string | null;
   /** 1: along the line as it is drawn, in the morning; -1: against it; null: not known. Evenings are the other way. */
   morning: 1 | -1 | null;
-  times: { time: TimeOfDay; name: string; way: string; percent: number }[];
+  /** Which way deer go at what time of day, and how often they are on it. */
+  times: string[];
   legs: LegView[];
   gaps: { text: string; path: Position[] }[];
 }
@@ -68,20 +69,23 @@ function endsOf({ way, stops }: MovementLine): { from: Stop; to: Stop } | null {
 }
 
 /** At first light and in the morning to the beds, in the afternoon and at last light to the food; between, either way. */
-const TOWARD: Partial<Record<TimeOfDay, 'from' | 'to'>> = {
-  dawn: 'to',
-  morning: 'to',
-  afternoon: 'from',
-  dusk: 'from',
-};
+const TIMES_TO: TimeOfDay[] = ['dawn', 'morning'];
+const TIMES_FROM: TimeOfDay[] = ['afternoon', 'dusk'];
 
-function timesOf(line: MovementLine): LineView['times'] {
+/** Deer's way by time of day with how often they are on the line. */
+function timesOf(line: MovementLine): string[] {
+  const at = (times: readonly TimeOfDay[]) =>
+    times.map((time) =>
+      TIME_WORDS.at(TIME_WORDS.names[time], Math.round((line.uses[TIMES_OF_DAY.indexOf(time)] ?? 0) * 100)),
+    );
   const ends = endsOf(line);
-  return TIMES_OF_DAY.map((time, i) => {
-    const toward = TOWARD[time];
-    const way = ends && toward ? TIME_WORDS.to(ends[toward].name) : TIME_WORDS.either;
-    return { time, name: TIME_WORDS.names[time], way, percent: Math.round((line.uses[i] ?? 0) * 100) };
-  });
+  if (!ends) return [TIME_WORDS.either(at(TIMES_OF_DAY))];
+  const rest = TIMES_OF_DAY.filter((time) => !TIMES_TO.includes(time) && !TIMES_FROM.includes(time));
+  return [
+    TIME_WORDS.toward(ends.to.name, at(TIMES_TO)),
+    TIME_WORDS.toward(ends.from.name, at(TIMES_FROM)),
+    TIME_WORDS.either(at(rest)),
+  ];
 }
 
 function lineView(line: MovementLine, { club }: ClubScope, firstLeg: number): LineView {

@@ -39,12 +39,10 @@ const TIMES: Record<TimeOfDay, string> = {
 
 export const TIME_WORDS = {
   names: TIMES,
-  caption: (line: string) => `Deer on ${line} by time of day`,
-  time: 'Time',
-  way: 'Which way',
-  chance: 'Chance',
-  to: (place: string) => `to ${place}`,
-  either: 'either way',
+  title: 'Deer by time of day',
+  at: (time: string, percent: number) => `${time} ${percent} %`,
+  toward: (place: string, times: string[]) => `To ${place}: ${times.join(', ')}`,
+  either: (times: string[]) => `Either way: ${times.join(', ')}`,
 } as const;
 
 export const MOVEMENT_MAP_WORDS = {

@@ -22,10 +22,12 @@ export function TrialResults({ gains }: { gains: readonly TrialGain[] }) {
     <>
       <div className="grid gap-x-10 gap-y-6 lg:grid-cols-2">
         {gains.map((gain) => (
-          <Section key={gain.window} level={3} title={WINDOW_TITLES[gain.window]} className="mt-0">
+          <Section key={gain.window} level={3} title={W.withTrial(gain.window)} className="mt-0">
             <PointBars
               trial
-              points={gain.points.map((point, i) => ({ name: SECTOR_NAMES[i] ?? '', ...point }))}
+              points={gain.points
+                .map((point, i) => ({ name: SECTOR_NAMES[i] ?? '', ...point }))
+                .filter((_, i) => gain.winds.has(i))}
               label={COVERAGE_WORDS.byPoint(gain.window)}
             />
           </Section>

@@ -73,7 +73,10 @@ export function TrialStand({ club, ask, winds: packed }: TrialStandProps) {
   }, [trial.trial]);
   const at = useMemo(() => readSeat(trial.lat, trial.lon), [trial.lat, trial.lon]);
   const gains = useMemo(
-    () => (arcs.length === 0 ? [] : tryStand(winds, { arcs, suitability: trialSuitability(trial.window) })),
+    () =>
+      arcs.length === 0
+        ? []
+        : tryStand(winds, { arcs, suitability: trialSuitability(trial.window) }).filter(({ hours }) => hours > 0),
     [winds, arcs, trial.window],
   );
   const open = useMemo(() => {

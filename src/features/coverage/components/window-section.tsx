@@ -17,7 +17,8 @@ export function WindowSection({ coverage }: { coverage: WindowCoverage }) {
         </div>
         <PointBars points={points} label={W.byPoint(window)} />
       </Section>
-      <div className="mt-6">
+      <details className="mt-4">
+        <summary className="flex min-h-11 cursor-pointer items-center font-semibold">{W.openMonths}</summary>
         <Table caption={W.byMonth(window)} stack={false}>
           <THead>
             <Th>{W.month}</Th>
@@ -36,7 +37,7 @@ export function WindowSection({ coverage }: { coverage: WindowCoverage }) {
             ))}
           </TBody>
         </Table>
-      </div>
+      </details>
     </div>
   );
 }

@@ -12,36 +12,26 @@ export function LineSection({ club, line }: { club: string; line: LineView }) {
       note={W.lineNote(line.length, line.way)}
       actions={<TextLink href={`/clubs/${club}/ground?select=${line.id}`}>{W.onGround}</TextLink>}
     >
-      <div className="grid gap-x-10 gap-y-5 lg:grid-cols-[minmax(0,1fr)_18rem]">
+      {line.legs.length > 0 && <LegTable club={club} line={line} />}
+      <div className="mt-4 grid gap-x-10 gap-y-3 sm:grid-cols-2">
         <div>
-          {line.legs.length > 0 && <LegTable club={club} line={line} />}
-          {line.gaps.length > 0 && (
-            <div className="mt-3 max-w-prose">
-              <p className="font-semibold">{W.gapsTitle}</p>
-              <ul className="list-disc pl-5">
-                {line.gaps.map(({ text }) => (
-                  <li key={text}>{text}</li>
-                ))}
-              </ul>
-            </div>
-          )}
-        </div>
-        <Table caption={T.caption(line.name)} stack={false}>
-          <THead>
-            <Th>{T.time}</Th>
-            <Th>{T.way}</Th>
-            <Th align="right">{T.chance}</Th>
-          </THead>
-          <TBody>
-            {line.times.map(({ time, name, way, percent }) => (
-              <Tr key={time}>
-                <RowHead>{name}</RowHead>
-                <Td>{way}</Td>
-                <Td align="right">{percent} %</Td>
-              </Tr>
+          <p className="font-semibold">{T.title}</p>
+          <ul className="list-disc pl-5">
+            {line.times.map((text) => (
+              <li key={text}>{text}</li>
             ))}
-          </TBody>
-        </Table>
+          </ul>
+        </div>
+        {line.gaps.length > 0 && (
+          <div>
+            <p className="font-semibold">{W.gapsTitle}</p>
+            <ul className="list-disc pl-5">
+              {line.gaps.map(({ text }) => (
+                <li key={text}>{text}</li>
+              ))}
+            </ul>
+          </div>
+        )}
       </div>
     </Section>
   );

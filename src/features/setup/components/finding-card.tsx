@@ -29,7 +29,6 @@ export function FindingCard(props: FindingCardProps) {
             <span className="flex flex-wrap items-center gap-x-3 gap-y-1 text-sm">
               <Badge>{CODE_WORDS[finding.code]}</Badge>
               {finding.effectShort && <span className="font-semibold tabular-nums">{finding.effectShort}</span>}
-              <span className="text-ink-soft">{finding.evidence}</span>
             </span>
           </span>
           <ChevronDown aria-hidden="true" className="mt-1 size-5 text-ink-soft group-open:rotate-180" />
@@ -37,6 +36,7 @@ export function FindingCard(props: FindingCardProps) {
         <div className="grid gap-3 pb-4 pl-[2.25rem]">
           <p className="max-w-prose">{finding.why}</p>
           {finding.effect && <p className="font-semibold">{finding.effect}</p>}
+          <p className="text-ink-soft text-sm">{W.evidence(finding.evidence)}</p>
           {finding.also.length > 0 && (
             <p className="text-ink-soft text-sm">{W.also(finding.also.map(({ name }) => name).join(', '))}</p>
           )}

@@ -56,7 +56,7 @@ export async function Findings({ scope, now, search, accept, dismiss, reopen }: 
           <EmptyState title={W.nothingFound}>{W.nothingFoundText}</EmptyState>
         ) : (
           <>
-            <form method="get" className="mb-4 flex flex-wrap items-end gap-4">
+            <form method="get" className="mb-4 grid grid-cols-2 items-end gap-3 sm:flex sm:flex-wrap sm:gap-4">
               <Select label={W.filterStand} name="stand" defaultValue={stand} options={stands} />
               <Select label={W.filterKind} name="what" defaultValue={what} options={kinds} />
               <Button type="submit">{W.show}</Button>
@@ -64,12 +64,11 @@ export async function Findings({ scope, now, search, accept, dismiss, reopen }: 
             <FindingsMap club={slug} findings={numbered.map(({ finding }) => ({ at: finding.at }))} />
             {open.length === 0 && <p className="mt-4 text-ink-soft">{W.nothingOfKind}</p>}
             {groups.map((group) => (
-              <Section
-                key={group.stand?.id ?? 'none'}
-                level={3}
-                title={group.stand?.name ?? W.noStand}
-                note={W.group(group.findings.length, group.gain)}
-              >
+              <section key={group.stand?.id ?? 'none'} className="mt-5 border-rule-strong border-t pt-2">
+                <div className="flex flex-wrap items-baseline justify-between gap-x-4">
+                  <h3 className="font-serif text-lg">{group.stand?.name ?? W.noStand}</h3>
+                  <p className="text-ink-soft text-sm">{W.group(group.findings.length, group.gain)}</p>
+                </div>
                 <ol>
                   {group.findings.map(({ finding, number }) => (
                     <FindingCard key={finding.key} {...common} finding={finding} number={number}>
@@ -77,7 +76,7 @@ export async function Findings({ scope, now, search, accept, dismiss, reopen }: 
                     </FindingCard>
                   ))}
                 </ol>
-              </Section>
+              </section>
             ))}
           </>
         )}

@@ -50,7 +50,7 @@ export const SETUP_WORDS = {
   nothingOfKind: 'Nothing of this kind at this stand.',
   noStand: 'Cameras and the rest of the ground',
   group: (count: number, gain: number) =>
-    gain === 0 ? findings(count) : `${findings(count)}; mending the worst gains ${gain}`,
+    gain === 0 ? findings(count) : `${findings(count)}, the worst costs ${gain}`,
   answered: 'Answered',
   answeredNote: 'They come back when the ground they rest on changes.',
   changedOn: { before: 'Stands and features are changed on the ', link: 'ground', after: '.' },
@@ -68,6 +68,7 @@ export const FINDING_WORDS = {
   when: (sector: string, window: SetupEffect['window']) => `${sector} ${window}s`,
   could: 'What could be done',
   also: (names: string) => `It touches ${names} too.`,
+  evidence: (evidence: string) => `Evidence: ${evidence}.`,
   onGround: 'Show on the ground',
   choreBy: (by: string, on: string) => `${by} made a chore of it, ${on}.`,
   leftBy: (by: string, on: string, reason: string) => `${by} left it, ${on}: ${reason}`,
