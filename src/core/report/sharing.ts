@@ -37,13 +37,3 @@ export function shareOut(sits: readonly CountedSit[]): Sharing {
   const list = [...members.values()].sort((a, b) => b.good - a.good || b.sits - a.sits);
   return { members: list, ofSits: gini(list.map((one) => one.sits)), ofGood: gini(list.map((one) => one.good)) };
 }
-
-/** Whether good sits fell to members much as sits did; the step is our choice. */
-export function sharedAsSits({
-  ofSits,
-  ofGood,
-}: Pick<Sharing, 'ofSits' | 'ofGood'>): 'alike' | 'less_even' | 'more_even' {
-  const apart = (ofGood ?? 0) - (ofSits ?? 0);
-  if (Math.abs(apart) < 0.1) return 'alike';
-  return apart > 0 ? 'less_even' : 'more_even';
-}

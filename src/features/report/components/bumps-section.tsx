@@ -2,11 +2,12 @@ import { figureText, intervalText } from '@/core/indices';
 import type { BumpCount } from '@/core/report/bumps';
 import { RangeChart } from '@/ui/charts/range-chart';
 import { Section } from '@/ui/page-parts';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { BumpsPart } from '../parts/bumps';
 import { BUMPS_WORDS as words } from '../words/bumps';
 import { PART_TITLES } from '../words/page';
 import { CsvLink } from './csv-link';
+import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 export function BumpsSection({ club, report }: PartProps) {
@@ -38,7 +39,7 @@ export function BumpsSection({ club, report }: PartProps) {
         className="mb-6"
       />
       <StandsTable bumps={bumps} />
-      <div className="mt-6 grid gap-x-10 gap-y-6 lg:grid-cols-2">
+      <div className="mt-6 grid items-start gap-x-10 gap-y-6 xl:grid-cols-2">
         {bumps.winds.length > 0 && (
           <CountTable
             caption={words.byWind}
@@ -66,19 +67,13 @@ export function BumpsSection({ club, report }: PartProps) {
 function CountCells({ count }: { count: BumpCount }) {
   return (
     <>
-      <Td label={words.logged} align="right">
-        {count.sits}
-      </Td>
-      <Td label={words.bumped} align="right">
-        {count.bumped}
-      </Td>
-      <Td label={words.clean} align="right">
-        {count.sits - count.bumped}
-      </Td>
-      <Td label={words.share} align="right">
+      <Td align="right">{count.sits}</Td>
+      <Td align="right">{count.bumped}</Td>
+      <Td align="right">{count.sits - count.bumped}</Td>
+      <Td align="right" className="whitespace-nowrap">
         {figureText(count.share, 'percent')}
       </Td>
-      <Td label={words.interval} align="right">
+      <Td align="right" className="whitespace-nowrap">
         {intervalText(count.share, 'percent')}
       </Td>
     </>
@@ -108,25 +103,25 @@ function CountTable({
   rows: { name: string; count: BumpCount }[];
 }) {
   return (
-    <Table caption={caption}>
+    <FigureTable caption={caption}>
       <THead>
         <CountHeads head={head} />
       </THead>
       <TBody>
         {rows.map(({ name, count }) => (
           <Tr key={name}>
-            <RowHead>{name}</RowHead>
+            <FigureHead>{name}</FigureHead>
             <CountCells count={count} />
           </Tr>
         ))}
       </TBody>
-    </Table>
+    </FigureTable>
   );
 }
 
 function StandsTable({ bumps }: { bumps: BumpsPart }) {
   return (
-    <Table caption={words.byStand}>
+    <FigureTable caption={words.byStand}>
       <THead>
         <CountHeads head={words.stand} />
         <Th>{words.winds}</Th>
@@ -134,14 +129,14 @@ function StandsTable({ bumps }: { bumps: BumpsPart }) {
       <TBody>
         {bumps.rows.map(({ standId, name, count, winds }) => (
           <Tr key={standId}>
-            <RowHead>{name}</RowHead>
+            <FigureHead>{name}</FigureHead>
             <CountCells count={count} />
-            <Td label={words.winds} className="text-sm">
+            <Td className="text-sm">
               {winds.map(({ wind, count: own }) => words.windLine(wind, own.bumped, own.sits)).join(', ')}
             </Td>
           </Tr>
         ))}
       </TBody>
-    </Table>
+    </FigureTable>
   );
 }

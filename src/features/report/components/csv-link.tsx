@@ -4,8 +4,16 @@ import type { ReportPart } from '../report-schema';
 import { REPORT_PAGE_WORDS as words } from '../words/page';
 import type { PartProps } from './part-props';
 
+interface CsvLinkProps extends PartProps {
+  part: ReportPart;
+  /** What is in the file. */
+  title: string;
+  /** Where two stand together each says what it is of. */
+  named?: boolean;
+}
+
 /** Takes one part out as a file. On paper there is nothing to press. */
-export function CsvLink({ club, report, part, title }: PartProps & { part: ReportPart; title: string }) {
+export function CsvLink({ club, report, part, title, named = false }: CsvLinkProps) {
   return (
     <span className="print:hidden">
       <ButtonLink
@@ -13,7 +21,7 @@ export function CsvLink({ club, report, part, title }: PartProps & { part: Repor
         prefetch={false}
         aria-label={words.csvOf(title)}
       >
-        {words.csv}
+        {named ? words.csvOf(title) : words.csv}
       </ButtonLink>
     </span>
   );

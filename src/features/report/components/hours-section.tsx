@@ -1,11 +1,12 @@
 import { numberText } from '@/features/clubs/read-number';
 import { ButtonLink } from '@/ui/button';
 import { Section } from '@/ui/page-parts';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { HoursPart, HoursRow } from '../parts/hours';
 import { HOURS_WORDS as words } from '../words/hours';
 import { PART_TITLES } from '../words/page';
 import { CsvLink } from './csv-link';
+import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 export function HoursSection({ club, report, hours }: PartProps & { hours: HoursPart }) {
@@ -24,7 +25,7 @@ export function HoursSection({ club, report, hours }: PartProps & { hours: Hours
       note={words.note}
       actions={<CsvLink club={club} report={report} part="hours" title={PART_TITLES.hours} />}
     >
-      <Table caption={words.caption} captionHidden>
+      <FigureTable caption={words.caption}>
         <THead>
           <Th>{words.member}</Th>
           <Th align="right">{words.onDays}</Th>
@@ -37,7 +38,7 @@ export function HoursSection({ club, report, hours }: PartProps & { hours: Hours
             <Line key={row.memberId} row={row} />
           ))}
         </TBody>
-      </Table>
+      </FigureTable>
     </Section>
   );
 }
@@ -45,16 +46,10 @@ export function HoursSection({ club, report, hours }: PartProps & { hours: Hours
 function Line({ row }: { row: HoursRow }) {
   return (
     <Tr>
-      <RowHead>{row.name}</RowHead>
-      <Td label={words.onDays} align="right">
-        {numberText(row.onDays)}
-      </Td>
-      <Td label={words.forChores} align="right">
-        {numberText(row.forChores)}
-      </Td>
-      <Td label={words.total} align="right">
-        {numberText(row.total)}
-      </Td>
+      <FigureHead>{row.name}</FigureHead>
+      <Td align="right">{numberText(row.onDays)}</Td>
+      <Td align="right">{numberText(row.forChores)}</Td>
+      <Td align="right">{numberText(row.total)}</Td>
     </Tr>
   );
 }

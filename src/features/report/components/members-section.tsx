@@ -1,16 +1,17 @@
 import { fairnessWords } from '@/core/draw/fairness';
 import { LEAST_SCORES } from '@/core/report/good-sits';
 import { Section } from '@/ui/page-parts';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { MembersPart } from '../parts/members';
 import { MEMBERS_WORDS, MEMBERS_TABLE_WORDS as words } from '../words/members';
 import { PART_TITLES } from '../words/page';
 import { CsvLink } from './csv-link';
+import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 export function MembersSection({ club, report }: PartProps) {
   const { members } = report;
-  const { atLeast, byStand, ofGood, ofSits, sits, judged, neverSat, rows, all } = members;
+  const { atLeast, byStand, ofGood, ofSits, sits, judged, neverSat, luck, rows, all } = members;
   return (
     <Section
       id="members"
@@ -22,9 +23,10 @@ export function MembersSection({ club, report }: PartProps) {
         <p className="font-semibold">
           {ofGood === null ? MEMBERS_WORDS.noneGood : MEMBERS_WORDS.fair(fairnessWords(ofGood), ofGood, members.sat)}
         </p>
-        {ofGood !== null && ofSits !== null && <p>{MEMBERS_WORDS.as[members.as](ofSits)}</p>}
+        {luck && <p>{MEMBERS_WORDS.luck[luck.as](luck.mean, luck.low, luck.high)}</p>}
         <ul className="list-disc pl-5 text-ink-soft text-sm">
           <li>{MEMBERS_WORDS.counted}</li>
+          {ofSits !== null && <li>{MEMBERS_WORDS.ofSits(ofSits)}</li>}
           {byStand > 0 && <li>{MEMBERS_WORDS.byStand(byStand)}</li>}
           {judged < sits && <li>{MEMBERS_WORDS.notJudged(sits - judged)}</li>}
           {neverSat > 0 && <li>{MEMBERS_WORDS.never(neverSat)}</li>}
@@ -43,7 +45,7 @@ export function MembersSection({ club, report }: PartProps) {
 
 function MembersTable({ members }: { members: MembersPart }) {
   return (
-    <Table caption={words.caption} captionHidden>
+    <FigureTable caption={words.caption}>
       <THead>
         <Th>{words.member}</Th>
         <Th align="right">{words.sits}</Th>
@@ -54,22 +56,14 @@ function MembersTable({ members }: { members: MembersPart }) {
       <TBody>
         {members.rows.map((row) => (
           <Tr key={row.memberId}>
-            <RowHead>{row.name}</RowHead>
-            <Td label={words.sits} align="right">
-              {row.sits}
-            </Td>
-            <Td label={words.good} align="right">
-              {row.good}
-            </Td>
-            <Td label={words.ofOwn} align="right">
-              {row.judged === 0 ? words.none : words.percent(row.good / row.judged)}
-            </Td>
-            <Td label={words.ofAll} align="right">
-              {row.shareOfGood === null ? words.none : words.percent(row.shareOfGood)}
-            </Td>
+            <FigureHead>{row.name}</FigureHead>
+            <Td align="right">{row.sits}</Td>
+            <Td align="right">{row.good}</Td>
+            <Td align="right">{row.judged === 0 ? words.none : words.percent(row.good / row.judged)}</Td>
+            <Td align="right">{row.shareOfGood === null ? words.none : words.percent(row.shareOfGood)}</Td>
           </Tr>
         ))}
       </TBody>
-    </Table>
+    </FigureTable>
   );
 }

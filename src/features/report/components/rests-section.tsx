@@ -1,8 +1,9 @@
 import { Section } from '@/ui/page-parts';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import { PART_TITLES } from '../words/page';
 import { RESTS_WORDS as words } from '../words/rests';
 import { CsvLink } from './csv-link';
+import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 export function RestsSection({ club, report }: PartProps) {
@@ -21,7 +22,7 @@ export function RestsSection({ club, report }: PartProps) {
       note={words.note}
       actions={<CsvLink club={club} report={report} part="rests" title={PART_TITLES.rests} />}
     >
-      <Table caption={words.caption}>
+      <FigureTable caption={words.caption}>
         <THead>
           <Th>{words.stand}</Th>
           <Th align="right">{words.rule}</Th>
@@ -32,25 +33,19 @@ export function RestsSection({ club, report }: PartProps) {
         <TBody>
           {rests.rows.map((row) => (
             <Tr key={row.standId}>
-              <RowHead>{row.name}</RowHead>
-              <Td label={words.rule} align="right">
-                {words.ruleOf(row.restDays)}
-              </Td>
-              <Td label={words.again} align="right">
-                {row.times}
-              </Td>
-              <Td label={words.kept} align="right">
+              <FigureHead>{row.name}</FigureHead>
+              <Td align="right">{words.ruleOf(row.restDays)}</Td>
+              <Td align="right">{row.times}</Td>
+              <Td align="right">
                 <span className={row.kept < row.times ? 'font-semibold' : undefined}>
                   {words.keptOf(row.kept, row.times)}
                 </span>
               </Td>
-              <Td label={words.least} align="right">
-                {row.least === null ? words.never : words.leastOf(row.least)}
-              </Td>
+              <Td align="right">{row.least === null ? words.never : words.leastOf(row.least)}</Td>
             </Tr>
           ))}
         </TBody>
-      </Table>
+      </FigureTable>
       <h3 className="mt-5 mb-1 font-serif text-lg">{words.broken}</h3>
       {rests.broken.length === 0 ? (
         <p>{words.allKept}</p>

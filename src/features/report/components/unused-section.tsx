@@ -7,6 +7,7 @@ import type { PartProps } from './part-props';
 
 export function UnusedSection({ club, report }: PartProps) {
   const { unused } = report;
+  const hasMore = unused.some(({ closedDays, drawnOn }) => closedDays > 0 || drawnOn !== null);
   if (unused.length === 0) {
     return (
       <Section id="unused" title={PART_TITLES.unused} note={words.note}>
@@ -26,7 +27,7 @@ export function UnusedSection({ club, report }: PartProps) {
           <Th>{words.stand}</Th>
           <Th>{words.what}</Th>
           <Th>{words.last}</Th>
-          <Th>{words.why}</Th>
+          {hasMore && <Th>{words.why}</Th>}
         </THead>
         <TBody>
           {unused.map((line) => (
@@ -34,14 +35,12 @@ export function UnusedSection({ club, report }: PartProps) {
               <RowHead>{line.name}</RowHead>
               <Td label={words.what}>{words.whatOf(line.what, line.sits)}</Td>
               <Td label={words.last}>{line.lastDay ? words.lastOf(line.lastDay) : words.noSit}</Td>
-              {line.closedDays > 0 || line.drawnOn ? (
+              {hasMore && (
                 <Td label={words.why}>
                   <span>
                     {line.closedDays > 0 && words.closed(line.closedDays)} {line.drawnOn && words.drawn(line.drawnOn)}
                   </span>
                 </Td>
-              ) : (
-                <Td />
               )}
             </Tr>
           ))}

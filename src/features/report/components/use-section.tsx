@@ -1,9 +1,10 @@
 import { Section } from '@/ui/page-parts';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { UsePart } from '../parts/use';
 import { PART_TITLES } from '../words/page';
 import { USE_WORDS, WEEKS_TABLE_WORDS, USE_TABLE_WORDS as words } from '../words/use';
 import { CsvLink } from './csv-link';
+import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 import { UseStrips } from './use-strips';
 
@@ -16,8 +17,8 @@ export function UseSection({ club, report }: PartProps) {
       note={USE_WORDS.note}
       actions={
         <>
-          <CsvLink club={club} report={report} part="use" title={USE_WORDS.sitsFile} />
-          <CsvLink club={club} report={report} part="pressure" title={USE_WORDS.pressureFile} />
+          <CsvLink club={club} report={report} part="use" title={USE_WORDS.sitsFile} named />
+          <CsvLink club={club} report={report} part="pressure" title={USE_WORDS.pressureFile} named />
         </>
       }
     >
@@ -33,7 +34,7 @@ export function UseSection({ club, report }: PartProps) {
 
 function UseTable({ use }: { use: UsePart }) {
   return (
-    <Table caption={words.caption}>
+    <FigureTable caption={words.caption}>
       <THead>
         <Th>{words.stand}</Th>
         <Th align="right">{words.sits}</Th>
@@ -48,30 +49,18 @@ function UseTable({ use }: { use: UsePart }) {
           const last = row.days.at(-1);
           return (
             <Tr key={row.standId}>
-              <RowHead>{row.gone ? USE_WORDS.gone(row.name) : row.name}</RowHead>
-              <Td label={words.sits} align="right">
-                {row.sits}
-              </Td>
-              <Td label={words.mornings} align="right">
-                {row.mornings}
-              </Td>
-              <Td label={words.evenings} align="right">
-                {row.evenings}
-              </Td>
-              <Td label={words.last} align="right">
-                {last ? words.day(last) : words.none}
-              </Td>
-              <Td label={words.mean} align="right">
-                {row.meanPressure.toFixed(2)}
-              </Td>
-              <Td label={words.peak} align="right">
-                {row.peakDay ? words.peakOn(row.peakPressure.toFixed(2), row.peakDay) : words.none}
-              </Td>
+              <FigureHead>{row.gone ? USE_WORDS.gone(row.name) : row.name}</FigureHead>
+              <Td align="right">{row.sits}</Td>
+              <Td align="right">{row.mornings}</Td>
+              <Td align="right">{row.evenings}</Td>
+              <Td align="right">{last ? words.day(last) : words.none}</Td>
+              <Td align="right">{row.meanPressure.toFixed(2)}</Td>
+              <Td align="right">{row.peakDay ? words.peakOn(row.peakPressure.toFixed(2), row.peakDay) : words.none}</Td>
             </Tr>
           );
         })}
       </TBody>
-    </Table>
+    </FigureTable>
   );
 }
 
@@ -81,35 +70,32 @@ const THICKEST = 6;
 function WeeksTable({ use }: { use: UsePart }) {
   const most = Math.max(1, ...use.rows.flatMap(({ byWeek }) => byWeek));
   return (
-    // biome-ignore lint/a11y/noNoninteractiveTabindex: a box that scrolls must be reached by keyboard
-    <section aria-label={WEEKS_TABLE_WORDS.open} tabIndex={0} className="overflow-x-auto">
-      <Table caption={WEEKS_TABLE_WORDS.caption} stack={false}>
-        <THead>
-          <Th>{WEEKS_TABLE_WORDS.stand}</Th>
-          {use.weeks.map(({ fromDay }) => (
-            <Th key={fromDay} align="right" className="whitespace-nowrap">
-              {WEEKS_TABLE_WORDS.week(fromDay)}
-            </Th>
-          ))}
-        </THead>
-        <TBody>
-          {use.rows.map((row) => (
-            <Tr key={row.standId}>
-              <RowHead className="sticky left-0 min-w-28 bg-paper">{row.name}</RowHead>
-              {row.byWeek.map((sits, week) => (
-                <Td key={use.weeks[week]?.fromDay} align="right">
-                  <span
-                    className={sits === 0 ? 'text-ink-soft' : 'inline-block min-w-5 border-moss border-b font-semibold'}
-                    style={sits === 0 ? undefined : { borderBottomWidth: (THICKEST * sits) / most }}
-                  >
-                    {sits}
-                  </span>
-                </Td>
-              ))}
-            </Tr>
-          ))}
-        </TBody>
-      </Table>
-    </section>
+    <FigureTable caption={WEEKS_TABLE_WORDS.caption}>
+      <THead>
+        <Th>{WEEKS_TABLE_WORDS.stand}</Th>
+        {use.weeks.map(({ fromDay }) => (
+          <Th key={fromDay} align="right" className="whitespace-nowrap">
+            {WEEKS_TABLE_WORDS.week(fromDay)}
+          </Th>
+        ))}
+      </THead>
+      <TBody>
+        {use.rows.map((row) => (
+          <Tr key={row.standId}>
+            <FigureHead>{row.gone ? USE_WORDS.gone(row.name) : row.name}</FigureHead>
+            {row.byWeek.map((sits, week) => (
+              <Td key={use.weeks[week]?.fromDay} align="right">
+                <span
+                  className={sits === 0 ? 'text-ink-soft' : 'inline-block min-w-5 border-moss border-b font-semibold'}
+                  style={sits === 0 ? undefined : { borderBottomWidth: (THICKEST * sits) / most }}
+                >
+                  {sits}
+                </span>
+              </Td>
+            ))}
+          </Tr>
+        ))}
+      </TBody>
+    </FigureTable>
   );
 }

@@ -1,5 +1,6 @@
+import { type ByLot, giniByLot, sharedAs } from '@/core/report/by-lot';
 import { type GoodSits, goodSits } from '@/core/report/good-sits';
-import { type MemberShare, sharedAsSits, shareOut } from '@/core/report/sharing';
+import { type MemberShare, shareOut } from '@/core/report/sharing';
 import { windowsHeld } from '@/features/bookings/sit-words';
 import type { ClubScope } from '@/server/scope';
 import type { ReportRows } from '../load-rows';
@@ -25,7 +26,8 @@ export interface MembersPart {
   neverSat: number;
   ofSits: number | null;
   ofGood: number | null;
-  as: ReturnType<typeof sharedAsSits>;
+  /** The same figure by luck alone, and how it compares; null: nothing to share out. */
+  luck: (ByLot & { as: ReturnType<typeof sharedAs> }) | null;
   /** Officers see all rows, a member only the own one. */
   rows: MemberRow[];
   all: boolean;
@@ -47,6 +49,10 @@ export function readMembers(scope: ClubScope, rows: ReportRows): MembersPart {
     })),
   );
   const sat = new Set(shared.members.map(({ memberId }) => memberId));
+  const lot = giniByLot(
+    shared.members.map(({ judged }) => judged),
+    found.good.size,
+  );
   const all = scope.can('report.read_all');
   const own = scope.member.id;
   return {
@@ -60,7 +66,7 @@ export function readMembers(scope: ClubScope, rows: ReportRows): MembersPart {
     neverSat: rows.hunters.filter((id) => !sat.has(id)).length,
     ofSits: shared.ofSits,
     ofGood: shared.ofGood,
-    as: sharedAsSits(shared),
+    luck: lot && shared.ofGood !== null ? { ...lot, as: sharedAs(shared.ofGood, lot) } : null,
     rows: shared.members
       .filter(({ memberId }) => all || memberId === own)
       .map((share) => ({

@@ -13,5 +13,6 @@ export const HARVEST_WORDS = {
   state: 'State',
   met: 'Met',
   open: 'Open',
-  metBy: (members: number) => `Your own count. Met by ${members === 1 ? '1 member' : `${members} members`}.`,
+  metBy: (members: number) =>
+    `Your own count. ${members === 0 ? 'No member has met it.' : members === 1 ? '1 member has met it.' : `${members} members have met it.`}`,
 } as const;

@@ -1,5 +1,7 @@
 const count = (n: number, one: string, many: string) => `${n} ${n === 1 ? one : many}`;
 
+const range = (low: number, high: number) => `${low.toFixed(2)} to ${high.toFixed(2)}`;
+
 export const MEMBERS_WORDS = {
   byScore: (atLeast: number) =>
     `A good sit is one of the better third by the sit score kept as its window began: ${atLeast.toFixed(0)} or more.`,
@@ -16,16 +18,17 @@ export const MEMBERS_WORDS = {
   counted:
     'A guest’s sit counts on the member who answers for them. A sit shared with a guest is one sit. What was seen, what was shot and sits given up count nothing.',
   fair: (words: string, value: number, members: number) =>
-    `Among the ${count(members, 'member', 'members')} who sat, the good sits are ${words}: Gini ${value.toFixed(2)}, where 0 is the same number for each and 1 all of them for one.`,
+    `Among the ${count(members, 'member', 'members')} who sat, the good sits are ${words}: Gini ${value.toFixed(2)}. At 0 each has the same number; the nearer to 1, the fewer hands they are in.`,
   noneGood: 'There was no good sit to share out.',
-  as: {
-    alike: (value: number) =>
-      `Sits of any kind come to ${value.toFixed(2)}: who had more good sits is mostly who sat more.`,
-    less_even: (value: number) =>
-      `Sits of any kind come to ${value.toFixed(2)}: the good ones fell to fewer people than sits did, so sitting more is not all of the reason.`,
-    more_even: (value: number) =>
-      `Sits of any kind come to ${value.toFixed(2)}: the good ones are spread wider than sits are.`,
+  luck: {
+    by_lot: (mean: number, low: number, high: number) =>
+      `Dealt out by lot among the sits that were made it would be about ${mean.toFixed(2)} (${range(low, high)} in nineteen deals of twenty), so luck and who sat how often explain it.`,
+    less_even: (mean: number, low: number, high: number) =>
+      `Dealt out by lot among the sits that were made it would be about ${mean.toFixed(2)} (${range(low, high)} in nineteen deals of twenty). They are in fewer hands than luck and who sat how often explain.`,
+    more_even: (mean: number, low: number, high: number) =>
+      `Dealt out by lot among the sits that were made it would be about ${mean.toFixed(2)} (${range(low, high)} in nineteen deals of twenty). They are shared more evenly than luck would have done it.`,
   },
+  ofSits: (value: number) => `Gini of all sits, good or not: ${value.toFixed(2)}.`,
   never: (members: number) =>
     members === 1
       ? '1 member of the club did not sit and is in neither figure.'

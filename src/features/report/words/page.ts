@@ -46,7 +46,7 @@ export const HEADLINE_WORDS = {
       : `kept ${kept} of the ${count(times, 'time', 'times')} a stand was sat again`,
   unused: 'Left alone',
   unusedOf: (never: number, oneWindow: number) =>
-    `${count(never, 'stand', 'stands')} nobody sat, ${oneWindow} sat in one window only`,
+    `${never === 0 ? 'every stand was sat' : `nobody sat ${count(never, 'stand', 'stands')}`}${oneWindow === 0 ? '' : `; ${oneWindow} in one window only`}`,
   fair: 'Good sits',
   fairOf: (words: string, value: number) => `${words} among those who sat (Gini ${value.toFixed(2)})`,
   fairNone: 'none to share out yet',

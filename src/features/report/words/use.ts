@@ -10,8 +10,8 @@ export const USE_WORDS = {
     `Bars: sits in a week, ${mostSits} at the full height. Line: pressure as the morning begins, ${mostPressure.toFixed(1)} at the full height.`,
   sits: (sits: number) => (sits === 1 ? '1 sit' : `${sits} sits`),
   month: (day: string) => MONTHS[Number(day.slice(5, 7)) - 1] ?? '',
-  sitsFile: 'Sits by stand and week',
-  pressureFile: 'Pressure by stand and day',
+  sitsFile: 'Sits',
+  pressureFile: 'Pressure',
   gone: (name: string) => `${name} (taken out of use)`,
 } as const;
 
