@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { readGateSheet } from '@/features/board/gate-sheet/read-gate-sheet';
+import { closeDays } from '@/features/bookings/close-days';
 import { listApproachesOf } from '@/features/ground/approaches-data';
-import { closeGround } from '@/features/ground/close-ground';
 import { refreshAllForecasts } from '@/features/weather/refresh-all';
 import { book, SATURDAY } from '../helpers/book';
 import { addMember, TEST_NOW } from '../helpers/make-club';
@@ -41,8 +41,8 @@ describe('the gate sheet', () => {
     const { club, ann, west, east } = made;
     const steward = await addMember(club, 'steward');
     const closure = { toDay: null, reason: 'Strap chewed' };
-    await closeGround(steward.scope, { ...closure, standId: west, fromDay: SATURDAY }, TEST_NOW);
-    await closeGround(steward.scope, { ...closure, standId: east, fromDay: '2026-11-08' }, TEST_NOW);
+    await closeDays(steward.scope, { ...closure, standId: west, fromDay: SATURDAY }, TEST_NOW);
+    await closeDays(steward.scope, { ...closure, standId: east, fromDay: '2026-11-08' }, TEST_NOW);
     const sheet = await readGateSheet(ann.scope, SATURDAY, TEST_NOW);
     expect(sheet.closed).toEqual(['West Oak: Strap chewed (until opened again)']);
     expect(sheet.ground?.stands.map(({ state }) => state)).toEqual(['free', 'closed']);

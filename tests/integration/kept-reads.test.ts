@@ -1,7 +1,7 @@
 import { beforeEach, describe, expect, it } from 'vitest';
 import { changeName } from '@/features/accounts/change-name';
 import { cancelSit } from '@/features/bookings/cancel-sit';
-import { closeGround } from '@/features/ground/close-ground';
+import { closeDays } from '@/features/bookings/close-days';
 import { saveLog } from '@/features/logs/save-log';
 import { readKeptSits, readKeptWeek } from '@/features/sits/kept-reads';
 import { readWeek } from '@/features/sits/read-week';
@@ -52,7 +52,7 @@ describe('a kept list', () => {
     const booked = await book(bert, west);
     const changes: [string, () => Promise<unknown>][] = [
       ['a name', () => changeName({ id: bert.userId, name: bert.name }, { name: 'Albert Hale' }, TEST_NOW)],
-      ['a closing', () => closeGround(admin.scope, closure, TEST_NOW)],
+      ['a closing', () => closeDays(admin.scope, closure, TEST_NOW)],
       ['a cancelling', () => cancelSit(bert.scope, { sitId: booked.id, reason: '' }, TEST_NOW)],
       ['a booking', () => book(bert, west)],
     ];

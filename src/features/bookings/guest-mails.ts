@@ -5,7 +5,7 @@ import { composeMail } from '@/features/mail/compose';
 import { queueMail } from '@/server/outbox';
 import type { ClubScope } from '@/server/scope';
 import type { SitDetail } from './data';
-import { type GuestReader, listGuestReaders } from './guests-data';
+import { type GuestReader, listGuestReaders } from './readers-data';
 import { type SitMail, sitEntry, sitFacts } from './sit-mails';
 import { dayAndWindow } from './sit-words';
 import { GUEST_MAIL_WORDS } from './words/mails';

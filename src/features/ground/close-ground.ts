@@ -1,5 +1,5 @@
 import { addDays, dayOf, formatDay } from '@/core/day-time';
-import { type Tx, write } from '@/db/client';
+import type { Tx } from '@/db/client';
 import { newId } from '@/lib/ids';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
@@ -14,7 +14,8 @@ export interface Closed {
   touched: BookedSit[];
 }
 
-async function nameOf(scope: ClubScope, tx: Tx, standId: string | null): Promise<string> {
+/** What is closed by name: a stand's, or that of the whole ground. */
+export async function nameOfGround(scope: ClubScope, tx: Tx, standId: string | null): Promise<string> {
   if (standId === null) return 'the whole ground';
   const stand = await getStand(scope, standId, tx);
   if (!stand) throw notFound();
@@ -37,8 +38,8 @@ export async function closeGroundIn(
   return { id, touched: await listBookedSits(scope, { ...values, now }, tx) };
 }
 
-/** Closes a stand, or with no stand the whole ground. A stand may stay closed until somebody opens it again. */
-export async function closeGround(scope: ClubScope, values: ClosureValues, now: number): Promise<Closed> {
+/** A closure that a person may not make, or that tells of no day to come. */
+export function refuseClosing(scope: ClubScope, values: ClosureValues, now: number): void {
   if (values.standId !== null && !scope.can('stands.write')) {
     throw new AppError('forbidden', 'Only a steward or an admin closes a stand; you may close the whole ground.');
   }
@@ -52,5 +53,4 @@ export async function closeGround(scope: ClubScope, values: ClosureValues, now: 
     const message = 'Choose a first day within the last year.';
     throw new AppError('invalid', message, { fields: { fromDay: message } });
   }
-  return write(async (tx) => closeGroundIn(tx, scope, values, await nameOf(scope, tx, values.standId), now));
 }

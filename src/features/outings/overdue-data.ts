@@ -1,12 +1,8 @@
-import { and, asc, eq, inArray, isNull } from 'drizzle-orm';
-import { PERMISSIONS_BY_ROLE, ROLES } from '@/core/permissions';
+import { asc, eq, inArray } from 'drizzle-orm';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
-import { memberships, OVERDUE_STEPS, overdueSteps, users } from '@/db/schema';
-import type { ClubScope } from '@/server/scope';
+import { memberships, OVERDUE_STEPS, overdueSteps } from '@/db/schema';
 
 export type OverdueStepRow = typeof overdueSteps.$inferSelect;
-
-const OFFICER_ROLES = ROLES.filter((role) => PERMISSIONS_BY_ROLE[role].includes('board.sign_for_others'));
 
 /** True when this process is the one that takes the step. */
 export async function insertStep(tx: Tx, row: typeof overdueSteps.$inferInsert): Promise<boolean> {
@@ -28,22 +24,6 @@ export async function listSteps(outingIds: string[], from: ReadFrom = reader()):
     .orderBy(asc(overdueSteps.at), asc(overdueSteps.id));
   // Steps taken at the same instant: in the order they are meant to come.
   return rows.sort((a, b) => a.at - b.at || OVERDUE_STEPS.indexOf(a.step) - OVERDUE_STEPS.indexOf(b.step));
-}
-
-/** Who signs for others in the club, by name. */
-export async function listOfficers(scope: ClubScope, from: ReadFrom = reader()) {
-  return from
-    .select({ memberId: memberships.id, name: users.name, email: users.email })
-    .from(memberships)
-    .innerJoin(users, eq(users.id, memberships.userId))
-    .where(
-      and(
-        eq(memberships.clubId, scope.club.id),
-        isNull(memberships.removedAt),
-        inArray(memberships.role, OFFICER_ROLES),
-      ),
-    )
-    .orderBy(asc(users.name), asc(memberships.id));
 }
 
 /** The account behind a membership. */

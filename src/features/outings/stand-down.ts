@@ -1,11 +1,12 @@
 import type { Tx } from '@/db/client';
 import { env } from '@/env';
+import { listOfficers } from '@/features/bookings/readers-data';
 import { composeMail } from '@/features/mail/compose';
 import { queueMail } from '@/server/outbox';
 import type { ClubScope } from '@/server/scope';
 import { findContact } from './contacts-data';
 import type { OutingDetail } from './data';
-import { listOfficers, listSteps, type OverdueStepRow } from './overdue-data';
+import { listSteps, type OverdueStepRow } from './overdue-data';
 import type { OverdueReader } from './overdue-mails';
 import { backByText, clockAndDay } from './words/outing';
 import { STAND_DOWN_MAIL } from './words/overdue';

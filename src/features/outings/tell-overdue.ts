@@ -1,11 +1,12 @@
 import { dueSteps, type OverdueStep, overdueStepTimes } from '@/core/outing/overdue-steps';
 import { type Tx, write } from '@/db/client';
+import { listOfficers } from '@/features/bookings/readers-data';
 import { log } from '@/server/log';
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { auditOuting } from './audit-outing';
 import { type ContactRow, findContact } from './contacts-data';
 import { findOuting, listPastBackBy, type OutingDetail } from './data';
-import { insertStep, listOfficers, listSteps, type OverdueStepRow } from './overdue-data';
+import { insertStep, listSteps, type OverdueStepRow } from './overdue-data';
 import { type OverdueReader, queueOverdueMail } from './overdue-mails';
 import { contactLink } from './sit-links';
 import { clockBeside } from './words/outing';

@@ -59,3 +59,27 @@ export const GUEST_MAIL_WORDS = {
   button: 'Open the board',
   footer: (host: string) => `You get this because ${host} named you as a guest.`,
 } as const;
+
+/** Of days or a stand that somebody closed under booked sits. */
+export const CLOSED_MAIL_WORDS = {
+  subject: (what: string, days: string) => `Closed: ${what}, ${days}`,
+  /** `to`: null, until opened again. */
+  days: (from: string, to: string | null, oneDay: boolean) => {
+    if (to === null) return `from ${from} until opened again`;
+    return oneDay ? from : `${from} to ${to}`;
+  },
+  opening: (by: string, what: string, sits: number) =>
+    `${by} has closed ${what}, and ${sits === 1 ? 'a sit of yours falls' : `${sits} sits of yours fall`} on it.`,
+  closed: 'Closed',
+  when: 'When',
+  why: 'Why',
+  sit: 'Your sit',
+  sitOf: (stand: string, when: string) => `${stand}, ${when}`,
+  after: 'It stays booked until you or an admin cancels it: move it or cancel it, and do not go in while it is closed.',
+  button: 'Move or cancel the sit',
+  footer: 'You get this because the sit is yours.',
+  officerOpening: (by: string, what: string, sits: number) =>
+    `${by} has closed ${what}. ${sits} booked ${sits === 1 ? 'sit falls' : 'sits fall'} on it and ${sits === 1 ? 'stays' : 'stay'} booked; the members have been told.`,
+  officerButton: 'See closed days',
+  officerFooter: (club: string) => `You get this because you are an officer of ${club}.`,
+} as const;

@@ -93,7 +93,10 @@ export function ClosureFormView({ club, today, stands, standId, close }: Closure
         keepLabel="Do not close"
         onConfirm={() => settle(true)}
       >
-        <p>They stay booked until the member or an admin cancels them. No new sit can be booked. Tell these people:</p>
+        <p>
+          They stay booked until the member or an admin cancels them. No new sit can be booked. These members are told
+          by mail, and so are the officers:
+        </p>
         <ul className="mt-2 list-disc pl-5">
           {question?.touched.map((sit) => (
             <li key={sit.id}>

@@ -1,7 +1,7 @@
 'use server';
 
+import { closeDays } from '@/features/bookings/close-days';
 import { openAgainInput } from '@/features/ground/action-inputs';
-import { closeGround } from '@/features/ground/close-ground';
 import { closureFormSchema, closureSchema } from '@/features/ground/closure-schema';
 import { openAgain } from '@/features/ground/open-again';
 import { clubAction } from '@/server/doors';
@@ -9,7 +9,7 @@ import { clubAction } from '@/server/doors';
 export const closeAction = clubAction({
   permission: 'closed_days.write',
   input: closureFormSchema,
-  run: ({ scope, input, now }) => closeGround(scope, closureSchema.parse(input), now),
+  run: ({ scope, input, now }) => closeDays(scope, closureSchema.parse(input), now),
 });
 
 export const openAgainAction = clubAction({
