@@ -38,7 +38,7 @@ export async function loadSeasonHours(
 ): Promise<SeasonHours> {
   const { lat, lon, zone } = scope.club;
   const days = pastSeason(dayOf(now, zone));
-  const source = `${weather.source} past ${days.fromDay}`;
+  const source = COVERAGE_WORDS.past(weather.source, days.fromDay);
   const port: WeatherPort = {
     ...weather,
     source,

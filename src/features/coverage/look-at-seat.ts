@@ -15,13 +15,13 @@ import type { ClubScope } from '@/server/scope';
 import { type TrialSeatAsk, trialArcs, trialSuitability } from './coverage-schema';
 import { loadSeasonHours } from './load-season-hours';
 import { usualWinds } from './usual-winds';
-import { TRIAL_WORDS as W } from './words';
+import { TRIAL_MAP_WORDS, TRIAL_WORDS as W } from './words';
 
 /** A middling hang-on: what stands there is not known yet. */
 function trialStand(ask: TrialSeatAsk, arcs: GoodWindArc[], scope: ClubScope): ScoredStand {
   return {
     id: 'trial',
-    name: 'Trial',
+    name: TRIAL_MAP_WORDS.name,
     kind: 'hang_on',
     at: toLocal(scope.club, ask),
     seatHeightM: 5,

@@ -25,6 +25,8 @@ export const COVERAGE_WORDS = {
   noHours: 'No hours to count yet',
   again: 'Look again',
   outside: 'The hours known lie outside the club’s window hours.',
+  /** Names a season of past hours; it is also what they are kept under. */
+  past: (source: string, from: string) => `${source} past ${from}`,
   fetching: 'The hours of last season are being fetched. Look again soon.',
   noStands: 'No stands yet',
   noStandsText: 'Nothing is covered until a stand has good winds. Try one below.',

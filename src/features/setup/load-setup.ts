@@ -8,6 +8,7 @@ import { listMapItems, loadGround } from '@/features/ground/data';
 import type { ClubScope } from '@/server/scope';
 import { getSetupSettings } from './settings-data';
 import { setupInput } from './setup-input';
+import { SETUP_WORDS } from './words/findings';
 
 export interface LoadedSetup {
   input: SetupInput;
@@ -32,6 +33,6 @@ export async function loadSetup(scope: ClubScope, now: number): Promise<LoadedSe
   return {
     ...setupInput(club, { ground, items }, asked),
     ownSettings: Object.keys(own).length,
-    windsFrom: winds ? `${season.source}, ${season.fromDay} to ${season.toDay}` : null,
+    windsFrom: winds ? SETUP_WORDS.windsOf(season.source, season.fromDay ?? '', season.toDay ?? '') : null,
   };
 }

@@ -32,6 +32,7 @@ export const SETUP_WORDS = {
   nothingYetText: 'Draw stands, ways in and what deer use first.',
   toGround: 'Go to the ground',
   count: (count: number) => (count === 1 ? 'One finding' : `${count} findings`),
+  windsOf: (source: string, from: string, to: string) => `${source}, ${from} to ${to}`,
   windsFrom: (source: string) => `Usual winds: ${source}.`,
   windsUnknown: 'No season of hours is known: every wind counts the same.',
   practice: (own: number) =>
