@@ -140,6 +140,9 @@ for (const file of files(src)) {
       if (/\bprocess\.env\b(?!\.NEXT_RUNTIME)/.test(code) && room !== 'env' && !/\.test\.tsx?$/.test(file)) {
         problems.push(`${relative(root, file)}:${line}  process.env is read only in src/env.ts`);
       }
+      if (/import .*\buseQuery(Client)?\b.*'@tanstack/.test(code) && !file.endsWith('ui/query.ts')) {
+        problems.push(`${relative(root, file)}:${line}  reads go through useRead and queryClient of @/ui/query`);
+      }
       if (room === 'core' && !/\.test\.ts$/.test(file)) {
         for (const pattern of IMPURE) {
           if (pattern.test(code)) problems.push(`${relative(root, file)}:${line}  core is pure: ${pattern.source}`);

@@ -3,7 +3,7 @@ import localFont from 'next/font/local';
 import { cookies } from 'next/headers';
 import type { ReactNode } from 'react';
 import { LIGHT_COOKIE, lightPaper, parseLight, SUN_COOKIE, shownLight } from '@/ui/light';
-import { Providers } from '@/ui/providers';
+import { ToastProvider } from '@/ui/toast';
 import './globals.css';
 
 const literata = localFont({
@@ -39,7 +39,7 @@ export default async function RootLayout({ children }: { children: ReactNode }) 
   return (
     <html lang="en" data-light={await readLight()} className={`${literata.variable} ${sourceSans.variable}`}>
       <body>
-        <Providers>{children}</Providers>
+        <ToastProvider>{children}</ToastProvider>
       </body>
     </html>
   );

@@ -3,7 +3,7 @@
 import * as AlertDialog from 'radix-ui/alert-dialog';
 import { type ReactNode, useState } from 'react';
 import { Button } from './button';
-import { SHEET_CLASSES, VEIL_CLASSES } from './dialog';
+import { SHEET_CLASSES, useFocusBack, VEIL_CLASSES } from './dialog';
 import { FieldError } from './field';
 
 export interface ConfirmDialogProps {
@@ -27,6 +27,7 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
   const [pending, setPending] = useState(false);
   const [error, setError] = useState<string>();
   const open = props.open ?? ownOpen;
+  const focus = useFocusBack(Boolean(trigger));
 
   function setOpen(next: boolean) {
     setError(undefined);
@@ -50,7 +51,11 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
       {trigger && <AlertDialog.Trigger asChild>{trigger}</AlertDialog.Trigger>}
       <AlertDialog.Portal>
         <AlertDialog.Overlay className={VEIL_CLASSES} />
-        <AlertDialog.Content className={SHEET_CLASSES} {...(children ? {} : { 'aria-describedby': undefined })}>
+        <AlertDialog.Content
+          className={SHEET_CLASSES}
+          {...focus}
+          {...(children ? {} : { 'aria-describedby': undefined })}
+        >
           <AlertDialog.Title className="double-rule mb-4 pb-2 font-serif text-xl">{title}</AlertDialog.Title>
           {children && (
             <AlertDialog.Description asChild>

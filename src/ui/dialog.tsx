@@ -1,9 +1,9 @@
 'use client';
 
-import { X } from 'lucide-react';
 import * as RadixDialog from 'radix-ui/dialog';
 import { type ReactNode, useRef } from 'react';
 import { joinClasses } from './join-classes';
+import { CloseSign } from './signs';
 
 export const VEIL_CLASSES = 'fixed inset-0 z-40 bg-veil';
 
@@ -22,8 +22,23 @@ export interface DialogProps {
   children: ReactNode;
 }
 
-export function Dialog({ title, description, trigger, open, onOpenChange, className, children }: DialogProps) {
+/** Without a trigger of its own a dialog would leave focus at the top of the page: it goes back to where it was. */
+export function useFocusBack(hasTrigger: boolean) {
   const before = useRef<Element | null>(null);
+  return {
+    onOpenAutoFocus: () => {
+      before.current = document.activeElement;
+    },
+    onCloseAutoFocus: (event: Event) => {
+      if (hasTrigger || !(before.current instanceof HTMLElement)) return;
+      event.preventDefault();
+      before.current.focus();
+    },
+  };
+}
+
+export function Dialog({ title, description, trigger, open, onOpenChange, className, children }: DialogProps) {
+  const focus = useFocusBack(Boolean(trigger));
   return (
     <RadixDialog.Root open={open} onOpenChange={onOpenChange}>
       {trigger && <RadixDialog.Trigger asChild>{trigger}</RadixDialog.Trigger>}
@@ -31,15 +46,7 @@ export function Dialog({ title, description, trigger, open, onOpenChange, classN
         <RadixDialog.Overlay className={VEIL_CLASSES} />
         <RadixDialog.Content
           className={joinClasses(SHEET_CLASSES, className)}
-          onOpenAutoFocus={() => {
-            before.current = document.activeElement;
-          }}
-          onCloseAutoFocus={(event) => {
-            // Without a trigger of its own the dialog would leave focus at the top of the page.
-            if (trigger || !(before.current instanceof HTMLElement)) return;
-            event.preventDefault();
-            before.current.focus();
-          }}
+          {...focus}
           {...(description ? {} : { 'aria-describedby': undefined })}
         >
           <div className="double-rule mb-4 flex items-start justify-between gap-4 pb-2">
@@ -48,7 +55,7 @@ export function Dialog({ title, description, trigger, open, onOpenChange, classN
               aria-label="Close"
               className="-mt-2 -mr-2 inline-flex size-11 shrink-0 items-center justify-center rounded-sm hover:bg-sunk"
             >
-              <X aria-hidden="true" className="size-5" />
+              <CloseSign className="size-5" />
             </RadixDialog.Close>
           </div>
           {description && (

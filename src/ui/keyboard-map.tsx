@@ -1,10 +1,10 @@
 'use client';
 
-import { Keyboard } from 'lucide-react';
 import { useRouter } from 'next/navigation';
 import { lazy, Suspense, useEffect, useState } from 'react';
 import { Button } from './button';
 import { goKeys, type KeyMeaning, meaningOf } from './go-keys';
+import { KeysSign } from './signs';
 
 const KeyList = lazy(async () => ({ default: (await import('./key-list')).KeyList }));
 
@@ -85,7 +85,7 @@ export function KeyboardMap({ items }: KeyboardMapProps) {
   return (
     <>
       <Button look="quiet" className="justify-start" aria-haspopup="dialog" onClick={() => setOpen(true)}>
-        <Keyboard aria-hidden="true" className="size-5" />
+        <KeysSign className="size-5" />
         Keys
       </Button>
       {open && (

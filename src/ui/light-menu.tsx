@@ -1,10 +1,10 @@
 'use client';
 
-import { Check } from 'lucide-react';
 import * as Dropdown from 'radix-ui/dropdown-menu';
 import { LIGHT_NAMES, LIGHTS, type Light, parseLight } from './light';
 import { LightButton } from './light-button';
 import { MENU_CLASSES } from './open-menu';
+import { TickSign } from './signs';
 
 const NOTES: Record<Light, string> = {
   auto: 'by the sun',
@@ -35,7 +35,7 @@ export function LightMenu({ light, onChoose }: LightMenuProps) {
                 className="flex min-h-11 cursor-pointer items-center gap-3 py-2 pr-4 pl-10 outline-none data-highlighted:bg-sunk"
               >
                 <Dropdown.ItemIndicator className="-ml-7 w-4">
-                  <Check aria-hidden="true" className="size-4" />
+                  <TickSign className="size-4" />
                 </Dropdown.ItemIndicator>
                 <span>
                   {LIGHT_NAMES[name]} <span className="text-ink-soft text-sm">{NOTES[name]}</span>

@@ -1,9 +1,9 @@
 'use client';
 
-import { ChevronDown } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { Button, type ButtonLook } from './button';
 import { LazyPart, makeLazy } from './lazy-part';
+import { DownSign } from './signs';
 
 export interface MenuItem {
   label: ReactNode;
@@ -47,7 +47,7 @@ export function Menu(props: MenuProps) {
           onKeyDown={(event) => event.key === 'ArrowDown' && open()}
         >
           {label}
-          <ChevronDown aria-hidden="true" className="size-4 shrink-0" />
+          <DownSign className="size-4 shrink-0" />
         </Button>
       )}
     />

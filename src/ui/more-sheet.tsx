@@ -1,10 +1,10 @@
 'use client';
 
-import { Menu as MenuSign } from 'lucide-react';
 import Link from 'next/link';
 import { type ReactNode, useState } from 'react';
 import { Dialog } from './dialog';
 import type { NavItem } from './nav-links';
+import { PagesSign } from './signs';
 
 export interface MoreSheetProps {
   items: readonly NavItem[];
@@ -23,7 +23,7 @@ export function MoreSheet({ items, current, foot, triggerClass }: MoreSheetProps
       onOpenChange={setOpen}
       trigger={
         <button type="button" className={triggerClass}>
-          <MenuSign aria-hidden="true" />
+          <PagesSign />
           More
         </button>
       }

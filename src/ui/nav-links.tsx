@@ -1,6 +1,5 @@
 'use client';
 
-import { Menu as MenuSign } from 'lucide-react';
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 import type { ReactNode } from 'react';
@@ -8,11 +7,12 @@ import { findCurrent } from './current-path';
 import { joinClasses } from './join-classes';
 import { LazyPart, makeLazy } from './lazy-part';
 import type { MoreSheetProps } from './more-sheet';
+import { PagesSign } from './signs';
 
 export interface NavItem {
   href: string;
   label: string;
-  /** A lucide icon of 24 px, drawn on the phone's bar. */
+  /** A sign of 24 px, drawn on the phone's bar. */
   icon: ReactNode;
 }
 
@@ -81,7 +81,7 @@ export function BottomBar({ items, onBar = 4, foot }: BottomBarProps) {
             part={{ items: rest, current, foot, triggerClass }}
             closed={({ ahead, open }) => (
               <button type="button" {...ahead} aria-haspopup="dialog" className={triggerClass} onClick={open}>
-                <MenuSign aria-hidden="true" />
+                <PagesSign />
                 More
               </button>
             )}

@@ -1,13 +1,15 @@
-import { Info, OctagonX, TriangleAlert } from 'lucide-react';
 import type { ReactNode } from 'react';
 import { joinClasses } from './join-classes';
+import { CautionSign, NoteSign, StopSign } from './signs';
+
+export { ErrorState, type ErrorStateProps } from './error-state';
 
 export type NoticeLevel = 'info' | 'caution' | 'stop';
 
 const LEVELS = {
-  info: { word: 'Note', Mark: Info, box: 'border-y border-rule-strong px-1', mark: 'text-ink-soft' },
-  caution: { word: 'Caution', Mark: TriangleAlert, box: 'border-y-2 border-clay px-1', mark: 'text-clay' },
-  stop: { word: 'Stop', Mark: OctagonX, box: 'border-2 border-clay bg-panel px-3', mark: 'text-clay' },
+  info: { word: 'Note', Mark: NoteSign, box: 'border-y border-rule-strong px-1', mark: 'text-ink-soft' },
+  caution: { word: 'Caution', Mark: CautionSign, box: 'border-y-2 border-clay px-1', mark: 'text-clay' },
+  stop: { word: 'Stop', Mark: StopSign, box: 'border-2 border-clay bg-panel px-3', mark: 'text-clay' },
 };
 
 export interface NoticeProps {
@@ -26,7 +28,7 @@ export function Notice({ level = 'info', title, actions, live, className, childr
   const role = live ? (level === 'info' ? 'status' : 'alert') : undefined;
   return (
     <div role={role} className={joinClasses('flex gap-3 py-2.5', box, className)}>
-      <Mark aria-hidden="true" className={joinClasses('mt-0.5 size-5 shrink-0', mark)} strokeWidth={2} />
+      <Mark className={joinClasses('mt-0.5 size-5 shrink-0', mark)} />
       <div className="min-w-0 flex-1">
         <p className="font-semibold">{title ?? word}</p>
         {children && <div className="max-w-prose">{children}</div>}
@@ -48,26 +50,6 @@ export function EmptyState({ title, children, action }: EmptyStateProps) {
     <div className="border-rule border-y px-1 py-8">
       <p className="font-serif text-lg">{title}</p>
       <div className="mt-1 max-w-prose text-ink-soft">{children}</div>
-      {action && <div className="mt-4 flex flex-wrap gap-2">{action}</div>}
-    </div>
-  );
-}
-
-export interface ErrorStateProps {
-  title?: ReactNode;
-  /** What happened and what to do. */
-  children: ReactNode;
-  action?: ReactNode;
-  /** Words to quote to the club's admin. */
-  reference?: string;
-}
-
-export function ErrorState({ title = 'That did not work', children, action, reference }: ErrorStateProps) {
-  return (
-    <div role="alert" className="border-2 border-clay bg-panel px-4 py-5">
-      <p className="font-serif text-lg">{title}</p>
-      <div className="mt-1 max-w-prose">{children}</div>
-      {reference && <p className="mt-2 text-ink-soft text-sm">Reference: {reference}</p>}
       {action && <div className="mt-4 flex flex-wrap gap-2">{action}</div>}
     </div>
   );

@@ -1,11 +1,11 @@
 'use client';
 
-import { ChevronDown } from 'lucide-react';
 import Link from 'next/link';
 import * as Dropdown from 'radix-ui/dropdown-menu';
 import { Button } from './button';
 import { joinClasses } from './join-classes';
 import type { MenuItem, MenuProps } from './menu';
+import { DownSign } from './signs';
 
 const ITEM_CLASSES =
   'flex min-h-11 w-full items-center gap-3 px-4 py-2 no-underline outline-none data-highlighted:bg-sunk data-disabled:text-ink-soft';
@@ -20,7 +20,7 @@ export function OpenMenu({ label, name, items, look = 'plain', align = 'start', 
       <Dropdown.Trigger asChild>
         <Button look={look} aria-label={name} className={className}>
           {label}
-          <ChevronDown aria-hidden="true" className="size-4 shrink-0" />
+          <DownSign className="size-4 shrink-0" />
         </Button>
       </Dropdown.Trigger>
       <Dropdown.Portal>

@@ -1,9 +1,9 @@
 'use client';
 
-import { Minus, Plus } from 'lucide-react';
 import { useId } from 'react';
 import { FieldError } from './field';
 import { joinClasses } from './join-classes';
+import { LessSign, MoreSign } from './signs';
 
 export interface StepperProps {
   label: string;
@@ -40,7 +40,7 @@ export function Stepper({ label, name, value, onChange, onBlur, most = 200, erro
             disabled={value <= 0}
             onClick={() => set(value - 1)}
           >
-            <Minus aria-hidden="true" className="size-6" />
+            <LessSign className="size-6" />
           </button>
           <input
             id={id}
@@ -62,7 +62,7 @@ export function Stepper({ label, name, value, onChange, onBlur, most = 200, erro
             )}
           />
           <button type="button" className={knob} aria-label={`One more: ${label}`} onClick={() => set(value + 1)}>
-            <Plus aria-hidden="true" className="size-6" />
+            <MoreSign className="size-6" />
           </button>
         </span>
       </div>

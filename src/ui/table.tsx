@@ -1,7 +1,7 @@
-import { ArrowDown, ArrowUp, ChevronsUpDown } from 'lucide-react';
 import Link from 'next/link';
 import type { ComponentProps, ReactNode } from 'react';
 import { joinClasses } from './join-classes';
+import { FallingSign, RisingSign, SortableSign } from './signs';
 
 /** Written out because a stacked table's display values would drop the built-in roles in some browsers. */
 const ROLE = {
@@ -102,8 +102,8 @@ export function Th({ sorted, onSort, sortHref, align = 'left', className, childr
 }
 
 function SortMark({ sorted }: { sorted: Sorted }) {
-  const Mark = sorted === 'ascending' ? ArrowUp : sorted === 'descending' ? ArrowDown : ChevronsUpDown;
-  return <Mark aria-hidden="true" className={joinClasses('size-4', sorted === 'none' && 'text-ink-soft')} />;
+  const Mark = sorted === 'ascending' ? RisingSign : sorted === 'descending' ? FallingSign : SortableSign;
+  return <Mark className={joinClasses('size-4', sorted === 'none' && 'text-ink-soft')} />;
 }
 
 export interface TdProps extends ComponentProps<'td'> {

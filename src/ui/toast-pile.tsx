@@ -1,8 +1,8 @@
 'use client';
 
-import { X } from 'lucide-react';
 import * as RadixToast from 'radix-ui/toast';
 import { joinClasses } from './join-classes';
+import { CloseSign } from './signs';
 import type { ShownToast } from './toast';
 
 /** The messages now shown, in a corner that a screen reader follows. */
@@ -25,7 +25,7 @@ export function ToastPile({ toasts, onClose }: { toasts: ShownToast[]; onClose: 
             {text && <RadixToast.Description className="text-sm">{text}</RadixToast.Description>}
           </div>
           <RadixToast.Close aria-label="Close message" className="inline-flex size-11 items-center justify-center">
-            <X aria-hidden="true" className="size-5" />
+            <CloseSign className="size-5" />
           </RadixToast.Close>
         </RadixToast.Root>
       ))}

@@ -13,8 +13,23 @@ export type ShownToast = ToastText & { id: number };
 
 const ToastContext = createContext<((toast: ToastText) => void) | null>(null);
 
+/** Stands in where the pile's script cannot be had: a message about a lost signal must not need one. */
+function PlainPile({ toasts }: { toasts: ShownToast[] }) {
+  const last = toasts.at(-1);
+  return (
+    <p role="alert" className="fixed inset-x-4 bottom-20 z-50 border-2 border-clay bg-panel px-4 py-3">
+      <strong>{last?.title}</strong> {last?.text}
+    </p>
+  );
+}
+
 /** The pile itself comes with the first message. */
-const ToastPile = lazy(async () => ({ default: (await import('./toast-pile')).ToastPile }));
+const ToastPile = lazy(() =>
+  import('./toast-pile').then(
+    (parts) => ({ default: parts.ToastPile }),
+    () => ({ default: PlainPile }),
+  ),
+);
 
 /** `const toast = useToast(); toast({ title: 'Sit booked' })`. */
 export function useToast(): (toast: ToastText) => void {

@@ -1,8 +1,8 @@
 'use client';
 
-import { CloudOff } from 'lucide-react';
 import { useEffect, useState } from 'react';
-import { useOnline } from './use-offline';
+import { NoSignalSign } from '../signs';
+import { useOnline } from './use-online';
 
 /** Says that there is no signal, or that this page is a kept copy, and of when it is. */
 export function OfflineMark({ asOf }: { asOf: string }) {
@@ -17,7 +17,7 @@ export function OfflineMark({ asOf }: { asOf: string }) {
   if (online && !old) return null;
   return (
     <p role="status" className="flex items-center gap-1.5 border border-rule-strong px-2 py-1 text-xs leading-tight">
-      <CloudOff aria-hidden className="size-4 shrink-0" />
+      <NoSignalSign className="size-4 shrink-0" />
       <span>
         <strong className="font-semibold">{online ? 'Kept copy' : 'No signal'}</strong>, as of{' '}
         <span className="whitespace-nowrap">{asOf}</span>

@@ -8,7 +8,7 @@ import { listMyClubs } from '@/features/accounts/reads';
 import { clockText } from '@/features/bookings/sit-words';
 import { clubNavItems } from '@/features/clubs/club-nav';
 import { ClubSwitch } from '@/features/clubs/components/club-switch';
-import { WaitingPanel } from '@/features/offline/components/waiting-panel';
+import { LateWaiting } from '@/features/offline/components/late-waiting';
 import { pagesToKeep } from '@/features/offline/keep-list';
 import { hashSecret } from '@/lib/secrets';
 import { now } from '@/server/clock';
@@ -65,7 +65,7 @@ export default async function ClubLayout({ params, children }: ClubLayoutProps) 
         <FollowSun changes={lightBySun(at, scope.club)} />
         <ZoneNote zone={zone} />
         {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
-        <WaitingPanel zone={zone} units={units} actions={WAITING} />
+        <LateWaiting zone={zone} units={units} actions={WAITING} />
         {children}
       </AppShell>
       {env.production && <KeepPages pages={pagesToKeep(slug, scope.can)} />}

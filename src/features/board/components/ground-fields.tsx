@@ -4,6 +4,7 @@ import type { UseFormRegisterReturn } from 'react-hook-form';
 import { TextLink } from '@/ui/button';
 import { Checkbox } from '@/ui/choices';
 import { Select, TextInput, TimeInput } from '@/ui/text-inputs';
+import { GROUND_FIELD_WORDS as WORDS } from '../words/dialogs';
 
 export type GroundField = 'approachId' | 'parkingId' | 'vehicle' | 'backBy' | 'contactOff';
 
@@ -20,7 +21,7 @@ interface Props {
 }
 
 const options = (list: { id: string; name: string }[]) => [
-  { value: '', label: 'Not said' },
+  { value: '', label: WORDS.notSaid },
   ...list.map(({ id, name }) => ({ value: id, label: name })),
 ];
 
@@ -28,33 +29,29 @@ const options = (list: { id: string; name: string }[]) => [
 export function GroundFields({ register, errorOf, waysIn, parkings, own, contactName }: Props) {
   return (
     <>
-      <TimeInput
-        label="Back by"
-        hint="At the parking place, by the club's clock. You can move it."
-        {...register('backBy')}
-        error={errorOf('backBy')}
+      <TimeInput label={WORDS.backBy} hint={WORDS.backByHint} {...register('backBy')} error={errorOf('backBy')} />
+      <Select label={WORDS.wayIn} options={options(waysIn)} {...register('approachId')} error={errorOf('approachId')} />
+      <Select
+        label={WORDS.parking}
+        options={options(parkings)}
+        {...register('parkingId')}
+        error={errorOf('parkingId')}
       />
-      <Select label="Way in" options={options(waysIn)} {...register('approachId')} error={errorOf('approachId')} />
-      <Select label="Parked at" options={options(parkings)} {...register('parkingId')} error={errorOf('parkingId')} />
       <TextInput
-        label="Vehicle"
+        label={WORDS.vehicle}
         optional
-        hint="Colour, make, plate: what somebody would look for."
+        hint={WORDS.vehicleHint}
         maxLength={80}
         {...register('vehicle')}
         error={errorOf('vehicle')}
       />
       {own && contactName === null && (
         <p className="text-ink-soft text-sm">
-          Nobody at home is told when you are overdue: <TextLink href="/account">name a safety contact</TextLink>.
+          {WORDS.noContact} <TextLink href="/account">{WORDS.nameOne}</TextLink>.
         </p>
       )}
       {own && contactName !== null && (
-        <Checkbox
-          label={`Do not tell ${contactName} this time`}
-          hint="Your safety contact. Otherwise they are mailed when you are overdue."
-          {...register('contactOff')}
-        />
+        <Checkbox label={WORDS.contactOff(contactName)} hint={WORDS.contactOffHint} {...register('contactOff')} />
       )}
     </>
   );

@@ -1,26 +1,23 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Button } from '@/ui/button';
 import { CopyField } from '@/ui/copy-field';
 import { Dialog } from '@/ui/dialog';
 import { FieldError } from '@/ui/field';
-import { boardKey } from '../queries';
+import type { Closes } from '@/ui/lazy-part';
 import type { BoardSit } from '../reads';
+import { SHARE_WORDS } from '../words/dialogs';
 import type { BoardActions } from './board-actions';
 
-const LOST = 'The server could not be reached. Try again.';
-
-interface Props {
+export interface ShareDialogProps {
   club: string;
   sit: BoardSit;
   outing: { id: string; linked: boolean };
   actions: Pick<BoardActions, 'share' | 'revoke'>;
 }
 
-function Links({ club, sit, outing, actions }: Props) {
-  const queries = useQueryClient();
+function Links({ club, sit, outing, actions }: ShareDialogProps) {
   const [url, setUrl] = useState<string>();
   const [said, setSaid] = useState('');
   const [error, setError] = useState<string>();
@@ -29,9 +26,8 @@ function Links({ club, sit, outing, actions }: Props) {
 
   async function run(work: () => Promise<string | undefined>) {
     setPending(true);
-    setError(await work().catch(() => LOST));
+    setError(await work().catch(() => SHARE_WORDS.lost));
     setPending(false);
-    await queries.invalidateQueries({ queryKey: boardKey(club) });
   }
   const share = () =>
     run(async () => {
@@ -45,28 +41,22 @@ function Links({ club, sit, outing, actions }: Props) {
       const answer = await actions.revoke(club, values);
       if (!answer.ok) return answer.error.message;
       setUrl(undefined);
-      setSaid('The links no longer work.');
+      setSaid(SHARE_WORDS.off);
     });
 
   return (
     <div className="grid gap-4">
-      <p>
-        A page for this sit alone: stand, way in, parking, vehicle, back-by time and whether{' '}
-        {sit.mine ? 'you are' : `${sit.memberName} is`} out. It needs no account and works until three days after the
-        back-by time. Whoever has the link can open it.
-      </p>
-      {url && (
-        <CopyField label="Link for somebody at home" value={url} hint="It is shown this once. Send it yourself." />
-      )}
+      <p>{SHARE_WORDS.about(sit.mine ? null : sit.memberName)}</p>
+      {url && <CopyField label={SHARE_WORDS.link} value={url} hint={SHARE_WORDS.linkHint} />}
       <div className="flex flex-wrap gap-3">
         {sit.mine && (
           <Button look="primary" pending={pending} onClick={share}>
-            {url ? 'Make another link' : 'Make a link'}
+            {url ? SHARE_WORDS.makeAnother : SHARE_WORDS.make}
           </Button>
         )}
         {(outing.linked || url) && (
           <Button pending={pending} onClick={revoke}>
-            Turn all links off
+            {SHARE_WORDS.turnOff}
           </Button>
         )}
       </div>
@@ -79,17 +69,9 @@ function Links({ club, sit, outing, actions }: Props) {
 }
 
 /** For the member, and for an officer where there are links to turn off. */
-export function ShareDialog(props: Props) {
-  const { sit } = props;
+export function ShareDialog({ onClose, ...props }: ShareDialogProps & Closes) {
   return (
-    <Dialog
-      title="A link for somebody at home"
-      trigger={
-        <Button look="quiet" aria-label={`Link for home: ${sit.memberName}, ${sit.standName}`}>
-          Link for home
-        </Button>
-      }
-    >
+    <Dialog title={SHARE_WORDS.title} open onOpenChange={(open) => !open && onClose()}>
       <Links {...props} />
     </Dialog>
   );

@@ -1,21 +1,20 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
-import { useState } from 'react';
 import { type SignInSitValues, signInSitSchema } from '@/features/outings/outing-schema';
 import { Button } from '@/ui/button';
-import { Dialog, DialogClose } from '@/ui/dialog';
+import { Dialog } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
-import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-offline';
+import type { Closes } from '@/ui/lazy-part';
+import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-send-or-keep';
 import { useToast } from '@/ui/toast';
-import { boardKey } from '../queries';
 import type { Board, BoardSit, SignInStart } from '../reads';
 import type { SavedOuting } from '../saved-outing';
+import { SIGN_IN_WORDS } from '../words/dialogs';
 import type { BoardActions } from './board-actions';
 import { EMPTY_IS_NULL, GroundFields } from './ground-fields';
 
-interface Props {
+export interface SignInDialogProps {
   club: string;
   sit: BoardSit;
   start: SignInStart;
@@ -23,9 +22,8 @@ interface Props {
   signIn: BoardActions['signIn'];
 }
 
-function SignInForm({ club, sit, start, board, signIn, onDone }: Props & { onDone: () => void }) {
+function SignInForm({ club, sit, start, board, signIn, onClose }: SignInDialogProps & Closes) {
   const toast = useToast();
-  const queries = useQueryClient();
   const sendOrKeep = useSendOrKeep();
   const { register, errorOf, errors, pending, formProps } = useActionForm({
     schema: signInSitSchema,
@@ -38,14 +36,13 @@ function SignInForm({ club, sit, start, board, signIn, onDone }: Props & { onDon
       contactOff: false,
     },
     submit: (values: SignInSitValues) => {
-      const label = sit.mine ? `Sign in at ${sit.standName}` : `Sign in ${sit.memberName} at ${sit.standName}`;
+      const label = SIGN_IN_WORDS.kept(sit.standName, sit.mine ? null : sit.memberName);
       return sendOrKeep({ kind: 'sign_in', club, label, values, send: (all) => signIn(club, all) });
     },
-    onDone: async (saved: SavedOuting | null) => {
-      const text = saved && `${saved.memberName} at ${saved.standName}, back by ${saved.backByText}.`;
-      toast(text ? { title: 'Signed in', text } : KEPT_TOAST);
-      onDone();
-      if (saved) await queries.invalidateQueries({ queryKey: boardKey(club) });
+    onDone: (saved: SavedOuting | null) => {
+      const text = saved && SIGN_IN_WORDS.doneText(saved.memberName, saved.standName, saved.backByText);
+      toast(text ? { title: SIGN_IN_WORDS.done, text } : KEPT_TOAST);
+      onClose();
     },
   });
   return (
@@ -59,32 +56,26 @@ function SignInForm({ club, sit, start, board, signIn, onDone }: Props & { onDon
         own={sit.mine}
         contactName={board.contactName}
       />
-      <SubmitRow label="Sign in" pending={pending} pendingLabel="Signing in">
-        <DialogClose>
-          <Button look="quiet">Not now</Button>
-        </DialogClose>
+      <SubmitRow label={SIGN_IN_WORDS.signIn} pending={pending} pendingLabel={SIGN_IN_WORDS.signingIn}>
+        <Button look="quiet" onClick={onClose}>
+          {SIGN_IN_WORDS.notNow}
+        </Button>
       </SubmitRow>
     </form>
   );
 }
 
 /** One tap opens it with everything filled in, the second signs in. */
-export function SignInDialog(props: Props) {
-  const [open, setOpen] = useState(false);
-  const { sit } = props;
+export function SignInDialog(props: SignInDialogProps & Closes) {
+  const { sit, onClose } = props;
   return (
     <Dialog
-      title={sit.mine ? `Sign in: ${sit.standName}` : `Sign in ${sit.memberName}`}
-      description={`${sit.standName}, ${sit.windowText}, ${sit.timeText}.`}
-      trigger={
-        <Button look="primary" aria-label={`Sign in: ${sit.memberName}, ${sit.standName}`}>
-          Sign in
-        </Button>
-      }
-      open={open}
-      onOpenChange={setOpen}
+      title={SIGN_IN_WORDS.title(sit.standName, sit.mine ? null : sit.memberName)}
+      description={SIGN_IN_WORDS.about(sit.standName, sit.windowText, sit.timeText)}
+      open
+      onOpenChange={(open) => !open && onClose()}
     >
-      <SignInForm {...props} onDone={() => setOpen(false)} />
+      <SignInForm {...props} />
     </Dialog>
   );
 }

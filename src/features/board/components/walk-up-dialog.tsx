@@ -1,28 +1,32 @@
 'use client';
 
-import { useQuery, useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { type WalkUpValues, walkUpSchema } from '@/features/outings/outing-schema';
-import { newRequestKey } from '@/features/sits/request-key';
+import { newRequestKey } from '@/lib/request-key';
 import { Button } from '@/ui/button';
-import { Dialog, DialogClose } from '@/ui/dialog';
+import { Dialog } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
+import type { Closes } from '@/ui/lazy-part';
 import { Loading, Notice } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import { Select } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
-import { boardKey, walkUpQuery } from '../queries';
+import { walkUpQuery } from '../queries';
 import type { WalkUpOptions, WalkUpStand } from '../read-walk-up';
 import type { Board } from '../reads';
+import { WALK_UP_WORDS } from '../words/dialogs';
 import type { BoardActions } from './board-actions';
 import { EMPTY_IS_NULL, GroundFields } from './ground-fields';
 
-interface Props {
+export interface WalkUpDialogProps {
   club: string;
   board: Pick<Board, 'parkings' | 'contactName'>;
   walkUp: BoardActions['walkUp'];
-  onDone: () => void;
+  windowText: string;
 }
+
+type Props = WalkUpDialogProps & Closes;
 
 /** The one way in there is, else none: it is for the person to say. */
 const onlyWay = (stand: WalkUpStand) => (stand.waysIn.length === 1 ? stand.waysIn[0] : undefined);
@@ -31,12 +35,11 @@ function WalkUpForm({
   club,
   board,
   walkUp,
-  onDone,
+  onClose,
   options,
   first,
 }: Props & { options: WalkUpOptions; first: WalkUpStand }) {
   const toast = useToast();
-  const queries = useQueryClient();
   const [requestKey] = useState(newRequestKey);
   const { form, register, errorOf, errors, pending, formProps } = useActionForm({
     schema: walkUpSchema,
@@ -51,10 +54,9 @@ function WalkUpForm({
       contactOff: false,
     },
     submit: (values: WalkUpValues) => walkUp(club, values),
-    onDone: async (saved) => {
-      toast({ title: 'Booked and signed in', text: `${saved.standName}, back by ${saved.backByText}.` });
-      onDone();
-      await queries.invalidateQueries({ queryKey: boardKey(club) });
+    onDone: (saved) => {
+      toast({ title: WALK_UP_WORDS.done, text: WALK_UP_WORDS.doneText(saved.standName, saved.backByText) });
+      onClose();
     },
   });
   const stand = options.stands.find(({ id }) => id === form.watch('standId')) ?? first;
@@ -72,12 +74,12 @@ function WalkUpForm({
     <form {...formProps} className="grid gap-4">
       <FormErrorSummary errors={errors} />
       <Select
-        label="Stand"
+        label={WALK_UP_WORDS.stand}
         options={options.stands.map(({ id, name }) => ({ value: id, label: name }))}
         {...register('standId', { onChange: (event) => choose(event.target.value) })}
         error={errorOf('standId')}
       />
-      <Select label="Weapon" options={stand.weapons} {...register('weapon')} error={errorOf('weapon')} />
+      <Select label={WALK_UP_WORDS.weapon} options={stand.weapons} {...register('weapon')} error={errorOf('weapon')} />
       <GroundFields
         register={(name) => (name.endsWith('Id') ? register(name, EMPTY_IS_NULL) : register(name))}
         errorOf={errorOf}
@@ -86,49 +88,41 @@ function WalkUpForm({
         own
         contactName={board.contactName}
       />
-      <SubmitRow label="Take it and sign in" pending={pending} pendingLabel="Signing in">
-        <DialogClose>
-          <Button look="quiet">Not now</Button>
-        </DialogClose>
+      <SubmitRow label={WALK_UP_WORDS.take} pending={pending} pendingLabel={WALK_UP_WORDS.taking}>
+        <Button look="quiet" onClick={onClose}>
+          {WALK_UP_WORDS.notNow}
+        </Button>
       </SubmitRow>
     </form>
   );
 }
 
 function WalkUp(props: Props) {
-  const { data, error } = useQuery(walkUpQuery(props.club));
+  const { data, error } = useRead(walkUpQuery(props.club));
   if (error) {
     return (
-      <Notice level="caution" live title="Not loaded">
+      <Notice level="caution" live title={WALK_UP_WORDS.notLoaded}>
         {error.message}
       </Notice>
     );
   }
-  if (!data) return <Loading label="Looking for free stands" />;
+  if (!data) return <Loading label={WALK_UP_WORDS.looking} />;
   const [first] = data.stands;
-  if (!first) {
-    return (
-      <p>
-        No stand is open to you now: each is taken, resting, closed or kept free by a rule. The Sit page says which.
-      </p>
-    );
-  }
+  if (!first) return <p>{WALK_UP_WORDS.nothing}</p>;
   return <WalkUpForm {...props} options={data} first={first} />;
 }
 
 /** At the gate without a booking: books a free stand for the window at hand and signs in at once. */
-export function WalkUpDialog(props: Omit<Props, 'onDone'> & { windowText: string }) {
-  const [open, setOpen] = useState(false);
-  const { windowText, ...rest } = props;
+export function WalkUpDialog(props: Props) {
+  const { windowText, onClose } = props;
   return (
     <Dialog
-      title="Walk up"
-      description={`A free stand for ${windowText}.`}
-      trigger={<Button>Walk up</Button>}
-      open={open}
-      onOpenChange={setOpen}
+      title={WALK_UP_WORDS.title}
+      description={WALK_UP_WORDS.about(windowText)}
+      open
+      onOpenChange={(open) => !open && onClose()}
     >
-      <WalkUp {...rest} onDone={() => setOpen(false)} />
+      <WalkUp {...props} />
     </Dialog>
   );
 }

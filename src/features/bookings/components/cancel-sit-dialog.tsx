@@ -1,12 +1,12 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
-import { type ReactNode, useState } from 'react';
 import type { ActionResult } from '@/server/doors';
 import { Button } from '@/ui/button';
-import { Dialog, DialogClose } from '@/ui/dialog';
+import { Dialog } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
+import type { Closes } from '@/ui/lazy-part';
+import { queryClient } from '@/ui/query';
 import { Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { type CancelSitValues, cancelSitSchema } from '../sit-schema';
@@ -15,7 +15,7 @@ import { CANCEL_SIT_WORDS } from '../words/screens';
 
 export type CancelAction = (club: string, values: CancelSitValues) => Promise<ActionResult<SavedSit>>;
 
-interface CancelSitProps {
+export interface CancelSitProps {
   club: string;
   cancel: CancelAction;
   sit: { id: string; standName: string; whenText: string };
@@ -23,17 +23,16 @@ interface CancelSitProps {
   memberName?: string | undefined;
 }
 
-function CancelSitForm({ club, cancel, sit, memberName, onDone }: CancelSitProps & { onDone: () => void }) {
+function CancelSitForm({ club, cancel, sit, memberName, onClose }: CancelSitProps & Closes) {
   const toast = useToast();
-  const queries = useQueryClient();
   const { register, errorOf, errors, pending, formProps } = useActionForm({
     schema: cancelSitSchema,
     defaultValues: { sitId: sit.id, reason: '' },
     submit: (values: CancelSitValues) => cancel(club, values),
     onDone: async () => {
       toast({ title: CANCEL_SIT_WORDS.done, text: CANCEL_SIT_WORDS.doneText(sit.standName, sit.whenText) });
-      onDone();
-      await queries.invalidateQueries();
+      onClose();
+      await queryClient().invalidateQueries();
     },
   });
   return (
@@ -49,25 +48,21 @@ function CancelSitForm({ club, cancel, sit, memberName, onDone }: CancelSitProps
         {...register('reason')}
       />
       <SubmitRow label={CANCEL_SIT_WORDS.cancelSit} look="danger" pending={pending}>
-        <DialogClose>
-          <Button>{CANCEL_SIT_WORDS.keep}</Button>
-        </DialogClose>
+        <Button onClick={onClose}>{CANCEL_SIT_WORDS.keep}</Button>
       </SubmitRow>
     </form>
   );
 }
 
-export function CancelSitDialog({ trigger, ...props }: CancelSitProps & { trigger?: ReactNode }) {
-  const [open, setOpen] = useState(false);
-  const label = CANCEL_SIT_WORDS.cancelLabel(props.sit.standName, props.sit.whenText);
+export function CancelSitDialog(props: CancelSitProps & Closes) {
+  const { memberName, onClose } = props;
   return (
     <Dialog
-      title={props.memberName ? CANCEL_SIT_WORDS.cancelSit2(props.memberName) : CANCEL_SIT_WORDS.title}
-      trigger={trigger ?? <Button aria-label={label}>{CANCEL_SIT_WORDS.cancel}</Button>}
-      open={open}
-      onOpenChange={setOpen}
+      title={memberName ? CANCEL_SIT_WORDS.cancelSit2(memberName) : CANCEL_SIT_WORDS.title}
+      open
+      onOpenChange={(open) => !open && onClose()}
     >
-      <CancelSitForm {...props} onDone={() => setOpen(false)} />
+      <CancelSitForm {...props} />
     </Dialog>
   );
 }

@@ -1,6 +1,5 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useWatch } from 'react-hook-form';
 import type { ActionResult } from '@/server/doors';
@@ -9,6 +8,7 @@ import { RadioCards } from '@/ui/choices';
 import { Dialog, DialogClose } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
+import { queryClient } from '@/ui/query';
 import { DateInput, Select, Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { SitOptions } from '../reads';
@@ -31,7 +31,6 @@ const WINDOW_CHOICES = SIT_WINDOWS.map((value) => ({ value, label: SIT_WINDOW_WO
 
 function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & { onDone: () => void }) {
   const toast = useToast();
-  const queries = useQueryClient();
   const { form, register, errorOf, errors, pending, formProps } = useActionForm({
     schema: changeSitSchema,
     defaultValues: {
@@ -49,7 +48,7 @@ function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & 
     onDone: async (saved: SavedSit) => {
       toast({ title: CHANGE_SIT_WORDS.done, text: `${saved.standName}, ${saved.whenText}, ${saved.timeText}.` });
       onDone();
-      await queries.invalidateQueries();
+      await queryClient().invalidateQueries();
     },
   });
   const [standId, guests] = useWatch({ control: form.control, name: ['standId', 'guests'] });

@@ -4,7 +4,8 @@ import { DefinitionList } from '@/ui/page-parts';
 import type { SitOptions } from '../reads';
 import type { SitView } from '../sit-view';
 import { UPCOMING_SITS_WORDS } from '../words/screens';
-import { type CancelAction, CancelSitDialog } from './cancel-sit-dialog';
+import { CancelSitButton } from './cancel-sit-button';
+import type { CancelAction } from './cancel-sit-dialog';
 import { type ChangeAction, ChangeSitDialog } from './change-sit-dialog';
 
 interface UpcomingSitsProps {
@@ -38,7 +39,7 @@ export function UpcomingSits({ club, sits, options, change, cancel }: UpcomingSi
           <div className="mt-3 flex flex-wrap gap-2">
             {/* A new key after each change: the form must start from what is saved. */}
             <ChangeSitDialog key={sit.sequence} club={club} change={change} sit={sit} options={options} />
-            <CancelSitDialog club={club} cancel={cancel} sit={sit} />
+            <CancelSitButton club={club} cancel={cancel} sit={sit} />
           </div>
         </li>
       ))}

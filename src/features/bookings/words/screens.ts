@@ -8,10 +8,13 @@ export const CANCEL_SIT_WORDS = {
   reason: 'Reason',
   cancelSit: 'Cancel the sit',
   keep: 'Keep the sit',
-  cancelLabel: (stand: string, when: string) => `Cancel ${stand}, ${when}`,
   cancelSit2: (memberName: string) => `Cancel the sit of ${memberName}`,
   title: 'Cancel this sit',
+} as const;
+
+export const CANCEL_BUTTON_WORDS = {
   cancel: 'Cancel',
+  cancelLabel: (stand: string, when: string) => `Cancel ${stand}, ${when}`,
 } as const;
 
 export const CHANGE_SIT_WORDS = {

@@ -1,6 +1,5 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
 import { useMemo } from 'react';
 import type { GoodWindArc } from '@/core/types';
@@ -8,6 +7,7 @@ import { mapQuery } from '@/features/map/queries';
 import type { StandThing } from '@/features/map/thing';
 import { Button } from '@/ui/button';
 import { ErrorState, Loading } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import { TRIAL_MAP_WORDS as W } from '../words';
 
 const MapCanvas = dynamic(() => import('@/features/map/components/map-canvas').then((part) => part.MapCanvas), {
@@ -32,7 +32,7 @@ export interface TrialMapProps {
 
 /** The ground with the trial stand on it: tapped into place, dragged, and its winds turned by hand. */
 export function TrialMap({ club, at, arcs, onPlace, onTurn }: TrialMapProps) {
-  const query = useQuery(mapQuery(club));
+  const query = useRead(mapQuery(club));
   const view = query.data;
   const trial = useMemo<StandThing | null>(
     () =>

@@ -1,6 +1,5 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
 import { useDeferredValue, useMemo, useState } from 'react';
 import { compassSpan } from '@/core/arcs';
@@ -11,6 +10,7 @@ import { parseNumber } from '@/features/clubs/read-number';
 import { arcText } from '@/features/ground/arc-text';
 import { Button } from '@/ui/button';
 import { Loading } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import { Select, TextInput } from '@/ui/text-inputs';
 import { type CoverageAsk, type TrialWindow, trialArcs, trialSuitability } from '../coverage-schema';
 import { type PackedWinds, unpackWinds } from '../pack-winds';
@@ -172,7 +172,7 @@ export function TrialStand({ club, ask, winds: packed }: TrialStandProps) {
 function SeatText({ club, ...asked }: { club: string; trial: string; window: TrialWindow } & Seat) {
   const { trial, window: hunted, lat, lon } = asked;
   const ask = useMemo(() => ({ trial, window: hunted, lat, lon }), [trial, hunted, lat, lon]);
-  const query = useQuery(seatQuery(club, useDeferredValue(ask)));
+  const query = useRead(seatQuery(club, useDeferredValue(ask)));
   if (query.isError) {
     return (
       <p>

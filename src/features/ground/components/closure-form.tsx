@@ -1,11 +1,11 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { formatDay } from '@/core/day-time';
 import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
+import { queryClient } from '@/ui/query';
 import { DateInput, Select, TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { type ClosureForm, closureSchema } from '../closure-schema';
@@ -31,13 +31,12 @@ export interface ClosureFormProps {
 
 /** Closes days; booked sits that they fall on are shown before anything is saved. */
 export function ClosureFormView({ club, today, stands, standId, close }: ClosureFormProps) {
-  const queries = useQueryClient();
   const toast = useToast();
   const [question, setQuestion] = useState<Question | null>(null);
 
   async function agreed(typed: ClosureForm): Promise<boolean> {
     const { standId, fromDay, toDay } = typed;
-    const touched = await queries.fetchQuery(touchedSitsQuery(club, { standId, fromDay, toDay }));
+    const touched = await queryClient().fetchQuery(touchedSitsQuery(club, { standId, fromDay, toDay }));
     if (touched.length === 0) return true;
     return new Promise((answer) => setQuestion({ touched, answer }));
   }

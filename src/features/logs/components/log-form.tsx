@@ -9,7 +9,7 @@ import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { useKeptDraft } from '@/ui/form/use-kept-draft';
 import { Notice } from '@/ui/notices';
-import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-offline';
+import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-send-or-keep';
 import { Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { BUMP_FIELDS, COUNT_FIELDS, type LogForm, logFormSchema } from '../log-schema';

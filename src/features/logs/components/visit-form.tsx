@@ -8,7 +8,7 @@ import type { ActionResult } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
-import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-offline';
+import { KEPT_TOAST, useSendOrKeep } from '@/ui/offline/use-send-or-keep';
 import { Stepper } from '@/ui/stepper';
 import { DateInput, Select, Textarea, TimeInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';

@@ -1,6 +1,5 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import { Maximize2, Redo2, Ruler, Undo2 } from 'lucide-react';
 import { type ReactNode, useMemo, useState } from 'react';
 import { ContourWords } from '@/features/terrain/components/contour-words';
@@ -8,6 +7,7 @@ import { contoursQuery } from '@/features/terrain/queries';
 import { Button } from '@/ui/button';
 import { Checkbox } from '@/ui/choices';
 import { Notice } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import { Tabs } from '@/ui/tabs';
 import type { MapOverlay } from '../overlay';
 import { mapQuery } from '../queries';
@@ -43,7 +43,7 @@ const EVERYTHING: ReadonlySet<LayerGroup> = new Set(LAYER_GROUPS.map(({ value })
 /** The club's ground: the map, the list that says the same, and the tools to draw it. */
 export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps) {
   const { slug } = initial.club;
-  const query = useQuery({ ...mapQuery(slug), initialData: initial, initialDataUpdatedAt: initial.madeAt });
+  const query = useRead({ ...mapQuery(slug), initialData: initial, initialDataUpdatedAt: initial.madeAt });
   const view = query.data;
   const state = useDrawing(slug, view.things);
   const editor = useMapEditor(view, state, selectedId);
@@ -51,7 +51,7 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
   const [shown, setShown] = useState(EVERYTHING);
   const [imagery, setImagery] = useState(false);
   const [hills, setHills] = useState(false);
-  const contours = useQuery({ ...contoursQuery(slug), enabled: hills });
+  const contours = useRead({ ...contoursQuery(slug), enabled: hills });
   const { things, changes } = state;
   const { selected, doing } = editor;
   const may = view.may.stands || view.may.features || view.may.approaches;

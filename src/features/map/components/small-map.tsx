@@ -1,10 +1,10 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
 import { useMemo } from 'react';
 import { Button } from '@/ui/button';
 import { ErrorState, Loading } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import { factsOf } from '../facts';
 import { mapQuery } from '../queries';
 import type { MapThing } from '../thing';
@@ -34,7 +34,7 @@ export interface SmallMapProps {
 
 /** The ground about one stand with its ways in. Its code and its data come only when it is shown. */
 export function SmallMap({ club, standId, approachId = null }: SmallMapProps) {
-  const query = useQuery(mapQuery(club));
+  const query = useRead(mapQuery(club));
   const view = query.data;
   const things = useMemo(() => (view ? aboutStand(view.things, standId) : []), [view, standId]);
   const framed = useMemo(() => things.filter((thing) => thing.kind !== 'item' && thing.kind !== 'feature'), [things]);

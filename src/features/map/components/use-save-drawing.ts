@@ -1,8 +1,8 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { ClubCall } from '@/features/ground/components/form-types';
+import { queryClient } from '@/ui/query';
 import { useToast } from '@/ui/toast';
 import { applyChanges } from '../drawing/apply-changes';
 import { listChanges } from '../drawing/list-changes';
@@ -23,14 +23,13 @@ export function useSaveDrawing(
   save: SaveDrawing,
   onSaved: (ids: Record<string, string>) => void,
 ) {
-  const queries = useQueryClient();
   const toast = useToast();
   const [pending, setPending] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
   const [conflicts, setConflicts] = useState<DrawingConflict[]>([]);
 
   async function fresh(): Promise<readonly MapThing[]> {
-    const view = await queries.fetchQuery({ ...mapQuery(club), staleTime: 0 });
+    const view = await queryClient().fetchQuery({ ...mapQuery(club), staleTime: 0 });
     return view.things;
   }
 

@@ -1,6 +1,5 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
 import { useMemo, useState } from 'react';
 import type { WindowName } from '@/core/types';
@@ -9,6 +8,7 @@ import type { MapOverlay } from '@/features/map/overlay';
 import { mapQuery } from '@/features/map/queries';
 import type { MapView } from '@/features/map/thing';
 import { EmptyState, Loading } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import type { MomentAsk } from '../ask-moment';
 import type { MomentView } from '../moment-types';
 import { momentAsked } from '../queries';
@@ -43,7 +43,7 @@ function overlayOf(view: MomentView): MapOverlay {
 export function GroundMap({ packed, zone, save, selectedId, next }: GroundMapProps) {
   const [initial] = useState((): MapView => JSON.parse(packed));
   const { slug, units } = initial.club;
-  const map = useQuery({ ...mapQuery(slug), initialData: initial, initialDataUpdatedAt: initial.madeAt });
+  const map = useRead({ ...mapQuery(slug), initialData: initial, initialDataUpdatedAt: initial.madeAt });
   const stands = useMemo(
     () => map.data.things.flatMap((thing) => (thing.kind === 'stand' ? [{ id: thing.id, name: thing.name }] : [])),
     [map.data],
@@ -51,7 +51,7 @@ export function GroundMap({ packed, zone, save, selectedId, next }: GroundMapPro
   const [open, setOpen] = useState(false);
   const [asked, setAsked] = useState<MomentAsk>({ ...next, stand: '', step: 0 });
   const ask = stands.some(({ id }) => id === asked.stand) ? asked : { ...asked, stand: stands[0]?.id ?? '' };
-  const query = useQuery({ ...momentAsked(slug, ask), enabled: open && ask.stand !== '' });
+  const query = useRead({ ...momentAsked(slug, ask), enabled: open && ask.stand !== '' });
   const view = query.data;
   const overlay = useMemo(() => (view ? overlayOf(view) : null), [view]);
   const panel =

@@ -1,6 +1,5 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
 import { useMemo, useState } from 'react';
 import type { WindowName } from '@/core/types';
@@ -8,6 +7,7 @@ import { mapQuery } from '@/features/map/queries';
 import { Button } from '@/ui/button';
 import { RadioCards } from '@/ui/choices';
 import { ErrorState, Loading } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import { type DrawnLine, movementOverlay } from '../overlay-of';
 import { MOVEMENT_MAP_WORDS as W } from '../words';
 
@@ -23,7 +23,7 @@ const WINDOWS = [
 
 /** The lines of movement on the ground, with the deer's way in the window chosen. */
 export function MovementMap({ club, lines }: { club: string; lines: DrawnLine[] }) {
-  const query = useQuery(mapQuery(club));
+  const query = useRead(mapQuery(club));
   const [window, setWindow] = useState<WindowName>('morning');
   const overlay = useMemo(() => movementOverlay(lines, window), [lines, window]);
   const view = query.data;

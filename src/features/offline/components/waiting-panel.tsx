@@ -1,13 +1,14 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useEffect, useState } from 'react';
 import { formatClock, formatClock12 } from '@/core/day-time';
 import { Button } from '@/ui/button';
 import { Notice } from '@/ui/notices';
 import { useKeptAccount } from '@/ui/offline/account';
-import { useOnline, useWaiting } from '@/ui/offline/use-offline';
+import { useOnline } from '@/ui/offline/use-online';
+import { useWaiting } from '@/ui/offline/use-waiting';
 import { type WaitingItem, waitingStore } from '@/ui/offline/waiting-store';
+import { queryClient } from '@/ui/query';
 import { useToast } from '@/ui/toast';
 import { flushWaiting } from '../flush-waiting';
 import type { WaitingActions } from '../send-waiting';
@@ -15,7 +16,7 @@ import type { WaitingActions } from '../send-waiting';
 /** Between tries while something waits and the device thinks that it has a signal. */
 const AGAIN_MS = 20_000;
 
-interface Props {
+export interface WaitingPanelProps {
   zone: string;
   units: 'us' | 'metric';
   actions: WaitingActions;
@@ -26,7 +27,6 @@ let flushing: Promise<void> | null = null;
 /** Sends what waits whenever there is a signal; one run at a time in a tab, and the server takes each key once. */
 function useFlush(actions: WaitingActions, items: WaitingItem[], online: boolean): string | null {
   const account = useKeptAccount();
-  const queries = useQueryClient();
   const toast = useToast();
   const [held, setHeld] = useState<string | null>(null);
   const open = items.filter((item) => item.refused === null).length;
@@ -39,11 +39,11 @@ function useFlush(actions: WaitingActions, items: WaitingItem[], online: boolean
       setHeld(done.held);
       if (done.sent.length === 0) return;
       toast({ title: 'Sent', text: `${done.sent.map((item) => item.label).join('; ')}.` });
-      await queries.invalidateQueries();
+      await queryClient().invalidateQueries();
     })();
     await flushing.catch(() => undefined);
     flushing = null;
-  }, [account, actions, queries, toast]);
+  }, [account, actions, toast]);
   useEffect(() => {
     if (!online || open === 0) return;
     void flush();
@@ -53,7 +53,7 @@ function useFlush(actions: WaitingActions, items: WaitingItem[], online: boolean
   return held;
 }
 
-function WaitingLine({ item, zone, units }: { item: WaitingItem } & Omit<Props, 'actions'>) {
+function WaitingLine({ item, zone, units }: { item: WaitingItem } & Omit<WaitingPanelProps, 'actions'>) {
   const clock = units === 'us' ? formatClock12(item.at, zone) : formatClock(item.at, zone);
   return (
     <li className="py-2">
@@ -77,7 +77,7 @@ function WaitingLine({ item, zone, units }: { item: WaitingItem } & Omit<Props, 
 }
 
 /** What was pressed without signal, until it is sent; a refusal stays until it has been read. */
-export function WaitingPanel({ zone, units, actions }: Props) {
+export function WaitingPanel({ zone, units, actions }: WaitingPanelProps) {
   const items = useWaiting();
   const online = useOnline();
   const held = useFlush(actions, items, online);

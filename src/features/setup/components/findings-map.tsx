@@ -1,11 +1,11 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import dynamic from 'next/dynamic';
 import { useMemo, useState } from 'react';
 import { mapQuery } from '@/features/map/queries';
 import { Button } from '@/ui/button';
 import { ErrorState, Loading } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import type { FindingView } from '../reads';
 import { MAP_WORDS as W } from '../words/findings';
 
@@ -27,7 +27,7 @@ export function FindingsMap(props: FindingsMapProps) {
 }
 
 function NumberedMap({ club, findings }: FindingsMapProps) {
-  const query = useQuery(mapQuery(club));
+  const query = useRead(mapQuery(club));
   const overlay = useMemo(
     () => ({ sitters: findings.map(({ at }, i) => ({ at: [at.lon, at.lat], name: String(i + 1) })) }),
     [findings],

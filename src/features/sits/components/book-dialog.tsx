@@ -1,6 +1,5 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { useFieldArray } from 'react-hook-form';
 import { formatDay } from '@/core/day-time';
@@ -11,6 +10,7 @@ import { Dialog } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { Notice } from '@/ui/notices';
+import { queryClient } from '@/ui/query';
 import { Select, Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { BookActions, Hunter } from '../book-actions';
@@ -30,7 +30,7 @@ interface BookDialogProps {
 
 /** Books a stand, or moves the reader's own sit to it. A refusal is shown with its rule, and the list is read again. */
 export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogProps) {
-  const client = useQueryClient();
+  const client = queryClient();
   const toast = useToast();
   const [requestKey] = useState(newRequestKey);
   const { club, window, mine } = view;

@@ -1,9 +1,9 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import { formatDay } from '@/core/day-time';
 import { Dialog } from '@/ui/dialog';
 import { Loading, Notice } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import type { SitsAskText } from '../ask-schema';
 import { compareRows } from '../compare-rows';
 import { sitDetailQuery } from '../queries';
@@ -20,8 +20,8 @@ export interface CompareDialogProps {
 /** Two stands of a window side by side. */
 export function CompareDialog({ view, ask, standIds, onClose }: CompareDialogProps) {
   const { day, window } = view.window;
-  const first = useQuery(sitDetailQuery(view.club.slug, standIds[0], { ...ask, day, window }));
-  const second = useQuery(sitDetailQuery(view.club.slug, standIds[1], { ...ask, day, window }));
+  const first = useRead(sitDetailQuery(view.club.slug, standIds[0], { ...ask, day, window }));
+  const second = useRead(sitDetailQuery(view.club.slug, standIds[1], { ...ask, day, window }));
   const error = first.error ?? second.error;
   return (
     <Dialog

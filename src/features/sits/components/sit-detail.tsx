@@ -1,8 +1,8 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import { Button } from '@/ui/button';
 import { ErrorState, Loading } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import { SitTimeline } from '@/ui/wind/sit-timeline';
 import { mergeRows, type StripRow } from '@/ui/wind/strip-shares';
 import { WindStrip } from '@/ui/wind/wind-strip';
@@ -27,7 +27,7 @@ interface SitDetailProps {
 /** What lies behind a row, read when it is opened. */
 export function SitDetail({ view, standId, ask }: SitDetailProps) {
   const { day, window } = view.window;
-  const query = useQuery(sitDetailQuery(view.club.slug, standId, { ...ask, day, window }));
+  const query = useRead(sitDetailQuery(view.club.slug, standId, { ...ask, day, window }));
   if (query.data) return <DetailBody detail={query.data} view={view} ask={ask} />;
   if (query.isError) {
     return (

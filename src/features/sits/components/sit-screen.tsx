@@ -1,11 +1,11 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import { useEffect, useState } from 'react';
 import { formatDay } from '@/core/day-time';
 import { Button, ButtonLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
+import { useRead } from '@/ui/query';
 import type { SitsAskText } from '../ask-schema';
 import type { BookActions, Hunter } from '../book-actions';
 import { sitsQuery } from '../queries';
@@ -33,7 +33,7 @@ export interface SitScreenProps {
 
 export function SitScreen({ ask, initial, openStandId, actions, hunters, may, isNext }: SitScreenProps) {
   const { slug } = initial.club;
-  const query = useQuery({ ...sitsQuery(slug, ask), initialData: initial, initialDataUpdatedAt: initial.madeAt });
+  const query = useRead({ ...sitsQuery(slug, ask), initialData: initial, initialDataUpdatedAt: initial.madeAt });
   const view = query.data;
   const [openId, setOpenId] = useState(openStandId);
   const [booking, setBooking] = useState<OpenRow | null>(null);

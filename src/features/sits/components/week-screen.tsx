@@ -1,11 +1,11 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { Button, ButtonLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
+import { useRead } from '@/ui/query';
 import { Select } from '@/ui/text-inputs';
 import type { WeekAskText } from '../ask-schema';
 import { weekQuery } from '../queries';
@@ -19,7 +19,7 @@ import { WeekTable } from './week-table';
 export function WeekScreen({ ask, initial }: { ask: WeekAskText; initial: WeekView }) {
   const { slug } = initial.club;
   const router = useRouter();
-  const query = useQuery({ ...weekQuery(slug, ask), initialData: initial, initialDataUpdatedAt: initial.madeAt });
+  const query = useRead({ ...weekQuery(slug, ask), initialData: initial, initialDataUpdatedAt: initial.madeAt });
   const view = query.data ?? initial;
   const [show, setShow] = useState<WeekShow>('all');
   return (

@@ -1,11 +1,11 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
 import { sectorName } from '@/core/sectors';
 import { formatHeight, type Units } from '@/core/units';
 import { Button } from '@/ui/button';
 import { Notice } from '@/ui/notices';
+import { useRead } from '@/ui/query';
 import { slopeQuery } from '../queries';
 import type { SlopeView } from '../read-slope';
 import { SLOPE_WORDS } from '../words';
@@ -23,7 +23,7 @@ interface SlopeOfferProps {
 /** What heights of the ground say of a place; nothing is set until it is taken. */
 export function SlopeOffer({ club, units, at, onTake }: SlopeOfferProps) {
   const [asked, setAsked] = useState<{ lat: number; lon: number } | null>(null);
-  const query = useQuery({ ...slopeQuery(club, asked ?? { lat: 0, lon: 0 }), enabled: asked !== null });
+  const query = useRead({ ...slopeQuery(club, asked ?? { lat: 0, lon: 0 }), enabled: asked !== null });
   const stale = asked !== null && (asked.lat !== at?.lat || asked.lon !== at?.lon);
   const found = asked !== null && !stale ? query.data : undefined;
   return (

@@ -1,6 +1,7 @@
 import type { Metadata } from 'next';
 import { BoardView } from '@/features/board/components/board-view';
 import { readBoard } from '@/features/board/reads';
+import { BOARD_PAGE_WORDS as WORDS } from '@/features/board/words/board';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -16,7 +17,7 @@ import {
   walkUpAction,
 } from './actions';
 
-export const metadata: Metadata = { title: 'Board' };
+export const metadata: Metadata = { title: WORDS.title };
 
 const ACTIONS = {
   signIn: signInSitAction,
@@ -33,20 +34,19 @@ export default clubPage('board.read', async ({ scope }) => {
     <>
       <PageTitle
         over={name}
-        title="Board"
-        lead="Who is on the ground, and who is booked where today and tomorrow, by the club's clock."
+        title={WORDS.title}
+        lead={WORDS.lead}
         actions={
           <>
-            {scope.can('sits.book') && <ButtonLink href={`/clubs/${slug}/my-sits`}>My sits</ButtonLink>}
+            {scope.can('sits.book') && <ButtonLink href={`/clubs/${slug}/my-sits`}>{WORDS.mySits}</ButtonLink>}
             <ButtonLink look="quiet" href={`/clubs/${slug}/board/gate-sheet`}>
-              Gate sheet
+              {WORDS.gateSheet}
             </ButtonLink>
           </>
         }
       />
-      <Notice level="caution" title="Windrest is no rescue service" className="mb-6">
-        It mails those the club and the member have named, and sends nobody. When somebody is missing, call the
-        emergency number.
+      <Notice level="caution" title={WORDS.noRescueTitle} className="mb-6">
+        {WORDS.noRescue}
       </Notice>
       <BoardView
         club={slug}

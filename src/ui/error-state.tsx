@@ -1,0 +1,21 @@
+import type { ReactNode } from 'react';
+
+export interface ErrorStateProps {
+  title?: ReactNode;
+  /** What happened and what to do. */
+  children: ReactNode;
+  action?: ReactNode;
+  /** Words to quote to the club's admin. */
+  reference?: string;
+}
+
+export function ErrorState({ title = 'That did not work', children, action, reference }: ErrorStateProps) {
+  return (
+    <div role="alert" className="border-2 border-clay bg-panel px-4 py-5">
+      <p className="font-serif text-lg">{title}</p>
+      <div className="mt-1 max-w-prose">{children}</div>
+      {reference && <p className="mt-2 text-ink-soft text-sm">Reference: {reference}</p>}
+      {action && <div className="mt-4 flex flex-wrap gap-2">{action}</div>}
+    </div>
+  );
+}
