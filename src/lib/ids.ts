@@ -31,6 +31,7 @@ export const ID_PREFIXES = {
   mail: 'mal',
   adjustment: 'adj',
   draw: 'drw',
+  drawRun: 'drn',
 } as const;
 
 export type IdKind = keyof typeof ID_PREFIXES;

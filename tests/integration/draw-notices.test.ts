@@ -2,9 +2,10 @@ import { and, eq } from 'drizzle-orm';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { DEFAULT_NOTICE_CHOICES, type NoticeChoices } from '@/core/notices/notice-kinds';
 import { reader, write } from '@/db/client';
-import { drawEntries, noticeLinks, outbox } from '@/db/schema';
+import { drawResults, noticeLinks, outbox } from '@/db/schema';
 import type { OpenDrawInput } from '@/features/draws/draw-schema';
-import { cancelDraw, enterDraw, openDraw } from '@/features/draws/open-draw';
+import { enterDraw } from '@/features/draws/enter-draw';
+import { cancelDraw, openDraw } from '@/features/draws/open-draw';
 import { publishDraw } from '@/features/draws/publish-draw';
 import { runDraw } from '@/features/draws/run-draw';
 import { acceptSwap, offerSwap } from '@/features/draws/swap-sits';
@@ -62,7 +63,7 @@ const choose = (who: TestMember, more: Partial<NoticeChoices>) =>
 async function open(more: Partial<OpenDrawInput> = {}, now = TEST_NOW): Promise<string> {
   const points = { pointsPerMiss: 1, resetOnGiven: true, workHoursPerPoint: 0 };
   const closes = { closesDay: '2026-11-07', closesClock: '17:00' };
-  const what = { day: DAY, windows: 'morning' as const, standIds: [creek, ridge], note: 'Opening day.' };
+  const what = { slots: [{ day: DAY, windows: 'morning' as const }], standIds: [creek, ridge], note: 'Opening day.' };
   return (await openDraw(admin.scope, { ...what, ...closes, ...points, ...more }, now)).id;
 }
 
@@ -70,13 +71,20 @@ async function open(more: Partial<OpenDrawInput> = {}, now = TEST_NOW): Promise<
 async function publish(): Promise<{ drawId: string; won: TestMember[]; lost: TestMember }> {
   const drawId = await open();
   for (const who of [ada, ben, cal]) {
-    const wishes = { drawId, weapon: 'bow' as const, choices: [creek, ridge], anyByScore: false };
+    const wishes = {
+      drawId,
+      weapon: 'bow' as const,
+      slots: [0],
+      choices: [creek, ridge],
+      anyByScore: false,
+      guests: [],
+    };
     await enterDraw(who.scope, wishes, TEST_NOW);
   }
   setClock(() => AFTER);
   await runDraw(admin.scope, drawId, AFTER);
   await publishDraw(admin.scope, drawId, AFTER);
-  const entries = await reader().select().from(drawEntries).where(eq(drawEntries.drawId, drawId));
+  const entries = await reader().select().from(drawResults).where(eq(drawResults.drawId, drawId));
   const standOf = (who: TestMember) => entries.find(({ memberId }) => memberId === who.id)?.standId ?? null;
   const won = [ada, ben, cal].filter((who) => standOf(who) !== null);
   const lost = [ada, ben, cal].find((who) => standOf(who) === null);
@@ -117,7 +125,7 @@ describe('notices of draws', () => {
     expect(sent.map(({ toEmail }) => toEmail).sort()).toEqual(emails(ada, ben, cal));
     expect(await told('Drawn: ')).toEqual(emails(...won));
     expect(await told('No stand drawn: Tue 10 Nov, morning')).toEqual([lost.email]);
-    const entries = await reader().select().from(drawEntries).where(eq(drawEntries.drawId, drawId));
+    const entries = await reader().select().from(drawResults).where(eq(drawResults.drawId, drawId));
     for (const who of [ada, ben, cal]) {
       const entry = entries.find(({ memberId }) => memberId === who.id);
       const text = sent.find(({ toEmail }) => toEmail === who.email)?.message?.text ?? '';
@@ -142,9 +150,9 @@ describe('notices of draws', () => {
     const { drawId, won } = await publish();
     const [one = ada, two = ben] = won;
     await tellDraws(AFTER + MINUTE);
-    await offerSwap(one.scope, { drawId, memberId: two.id }, AFTER + 2 * MINUTE);
+    await offerSwap(one.scope, { drawId, memberId: two.id, slot: 0 }, AFTER + 2 * MINUTE);
     await tellDraws(AFTER + 3 * MINUTE);
-    await offerSwap(one.scope, { drawId, memberId: two.id }, AFTER + 4 * MINUTE);
+    await offerSwap(one.scope, { drawId, memberId: two.id, slot: 0 }, AFTER + 4 * MINUTE);
     await tellDraws(AFTER + 5 * MINUTE);
     expect(await told('Swap offered: ')).toEqual([two.email]);
     const text = (await mails()).find(({ subject }) => subject.startsWith('Swap'))?.message?.text ?? '';
@@ -155,8 +163,8 @@ describe('notices of draws', () => {
   it('say nothing of an offer taken before it was told', async () => {
     const { drawId, won } = await publish();
     const [one = ada, two = ben] = won;
-    await offerSwap(one.scope, { drawId, memberId: two.id }, AFTER + MINUTE);
-    await acceptSwap(two.scope, { drawId, memberId: one.id }, AFTER + 2 * MINUTE);
+    await offerSwap(one.scope, { drawId, memberId: two.id, slot: 0 }, AFTER + MINUTE);
+    await acceptSwap(two.scope, { drawId, memberId: one.id, slot: 0 }, AFTER + 2 * MINUTE);
     await tellDraws(AFTER + 3 * MINUTE);
     expect(await told('Swap offered: ')).toEqual([]);
     expect(await told('Drawn: ')).toEqual(emails(...won));
@@ -164,13 +172,13 @@ describe('notices of draws', () => {
 
   it('reach nobody who chose them off, whatever happens', async () => {
     for (const who of [ada, ben, cal]) await choose(who, { kinds: ['weekly'] });
-    await open({ day: '2026-11-13' });
+    await open({ slots: [{ day: '2026-11-13', windows: 'morning' }] });
     await tellDraws(TEST_NOW + MINUTE);
     expect(await mails()).toEqual([]);
     const { drawId, won } = await publish();
     const [one = ada, two = ben] = won;
-    await offerSwap(one.scope, { drawId, memberId: two.id }, AFTER + MINUTE);
-    const next = await open({ day: '2026-11-14', closesDay: '2026-11-12' }, AFTER);
+    await offerSwap(one.scope, { drawId, memberId: two.id, slot: 0 }, AFTER + MINUTE);
+    const next = await open({ slots: [{ day: '2026-11-14', windows: 'morning' }], closesDay: '2026-11-12' }, AFTER);
     await cancelDraw(admin.scope, next, AFTER + MINUTE);
     await choose(cal, { kinds: ['draw_changed'] });
     await tellDraws(AFTER + 2 * MINUTE);
@@ -187,7 +195,10 @@ describe('notices of draws', () => {
     expect(at.get(ada.email)).toBe(Date.UTC(2026, 10, 4, 17));
     expect(at.get(ben.email)).toBe(Date.UTC(2026, 10, 5, 13));
     // Another whose entries close at 13:00 of the same day.
-    await open({ windows: 'evening', closesDay: '2026-11-04', closesClock: '13:00' }, TEST_NOW + MINUTE);
+    await open(
+      { slots: [{ day: DAY, windows: 'evening' }], closesDay: '2026-11-04', closesClock: '13:00' },
+      TEST_NOW + MINUTE,
+    );
     await tellDraws(TEST_NOW + 2 * MINUTE);
     const late = (await mails()).find(({ toEmail, subject }) => toEmail === ben.email && subject.includes('evening'));
     expect(late?.nextAttemptAt).toBe(Date.UTC(2026, 10, 4, 16));

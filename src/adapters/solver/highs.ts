@@ -1,26 +1,35 @@
 import { Worker } from 'node:worker_threads';
 import { z } from 'zod';
-import type { ZeroOneProgram } from '@/core/draw/build-program';
-import type { SolveAnswer, SolveOptions, Solver } from './port';
+import type { Program } from '@/core/draw/build-program';
+import type { SolveAnswer, SolveHooks, SolveOptions, SolveProgress, Solver } from './port';
 import { WORKER_CODE } from './worker-code';
 
-/** Model states of HiGHS (its modelStatus constants). */
+/** Model states of HiGHS (its modelStatus constants): the last stands for a limit of nodes. */
 const OPTIMAL = 7;
 const TIME_LIMIT = 13;
+const SOLUTION_LIMIT = 16;
 
 /** Beyond its own time limit a worker gets this long to load and to answer before it is stopped. */
 const GRACE_MS = 15_000;
 
-const messageSchema = z.object({
+const WHOLE_WITHIN = 1e-6;
+
+const number = z.number().nullable();
+const answerSchema = z.object({
   status: z.number(),
   /** null: none was found. */
   columns: z.array(z.number()).nullable(),
-  value: z.number().nullable(),
-  bound: z.number().nullable(),
+  value: number,
+  bound: number,
 });
-type Message = z.output<typeof messageSchema>;
+const messageSchema = z.union([
+  z.object({ answer: answerSchema }),
+  z.object({ progress: z.object({ seconds: z.number(), value: number, bound: number }) }),
+]);
+type Answer = z.output<typeof answerSchema>;
+type Ended = { kind: 'answered'; answer: Answer } | { kind: 'no_answer_in_time' } | { kind: 'stopped' };
 
-function modelOf({ gain, rows }: ZeroOneProgram) {
+function modelOf({ gain, whole, rows }: Program) {
   const starts = [0];
   for (const row of rows) starts.push((starts.at(-1) ?? 0) + row.columns.length);
   return {
@@ -30,7 +39,7 @@ function modelOf({ gain, rows }: ZeroOneProgram) {
     colCost: gain,
     colLower: gain.map(() => 0),
     colUpper: gain.map(() => 1),
-    integrality: gain.map(() => 1),
+    integrality: whole.map((one) => (one ? 1 : 0)),
     rowLower: rows.map(() => Number.NEGATIVE_INFINITY),
     rowUpper: rows.map((row) => row.most),
     matrix: {
@@ -44,49 +53,74 @@ function modelOf({ gain, rows }: ZeroOneProgram) {
   };
 }
 
-function runWorker(program: ZeroOneProgram, { seconds, gap, seed }: SolveOptions): Promise<Message | null> {
-  const options = {
+function runWorker(program: Program, options: SolveOptions, hooks: SolveHooks): Promise<Ended> {
+  const { seconds, gap, mostNodes, seed } = options;
+  const settings = {
     time_limit: seconds,
     mip_rel_gap: gap,
     mip_abs_gap: 0,
+    mip_max_nodes: mostNodes,
+    // Draws have no symmetry worth the search, and starting over costs more here than it saves (npm run bench:draw).
+    mip_detect_symmetry: false,
+    mip_allow_restart: false,
+    mip_min_logging_interval: 0.5,
     random_seed: seed % 2147483647,
     output_flag: false,
   };
+  if (hooks.signal?.aborted) return Promise.resolve({ kind: 'stopped' });
   return new Promise((resolve, reject) => {
-    const worker = new Worker(WORKER_CODE, { eval: true, workerData: { model: modelOf(program), options } });
-    const timer = setTimeout(() => settle(() => resolve(null)), seconds * 1000 + GRACE_MS);
+    const worker = new Worker(WORKER_CODE, { eval: true, workerData: { model: modelOf(program), options: settings } });
+    const timer = setTimeout(() => settle(() => resolve({ kind: 'no_answer_in_time' })), seconds * 1000 + GRACE_MS);
+    const stop = () => settle(() => resolve({ kind: 'stopped' }));
     const settle = (done: () => void) => {
       clearTimeout(timer);
-      worker.terminate();
+      hooks.signal?.removeEventListener('abort', stop);
+      void worker.terminate();
       done();
     };
-    worker.once('message', (message) => {
+    hooks.signal?.addEventListener('abort', stop, { once: true });
+    worker.on('message', (message) => {
       const read = messageSchema.safeParse(message);
-      settle(() => (read.success ? resolve(read.data) : reject(read.error)));
+      if (!read.success) return settle(() => reject(read.error));
+      const { data } = read;
+      if ('progress' in data) hooks.onProgress?.(data.progress satisfies SolveProgress);
+      else settle(() => resolve({ kind: 'answered', answer: data.answer }));
     });
     worker.once('error', (error) => settle(() => reject(error)));
-    worker.once('exit', () => settle(() => resolve(null)));
+    worker.once('exit', () => settle(() => resolve({ kind: 'no_answer_in_time' })));
   });
 }
 
+const isWhole = (columns: readonly number[]) =>
+  columns.every((share) => Math.abs(share - Math.round(share)) <= WHOLE_WITHIN);
+
 /** HiGHS in a worker thread, one for each answer. */
 export const highsSolver: Solver = {
-  async solve(program, options): Promise<SolveAnswer> {
+  async solve(program, options, hooks = {}): Promise<SolveAnswer> {
     if (program.gain.length === 0) {
-      return { kind: 'found', columns: [], value: 0, bound: 0, gap: 0, timeUp: false };
+      return { kind: 'found', columns: [], value: 0, bound: 0, gap: 0, cutBy: null };
     }
-    const answer = await runWorker(program, options);
-    if (!answer) return { kind: 'no_answer_in_time' };
-    const { status, value } = answer;
-    const timeUp = status === TIME_LIMIT;
-    if (answer.columns === null || value === null) {
-      return timeUp ? { kind: 'no_answer_in_time' } : { kind: 'impossible', status };
+    const ended = await runWorker(program, options, hooks);
+    if (ended.kind !== 'answered') return ended;
+    const { status, columns, value } = ended.answer;
+    const cutBy = ({ [TIME_LIMIT]: 'time', [SOLUTION_LIMIT]: 'nodes' } as const)[status] ?? null;
+    if (columns === null || value === null) {
+      return cutBy ? { kind: 'no_answer_in_time' } : { kind: 'impossible', status };
     }
-    if (status !== OPTIMAL && !timeUp) return { kind: 'impossible', status };
+    if (status !== OPTIMAL && !cutBy) return { kind: 'impossible', status };
+    if (!isWhole(columns)) {
+      return highsSolver.solve({ ...program, whole: program.whole.map(() => true) }, options, hooks);
+    }
     const all = program.gain.reduce((sum, gain) => sum + Math.max(0, gain), 0);
-    const bound = Math.max(answer.bound ?? all, value);
+    const bound = Math.max(ended.answer.bound ?? all, value);
     const left = value > 0 ? (bound - value) / value : 0;
-    const columns = answer.columns.map((share) => Math.round(share));
-    return { kind: 'found', columns, value, bound, gap: left < 1e-9 ? 0 : left, timeUp };
+    return {
+      kind: 'found',
+      columns: columns.map((share) => Math.round(share)),
+      value,
+      bound,
+      gap: left < 1e-9 ? 0 : left,
+      cutBy,
+    };
   },
 };

@@ -8,18 +8,30 @@ const { join } = require('node:path');
 const { parentPort, workerData } = require('node:worker_threads');
 const load = createRequire(join(process.cwd(), 'package.json'))('highs');
 const { model: data, options } = workerData;
+const finite = (value) => (Number.isFinite(value) ? value : null);
 (load.default ?? load)().then((highs) => {
+  const tell = ({ data }) => {
+    parentPort.postMessage({
+      progress: {
+        seconds: data.running_time,
+        value: finite(data.mip_primal_bound),
+        bound: finite(data.mip_dual_bound),
+      },
+    });
+  };
   highs.withModel((model) => {
     model.passModel(data);
     for (const [name, value] of Object.entries(options)) model.options.set(name, value);
-    const { modelStatus } = model.run();
+    const { mipLogging, mipImprovingSolution } = highs.constants.callbackType;
+    const { modelStatus } = model.run({ [mipLogging]: tell, [mipImprovingSolution]: tell });
     const { colValue } = model.getSolution();
-    const finite = (value) => (Number.isFinite(value) ? value : null);
     parentPort.postMessage({
-      status: modelStatus,
-      columns: model.info.get('primal_solution_status') === 2 ? Array.from(colValue) : null,
-      value: finite(model.getObjectiveValue()),
-      bound: finite(model.info.get('mip_dual_bound')),
+      answer: {
+        status: modelStatus,
+        columns: model.info.get('primal_solution_status') === 2 ? Array.from(colValue) : null,
+        value: finite(model.getObjectiveValue()),
+        bound: finite(model.info.get('mip_dual_bound')),
+      },
     });
   });
 });

@@ -1,68 +1,104 @@
 /**
- * Who may be given which stand for one window, and what each giving is worth. Members and stands are numbered from 0; a
- * kind is a group of members for whom the distances between stands are the same (a weapon).
+ * Who may be given which place, and what each giving is worth. A place is one stand in one slot; a slot is a window of a
+ * day, and no two slots share hours. Members, slots and places are numbered from 0; a kind is a group of members for whom
+ * the distances between stands are the same (a weapon).
  */
 export interface Allotment {
   /** Kind of each member, 0 or more. */
   kinds: number[];
-  stands: number;
-  /** worth[member][stand], above 0; null: a rule forbids it, or it was not asked for. */
+  slots: number;
+  /** Slot of each place. */
+  slotOf: number[];
+  /** worth[member][place], 0 or more; null: a rule forbids it, or it was not asked for. */
   worth: (number | null)[][];
-  /** Pairs of stands of which one at most is used; a kind of null means whoever sits there. */
+  /** steps[member][n]: what the place numbered n that a member is given adds besides; 0 or more, never rising. */
+  steps: number[][];
+  /** Pairs of places of which one at most is used. */
   conflicts: Conflict[];
-  /** Stands that are reached by at least one way clear of every stand used. */
-  ways: StandWays[];
+  /** Places that are reached by at least one way clear of every place used. */
+  ways: PlaceWays[];
+  limits: Limit[];
 }
 
-export interface Place {
-  stand: number;
+export interface Use {
+  place: number;
+  /** null: whoever sits there. */
   kind: number | null;
 }
 
 export interface Conflict {
-  a: Place;
-  b: Place;
+  a: Use;
+  b: Use;
 }
 
-export interface StandWays {
-  stand: number;
-  /** For each way in, the stands that shut it while somebody sits there. */
+export interface PlaceWays {
+  place: number;
+  /** For each way in, the places that shut it while somebody sits there. */
   shutBy: number[][];
 }
 
-/** The stand given to each member; null: none. */
-export type Given = (number | null)[];
+/** Of these places a member is given so many at most; with a null member, so many are used by anybody. */
+export interface Limit {
+  member: number | null;
+  places: number[];
+  most: number;
+}
+
+/** given[member][slot]: the place; null: none. */
+export type Given = (number | null)[][];
 
 export type Fault =
   | 'forbidden'
-  | 'stand_twice'
+  | 'place_twice'
   | 'conflict'
   | 'no_way'
-  /** As many answers as members are wanted. */
-  | 'wrong_length';
+  | 'limit'
+  /** As many answers as members and slots are wanted, each a place of its slot. */
+  | 'wrong_shape';
 
-function holds(place: Place, given: Given, kinds: readonly number[]): boolean {
-  return given.some((stand, member) => stand === place.stand && (place.kind === null || kinds[member] === place.kind));
+export function nothingGiven({ kinds, slots }: Pick<Allotment, 'kinds' | 'slots'>): Given {
+  return kinds.map(() => Array.from({ length: slots }, () => null));
+}
+
+export function placesOf(given: Given, member: number | null): number[] {
+  const rows = member === null ? given : [given[member] ?? []];
+  return rows.flat().filter((place) => place !== null);
+}
+
+function holds(use: Use, given: Given, kinds: readonly number[]): boolean {
+  return given.some((row, member) => row.includes(use.place) && (use.kind === null || kinds[member] === use.kind));
 }
 
 /** The first thing that stands against an answer; null: it keeps every rule. */
 export function faultOf(allotment: Allotment, given: Given): Fault | null {
-  const { kinds, worth, conflicts, ways } = allotment;
-  if (given.length !== kinds.length) return 'wrong_length';
-  const used = given.filter((stand) => stand !== null);
-  if (given.some((stand, member) => stand !== null && (worth[member]?.[stand] ?? null) === null)) return 'forbidden';
-  if (new Set(used).size < used.length) return 'stand_twice';
+  const { kinds, slots, slotOf, worth, conflicts, ways, limits } = allotment;
+  const shaped = given.every(
+    (row) => row.length === slots && row.every((place, slot) => place === null || slotOf[place] === slot),
+  );
+  if (given.length !== kinds.length || !shaped) return 'wrong_shape';
+  if (given.some((row, member) => row.some((place) => place !== null && (worth[member]?.[place] ?? null) === null))) {
+    return 'forbidden';
+  }
+  const used = placesOf(given, null);
+  if (new Set(used).size < used.length) return 'place_twice';
   if (conflicts.some(({ a, b }) => holds(a, given, kinds) && holds(b, given, kinds))) return 'conflict';
   const shut = ways.some(
-    ({ stand, shutBy }) => used.includes(stand) && shutBy.every((by) => by.some((other) => used.includes(other))),
+    ({ place, shutBy }) => used.includes(place) && shutBy.every((by) => by.some((other) => used.includes(other))),
   );
-  return shut ? 'no_way' : null;
+  if (shut) return 'no_way';
+  const over = limits.some(
+    ({ member, places, most }) => placesOf(given, member).filter((place) => places.includes(place)).length > most,
+  );
+  return over ? 'limit' : null;
 }
 
-/** Sum of what was given is worth. */
-export function totalWorth(allotment: Allotment, given: Given): number {
-  return given.reduce<number>(
-    (sum, stand, member) => sum + (stand === null ? 0 : (allotment.worth[member]?.[stand] ?? 0)),
-    0,
+/** Sum of what was given is worth, with the steps. */
+export function totalWorth({ worth, steps }: Allotment, given: Given): number {
+  const sum = (values: (number | null | undefined)[]) => values.reduce<number>((all, one) => all + (one ?? 0), 0);
+  return sum(
+    given.map((_, member) => {
+      const places = placesOf(given, member);
+      return sum(places.map((place) => worth[member]?.[place])) + sum(places.map((_, n) => steps[member]?.[n]));
+    }),
   );
 }

@@ -1,14 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { DEFAULT_CLUB_RULES } from '../booking/rules';
-import type { Allotment } from './allotment';
-import { drawConflicts } from './draw-conflicts';
-import { whyNot } from './explain-result';
 import { fairnessWords, gini } from './fairness';
 import { countPoints, DEFAULT_POINT_RULES } from './points';
-import { solveByTrying } from './solve-by-trying';
 import { turnOrder } from './turn-order';
-import { turnWeight, worthOf } from './worth';
+import { stepsOf, turnWeight, worthOf } from './worth';
 
 describe('points', () => {
   it('adds one for a miss, starts again after a stand, and gives one for a work day of 4 hours (practice)', () => {
@@ -52,71 +47,23 @@ describe('the order of turns', () => {
 describe('worth', () => {
   it('falls with each choice, and counts the rest by score only when asked to', () => {
     const entry = { choices: ['a', 'b'], anyByScore: false };
-    expect(worthOf(entry, 'a', null)).toBe(300);
-    expect(worthOf(entry, 'b', 90)).toBe(275);
+    expect(worthOf(entry, 'a', null)).toBe(100);
+    expect(worthOf(entry, 'b', 90)).toBe(75);
     expect(worthOf(entry, 'c', 90)).toBeNull();
-    expect(worthOf({ ...entry, anyByScore: true }, 'c', 80)).toBeCloseTo(200 + 56.25 * 0.8, 9);
-    expect(worthOf({ choices: [], anyByScore: true }, 'c', 70)).toBe(270);
+    expect(worthOf({ ...entry, anyByScore: true }, 'c', 80)).toBeCloseTo(56.25 * 0.8, 9);
+    expect(worthOf({ choices: [], anyByScore: true }, 'c', 70)).toBe(70);
   });
 
   it('goes from 2 for the first in line to 1 for the last', () => {
     expect([0, 1, 2].map((turn) => turnWeight(turn, 3))).toEqual([2, 1.5, 1]);
     expect(turnWeight(0, 1)).toBe(1);
   });
-});
 
-describe('stands in each other’s way', () => {
-  const line = (...points: [number, number][]) => points.map(([x, y]) => ({ eastM: x, northM: y }));
-  const stands = [
-    { id: 'a', at: { eastM: 0, northM: 0 }, approaches: [line([0, -500], [0, 0])] },
-    { id: 'b', at: { eastM: 150, northM: 0 }, approaches: [] },
-    { id: 'c', at: { eastM: 5, northM: -400 }, approaches: [] },
-    { id: 'd', at: { eastM: 2000, northM: 0 }, approaches: [line([1995, 900], [2000, 0]), line([1000, 0], [2000, 0])] },
-    { id: 'e', at: { eastM: 1997, northM: 700 }, approaches: [] },
-  ];
-  const spacingM = { ...DEFAULT_CLUB_RULES.spacingM, bow: 100, rifle: 200 };
-  const rules = { ...DEFAULT_CLUB_RULES, spacingM, passThroughM: 90 };
-  const pair = (a: number, b: number) => ({ a: { stand: a, kind: null }, b: { stand: b, kind: null } });
-
-  it('takes the wider spacing of the two weapons', () => {
-    expect(drawConflicts({ stands, weapons: ['bow'], occupied: [], rules }).conflicts).toEqual([]);
-    expect(drawConflicts({ stands, weapons: ['rifle'], occupied: [], rules }).conflicts).toEqual([pair(0, 1)]);
-    const both = drawConflicts({ stands, weapons: ['bow', 'rifle'], occupied: [], rules }).conflicts;
-    expect(both).toHaveLength(3);
-    expect(both).not.toContainEqual({ a: { stand: 0, kind: 0 }, b: { stand: 1, kind: 0 } });
-  });
-
-  it('shuts a way that passes an occupied stand, and leaves the other way open', () => {
-    const { ways } = drawConflicts({ stands, weapons: ['bow'], occupied: [], rules });
-    expect(ways).toEqual([{ stand: 0, shutBy: [[2]] }]);
-    const taken = drawConflicts({ stands, weapons: ['bow'], occupied: [{ eastM: 1500, northM: 0 }], rules });
-    expect(taken.ways).toEqual([
-      { stand: 0, shutBy: [[2]] },
-      { stand: 3, shutBy: [[4]] },
-    ]);
-  });
-});
-
-describe('why a stand was not given', () => {
-  const allotment: Allotment = {
-    kinds: [0, 0],
-    stands: 3,
-    worth: [
-      [600, 550, null],
-      [300, 275, 250],
-    ],
-    conflicts: [{ a: { stand: 0, kind: null }, b: { stand: 1, kind: null } }],
-    ways: [],
-  };
-  it('names the rule, the holder, or the stand that is too near', () => {
-    const { given, value } = solveByTrying(allotment);
-    expect({ given, value }).toEqual({ given: [0, 2], value: 850 });
-    const why = (stand: number, ruleText: string | null = null) =>
-      whyNot(allotment, given, { member: 1, stand, ruleText });
-    expect(why(0)).toEqual({ kind: 'taken', by: 0 });
-    expect(why(1)).toEqual({ kind: 'blocked', by: 0 });
-    expect(why(0, 'It is resting.')).toEqual({ kind: 'rule', text: 'It is resting.' });
-    expect(whyNot(allotment, [null, 2], { member: 1, stand: 1, ruleText: null })).toEqual({ kind: 'total' });
+  it('is never more for a second stand of the first in line than for any first of the last', () => {
+    const [first = 0, second = 0, third = 0] = stepsOf(3);
+    expect(second).toBeGreaterThan(third);
+    const best = worthOf({ choices: ['a'], anyByScore: false }, 'a', null) ?? 0;
+    expect(turnWeight(0, 9) * (second + best)).toBeLessThanOrEqual(turnWeight(8, 9) * first);
   });
 });
 

@@ -1,27 +1,32 @@
-import { type Allotment, faultOf, type Given, totalWorth } from './allotment';
+import { type Allotment, faultOf, type Given, nothingGiven, totalWorth } from './allotment';
 
 /** The best answer by trying every one there is; only for a handful of members. A yardstick for tests. */
 export function solveByTrying(allotment: Allotment): { value: number; given: Given } {
-  const members = allotment.kinds.length;
-  let best: { value: number; given: Given } = { value: 0, given: allotment.kinds.map(() => null) };
-  const given: Given = [...best.given];
+  const { kinds, slots, slotOf, worth } = allotment;
+  let best = { value: 0, given: nothingGiven(allotment) };
+  const given = nothingGiven(allotment);
   const used = new Set<number>();
-  function place(member: number): void {
-    if (member === members) {
+  function settle(turn: number): void {
+    const member = Math.floor(turn / slots);
+    const slot = turn % slots;
+    const row = given[member];
+    if (!row) {
       const value = totalWorth(allotment, given);
-      if (value > best.value && faultOf(allotment, given) === null) best = { value, given: [...given] };
+      if (value > best.value && faultOf(allotment, given) === null) {
+        best = { value, given: given.map((one) => [...one]) };
+      }
       return;
     }
-    place(member + 1);
-    for (let stand = 0; stand < allotment.stands; stand++) {
-      if (used.has(stand) || (allotment.worth[member]?.[stand] ?? null) === null) continue;
-      given[member] = stand;
-      used.add(stand);
-      place(member + 1);
-      used.delete(stand);
-      given[member] = null;
-    }
+    settle(turn + 1);
+    slotOf.forEach((at, place) => {
+      if (at !== slot || used.has(place) || (worth[member]?.[place] ?? null) === null) return;
+      row[slot] = place;
+      used.add(place);
+      settle(turn + 1);
+      used.delete(place);
+      row[slot] = null;
+    });
   }
-  place(0);
+  if (kinds.length > 0) settle(0);
   return best;
 }

@@ -1,6 +1,6 @@
 import { formatDay } from '@/core/day-time';
 import type { SitWindow, Weapon } from '@/core/types';
-import type { Tx } from '@/db/client';
+import type { ReadFrom, Tx } from '@/db/client';
 import type { SitGuest } from '@/db/schema';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
@@ -41,7 +41,12 @@ function spanOf(spans: SitWindow[]): { startAt: number; endAt: number } {
   return { startAt: Math.min(...spans.map((s) => s.startAt)), endAt: Math.max(...spans.map((s) => s.endAt)) };
 }
 
-function seatRefusals(context: BookingContext, wanted: WantedSit, standName: string): Refusal[] {
+/** A seat for each of the party. */
+export function seatRefusals(
+  context: BookingContext,
+  wanted: Pick<WantedSit, 'standId' | 'guests'>,
+  standName: string,
+): Refusal[] {
   const seats = context.seats.get(wanted.standId) ?? 1;
   const people = wanted.guests.length + 1;
   if (wanted.guests.length === 0 || people <= seats) return [];
@@ -49,13 +54,17 @@ function seatRefusals(context: BookingContext, wanted: WantedSit, standName: str
 }
 
 /** Guests with an account: in the club, and within the dates of their invitation. */
-async function guestRefusals(scope: ClubScope, tx: Tx, wanted: WantedSit): Promise<Refusal[]> {
+export async function guestRefusals(
+  scope: ClubScope,
+  from: ReadFrom,
+  wanted: Pick<WantedSit, 'memberId' | 'guests' | 'day'>,
+): Promise<Refusal[]> {
   const ids = wanted.guests.flatMap((guest) => guest.memberId ?? []);
   if (new Set(wanted.guests.map(guestKey)).size < wanted.guests.length) {
     throw invalid('guests', SIT_ERRORS.guestNamedTwice);
   }
   if (ids.includes(wanted.memberId)) throw invalid('guests', SIT_ERRORS.ownGuest);
-  const found = await listMembersForRules(scope, ids, tx);
+  const found = await listMembersForRules(scope, ids, from);
   if (found.length < ids.length) throw invalid('guests', SIT_ERRORS.guestGone);
   return found
     .flatMap((member) => guestMemberGates(member, wanted.day))

@@ -1,6 +1,6 @@
-import { and, asc, desc, eq, isNotNull, isNull } from 'drizzle-orm';
+import { and, asc, desc, eq, isNull } from 'drizzle-orm';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
-import { chores, drawEntries, draws, memberships, sits, users, workDayMembers, workDays } from '@/db/schema';
+import { drawEntries, draws, memberships, users } from '@/db/schema';
 import type { ClubScope } from '@/server/scope';
 
 export type DrawRow = typeof draws.$inferSelect;
@@ -33,37 +33,34 @@ export async function updateDraw(scope: ClubScope, tx: Tx, id: string, set: Part
     .where(and(eq(draws.clubId, scope.club.id), eq(draws.id, id)));
 }
 
-/** Entries of people still in the club, by name, with what became of their sits. */
+/** Entries of people still in the club, by name. */
 export function listEntries(scope: ClubScope, drawId: string, from: ReadFrom = reader()) {
   return from
-    .select({ entry: drawEntries, userId: users.id, name: users.name, sitStatus: sits.status })
+    .select({ entry: drawEntries, userId: users.id, name: users.name })
     .from(drawEntries)
     .innerJoin(memberships, eq(memberships.id, drawEntries.memberId))
     .innerJoin(users, eq(users.id, memberships.userId))
-    .leftJoin(sits, eq(sits.id, drawEntries.sitId))
     .where(and(eq(drawEntries.clubId, scope.club.id), eq(drawEntries.drawId, drawId), isNull(memberships.removedAt)))
     .orderBy(asc(users.name), asc(drawEntries.memberId));
 }
 
 export async function putEntry(tx: Tx, row: typeof drawEntries.$inferInsert): Promise<void> {
-  const { weapon, choices, anyByScore, at } = row;
+  const { drawId: _, clubId: __, memberId: ___, ...wishes } = row;
   await tx
     .insert(drawEntries)
     .values(row)
-    .onConflictDoUpdate({
-      target: [drawEntries.drawId, drawEntries.memberId],
-      set: { weapon, choices, anyByScore, at },
-    });
+    .onConflictDoUpdate({ target: [drawEntries.drawId, drawEntries.memberId], set: wishes });
 }
 
 const entryOf = (scope: ClubScope, drawId: string, memberId: string) =>
   and(eq(drawEntries.clubId, scope.club.id), eq(drawEntries.drawId, drawId), eq(drawEntries.memberId, memberId));
 
+/** What a member brought to the draw when it was made. */
 export async function updateEntry(
   scope: ClubScope,
   tx: Tx,
   at: Pick<EntryRow, 'drawId' | 'memberId'>,
-  set: Partial<EntryRow>,
+  set: Pick<EntryRow, 'points' | 'turn'>,
 ): Promise<void> {
   await tx
     .update(drawEntries)
@@ -73,32 +70,4 @@ export async function updateEntry(
 
 export async function deleteEntry(scope: ClubScope, tx: Tx, drawId: string, memberId: string): Promise<void> {
   await tx.delete(drawEntries).where(entryOf(scope, drawId, memberId));
-}
-
-/** What members got of the draws published so far. */
-export function listPastResults(scope: ClubScope, from: ReadFrom = reader()) {
-  return from
-    .select({ memberId: drawEntries.memberId, day: draws.day, standId: drawEntries.standId })
-    .from(drawEntries)
-    .innerJoin(draws, eq(draws.id, drawEntries.drawId))
-    .where(and(eq(drawEntries.clubId, scope.club.id), eq(draws.state, 'published')));
-}
-
-/** Hours credited to members on work days and for chores. */
-export async function listWorkHours(
-  scope: ClubScope,
-  from: ReadFrom = reader(),
-): Promise<{ memberId: string | null; day: string | null; hours: number | null }[]> {
-  const onDays = await from
-    .select({ memberId: workDayMembers.memberId, day: workDays.day, hours: workDayMembers.hours })
-    .from(workDayMembers)
-    .innerJoin(workDays, eq(workDays.id, workDayMembers.workDayId))
-    .where(
-      and(eq(workDayMembers.clubId, scope.club.id), isNotNull(workDayMembers.hours), isNull(workDays.cancelledAt)),
-    );
-  const forChores = await from
-    .select({ memberId: chores.doneBy, day: chores.doneOn, hours: chores.hours })
-    .from(chores)
-    .where(and(eq(chores.clubId, scope.club.id), isNotNull(chores.doneOn), isNull(chores.removedAt)));
-  return [...onDays, ...forChores];
 }

@@ -1,7 +1,7 @@
 import { countPoints, type PointEvent, type PointRules } from '@/core/draw/points';
 import { type ReadFrom, reader } from '@/db/client';
 import type { ClubScope } from '@/server/scope';
-import { listPastResults, listWorkHours } from './draws-data';
+import { listPastResults, listWorkHours } from './points-data';
 
 /** Points of each member from draws and work before a day; a member not named has none. */
 export async function loadPoints(

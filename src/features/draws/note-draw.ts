@@ -1,12 +1,12 @@
 import type { Tx } from '@/db/client';
-import { dayAndWindow } from '@/features/bookings/sit-words';
 import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { type DrawRow, findDraw } from './draws-data';
+import { slotsTitle } from './slots';
+import { DRAW_AUDIT, DRAW_ERRORS } from './words/errors';
 
-export const drawName = (draw: Pick<DrawRow, 'day' | 'windows'>) =>
-  `the draw for ${dayAndWindow(draw.day, draw.windows, true)}`;
+export const drawName = (draw: Pick<DrawRow, 'slots'>) => DRAW_AUDIT.name(slotsTitle(draw.slots));
 
 /** The audit row of a draw. */
 export function noteDraw(
@@ -30,11 +30,5 @@ export async function needDraw(
   const draw = await findDraw(scope, id, from);
   if (!draw) throw notFound();
   if (states.includes(draw.state)) return draw;
-  const how = {
-    open: 'has not been made yet',
-    drawn: 'has been made',
-    published: 'is published',
-    cancelled: 'was called off',
-  }[draw.state];
-  throw new AppError('conflict', `This draw ${how}. Reload the page to see how it stands.`);
+  throw new AppError('conflict', DRAW_ERRORS.states[draw.state]);
 }

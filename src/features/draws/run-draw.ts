@@ -1,116 +1,154 @@
 import { chooseSolver } from '@/adapters/solver/choose';
-import { dayOf } from '@/core/day-time';
-import { type Allotment, faultOf } from '@/core/draw/allotment';
+import type { SolveProgress } from '@/adapters/solver/port';
+import { dayOf, formatDay } from '@/core/day-time';
+import { faultOf, type Given, placesOf } from '@/core/draw/allotment';
 import { buildProgram, readGiven } from '@/core/draw/build-program';
-import { drawConflicts } from '@/core/draw/draw-conflicts';
-import { turnOrder } from '@/core/draw/turn-order';
-import { turnWeight, worthOf } from '@/core/draw/worth';
-import { reader, write } from '@/db/client';
-import { gatesFor, loadBookingContext } from '@/features/bookings/booking-context';
-import { clockText, windowsHeld } from '@/features/bookings/sit-words';
-import { readSits } from '@/features/sits/reads';
+import { solveOptions } from '@/core/draw/solve-options';
+import { write } from '@/db/client';
+import type { DrawResult } from '@/db/schema';
+import { clockText } from '@/features/bookings/sit-words';
+import { newId } from '@/lib/ids';
+import { now as clock } from '@/server/clock';
 import { AppError } from '@/server/errors';
+import { log } from '@/server/log';
 import type { ClubScope } from '@/server/scope';
-import { type DrawRow, listEntries, updateDraw, updateEntry } from './draws-data';
-import { loadPoints } from './load-points';
+import { type DrawRow, updateDraw, updateEntry } from './draws-data';
+import { type LoadedDraw, loadDraw } from './load-draw';
 import { drawName, needDraw, noteDraw } from './note-draw';
+import { replaceResults } from './results-data';
+import { isAtWork, LEASE_MS, liveRun } from './runs';
+import { findLastRun, insertRun, updateLiveRun } from './runs-data';
 import { tellResults } from './tell-results';
+import { DRAW_AUDIT, DRAW_ERRORS } from './words/errors';
 
-/** An answer within a hundredth of the best is taken; after so many seconds the best one found. */
-const GAP = 0.01;
-const SECONDS = 20;
+const BEAT_MS = 1_000;
+const MAY_BE_MADE = ['open', 'drawn'] as const;
 
-async function loadScores(scope: ClubScope, draw: DrawRow, now: number): Promise<Map<string, number>> {
-  const window = windowsHeld(draw.windows)[0];
-  const { open, blocked } = await readSits(scope, { day: draw.day, window }, now, { rules: 'leave_out' });
-  return new Map([...open, ...blocked].map((row) => [row.standId, row.score]));
+export interface StartedRun {
+  runId: string;
+  /** Whether this call began it; else it was at work already. */
+  began: boolean;
 }
 
-function seedNumber(seed: string): number {
-  let sum = 0;
-  for (const char of seed) sum = (Math.imul(sum, 31) + (char.codePointAt(0) ?? 0)) >>> 0;
-  return sum;
+/** Notes that the draw is being made; while one run is at work a second call gets that one. */
+export async function beginRun(scope: ClubScope, drawId: string, now: number): Promise<StartedRun> {
+  return write(async (tx) => {
+    const draw = await needDraw(scope, drawId, MAY_BE_MADE, tx);
+    if (now < draw.closesAt) {
+      const day = formatDay(dayOf(draw.closesAt, scope.club.zone));
+      throw new AppError('conflict', DRAW_ERRORS.stillOpen(clockText(draw.closesAt, scope.club), day));
+    }
+    const last = await findLastRun(scope, drawId, tx);
+    if (last && isAtWork(last, now)) return { runId: last.id, began: false };
+    if (last) await updateLiveRun(scope, tx, last.id, { endedAt: now, outcome: 'lost' });
+    const runId = newId('drawRun');
+    const row = { drawId, clubId: scope.club.id, startedBy: scope.member.id, startedAt: now };
+    await insertRun(tx, { id: runId, ...row, leaseUntil: now + LEASE_MS });
+    return { runId, began: true };
+  });
 }
 
-/** Makes the draw: turns by points and chance, then the allotment of the greatest total worth that keeps every rule. */
-export async function runDraw(scope: ClubScope, drawId: string, now: number): Promise<{ id: string; given: number }> {
-  const draw = await needDraw(scope, drawId, ['open', 'drawn']);
-  if (now < draw.closesAt) {
-    throw new AppError(
-      'conflict',
-      `Members may enter until ${clockText(draw.closesAt, scope.club)} on ${dayOf(draw.closesAt, scope.club.zone)}. Make the draw after that.`,
-    );
+/** Stops the run at work; the draw stays as it was. Its process hears of it at its next beat. */
+export async function stopRun(scope: ClubScope, drawId: string, now: number): Promise<{ id: string }> {
+  return write(async (tx) => {
+    const run = await liveRun(scope, drawId, now, tx);
+    if (!run) throw new AppError('conflict', DRAW_ERRORS.notAtWork);
+    await updateLiveRun(scope, tx, run.id, { endedAt: now, outcome: 'stopped' });
+    return { id: drawId };
+  });
+}
+
+/** Begins to make the draw and answers at once; the work goes on in this process, its state stands in its run. */
+export async function startDraw(scope: ClubScope, drawId: string, now: number): Promise<StartedRun> {
+  const started = await beginRun(scope, drawId, now);
+  if (started.began) {
+    void workOn(scope, drawId, started.runId, now).catch((err: unknown) => log.error({ err, drawId }, 'draw run'));
   }
-  const entries = await listEntries(scope, drawId);
-  if (entries.length === 0) throw new AppError('conflict', 'Nobody entered this draw. Call it off.');
-  const points = await loadPoints(scope, { before: draw.day, rules: draw.pointRules });
-  const pointsOf = (memberId: string) => points.get(memberId) ?? 0;
-  const turns = turnOrder(
-    draw.seed,
-    entries.map(({ entry }) => ({ id: entry.memberId, points: pointsOf(entry.memberId) })),
-  );
-  const turnOf = (memberId: string) => turns.indexOf(memberId);
-  const scores = entries.some(({ entry }) => entry.anyByScore) ? await loadScores(scope, draw, now) : new Map();
-  const windows = windowsHeld(draw.windows);
-  const base = { day: draw.day, windows, standIds: draw.standIds, now };
-  const ground = await loadBookingContext(scope, { ...base, memberId: null }, reader());
-  const stands = draw.standIds.flatMap((id) => ground.stands.get(id) ?? []);
-  const weapons = [...new Set(entries.map(({ entry }) => entry.weapon))];
-  const occupied = ground.otherSits
-    .filter((sit) => sit.day === draw.day && sit.windows.some((window) => windows.includes(window)))
-    .map((sit) => sit.standAt);
+  return started;
+}
 
-  const ruleTexts: (string | null)[][] = [];
-  for (const { entry } of entries) {
-    const context = await loadBookingContext(scope, { ...base, memberId: entry.memberId }, reader());
-    ruleTexts.push(
-      stands.map((stand) => {
-        const gates = gatesFor(context, stand.id, { weapon: entry.weapon, guests: [] });
-        return gates[0]?.text ?? null;
+/** Makes the draw and waits for it. Throws what stood against it. */
+export async function runDraw(scope: ClubScope, drawId: string, now: number): Promise<{ id: string }> {
+  const { runId, began } = await beginRun(scope, drawId, now);
+  if (!began) throw new AppError('conflict', DRAW_ERRORS.atWork);
+  const refusal = await workOn(scope, drawId, runId, now);
+  if (refusal) throw refusal;
+  return { id: drawId };
+}
+
+/** Does the work of a run to its end, whatever that is; gives the refusal it ended with. */
+export async function workOn(scope: ClubScope, drawId: string, runId: string, now: number): Promise<AppError | null> {
+  const stop = new AbortController();
+  let progress: SolveProgress | null = null;
+  const beat = setInterval(() => void tell().catch((err: unknown) => log.error({ err, runId }, 'draw beat')), BEAT_MS);
+  async function tell() {
+    const whole = (worth: number | null | undefined) => (worth == null ? null : Math.round(worth));
+    const set = { leaseUntil: clock() + LEASE_MS, value: whole(progress?.value), bound: whole(progress?.bound) };
+    if (!(await write((tx) => updateLiveRun(scope, tx, runId, set)))) stop.abort();
+  }
+  try {
+    const draw = await needDraw(scope, drawId, MAY_BE_MADE);
+    const loaded = await loadDraw(scope, draw, now);
+    const onProgress = (heard: SolveProgress) => {
+      progress = heard;
+    };
+    const solved = await solveDraw(loaded, draw.seed, { signal: stop.signal, onProgress });
+    if (solved) await keepResults(scope, { draw, runId, loaded, ...solved }, now);
+    return null;
+  } catch (error) {
+    const known = error instanceof AppError;
+    if (!known) log.error({ err: error, drawId }, 'the draw could not be made');
+    const refusal = known ? error : new AppError('internal', DRAW_ERRORS.failed);
+    const end = { endedAt: clock(), outcome: 'failed' as const, message: refusal.message };
+    await write((tx) => updateLiveRun(scope, tx, runId, end));
+    return refusal;
+  } finally {
+    clearInterval(beat);
+  }
+}
+
+/** null: it was stopped. */
+async function solveDraw(
+  { allotment }: LoadedDraw,
+  seed: string,
+  hooks: { signal: AbortSignal; onProgress: (progress: SolveProgress) => void },
+): Promise<{ given: Given; result: DrawResult } | null> {
+  const built = buildProgram(allotment);
+  const answer = await chooseSolver().solve(built.program, solveOptions(seed), hooks);
+  if (answer.kind === 'stopped') return null;
+  if (answer.kind !== 'found') throw new AppError('unavailable', DRAW_ERRORS.noAnswer);
+  const given = readGiven(allotment, built, answer.columns);
+  const fault = faultOf(allotment, given);
+  if (fault) throw new AppError('internal', DRAW_ERRORS.failed, { log: `the solver broke a rule: ${fault}` });
+  const { value, bound, gap, cutBy } = answer;
+  return { given, result: { value, bound, gap, cutBy } };
+}
+
+/** Keeps the outcome if the run still stands: one that was stopped, or left for lost, changes nothing. */
+async function keepResults(
+  scope: ClubScope,
+  made: { draw: DrawRow; runId: string; loaded: LoadedDraw; given: Given; result: DrawResult },
+  now: number,
+): Promise<void> {
+  const { draw, runId, loaded, given, result } = made;
+  const { members, stands, slots } = loaded;
+  const told = tellResults({ ...loaded, given });
+  await write(async (tx) => {
+    await needDraw(scope, draw.id, MAY_BE_MADE, tx);
+    if (!(await updateLiveRun(scope, tx, runId, { endedAt: clock(), outcome: 'made' }))) return;
+    for (const { entry, points, turn } of members) await updateEntry(scope, tx, entry, { points, turn });
+    const rows = members.flatMap(({ entry }, member) =>
+      entry.slots.map((slot) => {
+        const place = given[member]?.[slot] ?? null;
+        const standId = place === null ? null : (stands[place % stands.length]?.id ?? null);
+        const reasons = told[member]?.[slot] ?? [];
+        return { drawId: draw.id, clubId: scope.club.id, memberId: entry.memberId, slot, standId, reasons };
       }),
     );
-  }
-  const worth = entries.map(({ entry }, member) =>
-    stands.map((stand, at) => {
-      if (ruleTexts[member]?.[at] !== null) return null;
-      const plain = worthOf(entry, stand.id, scores.get(stand.id) ?? null);
-      return plain === null ? null : Math.round(plain * turnWeight(turnOf(entry.memberId), entries.length) * 10);
-    }),
-  );
-  if (worth.every((row) => row.every((one) => one === null))) {
-    const text = ruleTexts.flat().find((one) => one !== null);
-    throw new AppError('conflict', `Nobody may be given any of the stands asked for. ${text ?? ''}`.trim());
-  }
-  const allotment: Allotment = {
-    kinds: entries.map(({ entry }) => weapons.indexOf(entry.weapon)),
-    stands: stands.length,
-    worth,
-    ...drawConflicts({ stands, weapons, occupied, rules: scope.club.rules }),
-  };
-  const built = buildProgram(allotment);
-  const answer = await chooseSolver().solve(built.program, { seconds: SECONDS, gap: GAP, seed: seedNumber(draw.seed) });
-  if (answer.kind !== 'found') {
-    throw new AppError('unavailable', 'No answer was found in time. Try again, or draw for fewer stands.');
-  }
-  const given = readGiven(allotment, built, answer.columns);
-  if (faultOf(allotment, given) !== null) {
-    throw new AppError('internal', 'The draw could not be made. Try again.', { log: 'the solver broke a rule' });
-  }
-  const { value, bound, gap, timeUp } = answer;
-  const members = entries.map(({ entry, name }) => {
-    return { name, entry, points: pointsOf(entry.memberId), turn: turnOf(entry.memberId) + 1 };
+    await replaceResults(scope, tx, draw.id, rows);
+    await updateDraw(scope, tx, draw.id, { state: 'drawn', drawnAt: now, result });
+    const detail = { seed: draw.seed, slots: slots.length, given: placesOf(given, null).length, ...result };
+    const summary = DRAW_AUDIT.made(drawName(draw));
+    await noteDraw(scope, tx, { id: draw.id, verb: 'made', summary, detail }, now);
   });
-  const reasons = tellResults({ allotment, given, members, stands, ruleTexts });
-  await write(async (tx) => {
-    await needDraw(scope, drawId, ['open', 'drawn'], tx);
-    for (const [index, { entry, points: had, turn }] of members.entries()) {
-      const at = given[index] ?? null;
-      const standId = at === null ? null : (stands[at]?.id ?? null);
-      await updateEntry(scope, tx, entry, { points: had, turn, standId, reasons: reasons[index] ?? [] });
-    }
-    await updateDraw(scope, tx, drawId, { state: 'drawn', drawnAt: now, result: { value, bound, gap, timeUp } });
-    const detail = { seed: draw.seed, value, gap };
-    await noteDraw(scope, tx, { id: drawId, verb: 'made', summary: `Made ${drawName(draw)}.`, detail }, now);
-  });
-  return { id: drawId, given: given.filter((one) => one !== null).length };
 }

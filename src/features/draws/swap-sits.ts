@@ -5,72 +5,62 @@ import { findSit, type SitDetail } from '@/features/bookings/data';
 import { newRequestKey } from '@/lib/request-key';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
-import { listEntries, updateEntry } from './draws-data';
 import { needDraw, noteDraw } from './note-draw';
+import { listResults, updateResult } from './results-data';
+import { DRAW_AUDIT, DRAW_ERRORS } from './words/errors';
 
-async function loadHeld(scope: ClubScope, tx: Tx, drawId: string, memberId: string, now: number) {
-  const found = (await listEntries(scope, drawId, tx)).find(({ entry }) => entry.memberId === memberId);
-  if (!found) throw notFound();
-  const sit = found.entry.sitId === null ? null : await findSit(scope, found.entry.sitId, tx);
-  if (sit?.status !== 'booked' || sit.endAt <= now) {
-    throw new AppError('conflict', `${found.name} has no sit of this draw to swap.`);
-  }
-  await refuseIfSigned(scope, sit, tx);
-  return { entry: found.entry, name: found.name, sit };
+interface SwapInput {
+  drawId: string;
+  memberId: string;
+  slot: number;
 }
 
-/** Offers one's own stand to another member of the draw for theirs; a new offer takes the place of the last. */
-export async function offerSwap(
-  scope: ClubScope,
-  input: { drawId: string; memberId: string },
-  now: number,
-): Promise<{ name: string }> {
+async function loadHeld(scope: ClubScope, tx: Tx, at: SwapInput, now: number) {
+  const found = (await listResults(scope, at.drawId, tx)).find(
+    ({ result }) => result.memberId === at.memberId && result.slot === at.slot,
+  );
+  if (!found) throw notFound();
+  const { result, name } = found;
+  const sit = result.sitId === null ? null : await findSit(scope, result.sitId, tx);
+  if (sit?.status !== 'booked' || sit.endAt <= now) throw new AppError('conflict', DRAW_ERRORS.noSitToSwap(name));
+  await refuseIfSigned(scope, sit, tx);
+  return { result, name, sit };
+}
+
+/** Offers one's own stand of a window to another member of the draw for theirs; a new offer takes the place of the last. */
+export async function offerSwap(scope: ClubScope, input: SwapInput, now: number): Promise<{ name: string }> {
   return write(async (tx) => {
     await needDraw(scope, input.drawId, ['published'], tx);
-    const own = await loadHeld(scope, tx, input.drawId, scope.member.id, now);
-    const other = await loadHeld(scope, tx, input.drawId, input.memberId, now);
-    if (own.entry.memberId === other.entry.memberId) throw new AppError('invalid', 'Choose another member.');
-    await updateEntry(scope, tx, own.entry, { swapWith: other.entry.memberId });
-    const summary = `${own.name} offered ${own.sit.standName} to ${other.name} for ${other.sit.standName}.`;
-    await noteDraw(scope, tx, { id: input.drawId, verb: 'swap_offered', summary }, now);
+    if (input.memberId === scope.member.id) throw new AppError('invalid', DRAW_ERRORS.otherMember);
+    const own = await loadHeld(scope, tx, { ...input, memberId: scope.member.id }, now);
+    const other = await loadHeld(scope, tx, input, now);
+    await updateResult(scope, tx, own.result, { swapWith: other.result.memberId });
+    const summary = DRAW_AUDIT.offered(own.name, own.sit.standName, other.name, other.sit.standName);
+    const detail = { slot: input.slot, memberId: input.memberId };
+    await noteDraw(scope, tx, { id: input.drawId, verb: 'swap_offered', summary, detail }, now);
     return { name: other.name };
   });
 }
 
-function swapped(sit: SitDetail, memberId: string, weapon: SitDetail['weapon']) {
-  const { standId, day, windows } = sit;
-  return {
-    memberId,
-    standId,
-    day,
-    windows,
-    weapon,
-    approachId: null,
-    guests: [],
-    note: '',
-    requestKey: newRequestKey(),
-  };
+/** The stand of one sit for the people of another: weapon and guests come along. */
+function swapped({ standId, day, windows }: SitDetail, { memberId, weapon, guests }: SitDetail) {
+  return { standId, day, windows, memberId, weapon, guests, approachId: null, note: '', requestKey: newRequestKey() };
 }
 
 /** Takes an offer: both sits change hands in one transaction, under every rule. */
-export async function acceptSwap(
-  scope: ClubScope,
-  input: { drawId: string; memberId: string },
-  now: number,
-): Promise<{ standName: string }> {
+export async function acceptSwap(scope: ClubScope, input: SwapInput, now: number): Promise<{ standName: string }> {
   return write(async (tx) => {
     await needDraw(scope, input.drawId, ['published'], tx);
-    const own = await loadHeld(scope, tx, input.drawId, scope.member.id, now);
-    const other = await loadHeld(scope, tx, input.drawId, input.memberId, now);
-    if (other.entry.swapWith !== scope.member.id)
-      throw new AppError('conflict', `${other.name} offers no swap to you.`);
-    const reason = `${other.name} and ${own.name} swapped stands.`;
+    const own = await loadHeld(scope, tx, { ...input, memberId: scope.member.id }, now);
+    const other = await loadHeld(scope, tx, input, now);
+    if (other.result.swapWith !== scope.member.id) throw new AppError('conflict', DRAW_ERRORS.noOffer(other.name));
+    const reason = DRAW_AUDIT.swapped(other.name, own.name);
     await cancelSitIn(tx, scope, own.sit, reason, now);
     await cancelSitIn(tx, scope, other.sit, reason, now);
-    const mine = await placeSitIn(tx, scope, swapped(other.sit, scope.member.id, own.sit.weapon), now);
-    const theirs = await placeSitIn(tx, scope, swapped(own.sit, other.entry.memberId, other.sit.weapon), now);
-    await updateEntry(scope, tx, own.entry, { sitId: mine.id, standId: mine.standId, swapWith: null });
-    await updateEntry(scope, tx, other.entry, { sitId: theirs.id, standId: theirs.standId, swapWith: null });
+    const mine = await placeSitIn(tx, scope, swapped(other.sit, own.sit), now);
+    const theirs = await placeSitIn(tx, scope, swapped(own.sit, other.sit), now);
+    await updateResult(scope, tx, own.result, { sitId: mine.id, standId: mine.standId, swapWith: null });
+    await updateResult(scope, tx, other.result, { sitId: theirs.id, standId: theirs.standId, swapWith: null });
     await noteDraw(scope, tx, { id: input.drawId, verb: 'swapped', summary: reason }, now);
     return { standName: mine.standName };
   });

@@ -2,8 +2,10 @@ import { dayOf, formatDay } from '@/core/day-time';
 import type { ReadFrom } from '@/db/client';
 import { env } from '@/env';
 import { findSit } from '@/features/bookings/data';
-import { clockText, dayAndWindow } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/sit-words';
 import { type DrawRow, listEntries } from '@/features/draws/draws-data';
+import { listResults, type ResultLine } from '@/features/draws/results-data';
+import { slotName, slotsTitle } from '@/features/draws/slots';
 import { getStand } from '@/features/ground/stands-data';
 import type { ClubScope } from '@/server/scope';
 import type { NoticePerson } from './choices-data';
@@ -22,7 +24,7 @@ export interface DrawMailsAsk {
 }
 export type DrawMail = { person: NoticePerson; mail: NoticeMail };
 
-const whenOf = (draw: DrawRow, withYear = false) => dayAndWindow(draw.day, draw.windows, withYear);
+const whenOf = (draw: DrawRow, withYear = false) => slotsTitle(draw.slots, withYear);
 
 const { opened, calledOff, published, swap } = DRAW_MAILS;
 
@@ -69,28 +71,44 @@ function calledOffMails(scope: ClubScope, { event, draw, people }: DrawMailsAsk)
     }));
 }
 
+/** What came of one window, and until when it is of use to know. */
+async function drawnPart(scope: ClubScope, draw: DrawRow, { result }: ResultLine, from: ReadFrom) {
+  const stand = result.standId === null ? null : await getStand(scope, result.standId, from);
+  const drawn = result.standId === null ? null : (stand?.name ?? published.goneStand);
+  const sit = result.sitId === null ? null : await findSit(scope, result.sitId, from);
+  const outcome = published.outcome(drawn);
+  const several = draw.slots.length > 1;
+  return {
+    drawn,
+    startAt: sit?.startAt ?? null,
+    paragraphs: [
+      several ? published.inWindow(slotName(draw.slots[result.slot]), outcome) : outcome,
+      ...(drawn !== null && sit?.status !== 'booked' ? [published.givenUp] : []),
+      ...result.reasons,
+    ],
+  };
+}
+
 async function publishedMails(scope: ClubScope, ask: DrawMailsAsk, from: ReadFrom): Promise<DrawMail[]> {
   const { event, draw, people } = ask;
+  const results = await listResults(scope, draw.id, from);
   const mails: DrawMail[] = [];
   for (const { entry } of await listEntries(scope, draw.id, from)) {
     const person = people.find(({ memberId }) => memberId === entry.memberId);
     if (!person) continue;
-    const stand = entry.standId === null ? null : await getStand(scope, entry.standId, from);
-    const drawn = entry.standId === null ? null : (stand?.name ?? published.goneStand);
-    const sit = entry.sitId === null ? null : await findSit(scope, entry.sitId, from);
-    const gone = entry.standId !== null && sit?.status !== 'booked';
+    const parts = [];
+    for (const line of results) {
+      if (line.result.memberId === entry.memberId) parts.push(await drawnPart(scope, draw, line, from));
+    }
+    const stands = [...new Set(parts.flatMap(({ drawn }) => drawn ?? []))];
+    const starts = parts.flatMap(({ startAt }) => startAt ?? []);
     mails.push({
       person,
       mail: {
         ...frame(scope, draw, `${event.id}:${person.memberId}`, published.button),
-        subject: published.subject(drawn, whenOf(draw)),
-        paragraphs: [
-          published.opening(whenOf(draw, true)),
-          published.outcome(drawn),
-          ...(gone ? [published.givenUp] : []),
-          ...(entry.reasons ?? []),
-        ],
-        ...(sit ? { latest: sit.startAt - BEFORE_MS } : {}),
+        subject: published.subject(stands.length === 0 ? null : stands.join(', '), whenOf(draw)),
+        paragraphs: [published.opening(whenOf(draw, true)), ...parts.flatMap(({ paragraphs }) => paragraphs)],
+        ...(starts.length > 0 ? { latest: Math.min(...starts) - BEFORE_MS } : {}),
       },
     });
   }
@@ -100,23 +118,25 @@ async function publishedMails(scope: ClubScope, ask: DrawMailsAsk, from: ReadFro
 /** The offer as it stands now: one taken or replaced since is told to nobody. */
 async function swapMails(scope: ClubScope, ask: DrawMailsAsk, from: ReadFrom, now: number): Promise<DrawMail[]> {
   const { event, draw, people } = ask;
-  const entries = await listEntries(scope, draw.id, from);
-  const offer = entries.find(({ userId, entry }) => userId === event.actorUserId && entry.swapWith !== null);
-  const asked = entries.find(({ entry }) => entry.memberId === offer?.entry.swapWith);
-  const person = people.find(({ memberId }) => memberId === asked?.entry.memberId);
-  if (!offer?.entry.sitId || !asked?.entry.sitId || !person) return [];
-  const theirs = await findSit(scope, offer.entry.sitId, from);
-  const own = await findSit(scope, asked.entry.sitId, from);
+  const results = (await listResults(scope, draw.id, from)).filter(({ result }) => result.slot === event.detail.slot);
+  const offer = results.find(({ userId, result }) => userId === event.actorUserId && result.swapWith !== null);
+  const asked = results.find(({ result }) => result.memberId === offer?.result.swapWith);
+  const person = people.find(({ memberId }) => memberId === asked?.result.memberId);
+  if (!offer?.result.sitId || !asked?.result.sitId || !person) return [];
+  const when = slotName(draw.slots[offer.result.slot]);
+  const whenWithYear = slotName(draw.slots[offer.result.slot], true);
+  const theirs = await findSit(scope, offer.result.sitId, from);
+  const own = await findSit(scope, asked.result.sitId, from);
   if (theirs?.status !== 'booked' || own?.status !== 'booked' || own.endAt <= now) return [];
   const mail = {
     ...frame(scope, draw, `swap:${theirs.id}:${own.id}:${person.memberId}`, swap.button),
-    subject: swap.subject(theirs.standName, own.standName, whenOf(draw)),
+    subject: swap.subject(theirs.standName, own.standName, when),
     paragraphs: [
       swap.opening({
         member: offer.name,
         theirs: theirs.standName,
         own: own.standName,
-        when: whenOf(draw, true),
+        when: whenWithYear,
       }),
       swap.after,
     ],

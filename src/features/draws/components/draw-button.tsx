@@ -5,6 +5,7 @@ import type { ActionResult } from '@/server/doors';
 import { Button } from '@/ui/button';
 import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { useToast } from '@/ui/toast';
+import { DRAW_BUTTON_WORDS } from '../words/buttons';
 
 export interface DrawButtonProps<Values> {
   club: string;
@@ -26,7 +27,7 @@ export function DrawButton<Values>(props: DrawButtonProps<Values>) {
   const toast = useToast();
   async function confirm() {
     const answer = await act(club, values).catch(() => null);
-    if (!answer) return 'The server could not be reached. Try again.';
+    if (!answer) return DRAW_BUTTON_WORDS.lost;
     if (!answer.ok) return answer.error.message;
     toast({ title: done });
   }

@@ -1,85 +1,36 @@
 import type { ComponentProps } from 'react';
 import { Badge } from '@/ui/page-parts';
-import type { DrawResultLine, DrawScreen } from '../reads';
+import type { DrawResultLine, SlotResults } from '../reads';
+import { RESULT_LIST_WORDS as WORDS } from '../words/results';
 import { DrawButton } from './draw-button';
 
 type Act<Values> = ComponentProps<typeof DrawButton<Values>>['act'];
+type SwapValues = { drawId: string; memberId: string; slot: number };
 
 export interface DrawResultsProps {
   club: string;
-  draw: Pick<DrawScreen, 'id' | 'state' | 'results' | 'ownSitId'>;
-  offer: Act<{ drawId: string; memberId: string }>;
-  accept: Act<{ drawId: string; memberId: string }>;
+  draw: { id: string; published: boolean };
+  results: SlotResults;
+  offer: Act<SwapValues>;
+  accept: Act<SwapValues>;
   giveBack: Act<{ sitId: string }>;
 }
 
-/** Every member in the order of turns: what they were given and why, and what can be done about it afterwards. */
-export function DrawResults({ club, draw, offer, accept, giveBack }: DrawResultsProps) {
-  const results = draw.results ?? [];
-  const own = results.find((line) => line.own);
-  const swaps = draw.state === 'published' && own?.held === true;
-  const buttons = (line: DrawResultLine) => {
-    if (!swaps || !line.held) return null;
-    const values = { drawId: draw.id, memberId: line.memberId };
-    if (line.own) {
-      return draw.ownSitId === null ? null : (
-        <DrawButton
-          club={club}
-          values={{ sitId: draw.ownSitId }}
-          label="Give it back"
-          title={`Give back ${line.stand}`}
-          done={`${line.stand} is free again`}
-          look="quiet"
-          danger
-          act={giveBack}
-        >
-          Your sit is cancelled and the stand is free for others. Your points stay as the draw left them.
-        </DrawButton>
-      );
-    }
-    if (line.offersTo === own.memberId) {
-      return (
-        <DrawButton
-          club={club}
-          values={values}
-          label="Take the swap"
-          about={`with ${line.name}`}
-          title={`Swap ${own.stand} for ${line.stand}`}
-          done={`You have ${line.stand}`}
-          look="primary"
-          act={accept}
-        >
-          {line.name} offers {line.stand} for {own.stand}. Both sits change hands at once, if every rule allows it.
-        </DrawButton>
-      );
-    }
-    if (own.offersTo === line.memberId) return <Badge>Swap offered</Badge>;
-    return (
-      <DrawButton
-        club={club}
-        values={values}
-        label="Offer a swap"
-        about={`to ${line.name}`}
-        title={`Offer ${own.stand} for ${line.stand}`}
-        done="Swap offered"
-        look="quiet"
-        act={offer}
-      >
-        {line.name} sees the offer on this page and may take it.
-      </DrawButton>
-    );
-  };
+/** Every member who wanted a window, in the order of turns: what they were given, why, and what can be done afterwards. */
+export function DrawResults(props: DrawResultsProps) {
+  const { lines } = props.results;
+  const own = lines.find((line) => line.own);
   return (
     <ol className="divide-y divide-rule">
-      {results.map((line) => (
+      {lines.map((line) => (
         <li key={line.memberId} className="flex flex-wrap items-start justify-between gap-3 py-3">
-          <div className="max-w-2xl">
-            <p>
-              <span className="mr-2 font-serif text-ink-soft">{line.turn}</span>
-              <strong className="font-serif">{line.own ? `${line.name} (you)` : line.name}</strong>
-              {': '}
-              {line.stand ?? 'no stand'}
-              {line.gone && <Badge>Given up since</Badge>}
+          <div className="min-w-0 max-w-2xl">
+            <p className="flex flex-wrap items-baseline gap-x-2">
+              <span className="font-serif text-ink-soft tabular-nums">{line.turn}</span>
+              <strong className="font-serif">{line.own ? WORDS.you(line.name) : line.name}</strong>
+              <span>{line.stand ?? WORDS.noStand}</span>
+              {line.guests.length > 0 && <span className="text-ink-soft">{WORDS.withGuests(line.guests)}</span>}
+              {line.gone && <Badge>{WORDS.gone}</Badge>}
             </p>
             <ul className="mt-1 text-ink-soft text-sm">
               {line.reasons.map((reason) => (
@@ -87,9 +38,63 @@ export function DrawResults({ club, draw, offer, accept, giveBack }: DrawResults
               ))}
             </ul>
           </div>
-          {buttons(line)}
+          {own && <LineButton {...props} line={line} own={own} />}
         </li>
       ))}
     </ol>
+  );
+}
+
+/** Give back one's own; take or offer a swap with another's. */
+function LineButton(props: DrawResultsProps & { line: DrawResultLine; own: DrawResultLine }) {
+  const { club, draw, results, line, own, offer, accept, giveBack } = props;
+  if (!draw.published || !own.held || !line.held || own.stand === null || line.stand === null) return null;
+  const values = { drawId: draw.id, memberId: line.memberId, slot: results.slot };
+  if (line.own) {
+    return results.ownSitId === null ? null : (
+      <DrawButton
+        club={club}
+        values={{ sitId: results.ownSitId }}
+        label={WORDS.giveBack}
+        title={WORDS.giveBackTitle(line.stand)}
+        done={WORDS.givenBack(line.stand)}
+        look="quiet"
+        danger
+        act={giveBack}
+      >
+        {WORDS.giveBackText}
+      </DrawButton>
+    );
+  }
+  if (line.offersTo === own.memberId) {
+    return (
+      <DrawButton
+        club={club}
+        values={values}
+        label={WORDS.take}
+        about={WORDS.takeAbout(line.name)}
+        title={WORDS.takeTitle(own.stand, line.stand)}
+        done={WORDS.taken(line.stand)}
+        look="primary"
+        act={accept}
+      >
+        {WORDS.takeText(line.name, line.stand, own.stand)}
+      </DrawButton>
+    );
+  }
+  if (own.offersTo === line.memberId) return <Badge>{WORDS.offered}</Badge>;
+  return (
+    <DrawButton
+      club={club}
+      values={values}
+      label={WORDS.offer}
+      about={WORDS.offerAbout(line.name)}
+      title={WORDS.offerTitle(own.stand, line.stand)}
+      done={WORDS.offered}
+      look="quiet"
+      act={offer}
+    >
+      {WORDS.offerText(line.name)}
+    </DrawButton>
   );
 }

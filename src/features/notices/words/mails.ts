@@ -103,6 +103,7 @@ export const DRAW_MAILS = {
     opening: (when: string) => `The draw for ${when} is published.`,
     outcome: (stand: string | null) => (stand === null ? 'You drew no stand.' : `Your stand: ${stand}.`),
     goneStand: 'a stand no longer in use',
+    inWindow: (when: string, outcome: string) => `${when}: ${outcome}`,
     givenUp: 'That sit has been given up since.',
     button: 'See the draw',
   },

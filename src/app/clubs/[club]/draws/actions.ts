@@ -3,9 +3,10 @@
 import { cancelSit } from '@/features/bookings/cancel-sit';
 import { cancelSitSchema } from '@/features/bookings/sit-schema';
 import { drawIdSchema, enterDrawSchema, openDrawSchema, swapSchema } from '@/features/draws/draw-schema';
-import { cancelDraw, enterDraw, leaveDraw, openDraw } from '@/features/draws/open-draw';
+import { enterDraw, leaveDraw } from '@/features/draws/enter-draw';
+import { cancelDraw, openDraw } from '@/features/draws/open-draw';
 import { publishDraw } from '@/features/draws/publish-draw';
-import { runDraw } from '@/features/draws/run-draw';
+import { startDraw, stopRun } from '@/features/draws/run-draw';
 import { acceptSwap, offerSwap } from '@/features/draws/swap-sits';
 import { clubAction } from '@/server/doors';
 
@@ -24,7 +25,13 @@ export const cancelDrawAction = clubAction({
 export const runDrawAction = clubAction({
   permission: 'draws.write',
   input: drawIdSchema,
-  run: ({ scope, input, now }) => runDraw(scope, input.drawId, now),
+  run: ({ scope, input, now }) => startDraw(scope, input.drawId, now),
+});
+
+export const stopDrawAction = clubAction({
+  permission: 'draws.write',
+  input: drawIdSchema,
+  run: ({ scope, input, now }) => stopRun(scope, input.drawId, now),
 });
 
 export const publishDrawAction = clubAction({

@@ -1,29 +1,26 @@
 import { OpenDrawForm } from '@/features/draws/components/open-draw-form';
 import { readDrawStands } from '@/features/draws/reads';
+import { NEW_DRAW_WORDS as WORDS } from '@/features/draws/words/screens';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { EmptyState } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { openDrawAction } from '../actions';
 
-export const metadata = { title: 'Open a draw' };
+export const metadata = { title: WORDS.title };
 
 export default clubPage('draws.write', async ({ scope }) => {
   const { slug, name } = scope.club;
   const stands = await readDrawStands(scope);
   return (
     <>
-      <PageTitle
-        over={name}
-        title="Open a draw"
-        lead="Members rank the stands until it closes. Then you make the draw, look at it and publish it: all of it is booked, or nothing."
-      />
+      <PageTitle over={name} title={WORDS.title} lead={WORDS.lead} />
       {stands.length === 0 ? (
         <EmptyState
-          title="No stands yet"
-          action={<ButtonLink href={`/clubs/${slug}/stands`}>Go to the stands</ButtonLink>}
+          title={WORDS.noStands}
+          action={<ButtonLink href={`/clubs/${slug}/stands`}>{WORDS.toStands}</ButtonLink>}
         >
-          A draw needs stands to share out.
+          {WORDS.noStandsText}
         </EmptyState>
       ) : (
         <OpenDrawForm club={slug} stands={stands} open={openDrawAction} />
