@@ -73,6 +73,7 @@ export const WALK_UP_WORDS = {
   weapon: 'Weapon',
   take: 'Take it and sign in',
   taking: 'Signing in',
+  care: 'Take care',
   notNow: 'Not now',
   notLoaded: 'Not loaded',
   looking: 'Looking for free stands',
