@@ -18,7 +18,7 @@ export interface SyntaxNode {
 type Read = 'all' | 'most' | 'look' | 'none';
 
 const READ_WHOLE =
-  /^(title|label|hint|placeholder|alt|message|aria-(label|description|roledescription|valuetext)|\w+Label)$/;
+  /^(title|label|hint|placeholder|alt|message|unit|aria-(label|description|roledescription|valuetext)|\w+Label)$/;
 const READ_MOSTLY =
   /^(heading|legend|caption|subject|subtitle|detail|description|summary|empty|note|said|text|term|children|\w+(Text|Title|Note|Hint))$/;
 const FOR_MACHINES =
@@ -47,8 +47,8 @@ const isClasses = (text: string) =>
       (token) => /^[a-z!*[-][\w:[\]()./%!&>*=,#'-]*$/.test(token) && (/[-:[/\d]/.test(token) || BARE_CLASS.test(token)),
     );
 
-/** Values of `Evidence` in core, and the one name that no language changes. */
-const NO_TEXT = new Set(['our choice', 'club log', 'Windrest']);
+/** Values of `Evidence` in core, and what no language changes: our name, signs of units. */
+const NO_TEXT = new Set(['our choice', 'club log', 'Windrest', 'yd', 'ft', 'in', 'cm', 'mi', 'km', 'lb', 'kg', 'mph']);
 
 /** Two words, or one with a capital; neither markup, a run of style rules nor a media type. */
 function looksRead(text: string): boolean {

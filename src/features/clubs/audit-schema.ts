@@ -1,22 +1,23 @@
 import { z } from 'zod';
 import { isDay } from '@/core/day-time';
+import { CLUB_FIELD_ERRORS } from './words/field-errors';
 
 /** Blank is no filter: a form sent by GET names every field. */
 const optional = (most: number) =>
   z
     .string()
     .trim()
-    .max(most, `Use at most ${most} characters.`)
+    .max(most, CLUB_FIELD_ERRORS.long(most))
     .optional()
     .transform((text) => text || null);
 
-const day = optional(20).refine((text) => text === null || isDay(text), 'Give a day as YYYY-MM-DD.');
+const day = optional(20).refine((text) => text === null || isDay(text), CLUB_FIELD_ERRORS.day);
 
 /** What of the audit log is asked for: the page's address and the file's. */
 export const auditFilterSchema = z
   .object({ person: optional(60), action: optional(60), from: day, to: day, text: optional(100) })
   .refine(({ from, to }) => from === null || to === null || from <= to, {
-    error: 'The last day may not come before the first.',
+    error: CLUB_FIELD_ERRORS.daysOrder,
     path: ['to'],
   });
 export type AuditFilter = z.output<typeof auditFilterSchema>;

@@ -11,6 +11,8 @@ import type { ChangeMemberInput } from './member-schema';
 import { listFutureSits } from './member-sits-data';
 import { isLastAdmin, sitText } from './removal';
 import { aRole } from './role-words';
+import { CLUB_AUDIT } from './words/audit';
+import { CLUB_ERRORS } from './words/errors';
 
 /** Sits already booked that the new role or days would not allow are named: whoever changes it cancels them first. */
 async function refuseLostSits(scope: ClubScope, tx: Tx, member: MemberRow, input: ChangeMemberInput, now: number) {
@@ -22,10 +24,7 @@ async function refuseLostSits(scope: ClubScope, tx: Tx, member: MemberRow, input
   });
   if (lost.length === 0) return;
   const list = lost.map(sitText).join('; ');
-  throw new AppError(
-    'conflict',
-    `${member.name} has sits booked that this would not allow: ${list}. Cancel them first.`,
-  );
+  throw new AppError('conflict', CLUB_ERRORS.lostSits(member.name, list));
 }
 
 async function refuseLostGuests(scope: ClubScope, tx: Tx, member: MemberRow, input: ChangeMemberInput) {
@@ -34,20 +33,17 @@ async function refuseLostGuests(scope: ClubScope, tx: Tx, member: MemberRow, inp
     .filter((one) => one.sponsorId === member.id)
     .map((one) => one.name);
   if (guests.length === 0) return;
-  throw new AppError(
-    'conflict',
-    `${member.name} answers for ${guests.join(', ')}. Give them another sponsor, remove them or revoke the invitation first.`,
-  );
+  throw new AppError('conflict', CLUB_ERRORS.answersFor(member.name, guests.join(', ')));
 }
 
 function changeText(scope: ClubScope, member: MemberRow, input: ChangeMemberInput, sponsorName: string | null): string {
   const { role, guestFrom, guestTo } = input;
   const days =
     guestFrom !== null && guestTo !== null
-      ? ` from ${formatDay(guestFrom, true)} to ${formatDay(guestTo, true)} under ${sponsorName}`
+      ? CLUB_AUDIT.guestDays(formatDay(guestFrom, true), formatDay(guestTo, true), sponsorName ?? '')
       : '';
-  if (role === member.role) return `${scope.actor.name} set ${member.name}'s stay:${days}.`;
-  return `${scope.actor.name} made ${member.name} ${aRole(role)}${days}; before, ${aRole(member.role)}.`;
+  if (role === member.role) return CLUB_AUDIT.staySet(scope.actor.name, member.name, days);
+  return CLUB_AUDIT.roleChanged(scope.actor.name, member.name, aRole(role), days, aRole(member.role));
 }
 
 /** Gives a member another role, or a guest another sponsor or other days. */
@@ -69,10 +65,10 @@ export async function changeMember(
     const after = { role, sponsorId, guestFrom, guestTo };
     if (JSON.stringify(before) === JSON.stringify(after)) return { name: member.name, changed: false };
     if (role !== 'admin' && (await isLastAdmin(scope, member, tx))) {
-      throw new AppError('conflict', `${member.name} is the club's only admin. Make another member an admin first.`);
+      throw new AppError('conflict', CLUB_ERRORS.onlyAdmin(member.name));
     }
     if (sponsorId === member.id) {
-      const message = 'A guest cannot answer for themselves. Choose another member.';
+      const message = CLUB_ERRORS.ownSponsor;
       throw new AppError('invalid', message, { fields: { sponsorId: message } });
     }
     const { sponsorName } = await requireStanding(scope, tx, input, now);

@@ -4,6 +4,7 @@ import type { ReadFrom } from '@/db/client';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { findMember } from './data';
+import { CLUB_ERRORS } from './words/errors';
 
 /** Whether a role may answer for guests: hunts, and is no guest. */
 export function maySponsor(role: Role): boolean {
@@ -26,11 +27,11 @@ export async function requireStanding(
   if (standing.role !== 'guest') return { sponsorName: null };
   const sponsor = standing.sponsorId === null ? null : await findMember(scope, standing.sponsorId, from);
   if (!sponsor || !maySponsor(sponsor.role)) {
-    const message = 'Choose a member of the club who hunts: that person answers for the guest.';
+    const message = CLUB_ERRORS.sponsor;
     throw new AppError('invalid', message, { fields: { sponsorId: message } });
   }
   if (standing.guestTo !== null && standing.guestTo < dayOf(now, scope.club.zone)) {
-    const message = 'The last day is past. Choose a day from today on.';
+    const message = CLUB_ERRORS.daysPast;
     throw new AppError('invalid', message, { fields: { guestTo: message } });
   }
   return { sponsorName: sponsor.name };

@@ -16,6 +16,7 @@ import {
 } from 'lucide-react';
 import type { Permission } from '@/core/permissions';
 import type { NavItem } from '@/ui/nav-links';
+import { NAV_WORDS } from './words/club';
 
 interface Screen {
   path: string;
@@ -26,20 +27,20 @@ interface Screen {
 
 /** In the order of the rail; the first four a person may open stand on the phone's bar. */
 const SCREENS: Screen[] = [
-  { path: 'sit', label: 'Sit', icon: <Armchair />, needs: 'sits.read' },
-  { path: 'week', label: 'Week', icon: <CalendarRange />, needs: 'sits.read' },
-  { path: 'board', label: 'Board', icon: <ClipboardList />, needs: 'board.read' },
-  { path: 'log', label: 'Log', icon: <NotebookPen />, needs: 'log.write' },
-  { path: 'my-sits', label: 'My sits', icon: <CalendarCheck />, needs: 'sits.book' },
-  { path: 'season', label: 'Season', icon: <ChartNoAxesColumn />, needs: 'report.read' },
-  { path: 'draws', label: 'Draws', icon: <Dices />, needs: 'draws.enter' },
-  { path: 'chores', label: 'Chores', icon: <Hammer />, needs: 'chores.read' },
-  { path: 'stands', label: 'Stands', icon: <TreePine />, needs: 'stands.read' },
-  { path: 'ground', label: 'Ground', icon: <MapSign />, needs: 'features.read' },
-  { path: 'closures', label: 'Closed days', icon: <CalendarX />, needs: 'closed_days.write' },
-  { path: 'calendar', label: 'Calendar', icon: <CalendarDays />, needs: 'feeds.own' },
-  { path: 'notices', label: 'Notices', icon: <BellRing />, needs: 'notices.own' },
-  { path: 'club', label: 'Club', icon: <Users />, needs: 'club.read' },
+  { path: 'sit', label: NAV_WORDS.sit, icon: <Armchair />, needs: 'sits.read' },
+  { path: 'week', label: NAV_WORDS.week, icon: <CalendarRange />, needs: 'sits.read' },
+  { path: 'board', label: NAV_WORDS.board, icon: <ClipboardList />, needs: 'board.read' },
+  { path: 'log', label: NAV_WORDS.log, icon: <NotebookPen />, needs: 'log.write' },
+  { path: 'my-sits', label: NAV_WORDS.mySits, icon: <CalendarCheck />, needs: 'sits.book' },
+  { path: 'season', label: NAV_WORDS.season, icon: <ChartNoAxesColumn />, needs: 'report.read' },
+  { path: 'draws', label: NAV_WORDS.draws, icon: <Dices />, needs: 'draws.enter' },
+  { path: 'chores', label: NAV_WORDS.chores, icon: <Hammer />, needs: 'chores.read' },
+  { path: 'stands', label: NAV_WORDS.stands, icon: <TreePine />, needs: 'stands.read' },
+  { path: 'ground', label: NAV_WORDS.ground, icon: <MapSign />, needs: 'features.read' },
+  { path: 'closures', label: NAV_WORDS.closedDays, icon: <CalendarX />, needs: 'closed_days.write' },
+  { path: 'calendar', label: NAV_WORDS.calendar, icon: <CalendarDays />, needs: 'feeds.own' },
+  { path: 'notices', label: NAV_WORDS.notices, icon: <BellRing />, needs: 'notices.own' },
+  { path: 'club', label: NAV_WORDS.club, icon: <Users />, needs: 'club.read' },
 ];
 
 /** The screens of a club that a person may open. */

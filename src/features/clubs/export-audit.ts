@@ -5,21 +5,11 @@ import type { ClubScope } from '@/server/scope';
 import { auditClub } from './audit-club';
 import { type AuditRow, listAudit } from './audit-data';
 import type { AuditFilter } from './audit-schema';
+import { CLUB_AUDIT } from './words/audit';
+import { AUDIT_FILE_HEADINGS } from './words/records';
 
 /** Our choice: some years of a large club, and a file that opens. */
 const MOST_ROWS = 50_000;
-
-const HEADINGS = [
-  'time (UTC)',
-  'club day',
-  'club time',
-  'person',
-  'action',
-  'subject',
-  'subject id',
-  'summary',
-  'detail',
-];
 
 function cells(scope: ClubScope, row: AuditRow): string[] {
   const { zone } = scope.club;
@@ -51,7 +41,7 @@ export async function exportAudit(
         action: 'audit.exported',
         subjectType: 'audit_log',
         subjectId: scope.club.id,
-        summary: `${scope.actor.name} took ${found.length} rows of the audit log out as a file.`,
+        summary: CLUB_AUDIT.auditTaken(scope.actor.name, found.length),
         detail: { ...filter },
       },
       now,
@@ -59,5 +49,5 @@ export async function exportAudit(
     return found;
   });
   const name = `audit-${scope.club.slug}-${dayOf(now, scope.club.zone)}.csv`;
-  return { name, csv: toCsv([HEADINGS, ...rows.map((row) => cells(scope, row))]) };
+  return { name, csv: toCsv([AUDIT_FILE_HEADINGS, ...rows.map((row) => cells(scope, row))]) };
 }

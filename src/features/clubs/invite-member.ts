@@ -12,6 +12,8 @@ import { findInvitationTo, insertInvitation, updateInvitation } from './invitati
 import type { InviteInput } from './member-schema';
 import { aRole } from './role-words';
 import { INVITATION_MS, INVITATION_RATE, mailInvitation } from './send-invitation';
+import { CLUB_AUDIT } from './words/audit';
+import { CLUB_ERRORS } from './words/errors';
 
 interface Inviter {
   emailVerifiedAt: number | null;
@@ -34,12 +36,10 @@ export async function inviteMember(
   const id = newId('invitation');
   await write(async (tx) => {
     const known = (await listMembers(scope, tx)).find((member) => member.email === input.email);
-    if (known) refuseEmail(`${known.name} is a member already, with this address.`);
+    if (known) refuseEmail(CLUB_ERRORS.memberAlready(known.name));
     const waiting = await findInvitationTo(scope, input.email, tx);
     if (waiting && waiting.expiresAt > now) {
-      refuseEmail(
-        `An invitation to this address is waiting already. Send it again from the members page, or revoke it.`,
-      );
+      refuseEmail(CLUB_ERRORS.invitationWaits);
     }
     if (waiting) await updateInvitation(scope, tx, waiting.id, { revokedAt: now });
     const { sponsorName } = await requireStanding(scope, tx, input, now);
@@ -53,7 +53,6 @@ export async function inviteMember(
       sentAt: now,
       expiresAt: now + INVITATION_MS,
     });
-    const under = sponsorName === null ? '' : `, under ${sponsorName}`;
     await auditClub(
       tx,
       scope,
@@ -61,7 +60,7 @@ export async function inviteMember(
         action: 'member.invited',
         subjectType: 'invitation',
         subjectId: id,
-        summary: `${scope.actor.name} invited ${input.name} as ${aRole(input.role)}${under}.`,
+        summary: CLUB_AUDIT.invited(scope.actor.name, input.name, aRole(input.role), sponsorName),
         detail: { ...input },
       },
       now,

@@ -11,19 +11,17 @@ import { findMembershipOf, insertMembership, reviveMembership } from './data';
 import { findInvitationBySecret, type InvitationRow, isFresh, spendInvitation } from './invitations-data';
 import type { JoinInput, JoinNewInput } from './join-schema';
 import { aRole } from './role-words';
+import { CLUB_AUDIT } from './words/audit';
+import { CLUB_ERRORS } from './words/errors';
 
-const deadLink = () =>
-  new AppError(
-    'invalid',
-    'This invitation was used already, was revoked or is too old. Ask whoever invited you for a new one.',
-  );
+const deadLink = () => new AppError('invalid', CLUB_ERRORS.invitationSpent);
 
 async function openInvitation(token: string, now: number) {
   const found = await findInvitationBySecret(hashSecret(token));
   if (!found || !isFresh(found.invitation, now)) throw deadLink();
   const { invitation, club } = found;
   if (invitation.guestTo !== null && invitation.guestTo < dayOf(now, club.zone)) {
-    throw new AppError('conflict', 'The days of this invitation are over. Ask whoever invited you for new ones.');
+    throw new AppError('conflict', CLUB_ERRORS.invitationOver);
   }
   return found;
 }
@@ -36,7 +34,7 @@ interface Joiner {
 async function addMember(tx: Tx, invitation: InvitationRow, user: Joiner, now: number): Promise<void> {
   const { clubId, role, sponsorId, guestFrom, guestTo } = invitation;
   const known = await findMembershipOf(clubId, user.id, tx);
-  if (known && known.removedAt === null) throw new AppError('conflict', 'You are in this club already.');
+  if (known && known.removedAt === null) throw new AppError('conflict', CLUB_ERRORS.inClub);
   const standing = { role, sponsorId, guestFrom, guestTo, joinedAt: now };
   const id = known?.id ?? newId('membership');
   if (known) await reviveMembership(tx, id, standing);
@@ -49,7 +47,7 @@ async function addMember(tx: Tx, invitation: InvitationRow, user: Joiner, now: n
       action: 'member.joined',
       subjectType: 'member',
       subjectId: id,
-      summary: `${user.name} joined as ${aRole(role)}, invited as ${invitation.name}.`,
+      summary: CLUB_AUDIT.joined(user.name, aRole(role), invitation.name),
       detail: { invitationId: invitation.id, role, sponsorId, guestFrom, guestTo },
     },
     now,

@@ -1,10 +1,9 @@
 import { z } from 'zod';
 import { nameField, newPasswordField } from '@/features/accounts/account-schema';
+import { CLUB_FIELD_ERRORS } from './words/field-errors';
 
 /** The shape of an invitation's secret; anything else is no link of ours. */
-export const invitationSecret = z
-  .string()
-  .regex(/^[\w-]{20,60}$/, 'This link is not whole. Open it from the mail again.');
+export const invitationSecret = z.string().regex(/^[\w-]{20,60}$/, CLUB_FIELD_ERRORS.link);
 
 export const joinSchema = z.object({ token: invitationSecret });
 export type JoinInput = z.output<typeof joinSchema>;

@@ -2,6 +2,7 @@ import { z } from 'zod';
 import { isDay } from '@/core/day-time';
 import { ROLES } from '@/core/permissions';
 import { emailField, nameField } from '@/features/accounts/account-schema';
+import { CLUB_FIELD_ERRORS } from './words/field-errors';
 
 const id = z.string().min(1).max(60);
 
@@ -25,14 +26,14 @@ function keepStanding<T extends Standing>(typed: T, ctx: z.RefinementCtx) {
   if (typed.role !== 'guest') return { ...typed, sponsorId: null, guestFrom: null, guestTo: null };
   const { sponsorId, guestFrom, guestTo } = typed;
   const fail = (path: keyof Standing, message: string) => ctx.addIssue({ code: 'custom', path: [path], message });
-  if (sponsorId === '') fail('sponsorId', 'Choose the member who answers for the guest.');
-  if (!isDay(guestFrom)) fail('guestFrom', 'Choose the first day.');
-  if (!isDay(guestTo)) fail('guestTo', 'Choose the last day.');
-  else if (isDay(guestFrom) && guestTo < guestFrom) fail('guestTo', 'The last day may not come before the first.');
+  if (sponsorId === '') fail('sponsorId', CLUB_FIELD_ERRORS.sponsor);
+  if (!isDay(guestFrom)) fail('guestFrom', CLUB_FIELD_ERRORS.guestFrom);
+  if (!isDay(guestTo)) fail('guestTo', CLUB_FIELD_ERRORS.guestTo);
+  else if (isDay(guestFrom) && guestTo < guestFrom) fail('guestTo', CLUB_FIELD_ERRORS.daysOrder);
   return { ...typed, sponsorId, guestFrom, guestTo };
 }
 
-const invitedName = z.string().trim().min(1, 'Write the name of the person you invite.').pipe(nameField);
+const invitedName = z.string().trim().min(1, CLUB_FIELD_ERRORS.invitedName).pipe(nameField);
 
 export const inviteSchema = z.object({ name: invitedName, email: emailField, ...standing }).transform(keepStanding);
 export type InviteForm = z.input<typeof inviteSchema>;

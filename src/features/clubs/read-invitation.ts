@@ -6,6 +6,7 @@ import { hashSecret } from '@/lib/secrets';
 import { findMembershipOf } from './data';
 import { findInvitationBySecret, isFresh } from './invitations-data';
 import { invitationSecret } from './join-schema';
+import { MEMBER_WORDS } from './words/members';
 
 export interface OpenInvitation {
   kind: 'open';
@@ -47,7 +48,8 @@ export async function readInvitation(
     name,
     email,
     role,
-    days: guestFrom && guestTo ? `${formatDay(guestFrom, true)} to ${formatDay(guestTo, true)}` : null,
+    days:
+      guestFrom && guestTo ? MEMBER_WORDS.guestDays(formatDay(guestFrom, true), formatDay(guestTo, true), false) : null,
     hasAccount: (account?.emailVerifiedAt ?? null) !== null,
   };
 }

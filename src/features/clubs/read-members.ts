@@ -6,6 +6,7 @@ import { maySponsor } from './check-standing';
 import { findMember, listMembers, type MemberRow } from './data';
 import { listInvitations } from './invitations-data';
 import { ROLE_WORDS } from './role-words';
+import { MEMBER_WORDS } from './words/members';
 
 export interface MemberView {
   id: string;
@@ -27,7 +28,7 @@ export interface MemberView {
 
 function guestText(from: string | null, to: string | null, today: string): string | null {
   if (from === null || to === null) return null;
-  return `${formatDay(from, true)} to ${formatDay(to, true)}${to < today ? ', over' : ''}`;
+  return MEMBER_WORDS.guestDays(formatDay(from, true), formatDay(to, true), to < today);
 }
 
 function viewOf(scope: ClubScope, row: MemberRow, names: Map<string, string>, now: number): MemberView {

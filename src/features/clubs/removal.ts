@@ -1,4 +1,5 @@
 import { formatDay } from '@/core/day-time';
+import { SIT_WINDOW_WORDS } from '@/core/words/windows';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
 import { composeMail } from '@/features/mail/compose';
 import { AppError } from '@/server/errors';
@@ -8,15 +9,16 @@ import { auditClub } from './audit-club';
 import { countAdmins, findMember, listMembers, type MemberRow, revokeFeedsOf, updateMember } from './data';
 import { listInvitations, revokeInvitationsBy } from './invitations-data';
 import { type FutureSit, listFutureSits } from './member-sits-data';
+import { CLUB_AUDIT } from './words/audit';
+import { CLUB_ERRORS } from './words/errors';
+import { REMOVED_MAIL } from './words/mails';
 
 /** Cancels the sits of a member in the same transaction, frees their claims and tells the member; gives how many. */
 export type CancelSitsOf = (tx: Tx, scope: ClubScope, memberId: string, reason: string, now: number) => Promise<number>;
 
-const WINDOW_WORDS = { morning: 'morning', evening: 'evening', all_day: 'all day' };
-
 /** 'Creek Ladder, Sat 7 Nov 2026, morning'. */
 export function sitText({ standName, day, windows }: FutureSit): string {
-  return `${standName}, ${formatDay(day, true)}, ${WINDOW_WORDS[windows]}`;
+  return `${standName}, ${formatDay(day, true)}, ${SIT_WINDOW_WORDS[windows]}`;
 }
 
 /** What goes when a person goes; said before, and done. */
@@ -65,11 +67,7 @@ export interface Removed {
 async function mailRemoved(tx: Tx, scope: ClubScope, member: MemberRow, why: string, now: number): Promise<void> {
   const { text, html } = composeMail({
     clubName: scope.club.name,
-    paragraphs: [
-      `Hello ${member.name},`,
-      `You are no longer in ${scope.club.name}. ${why}`,
-      'Sits you had booked are cancelled, and your calendar addresses of this club no longer work. Your account stays.',
-    ],
+    paragraphs: [REMOVED_MAIL.hello(member.name), REMOVED_MAIL.opening(scope.club.name, why), REMOVED_MAIL.goes],
   });
   await queueMail(
     tx,
@@ -78,7 +76,7 @@ async function mailRemoved(tx: Tx, scope: ClubScope, member: MemberRow, why: str
       kind: 'club.removed',
       dedupeKey: `club.removed:${member.id}:${now}`,
       to: { email: member.email, name: member.name },
-      subject: `You are no longer in ${scope.club.name}`,
+      subject: REMOVED_MAIL.subject(scope.club.name),
       text,
       html,
     },
@@ -103,7 +101,7 @@ export async function takeOut(
   now: number,
 ): Promise<Removed> {
   if (await isLastAdmin(scope, member, tx)) {
-    throw new AppError('conflict', `${member.name} is the club's only admin. Make another member an admin first.`);
+    throw new AppError('conflict', CLUB_ERRORS.onlyAdmin(member.name));
   }
   const guests = guestsOf(await listMembers(scope, tx), member.id);
   const revoked = await revokeInvitationsBy(scope, tx, member.id, now);
@@ -123,7 +121,9 @@ export async function takeOut(
         action: left ? 'member.left' : 'member.removed',
         subjectType: 'member',
         subjectId: one.id,
-        summary: `${left ? `${one.name} left the club` : `${scope.actor.name} removed ${one.name}`}; ${cancelled} booked ${cancelled === 1 ? 'sit was' : 'sits were'} cancelled.`,
+        summary: left
+          ? CLUB_AUDIT.left(one.name, cancelled)
+          : CLUB_AUDIT.removed(scope.actor.name, one.name, cancelled),
         detail: {
           role: one.role,
           cancelledSits: cancelled,

@@ -3,6 +3,7 @@ import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { findMember } from './data';
 import { type CancelSitsOf, type Removed, takeOut } from './removal';
+import { REMOVED_MAIL } from './words/mails';
 
 /** Takes a member out of the club, with the sits and the guests that go too. The record of past sits stays. */
 export async function removeMember(
@@ -16,8 +17,8 @@ export async function removeMember(
     if (!member) throw notFound();
     const going = {
       action: 'member.removed' as const,
-      reason: `${scope.actor.name} took you out of the club.`,
-      guestReason: `${member.name}, who answered for you, is no longer in the club.`,
+      reason: REMOVED_MAIL.takenOut(scope.actor.name),
+      guestReason: REMOVED_MAIL.sponsorGone(member.name),
     };
     return takeOut(tx, scope, member, going, cancelSitsOf, now);
   });
@@ -30,8 +31,8 @@ export async function leaveClub(scope: ClubScope, cancelSitsOf: CancelSitsOf, no
     if (!member) throw notFound();
     const going = {
       action: 'member.left' as const,
-      reason: 'You left the club.',
-      guestReason: `${member.name}, who answered for you, left the club.`,
+      reason: REMOVED_MAIL.left,
+      guestReason: REMOVED_MAIL.sponsorLeft(member.name),
     };
     return takeOut(tx, scope, member, going, cancelSitsOf, now);
   });

@@ -8,6 +8,7 @@ import { auditClub } from './audit-club';
 import { requireStanding } from './check-standing';
 import { findInvitation, updateInvitation } from './invitations-data';
 import { INVITATION_MS, INVITATION_RATE, mailInvitation } from './send-invitation';
+import { CLUB_AUDIT } from './words/audit';
 
 /** Sends a new link with its full time; the one sent before stops working, for only its hash was kept. */
 export async function resendInvitation(
@@ -35,7 +36,7 @@ export async function resendInvitation(
         action: 'member.invited_again',
         subjectType: 'invitation',
         subjectId: invitation.id,
-        summary: `${scope.actor.name} sent the invitation to ${invitation.name} again.`,
+        summary: CLUB_AUDIT.invitationResent(scope.actor.name, invitation.name),
       },
       now,
     );

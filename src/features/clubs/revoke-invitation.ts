@@ -3,6 +3,7 @@ import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { auditClub } from './audit-club';
 import { findInvitation, updateInvitation } from './invitations-data';
+import { CLUB_AUDIT } from './words/audit';
 
 /** The link stops working at once. */
 export async function revokeInvitation(
@@ -21,7 +22,7 @@ export async function revokeInvitation(
         action: 'member.invitation_revoked',
         subjectType: 'invitation',
         subjectId: invitation.id,
-        summary: `${scope.actor.name} revoked the invitation to ${invitation.name}.`,
+        summary: CLUB_AUDIT.invitationRevoked(scope.actor.name, invitation.name),
       },
       now,
     );

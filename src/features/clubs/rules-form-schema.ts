@@ -7,8 +7,9 @@ import { type Units, ydToM } from '@/core/units';
 import { formReader, type TextReader } from './read-number';
 import { harvestRuleFields, readHarvestRules, readStated } from './rules-harvest-form';
 import { readWorkRules, workRuleFields } from './rules-work-form';
+import { RULES_ERRORS } from './words/field-errors';
 
-const line = z.string().max(600, 'Keep it to 600 characters.');
+const line = z.string().max(600, RULES_ERRORS.long600);
 const fromSunFields = z.object({ minutes: line, side: z.enum(['before', 'after']) });
 
 /** What the rules form holds: text in the club's units. */
@@ -74,15 +75,21 @@ function readFromSun(form: TextReader, path: string, { minutes, side }: RulesFor
 }
 
 function readClock(form: TextReader, path: string, text: string): string {
-  if (!isClock(text.trim())) form.fail([path], 'Give a time.');
+  if (!isClock(text.trim())) form.fail([path], RULES_ERRORS.clock);
   return text.trim();
 }
 
 function readClaimAhead(form: TextReader, typed: RulesForm): ClaimAhead {
   if (typed.claimAhead === 'days') {
-    return { kind: 'days', days: form.needNumber(['claimDays'], typed.claimDays, whole('Days ahead', 0, 365)) };
+    return {
+      kind: 'days',
+      days: form.needNumber(['claimDays'], typed.claimDays, whole(RULES_ERRORS.daysAhead, 0, 365)),
+    };
   }
-  return { kind: 'hunt_time', hours: form.needNumber(['claimHours'], typed.claimHours, whole('Hours ahead', 1, 24)) };
+  return {
+    kind: 'hunt_time',
+    hours: form.needNumber(['claimHours'], typed.claimHours, whole(RULES_ERRORS.hoursAhead, 1, 24)),
+  };
 }
 
 function readLegalLight(form: TextReader, typed: RulesForm): ClubRules['legalLight'] {
@@ -91,12 +98,12 @@ function readLegalLight(form: TextReader, typed: RulesForm): ClubRules['legalLig
     minutesBeforeSunrise: form.needNumber(
       ['legalLight', i, 'minutesBeforeSunrise'],
       rule.minutesBeforeSunrise,
-      whole('Minutes before sunrise', -60, 90),
+      whole(RULES_ERRORS.minutesBeforeSunrise, -60, 90),
     ),
     minutesAfterSunset: form.needNumber(
       ['legalLight', i, 'minutesAfterSunset'],
       rule.minutesAfterSunset,
-      whole('Minutes after sunset', -60, 90),
+      whole(RULES_ERRORS.minutesAfterSunset, -60, 90),
     ),
     source: rule.source.trim(),
     statedOn: rule.statedOn.trim(),
@@ -105,7 +112,7 @@ function readLegalLight(form: TextReader, typed: RulesForm): ClubRules['legalLig
 
 function readSpacing(form: TextReader, typed: RulesForm, units: Units): ClubRules['spacingM'] {
   const read = (weapon: Weapon) =>
-    readDistance(form, ['spacing', weapon], typed.spacing[weapon], 'Spacing', 2000, units);
+    readDistance(form, ['spacing', weapon], typed.spacing[weapon], RULES_ERRORS.spacing, 2000, units);
   return {
     bow: read('bow'),
     crossbow: read('crossbow'),
@@ -116,11 +123,15 @@ function readSpacing(form: TextReader, typed: RulesForm, units: Units): ClubRule
 }
 
 function readOverdue(form: TextReader, typed: RulesForm): ClubRules['overdueSteps'] {
-  const memberMinutes = form.needNumber(['overdueMember'], typed.overdueMember, whole('Minutes', 0, 720));
-  const officersMinutes = form.needNumber(['overdueOfficers'], typed.overdueOfficers, whole('Minutes', 0, 720));
-  const contactMinutes = form.needNumber(['overdueContact'], typed.overdueContact, whole('Minutes', 0, 720));
-  if (officersMinutes < memberMinutes) form.fail(['overdueOfficers'], 'Officers are not told before the member.');
-  if (contactMinutes < officersMinutes) form.fail(['overdueContact'], 'The contact is not told before the officers.');
+  const memberMinutes = form.needNumber(['overdueMember'], typed.overdueMember, whole(RULES_ERRORS.minutes, 0, 720));
+  const officersMinutes = form.needNumber(
+    ['overdueOfficers'],
+    typed.overdueOfficers,
+    whole(RULES_ERRORS.minutes, 0, 720),
+  );
+  const contactMinutes = form.needNumber(['overdueContact'], typed.overdueContact, whole(RULES_ERRORS.minutes, 0, 720));
+  if (officersMinutes < memberMinutes) form.fail(['overdueOfficers'], RULES_ERRORS.officersOrder);
+  if (contactMinutes < officersMinutes) form.fail(['overdueContact'], RULES_ERRORS.contactOrder);
   return { memberMinutes, officersMinutes, contactMinutes };
 }
 
@@ -129,29 +140,29 @@ function readRules(form: TextReader, typed: RulesForm, units: Units): ClubRules 
     legalLight: readLegalLight(form, typed),
     windowHours: {
       morning: {
-        startMinutesFromSunrise: readFromSun(form, 'morningStart', typed.morningStart, 'Start of the morning'),
+        startMinutesFromSunrise: readFromSun(form, 'morningStart', typed.morningStart, RULES_ERRORS.startMorning),
         endClock: readClock(form, 'morningEnd', typed.morningEnd),
       },
       evening: {
         startClock: readClock(form, 'eveningStart', typed.eveningStart),
-        endMinutesFromSunset: readFromSun(form, 'eveningEnd', typed.eveningEnd, 'End of the evening'),
+        endMinutesFromSunset: readFromSun(form, 'eveningEnd', typed.eveningEnd, RULES_ERRORS.endEvening),
       },
     },
     seasons: typed.seasons.map((season) => ({ ...season, legalLightName: season.legalLightName.trim() || null })),
     claimAhead: readClaimAhead(form, typed),
-    maxLiveClaims: form.number(['maxLiveClaims'], typed.maxLiveClaims, whole('Sits booked at once', 1, 100)),
-    holdMinutes: form.number(['holdMinutes'], typed.holdMinutes, whole('Hold time', 5, 600)),
-    restDaysDefault: form.needNumber(['restDays'], typed.restDays, whole('Rest days', 0, 60)),
+    maxLiveClaims: form.number(['maxLiveClaims'], typed.maxLiveClaims, whole(RULES_ERRORS.sitsBookedOnce, 1, 100)),
+    holdMinutes: form.number(['holdMinutes'], typed.holdMinutes, whole(RULES_ERRORS.holdTime, 5, 600)),
+    restDaysDefault: form.needNumber(['restDays'], typed.restDays, whole(RULES_ERRORS.restDays, 0, 60)),
     mostSitsPerMemberSeason: form.number(
       ['mostSitsPerMember'],
       typed.mostSitsPerMember,
-      whole('Sits a season', 1, 400),
+      whole(RULES_ERRORS.sitsASeason, 1, 400),
     ),
     spacingM: readSpacing(form, typed, units),
-    passThroughM: readDistance(form, ['passThrough'], typed.passThrough, 'Walking distance', 1000, units),
-    guestDaysPerSeason: form.number(['guestDays'], typed.guestDays, whole('Guest days', 0, 366)),
-    guestsAtOnce: form.needNumber(['guestsAtOnce'], typed.guestsAtOnce, whole('Guests at once', 0, 20)),
-    backByMinutes: form.needNumber(['backByMinutes'], typed.backByMinutes, whole('Back-by allowance', 0, 720)),
+    passThroughM: readDistance(form, ['passThrough'], typed.passThrough, RULES_ERRORS.walkingDistance, 1000, units),
+    guestDaysPerSeason: form.number(['guestDays'], typed.guestDays, whole(RULES_ERRORS.guestDays, 0, 366)),
+    guestsAtOnce: form.needNumber(['guestsAtOnce'], typed.guestsAtOnce, whole(RULES_ERRORS.guestsAtOnce, 0, 20)),
+    backByMinutes: form.needNumber(['backByMinutes'], typed.backByMinutes, whole(RULES_ERRORS.backByAllowance, 0, 720)),
     overdueSteps: readOverdue(form, typed),
     overdueShowsPlace: typed.overdueShowsPlace,
     sightingsSeenBy: typed.sightingsSeenBy,
@@ -181,7 +192,7 @@ export function makeRulesSchema(units: Units) {
       if (SAME_NAMES.includes(String(issue.path[0]))) form.fail(issue.path.map(keyOf), issue.message);
     }
     if (form.failed() || !checked.success) {
-      if (!form.failed()) form.fail([], 'These rules cannot be saved as they are. Look at each entry again.');
+      if (!form.failed()) form.fail([], RULES_ERRORS.whole);
       return z.NEVER;
     }
     return { version: typed.version, rules: checked.data };

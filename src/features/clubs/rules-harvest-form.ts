@@ -3,15 +3,16 @@ import type { ClubRules, OrangeRule } from '@/core/booking/rules';
 import { isDay } from '@/core/day-time';
 import { QUOTA_DEER, QUOTA_PER } from '@/core/harvest/harvest-types';
 import type { TextReader } from './read-number';
+import { RULES_ERRORS } from './words/field-errors';
 
-const line = z.string().max(600, 'Keep it to 600 characters.');
+const line = z.string().max(600, RULES_ERRORS.long600);
 
 /** Fields of the rules form about deer taken. */
 export const harvestRuleFields = {
   harvestQuotas: z
     .array(z.object({ deer: z.enum(QUOTA_DEER), per: z.enum(QUOTA_PER), most: line }))
-    .max(20, 'Twenty quotas at most.'),
-  stateRuleText: z.string().max(2000, 'Keep it to 2000 characters.'),
+    .max(20, RULES_ERRORS.quotas),
+  stateRuleText: z.string().max(2000, RULES_ERRORS.long2000),
   stateRuleSource: line,
   stateRuleStatedOn: line,
 };
@@ -30,11 +31,11 @@ export function readStated(form: TextReader, typed: StatedFields, at: StatedFiel
   const source = typed.source.trim();
   const statedOn = typed.statedOn.trim();
   if (text === '' && source === '' && statedOn === '') return null;
-  if (text === '') form.fail(at.text.split('.'), 'Write the rule, or clear its source and day.');
-  if (text.length > most) form.fail(at.text.split('.'), `Keep the rule to ${most} characters.`);
-  if (source === '') form.fail(at.source.split('.'), 'Say where the rule is written.');
-  if (source.length > 300) form.fail(at.source.split('.'), 'Keep the source to 300 characters.');
-  if (!isDay(statedOn)) form.fail(at.statedOn.split('.'), 'Choose the day on which it was stated.');
+  if (text === '') form.fail(at.text.split('.'), RULES_ERRORS.rule);
+  if (text.length > most) form.fail(at.text.split('.'), RULES_ERRORS.ruleLong(most));
+  if (source === '') form.fail(at.source.split('.'), RULES_ERRORS.source);
+  if (source.length > 300) form.fail(at.source.split('.'), RULES_ERRORS.sourceLong);
+  if (!isDay(statedOn)) form.fail(at.statedOn.split('.'), RULES_ERRORS.statedOn);
   return { text, source, statedOn };
 }
 
@@ -46,7 +47,12 @@ export function readHarvestRules(
     harvestQuotas: typed.harvestQuotas.map(({ deer, per, most }, i) => ({
       deer,
       per,
-      most: form.needNumber(['harvestQuotas', i, 'most'], most, { label: 'Deer', min: 0, max: 1000, whole: true }),
+      most: form.needNumber(['harvestQuotas', i, 'most'], most, {
+        label: RULES_ERRORS.deer,
+        min: 0,
+        max: 1000,
+        whole: true,
+      }),
     })),
     stateHarvestRule: readStated(
       form,

@@ -3,8 +3,9 @@ import type { ClubRules } from '@/core/booking/rules';
 import { GROUND_WORKS, type GroundWork } from '@/core/ground-work';
 import type { TextReader } from './read-number';
 import { readStated } from './rules-harvest-form';
+import { RULES_ERRORS } from './words/field-errors';
 
-const line = z.string().max(600, 'Keep it to 600 characters.');
+const line = z.string().max(600, RULES_ERRORS.long600);
 const stated = z.object({ text: line, source: line, statedOn: line });
 
 /** Fields of the rules form about work on the ground. */

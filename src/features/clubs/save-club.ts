@@ -7,6 +7,8 @@ import type { ChangePlaceInput } from './club-schema';
 import { getClub, lastClubChange, updateClub } from './data';
 import { placeLines, type RuleLine } from './place-words';
 import { type ChangedLine, changedLines, describeRules } from './rules-words';
+import { CLUB_AUDIT } from './words/audit';
+import { CLUB_ERRORS } from './words/errors';
 
 type Club = NonNullable<Awaited<ReturnType<typeof getClub>>>;
 
@@ -15,7 +17,7 @@ interface Save {
   set: Parameters<typeof updateClub>[3];
   action: 'club.rules_changed' | 'club.place_changed';
   /** Begins the summary: 'changed the rules'. */
-  did: string;
+  did: 'rulesChanged' | 'placeChanged';
   lines: (club: Club) => RuleLine[];
 }
 
@@ -24,11 +26,8 @@ async function saveClub(scope: ClubScope, tx: Tx, save: Save, now: number): Prom
   const before = await getClub(scope, tx);
   if (!before) throw notFound();
   if (before.version !== save.version) {
-    const who = (await lastClubChange(scope, tx)) ?? 'Somebody';
-    throw new AppError(
-      'conflict',
-      `${who} saved a change while you had this page open. What you typed is still here and nothing was overwritten. Open the page in another tab to see the change, then load this one again and make yours.`,
-    );
+    const who = (await lastClubChange(scope, tx)) ?? CLUB_ERRORS.somebody;
+    throw new AppError('conflict', CLUB_ERRORS.changedSince(who));
   }
   const after = { ...before, ...save.set };
   const changed = changedLines(save.lines(before), save.lines(after));
@@ -41,7 +40,7 @@ async function saveClub(scope: ClubScope, tx: Tx, save: Save, now: number): Prom
       action: save.action,
       subjectType: 'club',
       subjectId: scope.club.id,
-      summary: `${scope.actor.name} ${save.did}: ${changed.map((line) => line.label).join(', ')}.`,
+      summary: CLUB_AUDIT[save.did](scope.actor.name, changed.map((line) => line.label).join(', ')),
       detail: { version: save.version + 1, changed },
     },
     now,
@@ -68,7 +67,7 @@ export async function saveRules(
         version,
         set: { rules },
         action: 'club.rules_changed',
-        did: 'changed the rules',
+        did: 'rulesChanged',
         lines: (club) => describeRules(completeRules(club.rules), club.units).flatMap((group) => group.lines),
       },
       now,
@@ -87,7 +86,7 @@ export async function savePlace(scope: ClubScope, input: ChangePlaceInput, now: 
         version,
         set: { name, lat, lon, zone, units },
         action: 'club.place_changed',
-        did: "changed the club's name, place or units",
+        did: 'placeChanged',
         lines: placeLines,
       },
       now,

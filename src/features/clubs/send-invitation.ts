@@ -8,6 +8,7 @@ import { queueMail } from '@/server/outbox';
 import type { RateRule } from '@/server/rate-limit';
 import type { ClubScope } from '@/server/scope';
 import { aRole } from './role-words';
+import { INVITATION_MAIL } from './words/mails';
 
 export const INVITATION_DAYS = 14;
 export const INVITATION_MS = INVITATION_DAYS * 24 * 60 * 60_000;
@@ -33,20 +34,17 @@ export async function mailInvitation(
 ): Promise<void> {
   const { club, actor } = scope;
   const { guestFrom, guestTo } = invited;
-  const days =
-    guestFrom && guestTo ? [`You may hunt from ${formatDay(guestFrom, true)} to ${formatDay(guestTo, true)}.`] : [];
+  const days = guestFrom && guestTo ? [INVITATION_MAIL.days(formatDay(guestFrom, true), formatDay(guestTo, true))] : [];
   const { text, html } = composeMail({
     clubName: club.name,
     paragraphs: [
-      `Hello ${invited.name},`,
-      `${actor.name} invites you to join ${club.name} as ${aRole(invited.role)}.`,
+      INVITATION_MAIL.hello(invited.name),
+      INVITATION_MAIL.opening(actor.name, club.name, aRole(invited.role)),
       ...days,
-      'The club books its stands with Windrest: you see which stands are quiet, book one, and everyone knows who is where.',
+      INVITATION_MAIL.what,
     ],
-    button: { label: `Join ${club.name}`, url: `${env.appUrl}/invite/${secret}` },
-    after: [
-      `The link works once, for ${INVITATION_DAYS} days. If you do not know ${actor.name}, leave this mail alone.`,
-    ],
+    button: { label: INVITATION_MAIL.button(club.name), url: `${env.appUrl}/invite/${secret}` },
+    after: [INVITATION_MAIL.lasts(INVITATION_DAYS, actor.name)],
   });
   await queueMail(
     tx,
@@ -55,7 +53,7 @@ export async function mailInvitation(
       kind: 'club.invited',
       dedupeKey: `club.invited:${invited.id}:${hashSecret(secret).slice(0, 16)}`,
       to: { email: invited.email, name: invited.name },
-      subject: `${actor.name} invites you to ${club.name}`,
+      subject: INVITATION_MAIL.subject(actor.name, club.name),
       text,
       html,
     },

@@ -4,6 +4,7 @@ import { approachFormSchema } from './approach-schema';
 import { featureFormSchema } from './feature-schema';
 import { parkingFormSchema } from './parking-schema';
 import { standFormSchema } from './stand-schema';
+import { TYPED_FIELD_ERRORS } from './words/field-errors';
 
 const id = z.string().min(1).max(40);
 const version = z.number().int().positive();
@@ -18,5 +19,5 @@ export const addApproachInput = approachFormSchema.extend({ standId: id });
 export const changeApproachInput = approachFormSchema.extend({ id, version });
 export const openAgainInput = z.object({ id });
 
-const day = z.string().refine(isDay, 'Choose a day.');
+const day = z.string().refine(isDay, TYPED_FIELD_ERRORS.chooseADay);
 export const touchedQuery = z.object({ standId: id.optional(), fromDay: day, toDay: day.optional() });

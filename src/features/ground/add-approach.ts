@@ -8,6 +8,7 @@ import { noteChange } from './note-change';
 import { listParkings } from './parkings-data';
 import { refuseTakenName } from './refuse';
 import { getStand } from './stands-data';
+import { GROUND_AUDIT } from './words/audit';
 import { TAKEN_NAMES } from './words/errors';
 
 /** Read here and not before: the line is tied to the stand and the parking place as they are now. */
@@ -24,7 +25,7 @@ export function addApproach(
     const values = makeApproachSchema(scope.club, { stand, parkings: await listParkings(scope, tx) }).parse(typed);
     refuseTakenName(await listApproachesOf(scope, standId, tx), values.name, TAKEN_NAMES.approach);
     await insertApproach(scope, tx, { ...values, id, standId });
-    const summary = `Added approach ${values.name} to ${stand.name}.`;
+    const summary = GROUND_AUDIT.approachAdded(values.name, stand.name);
     await noteChange(scope, tx, { subject: 'approach', verb: 'added', id, summary }, now);
     return { id, name: values.name };
   });

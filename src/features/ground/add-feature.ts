@@ -5,6 +5,7 @@ import type { FeatureFormValues } from './feature-schema';
 import { insertFeature, listFeatures } from './features-data';
 import { noteChange } from './note-change';
 import { refuseTakenName } from './refuse';
+import { GROUND_AUDIT } from './words/audit';
 import { TAKEN_NAMES } from './words/errors';
 
 export function addFeature(
@@ -16,7 +17,7 @@ export function addFeature(
   return write(async (tx) => {
     refuseTakenName(await listFeatures(scope, tx), values.name, TAKEN_NAMES.feature);
     await insertFeature(scope, tx, { ...values, id });
-    const summary = `Added feature ${values.name}.`;
+    const summary = GROUND_AUDIT.featureAdded(values.name);
     await noteChange(scope, tx, { subject: 'feature', verb: 'added', id, summary }, now);
     return { id, name: values.name };
   });

@@ -4,6 +4,7 @@ import type { ClubScope } from '@/server/scope';
 import { noteChange } from './note-change';
 import { insertParking, listParkings, type ParkingValues } from './parkings-data';
 import { refuseTakenName } from './refuse';
+import { GROUND_AUDIT } from './words/audit';
 import { TAKEN_NAMES } from './words/errors';
 
 export function addParking(
@@ -15,7 +16,7 @@ export function addParking(
   return write(async (tx) => {
     refuseTakenName(await listParkings(scope, tx), values.name, TAKEN_NAMES.parking);
     await insertParking(scope, tx, { ...values, id });
-    const summary = `Added parking place ${values.name}.`;
+    const summary = GROUND_AUDIT.parkingAdded(values.name);
     await noteChange(scope, tx, { subject: 'parking', verb: 'added', id, summary }, now);
     return { id, name: values.name };
   });

@@ -5,6 +5,7 @@ import { refuseUnknownMembers } from './known-members';
 import { noteChange } from './note-change';
 import { refuseTakenName } from './refuse';
 import { insertStand, listStands, type StandValues } from './stands-data';
+import { GROUND_AUDIT } from './words/audit';
 import { TAKEN_NAMES } from './words/errors';
 
 export function addStand(scope: ClubScope, values: StandValues, now: number): Promise<{ id: string; name: string }> {
@@ -13,7 +14,12 @@ export function addStand(scope: ClubScope, values: StandValues, now: number): Pr
     refuseTakenName(await listStands(scope, tx), values.name, TAKEN_NAMES.stand);
     await refuseUnknownMembers(scope, values.allowedMemberIds, tx);
     await insertStand(scope, tx, { ...values, id, createdAt: now });
-    await noteChange(scope, tx, { subject: 'stand', verb: 'added', id, summary: `Added stand ${values.name}.` }, now);
+    await noteChange(
+      scope,
+      tx,
+      { subject: 'stand', verb: 'added', id, summary: GROUND_AUDIT.standAdded(values.name) },
+      now,
+    );
     return { id, name: values.name };
   });
 }

@@ -5,23 +5,24 @@ import type { ApproachValues } from './approaches-data';
 import type { FormClub } from './form-club';
 import { parsePoints, pointsText } from './geometry-text';
 import { LINE_MAX, NOTES_MAX, readForm } from './read-form';
+import { APPROACH_FIELD_ERRORS } from './words/field-errors';
 
 export const DIRECTIONS = ['in', 'out', 'both'] as const;
 
 /** A line that begins or ends this near is taken to be there already. */
 const SAME_PLACE_M = 15;
 
-const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const line = z.string().max(LINE_MAX, APPROACH_FIELD_ERRORS.long(LINE_MAX));
 
 export const approachFormSchema = z.object({
   name: line,
   /** Blank: no parking place is named. */
   parkingId: line,
   direction: z.enum(DIRECTIONS),
-  points: z.string().max(60_000, 'That is too long to keep: leave some points out.'),
+  points: z.string().max(60_000, APPROACH_FIELD_ERRORS.shapeLong),
   /** Number of the last line that is driven; blank: all on foot. */
   drivenTo: line,
-  notes: z.string().max(NOTES_MAX, `Keep the notes to ${NOTES_MAX} characters.`),
+  notes: z.string().max(NOTES_MAX, APPROACH_FIELD_ERRORS.notesLong(NOTES_MAX)),
 });
 export type ApproachForm = z.output<typeof approachFormSchema>;
 
@@ -53,20 +54,19 @@ export function makeApproachSchema(club: FormClub, places: ApproachPlaces) {
     const form = readForm(ctx);
     const name = form.name('name', typed.name);
     const parking = places.parkings.find((p) => p.id === typed.parkingId);
-    if (typed.parkingId !== '' && !parking) form.fail('parkingId', 'That parking place is gone: choose another.');
+    if (typed.parkingId !== '' && !parking) form.fail('parkingId', APPROACH_FIELD_ERRORS.parkingGone);
     const read = parsePoints(typed.points, club);
     if (!read.ok) {
       form.fail('points', read.message);
       return z.NEVER;
     }
     const [first, last] = [read.points[0], read.points.at(-1)];
-    if (!first && !parking)
-      form.fail('points', 'Type the places along the way, or choose a parking place to walk straight from.');
+    if (!first && !parking) form.fail('points', APPROACH_FIELD_ERRORS.points);
     if (first && last && apart(last, stand) > 2 * SAME_PLACE_M && apart(first, stand) < apart(last, stand) / 2) {
-      form.fail('points', `The line begins near ${stand.name}: type it from the parking place to the stand.`);
+      form.fail('points', APPROACH_FIELD_ERRORS.beginsAtStand(stand.name));
     }
     const tied = tieEnds(club, read.points, { stand, parking });
-    const rule = { label: 'Driven as far as line', min: 1, max: Math.max(1, read.points.length), whole: true };
+    const rule = { label: APPROACH_FIELD_ERRORS.drivenTo, min: 1, max: Math.max(1, read.points.length), whole: true };
     const driven = form.number('drivenTo', typed.drivenTo, rule);
     const values: ApproachValues = {
       name,

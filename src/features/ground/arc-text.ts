@@ -3,6 +3,7 @@ import { parseArcs } from '@/core/parse-arcs';
 import { SECTORS } from '@/core/sectors';
 import type { Arc, GoodWindArc, WindowName } from '@/core/types';
 import { numberText } from '@/features/clubs/read-number';
+import { TYPED_FIELD_ERRORS } from './words/field-errors';
 
 /** Form fields for good winds, and the window each stands for. */
 export const ARC_FIELDS = [
@@ -20,7 +21,7 @@ export type ReadArcs = { ok: true; arcs: GoodWindArc[] } | { ok: false; message:
 export function readArcs(text: string, window: WindowName | null): ReadArcs {
   const parsed = parseArcs(text);
   if (!parsed.ok) return parsed;
-  if (parsed.arcs.length > MOST_ARCS) return { ok: false, message: `Type at most ${MOST_ARCS} winds.` };
+  if (parsed.arcs.length > MOST_ARCS) return { ok: false, message: TYPED_FIELD_ERRORS.mostWinds(MOST_ARCS) };
   return { ok: true, arcs: parsed.arcs.map((arc) => ({ ...arc, window })) };
 }
 

@@ -1,6 +1,7 @@
 import { normalizeDeg } from '@/core/angles';
 import { findSector, SECTORS, sectorName } from '@/core/sectors';
 import { numberText, parseNumber } from '@/features/clubs/read-number';
+import { TYPED_FIELD_ERRORS } from './words/field-errors';
 
 export type ParsedBearing = { ok: true; deg: number | null } | { ok: false; message: string };
 
@@ -12,7 +13,7 @@ export function parseBearing(text: string): ParsedBearing {
   if (sector) return { ok: true, deg: sector.centreDeg };
   const deg = parseNumber(trimmed);
   if (deg === null || deg < 0 || deg > 360) {
-    return { ok: false, message: 'Type a compass point (N, NNE ... NNW) or degrees from 0 to 360.' };
+    return { ok: false, message: TYPED_FIELD_ERRORS.bearing };
   }
   return { ok: true, deg: normalizeDeg(deg) };
 }

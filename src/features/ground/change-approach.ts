@@ -7,6 +7,7 @@ import { noteChange } from './note-change';
 import { listParkings } from './parkings-data';
 import { changedSince, changes, refuseTakenName } from './refuse';
 import { getStand } from './stands-data';
+import { GROUND_AUDIT } from './words/audit';
 import { TAKEN_NAMES } from './words/errors';
 
 export function changeApproach(
@@ -23,7 +24,7 @@ export function changeApproach(
     refuseTakenName(await listApproachesOf(scope, stand.id, tx), values.name, TAKEN_NAMES.approach, at.id);
     if (!(await updateApproach(scope, tx, at, values))) throw await changedSince(scope, before, tx);
     const detail = changes(before, values);
-    const summary = `Changed approach ${values.name} to ${stand.name}.`;
+    const summary = GROUND_AUDIT.approachChanged(values.name, stand.name);
     await noteChange(scope, tx, { subject: 'approach', verb: 'changed', id: at.id, summary, detail }, now);
     return { id: at.id, name: values.name };
   });

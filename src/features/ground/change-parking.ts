@@ -4,6 +4,7 @@ import type { ClubScope } from '@/server/scope';
 import { noteChange } from './note-change';
 import { getParking, listParkings, type ParkingValues, updateParking } from './parkings-data';
 import { changedSince, changes, refuseTakenName } from './refuse';
+import { GROUND_AUDIT } from './words/audit';
 import { TAKEN_NAMES } from './words/errors';
 
 export function changeParking(
@@ -18,7 +19,7 @@ export function changeParking(
     refuseTakenName(await listParkings(scope, tx), values.name, TAKEN_NAMES.parking, at.id);
     if (!(await updateParking(scope, tx, at, values))) throw await changedSince(scope, before, tx);
     const detail = changes(before, values);
-    const summary = `Changed parking place ${values.name}.`;
+    const summary = GROUND_AUDIT.parkingChanged(values.name);
     await noteChange(scope, tx, { subject: 'parking', verb: 'changed', id: at.id, summary, detail }, now);
     return { id: at.id, name: values.name };
   });

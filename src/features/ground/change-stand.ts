@@ -5,6 +5,7 @@ import { refuseUnknownMembers } from './known-members';
 import { noteChange } from './note-change';
 import { changedSince, changes, refuseTakenName } from './refuse';
 import { getStand, listStands, type StandValues, updateStand } from './stands-data';
+import { GROUND_AUDIT } from './words/audit';
 import { TAKEN_NAMES } from './words/errors';
 
 export function changeStand(
@@ -20,7 +21,7 @@ export function changeStand(
     await refuseUnknownMembers(scope, values.allowedMemberIds, tx);
     if (!(await updateStand(scope, tx, at, values))) throw await changedSince(scope, before, tx);
     const detail = changes(before, values);
-    const summary = `Changed stand ${values.name}.`;
+    const summary = GROUND_AUDIT.standChanged(values.name);
     await noteChange(scope, tx, { subject: 'stand', verb: 'changed', id: at.id, summary, detail }, now);
     return { id: at.id, name: values.name };
   });

@@ -6,19 +6,20 @@ import type { FeatureRow } from './features-data';
 import type { FormClub } from './form-club';
 import { type DrawnGeometry, geometryText, parseGeometry, SHAPES } from './geometry-text';
 import { type FormReader, LINE_MAX, NOTES_MAX, readForm } from './read-form';
+import { FEATURE_FIELD_ERRORS } from './words/field-errors';
 
 /** GeoJSON of the most points kept, with room to spare. */
 const PLACES_MAX = 60_000;
 
 const MOST_CROPS = 20;
-const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const line = z.string().max(LINE_MAX, FEATURE_FIELD_ERRORS.long(LINE_MAX));
 const NO_USE = { night: '', dawn: '', morning: '', midday: '', afternoon: '', dusk: '' };
 
 export const featureFormSchema = z.object({
   name: line,
   kind: z.enum(FEATURE_KINDS),
   shape: z.enum(SHAPES),
-  places: z.string().max(PLACES_MAX, 'That is too long to keep: leave some points out.'),
+  places: z.string().max(PLACES_MAX, FEATURE_FIELD_ERRORS.shapeLong),
   /** '1' to '12'. */
   months: z.array(z.string().max(2)).max(12),
   /** Percent by time of day; blank: as the kind is commonly used. */
@@ -26,8 +27,8 @@ export const featureFormSchema = z.object({
   /** What a crop field holds, year by year. */
   rotation: z
     .array(z.object({ year: line, crop: line, months: z.array(z.string().max(2)).max(12) }))
-    .max(MOST_CROPS, `Keep at most ${MOST_CROPS} years.`),
-  notes: z.string().max(NOTES_MAX, `Keep the notes to ${NOTES_MAX} characters.`),
+    .max(MOST_CROPS, FEATURE_FIELD_ERRORS.mostYears(MOST_CROPS)),
+  notes: z.string().max(NOTES_MAX, FEATURE_FIELD_ERRORS.notesLong(NOTES_MAX)),
 });
 export type FeatureForm = z.output<typeof featureFormSchema>;
 
@@ -39,8 +40,8 @@ export type FeatureFormValues = Pick<
 
 function readMonths(form: FormReader, path: string, typed: readonly string[]): number[] {
   const months = [...new Set(typed.map(Number))].sort((a, b) => a - b);
-  if (months.length === 0) form.fail(path, 'Choose at least one month in which deer use it.');
-  if (months.some((m) => !Number.isInteger(m) || m < 1 || m > 12)) form.fail(path, 'Months run from 1 to 12.');
+  if (months.length === 0) form.fail(path, FEATURE_FIELD_ERRORS.months);
+  if (months.some((m) => !Number.isInteger(m) || m < 1 || m > 12)) form.fail(path, FEATURE_FIELD_ERRORS.monthRange);
   return months;
 }
 
@@ -48,7 +49,12 @@ function readMonths(form: FormReader, path: string, typed: readonly string[]): n
 function readUse(form: FormReader, typed: FeatureForm['use']): Partial<UseTable> | null {
   const use: Partial<UseTable> = {};
   for (const time of TIMES_OF_DAY) {
-    const percent = form.number(`use.${time}`, typed[time], { label: 'Use', min: 0, max: 100, unit: 'percent' });
+    const percent = form.number(`use.${time}`, typed[time], {
+      label: FEATURE_FIELD_ERRORS.use,
+      min: 0,
+      max: 100,
+      unit: FEATURE_FIELD_ERRORS.percent,
+    });
     if (percent !== null) use[time] = percent / 100;
   }
   return Object.keys(use).length === 0 ? null : use;
@@ -57,9 +63,9 @@ function readUse(form: FormReader, typed: FeatureForm['use']): Partial<UseTable>
 function readRotation(form: FormReader, typed: FeatureForm['rotation']): CropYear[] {
   const years = new Set<number>();
   return typed.map(({ year, crop, months }, i): CropYear => {
-    const rule = { label: 'Year', min: 1990, max: 2200, whole: true };
+    const rule = { label: FEATURE_FIELD_ERRORS.year, min: 1990, max: 2200, whole: true };
     const read = form.needNumber(`rotation.${i}.year`, year, rule);
-    if (years.has(read)) form.fail(`rotation.${i}.year`, `There is already a crop of ${read}.`);
+    if (years.has(read)) form.fail(`rotation.${i}.year`, FEATURE_FIELD_ERRORS.cropTwice(read));
     years.add(read);
     return {
       year: read,

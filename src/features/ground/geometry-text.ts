@@ -2,6 +2,7 @@ import type { Geometry, LineString, Point, Polygon, Position } from 'geojson';
 import { z } from 'zod';
 import type { LatLon } from '@/core/geometry';
 import { degreesText, farFromClub, parseDegrees } from './place-text';
+import { GEOMETRY_ERRORS } from './words/field-errors';
 
 export const SHAPES = ['point', 'line', 'area'] as const;
 export type Shape = (typeof SHAPES)[number];
@@ -51,13 +52,13 @@ export function parsePoints(text: string, club: LatLon): ParsedLine {
     const lat = parseDegrees(parts[0] ?? '', 'lat');
     const lon = parseDegrees(parts[1] ?? '', 'lon');
     if (parts.length !== 2 || lat === null || lon === null) {
-      return fail(`Line ${i + 1}: type latitude, longitude, such as 38.6051, -83.1952.`);
+      return fail(GEOMETRY_ERRORS.line(i + 1));
     }
     const far = farFromClub(club, { lat, lon });
-    if (far) return fail(`Line ${i + 1}: ${far}`);
+    if (far) return fail(GEOMETRY_ERRORS.lineFar(i + 1, far));
     points.push([lon, lat]);
   }
-  if (points.length > MOST_POINTS) return fail(`At most ${MOST_POINTS} points are kept: leave some out.`);
+  if (points.length > MOST_POINTS) return fail(GEOMETRY_ERRORS.mostPoints(MOST_POINTS));
   return { ok: true, points };
 }
 
@@ -75,10 +76,10 @@ function parseGeoJson(text: string, club: LatLon): ParsedGeometry {
   try {
     value = JSON.parse(text);
   } catch {
-    return fail('This begins like GeoJSON but cannot be read: paste the whole of it.');
+    return fail(GEOMETRY_ERRORS.brokenGeoJson);
   }
   const parsed = drawn.safeParse(unwrap(value));
-  if (!parsed.success) return fail('Paste one GeoJSON Point, LineString or Polygon.');
+  if (!parsed.success) return fail(GEOMETRY_ERRORS.oneGeoJson);
   const geometry = parsed.data;
   const points =
     geometry.type === 'Point'
@@ -86,16 +87,14 @@ function parseGeoJson(text: string, club: LatLon): ParsedGeometry {
       : geometry.type === 'LineString'
         ? geometry.coordinates
         : geometry.coordinates.flat();
-  if (points.length > MOST_POINTS) return fail(`At most ${MOST_POINTS} points are kept: leave some out.`);
+  if (points.length > MOST_POINTS) return fail(GEOMETRY_ERRORS.mostPoints(MOST_POINTS));
   for (const [lon = 0, lat = 0] of points) {
-    if (Math.abs(lat) > 90 || Math.abs(lon) > 180)
-      return fail('GeoJSON puts longitude first: these numbers are out of bounds.');
+    if (Math.abs(lat) > 90 || Math.abs(lon) > 180) return fail(GEOMETRY_ERRORS.outOfBounds);
     const far = farFromClub(club, { lat, lon });
     if (far) return fail(far);
   }
   if (geometry.type !== 'Polygon') return { ok: true, geometry };
-  if (geometry.coordinates.some((ring) => !same(ring[0], ring.at(-1))))
-    return fail('A ring of the area is not closed.');
+  if (geometry.coordinates.some((ring) => !same(ring[0], ring.at(-1)))) return fail(GEOMETRY_ERRORS.openRing);
   return { ok: true, geometry: { ...geometry, coordinates: wound(geometry.coordinates) } };
 }
 
@@ -104,7 +103,7 @@ export function parseGeometry(shape: Shape, text: string, club: LatLon): ParsedG
   if (/^\s*[{[]/.test(text)) {
     const parsed = parseGeoJson(text, club);
     if (parsed.ok && TYPE_SHAPES[parsed.geometry.type] !== shape) {
-      return fail(`The GeoJSON is a ${TYPE_SHAPES[parsed.geometry.type]}: choose that above.`);
+      return fail(GEOMETRY_ERRORS.otherShape[TYPE_SHAPES[parsed.geometry.type]]);
     }
     return parsed;
   }
@@ -113,17 +112,15 @@ export function parseGeometry(shape: Shape, text: string, club: LatLon): ParsedG
   const points = shape === 'area' && same(read.points[0], read.points.at(-1)) ? read.points.slice(0, -1) : read.points;
   const [first] = points;
   if (!first || points.length < FEWEST[shape]) {
-    return fail(
-      `A${shape === 'area' ? 'n' : ''} ${shape} needs ${FEWEST[shape]} place${FEWEST[shape] === 1 ? '' : 's or more'}, one to a line.`,
-    );
+    return fail(GEOMETRY_ERRORS.fewest[shape](FEWEST[shape]));
   }
   if (shape === 'point') {
     return points.length === 1
       ? { ok: true, geometry: { type: 'Point', coordinates: first } }
-      : fail('A point is one place only.');
+      : fail(GEOMETRY_ERRORS.onePlace);
   }
   if (shape === 'line') return { ok: true, geometry: { type: 'LineString', coordinates: points } };
-  if (turnOf(points) === 0) return fail('These places lie on one line and hold no area.');
+  if (turnOf(points) === 0) return fail(GEOMETRY_ERRORS.flatArea);
   return { ok: true, geometry: { type: 'Polygon', coordinates: wound([[...points, first]]) } };
 }
 

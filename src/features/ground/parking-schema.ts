@@ -3,14 +3,15 @@ import type { FormClub } from './form-club';
 import type { ParkingValues } from './parkings-data';
 import { degreesText, readPlace } from './place-text';
 import { LINE_MAX, NOTES_MAX, readForm } from './read-form';
+import { PARKING_FIELD_ERRORS } from './words/field-errors';
 
-const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const line = z.string().max(LINE_MAX, PARKING_FIELD_ERRORS.long(LINE_MAX));
 
 export const parkingFormSchema = z.object({
   name: line,
   lat: line,
   lon: line,
-  notes: z.string().max(NOTES_MAX, `Keep the notes to ${NOTES_MAX} characters.`),
+  notes: z.string().max(NOTES_MAX, PARKING_FIELD_ERRORS.notesLong(NOTES_MAX)),
 });
 export type ParkingForm = z.output<typeof parkingFormSchema>;
 

@@ -1,6 +1,7 @@
 import { distanceM, type LatLon, toLocal } from '@/core/geometry';
 import { numberText, parseNumber } from '@/features/clubs/read-number';
 import type { FormReader } from './read-form';
+import { TYPED_FIELD_ERRORS } from './words/field-errors';
 
 /** Ground further from the club than this is a slip of the hand. */
 const FARTHEST_M = 100_000;
@@ -29,19 +30,18 @@ export function farFromClub(club: LatLon, at: LatLon): string | null {
   const near = (p: LatLon) => distanceM({ eastM: 0, northM: 0 }, toLocal(club, p)) <= FARTHEST_M;
   if (near(at)) return null;
   if (Math.abs(at.lon) <= 90 && near({ lat: at.lon, lon: at.lat })) {
-    return 'This is far from the club: did you swap latitude and longitude?';
+    return TYPED_FIELD_ERRORS.farSwapped;
   }
-  if (near({ lat: at.lat, lon: -at.lon }))
-    return 'This is far from the club: is a minus sign missing or too many? West is minus.';
-  return 'This is more than 100 km from the club: did you swap latitude and longitude?';
+  if (near({ lat: at.lat, lon: -at.lon })) return TYPED_FIELD_ERRORS.farMinus;
+  return TYPED_FIELD_ERRORS.far;
 }
 
 /** The place of a form with a field for each number. */
 export function readPlace(form: FormReader, club: LatLon, typed: { lat: string; lon: string }): LatLon {
   const lat = parseDegrees(typed.lat, 'lat');
   const lon = parseDegrees(typed.lon, 'lon');
-  if (lat === null) form.fail('lat', 'Type the latitude in degrees, from -90 to 90, such as 38.6051.');
-  if (lon === null) form.fail('lon', 'Type the longitude in degrees, from -180 to 180; west is minus.');
+  if (lat === null) form.fail('lat', TYPED_FIELD_ERRORS.latitude);
+  if (lon === null) form.fail('lon', TYPED_FIELD_ERRORS.longitude);
   if (lat === null || lon === null) return club;
   const far = farFromClub(club, { lat, lon });
   if (far) form.fail('lat', far);

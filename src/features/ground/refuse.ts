@@ -1,8 +1,10 @@
 import { formatDay } from '@/core/day-time';
+import { SIT_WINDOW_WORDS } from '@/core/words/windows';
 import type { ReadFrom } from '@/db/client';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { type BookedSit, lastChangedBy } from './people-data';
+import { GROUND_ERRORS, namesAndMore } from './words/errors';
 
 /** Somebody saved the same thing after it was opened: says who. */
 export async function changedSince(
@@ -10,11 +12,8 @@ export async function changedSince(
   thing: { id: string; name: string },
   from: ReadFrom,
 ): Promise<AppError> {
-  const who = (await lastChangedBy(scope, thing.id, from)) ?? 'Somebody';
-  return new AppError(
-    'conflict',
-    `${who} changed ${thing.name} since you opened it. What you typed is still here: open ${thing.name} in another tab, compare, and type it there.`,
-  );
+  const who = (await lastChangedBy(scope, thing.id, from)) ?? GROUND_ERRORS.somebody;
+  return new AppError('conflict', GROUND_ERRORS.changedSince(who, thing.name, thing.name));
 }
 
 /** Names are one of a kind in a club, whatever their case. */
@@ -30,16 +29,14 @@ export function refuseTakenName(
   throw new AppError('conflict', message, { fields: { name: message } });
 }
 
-const WINDOW_WORDS = { morning: 'morning', evening: 'evening', all_day: 'all day' } as const;
 const MOST_NAMED = 5;
 
 /** 'Sat 7 Nov morning (Dale)', at most five and how many more. */
 export function namedSits(sits: BookedSit[]): string {
   const named = sits
     .slice(0, MOST_NAMED)
-    .map((s) => `${formatDay(s.day)} ${WINDOW_WORDS[s.windows]} (${s.memberName})`);
-  const more = sits.length - named.length;
-  return named.join(', ') + (more > 0 ? ` and ${more} more` : '');
+    .map((s) => `${formatDay(s.day)} ${SIT_WINDOW_WORDS[s.windows]} (${s.memberName})`);
+  return namesAndMore(named, sits.length - named.length);
 }
 
 /** The fields that differ, before and after, for the audit log. */

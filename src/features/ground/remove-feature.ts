@@ -4,6 +4,7 @@ import type { ClubScope } from '@/server/scope';
 import { getFeature, updateFeature } from './features-data';
 import { noteChange } from './note-change';
 import { changedSince } from './refuse';
+import { GROUND_AUDIT } from './words/audit';
 
 export function removeFeature(
   scope: ClubScope,
@@ -14,7 +15,7 @@ export function removeFeature(
     const feature = await getFeature(scope, at.id, tx);
     if (!feature) throw notFound();
     if (!(await updateFeature(scope, tx, at, { removedAt: now }))) throw await changedSince(scope, feature, tx);
-    const summary = `Removed feature ${feature.name}.`;
+    const summary = GROUND_AUDIT.featureRemoved(feature.name);
     await noteChange(scope, tx, { subject: 'feature', verb: 'removed', id: at.id, summary }, now);
     return { name: feature.name };
   });

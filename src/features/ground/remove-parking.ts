@@ -5,6 +5,8 @@ import { listApproaches } from './approaches-data';
 import { noteChange } from './note-change';
 import { getParking, updateParking } from './parkings-data';
 import { changedSince } from './refuse';
+import { GROUND_AUDIT } from './words/audit';
+import { GROUND_ERRORS, namesAndMore } from './words/errors';
 
 /** Refused while an approach begins there. */
 export async function removeParkingIn(
@@ -17,11 +19,11 @@ export async function removeParkingIn(
   if (!parking) throw notFound();
   const begun = (await listApproaches(scope, tx)).filter((a) => a.parkingId === at.id).map((a) => a.name);
   if (begun.length > 0) {
-    const names = begun.slice(0, 5).join(', ') + (begun.length > 5 ? ` and ${begun.length - 5} more` : '');
-    throw new AppError('conflict', `Approaches begin at ${parking.name}: ${names}. Give them another place first.`);
+    const names = namesAndMore(begun.slice(0, 5), begun.length - 5);
+    throw new AppError('conflict', GROUND_ERRORS.parkingUsed(parking.name, names));
   }
   if (!(await updateParking(scope, tx, at, { removedAt: now }))) throw await changedSince(scope, parking, tx);
-  const summary = `Removed parking place ${parking.name}.`;
+  const summary = GROUND_AUDIT.parkingRemoved(parking.name);
   await noteChange(scope, tx, { subject: 'parking', verb: 'removed', id: at.id, summary }, now);
   return { name: parking.name };
 }

@@ -7,6 +7,8 @@ import { noteChange } from './note-change';
 import { listBookedSits } from './people-data';
 import { changedSince, namedSits } from './refuse';
 import { getStand, updateStand } from './stands-data';
+import { GROUND_AUDIT } from './words/audit';
+import { GROUND_ERRORS } from './words/errors';
 
 /** Takes a stand away with its approaches and closures; past sits keep it. Refused while sits are booked there. */
 export async function removeStandIn(
@@ -19,12 +21,12 @@ export async function removeStandIn(
   if (!stand) throw notFound();
   const booked = await listBookedSits(scope, { standId: at.id, now }, tx);
   if (booked.length > 0) {
-    throw new AppError('conflict', `${stand.name} is booked: ${namedSits(booked)}. Cancel or move these sits first.`);
+    throw new AppError('conflict', GROUND_ERRORS.standBooked(stand.name, namedSits(booked)));
   }
   if (!(await updateStand(scope, tx, at, { removedAt: now }))) throw await changedSince(scope, stand, tx);
   await removeApproachesOf(scope, tx, at.id, now);
   await removeClosuresOf(scope, tx, at.id, now);
-  const summary = `Removed stand ${stand.name} with its approaches and closures.`;
+  const summary = GROUND_AUDIT.standRemoved(stand.name);
   await noteChange(scope, tx, { subject: 'stand', verb: 'removed', id: at.id, summary }, now);
   return { name: stand.name };
 }

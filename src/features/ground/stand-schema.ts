@@ -7,8 +7,9 @@ import type { FormClub } from './form-club';
 import { readPlace } from './place-text';
 import { type FormReader, LINE_MAX, NOTES_MAX, readForm } from './read-form';
 import type { StandValues } from './stands-data';
+import { STAND_FIELD_ERRORS } from './words/field-errors';
 
-const line = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const line = z.string().max(LINE_MAX, STAND_FIELD_ERRORS.long(LINE_MAX));
 
 /** What the form holds: text in the club's units. */
 export const standFormSchema = z.object({
@@ -34,7 +35,7 @@ export const standFormSchema = z.object({
   slopePercent: line,
   whoMayHunt: z.enum(['everyone', 'named']),
   allowedMemberIds: z.array(z.string().max(40)).max(500),
-  notes: z.string().max(NOTES_MAX, `Keep the notes to ${NOTES_MAX} characters.`),
+  notes: z.string().max(NOTES_MAX, STAND_FIELD_ERRORS.notesLong(NOTES_MAX)),
 });
 export type StandForm = z.output<typeof standFormSchema>;
 
@@ -48,11 +49,16 @@ function readRanges(form: FormReader, typed: StandForm['shotRange'], units: Unit
   const { range: max, rangeUnit: unit } = STAND_LIMITS[units];
   const ranges: Partial<Record<Weapon, number>> = {};
   for (const weapon of WEAPONS) {
-    const range = form.number(`shotRange.${weapon}`, typed[weapon], { label: 'Longest shot', min: 1, max, unit });
+    const range = form.number(`shotRange.${weapon}`, typed[weapon], {
+      label: STAND_FIELD_ERRORS.longestShot,
+      min: 1,
+      max,
+      unit,
+    });
     if (range !== null) ranges[weapon] = units === 'us' ? ydToM(range) : range;
   }
   if (WEAPONS.every((weapon) => typed[weapon].trim() === '')) {
-    form.fail('shotRange.bow', 'At least one weapon needs its longest shot.');
+    form.fail('shotRange.bow', STAND_FIELD_ERRORS.oneWeapon);
   }
   return ranges;
 }
@@ -80,9 +86,14 @@ export function makeStandSchema(club: FormClub) {
     // In the form's own order, so that the list of mistakes follows it.
     const name = form.name('name', typed.name);
     const place = readPlace(form, club, typed);
-    const height = form.needNumber('seatHeight', typed.seatHeight, { label: 'Seat height', min: 0, max, unit });
-    const days = { label: 'Rest days', min: 0, max: 60, whole: true };
-    const most = { label: 'Most sits', min: 1, max: 365, whole: true };
+    const height = form.needNumber('seatHeight', typed.seatHeight, {
+      label: STAND_FIELD_ERRORS.seatHeight,
+      min: 0,
+      max,
+      unit,
+    });
+    const days = { label: STAND_FIELD_ERRORS.restDays, min: 0, max: 60, whole: true };
+    const most = { label: STAND_FIELD_ERRORS.mostSits, min: 1, max: 365, whole: true };
     const named = typed.whoMayHunt === 'named';
     const values: StandValues = {
       name,
@@ -94,7 +105,7 @@ export function makeStandSchema(club: FormClub) {
       shotSide: typed.shotSide,
       shotRangeM: readRanges(form, typed.shotRange, club.units),
       shelter: typed.shelter,
-      seats: form.needNumber('seats', typed.seats, { label: 'Seats', min: 1, max: 8, whole: true }),
+      seats: form.needNumber('seats', typed.seats, { label: STAND_FIELD_ERRORS.seats, min: 1, max: 8, whole: true }),
       arcs: readAllArcs(form, typed),
       morning: typed.morning,
       evening: typed.evening,
@@ -102,15 +113,15 @@ export function makeStandSchema(club: FormClub) {
       mostSitsSeason: form.number('mostSitsSeason', typed.mostSitsSeason, most),
       drainBearingDeg: readBearing(form, 'drainBearing', typed.drainBearing),
       slopePercent: form.number('slopePercent', typed.slopePercent, {
-        label: 'Slope',
+        label: STAND_FIELD_ERRORS.slope,
         min: 0,
         max: 200,
-        unit: 'percent',
+        unit: STAND_FIELD_ERRORS.percent,
       }),
       allowedMemberIds: named ? [...new Set(typed.allowedMemberIds)] : null,
       notes: typed.notes.trim(),
     };
-    if (named && typed.allowedMemberIds.length === 0) form.fail('allowedMemberIds', 'Name at least one member.');
+    if (named && typed.allowedMemberIds.length === 0) form.fail('allowedMemberIds', STAND_FIELD_ERRORS.oneMember);
     return form.failed() ? z.NEVER : values;
   });
 }

@@ -5,6 +5,8 @@ import { distanceM, type LatLon, lengthM, toLocal } from '@/core/geometry';
 import type { Arc, Suitability } from '@/core/types';
 import { formatArea, formatDistance, type Units } from '@/core/units';
 import type { ClosureRow } from './closures-data';
+import { NONE_SET } from './words';
+import { CLOSED_DAYS_WORDS } from './words/closures';
 
 /** A stand as a row of the list. */
 export interface StandLine {
@@ -55,7 +57,7 @@ export interface ClosureLine {
 
 /** Arcs for people, as compass points and degrees, each once: 'NW-N · 304°–11°'. */
 export function formatArcs(arcs: readonly Arc[]): string {
-  return arcs.length === 0 ? 'None set' : mergeArcs(arcs).map(formatArc).join(', ');
+  return arcs.length === 0 ? NONE_SET : mergeArcs(arcs).map(formatArc).join(', ');
 }
 
 /** The same as compass points alone, for a narrow column. */
@@ -67,8 +69,8 @@ export function formatWinds(arcs: readonly Arc[]): string {
 
 export function formatDays(closure: Pick<ClosureRow, 'fromDay' | 'toDay'>): string {
   const from = formatDay(closure.fromDay, true);
-  if (closure.toDay === null) return `${from} until opened again`;
-  return closure.toDay === closure.fromDay ? from : `${from} to ${formatDay(closure.toDay, true)}`;
+  if (closure.toDay === null) return CLOSED_DAYS_WORDS.untilOpened(from);
+  return closure.toDay === closure.fromDay ? from : CLOSED_DAYS_WORDS.days(from, formatDay(closure.toDay, true));
 }
 
 /** What a list says of a stand's closures on a day, the first that holds or is to come. */
@@ -77,9 +79,10 @@ export function formatClosed(closures: Pick<ClosureRow, 'fromDay' | 'toDay' | 'r
     .filter((c) => c.toDay === null || c.toDay >= today)
     .toSorted((a, b) => a.fromDay.localeCompare(b.fromDay));
   if (!next) return '';
-  if (next.fromDay > today) return `Closes ${formatDay(next.fromDay)}: ${next.reason}`;
-  const until = next.toDay === null ? 'until opened again' : `until ${formatDay(next.toDay)}`;
-  return `Closed ${until}: ${next.reason}`;
+  if (next.fromDay > today) return CLOSED_DAYS_WORDS.closes(formatDay(next.fromDay), next.reason);
+  return next.toDay === null
+    ? CLOSED_DAYS_WORDS.closedUntilOpened(next.reason)
+    : CLOSED_DAYS_WORDS.closedUntil(formatDay(next.toDay), next.reason);
 }
 
 /** Length of a line or area of a patch; empty for a point. */

@@ -68,3 +68,6 @@ export function formatMonths(months: readonly number[]): string {
     })
     .join(', ');
 }
+
+/** In place of good winds that nobody has set. */
+export const NONE_SET = 'None set';

@@ -8,6 +8,7 @@ import { listMyClubs } from '@/features/accounts/reads';
 import { clockText } from '@/features/bookings/sit-words';
 import { clubNavItems } from '@/features/clubs/club-nav';
 import { ClubSwitch } from '@/features/clubs/components/club-switch';
+import { CLUB_SHELL_WORDS } from '@/features/clubs/words/pages';
 import { LateWaiting } from '@/features/offline/components/late-waiting';
 import { pagesToKeep } from '@/features/offline/keep-list';
 import { hashSecret } from '@/lib/secrets';
@@ -56,8 +57,8 @@ export default async function ClubLayout({ params, children }: ClubLayoutProps) 
             label={user.name}
             look="quiet"
             items={[
-              { label: 'Account and sign out', href: '/account' },
-              { label: 'My clubs', href: '/clubs' },
+              { label: CLUB_SHELL_WORDS.account, href: '/account' },
+              { label: CLUB_SHELL_WORDS.clubs, href: '/clubs' },
             ]}
           />
         }

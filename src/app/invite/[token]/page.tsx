@@ -4,13 +4,14 @@ import { JoinForm } from '@/features/clubs/components/join-form';
 import { JoinNewForm } from '@/features/clubs/components/join-new-form';
 import { type OpenInvitation, readInvitation } from '@/features/clubs/read-invitation';
 import { aRole, ROLE_NOTES } from '@/features/clubs/role-words';
+import { INVITE_PAGE_WORDS } from '@/features/clubs/words/pages';
 import { now } from '@/server/clock';
 import { publicPage } from '@/server/doors';
 import { ButtonLink, TextLink } from '@/ui/button';
 import { PageTitle } from '@/ui/page-parts';
 import { joinAction, joinNewAction } from './actions';
 
-export const metadata: Metadata = { title: 'Join a club', referrer: 'no-referrer' };
+export const metadata: Metadata = { title: INVITE_PAGE_WORDS.title, referrer: 'no-referrer' };
 
 interface Visit {
   token: string;
@@ -24,12 +25,13 @@ function WayIn({ token, invitation, user }: Visit) {
     return (
       <>
         <p className="mb-4 max-w-prose">
-          You are signed in as {user.name} ({user.email}).
+          {INVITE_PAGE_WORDS.signedIn(user.name, user.email)}
           {user.email !== email && (
             <>
               {' '}
-              The invitation went to {email}: join as {user.name} only if both are you. To join with another account,
-              sign out under <TextLink href="/account">Account</TextLink> and open this link again.
+              {INVITE_PAGE_WORDS.otherEmail(email, user.name)} {INVITE_PAGE_WORDS.signOutBefore}
+              <TextLink href="/account">{INVITE_PAGE_WORDS.signOutLink}</TextLink>
+              {INVITE_PAGE_WORDS.signOutAfter}
             </>
           )}
         </p>
@@ -41,9 +43,9 @@ function WayIn({ token, invitation, user }: Visit) {
   if (hasAccount) {
     return (
       <>
-        <p className="mb-4 max-w-prose">You have an account with {email}. Sign in, and you come back here to join.</p>
+        <p className="mb-4 max-w-prose">{INVITE_PAGE_WORDS.hasAccount(email)}</p>
         <ButtonLink href={signIn} look="primary">
-          Sign in to join
+          {INVITE_PAGE_WORDS.signIn}
         </ButtonLink>
       </>
     );
@@ -52,7 +54,9 @@ function WayIn({ token, invitation, user }: Visit) {
     <>
       <JoinNewForm token={token} name={name} email={email} clubName={clubName} action={joinNewAction} />
       <p className="mt-6">
-        Have an account with another address? <TextLink href={signIn}>Sign in</TextLink> with it, then join.
+        {INVITE_PAGE_WORDS.otherAccountBefore}
+        <TextLink href={signIn}>{INVITE_PAGE_WORDS.otherAccountLink}</TextLink>
+        {INVITE_PAGE_WORDS.otherAccountAfter}
       </p>
     </>
   );
@@ -61,13 +65,10 @@ function WayIn({ token, invitation, user }: Visit) {
 function DeadInvitation() {
   return (
     <>
-      <PageTitle title="This invitation does not work" />
-      <p className="max-w-prose">
-        It was used already, was revoked, is older than 14 days, or is not whole. Open the newest mail again, or ask
-        whoever invited you for a new one.
-      </p>
+      <PageTitle title={INVITE_PAGE_WORDS.spent} />
+      <p className="max-w-prose">{INVITE_PAGE_WORDS.spentText}</p>
       <p className="mt-6">
-        <TextLink href="/">First page</TextLink>
+        <TextLink href="/">{INVITE_PAGE_WORDS.firstPage}</TextLink>
       </p>
     </>
   );
@@ -81,19 +82,19 @@ export default publicPage(async ({ params, user }) => {
       {view.kind === 'dead' && <DeadInvitation />}
       {view.kind === 'in' && (
         <>
-          <PageTitle title={`You are in ${view.clubName}`} />
+          <PageTitle title={INVITE_PAGE_WORDS.inClub(view.clubName)} />
           <ButtonLink href={`/clubs/${view.clubSlug}`} look="primary">
-            Open the club
+            {INVITE_PAGE_WORDS.open}
           </ButtonLink>
         </>
       )}
       {view.kind === 'open' && (
         <>
           <PageTitle
-            title={`Join ${view.clubName}`}
-            lead={`${view.name}, you are invited as ${aRole(view.role)}. ${ROLE_NOTES[view.role]}`}
+            title={INVITE_PAGE_WORDS.join(view.clubName)}
+            lead={INVITE_PAGE_WORDS.lead(view.name, aRole(view.role), ROLE_NOTES[view.role])}
           />
-          {view.days && <p className="mb-4">Your days: {view.days}.</p>}
+          {view.days && <p className="mb-4">{INVITE_PAGE_WORDS.days(view.days)}</p>}
           <WayIn token={token} invitation={view} user={user} />
         </>
       )}

@@ -29,6 +29,7 @@ export const CHANGE_SIT_WORDS = {
   note: 'Note',
   save: 'Save the change',
   keep: 'Keep as it is',
+  care: 'Take care',
   changeLabel: (stand: string, when: string) => `Change ${stand}, ${when}`,
   title: 'Change this sit',
   description: "The club's rules are checked again for the new place and time.",

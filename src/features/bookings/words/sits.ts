@@ -1,15 +1,12 @@
 import { formatClock, formatClock12, formatDay } from '@/core/day-time';
 import { WINDOW_NAMES, type WindowName } from '@/core/types';
+import { SIT_WINDOW_WORDS } from '@/core/words/windows';
 
 /** What a sit holds: one window, or the whole day. */
 export const SIT_WINDOWS = [...WINDOW_NAMES, 'all_day'] as const;
 export type SitWindows = (typeof SIT_WINDOWS)[number];
 
-export const SIT_WINDOW_WORDS: Record<SitWindows, string> = {
-  morning: 'morning',
-  evening: 'evening',
-  all_day: 'all day',
-};
+export { SIT_WINDOW_WORDS };
 
 export function windowsHeld(windows: SitWindows): WindowName[] {
   return windows === 'all_day' ? [...WINDOW_NAMES] : [windows];

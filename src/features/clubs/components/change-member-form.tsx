@@ -6,6 +6,7 @@ import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { useToast } from '@/ui/toast';
 import { type ChangeMemberForm as ChangeValues, changeMemberSchema } from '../member-schema';
 import type { SponsorChoice } from '../read-members';
+import { CHANGE_MEMBER_WORDS } from '../words/members';
 import { StandingFields } from './standing-fields';
 
 interface Changed {
@@ -27,14 +28,14 @@ export function ChangeMemberForm({ club, member, sponsors, action }: Props) {
     defaultValues: member,
     submit: (values) => action(club, values),
     onDone: ({ name, changed }) =>
-      toast({ title: changed ? `Saved: ${name}` : 'Nothing was different, so nothing was saved.' }),
+      toast({ title: changed ? CHANGE_MEMBER_WORDS.saved(name) : CHANGE_MEMBER_WORDS.nothing }),
   });
   return (
     <FormProvider {...form}>
       <form {...formProps} className="flex max-w-2xl flex-col gap-5">
-        <FormErrorSummary title="This was not saved" errors={errors} />
+        <FormErrorSummary title={CHANGE_MEMBER_WORDS.notSaved} errors={errors} />
         <StandingFields sponsors={sponsors} />
-        <SubmitRow label="Save" pending={pending} />
+        <SubmitRow label={CHANGE_MEMBER_WORDS.save} pending={pending} />
       </form>
     </FormProvider>
   );

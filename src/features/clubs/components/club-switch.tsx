@@ -1,4 +1,5 @@
 import { Menu } from '@/ui/menu';
+import { CLUB_SWITCH_WORDS } from '../words/club';
 
 interface ClubSwitchProps {
   name: string;
@@ -12,7 +13,7 @@ export function ClubSwitch({ name, slug, clubs }: ClubSwitchProps) {
   return (
     <Menu
       label={<span className="truncate">{name}</span>}
-      name={`${name}: change club`}
+      name={CLUB_SWITCH_WORDS.change(name)}
       look="quiet"
       className="max-w-full min-w-0"
       items={clubs.map((club) => ({

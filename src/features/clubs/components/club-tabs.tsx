@@ -5,12 +5,12 @@ import { findCurrent } from '@/ui/current-path';
 import { TabLinks } from '@/ui/tab-links';
 
 interface ClubTabsProps {
-  label?: string;
+  label: string;
   items: { href: string; label: string }[];
 }
 
 /** Pages that belong together, such as those about the club itself. */
-export function ClubTabs({ label = 'About the club', items }: ClubTabsProps) {
+export function ClubTabs({ label, items }: ClubTabsProps) {
   const current = findCurrent(
     usePathname(),
     items.map((item) => item.href),

@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { Button } from '@/ui/button';
 import type { ActionAnswer } from '@/ui/form/use-action-form';
 import { useToast } from '@/ui/toast';
+import { DEAD_MAIL_WORDS } from '../words/records';
 
 export interface DeadMailLine {
   id: string;
@@ -29,7 +30,7 @@ export function DeadMailList({ club, lines, action }: Props) {
         <li key={line.id} className="flex flex-wrap items-start justify-between gap-x-6 gap-y-2 py-3">
           <div className="min-w-0">
             <p className="break-words font-semibold">{line.subject}</p>
-            <p className="break-words">To {line.to}</p>
+            <p className="break-words">{DEAD_MAIL_WORDS.to(line.to)}</p>
             <p className="text-ink-soft text-sm">{line.when}</p>
             <p className="break-words text-sm">{line.error}</p>
           </div>
@@ -47,13 +48,18 @@ function RetryButton({ club, line, action }: { club: string; line: DeadMailLine;
     setPending(true);
     const answer = await action(club, { id: line.id }).catch(() => null);
     setPending(false);
-    if (!answer) toast({ title: 'The server could not be reached. Try again.', level: 'caution' });
-    else if (!answer.ok) toast({ title: 'Not sent', text: answer.error.message, level: 'caution' });
-    else toast({ title: `In the line again for ${answer.data.toName}` });
+    if (!answer) toast({ title: DEAD_MAIL_WORDS.lost, level: 'caution' });
+    else if (!answer.ok) toast({ title: DEAD_MAIL_WORDS.notSent, text: answer.error.message, level: 'caution' });
+    else toast({ title: DEAD_MAIL_WORDS.again(answer.data.toName) });
   }
   return (
-    <Button onClick={retry} pending={pending} pendingLabel="Working…" aria-label={`Send again: ${line.subject}`}>
-      Send again
+    <Button
+      onClick={retry}
+      pending={pending}
+      pendingLabel={DEAD_MAIL_WORDS.working}
+      aria-label={DEAD_MAIL_WORDS.sendLabel(line.subject)}
+    >
+      {DEAD_MAIL_WORDS.send}
     </Button>
   );
 }

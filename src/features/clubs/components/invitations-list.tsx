@@ -6,6 +6,7 @@ import { ConfirmDialog } from '@/ui/confirm-dialog';
 import type { ActionAnswer } from '@/ui/form/use-action-form';
 import { useToast } from '@/ui/toast';
 import type { InvitationRowView } from '../read-members';
+import { INVITATIONS_WORDS } from '../words/members';
 
 type Act = (club: string, values: { id: string }) => Promise<ActionAnswer<{ name: string }>>;
 
@@ -16,7 +17,7 @@ interface Props {
   revoke: Act;
 }
 
-const LOST = 'The server could not be reached. Nothing was changed: try again.';
+const LOST = INVITATIONS_WORDS.lost;
 
 export function InvitationsList({ club, rows, resend, revoke }: Props) {
   return (
@@ -28,12 +29,7 @@ export function InvitationsList({ club, rows, resend, revoke }: Props) {
               {row.name}
               <span className="break-all font-normal text-ink-soft"> {row.email}</span>
             </p>
-            <p className="text-ink-soft text-sm">
-              {row.roleWord}
-              {row.sponsorName && ` of ${row.sponsorName}`}
-              {row.guestText && `, ${row.guestText}`}. Sent {row.sentText};{' '}
-              {row.untilText ? `works until ${row.untilText}.` : 'too old now: send it again or revoke it.'}
-            </p>
+            <p className="text-ink-soft text-sm">{INVITATIONS_WORDS.facts(row)}</p>
           </div>
           <div className="flex flex-wrap gap-2">
             <ResendButton club={club} row={row} action={resend} />
@@ -53,12 +49,17 @@ function ResendButton({ club, row, action }: { club: string; row: InvitationRowV
     const answer = await action(club, { id: row.id }).catch(() => null);
     setPending(false);
     if (!answer) toast({ title: LOST, level: 'caution' });
-    else if (!answer.ok) toast({ title: 'Not sent', text: answer.error.message, level: 'caution' });
-    else toast({ title: `A new link is on its way to ${row.name}`, text: 'The old one no longer works.' });
+    else if (!answer.ok) toast({ title: INVITATIONS_WORDS.notSent, text: answer.error.message, level: 'caution' });
+    else toast({ title: INVITATIONS_WORDS.resent(row.name), text: INVITATIONS_WORDS.resentText });
   }
   return (
-    <Button onClick={send} pending={pending} pendingLabel="Sending…" aria-label={`Send again to ${row.name}`}>
-      Send again
+    <Button
+      onClick={send}
+      pending={pending}
+      pendingLabel={INVITATIONS_WORDS.sending}
+      aria-label={INVITATIONS_WORDS.resendLabel(row.name)}
+    >
+      {INVITATIONS_WORDS.resend}
     </Button>
   );
 }
@@ -69,17 +70,17 @@ function RevokeButton({ club, row, action }: { club: string; row: InvitationRowV
     const answer = await action(club, { id: row.id }).catch(() => null);
     if (!answer) return LOST;
     if (!answer.ok) return answer.error.message;
-    toast({ title: `The invitation to ${row.name} is revoked` });
+    toast({ title: INVITATIONS_WORDS.revoked(row.name) });
   }
   return (
     <ConfirmDialog
-      title={`Revoke the invitation to ${row.name}?`}
-      confirmLabel="Revoke"
+      title={INVITATIONS_WORDS.revokeTitle(row.name)}
+      confirmLabel={INVITATIONS_WORDS.revoke}
       danger
-      trigger={<Button aria-label={`Revoke the invitation to ${row.name}`}>Revoke</Button>}
+      trigger={<Button aria-label={INVITATIONS_WORDS.revokeLabel(row.name)}>{INVITATIONS_WORDS.revoke}</Button>}
       onConfirm={revoke}
     >
-      The link in the mail stops working. You may invite {row.name} again at any time.
+      {INVITATIONS_WORDS.revokeText(row.name)}
     </ConfirmDialog>
   );
 }

@@ -9,6 +9,7 @@ import { TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import { type InviteForm as InviteValues, inviteSchema } from '../member-schema';
 import type { SponsorChoice } from '../read-members';
+import { INVITE_WORDS } from '../words/members';
 import { StandingFields } from './standing-fields';
 
 interface Props {
@@ -26,7 +27,7 @@ export function InviteForm({ club, sponsors, action }: Props) {
     defaultValues: { name: '', email: '', role: 'member', sponsorId: '', guestFrom: '', guestTo: '' },
     submit: (values) => action(club, values),
     onDone: ({ name }) => {
-      toast({ title: `Invitation to ${name} is on its way` });
+      toast({ title: INVITE_WORDS.sent(name) });
       router.push(back);
     },
   });
@@ -34,10 +35,16 @@ export function InviteForm({ club, sponsors, action }: Props) {
     <FormProvider {...form}>
       <form {...formProps} className="flex max-w-2xl flex-col gap-5">
         <FormErrorSummary errors={errors} />
-        <TextInput label="Name" autoComplete="off" {...register('name')} error={errorOf('name')} required />
         <TextInput
-          label="E-mail"
-          hint="The link goes there. It works once, for 14 days."
+          label={INVITE_WORDS.name}
+          autoComplete="off"
+          {...register('name')}
+          error={errorOf('name')}
+          required
+        />
+        <TextInput
+          label={INVITE_WORDS.email}
+          hint={INVITE_WORDS.emailHint}
           type="email"
           autoComplete="off"
           {...register('email')}
@@ -45,9 +52,9 @@ export function InviteForm({ club, sponsors, action }: Props) {
           required
         />
         <StandingFields sponsors={sponsors} />
-        <SubmitRow label="Send the invitation" pending={pending} pendingLabel="Sending…">
+        <SubmitRow label={INVITE_WORDS.send} pending={pending} pendingLabel={INVITE_WORDS.sending}>
           <ButtonLink href={back} look="quiet">
-            Back to members
+            {INVITE_WORDS.back}
           </ButtonLink>
         </SubmitRow>
       </form>

@@ -4,6 +4,7 @@ import { useRouter } from 'next/navigation';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { joinSchema } from '../join-schema';
+import { JOIN_WORDS } from '../words/members';
 
 interface Props {
   token: string;
@@ -22,8 +23,8 @@ export function JoinForm({ token, clubName, action }: Props) {
   });
   return (
     <form {...formProps} className="flex flex-col gap-5">
-      <FormErrorSummary title="You have not joined" errors={errors.map(({ message }) => ({ message }))} />
-      <SubmitRow label={`Join ${clubName}`} pending={pending} pendingLabel="Joining…" />
+      <FormErrorSummary title={JOIN_WORDS.notJoined} errors={errors.map(({ message }) => ({ message }))} />
+      <SubmitRow label={JOIN_WORDS.join(clubName)} pending={pending} pendingLabel={JOIN_WORDS.joining} />
     </form>
   );
 }

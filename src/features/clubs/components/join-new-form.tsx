@@ -5,6 +5,7 @@ import { EmailInput, NameInput, NewPasswordInput } from '@/features/accounts/com
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { joinNewSchema } from '../join-schema';
+import { JOIN_NEW_WORDS } from '../words/members';
 
 interface Values {
   token: string;
@@ -34,9 +35,9 @@ export function JoinNewForm({ token, name, email, clubName, action }: Props) {
     <form {...formProps} className="flex flex-col gap-5">
       <FormErrorSummary errors={errors} />
       <NameInput {...register('name')} error={errorOf('name')} />
-      <EmailInput hint="Where the invitation went; you sign in with it." value={email} readOnly required={false} />
+      <EmailInput hint={JOIN_NEW_WORDS.emailHint} value={email} readOnly required={false} />
       <NewPasswordInput {...register('password')} error={errorOf('password')} />
-      <SubmitRow label={`Make an account and join ${clubName}`} pending={pending} pendingLabel="Joining…" />
+      <SubmitRow label={JOIN_NEW_WORDS.join(clubName)} pending={pending} pendingLabel={JOIN_NEW_WORDS.joining} />
     </form>
   );
 }

@@ -3,6 +3,7 @@
 import { TextLink } from '@/ui/button';
 import { type DataColumn, DataTable } from '@/ui/data-table';
 import type { MemberView } from '../read-members';
+import { MEMBERS_WORDS } from '../words/members';
 
 export interface MemberLine extends MemberView {
   /** The member's page, for those who may open it. */
@@ -11,21 +12,33 @@ export interface MemberLine extends MemberView {
 
 const NAME: DataColumn<MemberLine> = {
   id: 'name',
-  header: 'Name',
+  header: MEMBERS_WORDS.name,
   value: (row) => row.name,
   cell: (row) => (
     <>
       {row.href ? <TextLink href={row.href}>{row.name}</TextLink> : row.name}
-      {row.isYou && <span className="font-normal text-ink-soft"> (you)</span>}
+      {row.isYou && <span className="font-normal text-ink-soft"> {MEMBERS_WORDS.you}</span>}
     </>
   ),
 };
 
 const REST: DataColumn<MemberLine>[] = [
-  { id: 'role', header: 'Role', value: (row) => row.roleWord },
-  { id: 'joined', header: 'Joined', value: (row) => row.joinedDay, cell: (row) => row.joinedText, filterable: false },
-  { id: 'days', header: 'Guest days', value: (row) => row.guestFrom, cell: (row) => row.guestText, filterable: false },
-  { id: 'sponsor', header: 'Sponsor', value: (row) => row.sponsorName },
+  { id: 'role', header: MEMBERS_WORDS.role, value: (row) => row.roleWord },
+  {
+    id: 'joined',
+    header: MEMBERS_WORDS.joined,
+    value: (row) => row.joinedDay,
+    cell: (row) => row.joinedText,
+    filterable: false,
+  },
+  {
+    id: 'days',
+    header: MEMBERS_WORDS.guestDays,
+    value: (row) => row.guestFrom,
+    cell: (row) => row.guestText,
+    filterable: false,
+  },
+  { id: 'sponsor', header: MEMBERS_WORDS.sponsor, value: (row) => row.sponsorName },
 ];
 
 const COLUMNS = [NAME, ...REST];
@@ -43,12 +56,12 @@ const WITH_EMAIL: DataColumn<MemberLine>[] = [
 export function MembersTable({ rows, withEmail }: { rows: MemberLine[]; withEmail: boolean }) {
   return (
     <DataTable
-      caption="Members of the club"
+      caption={MEMBERS_WORDS.caption}
       captionHidden
       rows={rows}
       columns={withEmail ? WITH_EMAIL : COLUMNS}
       rowId={(row) => row.id}
-      filterLabel="Find a member"
+      filterLabel={MEMBERS_WORDS.find}
       initialSort={{ id: 'name' }}
     />
   );

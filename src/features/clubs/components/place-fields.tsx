@@ -8,6 +8,7 @@ import { RadioCards } from '@/ui/choices';
 import { Section } from '@/ui/page-parts';
 import { Select, TextInput } from '@/ui/text-inputs';
 import { proposeZone, zoneChoices } from '../propose-zone';
+import { PLACE_WORDS } from '../words/club';
 
 interface Fields {
   name: string;
@@ -39,16 +40,16 @@ export function PlaceFields({ zones, withSlug = false }: Props) {
   }
 
   function fillPlace() {
-    if (!navigator.geolocation) return setFinding('This browser cannot tell where it is. Type the numbers.');
-    setFinding('Looking for your position…');
+    if (!navigator.geolocation) return setFinding(PLACE_WORDS.noPosition);
+    setFinding(PLACE_WORDS.looking);
     navigator.geolocation.getCurrentPosition(
       ({ coords }) => {
         setValue('lat', coords.latitude.toFixed(5), { shouldDirty: true, shouldValidate: true });
         setValue('lon', coords.longitude.toFixed(5), { shouldDirty: true, shouldValidate: true });
-        setFinding(`Filled in, to about ${Math.round(coords.accuracy)} m.`);
+        setFinding(PLACE_WORDS.filled(Math.round(coords.accuracy)));
         void fillZone();
       },
-      () => setFinding('The position was not given. Type the numbers.'),
+      () => setFinding(PLACE_WORDS.positionRefused),
       { enableHighAccuracy: true, timeout: 20_000 },
     );
   }
@@ -60,10 +61,10 @@ export function PlaceFields({ zones, withSlug = false }: Props) {
   });
   return (
     <>
-      <Section title="Name">
+      <Section title={PLACE_WORDS.name}>
         <div className="flex flex-col gap-5">
           <TextInput
-            label="Name of the club"
+            label={PLACE_WORDS.nameClub}
             autoComplete="organization"
             {...name}
             error={errors.name?.message}
@@ -71,8 +72,8 @@ export function PlaceFields({ zones, withSlug = false }: Props) {
           />
           {withSlug && (
             <TextInput
-              label="Address"
-              hint="Stands in every link of the club and cannot be changed later: small letters, digits and dashes."
+              label={PLACE_WORDS.slug}
+              hint={PLACE_WORDS.slugHint}
               autoComplete="off"
               autoCapitalize="none"
               spellCheck={false}
@@ -83,14 +84,11 @@ export function PlaceFields({ zones, withSlug = false }: Props) {
           )}
         </div>
       </Section>
-      <Section
-        title="Place"
-        note="About the middle of the ground. Sunrise, weather and distances are worked out from here."
-      >
+      <Section title={PLACE_WORDS.place} note={PLACE_WORDS.placeNote}>
         <div className="grid gap-5 sm:grid-cols-2">
           <TextInput
-            label="Latitude"
-            hint="Degrees north, such as 34.117"
+            label={PLACE_WORDS.lat}
+            hint={PLACE_WORDS.latHint}
             inputMode="text"
             autoComplete="off"
             {...register('lat', { onBlur: () => void fillZone() })}
@@ -98,8 +96,8 @@ export function PlaceFields({ zones, withSlug = false }: Props) {
             required
           />
           <TextInput
-            label="Longitude"
-            hint="Degrees east; west is minus, such as -84"
+            label={PLACE_WORDS.lon}
+            hint={PLACE_WORDS.lonHint}
             inputMode="text"
             autoComplete="off"
             {...register('lon', { onBlur: () => void fillZone() })}
@@ -108,16 +106,16 @@ export function PlaceFields({ zones, withSlug = false }: Props) {
           />
         </div>
         <div className="mt-3 flex flex-wrap items-center gap-3">
-          <Button onClick={fillPlace}>Use where I am now</Button>
+          <Button onClick={fillPlace}>{PLACE_WORDS.here}</Button>
           <p role="status" className="text-ink-soft text-sm">
             {finding}
           </p>
         </div>
         <div className="mt-5 flex flex-col gap-5">
           <Select
-            label="Time zone"
-            hint="Proposed from the place. Every clock of the club is read in it."
-            placeholder="Choose a zone"
+            label={PLACE_WORDS.zone}
+            hint={PLACE_WORDS.zoneHint}
+            placeholder={PLACE_WORDS.zonePlaceholder}
             options={zoneChoices(zones, zone).map((one) => ({ value: one, label: one.replaceAll('_', ' ') }))}
             fieldClassName="max-w-sm"
             {...register('zone')}
@@ -126,11 +124,11 @@ export function PlaceFields({ zones, withSlug = false }: Props) {
             required
           />
           <RadioCards
-            label="Units"
+            label={PLACE_WORDS.units}
             across
             choices={[
-              { value: 'us', label: 'Yards, feet, °F', note: '12-hour clock' },
-              { value: 'metric', label: 'Metres, °C', note: '24-hour clock' },
+              { value: 'us', label: PLACE_WORDS.us, note: PLACE_WORDS.usNote },
+              { value: 'metric', label: PLACE_WORDS.metric, note: PLACE_WORDS.metricNote },
             ]}
             {...register('units')}
             error={errors.units?.message}

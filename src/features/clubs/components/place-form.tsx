@@ -8,6 +8,7 @@ import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { useToast } from '@/ui/toast';
 import { type ChangePlaceForm, changePlaceSchema } from '../club-schema';
 import type { SavedClub } from '../save-club';
+import { PLACE_WORDS } from '../words/club';
 import { PlaceFields } from './place-fields';
 
 interface Props {
@@ -26,7 +27,7 @@ export function PlaceForm({ club, place, zones, action }: Props) {
     defaultValues: place,
     submit: (values) => action(club, values),
     onDone: ({ changed }) => {
-      toast({ title: changed.length === 0 ? 'Nothing was different' : `Saved: ${changed.join(', ')}` });
+      toast({ title: changed.length === 0 ? PLACE_WORDS.nothing : PLACE_WORDS.saved(changed.join(', ')) });
       router.push(page);
     },
   });
@@ -35,9 +36,9 @@ export function PlaceForm({ club, place, zones, action }: Props) {
       <form {...formProps} className="flex flex-col gap-6">
         <FormErrorSummary errors={errors} />
         <PlaceFields zones={zones} />
-        <SubmitRow label="Save" pending={pending} pendingLabel="Saving…">
+        <SubmitRow label={PLACE_WORDS.save} pending={pending} pendingLabel={PLACE_WORDS.saving}>
           <ButtonLink href={page} look="quiet">
-            Back without saving
+            {PLACE_WORDS.back}
           </ButtonLink>
         </SubmitRow>
       </form>

@@ -7,8 +7,9 @@ import { ConfirmDialog } from '@/ui/confirm-dialog';
 import type { ActionAnswer } from '@/ui/form/use-action-form';
 import { useToast } from '@/ui/toast';
 import type { Removed } from '../removal';
+import { REMOVE_MEMBER_WORDS } from '../words/members';
 
-const LOST = 'The server could not be reached. Nothing was changed: try again.';
+const LOST = REMOVE_MEMBER_WORDS.lost;
 
 interface Props {
   club: string;
@@ -26,15 +27,15 @@ export function RemoveMember({ club, member, action, children }: Props) {
     if (!answer) return LOST;
     if (!answer.ok) return answer.error.message;
     const { cancelledSits } = answer.data;
-    toast({ title: `${member.name} was removed`, text: `Sits cancelled: ${cancelledSits}.` });
+    toast({ title: REMOVE_MEMBER_WORDS.removed(member.name), text: REMOVE_MEMBER_WORDS.sitsCancelled(cancelledSits) });
     router.push(`/clubs/${club}/club/members`);
   }
   return (
     <ConfirmDialog
-      title={`Remove ${member.name}?`}
-      confirmLabel="Remove"
+      title={REMOVE_MEMBER_WORDS.removeTitle(member.name)}
+      confirmLabel={REMOVE_MEMBER_WORDS.remove}
       danger
-      trigger={<Button look="danger">Remove {member.name}</Button>}
+      trigger={<Button look="danger">{REMOVE_MEMBER_WORDS.removeLabel(member.name)}</Button>}
       onConfirm={remove}
     >
       {children}
@@ -59,11 +60,11 @@ export function LeaveClub({ club, clubName, action, children }: LeaveProps) {
   }
   return (
     <ConfirmDialog
-      title={`Leave ${clubName}?`}
-      confirmLabel="Leave the club"
-      keepLabel="Stay"
+      title={REMOVE_MEMBER_WORDS.leaveTitle(clubName)}
+      confirmLabel={REMOVE_MEMBER_WORDS.leave}
+      keepLabel={REMOVE_MEMBER_WORDS.stay}
       danger
-      trigger={<Button>Leave the club</Button>}
+      trigger={<Button>{REMOVE_MEMBER_WORDS.leave}</Button>}
       onConfirm={leave}
     >
       {children}

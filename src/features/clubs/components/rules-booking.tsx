@@ -5,12 +5,13 @@ import { Checkbox, RadioCards } from '@/ui/choices';
 import { Section } from '@/ui/page-parts';
 import { NumberInput } from '@/ui/text-inputs';
 import type { RulesForm } from '../rules-form-schema';
+import { COUNT_WORDS, RULES_BOOKING_WORDS } from '../words/rules-form';
 import { RulesOverdue } from './rules-overdue';
 import { useRulesFields } from './use-rules-fields';
 
 const AHEAD = [
-  { value: 'days', label: 'By days', note: 'A sit may be booked so many days before.' },
-  { value: 'hunt_time', label: 'Only at hunt time', note: 'Within so many hours of the start, one stand at a time.' },
+  { value: 'days', label: RULES_BOOKING_WORDS.days, note: RULES_BOOKING_WORDS.daysNote },
+  { value: 'hunt_time', label: RULES_BOOKING_WORDS.huntTime, note: RULES_BOOKING_WORDS.huntTimeNote },
 ];
 
 export function RulesBooking() {
@@ -18,65 +19,80 @@ export function RulesBooking() {
   const field = useRulesFields();
   return (
     <>
-      <Section title="Booking">
+      <Section title={RULES_BOOKING_WORDS.booking}>
         <div className="flex flex-col gap-5">
-          <RadioCards label="How far ahead" across choices={AHEAD} {...field('claimAhead')} />
+          <RadioCards label={RULES_BOOKING_WORDS.howFarAhead} across choices={AHEAD} {...field('claimAhead')} />
           {watch('claimAhead') === 'days' ? (
-            <NumberInput label="Days ahead" unit="days" step="1" {...field('claimDays')} />
+            <NumberInput
+              label={RULES_BOOKING_WORDS.daysAhead}
+              unit={COUNT_WORDS.days}
+              step="1"
+              {...field('claimDays')}
+            />
           ) : (
-            <NumberInput label="Hours before the window" unit="hours" step="1" {...field('claimHours')} />
+            <NumberInput
+              label={RULES_BOOKING_WORDS.hoursBeforeWindow}
+              unit={COUNT_WORDS.hours}
+              step="1"
+              {...field('claimHours')}
+            />
           )}
           <NumberInput
-            label="Sits booked at once"
-            hint="Most that a member may hold. Blank: no limit."
+            label={RULES_BOOKING_WORDS.sitsBookedOnce}
+            hint={RULES_BOOKING_WORDS.sitsBookedOnceHint}
             optional
             step="1"
             {...field('maxLiveClaims')}
           />
           <NumberInput
-            label="Hold"
-            hint="Minutes after the window began at which a sit nobody signed in for lapses. Blank: never."
+            label={RULES_BOOKING_WORDS.hold}
+            hint={RULES_BOOKING_WORDS.holdHint}
             optional
-            unit="minutes"
+            unit={COUNT_WORDS.minutes}
             step="1"
             {...field('holdMinutes')}
           />
-          <Checkbox label="A free stand may be taken after its window has begun" {...field('walkUpSits')} />
+          <Checkbox label={RULES_BOOKING_WORDS.walkUp} {...field('walkUpSits')} />
           <NumberInput
-            label="Back-by allowance"
-            hint="After the back-by time, before a person counts as overdue."
-            unit="minutes"
+            label={RULES_BOOKING_WORDS.backByAllowance}
+            hint={RULES_BOOKING_WORDS.backByAllowanceHint}
+            unit={COUNT_WORDS.minutes}
             step="1"
             {...field('backByMinutes')}
           />
         </div>
       </Section>
       <RulesOverdue />
-      <Section title="Rest, limits and guests">
+      <Section title={RULES_BOOKING_WORDS.limits}>
         <div className="grid gap-5 sm:grid-cols-2">
           <NumberInput
-            label="Rest of a stand"
-            hint="Full days unused between sits, where the stand sets none of its own."
-            unit="days"
+            label={RULES_BOOKING_WORDS.restStand}
+            hint={RULES_BOOKING_WORDS.restStandHint}
+            unit={COUNT_WORDS.days}
             step="1"
             {...field('restDays')}
           />
           <NumberInput
-            label="Sits a season"
-            hint="Most a member may have. Blank: no limit."
+            label={RULES_BOOKING_WORDS.sitsASeason}
+            hint={RULES_BOOKING_WORDS.sitsASeasonHint}
             optional
             step="1"
             {...field('mostSitsPerMember')}
           />
           <NumberInput
-            label="Guest days a season"
-            hint="Most days a member may bring guests. Blank: no limit."
+            label={RULES_BOOKING_WORDS.guestDaysSeason}
+            hint={RULES_BOOKING_WORDS.guestDaysSeasonHint}
             optional
-            unit="days"
+            unit={COUNT_WORDS.days}
             step="1"
             {...field('guestDays')}
           />
-          <NumberInput label="Guests at once" hint="0: members bring none." step="1" {...field('guestsAtOnce')} />
+          <NumberInput
+            label={RULES_BOOKING_WORDS.guestsAtOnce}
+            hint={RULES_BOOKING_WORDS.guestsAtOnceHint}
+            step="1"
+            {...field('guestsAtOnce')}
+          />
         </div>
       </Section>
     </>

@@ -11,6 +11,7 @@ import { Notice } from '@/ui/notices';
 import { useToast } from '@/ui/toast';
 import { makeRulesSchema, type RulesForm as RulesValues } from '../rules-form-schema';
 import type { SavedClub } from '../save-club';
+import { RULES_WORDS } from '../words/rules-form';
 import { RulesBooking } from './rules-booking';
 import { RulesDistances } from './rules-distances';
 import { RulesHarvest } from './rules-harvest';
@@ -39,7 +40,7 @@ export function RulesForm({ club, units, rules, action }: Props) {
     submit: (values) => action(club, values),
     onDone: ({ changed }) => {
       draft.drop();
-      toast({ title: changed.length === 0 ? 'Nothing was different' : `Saved: ${changed.join(', ')}` });
+      toast({ title: changed.length === 0 ? RULES_WORDS.nothing : RULES_WORDS.saved(changed.join(', ')) });
       router.push(page);
     },
   });
@@ -50,10 +51,10 @@ export function RulesForm({ club, units, rules, action }: Props) {
         <FormErrorSummary errors={errors} />
         {draft.brought && (
           <Notice
-            title="Your unsaved entries are back"
-            actions={<Button onClick={draft.startAfresh}>Start afresh</Button>}
+            title={RULES_WORDS.draftTitle}
+            actions={<Button onClick={draft.startAfresh}>{RULES_WORDS.draftDrop}</Button>}
           >
-            They were typed in this tab before and not saved.
+            {RULES_WORDS.draftText}
           </Notice>
         )}
         <RulesLegalLight />
@@ -64,9 +65,9 @@ export function RulesForm({ club, units, rules, action }: Props) {
         <RulesSharing />
         <RulesHarvest />
         <RulesWork />
-        <SubmitRow label="Save the rules" pending={pending} pendingLabel="Saving…" className="mt-8">
+        <SubmitRow label={RULES_WORDS.save} pending={pending} pendingLabel={RULES_WORDS.saving} className="mt-8">
           <ButtonLink href={page} look="quiet">
-            Back without saving
+            {RULES_WORDS.back}
           </ButtonLink>
         </SubmitRow>
       </form>

@@ -3,36 +3,38 @@
 import { FieldGroup } from '@/ui/field';
 import { Section } from '@/ui/page-parts';
 import { NumberInput, Select, TimeInput } from '@/ui/text-inputs';
+import { RULES_HOURS_WORDS } from '../words/rules-form';
 import { useRulesFields } from './use-rules-fields';
 
-const sides = (event: string) => [
-  { value: 'before', label: `before ${event}` },
-  { value: 'after', label: `after ${event}` },
+const SUNRISE_SIDES = [
+  { value: 'before', label: RULES_HOURS_WORDS.beforeSunrise },
+  { value: 'after', label: RULES_HOURS_WORDS.afterSunrise },
+];
+const SUNSET_SIDES = [
+  { value: 'before', label: RULES_HOURS_WORDS.beforeSunset },
+  { value: 'after', label: RULES_HOURS_WORDS.afterSunset },
 ];
 
 export function RulesHours() {
   const field = useRulesFields();
   return (
-    <Section
-      title="Window hours"
-      note="When a morning and an evening begin and end for booking and the board. Sits already booked keep their hours."
-    >
+    <Section title={RULES_HOURS_WORDS.windowHours} note={RULES_HOURS_WORDS.windowHoursNote}>
       <div className="grid gap-6 sm:grid-cols-2">
-        <FieldGroup label="Morning">
+        <FieldGroup label={RULES_HOURS_WORDS.morning}>
           <div className="flex flex-col gap-3">
             <div className="grid grid-cols-2 items-end gap-3">
-              <NumberInput label="Starts, minutes" step="1" {...field('morningStart.minutes')} />
-              <Select label="Side of sunrise" options={sides('sunrise')} {...field('morningStart.side')} />
+              <NumberInput label={RULES_HOURS_WORDS.startsMinutes} step="1" {...field('morningStart.minutes')} />
+              <Select label={RULES_HOURS_WORDS.sideOfSunrise} options={SUNRISE_SIDES} {...field('morningStart.side')} />
             </div>
-            <TimeInput label="Ends at" {...field('morningEnd')} />
+            <TimeInput label={RULES_HOURS_WORDS.endsAt} {...field('morningEnd')} />
           </div>
         </FieldGroup>
-        <FieldGroup label="Evening">
+        <FieldGroup label={RULES_HOURS_WORDS.evening}>
           <div className="flex flex-col gap-3">
-            <TimeInput label="Starts at" {...field('eveningStart')} />
+            <TimeInput label={RULES_HOURS_WORDS.startsAt} {...field('eveningStart')} />
             <div className="grid grid-cols-2 items-end gap-3">
-              <NumberInput label="Ends, minutes" step="1" {...field('eveningEnd.minutes')} />
-              <Select label="Side of sunset" options={sides('sunset')} {...field('eveningEnd.side')} />
+              <NumberInput label={RULES_HOURS_WORDS.endsMinutes} step="1" {...field('eveningEnd.minutes')} />
+              <Select label={RULES_HOURS_WORDS.sideOfSunset} options={SUNSET_SIDES} {...field('eveningEnd.side')} />
             </div>
           </div>
         </FieldGroup>

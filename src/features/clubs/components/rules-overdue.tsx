@@ -3,28 +3,39 @@
 import { Checkbox } from '@/ui/choices';
 import { Section } from '@/ui/page-parts';
 import { NumberInput } from '@/ui/text-inputs';
+import { COUNT_WORDS, RULES_OVERDUE_WORDS } from '../words/rules-form';
 import { useRulesFields } from './use-rules-fields';
 
 /** Who is told when somebody is overdue, and when. */
 export function RulesOverdue() {
   const field = useRulesFields();
   return (
-    <Section title="Overdue" note="Minutes after a person counts as overdue. Each is told once by e-mail.">
+    <Section title={RULES_OVERDUE_WORDS.overdue} note={RULES_OVERDUE_WORDS.overdueNote}>
       <div className="grid gap-5 sm:grid-cols-3">
-        <NumberInput label="Tell the member" unit="minutes" step="1" {...field('overdueMember')} />
-        <NumberInput label="Tell the officers" unit="minutes" step="1" {...field('overdueOfficers')} />
         <NumberInput
-          label="Tell the safety contact"
-          hint="Only one who has said yes."
-          unit="minutes"
+          label={RULES_OVERDUE_WORDS.member}
+          unit={COUNT_WORDS.minutes}
+          step="1"
+          {...field('overdueMember')}
+        />
+        <NumberInput
+          label={RULES_OVERDUE_WORDS.officers}
+          unit={COUNT_WORDS.minutes}
+          step="1"
+          {...field('overdueOfficers')}
+        />
+        <NumberInput
+          label={RULES_OVERDUE_WORDS.contact}
+          hint={RULES_OVERDUE_WORDS.contactHint}
+          unit={COUNT_WORDS.minutes}
           step="1"
           {...field('overdueContact')}
         />
       </div>
       <Checkbox
         className="mt-5"
-        label="The safety contact's page shows the stand's position"
-        hint="Off: it names stand, way in and parking only."
+        label={RULES_OVERDUE_WORDS.showsPlace}
+        hint={RULES_OVERDUE_WORDS.showsPlaceHint}
         {...field('overdueShowsPlace')}
       />
     </Section>

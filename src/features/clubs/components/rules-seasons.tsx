@@ -3,11 +3,11 @@
 import { useFieldArray, useFormContext } from 'react-hook-form';
 import { weaponWord } from '@/core/booking/seasons';
 import { WEAPONS } from '@/core/types';
-import { Button } from '@/ui/button';
 import { CheckboxGroup } from '@/ui/choices';
-import { Card, Section } from '@/ui/page-parts';
 import { DateInput, Select, TextInput } from '@/ui/text-inputs';
 import type { RulesForm } from '../rules-form-schema';
+import { RULES_SEASONS_WORDS } from '../words/rules-form';
+import { RuleRows } from './rule-rows';
 import { useRulesFields } from './use-rules-fields';
 
 const WEAPON_CHOICES = WEAPONS.map((weapon) => ({ value: weapon, label: weaponWord(weapon) }));
@@ -32,37 +32,41 @@ export function RulesSeasons() {
   }
 
   return (
-    <Section title="Seasons" note="The dates your club hunts, by weapon. With none set, every day is open for booking.">
-      <div className="flex flex-col gap-4">
-        {fields.map((row, i) => (
-          <Card key={row.key} className="flex flex-col gap-4">
-            <TextInput label="Name of the season" autoComplete="off" {...field(`seasons.${i}.name`)} />
-            <CheckboxGroup label="Weapons" choices={WEAPON_CHOICES} {...field(`seasons.${i}.weapons`)} />
-            <div className="grid gap-4 sm:grid-cols-2">
-              <DateInput label="First day" {...field(`seasons.${i}.fromDay`)} />
-              <DateInput label="Last day" {...field(`seasons.${i}.toDay`)} />
-            </div>
-            <Select
-              label="Legal-light rule"
-              optional
-              options={[
-                { value: '', label: lightNames.length === 1 ? 'The only one' : 'None named' },
-                ...lightNames.map((name) => ({ value: name, label: name })),
-              ]}
-              fieldClassName="max-w-sm"
-              {...field(`seasons.${i}.legalLightName`)}
-            />
-            <div>
-              <Button look="quiet" onClick={() => remove(i)}>
-                Take this season out
-              </Button>
-            </div>
-          </Card>
-        ))}
-      </div>
-      <Button className="mt-3" onClick={add} disabled={fields.length >= 60}>
-        Add a season
-      </Button>
-    </Section>
+    <RuleRows
+      name="seasons"
+      keys={fields.map((row) => row.key)}
+      words={RULES_SEASONS_WORDS}
+      most={60}
+      onAdd={add}
+      onRemove={remove}
+    >
+      {(i) => (
+        <>
+          <TextInput label={RULES_SEASONS_WORDS.name} autoComplete="off" {...field(`seasons.${i}.name`)} />
+          <CheckboxGroup
+            label={RULES_SEASONS_WORDS.weapons}
+            choices={WEAPON_CHOICES}
+            {...field(`seasons.${i}.weapons`)}
+          />
+          <div className="grid gap-4 sm:grid-cols-2">
+            <DateInput label={RULES_SEASONS_WORDS.firstDay} {...field(`seasons.${i}.fromDay`)} />
+            <DateInput label={RULES_SEASONS_WORDS.lastDay} {...field(`seasons.${i}.toDay`)} />
+          </div>
+          <Select
+            label={RULES_SEASONS_WORDS.light}
+            optional
+            options={[
+              {
+                value: '',
+                label: lightNames.length === 1 ? RULES_SEASONS_WORDS.onlyLight : RULES_SEASONS_WORDS.noLight,
+              },
+              ...lightNames.map((name) => ({ value: name, label: name })),
+            ]}
+            fieldClassName="max-w-sm"
+            {...field(`seasons.${i}.legalLightName`)}
+          />
+        </>
+      )}
+    </RuleRows>
   );
 }

@@ -6,6 +6,7 @@ import { RadioCards } from '@/ui/choices';
 import { DateInput, Select } from '@/ui/text-inputs';
 import type { SponsorChoice } from '../read-members';
 import { ROLE_NOTES, ROLE_WORDS } from '../role-words';
+import { STANDING_WORDS } from '../words/members';
 
 interface Fields {
   role: Role;
@@ -26,21 +27,21 @@ export function StandingFields({ sponsors }: Props) {
   const { errors } = formState;
   return (
     <>
-      <RadioCards label="Role" choices={CHOICES} {...register('role')} error={errors.role?.message} />
+      <RadioCards label={STANDING_WORDS.role} choices={CHOICES} {...register('role')} error={errors.role?.message} />
       {watch('role') === 'guest' && (
         <div className="flex flex-col gap-5 border-rule-strong border-l-2 pl-4">
           <Select
-            label="Sponsor"
-            hint="The member who answers for the guest. When the sponsor goes, so does the guest."
-            placeholder="Choose a member"
+            label={STANDING_WORDS.sponsorId}
+            hint={STANDING_WORDS.sponsorIdHint}
+            placeholder={STANDING_WORDS.sponsorIdPlaceholder}
             options={sponsors.map(({ id, name }) => ({ value: id, label: name }))}
             fieldClassName="max-w-sm"
             {...register('sponsorId')}
             error={errors.sponsorId?.message}
           />
           <div className="grid gap-5 sm:grid-cols-2">
-            <DateInput label="First day" {...register('guestFrom')} error={errors.guestFrom?.message} />
-            <DateInput label="Last day" {...register('guestTo')} error={errors.guestTo?.message} />
+            <DateInput label={STANDING_WORDS.guestFrom} {...register('guestFrom')} error={errors.guestFrom?.message} />
+            <DateInput label={STANDING_WORDS.guestTo} {...register('guestTo')} error={errors.guestTo?.message} />
           </div>
         </div>
       )}

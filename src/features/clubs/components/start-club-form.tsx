@@ -5,6 +5,7 @@ import { FormProvider } from 'react-hook-form';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { type ActionAnswer, useActionForm } from '@/ui/form/use-action-form';
 import { type CreateClubForm, createClubSchema } from '../club-schema';
+import { START_CLUB_WORDS } from '../words/club';
 import { PlaceFields } from './place-fields';
 
 interface Props {
@@ -25,7 +26,7 @@ export function StartClubForm({ zones, action }: Props) {
       <form {...formProps} className="flex flex-col gap-6">
         <FormErrorSummary errors={errors} />
         <PlaceFields zones={zones} withSlug />
-        <SubmitRow label="Start the club" pending={pending} />
+        <SubmitRow label={START_CLUB_WORDS.start} pending={pending} />
       </form>
     </FormProvider>
   );

@@ -1,6 +1,5 @@
 import type { RemovalPlan } from '../removal';
-
-const sitsWord = (count: number) => (count === 1 ? 'One booked sit is' : `${count} booked sits are`);
+import { WHAT_GOES_WORDS } from '../words/members';
 
 function SitList({ sits }: { sits: string[] }) {
   return (
@@ -17,24 +16,21 @@ export function WhatGoes({ plan }: { plan: RemovalPlan }) {
   return (
     <div className="flex flex-col gap-3">
       {plan.sits.length === 0 ? (
-        <p>No sit of {plan.name} is booked ahead.</p>
+        <p>{WHAT_GOES_WORDS.noSits(plan.name)}</p>
       ) : (
         <div>
-          <p>{sitsWord(plan.sits.length)} cancelled, and a mail tells of each. The stands are free for others:</p>
+          <p>{WHAT_GOES_WORDS.sits(plan.sits.length)}</p>
           <SitList sits={plan.sits} />
         </div>
       )}
       {plan.guests.map((guest) => (
         <div key={guest.name}>
-          <p>
-            {guest.name}, a guest of {plan.name}, is taken out too.
-            {guest.sits.length > 0 && ` ${sitsWord(guest.sits.length)} cancelled:`}
-          </p>
+          <p>{WHAT_GOES_WORDS.guest(guest.name, plan.name, guest.sits.length)}</p>
           <SitList sits={guest.sits} />
         </div>
       ))}
-      {plan.invitations.length > 0 && <p>Open invitations are revoked: {plan.invitations.join(', ')}.</p>}
-      <p>Past sits and the audit log stay as they are. Calendar addresses stop working.</p>
+      {plan.invitations.length > 0 && <p>{WHAT_GOES_WORDS.invitations(plan.invitations)}</p>}
+      <p>{WHAT_GOES_WORDS.stays}</p>
     </div>
   );
 }

@@ -11,6 +11,7 @@ import { useToast } from '@/ui/toast';
 import { type ApproachForm, type ApproachPlaces, makeApproachSchema } from '../approach-schema';
 import type { FormClub } from '../form-club';
 import { DIRECTION_WORDS } from '../words';
+import { APPROACH_WORDS } from '../words/forms';
 import { choicesOf } from './choices-of';
 import { DraftNotice } from './draft-notice';
 import type { ClubCall, Saved } from './form-types';
@@ -39,7 +40,7 @@ export function ApproachFormView(props: ApproachFormProps) {
     submit: (typed) => (at ? change(club, { ...typed, ...at }) : add(club, { ...typed, standId })),
     onDone: (saved) => {
       draft.drop();
-      toast({ title: `${saved.name} is saved` });
+      toast({ title: APPROACH_WORDS.saved(saved.name) });
       router.push(back);
     },
   });
@@ -50,43 +51,46 @@ export function ApproachFormView(props: ApproachFormProps) {
     <form {...fields.formProps} className="flex max-w-2xl flex-col gap-5">
       <DraftNotice brought={draft.brought} onStartAfresh={draft.startAfresh} />
       <FormErrorSummary errors={fields.errors} />
-      <TextInput label="Name" autoComplete="off" error={errorOf('name')} {...register('name')} />
+      <TextInput label={APPROACH_WORDS.name} autoComplete="off" error={errorOf('name')} {...register('name')} />
       <div className="grid gap-4 sm:grid-cols-2">
         <Select
-          label="From parking place"
+          label={APPROACH_WORDS.parkingId}
           optional
-          options={[{ value: '', label: 'None' }, ...places.parkings.map((p) => ({ value: p.id, label: p.name }))]}
+          options={[
+            { value: '', label: APPROACH_WORDS.none },
+            ...places.parkings.map((p) => ({ value: p.id, label: p.name })),
+          ]}
           error={errorOf('parkingId')}
           {...register('parkingId')}
         />
         <Select
-          label="Walked"
+          label={APPROACH_WORDS.direction}
           options={choicesOf(DIRECTION_WORDS)}
           error={errorOf('direction')}
           {...register('direction')}
         />
       </div>
       <Textarea
-        label="Places along the way"
-        hint={`One to a line, latitude, longitude, from the parking place to ${places.stand.name}. The two ends may be left out.`}
+        label={APPROACH_WORDS.points}
+        hint={APPROACH_WORDS.pointsHint(places.stand.name)}
         rows={8}
         spellCheck={false}
         error={errorOf('points')}
         {...register('points')}
       />
       <TextInput
-        label="Driven as far as line"
+        label={APPROACH_WORDS.drivenTo}
         optional
-        hint="Number of the last line above that is driven. Left blank, all of it is walked."
+        hint={APPROACH_WORDS.drivenToHint}
         inputMode="numeric"
         className="max-w-36"
         error={errorOf('drivenTo')}
         {...register('drivenTo')}
       />
-      <Textarea label="Notes" optional error={errorOf('notes')} {...register('notes')} />
-      <SubmitRow label="Save approach" pending={fields.pending} pendingLabel="Saving…">
+      <Textarea label={APPROACH_WORDS.notes} optional error={errorOf('notes')} {...register('notes')} />
+      <SubmitRow label={APPROACH_WORDS.save} pending={fields.pending} pendingLabel={APPROACH_WORDS.saving}>
         <ButtonLink href={back} look="quiet">
-          Back without saving
+          {APPROACH_WORDS.back}
         </ButtonLink>
       </SubmitRow>
     </form>

@@ -2,13 +2,18 @@
 
 import { Button } from '@/ui/button';
 import { Notice } from '@/ui/notices';
+import { DRAFT_NOTICE_WORDS } from '../words/forms';
 
 /** Says that a form came back as it was left. */
 export function DraftNotice({ brought, onStartAfresh }: { brought: boolean; onStartAfresh: () => void }) {
   if (!brought) return null;
   return (
-    <Notice live title="Not saved yet" actions={<Button onClick={onStartAfresh}>Start afresh</Button>}>
-      What you typed here before has been brought back.
+    <Notice
+      live
+      title={DRAFT_NOTICE_WORDS.title}
+      actions={<Button onClick={onStartAfresh}>{DRAFT_NOTICE_WORDS.drop}</Button>}
+    >
+      {DRAFT_NOTICE_WORDS.text}
     </Notice>
   );
 }

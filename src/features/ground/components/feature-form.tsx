@@ -12,6 +12,7 @@ import { useToast } from '@/ui/toast';
 import { type FeatureForm, makeFeatureSchema } from '../feature-schema';
 import type { FormClub } from '../form-club';
 import { FEATURE_KIND_WORDS, MONTH_CHOICES, SHAPE_WORDS } from '../words';
+import { FEATURE_WORDS } from '../words/forms';
 import { choicesOf } from './choices-of';
 import { DraftNotice } from './draft-notice';
 import { CropFields, FeatureUseFields } from './feature-use-fields';
@@ -40,7 +41,7 @@ export function FeatureFormView({ club, formClub, values, year, at, add, change 
     submit: (typed) => (at ? change(club, { ...typed, ...at }) : add(club, typed)),
     onDone: (saved) => {
       draft.drop();
-      toast({ title: `${saved.name} is saved` });
+      toast({ title: FEATURE_WORDS.saved(saved.name) });
       router.push(back);
     },
   });
@@ -52,36 +53,41 @@ export function FeatureFormView({ club, formClub, values, year, at, add, change 
       <DraftNotice brought={draft.brought} onStartAfresh={draft.startAfresh} />
       <FormErrorSummary errors={fields.errors} />
       <div className="grid gap-4 sm:grid-cols-2">
-        <TextInput label="Name" autoComplete="off" error={errorOf('name')} {...register('name')} />
-        <Select label="Kind" options={choicesOf(FEATURE_KIND_WORDS)} error={errorOf('kind')} {...register('kind')} />
+        <TextInput label={FEATURE_WORDS.name} autoComplete="off" error={errorOf('name')} {...register('name')} />
+        <Select
+          label={FEATURE_WORDS.kind}
+          options={choicesOf(FEATURE_KIND_WORDS)}
+          error={errorOf('kind')}
+          {...register('kind')}
+        />
       </div>
       <RadioCards
-        label="Drawn as"
+        label={FEATURE_WORDS.shape}
         across
         choices={choicesOf(SHAPE_WORDS)}
         error={errorOf('shape')}
         {...register('shape')}
       />
       <Textarea
-        label="Places"
-        hint="One to a line, latitude, longitude; an area closes itself. Or paste GeoJSON."
+        label={FEATURE_WORDS.places}
+        hint={FEATURE_WORDS.placesHint}
         rows={8}
         spellCheck={false}
         error={errorOf('places')}
         {...register('places')}
       />
       <CheckboxGroup
-        label="Months in which deer use it"
+        label={FEATURE_WORDS.months}
         choices={MONTH_CHOICES}
         error={errorOf('months')}
         {...register('months')}
       />
       <CropFields fields={fields} year={year} />
       <FeatureUseFields fields={fields} />
-      <Textarea label="Notes" optional error={errorOf('notes')} {...register('notes')} />
-      <SubmitRow label="Save feature" pending={fields.pending} pendingLabel="Saving…">
+      <Textarea label={FEATURE_WORDS.notes} optional error={errorOf('notes')} {...register('notes')} />
+      <SubmitRow label={FEATURE_WORDS.save} pending={fields.pending} pendingLabel={FEATURE_WORDS.saving}>
         <ButtonLink href={back} look="quiet">
-          Back without saving
+          {FEATURE_WORDS.back}
         </ButtonLink>
       </SubmitRow>
     </form>

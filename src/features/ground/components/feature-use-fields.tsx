@@ -9,15 +9,16 @@ import { FieldGroup } from '@/ui/field';
 import { TextInput } from '@/ui/text-inputs';
 import { ALL_MONTHS, type FeatureForm } from '../feature-schema';
 import { FEATURE_KIND_WORDS, MONTH_CHOICES } from '../words';
+import { FEATURE_USE_WORDS } from '../words/forms';
 import type { Fields } from './form-types';
 
 const TIME_WORDS = {
-  night: 'Night',
-  dawn: 'Dawn',
-  morning: 'Morning',
-  midday: 'Midday',
-  afternoon: 'Afternoon',
-  dusk: 'Dusk',
+  night: FEATURE_USE_WORDS.night,
+  dawn: FEATURE_USE_WORDS.dawn,
+  morning: FEATURE_USE_WORDS.morning,
+  midday: FEATURE_USE_WORDS.midday,
+  afternoon: FEATURE_USE_WORDS.afternoon,
+  dusk: FEATURE_USE_WORDS.dusk,
 } as const;
 
 /** How likely deer are here at each time of day, in place of what is common for the kind. */
@@ -27,9 +28,9 @@ export function FeatureUseFields({ fields }: { fields: Fields<FeatureForm> }) {
   const common = DEFAULT_WHEREABOUTS.use[kind];
   return (
     <FieldGroup
-      label="Chance that deer are here"
+      label={FEATURE_USE_WORDS.chance}
       optional
-      hint={`In a hundred times. Left blank, as is common for ${FEATURE_KIND_WORDS[kind].toLowerCase()}: the pale figures.`}
+      hint={FEATURE_USE_WORDS.chanceHint(FEATURE_KIND_WORDS[kind].toLowerCase())}
     >
       <div className="grid grid-cols-2 gap-3 sm:grid-cols-3">
         {TIMES_OF_DAY.map((time) => (
@@ -56,38 +57,34 @@ export function CropFields({ fields, year }: { fields: Fields<FeatureForm>; year
   const rows = useFieldArray({ control: form.control, name: 'rotation' });
   if (kind !== 'crop') return null;
   return (
-    <FieldGroup
-      label="Crops by year"
-      optional
-      hint="In a year that is named here, its months stand in place of those above. A year's crop counts until March of the next."
-    >
+    <FieldGroup label={FEATURE_USE_WORDS.crops} optional hint={FEATURE_USE_WORDS.cropsHint}>
       <div className="flex flex-col gap-4">
         {rows.fields.map((row, i) => (
           <div key={row.id} className="grid gap-3 border-rule border-l-2 pl-3">
             <div className="grid grid-cols-[6rem_1fr] gap-3">
               <TextInput
-                label="Year"
+                label={FEATURE_USE_WORDS.year}
                 inputMode="numeric"
                 autoComplete="off"
                 error={errorOf(`rotation.${i}.year`)}
                 {...register(`rotation.${i}.year`)}
               />
               <TextInput
-                label="Crop"
+                label={FEATURE_USE_WORDS.crop}
                 autoComplete="off"
                 error={errorOf(`rotation.${i}.crop`)}
                 {...register(`rotation.${i}.crop`)}
               />
             </div>
             <CheckboxGroup
-              label="Months in which deer use it then"
+              label={FEATURE_USE_WORDS.months}
               choices={MONTH_CHOICES}
               error={errorOf(`rotation.${i}.months`)}
               {...register(`rotation.${i}.months`)}
             />
             <div>
               <Button look="quiet" onClick={() => rows.remove(i)}>
-                Take this year out
+                {FEATURE_USE_WORDS.removeYear}
               </Button>
             </div>
           </div>
@@ -100,7 +97,7 @@ export function CropFields({ fields, year }: { fields: Fields<FeatureForm>; year
               rows.append({ year: String(next), crop: '', months: [...ALL_MONTHS] });
             }}
           >
-            Add a year
+            {FEATURE_USE_WORDS.addYear}
           </Button>
         </div>
       </div>

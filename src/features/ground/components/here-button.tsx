@@ -5,6 +5,7 @@ import { useState } from 'react';
 import { Button } from '@/ui/button';
 import { FieldError } from '@/ui/field';
 import { degreesText } from '../place-text';
+import { HERE_WORDS } from '../words/forms';
 
 /** Fills a place in from the phone of whoever stands there; it stays on the phone until the form is saved. */
 export function HereButton({ onPlace }: { onPlace: (place: { lat: string; lon: string }) => void }) {
@@ -13,7 +14,7 @@ export function HereButton({ onPlace }: { onPlace: (place: { lat: string; lon: s
 
   function find() {
     if (!navigator.geolocation) {
-      setProblem('This device tells no position: type the numbers.');
+      setProblem(HERE_WORDS.noPosition);
       return;
     }
     setPending(true);
@@ -25,7 +26,7 @@ export function HereButton({ onPlace }: { onPlace: (place: { lat: string; lon: s
       },
       () => {
         setPending(false);
-        setProblem('The position could not be had: allow it, or type the numbers.');
+        setProblem(HERE_WORDS.refused);
       },
       { enableHighAccuracy: true, timeout: 20_000 },
     );
@@ -33,8 +34,8 @@ export function HereButton({ onPlace }: { onPlace: (place: { lat: string; lon: s
 
   return (
     <div>
-      <Button onClick={find} pending={pending} pendingLabel="Finding the place…">
-        <LocateFixed aria-hidden="true" className="size-5" /> I am standing there
+      <Button onClick={find} pending={pending} pendingLabel={HERE_WORDS.finding}>
+        <LocateFixed aria-hidden="true" className="size-5" /> {HERE_WORDS.here}
       </Button>
       <FieldError>{problem}</FieldError>
     </div>

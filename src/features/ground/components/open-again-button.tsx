@@ -3,6 +3,7 @@
 import { Button } from '@/ui/button';
 import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { useToast } from '@/ui/toast';
+import { OPEN_AGAIN_WORDS } from '../words/forms';
 import type { ClubCall } from './form-types';
 
 export interface OpenAgainButtonProps {
@@ -17,18 +18,18 @@ export function OpenAgainButton({ club, id, what, openAgain }: OpenAgainButtonPr
   const toast = useToast();
   return (
     <ConfirmDialog
-      title={`Open ${what} again?`}
-      confirmLabel="Open again"
-      keepLabel="Keep closed"
-      trigger={<Button>Open again</Button>}
+      title={OPEN_AGAIN_WORDS.title(what)}
+      confirmLabel={OPEN_AGAIN_WORDS.openAgain}
+      keepLabel={OPEN_AGAIN_WORDS.keepClosed}
+      trigger={<Button>{OPEN_AGAIN_WORDS.openAgain}</Button>}
       onConfirm={async () => {
         const answer = await openAgain(club, { id }).catch(() => null);
-        if (!answer) return 'The server could not be reached. Try again.';
+        if (!answer) return OPEN_AGAIN_WORDS.lost;
         if (!answer.ok) return answer.error.message;
-        toast({ title: 'Open again' });
+        toast({ title: OPEN_AGAIN_WORDS.openAgain });
       }}
     >
-      <p>Members can book from today on. Closed days that are past stay on record.</p>
+      <p>{OPEN_AGAIN_WORDS.text}</p>
     </ConfirmDialog>
   );
 }

@@ -10,6 +10,7 @@ import { Textarea, TextInput } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { FormClub } from '../form-club';
 import { makeParkingSchema, type ParkingForm } from '../parking-schema';
+import { PARKING_WORDS } from '../words/forms';
 import { DraftNotice } from './draft-notice';
 import type { ClubCall, Saved } from './form-types';
 import { HereButton } from './here-button';
@@ -35,7 +36,7 @@ export function ParkingFormView({ club, formClub, values, at, add, change }: Par
     submit: (typed) => (at ? change(club, { ...typed, ...at }) : add(club, typed)),
     onDone: (saved) => {
       draft.drop();
-      toast({ title: `${saved.name} is saved` });
+      toast({ title: PARKING_WORDS.saved(saved.name) });
       router.push(back);
     },
   });
@@ -46,18 +47,18 @@ export function ParkingFormView({ club, formClub, values, at, add, change }: Par
     <form {...fields.formProps} className="flex max-w-2xl flex-col gap-5">
       <DraftNotice brought={draft.brought} onStartAfresh={draft.startAfresh} />
       <FormErrorSummary errors={fields.errors} />
-      <TextInput label="Name" autoComplete="off" error={errorOf('name')} {...register('name')} />
+      <TextInput label={PARKING_WORDS.name} autoComplete="off" error={errorOf('name')} {...register('name')} />
       <div className="grid gap-4 sm:grid-cols-2">
         <TextInput
-          label="Latitude"
-          hint="Degrees, such as 38.6051"
+          label={PARKING_WORDS.lat}
+          hint={PARKING_WORDS.latHint}
           autoComplete="off"
           error={errorOf('lat')}
           {...register('lat')}
         />
         <TextInput
-          label="Longitude"
-          hint="West is minus, such as -83.1952"
+          label={PARKING_WORDS.lon}
+          hint={PARKING_WORDS.lonHint}
           autoComplete="off"
           error={errorOf('lon')}
           {...register('lon')}
@@ -69,10 +70,16 @@ export function ParkingFormView({ club, formClub, values, at, add, change }: Par
           }}
         />
       </div>
-      <Textarea label="Notes" optional hint="Gate, room, mud." error={errorOf('notes')} {...register('notes')} />
-      <SubmitRow label="Save parking place" pending={fields.pending} pendingLabel="Saving…">
+      <Textarea
+        label={PARKING_WORDS.notes}
+        optional
+        hint={PARKING_WORDS.notesHint}
+        error={errorOf('notes')}
+        {...register('notes')}
+      />
+      <SubmitRow label={PARKING_WORDS.save} pending={fields.pending} pendingLabel={PARKING_WORDS.saving}>
         <ButtonLink href={back} look="quiet">
-          Back without saving
+          {PARKING_WORDS.back}
         </ButtonLink>
       </SubmitRow>
     </form>

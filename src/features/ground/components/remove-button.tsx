@@ -5,6 +5,7 @@ import type { ReactNode } from 'react';
 import { Button } from '@/ui/button';
 import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { useToast } from '@/ui/toast';
+import { REMOVE_WORDS } from '../words/forms';
 import type { ClubCall } from './form-types';
 
 export interface RemoveButtonProps {
@@ -23,15 +24,15 @@ export function RemoveButton({ club, at, name, children, remove, to }: RemoveBut
   const toast = useToast();
   return (
     <ConfirmDialog
-      title={`Remove ${name}?`}
-      confirmLabel={`Remove ${name}`}
+      title={REMOVE_WORDS.title(name)}
+      confirmLabel={REMOVE_WORDS.removeLabel(name)}
       danger
-      trigger={<Button>Remove</Button>}
+      trigger={<Button>{REMOVE_WORDS.remove}</Button>}
       onConfirm={async () => {
         const answer = await remove(club, at).catch(() => null);
-        if (!answer) return 'The server could not be reached. Try again.';
+        if (!answer) return REMOVE_WORDS.lost;
         if (!answer.ok) return answer.error.message;
-        toast({ title: `${answer.data.name} is removed` });
+        toast({ title: REMOVE_WORDS.removed(answer.data.name) });
         router.push(to);
       }}
     >

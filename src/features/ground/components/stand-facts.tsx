@@ -8,16 +8,18 @@ import { degreesText } from '../place-text';
 import type { StandRow } from '../stands-data';
 import { formatArcs } from '../view';
 import { SHELTER_WORDS, SHOT_SIDE_WORDS, STAND_KIND_WORDS, SUITABILITY_WORDS, WEAPON_WORDS } from '../words';
+import { STAND_FACTS_WORDS } from '../words/stand';
 import { ArcBars } from './arc-bars';
 
 export function GoodWinds({ stand }: { stand: StandRow }) {
   return (
-    <Section title="Good winds" note="Where the wind may come from, from true north.">
+    <Section title={STAND_FACTS_WORDS.goodWinds} note={STAND_FACTS_WORDS.goodWindsNote}>
       <div className="grid gap-6 sm:grid-cols-2">
         {(['morning', 'evening'] as const).map((window) => (
           <div key={window}>
             <h3 className="font-semibold">
-              {window === 'morning' ? 'Morning' : 'Evening'}: {SUITABILITY_WORDS[stand[window]].toLowerCase()}
+              {window === 'morning' ? STAND_FACTS_WORDS.morning : STAND_FACTS_WORDS.evening}:{' '}
+              {SUITABILITY_WORDS[stand[window]].toLowerCase()}
             </h3>
             <ArcBars arcs={arcsFor(stand.arcs, window)} className="my-1 h-auto w-full max-w-md" />
             <p>{formatArcs(arcsFor(stand.arcs, window))}</p>
@@ -29,9 +31,9 @@ export function GoodWinds({ stand }: { stand: StandRow }) {
 }
 
 function facing(stand: StandRow): Definition {
-  if (stand.facingDeg === null) return { term: 'Faces', detail: 'No one way' };
+  if (stand.facingDeg === null) return { term: STAND_FACTS_WORDS.faces, detail: STAND_FACTS_WORDS.noOneWay };
   return {
-    term: 'Faces',
+    term: STAND_FACTS_WORDS.faces,
     detail: (
       <span className="inline-flex items-center gap-2">
         <span aria-hidden="true">
@@ -54,31 +56,43 @@ export interface StandFactsProps {
 export function StandFacts({ stand, units, restDaysDefault, allowedNames }: StandFactsProps) {
   const shots = WEAPONS.flatMap((weapon) => {
     const range = stand.shotRangeM[weapon];
-    return range === undefined ? [] : [`${WEAPON_WORDS[weapon]} to ${formatDistance(range, units)}`];
+    return range === undefined ? [] : [STAND_FACTS_WORDS.shot(WEAPON_WORDS[weapon], formatDistance(range, units))];
   });
   const seat: Definition[] = [
-    { term: 'Kind', detail: STAND_KIND_WORDS[stand.kind] },
-    { term: 'Latitude, longitude', detail: `${degreesText(stand.lat)}, ${degreesText(stand.lon)}` },
-    { term: 'Seat height', detail: formatHeight(stand.seatHeightM, units) },
-    { term: 'Seats', detail: stand.seats },
+    { term: STAND_FACTS_WORDS.kind, detail: STAND_KIND_WORDS[stand.kind] },
+    { term: STAND_FACTS_WORDS.latitudeLongitude, detail: `${degreesText(stand.lat)}, ${degreesText(stand.lon)}` },
+    { term: STAND_FACTS_WORDS.seatHeight, detail: formatHeight(stand.seatHeightM, units) },
+    { term: STAND_FACTS_WORDS.seats, detail: stand.seats },
     facing(stand),
-    { term: 'Shot side', detail: SHOT_SIDE_WORDS[stand.shotSide] },
-    { term: 'Longest shot', detail: shots.length === 0 ? 'No weapon is allowed' : shots.join(', ') },
-  ];
-  const drain = stand.drainBearingDeg === null ? 'Not known' : `Toward ${formatBearing(stand.drainBearingDeg)}`;
-  const use: Definition[] = [
-    { term: 'Rest after a sit', detail: days(stand.restDays ?? restDaysDefault, stand.restDays === null) },
-    { term: 'Most sits a season', detail: stand.mostSitsSeason ?? 'No limit' },
+    { term: STAND_FACTS_WORDS.shotSide, detail: SHOT_SIDE_WORDS[stand.shotSide] },
     {
-      term: 'Who may hunt it',
-      detail: allowedNames === null ? 'Everyone who hunts' : allowedNames.join(', ') || 'Nobody',
+      term: STAND_FACTS_WORDS.longestShot,
+      detail: shots.length === 0 ? STAND_FACTS_WORDS.noWeaponAllowed : shots.join(', '),
     },
-    { term: 'Shelter', detail: SHELTER_WORDS[stand.shelter] },
-    { term: 'Cold air drains', detail: drain },
-    { term: 'Slope', detail: stand.slopePercent === null ? 'Not known' : `${stand.slopePercent} %` },
+  ];
+  const drain =
+    stand.drainBearingDeg === null
+      ? STAND_FACTS_WORDS.notKnown
+      : STAND_FACTS_WORDS.toward(formatBearing(stand.drainBearingDeg));
+  const use: Definition[] = [
+    { term: STAND_FACTS_WORDS.restAfterSit, detail: days(stand.restDays ?? restDaysDefault, stand.restDays === null) },
+    { term: STAND_FACTS_WORDS.mostSitsSeason, detail: stand.mostSitsSeason ?? STAND_FACTS_WORDS.noLimit },
+    {
+      term: STAND_FACTS_WORDS.whoHunt,
+      detail:
+        allowedNames === null
+          ? STAND_FACTS_WORDS.everyoneWhoHunts
+          : allowedNames.join(', ') || STAND_FACTS_WORDS.nobody,
+    },
+    { term: STAND_FACTS_WORDS.shelter, detail: SHELTER_WORDS[stand.shelter] },
+    { term: STAND_FACTS_WORDS.coldAirDrains, detail: drain },
+    {
+      term: STAND_FACTS_WORDS.slope,
+      detail: stand.slopePercent === null ? STAND_FACTS_WORDS.notKnown : `${stand.slopePercent} %`,
+    },
   ];
   return (
-    <Section title="Facts">
+    <Section title={STAND_FACTS_WORDS.facts}>
       <div className="grid gap-x-10 lg:grid-cols-2">
         <DefinitionList items={seat} className="self-start" />
         <DefinitionList items={use} className="self-start border-t-0 lg:border-t" />
@@ -88,6 +102,5 @@ export function StandFacts({ stand, units, restDaysDefault, allowedNames }: Stan
 }
 
 function days(count: number, byDefault: boolean): string {
-  const text = `${count} full day${count === 1 ? '' : 's'}`;
-  return byDefault ? `${text}, the club's default` : text;
+  return byDefault ? STAND_FACTS_WORDS.defaultDays(count) : STAND_FACTS_WORDS.days(count);
 }

@@ -10,6 +10,7 @@ import { useToast } from '@/ui/toast';
 import type { FormClub } from '../form-club';
 import type { Hunter } from '../people-data';
 import { makeStandSchema, type StandForm } from '../stand-schema';
+import { STAND_WORDS } from '../words/stand';
 import { DraftNotice } from './draft-notice';
 import type { ClubCall, Saved } from './form-types';
 import { StandPlaceFields, StandSeatFields } from './stand-place-fields';
@@ -40,7 +41,7 @@ export function StandFormView(props: StandFormProps) {
     submit: (typed) => (at ? change(club, { ...typed, ...at }) : add(club, typed)),
     onDone: (saved) => {
       draft.drop();
-      toast({ title: `${saved.name} is saved` });
+      toast({ title: STAND_WORDS.saved(saved.name) });
       router.push(`/clubs/${club}/stands/${saved.id}`);
     },
   });
@@ -56,9 +57,9 @@ export function StandFormView(props: StandFormProps) {
       <StandUseFields fields={fields} restDaysDefault={restDaysDefault} />
       <StandAirFields fields={fields} club={club} units={formClub.units} />
       <StandWhoFields fields={fields} hunters={hunters} />
-      <SubmitRow label="Save stand" pending={fields.pending} pendingLabel="Saving…" className="mt-6">
+      <SubmitRow label={STAND_WORDS.save} pending={fields.pending} pendingLabel={STAND_WORDS.saving} className="mt-6">
         <ButtonLink href={back} look="quiet">
-          Back without saving
+          {STAND_WORDS.back}
         </ButtonLink>
       </SubmitRow>
     </form>

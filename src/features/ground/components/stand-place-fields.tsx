@@ -7,6 +7,7 @@ import { Section } from '@/ui/page-parts';
 import { Select, TextInput } from '@/ui/text-inputs';
 import { STAND_LIMITS, type StandForm } from '../stand-schema';
 import { SHOT_SIDE_WORDS, STAND_KIND_WORDS, WEAPON_WORDS } from '../words';
+import { STAND_PLACE_WORDS } from '../words/stand';
 import { choicesOf } from './choices-of';
 import type { Fields } from './form-types';
 import { HereButton } from './here-button';
@@ -14,21 +15,26 @@ import { HereButton } from './here-button';
 export function StandPlaceFields({ fields }: { fields: Fields<StandForm> }) {
   const { register, errorOf, form } = fields;
   return (
-    <Section title="Place" heading="margin">
+    <Section title={STAND_PLACE_WORDS.place} heading="margin">
       <div className="grid gap-4 sm:grid-cols-2">
-        <TextInput label="Name" error={errorOf('name')} autoComplete="off" {...register('name')} />
-        <Select label="Kind" options={choicesOf(STAND_KIND_WORDS)} error={errorOf('kind')} {...register('kind')} />
+        <TextInput label={STAND_PLACE_WORDS.name} error={errorOf('name')} autoComplete="off" {...register('name')} />
+        <Select
+          label={STAND_PLACE_WORDS.kind}
+          options={choicesOf(STAND_KIND_WORDS)}
+          error={errorOf('kind')}
+          {...register('kind')}
+        />
         <TextInput
-          label="Latitude"
-          hint="Degrees, such as 38.6051"
+          label={STAND_PLACE_WORDS.lat}
+          hint={STAND_PLACE_WORDS.latHint}
           inputMode="text"
           autoComplete="off"
           error={errorOf('lat')}
           {...register('lat')}
         />
         <TextInput
-          label="Longitude"
-          hint="West is minus, such as -83.1952"
+          label={STAND_PLACE_WORDS.lon}
+          hint={STAND_PLACE_WORDS.lonHint}
           autoComplete="off"
           error={errorOf('lon')}
           {...register('lon')}
@@ -48,32 +54,37 @@ export function StandSeatFields({ fields, units }: { fields: Fields<StandForm>; 
   const { register, errorOf } = fields;
   const { heightUnit, rangeUnit } = STAND_LIMITS[units];
   return (
-    <Section title="Seat and shot" heading="margin">
+    <Section title={STAND_PLACE_WORDS.seatAndShot} heading="margin">
       <div className="grid gap-4 sm:grid-cols-2">
         <TextInput
-          label="Seat height above ground"
+          label={STAND_PLACE_WORDS.seatHeight}
           inputMode="decimal"
           unit={heightUnit}
           error={errorOf('seatHeight')}
           {...register('seatHeight')}
         />
-        <TextInput label="Seats" inputMode="numeric" error={errorOf('seats')} {...register('seats')} />
         <TextInput
-          label="Faces"
+          label={STAND_PLACE_WORDS.seats}
+          inputMode="numeric"
+          error={errorOf('seats')}
+          {...register('seats')}
+        />
+        <TextInput
+          label={STAND_PLACE_WORDS.facing}
           optional
-          hint="A compass point (NE) or degrees from true north"
+          hint={STAND_PLACE_WORDS.facingHint}
           autoComplete="off"
           error={errorOf('facing')}
           {...register('facing')}
         />
         <Select
-          label="Shot side"
+          label={STAND_PLACE_WORDS.shotSide}
           options={choicesOf(SHOT_SIDE_WORDS)}
           error={errorOf('shotSide')}
           {...register('shotSide')}
         />
       </div>
-      <FieldGroup label="Longest shot" hint="A weapon left blank is not allowed at this stand." className="mt-5">
+      <FieldGroup label={STAND_PLACE_WORDS.longestShot} hint={STAND_PLACE_WORDS.longestShotHint} className="mt-5">
         <div className="grid grid-cols-2 gap-4 lg:grid-cols-5">
           {WEAPONS.map((weapon) => (
             <TextInput

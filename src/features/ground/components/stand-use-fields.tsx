@@ -7,6 +7,7 @@ import { Select, Textarea, TextInput } from '@/ui/text-inputs';
 import type { Hunter } from '../people-data';
 import type { StandForm } from '../stand-schema';
 import { SUITABILITY_WORDS } from '../words';
+import { STAND_USE_WORDS } from '../words/stand';
 import { choicesOf } from './choices-of';
 import type { Fields } from './form-types';
 
@@ -14,22 +15,32 @@ export function StandUseFields({ fields, restDaysDefault }: { fields: Fields<Sta
   const { register, errorOf } = fields;
   const suitabilities = choicesOf(SUITABILITY_WORDS);
   return (
-    <Section title="Use and rest" heading="margin">
+    <Section title={STAND_USE_WORDS.useAndRest} heading="margin">
       <div className="grid gap-4 sm:grid-cols-2">
-        <Select label="Morning" options={suitabilities} error={errorOf('morning')} {...register('morning')} />
-        <Select label="Evening" options={suitabilities} error={errorOf('evening')} {...register('evening')} />
+        <Select
+          label={STAND_USE_WORDS.morning}
+          options={suitabilities}
+          error={errorOf('morning')}
+          {...register('morning')}
+        />
+        <Select
+          label={STAND_USE_WORDS.evening}
+          options={suitabilities}
+          error={errorOf('evening')}
+          {...register('evening')}
+        />
         <TextInput
-          label="Rest days after a sit"
+          label={STAND_USE_WORDS.restDays}
           optional
-          hint={`Left blank, the club's ${restDaysDefault}`}
+          hint={STAND_USE_WORDS.restDaysHint(restDaysDefault)}
           inputMode="numeric"
           error={errorOf('restDays')}
           {...register('restDays')}
         />
         <TextInput
-          label="Most sits in a season"
+          label={STAND_USE_WORDS.mostSitsSeason}
           optional
-          hint="Left blank, no limit"
+          hint={STAND_USE_WORDS.mostSitsSeasonHint}
           inputMode="numeric"
           error={errorOf('mostSitsSeason')}
           {...register('mostSitsSeason')}
@@ -40,18 +51,18 @@ export function StandUseFields({ fields, restDaysDefault }: { fields: Fields<Sta
 }
 
 const WHO = [
-  { value: 'everyone', label: 'Everyone who hunts in the club' },
-  { value: 'named', label: 'Named members only' },
+  { value: 'everyone', label: STAND_USE_WORDS.everyone },
+  { value: 'named', label: STAND_USE_WORDS.named },
 ];
 
 export function StandWhoFields({ fields, hunters }: { fields: Fields<StandForm>; hunters: Hunter[] }) {
   const { register, errorOf, form } = fields;
   const who = useWatch({ control: form.control, name: 'whoMayHunt' });
   return (
-    <Section title="Who, and notes" heading="margin">
+    <Section title={STAND_USE_WORDS.whoAndNotes} heading="margin">
       <div className="flex flex-col gap-5">
         <RadioCards
-          label="Who may hunt it"
+          label={STAND_USE_WORDS.whoMayHunt}
           across
           choices={WHO}
           error={errorOf('whoMayHunt')}
@@ -59,16 +70,16 @@ export function StandWhoFields({ fields, hunters }: { fields: Fields<StandForm>;
         />
         {who === 'named' && (
           <CheckboxGroup
-            label="Members"
+            label={STAND_USE_WORDS.allowedMemberIds}
             choices={hunters.map(({ id, name, role }) => ({ value: id, label: name, note: role }))}
             error={errorOf('allowedMemberIds')}
             {...register('allowedMemberIds')}
           />
         )}
         <Textarea
-          label="Notes"
+          label={STAND_USE_WORDS.notes}
           optional
-          hint="What a person should know before going in: the climb, strap dates, phone signal."
+          hint={STAND_USE_WORDS.notesHint}
           error={errorOf('notes')}
           {...register('notes')}
         />

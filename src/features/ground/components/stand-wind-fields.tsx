@@ -12,17 +12,18 @@ import { parseDegrees } from '../place-text';
 import type { StandForm } from '../stand-schema';
 import { formatArcs } from '../view';
 import { SHELTER_WORDS } from '../words';
+import { STAND_AIR_WORDS, STAND_WIND_WORDS } from '../words/stand';
 import { ArcBars } from './arc-bars';
 import { choicesOf } from './choices-of';
 import type { Fields } from './form-types';
 
 const LABELS = {
   arcsBoth: {
-    label: 'Good winds, morning and evening',
-    hint: 'Where the wind may come from: NW-N, or 310-20, or both',
+    label: STAND_WIND_WORDS.goodWindsLabel,
+    hint: STAND_WIND_WORDS.goodWindsHint,
   },
-  arcsMorning: { label: 'Good in the morning only', hint: 'Added to the winds above' },
-  arcsEvening: { label: 'Good in the evening only', hint: 'Added to the winds above' },
+  arcsMorning: { label: STAND_WIND_WORDS.morning, hint: STAND_WIND_WORDS.addedHint },
+  arcsEvening: { label: STAND_WIND_WORDS.evening, hint: STAND_WIND_WORDS.addedHint },
 } as const;
 
 export function StandWindFields({ fields }: { fields: Fields<StandForm> }) {
@@ -33,11 +34,7 @@ export function StandWindFields({ fields }: { fields: Fields<StandForm> }) {
     return read.ok ? read.arcs : [];
   });
   return (
-    <Section
-      title="Good winds"
-      heading="margin"
-      note="Compass points hold their whole sector; spans run clockwise and may cross north; 'any' is all the way round."
-    >
+    <Section title={STAND_WIND_WORDS.goodWinds} heading="margin" note={STAND_WIND_WORDS.goodWindsNote}>
       <div className="flex flex-col gap-4">
         {ARC_FIELDS.map(({ name }) => (
           <TextInput
@@ -56,7 +53,7 @@ export function StandWindFields({ fields }: { fields: Fields<StandForm> }) {
       <dl className="mt-4 grid gap-4 border-rule border-t pt-3 sm:grid-cols-2" aria-live="polite">
         {(['morning', 'evening'] as const).map((window) => (
           <div key={window}>
-            <dt className="text-ink-soft text-sm">{window === 'morning' ? 'Morning' : 'Evening'}, as read</dt>
+            <dt className="text-ink-soft text-sm">{STAND_WIND_WORDS.read[window]}</dt>
             <dd>
               <ArcBars arcs={arcsFor(arcs, window)} />
               {formatArcs(arcsFor(arcs, window))}
@@ -79,29 +76,29 @@ export function StandAirFields({ fields, club, units }: StandAirFieldsProps) {
   const [latText, lonText] = useWatch({ control: form.control, name: ['lat', 'lon'] });
   const [lat, lon] = [parseDegrees(latText, 'lat'), parseDegrees(lonText, 'lon')];
   const drain = parseBearing(useWatch({ control: form.control, name: 'drainBearing' }));
-  const read = drain.ok && drain.deg !== null ? `Read as ${formatBearing(drain.deg)}. ` : '';
+  const read = drain.ok ? drain.deg : null;
   return (
-    <Section title="Air about the seat" heading="margin">
+    <Section title={STAND_AIR_WORDS.title} heading="margin">
       <div className="grid gap-4 sm:grid-cols-2">
         <Select
-          label="Shelter"
-          hint="How open the ground is to the wind"
+          label={STAND_AIR_WORDS.shelter}
+          hint={STAND_AIR_WORDS.shelterHint}
           options={choicesOf(SHELTER_WORDS)}
           error={errorOf('shelter')}
           {...register('shelter')}
         />
         <TextInput
-          label="Cold air drains toward"
+          label={STAND_AIR_WORDS.drain}
           optional
-          hint={`${read}Downhill from the seat on a still evening, a compass point or degrees`}
+          hint={read === null ? STAND_AIR_WORDS.drainHint : STAND_AIR_WORDS.drainHintRead(formatBearing(read))}
           autoComplete="off"
           error={errorOf('drainBearing')}
           {...register('drainBearing')}
         />
         <TextInput
-          label="Slope"
+          label={STAND_AIR_WORDS.slope}
           optional
-          hint="Rise in 100 along the ground"
+          hint={STAND_AIR_WORDS.slopeHint}
           inputMode="decimal"
           unit="%"
           error={errorOf('slopePercent')}

@@ -1,13 +1,14 @@
 import { ClosureFormView } from '@/features/ground/components/closure-form';
 import { ClosureList } from '@/features/ground/components/closure-list';
 import { readClosures } from '@/features/ground/reads';
+import { CLOSURES_PAGE_WORDS } from '@/features/ground/words/pages';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { EmptyState } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { closeAction, openAgainAction } from './actions';
 
-export const metadata = { title: 'Closed days' };
+export const metadata = { title: CLOSURES_PAGE_WORDS.title };
 
 export default clubPage('closed_days.write', async ({ scope, search }) => {
   const { today, lines, stands } = await readClosures(scope, now());
@@ -15,11 +16,8 @@ export default clubPage('closed_days.write', async ({ scope, search }) => {
   const standId = closable.find(({ id }) => id === search.stand)?.id ?? '';
   return (
     <>
-      <PageTitle
-        title="Closed days"
-        lead="Nobody can book on closed days. Sits booked before stay until the member or an admin cancels them."
-      />
-      <Section title="Close days">
+      <PageTitle title={CLOSURES_PAGE_WORDS.title} lead={CLOSURES_PAGE_WORDS.lead} />
+      <Section title={CLOSURES_PAGE_WORDS.closeDays}>
         <ClosureFormView
           key={standId}
           club={scope.club.slug}
@@ -29,15 +27,13 @@ export default clubPage('closed_days.write', async ({ scope, search }) => {
           close={closeAction}
         />
       </Section>
-      <Section title="Closed now or later">
+      <Section title={CLOSURES_PAGE_WORDS.list}>
         {lines.length === 0 ? (
-          <EmptyState title="Everything is open">
-            What you close above is listed here, and can be opened again.
-          </EmptyState>
+          <EmptyState title={CLOSURES_PAGE_WORDS.none}>{CLOSURES_PAGE_WORDS.noneText}</EmptyState>
         ) : (
           <ClosureList
             club={scope.club.slug}
-            caption="Closures of today and later"
+            caption={CLOSURES_PAGE_WORDS.caption}
             lines={lines}
             openAgain={openAgainAction}
           />

@@ -5,6 +5,7 @@ import { placeLines } from '@/features/clubs/place-words';
 import { readMember } from '@/features/clubs/read-members';
 import { planRemoval } from '@/features/clubs/removal';
 import { ROLE_NOTES } from '@/features/clubs/role-words';
+import { CLUB_PAGE_WORDS } from '@/features/clubs/words/pages';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { notFound } from '@/server/errors';
@@ -12,7 +13,7 @@ import { ButtonLink } from '@/ui/button';
 import { DefinitionList, PageTitle, Section } from '@/ui/page-parts';
 import { leaveAction } from './actions';
 
-export const metadata: Metadata = { title: 'Club' };
+export const metadata: Metadata = { title: CLUB_PAGE_WORDS.title };
 
 export default clubPage('club.read', async ({ scope }) => {
   const at = now();
@@ -22,45 +23,48 @@ export default clubPage('club.read', async ({ scope }) => {
   if (!you || !plan) throw notFound();
   const base = `/clubs/${club.slug}`;
   const yours = [
-    { term: 'Name', detail: you.name },
-    { term: 'Role', detail: `${you.roleWord}. ${ROLE_NOTES[you.role]}` },
-    { term: 'Joined', detail: you.joinedText },
-    ...(you.guestText ? [{ term: 'Your days', detail: you.guestText }] : []),
-    ...(you.sponsorName ? [{ term: 'Sponsor', detail: you.sponsorName }] : []),
+    { term: CLUB_PAGE_WORDS.name, detail: you.name },
+    { term: CLUB_PAGE_WORDS.role, detail: `${you.roleWord}. ${ROLE_NOTES[you.role]}` },
+    { term: CLUB_PAGE_WORDS.joined, detail: you.joinedText },
+    ...(you.guestText ? [{ term: CLUB_PAGE_WORDS.yourDays, detail: you.guestText }] : []),
+    ...(you.sponsorName ? [{ term: CLUB_PAGE_WORDS.sponsor, detail: you.sponsorName }] : []),
   ];
   // Whoever may not see the stands is not told where the ground lies.
   const lines = placeLines({ ...club, units: club.clubUnits });
   const place = scope.can('stands.read') ? lines : lines.filter((line) => line.label !== 'Place');
   return (
     <>
-      <PageTitle title={club.name} actions={<ButtonLink href={`${base}/club/rules`}>Club rules</ButtonLink>} />
+      <PageTitle
+        title={club.name}
+        actions={<ButtonLink href={`${base}/club/rules`}>{CLUB_PAGE_WORDS.clubRules}</ButtonLink>}
+      />
       {scope.can('members.write') && (
-        <Section title="Setting up" note="What a club needs before its first sit, in this order.">
+        <Section title={CLUB_PAGE_WORDS.settingUp} note={CLUB_PAGE_WORDS.settingUpNote}>
           <div className="flex flex-wrap gap-2">
-            <ButtonLink href={`${base}/club/rules/edit`}>Set the rules</ButtonLink>
-            <ButtonLink href={`${base}/ground`}>Put in parking and ground</ButtonLink>
-            <ButtonLink href={`${base}/stands`}>Add stands</ButtonLink>
-            <ButtonLink href={`${base}/club/members/invite`}>Invite members</ButtonLink>
+            <ButtonLink href={`${base}/club/rules/edit`}>{CLUB_PAGE_WORDS.setRules}</ButtonLink>
+            <ButtonLink href={`${base}/ground`}>{CLUB_PAGE_WORDS.ground}</ButtonLink>
+            <ButtonLink href={`${base}/stands`}>{CLUB_PAGE_WORDS.stands}</ButtonLink>
+            <ButtonLink href={`${base}/club/members/invite`}>{CLUB_PAGE_WORDS.invite}</ButtonLink>
           </div>
         </Section>
       )}
       <Section
-        title="The club"
+        title={CLUB_PAGE_WORDS.theClub}
         actions={
           scope.can('rules.write') && (
             <ButtonLink href={`${base}/club/place`} look="quiet">
-              Change name or place
+              {CLUB_PAGE_WORDS.change}
             </ButtonLink>
           )
         }
       >
         <DefinitionList items={place.map(({ label, text }) => ({ term: label, detail: text }))} className="max-w-2xl" />
       </Section>
-      <Section title="You in this club">
+      <Section title={CLUB_PAGE_WORDS.you}>
         <DefinitionList items={yours} className="max-w-2xl" />
         <div className="mt-4">
           {plan.lastAdmin ? (
-            <p className="text-ink-soft">You are the only admin. Make another member an admin before you leave.</p>
+            <p className="text-ink-soft">{CLUB_PAGE_WORDS.onlyAdmin}</p>
           ) : (
             <LeaveClub club={club.slug} clubName={club.name} action={leaveAction}>
               <WhatGoes plan={plan} />

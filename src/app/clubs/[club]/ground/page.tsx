@@ -1,5 +1,6 @@
 import { FeaturesTable, ParkingsTable } from '@/features/ground/components/ground-tables';
 import { readGround } from '@/features/ground/reads';
+import { GROUND_PAGE_WORDS } from '@/features/ground/words/pages';
 import { readMap } from '@/features/map/read-map';
 import { GroundMap } from '@/features/moment/components/ground-map';
 import { windowToPick } from '@/features/sits/reads';
@@ -10,7 +11,7 @@ import { EmptyState } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
 import { saveDrawingAction } from './actions';
 
-export const metadata = { title: 'Ground' };
+export const metadata = { title: GROUND_PAGE_WORDS.title };
 
 export default clubPage('features.read', async ({ scope, search }) => {
   const at = now();
@@ -18,17 +19,19 @@ export default clubPage('features.read', async ({ scope, search }) => {
   const { day, window } = windowToPick(at, scope.club);
   const base = `/clubs/${scope.club.slug}/ground`;
   const canWrite = scope.can('features.write');
-  const addFeature = <ButtonLink href={`${base}/features/new`}>Add a feature</ButtonLink>;
-  const addParking = <ButtonLink href={`${base}/parking/new`}>Add a parking place</ButtonLink>;
+  const addFeature = <ButtonLink href={`${base}/features/new`}>{GROUND_PAGE_WORDS.addFeature}</ButtonLink>;
+  const addParking = <ButtonLink href={`${base}/parking/new`}>{GROUND_PAGE_WORDS.addParking}</ButtonLink>;
   return (
     <>
       <PageTitle
-        title="Ground"
-        lead="What deer use and where people leave their trucks: the ranking weighs both."
+        title={GROUND_PAGE_WORDS.title}
+        lead={GROUND_PAGE_WORDS.lead}
         actions={
           <>
-            {canWrite && <ButtonLink href={`${base}/import`}>Bring in a file</ButtonLink>}
-            {scope.can('ground.export') && <ButtonLink href={`${base}/export`}>Take it out</ButtonLink>}
+            {canWrite && <ButtonLink href={`${base}/import`}>{GROUND_PAGE_WORDS.bringFile}</ButtonLink>}
+            {scope.can('ground.export') && (
+              <ButtonLink href={`${base}/export`}>{GROUND_PAGE_WORDS.takeItOut}</ButtonLink>
+            )}
           </>
         }
       />
@@ -39,26 +42,24 @@ export default clubPage('features.read', async ({ scope, search }) => {
         selectedId={typeof search.select === 'string' ? search.select : null}
         next={{ day, window }}
       />
-      <Section title="Features" actions={canWrite && features.length > 0 && addFeature}>
+      <Section title={GROUND_PAGE_WORDS.features} actions={canWrite && features.length > 0 && addFeature}>
         <FeaturesTable
           club={scope.club.slug}
           lines={features}
           empty={
-            <EmptyState title="No features yet" action={canWrite && addFeature}>
-              {canWrite
-                ? 'Begin with bedding and food: scent and noise are weighed against them.'
-                : 'A steward adds bedding, food, water and travel lines.'}
+            <EmptyState title={GROUND_PAGE_WORDS.noFeatures} action={canWrite && addFeature}>
+              {canWrite ? GROUND_PAGE_WORDS.noFeaturesText : GROUND_PAGE_WORDS.noFeaturesTextAsk}
             </EmptyState>
           }
         />
       </Section>
-      <Section title="Parking places" actions={canWrite && parkings.length > 0 && addParking}>
+      <Section title={GROUND_PAGE_WORDS.parkingPlaces} actions={canWrite && parkings.length > 0 && addParking}>
         <ParkingsTable
           club={scope.club.slug}
           lines={parkings}
           empty={
-            <EmptyState title="No parking places yet" action={canWrite && addParking}>
-              Approaches begin at a parking place{canWrite ? ': add one first.' : '; a steward adds them.'}
+            <EmptyState title={GROUND_PAGE_WORDS.noParking} action={canWrite && addParking}>
+              {canWrite ? GROUND_PAGE_WORDS.noParkingText : GROUND_PAGE_WORDS.noParkingTextAsk}
             </EmptyState>
           }
         />

@@ -1,11 +1,7 @@
-import type { ReactNode } from 'react';
-import type { Permission } from '@/core/permissions';
-import { ClubTabs } from '@/features/clubs/components/club-tabs';
 import { SEASON_WORDS } from '@/features/logs/words/sightings';
-import { findScope } from '@/server/scope';
-import { currentUser } from '@/server/session';
+import { type FolderProps, PagesWithTabs, type Tab } from '../pages-with-tabs';
 
-const PAGES: { path: string; label: string; needs: Permission }[] = [
+const TABS: Tab[] = [
   { path: '', label: SEASON_WORDS.report, needs: 'report.read' },
   { path: '/sightings', label: SEASON_WORDS.sightings, needs: 'log.read' },
   { path: '/harvest', label: SEASON_WORDS.harvest, needs: 'harvest.read' },
@@ -15,25 +11,6 @@ const PAGES: { path: string; label: string; needs: Permission }[] = [
   { path: '/learning', label: SEASON_WORDS.learning, needs: 'log.read_all' },
 ];
 
-interface Props {
-  params: Promise<{ club: string }>;
-  children: ReactNode;
-}
-
-/** Tabs for whoever the person is; the pages check. */
-export default async function SeasonLayout({ params, children }: Props) {
-  const { club } = await params;
-  const user = await currentUser();
-  const scope = user && (await findScope(club, user.id));
-  if (!scope) return children;
-  const items = PAGES.filter((page) => scope.can(page.needs));
-  return (
-    <>
-      <ClubTabs
-        label={SEASON_WORDS.tabs}
-        items={items.map(({ path, label }) => ({ href: `/clubs/${club}/season${path}`, label }))}
-      />
-      {children}
-    </>
-  );
+export default function SeasonLayout(props: FolderProps) {
+  return <PagesWithTabs {...props} folder="season" label={SEASON_WORDS.tabs} tabs={TABS} />;
 }

@@ -1,12 +1,13 @@
 import { StandsTable } from '@/features/ground/components/stands-table';
 import { readClosures, readStandList } from '@/features/ground/reads';
+import { STANDS_PAGE_WORDS } from '@/features/ground/words/pages';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 
-export const metadata = { title: 'Stands' };
+export const metadata = { title: STANDS_PAGE_WORDS.title };
 
 export default clubPage('stands.read', async ({ scope }) => {
   const at = now();
@@ -15,17 +16,19 @@ export default clubPage('stands.read', async ({ scope }) => {
   const canWrite = scope.can('stands.write');
   const addLink = (
     <ButtonLink href={`${base}/stands/new`} look="primary">
-      Add a stand
+      {STANDS_PAGE_WORDS.add}
     </ButtonLink>
   );
   return (
     <>
       <PageTitle
-        title="Stands"
-        lead="Every place to sit, the winds it is good for and whether it is open."
+        title={STANDS_PAGE_WORDS.title}
+        lead={STANDS_PAGE_WORDS.lead}
         actions={
           <>
-            {scope.can('closed_days.write') && <ButtonLink href={`${base}/closures`}>Closed days</ButtonLink>}
+            {scope.can('closed_days.write') && (
+              <ButtonLink href={`${base}/closures`}>{STANDS_PAGE_WORDS.closedDays}</ButtonLink>
+            )}
             {canWrite && lines.length > 0 && addLink}
           </>
         }
@@ -33,7 +36,7 @@ export default clubPage('stands.read', async ({ scope }) => {
       {closures.lines
         .filter((line) => line.standName === null)
         .map((line) => (
-          <Notice key={line.id} level="caution" title="The whole ground is closed" className="mb-4">
+          <Notice key={line.id} level="caution" title={STANDS_PAGE_WORDS.allClosed} className="mb-4">
             {line.days}: {line.reason}.
           </Notice>
         ))}
@@ -41,10 +44,8 @@ export default clubPage('stands.read', async ({ scope }) => {
         club={scope.club.slug}
         lines={lines}
         empty={
-          <EmptyState title="No stands yet" action={canWrite && addLink}>
-            {canWrite
-              ? 'Add the first one: its place and its good winds are enough to begin ranking.'
-              : 'A steward adds the stands; ask for it.'}
+          <EmptyState title={STANDS_PAGE_WORDS.none} action={canWrite && addLink}>
+            {canWrite ? STANDS_PAGE_WORDS.noneText : STANDS_PAGE_WORDS.noneTextAsk}
           </EmptyState>
         }
       />

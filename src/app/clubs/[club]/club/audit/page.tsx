@@ -3,13 +3,14 @@ import { auditFilterSchema, auditSearch } from '@/features/clubs/audit-schema';
 import { AuditFilters } from '@/features/clubs/components/audit-filters';
 import { AuditTable } from '@/features/clubs/components/audit-table';
 import { readAudit } from '@/features/clubs/read-audit';
+import { CLUB_AUDIT_PAGE_WORDS } from '@/features/clubs/words/pages';
 import { clubPage } from '@/server/doors';
 import { buttonClasses } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { Pager } from '@/ui/pager';
 
-export const metadata: Metadata = { title: 'Audit log' };
+export const metadata: Metadata = { title: CLUB_AUDIT_PAGE_WORDS.title };
 
 const NO_FILTER = auditFilterSchema.parse({});
 
@@ -24,23 +25,23 @@ export default clubPage('audit.read', async ({ scope, search }) => {
   return (
     <>
       <PageTitle
-        title="Audit log"
+        title={CLUB_AUDIT_PAGE_WORDS.title}
         over={name}
-        lead="Every change, by whom and when. Nobody can change or delete a row."
+        lead={CLUB_AUDIT_PAGE_WORDS.lead}
         actions={
           <a href={`/api/clubs/${slug}/audit${auditSearch(filter)}`} download className={buttonClasses('plain')}>
-            Take out as CSV
+            {CLUB_AUDIT_PAGE_WORDS.takeOut}
           </a>
         }
       />
       {!parsed.success && (
-        <Notice level="caution" title="This filter cannot be read, so all rows are shown" className="mb-4">
+        <Notice level="caution" title={CLUB_AUDIT_PAGE_WORDS.badFilter} className="mb-4">
           {Object.values(errors).join(' ')}
         </Notice>
       )}
       <AuditFilters filter={filter} errors={errors} people={people} actions={actions} page={page} />
       {lines.length === 0 ? (
-        <EmptyState title="Nothing was found">Widen the days, or clear the filter.</EmptyState>
+        <EmptyState title={CLUB_AUDIT_PAGE_WORDS.none}>{CLUB_AUDIT_PAGE_WORDS.noneText}</EmptyState>
       ) : (
         <>
           <AuditTable lines={lines} />
@@ -48,7 +49,7 @@ export default clubPage('audit.read', async ({ scope, search }) => {
             page={found.page}
             pages={found.pages}
             hrefFor={(next) => `${page}${auditSearch(filter, next)}`}
-            summary={`${total} ${total === 1 ? 'row' : 'rows'}, page ${found.page} of ${found.pages}`}
+            summary={CLUB_AUDIT_PAGE_WORDS.pages(total, found.page, found.pages)}
           />
         </>
       )}

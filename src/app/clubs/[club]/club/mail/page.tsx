@@ -1,13 +1,14 @@
 import type { Metadata } from 'next';
 import { momentText } from '@/features/clubs/audit-words';
 import { DeadMailList } from '@/features/clubs/components/dead-mail-list';
+import { CLUB_MAIL_PAGE_WORDS } from '@/features/clubs/words/pages';
 import { listDeadMail } from '@/features/mail/reads';
 import { clubPage } from '@/server/doors';
 import { EmptyState } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { retryMailAction } from './actions';
 
-export const metadata: Metadata = { title: 'Mail' };
+export const metadata: Metadata = { title: CLUB_MAIL_PAGE_WORDS.title };
 
 export default clubPage('mail.read', async ({ scope }) => {
   const mails = await listDeadMail(scope);
@@ -15,18 +16,14 @@ export default clubPage('mail.read', async ({ scope }) => {
     id: mail.id,
     subject: mail.subject,
     to: `${mail.toName} (${mail.toEmail})`,
-    when: `Given up ${momentText(mail.deadAt ?? mail.createdAt, scope.club)} after ${mail.attempts} ${mail.attempts === 1 ? 'try' : 'tries'}.`,
+    when: CLUB_MAIL_PAGE_WORDS.givenUp(momentText(mail.deadAt ?? mail.createdAt, scope.club), mail.attempts),
     error: mail.lastError ?? '',
   }));
   return (
     <>
-      <PageTitle
-        title="Mail that was given up"
-        over={scope.club.name}
-        lead="Mail of this club that could not be delivered after several tries, or that the receiver's server refused."
-      />
+      <PageTitle title={CLUB_MAIL_PAGE_WORDS.heading} over={scope.club.name} lead={CLUB_MAIL_PAGE_WORDS.lead} />
       {lines.length === 0 ? (
-        <EmptyState title="None">Every mail of the club was delivered or is still being tried.</EmptyState>
+        <EmptyState title={CLUB_MAIL_PAGE_WORDS.none}>{CLUB_MAIL_PAGE_WORDS.noneText}</EmptyState>
       ) : (
         <DeadMailList club={scope.club.slug} lines={lines} action={retryMailAction} />
       )}

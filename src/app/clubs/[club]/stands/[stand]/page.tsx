@@ -5,6 +5,7 @@ import { formClubOf } from '@/features/ground/form-club';
 import { readStand } from '@/features/ground/reads';
 import { namedSits } from '@/features/ground/refuse';
 import { STAND_KIND_WORDS } from '@/features/ground/words';
+import { STAND_PAGE_WORDS } from '@/features/ground/words/pages';
 import { SmallMap } from '@/features/map/components/small-map';
 import { PhotoSection } from '@/features/photos/components/photo-section';
 import { readPhotos } from '@/features/photos/read-photos';
@@ -17,7 +18,7 @@ import { captionPhotoAction, removePhotoAction } from '../../photos/actions';
 import { removeStandAction } from '../actions';
 import { removeApproachAction } from './approaches/actions';
 
-export const metadata = { title: 'Stand' };
+export const metadata = { title: STAND_PAGE_WORDS.title };
 
 export default clubPage('stands.read', async ({ scope, params }) => {
   const { stand, approaches, parkings, closures, allowedNames, sits } = await readStand(
@@ -35,8 +36,8 @@ export default clubPage('stands.read', async ({ scope, params }) => {
         actions={
           canWrite && (
             <>
-              <ButtonLink href={`${base}/stands/${stand.id}/edit`}>Edit</ButtonLink>
-              <ButtonLink href={`${base}/closures?stand=${stand.id}`}>Close</ButtonLink>
+              <ButtonLink href={`${base}/stands/${stand.id}/edit`}>{STAND_PAGE_WORDS.edit}</ButtonLink>
+              <ButtonLink href={`${base}/closures?stand=${stand.id}`}>{STAND_PAGE_WORDS.close}</ButtonLink>
               <RemoveButton
                 club={scope.club.slug}
                 at={{ id: stand.id, version: stand.version }}
@@ -44,17 +45,15 @@ export default clubPage('stands.read', async ({ scope, params }) => {
                 remove={removeStandAction}
                 to={`${base}/stands`}
               >
-                <p>Its approaches and closures go with it. Past sits stay on record.</p>
-                {sits.length > 0 && (
-                  <p className="mt-2">It is booked: {namedSits(sits)}. Cancel or move these sits first.</p>
-                )}
+                <p>{STAND_PAGE_WORDS.removeText}</p>
+                {sits.length > 0 && <p className="mt-2">{STAND_PAGE_WORDS.booked(namedSits(sits))}</p>}
               </RemoveButton>
             </>
           )
         }
       />
       {closures.map((closure) => (
-        <Notice key={closure.id} level="caution" title="Closed" className="mb-4">
+        <Notice key={closure.id} level="caution" title={STAND_PAGE_WORDS.closed} className="mb-4">
           {closure.days}: {closure.reason}.
         </Notice>
       ))}
@@ -67,9 +66,9 @@ export default clubPage('stands.read', async ({ scope, params }) => {
       />
       {scope.can('features.read') && (
         <Section
-          title="Map"
+          title={STAND_PAGE_WORDS.map}
           actions={
-            canWrite && <ButtonLink href={`${base}/ground?select=${stand.id}`}>Draw on the club's map</ButtonLink>
+            canWrite && <ButtonLink href={`${base}/ground?select=${stand.id}`}>{STAND_PAGE_WORDS.draw}</ButtonLink>
           }
         >
           <SmallMap club={scope.club.slug} standId={stand.id} />
@@ -85,7 +84,7 @@ export default clubPage('stands.read', async ({ scope, params }) => {
         remove={removeApproachAction}
       />
       {stand.notes !== '' && (
-        <Section title="Notes">
+        <Section title={STAND_PAGE_WORDS.notes}>
           <p className="max-w-prose whitespace-pre-line">{stand.notes}</p>
         </Section>
       )}

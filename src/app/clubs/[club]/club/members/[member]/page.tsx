@@ -4,6 +4,7 @@ import { RemoveMember } from '@/features/clubs/components/remove-member';
 import { WhatGoes } from '@/features/clubs/components/what-goes';
 import { readMember, readSponsors } from '@/features/clubs/read-members';
 import { planRemoval } from '@/features/clubs/removal';
+import { MEMBER_PAGE_WORDS } from '@/features/clubs/words/pages';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { notFound } from '@/server/errors';
@@ -11,7 +12,7 @@ import { Notice } from '@/ui/notices';
 import { DefinitionList, PageTitle, Section } from '@/ui/page-parts';
 import { changeMemberAction, removeMemberAction } from '../actions';
 
-export const metadata: Metadata = { title: 'Member' };
+export const metadata: Metadata = { title: MEMBER_PAGE_WORDS.title };
 
 export default clubPage('members.write', async ({ scope, params }) => {
   const at = now();
@@ -28,23 +29,23 @@ export default clubPage('members.write', async ({ scope, params }) => {
     guestTo: member.guestTo ?? '',
   };
   const facts = [
-    { term: 'E-mail', detail: <span className="break-all">{member.email}</span> },
-    { term: 'Role', detail: member.roleWord },
-    { term: 'Joined', detail: member.joinedText },
-    ...(member.guestText ? [{ term: 'Guest days', detail: member.guestText }] : []),
-    ...(member.sponsorName ? [{ term: 'Sponsor', detail: member.sponsorName }] : []),
+    { term: MEMBER_PAGE_WORDS.email, detail: <span className="break-all">{member.email}</span> },
+    { term: MEMBER_PAGE_WORDS.role, detail: member.roleWord },
+    { term: MEMBER_PAGE_WORDS.joined, detail: member.joinedText },
+    ...(member.guestText ? [{ term: MEMBER_PAGE_WORDS.guestDays, detail: member.guestText }] : []),
+    ...(member.sponsorName ? [{ term: MEMBER_PAGE_WORDS.sponsor, detail: member.sponsorName }] : []),
   ];
   return (
     <>
-      <PageTitle title={member.isYou ? `${name} (you)` : name} over="Member" />
+      <PageTitle title={member.isYou ? `${name} (you)` : name} over={MEMBER_PAGE_WORDS.title} />
       <DefinitionList items={facts} className="max-w-2xl" />
       {plan.lastAdmin ? (
-        <Notice title="The only admin" className="mt-6">
-          Make another member an admin before you change or remove {name}.
+        <Notice title={MEMBER_PAGE_WORDS.onlyAdmin} className="mt-6">
+          {MEMBER_PAGE_WORDS.onlyAdminText(name)}
         </Notice>
       ) : (
         <>
-          <Section title="Change the role">
+          <Section title={MEMBER_PAGE_WORDS.changeRole}>
             <ChangeMemberForm
               club={scope.club.slug}
               member={standing}
@@ -52,7 +53,7 @@ export default clubPage('members.write', async ({ scope, params }) => {
               action={changeMemberAction}
             />
           </Section>
-          <Section title="Remove from the club" note="What goes with it:">
+          <Section title={MEMBER_PAGE_WORDS.remove} note={MEMBER_PAGE_WORDS.removeNote}>
             <WhatGoes plan={plan} />
             <div className="mt-4">
               <RemoveMember club={scope.club.slug} member={{ id, name }} action={removeMemberAction}>

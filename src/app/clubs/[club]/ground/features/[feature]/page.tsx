@@ -8,6 +8,7 @@ import { formClubOf } from '@/features/ground/form-club';
 import { geometryText } from '@/features/ground/geometry-text';
 import { formatSize } from '@/features/ground/view';
 import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS } from '@/features/ground/words';
+import { FEATURE_PAGE_WORDS } from '@/features/ground/words/pages';
 import { PhotoSection } from '@/features/photos/components/photo-section';
 import { readPhotos } from '@/features/photos/read-photos';
 import { now } from '@/server/clock';
@@ -17,7 +18,7 @@ import { DefinitionList, PageTitle } from '@/ui/page-parts';
 import { captionPhotoAction, removePhotoAction } from '../../../photos/actions';
 import { addFeatureAction, changeFeatureAction, removeFeatureAction } from '../../actions';
 
-export const metadata = { title: 'Feature' };
+export const metadata = { title: FEATURE_PAGE_WORDS.title };
 
 export default clubPage('features.read', async ({ scope, params }) => {
   const feature = await getFeature(scope, params.feature ?? '');
@@ -40,7 +41,7 @@ export default clubPage('features.read', async ({ scope, params }) => {
               remove={removeFeatureAction}
               to={`/clubs/${scope.club.slug}/ground`}
             >
-              <p>The ranking will no longer weigh it.</p>
+              <p>{FEATURE_PAGE_WORDS.removeText}</p>
             </RemoveButton>
           )
         }
@@ -59,15 +60,18 @@ export default clubPage('features.read', async ({ scope, params }) => {
       ) : (
         <DefinitionList
           items={[
-            { term: 'Drawn as', detail: SHAPE_WORDS[shape] },
-            { term: 'Size', detail: formatSize(feature.geometry, scope.club, scope.club.units) || '–' },
-            { term: 'Months', detail: formatMonths(feature.months) },
+            { term: FEATURE_PAGE_WORDS.drawnAs, detail: SHAPE_WORDS[shape] },
+            {
+              term: FEATURE_PAGE_WORDS.size,
+              detail: formatSize(feature.geometry, scope.club, scope.club.units) || '–',
+            },
+            { term: FEATURE_PAGE_WORDS.months, detail: formatMonths(feature.months) },
             ...feature.rotation.map((one) => ({
-              term: `Crop of ${one.year}`,
+              term: FEATURE_PAGE_WORDS.cropOf(one.year),
               detail: `${one.crop}, ${formatMonths(one.months)}`,
             })),
-            { term: 'Latitude, longitude', detail: <span className="whitespace-pre-line">{text}</span> },
-            { term: 'Notes', detail: feature.notes || '–' },
+            { term: FEATURE_PAGE_WORDS.latitudeLongitude, detail: <span className="whitespace-pre-line">{text}</span> },
+            { term: FEATURE_PAGE_WORDS.notes, detail: feature.notes || '–' },
           ]}
         />
       )}

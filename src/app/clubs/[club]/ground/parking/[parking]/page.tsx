@@ -4,12 +4,13 @@ import { formClubOf } from '@/features/ground/form-club';
 import { parkingFormOf } from '@/features/ground/parking-schema';
 import { getParking } from '@/features/ground/parkings-data';
 import { degreesText } from '@/features/ground/place-text';
+import { PARKING_PAGE_WORDS } from '@/features/ground/words/pages';
 import { clubPage } from '@/server/doors';
 import { notFound } from '@/server/errors';
 import { DefinitionList, PageTitle } from '@/ui/page-parts';
 import { addParkingAction, changeParkingAction, removeParkingAction } from '../../actions';
 
-export const metadata = { title: 'Parking place' };
+export const metadata = { title: PARKING_PAGE_WORDS.title };
 
 export default clubPage('features.read', async ({ scope, params }) => {
   const parking = await getParking(scope, params.parking ?? '');
@@ -20,7 +21,7 @@ export default clubPage('features.read', async ({ scope, params }) => {
     <>
       <PageTitle
         title={parking.name}
-        over="Parking place"
+        over={PARKING_PAGE_WORDS.title}
         actions={
           canWrite && (
             <RemoveButton
@@ -30,7 +31,7 @@ export default clubPage('features.read', async ({ scope, params }) => {
               remove={removeParkingAction}
               to={`/clubs/${scope.club.slug}/ground`}
             >
-              <p>It can be removed once no approach begins there.</p>
+              <p>{PARKING_PAGE_WORDS.removeText}</p>
             </RemoveButton>
           )
         }
@@ -48,8 +49,11 @@ export default clubPage('features.read', async ({ scope, params }) => {
       ) : (
         <DefinitionList
           items={[
-            { term: 'Latitude, longitude', detail: `${degreesText(parking.lat)}, ${degreesText(parking.lon)}` },
-            { term: 'Notes', detail: parking.notes || '–' },
+            {
+              term: PARKING_PAGE_WORDS.latitudeLongitude,
+              detail: `${degreesText(parking.lat)}, ${degreesText(parking.lon)}`,
+            },
+            { term: PARKING_PAGE_WORDS.notes, detail: parking.notes || '–' },
           ]}
         />
       )}

@@ -3,6 +3,7 @@ import { getApproach } from '@/features/ground/approaches-data';
 import { ApproachFormView } from '@/features/ground/components/approach-form';
 import { formClubOf } from '@/features/ground/form-club';
 import { readApproachPlaces } from '@/features/ground/reads';
+import { CHANGE_APPROACH_PAGE_WORDS } from '@/features/ground/words/pages';
 import { SmallMap } from '@/features/map/components/small-map';
 import { clubPage } from '@/server/doors';
 import { notFound } from '@/server/errors';
@@ -10,7 +11,7 @@ import { ButtonLink } from '@/ui/button';
 import { PageTitle } from '@/ui/page-parts';
 import { addApproachAction, changeApproachAction } from '../../actions';
 
-export const metadata = { title: 'Edit an approach' };
+export const metadata = { title: CHANGE_APPROACH_PAGE_WORDS.title };
 
 export default clubPage('approaches.write', async ({ scope, params }) => {
   const approach = await getApproach(scope, params.approach ?? '');
@@ -19,10 +20,12 @@ export default clubPage('approaches.write', async ({ scope, params }) => {
   return (
     <>
       <PageTitle
-        title={`Edit ${approach.name}`}
+        title={CHANGE_APPROACH_PAGE_WORDS.heading(approach.name)}
         over={places.stand.name}
         actions={
-          <ButtonLink href={`/clubs/${scope.club.slug}/ground?select=${approach.id}`}>Draw it on the map</ButtonLink>
+          <ButtonLink href={`/clubs/${scope.club.slug}/ground?select=${approach.id}`}>
+            {CHANGE_APPROACH_PAGE_WORDS.draw}
+          </ButtonLink>
         }
       />
       <div className="mb-6 max-w-2xl">

@@ -1,0 +1,131 @@
+export const STAND_FACTS_WORDS = {
+  days: (count: number) => `${count} full day${count === 1 ? '' : 's'}`,
+  defaultDays: (count: number) => `${count} full day${count === 1 ? '' : 's'}, the club's default`,
+  goodWinds: 'Good winds',
+  goodWindsNote: 'Where the wind may come from, from true north.',
+  morning: 'Morning',
+  evening: 'Evening',
+  faces: 'Faces',
+  noOneWay: 'No one way',
+  shot: (weapon: string, range: string) => `${weapon} to ${range}`,
+  kind: 'Kind',
+  latitudeLongitude: 'Latitude, longitude',
+  seatHeight: 'Seat height',
+  seats: 'Seats',
+  shotSide: 'Shot side',
+  longestShot: 'Longest shot',
+  noWeaponAllowed: 'No weapon is allowed',
+  notKnown: 'Not known',
+  toward: (bearing: string) => `Toward ${bearing}`,
+  restAfterSit: 'Rest after a sit',
+  mostSitsSeason: 'Most sits a season',
+  noLimit: 'No limit',
+  whoHunt: 'Who may hunt it',
+  everyoneWhoHunts: 'Everyone who hunts',
+  nobody: 'Nobody',
+  shelter: 'Shelter',
+  coldAirDrains: 'Cold air drains',
+  slope: 'Slope',
+  facts: 'Facts',
+} as const;
+
+export const STAND_APPROACHES_WORDS = {
+  onFoot: (walked: string) => `${walked} on foot`,
+  walkedAndDriven: (walked: string, driven: string) => `${walked} on foot, ${driven} driven`,
+  noneText: 'With an approach the ranking weighs the walk and says when to leave.',
+  noneTextAsk: 'With an approach the ranking weighs the walk and says when to leave. Ask a steward to add one.',
+  add: 'Add an approach',
+  approaches: 'Approaches',
+  none: 'No way in is drawn yet',
+  caption: 'Ways in and out',
+  approach: 'Approach',
+  from: 'From',
+  walked: 'Walked',
+  length: 'Length',
+  notes: 'Notes',
+  change: 'Change',
+  noParking: 'No parking place',
+  editLabel: (name: string) => `Edit ${name}`,
+  edit: 'Edit',
+  removeText: 'Members will no longer be offered this way.',
+} as const;
+
+export const STAND_WIND_WORDS = {
+  read: { morning: 'Morning, as read', evening: 'Evening, as read' },
+  goodWindsLabel: 'Good winds, morning and evening',
+  goodWindsHint: 'Where the wind may come from: NW-N, or 310-20, or both',
+  morning: 'Good in the morning only',
+  addedHint: 'Added to the winds above',
+  evening: 'Good in the evening only',
+  goodWinds: 'Good winds',
+  goodWindsNote:
+    "Compass points hold their whole sector; spans run clockwise and may cross north; 'any' is all the way round.",
+} as const;
+
+export const STAND_AIR_WORDS = {
+  drainHint: 'Downhill from the seat on a still evening, a compass point or degrees',
+  drainHintRead: (bearing: string) =>
+    `Read as ${bearing}. Downhill from the seat on a still evening, a compass point or degrees`,
+  title: 'Air about the seat',
+  shelter: 'Shelter',
+  shelterHint: 'How open the ground is to the wind',
+  drain: 'Cold air drains toward',
+  slope: 'Slope',
+  slopeHint: 'Rise in 100 along the ground',
+} as const;
+
+export const STAND_WORDS = {
+  saved: (name: string) => `${name} is saved`,
+  save: 'Save stand',
+  saving: 'Saving…',
+  back: 'Back without saving',
+} as const;
+
+export const STAND_PLACE_WORDS = {
+  place: 'Place',
+  name: 'Name',
+  kind: 'Kind',
+  lat: 'Latitude',
+  latHint: 'Degrees, such as 38.6051',
+  lon: 'Longitude',
+  lonHint: 'West is minus, such as -83.1952',
+  seatAndShot: 'Seat and shot',
+  seatHeight: 'Seat height above ground',
+  seats: 'Seats',
+  facing: 'Faces',
+  facingHint: 'A compass point (NE) or degrees from true north',
+  shotSide: 'Shot side',
+  longestShot: 'Longest shot',
+  longestShotHint: 'A weapon left blank is not allowed at this stand.',
+} as const;
+
+export const STAND_USE_WORDS = {
+  useAndRest: 'Use and rest',
+  morning: 'Morning',
+  evening: 'Evening',
+  restDays: 'Rest days after a sit',
+  restDaysHint: (restDaysDefault: string) => `Left blank, the club's ${restDaysDefault}`,
+  mostSitsSeason: 'Most sits in a season',
+  mostSitsSeasonHint: 'Left blank, no limit',
+  everyone: 'Everyone who hunts in the club',
+  named: 'Named members only',
+  whoAndNotes: 'Who, and notes',
+  whoMayHunt: 'Who may hunt it',
+  allowedMemberIds: 'Members',
+  notes: 'Notes',
+  notesHint: 'What a person should know before going in: the climb, strap dates, phone signal.',
+} as const;
+
+export const STANDS_WORDS = {
+  noneSet: 'None set',
+  stand: 'Stand',
+  kind: 'Kind',
+  morningWinds: 'Morning winds',
+  eveningWinds: 'Evening winds',
+  morning: 'Morning',
+  evening: 'Evening',
+  restDays: 'Rest days',
+  open: 'Open',
+  caption: "The club's stands",
+  find: 'Find a stand by name, kind, wind or closure',
+} as const;
