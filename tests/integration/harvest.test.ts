@@ -4,14 +4,18 @@ import { beforeEach, describe, expect, it } from 'vitest';
 import type { ClubRules } from '@/core/booking/rules';
 import { reader } from '@/db/client';
 import { auditLog, harvests } from '@/db/schema';
+import { readWalkUp } from '@/features/board/read-walk-up';
 import { exportHarvest } from '@/features/harvest/export-harvest';
 import { emptyHarvestForm, type HarvestForm, makeHarvestSchema } from '@/features/harvest/harvest-schema';
+import { readQuotasOf, readSeasonCautions } from '@/features/harvest/quota-cautions';
 import { readHarvest } from '@/features/harvest/reads';
 import { addHarvest, changeHarvest, removeHarvest } from '@/features/harvest/save-harvest';
 import { readHarvestSheet, readNewHarvest } from '@/features/harvest/sheet-reads';
+import { readSwap } from '@/features/notices/read-swap';
+import { readWeek } from '@/features/sits/read-week';
 import { readSits } from '@/features/sits/reads';
 import { setClock } from '@/server/clock';
-import { refusal, SATURDAY, smallClub } from '../helpers/book';
+import { book, refusal, SATURDAY, smallClub } from '../helpers/book';
 import { onSaturday, sitAndLog } from '../helpers/log-sits';
 import { addMember, makeClub, type TestClub, type TestMember } from '../helpers/make-club';
 
@@ -164,6 +168,33 @@ describe('quotas', () => {
       "The club's limit of 3 deer this season is met (3 taken).",
       'The limit for your guests of 1 deer this season is met (1 taken).',
     ]);
+  });
+
+  it('are told of whoever is booked for, wherever a sit can be booked or changed', async () => {
+    const admin = await addMember(club, 'admin', { name: 'Ida Kern' });
+    await addHarvest(ann.scope, sheet(ann, BUCK), NOON);
+    const of = async (who: TestMember, member?: string) =>
+      (await readQuotasOf(who.scope, { day: SATURDAY, memberId: member })).map(({ text }) => text);
+    expect(await of(admin)).toEqual([]);
+    expect(await of(admin, ann.id)).toEqual(["Ann Roe's limit of 1 antlered deer this season is met (1 taken)."]);
+    expect(await of(admin, guest.id)).toEqual([
+      'The deer of Gil Frost count on their sponsor, whose limit of 1 antlered deer this season is met (1 taken).',
+    ]);
+    expect(await of(admin, bert.id)).toEqual([]);
+    expect((await refusal(of(bert, ann.id))).code).toBe('forbidden');
+    const own = 'Your limit of 1 antlered deer this season is met (1 taken).';
+    expect(await of(ann, ann.id)).toEqual([own]);
+    expect((await readWeek(ann.scope, {}, NOON)).cautions.map(({ text }) => text)).toEqual([own]);
+    expect((await readWeek(bert.scope, {}, NOON)).cautions).toEqual([]);
+    expect((await readWalkUp(ann.scope, NOON)).cautions).toEqual([own]);
+    expect((await readWalkUp(bert.scope, NOON)).cautions).toEqual([]);
+    expect(await readSeasonCautions(ann.scope, [SATURDAY, '2026-11-21', '2027-11-06'])).toEqual([
+      { fromDay: '2026-07-01', toDay: '2027-06-30', texts: [own] },
+      { fromDay: '2027-07-01', toDay: '2028-06-30', texts: [] },
+    ]);
+    const sit = await book(ann, oak, { day: '2026-11-14' }, NOON);
+    expect((await readSwap(ann.scope, sit.id, NOON))?.quotas).toEqual([own]);
+    expect((await readSwap(admin.scope, sit.id, NOON))?.quotas).toEqual(await of(admin, ann.id));
   });
 
   it('begin anew with the season, and forget a sheet taken out', async () => {

@@ -51,5 +51,9 @@ it('says a quota, and that it is met, in words', () => {
   const [state] = quotaStates([ONE_BUCK], [deer('ann', { antlered: true })], 'ann');
   if (!state) throw new Error('no state');
   expect(metText(state, 'own')).toBe('Your limit of 1 antlered deer this season is met (1 taken).');
+  expect(metText(state, { name: 'Ann Roe', guest: false })).toBe(
+    "Ann Roe's limit of 1 antlered deer this season is met (1 taken).",
+  );
+  expect(metText(state, { name: 'Gil', guest: true })).toContain('The deer of Gil count on their sponsor, whose limit');
   expect(metText(state, 'sponsor')).toContain('Your deer count on your sponsor, whose limit of 1 antlered deer');
 });

@@ -57,18 +57,28 @@ export function quotaStates(
     });
 }
 
-/** Whose count is meant when a person is told: their own, or, told to a guest, their sponsor's. */
-export type CountOwner = 'own' | 'sponsor';
+/** Whose count is meant: the reader's own, to a guest their sponsor's, or that of somebody the reader books for. */
+export type CountOwner = 'own' | 'sponsor' | { name: string; guest: boolean };
 
-const OWNER_WORDS: Record<Exclude<QuotaPer, 'club'>, Record<CountOwner, string>> = {
-  member: { own: 'Your limit', sponsor: 'Your deer count on your sponsor, whose limit' },
-  member_guests: { own: 'The limit for your guests', sponsor: "The limit for your sponsor's guests" },
-};
+function ownerText(per: Exclude<QuotaPer, 'club'>, owner: CountOwner): string {
+  const guests = per === 'member_guests';
+  if (owner === 'own') return guests ? 'The limit for your guests' : 'Your limit';
+  if (owner === 'sponsor') {
+    return guests ? "The limit for your sponsor's guests" : 'Your deer count on your sponsor, whose limit';
+  }
+  const { name, guest } = owner;
+  if (guest) {
+    return guests
+      ? `The limit for the guests of ${name}'s sponsor`
+      : `The deer of ${name} count on their sponsor, whose limit`;
+  }
+  return guests ? `The limit for the guests of ${name}` : `${name}'s limit`;
+}
 
 /** What a person is told before booking when a quota is met. */
 export function metText({ quota, taken }: QuotaState, owner: CountOwner): string {
   const { deer, per, most } = quota;
-  const limit = per === 'club' ? "The club's limit" : OWNER_WORDS[per][owner];
+  const limit = per === 'club' ? "The club's limit" : ownerText(per, owner);
   const kind = deer === 'any' ? '' : ` ${DEER_WORDS[deer]}`;
   return `${limit} of ${most}${kind} deer this season is met (${taken} taken).`;
 }

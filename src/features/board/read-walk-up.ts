@@ -5,6 +5,7 @@ import { reader } from '@/db/client';
 import { loadGates } from '@/features/bookings/load-gates';
 import { listStandsForRules } from '@/features/bookings/rules-data';
 import { listApproaches } from '@/features/ground/approaches-data';
+import { readQuotaCautions } from '@/features/harvest/quota-cautions';
 import { listLastVehicles } from '@/features/outings/data';
 import { expectedBackBy } from '@/features/outings/walk-out';
 import { walkUpWindow } from '@/features/outings/walk-up';
@@ -26,12 +27,14 @@ export interface WalkUpOptions {
   /** Stands that no rule closes to the reader now. */
   stands: WalkUpStand[];
   vehicle: string;
+  /** Quotas that are met. */
+  cautions: string[];
 }
 
 /** What a member at the gate may take now. */
 export async function readWalkUp(scope: ClubScope, now: number): Promise<WalkUpOptions> {
   const window = walkUpWindow(scope, now);
-  if (!window) return { windowText: null, stands: [], vehicle: '' };
+  if (!window) return { windowText: null, stands: [], vehicle: '', cautions: [] };
   const memberId = scope.member.id;
   const { gatesByStand } = await loadGates(scope, { ...window, memberId, weapon: null, now });
   const ways = await listApproaches(scope);
@@ -41,6 +44,7 @@ export async function readWalkUp(scope: ClubScope, now: number): Promise<WalkUpO
   return {
     windowText: windowText(scope, window),
     vehicle: vehicles.get(memberId) ?? '',
+    cautions: (await readQuotaCautions(scope, { day })).map(({ text }) => text),
     stands: stands
       .filter(({ id }) => gatesByStand.get(id)?.length === 0)
       .map((stand) => {

@@ -1,5 +1,6 @@
 import { findSit } from '@/features/bookings/data';
 import { type SitView, sitView } from '@/features/bookings/sit-view';
+import { readQuotaCautions } from '@/features/harvest/quota-cautions';
 import { loadForecast } from '@/features/sits/load-forecast';
 import type { ClubScope } from '@/server/scope';
 import { findAlternatives, judgeSit, worthOf } from './judge-sits';
@@ -12,6 +13,8 @@ export interface SwapView {
   /** The sit can still be moved. */
   open: boolean;
   now: string | null;
+  /** Quotas that are met on the count of whoever sits. */
+  quotas: string[];
   choices: { standId: string; name: string; approachId: string | null; approachName: string | null; text: string }[];
 }
 
@@ -21,7 +24,7 @@ export async function readSwap(scope: ClubScope, sitId: string, now: number): Pr
   if (!sit || (sit.memberId !== scope.member.id && !scope.can('sits.book_for_others'))) return null;
   const open = sit.status === 'booked' && sit.startAt > now;
   const view = sitView(scope, sit);
-  if (!open) return { sit: view, open, now: null, choices: [] };
+  if (!open) return { sit: view, open, now: null, quotas: [], choices: [] };
   const kept = await loadForecast(scope, now);
   const worth = worthOf(await judgeSit(scope, sit, kept, now));
   const free = worth ? await findAlternatives(scope, sit, worth.quiet, kept, now) : [];
@@ -29,6 +32,7 @@ export async function readSwap(scope: ClubScope, sitId: string, now: number): Pr
     sit: view,
     open,
     now: worth && worthText(worth),
+    quotas: (await readQuotaCautions(scope, { day: sit.day, memberId: sit.memberId })).map(({ text }) => text),
     choices: free.slice(0, MOST).map((one) => ({
       standId: one.standId,
       name: one.name,

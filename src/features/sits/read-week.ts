@@ -2,6 +2,7 @@ import { arcsFor } from '@/core/arcs';
 import { type SitWindow, type Verdict, WEAPONS } from '@/core/types';
 import { rankWeek } from '@/core/week';
 import { windowsFrom } from '@/core/windows';
+import { readQuotaCautions } from '@/features/harvest/quota-cautions';
 import type { ClubScope } from '@/server/scope';
 import { forecastReaches, forecastView, loadForecast } from './load-forecast';
 import { loadOpenWeek, type OpenStands, readerOf, windowKey } from './load-open';
@@ -89,6 +90,7 @@ export async function readWeek(
       arcs: { morning: arcsFor(arcs, 'morning'), evening: arcsFor(arcs, 'evening') },
     })),
     strips: strips.list,
+    cautions: options.rules === 'leave_out' ? [] : await readQuotaCautions(scope, { day: first.day }),
     columns,
     madeAt: now,
   };

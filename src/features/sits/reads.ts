@@ -118,7 +118,7 @@ export async function readSits(
   const { window, weapon, kept, scoring, mine, verdicts } = await rank(scope, { ...ask, detail: 'list' }, now, options);
   const { input, rows } = scoring;
   const shared = sharedCautions(verdicts);
-  const quotas = options.rules === 'leave_out' ? [] : await readQuotaCautions(scope, window.day);
+  const quotas = options.rules === 'leave_out' ? [] : await readQuotaCautions(scope, { day: window.day });
   const stands = new Map(input.stands.map((stand) => [stand.id, stand]));
   return {
     club: clubView(club),

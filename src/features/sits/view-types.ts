@@ -227,6 +227,8 @@ export interface WeekView {
   stands: { standId: string; name: string; arcs: Record<WindowName, Arc[]> }[];
   /** Winds of sits, in thousandths over 72 bins; many stands share one. */
   strips: number[][];
+  /** Quotas that are met, before anybody books. */
+  cautions: CautionView[];
   columns: WeekColumnView[];
   madeAt: number;
 }

@@ -88,6 +88,15 @@ function WalkUpForm({
         own
         contactName={board.contactName}
       />
+      {options.cautions.length > 0 && (
+        <Notice level="caution" title={WALK_UP_WORDS.care}>
+          <ul className="list-disc pl-5">
+            {options.cautions.map((text) => (
+              <li key={text}>{text}</li>
+            ))}
+          </ul>
+        </Notice>
+      )}
       <SubmitRow label={WALK_UP_WORDS.take} pending={pending} pendingLabel={WALK_UP_WORDS.taking}>
         <Button look="quiet" onClick={onClose}>
           {WALK_UP_WORDS.notNow}

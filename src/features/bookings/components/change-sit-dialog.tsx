@@ -8,6 +8,7 @@ import { RadioCards } from '@/ui/choices';
 import { Dialog, DialogClose } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
+import { Notice } from '@/ui/notices';
 import { queryClient } from '@/ui/query';
 import { DateInput, Select, Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
@@ -20,16 +21,24 @@ import { GuestFields } from './guest-fields';
 
 export type ChangeAction = (club: string, values: ChangeSitValues) => Promise<ActionResult<SavedSit>>;
 
+/** What is said to whoever books on a day of a season. */
+export interface SeasonTexts {
+  fromDay: string;
+  toDay: string;
+  texts: string[];
+}
+
 interface ChangeSitProps {
   club: string;
   change: ChangeAction;
   sit: SitView;
   options: SitOptions;
+  quotas: SeasonTexts[];
 }
 
 const WINDOW_CHOICES = SIT_WINDOWS.map((value) => ({ value, label: SIT_WINDOW_WORDS[value] }));
 
-function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & { onDone: () => void }) {
+function ChangeSitForm({ club, change, sit, options, quotas, onDone }: ChangeSitProps & { onDone: () => void }) {
   const toast = useToast();
   const { form, register, errorOf, errors, pending, formProps } = useActionForm({
     schema: changeSitSchema,
@@ -51,7 +60,8 @@ function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & 
       await queryClient().invalidateQueries();
     },
   });
-  const [standId, guests] = useWatch({ control: form.control, name: ['standId', 'guests'] });
+  const [standId, guests, day] = useWatch({ control: form.control, name: ['standId', 'guests', 'day'] });
+  const cautions = quotas.filter(({ fromDay, toDay }) => fromDay <= day && day <= toDay).flatMap(({ texts }) => texts);
   const stand = options.stands.find((one) => one.id === standId);
   const waysIn = options.waysIn.filter((way) => way.standId === standId);
   const most = Math.min(options.guestsAtOnce, stand ? stand.seats - 1 : options.guestsAtOnce);
@@ -102,6 +112,15 @@ function ChangeSitForm({ club, change, sit, options, onDone }: ChangeSitProps & 
         error={errorOf('note')}
         {...register('note')}
       />
+      {cautions.length > 0 && (
+        <Notice level="caution" title={CHANGE_SIT_WORDS.care}>
+          <ul className="list-disc pl-5">
+            {cautions.map((text) => (
+              <li key={text}>{text}</li>
+            ))}
+          </ul>
+        </Notice>
+      )}
       <SubmitRow label={CHANGE_SIT_WORDS.save} pending={pending}>
         <DialogClose>
           <Button>{CHANGE_SIT_WORDS.keep}</Button>

@@ -6,12 +6,14 @@ import type { SitView } from '../sit-view';
 import { UPCOMING_SITS_WORDS } from '../words/screens';
 import { CancelSitButton } from './cancel-sit-button';
 import type { CancelAction } from './cancel-sit-dialog';
-import { type ChangeAction, ChangeSitDialog } from './change-sit-dialog';
+import { type ChangeAction, ChangeSitDialog, type SeasonTexts } from './change-sit-dialog';
 
 interface UpcomingSitsProps {
   club: string;
   sits: SitView[];
   options: SitOptions;
+  /** Quotas that are met, by season. */
+  quotas: SeasonTexts[];
   change: ChangeAction;
   cancel: CancelAction;
 }
@@ -29,7 +31,7 @@ function factsOf(sit: SitView) {
   ];
 }
 
-export function UpcomingSits({ club, sits, options, change, cancel }: UpcomingSitsProps) {
+export function UpcomingSits({ club, sits, options, quotas, change, cancel }: UpcomingSitsProps) {
   return (
     <ul className="flex flex-col gap-8">
       {sits.map((sit) => (
@@ -38,7 +40,14 @@ export function UpcomingSits({ club, sits, options, change, cancel }: UpcomingSi
           <DefinitionList items={factsOf(sit)} />
           <div className="mt-3 flex flex-wrap gap-2">
             {/* A new key after each change: the form must start from what is saved. */}
-            <ChangeSitDialog key={sit.sequence} club={club} change={change} sit={sit} options={options} />
+            <ChangeSitDialog
+              key={sit.sequence}
+              club={club}
+              change={change}
+              sit={sit}
+              options={options}
+              quotas={quotas}
+            />
             <CancelSitButton club={club} cancel={cancel} sit={sit} />
           </div>
         </li>

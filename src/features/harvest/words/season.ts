@@ -89,3 +89,8 @@ export const HARVEST_FILE_HEADINGS = [
 ];
 
 export const HARVEST_FILE_WORDS = { yes: 'yes', no: 'no' } as const;
+
+export const QUOTA_ERRORS = {
+  day: 'Write a day as YYYY-MM-DD.',
+  others: 'Only who books for others looks at their quotas.',
+} as const;

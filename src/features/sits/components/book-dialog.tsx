@@ -1,16 +1,17 @@
 'use client';
 
 import { useState } from 'react';
-import { useFieldArray } from 'react-hook-form';
+import { useFieldArray, useWatch } from 'react-hook-form';
 import { formatDay } from '@/core/day-time';
 import { type BookSitValues, bookSitSchema, type ChangeSitValues } from '@/features/bookings/sit-schema';
+import { quotasQuery } from '@/features/harvest/queries';
 import { Button } from '@/ui/button';
 import { RadioCards } from '@/ui/choices';
 import { Dialog } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
 import { Notice } from '@/ui/notices';
-import { queryClient } from '@/ui/query';
+import { queryClient, useRead } from '@/ui/query';
 import { Select, Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { BookActions, Hunter } from '../book-actions';
@@ -64,7 +65,13 @@ export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogP
     },
   });
   const guests = useFieldArray({ control: form.control, name: 'guests' });
-  const cautions = [...view.cautions, ...row.cautions];
+  const forId = useWatch({ control: form.control, name: 'memberId' });
+  const quotas = useRead({ ...quotasQuery(club.slug, { day: window.day, member: forId ?? '' }), enabled: !!forId });
+  // The list was read for the reader: of another their own quotas count.
+  const head = forId
+    ? [...(quotas.data ?? []), ...view.cautions.filter(({ code }) => code !== 'quota_met')]
+    : view.cautions;
+  const cautions = [...head, ...row.cautions];
   const emptyIsNull = { setValueAs: (value: unknown) => value || null };
   return (
     <Dialog

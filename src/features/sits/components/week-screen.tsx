@@ -63,6 +63,9 @@ export function WeekScreen({ ask, initial }: { ask: WeekAskText; initial: WeekVi
             {query.error.message}
           </Notice>
         )}
+        {view.cautions.map((caution) => (
+          <Notice key={caution.text} level="caution" title={caution.text} />
+        ))}
       </div>
       {view.stands.length === 0 ? (
         <div className="mt-6">

@@ -1,8 +1,10 @@
 import type { Metadata } from 'next';
+import { dayOf } from '@/core/day-time';
 import { PastSits } from '@/features/bookings/components/past-sits';
 import { UpcomingSits } from '@/features/bookings/components/upcoming-sits';
 import { readMySits, readSitOptions } from '@/features/bookings/reads';
 import { MY_SITS_PAGE_WORDS } from '@/features/bookings/words/screens';
+import { readSeasonCautions } from '@/features/harvest/quota-cautions';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
@@ -13,8 +15,9 @@ import { cancelSitAction, changeSitAction } from '../sit/actions';
 export const metadata: Metadata = { title: MY_SITS_PAGE_WORDS.title };
 
 export default clubPage('sits.book', async ({ scope }) => {
-  const { slug, name } = scope.club;
-  const { upcoming, past } = await readMySits(scope, now());
+  const { slug, name, zone } = scope.club;
+  const at = now();
+  const { upcoming, past } = await readMySits(scope, at);
   const book = <ButtonLink href={`/clubs/${slug}/sit`}>{MY_SITS_PAGE_WORDS.find}</ButtonLink>;
   const calendar = scope.can('feeds.own') && (
     <ButtonLink look="quiet" href={`/clubs/${slug}/calendar`}>
@@ -41,6 +44,7 @@ export default clubPage('sits.book', async ({ scope }) => {
             club={slug}
             sits={upcoming}
             options={await readSitOptions(scope)}
+            quotas={await readSeasonCautions(scope, [dayOf(at, zone), ...upcoming.map(({ day }) => day)])}
             change={changeSitAction}
             cancel={cancelSitAction}
           />

@@ -4,7 +4,7 @@ import { SWAP_PAGE_WORDS } from '@/features/notices/words/swap';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
-import { EmptyState } from '@/ui/notices';
+import { EmptyState, Notice } from '@/ui/notices';
 import { DefinitionList, PageTitle, Section } from '@/ui/page-parts';
 import { swapSitAction } from './actions';
 
@@ -29,6 +29,9 @@ export default clubPage('sits.book', async ({ scope, params }) => {
     <>
       <PageTitle over={name} title={words.titleOf(sit.standName)} lead={words.lead(sit.whenText, sit.timeText)} />
       {view.now && <DefinitionList items={[{ term: words.now, detail: view.now }]} />}
+      {view.quotas.map((text) => (
+        <Notice key={text} level="caution" title={text} className="mt-4" />
+      ))}
       <Section title={words.free} note={words.freeNote}>
         {!view.open ? (
           <EmptyState title={words.over} action={mySits}>
