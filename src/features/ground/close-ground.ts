@@ -7,6 +7,9 @@ import { type ClosureValues, insertClosure } from './closures-data';
 import { noteChange } from './note-change';
 import { type BookedSit, listBookedSits } from './people-data';
 import { getStand } from './stands-data';
+import { GROUND_AUDIT } from './words/audit';
+import { WHOLE_GROUND } from './words/closures';
+import { GROUND_ERRORS } from './words/errors';
 
 export interface Closed {
   id: string;
@@ -16,7 +19,7 @@ export interface Closed {
 
 /** What is closed by name: a stand's, or that of the whole ground. */
 export async function nameOfGround(scope: ClubScope, tx: Tx, standId: string | null): Promise<string> {
-  if (standId === null) return 'the whole ground';
+  if (standId === null) return WHOLE_GROUND;
   const stand = await getStand(scope, standId, tx);
   if (!stand) throw notFound();
   return stand.name;
@@ -32,8 +35,9 @@ export async function closeGroundIn(
 ): Promise<Closed> {
   const id = newId('closure');
   await insertClosure(scope, tx, { ...values, id, createdAt: now });
-  const until = values.toDay === null ? 'until opened again' : `to ${formatDay(values.toDay, true)}`;
-  const summary = `Closed ${name} from ${formatDay(values.fromDay, true)} ${until}: ${values.reason}`;
+  const from = formatDay(values.fromDay, true);
+  const to = values.toDay === null ? null : formatDay(values.toDay, true);
+  const summary = GROUND_AUDIT.closed(name, from, to, values.reason);
   await noteChange(scope, tx, { subject: 'closure', verb: 'added', id, summary, detail: { ...values } }, now);
   return { id, touched: await listBookedSits(scope, { ...values, now }, tx) };
 }
@@ -41,16 +45,16 @@ export async function closeGroundIn(
 /** A closure that a person may not make, or that tells of no day to come. */
 export function refuseClosing(scope: ClubScope, values: ClosureValues, now: number): void {
   if (values.standId !== null && !scope.can('stands.write')) {
-    throw new AppError('forbidden', 'Only a steward or an admin closes a stand; you may close the whole ground.');
+    throw new AppError('forbidden', GROUND_ERRORS.onlyStewardCloses);
   }
   const today = dayOf(now, scope.club.zone);
   if (values.toDay !== null && values.toDay < today) {
-    const message = 'These days are past: choose a last day from today on.';
+    const message = GROUND_ERRORS.daysPast;
     throw new AppError('invalid', message, { fields: { toDay: message } });
   }
   // A closure tells of days to come; one that began long ago would only rewrite the record.
   if (values.fromDay < addDays(today, -366)) {
-    const message = 'Choose a first day within the last year.';
+    const message = GROUND_ERRORS.firstDayOld;
     throw new AppError('invalid', message, { fields: { fromDay: message } });
   }
 }

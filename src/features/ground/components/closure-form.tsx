@@ -2,6 +2,7 @@
 
 import { useState } from 'react';
 import { formatDay } from '@/core/day-time';
+import { SIT_WINDOW_WORDS } from '@/core/words/windows';
 import { ConfirmDialog } from '@/ui/confirm-dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
@@ -11,9 +12,8 @@ import { useToast } from '@/ui/toast';
 import { type ClosureForm, closureSchema } from '../closure-schema';
 import type { BookedSit } from '../people-data';
 import { touchedSitsQuery } from '../queries';
+import { CLOSURE_WORDS } from '../words/closures';
 import type { ClubCall } from './form-types';
-
-const WINDOW_WORDS = { morning: 'morning', evening: 'evening', all_day: 'all day' } as const;
 
 interface Question {
   touched: BookedSit[];
@@ -50,9 +50,9 @@ export function ClosureFormView({ club, today, stands, standId, close }: Closure
     schema: closureSchema,
     defaultValues: { standId, fromDay: today, toDay: '', reason: '' },
     submit: async (typed) =>
-      (await agreed(typed)) ? close(club, typed) : { ok: false, error: { message: 'Nothing was closed.' } },
+      (await agreed(typed)) ? close(club, typed) : { ok: false, error: { message: CLOSURE_WORDS.nothing } },
     onDone: () => {
-      toast({ title: 'Closed' });
+      toast({ title: CLOSURE_WORDS.closed });
       fields.form.reset({ standId: '', fromDay: today, toDay: '', reason: '' });
       fields.form.setFocus('fromDay');
     },
@@ -64,9 +64,9 @@ export function ClosureFormView({ club, today, stands, standId, close }: Closure
       <FormErrorSummary errors={fields.errors} />
       {stands.length > 0 && (
         <Select
-          label="What is closed"
+          label={CLOSURE_WORDS.standId}
           options={[
-            { value: '', label: 'The whole ground' },
+            { value: '', label: CLOSURE_WORDS.theWholeGround },
             ...stands.map(({ id, name }) => ({ value: id, label: name })),
           ]}
           error={errorOf('standId')}
@@ -74,32 +74,34 @@ export function ClosureFormView({ club, today, stands, standId, close }: Closure
         />
       )}
       <div className="grid gap-4 sm:grid-cols-2">
-        <DateInput label="First closed day" error={errorOf('fromDay')} {...register('fromDay')} />
+        <DateInput label={CLOSURE_WORDS.fromDay} error={errorOf('fromDay')} {...register('fromDay')} />
         <DateInput
-          label="Last closed day"
-          hint={stands.length > 0 ? 'A stand may be left without one: closed until opened again' : undefined}
+          label={CLOSURE_WORDS.toDay}
+          hint={stands.length > 0 ? CLOSURE_WORDS.toDayHint : undefined}
           error={errorOf('toDay')}
           {...register('toDay')}
         />
       </div>
-      <TextInput label="Reason" hint="Members read it" error={errorOf('reason')} {...register('reason')} />
-      <SubmitRow label="Close" pending={fields.pending} pendingLabel="Closing…" />
+      <TextInput
+        label={CLOSURE_WORDS.reason}
+        hint={CLOSURE_WORDS.reasonHint}
+        error={errorOf('reason')}
+        {...register('reason')}
+      />
+      <SubmitRow label={CLOSURE_WORDS.close} pending={fields.pending} pendingLabel={CLOSURE_WORDS.closing} />
       <ConfirmDialog
         open={question !== null}
         onOpenChange={(open) => !open && settle(false)}
-        title="Sits are booked on these days"
-        confirmLabel="Close all the same"
-        keepLabel="Do not close"
+        title={CLOSURE_WORDS.bookedTitle}
+        confirmLabel={CLOSURE_WORDS.closeAllSame}
+        keepLabel={CLOSURE_WORDS.keep}
         onConfirm={() => settle(true)}
       >
-        <p>
-          They stay booked until the member or an admin cancels them. No new sit can be booked. These members are told
-          by mail, and so are the officers:
-        </p>
+        <p>{CLOSURE_WORDS.bookedText}</p>
         <ul className="mt-2 list-disc pl-5">
           {question?.touched.map((sit) => (
             <li key={sit.id}>
-              {formatDay(sit.day)} {WINDOW_WORDS[sit.windows]}: {sit.memberName}, {sit.standName}
+              {formatDay(sit.day)} {SIT_WINDOW_WORDS[sit.windows]}: {sit.memberName}, {sit.standName}
             </li>
           ))}
         </ul>

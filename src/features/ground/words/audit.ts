@@ -12,4 +12,7 @@ export const GROUND_AUDIT = {
   featureRemoved: (feature: string) => `Removed feature ${feature}.`,
   parkingRemoved: (parking: string) => `Removed parking place ${parking}.`,
   standRemoved: (stand: string) => `Removed stand ${stand} with its approaches and closures.`,
+  /** `to` null: until opened again. */
+  closed: (what: string, from: string, to: string | null, reason: string) =>
+    `Closed ${what} from ${from} ${to === null ? 'until opened again' : `to ${to}`}: ${reason}`,
 } as const;

@@ -20,3 +20,22 @@ export const CLOSURE_LIST_WORDS = {
   now: 'Now',
   nobody: 'Nobody',
 } as const;
+
+export const CLOSURE_WORDS = {
+  nothing: 'Nothing was closed.',
+  closed: 'Closed',
+  standId: 'What is closed',
+  theWholeGround: 'The whole ground',
+  fromDay: 'First closed day',
+  toDay: 'Last closed day',
+  toDayHint: 'A stand may be left without one: closed until opened again',
+  reason: 'Reason',
+  reasonHint: 'Members read it',
+  close: 'Close',
+  closing: 'Closing…',
+  bookedTitle: 'Sits are booked on these days',
+  closeAllSame: 'Close all the same',
+  keep: 'Do not close',
+  bookedText:
+    'They stay booked until the member or an admin cancels them. No new sit can be booked. These members are told by mail, and so are the officers:',
+} as const;

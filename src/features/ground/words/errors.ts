@@ -28,4 +28,7 @@ export const GROUND_ERRORS = {
   parkingUsed: (parking: string, approaches: string) =>
     `Approaches begin at ${parking}: ${approaches}. Give them another place first.`,
   standBooked: (stand: string, sits: string) => `${stand} is booked: ${sits}. Cancel or move these sits first.`,
+  onlyStewardCloses: 'Only a steward or an admin closes a stand; you may close the whole ground.',
+  daysPast: 'These days are past: choose a last day from today on.',
+  firstDayOld: 'Choose a first day within the last year.',
 } as const;

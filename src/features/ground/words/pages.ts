@@ -66,7 +66,7 @@ export const FEATURE_PAGE_WORDS = {
   drawnAs: 'Drawn as',
   size: 'Size',
   months: 'Months',
-  cropOf: (year: string) => `Crop of ${year}`,
+  cropOf: (year: number) => `Crop of ${year}`,
   latitudeLongitude: 'Latitude, longitude',
   notes: 'Notes',
 } as const;

@@ -104,7 +104,7 @@ export const STAND_USE_WORDS = {
   morning: 'Morning',
   evening: 'Evening',
   restDays: 'Rest days after a sit',
-  restDaysHint: (restDaysDefault: string) => `Left blank, the club's ${restDaysDefault}`,
+  restDaysHint: (days: number) => `Left blank, the club's ${days}`,
   mostSitsSeason: 'Most sits in a season',
   mostSitsSeasonHint: 'Left blank, no limit',
   everyone: 'Everyone who hunts in the club',
