@@ -1,6 +1,7 @@
 import { and, eq } from 'drizzle-orm';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { reader, write } from '@/db/client';
+import type { DrawSlot } from '@/db/schema';
 import { drawResults, drawRuns, memberships, sits } from '@/db/schema';
 import { enterDrawSchema } from '@/features/draws/draw-schema';
 import { enterDraw } from '@/features/draws/enter-draw';
@@ -41,7 +42,7 @@ beforeEach(async () => {
   ridge = await addStand(club, { name: 'Ridge', seats: 2, ...near(0.02) });
 });
 
-async function open(slots = WEEKEND): Promise<string> {
+async function open(slots: DrawSlot[] = WEEKEND): Promise<string> {
   const closes = { closesDay: '2026-11-07', closesClock: '17:00', note: '' };
   const points = { pointsPerMiss: 1, resetOnGiven: true, workHoursPerPoint: 0 };
   return (await openDraw(admin.scope, { slots, standIds: [creek, ridge], ...closes, ...points }, TEST_NOW)).id;
