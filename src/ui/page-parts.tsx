@@ -51,7 +51,7 @@ export function Section(props: SectionProps) {
         className,
       )}
     >
-      <div className="mb-3 flex flex-wrap items-start justify-between gap-x-4 gap-y-2">
+      <div className="mb-3 flex break-after-avoid flex-wrap items-start justify-between gap-x-4 gap-y-2">
         <div>
           <Heading id={headingId} className={joinClasses('font-serif', level === 2 ? 'text-xl' : 'text-lg')}>
             {title}

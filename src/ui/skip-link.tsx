@@ -3,7 +3,7 @@ export function SkipLink() {
   return (
     <a
       href="#main"
-      className="fixed top-2 left-2 z-50 -translate-y-20 border-2 border-moss bg-panel px-4 py-2.5 font-semibold focus:translate-y-0"
+      className="fixed top-2 left-2 z-50 -translate-y-20 border-2 border-moss bg-panel px-4 py-2.5 font-semibold focus:translate-y-0 print:hidden"
     >
       Skip to the page
     </a>

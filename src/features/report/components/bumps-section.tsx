@@ -10,6 +10,11 @@ import { CsvLink } from './csv-link';
 import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
+/** A share and its interval in percent, as the axis counts. */
+function percentOf({ share }: BumpCount) {
+  return share.known ? { value: share.value * 100, low: share.low * 100, high: share.high * 100 } : null;
+}
+
 export function BumpsSection({ club, report }: PartProps) {
   const { bumps } = report;
   if (bumps.all.sits === 0) {
@@ -32,7 +37,7 @@ export function BumpsSection({ club, report }: PartProps) {
         rows={bumps.rows.map(({ standId, name, count }) => ({
           key: standId,
           label: name,
-          range: count.share.known ? count.share : null,
+          range: percentOf(count),
           text: figureText(count.share, 'percent'),
           note: words.sits(count.sits),
         }))}
@@ -70,12 +75,8 @@ function CountCells({ count }: { count: BumpCount }) {
       <Td align="right">{count.sits}</Td>
       <Td align="right">{count.bumped}</Td>
       <Td align="right">{count.sits - count.bumped}</Td>
-      <Td align="right" className="whitespace-nowrap">
-        {figureText(count.share, 'percent')}
-      </Td>
-      <Td align="right" className="whitespace-nowrap">
-        {intervalText(count.share, 'percent')}
-      </Td>
+      <Td align="right">{figureText(count.share, 'percent')}</Td>
+      <Td align="right">{intervalText(count.share, 'percent')}</Td>
     </>
   );
 }
@@ -131,7 +132,7 @@ function StandsTable({ bumps }: { bumps: BumpsPart }) {
           <Tr key={standId}>
             <FigureHead>{name}</FigureHead>
             <CountCells count={count} />
-            <Td className="text-sm">
+            <Td className="min-w-60 whitespace-normal! text-sm">
               {winds.map(({ wind, count: own }) => words.windLine(wind, own.bumped, own.sits)).join(', ')}
             </Td>
           </Tr>

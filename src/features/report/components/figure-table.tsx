@@ -9,7 +9,7 @@ export function FigureTable({ caption, children }: { caption: string; children: 
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a box that scrolls must be reached by keyboard
     <section aria-label={caption} tabIndex={0} className="overflow-x-auto print:overflow-visible">
-      <Table caption={caption} stack={false}>
+      <Table caption={caption} stack={false} className="[&_td]:whitespace-nowrap">
         {children}
       </Table>
     </section>

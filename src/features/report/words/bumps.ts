@@ -2,7 +2,7 @@ export const BUMPS_WORDS = {
   note: 'Of sits with a log: whether a deer was bumped on the way in, from the seat or on the way out. A sit without is a clean one. Deer bumped unseen are in no log. The wind is that of the forecast as the window began, at the stand.',
   empty: 'No log is written yet. Bumps are counted from the logs.',
   chart: 'Share of logged sits with a bump, by stand.',
-  unit: 'sits with a bump',
+  unit: 'percent of sits with a bump',
   sits: (sits: number) => (sits === 1 ? '1 sit' : `${sits} sits`),
   byStand: 'By stand, the largest share first',
   byWind: 'By wind, the whole club',

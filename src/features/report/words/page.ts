@@ -34,7 +34,7 @@ export const HEADLINE_WORDS = {
   sits: 'Sits',
   sitsOf: (sits: number, used: number, stands: number, members: number) =>
     `${count(sits, 'sit', 'sits')} on ${used} of ${count(stands, 'stand', 'stands')}, by ${count(members, 'member', 'members')} with their guests`,
-  unproven: 'Nobody knows',
+  unproven: 'Not known',
   unprovenOf: (sits: number) =>
     sits === 1
       ? '1 booked sit has neither a sign-in nor a log'
