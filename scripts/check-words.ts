@@ -8,6 +8,8 @@ import { findWords } from './find-words';
  */
 const WORDS_MAY_STAND = [
   /\.test\.tsx?$/,
+  // Made ground for tests.
+  /\/example-[\w-]+\.ts$/,
   /(^|\/)words\.ts$/,
   /\/words\/[\w-]+\.ts$/,
   // Numbers, units and dates are formatted in one place each; the source of a constant stands beside it.

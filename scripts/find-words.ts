@@ -25,7 +25,7 @@ const FOR_MACHINES =
   /^(className|\w*ClassName|style|d|transform|points|viewBox|preserveAspectRatio|log|href|data-.*|autoComplete|accept|sizes|type|prodId|[A-Z]\w*-[\w-]*)$/;
 /** Calls whose texts are for us: the log, faults of the program, class names, rules of the browser. */
 const CALLS_FOR_US =
-  /^(log\.\w+|console\.\w+|(\w*\.)?sql|joinClasses|Error|RangeError|TypeError|URL|RegExp|Intl\.\w+|matchMedia|.*\.querySelector\w*|.*\.getElementsBy\w+|.*\.closest|z\.literal)$/;
+  /^(log\.\w+|console\.\w+|(\w*\.)?sql|joinClasses|Error|RangeError|TypeError|URL|RegExp|Intl\.\w+|matchMedia|press|.*\.(on|off)|.*\.querySelector\w*|.*\.getElementsBy\w+|.*\.closest|z\.literal)$/;
 const BARE_CLASS =
   /^(absolute|block|border|capitalize|container|contents|fixed|flex|grid|group|hidden|inline|invisible|italic|outline|peer|relative|rounded|static|sticky|table|truncate|underline|uppercase|lowercase|transition|shadow)$/;
 
@@ -52,14 +52,14 @@ const NO_TEXT = new Set(['our choice', 'club log', 'Windrest', 'yd', 'ft', 'in',
 
 /** Two words, or one with a capital; neither markup, a run of style rules nor a media type. */
 function looksRead(text: string): boolean {
-  if (/^\s*<|^[a-z-]+:\S+;|^\w+\/[\w+.-]+(; charset=\S+)?$/.test(text)) return false;
+  if (/^\s*<|^[a-z-]+:\S+;|^\w+\/[\w+.-]+(; charset=\S+)?$|^\(.*: .*\)$/.test(text)) return false;
   if (/^[A-Z][a-z]+(…|[.!?])?$/.test(text.trim())) return true;
   return /[\p{L}\d,;:)]\s+[\p{L}(]/u.test(text) && /\p{L}{2}/u.test(text) && !isClasses(text);
 }
 
 /** Whether a template has words beside its values: ' min late' is one, 'rotate(' is none. */
 function templateReads(node: SyntaxNode): boolean {
-  const parts = (node.quasis as { value: { cooked: string } }[]).map((q) => q.value.cooked);
+  const parts = (node.quasis as { value: { cooked: string } }[]).map((q) => q.value.cooked.replace(/\d+px/g, ''));
   if (parts[0]?.startsWith('<') || isClasses(parts.join('x-')) || parts.every((part) => /^[/?#&=\w:.@%-]*$/.test(part)))
     return false;
   const word = /(^|\s|[(,;])\p{L}{2,}[,.;:!?']?(\s|$)|\p{L}{2,}[,.;:!?]?\s|\s\p{L}{2,}|^\p{L}{2,}$/u;

@@ -3,13 +3,14 @@ import { MAP_LAYERS } from '@/core/map-layers';
 import { FEATURE_KINDS, STAND_KINDS } from '@/core/types';
 import { LINE_MAX } from '@/features/ground/read-form';
 import { THING_KINDS } from './thing';
+import { MAP_ERRORS } from './words/errors';
 
 /** Changes that one saving takes. */
 export const MOST_CHANGES = 500;
 
 const id = z.string().min(1).max(40);
 const version = z.number().int().min(0).max(1e9);
-const name = z.string().max(LINE_MAX, `Keep it to ${LINE_MAX} characters.`);
+const name = z.string().max(LINE_MAX, MAP_ERRORS.long(LINE_MAX));
 const deg = z.number().min(0).max(360);
 const position = z.array(z.number()).min(2).max(4);
 const line = z.array(position).min(2).max(1000);
@@ -58,10 +59,7 @@ export type DrawingChange = z.output<typeof drawingChange>;
 export type SetChange = Extract<DrawingChange, { op: 'set' }>;
 
 export const drawingInput = z.object({
-  changes: z
-    .array(drawingChange)
-    .min(1, 'There is nothing to save.')
-    .max(MOST_CHANGES, `Save at most ${MOST_CHANGES} changes at once.`),
+  changes: z.array(drawingChange).min(1, MAP_ERRORS.nothing).max(MOST_CHANGES, MAP_ERRORS.mostChanges(MOST_CHANGES)),
 });
 
 /** A thing that somebody else saved or removed after it was opened here. */

@@ -7,6 +7,7 @@ import { DIRECTION_WORDS, formatMonths } from '@/features/ground/words';
 import { sizeOf, sizeText } from './drawing/measure';
 import type { MapClub, MapThing } from './thing';
 import { whatOf } from './words';
+import { FACT_WORDS } from './words/facts';
 
 export interface Fact {
   term: string;
@@ -20,40 +21,40 @@ function standName(things: readonly MapThing[], id: string | null): string {
 /** Everything the map shows of a thing, in words. */
 export function factsOf(thing: MapThing, things: readonly MapThing[], club: MapClub): Fact[] {
   const size = sizeText(club, thing.geometry, club.units);
-  const facts: Fact[] = [{ term: 'Kind', detail: whatOf(thing) }];
+  const facts: Fact[] = [{ term: FACT_WORDS.kind, detail: whatOf(thing) }];
   if (thing.geometry.type === 'Point') {
     const [lon = 0, lat = 0] = thing.geometry.coordinates;
-    facts.push({ term: 'Latitude, longitude', detail: `${degreesText(lat)}, ${degreesText(lon)}` });
-  } else facts.push({ term: 'Size', detail: size });
+    facts.push({ term: FACT_WORDS.latitudeLongitude, detail: `${degreesText(lat)}, ${degreesText(lon)}` });
+  } else facts.push({ term: FACT_WORDS.size, detail: size });
   switch (thing.kind) {
     case 'stand':
       facts.push(
-        { term: 'Good winds, morning', detail: formatArcs(arcsFor(thing.arcs, 'morning')) },
-        { term: 'Good winds, evening', detail: formatArcs(arcsFor(thing.arcs, 'evening')) },
+        { term: FACT_WORDS.goodWindsMorning, detail: formatArcs(arcsFor(thing.arcs, 'morning')) },
+        { term: FACT_WORDS.goodWindsEvening, detail: formatArcs(arcsFor(thing.arcs, 'evening')) },
       );
-      if (thing.closed) facts.push({ term: 'Open', detail: thing.closed });
+      if (thing.closed) facts.push({ term: FACT_WORDS.open, detail: thing.closed });
       break;
     case 'approach':
       facts.push(
-        { term: 'Leads to', detail: standName(things, thing.standId) || 'No stand' },
-        { term: 'From', detail: standName(things, thing.parkingId) || 'No parking place' },
-        { term: 'Walked', detail: DIRECTION_WORDS[thing.direction] },
+        { term: FACT_WORDS.leadsTo, detail: standName(things, thing.standId) || FACT_WORDS.noStand },
+        { term: FACT_WORDS.from, detail: standName(things, thing.parkingId) || FACT_WORDS.noParkingPlace },
+        { term: FACT_WORDS.walked, detail: DIRECTION_WORDS[thing.direction] },
       );
       break;
     case 'feature':
-      facts.push({ term: 'Months', detail: formatMonths(thing.months) });
-      if (thing.crop) facts.push({ term: 'Crop this year', detail: thing.crop });
+      facts.push({ term: FACT_WORDS.months, detail: formatMonths(thing.months) });
+      if (thing.crop) facts.push({ term: FACT_WORDS.cropThisYear, detail: thing.crop });
       break;
     case 'item':
-      if (thing.props.cutYear) facts.push({ term: 'Timber cut', detail: String(thing.props.cutYear) });
+      if (thing.props.cutYear) facts.push({ term: FACT_WORDS.timberCut, detail: String(thing.props.cutYear) });
       if (thing.props.facingDeg !== undefined) {
-        facts.push({ term: 'Looks', detail: formatBearing(thing.props.facingDeg) });
+        facts.push({ term: FACT_WORDS.looks, detail: formatBearing(thing.props.facingDeg) });
       }
       if (thing.props.sector) {
         const { fromDeg, toDeg, reachM } = thing.props.sector;
         facts.push({
-          term: 'No shooting',
-          detail: `${formatBearing(fromDeg)} to ${formatBearing(toDeg)}, ${formatDistance(reachM, club.units)}`,
+          term: FACT_WORDS.noShooting,
+          detail: FACT_WORDS.noShoot(formatBearing(fromDeg), formatBearing(toDeg), formatDistance(reachM, club.units)),
         });
       }
       break;
@@ -67,13 +68,13 @@ export function briefOf(thing: MapThing, things: readonly MapThing[], club: MapC
   const parts: (string | undefined)[] = [];
   switch (thing.kind) {
     case 'stand':
-      parts.push(whatOf(thing), thing.arcs.length > 0 ? formatWinds(thing.arcs) : 'no winds set', thing.closed);
+      parts.push(whatOf(thing), thing.arcs.length > 0 ? formatWinds(thing.arcs) : FACT_WORDS.noWinds, thing.closed);
       break;
     case 'parking':
       break;
     case 'approach': {
       const from = standName(things, thing.parkingId);
-      parts.push(`to ${standName(things, thing.standId) || 'no stand'}`, from && `from ${from}`, size);
+      parts.push(FACT_WORDS.to(standName(things, thing.standId)), from && FACT_WORDS.fromPlace(from), size);
       break;
     }
     case 'feature':
@@ -85,7 +86,7 @@ export function briefOf(thing: MapThing, things: readonly MapThing[], club: MapC
       );
       break;
     case 'item':
-      parts.push(thing.name ? whatOf(thing) : '', thing.props.cutYear ? `cut ${thing.props.cutYear}` : '', size);
+      parts.push(thing.name ? whatOf(thing) : '', thing.props.cutYear ? FACT_WORDS.cut(thing.props.cutYear) : '', size);
       break;
   }
   return parts.filter(Boolean).join(', ');

@@ -4,6 +4,7 @@ import type { ClubScope } from '@/server/scope';
 import type { DrawingChange, DrawingConflict } from './drawing-schema';
 import type { DrawnRows } from './drawn-rows';
 import { LAYER_WORDS } from './words';
+import { MAP_ERRORS } from './words/errors';
 
 function nameOfRow(row: DrawnRows[keyof DrawnRows][number]): string {
   return row.name || ('layer' in row ? LAYER_WORDS[row.layer] : '');
@@ -30,7 +31,7 @@ export async function findConflicts(
     if (version === 0) continue;
     const row = rows[TABLES[kind]].find((one) => one.id === id);
     if (row?.version === version || (!row && change.op === 'remove')) continue;
-    const who = (await lastChangedBy(scope, id, tx)) ?? 'Somebody';
+    const who = (await lastChangedBy(scope, id, tx)) ?? MAP_ERRORS.somebody;
     const name = row ? nameOfRow(row) : change.op === 'set' ? change.name : '';
     conflicts.push({ id, kind, name, who, gone: !row });
   }

@@ -5,6 +5,7 @@ import { removeStandIn } from '@/features/ground/remove-stand';
 import type { DrawingChange } from './drawing-schema';
 import type { Saving } from './set-drawn';
 import { LAYER_WORDS } from './words';
+import { MAP_AUDIT } from './words/audit';
 
 /** Takes a thing off the map. What is gone already stays gone. */
 export async function removeDrawn(saving: Saving, change: Extract<DrawingChange, { op: 'remove' }>): Promise<void> {
@@ -22,7 +23,7 @@ export async function removeDrawn(saving: Saving, change: Extract<DrawingChange,
       const row = await updateApproach(scope, tx, at, { removedAt: now });
       if (!row) return;
       const stand = rows.stands.find((one) => one.id === row.standId)?.name;
-      const summary = `Removed approach ${row.name}${stand ? ` to ${stand}` : ''}.`;
+      const summary = MAP_AUDIT.approachRemoved(row.name, stand);
       return noteChange(scope, tx, { subject: 'approach', verb: 'removed', id, summary }, now);
     }
     case 'feature': {
@@ -31,14 +32,14 @@ export async function removeDrawn(saving: Saving, change: Extract<DrawingChange,
       return noteChange(
         scope,
         tx,
-        { subject: 'feature', verb: 'removed', id, summary: `Removed feature ${row.name}.` },
+        { subject: 'feature', verb: 'removed', id, summary: MAP_AUDIT.featureRemoved(row.name) },
         now,
       );
     }
     case 'item': {
       const row = await updateMapItem(scope, tx, at, { removedAt: now });
       if (!row) return;
-      const summary = `Removed ${LAYER_WORDS[row.layer].toLowerCase()}${row.name ? ` ${row.name}` : ''} from the map.`;
+      const summary = MAP_AUDIT.itemRemoved(LAYER_WORDS[row.layer], row.name);
       return noteChange(scope, tx, { subject: 'map_item', verb: 'removed', id, summary }, now);
     }
   }

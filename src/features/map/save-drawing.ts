@@ -8,6 +8,7 @@ import { findConflicts } from './find-conflicts';
 import { removeDrawn } from './remove-drawn';
 import { setApproach } from './set-approach';
 import { type Saving, setFeature, setItem, setParking, setStand } from './set-drawn';
+import { MAP_ERRORS } from './words/errors';
 
 const NEEDS: Record<DrawingChange['kind'], Permission> = {
   stand: 'stands.write',
@@ -19,12 +20,12 @@ const NEEDS: Record<DrawingChange['kind'], Permission> = {
 
 function refuseUnallowed(scope: ClubScope, changes: DrawingChange[]): void {
   if (changes.every(({ kind }) => scope.can(NEEDS[kind]))) return;
-  throw new AppError('forbidden', `Your role in ${scope.club.name} does not allow all of these changes.`);
+  throw new AppError('forbidden', MAP_ERRORS.notAllowed(scope.club.name));
 }
 
 function refuseTwice(changes: DrawingChange[]): void {
   if (new Set(changes.map(({ id }) => id)).size === changes.length) return;
-  throw new AppError('invalid', 'One thing is changed twice: undo the last change and save again.');
+  throw new AppError('invalid', MAP_ERRORS.changedTwice);
 }
 
 function set(saving: Saving, change: SetChange): Promise<void> {

@@ -23,6 +23,8 @@ import type { SetChange } from './drawing-schema';
 import type { DrawnRows } from './drawn-rows';
 import { drawnStandDefaults } from './new-stand';
 import { LAYER_WORDS } from './words';
+import { MAP_AUDIT } from './words/audit';
+import { MAP_ERRORS } from './words/errors';
 
 /** One saving under way. `ids`: what things drawn anew are called from now on. */
 export interface Saving {
@@ -39,11 +41,10 @@ type Of<K extends SetChange['kind']> = Extract<SetChange, { kind: K }>;
 const SHAPES: Record<string, DrawnShape> = { Point: 'point', LineString: 'line', Polygon: 'area' };
 const ALL_YEAR = [1, 2, 3, 4, 5, 6, 7, 8, 9, 10, 11, 12];
 
-export function nameFor({ name }: SetChange, what: string): string {
+export function nameFor({ name }: SetChange, needed: string): string {
   const tidy = name.trim().replace(/\s+/g, ' ');
-  if (tidy === '') throw new AppError('invalid', `Give ${what} a name before you save.`);
-  if (tidy.length > NAME_MAX)
-    throw new AppError('invalid', `Keep the name "${tidy.slice(0, 20)}…" to ${NAME_MAX} characters.`);
+  if (tidy === '') throw new AppError('invalid', needed);
+  if (tidy.length > NAME_MAX) throw new AppError('invalid', MAP_ERRORS.nameLong(tidy.slice(0, 20), NAME_MAX));
   return tidy;
 }
 
@@ -51,11 +52,11 @@ export function nameFor({ name }: SetChange, what: string): string {
 export function geometryFor(saving: Saving, change: SetChange, name: string): DrawnGeometry | undefined {
   const { geometry } = change;
   if (!geometry) {
-    if (change.version === 0) throw new AppError('invalid', `${name} is drawn nowhere: draw it or remove it.`);
+    if (change.version === 0) throw new AppError('invalid', MAP_ERRORS.drawnNowhere(name));
     return undefined;
   }
   if (geometry.type === 'Polygon' && geometry.coordinates.some((ring) => ring.length < 4)) {
-    throw new AppError('invalid', `${name}: an area needs three corners or more.`);
+    throw new AppError('invalid', MAP_ERRORS.fewCorners(name));
   }
   const read = parseGeometry(SHAPES[geometry.type] ?? 'area', JSON.stringify(geometry), saving.scope.club);
   if (!read.ok) throw new AppError('invalid', `${name}: ${read.message}`);
@@ -97,9 +98,9 @@ export function noteSet(
 ): Promise<void> {
   const { scope, tx, now } = saving;
   const { subject, id, what, before, values } = note;
-  if (!before) return noteChange(scope, tx, { subject, verb: 'added', id, summary: `Added ${what} on the map.` }, now);
+  if (!before) return noteChange(scope, tx, { subject, verb: 'added', id, summary: MAP_AUDIT.added(what) }, now);
   const detail = changes(before, values);
-  return noteChange(scope, tx, { subject, verb: 'changed', id, summary: `Changed ${what} on the map.`, detail }, now);
+  return noteChange(scope, tx, { subject, verb: 'changed', id, summary: MAP_AUDIT.changed(what), detail }, now);
 }
 
 function rowOf<T extends Kept>(rows: T[], change: SetChange): T | null {
@@ -111,12 +112,12 @@ function rowOf<T extends Kept>(rows: T[], change: SetChange): T | null {
 
 export async function setStand(saving: Saving, change: Of<'stand'>): Promise<void> {
   const { scope, tx, rows, now } = saving;
-  const name = nameFor(change, 'each stand');
+  const name = nameFor(change, MAP_ERRORS.standNeedsName);
   const before = rowOf(rows.stands, change);
   refuseTakenName(others(saving, rows.stands), name, TAKEN_NAMES.stand, change.id);
   const values = { name, kind: change.what, arcs: change.arcs, ...placeFor(saving, change, name) };
   const id = before?.id ?? newId('stand');
-  const note = { subject: 'stand' as const, id, what: `stand ${name}`, before, values };
+  const note = { subject: 'stand' as const, id, what: MAP_AUDIT.stand(name), before, values };
   if (before) {
     const row = await updateStand(scope, tx, change, values);
     if (row) keep(rows.stands, row);
@@ -132,12 +133,12 @@ export async function setStand(saving: Saving, change: Of<'stand'>): Promise<voi
 
 export async function setParking(saving: Saving, change: Of<'parking'>): Promise<void> {
   const { scope, tx, rows } = saving;
-  const name = nameFor(change, 'each parking place');
+  const name = nameFor(change, MAP_ERRORS.parkingNeedsName);
   const before = rowOf(rows.parkings, change);
   refuseTakenName(others(saving, rows.parkings), name, TAKEN_NAMES.parking, change.id);
   const values = { name, ...placeFor(saving, change, name) };
   const id = before?.id ?? newId('parking');
-  const note = { subject: 'parking' as const, id, what: `parking place ${name}`, before, values };
+  const note = { subject: 'parking' as const, id, what: MAP_AUDIT.parking(name), before, values };
   if (before) {
     const row = await updateParking(scope, tx, change, values);
     if (row) keep(rows.parkings, row);
@@ -152,13 +153,13 @@ export async function setParking(saving: Saving, change: Of<'parking'>): Promise
 
 export async function setFeature(saving: Saving, change: Of<'feature'>): Promise<void> {
   const { scope, tx, rows } = saving;
-  const name = nameFor(change, 'each feature');
+  const name = nameFor(change, MAP_ERRORS.featureNeedsName);
   const before = rowOf(rows.features, change);
   refuseTakenName(others(saving, rows.features), name, TAKEN_NAMES.feature, change.id);
   const geometry = geometryFor(saving, change, name);
   const values = { name, kind: change.what, ...(geometry ? { geometry } : {}) };
   const id = before?.id ?? newId('feature');
-  const note = { subject: 'feature' as const, id, what: `feature ${name}`, before, values };
+  const note = { subject: 'feature' as const, id, what: MAP_AUDIT.feature(name), before, values };
   if (before) {
     const row = await updateFeature(scope, tx, change, values);
     if (row) keep(rows.features, row);
@@ -179,7 +180,7 @@ export async function setItem(saving: Saving, change: Of<'item'>): Promise<void>
   const before = rowOf(rows.items, change);
   const geometry = geometryFor(saving, change, name || layer);
   if (geometry && !LAYER_SHAPES[change.what].includes(SHAPES[geometry.type] ?? 'area')) {
-    throw new AppError('invalid', `${name || layer}: this kind is drawn as ${LAYER_SHAPES[change.what].join(' or ')}.`);
+    throw new AppError('invalid', MAP_ERRORS.wrongShape(name || layer, LAYER_SHAPES[change.what].join(' or ')));
   }
   const values = { name, layer: change.what, props: change.props, ...(geometry ? { geometry } : {}) };
   const id = before?.id ?? newId('mapItem');

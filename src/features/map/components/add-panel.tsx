@@ -9,6 +9,7 @@ import { Button } from '@/ui/button';
 import { Select } from '@/ui/text-inputs';
 import { kindGroups, type NewKind, shapesOf } from '../drawing/kinds';
 import type { MapView } from '../thing';
+import { ADD_WORDS } from '../words/editing';
 import { PlacesField } from './places-field';
 
 interface AddPanelProps {
@@ -29,10 +30,10 @@ export function AddPanel({ view, onDraw, onHere, onPlaces }: AddPanelProps) {
   const shapes = shapesOf(kind);
   const shape = shapes.find((one) => one === wanted) ?? shapes[0] ?? 'point';
   return (
-    <section aria-label="Add to the map" className="grid gap-3 border-rule border-b pb-4">
+    <section aria-label={ADD_WORDS.title} className="grid gap-3 border-rule border-b pb-4">
       <div className="grid grid-cols-[1fr_auto] items-end gap-2">
         <Select
-          label="Add"
+          label={ADD_WORDS.add}
           value={value}
           onChange={({ target }) => {
             setValue(target.value);
@@ -51,7 +52,7 @@ export function AddPanel({ view, onDraw, onHere, onPlaces }: AddPanelProps) {
         </Select>
         {shapes.length > 1 && (
           <Select
-            label="As"
+            label={ADD_WORDS.as}
             value={shape}
             options={shapes.map((one) => ({ value: one, label: SHAPE_WORDS[one] }))}
             onChange={({ target }) => setWanted(shapes.find((one) => one === target.value) ?? null)}
@@ -60,22 +61,22 @@ export function AddPanel({ view, onDraw, onHere, onPlaces }: AddPanelProps) {
       </div>
       <div className="flex flex-wrap gap-2">
         <Button look="primary" onClick={() => onDraw(kind, shape)}>
-          <Pencil aria-hidden="true" className="size-4" /> Draw it
+          <Pencil aria-hidden="true" className="size-4" /> {ADD_WORDS.draw}
         </Button>
         {shape === 'point' && (
           <Button onClick={() => onHere(kind)}>
-            <LocateFixed aria-hidden="true" className="size-4" /> Where I stand
+            <LocateFixed aria-hidden="true" className="size-4" /> {ADD_WORDS.here}
           </Button>
         )}
       </div>
       <details>
-        <summary className="min-h-11 py-2">Or type where it is</summary>
+        <summary className="min-h-11 py-2">{ADD_WORDS.type}</summary>
         <PlacesField
           key={`${value} ${shape}`}
           club={view.club}
           shape={shape}
           geometry={null}
-          action="Add it there"
+          action={ADD_WORDS.addTyped}
           onPlaces={(geometry) => onPlaces(kind, geometry)}
         />
       </details>

@@ -5,11 +5,12 @@ import type { GoodWindArc } from '@/core/types';
 import { ARC_FIELDS, arcText, readArcs } from '@/features/ground/arc-text';
 import { Button } from '@/ui/button';
 import { TextInput } from '@/ui/text-inputs';
+import { ARC_WORDS } from '../words/editing';
 
 const LABELS = {
-  arcsBoth: 'Good winds',
-  arcsMorning: 'Morning only',
-  arcsEvening: 'Evening only',
+  arcsBoth: ARC_WORDS.goodWinds,
+  arcsMorning: ARC_WORDS.morningOnly,
+  arcsEvening: ARC_WORDS.eveningOnly,
 } as const;
 
 /** A quarter to begin with, about the wind that most often blows: it is there to be turned. */
@@ -26,7 +27,7 @@ export function ArcFields({
   const [typed, setTyped] = useState<{ name: string; text: string } | null>(null);
   return (
     <fieldset className="grid gap-3">
-      <legend className="sr-only">Good winds</legend>
+      <legend className="sr-only">{ARC_WORDS.goodWinds}</legend>
       {ARC_FIELDS.map(({ name, window }) => {
         const text = typed?.name === name ? typed.text : arcText(arcs, window);
         const read = readArcs(text, window);
@@ -34,7 +35,7 @@ export function ArcFields({
           <TextInput
             key={name}
             label={LABELS[name]}
-            hint={name === 'arcsBoth' ? 'Where the wind may come from: NW-N, or 310-20' : undefined}
+            hint={name === 'arcsBoth' ? ARC_WORDS.hint : undefined}
             optional={name !== 'arcsBoth'}
             autoComplete="off"
             autoCapitalize="characters"
@@ -51,9 +52,9 @@ export function ArcFields({
         );
       })}
       {arcs.length === 0 ? (
-        <Button onClick={() => onChange([FIRST_ARC], 'first')}>Set winds by hand on the map</Button>
+        <Button onClick={() => onChange([FIRST_ARC], 'first')}>{ARC_WORDS.hand}</Button>
       ) : (
-        <p className="text-ink-soft text-sm">Or drag the round handles beside the stand.</p>
+        <p className="text-ink-soft text-sm">{ARC_WORDS.handles}</p>
       )}
     </fieldset>
   );

@@ -7,6 +7,7 @@ import { Dialog } from '@/ui/dialog';
 import type { ConflictChoice } from '../drawing/settle-conflicts';
 import type { DrawingChange, DrawingConflict } from '../drawing-schema';
 import { KIND_WORDS } from '../words';
+import { CONFLICT_WORDS } from '../words/editing';
 
 interface ConflictDialogProps {
   conflicts: readonly DrawingConflict[];
@@ -22,20 +23,20 @@ function choicesOf(
 ): { value: ConflictChoice; label: string; note: string }[] {
   if (removing) {
     return [
-      { value: 'both', label: 'Keep it', note: `As ${conflict.who} left it.` },
-      { value: 'mine', label: 'Remove it all the same', note: 'Their change goes with it.' },
+      { value: 'both', label: CONFLICT_WORDS.keep, note: CONFLICT_WORDS.keepNote(conflict.who) },
+      { value: 'mine', label: CONFLICT_WORDS.remove, note: CONFLICT_WORDS.removeNote },
     ];
   }
   if (conflict.gone) {
     return [
-      { value: 'both', label: 'Add mine anew', note: 'What you drew is kept.' },
-      { value: 'theirs', label: 'Leave it removed', note: 'What you drew is dropped.' },
+      { value: 'both', label: CONFLICT_WORDS.addAnew, note: CONFLICT_WORDS.addAnewNote },
+      { value: 'theirs', label: CONFLICT_WORDS.leave, note: CONFLICT_WORDS.leaveNote },
     ];
   }
   return [
-    { value: 'both', label: 'Keep both', note: 'Mine is added beside it, to be put right by hand.' },
-    { value: 'mine', label: 'Put mine over theirs', note: 'Their change is lost.' },
-    { value: 'theirs', label: 'Keep theirs', note: 'What you drew of it is dropped.' },
+    { value: 'both', label: CONFLICT_WORDS.both, note: CONFLICT_WORDS.bothNote },
+    { value: 'mine', label: CONFLICT_WORDS.mine, note: CONFLICT_WORDS.mineNote },
+    { value: 'theirs', label: CONFLICT_WORDS.theirs, note: CONFLICT_WORDS.theirsNote },
   ];
 }
 
@@ -46,8 +47,8 @@ export function ConflictDialog({ conflicts, changes, pending, onSettle, onClose 
     <Dialog
       open={conflicts.length > 0}
       onOpenChange={(open) => !open && onClose()}
-      title="Somebody saved before you"
-      description="Nothing of yours is saved or lost yet. Choose for each."
+      title={CONFLICT_WORDS.title}
+      description={CONFLICT_WORDS.text}
     >
       <div className="grid gap-5">
         {conflicts.map((conflict) => {
@@ -68,11 +69,16 @@ export function ConflictDialog({ conflicts, changes, pending, onSettle, onClose 
           );
         })}
         <div className="flex flex-wrap gap-2">
-          <Button look="primary" pending={pending} pendingLabel="Saving…" onClick={() => onSettle(chosen)}>
-            Go on and save
+          <Button
+            look="primary"
+            pending={pending}
+            pendingLabel={CONFLICT_WORDS.saving}
+            onClick={() => onSettle(chosen)}
+          >
+            {CONFLICT_WORDS.save}
           </Button>
           <Button look="quiet" onClick={onClose}>
-            Back to the drawing
+            {CONFLICT_WORDS.back}
           </Button>
         </div>
       </div>

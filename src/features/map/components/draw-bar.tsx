@@ -5,6 +5,7 @@ import type { DrawnGeometry } from '@/features/ground/geometry-text';
 import { Button } from '@/ui/button';
 import { sizeText } from '../drawing/measure';
 import type { MapClub } from '../thing';
+import { DRAW_WORDS } from '../words/editing';
 
 interface DrawBarProps {
   club: MapClub;
@@ -55,13 +56,13 @@ export function DrawingBar({ club, title, shape, line, onFinish, onUndoPoint, on
       {line && (
         <>
           <Button look="primary" onClick={onFinish}>
-            Finish
+            {DRAW_WORDS.finish}
           </Button>
-          <Button onClick={onUndoPoint}>Take back a point</Button>
+          <Button onClick={onUndoPoint}>{DRAW_WORDS.undoPoint}</Button>
         </>
       )}
       <Button look="quiet" onClick={onCancel}>
-        Cancel
+        {DRAW_WORDS.cancel}
       </Button>
     </DrawBar>
   );

@@ -6,6 +6,7 @@ import { formatDistance } from '@/core/units';
 import { Button } from '@/ui/button';
 import { Notice } from '@/ui/notices';
 import type { MapClub } from '../thing';
+import { HERE_WORDS } from '../words/editing';
 
 /** Looser than this, a stand would land in the wrong tree. */
 const LOOSE_M = 15;
@@ -32,7 +33,7 @@ export function HerePanel({ club, what, here, onHere, onDrop, onCancel }: HerePa
   // biome-ignore lint/correctness/useExhaustiveDependencies: asked once for each try
   useEffect(() => {
     if (!navigator.geolocation) {
-      setProblem('This device tells no position: draw it, or type the numbers.');
+      setProblem(HERE_WORDS.noPosition);
       return;
     }
     let wanted = true;
@@ -42,7 +43,7 @@ export function HerePanel({ club, what, here, onHere, onDrop, onCancel }: HerePa
         if (wanted) onHere({ at: [coords.longitude, coords.latitude], accuracyM: coords.accuracy });
       },
       () => {
-        if (wanted) setProblem('The position could not be had: allow it, draw it, or type the numbers.');
+        if (wanted) setProblem(HERE_WORDS.refused);
       },
       { enableHighAccuracy: true, timeout: 20_000, maximumAge: 0 },
     );
@@ -55,30 +56,22 @@ export function HerePanel({ club, what, here, onHere, onDrop, onCancel }: HerePa
     <Notice
       live
       level={problem || (here && here.accuracyM > LOOSE_M) ? 'caution' : 'info'}
-      title={
-        here
-          ? `You stand within ${formatDistance(here.accuracyM, club.units)} of the mark`
-          : (problem ?? 'Finding where you stand…')
-      }
+      title={here ? HERE_WORDS.found(formatDistance(here.accuracyM, club.units)) : (problem ?? HERE_WORDS.finding)}
       actions={
         <>
           {here && (
             <Button look="primary" onClick={onDrop}>
-              Add the {what.toLowerCase()} here
+              {HERE_WORDS.add(what.toLowerCase())}
             </Button>
           )}
-          {(here || problem) && <Button onClick={() => setTries((n) => n + 1)}>Look again</Button>}
+          {(here || problem) && <Button onClick={() => setTries((n) => n + 1)}>{HERE_WORDS.lookAgain}</Button>}
           <Button look="quiet" onClick={onCancel}>
-            Cancel
+            {HERE_WORDS.cancel}
           </Button>
         </>
       }
     >
-      {here && here.accuracyM > LOOSE_M
-        ? 'That is loose. Wait under open sky and look again, or move the mark by hand afterwards.'
-        : here
-          ? 'The circle on the map is how sure your phone is.'
-          : null}
+      {here && here.accuracyM > LOOSE_M ? HERE_WORDS.loose : here ? HERE_WORDS.sure : null}
     </Notice>
   );
 }

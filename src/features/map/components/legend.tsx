@@ -2,15 +2,16 @@
 
 import { CheckboxGroup } from '@/ui/choices';
 import type { MapThing } from '../thing';
+import { LEGEND_WORDS } from '../words/screen';
 
 /** What may be left off the map for a clearer look. */
 export const LAYER_GROUPS = [
-  { value: 'stands', label: 'Stands and parking' },
-  { value: 'ways', label: 'Approaches' },
-  { value: 'features', label: 'What deer use' },
-  { value: 'land', label: 'Cover, water, roads, trails' },
-  { value: 'limits', label: 'Boundary, closed areas, no-shoot sectors' },
-  { value: 'things', label: 'Cameras, hazards, gates, signal' },
+  { value: 'stands', label: LEGEND_WORDS.stands },
+  { value: 'ways', label: LEGEND_WORDS.ways },
+  { value: 'features', label: LEGEND_WORDS.features },
+  { value: 'land', label: LEGEND_WORDS.land },
+  { value: 'limits', label: LEGEND_WORDS.limits },
+  { value: 'things', label: LEGEND_WORDS.things },
 ] as const;
 export type LayerGroup = (typeof LAYER_GROUPS)[number]['value'];
 
@@ -37,9 +38,9 @@ interface LegendProps {
 export function Legend({ shown, onShown }: LegendProps) {
   return (
     <details className="border-rule border-b">
-      <summary className="min-h-11 py-2">Layers and signs</summary>
+      <summary className="min-h-11 py-2">{LEGEND_WORDS.title}</summary>
       <CheckboxGroup
-        label="Show on the map"
+        label={LEGEND_WORDS.showMap}
         choices={LAYER_GROUPS}
         value={[...shown]}
         onChange={({ target }) => {
@@ -52,12 +53,12 @@ export function Legend({ shown, onShown }: LegendProps) {
         }}
       />
       <ul className="mt-2 list-disc pb-3 pl-5 text-ink-soft text-sm">
-        <li>A black disc is a stand. The open brackets round it are its good winds: where the wind may come from.</li>
-        <li>The inner bracket is for the morning alone, the outer for the evening alone, the middle one for both.</li>
-        <li>Dotted black lines are approaches, whole where they are driven.</li>
-        <li>Long moss dashes are travel lines, moss dots rub lines, a heavy dashed ring a sanctuary.</li>
-        <li>Dots fill woods, ticks swamp, waves water, bare ground cut timber, hatching farm fields and plots.</li>
-        <li>Crossed clay is closed. Clay hatching is where nobody shoots.</li>
+        <li>{LEGEND_WORDS.signStand}</li>
+        <li>{LEGEND_WORDS.signBrackets}</li>
+        <li>{LEGEND_WORDS.signApproaches}</li>
+        <li>{LEGEND_WORDS.signFeatures}</li>
+        <li>{LEGEND_WORDS.signLand}</li>
+        <li>{LEGEND_WORDS.signClosed}</li>
       </ul>
     </details>
   );

@@ -18,6 +18,7 @@ import { paintThings } from '../leaflet/paint-things';
 import { seatHandle } from '../leaflet/seat-handle';
 import type { MapOverlay } from '../overlay';
 import type { MapThing, MapView } from '../thing';
+import { MAP_CANVAS_WORDS } from '../words/screen';
 import { MapPatterns } from './map-patterns';
 import { ScaleAndNorth } from './scale-and-north';
 import { useLight } from './use-light';
@@ -232,7 +233,7 @@ export function MapCanvas(props: MapCanvasProps) {
       <div
         ref={host}
         role="application"
-        aria-label={`${props.label}. Arrow keys move it, plus and minus zoom. The list beside it says the same.`}
+        aria-label={MAP_CANVAS_WORDS.label(props.label)}
         className="m-map size-full border border-rule-strong"
       />
       {parts && <ScaleAndNorth map={parts.map} units={club.units} declinationDeg={view.declinationDeg} />}

@@ -5,6 +5,7 @@ import { Button } from '@/ui/button';
 import type { NewKind } from '../drawing/kinds';
 import type { MapThing, MapView } from '../thing';
 import { KIND_WORDS, LAYER_WORDS, nameOf } from '../words';
+import { MAP_DOING_WORDS } from '../words/screen';
 import { DrawBar, DrawingBar } from './draw-bar';
 import { HerePanel } from './here-panel';
 import { MeasurePanel } from './measure-panel';
@@ -23,12 +24,6 @@ export function kindWords(kind: NewKind): string {
   }
 }
 
-const HOW = {
-  point: 'tap where it is.',
-  line: 'tap from point to point; tap the last one again to end.',
-  area: 'tap its corners one after another; tap the first one again to close it.',
-} as const;
-
 /** The bar over the map for whatever the hand is doing. */
 export function MapDoing({ view, editor, things }: { view: MapView; editor: MapEditor; things: readonly MapThing[] }) {
   const { doing, progress, corner } = editor;
@@ -42,36 +37,25 @@ export function MapDoing({ view, editor, things }: { view: MapView; editor: MapE
   };
   switch (doing.mode) {
     case 'add': {
-      const from = doing.kind.kind === 'approach' ? 'from the parking place to the stand, ' : '';
-      return (
-        <DrawingBar
-          {...bar}
-          line={doing.shape !== 'point'}
-          title={`${kindWords(doing.kind)}: ${from}${HOW[doing.shape]}`}
-        />
-      );
+      const say = doing.kind.kind === 'approach' ? MAP_DOING_WORDS.addApproach : MAP_DOING_WORDS.add[doing.shape];
+      return <DrawingBar {...bar} line={doing.shape !== 'point'} title={say(kindWords(doing.kind))} />;
     }
     case 'split':
       return (
         <DrawingBar
           {...bar}
           line={doing.shape === 'area'}
-          title={
-            doing.shape === 'area' ? 'Split: draw a line right across it.' : 'Split: tap the line where it is to part.'
-          }
+          title={doing.shape === 'area' ? MAP_DOING_WORDS.split : MAP_DOING_WORDS.splitLine}
         />
       );
     case 'reshape': {
       const thing = things.find((one) => one.id === doing.id);
-      const how =
-        thing?.geometry.type === 'Point'
-          ? 'drag it'
-          : 'drag its corners, or the small dots between them, or the whole of it';
+      const say = thing?.geometry.type === 'Point' ? MAP_DOING_WORDS.reshapePoint : MAP_DOING_WORDS.reshape;
       return (
-        <DrawBar club={club} shape={progress} title={`${thing ? nameOf(thing) : 'Reshape'}: ${how}.`}>
-          {corner && <Button onClick={() => editor.takeOut(corner)}>Take out this corner</Button>}
+        <DrawBar club={club} shape={progress} title={say(thing ? nameOf(thing) : null)}>
+          {corner && <Button onClick={() => editor.takeOut(corner)}>{MAP_DOING_WORDS.takeOut}</Button>}
           <Button look="primary" onClick={editor.stop}>
-            Done
+            {MAP_DOING_WORDS.done}
           </Button>
         </DrawBar>
       );

@@ -7,13 +7,14 @@ import { TextInput } from '@/ui/text-inputs';
 import { briefOf } from '../facts';
 import type { MapClub, MapThing, ThingKind } from '../thing';
 import { nameOf } from '../words';
+import { MAP_LIST_WORDS } from '../words/screen';
 
 const GROUPS: readonly { kind: ThingKind; label: string }[] = [
-  { kind: 'stand', label: 'Stands' },
-  { kind: 'approach', label: 'Approaches' },
-  { kind: 'parking', label: 'Parking places' },
-  { kind: 'feature', label: 'What deer use' },
-  { kind: 'item', label: 'Land' },
+  { kind: 'stand', label: MAP_LIST_WORDS.stands },
+  { kind: 'approach', label: MAP_LIST_WORDS.approaches },
+  { kind: 'parking', label: MAP_LIST_WORDS.parkingPlaces },
+  { kind: 'feature', label: MAP_LIST_WORDS.whatDeerUse },
+  { kind: 'item', label: MAP_LIST_WORDS.land },
 ];
 const FIRST = 60;
 
@@ -35,11 +36,11 @@ export function MapList({ club, things, selectedId, onSelect }: MapListProps) {
         .filter(({ name, brief }) => asked === '' || `${name} ${brief}`.toLowerCase().includes(asked)),
     [things, club, asked],
   );
-  if (things.length === 0) return <p className="py-4 text-ink-soft">Nothing is drawn yet.</p>;
+  if (things.length === 0) return <p className="py-4 text-ink-soft">{MAP_LIST_WORDS.empty}</p>;
   return (
     <div>
       <TextInput
-        label="Find on the map"
+        label={MAP_LIST_WORDS.find}
         type="search"
         autoComplete="off"
         value={filter}
@@ -54,7 +55,7 @@ export function MapList({ club, things, selectedId, onSelect }: MapListProps) {
           onSelect={onSelect}
         />
       ))}
-      {rows.length === 0 && <p className="py-3 text-ink-soft">Nothing on the map is called that.</p>}
+      {rows.length === 0 && <p className="py-3 text-ink-soft">{MAP_LIST_WORDS.noneFound}</p>}
     </div>
   );
 }
@@ -88,7 +89,7 @@ function Group({ label, rows, selectedId, onSelect }: GroupProps) {
               )}
             >
               <span className="font-semibold">{name}</span>
-              {thing.version === 0 && <span className="text-clay text-sm"> not saved yet</span>}
+              {thing.version === 0 && <span className="text-clay text-sm">{MAP_LIST_WORDS.notSavedYet}</span>}
               {brief && <span className="block text-ink-soft text-sm">{brief}</span>}
             </button>
           </li>
@@ -96,7 +97,7 @@ function Group({ label, rows, selectedId, onSelect }: GroupProps) {
       </ul>
       {rows.length > shown.length && (
         <Button look="quiet" onClick={() => setAll(true)}>
-          Show all {rows.length}
+          {MAP_LIST_WORDS.showAll(rows.length)}
         </Button>
       )}
     </div>

@@ -12,6 +12,7 @@ import { Tabs } from '@/ui/tabs';
 import type { MapOverlay } from '../overlay';
 import { mapQuery } from '../queries';
 import type { MapView } from '../thing';
+import { MAP_SCREEN_WORDS } from '../words/screen';
 import { AddPanel } from './add-panel';
 import { ConflictDialog } from './conflict-dialog';
 import { groupOf, LAYER_GROUPS, type LayerGroup, Legend } from './legend';
@@ -119,10 +120,10 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
     <div className="grid gap-3">
       {state.brought && changes.length > 0 && (
         <Notice
-          title="Not saved yet"
-          actions={<Button onClick={() => state.restart(view.things)}>Start afresh</Button>}
+          title={MAP_SCREEN_WORDS.draftTitle}
+          actions={<Button onClick={() => state.restart(view.things)}>{MAP_SCREEN_WORDS.draftDrop}</Button>}
         >
-          What you drew here before has been brought back.
+          {MAP_SCREEN_WORDS.draftText}
         </Notice>
       )}
       {(saving.problem ?? editor.problem) && (
@@ -130,10 +131,10 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
       )}
       <div className="flex flex-wrap items-center gap-2">
         <Button onClick={() => editor.map.current?.showAll()}>
-          <Maximize2 aria-hidden="true" className="size-4" /> All of it
+          <Maximize2 aria-hidden="true" className="size-4" /> {MAP_SCREEN_WORDS.showAll}
         </Button>
         <Button aria-pressed={doing.mode === 'measure'} onClick={() => editor.begin({ mode: 'measure' })}>
-          <Ruler aria-hidden="true" className="size-4" /> Measure
+          <Ruler aria-hidden="true" className="size-4" /> {MAP_SCREEN_WORDS.measure}
         </Button>
         {may && (
           <>
@@ -144,7 +145,7 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
                 state.undo();
               }}
             >
-              <Undo2 aria-hidden="true" className="size-4" /> Undo
+              <Undo2 aria-hidden="true" className="size-4" /> {MAP_SCREEN_WORDS.undo}
             </Button>
             <Button
               disabled={state.drawing.future.length === 0}
@@ -153,20 +154,29 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
                 state.redo();
               }}
             >
-              <Redo2 aria-hidden="true" className="size-4" /> Redo
+              <Redo2 aria-hidden="true" className="size-4" /> {MAP_SCREEN_WORDS.redo}
             </Button>
             <span className="grow" />
             {changes.length > 0 && (
-              <Button look="primary" pending={saving.pending} pendingLabel="Saving…" onClick={saving.save}>
-                Save {changes.length === 1 ? 'one change' : `${changes.length} changes`}
+              <Button
+                look="primary"
+                pending={saving.pending}
+                pendingLabel={MAP_SCREEN_WORDS.saving}
+                onClick={saving.save}
+              >
+                {MAP_SCREEN_WORDS.save(changes.length)}
               </Button>
             )}
           </>
         )}
-        <Checkbox label="Contours" checked={hills} onChange={({ target }) => setHills(target.checked)} />
+        <Checkbox
+          label={MAP_SCREEN_WORDS.contours}
+          checked={hills}
+          onChange={({ target }) => setHills(target.checked)}
+        />
         {view.imagery && (
           <Checkbox
-            label="Photographs from above"
+            label={MAP_SCREEN_WORDS.photographs}
             checked={imagery}
             onChange={({ target }) => setImagery(target.checked)}
           />
@@ -180,7 +190,7 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
             ref={editor.map}
             view={view}
             things={seen}
-            label={`Map of ${view.club.name}`}
+            label={MAP_SCREEN_WORDS.mapOf(view.club.name)}
             className="relative h-[58dvh] min-h-80 lg:h-[min(48rem,78dvh)]"
             tool={editor.tool}
             selectedId={editor.selectedId}
@@ -202,9 +212,9 @@ export function MapScreen({ initial, save, selectedId, moment }: MapScreenProps)
         <div className="min-w-0 lg:max-h-[min(52rem,84dvh)] lg:overflow-y-auto lg:pr-2">
           {moment ? (
             <Tabs
-              label="Beside the map"
+              label={MAP_SCREEN_WORDS.besideTheMap}
               tabs={[
-                { id: 'list', label: 'What is there', content: list },
+                { id: 'list', label: MAP_SCREEN_WORDS.whatIsThere, content: list },
                 { id: 'moment', label: moment.label, content: moment.panel },
               ]}
               value={moment.open ? 'moment' : 'list'}

@@ -6,6 +6,7 @@ import { Button } from '@/ui/button';
 import { Select } from '@/ui/text-inputs';
 import { legBetween, legText, ringAreaM2, sizeText } from '../drawing/measure';
 import type { MapThing, MapView } from '../thing';
+import { MEASURE_WORDS } from '../words/editing';
 
 interface MeasurePanelProps {
   view: Pick<MapView, 'club' | 'declinationDeg'>;
@@ -33,26 +34,26 @@ export function MeasurePanel({ view, things, points, onPoints, onClose }: Measur
   };
   const chosen = (i: number) => places.find((place) => place.at === points[i])?.value ?? '';
   return (
-    <section aria-label="Measure" className="grid gap-3 border-clay border-l-4 bg-panel p-3">
+    <section aria-label={MEASURE_WORDS.measure} className="grid gap-3 border-clay border-l-4 bg-panel p-3">
       <div className="flex items-start justify-between gap-2">
         <p>
-          <span className="font-semibold">Measure.</span> Tap places on the map, or choose two.
+          <span className="font-semibold">{MEASURE_WORDS.lead}</span> {MEASURE_WORDS.how}
         </p>
         <Button look="quiet" onClick={onClose}>
-          Done
+          {MEASURE_WORDS.done}
         </Button>
       </div>
       <div className="grid grid-cols-2 gap-2">
         <Select
-          label="From"
-          placeholder="A place"
+          label={MEASURE_WORDS.from}
+          placeholder={MEASURE_WORDS.aPlace}
           options={places}
           value={chosen(0)}
           onChange={({ target }) => choose(0)(target.value)}
         />
         <Select
-          label="To"
-          placeholder="A place"
+          label={MEASURE_WORDS.to}
+          placeholder={MEASURE_WORDS.aPlace}
           options={places}
           value={chosen(1)}
           onChange={({ target }) => choose(1)(target.value)}
@@ -67,16 +68,22 @@ export function MeasurePanel({ view, things, points, onPoints, onClose }: Measur
             ))}
           </ol>
         )}
-        {legs.length > 1 && <p className="font-semibold">Together {formatDistance(total, club.units)}</p>}
+        {legs.length > 1 && (
+          <p className="font-semibold">{MEASURE_WORDS.together(formatDistance(total, club.units))}</p>
+        )}
         {points.length > 2 && ringAreaM2(club, points) > 0 && (
-          <p>Closed: {sizeText(club, { type: 'Polygon', coordinates: [[...points, points[0] ?? []]] }, club.units)}</p>
+          <p>
+            {MEASURE_WORDS.closed(
+              sizeText(club, { type: 'Polygon', coordinates: [[...points, points[0] ?? []]] }, club.units),
+            )}
+          </p>
         )}
       </div>
       {points.length > 0 && (
         <div className="flex gap-2">
-          <Button onClick={() => onPoints(points.slice(0, -1))}>Take back a point</Button>
+          <Button onClick={() => onPoints(points.slice(0, -1))}>{MEASURE_WORDS.undoPoint}</Button>
           <Button look="quiet" onClick={() => onPoints([])}>
-            Begin again
+            {MEASURE_WORDS.beginAgain}
           </Button>
         </div>
       )}

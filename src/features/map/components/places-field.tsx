@@ -6,6 +6,7 @@ import { type DrawnGeometry, geometryText, parseGeometry } from '@/features/grou
 import { Button } from '@/ui/button';
 import { Textarea } from '@/ui/text-inputs';
 import type { MapClub } from '../thing';
+import { PLACES_WORDS } from '../words/screen';
 
 interface PlacesFieldProps {
   club: MapClub;
@@ -25,10 +26,8 @@ export function PlacesField({ club, shape, geometry, action, onPlaces }: PlacesF
     <div className="grid gap-2">
       <Textarea
         id={id}
-        label={shape === 'point' ? 'Place' : 'Places'}
-        hint={
-          shape === 'point' ? 'Latitude, longitude, such as 38.6051, -83.1952' : 'Latitude, longitude, one to a line'
-        }
+        label={shape === 'point' ? PLACES_WORDS.place : PLACES_WORDS.places}
+        hint={shape === 'point' ? PLACES_WORDS.placeHint : PLACES_WORDS.placesHint}
         rows={shape === 'point' ? 2 : 6}
         spellCheck={false}
         value={text}

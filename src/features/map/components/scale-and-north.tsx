@@ -3,8 +3,9 @@
 import type { Map as LeafletMap } from 'leaflet';
 import { useEffect, useState } from 'react';
 import type { Units } from '@/core/units';
-import { declinationText } from '../drawing/measure';
+import { declinationSide } from '../drawing/measure';
 import { metresPerPixel, type ScaleBar, scaleBar } from '../drawing/scale-bar';
+import { SCALE_AND_NORTH_WORDS } from '../words/screen';
 
 const MOST_PX = 120;
 
@@ -37,11 +38,9 @@ export function ScaleAndNorth({
         <svg aria-hidden="true" width="18" height="26" viewBox="0 0 18 26" className="mx-auto">
           <path d="M9 1V25M9 1L4 9M9 1L14 9" fill="none" stroke="currentColor" strokeWidth="1.6" />
         </svg>
-        True north
+        {SCALE_AND_NORTH_WORDS.trueNorth}
         {declinationDeg !== null && (
-          <span className="block text-ink-soft">
-            compass {declinationText(declinationDeg).replace(' of true north', '')}
-          </span>
+          <span className="block text-ink-soft">{SCALE_AND_NORTH_WORDS.compass(declinationSide(declinationDeg))}</span>
         )}
       </p>
     </>

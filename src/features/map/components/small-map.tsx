@@ -9,10 +9,12 @@ import { factsOf } from '../facts';
 import { mapQuery } from '../queries';
 import type { MapThing } from '../thing';
 import { nameOf } from '../words';
+import { FACT_WORDS } from '../words/facts';
+import { SMALL_MAP_WORDS } from '../words/screen';
 
 const MapCanvas = dynamic(() => import('./map-canvas').then((part) => part.MapCanvas), {
   ssr: false,
-  loading: () => <Loading label="Unfolding the map" />,
+  loading: () => <Loading label={SMALL_MAP_WORDS.loading} />,
 });
 
 /** Kinds that help a person find the way; the rest of the ground would only crowd a small map. */
@@ -40,12 +42,15 @@ export function SmallMap({ club, standId, approachId = null }: SmallMapProps) {
   const framed = useMemo(() => things.filter((thing) => thing.kind !== 'item' && thing.kind !== 'feature'), [things]);
   if (query.isError) {
     return (
-      <ErrorState title="The map could not be read" action={<Button onClick={() => query.refetch()}>Try again</Button>}>
+      <ErrorState
+        title={SMALL_MAP_WORDS.failed}
+        action={<Button onClick={() => query.refetch()}>{SMALL_MAP_WORDS.tryAgain}</Button>}
+      >
         {query.error.message}
       </ErrorState>
     );
   }
-  if (!view) return <Loading label="Unfolding the map" />;
+  if (!view) return <Loading label={SMALL_MAP_WORDS.loading} />;
   const stand = things.find((thing) => thing.id === standId);
   const ways = things.filter((thing) => thing.kind === 'approach');
   return (
@@ -55,21 +60,21 @@ export function SmallMap({ club, standId, approachId = null }: SmallMapProps) {
         view={view}
         things={things}
         frame={framed}
-        label={`Map of the way to ${stand ? nameOf(stand) : 'the stand'}`}
+        label={SMALL_MAP_WORDS.label(stand ? nameOf(stand) : null)}
         className="relative h-72 sm:h-80"
         selectedId={approachId ?? standId}
       />
       <figcaption className="mt-1 text-sm">
-        {ways.length === 0 && <p className="text-ink-soft">No way in is drawn.</p>}
+        {ways.length === 0 && <p className="text-ink-soft">{SMALL_MAP_WORDS.noWay}</p>}
         <ul>
           {ways.map((way) => (
             <li key={way.id}>
               <span className="font-semibold">{nameOf(way)}</span>{' '}
               <span className="text-ink-soft">
                 {factsOf(way, view.things, view.club)
-                  .filter(({ term }) => term === 'Size' || term === 'From')
+                  .filter(({ term }) => term === FACT_WORDS.size || term === FACT_WORDS.from)
                   .map(({ detail }) => detail)
-                  .join(', from ')}
+                  .join(SMALL_MAP_WORDS.from)}
               </span>
             </li>
           ))}

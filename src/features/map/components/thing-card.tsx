@@ -7,6 +7,7 @@ import { isDrawn } from '../drawing/list-changes';
 import { factsOf } from '../facts';
 import type { MapThing, MapView } from '../thing';
 import { KIND_WORDS, nameOf } from '../words';
+import { THING_WORDS } from '../words/editing';
 import { PlacesField } from './places-field';
 import { ThingFields } from './thing-fields';
 
@@ -53,14 +54,14 @@ export function ThingCard(props: ThingCardProps) {
   const shape = isDrawn(thing.geometry) ? SHAPES[thing.geometry.type] : null;
   const page = pageOf(thing, view.club.slug);
   const showPage = page !== null && (change || thing.kind === 'stand' || thing.kind === 'feature');
-  const parts = thing.kind === 'approach' || shape === 'point' ? null : 'Split';
+  const parts = thing.kind === 'approach' || shape === 'point' ? null : THING_WORDS.split;
   return (
-    <section aria-label={`Chosen: ${nameOf(thing)}`} className="border-clay border-l-4 bg-panel p-3">
+    <section aria-label={THING_WORDS.chosen(nameOf(thing))} className="border-clay border-l-4 bg-panel p-3">
       <div className="flex items-start justify-between gap-2">
         <h2 className="font-serif text-lg leading-snug">
           {nameOf(thing)} <span className="block text-ink-soft text-sm">{KIND_WORDS[thing.kind]}</span>
         </h2>
-        <Button look="quiet" onClick={onClose} aria-label="Let go of it">
+        <Button look="quiet" onClick={onClose} aria-label={THING_WORDS.letGo}>
           <X aria-hidden="true" className="size-5" />
         </Button>
       </div>
@@ -68,18 +69,18 @@ export function ThingCard(props: ThingCardProps) {
         <>
           <ThingFields key={thing.id} thing={thing} things={things} club={view.club} onChange={onChange} />
           <div className="mt-3 flex flex-wrap gap-2">
-            {shape && <Button onClick={onReshape}>{shape === 'point' ? 'Move' : 'Reshape or move'}</Button>}
+            {shape && <Button onClick={onReshape}>{shape === 'point' ? THING_WORDS.move : THING_WORDS.reshape}</Button>}
             {shape && parts && (
               <Button onClick={onSplit}>
                 <Scissors aria-hidden="true" className="size-4" /> {parts}
               </Button>
             )}
             <Button look="danger" onClick={onRemove}>
-              <Trash2 aria-hidden="true" className="size-4" /> Remove
+              <Trash2 aria-hidden="true" className="size-4" /> {THING_WORDS.remove}
             </Button>
           </div>
           <details className="mt-3">
-            <summary className="min-h-11 py-2 font-semibold">Facts and places in numbers</summary>
+            <summary className="min-h-11 py-2 font-semibold">{THING_WORDS.facts}</summary>
             <DefinitionList items={factsOf(thing, things, view.club)} />
             {isDrawn(thing.geometry) && shape && (
               <PlacesField
@@ -87,7 +88,7 @@ export function ThingCard(props: ThingCardProps) {
                 club={view.club}
                 shape={shape}
                 geometry={thing.geometry}
-                action="Put it there"
+                action={THING_WORDS.put}
                 onPlaces={(geometry) => onChange({ ...thing, geometry }, null)}
               />
             )}
@@ -98,7 +99,7 @@ export function ThingCard(props: ThingCardProps) {
       )}
       {showPage && (
         <p className="mt-3">
-          <ButtonLink href={page}>All that is kept of it</ButtonLink>
+          <ButtonLink href={page}>{THING_WORDS.all}</ButtonLink>
         </p>
       )}
     </section>

@@ -8,6 +8,7 @@ import { DIRECTION_WORDS, FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/feature
 import { NumberInput, Select, TextInput } from '@/ui/text-inputs';
 import type { ApproachThing, ItemThing, MapClub, MapThing } from '../thing';
 import { LAYER_WORDS } from '../words';
+import { THING_FIELD_WORDS } from '../words/editing';
 import { ArcFields } from './arc-fields';
 
 export interface FieldsProps {
@@ -30,12 +31,12 @@ export function ThingFields(props: FieldsProps) {
   return (
     <div className="grid gap-3">
       <TextInput
-        label="Name"
+        label={THING_FIELD_WORDS.name}
         autoComplete="off"
         optional={thing.kind === 'item'}
         maxLength={60}
         value={thing.name}
-        error={thing.name.trim() === '' && thing.kind !== 'item' ? 'Give it a name.' : undefined}
+        error={thing.name.trim() === '' && thing.kind !== 'item' ? THING_FIELD_WORDS.giveName : undefined}
         onChange={({ target }) => onChange({ ...thing, name: target.value }, `name:${thing.id}`)}
       />
       {kindFields(props)}
@@ -49,7 +50,7 @@ function kindFields({ thing, things, club, onChange }: FieldsProps): ReactNode {
       return (
         <>
           <Select
-            label="Kind"
+            label={THING_FIELD_WORDS.kind}
             value={thing.what}
             options={options(STAND_KINDS, STAND_KIND_WORDS)}
             onChange={({ target }) => {
@@ -66,7 +67,7 @@ function kindFields({ thing, things, club, onChange }: FieldsProps): ReactNode {
     case 'feature':
       return (
         <Select
-          label="Kind"
+          label={THING_FIELD_WORDS.kind}
           value={thing.what}
           options={options(FEATURE_KINDS, FEATURE_KIND_WORDS)}
           onChange={({ target }) => {
@@ -94,19 +95,19 @@ function ApproachFields({
   return (
     <>
       <Select
-        label="Leads to"
+        label={THING_FIELD_WORDS.leadsTo}
         value={thing.standId}
         options={named('stand')}
         onChange={({ target }) => onChange({ ...thing, standId: target.value }, null)}
       />
       <Select
-        label="From parking place"
+        label={THING_FIELD_WORDS.fromParkingPlace}
         value={thing.parkingId ?? ''}
-        options={[{ value: '', label: 'None' }, ...named('parking')]}
+        options={[{ value: '', label: THING_FIELD_WORDS.none }, ...named('parking')]}
         onChange={({ target }) => onChange({ ...thing, parkingId: target.value || null }, null)}
       />
       <Select
-        label="Walked"
+        label={THING_FIELD_WORDS.walked}
         value={thing.direction}
         options={options(WALKED, DIRECTION_WORDS)}
         onChange={({ target }) => {
@@ -141,7 +142,7 @@ function ItemFields({ thing, club, onChange }: { thing: ItemThing } & Pick<Field
   return (
     <>
       <Select
-        label="Kind"
+        label={THING_FIELD_WORDS.kind}
         value={thing.what}
         options={options(layers, LAYER_WORDS)}
         onChange={({ target }) => {
@@ -152,9 +153,9 @@ function ItemFields({ thing, club, onChange }: { thing: ItemThing } & Pick<Field
       />
       {thing.what === 'wood' && (
         <NumberInput
-          label="Timber cut in"
+          label={THING_FIELD_WORDS.timberCutIn}
           optional
-          hint="The year"
+          hint={THING_FIELD_WORDS.timberCutInHint}
           min={1900}
           max={2200}
           value={thing.props.cutYear ?? ''}
@@ -170,10 +171,10 @@ function ItemFields({ thing, club, onChange }: { thing: ItemThing } & Pick<Field
       )}
       {thing.what === 'camera' && (
         <NumberInput
-          label="Looks toward"
+          label={THING_FIELD_WORDS.looksToward}
           optional
           unit="°"
-          hint="From true north, clockwise"
+          hint={THING_FIELD_WORDS.looksTowardHint}
           min={0}
           max={360}
           defaultValue={thing.props.facingDeg ?? ''}
@@ -188,7 +189,7 @@ function ItemFields({ thing, club, onChange }: { thing: ItemThing } & Pick<Field
       {thing.what === 'no_shoot' && sector && (
         <div className="grid grid-cols-3 gap-2">
           <NumberInput
-            label="From"
+            label={THING_FIELD_WORDS.from}
             unit="°"
             min={0}
             max={360}
@@ -196,7 +197,7 @@ function ItemFields({ thing, club, onChange }: { thing: ItemThing } & Pick<Field
             onChange={({ target }) => turn('fromDeg', target.value, 360)}
           />
           <NumberInput
-            label="To"
+            label={THING_FIELD_WORDS.to}
             unit="°"
             min={0}
             max={360}
@@ -204,7 +205,7 @@ function ItemFields({ thing, club, onChange }: { thing: ItemThing } & Pick<Field
             onChange={({ target }) => turn('toDeg', target.value, 360)}
           />
           <NumberInput
-            label="Reach"
+            label={THING_FIELD_WORDS.reach}
             unit={us ? 'yd' : 'm'}
             min={1}
             max={2000}

@@ -13,6 +13,7 @@ import { isDrawn } from '../drawing/list-changes';
 import { splitArea, splitLine } from '../drawing/split';
 import type { MapThing, MapView } from '../thing';
 import { whatOf } from '../words';
+import { MAP_EDITOR_WORDS } from '../words/screen';
 import type { Here } from './here-panel';
 import type { MapHandle, MapTool } from './map-canvas';
 import { newThingId, type useDrawing } from './use-drawing';
@@ -175,7 +176,7 @@ export function useMapEditor(
       const thing = things.find((one) => one.id === doing.id);
       const geometry = thing && isDrawn(thing.geometry) ? withoutCorner(thing.geometry, at) : null;
       if (!thing || !geometry) {
-        setProblem('No more corners can go.');
+        setProblem(MAP_EDITOR_WORDS.noMoreCorners);
         return;
       }
       put({ ...thing, geometry }, null);

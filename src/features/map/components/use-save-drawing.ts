@@ -10,11 +10,12 @@ import { type ConflictChoice, settleConflicts } from '../drawing/settle-conflict
 import type { DrawingAnswer, DrawingChange, DrawingConflict } from '../drawing-schema';
 import { mapQuery } from '../queries';
 import type { MapThing } from '../thing';
+import { SAVE_DRAWING_WORDS } from '../words/editing';
 import { newThingId, type useDrawing } from './use-drawing';
 
 export type SaveDrawing = ClubCall<{ changes: DrawingChange[] }, DrawingAnswer>;
 
-const LOST = 'The server could not be reached. What you drew is still here: try again.';
+const LOST = SAVE_DRAWING_WORDS.lost;
 
 /** Saves what is drawn; where others were quicker, asks what to keep and saves again. */
 export function useSaveDrawing(
@@ -39,7 +40,7 @@ export function useSaveDrawing(
     if (!answer?.ok) return setProblem(answer?.error.message ?? LOST);
     if (!answer.data.saved) return setConflicts(answer.data.conflicts);
     const { ids, count } = answer.data;
-    toast({ title: count === 1 ? 'One change is saved' : `${count} changes are saved` });
+    toast({ title: count === 1 ? SAVE_DRAWING_WORDS.savedOne : SAVE_DRAWING_WORDS.saved(count) });
     state.restart(await fresh());
     onSaved(ids);
   }

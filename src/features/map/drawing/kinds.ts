@@ -5,6 +5,7 @@ import type { DrawnGeometry } from '@/features/ground/geometry-text';
 import { FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words';
 import type { MapClub, MapThing } from '../thing';
 import { LAYER_WORDS } from '../words';
+import { NEW_THING_WORDS } from '../words/drawing';
 import { tieDrawn } from './follow';
 
 /** What may be drawn: 'stand:ladder', 'parking', 'approach', 'feature:bedding', 'item:wood'. */
@@ -52,7 +53,7 @@ export function kindGroups(may: { stands: boolean; features: boolean; approaches
   const groups: KindGroup[] = [];
   if (may.stands) {
     groups.push({
-      label: 'Stand',
+      label: NEW_THING_WORDS.stand,
       kinds: STAND_KINDS.map((what) => ({
         value: `stand:${what}`,
         label: STAND_KIND_WORDS[what],
@@ -61,12 +62,12 @@ export function kindGroups(may: { stands: boolean; features: boolean; approaches
     });
   }
   const ways: KindGroup['kinds'] = [];
-  if (may.features) ways.push({ value: 'parking', label: 'Parking place', kind: { kind: 'parking' } });
-  if (may.approaches) ways.push({ value: 'approach', label: 'Approach', kind: { kind: 'approach' } });
-  if (ways.length > 0) groups.push({ label: 'Ways in', kinds: ways });
+  if (may.features) ways.push({ value: 'parking', label: NEW_THING_WORDS.parking, kind: { kind: 'parking' } });
+  if (may.approaches) ways.push({ value: 'approach', label: NEW_THING_WORDS.approach, kind: { kind: 'approach' } });
+  if (ways.length > 0) groups.push({ label: NEW_THING_WORDS.waysIn, kinds: ways });
   if (may.features) {
     groups.push({
-      label: 'What deer use',
+      label: NEW_THING_WORDS.whatDeerUse,
       kinds: FEATURE_KINDS.map((what) => ({
         value: `feature:${what}`,
         label: FEATURE_KIND_WORDS[what],
@@ -74,7 +75,7 @@ export function kindGroups(may: { stands: boolean; features: boolean; approaches
       })),
     });
     groups.push({
-      label: 'Land',
+      label: NEW_THING_WORDS.land,
       kinds: MAP_LAYERS.map((what) => ({
         value: `item:${what}`,
         label: LAYER_WORDS[what],
@@ -109,14 +110,17 @@ function makeApproach(
 ): Made {
   const tied = tieDrawn(club, things, line, TIE_M);
   const stand = tied.standId ?? standId ?? things.find((thing) => thing.kind === 'stand')?.id;
-  if (!stand) return { ok: false, message: 'An approach leads to a stand: draw the stand first.' };
+  if (!stand) return { ok: false, message: NEW_THING_WORDS.approachNeedsStand };
   const parking = things.find((thing) => thing.id === tied.parkingId);
   return {
     ok: true,
     thing: {
       ...base,
       kind: 'approach',
-      name: freshName(things, parking ? `From ${parking.name.slice(0, 40)}` : 'Approach').replace(/ 1$/, ''),
+      name: freshName(
+        things,
+        parking ? NEW_THING_WORDS.fromParking(parking.name.slice(0, 40)) : NEW_THING_WORDS.approach,
+      ).replace(/ 1$/, ''),
       geometry: { type: 'LineString', coordinates: tied.line },
       standId: stand,
       parkingId: tied.parkingId,
@@ -141,7 +145,7 @@ export function makeThing(
         thing: {
           ...base,
           kind: 'stand',
-          name: freshName(things, 'Stand'),
+          name: freshName(things, NEW_THING_WORDS.stand),
           geometry,
           what: kind.what,
           arcs: [],
@@ -149,11 +153,14 @@ export function makeThing(
         },
       };
     case 'parking':
-      return { ok: true, thing: { ...base, kind: 'parking', name: freshName(things, 'Parking'), geometry } };
+      return {
+        ok: true,
+        thing: { ...base, kind: 'parking', name: freshName(things, NEW_THING_WORDS.parkingName), geometry },
+      };
     case 'approach':
       return geometry.type === 'LineString'
         ? makeApproach(base, geometry.coordinates, things, club, at.standId)
-        : { ok: false, message: 'An approach is a line.' };
+        : { ok: false, message: NEW_THING_WORDS.approachIsLine };
     case 'feature': {
       const name = freshName(things, FEATURE_KIND_WORDS[kind.what]);
       return {

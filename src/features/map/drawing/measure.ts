@@ -4,6 +4,7 @@ import { bearingDeg, distanceM, type LatLon, lengthM, toLocal } from '@/core/geo
 import { sectorName } from '@/core/sectors';
 import type { Point } from '@/core/types';
 import { formatArea, formatDistance, m2ToAcre, mToYd, type Units } from '@/core/units';
+import { MEASURED_WORDS } from '../words/drawing';
 
 export function localOf(centre: LatLon, [lon = 0, lat = 0]: Position): Point {
   return toLocal(centre, { lat, lon });
@@ -59,8 +60,9 @@ export function sizeText(centre: LatLon, geometry: Geometry, units: Units): stri
   const { lengthM: length, areaM2 } = sizeOf(centre, geometry);
   if (areaM2 === null) return length > 0 ? formatDistance(length, units) : '';
   const small = units === 'us' ? m2ToAcre(areaM2) < 0.1 : areaM2 < 1000;
-  const tiny = units === 'us' ? `${Math.round(areaM2 / 0.9144 ** 2)} sq yd` : `${Math.round(areaM2)} m²`;
-  return `${small ? tiny : formatArea(areaM2, units)}, ${formatDistance(length, units)} round`;
+  const tiny =
+    units === 'us' ? MEASURED_WORDS.squareYards(Math.round(areaM2 / 0.9144 ** 2)) : `${Math.round(areaM2)} m²`;
+  return MEASURED_WORDS.area(small ? tiny : formatArea(areaM2, units), formatDistance(length, units));
 }
 
 export interface Leg {
@@ -84,13 +86,16 @@ export function legBetween(centre: LatLon, from: Position, to: Position, declina
 /** '240 yd toward NW, 314° true, 325° by compass'. */
 export function legText(leg: Leg, units: Units): string {
   const whole = (deg: number) => `${Math.round(deg) % 360}°`;
-  const compass = leg.magneticDeg === null ? '' : `, ${whole(leg.magneticDeg)} by compass`;
+  const compass = leg.magneticDeg === null ? null : whole(leg.magneticDeg);
   const far =
-    units === 'us' ? `${Math.round(mToYd(leg.metres)).toLocaleString('en-US')} yd` : formatDistance(leg.metres, units);
-  return `${far} toward ${sectorName(leg.trueDeg)}, ${whole(leg.trueDeg)} true${compass}`;
+    units === 'us'
+      ? MEASURED_WORDS.yards(Math.round(mToYd(leg.metres)).toLocaleString('en-US'))
+      : formatDistance(leg.metres, units);
+  return MEASURED_WORDS.leg(far, sectorName(leg.trueDeg), whole(leg.trueDeg), compass);
 }
 
-/** '11.2° west of true north'. */
-export function declinationText(deg: number): string {
-  return `${Math.abs(deg).toFixed(1)}° ${deg < 0 ? 'west' : 'east'} of true north`;
+/** '11.2° west': of true north. */
+export function declinationSide(deg: number): string {
+  const size = `${Math.abs(deg).toFixed(1)}°`;
+  return deg < 0 ? MEASURED_WORDS.west(size) : MEASURED_WORDS.east(size);
 }

@@ -1,10 +1,11 @@
 import type { DrawingChange, DrawingConflict } from '../drawing-schema';
 import type { MapThing } from '../thing';
+import { SETTLE_WORDS } from '../words/drawing';
 
 /** both: what is stored stays, and what was drawn is added beside it under another name. */
 export type ConflictChoice = 'both' | 'theirs' | 'mine';
 
-const MARK = ' (drawn beside)';
+const MARK = SETTLE_WORDS.beside;
 
 function freeName(name: string, taken: ReadonlySet<string>): string {
   for (let n = 1; ; n++) {

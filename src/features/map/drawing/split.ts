@@ -4,6 +4,7 @@ import { intersect } from '@turf/intersect';
 import type { LineString, MultiPolygon, Polygon, Position } from 'geojson';
 import { distanceM, fromLocal, type LatLon, nearestOnSegment } from '@/core/geometry';
 import type { Point } from '@/core/types';
+import { SPLIT_WORDS } from '../words/drawing';
 import { localOf, ringAreaM2 } from './measure';
 
 /** Pieces smaller than this are slips of the hand, m2. */
@@ -23,7 +24,7 @@ export function splitLine(centre: LatLon, line: LineString, at: Position): Split
   }
   const [first, last] = [points[0], points.at(-1)];
   if (!best || !first || !last || distanceM(best.p, first) < 0.5 || distanceM(best.p, last) < 0.5) {
-    return { ok: false, message: 'Choose a spot between the ends of the line.' };
+    return { ok: false, message: SPLIT_WORDS.spot };
   }
   const { lat, lon } = fromLocal(centre, best.p);
   const cut: Position = [lon, lat];
@@ -80,11 +81,11 @@ export function splitArea(centre: LatLon, area: Polygon, cut: readonly Position[
   const about = [...(area.coordinates[0] ?? []), ...cut].map((p) => localOf(centre, p));
   const reachM = 2 * Math.max(100, ...about.map((p) => Math.hypot(p.eastM, p.northM)));
   const side = sideOf(centre, cut, reachM);
-  if (!side) return { ok: false, message: 'Draw the cut as a line of two points or more.' };
+  if (!side) return { ok: false, message: SPLIT_WORDS.cutPoints };
   const [whole, half] = [polygon(area.coordinates), polygon([side])];
   const parts = [intersect(featureCollection([whole, half])), difference(featureCollection([whole, half]))]
     .flatMap((feature) => partsOf(feature?.geometry))
     .filter((part) => ringAreaM2(centre, part.coordinates[0] ?? []) > LEAST_PIECE_M2);
-  if (parts.length < 2) return { ok: false, message: 'The cut must run across the area, from one side to another.' };
+  if (parts.length < 2) return { ok: false, message: SPLIT_WORDS.across };
   return { ok: true, parts };
 }

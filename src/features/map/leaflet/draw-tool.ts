@@ -11,6 +11,7 @@ import {
 import { TerraDrawLeafletAdapter } from 'terra-draw-leaflet-adapter';
 import type { DrawnShape } from '@/core/map-layers';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
+import { DRAW_TOOL_WORDS } from '../words/drawing';
 import type { Inks } from './paint-style';
 
 const MODES = { point: 'point', line: 'linestring', area: 'polygon' } as const satisfies Record<DrawnShape, string>;
@@ -158,7 +159,7 @@ export function makeDrawTool(map: L.Map, inks: Inks, events: DrawEvents) {
       const [added] = draw.addFeatures([
         { id, type: 'Feature', geometry: forTool(geometry), properties: { mode: MODE_OF[geometry.type] } },
       ]);
-      if (!added?.valid) return added?.reason ?? 'It cannot be reshaped by hand: type its places.';
+      if (!added?.valid) return added?.reason ?? DRAW_TOOL_WORDS.notByHand;
       draw.setMode('select');
       draw.selectFeature(id);
       events.onProgress(geometry);

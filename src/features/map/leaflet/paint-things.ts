@@ -6,6 +6,7 @@ import { formatWinds } from '@/features/ground/view';
 import { bracketPath } from '../drawing/bracket';
 import type { ItemThing, MapThing, StandThing } from '../thing';
 import { nameOf, whatOf } from '../words';
+import { FACT_WORDS } from '../words/facts';
 import { signOf } from './glyphs';
 import { latLng } from './make-map';
 import { canvasStyle, classOf, type Inks, paneOf } from './paint-style';
@@ -25,7 +26,8 @@ function bracketsOf(stand: StandThing): string {
 
 /** What a screen reader says of a mark. */
 export function markText(thing: MapThing): string {
-  const winds = thing.kind === 'stand' && thing.arcs.length > 0 ? `, good winds ${formatWinds(thing.arcs)}` : '';
+  const winds =
+    thing.kind === 'stand' && thing.arcs.length > 0 ? `, ${FACT_WORDS.goodWinds(formatWinds(thing.arcs))}` : '';
   return `${nameOf(thing)}${thing.name ? `, ${whatOf(thing).toLowerCase()}` : ''}${winds}`;
 }
 
@@ -179,7 +181,7 @@ export function paintThings(map: L.Map, centre: LatLon, events: PainterEvents, l
             thing,
             dense,
             group: draw(thing, dense, state.inks),
-            dress: `false false ${dense ? state.inks.ink : ''}`,
+            dress: ['false', 'false', dense ? state.inks.ink : ''].join(' '),
           });
       }
       for (const one of painted.values())

@@ -1,0 +1,18 @@
+export const MAP_ERRORS = {
+  standNeedsName: 'Give each stand a name before you save.',
+  parkingNeedsName: 'Give each parking place a name before you save.',
+  featureNeedsName: 'Give each feature a name before you save.',
+  approachNeedsName: 'Give each approach a name before you save.',
+  long: (most: number) => `Keep it to ${most} characters.`,
+  nothing: 'There is nothing to save.',
+  mostChanges: (most: number) => `Save at most ${most} changes at once.`,
+  somebody: 'Somebody',
+  notAllowed: (club: string) => `Your role in ${club} does not allow all of these changes.`,
+  changedTwice: 'One thing is changed twice: undo the last change and save again.',
+  leadsNowhere: (approach: string) => `${approach} leads to no stand: choose the stand it ends at.`,
+  parkingGone: (approach: string) => `${approach}: its parking place is gone. Choose another.`,
+  nameLong: (start: string, most: number) => `Keep the name "${start}…" to ${most} characters.`,
+  drawnNowhere: (name: string) => `${name} is drawn nowhere: draw it or remove it.`,
+  fewCorners: (name: string) => `${name}: an area needs three corners or more.`,
+  wrongShape: (name: string, shape: string) => `${name}: this kind is drawn as ${shape}.`,
+} as const;
