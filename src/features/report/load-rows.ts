@@ -1,5 +1,6 @@
 import { huntingYear } from '@/core/booking/hunting-year';
 import { dayOf } from '@/core/day-time';
+import { can } from '@/core/permissions';
 import { isOwnSit } from '@/features/logs/log-access';
 import { type LoggableSit, listEnded } from '@/features/logs/logs-data';
 import { maySeeSightings } from '@/features/logs/see-sightings';
@@ -31,7 +32,7 @@ export interface ReportRows {
   /** In use, or sat in the period, by name. */
   stands: ReportStand[];
   names: Map<string, string>;
-  /** Members of the club now who are neither guest nor landowner. */
+  /** Members of the club now on whose count sits, deer and work go: neither guests nor landowners. */
   hunters: string[];
   /** The last day each stand was sat before the period. */
   before: Map<string, string>;
@@ -71,9 +72,7 @@ export async function loadRows(scope: ClubScope, ask: ReportAsk, now: number): P
     sits,
     stands: stands.filter(({ id, removedAt }) => removedAt === null || sat.has(id)),
     names: new Map(people.map(({ id, name }) => [id, name])),
-    hunters: people
-      .filter(({ role, removedAt }) => removedAt === null && role !== 'guest' && role !== 'landowner')
-      .map(({ id }) => id),
+    hunters: people.filter(({ role, removedAt }) => removedAt === null && can(role, 'log.write')).map(({ id }) => id),
     before,
   };
 }
