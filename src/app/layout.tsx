@@ -5,6 +5,7 @@ import type { ReactNode } from 'react';
 import { LIGHT_COOKIE, lightPaper, parseLight, SUN_COOKIE, shownLight } from '@/ui/light';
 import { ToastProvider } from '@/ui/toast';
 import './globals.css';
+import { SITE_WORDS } from '@/features/accounts/words/public';
 
 const literata = localFont({
   src: '../../node_modules/@fontsource-variable/literata/files/literata-latin-wght-normal.woff2',
@@ -22,7 +23,7 @@ const sourceSans = localFont({
 
 export const metadata: Metadata = {
   title: { default: 'Windrest', template: '%s · Windrest' },
-  description: 'Where to sit without the deer ever knowing, and who else is in the woods.',
+  description: SITE_WORDS.description,
   robots: { index: false, follow: false },
 };
 

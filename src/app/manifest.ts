@@ -1,4 +1,5 @@
 import type { MetadataRoute } from 'next';
+import { SITE_WORDS } from '@/features/accounts/words/public';
 
 /** The paper of daylight, as in globals.css: an installed program opens before any choice of light is known. */
 const PAPER = '#f4efe3';
@@ -9,7 +10,7 @@ export default function manifest(): MetadataRoute.Manifest {
     id: '/',
     name: 'Windrest',
     short_name: 'Windrest',
-    description: 'Where to sit without the deer ever knowing, and who else is in the woods.',
+    description: SITE_WORDS.description,
     start_url: '/',
     scope: '/',
     display: 'standalone',

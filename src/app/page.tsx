@@ -1,6 +1,7 @@
 import { redirect } from 'next/navigation';
 import { env } from '@/env';
 import { listMyClubs } from '@/features/accounts/reads';
+import { HOME_WORDS } from '@/features/accounts/words/public';
 import { TryDemoButton } from '@/features/demo/components/try-demo-button';
 import { now } from '@/server/clock';
 import { publicPage } from '@/server/doors';
@@ -16,34 +17,22 @@ export default publicPage(async ({ user }) => {
   }
   return (
     <PlainFrame width="page">
-      <PageTitle
-        title="Sit where the deer never know"
-        lead="Windrest is for deer-hunting clubs, leases and family land. Each day it tells each member where a sit alerts no deer, and who else is in the woods."
-      />
+      <PageTitle title={HOME_WORDS.heading} lead={HOME_WORDS.lead} />
       <div className="flex flex-wrap gap-3">
         <ButtonLink href="/sign-up" look="primary">
-          Make an account
+          {HOME_WORDS.signUp}
         </ButtonLink>
-        <ButtonLink href="/sign-in">Sign in</ButtonLink>
+        <ButtonLink href="/sign-in">{HOME_WORDS.signIn}</ButtonLink>
         {env.demoSignIn && <TryDemoButton action={demoSignInAction} />}
       </div>
-      <Section title="A quiet stand first" heading="margin" className="mt-10">
-        <p className="max-w-prose">
-          Every stand of the club is ranked for the morning or the evening by the wind through the whole sit, the way in
-          and out, the sun, and how lately people were near. The list says why, and when to leave the gate.
-        </p>
+      <Section title={HOME_WORDS.quiet} heading="margin" className="mt-10">
+        <p className="max-w-prose">{HOME_WORDS.quietText}</p>
       </Section>
-      <Section title="One stand, one hunter" heading="margin">
-        <p className="max-w-prose">
-          A booked sit is taken for everyone. The club’s own rules on rest days, guests, distance and seasons hold the
-          same for all, and a refusal names its rule.
-        </p>
+      <Section title={HOME_WORDS.booked} heading="margin">
+        <p className="max-w-prose">{HOME_WORDS.bookedText}</p>
       </Section>
-      <Section title="Everyone home" heading="margin">
-        <p className="max-w-prose">
-          The board shows who is booked and where. Windrest is no rescue service: tell someone where you go and when you
-          will be back.
-        </p>
+      <Section title={HOME_WORDS.home} heading="margin">
+        <p className="max-w-prose">{HOME_WORDS.homeText}</p>
       </Section>
     </PlainFrame>
   );

@@ -4,7 +4,6 @@ import './map.css';
 import type { Geometry, Position } from 'geojson';
 import type { LatLon } from '@/core/geometry';
 import type { MapThing } from '../thing';
-import { MAKE_MAP_WORDS } from '../words/drawing';
 import { PANES } from './paint-style';
 
 export function latLng([lon = 0, lat = 0]: Position): L.LatLng {
@@ -26,7 +25,7 @@ export function makeMap(container: HTMLElement, centre: LatLon, compact: boolean
     attributionControl: false,
     // A page with a map in it must scroll past the map.
     scrollWheelZoom: !compact,
-    zoomAnimation: !window.matchMedia(MAKE_MAP_WORDS.prefersReducedMotion).matches,
+    zoomAnimation: !window.matchMedia('(prefers-reduced-motion: reduce)').matches,
   });
   // From afar the marks shrink and only the chosen stand keeps its brackets.
   const far = () => container.classList.toggle('m-far', map.getZoom() < CLOSE_ZOOM);

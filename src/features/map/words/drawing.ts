@@ -13,10 +13,6 @@ export const DRAW_TOOL_WORDS = {
   notByHand: 'It cannot be reshaped by hand: type its places.',
 } as const;
 
-export const MAKE_MAP_WORDS = {
-  prefersReducedMotion: '(prefers-reduced-motion: reduce)',
-} as const;
-
 export const NEW_THING_WORDS = {
   stand: 'Stand',
   parking: 'Parking place',
