@@ -1,22 +1,19 @@
 import { addDays, dayOf, daysBetween, formatClock, formatDay } from '../day-time';
 import type { Gate, SitWindow } from '../types';
+import { GATE_WORDS } from '../words/gates';
 import type { ClaimAhead } from './rules';
 
 const HOUR_MS = 3_600_000;
-
-function counted(n: number, one: string): string {
-  return `${n} ${one}${n === 1 ? '' : 's'}`;
-}
 
 /** A window that has ended cannot be booked; one that has begun only where the club has walk-up sits. */
 export function windowOverGates(spans: readonly SitWindow[], now: number, walkUpSits: boolean, zone: string): Gate[] {
   return spans.flatMap((span): Gate[] => {
     if (span.endAt <= now) {
-      const text = `The ${span.window} of ${formatDay(span.day)} ended at ${formatClock(span.endAt, zone)}.`;
+      const text = GATE_WORDS.windowOver(span.window, formatDay(span.day), formatClock(span.endAt, zone));
       return [{ code: 'window_over', text, endsOn: null }];
     }
     if (span.startAt <= now && !walkUpSits) {
-      const text = `The ${span.window} of ${formatDay(span.day)} began at ${formatClock(span.startAt, zone)}, and the club has no walk-up sits.`;
+      const text = GATE_WORDS.noWalkUp(span.window, formatDay(span.day), formatClock(span.startAt, zone));
       return [{ code: 'window_over', text, endsOn: null }];
     }
     return [];
@@ -35,15 +32,20 @@ export function claimAheadGates(input: {
   if (rule.kind === 'days') {
     if (daysBetween(dayOf(now, zone), day) <= rule.days) return [];
     const opensOn = addDays(day, -rule.days);
-    const text = `Claims are taken ${counted(rule.days, 'day')} ahead: ${formatDay(day)} opens on ${formatDay(opensOn)}.`;
+    const text = GATE_WORDS.daysAhead(rule.days, formatDay(day), formatDay(opensOn));
     return [{ code: 'too_far_ahead', text, endsOn: opensOn }];
   }
   return spans
     .filter((span) => span.startAt - now > rule.hours * HOUR_MS)
     .map((span): Gate => {
       const opensAt = span.startAt - rule.hours * HOUR_MS;
-      const opens = `${formatDay(dayOf(opensAt, zone))} at ${formatClock(opensAt, zone)}`;
-      const text = `Claims are taken only at the time of the hunt, ${counted(rule.hours, 'hour')} ahead: the ${span.window} of ${formatDay(span.day)} opens on ${opens}.`;
+      const text = GATE_WORDS.huntTime({
+        hours: rule.hours,
+        window: span.window,
+        day: formatDay(span.day),
+        opensDay: formatDay(dayOf(opensAt, zone)),
+        opensAt: formatClock(opensAt, zone),
+      });
       return { code: 'too_far_ahead', text, endsOn: new Date(opensAt).toISOString() };
     });
 }

@@ -1,5 +1,6 @@
 import { addDays, formatDay } from '../day-time';
 import type { Gate } from '../types';
+import { GATE_WORDS } from '../words/gates';
 import type { BookingMember, BookingStand, OtherSit } from './booking-types';
 import { huntingYear } from './hunting-year';
 import type { ClubRules } from './rules';
@@ -24,11 +25,7 @@ export function liveClaimGates(input: {
     .sort((a, b) => a.endAt - b.endAt || a.sitId.localeCompare(b.sitId));
   if (live.length < most) return [];
   const held = live.map((sit) => `${sit.standName} (${formatDay(sit.day)})`).join(', ');
-  const claims = `${most} ${most === 1 ? 'claim' : 'claims'}`;
-  const text =
-    live.length === 0
-      ? `The club allows ${claims} at a time.`
-      : `A member may hold ${claims} at a time, and ${input.member.name} holds ${held}.`;
+  const text = live.length === 0 ? GATE_WORDS.clubClaims(most) : GATE_WORDS.memberClaims(most, input.member.name, held);
   // The claim whose end brings the count under the most.
   const frees = live[live.length - most];
   return [{ code: 'claim_limit', text, endsOn: frees ? new Date(frees.endAt).toISOString() : null }];
@@ -46,12 +43,12 @@ export function seasonLimitGates(input: {
   const endsOn = addDays(huntingYear(input.day).toDay, 1);
   const { mostSitsSeason } = input.stand;
   if (mostSitsSeason !== null && input.counts.stand >= mostSitsSeason) {
-    const text = `${input.stand.name} has had its ${input.counts.stand} sits this season; the most is ${mostSitsSeason}.`;
+    const text = GATE_WORDS.standSeason(input.stand.name, input.counts.stand, mostSitsSeason);
     gates.push({ code: 'season_limit', text, endsOn });
   }
   const most = input.rules.mostSitsPerMemberSeason;
   if (most !== null && input.counts.member >= most) {
-    const text = `${input.member.name} has ${input.counts.member} sits this season; the most for a member is ${most}.`;
+    const text = GATE_WORDS.memberSeason(input.member.name, input.counts.member, most);
     gates.push({ code: 'season_limit', text, endsOn });
   }
   return gates;

@@ -1,5 +1,6 @@
 import { formatDay } from '../day-time';
 import type { Gate, WindowName } from '../types';
+import { GATE_WORDS } from '../words/gates';
 import type { BookingMember, BookingStand, OtherSit } from './booking-types';
 
 function shared(a: readonly WindowName[], b: readonly WindowName[]): WindowName[] {
@@ -12,10 +13,6 @@ interface Claim {
   sits: readonly OtherSit[];
 }
 
-function when(day: string, windows: readonly WindowName[]): string {
-  return `on ${formatDay(day)}, ${windows.join(' and ')}`;
-}
-
 /** The stand is already claimed in one of the windows. */
 export function takenGates(stand: Pick<BookingStand, 'id' | 'name'>, claim: Claim): Gate[] {
   return claim.sits
@@ -23,7 +20,7 @@ export function takenGates(stand: Pick<BookingStand, 'id' | 'name'>, claim: Clai
     .flatMap((sit): Gate[] => {
       const windows = shared(sit.windows, claim.windows);
       if (windows.length === 0) return [];
-      const text = `${stand.name} is taken ${when(claim.day, windows)}: ${sit.memberName} has it.`;
+      const text = GATE_WORDS.taken(stand.name, formatDay(claim.day), windows, sit.memberName);
       return [{ code: 'taken', text, endsOn: null }];
     });
 }
@@ -39,7 +36,7 @@ export function memberBusyGates(
     .flatMap((sit): Gate[] => {
       const windows = shared(sit.windows, claim.windows);
       if (windows.length === 0) return [];
-      const text = `${member.name} already has ${sit.standName} ${when(claim.day, windows)}. One stand a member in each window.`;
+      const text = GATE_WORDS.memberBusy(member.name, sit.standName, formatDay(claim.day), windows);
       return [{ code: 'member_busy', text, endsOn: null }];
     });
 }

@@ -1,5 +1,6 @@
 import { addDays, formatDay } from '../day-time';
 import type { Gate } from '../types';
+import { GATE_WORDS } from '../words/gates';
 import type { BookingStand } from './booking-types';
 import type { ClosedDays } from './rules';
 
@@ -27,9 +28,8 @@ function closedGates(code: 'closed' | 'closed_day', what: string, spans: readonl
   const span = spans.find((s) => covers(s, day));
   if (!span) return [];
   const endsOn = openAgainOn(spans, day);
-  const until = endsOn === null ? 'until further notice' : `until ${formatDay(addDays(endsOn, -1))}`;
-  const reason = span.reason.trim();
-  return [{ code, text: `${what} is closed ${until}${reason === '' ? '.' : `: ${reason}.`}`, endsOn }];
+  const until = endsOn === null ? null : formatDay(addDays(endsOn, -1));
+  return [{ code, text: GATE_WORDS.closed(what, until, span.reason.trim()), endsOn }];
 }
 
 /** Closures of the stand that cover the day. */
@@ -39,5 +39,5 @@ export function standClosureGates(stand: Pick<BookingStand, 'name' | 'closures'>
 
 /** Days on which the whole ground is closed. */
 export function closedDayGates(closedDays: readonly ClosedDays[], day: string): Gate[] {
-  return closedGates('closed_day', 'The ground', closedDays, day);
+  return closedGates('closed_day', GATE_WORDS.ground, closedDays, day);
 }

@@ -1,5 +1,6 @@
 import { addDays } from '../day-time';
 import type { Gate, WindowName } from '../types';
+import { GATE_WORDS } from '../words/gates';
 import type { BookingMember, GuestHunt } from './booking-types';
 import type { ClubRules } from './rules';
 
@@ -41,14 +42,14 @@ export function guestGates(input: {
   const { rules, member, hunt, others } = input;
   if (hunt.guests <= 0) return [];
   if (hunt.guests > rules.guestsAtOnce) {
-    const most = rules.guestsAtOnce === 0 ? 'no guests' : `at most ${rules.guestsAtOnce} at once`;
-    return [{ code: 'guest_days', text: `The club allows ${most}; ${hunt.guests} were named.`, endsOn: null }];
+    const text = GATE_WORDS.guestsAtOnce(rules.guestsAtOnce, hunt.guests);
+    return [{ code: 'guest_days', text, endsOn: null }];
   }
   const most = rules.guestDaysPerSeason;
   if (most === null) return [];
   const used = countGuestDays(others);
   const added = countGuestDays([...others, hunt]) - used;
   if (added <= 0 || used + added <= most) return [];
-  const text = `${member.name} has used ${used} of ${most} guest days this season; this needs ${added} more.`;
+  const text = GATE_WORDS.guestDays(member.name, used, most, added);
   return [{ code: 'guest_days', text, endsOn: null }];
 }

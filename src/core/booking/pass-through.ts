@@ -1,6 +1,7 @@
 import { distanceToShapeM } from '../geometry';
 import type { Gate, Point, WindowName } from '../types';
 import { formatExactDistance, type Units } from '../units';
+import { GATE_WORDS } from '../words/gates';
 import type { BookingStand, OtherSit } from './booking-types';
 import { sitsBeside } from './spacing';
 
@@ -42,6 +43,6 @@ export function passThroughGates(input: {
   );
   const least = formatExactDistance(passThroughM, input.units);
   const names = holders.map((sit) => `${sit.standName} (${sit.memberName})`).join(', ');
-  const text = `Every way in to ${stand.name} passes within ${least} of an occupied stand: ${names}. The club allows no walking through that close.`;
+  const text = GATE_WORDS.passThrough(stand.name, least, names);
   return [{ code: 'pass_through', text, endsOn: null }];
 }

@@ -1,5 +1,6 @@
 import { addDays, daysBetween, formatDay } from '../day-time';
 import type { Gate } from '../types';
+import { GATE_WORDS } from '../words/gates';
 import type { OtherSit } from './booking-types';
 
 /**
@@ -41,17 +42,28 @@ export function restGates(input: {
     .sort((a, b) => a.day.localeCompare(b.day) || a.memberName.localeCompare(b.memberName));
   if (clashing.length === 0) return [];
   const endsOn = firstRestedDay({ restDays, sitDays: sits.map((sit) => sit.day), day });
-  const rule = `${restDays} full ${restDays === 1 ? 'day' : 'days'} of rest`;
   const gates: Gate[] = [];
   const earlier = clashing.filter((sit) => sit.day < day).at(-1);
   if (earlier) {
     const through = formatDay(addDays(earlier.day, restDays));
-    const text = `${standName} is resting: ${earlier.memberName} sat there on ${formatDay(earlier.day)}. The rule is ${rule}, so it rests through ${through}.`;
+    const text = GATE_WORDS.resting({
+      stand: standName,
+      member: earlier.memberName,
+      day: formatDay(earlier.day),
+      restDays,
+      through,
+    });
     gates.push({ code: 'resting', text, endsOn });
   }
   const later = clashing.find((sit) => sit.day > day);
   if (later) {
-    const text = `${standName} is booked by ${later.memberName} on ${formatDay(later.day)}. The rule is ${rule}, and a sit on ${formatDay(day)} would break it.`;
+    const text = GATE_WORDS.breaksRest({
+      stand: standName,
+      member: later.memberName,
+      day: formatDay(later.day),
+      restDays,
+      asked: formatDay(day),
+    });
     gates.push({ code: 'breaks_later_rest', text, endsOn });
   }
   return gates;

@@ -1,14 +1,8 @@
 import { formatDay } from '../day-time';
 import type { Gate, Weapon } from '../types';
+import { GATE_WORDS } from '../words/gates';
+import { WEAPON_WORDS } from '../words/weapons';
 import type { ClubRules, LegalLightRule, Season } from './rules';
-
-const WEAPON_WORDS: Record<Weapon, string> = {
-  bow: 'bow',
-  crossbow: 'crossbow',
-  muzzleloader: 'muzzleloader',
-  shotgun: 'shotgun',
-  rifle: 'rifle',
-};
 
 /** A weapon in plain words. */
 export function weaponWord(weapon: Weapon): string {
@@ -34,22 +28,21 @@ export function seasonGates(rules: Pick<ClubRules, 'seasons'>, day: string, weap
   const { seasons } = rules;
   if (seasons.length === 0 || openSeasons(seasons, day, weapon).length > 0) return [];
   const next = nextOpenDay(seasons, day, weapon);
-  const opens = next === null ? 'No later season is set.' : `The next opens on ${formatDay(next, true)}.`;
+  const opens = next === null ? GATE_WORDS.noLaterSeason : GATE_WORDS.nextSeason(formatDay(next, true));
   const open = openSeasons(seasons, day, null)
     .map((s) => s.name)
     .join(', ');
   const what =
     weapon !== null && open !== ''
-      ? `${formatDay(day)} is in ${open}, which does not take the ${weaponWord(weapon)}.`
-      : `${formatDay(day)} is out of season${weapon === null ? '' : ` for the ${weaponWord(weapon)}`} by the club's dates.`;
+      ? GATE_WORDS.otherWeapon(formatDay(day), open, weaponWord(weapon))
+      : GATE_WORDS.outOfSeason(formatDay(day), weapon === null ? null : weaponWord(weapon));
   return [{ code: 'out_of_season', text: `${what} ${opens}`, endsOn: next }];
 }
 
 /** Weapons the stand is set up for. */
 export function weaponGates(stand: { name: string; weapons: readonly Weapon[] }, weapon: Weapon | null): Gate[] {
   if (weapon === null || stand.weapons.includes(weapon)) return [];
-  const allowed = stand.weapons.length === 0 ? 'none' : stand.weapons.map(weaponWord).join(', ');
-  const text = `${stand.name} is not for the ${weaponWord(weapon)}: weapons allowed there are ${allowed}.`;
+  const text = GATE_WORDS.standWeapon(stand.name, weaponWord(weapon), stand.weapons.map(weaponWord));
   return [{ code: 'weapon', text, endsOn: null }];
 }
 

@@ -1,6 +1,7 @@
 import { distanceM } from '../geometry';
 import type { Gate, Weapon, WindowName } from '../types';
 import { formatExactDistance, type Units } from '../units';
+import { GATE_WORDS } from '../words/gates';
 import type { BookingStand, OtherSit } from './booking-types';
 import { type ClubRules, spacingBetweenM } from './rules';
 
@@ -32,7 +33,13 @@ export function spacingGates(input: {
     const least = spacingBetweenM(rules, input.weapon, sit.weapon);
     const apart = distanceM(stand.at, sit.standAt);
     if (apart >= least - SAME_M) return [];
-    const text = `${stand.name} is ${formatExactDistance(apart, units)} from ${sit.standName}, where ${sit.memberName} sits. The least distance between occupied stands is ${formatExactDistance(least, units)}.`;
+    const text = GATE_WORDS.spacing({
+      stand: stand.name,
+      apart: formatExactDistance(apart, units),
+      other: sit.standName,
+      member: sit.memberName,
+      least: formatExactDistance(least, units),
+    });
     return [{ code: 'spacing', text, endsOn: null }];
   });
 }
