@@ -42,13 +42,13 @@ export const COVERAGE_WORDS = {
   noneUncovered: 'none',
   byStand: 'By stand',
   byStandNote:
-    'Hours with the wind in a good arc of the stand in a window it is hunted in. Alone: hours no other stand covers.',
+    'Hours with the wind in a good arc of the stand in a window it is hunted in, and their share of all wind. Alone: hours no other stand covers.',
   byStandCaption: 'Hours covered by each stand',
   stand: 'Stand',
-  mornings: 'Mornings, h',
-  evenings: 'Evenings, h',
-  ofAll: 'Of all wind',
-  alone: 'Alone, h',
+  mornings: 'Mornings',
+  evenings: 'Evenings',
+  ofAll: 'Of all',
+  alone: 'Alone',
 } as const;
 
 export const BARS_WORDS = {

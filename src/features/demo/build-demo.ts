@@ -44,6 +44,7 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
   const harvests = buildHarvests(taken, club, sitLogs, sits);
   const sitLogVersions = buildLogVersions(taken, sitLogs, sits);
   const { parkings, stands, approaches, features } = ground;
+  const upkeep = buildUpkeep({ today, dice: makeDice(`upkeep ${today}`) }, club, ground, closures);
   const mapItems = buildLand({ today, dice: makeDice(`land ${today}`) }, club);
   return {
     users,
@@ -63,14 +64,14 @@ export function buildDemo(now: number, passwordHash: string): DemoRows {
     sitLogVersions,
     harvests,
     visits: buildVisits(day, club, ground),
-    ...buildUpkeep({ today, dice: makeDice(`upkeep ${today}`) }, club, ground, closures),
+    ...upkeep,
     ...buildDraws({ today, dice: makeDice(`draws ${today}`) }, club, ground),
     auditLog: [
       ...buildAudit(day, club, { ground, closures, sits }),
       ...buildAudit(day, second, { ground: { ...ground, stands: second.stands }, closures: [], sits: [] }),
     ],
     mapItems,
-    setupAnswers: buildSetupAnswers(day, club, ground, mapItems),
+    setupAnswers: buildSetupAnswers(day, club, ground, { mapItems, chores: upkeep.chores }),
     imports: buildImports({ today, dice: makeDice(`imports ${today}`) }, club),
   };
 }

@@ -63,11 +63,15 @@ interface DemoChore {
   hours?: number;
 }
 
+/** Made of a finding of the set-up check. */
+export const SADDLE_CAMERA_CHORE = 'Turn the saddle camera out of the low sun';
+
 const CHORES: readonly DemoChore[] = [
   { title: 'Oil the blind door and clear the west lane', stand: 'hay', due: 9 },
   { title: 'New guy wires, then a second look', stand: 'cutover', who: 'abel', due: -1 },
   { title: 'Bring the mower back to the barn', who: 'odalys', due: 4, notes: 'The trailer is at the south gate.' },
   { title: 'New strap at the bench stand', stand: 'bench', who: 'ione', due: 16 },
+  { title: SADDLE_CAMERA_CHORE, who: 'hollis', due: 6 },
   { title: 'Paint names on the parking signs' },
   { title: 'Mow the walk to the orchard', who: 'odalys', due: -30, done: -31, hours: 2.5 },
   { title: 'Haul brush from the creek gate', who: 'hollis', due: -20, done: -22, hours: 3 },

@@ -23,7 +23,6 @@ export async function insertDemo(tx: Tx, rows: DemoRows): Promise<void> {
   await insertAll(tx, schema.approaches, rows.approaches);
   await insertAll(tx, schema.features, rows.features);
   await insertAll(tx, schema.mapItems, rows.mapItems);
-  await insertAll(tx, schema.setupAnswers, rows.setupAnswers);
   await insertAll(tx, schema.imports, rows.imports);
   await insertAll(tx, schema.sits, rows.sits);
   await insertAll(tx, schema.claims, rows.claims);
@@ -35,6 +34,7 @@ export async function insertDemo(tx: Tx, rows: DemoRows): Promise<void> {
   await insertAll(tx, schema.harvests, rows.harvests);
   await insertAll(tx, schema.visits, rows.visits);
   await insertAll(tx, schema.chores, rows.chores);
+  await insertAll(tx, schema.setupAnswers, rows.setupAnswers);
   await insertAll(tx, schema.inspections, rows.inspections);
   await insertAll(tx, schema.draws, rows.draws);
   await insertAll(tx, schema.drawEntries, rows.drawEntries);

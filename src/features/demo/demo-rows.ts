@@ -11,7 +11,6 @@ export interface DemoRows {
   approaches: (typeof schema.approaches.$inferInsert)[];
   features: (typeof schema.features.$inferInsert)[];
   mapItems: (typeof schema.mapItems.$inferInsert)[];
-  setupAnswers: (typeof schema.setupAnswers.$inferInsert)[];
   imports: (typeof schema.imports.$inferInsert)[];
   sits: (typeof schema.sits.$inferInsert)[];
   claims: (typeof schema.claims.$inferInsert)[];
@@ -23,6 +22,7 @@ export interface DemoRows {
   harvests: (typeof schema.harvests.$inferInsert)[];
   visits: (typeof schema.visits.$inferInsert)[];
   chores: (typeof schema.chores.$inferInsert)[];
+  setupAnswers: (typeof schema.setupAnswers.$inferInsert)[];
   inspections: (typeof schema.inspections.$inferInsert)[];
   draws: (typeof schema.draws.$inferInsert)[];
   drawEntries: (typeof schema.drawEntries.$inferInsert)[];

@@ -79,7 +79,7 @@ export const HILL_STANDS: readonly DemoStand[] = [
     kind: 'hang_on',
     at: [-200, 46],
     seatHeightFt: 18,
-    facingDeg: 310,
+    facingDeg: 315,
     shotSide: 'left',
     shotRangeM: CLOSE,
     shelter: 'edge',

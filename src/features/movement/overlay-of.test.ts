@@ -2,6 +2,8 @@ import { describe, expect, it } from 'vitest';
 import { type DrawnLine, movementOverlay } from './overlay-of';
 
 const LINE: DrawnLine = {
+  id: 'f',
+  name: 'Long line',
   morning: 1,
   legs: [
     {

@@ -2,7 +2,7 @@ import type { WindowName } from '@/core/types';
 import type { MapOverlay } from '@/features/map/overlay';
 import type { LineView } from './reads';
 
-export type DrawnLine = Pick<LineView, 'morning' | 'legs' | 'gaps'>;
+export type DrawnLine = Pick<LineView, 'id' | 'name' | 'morning' | 'legs' | 'gaps'>;
 
 /** What the lines of movement lay over a map in a window: legs with the deer's way, gaps, and the stands that reach a leg. */
 export function movementOverlay(lines: readonly DrawnLine[], window: WindowName): MapOverlay {

@@ -50,6 +50,8 @@ export const MOVEMENT_MAP_WORDS = {
   failed: 'The map could not be read',
   again: 'Try again',
   label: 'Map of the lines of movement, by the numbers of the legs in the lists',
+  line: 'Lines drawn',
+  allLines: 'All of them',
   choose: 'Deer’s way',
   morning: 'In the morning',
   morningNote: 'First light and after',

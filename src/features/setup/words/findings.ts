@@ -51,7 +51,9 @@ export const SETUP_WORDS = {
   nothingOfKind: 'Nothing of this kind at this stand.',
   noStand: 'Cameras and the rest of the ground',
   group: (count: number, gain: number) =>
-    gain === 0 ? findings(count) : `${findings(count)}, the worst costs ${gain}`,
+    [findings(count), gain > 0 && (count === 1 ? `costs ${gain}` : `the worst costs ${gain}`)]
+      .filter(Boolean)
+      .join(', '),
   answered: 'Answered',
   answeredNote: 'They come back when the ground they rest on changes.',
   changedOn: { before: 'Stands and features are changed on the ', link: 'ground', after: '.' },

@@ -56,7 +56,7 @@ export default clubPage('features.read', async ({ scope, search }) => {
         <TrialStand club={slug} ask={readCoverageAsk(search)} winds={view.winds} />
       </Section>
       <Section title={W.byStand} note={W.byStandNote}>
-        <Table caption={W.byStandCaption} captionHidden>
+        <Table caption={W.byStandCaption} captionHidden stack={false}>
           <THead>
             <Th>{W.stand}</Th>
             <Th align="right">{W.mornings}</Th>
@@ -68,18 +68,10 @@ export default clubPage('features.read', async ({ scope, search }) => {
             {view.stands.map((stand) => (
               <Tr key={stand.id}>
                 <RowHead>{stand.name}</RowHead>
-                <Td label={W.mornings} align="right">
-                  {stand.morning}
-                </Td>
-                <Td label={W.evenings} align="right">
-                  {stand.evening}
-                </Td>
-                <Td label={W.ofAll} align="right">
-                  {shareText(stand.share)}
-                </Td>
-                <Td label={W.alone} align="right">
-                  {stand.alone}
-                </Td>
+                <Td align="right">{stand.morning}</Td>
+                <Td align="right">{stand.evening}</Td>
+                <Td align="right">{shareText(stand.share)}</Td>
+                <Td align="right">{stand.alone}</Td>
               </Tr>
             ))}
           </TBody>

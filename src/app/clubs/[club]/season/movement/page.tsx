@@ -14,7 +14,7 @@ export const metadata = { title: W.title };
 export default clubPage('features.read', async ({ scope }) => {
   const { slug, name } = scope.club;
   const { lines, month } = await readMovement(scope, now());
-  const drawn = lines.map(({ morning, legs, gaps }) => ({ morning, legs, gaps }));
+  const drawn = lines.map(({ id, name: line, morning, legs, gaps }) => ({ id, name: line, morning, legs, gaps }));
   return (
     <>
       <PageTitle over={name} title={W.title} lead={W.lead(MONTH_NAMES[month - 1] ?? '')} />
