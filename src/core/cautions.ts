@@ -1,6 +1,7 @@
 import type { Caution, StandKind } from './types';
 import { cToF, formatSpeed, mphToMps, mpsToMph, type Units } from './units';
 import { windChillF } from './wind-chill';
+import { CAUTION_WORDS } from './words/sit';
 
 const MIN = 60_000;
 const RAISED: ReadonlySet<StandKind> = new Set(['ladder', 'hang_on', 'climber', 'tripod', 'box_blind']);
@@ -39,10 +40,11 @@ function windCaution(input: CautionInput): Caution | null {
   const stop = speed >= mphToMps(30) - 1e-9 || gust >= mphToMps(40) - 1e-9;
   const care = speed >= mphToMps(20) - 1e-9 || gust >= mphToMps(30) - 1e-9;
   if (!care) return null;
-  const text = `wind to ${formatSpeed(speed, input.units)}, gusts to ${formatSpeed(Math.max(gust, speed), input.units)}`;
+  const wind = formatSpeed(speed, input.units);
+  const gusts = formatSpeed(Math.max(gust, speed), input.units);
   return stop
-    ? { code: 'wind_stay_down', level: 'stop', text: `Stay on the ground: ${text}` }
-    : { code: 'wind_raised', level: 'caution', text: `Raised seat: ${text}` };
+    ? { code: 'wind_stay_down', level: 'stop', text: CAUTION_WORDS.stayDown(wind, gusts) }
+    : { code: 'wind_raised', level: 'caution', text: CAUTION_WORDS.raisedSeat(wind, gusts) };
 }
 
 /** From the first thunder to 30 minutes after the last hour with thunder (US National Weather Service). */
@@ -55,7 +57,7 @@ function thunderCaution(input: CautionInput): Caution | null {
   return {
     code: 'thunder',
     level: 'stop',
-    text: `Thunder from ${input.clock(first.at)}: be in a building or hard-topped car until 30 minutes after the last (${until})`,
+    text: CAUTION_WORDS.thunder(input.clock(first.at), until),
   };
 }
 
@@ -70,8 +72,8 @@ function coldCaution(input: CautionInput): Caution | null {
   if (least > 10) return null;
   const felt = input.units === 'us' ? `${Math.round(least)} °F` : `${Math.round(((least - 32) * 5) / 9)} °C`;
   return least <= -18
-    ? { code: 'cold', level: 'caution', text: `Feels like ${felt}: bare skin may freeze within 30 minutes` }
-    : { code: 'cold', level: 'note', text: `Feels like ${felt}` };
+    ? { code: 'cold', level: 'caution', text: CAUTION_WORDS.frostbite(felt) }
+    : { code: 'cold', level: 'note', text: CAUTION_WORDS.cold(felt) };
 }
 
 /** Cautions for a sit, the gravest first; the same for every rank of stand. */
@@ -88,17 +90,17 @@ export function cautionsFor(input: CautionInput): Caution[] {
     found.push({
       code: 'no_forecast',
       level: 'caution',
-      text: 'No forecast: ranked by arcs, rest and the way in only',
+      text: CAUTION_WORDS.noForecast,
     });
   } else if (input.forecastAgeHours > input.staleHours) {
     const hours = Math.round(input.forecastAgeHours);
     found.push({
       code: 'stale_forecast',
       level: 'caution',
-      text: `The forecast is ${hours} h old: check the wind yourself`,
+      text: CAUTION_WORDS.staleForecast(hours),
     });
   }
-  if (raised) found.push({ code: 'harness', level: 'note', text: 'Harness on and tied in from ground to ground' });
+  if (raised) found.push({ code: 'harness', level: 'note', text: CAUTION_WORDS.harness });
   if (input.orangeRule) found.push({ code: 'orange', level: 'note', text: input.orangeRule });
   const order = { stop: 0, caution: 1, note: 2 };
   return found.sort((a, b) => order[a.level] - order[b.level]);

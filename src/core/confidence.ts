@@ -1,5 +1,6 @@
 import type { ScoreSettings } from './score';
 import type { Confidence } from './types';
+import { CONFIDENCE_WORDS } from './words/sit';
 
 const HOUR_MS = 3_600_000;
 
@@ -19,22 +20,24 @@ export interface ForecastTrust {
  */
 export function confidenceFor(trust: ForecastTrust | null, now: number, s: ScoreSettings): Confidence {
   if (trust === null) {
-    return { level: 'none', text: 'No forecast', leadHours: null, spreadDeg: null, forecastAgeHours: null };
+    return { level: 'none', text: CONFIDENCE_WORDS.none, leadHours: null, spreadDeg: null, forecastAgeHours: null };
   }
   const age = Math.max(0, (now - trust.issuedAt) / HOUR_MS);
   const spread = trust.spreadDeg;
   const base = { leadHours: trust.leadHours, spreadDeg: spread, forecastAgeHours: age };
-  if (spread === null) return { level: 'low', text: 'Wind light and variable: direction unknown', ...base };
-  const about = `direction within about ${Math.max(5, Math.round(spread / 5) * 5)}°`;
-  if (trust.missingShare > 0.25) return { level: 'low', text: `Forecast has gaps; ${about}`, ...base };
-  if (age > s.staleHours * 2) return { level: 'low', text: `Forecast is ${Math.round(age)} h old; ${about}`, ...base };
+  if (spread === null) return { level: 'low', text: CONFIDENCE_WORDS.variable, ...base };
+  const within = Math.max(5, Math.round(spread / 5) * 5);
+  if (trust.missingShare > 0.25) return { level: 'low', text: CONFIDENCE_WORDS.gaps(within), ...base };
+  if (age > s.staleHours * 2) return { level: 'low', text: CONFIDENCE_WORDS.old(Math.round(age), within), ...base };
   if (spread <= s.highSpreadDeg && trust.leadHours <= s.highLeadHours && age <= s.staleHours) {
-    return { level: 'high', text: `Steady wind soon; ${about}`, ...base };
+    return { level: 'high', text: CONFIDENCE_WORDS.high(within), ...base };
   }
   if (spread <= s.fairSpreadDeg && trust.leadHours <= s.fairLeadHours) {
-    return { level: 'fair', text: `Forecast ${Math.round(trust.leadHours)} h ahead; ${about}`, ...base };
+    return { level: 'fair', text: CONFIDENCE_WORDS.fair(Math.round(trust.leadHours), within), ...base };
   }
-  const why =
-    spread > s.fairSpreadDeg ? 'Wind may come from almost anywhere' : `${Math.round(trust.leadHours / 24)} days ahead`;
-  return { level: 'low', text: `${why}; ${about}`, ...base };
+  const text =
+    spread > s.fairSpreadDeg
+      ? CONFIDENCE_WORDS.anywhere(within)
+      : CONFIDENCE_WORDS.daysAhead(Math.round(trust.leadHours / 24), within);
+  return { level: 'low', text, ...base };
 }

@@ -9,6 +9,7 @@ import type { SitFrame } from './sit-frame';
 import type { Counterfactual } from './types';
 import type { SitSums } from './verdict';
 import { directionShares } from './wind/histogram';
+import { WHAT_IF_WORDS } from './words/sit';
 
 /** Turns tried from the mean wind: backing is against the clock, veering with it. */
 const TURNS = [-45, 45, -90, 90];
@@ -66,14 +67,17 @@ function whatIfWind(frame: SitFrame, sums: SitSums): Counterfactual[] {
       }
     });
     if (k < 0) continue;
-    const after = k === 0 ? '' : ` after ${frame.clock(seat.set.at[k] as number)}`;
-    const lead = `If the wind ${turn < 0 ? 'backs' : 'veers'} to ${sectorName(to)}${after}`;
+    const turned = {
+      backs: turn < 0,
+      to: sectorName(to),
+      after: k === 0 ? null : frame.clock(seat.set.at[k] as number),
+    };
     const then = scentIf(frame, sums, to, k);
     const reached = then ? features[then.top] : undefined;
     if (then && reached && then.topChance >= 0.08 && then.chance >= asItIs + 0.05) {
-      found.push({ code: 'wind_scent', text: `${lead}, scent reaches ${reached.name}`, weight: likely * then.chance });
+      found.push({ code: 'wind_scent', text: WHAT_IF_WORDS.scent(turned, reached.name), weight: likely * then.chance });
     } else if (arcs.length > 0 && anyArcContains(arcs, mean) && !anyArcContains(arcs, to)) {
-      found.push({ code: 'wind_arc', text: `${lead}, it leaves the good winds of this stand`, weight: likely * 0.1 });
+      found.push({ code: 'wind_arc', text: WHAT_IF_WORDS.leavesArcs(turned), weight: likely * 0.1 });
     }
   }
   const best = found.sort((a, b) => b.weight - a.weight).slice(0, 2);
@@ -92,14 +96,18 @@ function whatIfWay(frame: SitFrame, ways: WeighedWay[]): Counterfactual[] {
     const name = other.tried.way.approach.name;
     found.push({
       code: 'other_way',
-      text: `By ${name} instead: quiet ${whole(other.quiet)}, not ${whole(best.quiet)}`,
+      text: WHAT_IF_WORDS.otherWay(name, whole(other.quiet), whole(best.quiet)),
     });
   }
   const same = ways.find((w) => w.tried.way.approach.id === bestId && w !== best);
   if (same && whole(same.quiet) !== whole(best.quiet)) {
     const at = frame.clock(same.tried.entry.inBy);
-    const promise = `promise ${whole(same.promise)}, not ${whole(best.promise)}`;
-    const text = `In the seat by ${at} instead: quiet ${whole(same.quiet)}, not ${whole(best.quiet)}; ${promise}`;
+    const [quiet, promise] = [whole(same.quiet), whole(same.promise)];
+    const text = WHAT_IF_WORDS.otherTime(
+      at,
+      { quiet, promise },
+      { quiet: whole(best.quiet), promise: whole(best.promise) },
+    );
     found.push({ code: 'other_time', text });
   }
   return found;
@@ -122,7 +130,7 @@ function whatIfRested(frame: SitFrame, sums: SitSums): Counterfactual[] {
     settings.score,
   );
   if (Math.round(then.score) <= Math.round(sums.best.score)) return [];
-  const text = `Left alone two more days: score ${Math.round(then.score)}, not ${Math.round(sums.best.score)}`;
+  const text = WHAT_IF_WORDS.rested(Math.round(then.score), Math.round(sums.best.score));
   return [{ code: 'rested', text }];
 }
 

@@ -2,6 +2,8 @@ import { type PromiseFactors, promiseOf, promiseSeated } from './promise/promise
 import { type QuietFactors, quietOf } from './quiet';
 import { type ScoreSettings, sitScore } from './score';
 import type { Evidence, Reason } from './types';
+import { REASON_WORDS } from './words/reasons';
+import { percentText } from './words/sit';
 
 /** Everything a score is made of. */
 export interface Factors {
@@ -41,9 +43,6 @@ export function scoreOf(f: Factors, s: ScoreSettings): { quiet: number; promise:
   return { quiet, promise, score: sitScore(quiet, promise, s) };
 }
 
-const percent = (share: number) => `${Math.round(share * 100)} %`;
-const named = (worst: { name: string; chance: number } | null) => (worst ? `, most of it at ${worst.name}` : '');
-
 type Draft = Omit<Reason, 'change'> & { without: Factors };
 
 function quietDrafts(f: Factors, x: ReasonFacts): Draft[] {
@@ -53,37 +52,34 @@ function quietDrafts(f: Factors, x: ReasonFacts): Draft[] {
   const add = (code: string, text: string, evidence: Evidence, without: Factors) =>
     drafts.push({ code, text, evidence, without, part });
   if (x.arcShare !== null) {
-    const text = x.forecast
-      ? `Wind in a good arc for ${percent(x.arcShare)} of the sit`
-      : `No forecast: its good arcs take ${percent(x.arcShare)} of the compass`;
+    const share = percentText(x.arcShare);
+    const text = x.forecast ? REASON_WORDS.arc(share) : REASON_WORDS.arcNoForecast(share);
     add('arc', text, 'practice', swap({ arc: 1 }));
   }
   if (x.windedChance !== null) {
-    const most = x.topScent ? `, most of it at ${x.topScent.name}` : '';
-    const text = `Scent from the seat may reach deer: ${percent(x.windedChance)}${most}`;
+    const text = REASON_WORDS.seatScent(percentText(x.windedChance), x.topScent?.name ?? null);
     add('seat_scent', text, 'standard', swap({ seat: 1 }));
   }
   if (x.wayName) {
     add(
       'walk_in',
-      `Walking in by ${x.wayName}: ${percent(x.inChance)}${named(x.inWorst)}`,
+      REASON_WORDS.walkIn(x.wayName, percentText(x.inChance), x.inWorst?.name ?? null),
       'study',
       swap({ walkIn: 1 }),
     );
-    const out = `Walking out by ${x.outName ?? x.wayName}: ${percent(x.outChance)}${named(x.outWorst)}`;
+    const out = REASON_WORDS.walkOut(x.outName ?? x.wayName, percentText(x.outChance), x.outWorst?.name ?? null);
     add('walk_out', out, 'study', swap({ walkOut: 1 }));
   } else {
-    const text = `No way in is drawn: ${percent(x.unknownWayChance)} assumed each way`;
+    const text = REASON_WORDS.noWay(percentText(x.unknownWayChance));
     add('no_way', text, 'our choice', swap({ walkIn: 1, walkOut: 1 }));
   }
   if (f.quiet.pressurePower > 1) {
-    const text = `Deer near here were disturbed lately (${x.recentEvents} ${x.recentEvents === 1 ? 'time' : 'times'}): they are alerted sooner`;
+    const text = REASON_WORDS.disturbed(x.recentEvents);
     add('pressure_quiet', text, 'study', swap({ pressurePower: 1 }));
   }
   if (f.quiet.learned) {
-    const way = f.quiet.learned > 0 ? 'quieter' : 'louder';
     const points = Math.abs(Math.round(f.quiet.learned * 100));
-    add('learned', `Sits here have gone ${way} than the sums say: ${points} points`, 'club log', swap({ learned: 0 }));
+    add('learned', REASON_WORDS.learned(f.quiet.learned > 0, points), 'club log', swap({ learned: 0 }));
   }
   return drafts;
 }
@@ -94,19 +90,18 @@ function promiseDrafts(f: Factors, x: ReasonFacts, usableBase: number): Draft[] 
   const drafts: Draft[] = [];
   const add = (code: string, text: string, evidence: Evidence, without: Factors) =>
     drafts.push({ code, text, evidence, without, part });
-  add('suitability', `The steward rates it ${x.suitability} for this window`, 'practice', swap({ base: usableBase }));
+  add('suitability', REASON_WORDS.suitability(x.suitability), 'practice', swap({ base: usableBase }));
   const near = x.featuresInRange.slice(0, 3).join(', ');
-  const lead = f.promise.features >= 1 ? 'In range' : 'In range, little in use then';
-  add('features', near ? `${lead}: ${near}` : 'Nothing deer use is in range', 'practice', swap({ features: 1 }));
-  add('crosswind', 'How the wind lies to the travel line in range', 'practice', swap({ crosswind: 1 }));
-  add('sun', `Low sun in the eyes${x.sunSpan ? ` ${x.sunSpan}` : ''}`, 'practice', swap({ sun: 1 }));
-  add('rain', 'Rain during the sit', 'our choice', swap({ rain: 1 }));
-  add('wind', 'Strong wind at the seat', 'our choice', swap({ wind: 1 }));
-  const rates = `${x.ratePerHour.toFixed(2)} deer an hour here, ${x.clubRatePerHour.toFixed(2)} in the club`;
-  add('sightings', `Seen from it: ${rates}`, 'club log', swap({ sightings: 1 }));
-  const lately = `Pressure near it in the last days (${x.recentEvents} ${x.recentEvents === 1 ? 'visit' : 'visits'})`;
-  add('pressure', lately, 'study', swap({ pressure: 1 }));
-  add('late_entry', `In the seat from ${x.inByText} only`, 'study', { ...f, seatedShare: 1 });
+  const inRange = f.promise.features >= 1 ? REASON_WORDS.inRange : REASON_WORDS.inRangeLittleUsed;
+  add('features', near ? inRange(near) : REASON_WORDS.nothingInRange, 'practice', swap({ features: 1 }));
+  add('crosswind', REASON_WORDS.crosswind, 'practice', swap({ crosswind: 1 }));
+  add('sun', REASON_WORDS.sun(x.sunSpan), 'practice', swap({ sun: 1 }));
+  add('rain', REASON_WORDS.rain, 'our choice', swap({ rain: 1 }));
+  add('wind', REASON_WORDS.wind, 'our choice', swap({ wind: 1 }));
+  const seen = REASON_WORDS.sightings(x.ratePerHour.toFixed(2), x.clubRatePerHour.toFixed(2));
+  add('sightings', seen, 'club log', swap({ sightings: 1 }));
+  add('pressure', REASON_WORDS.pressure(x.recentEvents), 'study', swap({ pressure: 1 }));
+  add('late_entry', REASON_WORDS.lateEntry(x.inByText), 'study', { ...f, seatedShare: 1 });
   return drafts;
 }
 

@@ -1,5 +1,6 @@
 import { sectorName } from './sectors';
 import type { Verdict } from './types';
+import { percentText, SENTENCE_WORDS } from './words/sit';
 
 /** How an instant is written on a club's clock: '6:05'. */
 export type Clock = (at: number) => string;
@@ -8,17 +9,16 @@ function windPart(verdict: Verdict, clock: Clock): string {
   const hold = verdict.arcHold;
   const from = verdict.meanFromDeg ?? null;
   if (hold === null) {
-    if (verdict.confidence.level === 'none') return 'No forecast';
-    return from === null ? 'Wind light and variable' : `${sectorName(from)} wind, no good winds set`;
+    if (verdict.confidence.level === 'none') return SENTENCE_WORDS.noForecast;
+    return from === null ? SENTENCE_WORDS.variable : SENTENCE_WORDS.noGoodWinds(sectorName(from));
   }
-  const share = `${Math.round(hold.shareOfTime * 100)} %`;
+  const share = percentText(hold.shareOfTime);
   const leaves = hold.likeliestLeavingAt;
   // A wind that is as likely out of its arcs from the start does not hold until anything.
   const holds = leaves !== null && hold.shareOfTime >= 0.6 && leaves > (verdict.timeline[0]?.at ?? 0);
-  const until = holds ? ` until ${clock(leaves)}` : '';
-  if (from === null) return `Wind light and variable, ${share} in its arcs`;
-  if (hold.shareOfTime < 0.25) return `${sectorName(from)} is the wrong wind (${share})`;
-  return `${sectorName(from)} holds ${share}${until}`;
+  if (from === null) return SENTENCE_WORDS.variableShare(share);
+  if (hold.shareOfTime < 0.25) return SENTENCE_WORDS.wrongWind(sectorName(from), share);
+  return SENTENCE_WORDS.holds(sectorName(from), share, holds ? clock(leaves) : null);
 }
 
 /**
@@ -29,8 +29,8 @@ export function sentence(verdict: Verdict, clock: Clock, now: number | null = nu
   const gate = verdict.gates[0];
   if (gate) return gate.text;
   const way = verdict.approach;
-  let walk = 'no way in is drawn for it';
-  if (way) walk = `walk in by ${way.approachName}, in by ${clock(way.inBy)}`;
-  if (way && now !== null && way.leaveBy < now) walk = `too late to walk in, it was to be in by ${clock(way.inBy)}`;
-  return `${windPart(verdict, clock)}; ${walk}`;
+  let walk: string = SENTENCE_WORDS.noWay;
+  if (way) walk = SENTENCE_WORDS.walk(way.approachName, clock(way.inBy));
+  if (way && now !== null && way.leaveBy < now) walk = SENTENCE_WORDS.tooLate(clock(way.inBy));
+  return SENTENCE_WORDS.line(windPart(verdict, clock), walk);
 }

@@ -4,6 +4,7 @@ import type { SitFrame } from './sit-frame';
 import { timelineOf } from './timeline';
 import type { Verdict } from './types';
 import type { SitSums } from './verdict';
+import { REASON_WORDS } from './words/reasons';
 
 const DAY_MS = 86_400_000;
 /** Places reached less than this are not named. */
@@ -53,7 +54,7 @@ function factsOf(frame: SitFrame, sums: SitSums, verdict: Verdict): ReasonFacts 
     outWorst: worst(first?.out.worst),
     suitability: stand.stand.suitability[frame.window.window.window],
     featuresInRange: used.map((r) => features[r.feature]?.name ?? '').filter((name) => name !== ''),
-    sunSpan: span ? `${frame.clock(span.from)} to ${frame.clock(span.to)}` : null,
+    sunSpan: span ? REASON_WORDS.span(frame.clock(span.from), frame.clock(span.to)) : null,
     recentEvents: recent.length,
     inByText: verdict.approach ? frame.clock(verdict.approach.inBy) : '',
     ratePerHour: stand.sightings.ratePerHour,

@@ -3,16 +3,17 @@ import type { SitFrame } from './sit-frame';
 import type { TimelineStep } from './types';
 import type { SitSums } from './verdict';
 import { directionShares } from './wind/histogram';
+import { STEP_WORDS } from './words/sit';
 
 /** Glare from which the sun counts as in the eyes. */
 const GLARE = 0.25;
 
 function noteOf(step: Pick<TimelineStep, 'windedChance' | 'arcHold'>, drift: string, thunder: boolean): string | null {
-  if (thunder) return 'Thunder';
-  if (drift === 'down') return 'Cold air drains down the slope';
-  if (drift === 'up') return 'Warm air draws up the slope';
-  if (drift === 'turning') return 'Slope air is turning';
-  if (step.arcHold !== null && step.arcHold < 0.5) return 'More likely out of its good winds than in';
+  if (thunder) return STEP_WORDS.thunder;
+  if (drift === 'down') return STEP_WORDS.drains;
+  if (drift === 'up') return STEP_WORDS.rises;
+  if (drift === 'turning') return STEP_WORDS.turning;
+  if (step.arcHold !== null && step.arcHold < 0.5) return STEP_WORDS.outOfArcs;
   return null;
 }
 

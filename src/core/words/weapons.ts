@@ -1,4 +1,4 @@
-import type { Weapon } from '../types';
+import type { Weapon } from '../ground-types';
 
 /** A weapon inside a sentence. */
 export const WEAPON_WORDS: Record<Weapon, string> = {
