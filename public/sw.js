@@ -4,12 +4,16 @@ const PAGES = 'windrest-pages-';
 /** How long a person waits for the network when a kept copy is at hand. */
 const PATIENCE_MS = 4000;
 const MOST_PAGES = 150;
+const MOST_READS = 60;
 const MOST_FILES = 600;
 const MOST_AT_ONCE = 300;
 
 /** Pages that are read without signal; every other page needs one. */
 const READABLE =
   /^\/clubs\/[a-z0-9-]+\/(sit|week|my-sits|board|board\/gate-sheet|stands|stands\/std_\w+|log|log\/sit_\w+|log\/visits\/new)$/;
+/** Reads that a kept page asks for: what lies behind a row of the list. The page names them in `data-detail`. */
+const READS = /^\/api\/clubs\/[a-z0-9-]+\/sits\/std_\w+$/;
+const DETAILS = /data-detail="([^"]+)"/g;
 const FIRST_PAGES = /^\/(clubs(\/[a-z0-9-]+)?)?$/;
 const ACCOUNT = /data-account="([\w-]+)"/;
 const FILES = /\/_next\/(static\/[\w./~%@[\]-]+\.(?:js|css|woff2))/g;
@@ -32,9 +36,11 @@ async function forget() {
   await Promise.all((await pageCaches()).map((name) => caches.delete(name)));
 }
 
-/** Cuts a cache back to its newest entries. */
-async function trim(cache, most) {
-  const keys = await cache.keys();
+const isRead = (key) => READS.test(new URL(key.url).pathname);
+
+/** Cuts what a cache has of one kind back to its newest entries. */
+async function trim(cache, most, ofKind = () => true) {
+  const keys = (await cache.keys()).filter(ofKind);
   await Promise.all(keys.slice(0, Math.max(0, keys.length - most)).map((key) => cache.delete(key)));
 }
 
@@ -70,9 +76,22 @@ async function keepPage(url, html, born) {
   const headers = { 'Content-Type': 'text/html; charset=utf-8', 'X-Kept-At': String(Date.now()) };
   await cache.delete(addressOf(url));
   await cache.put(addressOf(url), new Response(html, { headers }));
-  await trim(cache, MOST_PAGES);
+  await trim(cache, MOST_PAGES, (key) => !isRead(key));
   if (born !== generation) await caches.delete(name);
   return born === generation;
+}
+
+/** Keeps a read beside the pages of the account that is signed in; without any, nobody's. */
+async function keepRead(url, answer, born) {
+  const json = await answer.text();
+  const [name] = await pageCaches();
+  if (!name || born !== generation) return;
+  const cache = await caches.open(name);
+  const headers = { 'Content-Type': 'application/json', 'X-Kept-At': String(Date.now()) };
+  await cache.delete(addressOf(url));
+  await cache.put(addressOf(url), new Response(json, { headers }));
+  await trim(cache, MOST_READS, isRead);
+  if (born !== generation) await caches.delete(name);
 }
 
 async function findKept(url, loosely) {
@@ -144,6 +163,21 @@ async function openPage(event) {
   return (await standIn(url)) ?? (await settled) ?? sayNoSignal();
 }
 
+async function openRead(event) {
+  const url = new URL(event.request.url);
+  const born = generation;
+  const settled = fetch(event.request).then(
+    (answer) => {
+      if (answer.ok) event.waitUntil(keepRead(url, answer.clone(), born));
+      return answer;
+    },
+    () => null,
+  );
+  event.waitUntil(settled);
+  const first = await Promise.race([settled, wait(PATIENCE_MS)]);
+  return first ?? (await findKept(url, false)) ?? (await settled) ?? Response.error();
+}
+
 async function openFile(request) {
   const cache = await caches.open(STATIC);
   const kept = await cache.match(request.url);
@@ -159,6 +193,7 @@ self.addEventListener('fetch', (event) => {
   if (request.method !== 'GET' || url.origin !== self.location.origin) return;
   if (url.pathname.startsWith('/_next/static/')) event.respondWith(openFile(request));
   else if (request.mode === 'navigate') event.respondWith(openPage(event));
+  else if (READS.test(url.pathname)) event.respondWith(openRead(event));
 });
 
 /** Fetches a page unless its kept copy is young enough; gives what it says, or null. */
@@ -173,14 +208,28 @@ async function freshen(path, maxAgeMs) {
   return (await keepPage(url, html, born)) ? html : null;
 }
 
+/** Reads that a page names, those not kept lately, one after the other. */
+async function warmReads(html, { most, maxAgeMs }, born) {
+  const paths = [...html.matchAll(DETAILS)].map(([, path]) => path.replaceAll('&amp;', '&'));
+  for (const path of paths.slice(0, most)) {
+    const url = new URL(path, self.location.origin);
+    const kept = await findKept(url, false);
+    if (born !== generation || !READS.test(url.pathname)) return;
+    if (kept && Date.now() - Number(kept.headers.get('X-Kept-At')) < maxAgeMs) continue;
+    const answer = await fetch(url.href, { credentials: 'same-origin' });
+    if (answer.ok) await keepRead(url, answer, born);
+  }
+}
+
 /** Ahead of need, one after the other: pages, the files they use, and the pages their links lead to. */
 async function warm(pages) {
   const born = generation;
-  for (const { path, maxAgeMs, follow } of pages) {
+  for (const { path, maxAgeMs, follow, details } of pages) {
     if (born !== generation) return;
     const html = await freshen(path, maxAgeMs);
     if (!html) continue;
     await keepFiles(html);
+    if (details) await warmReads(html, details, born);
     if (!follow) continue;
     const links = new Set([...html.matchAll(/href="(\/[^"?#]+)"/g)].map(([, href]) => href));
     const wanted = [...links].filter((href) => href.startsWith(follow.under) && READABLE.test(href));

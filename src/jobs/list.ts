@@ -1,6 +1,7 @@
 import { write } from '@/db/client';
 import { deleteOldRuns } from '@/db/queries/job-runs';
 import { deleteOldRates } from '@/db/queries/rate-limits';
+import { deleteOldSentRequests } from '@/db/queries/sent-requests';
 import { remindUpkeep } from '@/features/chores/remind-upkeep';
 import { deleteOldImports } from '@/features/exchange/imports-data';
 import { keepPredictions } from '@/features/learning/keep-predictions';
@@ -19,6 +20,9 @@ import { refreshAllForecasts } from '@/features/weather/refresh-all';
 import { DAY, type Job, MINUTE } from './job';
 import { BOARD_JOBS, MAIL_JOB } from './urgent-jobs';
 import { JOB_RESULTS } from './words';
+
+/** A phone that lies in a drawer from one season to the next may still hold a press that was taken long ago. */
+const SENT_KEPT_MS = 400 * DAY;
 
 /** Run one after the other these go from the most urgent; what they queue is mailed in the same round. */
 export const JOBS: readonly Job[] = [
@@ -123,6 +127,7 @@ export const JOBS: readonly Job[] = [
         await deleteOldNoticeLinks(tx, now - 365 * DAY);
         await deleteOldOutlooks(tx, now - 30 * DAY);
         await deleteOldImports(tx, now - 30 * DAY);
+        await deleteOldSentRequests(tx, now - SENT_KEPT_MS);
       });
       return JOB_RESULTS.tidied;
     },

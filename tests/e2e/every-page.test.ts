@@ -1,7 +1,8 @@
-import type { Browser } from 'playwright-core';
+import type { Browser, BrowserContext, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { launchBrowser, newVisitor, type Visitor } from '../helpers/browser';
+import { DESKTOP, launchBrowser, newVisitor } from '../helpers/browser';
 import { fillerOf, leadsNowhere, listPages } from '../helpers/list-pages';
+import { makeLiveLinks } from '../helpers/live-links';
 import { lookAtPage } from '../helpers/look-at-page';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
 import { signInDemo } from '../helpers/sign-in-demo';
@@ -17,6 +18,8 @@ const PEOPLE = [
 
 /** Shows the same parts once in each light, so their names stand there three times. */
 const ALL_PARTS = '/dev/ui';
+/** Tabs that look at once: as many as a small machine has cores. */
+const TABS = 2;
 
 function inClub(page: string): boolean {
   return page.startsWith('/clubs/[club]');
@@ -24,9 +27,41 @@ function inClub(page: string): boolean {
 
 let app: ServedApp;
 let browser: Browser;
+let live: Record<string, string>;
+
+/** Tabs of one person, lent to one look at a time. */
+class Tabs {
+  private readonly free: Page[] = [];
+  private readonly waiting: ((page: Page) => void)[] = [];
+  private constructor(private readonly context: BrowserContext) {}
+
+  static async open(key: string | null): Promise<Tabs> {
+    const { context, page } = await newVisitor(browser, app.url, DESKTOP);
+    const tabs = new Tabs(context);
+    if (key) await signInDemo(page, key);
+    tabs.free.push(page);
+    while (tabs.free.length < TABS) tabs.free.push(await context.newPage());
+    for (const one of tabs.free) await one.emulateMedia({ reducedMotion: 'reduce' });
+    return tabs;
+  }
+
+  async lend<T>(use: (page: Page) => Promise<T>): Promise<T> {
+    const page = this.free.pop() ?? (await new Promise<Page>((lent) => this.waiting.push(lent)));
+    try {
+      return await use(page);
+    } finally {
+      const next = this.waiting.shift();
+      if (next) next(page);
+      else this.free.push(page);
+    }
+  }
+
+  close = () => this.context.close();
+}
 
 beforeAll(async () => {
   app = await serveApp({ seed: true });
+  live = await makeLiveLinks(app.databaseUrl, Date.now());
   browser = await launchBrowser();
 });
 
@@ -36,27 +71,53 @@ afterAll(async () => {
 });
 
 describe.each(PEOPLE)('as $who', ({ key, sees }) => {
-  let visitor: Visitor;
+  let tabs: Tabs;
   let addressOf: (page: string) => string | null;
 
   beforeAll(async () => {
-    visitor = await newVisitor(browser, app.url, { width: 1280, height: 800 });
-    await visitor.page.emulateMedia({ reducedMotion: 'reduce' });
-    if (key) await signInDemo(visitor.page, key);
+    tabs = await Tabs.open(key);
     addressOf = await fillerOf(app.databaseUrl, `${key ?? 'nobody'}@example.org`);
   });
 
-  afterAll(() => visitor?.context.close());
+  afterAll(() => tabs?.close());
 
-  it.each(listPages().filter(sees))('%s has no fault that axe knows, and keeps within its width', async (page) => {
-    const address = addressOf(page);
-    const mayMiss = key !== 'nora';
-    if (!address) return expect(mayMiss, `the demo has nothing for ${page}`).toBe(true);
-    const answer = await visitor.page.goto(address);
-    const status = answer?.status() ?? 0;
-    if (status === 404) return expect(mayMiss || leadsNowhere(page), `${page} is not found`).toBe(true);
-    expect(status).toBe(200);
-    const found = await lookAtPage(visitor.page, inClub(page) && mayMiss);
-    expect(found.filter((text) => page !== ALL_PARTS || !text.includes('landmark-unique'))).toEqual([]);
+  it.concurrent.each(listPages().filter(sees))(
+    '%s has no fault that axe knows, and keeps within its width',
+    async (page) => {
+      const address = addressOf(page);
+      const mayMiss = key !== 'nora';
+      if (!address) return expect(mayMiss, `the demo has nothing for ${page}`).toBe(true);
+      await tabs.lend(async (tab) => {
+        const answer = await tab.goto(address);
+        const status = answer?.status() ?? 0;
+        if (status === 404) return expect(mayMiss || leadsNowhere(page), `${page} is not found`).toBe(true);
+        expect(status).toBe(200);
+        const found = await lookAtPage(tab, inClub(page) && mayMiss);
+        expect(found.filter((text) => page !== ALL_PARTS || !text.includes('landmark-unique'))).toEqual([]);
+      });
+    },
+  );
+});
+
+describe('a link that was mailed and still works', () => {
+  let tabs: Tabs;
+  beforeAll(async () => {
+    tabs = await Tabs.open(null);
+  });
+  afterAll(() => tabs?.close());
+
+  const pages = listPages().filter((page) => page.endsWith('/[token]'));
+
+  it.concurrent.each(pages)('%s says something else than of a dead one, without a fault', async (page) => {
+    await tabs.lend(async (tab) => {
+      const heading = () => tab.getByRole('heading', { level: 1 }).textContent();
+      const address = live[page];
+      if (!address) throw new Error(`makeLiveLinks knows no link for ${page}`);
+      await tab.goto(page.replace('[token]', 'none'));
+      const dead = await heading();
+      expect((await tab.goto(address))?.status()).toBe(200);
+      expect(await heading()).not.toBe(dead);
+      expect(await lookAtPage(tab, false)).toEqual([]);
+    });
   });
 });

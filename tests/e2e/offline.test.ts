@@ -93,6 +93,14 @@ describe('a day with no signal in the woods', () => {
     await noSignal(page).waitFor();
     expect(await axeFindings(page)).toEqual([]);
     await keepPicture(page, 'offline-sit');
+    await page
+      .getByRole('button', { name: /Oak Ladder/ })
+      .first()
+      .click();
+    await page.getByRole('heading', { name: 'Why this score' }).waitFor();
+    await page.getByRole('heading', { name: 'Way in' }).waitFor();
+    expect(await axeFindings(page)).toEqual([]);
+    await keepPicture(page, 'offline-opened');
     await page.goto(`${CLUB}/my-sits`);
     await page.getByText('Oak Ladder').first().waitFor();
     await page.goto(`${CLUB}/board/gate-sheet`);

@@ -1,11 +1,12 @@
 import { eq } from 'drizzle-orm';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { reader } from '@/db/client';
-import { auditLog, sitLogVersions, visits } from '@/db/schema';
+import { auditLog, sentRequests, sitLogVersions, visits } from '@/db/schema';
 import { addVisit } from '@/features/logs/add-visit';
 import { removeVisit } from '@/features/logs/remove-visit';
 import { saveLog } from '@/features/logs/save-log';
 import { signOut } from '@/features/outings/sign-out';
+import { JOBS } from '@/jobs/list';
 import { newRequestKey } from '@/lib/request-key';
 import { setClock } from '@/server/clock';
 import { book, refusal, smallClub } from '../helpers/book';
@@ -109,5 +110,21 @@ describe('what was pressed without signal', () => {
     await removeVisit(ann.scope, first.id, at);
     expect((await addVisit(ann.scope, visit, at, sent)).id).toBe(first.id);
     expect(await reader().select().from(visits).where(eq(visits.clubId, club.id))).toHaveLength(1);
+  });
+
+  it('is remembered for more than a year, since a phone may wait that long, and then forgotten', async () => {
+    const at = startAt + HOUR;
+    const sent = press(at);
+    const place = { of: 'stand' as const, id: oak };
+    const visit = { kind: 'camera_check' as const, day: '2026-11-07', clock: '05:00', place, bumped: 0, notes: '' };
+    await addVisit(ann.scope, visit, at, sent);
+    const tidy = JOBS.find((job) => job.name === 'tidy');
+    const kept = () => reader().select().from(sentRequests).where(eq(sentRequests.clubId, club.id));
+    await tidy?.run(at + 366 * 24 * HOUR);
+    expect(await kept()).toHaveLength(1);
+    await addVisit(ann.scope, visit, at + MINUTE, sent);
+    expect(await reader().select().from(visits).where(eq(visits.clubId, club.id))).toHaveLength(1);
+    await tidy?.run(at + 401 * 24 * HOUR);
+    expect(await kept()).toEqual([]);
   });
 });

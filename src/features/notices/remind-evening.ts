@@ -10,7 +10,7 @@ import { env } from '@/env';
 import { listBookedSits, type SitDetail } from '@/features/bookings/data';
 import { clockText, dayAndWindow, spanText } from '@/features/bookings/sit-words';
 import { hasMail } from '@/features/mail/data';
-import { legalLightText, minutesText } from '@/features/sits/words';
+import { legalLightText, minutesText } from '@/features/sits/words/terms';
 import { getForecast } from '@/features/weather/get-forecast';
 import { type ClubScope, findScope, systemScopeById } from '@/server/scope';
 import { listNoticePeople } from './choices-data';

@@ -11,11 +11,13 @@ interface Readable {
   needs: Permission;
   maxAgeMs: number;
   follow?: Omit<NonNullable<PageToKeep['follow']>, 'under'>;
+  details?: PageToKeep['details'];
 }
 
 /** In the order of worth before dawn: a signal may be gone after the first. */
 const PAGES: Readable[] = [
-  { path: 'sit', needs: 'sits.read', maxAgeMs: SOON },
+  // The best dozen can be opened: nobody chooses among more before dawn.
+  { path: 'sit', needs: 'sits.read', maxAgeMs: SOON, details: { most: 12, maxAgeMs: 6 * SOON } },
   { path: 'board', needs: 'board.read', maxAgeMs: SOON },
   { path: 'my-sits', needs: 'sits.book', maxAgeMs: SOON },
   { path: 'log', needs: 'log.write', maxAgeMs: SOON, follow: { most: 20, maxAgeMs: DAY_LONG } },
@@ -26,8 +28,13 @@ const PAGES: Readable[] = [
 
 /** The pages of a club that a person may open and wants without signal. */
 export function pagesToKeep(slug: string, can: (permission: Permission) => boolean): PageToKeep[] {
-  return PAGES.filter((page) => can(page.needs)).map(({ path, maxAgeMs, follow }) => {
+  return PAGES.filter((page) => can(page.needs)).map(({ path, maxAgeMs, follow, details }) => {
     const address = `/clubs/${slug}/${path}`;
-    return { path: address, maxAgeMs, ...(follow ? { follow: { ...follow, under: `${address}/` } } : {}) };
+    return {
+      path: address,
+      maxAgeMs,
+      ...(follow ? { follow: { ...follow, under: `${address}/` } } : {}),
+      ...(details ? { details } : {}),
+    };
   });
 }

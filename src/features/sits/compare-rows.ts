@@ -1,5 +1,6 @@
 import type { ClubView, ReasonView, SitDetailView } from './view-types';
-import { clockText, minutesText, pointsText } from './words';
+import { WAYS_WORDS, COMPARE_ROW_WORDS as WORDS } from './words/detail';
+import { clockText, minutesText, pointsText } from './words/terms';
 
 export interface CompareRow {
   label: string;
@@ -24,17 +25,17 @@ function figure(label: string, pair: [SitDetailView, SitDetailView], of: (one: S
 }
 
 function windLines({ hold }: SitDetailView, club: ClubView): string[] {
-  if (!hold) return ['Not known'];
-  const leaves = hold.leavesAt === null ? [] : [`Likeliest out of it at ${clockText(hold.leavesAt, club)}`];
-  return [`In a good arc ${percent(hold.share)} of the sit`, ...leaves];
+  if (!hold) return [WORDS.notKnown];
+  const leaves = hold.leavesAt === null ? [] : [WORDS.outAt(clockText(hold.leavesAt, club))];
+  return [WORDS.hold(percent(hold.share)), ...leaves];
 }
 
 function wayLines({ ways: [way] }: SitDetailView, club: ClubView): string[] {
-  if (!way) return ['None is drawn'];
+  if (!way) return [WORDS.noWay];
   return [
-    `${way.name}, ${way.entry}`,
-    `Leave by ${clockText(way.leaveBy, club)}, in by ${clockText(way.inBy, club)}`,
-    `${minutesText(way.walkSeconds)} of walking`,
+    WAYS_WORDS.nameAndTime(way.name, way.entry),
+    WORDS.leave(clockText(way.leaveBy, club), clockText(way.inBy, club)),
+    WORDS.walking(minutesText(way.walkSeconds)),
   ];
 }
 
@@ -43,7 +44,7 @@ function reasonLines(reasons: ReasonView[], sign: 1 | -1): string[] {
     .filter((reason) => Math.round(reason.change) * sign > 0)
     .slice(0, MOST_REASONS)
     .map((reason) => `${pointsText(reason.change)} ${reason.text}`);
-  return lines.length > 0 ? lines : ['Nothing of weight'];
+  return lines.length > 0 ? lines : [WORDS.nothing];
 }
 
 /** Two stands of one window line by line, for a table of two columns. */
@@ -54,21 +55,23 @@ export function compareRows(pair: [SitDetailView, SitDetailView], club: ClubView
     better: null,
   });
   const holds: [number, number] = [100 * (pair[0].hold?.share ?? 0), 100 * (pair[1].hold?.share ?? 0)];
-  const chance = (share: number | null) => (share === null ? ['Not known'] : [percent(share)]);
+  const chance = (share: number | null) => (share === null ? [WORDS.notKnown] : [percent(share)]);
   return [
-    lines('Word', (one) => [one.word]),
-    figure('Sit score', pair, (one) => one.score),
-    figure('Quiet', pair, (one) => one.quiet),
-    figure('Promise', pair, (one) => one.promise),
-    { ...lines('Wind', (one) => windLines(one, club)), better: moreOf(holds) },
-    lines('Chance of being winded', (one) => chance(one.windedChance)),
-    lines('Way in', (one) => wayLines(one, club)),
-    lines('Chance of alerting deer, in and out', ({ ways: [way] }) =>
-      way ? [`${percent(way.inChance)} and ${percent(way.outChance)}`] : ['Not known'],
+    lines(WORDS.word, (one) => [one.word]),
+    figure(WORDS.score, pair, (one) => one.score),
+    figure(WORDS.quiet, pair, (one) => one.quiet),
+    figure(WORDS.promise, pair, (one) => one.promise),
+    { ...lines(WORDS.wind, (one) => windLines(one, club)), better: moreOf(holds) },
+    lines(WORDS.winded, (one) => chance(one.windedChance)),
+    lines(WORDS.wayIn, (one) => wayLines(one, club)),
+    lines(WORDS.alert, ({ ways: [way] }) =>
+      way ? [WORDS.inAndOut(percent(way.inChance), percent(way.outChance))] : [WORDS.notKnown],
     ),
-    lines('Speaks for it', (one) => reasonLines(one.reasons, 1)),
-    lines('Speaks against it', (one) => reasonLines(one.reasons, -1)),
-    lines('Take care', (one) => (one.cautions.length > 0 ? one.cautions.map(({ text }) => text) : ['Nothing special'])),
-    lines('How sure', (one) => [one.confidence.text]),
+    lines(WORDS.speaksFor, (one) => reasonLines(one.reasons, 1)),
+    lines(WORDS.speaksAgainst, (one) => reasonLines(one.reasons, -1)),
+    lines(WORDS.care, (one) =>
+      one.cautions.length > 0 ? one.cautions.map(({ text }) => text) : [WORDS.nothingSpecial],
+    ),
+    lines(WORDS.sure, (one) => [one.confidence.text]),
   ];
 }

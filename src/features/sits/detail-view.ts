@@ -11,7 +11,8 @@ import type {
 } from '@/core/types';
 import { cautionView, orNull, round1, round3 } from './view';
 import type { ReasonView, SitDetailView, TimelineView, WayView } from './view-types';
-import { ENTRY_WORDS } from './words';
+import { REASON_WORDS } from './words/detail';
+import { ENTRY_WORDS } from './words/terms';
 
 const wholeDeg = (deg: number) => ((Math.round(deg) % 360) + 360) % 360;
 
@@ -75,7 +76,7 @@ function timelineView(step: TimelineStep): TimelineView {
 
 /** A log's figures are told only to those who may see what others saw. */
 function reasonView({ code, text, change, part, evidence }: Reason, seeSightings: boolean): ReasonView {
-  const told = code === 'sightings' && !seeSightings ? 'What was seen from it in past sits' : text;
+  const told = code === 'sightings' && !seeSightings ? REASON_WORDS.hiddenSightings : text;
   return { code, text: told, change: round1(change), part, evidence };
 }
 

@@ -1,5 +1,5 @@
 import type { ScoredFeature } from '@/core/types';
-import { FEATURE_WORDS } from './words';
+import { FEATURE_WORDS } from './words/terms';
 
 /**
  * Features under the plain name of their kind, for those who may not know what lies where. Done before anything is scored,

@@ -1,6 +1,6 @@
 import { formatDay } from '@/core/day-time';
 import type { SitRow, SitsView } from './view-types';
-import { clockText } from './words';
+import { clockText } from './words/terms';
 
 interface Line {
   rank: string;

@@ -1,4 +1,5 @@
 import { arcsFor } from '@/core/arcs';
+import { formatDay } from '@/core/day-time';
 import { type SitWindow, type Verdict, WEAPONS } from '@/core/types';
 import { rankWeek } from '@/core/week';
 import { windowsFrom } from '@/core/windows';
@@ -75,6 +76,7 @@ export async function readWeek(
     const cells = new Map(verdicts.map((v) => [v.standId, weekCell(v, openOf(window)?.mine ?? null, strips)]));
     return {
       window,
+      dayText: formatDay(window.day),
       cells: input.stands.flatMap((stand) => cells.get(stand.id) ?? []),
       order: verdicts.map((verdict) => verdict.standId),
     };

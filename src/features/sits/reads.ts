@@ -20,7 +20,7 @@ import { loadScoring, type Scoring } from './load-scoring';
 import { shapeRows, sharedCautions } from './view';
 import type { ClubView, LightView, OwnSit, SitDetailView, SitsView, SkyView } from './view-types';
 import { weatherLines } from './weather-lines';
-import { legalLightText } from './words';
+import { legalLightText } from './words/terms';
 
 export interface SitsAsk {
   /** Left out: the next window, or the one going on. */

@@ -9,23 +9,25 @@ export function keptWeapon(cookie: string | undefined): Weapon | undefined {
   return WEAPONS.find((weapon) => weapon === cookie);
 }
 
-/** Keeps the choice for the next visit; null: any weapon. */
-export function keepWeapon(weapon: Weapon | null): void {
+/** Keeps the choice for the next visit; empty: any weapon. */
+export function keepWeapon(weapon: string): void {
   const age = weapon ? YEAR_SECONDS : 0;
   // biome-ignore lint/suspicious/noDocumentCookie: the Cookie Store API is missing from older phones
-  document.cookie = `${WEAPON_COOKIE}=${weapon ?? ''}; path=/clubs; max-age=${age}; samesite=lax`;
+  document.cookie = `${WEAPON_COOKIE}=${weapon}; path=/clubs; max-age=${age}; samesite=lax`;
 }
 
 export interface KeptWindow {
   day: string;
   window: WindowName;
   startAt: number;
+  /** 'Sat 14 Nov, morning' */
+  title: string;
 }
 
 /** The window last looked at in this tab, so that a look at the board does not lose it. */
-export function keepWindow(club: string, { day, window, startAt }: KeptWindow): void {
+export function keepWindow(club: string, { day, window, startAt, title }: KeptWindow): void {
   try {
-    sessionStorage.setItem(`${WINDOW_KEY} ${club}`, JSON.stringify({ day, window, startAt }));
+    sessionStorage.setItem(`${WINDOW_KEY} ${club}`, JSON.stringify({ day, window, startAt, title }));
   } catch {
     // A browser that keeps nothing only loses the way back.
   }
@@ -42,6 +44,7 @@ export function readKeptWindow(club: string): KeptWindow | null {
 
 function isKeptWindow(kept: unknown): kept is KeptWindow {
   if (typeof kept !== 'object' || kept === null) return false;
-  const { day, window, startAt } = { day: null, window: null, startAt: null, ...kept };
-  return typeof day === 'string' && (window === 'morning' || window === 'evening') && typeof startAt === 'number';
+  const { day, window, startAt, title } = { day: null, window: null, startAt: null, title: null, ...kept };
+  const isWindow = window === 'morning' || window === 'evening';
+  return typeof day === 'string' && isWindow && typeof startAt === 'number' && typeof title === 'string';
 }

@@ -132,6 +132,21 @@ export interface SitsView {
   madeAt: number;
 }
 
+/** The list as a page shows it. */
+export interface KeptSitsView extends SitsView {
+  /** Changes when anything a reader sees does. */
+  mark: string;
+}
+
+export type RowBrief = Pick<OpenRow, 'standId' | 'name' | 'sentence' | 'weapons' | 'way' | 'waysIn' | 'cautions'>;
+
+/** What opened rows and the booking form need of the list. */
+export interface SitsBrief extends Pick<SitsView, 'club' | 'window' | 'weapon' | 'cautions' | 'mine'> {
+  sky: Pick<SkyView, 'rise' | 'set'>;
+  open: RowBrief[];
+  blocked: { standId: string; name: string; gate: string | null }[];
+}
+
 export interface TimelineView {
   at: number;
   arcHold: number | null;
@@ -213,6 +228,8 @@ export interface WeekCell {
 
 export interface WeekColumnView {
   window: WindowView;
+  /** 'Sat 14 Nov' */
+  dayText: string;
   /** In the order of the stands. */
   cells: WeekCell[];
   /** Stand ids, the best first; those not open last. */
@@ -231,4 +248,8 @@ export interface WeekView {
   cautions: CautionView[];
   columns: WeekColumnView[];
   madeAt: number;
+}
+
+export interface KeptWeekView extends WeekView {
+  mark: string;
 }

@@ -3,7 +3,7 @@ import { sentence } from '@/core/sentence';
 import { type Caution, type Gate, type ScoredStand, type Verdict, WEAPONS, type Weapon } from '@/core/types';
 import type { GroundRows } from '@/features/ground/data';
 import type { BlockedRow, CautionView, GateView, OpenRow, SitRow, WayBrief } from './view-types';
-import { type ClubClock, endsText, shortClock } from './words';
+import { type ClubClock, endsText, shortClock } from './words/terms';
 
 /** Figures as exact as a screen needs them: the list travels over poor signal. */
 export const round1 = (value: number) => Math.round(value * 10) / 10;

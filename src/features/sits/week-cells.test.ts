@@ -18,7 +18,7 @@ function cell(standId: string, more: Partial<WeekCell> = {}): WeekCell {
 }
 
 function column(day: string, window: 'morning' | 'evening', cells: WeekCell[], order: string[]): WeekColumnView {
-  return { window: { day, window, startAt: 0, endAt: 1 }, cells, order };
+  return { window: { day, window, startAt: 0, endAt: 1 }, dayText: day, cells, order };
 }
 
 describe('the week', () => {

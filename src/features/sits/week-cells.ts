@@ -1,9 +1,8 @@
 import type { WeekCell, WeekColumnView, WeekView } from './view-types';
+import { WEEK_CELL_WORDS as WORDS } from './words/week';
 
 export const WEEK_SHOWS = ['all', 'open', 'mine'] as const;
 export type WeekShow = (typeof WEEK_SHOWS)[number];
-
-export const WEEK_SHOW_LABELS: Record<WeekShow, string> = { all: 'All stands', open: 'Open stands', mine: 'My sits' };
 
 export function isShown(cell: WeekCell, show: WeekShow): boolean {
   return show === 'all' || (show === 'open' ? cell.open && !cell.mine : cell.mine);
@@ -22,20 +21,26 @@ export function shownStands(view: WeekView, show: WeekShow): WeekView['stands'] 
   );
 }
 
+export interface WeekDay {
+  day: string;
+  dayText: string;
+  columns: WeekColumnView[];
+}
+
 /** Columns that follow each other on one day. */
-export function groupByDay(columns: WeekColumnView[]): { day: string; columns: WeekColumnView[] }[] {
-  const days: { day: string; columns: WeekColumnView[] }[] = [];
+export function groupByDay(columns: WeekColumnView[]): WeekDay[] {
+  const days: WeekDay[] = [];
   for (const column of columns) {
     const last = days.at(-1);
     if (last?.day === column.window.day) last.columns.push(column);
-    else days.push({ day: column.window.day, columns: [column] });
+    else days.push({ day: column.window.day, dayText: column.dayText, columns: [column] });
   }
   return days;
 }
 
 /** What the strip of a cell shows, in words. */
 export function cellText(cell: WeekCell): string {
-  if (!cell.open && cell.gate) return `not open: ${cell.gate}`;
-  if (cell.strip === null) return 'no forecast';
-  return cell.hold === null ? 'no good winds set' : `wind in its arcs ${Math.round(cell.hold * 100)} % of the sit`;
+  if (!cell.open && cell.gate) return WORDS.notOpen(cell.gate);
+  if (cell.strip === null) return WORDS.noForecast;
+  return cell.hold === null ? WORDS.noWinds : WORDS.hold(Math.round(cell.hold * 100));
 }

@@ -11,6 +11,8 @@ export interface PageToKeep {
   maxAgeMs: number;
   /** Keep the pages too that it links to under this path. */
   follow?: { under: string; most: number; maxAgeMs: number };
+  /** Keep too what lies behind the rows it lists, the first so many. */
+  details?: { most: number; maxAgeMs: number };
 }
 
 async function startKeeping(pages: PageToKeep[]): Promise<void> {

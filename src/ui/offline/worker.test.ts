@@ -171,6 +171,45 @@ describe('the worker', () => {
     expect(await open('/clubs/oak/stands/std_1')).toContain('data-kept');
   });
 
+  it('keeps ahead what lies behind the first rows of a list, and answers with it without signal', async () => {
+    const address = (id: string) => `/api/clubs/oak/sits/std_${id}?day=2026-11-07&window=morning`;
+    const read = (path: string) =>
+      fire('fetch', { request: { method: 'GET', mode: 'cors', url: ORIGIN + path } }).then((r) => r?.text());
+    const rows = ['1', '2', '3'].map((id) => `<li data-detail="${address(id).replaceAll('&', '&amp;')}"></li>`);
+    network = (url) => (url.includes('/api/') ? Response.json({ stand: url.slice(-40) }) : page('a1', rows.join('')));
+    const pages = [{ path: '/clubs/oak/sit', maxAgeMs: 60_000, details: { most: 2, maxAgeMs: 60_000 } }];
+    await warm(pages);
+    expect(asked).toEqual(['/clubs/oak/sit', address('1'), address('2')]);
+    await warm(pages);
+    expect(asked).toHaveLength(3);
+    network = offline;
+    expect(await read(address('2'))).toContain('std_2');
+    expect(await fire('fetch', { request: { method: 'GET', mode: 'cors', url: ORIGIN + address('3') } })).toMatchObject(
+      {
+        type: 'error',
+      },
+    );
+    network = () => Response.json({ stand: 'anew' });
+    expect(await read(address('2'))).toContain('anew');
+    network = offline;
+    expect(await read(address('2'))).toContain('anew');
+    network = () => new Response('<html lang="en">Sign in</html>');
+    await open('/sign-in');
+    network = offline;
+    expect(kept()).toEqual([]);
+    expect(await fire('fetch', { request: { method: 'GET', mode: 'cors', url: ORIGIN + address('2') } })).toMatchObject(
+      {
+        type: 'error',
+      },
+    );
+  });
+
+  it('keeps no read before a page has named the account', async () => {
+    network = () => Response.json({ stand: 'x' });
+    await fire('fetch', { request: { method: 'GET', mode: 'cors', url: `${ORIGIN}/api/clubs/oak/sits/std_1?day=a` } });
+    expect(kept()).toEqual([]);
+  });
+
   it('leads from the first page to the kept list', async () => {
     network = () => page('a1', 'Oak Ladder');
     await open('/clubs/oak/sit');

@@ -13,7 +13,7 @@ import { listStands } from '@/features/ground/stands-data';
 import { listOutingsOf } from '@/features/outings/data';
 import { expectedBackBy } from '@/features/outings/walk-out';
 import { loadForecast } from '@/features/sits/load-forecast';
-import { ageText, legalLightText } from '@/features/sits/words';
+import { ageText, legalLightText } from '@/features/sits/words/terms';
 import type { ClubScope } from '@/server/scope';
 import { type HourWind, hourWinds } from './hour-winds';
 import { type Sketch, sketchGround } from './sketch-ground';

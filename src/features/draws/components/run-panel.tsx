@@ -1,10 +1,10 @@
 'use client';
 
-import { useQuery } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
 import { type ComponentProps, useEffect, useRef } from 'react';
 import { Notice } from '@/ui/notices';
 import { ProgressBar } from '@/ui/progress-bar';
+import { useRead } from '@/ui/query';
 import { useToast } from '@/ui/toast';
 import { runQuery } from '../queries';
 import type { RunView } from '../read-run';
@@ -22,7 +22,7 @@ interface RunPanelProps {
 export function RunPanel({ club, drawId, initial, stop }: RunPanelProps) {
   const router = useRouter();
   const toast = useToast();
-  const { data: run } = useQuery({ ...runQuery(club, drawId), initialData: initial });
+  const { data: run } = useRead({ ...runQuery(club, drawId), initialData: initial });
   const watched = useRef<string | null>(null);
   useEffect(() => {
     if (run?.atWork) {

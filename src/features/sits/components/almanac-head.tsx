@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import type { SitsView } from '../view-types';
-import { clockText } from '../words';
+import { ALMANAC_WORDS as WORDS } from '../words/list';
+import { clockText } from '../words/terms';
 
 interface Entry {
   term: string;
@@ -9,10 +10,12 @@ interface Entry {
 
 /** The hour the sun rises or sets, whichever the window leans on. */
 function sunEntry({ sky, window, club }: SitsView): Entry {
-  if (sky.polar !== 'none') return { term: 'Sun', value: sky.polar === 'up_all_day' ? 'up all day' : 'down all day' };
+  if (sky.polar !== 'none') {
+    return { term: WORDS.sun, value: sky.polar === 'up_all_day' ? WORDS.upAllDay : WORDS.downAllDay };
+  }
   const at = window.window === 'morning' ? sky.rise : sky.set;
-  const term = window.window === 'morning' ? 'Sunrise' : 'Sunset';
-  return { term, value: at === null ? '–' : clockText(at, club) };
+  const term = window.window === 'morning' ? WORDS.sunrise : WORDS.sunset;
+  return { term, value: at === null ? WORDS.unknown : clockText(at, club) };
 }
 
 /** What a person before dawn wants of the almanac, in a few words: for a phone. */
@@ -21,15 +24,19 @@ export function AlmanacLine({ view }: { view: SitsView }) {
   const clock = (at: number) => clockText(at, club);
   const sun = sunEntry(view);
   const parts = [
-    `${clock(window.startAt)} – ${clock(window.endAt)}`,
+    WORDS.span(clock(window.startAt), clock(window.endAt)),
     `${sun.term.toLowerCase()} ${sun.value}`,
     ...(weather ? [weather.wind, weather.air] : []),
   ];
-  const edge = light && (window.window === 'morning' ? `from ${clock(light.startAt)}` : `until ${clock(light.endAt)}`);
+  const edge =
+    light &&
+    (window.window === 'morning'
+      ? WORDS.lightFromRule(clock(light.startAt))
+      : WORDS.lightUntilRule(clock(light.endAt)));
   return (
     <p className="border-rule-strong border-y py-2 leading-snug sm:hidden">
       {parts.join(' · ')}
-      {edge && <span className="block text-ink-soft text-sm">Light {edge} by the club's rule. State law decides.</span>}
+      {edge && <span className="block text-ink-soft text-sm">{edge}</span>}
     </p>
   );
 }
@@ -37,22 +44,22 @@ export function AlmanacLine({ view }: { view: SitsView }) {
 /** The day's figures as an almanac sets them: sun, window, wind, air, moon. */
 export function AlmanacHead({ view }: { view: SitsView }) {
   const { club, sky, window, weather, light } = view;
-  const clock = (at: number | null) => (at === null ? '–' : clockText(at, club));
+  const clock = (at: number | null) => (at === null ? WORDS.unknown : clockText(at, club));
   const morning = window.window === 'morning';
   const entries: Entry[] = [
-    { term: 'Window', value: `${clock(window.startAt)} – ${clock(window.endAt)}` },
+    { term: WORDS.window, value: WORDS.span(clock(window.startAt), clock(window.endAt)) },
     sunEntry(view),
     morning
-      ? { term: 'First light', value: clock(sky.civilDawn) }
-      : { term: 'Last light', value: clock(sky.civilDusk) },
+      ? { term: WORDS.firstLight, value: clock(sky.civilDawn) }
+      : { term: WORDS.lastLight, value: clock(sky.civilDusk) },
     ...(weather
       ? [
-          { term: 'Wind', value: weather.wind },
-          { term: 'Air', value: weather.air },
-          ...(weather.barometer ? [{ term: 'Barometer', value: weather.barometer }] : []),
+          { term: WORDS.wind, value: weather.wind },
+          { term: WORDS.air, value: weather.air },
+          ...(weather.barometer ? [{ term: WORDS.barometer, value: weather.barometer }] : []),
         ]
       : []),
-    { term: 'Moon', value: sky.moon },
+    { term: WORDS.moon, value: sky.moon },
   ];
   return (
     <div className="mt-5">
@@ -67,7 +74,7 @@ export function AlmanacHead({ view }: { view: SitsView }) {
       {light && (
         <p className="mt-2 max-w-prose text-ink-soft text-sm">
           <span className="text-ink">
-            {morning ? `Light from ${clock(light.startAt)}.` : `Light until ${clock(light.endAt)}.`}
+            {morning ? WORDS.lightFrom(clock(light.startAt)) : WORDS.lightUntil(clock(light.endAt))}
           </span>{' '}
           {light.text}
         </p>

@@ -1,34 +1,33 @@
 'use client';
 
 import { useEffect, useState } from 'react';
-import { formatDay } from '@/core/day-time';
 import { TextLink } from '@/ui/button';
 import { type KeptWindow, keepWindow, readKeptWindow } from '../remember';
 import { sitAddress } from '../sit-address';
-import type { SitsView } from '../view-types';
-import { WINDOW_WORDS } from '../words';
+import { BACK_WORDS } from '../words/list';
 
 interface BackToWindowProps {
-  view: SitsView;
+  club: string;
+  window: KeptWindow;
   /** The address names no window: the next one is shown. */
   isNext: boolean;
+  madeAt: number;
 }
 
 /** Opens on the next window as always, and offers the one ahead that was looked at before. */
-export function BackToWindow({ view, isNext }: BackToWindowProps) {
+export function BackToWindow({ club, window, isNext, madeAt }: BackToWindowProps) {
   const [back, setBack] = useState<KeptWindow | null>(null);
-  const { club, window, madeAt } = view;
   useEffect(() => {
-    if (!isNext) return keepWindow(club.slug, window);
-    const kept = readKeptWindow(club.slug);
+    if (!isNext) return keepWindow(club, window);
+    const kept = readKeptWindow(club);
     const another = kept && (kept.day !== window.day || kept.window !== window.window);
     setBack(another && kept.startAt > madeAt ? kept : null);
-  }, [club.slug, window, isNext, madeAt]);
+  }, [club, window, isNext, madeAt]);
   if (!back) return null;
   return (
     <p className="text-sm print:hidden">
-      <TextLink href={sitAddress(club.slug, { day: back.day, window: back.window })}>
-        Back to {formatDay(back.day)}, {WINDOW_WORDS[back.window]}
+      <TextLink href={sitAddress(club, { day: back.day, window: back.window })}>
+        {BACK_WORDS.backTo(back.title)}
       </TextLink>
     </p>
   );

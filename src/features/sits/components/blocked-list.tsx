@@ -1,12 +1,13 @@
 import { Section } from '@/ui/page-parts';
 import type { BlockedRow } from '../view-types';
+import { SIT_LIST_WORDS } from '../words/list';
 import { WordMark } from './word-mark';
 
 /** Stands a rule stops, each with the rule, who or what holds it, and when it ends. */
 export function BlockedList({ rows }: { rows: BlockedRow[] }) {
   if (rows.length === 0) return null;
   return (
-    <Section title="Not open" note="How they would rank if they were, the best first.">
+    <Section title={SIT_LIST_WORDS.blocked} note={SIT_LIST_WORDS.blockedNote}>
       <ul>
         {rows.map((row) => (
           <li
@@ -21,7 +22,10 @@ export function BlockedList({ rows }: { rows: BlockedRow[] }) {
             <div>
               {row.gates.map((gate) => (
                 <p key={`${gate.code} ${gate.text}`}>
-                  {gate.text} {gate.ends && <span className="whitespace-nowrap text-ink-soft">{gate.ends}.</span>}
+                  {gate.text}{' '}
+                  {gate.ends && (
+                    <span className="whitespace-nowrap text-ink-soft">{SIT_LIST_WORDS.until(gate.ends)}</span>
+                  )}
                 </p>
               ))}
             </div>

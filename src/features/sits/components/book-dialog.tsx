@@ -1,41 +1,44 @@
 'use client';
 
+import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { useFieldArray, useWatch } from 'react-hook-form';
 import { formatDay } from '@/core/day-time';
 import { type BookSitValues, bookSitSchema, type ChangeSitValues } from '@/features/bookings/sit-schema';
 import { quotasQuery } from '@/features/harvest/queries';
+import { newRequestKey } from '@/lib/request-key';
 import { Button } from '@/ui/button';
 import { RadioCards } from '@/ui/choices';
 import { Dialog } from '@/ui/dialog';
 import { FormErrorSummary, SubmitRow } from '@/ui/form';
 import { useActionForm } from '@/ui/form/use-action-form';
+import type { Closes } from '@/ui/lazy-part';
 import { Notice } from '@/ui/notices';
 import { queryClient, useRead } from '@/ui/query';
 import { Select, Textarea } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
 import type { BookActions, Hunter } from '../book-actions';
 import { sitsKey } from '../queries';
-import { newRequestKey } from '../request-key';
-import type { OpenRow, SitsView } from '../view-types';
-import { clockText, WEAPON_LABELS, WINDOW_WORDS } from '../words';
+import type { RowBrief, SitsBrief } from '../view-types';
+import { BOOK_FORM_WORDS as WORDS } from '../words/book';
+import { windowTitle } from '../words/list';
+import { WEAPON_LABELS, WINDOW_WORDS } from '../words/names';
+import { clockText } from '../words/terms';
 import { GuestFields } from './guest-fields';
 
-interface BookDialogProps {
-  row: OpenRow;
-  view: SitsView;
+export interface BookDialogProps {
+  row: RowBrief;
+  view: SitsBrief;
   actions: BookActions;
   hunters: Hunter[] | null;
-  onClose: () => void;
 }
 
 /** Books a stand, or moves the reader's own sit to it. A refusal is shown with its rule, and the list is read again. */
-export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogProps) {
-  const client = queryClient();
+export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogProps & Closes) {
+  const router = useRouter();
   const toast = useToast();
   const [requestKey] = useState(newRequestKey);
   const { club, window, mine } = view;
-  const refresh = () => client.invalidateQueries({ queryKey: sitsKey(club.slug) });
   const defaultValues: BookSitValues = {
     standId: row.standId,
     day: window.day,
@@ -54,14 +57,14 @@ export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogP
       const answer = mine
         ? await actions.change(club.slug, changeValues(values, mine))
         : await actions.book(club.slug, values);
-      if (!answer.ok) await refresh();
+      if (!answer.ok) router.refresh();
       return answer;
     },
     onDone: async (saved) => {
       onClose();
-      const text = `${saved.standName}, ${saved.whenText}`;
-      toast(mine ? { title: 'Sit moved', text } : { title: 'Sit booked', text });
-      await refresh();
+      toast({ title: mine ? WORDS.moved : WORDS.booked, text: WORDS.saved(saved.standName, saved.whenText) });
+      // The list comes with the answer; opened rows are read anew.
+      await queryClient().invalidateQueries({ queryKey: sitsKey(club.slug) });
     },
   });
   const guests = useFieldArray({ control: form.control, name: 'guests' });
@@ -77,13 +80,13 @@ export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogP
     <Dialog
       open
       onOpenChange={(open) => !open && onClose()}
-      title={`${mine ? 'Move to' : 'Book'} ${row.name}`}
-      description={`${formatDay(window.day, true)}, ${WINDOW_WORDS[window.window]}. ${row.sentence}.`}
+      title={mine ? WORDS.moveTo(row.name) : WORDS.book(row.name)}
+      description={WORDS.about(windowTitle(formatDay(window.day, true), window.window), row.sentence)}
     >
       <form {...formProps} className="grid gap-4">
         <FormErrorSummary errors={errors} />
         <RadioCards
-          label="How long"
+          label={WORDS.howLong}
           across
           {...register('windows')}
           defaultValue={defaultValues.windows}
@@ -91,37 +94,40 @@ export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogP
           choices={[
             {
               value: window.window,
-              label: `This ${WINDOW_WORDS[window.window]}`,
-              note: `${clockText(window.startAt, club)} to ${clockText(window.endAt, club)}`,
+              label: WORDS.thisWindow(WINDOW_WORDS[window.window]),
+              note: WORDS.span(clockText(window.startAt, club), clockText(window.endAt, club)),
             },
-            { value: 'all_day', label: 'All day', note: 'Morning and evening' },
+            { value: 'all_day', label: WORDS.allDay, note: WORDS.allDayNote },
           ]}
         />
         {hunters && !mine && (
           <Select
-            label="For"
+            label={WORDS.forWhom}
             {...register('memberId', emptyIsNull)}
             error={errorOf('memberId')}
-            options={[{ value: '', label: 'Myself' }, ...hunters.map(({ id, name }) => ({ value: id, label: name }))]}
+            options={[
+              { value: '', label: WORDS.myself },
+              ...hunters.map(({ id, name }) => ({ value: id, label: name })),
+            ]}
           />
         )}
         <Select
-          label="Weapon"
+          label={WORDS.weapon}
           {...register('weapon')}
           error={errorOf('weapon')}
           options={row.weapons.map((value) => ({ value, label: WEAPON_LABELS[value] }))}
         />
         <Select
-          label="Way in"
+          label={WORDS.wayIn}
           hint={
             row.way
-              ? `Leave by ${clockText(row.way.leaveBy, club)}, in by ${clockText(row.way.inBy, club)} by ${row.way.name}.`
+              ? WORDS.wayHint(clockText(row.way.leaveBy, club), clockText(row.way.inBy, club), row.way.name)
               : undefined
           }
           {...register('approachId', emptyIsNull)}
           error={errorOf('approachId')}
           options={[
-            { value: '', label: 'Not said' },
+            { value: '', label: WORDS.notSaid },
             ...row.waysIn.map(({ id, name }) => ({ value: id, label: name })),
           ]}
         />
@@ -133,9 +139,9 @@ export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogP
           errorOf={(index) => errorOf(`guests.${index}.name`)}
           error={errorOf('guests')}
         />
-        <Textarea label="Note" optional rows={2} {...register('note')} error={errorOf('note')} />
+        <Textarea label={WORDS.note} optional rows={2} {...register('note')} error={errorOf('note')} />
         {cautions.length > 0 && (
-          <Notice level={cautions.some((caution) => caution.level === 'stop') ? 'stop' : 'caution'} title="Take care">
+          <Notice level={cautions.some((caution) => caution.level === 'stop') ? 'stop' : 'caution'} title={WORDS.care}>
             <ul className="list-disc pl-5">
               {cautions.map((caution) => (
                 <li key={caution.text}>{caution.text}</li>
@@ -144,12 +150,12 @@ export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogP
           </Notice>
         )}
         <SubmitRow
-          label={mine ? 'Move my sit here' : 'Book this sit'}
+          label={mine ? WORDS.moveSit : WORDS.bookSit}
           pending={pending}
-          pendingLabel={mine ? 'Moving' : 'Booking'}
+          pendingLabel={mine ? WORDS.moving : WORDS.booking}
         >
           <Button look="quiet" onClick={onClose}>
-            Not now
+            {WORDS.notNow}
           </Button>
         </SubmitRow>
       </form>
@@ -157,7 +163,7 @@ export function BookDialog({ row, view, actions, hunters, onClose }: BookDialogP
   );
 }
 
-function changeValues(values: BookSitValues, mine: NonNullable<SitsView['mine']>): ChangeSitValues {
+function changeValues(values: BookSitValues, mine: NonNullable<SitsBrief['mine']>): ChangeSitValues {
   const { memberId: _, requestKey: __, ...chosen } = values;
   return { ...chosen, sitId: mine.sitId, sequence: mine.sequence };
 }

@@ -1,30 +1,44 @@
 'use client';
 
-import dynamic from 'next/dynamic';
-import { useState } from 'react';
+import { Suspense, useState } from 'react';
+import { makeLazy } from '@/ui/lazy-part';
 import { Select } from '@/ui/text-inputs';
+import { useToast } from '@/ui/toast';
+import { LAZY_WORDS } from '@/ui/words';
 import type { SitsAskText } from '../ask-schema';
-import type { SitsView } from '../view-types';
+import type { SitsBrief } from '../view-types';
+import { COMPARE_WORDS } from '../words/detail';
+import type { CompareDialogProps } from './compare-dialog';
 
-const CompareDialog = dynamic(() => import('./compare-dialog').then((parts) => parts.CompareDialog), { ssr: false });
+const lazyCompare = makeLazy<CompareDialogProps>(() => import('./compare-dialog').then((parts) => parts.CompareDialog));
 
 /** Sets the opened stand beside another of the window, open or not. */
-export function CompareChoice({ view, ask, standId }: { view: SitsView; ask: SitsAskText; standId: string }) {
+export function CompareChoice({ view, ask, standId }: { view: SitsBrief; ask: SitsAskText; standId: string }) {
   const [other, setOther] = useState('');
+  const toast = useToast();
+  const choose = (id: string) =>
+    void lazyCompare.load().then(
+      () => setOther(id),
+      () => toast({ ...LAZY_WORDS, level: 'caution' }),
+    );
   const others = [...view.open, ...view.blocked].filter((row) => row.standId !== standId);
   if (others.length === 0) return null;
   return (
     <>
       <Select
-        label="Compare with"
+        label={COMPARE_WORDS.choose}
         value={other}
-        onChange={({ target }) => setOther(target.value)}
+        onChange={({ target }) => choose(target.value)}
         options={[
-          { value: '', label: 'Choose a stand' },
+          { value: '', label: COMPARE_WORDS.chooseOne },
           ...others.map((row) => ({ value: row.standId, label: row.name })),
         ]}
       />
-      {other && <CompareDialog view={view} ask={ask} standIds={[standId, other]} onClose={() => setOther('')} />}
+      {other && (
+        <Suspense>
+          <lazyCompare.Part view={view} ask={ask} standIds={[standId, other]} onClose={() => setOther('')} />
+        </Suspense>
+      )}
     </>
   );
 }

@@ -7,11 +7,12 @@ import { useRead } from '@/ui/query';
 import type { SitsAskText } from '../ask-schema';
 import { compareRows } from '../compare-rows';
 import { sitDetailQuery } from '../queries';
-import type { SitDetailView, SitsView } from '../view-types';
-import { WINDOW_WORDS } from '../words';
+import type { SitDetailView, SitsBrief } from '../view-types';
+import { COMPARE_WORDS as WORDS } from '../words/detail';
+import { windowTitle } from '../words/list';
 
 export interface CompareDialogProps {
-  view: SitsView;
+  view: SitsBrief;
   ask: SitsAskText;
   standIds: [string, string];
   onClose: () => void;
@@ -27,32 +28,32 @@ export function CompareDialog({ view, ask, standIds, onClose }: CompareDialogPro
     <Dialog
       open
       onOpenChange={(open) => !open && onClose()}
-      title="Side by side"
-      description={`${formatDay(day)}, ${WINDOW_WORDS[window]}. The better figure of a line is set bold.`}
+      title={WORDS.title}
+      description={WORDS.about(windowTitle(formatDay(day), window))}
       className="sm:w-[min(48rem,calc(100vw-3rem))]"
     >
       {first.data && second.data ? (
         <CompareTable view={view} pair={[first.data, second.data]} />
       ) : error ? (
-        <Notice level="caution" title="The two could not be read">
+        <Notice level="caution" title={WORDS.failed}>
           {error.message}
         </Notice>
       ) : (
-        <Loading label="Reading both stands" lines={6} />
+        <Loading label={WORDS.reading} lines={6} />
       )}
     </Dialog>
   );
 }
 
-function gateOf(view: SitsView, standId: string): string | null {
-  return view.blocked.find((row) => row.standId === standId)?.gates[0]?.text ?? null;
+function gateOf(view: SitsBrief, standId: string): string | null {
+  return view.blocked.find((row) => row.standId === standId)?.gate ?? null;
 }
 
-function CompareTable({ view, pair }: { view: SitsView; pair: [SitDetailView, SitDetailView] }) {
+function CompareTable({ view, pair }: { view: SitsBrief; pair: [SitDetailView, SitDetailView] }) {
   const gates = pair.map(({ standId }) => gateOf(view, standId));
   return (
     <table className="w-full table-fixed border-collapse">
-      <caption className="sr-only">{`${pair[0].name} and ${pair[1].name}`}</caption>
+      <caption className="sr-only">{WORDS.both(pair[0].name, pair[1].name)}</caption>
       <thead>
         <tr className="border-rule-strong border-b align-bottom">
           <td className="w-[26%] py-1.5" />
@@ -66,10 +67,10 @@ function CompareTable({ view, pair }: { view: SitsView; pair: [SitDetailView, Si
       <tbody>
         {gates.some(Boolean) && (
           <tr className="border-rule border-b align-top">
-            <RowHead label="Open" />
+            <RowHead label={WORDS.open} />
             {gates.map((gate, i) => (
               <td key={pair[i]?.standId} className="py-1.5 pl-3">
-                {gate ?? 'Yes'}
+                {gate ?? WORDS.yes}
               </td>
             ))}
           </tr>
@@ -82,7 +83,7 @@ function CompareTable({ view, pair }: { view: SitsView; pair: [SitDetailView, Si
                 {lines.map((line) => (
                   <p key={line}>{line}</p>
                 ))}
-                {better === i && <span className="sr-only">the better of the two</span>}
+                {better === i && <span className="sr-only">{WORDS.better}</span>}
               </td>
             ))}
           </tr>

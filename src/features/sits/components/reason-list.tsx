@@ -1,9 +1,10 @@
 import type { ReasonView } from '../view-types';
-import { EVIDENCE_WORDS, pointsText } from '../words';
+import { REASON_WORDS } from '../words/detail';
+import { EVIDENCE_WORDS, pointsText } from '../words/terms';
 
 /** Each reason with the points of sit score it gives or takes, and what it rests on. */
 export function ReasonList({ reasons }: { reasons: ReasonView[] }) {
-  if (reasons.length === 0) return <p>Nothing speaks for or against it beyond the ordinary.</p>;
+  if (reasons.length === 0) return <p>{REASON_WORDS.none}</p>;
   return (
     <ul>
       {reasons.map((reason) => (
@@ -13,12 +14,12 @@ export function ReasonList({ reasons }: { reasons: ReasonView[] }) {
         >
           <span className="text-right font-semibold">
             {pointsText(reason.change)}
-            <span className="sr-only"> points: </span>
+            <span className="sr-only">{REASON_WORDS.points}</span>
           </span>
           <span>
             {reason.text}{' '}
             <span className="whitespace-nowrap text-ink-soft text-sm">
-              {reason.part}; {EVIDENCE_WORDS[reason.evidence]}
+              {REASON_WORDS.basis(reason.part, EVIDENCE_WORDS[reason.evidence])}
             </span>
           </span>
         </li>

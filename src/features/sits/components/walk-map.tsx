@@ -3,6 +3,7 @@
 import { useState } from 'react';
 import { SmallMap, type SmallMapProps } from '@/features/map/components/small-map';
 import { Button } from '@/ui/button';
+import { WAYS_WORDS } from '../words/detail';
 
 /** The map of the walk, asked for by a tap: nothing of a map is loaded before. */
 export function WalkMap(props: SmallMapProps) {
@@ -16,7 +17,7 @@ export function WalkMap(props: SmallMapProps) {
   }
   return (
     <Button className="mt-3" onClick={() => setOpen(true)}>
-      Show the map of the walk
+      {WAYS_WORDS.map}
     </Button>
   );
 }

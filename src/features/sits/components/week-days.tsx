@@ -1,10 +1,10 @@
 import Link from 'next/link';
-import { formatDay } from '@/core/day-time';
 import { TextLink } from '@/ui/button';
 import { sitAddress } from '../sit-address';
 import type { WeekColumnView, WeekView } from '../view-types';
 import { cellText, groupByDay, rankedCells, type WeekShow } from '../week-cells';
-import { WINDOW_WORDS } from '../words';
+import { WINDOW_WORDS } from '../words/names';
+import { WEEK_DAYS_WORDS as WORDS } from '../words/week';
 import { MiniStrip } from './mini-strip';
 import { WordMark } from './word-mark';
 
@@ -14,9 +14,9 @@ const BEST = 4;
 export function WeekDays({ view, show }: { view: WeekView; show: WeekShow }) {
   return (
     <div>
-      {groupByDay(view.columns).map(({ day, columns }) => (
-        <section key={day} aria-label={formatDay(day)} className="mt-6 first:mt-0">
-          <h2 className="border-rule-strong border-b font-serif text-xl">{formatDay(day)}</h2>
+      {groupByDay(view.columns).map(({ day, dayText, columns }) => (
+        <section key={day} aria-label={dayText} className="mt-6 first:mt-0">
+          <h2 className="border-rule-strong border-b font-serif text-xl">{dayText}</h2>
           {columns.map((column) => (
             <WindowList key={column.window.window} view={view} column={column} show={show} />
           ))}
@@ -37,12 +37,11 @@ function WindowList({ view, column, show }: { view: WeekView; column: WeekColumn
       <h3 className="flex items-baseline justify-between">
         <span className="small-caps text-ink-soft">{WINDOW_WORDS[window]}</span>
         <TextLink className="py-2 text-sm" href={sitAddress(view.club.slug, { day, window, ...weapon })}>
-          The list<span className="sr-only">{` of ${formatDay(day)}, ${WINDOW_WORDS[window]}`}</span>
+          {WORDS.list}
+          <span className="sr-only">{WORDS.listOf(column.dayText, WINDOW_WORDS[window])}</span>
         </TextLink>
       </h3>
-      {best.length === 0 && (
-        <p className="pb-2 text-ink-soft">{show === 'mine' ? 'No sit of yours.' : 'No stand is open.'}</p>
-      )}
+      {best.length === 0 && <p className="pb-2 text-ink-soft">{show === 'mine' ? WORDS.noSit : WORDS.noneOpen}</p>}
       <ol>
         {best.map((cell) => {
           const stand = view.stands.find(({ standId }) => standId === cell.standId);
@@ -53,10 +52,7 @@ function WindowList({ view, column, show }: { view: WeekView; column: WeekColumn
                 href={sitAddress(view.club.slug, { day, window, ...weapon, stand: cell.standId })}
                 className="flex min-h-11 items-center justify-between gap-3 py-1.5"
               >
-                <span className="min-w-0">
-                  {stand?.name}
-                  {cell.mine && ' (your sit)'}
-                </span>
+                <span className="min-w-0">{cell.mine ? WORDS.yours(stand?.name ?? '') : stand?.name}</span>
                 <span className="flex shrink-0 items-center gap-3">
                   <MiniStrip
                     arcs={stand?.arcs[window] ?? []}
@@ -72,7 +68,7 @@ function WindowList({ view, column, show }: { view: WeekView; column: WeekColumn
           );
         })}
       </ol>
-      {told.length > BEST && <p className="pb-1 text-ink-soft text-sm">and {told.length - BEST} more in the list</p>}
+      {told.length > BEST && <p className="pb-1 text-ink-soft text-sm">{WORDS.more(told.length - BEST)}</p>}
     </div>
   );
 }

@@ -1,12 +1,12 @@
 import Link from 'next/link';
-import { formatDay } from '@/core/day-time';
 import { Button } from '@/ui/button';
 import { joinClasses } from '@/ui/join-classes';
 import { useMoreRows } from '@/ui/use-more-rows';
 import { sitAddress } from '../sit-address';
 import type { WeekCell, WeekColumnView, WeekView } from '../view-types';
 import { cellText, groupByDay, isShown, shownStands, type WeekShow } from '../week-cells';
-import { WINDOW_WORDS } from '../words';
+import { WINDOW_WORDS } from '../words/names';
+import { WEEK_TABLE_WORDS as WORDS } from '../words/week';
 import { MiniStrip } from './mini-strip';
 
 /** A screen or three of them: more would be slow to draw on a phone. */
@@ -19,7 +19,7 @@ export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
   const { shown, foot, showAll } = useMoreRows(stands.length, ROWS_AT_ONCE);
   return (
     <table className="week-table border-collapse text-sm">
-      <caption className="sr-only">Every stand in every window the forecast reaches</caption>
+      <caption className="sr-only">{WORDS.caption}</caption>
       <thead>
         <tr>
           <th
@@ -27,21 +27,21 @@ export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
             rowSpan={2}
             className="sticky left-0 z-10 min-w-36 bg-paper print:min-w-0 pr-3 text-left align-bottom"
           >
-            Stand
+            {WORDS.stand}
           </th>
-          {days.map(({ day, columns }) => (
+          {days.map(({ day, dayText, columns }) => (
             <th
               key={day}
               scope="colgroup"
               colSpan={columns.length}
               className="border-rule-strong border-l px-2 text-left font-serif text-base"
             >
-              {formatDay(day)}
+              {dayText}
             </th>
           ))}
         </tr>
         <tr className="border-rule-strong border-b">
-          {view.columns.map(({ window }) => (
+          {view.columns.map(({ window, dayText }) => (
             <th
               key={`${window.day} ${window.window}`}
               scope="col"
@@ -55,7 +55,7 @@ export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
                 href={sitAddress(view.club.slug, { day: window.day, window: window.window })}
               >
                 {WINDOW_WORDS[window.window]}
-                <span className="sr-only"> of {formatDay(window.day)}</span>
+                <span className="sr-only">{WORDS.ofDay(dayText)}</span>
               </Link>
             </th>
           ))}
@@ -82,7 +82,7 @@ export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
         <tfoot ref={foot}>
           <tr>
             <td colSpan={1 + view.columns.length} className="py-3">
-              <Button onClick={showAll}>Show all {stands.length} stands</Button>
+              <Button onClick={showAll}>{WORDS.showAll(stands.length)}</Button>
             </td>
           </tr>
         </tfoot>
@@ -120,8 +120,8 @@ function Cell({ view, column, stand, show }: CellProps) {
 }
 
 function CellWords({ cell }: { cell: WeekCell }) {
-  if (cell.mine) return <span className="block whitespace-nowrap font-semibold">Your sit</span>;
-  if (!cell.open) return <span className="block whitespace-nowrap text-ink-soft italic">not open</span>;
+  if (cell.mine) return <span className="block whitespace-nowrap font-semibold">{WORDS.yourSit}</span>;
+  if (!cell.open) return <span className="block whitespace-nowrap text-ink-soft italic">{WORDS.notOpen}</span>;
   return (
     <span className={joinClasses('flex justify-between gap-2', cell.word === 'Quiet' && 'font-semibold')}>
       {cell.word} <span>{Math.round(cell.score)}</span>

@@ -2,7 +2,8 @@ import { sectorName } from '@/core/sectors';
 import { formatSpeed, formatTemp } from '@/core/units';
 import { WindBarb } from '@/ui/wind/wind-barb';
 import type { ClubView, TimelineView } from '../view-types';
-import { shortClock } from '../words';
+import { HOURS_WORDS } from '../words/detail';
+import { shortClock } from '../words/terms';
 
 /** A barb an hour, with speed and temperature below it. */
 export function WindByHour({ hours, club }: { hours: TimelineView[]; club: ClubView }) {
@@ -12,13 +13,15 @@ export function WindByHour({ hours, club }: { hours: TimelineView[]; club: ClubV
         <li key={hour.at} className="w-14">
           <span className="block">{shortClock(hour.at, club)}</span>
           {hour.windSpeedMps === null ? (
-            <span className="block py-2 text-ink-soft">no wind given</span>
+            <span className="block py-2 text-ink-soft">{HOURS_WORDS.noWind}</span>
           ) : (
             <>
               <WindBarb
                 fromDeg={hour.meanFromDeg}
                 speedMps={hour.windSpeedMps}
-                label={`${hour.meanFromDeg === null ? 'Variable' : sectorName(hour.meanFromDeg)} wind`}
+                label={HOURS_WORDS.windOf(
+                  hour.meanFromDeg === null ? HOURS_WORDS.variable : sectorName(hour.meanFromDeg),
+                )}
                 className="mx-auto"
               />
               <span className="block whitespace-nowrap">{formatSpeed(hour.windSpeedMps, club.units)}</span>

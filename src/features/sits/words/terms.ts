@@ -1,6 +1,6 @@
 import type { LegalLightRule } from '@/core/booking/rules';
 import { formatClock, formatClock12, formatDay } from '@/core/day-time';
-import type { ApproachOption, Evidence, FeatureKind, Weapon, WindowName } from '@/core/types';
+import type { ApproachOption, Evidence, FeatureKind } from '@/core/types';
 
 /** A feature's kind in a sentence, for those who are not told its name. */
 export const FEATURE_WORDS: Record<FeatureKind, string> = {
@@ -14,16 +14,6 @@ export const FEATURE_WORDS: Record<FeatureKind, string> = {
   travel_line: 'a travel line',
   crossing: 'a crossing',
   sanctuary: 'a sanctuary',
-};
-
-export const WINDOW_WORDS: Record<WindowName, string> = { morning: 'morning', evening: 'evening' };
-
-export const WEAPON_LABELS: Record<Weapon, string> = {
-  bow: 'Bow',
-  crossbow: 'Crossbow',
-  muzzleloader: 'Muzzleloader',
-  shotgun: 'Shotgun',
-  rifle: 'Rifle',
 };
 
 export const ENTRY_WORDS: Record<ApproachOption['entry'], string> = {

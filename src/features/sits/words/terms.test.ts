@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { ageText, legalLightText, minutesText, pointsText, shortClock } from './words';
+import { ageText, legalLightText, minutesText, pointsText, shortClock } from './terms';
 
 const rule = {
   name: 'Deer',

@@ -1,1 +1,0 @@
-export { newRequestKey } from '@/lib/request-key';
