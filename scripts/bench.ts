@@ -1,7 +1,7 @@
 import { prepareGround } from '../src/core/rank';
 import type { WeekInput } from '../src/core/rank-input';
 import { scentGround } from '../src/core/scent/scent-ground';
-import type { Verdict } from '../src/core/types';
+import type { Verdict } from '../src/core/verdict-types';
 import { rankWeek } from '../src/core/week';
 import { makeWorld } from './bench-plain/make-world';
 import { type PlainSit, plainSit } from './bench-plain/sit-plain';

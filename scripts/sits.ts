@@ -1,7 +1,8 @@
 import { parseArgs } from 'node:util';
 import { chooseWeather } from '@/adapters/weather/choose';
+import { WINDOW_NAMES } from '@/core/condition-types';
 import { isDay } from '@/core/day-time';
-import { WEAPONS, WINDOW_NAMES } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { sitWindow } from '@/core/windows';
 import { closeDatabase } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';

@@ -1,17 +1,16 @@
 import { DEFAULT_CLUB_RULES } from '../../src/core/booking/rules';
-import type { WeekInput } from '../../src/core/rank-input';
-import { DEFAULT_SETTINGS } from '../../src/core/settings';
+import type { Forecast, WeatherHour } from '../../src/core/condition-types';
 import type {
   FeatureKind,
-  Forecast,
   LocalShape,
   Point,
   ScoredApproach,
   ScoredFeature,
   ScoredStand,
-  WeatherHour,
-} from '../../src/core/types';
-import { FEATURE_KINDS, SHELTER_CLASSES, STAND_KINDS } from '../../src/core/types';
+} from '../../src/core/ground-types';
+import { FEATURE_KINDS, SHELTER_CLASSES, STAND_KINDS } from '../../src/core/ground-types';
+import type { WeekInput } from '../../src/core/rank-input';
+import { DEFAULT_SETTINGS } from '../../src/core/settings';
 import { sitWindow, windowsFrom } from '../../src/core/windows';
 
 const HOUR = 3_600_000;

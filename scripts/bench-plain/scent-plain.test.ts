@@ -2,10 +2,10 @@ import { describe, expect, it } from 'vitest';
 import { STABILITY_CLASSES, type StabilityClass } from '@/core/air/stability-types';
 import { normalizeDeg } from '@/core/angles';
 import { pointAt } from '@/core/geometry';
+import type { LocalShape, Point } from '@/core/ground-types';
 import { scentGround, sourceGeometry } from '@/core/scent/scent-ground';
 import { seatScent } from '@/core/scent/seat-scent';
 import { DEFAULT_SETTINGS } from '@/core/settings';
-import type { LocalShape, Point } from '@/core/types';
 import type { ScenarioSet } from '@/core/wind/scenario-types';
 import { plainSeatScent } from './scent-plain';
 

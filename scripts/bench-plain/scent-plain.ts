@@ -1,10 +1,10 @@
 import { type StabilityClass, stabilityIndex } from '@/core/air/stability-types';
+import type { Point } from '@/core/ground-types';
 import { sweptPlume } from '@/core/scent/plume';
 import { WIDENINGS_DEG, wideningLevel } from '@/core/scent/plume-table';
 import type { SampledFeature } from '@/core/scent/sample-feature';
 import { referenceStrength, windedChanceOf } from '@/core/scent/saturate';
 import type { ScentGround } from '@/core/scent/scent-ground';
-import type { Point } from '@/core/types';
 import { extraScatterDeg } from '@/core/wind/scatter';
 import type { ScenarioSet } from '@/core/wind/scenario-types';
 

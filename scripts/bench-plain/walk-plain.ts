@@ -3,10 +3,10 @@ import { apartDeg, normalizeDeg } from '../../src/core/angles';
 import { seenFalloff, senseFactor } from '../../src/core/approach/seen-heard';
 import { circleOf, type Sight, sightOf, sourcesAlong } from '../../src/core/approach/walk-ground';
 import { routeLengths } from '../../src/core/approach/walk-times';
+import type { ScoredApproach, ScoredFeature } from '../../src/core/ground-types';
 import { sweptPlume } from '../../src/core/scent/plume';
 import { referenceStrength, windedChanceOf } from '../../src/core/scent/saturate';
 import type { ScoringSettings } from '../../src/core/settings';
-import type { ScoredApproach, ScoredFeature } from '../../src/core/types';
 import type { ScenarioSet } from '../../src/core/wind/scenario-types';
 
 export interface PlainWalk {

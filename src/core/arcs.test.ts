@@ -11,7 +11,7 @@ import {
   formatArc,
   mergeArcs,
 } from './arcs';
-import type { Arc } from './types';
+import type { Arc } from './ground-types';
 
 const arcGen = fc.record({
   fromDeg: fc.integer({ min: 0, max: 359 }),

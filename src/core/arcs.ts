@@ -1,6 +1,7 @@
 import { normalizeDeg } from './angles';
+import type { WindowName } from './condition-types';
+import type { Arc, GoodWindArc } from './ground-types';
 import { SECTOR_NAMES, SECTOR_WIDTH_DEG, sectorOf } from './sectors';
-import type { Arc, GoodWindArc, WindowName } from './types';
 
 export const FULL_CIRCLE: Arc = { fromDeg: 0, toDeg: 360 };
 

@@ -1,8 +1,9 @@
 import type { TriedWay } from './approach/try-ways';
+import type { ScoredFeature } from './ground-types';
 import { type Factors, scoreOf } from './reasons';
 import type { ScoreSettings } from './score';
 import { shareAfter, shareBefore, windedIn } from './seated';
-import type { ApproachOption, ScoredFeature } from './types';
+import type { ApproachOption } from './verdict-types';
 import type { WindowFrame } from './window-frame';
 
 /** A way in at one time, with everything the sit then scores by. */

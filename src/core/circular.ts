@@ -1,7 +1,7 @@
 import { normalizeDeg, toRad, windFromVector, windVector } from './angles';
 import { arcContains, arcWidthDeg, mergeArcs } from './arcs';
 import { normalCdf } from './erf';
-import type { Arc } from './types';
+import type { Arc } from './ground-types';
 
 const DEG = 180 / Math.PI;
 

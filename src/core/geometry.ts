@@ -1,5 +1,5 @@
 import { normalizeDeg, toRad } from './angles';
-import type { LocalShape, Point } from './types';
+import type { LocalShape, Point } from './ground-types';
 
 /** WGS 84 semi-major axis and first eccentricity squared (NGA.STND.0036). */
 const SEMI_MAJOR_M = 6378137;

@@ -1,12 +1,12 @@
 import { buildWalkGround, circleOf, type FeatureCircle, type WalkGround } from './approach/walk-ground';
 import { type WalkPlumes, walkPlumes } from './approach/walk-scent';
 import { distanceM } from './geometry';
+import type { ScoredApproach, ScoredFeature, ScoredStand } from './ground-types';
 import { type NearEvent, nearEvents } from './pressure';
 import { featuresInRange, type InRange } from './promise/in-range';
 import { clubRate, shrunkRate, sightingsFactor } from './promise/sightings';
 import type { GroundInput } from './rank-input';
 import { type SourceGeometry, scentGround, sourceGeometry } from './scent/scent-ground';
-import type { ScoredApproach, ScoredFeature, ScoredStand } from './types';
 import { thinCrowded, usesOf, type WhereaboutsSettings } from './whereabouts';
 
 /** A stand with all about it that does not depend on the hour. */

@@ -3,11 +3,11 @@ import { describe, expect, it } from 'vitest';
 import { makeForecast, makeStand, PLACE, windowOf } from '../../tests/helpers/small-ground';
 import { parseReplayCsv } from '../adapters/weather/replay-csv';
 import { DEFAULT_CLUB_RULES } from './booking/rules';
+import type { WindowName } from './condition-types';
 import { addDays } from './day-time';
 import { formatHindcast } from './format-hindcast';
 import { hindcast } from './hindcast';
 import { DEFAULT_SETTINGS } from './settings';
-import type { WindowName } from './types';
 import { allDayWindows } from './windows';
 
 const settings = DEFAULT_SETTINGS;

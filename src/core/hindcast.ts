@@ -1,10 +1,11 @@
 import { placeAir } from './air/place-air';
 import { standAir } from './air/stand-air';
 import { anyArcContains, arcsFor, coveredDeg } from './arcs';
+import type { SitWindow, WeatherHour, WindowName } from './condition-types';
+import type { ScoredStand } from './ground-types';
 import { SECTOR_NAMES, type SectorName, sectorOf } from './sectors';
 import type { ScoringSettings } from './settings';
 import type { Place } from './sun';
-import type { ScoredStand, SitWindow, WeatherHour, WindowName } from './types';
 
 export interface HindcastInput {
   place: Place;

@@ -1,9 +1,10 @@
 import { type WalkStretch, walkStretches } from './approach/walk-stretches';
 import type { StandFrame } from './ground-frame';
+import type { ScoredApproach } from './ground-types';
 import { type FieldGrid, scentField } from './scent/scent-field';
 import type { SitFrame } from './sit-frame';
 import { sunPosition } from './sun';
-import type { ApproachOption, ScoredApproach } from './types';
+import type { ApproachOption } from './verdict-types';
 
 /** The air about one stand in one half hour, laid out on the ground. */
 export interface Moment {

@@ -9,9 +9,10 @@ import {
   makeStand,
   windowOf,
 } from '../../tests/helpers/small-ground';
+import type { GoodWindArc, ScoredStand } from './ground-types';
 import { rankSits } from './rank';
 import type { RankInput } from './rank-input';
-import type { GoodWindArc, ScoredStand, Verdict } from './types';
+import type { Verdict } from './verdict-types';
 
 /** What clubs and land managers say of their own ground (common practice, no study), on a small layout made up for it. */
 

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import type { PressureEvent, PressureKind } from './condition-types';
 import {
   DEFAULT_PRESSURE,
   marginalCost,
@@ -8,7 +9,6 @@ import {
   pressureOnPromise,
   pressureOnQuiet,
 } from './pressure';
-import type { PressureEvent, PressureKind } from './types';
 
 const DAY = 86_400_000;
 const s = DEFAULT_PRESSURE;

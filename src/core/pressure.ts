@@ -1,5 +1,6 @@
+import type { PressureEvent, PressureKind } from './condition-types';
 import { distanceM } from './geometry';
-import type { Point, PressureEvent, PressureKind } from './types';
+import type { Point } from './ground-types';
 
 const DAY_MS = 86_400_000;
 

@@ -1,17 +1,9 @@
+import type { Forecast, PressureEvent, SitWindow, StandSightings } from './condition-types';
+import type { ScoredApproach, ScoredFeature, ScoredStand, Weapon } from './ground-types';
 import type { ScoringSettings } from './settings';
 import type { Place } from './sun';
-import type {
-  Forecast,
-  Gate,
-  PressureEvent,
-  ScoredApproach,
-  ScoredFeature,
-  ScoredStand,
-  SitWindow,
-  StandSightings,
-  Weapon,
-} from './types';
 import type { Units } from './units';
+import type { Gate } from './verdict-types';
 
 /** What lies on the ground and what happened there: the same for every window. */
 export interface GroundInput {

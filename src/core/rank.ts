@@ -1,8 +1,9 @@
 import { frameGround, type GroundFrame } from './ground-frame';
+import type { ScoredStand } from './ground-types';
 import type { GroundInput, RankInput } from './rank-input';
 import { frameSits } from './sit-frame';
-import type { ScoredStand, Verdict } from './types';
 import { judgeSit } from './verdict';
+import type { Verdict } from './verdict-types';
 
 /** A club's ground made ready once for many rankings; see rankSits. Holds while the input it was made from is unchanged. */
 export function prepareGround(input: GroundInput): GroundFrame {

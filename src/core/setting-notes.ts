@@ -1,4 +1,4 @@
-import type { Evidence } from './types';
+import type { Evidence } from './verdict-types';
 
 /** What the settings of whereabouts, approach, pressure, promise and score rest on; see SETTING_NOTES. */
 export const HUNT_SETTING_NOTES: Record<string, { evidence: Evidence; note: string }> = {

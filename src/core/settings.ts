@@ -1,9 +1,10 @@
 import { type ApproachSettings, DEFAULT_APPROACH } from './approach/approach-settings';
+import type { ShelterClass } from './ground-types';
 import { DEFAULT_PRESSURE, type PressureSettings } from './pressure';
 import { DEFAULT_PROMISE, type PromiseSettings } from './promise/promise-settings';
 import { DEFAULT_SCORE, type ScoreSettings } from './score';
 import { HUNT_SETTING_NOTES } from './setting-notes';
-import type { Evidence, ShelterClass } from './types';
+import type { Evidence } from './verdict-types';
 import { DEFAULT_WHEREABOUTS, type WhereaboutsSettings } from './whereabouts';
 
 /** A value at a speed; values between entries are interpolated, ends are held. */

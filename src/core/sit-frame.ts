@@ -2,14 +2,16 @@ import { type AirFrame, frameAir, type SeatFrame } from './air-frame';
 import { type Entry, entriesFor } from './approach/entries';
 import type { WalkContext } from './approach/try-ways';
 import { type CautionInput, cautionsFor } from './cautions';
+import type { Forecast, SitWindow } from './condition-types';
 import { confidenceFor } from './confidence';
 import { formatClock, formatClock12 } from './day-time';
 import { type Glare, glareOf } from './glare';
 import type { GroundFrame } from './ground-frame';
+import type { ScoredStand } from './ground-types';
 import { lightShares, type PromiseStep } from './promise/promise-factors';
 import type { Detail } from './rank-input';
-import type { Caution, Confidence, Forecast, ScoredStand, SitWindow } from './types';
 import type { Units } from './units';
+import type { Caution, Confidence } from './verdict-types';
 import { frameWindow, type WindowFrame } from './window-frame';
 
 const HOUR = 3_600_000;

@@ -10,12 +10,15 @@ import {
   windowOf,
 } from '../../tests/helpers/small-ground';
 import { normalizeDeg, toRad } from './angles';
+import type { PressureEvent, PressureKind } from './condition-types';
+import { PRESSURE_KINDS } from './condition-types';
 import { pointAt } from './geometry';
+import type { LocalShape, Point } from './ground-types';
+import { FEATURE_KINDS } from './ground-types';
 import { rankSits } from './rank';
 import type { RankInput } from './rank-input';
-import type { LocalShape, Point, PressureEvent, PressureKind, Verdict } from './types';
-import { FEATURE_KINDS, PRESSURE_KINDS } from './types';
 import { scoreSit } from './verdict';
+import type { Verdict } from './verdict-types';
 import { rankWeek } from './week';
 
 const HOUR = 3_600_000;

@@ -10,10 +10,11 @@ import {
   PLACE,
   windowOf,
 } from '../../tests/helpers/small-ground';
+import type { Forecast } from './condition-types';
 import { formatClock } from './day-time';
 import { rankSits } from './rank';
 import { sentence } from './sentence';
-import type { Forecast, Gate } from './types';
+import type { Gate } from './verdict-types';
 
 const clock = (when: number) => formatClock(when, PLACE.zone);
 const arcs = [{ fromDeg: 225, toDeg: 315, window: null }];

@@ -12,7 +12,7 @@ import { windedExponents } from './seated';
 import type { SitFrame } from './sit-frame';
 import { frameSits } from './sit-frame';
 import { tellVerdict } from './tell-verdict';
-import type { ArcHoldSummary, Gate, Verdict } from './types';
+import type { ArcHoldSummary, Gate, Verdict } from './verdict-types';
 import { type ArcHold, arcHold } from './wind/arc-hold';
 import { wordFor } from './word';
 

@@ -1,9 +1,10 @@
+import type { SitWindow } from './condition-types';
 import { frameGround, type GroundFrame } from './ground-frame';
 import { compareVerdicts, namesOf } from './rank';
 import type { WeekInput } from './rank-input';
 import { frameSits } from './sit-frame';
-import type { SitWindow, Verdict } from './types';
 import { judgeSit } from './verdict';
+import type { Verdict } from './verdict-types';
 
 export interface WeekColumn {
   window: SitWindow;

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { FeatureKind, ScoredFeature } from './types';
+import type { FeatureKind, ScoredFeature } from './ground-types';
 import {
   DEFAULT_WHEREABOUTS,
   type SunMarks,

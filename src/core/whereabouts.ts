@@ -5,7 +5,7 @@ import {
   TIMES_OF_DAY,
   type TimeOfDay,
   type UseTable,
-} from './types';
+} from './ground-types';
 
 const MIN = 60_000;
 

@@ -1,9 +1,9 @@
 import { stepStarts } from './air/interpolate';
+import type { SitWindow } from './condition-types';
 import { movementOf } from './promise/promise-factors';
 import type { LowSunMinute } from './promise/sun-in-eyes';
 import type { ScoringSettings } from './settings';
 import { type Place, sunPosition, sunTimes } from './sun';
-import type { SitWindow } from './types';
 import { type SunMarks, shareAt, timeWeights } from './whereabouts';
 
 const MIN = 60_000;

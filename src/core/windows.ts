@@ -1,7 +1,7 @@
 import type { ClubRules } from './booking/rules';
+import { type SitWindow, WINDOW_NAMES, type WindowName } from './condition-types';
 import { addDays, dayOf, localToUtc } from './day-time';
 import { daylight, type Place } from './sun';
-import { type SitWindow, WINDOW_NAMES, type WindowName } from './types';
 
 const MINUTE_MS = 60_000;
 

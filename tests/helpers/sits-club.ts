@@ -1,5 +1,5 @@
 import { beforeAll, beforeEach } from 'vitest';
-import type { Forecast, WeatherHour } from '@/core/types';
+import type { Forecast, WeatherHour } from '@/core/condition-types';
 import { readSits, type SitsAsk } from '@/features/sits/reads';
 import type { KeptForecast } from '@/features/weather/get-forecast';
 import { setClock } from '@/server/clock';

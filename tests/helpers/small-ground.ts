@@ -1,17 +1,8 @@
 import { DEFAULT_CLUB_RULES } from '@/core/booking/rules';
+import type { Forecast, SitWindow, WeatherHour, WindowName } from '@/core/condition-types';
+import type { LocalShape, Point, ScoredApproach, ScoredFeature, ScoredStand } from '@/core/ground-types';
 import type { RankInput } from '@/core/rank-input';
 import { DEFAULT_SETTINGS } from '@/core/settings';
-import type {
-  Forecast,
-  LocalShape,
-  Point,
-  ScoredApproach,
-  ScoredFeature,
-  ScoredStand,
-  SitWindow,
-  WeatherHour,
-  WindowName,
-} from '@/core/types';
 import { sitWindow } from '@/core/windows';
 
 const HOUR = 3_600_000;

@@ -1,10 +1,11 @@
 import { count, eq, getTableColumns } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
+import type { WindowName } from '@/core/condition-types';
 import { addDays, dayOf, daysBetween } from '@/core/day-time';
 import { distanceM, insideRings, toLocal } from '@/core/geometry';
+import { FEATURE_KINDS, STAND_KINDS } from '@/core/ground-types';
 import { quotaStates } from '@/core/harvest/quotas';
 import { ROLES } from '@/core/permissions';
-import { FEATURE_KINDS, STAND_KINDS, type WindowName } from '@/core/types';
 import { m2ToAcre } from '@/core/units';
 import { reader } from '@/db/client';
 import * as schema from '@/db/schema';

@@ -1,7 +1,7 @@
 import { eq } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
+import { FEATURE_KINDS } from '@/core/ground-types';
 import { MAP_LAYERS } from '@/core/map-layers';
-import { FEATURE_KINDS } from '@/core/types';
 import { reader } from '@/db/client';
 import { auditLog, imports, stands } from '@/db/schema';
 import { EXPORT_FORMATS, EXPORT_LAYERS } from '@/features/exchange/exchange-schema';

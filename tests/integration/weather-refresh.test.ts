@@ -4,7 +4,7 @@ import { latestRun } from '@/adapters/weather/fake/make-forecast';
 import { stopFakeWeather } from '@/adapters/weather/fake/serve';
 import { type WeatherPlace, type WeatherPort, type WeatherResult, weatherFailure } from '@/adapters/weather/port';
 import { DEFAULT_CLUB_RULES } from '@/core/booking/rules';
-import type { Forecast } from '@/core/types';
+import type { Forecast } from '@/core/condition-types';
 import { write } from '@/db/client';
 import { clubs, forecasts } from '@/db/schema';
 import { ensureForecast } from '@/features/weather/ensure-forecast';

@@ -1,7 +1,7 @@
 import { Unit } from '@openmeteo/sdk/unit.js';
 import { Variable } from '@openmeteo/sdk/variable.js';
 import { z } from 'zod';
-import type { EnsembleMember, WeatherHour } from '@/core/types';
+import type { EnsembleMember, WeatherHour } from '@/core/condition-types';
 import type { DecodedAnswer, DecodedVariable } from './decode-answer';
 import type { WeatherPlace } from './port';
 

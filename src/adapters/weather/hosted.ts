@@ -1,5 +1,5 @@
 import { fetchWeatherApi } from 'openmeteo';
-import type { EnsembleMember } from '@/core/types';
+import type { EnsembleMember } from '@/core/condition-types';
 import { checkHours, checkMembers } from './check-answer';
 import { type DecodedAnswer, decodeAnswer } from './decode-answer';
 import {

@@ -1,4 +1,4 @@
-import type { Forecast } from '@/core/types';
+import type { Forecast } from '@/core/condition-types';
 
 export interface WeatherPlace {
   lat: number;

@@ -1,4 +1,4 @@
-import type { WeatherHour } from '@/core/types';
+import type { WeatherHour } from '@/core/condition-types';
 
 /** A row that was left out, by its line in the file (the heading is line 1). */
 export interface ReplayProblem {

@@ -1,5 +1,5 @@
 import { readFile } from 'node:fs/promises';
-import type { Forecast, WeatherHour } from '@/core/types';
+import type { Forecast, WeatherHour } from '@/core/condition-types';
 import { type WeatherPort, weatherFailure } from './port';
 import { parseReplayCsv } from './replay-csv';
 

@@ -1,6 +1,6 @@
+import type { Forecast, WeatherHour } from '../condition-types';
 import type { AirSettings } from '../settings';
 import { sunPosition } from '../sun';
-import type { Forecast, WeatherHour } from '../types';
 import { hoursAround, stepStarts, usableWinds, type WindAt, windAt } from './interpolate';
 import { isStabilityNight } from './night-rule';
 import { stabilityOf } from './stability';

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
+import { SHELTER_CLASSES } from '../ground-types';
 import { DEFAULT_SETTINGS } from '../settings';
-import { SHELTER_CLASSES } from '../types';
 import { heightShare } from './power-law';
 import { NWCG_FACTORS, shelterShare } from './shelter';
 import { STABILITY_CLASSES } from './stability-types';

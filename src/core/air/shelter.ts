@@ -1,5 +1,5 @@
+import type { ShelterClass } from '../ground-types';
 import type { AirSettings } from '../settings';
-import type { ShelterClass } from '../types';
 
 /**
  * NWCG wind adjustment factors on 20-ft wind (Firefighter Math 8.2; the 0.1 was read, the rest are values from memory):

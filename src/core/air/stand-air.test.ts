@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import type { Forecast, WeatherHour } from '../condition-types';
 import { DEFAULT_SETTINGS } from '../settings';
-import type { Forecast, WeatherHour } from '../types';
 import { placeAir } from './place-air';
 import { standAir } from './stand-air';
 

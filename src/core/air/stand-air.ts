@@ -1,6 +1,6 @@
 import { toRad, windFromVector } from '../angles';
+import type { ScoredStand } from '../ground-types';
 import type { AirSettings } from '../settings';
-import type { ScoredStand } from '../types';
 import type { PlaceStep } from './place-air';
 import { heightShare } from './power-law';
 import { shelterShare } from './shelter';

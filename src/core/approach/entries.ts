@@ -1,4 +1,5 @@
-import type { ApproachOption, SitWindow } from '../types';
+import type { SitWindow } from '../condition-types';
+import type { ApproachOption } from '../verdict-types';
 import type { SunMarks } from '../whereabouts';
 import type { ApproachSettings } from './approach-settings';
 

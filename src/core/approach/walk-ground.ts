@@ -1,6 +1,6 @@
 import { turnDeg } from '../angles';
 import { bearingDeg, distanceM, nearestOnShape, pointAt } from '../geometry';
-import type { LocalShape, Point, ScoredApproach, ScoredFeature } from '../types';
+import type { LocalShape, Point, ScoredApproach, ScoredFeature } from '../ground-types';
 import type { ApproachSettings } from './approach-settings';
 import { seenFalloff } from './seen-heard';
 import { routeLengths, walkSeconds } from './walk-times';

@@ -1,5 +1,5 @@
 import { distanceM } from '../geometry';
-import type { Point, ScoredApproach, ScoredFeature } from '../types';
+import type { Point, ScoredApproach, ScoredFeature } from '../ground-types';
 import type { WalkContext } from './try-ways';
 import { walkChance } from './walk-chance';
 import { buildWalkGround, circleOf, sourcesAlong } from './walk-ground';

@@ -1,5 +1,5 @@
 import { distanceM, lengthM } from '../geometry';
-import type { ScoredApproach } from '../types';
+import type { ScoredApproach } from '../ground-types';
 import type { ApproachSettings } from './approach-settings';
 
 /** Metres driven and walked from the parking place to the stand. */

@@ -1,5 +1,6 @@
+import type { SitWindow, WindowName } from '../condition-types';
+import type { Point, Weapon } from '../ground-types';
 import type { Role } from '../permissions';
-import type { Point, SitWindow, Weapon, WindowName } from '../types';
 import type { Units } from '../units';
 import type { ClosedDays, ClubRules } from './rules';
 

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import type { WindowName } from '../condition-types';
 import { addDays, localToUtc } from '../day-time';
-import type { WindowName } from '../types';
 import { checkBooking } from './check-booking';
 import { bookingCheck, otherSit, PLACE, rulesWith, STAND } from './example-booking';
 

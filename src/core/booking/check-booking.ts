@@ -1,4 +1,4 @@
-import type { Gate } from '../types';
+import type { Gate } from '../verdict-types';
 import type { BookingCheck } from './booking-types';
 import { claimAheadGates, windowOverGates } from './claim-ahead';
 import { liveClaimGates, seasonLimitGates } from './claim-limits';

@@ -1,5 +1,6 @@
+import type { SitWindow } from '../condition-types';
 import { addDays, dayOf, daysBetween, formatClock, formatDay } from '../day-time';
-import type { Gate, SitWindow } from '../types';
+import type { Gate } from '../verdict-types';
 import { GATE_WORDS } from '../words/gates';
 import type { ClaimAhead } from './rules';
 

@@ -1,5 +1,5 @@
 import { addDays, formatDay } from '../day-time';
-import type { Gate } from '../types';
+import type { Gate } from '../verdict-types';
 import { GATE_WORDS } from '../words/gates';
 import type { BookingMember, BookingStand, OtherSit } from './booking-types';
 import { huntingYear } from './hunting-year';

@@ -1,5 +1,5 @@
+import type { WindowName } from '../condition-types';
 import { localToUtc } from '../day-time';
-import type { WindowName } from '../types';
 import { sitWindow } from '../windows';
 import type { BookingCheck, BookingStand, OtherSit } from './check-booking';
 import { type ClubRules, DEFAULT_CLUB_RULES } from './rules';

@@ -1,5 +1,6 @@
+import type { WindowName } from '../condition-types';
 import { addDays } from '../day-time';
-import type { Gate, WindowName } from '../types';
+import type { Gate } from '../verdict-types';
 import { GATE_WORDS } from '../words/gates';
 import type { BookingMember, GuestHunt } from './booking-types';
 import type { ClubRules } from './rules';

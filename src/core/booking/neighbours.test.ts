@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { pointAt } from '../geometry';
-import { WEAPONS } from '../types';
+import { WEAPONS } from '../ground-types';
 import { ydToM } from '../units';
 import { checkBooking } from './check-booking';
 import { bookingCheck, otherSit, rulesWith, STAND } from './example-booking';

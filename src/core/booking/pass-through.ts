@@ -1,6 +1,8 @@
+import type { WindowName } from '../condition-types';
 import { distanceToShapeM } from '../geometry';
-import type { Gate, Point, WindowName } from '../types';
+import type { Point } from '../ground-types';
 import { formatExactDistance, type Units } from '../units';
+import type { Gate } from '../verdict-types';
 import { GATE_WORDS } from '../words/gates';
 import type { BookingStand, OtherSit } from './booking-types';
 import { sitsBeside } from './spacing';

@@ -1,5 +1,5 @@
 import { addDays, daysBetween, formatDay } from '../day-time';
-import type { Gate } from '../types';
+import type { Gate } from '../verdict-types';
 import { GATE_WORDS } from '../words/gates';
 import type { OtherSit } from './booking-types';
 

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { isClock, isDay } from '../day-time';
+import { WEAPONS } from '../ground-types';
 import { QUOTA_DEER, QUOTA_PER } from '../harvest/harvest-types';
-import { WEAPONS } from '../types';
 import { CALENDAR_PRIVACY, type ClubRules, SIGHTINGS_SEEN_BY } from './rules';
 
 const day = z.string().refine(isDay, 'Give a day as YYYY-MM-DD.');

@@ -1,6 +1,6 @@
+import { WEAPONS, type Weapon } from '../ground-types';
 import type { GroundWork } from '../ground-work';
 import type { HarvestQuota } from '../harvest/harvest-types';
-import { WEAPONS, type Weapon } from '../types';
 import { ydToM } from '../units';
 
 /** Hours in which the club allows a shot, counted from the sun. The club states it; nothing here says what is legal. */

@@ -1,5 +1,6 @@
 import { formatDay } from '../day-time';
-import type { Gate, Weapon } from '../types';
+import type { Weapon } from '../ground-types';
+import type { Gate } from '../verdict-types';
 import { GATE_WORDS } from '../words/gates';
 import { WEAPON_WORDS } from '../words/weapons';
 import type { ClubRules, LegalLightRule, Season } from './rules';

@@ -1,5 +1,5 @@
 import { can } from '../permissions';
-import type { Gate } from '../types';
+import type { Gate } from '../verdict-types';
 import { GATE_WORDS } from '../words/gates';
 import type { BookingMember, BookingStand } from './booking-types';
 

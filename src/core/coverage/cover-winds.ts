@@ -1,7 +1,8 @@
 import { anyArcContains, arcsFor } from '../arcs';
+import { type SitWindow, type WeatherHour, WINDOW_NAMES, type WindowName } from '../condition-types';
 import { monthOf } from '../day-time';
+import type { Arc, ScoredStand } from '../ground-types';
 import { sectorOf } from '../sectors';
-import { type Arc, type ScoredStand, type SitWindow, type WeatherHour, WINDOW_NAMES, type WindowName } from '../types';
 
 export type CoveringStand = Pick<ScoredStand, 'id' | 'name' | 'arcs' | 'suitability'>;
 

@@ -1,6 +1,6 @@
 import { anyArcContains } from '../arcs';
+import { WINDOW_NAMES, type WindowName } from '../condition-types';
 import { sectorOf } from '../sectors';
-import { WINDOW_NAMES, type WindowName } from '../types';
 import { type CountedWind, type CoveringStand, huntedArcs } from './cover-winds';
 
 /** What a stand that is not there yet would add in one window. Shares 0-1 of the hours with a direction. */

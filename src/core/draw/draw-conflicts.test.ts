@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { DEFAULT_CLUB_RULES } from '../booking/rules';
-import type { Point, Weapon } from '../types';
+import type { Point, Weapon } from '../ground-types';
 import { drawConflicts } from './draw-conflicts';
 
 const line = (...points: [number, number][]) => points.map(([x, y]) => ({ eastM: x, northM: y }));

@@ -3,7 +3,7 @@ import { clearApproaches } from '../booking/pass-through';
 import { restGates } from '../booking/rest';
 import { type ClubRules, spacingBetweenM } from '../booking/rules';
 import { distanceM } from '../geometry';
-import type { Point, Weapon } from '../types';
+import type { Point, Weapon } from '../ground-types';
 import type { Conflict, PlaceWays } from './allotment';
 
 /** As in booking: distances this close are the same. */

@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { at, box, makeFeature, makeStand } from '../../../tests/helpers/small-ground';
+import type { ScoredFeature, ScoredStand } from '../ground-types';
 import { DEFAULT_SETTINGS } from '../settings';
 import { DEFAULT_SETUP } from '../setup-check/setup-settings';
-import type { ScoredFeature, ScoredStand } from '../types';
 import { chainMovement, type MovementInput } from './chain-movement';
 
 const line = (id: string, ...points: [number, number][]) =>

@@ -1,9 +1,10 @@
+import type { WindowName } from '../condition-types';
 import { bearingDeg, distanceM, distanceToShapeM, lengthM } from '../geometry';
+import type { FeatureKind, Point, ScoredFeature, ScoredStand } from '../ground-types';
 import { sectorName } from '../sectors';
 import type { ScoringSettings } from '../settings';
 import type { SetupSettings } from '../setup-check/setup-settings';
 import { along, canShoot, carries, shotOf, windowsHunted, windsHunted } from '../setup-check/shot-of';
-import type { FeatureKind, Point, ScoredFeature, ScoredStand, WindowName } from '../types';
 import { usesOf } from '../whereabouts';
 import { stretchOf } from './stretch';
 

@@ -1,5 +1,5 @@
 import { distanceM } from '../geometry';
-import type { Point } from '../types';
+import type { Point } from '../ground-types';
 
 /** The part of a line between two distances along it, metres from its first point: both ends and every corner between. */
 export function stretchOf(points: Point[], fromM: number, toM: number): Point[] {

@@ -1,9 +1,10 @@
 import type { ClubRules } from '../booking/rules';
 import { legalLightRuleOf } from '../booking/seasons';
+import type { WindowName } from '../condition-types';
 import { addDays, dayOf, formatClock, localToUtc } from '../day-time';
+import type { Weapon } from '../ground-types';
 import { legalLight } from '../legal-light';
 import type { Place } from '../sun';
-import type { Weapon, WindowName } from '../types';
 
 const MINUTE_MS = 60_000;
 const HOUR_MS = 60 * MINUTE_MS;

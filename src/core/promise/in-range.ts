@@ -1,6 +1,6 @@
 import { turnDeg } from '../angles';
 import { bearingDeg, distanceM, nearestOnShape } from '../geometry';
-import type { ScoredFeature, ScoredStand, Weapon } from '../types';
+import type { ScoredFeature, ScoredStand, Weapon } from '../ground-types';
 import type { PromiseSettings } from './promise-settings';
 
 /** A bow shot of 30 yd: what a stand with no range written is taken to reach. Practice. */

@@ -1,4 +1,4 @@
-import type { Suitability } from '../types';
+import type { Suitability } from '../ground-types';
 import { shareAt } from '../whereabouts';
 import { crosswindFactor, crosswindShare } from './crosswind';
 import type { InRange } from './in-range';

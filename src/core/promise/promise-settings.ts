@@ -1,4 +1,4 @@
-import type { Suitability, TimeOfDay } from '../types';
+import type { Suitability, TimeOfDay } from '../ground-types';
 
 export interface PromiseSettings {
   /** Chance of deer in range in daylight that the steward's own rating of the window stands for. */

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { ScoredFeature, ScoredStand } from '../types';
+import type { ScoredFeature, ScoredStand } from '../ground-types';
 import { crosswindFactor, crosswindShare } from './crosswind';
 import { featuresInRange, shotRangeM } from './in-range';
 import { promiseSeated } from './promise-factors';

@@ -1,4 +1,4 @@
-import type { StandSightings } from '../types';
+import type { StandSightings } from '../condition-types';
 import type { PromiseSettings } from './promise-settings';
 
 /** Deer an hour over a whole log; the published default where no hours were sat. */

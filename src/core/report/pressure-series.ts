@@ -1,5 +1,6 @@
+import type { PressureEvent } from '../condition-types';
+import type { Point } from '../ground-types';
 import { nearEvents, type PressureSettings, pressureLeft } from '../pressure';
-import type { Point, PressureEvent } from '../types';
 
 const DAY_MS = 86_400_000;
 

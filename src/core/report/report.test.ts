@@ -1,10 +1,10 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { firstRestedDay } from '../booking/rest';
+import { PRESSURE_KINDS, type PressureEvent } from '../condition-types';
 import { addDays } from '../day-time';
 import { gini } from '../draw/fairness';
 import { DEFAULT_PRESSURE, nearEvents, pressureLeft } from '../pressure';
-import { PRESSURE_KINDS, type PressureEvent } from '../types';
 import { bumpsByWind, countBumps, windOf } from './bumps';
 import { giniByLot, sharedAs } from './by-lot';
 import { goodSits, type JudgedSit, LEAST_SCORES } from './good-sits';

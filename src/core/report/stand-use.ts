@@ -1,4 +1,5 @@
-import type { Suitability, WindowName } from '../types';
+import type { WindowName } from '../condition-types';
+import type { Suitability } from '../ground-types';
 import type { Week } from './weeks';
 
 /** A sit that has ended. */

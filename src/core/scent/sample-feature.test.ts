@@ -1,8 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { distanceM, insideRings } from '../geometry';
+import type { LocalShape, Point } from '../ground-types';
 import { DEFAULT_SETTINGS } from '../settings';
-import type { LocalShape, Point } from '../types';
 import { sampleFeature } from './sample-feature';
 
 const s = DEFAULT_SETTINGS.scent;

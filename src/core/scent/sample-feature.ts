@@ -1,6 +1,6 @@
 import { insideRings, lengthM } from '../geometry';
+import type { LocalShape, Point } from '../ground-types';
 import type { ScentSettings } from '../settings';
-import type { LocalShape, Point } from '../types';
 
 /** Places deer may stand in a feature; weights sum to 1. */
 export interface SampledFeature {

@@ -1,8 +1,8 @@
 import type { StabilityClass } from '../air/stability-types';
 import { apartDeg, downwindDeg } from '../angles';
 import { bearingDeg, distanceM } from '../geometry';
+import type { Point } from '../ground-types';
 import type { ScentSettings } from '../settings';
-import type { Point } from '../types';
 import { extraScatterDeg } from '../wind/scatter';
 import type { ScenarioSet } from '../wind/scenario-types';
 import { sweptPlume } from './plume';

@@ -1,8 +1,8 @@
 import type { StabilityClass } from '../air/stability-types';
 import { stabilityIndex } from '../air/stability-types';
 import { normalizeDeg } from '../angles';
+import type { LocalShape, Point } from '../ground-types';
 import type { ScentSettings } from '../settings';
-import type { LocalShape, Point } from '../types';
 import { type PlumeTable, plumeTable, WIDENINGS_DEG } from './plume-table';
 import { type SampledFeature, sampleFeature } from './sample-feature';
 import { referenceStrength } from './saturate';

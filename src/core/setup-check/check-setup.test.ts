@@ -11,9 +11,9 @@ import {
 } from '../../../tests/helpers/small-ground';
 import { apartDeg } from '../angles';
 import { localToUtc } from '../day-time';
+import type { ScoredApproach, ScoredFeature, ScoredStand } from '../ground-types';
 import { DEFAULT_SETTINGS } from '../settings';
 import { sunPosition } from '../sun';
-import type { ScoredApproach, ScoredFeature, ScoredStand } from '../types';
 import { checkSetup } from './check-setup';
 import { DEFAULT_SETUP } from './setup-settings';
 import type { Finding, SetupInput } from './setup-types';

@@ -1,6 +1,6 @@
 import { monthOf } from '../day-time';
 import { bearingDeg, distanceM, distanceToShapeM, nearestOnShape } from '../geometry';
-import { type Point, type ScoredApproach, type ScoredFeature, type ScoredStand, TIMES_OF_DAY } from '../types';
+import { type Point, type ScoredApproach, type ScoredFeature, type ScoredStand, TIMES_OF_DAY } from '../ground-types';
 import { usesOf } from '../whereabouts';
 import { approachFacts, away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';

@@ -1,3 +1,4 @@
+import type { WindowName } from '../condition-types';
 import { monthOf } from '../day-time';
 import { bearingDeg, distanceM, distanceToShapeM, nearestOnShape } from '../geometry';
 import {
@@ -7,8 +8,7 @@ import {
   type ScoredStand,
   TIMES_OF_DAY,
   type TimeOfDay,
-  type WindowName,
-} from '../types';
+} from '../ground-types';
 import { formatDistance } from '../units';
 import { usesOf } from '../whereabouts';
 import { approachFacts, away, featureFacts, listText, makeFinding } from './make-finding';

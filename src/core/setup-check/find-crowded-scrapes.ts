@@ -1,5 +1,5 @@
 import { bearingDeg, distanceM, nearestOnShape } from '../geometry';
-import type { Point, ScoredFeature, ScoredStand } from '../types';
+import type { Point, ScoredFeature, ScoredStand } from '../ground-types';
 import { formatDistance } from '../units';
 import { away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';

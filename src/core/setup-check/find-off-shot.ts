@@ -1,5 +1,5 @@
+import type { ScoredFeature, ScoredStand } from '../ground-types';
 import { sectorName } from '../sectors';
-import type { ScoredFeature, ScoredStand } from '../types';
 import { formatDistance } from '../units';
 import { away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';

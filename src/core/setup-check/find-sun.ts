@@ -1,9 +1,9 @@
 import { apartDeg, normalizeDeg } from '../angles';
 import { formatClock, formatClock12, localToUtc, monthOf } from '../day-time';
+import type { ScoredStand } from '../ground-types';
 import { sunInEyes } from '../promise/sun-in-eyes';
 import { sectorName } from '../sectors';
 import { sunPosition } from '../sun';
-import type { ScoredStand } from '../types';
 
 import { makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';

@@ -1,4 +1,4 @@
-import type { ScoredFeature, ScoredStand } from '../types';
+import type { ScoredFeature, ScoredStand } from '../ground-types';
 import { away, featureFacts, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import {

@@ -1,5 +1,5 @@
+import type { LocalShape, ScoredApproach, ScoredFeature, ScoredStand } from '../ground-types';
 import { sectorName } from '../sectors';
-import type { LocalShape, ScoredApproach, ScoredFeature, ScoredStand } from '../types';
 import type { Units } from '../units';
 import { formatDistance } from '../units';
 import type { Finding } from './setup-types';

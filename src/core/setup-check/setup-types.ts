@@ -1,8 +1,10 @@
+import type { SitWindow, WindowName } from '../condition-types';
+import type { Point, ScoredApproach, ScoredFeature, ScoredStand } from '../ground-types';
 import type { GroundWork } from '../ground-work';
 import type { ScoringSettings } from '../settings';
 import type { Place } from '../sun';
-import type { Evidence, Point, ScoredApproach, ScoredFeature, ScoredStand, SitWindow, WindowName } from '../types';
 import type { Units } from '../units';
+import type { Evidence } from '../verdict-types';
 import type { SetupSettings } from './setup-settings';
 
 export const FINDING_CODES = [

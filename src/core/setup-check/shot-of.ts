@@ -1,18 +1,10 @@
 import { apartDeg, downwindDeg } from '../angles';
 import { anyArcContains, arcsFor } from '../arcs';
+import { WINDOW_NAMES, type WindowName } from '../condition-types';
 import { bearingDeg, distanceM, distanceToShapeM, lengthM, nearestOnShape } from '../geometry';
+import type { FeatureKind, LocalShape, Point, ScoredApproach, ScoredFeature, ScoredStand } from '../ground-types';
 import type { GroundWork } from '../ground-work';
 import { shotRangeM, shotSideShare } from '../promise/in-range';
-import {
-  type FeatureKind,
-  type LocalShape,
-  type Point,
-  type ScoredApproach,
-  type ScoredFeature,
-  type ScoredStand,
-  WINDOW_NAMES,
-  type WindowName,
-} from '../types';
 import type { SetupInput } from './setup-types';
 
 /** What draws deer to itself. */

@@ -1,6 +1,8 @@
+import type { Forecast, SitWindow, WeatherHour, WindowName } from '../condition-types';
+import type { ScoredStand } from '../ground-types';
 import { prepareGround, rankSits } from '../rank';
 import type { GroundInput } from '../rank-input';
-import type { Forecast, ScoredStand, SitWindow, Verdict, WeatherHour, WindowName } from '../types';
+import type { Verdict } from '../verdict-types';
 import type { Finding, SetupEffect, SetupTrial, UsualWinds } from './setup-types';
 import { windowsHunted, windsHunted } from './shot-of';
 

@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { at, box, makeApproach, makeFeature, makeStand, PLACE, windowOf } from '../../../tests/helpers/small-ground';
+import type { ScoredFeature, ScoredStand } from '../ground-types';
 import { DEFAULT_SETTINGS } from '../settings';
-import type { ScoredFeature, ScoredStand } from '../types';
 import { checkSetup } from './check-setup';
 import { DEFAULT_SETUP } from './setup-settings';
 import type { SetupInput } from './setup-types';

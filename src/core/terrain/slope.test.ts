@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { apartDeg } from '../angles';
 import { fromLocal, toLocal } from '../geometry';
-import type { Point } from '../types';
+import type { Point } from '../ground-types';
 import { type HeightGrid, heightAt, slopeAt } from './height-grid';
 
 const CENTRE = { lat: 41.1, lon: -77.3 };

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { STAND_KINDS } from '../types';
+import { STAND_KINDS } from '../ground-types';
 import { dueState, INSPECTION_ITEMS, ITEM_ANSWERS, itemsFor, mildestResult, resultFits, strapDue } from './inspection';
 
 describe('what is looked at', () => {

@@ -1,5 +1,5 @@
 import { addDays, daysBetween } from '../day-time';
-import type { StandKind } from '../types';
+import type { StandKind } from '../ground-types';
 
 export const INSPECTION_RESULTS = ['pass', 'fix_first', 'closed'] as const;
 export type InspectionResult = (typeof INSPECTION_RESULTS)[number];

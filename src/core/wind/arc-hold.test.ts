@@ -2,8 +2,9 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { placeAir } from '../air/place-air';
 import { normalizeDeg } from '../angles';
+import type { EnsembleMember, Forecast } from '../condition-types';
+import type { Arc } from '../ground-types';
 import { DEFAULT_SETTINGS, type ScoringSettings } from '../settings';
-import type { Arc, EnsembleMember, Forecast } from '../types';
 import { arcHold } from './arc-hold';
 import { buildScenarios } from './scenarios';
 

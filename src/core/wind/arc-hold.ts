@@ -1,4 +1,5 @@
-import type { Arc, ArcHoldSummary } from '../types';
+import type { Arc } from '../ground-types';
+import type { ArcHoldSummary } from '../verdict-types';
 import { arcTest, chanceInArcs } from './arc-probability';
 import type { ScenarioSet } from './scenario-types';
 

@@ -1,7 +1,7 @@
 import { normalizeDeg } from '../angles';
 import { arcWidthDeg, mergeArcs } from '../arcs';
 import { normalCdf } from '../erf';
-import type { Arc } from '../types';
+import type { Arc } from '../ground-types';
 
 const STEPS_PER_SIGMA = 256;
 const REACH = 6;

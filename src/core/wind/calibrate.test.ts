@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { normalizeDeg } from '../angles';
+import type { WeatherHour } from '../condition-types';
 import { DEFAULT_SETTINGS } from '../settings';
-import type { WeatherHour } from '../types';
 import { calibrate, type ForecastPair, pairHours, sectorArcs, tuneErrorModel, withErrorModel } from './calibrate';
 import { normalNodes } from './error-model';
 

@@ -2,8 +2,9 @@ import type { PlaceStep } from '../air/place-air';
 import type { StabilityClass } from '../air/stability-types';
 import { normalizeDeg } from '../angles';
 import { arcContains } from '../arcs';
+import type { Forecast, WeatherHour } from '../condition-types';
+import type { Arc } from '../ground-types';
 import type { ScoringSettings, SpeedPoint } from '../settings';
-import type { Arc, Forecast, WeatherHour } from '../types';
 import { arcHold } from './arc-hold';
 import { buildScenarios } from './scenarios';
 

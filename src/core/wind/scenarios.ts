@@ -1,8 +1,8 @@
 import { usableWinds, windAt } from '../air/interpolate';
 import type { PlaceStep } from '../air/place-air';
 import { normalizeDeg } from '../angles';
+import type { Forecast } from '../condition-types';
 import type { ScoringSettings } from '../settings';
-import type { Forecast } from '../types';
 import { directionErrorDeg, normalNodes, widenByVariable } from './error-model';
 import { scatterDeg } from './scatter';
 import type { ScenarioSet, ScenarioStep, WindScenario } from './scenario-types';

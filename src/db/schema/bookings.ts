@@ -1,6 +1,7 @@
 import { index, integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
+import { WINDOW_NAMES } from '@/core/condition-types';
+import { WEAPONS } from '@/core/ground-types';
 import { FOLLOW_UPS, HIT_PLACES, SHOTS } from '@/core/log/follow-up';
-import { WEAPONS, WINDOW_NAMES } from '@/core/types';
 import { clubs, memberships } from './clubs';
 import { approaches, stands } from './ground';
 

@@ -1,7 +1,8 @@
 import { sql } from 'drizzle-orm';
 import { index, integer, primaryKey, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
+import type { WindowName } from '@/core/condition-types';
 import type { PointRules } from '@/core/draw/points';
-import { WEAPONS, type WindowName } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { type SitGuest, sits } from './bookings';
 import { clubs, memberships } from './clubs';
 import { stands } from './ground';

@@ -1,16 +1,16 @@
 import { index, integer, real, sqliteTable, text } from 'drizzle-orm/sqlite-core';
 import type { Geometry, Position } from 'geojson';
-import type { CropYear } from '@/core/map-layers';
+import { PRESSURE_KINDS } from '@/core/condition-types';
 import {
   FEATURE_KINDS,
   type GoodWindArc,
-  PRESSURE_KINDS,
   SHELTER_CLASSES,
   STAND_KINDS,
   SUITABILITIES,
   type UseTable,
   type Weapon,
-} from '@/core/types';
+} from '@/core/ground-types';
+import type { CropYear } from '@/core/map-layers';
 import { clubs } from './clubs';
 
 const clubId = () =>

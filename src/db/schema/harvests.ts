@@ -1,6 +1,6 @@
 import { index, integer, real, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
+import { WEAPONS } from '@/core/ground-types';
 import { AGE_CLASSES, AGE_METHODS, SEXES } from '@/core/harvest/harvest-types';
-import { WEAPONS } from '@/core/types';
 import { sits } from './bookings';
 import { clubs, memberships } from './clubs';
 import { stands } from './ground';

@@ -1,6 +1,6 @@
 import { weaponWord } from '@/core/booking/seasons';
 import { formatClock } from '@/core/day-time';
-import { WEAPONS, type Weapon } from '@/core/types';
+import { WEAPONS, type Weapon } from '@/core/ground-types';
 import { reader } from '@/db/client';
 import { loadGates } from '@/features/bookings/load-gates';
 import { listStandsForRules } from '@/features/bookings/rules-data';

@@ -1,4 +1,4 @@
-import type { SitWindow } from '@/core/types';
+import type { SitWindow } from '@/core/condition-types';
 import { dayAndWindow, spanText } from '@/features/bookings/sit-words';
 import { walkUpWindow } from '@/features/outings/walk-up';
 import type { ClubScope } from '@/server/scope';

@@ -1,5 +1,6 @@
+import type { SitWindow } from '@/core/condition-types';
 import { formatDay } from '@/core/day-time';
-import type { SitWindow, Weapon } from '@/core/types';
+import type { Weapon } from '@/core/ground-types';
 import type { ReadFrom, Tx } from '@/db/client';
 import type { SitGuest } from '@/db/schema';
 import { AppError } from '@/server/errors';

@@ -1,4 +1,4 @@
-import type { WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
 import type { Tx } from '@/db/client';
 import { isUniqueViolation } from '@/db/errors';
 import type { ClubScope } from '@/server/scope';

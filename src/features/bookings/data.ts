@@ -1,5 +1,5 @@
 import { and, asc, desc, eq, gt, gte, inArray, lte, ne, or } from 'drizzle-orm';
-import type { WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
 import { type ReadFrom, reader, type Tx } from '@/db/client';
 import { approaches, claims, memberships, outings, parkings, sits, stands, users } from '@/db/schema';
 import { newId } from '@/lib/ids';

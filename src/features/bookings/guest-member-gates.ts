@@ -1,7 +1,7 @@
 import { guestActive } from '@/core/access-window';
 import { formatDay } from '@/core/day-time';
 import type { Role } from '@/core/permissions';
-import type { Gate } from '@/core/types';
+import type { Gate } from '@/core/verdict-types';
 import { SIT_ERRORS } from './words/errors';
 
 export interface DatedGuest {

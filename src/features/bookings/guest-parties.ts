@@ -1,5 +1,5 @@
 import type { GuestHunt } from '@/core/booking/booking-types';
-import { WINDOW_NAMES, type WindowName } from '@/core/types';
+import { WINDOW_NAMES, type WindowName } from '@/core/condition-types';
 import type { SitGuest } from '@/db/schema';
 
 /** Guests on one sit, each by a key that is the same wherever the same person is named. */

@@ -1,4 +1,6 @@
-import type { Gate, Weapon, WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
+import type { Weapon } from '@/core/ground-types';
+import type { Gate } from '@/core/verdict-types';
 import { type ReadFrom, reader } from '@/db/client';
 import type { ClubScope } from '@/server/scope';
 import { gatesFor, loadBookingContext } from './booking-context';

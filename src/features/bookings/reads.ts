@@ -1,5 +1,5 @@
 import { weaponWord } from '@/core/booking/seasons';
-import { WEAPONS, type Weapon } from '@/core/types';
+import { WEAPONS, type Weapon } from '@/core/ground-types';
 import { type ReadFrom, reader } from '@/db/client';
 import type { ClubScope } from '@/server/scope';
 import { listPastSits, listUpcomingSits } from './data';

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { isDay } from '@/core/day-time';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { SIT_WINDOWS } from './sit-words';
 import { SIT_FIELD_ERRORS } from './words/errors';
 

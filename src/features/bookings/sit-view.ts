@@ -1,5 +1,5 @@
 import { weaponWord } from '@/core/booking/seasons';
-import type { Weapon } from '@/core/types';
+import type { Weapon } from '@/core/ground-types';
 import type { SitGuest } from '@/db/schema';
 import type { ClubScope } from '@/server/scope';
 import type { SitDetail } from './data';

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { STAND_KINDS } from '@/core/types';
+import { STAND_KINDS } from '@/core/ground-types';
 import {
   INSPECTION_ITEMS,
   INSPECTION_RESULTS,

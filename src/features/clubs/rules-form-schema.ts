@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { CALENDAR_PRIVACY, type ClaimAhead, type ClubRules, SIGHTINGS_SEEN_BY } from '@/core/booking/rules';
 import { clubRulesSchema } from '@/core/booking/rules-schema';
 import { isClock } from '@/core/day-time';
-import { WEAPONS, type Weapon } from '@/core/types';
+import { WEAPONS, type Weapon } from '@/core/ground-types';
 import { type Units, ydToM } from '@/core/units';
 import { formReader, type TextReader } from './read-number';
 import { harvestRuleFields, readHarvestRules, readStated } from './rules-harvest-form';

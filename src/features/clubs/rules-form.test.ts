@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { type ClubRules, DEFAULT_CLUB_RULES } from '@/core/booking/rules';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { rulesToForm } from './rules-form';
 import { makeRulesSchema, type RulesForm } from './rules-form-schema';
 

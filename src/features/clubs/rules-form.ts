@@ -1,5 +1,5 @@
 import type { ClubRules } from '@/core/booking/rules';
-import { WEAPONS, type Weapon } from '@/core/types';
+import { WEAPONS, type Weapon } from '@/core/ground-types';
 import { mToYd, type Units } from '@/core/units';
 import { numberText } from './read-number';
 import type { RulesForm } from './rules-form-schema';

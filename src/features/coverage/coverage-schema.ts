@@ -1,5 +1,6 @@
 import { z } from 'zod';
-import type { ScoredStand, Suitability, WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
+import type { ScoredStand, Suitability } from '@/core/ground-types';
 import { readArcs } from '@/features/ground/arc-text';
 
 const shared = {

@@ -1,7 +1,7 @@
 import type { WeatherPort } from '@/adapters/weather/port';
 import { huntingYear } from '@/core/booking/hunting-year';
+import type { WeatherHour } from '@/core/condition-types';
 import { addDays, dayOf } from '@/core/day-time';
-import type { WeatherHour } from '@/core/types';
 import { getForecast } from '@/features/weather/get-forecast';
 import { currentWeather, refreshForecast } from '@/features/weather/refresh-forecast';
 import type { ClubScope } from '@/server/scope';

@@ -1,10 +1,10 @@
 import { dayOf } from '@/core/day-time';
 import { toLocal } from '@/core/geometry';
+import type { GoodWindArc, ScoredStand } from '@/core/ground-types';
 import { cropYearOf } from '@/core/map-layers';
 import { sectorName } from '@/core/sectors';
 import { DEFAULT_SETTINGS } from '@/core/settings';
 import { judgeUsual } from '@/core/setup-check/weigh-finding';
-import type { GoodWindArc, ScoredStand } from '@/core/types';
 import { ydToM } from '@/core/units';
 import { allDayWindows } from '@/core/windows';
 import { wordFor } from '@/core/word';

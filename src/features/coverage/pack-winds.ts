@@ -1,5 +1,5 @@
+import { WINDOW_NAMES } from '@/core/condition-types';
 import type { CountedWind } from '@/core/coverage/cover-winds';
-import { WINDOW_NAMES } from '@/core/types';
 
 /** A season's winds for the browser, short: window (0 or 1), month, direction, covered (0 or 1). */
 export type PackedWinds = [number, number, number, number][];

@@ -1,8 +1,8 @@
+import type { WindowName } from '@/core/condition-types';
 import { type Coverage, coveredShare, coverWinds } from '@/core/coverage/cover-winds';
 import { dayOf } from '@/core/day-time';
 import { cropYearOf } from '@/core/map-layers';
 import { SECTOR_NAMES } from '@/core/sectors';
-import type { WindowName } from '@/core/types';
 import { loadGround } from '@/features/ground/data';
 import { featuresInYear } from '@/features/ground/features-in-year';
 import { groundToCore } from '@/features/ground/to-core';

@@ -1,6 +1,6 @@
+import type { SitWindow, WindowName } from '@/core/condition-types';
 import { type Coverage, coverWinds, windShares } from '@/core/coverage/cover-winds';
 import { daysBetween } from '@/core/day-time';
-import type { SitWindow, WindowName } from '@/core/types';
 import { sitWindow, windowsFrom } from '@/core/windows';
 import type { ScopeClub } from '@/server/scope';
 import type { SeasonHours } from './load-season-hours';

@@ -1,4 +1,4 @@
-import type { WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
 
 export const MONTH_NAMES = [
   'January',

@@ -1,4 +1,4 @@
-import type { Suitability } from '@/core/types';
+import type { Suitability } from '@/core/ground-types';
 import type { MadeGround } from './build-ground';
 import type { DemoDay } from './demo-day';
 import type { DemoRows } from './demo-rows';

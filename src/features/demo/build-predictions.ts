@@ -1,7 +1,7 @@
 import { normalizeDeg } from '@/core/angles';
 import { arcsFor, arcWidthDeg } from '@/core/arcs';
+import type { Suitability } from '@/core/ground-types';
 import { DEFAULT_SCORE, sitScore } from '@/core/score';
-import type { Suitability } from '@/core/types';
 import type { MadeGround, StandRow } from './build-ground';
 import type { DemoDay } from './demo-day';
 import type { DemoRows } from './demo-rows';

@@ -1,4 +1,4 @@
-import type { PressureKind } from '@/core/types';
+import type { PressureKind } from '@/core/condition-types';
 import type { MadeClub } from './build-club';
 import type { MadeGround } from './build-ground';
 import { type DemoDay, momentOf } from './demo-day';

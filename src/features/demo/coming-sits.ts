@@ -1,4 +1,4 @@
-import type { Weapon } from '@/core/types';
+import type { Weapon } from '@/core/ground-types';
 import type { MadeClub } from './build-club';
 import type { MadeGround } from './build-ground';
 import { type DemoDay, daysFrom, momentOf } from './demo-day';

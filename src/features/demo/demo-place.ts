@@ -1,6 +1,6 @@
 import type { Position } from 'geojson';
 import { fromLocal, type LatLon } from '@/core/geometry';
-import type { Point } from '@/core/types';
+import type { Point } from '@/core/ground-types';
 
 /** A made-up place in hill country; no real ground is meant. */
 export const DEMO_PLACE = { lat: 41.118, lon: -77.286, zone: 'America/New_York' };

@@ -1,4 +1,4 @@
-import type { FeatureKind, UseTable } from '@/core/types';
+import type { FeatureKind, UseTable } from '@/core/ground-types';
 import type { Spot } from './demo-place';
 
 export interface DemoFeature {

@@ -1,5 +1,5 @@
 import { openSeasons } from '@/core/booking/seasons';
-import type { Weapon } from '@/core/types';
+import type { Weapon } from '@/core/ground-types';
 import type { MadeClub, MadeMember } from './build-club';
 import type { MadeGround, StandRow } from './build-ground';
 import { type DemoDay, daysFrom, momentOf } from './demo-day';

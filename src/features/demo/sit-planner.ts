@@ -1,8 +1,9 @@
 import type { BookingStand, GuestHunt, OtherSit } from '@/core/booking/booking-types';
 import { checkBooking } from '@/core/booking/check-booking';
 import { huntingYear } from '@/core/booking/hunting-year';
+import { WINDOW_NAMES, type WindowName } from '@/core/condition-types';
 import { toLocal } from '@/core/geometry';
-import { WEAPONS, type Weapon, WINDOW_NAMES, type WindowName } from '@/core/types';
+import { WEAPONS, type Weapon } from '@/core/ground-types';
 import { sitWindow } from '@/core/windows';
 import type { MadeClub, MadeMember } from './build-club';
 import type { MadeGround, StandRow } from './build-ground';

@@ -1,4 +1,4 @@
-import type { GoodWindArc, ShelterClass, ShotSide, StandKind, Suitability, Weapon } from '@/core/types';
+import type { GoodWindArc, ShelterClass, ShotSide, StandKind, Suitability, Weapon } from '@/core/ground-types';
 import { ydToM } from '@/core/units';
 import type { Spot } from './demo-place';
 

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { isClock, isDay } from '@/core/day-time';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { SIT_WINDOWS } from '@/features/bookings/sit-words';
 import { DRAW_FIELD_ERRORS as ERRORS } from './words/forms';
 

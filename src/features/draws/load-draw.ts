@@ -5,7 +5,7 @@ import { drawConflicts } from '@/core/draw/draw-conflicts';
 import { drawLimits } from '@/core/draw/draw-limits';
 import { turnOrder } from '@/core/draw/turn-order';
 import { stepsOf, turnWeight, worthOf } from '@/core/draw/worth';
-import type { Weapon } from '@/core/types';
+import type { Weapon } from '@/core/ground-types';
 import { reader } from '@/db/client';
 import type { DrawSlot } from '@/db/schema';
 import { type BookingContext, loadBookingContext } from '@/features/bookings/booking-context';

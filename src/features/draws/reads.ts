@@ -1,6 +1,6 @@
 import { dayOf, formatDay } from '@/core/day-time';
 import { fairnessWords, gini } from '@/core/draw/fairness';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { reader } from '@/db/client';
 import { listSponsoredGuests } from '@/features/bookings/rules-data';
 import { clockText } from '@/features/bookings/sit-words';

@@ -1,6 +1,6 @@
 import type { Position } from 'geojson';
 import { distanceM, distanceToShapeM, type LatLon, toLocal } from '@/core/geometry';
-import type { LocalShape, Point } from '@/core/types';
+import type { LocalShape, Point } from '@/core/ground-types';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
 
 /** Two points nearer than this, and two lines nowhere further apart than this, are most likely one thing. */

@@ -1,7 +1,8 @@
 import { arcWidthDeg } from '@/core/arcs';
+import type { WindowName } from '@/core/condition-types';
+import type { Arc, GoodWindArc } from '@/core/ground-types';
 import { parseArcs } from '@/core/parse-arcs';
 import { SECTORS } from '@/core/sectors';
-import type { Arc, GoodWindArc, WindowName } from '@/core/types';
 import { numberText } from '@/features/clubs/read-number';
 import { TYPED_FIELD_ERRORS } from './words/field-errors';
 

@@ -1,6 +1,6 @@
 import { z } from 'zod';
+import { FEATURE_KINDS, TIMES_OF_DAY, type UseTable } from '@/core/ground-types';
 import type { CropYear } from '@/core/map-layers';
-import { FEATURE_KINDS, TIMES_OF_DAY, type UseTable } from '@/core/types';
 import { numberText } from '@/features/clubs/read-number';
 import type { FeatureRow } from './features-data';
 import type { FormClub } from './form-club';

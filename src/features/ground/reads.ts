@@ -1,6 +1,6 @@
 import { arcsFor } from '@/core/arcs';
 import { dayOf } from '@/core/day-time';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import type { ApproachPlaces } from './approach-schema';

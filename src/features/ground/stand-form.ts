@@ -1,4 +1,4 @@
-import type { Weapon } from '@/core/types';
+import type { Weapon } from '@/core/ground-types';
 import { mToFt, mToYd, type Units } from '@/core/units';
 import { numberText } from '@/features/clubs/read-number';
 import { arcText } from './arc-text';

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { SHELTER_CLASSES, STAND_KINDS, SUITABILITIES, WEAPONS, type Weapon } from '@/core/types';
+import { SHELTER_CLASSES, STAND_KINDS, SUITABILITIES, WEAPONS, type Weapon } from '@/core/ground-types';
 import { ftToM, type Units, ydToM } from '@/core/units';
 import { ARC_FIELDS, type ArcField, readArcs } from './arc-text';
 import { parseBearing } from './bearing-text';

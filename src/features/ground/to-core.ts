@@ -9,7 +9,7 @@ import {
   type ScoredFeature,
   type ScoredStand,
   WEAPONS,
-} from '@/core/types';
+} from '@/core/ground-types';
 import type { GroundRows } from './data';
 
 /** What the core needs to know of a club. */

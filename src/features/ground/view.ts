@@ -2,7 +2,7 @@ import type { Geometry } from 'geojson';
 import { formatArc, mergeArcs } from '@/core/arcs';
 import { formatDay } from '@/core/day-time';
 import { distanceM, type LatLon, lengthM, toLocal } from '@/core/geometry';
-import type { Arc, Suitability } from '@/core/types';
+import type { Arc, Suitability } from '@/core/ground-types';
 import { formatArea, formatDistance, type Units } from '@/core/units';
 import type { ClosureRow } from './closures-data';
 import { NONE_SET } from './words';

@@ -1,4 +1,4 @@
-import type { FeatureKind, ShelterClass, ShotSide, StandKind, Suitability, Weapon } from '@/core/types';
+import type { FeatureKind, ShelterClass, ShotSide, StandKind, Suitability, Weapon } from '@/core/ground-types';
 
 export const STAND_KIND_WORDS: Record<StandKind, string> = {
   ladder: 'Ladder stand',

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { isClock } from '@/core/day-time';
+import { WEAPONS } from '@/core/ground-types';
 import { AGE_CLASSES, AGE_METHODS } from '@/core/harvest/harvest-types';
-import { WEAPONS } from '@/core/types';
 import { inToMm, kgToLb, lbToKg, mmToIn, type Units } from '@/core/units';
 import { numberText } from '@/features/clubs/read-number';
 import { type FormReader, LINE_MAX, readForm } from '@/features/ground/read-form';

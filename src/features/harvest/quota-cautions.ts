@@ -1,6 +1,6 @@
 import { huntingYear } from '@/core/booking/hunting-year';
 import { type CountOwner, metText, quotaStates } from '@/core/harvest/quotas';
-import type { Caution } from '@/core/types';
+import type { Caution } from '@/core/verdict-types';
 import { type ReadFrom, reader } from '@/db/client';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';

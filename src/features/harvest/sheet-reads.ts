@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { dayOf, formatClock } from '@/core/day-time';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { formatWeight, type Units } from '@/core/units';
 import { findSit } from '@/features/bookings/data';
 import { listStands } from '@/features/ground/stands-data';

@@ -1,5 +1,5 @@
+import { WINDOW_NAMES } from '@/core/condition-types';
 import { rankSits } from '@/core/rank';
-import { WINDOW_NAMES } from '@/core/types';
 import { sitWindow } from '@/core/windows';
 import { write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';

@@ -1,7 +1,7 @@
 import { z } from 'zod';
+import type { PressureKind } from '@/core/condition-types';
 import { isClock } from '@/core/day-time';
 import type { LatLon } from '@/core/geometry';
-import type { PressureKind } from '@/core/types';
 import type { FormClub } from '@/features/ground/form-club';
 import { degreesText, readPlace } from '@/features/ground/place-text';
 import { LINE_MAX, readForm } from '@/features/ground/read-form';

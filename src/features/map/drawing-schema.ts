@@ -1,6 +1,6 @@
 import { z } from 'zod';
+import { FEATURE_KINDS, STAND_KINDS } from '@/core/ground-types';
 import { MAP_LAYERS } from '@/core/map-layers';
-import { FEATURE_KINDS, STAND_KINDS } from '@/core/types';
 import { LINE_MAX } from '@/features/ground/read-form';
 import { THING_KINDS } from './thing';
 import { MAP_ERRORS } from './words/errors';

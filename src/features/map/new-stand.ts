@@ -1,4 +1,4 @@
-import type { ShelterClass, StandKind } from '@/core/types';
+import type { ShelterClass, StandKind } from '@/core/ground-types';
 import { ftToM, ydToM } from '@/core/units';
 import type { StandValues } from '@/features/ground/stands-data';
 

@@ -1,6 +1,6 @@
 import type { Geometry } from 'geojson';
+import type { FeatureKind, GoodWindArc, StandKind } from '@/core/ground-types';
 import type { MapItemProps, MapLayer } from '@/core/map-layers';
-import type { FeatureKind, GoodWindArc, StandKind } from '@/core/types';
 
 /** One thing on the map, alike whether it is stored or only drawn so far. */
 interface Base {

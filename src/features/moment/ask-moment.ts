@@ -1,6 +1,6 @@
 import { z } from 'zod';
+import { WINDOW_NAMES } from '@/core/condition-types';
 import { isDay } from '@/core/day-time';
-import { WINDOW_NAMES } from '@/core/types';
 
 /** A stand, a window and a half hour of it, as an address holds them. */
 export const momentQuery = z.object({

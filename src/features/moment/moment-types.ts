@@ -1,5 +1,5 @@
 import type { MultiPolygon, Position } from 'geojson';
-import type { WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
 
 export interface StretchView {
   from: Position;

@@ -1,8 +1,8 @@
 import { frameGround } from '@/core/ground-frame';
 import { gridAbout, momentAt, walkInStretches } from '@/core/moment';
 import { frameSits, type SitFrame } from '@/core/sit-frame';
-import type { Verdict } from '@/core/types';
 import { judgeSit } from '@/core/verdict';
+import type { Verdict } from '@/core/verdict-types';
 import { sitWindow } from '@/core/windows';
 import { listBookedSits } from '@/features/ground/people-data';
 import { loadForecast } from '@/features/sits/load-forecast';

@@ -1,7 +1,7 @@
 import type { Position } from 'geojson';
 import type { WalkStretch } from '@/core/approach/walk-stretches';
 import { fromLocal, type LatLon } from '@/core/geometry';
-import type { Point } from '@/core/types';
+import type { Point } from '@/core/ground-types';
 import type { StretchView } from './moment-types';
 
 export function positionOf(centre: LatLon, p: Point): Position {

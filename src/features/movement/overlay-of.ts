@@ -1,4 +1,4 @@
-import type { WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
 import type { MapOverlay } from '@/features/map/overlay';
 import type { LineView } from './reads';
 

@@ -1,12 +1,12 @@
 import type { Position } from 'geojson';
 import { dayOf, monthOf } from '@/core/day-time';
 import { fromLocal } from '@/core/geometry';
+import { type Point, TIMES_OF_DAY, type TimeOfDay } from '@/core/ground-types';
 import { cropYearOf } from '@/core/map-layers';
 import { chainMovement, type MovementLine, type Stop } from '@/core/movement/chain-movement';
 import { SECTOR_NAMES } from '@/core/sectors';
 import { DEFAULT_SETTINGS } from '@/core/settings';
 import { completeSetup } from '@/core/setup-check/setup-settings';
-import { type Point, TIMES_OF_DAY, type TimeOfDay } from '@/core/types';
 import { formatDistance } from '@/core/units';
 import { loadGround } from '@/features/ground/data';
 import { featuresInYear } from '@/features/ground/features-in-year';

@@ -1,4 +1,5 @@
-import type { TimeOfDay, WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
+import type { TimeOfDay } from '@/core/ground-types';
 
 export const MOVEMENT_WORDS = {
   title: 'Lines of movement',

@@ -1,6 +1,7 @@
+import { type SitWindow, WINDOW_NAMES } from '@/core/condition-types';
 import { rankSits } from '@/core/rank';
 import type { Detail } from '@/core/rank-input';
-import { type Gate, type SitWindow, type Verdict, WINDOW_NAMES } from '@/core/types';
+import type { Gate, Verdict } from '@/core/verdict-types';
 import { sitWindow } from '@/core/windows';
 import type { SitRow } from '@/features/bookings/data';
 import { windowsHeld } from '@/features/bookings/sit-words';

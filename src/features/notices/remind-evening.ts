@@ -3,7 +3,7 @@ import { addDays, dayOf, formatClock } from '@/core/day-time';
 import { legalLight } from '@/core/legal-light';
 import { sentence } from '@/core/sentence';
 import { sunTimes } from '@/core/sun';
-import type { ApproachOption, Verdict } from '@/core/types';
+import type { ApproachOption, Verdict } from '@/core/verdict-types';
 import { reader, write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';
 import { env } from '@/env';

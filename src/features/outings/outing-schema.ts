@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { isClock } from '@/core/day-time';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { sentSchema } from '@/lib/sent-schema';
 import { OUTING_FIELD_ERRORS as ERRORS } from './words/sign';
 

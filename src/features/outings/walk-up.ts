@@ -1,4 +1,4 @@
-import type { SitWindow } from '@/core/types';
+import type { SitWindow } from '@/core/condition-types';
 import { nextWindow } from '@/core/windows';
 import { write } from '@/db/client';
 import { bookSitIn } from '@/features/bookings/book-sit';

@@ -1,6 +1,7 @@
 import { z } from 'zod';
+import { WINDOW_NAMES } from '@/core/condition-types';
 import { isDay } from '@/core/day-time';
-import { WEAPONS, WINDOW_NAMES } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { inAskedYears } from './asked-years';
 
 const day = z

@@ -1,14 +1,8 @@
 import { arcsFor } from '@/core/arcs';
+import type { SitWindow } from '@/core/condition-types';
 import { bearingDeg, distanceM } from '@/core/geometry';
-import type {
-  ApproachOption,
-  Reason,
-  ScoredApproach,
-  ScoredStand,
-  SitWindow,
-  TimelineStep,
-  Verdict,
-} from '@/core/types';
+import type { ScoredApproach, ScoredStand } from '@/core/ground-types';
+import type { ApproachOption, Reason, TimelineStep, Verdict } from '@/core/verdict-types';
 import { cautionView, orNull, round1, round3 } from './view';
 import type { ReasonView, SitDetailView, TimelineView, WayView } from './view-types';
 import { REASON_WORDS } from './words/detail';

@@ -1,4 +1,4 @@
-import type { ScoredFeature } from '@/core/types';
+import type { ScoredFeature } from '@/core/ground-types';
 import { FEATURE_WORDS } from './words/terms';
 
 /**

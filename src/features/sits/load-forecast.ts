@@ -1,5 +1,5 @@
 import type { WeatherPort } from '@/adapters/weather/port';
-import type { SitWindow } from '@/core/types';
+import type { SitWindow } from '@/core/condition-types';
 import { ensureForecast } from '@/features/weather/ensure-forecast';
 import type { KeptForecast } from '@/features/weather/get-forecast';
 import type { ClubScope } from '@/server/scope';

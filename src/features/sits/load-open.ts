@@ -1,4 +1,6 @@
-import { type Gate, type SitWindow, type Weapon, WINDOW_NAMES } from '@/core/types';
+import { type SitWindow, WINDOW_NAMES } from '@/core/condition-types';
+import type { Weapon } from '@/core/ground-types';
+import type { Gate } from '@/core/verdict-types';
 import { type ReadFrom, reader } from '@/db/client';
 import { gatesFor, loadBookingContext } from '@/features/bookings/booking-context';
 import type { ClubScope } from '@/server/scope';

@@ -1,10 +1,11 @@
 import { huntingYear } from '@/core/booking/hunting-year';
+import type { PressureEvent, StandSightings } from '@/core/condition-types';
 import { addDays } from '@/core/day-time';
 import { toLocal } from '@/core/geometry';
+import type { Weapon } from '@/core/ground-types';
 import { cropYearOf } from '@/core/map-layers';
 import type { GroundInput } from '@/core/rank-input';
 import { DEFAULT_SETTINGS } from '@/core/settings';
-import type { PressureEvent, StandSightings, Weapon } from '@/core/types';
 import { type ReadFrom, reader } from '@/db/client';
 import { type GroundRows, loadGround } from '@/features/ground/data';
 import { featuresInYear } from '@/features/ground/features-in-year';

@@ -1,6 +1,8 @@
 import { arcsFor } from '@/core/arcs';
+import type { SitWindow } from '@/core/condition-types';
 import { formatDay } from '@/core/day-time';
-import { type SitWindow, type Verdict, WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
+import type { Verdict } from '@/core/verdict-types';
 import { rankWeek } from '@/core/week';
 import { windowsFrom } from '@/core/windows';
 import { readQuotaCautions } from '@/features/harvest/quota-cautions';

@@ -1,11 +1,13 @@
 import { legalLightRuleOf } from '@/core/booking/seasons';
+import type { SitWindow, WindowName } from '@/core/condition-types';
 import { dayOf } from '@/core/day-time';
+import { WEAPONS, type Weapon } from '@/core/ground-types';
 import { legalLight } from '@/core/legal-light';
 import { moonAt } from '@/core/moon';
 import { rankSits } from '@/core/rank';
 import type { Detail } from '@/core/rank-input';
 import { sunTimes } from '@/core/sun';
-import { type SitWindow, type Verdict, WEAPONS, type Weapon, type WindowName } from '@/core/types';
+import type { Verdict } from '@/core/verdict-types';
 import { nextWindow, sitWindow } from '@/core/windows';
 import { readQuotaCautions } from '@/features/harvest/quota-cautions';
 import { maySeeSightings } from '@/features/logs/see-sightings';

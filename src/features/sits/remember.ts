@@ -1,4 +1,5 @@
-import { WEAPONS, type Weapon, type WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
+import { WEAPONS, type Weapon } from '@/core/ground-types';
 
 export const WEAPON_COOKIE = 'sit_weapon';
 const YEAR_SECONDS = 365 * 24 * 3600;

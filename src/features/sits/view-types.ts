@@ -1,4 +1,6 @@
-import type { Arc, Caution, Confidence, Evidence, StandKind, Weapon, WindowName, Word } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
+import type { Arc, StandKind, Weapon } from '@/core/ground-types';
+import type { Caution, Confidence, Evidence, Word } from '@/core/verdict-types';
 import type { SitGuest } from '@/db/schema';
 
 /** What the Sit and Week screens are drawn from: plain data, no positions. Scores 0-100, chances and shares 0-1. */

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import type { Caution, ScoredFeature, ScoredStand, Verdict } from '@/core/types';
+import type { ScoredFeature, ScoredStand } from '@/core/ground-types';
+import type { Caution, Verdict } from '@/core/verdict-types';
 import { shapeDetail } from './detail-view';
 import { hideFeatures } from './hide-features';
 import { shapeRows, sharedCautions } from './view';

@@ -1,6 +1,7 @@
 import { arcsFor } from '@/core/arcs';
+import { type ScoredStand, WEAPONS, type Weapon } from '@/core/ground-types';
 import { sentence } from '@/core/sentence';
-import { type Caution, type Gate, type ScoredStand, type Verdict, WEAPONS, type Weapon } from '@/core/types';
+import type { Caution, Gate, Verdict } from '@/core/verdict-types';
 import type { GroundRows } from '@/features/ground/data';
 import type { BlockedRow, CautionView, GateView, OpenRow, SitRow, WayBrief } from './view-types';
 import { type ClubClock, endsText, shortClock } from './words/terms';

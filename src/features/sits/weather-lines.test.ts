@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { Forecast, WeatherHour } from '@/core/types';
+import type { Forecast, WeatherHour } from '@/core/condition-types';
 import { mphToMps } from '@/core/units';
 import { weatherLines } from './weather-lines';
 

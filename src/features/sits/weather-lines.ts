@@ -1,6 +1,6 @@
 import { meanWind } from '@/core/circular';
+import type { Forecast, WeatherHour } from '@/core/condition-types';
 import { sectorName } from '@/core/sectors';
-import type { Forecast, WeatherHour } from '@/core/types';
 import { formatSpeed, formatTemp, hPaToInHg, mmToIn, type Units } from '@/core/units';
 import type { WeatherView } from './view-types';
 

@@ -1,5 +1,5 @@
 import type { WeatherPlace } from '@/adapters/weather/port';
-import type { Forecast } from '@/core/types';
+import type { Forecast } from '@/core/condition-types';
 import { env } from '@/env';
 import { findForecastRow } from './data';
 import { unpackForecast } from './pack-forecast';

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import type { Forecast } from '@/core/types';
+import type { Forecast } from '@/core/condition-types';
 import { packForecast, unpackForecast } from './pack-forecast';
 import { placeKey, roundPlace } from './place-key';
 

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import type { Forecast } from '@/core/types';
+import type { Forecast } from '@/core/condition-types';
 
 /** Columns in place of rows: a tenth of the bytes, which every read of a list has to parse. */
 const column = z.array(z.number().nullable());

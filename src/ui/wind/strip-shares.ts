@@ -1,8 +1,8 @@
 import { turnDeg } from '@/core/angles';
 import { compassSpan, mergeArcs } from '@/core/arcs';
 import { circularMean } from '@/core/circular';
+import type { Arc } from '@/core/ground-types';
 import { SECTOR_WIDTH_DEG, type SectorName, sectorName } from '@/core/sectors';
-import type { Arc } from '@/core/types';
 
 /** Bins of a direction histogram: bin i holds directions from 5i up to 5i + 5 degrees. */
 export const BIN_COUNT = 72;

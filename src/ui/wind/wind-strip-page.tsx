@@ -1,4 +1,4 @@
-import type { Arc } from '@/core/types';
+import type { Arc } from '@/core/ground-types';
 import { joinClasses } from '../join-classes';
 import { round, shadePaths } from './strip-drawing';
 import { describeWindStrip, holdOf, percent, type StripRow, settledName, unrollArcs } from './strip-shares';

@@ -1,4 +1,4 @@
-import type { Arc } from '@/core/types';
+import type { Arc } from '@/core/ground-types';
 import { round, shadePaths } from './strip-drawing';
 import { describeWindStrip, mergeRows, type StripRow, unrollArcs } from './strip-shares';
 import { WindStripPage } from './wind-strip-page';

@@ -1,5 +1,5 @@
+import type { Forecast } from '@/core/condition-types';
 import { sectorName } from '@/core/sectors';
-import type { Forecast } from '@/core/types';
 import { formatSpeed, formatTemp, mmToIn, type Units } from '@/core/units';
 
 export interface HourWind {

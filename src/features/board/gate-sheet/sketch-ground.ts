@@ -1,5 +1,5 @@
 import { type LatLon, toLocal } from '@/core/geometry';
-import type { Point } from '@/core/types';
+import type { Point } from '@/core/ground-types';
 import type { Units } from '@/core/units';
 import { scaleBar } from '@/features/map/drawing/scale-bar';
 

@@ -1,5 +1,5 @@
+import { WINDOW_NAMES, type WindowName } from '@/core/condition-types';
 import { formatClock, formatClock12, formatDay } from '@/core/day-time';
-import { WINDOW_NAMES, type WindowName } from '@/core/types';
 import { SIT_WINDOW_WORDS } from '@/core/words/windows';
 
 /** What a sit holds: one window, or the whole day. */

@@ -1,7 +1,7 @@
 'use client';
 
 import { weaponWord } from '@/core/booking/seasons';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import type { Units } from '@/core/units';
 import { Section } from '@/ui/page-parts';
 import { NumberInput } from '@/ui/text-inputs';

@@ -2,7 +2,7 @@
 
 import { useFieldArray, useFormContext } from 'react-hook-form';
 import { weaponWord } from '@/core/booking/seasons';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { CheckboxGroup } from '@/ui/choices';
 import { DateInput, Select, TextInput } from '@/ui/text-inputs';
 import type { RulesForm } from '../rules-form-schema';

@@ -1,9 +1,9 @@
 import type { CalendarPrivacy, ClubRules, SightingsSeenBy } from '@/core/booking/rules';
 import { weaponWord } from '@/core/booking/seasons';
 import { formatDay } from '@/core/day-time';
+import { WEAPONS } from '@/core/ground-types';
 import { GROUND_WORKS } from '@/core/ground-work';
 import { quotaText } from '@/core/harvest/quotas';
-import { WEAPONS } from '@/core/types';
 import { mToYd, type Units } from '@/core/units';
 import { numberText } from '../read-number';
 import { WORK_RULE_WORDS, WORK_WORDS } from './ground-work';

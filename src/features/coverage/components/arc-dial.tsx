@@ -3,8 +3,8 @@
 import { type KeyboardEvent, type PointerEvent, useRef } from 'react';
 import { normalizeDeg } from '@/core/angles';
 import { arcWidthDeg } from '@/core/arcs';
+import type { GoodWindArc } from '@/core/ground-types';
 import { SECTOR_NAMES, sectorName } from '@/core/sectors';
-import type { GoodWindArc } from '@/core/types';
 import { bracketPath, dragDeg, onCircle } from '@/features/map/drawing/bracket';
 import { DIAL_WORDS as W } from '../words';
 

@@ -2,7 +2,7 @@
 
 import dynamic from 'next/dynamic';
 import { useMemo } from 'react';
-import type { GoodWindArc } from '@/core/types';
+import type { GoodWindArc } from '@/core/ground-types';
 import { mapQuery } from '@/features/map/queries';
 import type { StandThing } from '@/features/map/thing';
 import { Button } from '@/ui/button';

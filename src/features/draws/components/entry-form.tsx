@@ -2,7 +2,7 @@
 
 import { useWatch } from 'react-hook-form';
 import { weaponWord } from '@/core/booking/seasons';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { GuestFields } from '@/features/bookings/components/guest-fields';
 import type { ActionResult } from '@/server/doors';
 import { Checkbox, CheckboxGroup } from '@/ui/choices';

@@ -1,4 +1,4 @@
-import type { Arc } from '@/core/types';
+import type { Arc } from '@/core/ground-types';
 import { WindStrip } from '@/ui/wind/wind-strip';
 
 /** The strip's bars alone, beside words that say the same. */

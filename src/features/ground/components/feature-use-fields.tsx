@@ -1,7 +1,7 @@
 'use client';
 
 import { useFieldArray, useWatch } from 'react-hook-form';
-import { TIMES_OF_DAY } from '@/core/types';
+import { TIMES_OF_DAY } from '@/core/ground-types';
 import { DEFAULT_WHEREABOUTS } from '@/core/whereabouts';
 import { Button } from '@/ui/button';
 import { CheckboxGroup } from '@/ui/choices';

@@ -1,5 +1,5 @@
 import { arcsFor } from '@/core/arcs';
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { formatDistance, formatHeight, type Units } from '@/core/units';
 import { type Definition, DefinitionList, Section } from '@/ui/page-parts';
 import { CompassMark } from '@/ui/wind/compass-mark';

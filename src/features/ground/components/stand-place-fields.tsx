@@ -1,6 +1,6 @@
 'use client';
 
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import type { Units } from '@/core/units';
 import { FieldGroup } from '@/ui/field';
 import { Section } from '@/ui/page-parts';

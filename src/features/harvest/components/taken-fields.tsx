@@ -1,6 +1,6 @@
 'use client';
 
-import { WEAPONS } from '@/core/types';
+import { WEAPONS } from '@/core/ground-types';
 import { WEAPON_WORDS } from '@/features/ground/words';
 import { DateInput, Select, Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
 import type { HarvestFormChoices } from '../sheet-reads';

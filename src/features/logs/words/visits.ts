@@ -1,4 +1,4 @@
-import type { PressureKind } from '@/core/types';
+import type { PressureKind } from '@/core/condition-types';
 
 export const VISIT_WORDS: Record<PressureKind, string> = {
   camera_check: 'Camera check',

@@ -1,7 +1,7 @@
 'use client';
 
 import { useState } from 'react';
-import type { GoodWindArc } from '@/core/types';
+import type { GoodWindArc } from '@/core/ground-types';
 import { ARC_FIELDS, arcText, readArcs } from '@/features/ground/arc-text';
 import { Button } from '@/ui/button';
 import { TextInput } from '@/ui/text-inputs';

@@ -3,8 +3,8 @@
 import type { Position } from 'geojson';
 import L from 'leaflet';
 import { type Ref, useEffect, useImperativeHandle, useRef, useState } from 'react';
+import type { GoodWindArc } from '@/core/ground-types';
 import type { DrawnShape } from '@/core/map-layers';
-import type { GoodWindArc } from '@/core/types';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
 import { isDrawn } from '../drawing/list-changes';
 import { snapIndex, snapTo } from '../drawing/snap';

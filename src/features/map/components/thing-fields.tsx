@@ -1,8 +1,8 @@
 'use client';
 
 import type { ReactNode } from 'react';
+import { FEATURE_KINDS, STAND_KINDS } from '@/core/ground-types';
 import { LAYER_SHAPES, MAP_LAYERS } from '@/core/map-layers';
-import { FEATURE_KINDS, STAND_KINDS } from '@/core/types';
 import { mToYd, ydToM } from '@/core/units';
 import { DIRECTION_WORDS, FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words';
 import { NumberInput, Select, TextInput } from '@/ui/text-inputs';

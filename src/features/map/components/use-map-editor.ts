@@ -2,8 +2,8 @@
 
 import type { Position } from 'geojson';
 import { useEffect, useMemo, useRef, useState } from 'react';
+import type { GoodWindArc } from '@/core/ground-types';
 import type { DrawnShape } from '@/core/map-layers';
-import type { GoodWindArc } from '@/core/types';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
 import { touchedCorner, withoutCorner } from '../drawing/corners';
 import { addThing, removeThing, replaceThing, setThings } from '../drawing/drawing';

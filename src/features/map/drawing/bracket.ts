@@ -1,6 +1,6 @@
 import { toRad } from '@/core/angles';
 import { arcWidthDeg } from '@/core/arcs';
-import type { Arc } from '@/core/types';
+import type { Arc } from '@/core/ground-types';
 
 /** Screen place of a direction at a distance from the middle: north is up, clockwise, pixels. */
 export function onCircle(deg: number, radius: number): [number, number] {

@@ -1,6 +1,6 @@
 import type { Position } from 'geojson';
+import { FEATURE_KINDS, type FeatureKind, STAND_KINDS, type StandKind } from '@/core/ground-types';
 import { type DrawnShape, LAYER_SHAPES, MAP_LAYERS, type MapLayer } from '@/core/map-layers';
-import { FEATURE_KINDS, type FeatureKind, STAND_KINDS, type StandKind } from '@/core/types';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
 import { FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words';
 import type { MapClub, MapThing } from '../thing';

@@ -1,8 +1,8 @@
 import type { Geometry, Position } from 'geojson';
 import { normalizeDeg } from '@/core/angles';
 import { bearingDeg, distanceM, type LatLon, lengthM, toLocal } from '@/core/geometry';
+import type { Point } from '@/core/ground-types';
 import { sectorName } from '@/core/sectors';
-import type { Point } from '@/core/types';
 import { formatArea, formatDistance, m2ToAcre, mToYd, type Units } from '@/core/units';
 import { MEASURED_WORDS } from '../words/drawing';
 

@@ -3,7 +3,7 @@ import { featureCollection, polygon } from '@turf/helpers';
 import { intersect } from '@turf/intersect';
 import type { LineString, MultiPolygon, Polygon, Position } from 'geojson';
 import { distanceM, fromLocal, type LatLon, nearestOnSegment } from '@/core/geometry';
-import type { Point } from '@/core/types';
+import type { Point } from '@/core/ground-types';
 import { SPLIT_WORDS } from '../words/drawing';
 import { localOf, ringAreaM2 } from './measure';
 

@@ -1,7 +1,7 @@
 import L from 'leaflet';
 import { normalizeDeg } from '@/core/angles';
 import { arcWidthDeg } from '@/core/arcs';
-import type { GoodWindArc } from '@/core/types';
+import type { GoodWindArc } from '@/core/ground-types';
 import { dragDeg, onCircle } from '../drawing/bracket';
 
 const RADIUS_PX = 44;

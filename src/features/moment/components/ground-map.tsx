@@ -2,7 +2,7 @@
 
 import dynamic from 'next/dynamic';
 import { useMemo, useState } from 'react';
-import type { WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
 import type { SaveDrawing } from '@/features/map/components/use-save-drawing';
 import type { MapOverlay } from '@/features/map/overlay';
 import { mapQuery } from '@/features/map/queries';

@@ -1,8 +1,8 @@
 'use client';
 
+import { WINDOW_NAMES, type WindowName } from '@/core/condition-types';
 import { addDays, formatClock, formatClock12, formatDay } from '@/core/day-time';
 import { sectorName } from '@/core/sectors';
-import { WINDOW_NAMES, type WindowName } from '@/core/types';
 import { formatDistance, formatSpeed, type Units } from '@/core/units';
 import { Button } from '@/ui/button';
 import { ErrorState, Loading, Notice } from '@/ui/notices';

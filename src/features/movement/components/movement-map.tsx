@@ -2,7 +2,7 @@
 
 import dynamic from 'next/dynamic';
 import { useMemo, useState } from 'react';
-import type { WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
 import { mapQuery } from '@/features/map/queries';
 import { Button } from '@/ui/button';
 import { RadioCards } from '@/ui/choices';

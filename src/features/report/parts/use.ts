@@ -1,10 +1,10 @@
+import type { PressureEvent } from '@/core/condition-types';
 import { addDays } from '@/core/day-time';
 import { toLocal } from '@/core/geometry';
 import { pressureSeries } from '@/core/report/pressure-series';
 import { useOfStand } from '@/core/report/stand-use';
 import { type Week, weeksBetween } from '@/core/report/weeks';
 import { DEFAULT_SETTINGS } from '@/core/settings';
-import type { PressureEvent } from '@/core/types';
 import { sitWindow } from '@/core/windows';
 import { windowsHeld } from '@/features/bookings/sit-words';
 import { listSitEvents, listVisitEvents } from '@/features/sits/data';

@@ -1,4 +1,4 @@
-import type { Arc } from '@/core/types';
+import type { Arc } from '@/core/ground-types';
 import { shadePaths } from '@/ui/wind/strip-drawing';
 import { unrollArcs } from '@/ui/wind/strip-shares';
 

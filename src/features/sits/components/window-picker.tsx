@@ -1,5 +1,5 @@
+import { WINDOW_NAMES, type WindowName } from '@/core/condition-types';
 import { addDays, formatDay } from '@/core/day-time';
-import { WINDOW_NAMES, type WindowName } from '@/core/types';
 import { ButtonLink, buttonClasses } from '@/ui/button';
 import { DateInput, Select } from '@/ui/text-inputs';
 import { sitAddress } from '../sit-address';

@@ -1,4 +1,4 @@
-import type { Word } from '@/core/types';
+import type { Word } from '@/core/verdict-types';
 import { Badge, type BadgeLook } from '@/ui/page-parts';
 
 const LOOKS: Record<Word, BadgeLook> = { Quiet: 'moss', Touchy: 'plain', Loud: 'clay' };
