@@ -1,4 +1,4 @@
-import type { WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
 import { WINDOW_WORDS } from './names';
 
 /** Texts of the Sit screen and its rows. */

@@ -1,4 +1,5 @@
-import type { Weapon, WindowName } from '@/core/types';
+import type { WindowName } from '@/core/condition-types';
+import type { Weapon } from '@/core/ground-types';
 
 /** Names that a phone writes itself: apart from what formats times, which is heavy. */
 

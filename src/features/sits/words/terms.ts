@@ -1,6 +1,7 @@
 import type { LegalLightRule } from '@/core/booking/rules';
 import { formatClock, formatClock12, formatDay } from '@/core/day-time';
-import type { ApproachOption, Evidence, FeatureKind } from '@/core/types';
+import type { FeatureKind } from '@/core/ground-types';
+import type { ApproachOption, Evidence } from '@/core/verdict-types';
 
 /** A feature's kind in a sentence, for those who are not told its name. */
 export const FEATURE_WORDS: Record<FeatureKind, string> = {
