@@ -1,24 +1,10 @@
+import { BEAUFORT_WORDS } from './words/sky';
+
 /**
  * The Beaufort scale by its WMO bounds in m/s (lowest speed of each force). The printed rows are whole mph or knots with
  * gaps between them; m/s has none, so every speed has one force.
  */
 const LOWEST_MPS = [0, 0.3, 1.6, 3.4, 5.5, 8.0, 10.8, 13.9, 17.2, 20.8, 24.5, 28.5, 32.7] as const;
-
-const WORDS = [
-  { name: 'calm', onLand: 'smoke goes straight up' },
-  { name: 'light air', onLand: 'smoke drifts, a vane stays still' },
-  { name: 'light breeze', onLand: 'felt on the face, leaves rustle' },
-  { name: 'gentle breeze', onLand: 'leaves and twigs always moving' },
-  { name: 'moderate breeze', onLand: 'small branches move' },
-  { name: 'fresh breeze', onLand: 'small trees begin to sway' },
-  { name: 'strong breeze', onLand: 'large branches move' },
-  { name: 'near gale', onLand: 'whole trees move' },
-  { name: 'gale', onLand: 'twigs break off' },
-  { name: 'strong gale', onLand: 'slight damage to buildings' },
-  { name: 'storm', onLand: 'small trees uprooted' },
-  { name: 'violent storm', onLand: 'large branches snap' },
-  { name: 'hurricane force', onLand: 'wide damage' },
-] as const;
 
 export interface Beaufort {
   /** 0-12. */
@@ -33,5 +19,5 @@ export function beaufort(speedMps: number): Beaufort {
   LOWEST_MPS.forEach((lowest, i) => {
     if (speedMps >= lowest) force = i;
   });
-  return { force, ...(WORDS[force] ?? WORDS[0]) };
+  return { force, ...(BEAUFORT_WORDS[force] ?? BEAUFORT_WORDS[0]) };
 }

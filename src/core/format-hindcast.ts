@@ -1,4 +1,5 @@
 import type { Hindcast } from './hindcast';
+import { HINDCAST_WORDS } from './words/hindcast';
 
 const percent = (share: number | null) => (share === null ? '-' : `${(100 * share).toFixed(0)} %`);
 
@@ -27,16 +28,16 @@ export function formatHindcast(h: Hindcast): string {
   const sectorRows = h.sectors.map((s) => [s.sector, percent(s.share), String(s.stands)]);
   const uncovered =
     h.uncovered.length === 0
-      ? 'Every wind that blew is covered by some stand.'
-      : `No stand covers: ${h.uncovered.map((s) => `${s.sector} (${percent(s.share)})`).join(', ')}.`;
+      ? HINDCAST_WORDS.allCovered
+      : HINDCAST_WORDS.uncovered(h.uncovered.map((s) => `${s.sector} (${percent(s.share)})`));
   return [
-    `${h.judged} of ${h.windows} windows had enough wind records; ${percent(h.noDirectionShare)} of half hours were calm or variable.`,
+    HINDCAST_WORDS.judged(h.judged, h.windows, percent(h.noDirectionShare)),
     '',
-    ...table([['Stand', 'mornings', 'evenings', 'share', 'arcs'], ...standRows]),
+    ...table([[...HINDCAST_WORDS.standHeadings], ...standRows]),
     '',
-    ...table([['Wind', 'blew', 'stands'], ...sectorRows]),
+    ...table([[...HINDCAST_WORDS.windHeadings], ...sectorRows]),
     '',
     uncovered,
-    `${h.noStand.length} windows had no stand for their wind.`,
+    HINDCAST_WORDS.noStand(h.noStand.length),
   ].join('\n');
 }

@@ -1,4 +1,5 @@
 import { countInterval, type Interval, ratioInterval, shareInterval } from './intervals';
+import { INTERVAL_WORDS, NO_FIGURE_WORDS } from './words/figures';
 
 /**
  * Observation indices: what members count from their stands, over the hours they sat. An index, not a census. Sits in which
@@ -101,14 +102,6 @@ export function indicesBy<T extends SitCount, K>(sits: readonly T[], keyOf: (sit
   return new Map([...groups].map(([key, group]) => [key, indicesOf(group)]));
 }
 
-const NO_FIGURE_WORDS: Record<NoFigure, string> = {
-  no_hours: 'no hours sat',
-  no_sits: 'no sits logged',
-  no_deer: 'no deer seen',
-  no_bucks: 'no bucks seen',
-  no_does: 'no does seen',
-};
-
 /** A figure for people: '1.70', '11.8 %' for shares, or why there is none: 'no bucks seen'. */
 export function figureText(figure: Figure, as: 'number' | 'percent' = 'number'): string {
   if (!figure.known) return NO_FIGURE_WORDS[figure.why];
@@ -119,5 +112,5 @@ export function figureText(figure: Figure, as: 'number' | 'percent' = 'number'):
 export function intervalText(figure: Figure, as: 'number' | 'percent' = 'number'): string {
   if (!figure.known) return '';
   const text = (value: number) => (as === 'percent' ? String(Math.round(value * 100)) : value.toFixed(2));
-  return `${text(figure.low)} to ${text(figure.high)}${as === 'percent' ? ' %' : ''}`;
+  return INTERVAL_WORDS[as](text(figure.low), text(figure.high));
 }

@@ -1,5 +1,6 @@
-import type { Arc } from './types';
+import type { Arc } from './ground-types';
 import { ktToMps } from './units';
+import { WIND_ERRORS } from './words/winds';
 
 export interface MetarWind {
   kind: 'wind' | 'variable' | 'calm';
@@ -23,16 +24,16 @@ const RANGE = /^(\d{3})V(\d{3})$/;
 export function parseMetarWind(text: string): ParsedMetarWind {
   const [group = '', spread, ...rest] = text.trim().toUpperCase().split(/\s+/);
   const match = GROUP.exec(group);
-  if (!match || rest.length > 0) return { ok: false, message: `Not a METAR wind: "${text.trim()}".` };
+  if (!match || rest.length > 0) return { ok: false, message: WIND_ERRORS.notMetar(text.trim()) };
   const [, direction = '', speed = '', gust, unit] = match;
   const toMps = (value: string) => (unit === 'KT' ? ktToMps(Number(value)) : Number(value));
   const degrees = direction === 'VRB' ? null : Number(direction);
-  if (degrees !== null && degrees > 360) return { ok: false, message: `${direction} is more than 360 degrees.` };
+  if (degrees !== null && degrees > 360) return { ok: false, message: WIND_ERRORS.overCircle(direction) };
   let range: Arc | null = null;
   if (spread !== undefined) {
     const [, from, to] = RANGE.exec(spread) ?? [];
     if (!from || !to || Number(from) > 360 || Number(to) > 360) {
-      return { ok: false, message: `Not a span of directions: "${spread}".` };
+      return { ok: false, message: WIND_ERRORS.notSpan(spread) };
     }
     range = { fromDeg: Number(from) % 360, toDeg: Number(to) % 360 };
   }

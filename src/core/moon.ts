@@ -1,16 +1,5 @@
 import { getMoonIllumination } from 'suncalc';
-
-const NAMES = [
-  'New moon',
-  'Waxing crescent',
-  'First quarter',
-  'Waxing gibbous',
-  'Full moon',
-  'Waning gibbous',
-  'Last quarter',
-  'Waning crescent',
-] as const;
-export type MoonName = (typeof NAMES)[number];
+import { MOON_NAMES, type MoonName } from './words/sky';
 
 /** A principal phase is named within about a day and a half of its instant, as wall calendars do. */
 const NEAR = 0.05;
@@ -21,5 +10,5 @@ export function moonAt(at: number): { litShare: number; name: MoonName } {
   const quarter = Math.round(phase * 4);
   const between = Math.floor(phase * 4);
   const index = Math.abs(phase - quarter / 4) <= NEAR ? (quarter % 4) * 2 : between * 2 + 1;
-  return { litShare: fraction, name: NAMES[index] ?? 'New moon' };
+  return { litShare: fraction, name: MOON_NAMES[index] ?? MOON_NAMES[0] };
 }

@@ -1,6 +1,7 @@
 import { FULL_CIRCLE } from './arcs';
+import type { Arc } from './ground-types';
 import { findSector, type Sector } from './sectors';
-import type { Arc } from './types';
+import { WIND_ERRORS } from './words/winds';
 
 export type ParsedArcs = { ok: true; arcs: Arc[] } | { ok: false; message: string; at: number };
 
@@ -11,26 +12,24 @@ const PART = /^([a-z]+|\d+(?:\.\d+)?)\s*°?(?:\s*(?:-|–|—|to\b)\s*([a-z]+|\d
 function readEnd(text: string): End | string {
   if (/^\d/.test(text)) {
     const deg = Number(text);
-    return deg <= 360 ? { kind: 'degrees', deg } : `${text} is more than 360 degrees.`;
+    return deg <= 360 ? { kind: 'degrees', deg } : WIND_ERRORS.overCircle(text);
   }
   const sector = findSector(text);
-  return sector
-    ? { kind: 'point', sector }
-    : `"${text}" is not a compass point (N, NNE, NE ... NNW) or a number of degrees.`;
+  return sector ? { kind: 'point', sector } : WIND_ERRORS.notPoint(text);
 }
 
 function readPart(part: string): Arc | string {
   if (/^(any|all)$/i.test(part)) return FULL_CIRCLE;
   const match = PART.exec(part);
   const [, first, second] = match ?? [];
-  if (!first) return `"${part}" is not a wind: type a point (W), a span (NW-N) or degrees (310-20).`;
+  if (!first) return WIND_ERRORS.notWind(part);
   const from = readEnd(first);
   if (typeof from === 'string') return from;
   const to = second === undefined ? from : readEnd(second);
   if (typeof to === 'string') return to;
   if (from.kind === 'degrees' && to.kind === 'degrees') {
     if (from.deg === 0 && to.deg === 360) return FULL_CIRCLE;
-    if (from.deg % 360 === to.deg % 360) return `${first} is one direction only: type a span such as 300-320.`;
+    if (from.deg % 360 === to.deg % 360) return WIND_ERRORS.oneDirection(first);
   }
   const fromDeg = from.kind === 'point' ? from.sector.lowerDeg : from.deg % 360;
   const toDeg = to.kind === 'point' ? to.sector.upperDeg : to.deg % 360;

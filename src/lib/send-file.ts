@@ -1,13 +1,12 @@
+import { REQUEST_WORDS } from './words';
 export type Sent<T> = { ok: true; data: T } | { ok: false; message: string };
-
-const LOST = 'The server could not be reached. Look at your connection and try again.';
 
 function messageOf(text: string): string {
   try {
     const body: { error?: { message?: unknown } } = JSON.parse(text);
-    return typeof body.error?.message === 'string' ? body.error.message : LOST;
+    return typeof body.error?.message === 'string' ? body.error.message : REQUEST_WORDS.lookAtConnection;
   } catch {
-    return LOST;
+    return REQUEST_WORDS.lookAtConnection;
   }
 }
 
@@ -23,8 +22,8 @@ export function sendFile<T>(address: string, file: Blob, onSent: (share: number)
       if (request.status >= 200 && request.status < 300) done({ ok: true, data: JSON.parse(request.responseText) });
       else done({ ok: false, message: messageOf(request.responseText) });
     };
-    request.onerror = () => done({ ok: false, message: LOST });
-    request.onabort = () => done({ ok: false, message: LOST });
+    request.onerror = () => done({ ok: false, message: REQUEST_WORDS.lookAtConnection });
+    request.onabort = () => done({ ok: false, message: REQUEST_WORDS.lookAtConnection });
     request.send(file);
   });
 }

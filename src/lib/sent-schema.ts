@@ -1,8 +1,9 @@
 import { z } from 'zod';
+import { SENT_WORDS } from './words';
 
 /** Made by the browser at the press: the key keeps a change from being made twice, the instant says when it was meant. */
 export const sentSchema = z.object({
-  key: z.guid('Reload the page and try again.'),
-  at: z.int('Reload the page and try again.').min(0, 'Reload the page and try again.'),
+  key: z.guid(SENT_WORDS.reload),
+  at: z.int(SENT_WORDS.reload).min(0, SENT_WORDS.reload),
 });
 export type Sent = z.output<typeof sentSchema>;

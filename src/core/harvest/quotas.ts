@@ -1,3 +1,4 @@
+import { QUOTA_MET_WORDS, QUOTA_WORDS } from '../words/quotas';
 import type { HarvestQuota, QuotaDeer, QuotaPer } from './harvest-types';
 
 /** A deer as quotas count it. */
@@ -16,22 +17,14 @@ export interface QuotaState {
   met: boolean;
 }
 
-const DEER_WORDS: Record<QuotaDeer, string> = { any: 'deer', antlered: 'antlered', antlerless: 'antlerless' };
-
 /** '1 antlered deer', '5 deer'. */
 export function quotaDeerText(deer: QuotaDeer, count: number): string {
-  return deer === 'any' ? `${count} deer` : `${count} ${DEER_WORDS[deer]} deer`;
+  return QUOTA_WORDS.deer[deer](count);
 }
-
-const PER_WORDS: Record<QuotaPer, string> = {
-  club: 'in the whole club',
-  member: 'a member, guests counted on their sponsor',
-  member_guests: 'for all guests of a member together',
-};
 
 /** 'At most 1 antlered deer a member, guests counted on their sponsor'. */
 export function quotaText({ deer, per, most }: HarvestQuota): string {
-  return `At most ${quotaDeerText(deer, most)} ${PER_WORDS[per]}`;
+  return QUOTA_WORDS.per[per](quotaDeerText(deer, most));
 }
 
 function counts(quota: HarvestQuota, deer: CountedDeer, memberId: string | null): boolean {
@@ -60,25 +53,14 @@ export function quotaStates(
 /** Whose count is meant: the reader's own, to a guest their sponsor's, or that of somebody the reader books for. */
 export type CountOwner = 'own' | 'sponsor' | { name: string; guest: boolean };
 
-function ownerText(per: Exclude<QuotaPer, 'club'>, owner: CountOwner): string {
-  const guests = per === 'member_guests';
-  if (owner === 'own') return guests ? 'The limit for your guests' : 'Your limit';
-  if (owner === 'sponsor') {
-    return guests ? "The limit for your sponsor's guests" : 'Your deer count on your sponsor, whose limit';
-  }
-  const { name, guest } = owner;
-  if (guest) {
-    return guests
-      ? `The limit for the guests of ${name}'s sponsor`
-      : `The deer of ${name} count on their sponsor, whose limit`;
-  }
-  return guests ? `The limit for the guests of ${name}` : `${name}'s limit`;
+function limitText(per: QuotaPer, owner: CountOwner): string {
+  if (per === 'club') return QUOTA_MET_WORDS.club;
+  const words = QUOTA_MET_WORDS[per];
+  if (owner === 'own' || owner === 'sponsor') return words[owner];
+  return owner.guest ? words.guest(owner.name) : words.member(owner.name);
 }
 
 /** What a person is told before booking when a quota is met. */
 export function metText({ quota, taken }: QuotaState, owner: CountOwner): string {
-  const { deer, per, most } = quota;
-  const limit = per === 'club' ? "The club's limit" : ownerText(per, owner);
-  const kind = deer === 'any' ? '' : ` ${DEER_WORDS[deer]}`;
-  return `${limit} of ${most}${kind} deer this season is met (${taken} taken).`;
+  return QUOTA_MET_WORDS.met(limitText(quota.per, owner), QUOTA_MET_WORDS.deer[quota.deer](quota.most), taken);
 }
