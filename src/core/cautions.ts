@@ -1,5 +1,6 @@
-import type { Caution, StandKind } from './types';
+import type { StandKind } from './ground-types';
 import { cToF, formatSpeed, mphToMps, mpsToMph, type Units } from './units';
+import type { Caution } from './verdict-types';
 import { windChillF } from './wind-chill';
 import { CAUTION_WORDS } from './words/sit';
 

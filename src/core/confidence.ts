@@ -1,5 +1,5 @@
 import type { ScoreSettings } from './score';
-import type { Confidence } from './types';
+import type { Confidence } from './verdict-types';
 import { CONFIDENCE_WORDS } from './words/sit';
 
 const HOUR_MS = 3_600_000;

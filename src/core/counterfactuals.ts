@@ -6,8 +6,8 @@ import { scoreOf } from './reasons';
 import { seatScent } from './scent/seat-scent';
 import { sectorName, sectorOf } from './sectors';
 import type { SitFrame } from './sit-frame';
-import type { Counterfactual } from './types';
 import type { SitSums } from './verdict';
+import type { Counterfactual } from './verdict-types';
 import { directionShares } from './wind/histogram';
 import { WHAT_IF_WORDS } from './words/sit';
 

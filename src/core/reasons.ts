@@ -1,7 +1,7 @@
 import { type PromiseFactors, promiseOf, promiseSeated } from './promise/promise-factors';
 import { type QuietFactors, quietOf } from './quiet';
 import { type ScoreSettings, sitScore } from './score';
-import type { Evidence, Reason } from './types';
+import type { Evidence, Reason } from './verdict-types';
 import { REASON_WORDS } from './words/reasons';
 import { percentText } from './words/sit';
 

@@ -1,5 +1,5 @@
 import { sectorName } from './sectors';
-import type { Verdict } from './types';
+import type { Verdict } from './verdict-types';
 import { percentText, SENTENCE_WORDS } from './words/sit';
 
 /** How an instant is written on a club's clock: '6:05'. */

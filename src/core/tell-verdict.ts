@@ -2,8 +2,8 @@ import { counterfactualsFor } from './counterfactuals';
 import { type ReasonFacts, reasonsFor } from './reasons';
 import type { SitFrame } from './sit-frame';
 import { timelineOf } from './timeline';
-import type { Verdict } from './types';
 import type { SitSums } from './verdict';
+import type { Verdict } from './verdict-types';
 import { REASON_WORDS } from './words/reasons';
 
 const DAY_MS = 86_400_000;

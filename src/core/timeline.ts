@@ -1,7 +1,7 @@
 import { clearShare } from './promise/sun-in-eyes';
 import type { SitFrame } from './sit-frame';
-import type { TimelineStep } from './types';
 import type { SitSums } from './verdict';
+import type { TimelineStep } from './verdict-types';
 import { directionShares } from './wind/histogram';
 import { STEP_WORDS } from './words/sit';
 

@@ -1,3 +1,0 @@
-export * from './condition-types';
-export * from './ground-types';
-export * from './verdict-types';
