@@ -18,7 +18,7 @@ export function WindowSection({ coverage }: { coverage: WindowCoverage }) {
         <PointBars points={points} label={W.byPoint(window)} />
       </Section>
       <details className="mt-4">
-        <summary className="flex min-h-11 cursor-pointer items-center font-semibold">{W.openMonths}</summary>
+        <summary className="cursor-pointer py-2.5 font-semibold">{W.openMonths}</summary>
         <Table caption={W.byMonth(window)} stack={false}>
           <THead>
             <Th>{W.month}</Th>

@@ -14,7 +14,7 @@ export function seatHandle(map: L.Map, onMove: (at: L.LatLng) => void) {
   let dragging = false;
 
   function make(at: L.LatLng, label: string): L.Marker {
-    const icon = L.divIcon({ className: 'm-seat', iconSize: [40, 40] });
+    const icon = L.divIcon({ className: 'm-seat', iconSize: [44, 44] });
     const made = L.marker(at, { icon, draggable: true, zIndexOffset: 1500, title: label, alt: label }).addTo(map);
     made.on('dragstart', () => {
       dragging = true;
