@@ -47,8 +47,24 @@ const isClasses = (text: string) =>
       (token) => /^[a-z!*[-][\w:[\]()./%!&>*=,#'-]*$/.test(token) && (/[-:[/\d]/.test(token) || BARE_CLASS.test(token)),
     );
 
-/** Values of `Evidence` in core, and what no language changes: our name, signs of units. */
-const NO_TEXT = new Set(['our choice', 'club log', 'Windrest', 'yd', 'ft', 'in', 'cm', 'mi', 'km', 'lb', 'kg', 'mph']);
+/** Values of `Evidence` and `Word` in core, and what no language changes: our name, signs of units. */
+const NO_TEXT = new Set([
+  'our choice',
+  'club log',
+  'Quiet',
+  'Touchy',
+  'Loud',
+  'Windrest',
+  'yd',
+  'ft',
+  'in',
+  'cm',
+  'mi',
+  'km',
+  'lb',
+  'kg',
+  'mph',
+]);
 
 /** Two words, or one with a capital; neither markup, a run of style rules nor a media type. */
 function looksRead(text: string): boolean {

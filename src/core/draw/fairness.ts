@@ -1,3 +1,4 @@
+import { FAIRNESS_WORDS } from '@/core/words/draw';
 /**
  * Gini coefficient of a sharing: 0 when all have the same, toward 1 when one has it all. Values are 0 or more. null with
  * nobody, or nothing to share. Mean absolute difference over twice the mean (Sen 1973, On Economic Inequality).
@@ -12,8 +13,8 @@ export function gini(values: readonly number[]): number | null {
 
 /** A Gini coefficient in words; the steps are our choice. */
 export function fairnessWords(value: number): string {
-  if (value < 0.1) return 'shared almost evenly';
-  if (value < 0.25) return 'shared fairly evenly';
-  if (value < 0.4) return 'shared unevenly';
-  return 'mostly in a few hands';
+  if (value < 0.1) return FAIRNESS_WORDS.evenly;
+  if (value < 0.25) return FAIRNESS_WORDS.fairly;
+  if (value < 0.4) return FAIRNESS_WORDS.unevenly;
+  return FAIRNESS_WORDS.fewHands;
 }

@@ -1,3 +1,4 @@
+import { MOVEMENT_WORDS } from '@/core/words/movement';
 import type { WindowName } from '../condition-types';
 import { bearingDeg, distanceM, distanceToShapeM, lengthM } from '../geometry';
 import type { FeatureKind, Point, ScoredFeature, ScoredStand } from '../ground-types';
@@ -96,7 +97,7 @@ function stopsOf(line: ScoredFeature, stations: Station[], input: MovementInput)
   if (!first || !last) return stops;
   const end = (at: Station, from: Point): Stop => ({
     featureId: null,
-    name: `its ${sectorName(bearingDeg(from, at.p))} end`,
+    name: MOVEMENT_WORDS.end(sectorName(bearingDeg(from, at.p))),
     kind: null,
     alongM: at.alongM,
     offM: 0,
@@ -140,7 +141,7 @@ function gapsOf(line: Point[], stations: Station[], stops: Stop[], input: Moveme
     gaps.push({
       fromM,
       toM,
-      between: `${before?.name ?? ''} and ${after?.name ?? ''}`,
+      between: MOVEMENT_WORDS.between(before?.name ?? '', after?.name ?? ''),
       points: stretchOf(line, fromM, toM),
     });
   }
@@ -153,7 +154,7 @@ function joinStops(stops: Stop[]): Stop[] {
   for (const stop of stops) {
     const last = joined.at(-1);
     if (last && stop.alongM - last.alongM < SAME_PLACE_M) {
-      joined[joined.length - 1] = { ...last, name: `${last.name} and ${stop.name}` };
+      joined[joined.length - 1] = { ...last, name: MOVEMENT_WORDS.together(last.name, stop.name) };
     } else joined.push(stop);
   }
   return joined;
