@@ -68,7 +68,6 @@ export function SettingsForm({ club, units, values, action }: SettingsFormProps)
                 autoComplete="off"
                 className="max-w-32"
                 unit={settingUnit(key, units)}
-                placeholder={settingText(key, DEFAULT_SETUP[key], units)}
                 {...register(`settings.${key}`)}
                 error={errorOf(`settings.${key}`)}
               />
