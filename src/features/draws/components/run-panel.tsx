@@ -22,7 +22,7 @@ interface RunPanelProps {
 export function RunPanel({ club, drawId, initial, stop }: RunPanelProps) {
   const router = useRouter();
   const toast = useToast();
-  const { data: run } = useRead({ ...runQuery(club, drawId), initialData: initial });
+  const { data: run } = useRead({ ...runQuery(club, drawId, initial?.id), initialData: initial });
   const watched = useRef<string | null>(null);
   useEffect(() => {
     if (run?.atWork) {
