@@ -4,7 +4,7 @@ import { lapsesAt } from '@/core/outing/board-state';
 import { dueSteps } from '@/core/outing/overdue-steps';
 import { reader } from '@/db/client';
 import { claims, outbox, outings, overdueSteps, sits } from '@/db/schema';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import type { ClubScope } from '@/server/scope';
 
 type Sit = typeof sits.$inferSelect;

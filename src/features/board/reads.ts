@@ -2,7 +2,7 @@ import { weaponWord } from '@/core/booking/seasons';
 import { addDays, dayOf, formatClock, formatDay } from '@/core/day-time';
 import { type BoardState, boardState } from '@/core/outing/board-state';
 import { findSit, listBookedSits, type SitDetail } from '@/features/bookings/data';
-import { clockText, SIT_WINDOW_WORDS, spanText } from '@/features/bookings/sit-words';
+import { clockText, SIT_WINDOW_WORDS, spanText } from '@/features/bookings/words/sits';
 import { type ApproachRow, listApproaches } from '@/features/ground/approaches-data';
 import { listParkings } from '@/features/ground/parkings-data';
 import { listLastVehicles, listOpenOutings, listOutingsOf, type OutingDetail } from '@/features/outings/data';

@@ -1,5 +1,5 @@
 import type { SitWindow } from '@/core/condition-types';
-import { dayAndWindow, spanText } from '@/features/bookings/sit-words';
+import { dayAndWindow, spanText } from '@/features/bookings/words/sits';
 import { walkUpWindow } from '@/features/outings/walk-up';
 import type { ClubScope } from '@/server/scope';
 import type { BoardSit } from './reads';

@@ -9,9 +9,9 @@ import { findSit, findSitByRequest, insertSit, type SitDetail } from './data';
 import { queueGuestMails } from './guest-mails';
 import { queueSitMail } from './sit-mails';
 import type { BookSitInput } from './sit-schema';
-import { dayAndWindow, windowsHeld } from './sit-words';
 import { SIT_AUDIT } from './words/audit';
 import { SIT_ERRORS } from './words/errors';
+import { dayAndWindow, windowsHeld } from './words/sits';
 
 /** Books a sit inside a change of which it is a part, for oneself or, with the permission, for another. */
 export async function bookSitIn(tx: Tx, scope: ClubScope, input: BookSitInput, now: number): Promise<SitDetail> {

@@ -23,8 +23,8 @@ import {
   listStandsForRules,
   type MemberForRules,
 } from './rules-data';
-import { windowsHeld } from './sit-words';
 import { SIT_ERRORS } from './words/errors';
+import { windowsHeld } from './words/sits';
 
 export interface ContextInput {
   day: string;

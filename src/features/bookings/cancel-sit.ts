@@ -6,9 +6,9 @@ import { deleteClaims, findSigning, findSit, type SitDetail, updateSit } from '.
 import { queueGuestMails } from './guest-mails';
 import { queueSitMail } from './sit-mails';
 import type { CancelSitInput } from './sit-schema';
-import { clockText, dayAndWindow } from './sit-words';
 import { SIT_AUDIT } from './words/audit';
 import { SIT_ERRORS } from './words/errors';
+import { clockText, dayAndWindow } from './words/sits';
 
 /** Frees the claims and keeps the record, inside a change of which it is a part (a member removed, a day closed). */
 export async function cancelSitIn(

@@ -10,9 +10,9 @@ import { deleteClaims, findSit, type SitDetail, updateSit } from './data';
 import { queueGuestMails } from './guest-mails';
 import { queueSitMail } from './sit-mails';
 import type { ChangeSitInput } from './sit-schema';
-import { clockText, dayAndWindow, windowsHeld } from './sit-words';
 import { SIT_AUDIT } from './words/audit';
 import { SIT_ERRORS } from './words/errors';
+import { clockText, dayAndWindow, windowsHeld } from './words/sits';
 
 function refuseChange(scope: ClubScope, sit: SitDetail, sequence: number, now: number): void {
   if (sit.memberId !== scope.member.id && !scope.can('sits.book_for_others')) {

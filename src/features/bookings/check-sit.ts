@@ -9,8 +9,8 @@ import { type BookingContext, gatesFor, loadBookingContext } from './booking-con
 import { guestMemberGates } from './guest-member-gates';
 import { guestKey } from './guest-parties';
 import { listMembersForRules } from './rules-data';
-import { type SitWindows, windowsHeld } from './sit-words';
 import { SIT_ERRORS } from './words/errors';
+import { type SitWindows, windowsHeld } from './words/sits';
 
 export interface WantedSit {
   memberId: string;

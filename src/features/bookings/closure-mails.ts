@@ -7,8 +7,8 @@ import { queueMail } from '@/server/outbox';
 import type { ClubScope } from '@/server/scope';
 import { listBookedSits, type SitDetail } from './data';
 import { listOfficers } from './readers-data';
-import { dayAndWindow } from './sit-words';
 import { CLOSED_MAIL_WORDS as WORDS } from './words/mails';
+import { dayAndWindow } from './words/sits';
 
 interface Closure extends ClosureValues {
   id: string;

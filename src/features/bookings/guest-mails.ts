@@ -7,8 +7,8 @@ import type { ClubScope } from '@/server/scope';
 import type { SitDetail } from './data';
 import { type GuestReader, listGuestReaders } from './readers-data';
 import { type SitMail, sitEntry, sitFacts } from './sit-mails';
-import { dayAndWindow } from './sit-words';
 import { GUEST_MAIL_WORDS } from './words/mails';
+import { dayAndWindow } from './words/sits';
 
 /** left_out: the sit stands, without this guest. */
 type GuestMail = SitMail | 'left_out';

@@ -1,8 +1,8 @@
 import { weaponWord } from '@/core/booking/seasons';
 import type { SitDetail } from './data';
 import type { EntryText } from './sit-calendar';
-import { SIT_WINDOW_WORDS } from './sit-words';
 import { SIT_ENTRY_WORDS } from './words/entries';
+import { SIT_WINDOW_WORDS } from './words/sits';
 
 /** 'by Creek way from North gate'; null when no way in is named. */
 export function wayInText(sit: Pick<SitDetail, 'approachName' | 'parkingName'>): string | null {

@@ -8,8 +8,8 @@ import type { ClubScope } from '@/server/scope';
 import type { SitDetail } from './data';
 import { sitCalendar } from './sit-calendar';
 import { fullEntry, wayInText } from './sit-entry';
-import { dayAndWindow, spanText, zoneText } from './sit-words';
 import { SIT_MAIL_WORDS } from './words/mails';
+import { dayAndWindow, spanText, zoneText } from './words/sits';
 
 export type SitMail = 'booked' | 'changed' | 'cancelled' | 'lapsed';
 

@@ -1,8 +1,8 @@
 import { z } from 'zod';
 import { isDay } from '@/core/day-time';
 import { WEAPONS } from '@/core/ground-types';
-import { SIT_WINDOWS } from './sit-words';
 import { SIT_FIELD_ERRORS } from './words/errors';
+import { SIT_WINDOWS } from './words/sits';
 
 /** Ids are told apart by the database; this only keeps nonsense out of it. */
 const id = z.string().trim().min(1, SIT_FIELD_ERRORS.chooseOne).max(60, SIT_FIELD_ERRORS.notListed);

@@ -4,7 +4,7 @@ import type { SitGuest } from '@/db/schema';
 import type { ClubScope } from '@/server/scope';
 import type { SitDetail } from './data';
 import { wayInText } from './sit-entry';
-import { dayAndWindow, type SitWindows, spanText } from './sit-words';
+import { dayAndWindow, type SitWindows, spanText } from './words/sits';
 
 /** A sit as screens show it; carries neither positions nor addresses. */
 export interface SitView {

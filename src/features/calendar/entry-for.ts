@@ -2,7 +2,7 @@ import type { CalendarPrivacy } from '@/core/booking/rules';
 import type { SitDetail } from '@/features/bookings/data';
 import type { EntryText } from '@/features/bookings/sit-calendar';
 import { fullEntry } from '@/features/bookings/sit-entry';
-import { SIT_WINDOW_WORDS } from '@/features/bookings/sit-words';
+import { SIT_WINDOW_WORDS } from '@/features/bookings/words/sits';
 import { CALENDAR_ENTRY_WORDS } from './words';
 
 interface Reader {

@@ -1,6 +1,6 @@
 import type { Tx } from '@/db/client';
 import { env } from '@/env';
-import { dayAndWindow } from '@/features/bookings/sit-words';
+import { dayAndWindow } from '@/features/bookings/words/sits';
 import { composeMail } from '@/features/mail/compose';
 import { queueMail } from '@/server/outbox';
 import type { ClubScope } from '@/server/scope';

@@ -2,7 +2,7 @@ import { huntingYear } from '@/core/booking/hunting-year';
 import { dayOf, formatClock, formatDay } from '@/core/day-time';
 import { can } from '@/core/permissions';
 import { type DueState, dueState } from '@/core/upkeep/inspection';
-import { spanText } from '@/features/bookings/sit-words';
+import { spanText } from '@/features/bookings/words/sits';
 import { numberText } from '@/features/clubs/read-number';
 import { degreesText } from '@/features/ground/place-text';
 import { listStands } from '@/features/ground/stands-data';

@@ -10,9 +10,9 @@ import { listInvitations } from './invitations-data';
 import type { ChangeMemberInput } from './member-schema';
 import { listFutureSits } from './member-sits-data';
 import { isLastAdmin, sitText } from './removal';
-import { aRole } from './role-words';
 import { CLUB_AUDIT } from './words/audit';
 import { CLUB_ERRORS } from './words/errors';
+import { aRole } from './words/roles';
 
 /** Sits already booked that the new role or days would not allow are named: whoever changes it cancels them first. */
 async function refuseLostSits(scope: ClubScope, tx: Tx, member: MemberRow, input: ChangeMemberInput, now: number) {

@@ -10,10 +10,10 @@ import { requireStanding } from './check-standing';
 import { listMembers } from './data';
 import { findInvitationTo, insertInvitation, updateInvitation } from './invitations-data';
 import type { InviteInput } from './member-schema';
-import { aRole } from './role-words';
 import { INVITATION_MS, INVITATION_RATE, mailInvitation } from './send-invitation';
 import { CLUB_AUDIT } from './words/audit';
 import { CLUB_ERRORS } from './words/errors';
+import { aRole } from './words/roles';
 
 interface Inviter {
   emailVerifiedAt: number | null;

@@ -10,9 +10,9 @@ import { hashPassword } from '@/server/passwords';
 import { findMembershipOf, insertMembership, reviveMembership } from './data';
 import { findInvitationBySecret, type InvitationRow, isFresh, spendInvitation } from './invitations-data';
 import type { JoinInput, JoinNewInput } from './join-schema';
-import { aRole } from './role-words';
 import { CLUB_AUDIT } from './words/audit';
 import { CLUB_ERRORS } from './words/errors';
+import { aRole } from './words/roles';
 
 const deadLink = () => new AppError('invalid', CLUB_ERRORS.invitationSpent);
 

@@ -1,7 +1,7 @@
 import type { ClubScope } from '@/server/scope';
 import { type AuditRow, countAudit, listAudit, listAuditActions, listAuditPeople } from './audit-data';
 import type { AuditFilter } from './audit-schema';
-import { actionWords, type DetailLine, detailLines, momentText } from './audit-words';
+import { actionWords, type DetailLine, detailLines, momentText } from './words/audit-text';
 
 const ROWS_A_PAGE = 50;
 

@@ -1,6 +1,6 @@
 import { type JobRunRow, listJobNames, listLastRuns } from '@/db/queries/job-runs';
 import type { ClubScope } from '@/server/scope';
-import { momentText } from './audit-words';
+import { momentText } from './words/audit-text';
 
 export interface JobRunLine {
   id: string;

@@ -5,8 +5,8 @@ import type { ClubScope } from '@/server/scope';
 import { maySponsor } from './check-standing';
 import { findMember, listMembers, type MemberRow } from './data';
 import { listInvitations } from './invitations-data';
-import { ROLE_WORDS } from './role-words';
 import { MEMBER_WORDS } from './words/members';
+import { ROLE_WORDS } from './words/roles';
 
 export interface MemberView {
   id: string;

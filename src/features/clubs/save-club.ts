@@ -5,10 +5,10 @@ import type { ClubScope } from '@/server/scope';
 import { auditClub } from './audit-club';
 import type { ChangePlaceInput } from './club-schema';
 import { getClub, lastClubChange, updateClub } from './data';
-import { placeLines, type RuleLine } from './place-words';
-import { type ChangedLine, changedLines, describeRules } from './rules-words';
 import { CLUB_AUDIT } from './words/audit';
 import { CLUB_ERRORS } from './words/errors';
+import { placeLines, type RuleLine } from './words/place';
+import { type ChangedLine, changedLines, describeRules } from './words/rules';
 
 type Club = NonNullable<Awaited<ReturnType<typeof getClub>>>;
 

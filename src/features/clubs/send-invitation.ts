@@ -7,8 +7,8 @@ import { hashSecret } from '@/lib/secrets';
 import { queueMail } from '@/server/outbox';
 import type { RateRule } from '@/server/rate-limit';
 import type { ClubScope } from '@/server/scope';
-import { aRole } from './role-words';
 import { INVITATION_MAIL } from './words/mails';
+import { aRole } from './words/roles';
 
 export const INVITATION_DAYS = 14;
 export const INVITATION_MS = INVITATION_DAYS * 24 * 60 * 60_000;

@@ -1,5 +1,5 @@
 import { formatDay } from '@/core/day-time';
-import { dayAndWindow } from '@/features/bookings/sit-words';
+import { dayAndWindow } from '@/features/bookings/words/sits';
 import type { MadeClub } from './build-club';
 import type { MadeGround } from './build-ground';
 import type { DemoDay } from './demo-day';

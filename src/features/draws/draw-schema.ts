@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { isClock, isDay } from '@/core/day-time';
 import { WEAPONS } from '@/core/ground-types';
-import { SIT_WINDOWS } from '@/features/bookings/sit-words';
+import { SIT_WINDOWS } from '@/features/bookings/words/sits';
 import { DRAW_FIELD_ERRORS as ERRORS } from './words/forms';
 
 const id = z.string().min(1).max(40);

@@ -2,7 +2,7 @@ import { dayOf, formatDay } from '@/core/day-time';
 import { reader, write } from '@/db/client';
 import { gatesFor, loadBookingContext } from '@/features/bookings/booking-context';
 import { guestKey } from '@/features/bookings/guest-parties';
-import { clockText, windowsHeld } from '@/features/bookings/sit-words';
+import { clockText, windowsHeld } from '@/features/bookings/words/sits';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import type { EnterDrawInput } from './draw-schema';

@@ -9,7 +9,7 @@ import type { Weapon } from '@/core/ground-types';
 import { reader } from '@/db/client';
 import type { DrawSlot } from '@/db/schema';
 import { type BookingContext, loadBookingContext } from '@/features/bookings/booking-context';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import { readSits } from '@/features/sits/reads';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';

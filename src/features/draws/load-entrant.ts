@@ -3,7 +3,7 @@ import { reader } from '@/db/client';
 import { type BookingContext, gatesFor, hostOf, loadBookingContext } from '@/features/bookings/booking-context';
 import { guestRefusals, seatRefusals } from '@/features/bookings/check-sit';
 import { guestHunts, guestKey } from '@/features/bookings/guest-parties';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import type { DrawRow, EntryRow } from './draws-data';

@@ -1,4 +1,4 @@
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { now as clock } from '@/server/clock';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';

@@ -3,7 +3,7 @@ import { fairnessWords, gini } from '@/core/draw/fairness';
 import { WEAPONS } from '@/core/ground-types';
 import { reader } from '@/db/client';
 import { listSponsoredGuests } from '@/features/bookings/rules-data';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { listStands } from '@/features/ground/stands-data';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
@@ -122,6 +122,9 @@ function resultLine({ result, entry, name, sitStatus }: ResultLine, own: string,
 }
 
 export async function readDraw(scope: ClubScope, id: string, now: number): Promise<DrawScreen> {
+  const officer = scope.can('draws.write');
+  // Before the draw: a run that ends between the two is then still watched, and its end asks for the page again.
+  const run = officer ? await readRun(scope, id, now) : null;
   const draw = await findDraw(scope, id);
   if (!draw) throw notFound();
   const { member, club } = scope;
@@ -129,7 +132,6 @@ export async function readDraw(scope: ClubScope, id: string, now: number): Promi
   const own = entries.find(({ entry }) => entry.memberId === member.id)?.entry ?? null;
   const names = new Map((await listStands(scope)).map((stand) => [stand.id, stand.name]));
   const points = await loadPoints(scope, { before: draw.day, rules: draw.pointRules });
-  const officer = scope.can('draws.write');
   const seen = draw.state === 'published' || (draw.state === 'drawn' && officer);
   const results = seen ? await listResults(scope, id) : [];
   const { pointsPerMiss, workHoursPerPoint, resetOnGiven } = draw.pointRules;
@@ -178,7 +180,7 @@ export async function readDraw(scope: ClubScope, id: string, now: number): Promi
       entries.map(({ entry }) => entry.memberId),
       results,
     ),
-    run: officer ? await readRun(scope, id, now) : null,
+    run,
   };
 }
 

@@ -6,7 +6,7 @@ import { buildProgram, readGiven } from '@/core/draw/build-program';
 import { solveOptions } from '@/core/draw/solve-options';
 import { write } from '@/db/client';
 import type { DrawResult } from '@/db/schema';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { newId } from '@/lib/ids';
 import { now as clock } from '@/server/clock';
 import { AppError } from '@/server/errors';

@@ -1,6 +1,6 @@
 import { daysBetween, formatDay } from '@/core/day-time';
 import type { DrawSlot } from '@/db/schema';
-import { dayAndWindow, SIT_WINDOW_WORDS, windowsHeld } from '@/features/bookings/sit-words';
+import { dayAndWindow, SIT_WINDOW_WORDS, windowsHeld } from '@/features/bookings/words/sits';
 import { SLOT_WORDS } from './words/screens';
 
 export function slotName(slot: DrawSlot | undefined, withYear = false): string {

@@ -3,7 +3,7 @@ import { dayOf } from '@/core/day-time';
 import { type ReadFrom, reader, write } from '@/db/client';
 import { listMapItems, loadGround } from '@/features/ground/data';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
-import { LAYER_WORDS } from '@/features/map/words';
+import { LAYER_WORDS } from '@/features/map/words/things';
 import { audit } from '@/server/audit';
 import type { ClubScope } from '@/server/scope';
 import type { ExportAsk, ExportFormat, ExportLayer } from './exchange-schema';

@@ -2,7 +2,7 @@ import type { DrawnShape } from '@/core/map-layers';
 import type { ImportedThing } from '@/db/schema';
 import { type DrawnGeometry, parseGeometry } from '@/features/ground/geometry-text';
 import type { MapClub, MapThing } from '@/features/map/thing';
-import { nameOf } from '@/features/map/words';
+import { nameOf } from '@/features/map/words/things';
 import { guessKind } from './guess-kind';
 import { kindOf } from './kind-values';
 import { type Measured, measure, NearIndex, sameWithinM } from './near';

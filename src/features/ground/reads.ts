@@ -15,7 +15,7 @@ import { namedSits } from './refuse';
 import { getStand, listStands } from './stands-data';
 import type { ClosureLine, FeatureLine, ParkingLine, StandLine } from './view';
 import { formatClosed, formatDays, formatSize, formatWinds } from './view';
-import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS, STAND_KIND_WORDS, WEAPON_WORDS } from './words';
+import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS, STAND_KIND_WORDS, WEAPON_WORDS } from './words/kinds';
 
 export async function readStandList(scope: ClubScope, now: number): Promise<StandLine[]> {
   const today = dayOf(now, scope.club.zone);

@@ -5,8 +5,8 @@ import { distanceM, type LatLon, lengthM, toLocal } from '@/core/geometry';
 import type { Arc, Suitability } from '@/core/ground-types';
 import { formatArea, formatDistance, type Units } from '@/core/units';
 import type { ClosureRow } from './closures-data';
-import { NONE_SET } from './words';
 import { CLOSED_DAYS_WORDS } from './words/closures';
+import { NONE_SET } from './words/kinds';
 
 /** A stand as a row of the list. */
 export interface StandLine {

@@ -1,6 +1,6 @@
 import { formatClock } from '@/core/day-time';
 import { write } from '@/db/client';
-import { WEAPON_WORDS } from '@/features/ground/words';
+import { WEAPON_WORDS } from '@/features/ground/words/kinds';
 import { seasonYear } from '@/features/logs/season-years';
 import { toCsv } from '@/lib/csv';
 import { audit } from '@/server/audit';

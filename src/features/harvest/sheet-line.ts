@@ -1,6 +1,6 @@
 import { formatWeight, type Units } from '@/core/units';
-import { momentText } from '@/features/clubs/audit-words';
-import { WEAPON_WORDS } from '@/features/ground/words';
+import { momentText } from '@/features/clubs/words/audit-text';
+import { WEAPON_WORDS } from '@/features/ground/words/kinds';
 import type { ClubScope } from '@/server/scope';
 import { deerKind } from './deer-kind';
 import type { HarvestRow, Sheet } from './harvests-data';

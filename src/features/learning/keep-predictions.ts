@@ -3,7 +3,7 @@ import { rankSits } from '@/core/rank';
 import { sitWindow } from '@/core/windows';
 import { write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import { loadScoring } from '@/features/sits/load-scoring';
 import { getForecast, type KeptForecast } from '@/features/weather/get-forecast';
 import { type ClubScope, systemScopeById } from '@/server/scope';

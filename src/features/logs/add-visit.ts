@@ -1,6 +1,6 @@
 import { localToUtc } from '@/core/day-time';
 import { write } from '@/db/client';
-import { momentText } from '@/features/clubs/audit-words';
+import { momentText } from '@/features/clubs/words/audit-text';
 import { newId } from '@/lib/ids';
 import type { Sent } from '@/lib/sent-schema';
 import { audit } from '@/server/audit';

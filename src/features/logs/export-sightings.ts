@@ -1,7 +1,7 @@
 import { formatClock } from '@/core/day-time';
 import type { Figure } from '@/core/indices';
 import { write } from '@/db/client';
-import { SIT_WINDOW_WORDS } from '@/features/bookings/sit-words';
+import { SIT_WINDOW_WORDS } from '@/features/bookings/words/sits';
 import { toCsv } from '@/lib/csv';
 import { audit } from '@/server/audit';
 import type { ClubScope } from '@/server/scope';

@@ -1,7 +1,7 @@
 import { addDays, dayOf } from '@/core/day-time';
 import type { FollowUp, HitPlace, Shot } from '@/core/log/follow-up';
-import { clockText, dayAndWindow, spanText } from '@/features/bookings/sit-words';
-import { momentText } from '@/features/clubs/audit-words';
+import { clockText, dayAndWindow, spanText } from '@/features/bookings/words/sits';
+import { momentText } from '@/features/clubs/words/audit-text';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope, ScopeClub } from '@/server/scope';
 import { maySeeLog, mayWriteLog } from './log-access';

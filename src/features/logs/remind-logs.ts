@@ -2,7 +2,7 @@ import { formatClock } from '@/core/day-time';
 import { type ReadFrom, reader, type Tx, write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';
 import { env } from '@/env';
-import { dayAndWindow, spanText } from '@/features/bookings/sit-words';
+import { dayAndWindow, spanText } from '@/features/bookings/words/sits';
 import { composeMail } from '@/features/mail/compose';
 import { hasMail } from '@/features/mail/data';
 import { queueMail } from '@/server/outbox';

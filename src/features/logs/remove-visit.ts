@@ -1,5 +1,5 @@
 import { write } from '@/db/client';
-import { momentText } from '@/features/clubs/audit-words';
+import { momentText } from '@/features/clubs/words/audit-text';
 import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';

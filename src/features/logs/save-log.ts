@@ -2,7 +2,7 @@ import { isDeepStrictEqual } from 'node:util';
 import { localToUtc } from '@/core/day-time';
 import { write } from '@/db/client';
 import type { SitLogSnapshot } from '@/db/schema';
-import { dayAndWindow } from '@/features/bookings/sit-words';
+import { dayAndWindow } from '@/features/bookings/words/sits';
 import { audit } from '@/server/audit';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';

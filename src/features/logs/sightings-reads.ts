@@ -1,6 +1,6 @@
 import { dayOf } from '@/core/day-time';
 import { type Indices, indicesBy, indicesOf, type SitCount } from '@/core/indices';
-import { SIT_WINDOW_WORDS, SIT_WINDOWS } from '@/features/bookings/sit-words';
+import { SIT_WINDOW_WORDS, SIT_WINDOWS } from '@/features/bookings/words/sits';
 import type { ClubScope } from '@/server/scope';
 import { findFirstLoggedDay, type LoggedSit, listEnded, listLogged } from './logs-data';
 import { type LogLine, logLine } from './reads';

@@ -1,6 +1,6 @@
 import { distanceM, toLocal } from '@/core/geometry';
 import { formatDistance } from '@/core/units';
-import { momentText } from '@/features/clubs/audit-words';
+import { momentText } from '@/features/clubs/words/audit-text';
 import { listStands } from '@/features/ground/stands-data';
 import type { ClubScope } from '@/server/scope';
 import { listVisits } from './visits-data';

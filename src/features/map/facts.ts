@@ -3,11 +3,11 @@ import { formatDistance } from '@/core/units';
 import { formatBearing } from '@/features/ground/bearing-text';
 import { degreesText } from '@/features/ground/place-text';
 import { formatArcs, formatWinds } from '@/features/ground/view';
-import { DIRECTION_WORDS, formatMonths } from '@/features/ground/words';
+import { DIRECTION_WORDS, formatMonths } from '@/features/ground/words/kinds';
 import { sizeOf, sizeText } from './drawing/measure';
 import type { MapClub, MapThing } from './thing';
-import { whatOf } from './words';
 import { FACT_WORDS } from './words/facts';
+import { whatOf } from './words/things';
 
 export interface Fact {
   term: string;

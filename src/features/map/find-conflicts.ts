@@ -3,8 +3,8 @@ import { lastChangedBy } from '@/features/ground/people-data';
 import type { ClubScope } from '@/server/scope';
 import type { DrawingChange, DrawingConflict } from './drawing-schema';
 import type { DrawnRows } from './drawn-rows';
-import { LAYER_WORDS } from './words';
 import { MAP_ERRORS } from './words/errors';
+import { LAYER_WORDS } from './words/things';
 
 function nameOfRow(row: DrawnRows[keyof DrawnRows][number]): string {
   return row.name || ('layer' in row ? LAYER_WORDS[row.layer] : '');

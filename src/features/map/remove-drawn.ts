@@ -4,8 +4,8 @@ import { removeParkingIn } from '@/features/ground/remove-parking';
 import { removeStandIn } from '@/features/ground/remove-stand';
 import type { DrawingChange } from './drawing-schema';
 import type { Saving } from './set-drawn';
-import { LAYER_WORDS } from './words';
 import { MAP_AUDIT } from './words/audit';
+import { LAYER_WORDS } from './words/things';
 
 /** Takes a thing off the map. What is gone already stays gone. */
 export async function removeDrawn(saving: Saving, change: Extract<DrawingChange, { op: 'remove' }>): Promise<void> {

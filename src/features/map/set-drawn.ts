@@ -22,9 +22,9 @@ import type { ClubScope } from '@/server/scope';
 import type { SetChange } from './drawing-schema';
 import type { DrawnRows } from './drawn-rows';
 import { drawnStandDefaults } from './new-stand';
-import { LAYER_WORDS } from './words';
 import { MAP_AUDIT } from './words/audit';
 import { MAP_ERRORS } from './words/errors';
+import { LAYER_WORDS } from './words/things';
 
 /** One saving under way. `ids`: what things drawn anew are called from now on. */
 export interface Saving {

@@ -2,7 +2,7 @@ import { dayOf, formatDay } from '@/core/day-time';
 import type { ReadFrom } from '@/db/client';
 import { env } from '@/env';
 import { findSit } from '@/features/bookings/data';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { type DrawRow, listEntries } from '@/features/draws/draws-data';
 import { listResults, type ResultLine } from '@/features/draws/results-data';
 import { slotName, slotsTitle } from '@/features/draws/slots';

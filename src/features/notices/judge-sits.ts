@@ -4,7 +4,7 @@ import type { Detail } from '@/core/rank-input';
 import type { Gate, Verdict } from '@/core/verdict-types';
 import { sitWindow } from '@/core/windows';
 import type { SitRow } from '@/features/bookings/data';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import { loadOpenStands } from '@/features/sits/load-open';
 import { loadScoring } from '@/features/sits/load-scoring';
 import type { KeptForecast } from '@/features/weather/get-forecast';

@@ -8,7 +8,7 @@ import { reader, write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';
 import { env } from '@/env';
 import { listBookedSits, type SitDetail } from '@/features/bookings/data';
-import { clockText, dayAndWindow, spanText } from '@/features/bookings/sit-words';
+import { clockText, dayAndWindow, spanText } from '@/features/bookings/words/sits';
 import { hasMail } from '@/features/mail/data';
 import { legalLightText, minutesText } from '@/features/sits/words/terms';
 import { getForecast } from '@/features/weather/get-forecast';

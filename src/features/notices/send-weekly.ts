@@ -4,7 +4,7 @@ import { type ReadFrom, reader, write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';
 import { env } from '@/env';
 import { listBookedSits } from '@/features/bookings/data';
-import { dayAndWindow, spanText } from '@/features/bookings/sit-words';
+import { dayAndWindow, spanText } from '@/features/bookings/words/sits';
 import { listOpenChores } from '@/features/chores/chores-data';
 import { listWorkDays } from '@/features/chores/work-days-data';
 import { listClosuresFrom } from '@/features/ground/closures-data';

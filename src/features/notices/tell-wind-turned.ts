@@ -4,7 +4,7 @@ import { write } from '@/db/client';
 import { listClubs } from '@/db/queries/memberships';
 import { env } from '@/env';
 import { listBookedSits, type SitDetail } from '@/features/bookings/data';
-import { dayAndWindow, spanText } from '@/features/bookings/sit-words';
+import { dayAndWindow, spanText } from '@/features/bookings/words/sits';
 import { getForecast, type KeptForecast } from '@/features/weather/get-forecast';
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { listNoticePeople, type NoticePerson } from './choices-data';

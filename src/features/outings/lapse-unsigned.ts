@@ -5,7 +5,7 @@ import { listClubs } from '@/db/queries/memberships';
 import { deleteClaims, findSit, updateSit } from '@/features/bookings/data';
 import { queueGuestMails } from '@/features/bookings/guest-mails';
 import { queueSitMail } from '@/features/bookings/sit-mails';
-import { dayAndWindow } from '@/features/bookings/sit-words';
+import { dayAndWindow } from '@/features/bookings/words/sits';
 import { audit } from '@/server/audit';
 import { type ClubScope, systemScopeById } from '@/server/scope';
 import { listOutingsOf, listUnsignedSits } from './data';

@@ -1,5 +1,5 @@
 import { write } from '@/db/client';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { auditOuting } from './audit-outing';

@@ -1,4 +1,4 @@
-import { dayAndWindow } from '@/features/bookings/sit-words';
+import { dayAndWindow } from '@/features/bookings/words/sits';
 import type { OutingDetail } from './data';
 import { backByText, clockAndDay, lastSignText } from './words/outing';
 import { OUTING_FACTS } from './words/sign';

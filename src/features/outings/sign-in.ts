@@ -1,7 +1,7 @@
 import { nextClock } from '@/core/outing/back-by';
 import { type Tx, write } from '@/db/client';
 import { findSit, type SitDetail } from '@/features/bookings/data';
-import { clockText, dayAndWindow } from '@/features/bookings/sit-words';
+import { clockText, dayAndWindow } from '@/features/bookings/words/sits';
 import { listApproachesOf } from '@/features/ground/approaches-data';
 import { getParking } from '@/features/ground/parkings-data';
 import { newId } from '@/lib/ids';

@@ -1,5 +1,5 @@
 import { type Tx, write } from '@/db/client';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { foundSent, noteSent, pressedAt } from '@/server/sent-requests';

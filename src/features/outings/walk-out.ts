@@ -3,7 +3,7 @@ import { walkSeconds } from '@/core/approach/walk-times';
 import { type LatLon, toLocal } from '@/core/geometry';
 import { defaultBackBy } from '@/core/outing/back-by';
 import type { SitRow } from '@/features/bookings/data';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import type { ApproachRow } from '@/features/ground/approaches-data';
 import type { ScopeClub } from '@/server/scope';
 

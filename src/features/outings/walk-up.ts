@@ -2,7 +2,7 @@ import type { SitWindow } from '@/core/condition-types';
 import { nextWindow } from '@/core/windows';
 import { write } from '@/db/client';
 import { bookSitIn } from '@/features/bookings/book-sit';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import type { OutingDetail } from './data';

@@ -4,7 +4,7 @@ import { ConfirmEmailNotice } from '@/features/accounts/components/confirm-email
 import { SignOutButton } from '@/features/accounts/components/sign-out-button';
 import { listMyClubs } from '@/features/accounts/reads';
 import { CLUBS_PAGE_WORDS } from '@/features/accounts/words/pages';
-import { ROLE_WORDS } from '@/features/clubs/role-words';
+import { ROLE_WORDS } from '@/features/clubs/words/roles';
 import { now } from '@/server/clock';
 import { accountPage } from '@/server/doors';
 import { ButtonLink, TextLink } from '@/ui/button';

@@ -5,7 +5,7 @@ import { lightBySun } from '@/core/sun-light';
 import { env } from '@/env';
 import { ConfirmEmailNotice } from '@/features/accounts/components/confirm-email-notice';
 import { listMyClubs } from '@/features/accounts/reads';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { clubNavItems } from '@/features/clubs/club-nav';
 import { ClubSwitch } from '@/features/clubs/components/club-switch';
 import { CLUB_SHELL_WORDS } from '@/features/clubs/words/pages';

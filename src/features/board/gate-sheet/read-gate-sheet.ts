@@ -4,7 +4,7 @@ import { legalLight } from '@/core/legal-light';
 import { sunTimes } from '@/core/sun';
 import { allDayWindows } from '@/core/windows';
 import { listBookedSits, type SitDetail } from '@/features/bookings/data';
-import { clockText, SIT_WINDOW_WORDS, spanText } from '@/features/bookings/sit-words';
+import { clockText, SIT_WINDOW_WORDS, spanText } from '@/features/bookings/words/sits';
 import { listApproaches } from '@/features/ground/approaches-data';
 import { listClosuresFrom } from '@/features/ground/closures-data';
 import { listMapItems } from '@/features/ground/map-items-data';

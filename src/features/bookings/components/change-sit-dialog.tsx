@@ -15,8 +15,8 @@ import { useToast } from '@/ui/toast';
 import type { SitOptions } from '../reads';
 import { type ChangeSitValues, changeSitSchema } from '../sit-schema';
 import type { SavedSit, SitView } from '../sit-view';
-import { SIT_WINDOW_WORDS, SIT_WINDOWS } from '../sit-words';
 import { CHANGE_SIT_WORDS } from '../words/screens';
+import { SIT_WINDOW_WORDS, SIT_WINDOWS } from '../words/sits';
 import { GuestFields } from './guest-fields';
 
 export type ChangeAction = (club: string, values: ChangeSitValues) => Promise<ActionResult<SavedSit>>;

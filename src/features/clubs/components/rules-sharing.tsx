@@ -3,7 +3,7 @@
 import { CALENDAR_PRIVACY, SIGHTINGS_SEEN_BY } from '@/core/booking/rules';
 import { RadioCards } from '@/ui/choices';
 import { Section } from '@/ui/page-parts';
-import { PRIVACY_WORDS, SIGHTINGS_WORDS } from '../rules-words';
+import { PRIVACY_WORDS, SIGHTINGS_WORDS } from '../words/rules';
 import { RULES_SHARING_WORDS } from '../words/rules-form';
 import { StatedFields } from './stated-fields';
 import { useRulesFields } from './use-rules-fields';

@@ -5,8 +5,8 @@ import { ROLES, type Role } from '@/core/permissions';
 import { RadioCards } from '@/ui/choices';
 import { DateInput, Select } from '@/ui/text-inputs';
 import type { SponsorChoice } from '../read-members';
-import { ROLE_NOTES, ROLE_WORDS } from '../role-words';
 import { STANDING_WORDS } from '../words/members';
+import { ROLE_NOTES, ROLE_WORDS } from '../words/roles';
 
 interface Fields {
   role: Role;

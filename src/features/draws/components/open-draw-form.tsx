@@ -3,7 +3,7 @@
 import { useRouter } from 'next/navigation';
 import { useFieldArray } from 'react-hook-form';
 import { DEFAULT_POINT_RULES } from '@/core/draw/points';
-import { SIT_WINDOWS } from '@/features/bookings/sit-words';
+import { SIT_WINDOWS } from '@/features/bookings/words/sits';
 import type { ActionResult } from '@/server/doors';
 import { Button, ButtonLink } from '@/ui/button';
 import { Checkbox, CheckboxGroup } from '@/ui/choices';

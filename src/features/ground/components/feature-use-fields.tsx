@@ -8,8 +8,8 @@ import { CheckboxGroup } from '@/ui/choices';
 import { FieldGroup } from '@/ui/field';
 import { TextInput } from '@/ui/text-inputs';
 import { ALL_MONTHS, type FeatureForm } from '../feature-schema';
-import { FEATURE_KIND_WORDS, MONTH_CHOICES } from '../words';
 import { FEATURE_USE_WORDS } from '../words/forms';
+import { FEATURE_KIND_WORDS, MONTH_CHOICES } from '../words/kinds';
 import type { Fields } from './form-types';
 
 const TIME_WORDS = {

@@ -7,7 +7,7 @@ import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { ApproachRow } from '../approaches-data';
 import type { FormClub } from '../form-club';
 import type { ParkingRow } from '../parkings-data';
-import { DIRECTION_WORDS } from '../words';
+import { DIRECTION_WORDS } from '../words/kinds';
 import { STAND_APPROACHES_WORDS } from '../words/stand';
 import type { ClubCall } from './form-types';
 import { RemoveButton } from './remove-button';

@@ -7,7 +7,7 @@ import { formatBearing } from '../bearing-text';
 import { degreesText } from '../place-text';
 import type { StandRow } from '../stands-data';
 import { formatArcs } from '../view';
-import { SHELTER_WORDS, SHOT_SIDE_WORDS, STAND_KIND_WORDS, SUITABILITY_WORDS, WEAPON_WORDS } from '../words';
+import { SHELTER_WORDS, SHOT_SIDE_WORDS, STAND_KIND_WORDS, SUITABILITY_WORDS, WEAPON_WORDS } from '../words/kinds';
 import { STAND_FACTS_WORDS } from '../words/stand';
 import { ArcBars } from './arc-bars';
 

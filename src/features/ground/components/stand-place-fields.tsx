@@ -6,7 +6,7 @@ import { FieldGroup } from '@/ui/field';
 import { Section } from '@/ui/page-parts';
 import { Select, TextInput } from '@/ui/text-inputs';
 import { STAND_LIMITS, type StandForm } from '../stand-schema';
-import { SHOT_SIDE_WORDS, STAND_KIND_WORDS, WEAPON_WORDS } from '../words';
+import { SHOT_SIDE_WORDS, STAND_KIND_WORDS, WEAPON_WORDS } from '../words/kinds';
 import { STAND_PLACE_WORDS } from '../words/stand';
 import { choicesOf } from './choices-of';
 import type { Fields } from './form-types';

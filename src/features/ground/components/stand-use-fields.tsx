@@ -6,7 +6,7 @@ import { Section } from '@/ui/page-parts';
 import { Select, Textarea, TextInput } from '@/ui/text-inputs';
 import type { Hunter } from '../people-data';
 import type { StandForm } from '../stand-schema';
-import { SUITABILITY_WORDS } from '../words';
+import { SUITABILITY_WORDS } from '../words/kinds';
 import { STAND_USE_WORDS } from '../words/stand';
 import { choicesOf } from './choices-of';
 import type { Fields } from './form-types';

@@ -11,7 +11,7 @@ import { bearingText, formatBearing, parseBearing } from '../bearing-text';
 import { parseDegrees } from '../place-text';
 import type { StandForm } from '../stand-schema';
 import { formatArcs } from '../view';
-import { SHELTER_WORDS } from '../words';
+import { SHELTER_WORDS } from '../words/kinds';
 import { STAND_AIR_WORDS, STAND_WIND_WORDS } from '../words/stand';
 import { ArcBars } from './arc-bars';
 import { choicesOf } from './choices-of';

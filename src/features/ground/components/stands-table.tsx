@@ -5,7 +5,7 @@ import { TextLink } from '@/ui/button';
 import { type DataColumn, DataTable } from '@/ui/data-table';
 import { Badge } from '@/ui/page-parts';
 import type { StandLine } from '../view';
-import { SUITABILITY_WORDS } from '../words';
+import { SUITABILITY_WORDS } from '../words/kinds';
 import { STANDS_WORDS } from '../words/stand';
 import { ArcBars } from './arc-bars';
 

@@ -1,7 +1,7 @@
 'use client';
 
 import { WEAPONS } from '@/core/ground-types';
-import { WEAPON_WORDS } from '@/features/ground/words';
+import { WEAPON_WORDS } from '@/features/ground/words/kinds';
 import { DateInput, Select, Textarea, TextInput, TimeInput } from '@/ui/text-inputs';
 import type { HarvestFormChoices } from '../sheet-reads';
 import { TAKEN_FORM_WORDS } from '../words/sheet';

@@ -3,7 +3,7 @@
 import { useFormContext, useWatch } from 'react-hook-form';
 import { isClock, localToUtc } from '@/core/day-time';
 import { FOLLOW_UPS, followFrom, HIT_PLACES, SHOTS } from '@/core/log/follow-up';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 import { RadioCards } from '@/ui/choices';
 import { Notice } from '@/ui/notices';
 import { Textarea, TimeInput } from '@/ui/text-inputs';

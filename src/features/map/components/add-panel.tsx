@@ -4,7 +4,7 @@ import { LocateFixed, Pencil } from 'lucide-react';
 import { useState } from 'react';
 import type { DrawnShape } from '@/core/map-layers';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
-import { SHAPE_WORDS } from '@/features/ground/words';
+import { SHAPE_WORDS } from '@/features/ground/words/kinds';
 import { Button } from '@/ui/button';
 import { Select } from '@/ui/text-inputs';
 import { kindGroups, type NewKind, shapesOf } from '../drawing/kinds';

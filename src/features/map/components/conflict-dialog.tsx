@@ -6,8 +6,8 @@ import { RadioCards } from '@/ui/choices';
 import { Dialog } from '@/ui/dialog';
 import type { ConflictChoice } from '../drawing/settle-conflicts';
 import type { DrawingChange, DrawingConflict } from '../drawing-schema';
-import { KIND_WORDS } from '../words';
 import { CONFLICT_WORDS } from '../words/editing';
+import { KIND_WORDS } from '../words/things';
 
 interface ConflictDialogProps {
   conflicts: readonly DrawingConflict[];

@@ -1,11 +1,11 @@
 'use client';
 
-import { FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words';
+import { FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words/kinds';
 import { Button } from '@/ui/button';
 import type { NewKind } from '../drawing/kinds';
 import type { MapThing, MapView } from '../thing';
-import { KIND_WORDS, LAYER_WORDS, nameOf } from '../words';
 import { MAP_DOING_WORDS } from '../words/screen';
+import { KIND_WORDS, LAYER_WORDS, nameOf } from '../words/things';
 import { DrawBar, DrawingBar } from './draw-bar';
 import { HerePanel } from './here-panel';
 import { MeasurePanel } from './measure-panel';

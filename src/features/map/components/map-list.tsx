@@ -6,8 +6,8 @@ import { joinClasses } from '@/ui/join-classes';
 import { TextInput } from '@/ui/text-inputs';
 import { briefOf } from '../facts';
 import type { MapClub, MapThing, ThingKind } from '../thing';
-import { nameOf } from '../words';
 import { MAP_LIST_WORDS } from '../words/screen';
+import { nameOf } from '../words/things';
 
 const GROUPS: readonly { kind: ThingKind; label: string }[] = [
   { kind: 'stand', label: MAP_LIST_WORDS.stands },

@@ -8,9 +8,9 @@ import { useRead } from '@/ui/query';
 import { factsOf } from '../facts';
 import { mapQuery } from '../queries';
 import type { MapThing } from '../thing';
-import { nameOf } from '../words';
 import { FACT_WORDS } from '../words/facts';
 import { SMALL_MAP_WORDS } from '../words/screen';
+import { nameOf } from '../words/things';
 
 const MapCanvas = dynamic(() => import('./map-canvas').then((part) => part.MapCanvas), {
   ssr: false,

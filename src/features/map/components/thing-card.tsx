@@ -6,8 +6,8 @@ import { DefinitionList } from '@/ui/page-parts';
 import { isDrawn } from '../drawing/list-changes';
 import { factsOf } from '../facts';
 import type { MapThing, MapView } from '../thing';
-import { KIND_WORDS, nameOf } from '../words';
 import { THING_WORDS } from '../words/editing';
+import { KIND_WORDS, nameOf } from '../words/things';
 import { PlacesField } from './places-field';
 import { ThingFields } from './thing-fields';
 

@@ -4,11 +4,11 @@ import type { ReactNode } from 'react';
 import { FEATURE_KINDS, STAND_KINDS } from '@/core/ground-types';
 import { LAYER_SHAPES, MAP_LAYERS } from '@/core/map-layers';
 import { mToYd, ydToM } from '@/core/units';
-import { DIRECTION_WORDS, FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words';
+import { DIRECTION_WORDS, FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words/kinds';
 import { NumberInput, Select, TextInput } from '@/ui/text-inputs';
 import type { ApproachThing, ItemThing, MapClub, MapThing } from '../thing';
-import { LAYER_WORDS } from '../words';
 import { THING_FIELD_WORDS } from '../words/editing';
+import { LAYER_WORDS } from '../words/things';
 import { ArcFields } from './arc-fields';
 
 export interface FieldsProps {

@@ -2,10 +2,10 @@ import type { Position } from 'geojson';
 import { FEATURE_KINDS, type FeatureKind, STAND_KINDS, type StandKind } from '@/core/ground-types';
 import { type DrawnShape, LAYER_SHAPES, MAP_LAYERS, type MapLayer } from '@/core/map-layers';
 import type { DrawnGeometry } from '@/features/ground/geometry-text';
-import { FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words';
+import { FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words/kinds';
 import type { MapClub, MapThing } from '../thing';
-import { LAYER_WORDS } from '../words';
 import { NEW_THING_WORDS } from '../words/drawing';
+import { LAYER_WORDS } from '../words/things';
 import { tieDrawn } from './follow';
 
 /** What may be drawn: 'stand:ladder', 'parking', 'approach', 'feature:bedding', 'item:wood'. */

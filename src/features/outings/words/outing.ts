@@ -1,6 +1,6 @@
 import { dayOf, formatDay } from '@/core/day-time';
 import type { BoardState } from '@/core/outing/board-state';
-import { clockText } from '@/features/bookings/sit-words';
+import { clockText } from '@/features/bookings/words/sits';
 
 export const STATE_WORDS: Record<BoardState, string> = {
   due: 'Due',

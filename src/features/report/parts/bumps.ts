@@ -1,6 +1,6 @@
 import { anyArcContains, arcsFor } from '@/core/arcs';
 import { type BumpCount, bumpsByWind, countBumps, type Wind, type WindedSit } from '@/core/report/bumps';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import type { ReportRows } from '../load-rows';
 
 export interface BumpRow {

@@ -1,7 +1,7 @@
 import { type ByLot, giniByLot, sharedAs } from '@/core/report/by-lot';
 import { type GoodSits, goodSits } from '@/core/report/good-sits';
 import { type MemberShare, shareOut } from '@/core/report/sharing';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import type { ClubScope } from '@/server/scope';
 import type { ReportRows } from '../load-rows';
 

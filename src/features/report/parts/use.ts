@@ -6,7 +6,7 @@ import { useOfStand } from '@/core/report/stand-use';
 import { type Week, weeksBetween } from '@/core/report/weeks';
 import { DEFAULT_SETTINGS } from '@/core/settings';
 import { sitWindow } from '@/core/windows';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import { listSitEvents, listVisitEvents } from '@/features/sits/data';
 import type { ClubScope } from '@/server/scope';
 import type { ReportRows, ReportSit } from '../load-rows';

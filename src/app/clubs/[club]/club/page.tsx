@@ -1,11 +1,11 @@
 import type { Metadata } from 'next';
 import { LeaveClub } from '@/features/clubs/components/remove-member';
 import { WhatGoes } from '@/features/clubs/components/what-goes';
-import { placeLines } from '@/features/clubs/place-words';
 import { readMember } from '@/features/clubs/read-members';
 import { planRemoval } from '@/features/clubs/removal';
-import { ROLE_NOTES } from '@/features/clubs/role-words';
 import { CLUB_PAGE_WORDS } from '@/features/clubs/words/pages';
+import { placeLines } from '@/features/clubs/words/place';
+import { ROLE_NOTES } from '@/features/clubs/words/roles';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { notFound } from '@/server/errors';

@@ -1,6 +1,6 @@
 import type { Metadata } from 'next';
-import { momentText } from '@/features/clubs/audit-words';
 import { DeadMailList } from '@/features/clubs/components/dead-mail-list';
+import { momentText } from '@/features/clubs/words/audit-text';
 import { CLUB_MAIL_PAGE_WORDS } from '@/features/clubs/words/pages';
 import { listDeadMail } from '@/features/mail/reads';
 import { clubPage } from '@/server/doors';

@@ -1,6 +1,6 @@
 import type { Metadata } from 'next';
-import { describeRules } from '@/features/clubs/rules-words';
 import { CLUB_RULES_PAGE_WORDS } from '@/features/clubs/words/pages';
+import { describeRules } from '@/features/clubs/words/rules';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { Notice } from '@/ui/notices';

@@ -1,4 +1,4 @@
-import { momentText } from '@/features/clubs/audit-words';
+import { momentText } from '@/features/clubs/words/audit-text';
 import { ImportList } from '@/features/exchange/components/import-list';
 import { UploadForm } from '@/features/exchange/components/upload-form';
 import { listImports } from '@/features/exchange/imports-data';

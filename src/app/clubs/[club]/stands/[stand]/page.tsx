@@ -4,7 +4,7 @@ import { GoodWinds, StandFacts } from '@/features/ground/components/stand-facts'
 import { formClubOf } from '@/features/ground/form-club';
 import { readStand } from '@/features/ground/reads';
 import { namedSits } from '@/features/ground/refuse';
-import { STAND_KIND_WORDS } from '@/features/ground/words';
+import { STAND_KIND_WORDS } from '@/features/ground/words/kinds';
 import { STAND_PAGE_WORDS } from '@/features/ground/words/pages';
 import { SmallMap } from '@/features/map/components/small-map';
 import { PhotoSection } from '@/features/photos/components/photo-section';

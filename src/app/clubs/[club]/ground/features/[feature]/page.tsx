@@ -7,7 +7,7 @@ import { getFeature } from '@/features/ground/features-data';
 import { formClubOf } from '@/features/ground/form-club';
 import { geometryText } from '@/features/ground/geometry-text';
 import { formatSize } from '@/features/ground/view';
-import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS } from '@/features/ground/words';
+import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS } from '@/features/ground/words/kinds';
 import { FEATURE_PAGE_WORDS } from '@/features/ground/words/pages';
 import { PhotoSection } from '@/features/photos/components/photo-section';
 import { readPhotos } from '@/features/photos/read-photos';

@@ -1,6 +1,6 @@
 import type { MapLayer } from '@/core/map-layers';
-import { FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words';
-import type { MapThing, ThingKind } from './thing';
+import { FEATURE_KIND_WORDS, STAND_KIND_WORDS } from '@/features/ground/words/kinds';
+import type { MapThing, ThingKind } from '../thing';
 
 export const LAYER_WORDS: Record<MapLayer, string> = {
   boundary: 'Boundary',

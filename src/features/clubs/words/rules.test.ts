@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { type ClubRules, DEFAULT_CLUB_RULES } from '@/core/booking/rules';
-import { placeText } from './place-words';
-import { changedLines, describeRules, fromSun } from './rules-words';
+import { placeText } from './place';
+import { changedLines, describeRules, fromSun } from './rules';
 
 const linesOf = (rules: Partial<ClubRules>, units: 'us' | 'metric' = 'us') =>
   describeRules({ ...DEFAULT_CLUB_RULES, ...rules }, units).flatMap((group) => group.lines);

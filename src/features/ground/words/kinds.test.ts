@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { formatMonths } from './words';
+import { formatMonths } from './kinds';
 
 it('writes months as runs, across the new year too', () => {
   expect(formatMonths([9, 10, 11, 12, 1])).toBe('Sep–Jan');

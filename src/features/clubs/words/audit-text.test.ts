@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { auditFilterSchema, auditSearch } from './audit-schema';
-import { actionWords, detailLines, momentText } from './audit-words';
+import { auditFilterSchema, auditSearch } from '../audit-schema';
+import { actionWords, detailLines, momentText } from './audit-text';
 
 describe('audit words', () => {
   it('reads actions and moments as people do', () => {

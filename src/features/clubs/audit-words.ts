@@ -1,1 +1,0 @@
-export * from './words/audit-text';
