@@ -56,9 +56,14 @@ function mostUse(feature: ScoredFeature, time: TimeOfDay, { days, scoring }: Set
   );
 }
 
-function passesOf(approach: ScoredApproach, stand: ScoredStand, feature: ScoredFeature, input: SetupInput): Pass[] {
-  const { besideM, seatMarginM, leastUse } = input.settings;
-  const path = footPath(approach, seatMarginM);
+interface Walk {
+  approach: ScoredApproach;
+  stand: ScoredStand;
+  path: Point[];
+}
+
+function passesOf({ approach, stand, path }: Walk, feature: ScoredFeature, input: SetupInput): Pass[] {
+  const { besideM, leastUse } = input.settings;
   const gaps = path.map((p) => distanceToShapeM(p, feature.shape));
   const gapM = Math.min(Number.POSITIVE_INFINITY, ...gaps);
   if (gapM > besideM) return [];
@@ -160,7 +165,9 @@ export function findBesideApproach(input: SetupInput, toldWays: ReadonlySet<stri
   const attractions = input.features.filter(isAttraction);
   const passes = input.approaches.flatMap((approach) => {
     const stand = standOf(input, approach.standId);
-    return stand ? attractions.flatMap((feature) => passesOf(approach, stand, feature, input)) : [];
+    if (!stand) return [];
+    const walk = { approach, stand, path: footPath(approach, input.settings.seatMarginM) };
+    return attractions.flatMap((feature) => passesOf(walk, feature, input));
   });
   return attractions.flatMap((feature) => {
     const counted = passes.filter(
