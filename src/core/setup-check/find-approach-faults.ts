@@ -4,7 +4,7 @@ import { type Point, type ScoredApproach, type ScoredFeature, type ScoredStand, 
 import { usesOf } from '../whereabouts';
 import { approachFacts, away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
-import { carries, footPath, isBed, isLine, standOf, windowsHunted, windsHunted } from './shot-of';
+import { carries, footPath, isBed, isLine, nearness, standOf, windowsHunted, windsHunted } from './shot-of';
 
 /** Where two segments meet; null when they do not. */
 function meet(a: Point, b: Point, c: Point, d: Point): Point | null {
@@ -58,10 +58,11 @@ function isTravelled(line: ScoredFeature, stand: ScoredStand, { days, scoring, s
 /** The first dry place at which a way on foot crosses each line deer travel. */
 function crossingsOf(approach: ScoredApproach, stand: ScoredStand, input: SetupInput): Crossing[] {
   const path = approach.points.slice(approach.vehicleToIndex);
+  const mayMeet = nearness(path);
   const waters = input.features.filter(({ kind }) => kind === 'water');
   const isWet = (p: Point) => waters.some((water) => distanceToShapeM(p, water.shape) <= input.settings.wadeM);
   return input.features.filter(isLine).flatMap((line) => {
-    if (line.shape.type !== 'line' || !isTravelled(line, stand, input)) return [];
+    if (line.shape.type !== 'line' || !mayMeet(line.shape, 0) || !isTravelled(line, stand, input)) return [];
     const at = meetings(path, line.shape.points).find((p) => !isWet(p));
     return at ? [{ line, at }] : [];
   });
@@ -172,11 +173,14 @@ export function findApproachFaults(input: SetupInput): Finding[] {
     const stand = standOf(input, approach.standId);
     if (!stand || windowsHunted(stand).length === 0) return [];
     const path = footPath(approach, 0);
-    const beds = input.features.filter(isBed).flatMap((bed) => windward(stand, path, bed, input));
-    const crossings = crossingsOf(approach, stand, input);
+    const mayReach = nearness(path);
+    const { bedsWithinM } = input.settings;
     const near = input.features.filter(
-      (f) => isBed(f) && path.some((p) => distanceToShapeM(p, f.shape) <= input.settings.bedsWithinM),
+      (f) =>
+        isBed(f) && mayReach(f.shape, bedsWithinM) && path.some((p) => distanceToShapeM(p, f.shape) <= bedsWithinM),
     );
+    const beds = near.flatMap((bed) => windward(stand, path, bed, input));
+    const crossings = crossingsOf(approach, stand, input);
     return beds.length + crossings.length > 0 ? [{ approach, stand, crossings, beds, near }] : [];
   });
   const far = ({ stand, crossings }: WayFaults) => distanceM(stand.at, crossings[0]?.at ?? stand.at);

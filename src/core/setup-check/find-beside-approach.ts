@@ -13,7 +13,7 @@ import { formatDistance } from '../units';
 import { usesOf } from '../whereabouts';
 import { approachFacts, away, featureFacts, listText, makeFinding } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
-import { footPath, isAttraction, isMovable, standOf, windowsHunted, workOn } from './shot-of';
+import { footPath, isAttraction, isMovable, nearness, standOf, windowsHunted, workOn } from './shot-of';
 
 type Leg = 'in' | 'out';
 
@@ -60,10 +60,12 @@ interface Walk {
   approach: ScoredApproach;
   stand: ScoredStand;
   path: Point[];
+  mayPass: ReturnType<typeof nearness>;
 }
 
-function passesOf({ approach, stand, path }: Walk, feature: ScoredFeature, input: SetupInput): Pass[] {
+function passesOf({ approach, stand, path, mayPass }: Walk, feature: ScoredFeature, input: SetupInput): Pass[] {
   const { besideM, leastUse } = input.settings;
+  if (!mayPass(feature.shape, besideM)) return [];
   const gaps = path.map((p) => distanceToShapeM(p, feature.shape));
   const gapM = Math.min(Number.POSITIVE_INFINITY, ...gaps);
   if (gapM > besideM) return [];
@@ -166,7 +168,8 @@ export function findBesideApproach(input: SetupInput, toldWays: ReadonlySet<stri
   const passes = input.approaches.flatMap((approach) => {
     const stand = standOf(input, approach.standId);
     if (!stand) return [];
-    const walk = { approach, stand, path: footPath(approach, input.settings.seatMarginM) };
+    const path = footPath(approach, input.settings.seatMarginM);
+    const walk = { approach, stand, path, mayPass: nearness(path) };
     return attractions.flatMap((feature) => passesOf(walk, feature, input));
   });
   return attractions.flatMap((feature) => {

@@ -95,6 +95,27 @@ export function footPath(approach: ScoredApproach, seatMarginM: number): Point[]
   });
 }
 
+function boxOf(points: Point[]) {
+  const [east, north] = [points.map((p) => p.eastM), points.map((p) => p.northM)];
+  return {
+    west: Math.min(...east),
+    east: Math.max(...east),
+    south: Math.min(...north),
+    north: Math.max(...north),
+  };
+}
+
+/** Asks whether a shape may come within so many metres of a path: false is sure, true is worth measuring. */
+export function nearness(path: Point[]): (shape: LocalShape, withinM: number) => boolean {
+  const a = boxOf(path);
+  return (shape, withinM) => {
+    const points = shape.type === 'point' ? [shape.at] : shape.type === 'line' ? shape.points : (shape.rings[0] ?? []);
+    const b = boxOf(points);
+    const [across, up] = [Math.max(a.west - b.east, b.west - a.east), Math.max(a.south - b.north, b.south - a.north)];
+    return across <= withinM && up <= withinM;
+  };
+}
+
 /** Least distance between a shape and a line of movement, to about 5 m. */
 export function gapM(shape: LocalShape, line: LocalShape): number {
   const points =
