@@ -120,3 +120,29 @@ describe.skipIf(!HAS_GDAL)(
     });
   },
 );
+
+/** A receiver left on for a day: larger than what is read beside other requests. */
+function longTrack(): string {
+  const points = Array.from({ length: 40_000 }, (_, i) => {
+    const [lon, lat] = positionOf([i / 40, 400 + 200 * Math.sin(i / 4000)]);
+    return `<trkpt lat="${lat}" lon="${lon}"/>`;
+  });
+  return `<?xml version="1.0"?>\n<gpx xmlns="http://www.topografix.com/GPX/1/1" version="1.1" creator="test"><trk><name>Long walk</name><trkseg>\n${points.join('\n')}\n</trkseg></trk></gpx>`;
+}
+
+describe('a steward brings in a large file', () => {
+  it('which is read in a thread of its own', async () => {
+    const body = longTrack();
+    expect(body.length).toBeGreaterThan(1024 * 1024);
+    const { page, troubles, context } = await newVisitor(browser, app.url, DESKTOP);
+    await signIn(page);
+    await page.goto('/clubs/tansy-fork/ground/import');
+    await page.getByLabel('File', { exact: true }).setInputFiles(file('day.gpx', body));
+    await page.getByRole('button', { name: 'Read the file' }).click();
+    await page.getByRole('heading', { name: 'day.gpx' }).waitFor({ timeout: 120_000 });
+    await page.getByText('Long walk').waitFor();
+    await page.getByText(/Thinned from 40000 points/).waitFor();
+    expect(troubles).toEqual([]);
+    await context.close();
+  });
+});

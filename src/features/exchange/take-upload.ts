@@ -5,7 +5,7 @@ import { readBody } from '@/server/read-body';
 import type { ClubScope } from '@/server/scope';
 import { insertImport } from './imports-data';
 import { MOST_BYTES } from './read/limits';
-import { readMapFile } from './read/read-file';
+import { readApart } from './read/read-apart';
 import { FILE_PROBLEMS } from './words/files';
 
 /** Reads a file and keeps what it holds for looking over. Nothing of the ground changes yet. */
@@ -16,7 +16,7 @@ export async function takeUpload(
 ): Promise<{ id: string }> {
   const tooMuch = FILE_PROBLEMS.bytes(MOST_BYTES / 1024 / 1024);
   const bytes = await readBody(upload.request, MOST_BYTES, tooMuch);
-  const read = readMapFile(bytes);
+  const read = await readApart(bytes);
   if (!read.ok) throw new AppError('invalid', read.message);
   const { format, things, remarks } = read;
   const id = newId('import');

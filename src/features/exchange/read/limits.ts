@@ -3,6 +3,7 @@ export const MOST_BYTES = 50 * 1024 * 1024;
 /** Of an archive once it is open, and how many times its own size that may be once past the first megabyte. */
 export const MOST_UNPACKED_BYTES = 100 * 1024 * 1024;
 export const MOST_UNPACK_RATIO = 200;
+export const FREE_BYTES = 1024 * 1024;
 export const MOST_ENTRIES = 1000;
 /** Elements of GPX or KML; heights and times of track points are not counted. */
 export const MOST_ELEMENTS = 250_000;

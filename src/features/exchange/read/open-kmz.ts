@@ -1,10 +1,9 @@
 import { Unzip, UnzipInflate } from 'fflate';
 import { FILE_PROBLEMS } from '../words/files';
 import { FileProblem } from './file-problem';
-import { MOST_ENTRIES, MOST_UNPACK_RATIO, MOST_UNPACKED_BYTES } from './limits';
+import { FREE_BYTES, MOST_ENTRIES, MOST_UNPACK_RATIO, MOST_UNPACKED_BYTES } from './limits';
 
 const STEP = 64 * 1024;
-const FREE_BYTES = 1024 * 1024;
 
 interface Unpacked {
   chunks: Uint8Array[];

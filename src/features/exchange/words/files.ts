@@ -37,6 +37,7 @@ export const FILE_PROBLEMS = {
   blank: 'The file holds nothing but blanks: choose another.',
   noMap: 'This is no file of a map that can be read here: choose GPX, KML, KMZ, GeoJSON or CSV.',
   otherXml: 'This is XML, but neither GPX nor KML: export it again in one of those.',
+  tooMuch: 'The file is more than can be read at once: split it, or thin its tracks, and try again.',
   nothing: 'There is nothing in the file that could be put on a map.',
   bytes: (megabytes: number) => `The file is over ${megabytes} MB: split it, or leave out what is not needed.`,
   points: (most: number) => `The file holds more than ${most} points: split it.`,
