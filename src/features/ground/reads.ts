@@ -14,7 +14,7 @@ import { degreesText } from './place-text';
 import { namedSits } from './refuse';
 import { getStand, listStands } from './stands-data';
 import type { ClosureLine, FeatureLine, ParkingLine, StandLine } from './view';
-import { formatClosed, formatDays, formatSize, formatWinds } from './view';
+import { formatClosed, formatDays, formatSize, formatWinds, holdsOn } from './view';
 import { FEATURE_KIND_WORDS, formatMonths, SHAPE_WORDS, STAND_KIND_WORDS, WEAPON_WORDS } from './words/kinds';
 
 export async function readStandList(scope: ClubScope, now: number): Promise<StandLine[]> {
@@ -43,6 +43,7 @@ export async function readStandList(scope: ClubScope, now: number): Promise<Stan
       closures.filter((c) => c.standId === stand.id),
       today,
     ),
+    closedNow: closures.some((c) => c.standId === stand.id && holdsOn(c, today)),
   }));
 }
 

@@ -24,6 +24,7 @@ export interface StandLine {
   approaches: number;
   /** Empty when it is open and no closure is to come. */
   closed: string;
+  closedNow: boolean;
 }
 
 export interface FeatureLine {
@@ -72,6 +73,10 @@ export function formatDays(closure: Pick<ClosureRow, 'fromDay' | 'toDay'>): stri
   if (closure.toDay === null) return CLOSED_DAYS_WORDS.untilOpened(from);
   return closure.toDay === closure.fromDay ? from : CLOSED_DAYS_WORDS.days(from, formatDay(closure.toDay, true));
 }
+
+/** Whether a closure covers a day. */
+export const holdsOn = ({ fromDay, toDay }: Pick<ClosureRow, 'fromDay' | 'toDay'>, day: string): boolean =>
+  fromDay <= day && (toDay === null || toDay >= day);
 
 /** What a list says of a stand's closures on a day, the first that holds or is to come. */
 export function formatClosed(closures: Pick<ClosureRow, 'fromDay' | 'toDay' | 'reason'>[], today: string): string {

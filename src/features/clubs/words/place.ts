@@ -26,10 +26,11 @@ export function placeText({ lat, lon }: Pick<Place, 'lat' | 'lon'>): string {
   return `${half(lat, 'N', 'S')}, ${half(lon, 'E', 'W')}`;
 }
 
-export function placeLines(club: Place): RuleLine[] {
+/** `where` false leaves out where the ground lies. */
+export function placeLines(club: Place, where = true): RuleLine[] {
   return [
     { label: 'Name', text: club.name },
-    { label: 'Place', text: placeText(club) },
+    ...(where ? [{ label: 'Place', text: placeText(club) }] : []),
     { label: 'Time zone', text: club.zone.replaceAll('_', ' ') },
     { label: 'Units', text: UNIT_WORDS[club.units] },
   ];

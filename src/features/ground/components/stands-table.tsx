@@ -60,15 +60,16 @@ const COLUMNS: readonly DataColumn<Row>[] = [
     id: 'closed',
     header: STANDS_WORDS.open,
     value: (row) => row.closed,
-    cell: (row) => (row.closed === '' ? STANDS_WORDS.open : <ClosedText text={row.closed} />),
+    cell: (row) => (row.closed === '' ? STANDS_WORDS.open : <ClosedText text={row.closed} now={row.closedNow} />),
   },
 ];
 
-function ClosedText({ text }: { text: string }) {
+/** Its first word stands out. */
+function ClosedText({ text, now }: { text: string; now: boolean }) {
   const [word = '', ...rest] = text.split(' ');
   return (
     <span>
-      <Badge look={word === 'Closed' ? 'clay' : 'plain'}>{word}</Badge> {rest.join(' ')}
+      <Badge look={now ? 'clay' : 'plain'}>{word}</Badge> {rest.join(' ')}
     </span>
   );
 }

@@ -30,8 +30,7 @@ export default clubPage('club.read', async ({ scope }) => {
     ...(you.sponsorName ? [{ term: CLUB_PAGE_WORDS.sponsor, detail: you.sponsorName }] : []),
   ];
   // Whoever may not see the stands is not told where the ground lies.
-  const lines = placeLines({ ...club, units: club.clubUnits });
-  const place = scope.can('stands.read') ? lines : lines.filter((line) => line.label !== 'Place');
+  const place = placeLines({ ...club, units: club.clubUnits }, scope.can('stands.read'));
   return (
     <>
       <PageTitle
