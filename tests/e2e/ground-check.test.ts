@@ -87,6 +87,8 @@ describe.each([
     await page.getByRole('button', { name: 'Save' }).click();
     await page.getByText('type a number from 5 to 240 minutes').first().waitFor();
     await field.fill('240');
+    // Leaving the field takes its error away, and with it the button's place.
+    await field.press('Tab');
     await page.getByRole('button', { name: 'Save' }).click();
     await page.waitForURL(/season\/setup$/);
     await page.getByText('one distance or share is the club’s own').waitFor();
@@ -109,6 +111,7 @@ describe.each([
     const water = page.getByRole('group', { name: 'Water holes' });
     await water.getByLabel(/The rule/).fill(`No new holes on a ${size}.`);
     await water.getByLabel(/Source/).fill('Lease, paragraph 9');
+    await water.getByLabel(/Stated on/).fill('');
     await page.getByRole('button', { name: 'Save the rules' }).click();
     await page.getByText('Choose the day on which it was stated.').first().waitFor();
     await water.getByLabel(/Stated on/).fill('2026-08-01');

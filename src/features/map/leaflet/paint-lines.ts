@@ -34,7 +34,8 @@ function legMark({ name, path, way }: NonNullable<MapOverlay['legs']>[number]): 
   text.textContent = name;
   body.append(text);
   const icon = L.divIcon({ className: '', html: body, iconSize: [0, 0] });
-  return L.marker(middle.at, { icon, interactive: false, keyboard: false });
+  // A number under a stand's mark would be lost: the list goes by it.
+  return L.marker(middle.at, { icon, interactive: false, keyboard: false, zIndexOffset: 800 });
 }
 
 /** Lines of movement: legs, the gaps in them, and the stands that reach them. */
