@@ -23,11 +23,15 @@ const answerSchema = z.object({
   bound: number,
 });
 const messageSchema = z.union([
+  z.object({ wasmModule: z.instanceof(WebAssembly.Module) }),
   z.object({ answer: answerSchema }),
   z.object({ progress: z.object({ seconds: z.number(), value: number, bound: number }) }),
 ]);
 type Answer = z.output<typeof answerSchema>;
 type Ended = { kind: 'answered'; answer: Answer } | { kind: 'no_answer_in_time' } | { kind: 'stopped' };
+
+/** The compiled solver, once a worker has made it. */
+let wasmModule: WebAssembly.Module | undefined;
 
 function modelOf({ gain, whole, rows }: Program) {
   const starts = [0];
@@ -69,7 +73,9 @@ function runWorker(program: Program, options: SolveOptions, hooks: SolveHooks): 
   };
   if (hooks.signal?.aborted) return Promise.resolve({ kind: 'stopped' });
   return new Promise((resolve, reject) => {
-    const worker = new Worker(WORKER_CODE, { eval: true, workerData: { model: modelOf(program), options: settings } });
+    const workerData = { model: modelOf(program), options: settings, wasmModule };
+    // Without the process's own flags: a loader of sources would be set up in every worker too.
+    const worker = new Worker(WORKER_CODE, { eval: true, execArgv: [], workerData });
     const timer = setTimeout(() => settle(() => resolve({ kind: 'no_answer_in_time' })), seconds * 1000 + GRACE_MS);
     const stop = () => settle(() => resolve({ kind: 'stopped' }));
     const settle = (done: () => void) => {
@@ -83,7 +89,8 @@ function runWorker(program: Program, options: SolveOptions, hooks: SolveHooks): 
       const read = messageSchema.safeParse(message);
       if (!read.success) return settle(() => reject(read.error));
       const { data } = read;
-      if ('progress' in data) hooks.onProgress?.(data.progress satisfies SolveProgress);
+      if ('wasmModule' in data) wasmModule = data.wasmModule;
+      else if ('progress' in data) hooks.onProgress?.(data.progress satisfies SolveProgress);
       else settle(() => resolve({ kind: 'answered', answer: data.answer }));
     });
     worker.once('error', (error) => settle(() => reject(error)));
