@@ -1,3 +1,4 @@
+import { addDays } from '@/core/day-time';
 import { DEFAULT_POINT_RULES } from '@/core/draw/points';
 import type { MadeClub } from './build-club';
 import type { MadeGround } from './build-ground';
@@ -9,15 +10,17 @@ export function buildDraws(day: DemoDay, club: MadeClub, ground: MadeGround): Pi
   const clubId = club.row.id;
   const standIds = ground.stands.slice(0, 8).map((stand) => stand.id);
   const members = club.members.filter(({ role }) => role === 'member' || role === 'steward');
+  const ahead = [11, 12, 13, 14, 15, 16, 17].map((n) => daysFrom(day, n));
+  const saturday = ahead.find((one) => new Date(`${one}T12:00Z`).getUTCDay() === 6) ?? daysFrom(day, 11);
   const opened = momentOf(day, -2, '20:15');
   const draw = {
     id: day.dice.id('draw'),
     clubId,
-    day: daysFrom(day, 12),
+    day: saturday,
     slots: [
-      { day: daysFrom(day, 12), windows: 'morning' as const },
-      { day: daysFrom(day, 12), windows: 'evening' as const },
-      { day: daysFrom(day, 13), windows: 'morning' as const },
+      { day: saturday, windows: 'morning' as const },
+      { day: saturday, windows: 'evening' as const },
+      { day: addDays(saturday, 1), windows: 'morning' as const },
     ],
     standIds,
     closesAt: momentOf(day, 10, '17:00'),
