@@ -22,7 +22,15 @@ function firstOfEach(...rules: Finding[][]): Finding[] {
  * give the sit away, and sun in eyes and cameras. Distances in metres, bearings in degrees true. Rules and distances are
  * practice (settings). In order of rule, then stand, then name; the same input gives the same findings. Never throws.
  */
-export function checkSetup(input: SetupInput): Finding[] {
+export function checkSetup(asked: SetupInput): Finding[] {
+  // The order in which things are listed is no part of the ground: prints may not hang on it.
+  const byId = <T extends { id: string }>(list: T[]) => [...list].sort((a, b) => a.id.localeCompare(b.id));
+  const input = {
+    ...asked,
+    stands: byId(asked.stands),
+    features: byId(asked.features),
+    approaches: byId(asked.approaches),
+  };
   const ways = findApproachFaults(input);
   const toldWays = new Set(ways.map((f) => f.subject.id));
   const found = [

@@ -143,6 +143,26 @@ describe('ways and lines', () => {
   });
 });
 
+describe('the order of things', () => {
+  it('changes neither what is found nor its prints', () => {
+    const lines = [-150, -250, -300].map((north, i) =>
+      makeFeature(`Path ${i}`, 'travel_line', line([-300, north], [300, north])),
+    );
+    const more = [
+      makeFeature('Beds', 'bedding', point(0, -420)),
+      makeFeature('Other beds', 'bedding', point(30, -430)),
+      makeFeature('Scrape', 'scrape', point(20, -60)),
+      makeFeature('Scrape 2', 'scrape', point(35, -60)),
+    ];
+    const features = [...lines, ...more];
+    const approaches = [fromSouth, fromEast];
+    const marks = (over: Partial<SetupInput>) => check(over).map(({ key, print, text }) => [key, print, text]);
+    const found = marks({ features, approaches });
+    expect(found.length).toBeGreaterThan(2);
+    expect(marks({ features: features.toReversed(), approaches: approaches.toReversed() })).toEqual(found);
+  });
+});
+
 describe('a scrape in the opening of a plot on a line', () => {
   it('is on the line with it', () => {
     const path = makeFeature('Path', 'travel_line', line([-300, 200], [300, 200]));
