@@ -143,7 +143,7 @@ describe('inspections', () => {
     await inspect(unsafe);
     expect((await readStandUpkeep(steward.scope, stand, TEST_NOW)).closedBy).toMatchObject({
       dayText: 'Wed 4 Nov 2026',
-      reason: 'Inspection: Tree dead at the top',
+      reason: 'Tree dead at the top',
     });
     expect(await inspect()).toMatchObject({ ok: true, data: { opened: false } });
     expect(await openClosures()).toHaveLength(1);

@@ -9,7 +9,6 @@ export type InspectionDetail = InspectionRow & {
   closureOpen: boolean;
   /** The closure was made by this inspection and still holds; one that stood before is not its own. */
   closedByIt: boolean;
-  closureReason: string | null;
 };
 
 const select = (from: ReadFrom) =>
@@ -21,7 +20,6 @@ const select = (from: ReadFrom) =>
       removedAt: closures.removedAt,
       toDay: closures.toDay,
       closedAt: closures.createdAt,
-      closureReason: closures.reason,
     })
     .from(inspections)
     .innerJoin(memberships, eq(memberships.id, inspections.byMemberId))
@@ -29,10 +27,10 @@ const select = (from: ReadFrom) =>
     .leftJoin(closures, eq(closures.id, inspections.closureId));
 
 function flat(row: Awaited<ReturnType<typeof select>>[number]): InspectionDetail {
-  const { inspection, byName, closureReason } = row;
+  const { inspection, byName } = row;
   const closureOpen = row.closureId !== null && row.removedAt === null && row.toDay === null;
   const closedByIt = closureOpen && row.closedAt === inspection.createdAt;
-  return { ...inspection, byName, closureOpen, closedByIt, closureReason };
+  return { ...inspection, byName, closureOpen, closedByIt };
 }
 
 const latestFirst = [desc(inspections.day), desc(inspections.createdAt), sql`${inspections}.rowid desc`];

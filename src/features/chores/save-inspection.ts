@@ -9,6 +9,7 @@ import { newId } from '@/lib/ids';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { mailClosed } from './closed-mails';
+import { firstLine } from './first-line';
 import type { InspectionInput } from './inspection-schema';
 import { insertInspection, listInspectionsOf } from './inspections-data';
 import { noteUpkeep } from './note-upkeep';
@@ -17,7 +18,6 @@ import { INSPECTION_ERRORS, INSPECTION_LEAVES } from './words/inspections';
 
 /** A chore to mend a stand is due in so many days. Our choice. */
 const MEND_DAYS = 14;
-const REASON_MAX = 160;
 
 export interface SavedInspection {
   standName: string;
@@ -28,8 +28,6 @@ export interface SavedInspection {
   /** What an inspection had closed was opened again. */
   opened: boolean;
 }
-
-const firstLine = (text: string) => text.split('\n')[0]?.replace(/\.+$/, '').slice(0, REASON_MAX) ?? '';
 
 /**
  * Keeps an inspection. Closed shuts the stand at once and tells those booked there; fix first and closed make a chore; a

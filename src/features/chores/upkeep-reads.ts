@@ -12,6 +12,7 @@ import { numberText } from '@/features/clubs/read-number';
 import { getStand, type StandRow } from '@/features/ground/stands-data';
 import { notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
+import { firstLine } from './first-line';
 import type { InspectionForm } from './inspection-schema';
 import { type InspectionDetail, listInspectionsOf } from './inspections-data';
 import { ANSWER_WORDS, ITEM_WORDS, RESULT_WORDS, STRAP_WORDS, UPKEEP_TABLE_WORDS as TABLE } from './words/inspections';
@@ -69,7 +70,7 @@ export interface InspectionView {
 /** What an inspection has closed and nobody has opened again. */
 export interface ClosedBy {
   closureId: string;
-  /** Of the inspection. */
+  /** Of the inspection, and the first line of its notes. */
   dayText: string;
   reason: string;
 }
@@ -120,7 +121,7 @@ export async function readStandUpkeep(scope: ClubScope, standId: string, now: nu
     },
     closed: rows.some((row) => row.closureOpen),
     closedBy: closing?.closureId
-      ? { closureId: closing.closureId, dayText: formatDay(closing.day, true), reason: closing.closureReason ?? '' }
+      ? { closureId: closing.closureId, dayText: formatDay(closing.day, true), reason: firstLine(closing.notes) }
       : null,
   };
 }
