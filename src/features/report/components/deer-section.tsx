@@ -1,12 +1,13 @@
-import { figureText } from '@/core/indices';
-import { IndexTable } from '@/features/logs/components/index-table';
+import { figureText, intervalText } from '@/core/indices';
 import type { IndexGroup } from '@/features/logs/sightings-reads';
-import { ButtonLink } from '@/ui/button';
+import { ButtonLink, TextLink } from '@/ui/button';
 import { RangeChart } from '@/ui/charts/range-chart';
 import { Section } from '@/ui/page-parts';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import { DEER_WORDS as words } from '../words/deer';
 import { PART_TITLES } from '../words/page';
 import { CsvLink } from './csv-link';
+import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 const rowsOf = (groups: IndexGroup[]) =>
@@ -35,10 +36,41 @@ export function DeerSection({ club, report }: PartProps) {
       {unlogged > 0 && <p className="mb-4">{words.unlogged(unlogged)}</p>}
       <h3 className="mb-2 font-serif text-lg">{words.byStand}</h3>
       <RangeChart title={words.byStandChart} unit={words.unit} rows={rowsOf(byStand)} className="mb-4" />
-      <IndexTable caption={words.byStandCaption} head={words.stand} groups={byStand} />
+      <DeerTable caption={words.byStandCaption} head={words.stand} groups={byStand} />
       <h3 className="mt-6 mb-2 font-serif text-lg">{words.byMonth}</h3>
       <RangeChart title={words.byMonthChart} unit={words.unit} rows={rowsOf(byMonth)} className="mb-4" />
-      <IndexTable caption={words.byMonthCaption} head={words.month} groups={byMonth} />
+      <DeerTable caption={words.byMonthCaption} head={words.month} groups={byMonth} />
+      <p className="mt-4 print:hidden">
+        <TextLink href={`/clubs/${club}/season/sightings`}>{words.more}</TextLink>
+      </p>
     </Section>
+  );
+}
+
+/** Bucks, does and fawns each stand on the Sightings page and in the file. */
+function DeerTable({ caption, head, groups }: { caption: string; head: string; groups: IndexGroup[] }) {
+  return (
+    <FigureTable caption={caption}>
+      <THead>
+        <Th>{head}</Th>
+        <Th align="right">{words.sits}</Th>
+        <Th align="right">{words.hoursSat}</Th>
+        <Th align="right">{words.deer}</Th>
+        <Th align="right">{words.rate}</Th>
+        <Th align="right">{words.interval}</Th>
+      </THead>
+      <TBody>
+        {groups.map(({ key, label, indices: { sits, hours, seen, perHour } }) => (
+          <Tr key={key}>
+            <FigureHead>{label}</FigureHead>
+            <Td align="right">{sits}</Td>
+            <Td align="right">{hours.toFixed(1)}</Td>
+            <Td align="right">{seen.all}</Td>
+            <Td align="right">{figureText(perHour.all)}</Td>
+            <Td align="right">{intervalText(perHour.all)}</Td>
+          </Tr>
+        ))}
+      </TBody>
+    </FigureTable>
   );
 }

@@ -84,13 +84,13 @@ function WeeksTable({ use }: { use: UsePart }) {
           <Tr key={row.standId}>
             <FigureHead>{row.gone ? USE_WORDS.gone(row.name) : row.name}</FigureHead>
             {row.byWeek.map((sits, week) => (
-              <Td key={use.weeks[week]?.fromDay} align="right">
-                <span
-                  className={sits === 0 ? 'text-ink-soft' : 'inline-block min-w-5 border-moss border-b font-semibold'}
-                  style={sits === 0 ? undefined : { borderBottomWidth: (THICKEST * sits) / most }}
-                >
-                  {sits}
-                </span>
+              <Td
+                key={use.weeks[week]?.fromDay}
+                align="right"
+                className={sits === 0 ? 'text-ink-soft' : 'border-moss font-semibold'}
+                style={sits === 0 ? undefined : { borderBottomWidth: (THICKEST * sits) / most }}
+              >
+                {sits}
               </Td>
             ))}
           </Tr>

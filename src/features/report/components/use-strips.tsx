@@ -70,26 +70,16 @@ interface StripProps {
 }
 
 function Strip({ row, wide, months, bar, line, className }: StripProps) {
+  const bars = row.byWeek
+    .map((sits, week) => (sits === 0 ? '' : `M${week * 7 + GAP / 2},${TALL}V${bar(sits)}h${7 - GAP}V${TALL}z`))
+    .join('');
   const points = row.pressure.map((pressure, day) => `${day},${line(pressure).toFixed(1)}`).join(' ');
   return (
     <svg viewBox={`0 0 ${wide} ${TALL}`} preserveAspectRatio="none" className={className} aria-hidden="true">
       {months.map((at) => (
         <line key={at} x1={at} x2={at} y1={0} y2={TALL} className="stroke-rule" vectorEffect="non-scaling-stroke" />
       ))}
-      {row.byWeek.map((sits, week) =>
-        sits === 0 ? null : (
-          <rect
-            // biome-ignore lint/suspicious/noArrayIndexKey: the weeks are drawn whole, in their order
-            key={week}
-            x={week * 7 + GAP / 2}
-            y={bar(sits)}
-            width={7 - GAP}
-            height={TALL - bar(sits)}
-            className="fill-moss"
-            opacity={0.45}
-          />
-        ),
-      )}
+      <path d={bars} className="fill-moss" opacity={0.45} />
       <line x1={0} x2={wide} y1={TALL} y2={TALL} className="stroke-rule-strong" vectorEffect="non-scaling-stroke" />
       <polyline
         points={points}
