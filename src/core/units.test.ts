@@ -52,6 +52,19 @@ describe('display', () => {
     expect(units.formatArea(units.acreToM2(420), 'us')).toBe('420.0 acres');
   });
 
+  it('gives rain and pressure as gauges read', () => {
+    // An inch is 25.4 mm by definition; 29.92 inHg is the standard atmosphere of 1013.25 hPa.
+    expect([units.formatRain(25.4, 'us'), units.formatRain(2.54, 'us'), units.formatRain(2.54, 'metric')]).toEqual([
+      '1.00 in',
+      '0.10 in',
+      '2.5 mm',
+    ]);
+    expect([units.formatPressure(1013.25, 'us'), units.formatPressure(1013.25, 'metric')]).toEqual([
+      '29.92 in',
+      '1013 hPa',
+    ]);
+  });
+
   it('never rounds a short distance up to the rule', () => {
     expect(units.formatExactDistance(units.ydToM(299.98), 'us')).toBe('299.9 yd');
     expect(units.formatExactDistance(units.ydToM(300), 'us')).toBe('300 yd');

@@ -65,6 +65,16 @@ export function formatTemp(c: number, units: Units): string {
   return units === 'us' ? `${whole(cToF(c))} °F` : `${whole(c)} °C`;
 }
 
+/** Millimetres of rain for people: hundredths of an inch, or tenths of a millimetre. */
+export function formatRain(mm: number, units: Units): string {
+  return units === 'us' ? `${mmToIn(mm).toFixed(2)} in` : `${mm.toFixed(1)} mm`;
+}
+
+/** Hectopascals for people: hundredths of an inch of mercury, or whole hectopascals. */
+export function formatPressure(hPa: number, units: Units): string {
+  return units === 'us' ? `${hPaToInHg(hPa).toFixed(2)} in` : `${whole(hPa)} hPa`;
+}
+
 /** Kilograms for people: whole pounds, or kilograms to a tenth. */
 export function formatWeight(kg: number, units: Units): string {
   return units === 'us' ? `${whole(kgToLb(kg))} lb` : `${kg.toFixed(1)} kg`;

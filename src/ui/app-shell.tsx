@@ -6,6 +6,7 @@ import { LightSwitch } from './light-switch';
 import { BottomBar, type NavItem, RailLinks } from './nav-links';
 import { SkipLink } from './skip-link';
 import { Wordmark } from './wordmark';
+import { SHELL_WORDS } from './words/shell';
 
 export interface AppShellProps {
   items: readonly NavItem[];
@@ -27,11 +28,11 @@ export function AppShell({ items, home, light, club, account, offlineMark, child
     <div className="min-h-dvh md:grid md:grid-cols-[14rem_minmax(0,1fr)] print:block">
       <SkipLink />
       <header className="sticky top-0 hidden h-dvh flex-col gap-3 overflow-y-auto border-rule border-r px-5 py-4 md:flex print:hidden">
-        <Link href={home} className="self-start rounded-sm no-underline" aria-label="Windrest, first page">
-          <Wordmark className="text-[1.7rem]" />
+        <Link href={home} className="self-start rounded-sm no-underline" aria-label={SHELL_WORDS.home}>
+          <Wordmark className="text-2xl" />
         </Link>
         {club}
-        <nav aria-label="Pages">
+        <nav aria-label={SHELL_WORDS.pages}>
           <RailLinks items={items} />
         </nav>
         <div className="mt-auto flex flex-col items-start gap-1">
@@ -46,7 +47,7 @@ export function AppShell({ items, home, light, club, account, offlineMark, child
 
       <div className="flex min-w-0 flex-col">
         <header className="flex min-h-14 items-center justify-between gap-3 border-rule border-b px-4 py-1.5 md:hidden print:hidden">
-          <Link href={home} className="rounded-sm py-2 no-underline" aria-label="Windrest, first page">
+          <Link href={home} className="rounded-sm py-2 no-underline" aria-label={SHELL_WORDS.home}>
             <Wordmark className="text-xl" />
           </Link>
           <div className="flex min-w-0 items-center gap-2">
@@ -64,8 +65,8 @@ export function AppShell({ items, home, light, club, account, offlineMark, child
       </div>
 
       <nav
-        aria-label="Pages"
-        className="fixed inset-x-0 bottom-0 z-30 border-rule-strong border-t bg-paper pb-[env(safe-area-inset-bottom)] md:hidden print:hidden"
+        aria-label={SHELL_WORDS.pages}
+        className="fixed inset-x-0 bottom-0 z-30 border-rule-strong border-t bg-paper foot-room md:hidden print:hidden"
       >
         <BottomBar
           items={items}

@@ -2,7 +2,7 @@ import { type ComponentProps, type ReactNode, useId } from 'react';
 import { FieldError, FieldGroup, type FieldText } from './field';
 import { joinClasses } from './join-classes';
 
-const TICK = 'tick mt-[0.15em] size-5 shrink-0';
+const TICK = joinClasses('tick', 'size-5 shrink-0');
 
 export interface CheckboxProps extends Omit<ComponentProps<'input'>, 'type'> {
   label: ReactNode;

@@ -5,6 +5,7 @@ import { type ReactNode, useState } from 'react';
 import { Button } from './button';
 import { SHEET_CLASSES, useFocusBack, VEIL_CLASSES } from './dialog';
 import { FieldError } from './field';
+import { CONFIRM_WORDS } from './words/opened';
 
 export interface ConfirmDialogProps {
   title: ReactNode;
@@ -22,7 +23,7 @@ export interface ConfirmDialogProps {
 }
 
 export function ConfirmDialog(props: ConfirmDialogProps) {
-  const { title, children, confirmLabel, keepLabel = 'Keep as it is', danger, trigger, onConfirm } = props;
+  const { title, children, confirmLabel, keepLabel = CONFIRM_WORDS.keep, danger, trigger, onConfirm } = props;
   const [ownOpen, setOwnOpen] = useState(false);
   const [pending, setPending] = useState(false);
   const [error, setError] = useState<string>();
@@ -66,7 +67,12 @@ export function ConfirmDialog(props: ConfirmDialogProps) {
             <FieldError>{error}</FieldError>
           </div>
           <div className="mt-5 flex flex-wrap gap-3">
-            <Button look={danger ? 'danger' : 'primary'} pending={pending} pendingLabel="Working…" onClick={confirm}>
+            <Button
+              look={danger ? 'danger' : 'primary'}
+              pending={pending}
+              pendingLabel={CONFIRM_WORDS.working}
+              onClick={confirm}
+            >
               {confirmLabel}
             </Button>
             <AlertDialog.Cancel asChild>

@@ -3,6 +3,7 @@
 import { type ReactNode, useRef, useState } from 'react';
 import { Button } from './button';
 import { CONTROL_CLASSES, Field } from './field';
+import { COPY_WORDS } from './words/forms';
 
 export interface CopyFieldProps {
   label: ReactNode;
@@ -20,13 +21,13 @@ export function CopyField({ label, value, hint, secret }: CopyFieldProps) {
   async function copy() {
     try {
       await navigator.clipboard.writeText(value);
-      setSaid('Copied');
+      setSaid(COPY_WORDS.copied);
     } catch {
       // No clipboard outside a secure page: leave it marked for the person's own copy key.
       setShown(true);
       box.current?.focus();
       box.current?.select();
-      setSaid('Selected: copy it now');
+      setSaid(COPY_WORDS.selected);
     }
   }
 
@@ -46,10 +47,10 @@ export function CopyField({ label, value, hint, secret }: CopyFieldProps) {
           />
           {secret && (
             <Button aria-pressed={shown} onClick={() => setShown(!shown)}>
-              {shown ? 'Hide' : 'Show'}
+              {shown ? COPY_WORDS.hide : COPY_WORDS.show}
             </Button>
           )}
-          <Button onClick={copy}>Copy</Button>
+          <Button onClick={copy}>{COPY_WORDS.copy}</Button>
           <span role="status" className="self-center text-sm">
             {said}
           </span>

@@ -17,6 +17,7 @@ import { EmptyState } from './notices';
 import { Pager } from './pager';
 import { RowHead, type Sorted, Table, TBody, Td, THead, Th, Tr } from './table';
 import { TextInput } from './text-inputs';
+import { TABLE_WORDS } from './words/tables';
 
 const features = tableFeatures({
   rowSortingFeature,
@@ -105,12 +106,10 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
         />
       )}
       <p role="status" className="sr-only">
-        {found.length} of {rows.length} shown
+        {TABLE_WORDS.shown(found.length, rows.length)}
       </p>
       {found.length === 0 ? (
-        <EmptyState title="Nothing matches">
-          Try fewer letters, or clear the filter to see all {rows.length}.
-        </EmptyState>
+        <EmptyState title={TABLE_WORDS.nothingTitle}>{TABLE_WORDS.nothing(rows.length)}</EmptyState>
       ) : (
         <Table caption={caption} captionHidden={captionHidden}>
           <THead>
@@ -150,7 +149,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
           page={page + 1}
           pages={pages}
           onPage={(next) => table.setPageIndex(next - 1)}
-          summary={`${page * pageSize + 1}–${Math.min(found.length, (page + 1) * pageSize)} of ${found.length}`}
+          summary={TABLE_WORDS.span(page * pageSize + 1, Math.min(found.length, (page + 1) * pageSize), found.length)}
         />
       )}
     </div>

@@ -4,12 +4,13 @@ import * as RadixDialog from 'radix-ui/dialog';
 import { type ReactNode, useRef } from 'react';
 import { joinClasses } from './join-classes';
 import { CloseSign } from './signs';
+import { DIALOG_WORDS } from './words/opened';
 
 export const VEIL_CLASSES = 'fixed inset-0 z-40 bg-veil';
 
 /** A sheet from the bottom on a phone, a page in the middle where there is room. */
 export const SHEET_CLASSES =
-  'fixed inset-x-0 bottom-0 z-50 flex max-h-[90dvh] flex-col overflow-y-auto border-rule-strong border-t bg-paper p-5 pb-[max(1.25rem,env(safe-area-inset-bottom))] focus:outline-none sm:inset-auto sm:top-1/2 sm:left-1/2 sm:w-[min(36rem,calc(100vw-3rem))] sm:-translate-x-1/2 sm:-translate-y-1/2 sm:border';
+  'fixed inset-x-0 bottom-0 z-50 flex max-h-[90dvh] flex-col overflow-y-auto border-rule-strong border-t bg-paper sheet-room p-5 focus:outline-none sm:inset-auto sm:top-1/2 sm:left-1/2 sm:-translate-x-1/2 sm:-translate-y-1/2 sm:border';
 
 export interface DialogProps {
   title: ReactNode;
@@ -52,7 +53,7 @@ export function Dialog({ title, description, trigger, open, onOpenChange, classN
           <div className="double-rule mb-4 flex items-start justify-between gap-4 pb-2">
             <RadixDialog.Title className="font-serif text-xl">{title}</RadixDialog.Title>
             <RadixDialog.Close
-              aria-label="Close"
+              aria-label={DIALOG_WORDS.close}
               className="-mt-2 -mr-2 inline-flex size-11 shrink-0 items-center justify-center rounded-sm hover:bg-sunk"
             >
               <CloseSign className="size-5" />

@@ -1,5 +1,6 @@
 import { type ReactNode, useId } from 'react';
 import { joinClasses } from './join-classes';
+import { FIELD_WORDS } from './words/forms';
 
 /** What a control takes so that its label, hint and error are tied to it. */
 export interface FieldControl {
@@ -34,7 +35,7 @@ export function Field({ id, label, hint, error, optional, required, className, c
     <div className={joinClasses('flex min-w-0 flex-col gap-1', className)}>
       <label htmlFor={controlId} className="font-semibold">
         {label}
-        {optional && <span className="font-normal text-ink-soft"> (optional)</span>}
+        {optional && <span className="font-normal text-ink-soft">{FIELD_WORDS.optional}</span>}
       </label>
       {hint && (
         <p id={hintId} className="text-ink-soft text-sm">
@@ -68,7 +69,7 @@ export function FieldGroup({ label, hint, error, optional, className, children }
     >
       <legend className="mb-1 font-semibold">
         {label}
-        {optional && <span className="font-normal text-ink-soft"> (optional)</span>}
+        {optional && <span className="font-normal text-ink-soft">{FIELD_WORDS.optional}</span>}
       </legend>
       {hint && (
         <p id={`${ownId}-hint`} className="text-ink-soft text-sm">

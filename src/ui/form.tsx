@@ -4,6 +4,7 @@ import { type ComponentProps, type MouseEvent, type ReactNode, useEffect, useRef
 import { useFormStatus } from 'react-dom';
 import { Button, type ButtonLook } from './button';
 import { joinClasses } from './join-classes';
+import { FORM_WORDS } from './words/forms';
 
 export interface FormError {
   /** Name of the field the error stands beside; left out for the form as a whole. */
@@ -12,13 +13,7 @@ export interface FormError {
 }
 
 /** What is wrong with a form, in one list that takes focus and leads to each field by its name. */
-export function FormErrorSummary({
-  errors,
-  title = 'Please put these right',
-}: {
-  errors: FormError[];
-  title?: string;
-}) {
+export function FormErrorSummary({ errors, title = FORM_WORDS.wrong }: { errors: FormError[]; title?: string }) {
   const box = useRef<HTMLDivElement>(null);
   const key = errors.map((error) => error.message).join('|');
   useEffect(() => {
@@ -66,7 +61,12 @@ export interface SubmitButtonProps extends Omit<ComponentProps<'button'>, 'type'
   pendingLabel?: ReactNode;
 }
 
-export function SubmitButton({ look = 'primary', pending, pendingLabel = 'Working…', ...rest }: SubmitButtonProps) {
+export function SubmitButton({
+  look = 'primary',
+  pending,
+  pendingLabel = FORM_WORDS.working,
+  ...rest
+}: SubmitButtonProps) {
   const status = useFormStatus();
   return <Button {...rest} type="submit" look={look} pending={pending || status.pending} pendingLabel={pendingLabel} />;
 }

@@ -2,6 +2,7 @@
 
 import { Checkbox } from './choices';
 import { Dialog } from './dialog';
+import { KEY_LIST_WORDS as WORDS } from './words/opened';
 
 export interface KeyListProps {
   places: readonly { key: string; label: string }[];
@@ -11,13 +12,13 @@ export interface KeyListProps {
 }
 
 const HERE = [
-  { keys: ['?'], label: 'This list' },
-  { keys: ['j'], label: 'Next stand of the list' },
-  { keys: ['k'], label: 'Stand before it' },
-  { keys: ['Enter'], label: 'Open or fold the stand' },
-  { keys: ['['], label: 'The window before' },
-  { keys: [']'], label: 'The window after' },
-  { keys: ['Esc'], label: 'Close what is open' },
+  { keys: ['?'], label: WORDS.list },
+  { keys: ['j'], label: WORDS.next },
+  { keys: ['k'], label: WORDS.before },
+  { keys: [WORDS.enter], label: WORDS.open },
+  { keys: ['['], label: WORDS.earlier },
+  { keys: [']'], label: WORDS.later },
+  { keys: [WORDS.esc], label: WORDS.close },
 ];
 
 function Keys({ keys }: { keys: string[] }) {
@@ -34,9 +35,9 @@ function Keys({ keys }: { keys: string[] }) {
 
 /** Every key and what it does. */
 export function KeyList({ places, off, onOff, onClose }: KeyListProps) {
-  const rows = [...HERE, ...places.map(({ key, label }) => ({ keys: ['g', key], label: `Go to ${label}` }))];
+  const rows = [...HERE, ...places.map(({ key, label }) => ({ keys: ['g', key], label: WORDS.goTo(label) }))];
   return (
-    <Dialog open onOpenChange={(open) => !open && onClose()} title="Keys">
+    <Dialog open onOpenChange={(open) => !open && onClose()} title={WORDS.title}>
       <dl className="mb-4 grid gap-x-8 sm:grid-cols-2">
         {rows.map(({ keys, label }) => (
           <div key={label} className="flex items-center justify-between gap-3 border-rule border-b py-1.5">
@@ -48,8 +49,8 @@ export function KeyList({ places, off, onOff, onClose }: KeyListProps) {
         ))}
       </dl>
       <Checkbox
-        label="Use these keys"
-        hint="Turn them off if your screen reader or voice control uses the same ones."
+        label={WORDS.use}
+        hint={WORDS.useHint}
         checked={!off}
         onChange={({ target }) => onOff(!target.checked)}
       />

@@ -5,6 +5,7 @@ import { lazy, Suspense, useEffect, useState } from 'react';
 import { Button } from './button';
 import { goKeys, type KeyMeaning, meaningOf } from './go-keys';
 import { KeysSign } from './signs';
+import { KEYS_BUTTON_WORDS } from './words/shell';
 
 const KeyList = lazy(async () => ({ default: (await import('./key-list')).KeyList }));
 
@@ -86,7 +87,7 @@ export function KeyboardMap({ items }: KeyboardMapProps) {
     <>
       <Button look="quiet" className="justify-start" aria-haspopup="dialog" onClick={() => setOpen(true)}>
         <KeysSign className="size-5" />
-        Keys
+        {KEYS_BUTTON_WORDS.keys}
       </Button>
       {open && (
         <Suspense>

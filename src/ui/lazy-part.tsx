@@ -2,7 +2,7 @@
 
 import { type ComponentType, type LazyExoticComponent, lazy, type ReactNode, Suspense, useState } from 'react';
 import { useToast } from './toast';
-import { LAZY_WORDS } from './words';
+import { LAZY_WORDS } from './words/late';
 
 export interface Opener {
   /** Fetches the part ahead of the press: spread on the button that opens it. */

@@ -1,17 +1,12 @@
 'use client';
 
 import * as Dropdown from 'radix-ui/dropdown-menu';
-import { LIGHT_NAMES, LIGHTS, type Light, parseLight } from './light';
+import { LIGHTS, type Light, parseLight } from './light';
 import { LightButton } from './light-button';
 import { MENU_CLASSES } from './open-menu';
 import { TickSign } from './signs';
-
-const NOTES: Record<Light, string> = {
-  auto: 'by the sun',
-  day: 'paper',
-  dark: 'for the evening',
-  dim: 'red on black, keeps night eyes',
-};
+import { LIGHT_NOTES } from './words/opened';
+import { LIGHT_NAMES } from './words/shell';
 
 export interface LightMenuProps {
   light: Light;
@@ -38,7 +33,7 @@ export function LightMenu({ light, onChoose }: LightMenuProps) {
                   <TickSign className="size-4" />
                 </Dropdown.ItemIndicator>
                 <span>
-                  {LIGHT_NAMES[name]} <span className="text-ink-soft text-sm">{NOTES[name]}</span>
+                  {LIGHT_NAMES[name]} <span className="text-ink-soft text-sm">{LIGHT_NOTES[name]}</span>
                 </span>
               </Dropdown.RadioItem>
             ))}

@@ -6,13 +6,6 @@ export const LIGHT_COOKIE = 'light';
 /** What the sun says now; it ends with the next sunrise or sunset. */
 export const SUN_COOKIE = 'light_by_sun';
 
-export const LIGHT_NAMES: Record<Light, string> = {
-  auto: 'Auto',
-  day: 'Day',
-  dark: 'Dark',
-  dim: 'Dim red',
-};
-
 export function parseLight(value: string | undefined): Light {
   return LIGHTS.find((light) => light === value) ?? 'auto';
 }

@@ -5,6 +5,7 @@ import { type ReactNode, useState } from 'react';
 import { Dialog } from './dialog';
 import type { NavItem } from './nav-links';
 import { PagesSign } from './signs';
+import { MORE_WORDS } from './words/shell';
 
 export interface MoreSheetProps {
   items: readonly NavItem[];
@@ -18,17 +19,17 @@ export function MoreSheet({ items, current, foot, triggerClass }: MoreSheetProps
   const [open, setOpen] = useState(true);
   return (
     <Dialog
-      title="More"
+      title={MORE_WORDS.more}
       open={open}
       onOpenChange={setOpen}
       trigger={
         <button type="button" className={triggerClass}>
           <PagesSign />
-          More
+          {MORE_WORDS.more}
         </button>
       }
     >
-      <nav aria-label="More pages">
+      <nav aria-label={MORE_WORDS.morePages}>
         <ul className="divide-y divide-rule">
           {items.map((item) => (
             <li key={item.href}>

@@ -8,6 +8,7 @@ import { joinClasses } from './join-classes';
 import { LazyPart, makeLazy } from './lazy-part';
 import type { MoreSheetProps } from './more-sheet';
 import { PagesSign } from './signs';
+import { MORE_WORDS } from './words/shell';
 
 export interface NavItem {
   href: string;
@@ -46,7 +47,7 @@ export function RailLinks({ items }: { items: readonly NavItem[] }) {
 }
 
 const CELL =
-  'flex min-h-14 w-full flex-col items-center justify-center gap-0.5 border-transparent border-t-[3px] px-1 pb-1 text-ink-soft text-xs no-underline aria-[current=page]:border-moss aria-[current=page]:font-semibold aria-[current=page]:text-ink';
+  'flex min-h-14 w-full flex-col items-center justify-center gap-0.5 border-transparent border-t-3 px-1 pb-1 text-ink-soft text-xs no-underline aria-[current=page]:border-moss aria-[current=page]:font-semibold aria-[current=page]:text-ink';
 
 const lazyMore = makeLazy<MoreSheetProps>(() => import('./more-sheet').then((parts) => parts.MoreSheet));
 
@@ -82,7 +83,7 @@ export function BottomBar({ items, onBar = 4, foot }: BottomBarProps) {
             closed={({ ahead, open }) => (
               <button type="button" {...ahead} aria-haspopup="dialog" className={triggerClass} onClick={open}>
                 <PagesSign />
-                More
+                {MORE_WORDS.more}
               </button>
             )}
           />

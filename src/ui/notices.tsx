@@ -1,15 +1,16 @@
 import type { ReactNode } from 'react';
 import { joinClasses } from './join-classes';
 import { CautionSign, NoteSign, StopSign } from './signs';
+import { LOADING_WORDS, NOTICE_WORDS } from './words/notices';
 
 export { ErrorState, type ErrorStateProps } from './error-state';
 
 export type NoticeLevel = 'info' | 'caution' | 'stop';
 
 const LEVELS = {
-  info: { word: 'Note', Mark: NoteSign, box: 'border-y border-rule-strong px-1', mark: 'text-ink-soft' },
-  caution: { word: 'Caution', Mark: CautionSign, box: 'border-y-2 border-clay px-1', mark: 'text-clay' },
-  stop: { word: 'Stop', Mark: StopSign, box: 'border-2 border-clay bg-panel px-3', mark: 'text-clay' },
+  info: { word: NOTICE_WORDS.info, Mark: NoteSign, box: 'border-y border-rule-strong px-1', mark: 'text-ink-soft' },
+  caution: { word: NOTICE_WORDS.caution, Mark: CautionSign, box: 'border-y-2 border-clay px-1', mark: 'text-clay' },
+  stop: { word: NOTICE_WORDS.stop, Mark: StopSign, box: 'border-2 border-clay bg-panel px-3', mark: 'text-clay' },
 };
 
 export interface NoticeProps {
@@ -56,7 +57,7 @@ export function EmptyState({ title, children, action }: EmptyStateProps) {
 }
 
 /** Ruled lines where text will stand. */
-export function Loading({ label = 'Loading', lines = 5 }: { label?: string; lines?: number }) {
+export function Loading({ label = LOADING_WORDS.loading, lines = 5 }: { label?: string; lines?: number }) {
   return (
     <div role="status" className="py-2">
       <span className="sr-only">{label}</span>
@@ -65,7 +66,7 @@ export function Loading({ label = 'Loading', lines = 5 }: { label?: string; line
           // biome-ignore lint/suspicious/noArrayIndexKey: lines of a drawing, all alike
           <div key={line} className="flex h-11 items-center gap-4 border-rule border-b">
             <div className="h-3 w-1/4 bg-sunk" />
-            <div className="h-3 bg-sunk" style={{ width: `${30 + ((line * 17) % 30)}%` }} />
+            <div className={joinClasses('h-3 bg-sunk', line % 2 === 0 ? 'w-1/3' : 'w-1/2')} />
           </div>
         ))}
       </div>

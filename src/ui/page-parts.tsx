@@ -1,6 +1,8 @@
 import { type ReactNode, useId } from 'react';
 import { joinClasses } from './join-classes';
 
+export { Badge, type BadgeLook } from './badge';
+
 export interface PageTitleProps {
   title: ReactNode;
   /** Small line above: the club, the day. */
@@ -86,28 +88,5 @@ export function DefinitionList({ items, className }: { items: Definition[]; clas
         </div>
       ))}
     </dl>
-  );
-}
-
-export type BadgeLook = 'plain' | 'strong' | 'moss' | 'clay';
-
-const BADGE_LOOKS: Record<BadgeLook, string> = {
-  plain: 'border-rule-strong text-ink',
-  strong: 'border-ink bg-ink text-paper',
-  moss: 'border-moss text-moss',
-  clay: 'border-clay text-clay',
-};
-
-/** A word set apart. The word carries the meaning; the look only helps. */
-export function Badge({ look = 'plain', children }: { look?: BadgeLook; children: ReactNode }) {
-  return (
-    <span
-      className={joinClasses(
-        'inline-block justify-self-start whitespace-nowrap rounded-sm border px-1.5 font-semibold text-sm leading-snug',
-        BADGE_LOOKS[look],
-      )}
-    >
-      {children}
-    </span>
   );
 }

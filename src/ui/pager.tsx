@@ -1,4 +1,5 @@
 import { Button, ButtonLink } from './button';
+import { PAGER_WORDS } from './words/tables';
 
 export interface PagerProps {
   /** From 1. */
@@ -15,14 +16,14 @@ export function Pager({ page, pages, hrefFor, onPage, summary }: PagerProps) {
   if (pages <= 1 && !summary) return null;
   return (
     <nav
-      aria-label="More of this list"
+      aria-label={PAGER_WORDS.more}
       className="flex flex-wrap items-center justify-between gap-3 border-rule border-t pt-3"
     >
-      <p className="text-ink-soft text-sm">{summary ?? `Page ${page} of ${pages}`}</p>
+      <p className="text-ink-soft text-sm">{summary ?? PAGER_WORDS.page(page, pages)}</p>
       {pages > 1 && (
         <div className="flex gap-2">
-          <Step to={page - 1} label="Previous" stop={page <= 1} hrefFor={hrefFor} onPage={onPage} />
-          <Step to={page + 1} label="Next" stop={page >= pages} hrefFor={hrefFor} onPage={onPage} />
+          <Step to={page - 1} label={PAGER_WORDS.previous} stop={page <= 1} hrefFor={hrefFor} onPage={onPage} />
+          <Step to={page + 1} label={PAGER_WORDS.next} stop={page >= pages} hrefFor={hrefFor} onPage={onPage} />
         </div>
       )}
     </nav>

@@ -5,6 +5,7 @@ import type { Light } from './light';
 import { LightSwitch } from './light-switch';
 import { SkipLink } from './skip-link';
 import { Wordmark } from './wordmark';
+import { SHELL_WORDS } from './words/shell';
 
 export interface PlainShellProps {
   light: Light;
@@ -23,8 +24,8 @@ export function PlainShell({ light, home = '/', width = 'form', links, children 
     <div className="flex min-h-dvh flex-col">
       <SkipLink />
       <header className={joinClasses('mx-auto flex w-full items-center justify-between gap-4 px-5 pt-6 pb-4', room)}>
-        <Link href={home} className="rounded-sm no-underline" aria-label="Windrest, first page">
-          <Wordmark className="text-[1.7rem]" />
+        <Link href={home} className="rounded-sm no-underline" aria-label={SHELL_WORDS.home}>
+          <Wordmark className="text-2xl" />
         </Link>
         <div className="flex items-center gap-2">
           {links}

@@ -4,7 +4,7 @@ const YEAR_SECONDS = 365 * 24 * 3600;
 
 function keepCookie(name: string, value: string, seconds: number): void {
   // biome-ignore lint/suspicious/noDocumentCookie: the Cookie Store API is missing from older phones
-  document.cookie = `${name}=${value}; path=/; max-age=${seconds}; samesite=lax`;
+  document.cookie = [`${name}=${value}`, 'path=/', `max-age=${seconds}`, 'samesite=lax'].join('; ');
 }
 
 function readCookie(name: string): string | undefined {

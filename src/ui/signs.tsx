@@ -24,8 +24,8 @@ function Sign({ className, children }: SignProps & { children: ReactNode }) {
   );
 }
 
-/** The few signs that a phone draws itself. Each is a decoration: the words beside it say the same. */
-const drawn = (d: string) => (props: SignProps) => (
+/** A sign of one path. Each is a decoration: the words beside it say the same. */
+export const drawn = (d: string) => (props: SignProps) => (
   <Sign {...props}>
     <path d={d} />
   </Sign>

@@ -1,3 +1,5 @@
+import { SHELL_WORDS } from './words/shell';
+
 /** First stop of the Tab key on every page. */
 export function SkipLink() {
   return (
@@ -5,7 +7,7 @@ export function SkipLink() {
       href="#main"
       className="fixed top-2 left-2 z-50 -translate-y-20 border-2 border-moss bg-panel px-4 py-2.5 font-semibold focus:translate-y-0 print:hidden"
     >
-      Skip to the page
+      {SHELL_WORDS.skip}
     </a>
   );
 }

@@ -4,6 +4,7 @@ import { useId } from 'react';
 import { FieldError } from './field';
 import { joinClasses } from './join-classes';
 import { LessSign, MoreSign } from './signs';
+import { STEPPER_WORDS } from './words/forms';
 
 export interface StepperProps {
   label: string;
@@ -36,7 +37,7 @@ export function Stepper({ label, name, value, onChange, onBlur, most = 200, erro
           <button
             type="button"
             className={knob}
-            aria-label={`One less: ${label}`}
+            aria-label={STEPPER_WORDS.less(label)}
             disabled={value <= 0}
             onClick={() => set(value - 1)}
           >
@@ -61,7 +62,7 @@ export function Stepper({ label, name, value, onChange, onBlur, most = 200, erro
               value > 0 && 'font-semibold',
             )}
           />
-          <button type="button" className={knob} aria-label={`One more: ${label}`} onClick={() => set(value + 1)}>
+          <button type="button" className={knob} aria-label={STEPPER_WORDS.more(label)} onClick={() => set(value + 1)}>
             <MoreSign className="size-6" />
           </button>
         </span>

@@ -4,11 +4,12 @@ import * as RadixToast from 'radix-ui/toast';
 import { joinClasses } from './join-classes';
 import { CloseSign } from './signs';
 import type { ShownToast } from './toast';
+import { TOAST_WORDS } from './words/opened';
 
 /** The messages now shown, in a corner that a screen reader follows. */
 export function ToastPile({ toasts, onClose }: { toasts: ShownToast[]; onClose: (id: number) => void }) {
   return (
-    <RadixToast.Provider label="Message" duration={6000}>
+    <RadixToast.Provider label={TOAST_WORDS.message} duration={6000}>
       {toasts.map(({ id, title, text, level = 'info' }) => (
         <RadixToast.Root
           key={id}
@@ -24,7 +25,7 @@ export function ToastPile({ toasts, onClose }: { toasts: ShownToast[]; onClose: 
             <RadixToast.Title className="font-semibold">{title}</RadixToast.Title>
             {text && <RadixToast.Description className="text-sm">{text}</RadixToast.Description>}
           </div>
-          <RadixToast.Close aria-label="Close message" className="inline-flex size-11 items-center justify-center">
+          <RadixToast.Close aria-label={TOAST_WORDS.close} className="inline-flex size-11 items-center justify-center">
             <CloseSign className="size-5" />
           </RadixToast.Close>
         </RadixToast.Root>

@@ -1,4 +1,5 @@
 import { type RefObject, useEffect, useRef, useState } from 'react';
+import { flushSync } from 'react-dom';
 
 export interface MoreRows {
   /** How many of the rows to draw. */
@@ -24,7 +25,8 @@ export function useMoreRows(total: number, atOnce: number): MoreRows {
     return () => watch.disconnect();
   }, [shown, total, atOnce]);
   useEffect(() => {
-    const all = () => setShown(total);
+    // The page is taken for print as it stands when this returns.
+    const all = () => flushSync(() => setShown(total));
     globalThis.addEventListener('beforeprint', all);
     return () => globalThis.removeEventListener('beforeprint', all);
   }, [total]);

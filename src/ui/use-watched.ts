@@ -1,13 +1,9 @@
 import { useEffect, useRef, useState } from 'react';
 import type { BeginWatch, Watch, Watched } from './watch-query';
-import { WATCH_WORDS } from './words';
+import { whenIdle } from './when-idle';
+import { WATCH_WORDS } from './words/late';
 
 const AGAIN_MS = 15_000;
-
-function whenIdle(run: () => void): void {
-  if ('requestIdleCallback' in window) window.requestIdleCallback(run, { timeout: 2000 });
-  else setTimeout(run, 200);
-}
 
 /**
  * What the server has drawn, kept fresh from then on: the script that asks comes once the page is there. A newer `first`,
@@ -32,9 +28,10 @@ export function useWatched<T>(load: () => Promise<BeginWatch<T>>, first: T): Wat
         timer = setTimeout(start, AGAIN_MS);
       }
     };
-    whenIdle(() => void start());
+    const callOff = whenIdle(() => void start());
     return () => {
       gone = true;
+      callOff();
       clearTimeout(timer);
       watch.current?.stop();
       watch.current = null;

@@ -1,10 +1,11 @@
 import { joinClasses } from './join-classes';
+import { NAME } from './words/shell';
 
 /** The product's name over a small unrolled compass with one bar of good wind. */
 export function Wordmark({ className }: { className?: string }) {
   return (
     <span className={joinClasses('inline-block font-semibold font-serif leading-none tracking-tight', className)}>
-      Windrest
+      {NAME}
       <svg
         viewBox="0 0 100 7"
         preserveAspectRatio="none"

@@ -1,6 +1,7 @@
 'use client';
 
 import { useEffect, useState } from 'react';
+import { ZONE_WORDS } from './words/offline';
 
 function offsetName(zone: string, at: Date, style: 'longOffset' | 'long'): string {
   const parts = new Intl.DateTimeFormat('en-US', { timeZone: zone, timeZoneName: style }).formatToParts(at);
@@ -14,7 +15,7 @@ export function ZoneNote({ zone }: { zone: string }) {
     const now = new Date();
     const own = Intl.DateTimeFormat().resolvedOptions().timeZone;
     const differs = offsetName(zone, now, 'longOffset') !== offsetName(own, now, 'longOffset');
-    setText(differs ? `Times are by the club's clock: ${offsetName(zone, now, 'long')}.` : null);
+    setText(differs ? ZONE_WORDS.byClub(offsetName(zone, now, 'long')) : null);
   }, [zone]);
   return text && <p className="mb-3 text-ink-soft text-sm print:hidden">{text}</p>;
 }

@@ -14,6 +14,7 @@ import { expectedBackBy } from '@/features/outings/walk-out';
 import { backByText, clockBeside, lastSignText, STATE_WORDS } from '@/features/outings/words/outing';
 import type { ClubScope } from '@/server/scope';
 import { walkUpOffer } from './walk-up-offer';
+import { BOARD_READ_WORDS } from './words/reads';
 
 /** What a form to sign in starts from. */
 export interface SignInStart {
@@ -86,14 +87,6 @@ interface Known {
   linked: Set<string>;
 }
 
-const TOLD = { member: 'Member', officers: 'Officers', contact: 'Safety contact' } as const;
-const NOT_TOLD: Record<OverdueStepRow['outcome'], string> = {
-  mailed: 'told',
-  nobody: 'not told: there is no other',
-  no_consent: 'not told: none has agreed',
-  off: 'not told: switched off',
-};
-
 function signInStart({ scope, now, ways, vehicles }: Known, sit: SitDetail): SignInStart | null {
   if (signInProblem(scope, sit, now) !== null) return null;
   const ins = ways.filter((way) => way.standId === sit.standId && way.direction !== 'out');
@@ -117,7 +110,6 @@ function boardSit(known: Known, sit: SitDetail): BoardSit {
   const maySign = (mine && scope.can('sits.book')) || scope.can('board.sign_for_others');
   const say = (at: number) => clockBeside(at, now, club);
   const steps = open ? known.steps.filter((row) => row.outingId === open.id && row.moves === open.moves) : [];
-  const out = outing?.signedOutAt ? `, ${say(outing.signedOutAt)}` : '';
   return {
     id: sit.id,
     day: sit.day,
@@ -127,7 +119,9 @@ function boardSit(known: Known, sit: SitDetail): BoardSit {
     windowText: SIT_WINDOW_WORDS[sit.windows],
     timeText: spanText(sit.startAt, sit.endAt, club),
     state,
-    stateText: STATE_WORDS[state] + out,
+    stateText: outing?.signedOutAt
+      ? BOARD_READ_WORDS.since(STATE_WORDS[state], say(outing.signedOutAt))
+      : STATE_WORDS[state],
     weaponText: weaponWord(sit.weapon),
     guests: sit.guests.map((guest) => guest.name),
     wayIn: outing ? outing.approachName : sit.approachName,
@@ -135,7 +129,7 @@ function boardSit(known: Known, sit: SitDetail): BoardSit {
     vehicle: outing?.vehicle ?? '',
     backByText: open && backByText(open, say),
     lastSign: open && lastSignText(open, say),
-    told: steps.map((row) => `${TOLD[row.step]} ${NOT_TOLD[row.outcome]} at ${clockText(row.at, club)}`),
+    told: steps.map((row) => BOARD_READ_WORDS.told(row.step, row.outcome, clockText(row.at, club))),
     outing: open && { id: open.id, backBy: open.backBy, linked: known.linked.has(open.id) },
     signIn: maySign && !open ? signInStart(known, sit) : null,
     maySign,
@@ -178,8 +172,8 @@ export async function readBoard(scope: ClubScope, now: number): Promise<Board> {
   return {
     onGround,
     days: [
-      { day: today, title: 'Today' },
-      { day: tomorrow, title: 'Tomorrow' },
+      { day: today, title: BOARD_READ_WORDS.today },
+      { day: tomorrow, title: BOARD_READ_WORDS.tomorrow },
     ].map(({ day, title }) => ({
       day,
       title,

@@ -3,9 +3,13 @@ import { dayAndWindow, spanText } from '@/features/bookings/words/sits';
 import { walkUpWindow } from '@/features/outings/walk-up';
 import type { ClubScope } from '@/server/scope';
 import type { BoardSit } from './reads';
+import { BOARD_READ_WORDS } from './words/reads';
 
 export function windowText(scope: ClubScope, window: SitWindow): string {
-  return `${dayAndWindow(window.day, window.window)}, ${spanText(window.startAt, window.endAt, scope.club)}`;
+  return BOARD_READ_WORDS.walkUp(
+    dayAndWindow(window.day, window.window),
+    spanText(window.startAt, window.endAt, scope.club),
+  );
 }
 
 /** The window a free stand may be taken for at the gate; null: none is near, the club has no walk-ups, or the reader has a sit. */

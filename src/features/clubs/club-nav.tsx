@@ -1,21 +1,21 @@
-import {
-  Armchair,
-  BellRing,
-  CalendarCheck,
-  CalendarDays,
-  CalendarRange,
-  CalendarX,
-  ChartNoAxesColumn,
-  ClipboardList,
-  Dices,
-  Hammer,
-  Map as MapSign,
-  NotebookPen,
-  TreePine,
-  Users,
-} from 'lucide-react';
 import type { Permission } from '@/core/permissions';
 import type { NavItem } from '@/ui/nav-links';
+import {
+  BellSign,
+  BoardSign,
+  CalendarSign,
+  ChoreSign,
+  ClosedDaySign,
+  DrawSign,
+  GroundSign,
+  LogSign,
+  OwnDaySign,
+  PeopleSign,
+  SeasonSign,
+  SeatSign,
+  TreeSign,
+  WeekSign,
+} from '@/ui/page-signs';
 import { NAV_WORDS } from './words/club';
 
 interface Screen {
@@ -27,20 +27,20 @@ interface Screen {
 
 /** In the order of the rail; the first four a person may open stand on the phone's bar. */
 const SCREENS: Screen[] = [
-  { path: 'sit', label: NAV_WORDS.sit, icon: <Armchair />, needs: 'sits.read' },
-  { path: 'week', label: NAV_WORDS.week, icon: <CalendarRange />, needs: 'sits.read' },
-  { path: 'board', label: NAV_WORDS.board, icon: <ClipboardList />, needs: 'board.read' },
-  { path: 'log', label: NAV_WORDS.log, icon: <NotebookPen />, needs: 'log.write' },
-  { path: 'my-sits', label: NAV_WORDS.mySits, icon: <CalendarCheck />, needs: 'sits.book' },
-  { path: 'season', label: NAV_WORDS.season, icon: <ChartNoAxesColumn />, needs: 'report.read' },
-  { path: 'draws', label: NAV_WORDS.draws, icon: <Dices />, needs: 'draws.enter' },
-  { path: 'chores', label: NAV_WORDS.chores, icon: <Hammer />, needs: 'chores.read' },
-  { path: 'stands', label: NAV_WORDS.stands, icon: <TreePine />, needs: 'stands.read' },
-  { path: 'ground', label: NAV_WORDS.ground, icon: <MapSign />, needs: 'features.read' },
-  { path: 'closures', label: NAV_WORDS.closedDays, icon: <CalendarX />, needs: 'closed_days.write' },
-  { path: 'calendar', label: NAV_WORDS.calendar, icon: <CalendarDays />, needs: 'feeds.own' },
-  { path: 'notices', label: NAV_WORDS.notices, icon: <BellRing />, needs: 'notices.own' },
-  { path: 'club', label: NAV_WORDS.club, icon: <Users />, needs: 'club.read' },
+  { path: 'sit', label: NAV_WORDS.sit, icon: <SeatSign />, needs: 'sits.read' },
+  { path: 'week', label: NAV_WORDS.week, icon: <WeekSign />, needs: 'sits.read' },
+  { path: 'board', label: NAV_WORDS.board, icon: <BoardSign />, needs: 'board.read' },
+  { path: 'log', label: NAV_WORDS.log, icon: <LogSign />, needs: 'log.write' },
+  { path: 'my-sits', label: NAV_WORDS.mySits, icon: <OwnDaySign />, needs: 'sits.book' },
+  { path: 'season', label: NAV_WORDS.season, icon: <SeasonSign />, needs: 'report.read' },
+  { path: 'draws', label: NAV_WORDS.draws, icon: <DrawSign />, needs: 'draws.enter' },
+  { path: 'chores', label: NAV_WORDS.chores, icon: <ChoreSign />, needs: 'chores.read' },
+  { path: 'stands', label: NAV_WORDS.stands, icon: <TreeSign />, needs: 'stands.read' },
+  { path: 'ground', label: NAV_WORDS.ground, icon: <GroundSign />, needs: 'features.read' },
+  { path: 'closures', label: NAV_WORDS.closedDays, icon: <ClosedDaySign />, needs: 'closed_days.write' },
+  { path: 'calendar', label: NAV_WORDS.calendar, icon: <CalendarSign />, needs: 'feeds.own' },
+  { path: 'notices', label: NAV_WORDS.notices, icon: <BellSign />, needs: 'notices.own' },
+  { path: 'club', label: NAV_WORDS.club, icon: <PeopleSign />, needs: 'club.read' },
 ];
 
 /** The screens of a club that a person may open. */

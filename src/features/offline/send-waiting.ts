@@ -4,6 +4,7 @@ import { visitFormSchema } from '@/features/logs/visit-schema';
 import { signInSitSchema, signOutSitSchema } from '@/features/outings/outing-schema';
 import type { ActionResult } from '@/server/doors';
 import type { WaitingItem } from '@/ui/offline/waiting-store';
+import { WAITING_ERRORS } from './words';
 
 type Act<S extends z.ZodType> = (club: string, values: z.output<S>) => Promise<ActionResult<unknown>>;
 
@@ -17,7 +18,7 @@ export interface WaitingActions {
 
 const UNREADABLE: ActionResult<never> = {
   ok: false,
-  error: { code: 'invalid', message: 'It was kept by an older Windrest and cannot be sent. Do it anew.' },
+  error: { code: 'invalid', message: WAITING_ERRORS.unreadable },
 };
 
 async function pass<S extends z.ZodType>(schema: S, act: Act<S>, item: WaitingItem): Promise<ActionResult<unknown>> {

@@ -3,13 +3,11 @@ import { WINDOW_NAMES } from '@/core/condition-types';
 import { isDay } from '@/core/day-time';
 import { WEAPONS } from '@/core/ground-types';
 import { inAskedYears } from './asked-years';
+import { ASK_ERRORS } from './words/reads';
 
-const day = z
-  .string()
-  .refine(isDay, 'Write a day as YYYY-MM-DD.')
-  .refine(inAskedYears, 'Choose a day of this century.');
-const window = z.enum(WINDOW_NAMES, { error: 'Choose morning or evening.' });
-const weapon = z.enum(WEAPONS, { error: 'Choose one of the weapons.' });
+const day = z.string().refine(isDay, ASK_ERRORS.day).refine(inAskedYears, ASK_ERRORS.years);
+const window = z.enum(WINDOW_NAMES, { error: ASK_ERRORS.window });
+const weapon = z.enum(WEAPONS, { error: ASK_ERRORS.weapon });
 
 /** The query string of the ranked list; what is left out is the next window, any weapon. */
 export const sitsAskSchema = z.object({ day: day.optional(), window: window.optional(), weapon: weapon.optional() });

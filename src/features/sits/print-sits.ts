@@ -1,5 +1,6 @@
 import { formatDay } from '@/core/day-time';
 import type { SitRow, SitsView } from './view-types';
+import { PRINT_WORDS as WORDS } from './words/reads';
 import { clockText } from './words/terms';
 
 interface Line {
@@ -15,13 +16,13 @@ interface Line {
 
 const HEADS: Line = {
   rank: '#',
-  name: 'Stand',
-  word: 'Word',
-  score: 'Score',
-  quiet: 'Quiet',
-  promise: 'Promise',
-  sure: 'Sure',
-  sentence: 'In a line',
+  name: WORDS.stand,
+  word: WORDS.word,
+  score: WORDS.score,
+  quiet: WORDS.quiet,
+  promise: WORDS.promise,
+  sure: WORDS.sure,
+  sentence: WORDS.line,
 };
 
 function line(row: SitRow, rank: string, sentence: string): Line {
@@ -46,11 +47,11 @@ export function printSits(view: SitsView): string {
       ...keys.map((key, i) => (right.has(key) ? one[key].padStart(widths[i] ?? 0) : one[key].padEnd(widths[i] ?? 0))),
       one.sentence,
     ].join('  ');
-  const span = `${clockText(window.startAt, club)} to ${clockText(window.endAt, club)}`;
-  const weather = view.weather ? `${view.weather.wind}; ${view.weather.air}` : 'No forecast for this window';
+  const span = WORDS.span(clockText(window.startAt, club), clockText(window.endAt, club));
+  const weather = view.weather ? `${view.weather.wind}; ${view.weather.air}` : WORDS.noForecast;
   return [
     `${club.name}: ${formatDay(window.day, true)}, ${window.window}, ${span} (${club.zone})`,
-    `${weather}. Forecast: ${view.forecast.source ?? 'none'}${view.forecast.error ? ` (${view.forecast.error})` : ''}`,
+    WORDS.forecast(weather, view.forecast.source, view.forecast.error),
     '',
     ...[HEADS, ...lines].map(text),
   ].join('\n');

@@ -8,6 +8,7 @@ import { currentWeather } from '@/features/weather/refresh-forecast';
 import { AppError } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { forecastFrom, loadForecast } from './load-forecast';
+import { ASK_ERRORS } from './words/reads';
 
 export interface HindcastView {
   source: string;
@@ -22,7 +23,7 @@ async function loadHours(scope: ClubScope, now: number, weather = currentWeather
     ? await forecastFrom(weather, scope)
     : await loadForecast(scope, now);
   if (!kept.forecast || kept.forecast.hours.length === 0) {
-    throw new AppError('unavailable', kept.error ?? 'There are no hours of weather to look back on yet.');
+    throw new AppError('unavailable', kept.error ?? ASK_ERRORS.noHours);
   }
   return kept.forecast;
 }

@@ -7,12 +7,13 @@ import { rankWeek } from '@/core/week';
 import { windowsFrom } from '@/core/windows';
 import { readQuotaCautions } from '@/features/harvest/quota-cautions';
 import type { ClubScope } from '@/server/scope';
+import { drawBars, drawShades } from './draw-mini-strip';
 import { forecastReaches, forecastView, loadForecast } from './load-forecast';
 import { loadOpenWeek, type OpenStands, readerOf, windowKey } from './load-open';
 import { loadScoring } from './load-scoring';
 import { clubView, type ReadOptions, type SitsAsk, windowToPick } from './reads';
 import { orNull, round1, round3 } from './view';
-import type { WeekCell, WeekColumnView, WeekView } from './view-types';
+import type { StripShade, WeekCell, WeekColumnView, WeekView } from './view-types';
 
 /** A forecast runs a week or two; without one a week is shown all the same. */
 const MOST_WINDOWS = 16;
@@ -20,14 +21,14 @@ const LEAST_WINDOWS = 14;
 
 /** Winds as they are told once: stands of one height and shelter share them. */
 class Strips {
-  readonly list: number[][] = [];
+  readonly list: StripShade[][] = [];
   private readonly known = new Map<string, number>();
 
   indexOf(shares: number[] | null): number | null {
     if (!shares) return null;
     const thousandths = shares.map((share) => Math.round(share * 1000));
     const key = thousandths.join();
-    const index = this.known.get(key) ?? this.list.push(thousandths) - 1;
+    const index = this.known.get(key) ?? this.list.push(drawShades(thousandths.map((one) => one / 1000))) - 1;
     this.known.set(key, index);
     return index;
   }
@@ -91,7 +92,7 @@ export async function readWeek(
     stands: input.stands.map(({ id, name, arcs }) => ({
       standId: id,
       name,
-      arcs: { morning: arcsFor(arcs, 'morning'), evening: arcsFor(arcs, 'evening') },
+      bars: { morning: drawBars(arcsFor(arcs, 'morning')), evening: drawBars(arcsFor(arcs, 'evening')) },
     })),
     strips: strips.list,
     cautions: options.rules === 'leave_out' ? [] : await readQuotaCautions(scope, { day: first.day }),

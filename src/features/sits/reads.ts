@@ -22,6 +22,7 @@ import { loadScoring, type Scoring } from './load-scoring';
 import { shapeRows, sharedCautions } from './view';
 import type { ClubView, LightView, OwnSit, SitDetailView, SitsView, SkyView } from './view-types';
 import { weatherLines } from './weather-lines';
+import { MOON_WORDS } from './words/reads';
 import { legalLightText } from './words/terms';
 
 export interface SitsAsk {
@@ -62,7 +63,7 @@ export function askedWindow(scope: ClubScope, ask: SitsAsk, now: number): SitWin
 function skyOf(club: ScopeClub, window: SitWindow): SkyView {
   const moon = moonAt(window.startAt);
   const sun = sunTimes(window.day, club.zone, club.lat, club.lon);
-  return { ...sun, moon: `${moon.name}, ${Math.round(moon.litShare * 100)} % lit` };
+  return { ...sun, moon: MOON_WORDS.lit(moon.name, Math.round(moon.litShare * 100)) };
 }
 
 function lightOf(club: ScopeClub, day: string, weapon: Weapon | null): LightView | null {

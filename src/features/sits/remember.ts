@@ -14,7 +14,7 @@ export function keptWeapon(cookie: string | undefined): Weapon | undefined {
 export function keepWeapon(weapon: string): void {
   const age = weapon ? YEAR_SECONDS : 0;
   // biome-ignore lint/suspicious/noDocumentCookie: the Cookie Store API is missing from older phones
-  document.cookie = `${WEAPON_COOKIE}=${weapon}; path=/clubs; max-age=${age}; samesite=lax`;
+  document.cookie = [`${WEAPON_COOKIE}=${weapon}`, 'path=/clubs', `max-age=${age}`, 'samesite=lax'].join('; ');
 }
 
 export interface KeptWindow {

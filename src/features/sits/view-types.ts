@@ -214,6 +214,19 @@ export interface SitDetailView {
   mayMap: boolean;
 }
 
+/** One tone of a wind strip 72 wide. */
+export interface StripShade {
+  opacity: number;
+  /** Path of an SVG. */
+  d: string;
+}
+
+/** A good arc on it. */
+export interface StripBar {
+  x: number;
+  width: number;
+}
+
 export interface WeekCell {
   standId: string;
   open: boolean;
@@ -243,9 +256,9 @@ export interface WeekView {
   weapon: Weapon | null;
   weapons: Weapon[];
   forecast: ForecastView;
-  stands: { standId: string; name: string; arcs: Record<WindowName, Arc[]> }[];
-  /** Winds of sits, in thousandths over 72 bins; many stands share one. */
-  strips: number[][];
+  stands: { standId: string; name: string; bars: Record<WindowName, StripBar[]> }[];
+  /** Winds of sits as they are drawn; many stands share one. */
+  strips: StripShade[][];
   /** Quotas that are met, before anybody books. */
   cautions: CautionView[];
   columns: WeekColumnView[];

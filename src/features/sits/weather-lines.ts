@@ -1,8 +1,9 @@
 import { meanWind } from '@/core/circular';
 import type { Forecast, WeatherHour } from '@/core/condition-types';
 import { sectorName } from '@/core/sectors';
-import { formatSpeed, formatTemp, hPaToInHg, mmToIn, type Units } from '@/core/units';
+import { formatPressure, formatRain, formatSpeed, formatTemp, type Units } from '@/core/units';
 import type { WeatherView } from './view-types';
+import { WEATHER_WORDS as WORDS } from './words/reads';
 
 const HOUR_MS = 3_600_000;
 /** Under this an hour's rain only wets the leaves. */
@@ -18,12 +19,12 @@ function given(hours: WeatherHour[], pick: (hour: WeatherHour) => number | null)
 function range(values: number[], format: (value: number) => string): string {
   const [low, high] = [format(Math.min(...values)), format(Math.max(...values))];
   if (low === high) return high;
-  return `${low.replace(/ .*$/, '')}${low.startsWith('-') ? ' to ' : '–'}${high}`;
+  return `${low.replace(/ .*$/, '')}${low.startsWith('-') ? WORDS.to : '–'}${high}`;
 }
 
 function windLine(hours: WeatherHour[], units: Units): string {
   const speeds = given(hours, (hour) => hour.windSpeedMps);
-  if (speeds.length === 0) return 'Wind not given';
+  if (speeds.length === 0) return WORDS.noWind;
   const speed = range(speeds, (value) => formatSpeed(value, units));
   const winds = hours.flatMap(({ windFromDeg, windSpeedMps }) =>
     windFromDeg === null || !windSpeedMps ? [] : [{ fromDeg: windFromDeg, speed: windSpeedMps }],
@@ -33,19 +34,18 @@ function windLine(hours: WeatherHour[], units: Units): string {
   // Winds that cancel out, or hours without a direction, leave no direction to name.
   const settled = mean.fromDeg !== null && mean.speed * winds.length > 0.4 * typical * hours.length;
   const gust = Math.max(0, ...given(hours, (hour) => hour.gustMps));
-  const gusts = gust > Math.max(...speeds) ? `, gusts ${formatSpeed(gust, units)}` : '';
-  if (Math.max(...speeds) < 0.5) return `Calm${gusts}`;
-  return `${settled && mean.fromDeg !== null ? sectorName(mean.fromDeg) : 'Variable'} ${speed}${gusts}`;
+  const gusts = gust > Math.max(...speeds) ? WORDS.gusts(formatSpeed(gust, units)) : '';
+  if (Math.max(...speeds) < 0.5) return WORDS.calm(gusts);
+  return WORDS.wind(settled && mean.fromDeg !== null ? sectorName(mean.fromDeg) : WORDS.variable, speed, gusts);
 }
 
 function airLine(hours: WeatherHour[], units: Units): string {
   const temps = given(hours, (hour) => hour.tempC);
   const rain = given(hours, (hour) => hour.precipMm).reduce((sum, mm) => sum + mm, 0);
-  const amount = units === 'us' ? `${mmToIn(rain).toFixed(2)} in` : `${rain.toFixed(1)} mm`;
   const parts = [
     temps.length > 0 ? range(temps, (value) => formatTemp(value, units)) : null,
-    rain >= TRACE_MM ? `rain ${amount}` : 'dry',
-    hours.some((hour) => hour.thunder) ? 'thunder' : null,
+    rain >= TRACE_MM ? WORDS.rain(formatRain(rain, units)) : WORDS.dry,
+    hours.some((hour) => hour.thunder) ? WORDS.thunder : null,
   ];
   return parts.filter((part) => part !== null).join(', ');
 }
@@ -55,8 +55,8 @@ function barometerLine(hours: WeatherHour[], units: Units): string | null {
   const [first, last] = [values[0], values.at(-1)];
   if (first === undefined || last === undefined) return null;
   const change = last - first;
-  const trend = Math.abs(change) < STEADY_HPA ? 'steady' : change > 0 ? 'rising' : 'falling';
-  return units === 'us' ? `${hPaToInHg(last).toFixed(2)} in, ${trend}` : `${Math.round(last)} hPa, ${trend}`;
+  const trend = Math.abs(change) < STEADY_HPA ? WORDS.steady : change > 0 ? WORDS.rising : WORDS.falling;
+  return WORDS.barometer(formatPressure(last, units), trend);
 }
 
 /** The open weather of a span at the club; null when the forecast holds no hour of it. */

@@ -1,5 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import { joinClasses } from '../join-classes';
+import { CHART_WORDS } from '../words/tables';
 
 export interface RangeRow {
   key: string;
@@ -43,10 +44,8 @@ export function RangeChart({ title, unit, rows, className }: RangeChartProps) {
   const { scale, ticks, tickText } = rangeScale(rows);
   return (
     <figure className={className}>
-      <figcaption className="mb-2 text-ink-soft text-sm">
-        {title} Bar: {unit}. Line: 95 % interval.
-      </figcaption>
-      <div role="img" aria-label={`Chart: ${title} The table says the same.`}>
+      <figcaption className="mb-2 text-ink-soft text-sm">{CHART_WORDS.legend(title, unit)}</figcaption>
+      <div role="img" aria-label={CHART_WORDS.name(title)}>
         <div className="flex flex-col gap-2 sm:gap-1" aria-hidden="true">
           {rows.map((row) => (
             <div

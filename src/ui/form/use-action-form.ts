@@ -4,6 +4,7 @@ import { zodResolver } from '@hookform/resolvers/zod';
 import { type SubmitEvent, useEffect, useState } from 'react';
 import { type DefaultValues, type FieldErrors, type FieldValues, type Path, useForm } from 'react-hook-form';
 import type { z } from 'zod';
+import { FORM_WORDS } from '../words/forms';
 
 /** What a server action answers. */
 export type ActionAnswer<T> =
@@ -25,7 +26,6 @@ interface NamedError {
 }
 
 const WHOLE_FORM = 'root.server';
-const LOST = 'The server could not be reached. What you typed is still here: try again.';
 
 /** react-hook-form's tree of errors as a list, with the path of each field. */
 export function listErrors(errors: object, path: string[] = []): NamedError[] {
@@ -60,7 +60,7 @@ export function useActionForm<Values extends FieldValues, T>(options: ActionForm
   const send = form.handleSubmit(
     async (values) => {
       const answer = await submit(values).catch(() => null);
-      if (!answer) return refuse({ message: LOST });
+      if (!answer) return refuse({ message: FORM_WORDS.lost });
       if (!answer.ok) return refuse(answer.error);
       setSummary([]);
       await onDone?.(answer.data);

@@ -2,6 +2,7 @@
 
 import { useEffect, useState } from 'react';
 import { NoSignalSign } from '../signs';
+import { OFFLINE_WORDS } from '../words/offline';
 import { useOnline } from './use-online';
 
 /** Says that there is no signal, or that this page is a kept copy, and of when it is. */
@@ -19,7 +20,8 @@ export function OfflineMark({ asOf }: { asOf: string }) {
     <p role="status" className="flex items-center gap-1.5 border border-rule-strong px-2 py-1 text-xs leading-tight">
       <NoSignalSign className="size-4 shrink-0" />
       <span>
-        <strong className="font-semibold">{online ? 'Kept copy' : 'No signal'}</strong>, as of{' '}
+        <strong className="font-semibold">{online ? OFFLINE_WORDS.kept : OFFLINE_WORDS.noSignal}</strong>
+        {OFFLINE_WORDS.asOf}
         <span className="whitespace-nowrap">{asOf}</span>
       </span>
     </p>

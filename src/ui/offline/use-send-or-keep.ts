@@ -2,6 +2,7 @@
 
 import { useCallback } from 'react';
 import { newRequestKey } from '@/lib/request-key';
+import { KEPT_WORDS } from '../words/offline';
 import { useKeptAccount } from './account';
 import { type Press, sendOrKeep } from './send-or-keep';
 import { waitingStore } from './waiting-store';
@@ -9,7 +10,7 @@ import { waitingStore } from './waiting-store';
 /** A signal of one bar may never answer. */
 const PATIENCE_MS = 15_000;
 
-export const KEPT_TOAST = { title: 'Kept on this device', text: 'It is sent as soon as there is a signal.' };
+export const KEPT_TOAST = KEPT_WORDS;
 
 export function useSendOrKeep() {
   const account = useKeptAccount();

@@ -1,4 +1,5 @@
 import { sectorName } from '@/core/sectors';
+import { COMPASS_WORDS } from '../words/wind';
 
 export interface CompassMarkProps {
   /** Degrees true the arrow points to; null: every way. */
@@ -13,7 +14,9 @@ export interface CompassMarkProps {
 export function CompassMark({ bearingDeg, label, size = 24, className }: CompassMarkProps) {
   const text =
     label ??
-    (bearingDeg === null ? 'Faces every way' : `Faces ${sectorName(bearingDeg)}, ${Math.round(bearingDeg) % 360}°`);
+    (bearingDeg === null
+      ? COMPASS_WORDS.everyWay
+      : COMPASS_WORDS.faces(sectorName(bearingDeg), Math.round(bearingDeg) % 360));
   return (
     <svg viewBox="-14 -14 28 28" width={size} height={size} role="img" aria-label={text} className={className}>
       <title>{text}</title>

@@ -1,3 +1,4 @@
+import { TIMELINE_WORDS as WORDS } from '../words/wind';
 import { percent } from './strip-shares';
 
 /** The part of a sit's half hour that the timeline draws. Chances and shares 0-1; null: no forecast. */
@@ -28,15 +29,13 @@ export function describeTimeline(spans: readonly TimelineSpan[], formatClock: (a
   const high = winded.reduce<(typeof winded)[number] | null>((a, b) => (a && a.value >= b.value ? a : b), null);
   const first = holds[0];
   if (low && first) {
-    parts.push(
-      `Arc hold ${percent(first.value)} at ${formatClock(first.at)}, lowest ${percent(low.value)} at ${formatClock(low.at)}`,
-    );
-  } else parts.push('No wind forecast');
-  if (high) parts.push(`chance of being winded at most ${percent(high.value)} a half hour, at ${formatClock(high.at)}`);
+    parts.push(WORDS.hold(percent(first.value), formatClock(first.at), percent(low.value), formatClock(low.at)));
+  } else parts.push(WORDS.noForecast);
+  if (high) parts.push(WORDS.winded(percent(high.value), formatClock(high.at)));
   const sun = spans.filter((span) => span.sunInEyes).map((span) => formatClock(span.at));
-  if (sun.length > 0) parts.push(`sun in the eyes ${sun.join(', ')}`);
+  if (sun.length > 0) parts.push(WORDS.sun(sun.join(', ')));
   const wet = spans.filter(isWet).map((span) => formatClock(span.at));
-  if (wet.length > 0) parts.push(`rain ${wet.join(', ')}`);
+  if (wet.length > 0) parts.push(WORDS.rain(wet.join(', ')));
   return parts.join('; ');
 }
 

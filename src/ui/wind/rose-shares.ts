@@ -1,4 +1,5 @@
 import { SECTOR_WIDTH_DEG, SECTORS } from '@/core/sectors';
+import { ROSE_WORDS } from '../words/wind';
 import { BIN_DEG, percent } from './strip-shares';
 
 /** 72 bins of 5 degrees gathered into the 16 compass points; a bin cut by a sector's bound is split by width. */
@@ -20,9 +21,9 @@ export function describeRose(sectorShares: readonly number[], calmShare = 0): st
   const told = SECTORS.map(({ name, index }) => ({ name, share: sectorShares[index] ?? 0 }))
     .filter(({ share }) => share >= 0.005)
     .sort((a, b) => b.share - a.share);
-  const calm = calmShare >= 0.005 ? `; calm ${percent(calmShare)}` : '';
-  if (told.length === 0) return calmShare >= 0.005 ? `Calm ${percent(calmShare)}` : 'No wind on record';
-  return `Wind from ${told.map(({ name, share }) => `${name} ${percent(share)}`).join(', ')}${calm}`;
+  const calm = calmShare >= 0.005 ? percent(calmShare) : null;
+  if (told.length === 0) return calm ? ROSE_WORDS.calm(calm) : ROSE_WORDS.none;
+  return ROSE_WORDS.from(told.map(({ name, share }) => `${name} ${percent(share)}`).join(', '), calm);
 }
 
 /** Step between a rose's rings so that two to four are drawn up to the fullest petal. */

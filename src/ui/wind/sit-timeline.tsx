@@ -1,4 +1,5 @@
 import { joinClasses } from '../join-classes';
+import { TIMELINE_WORDS as WORDS } from '../words/wind';
 import { describeTimeline, isWet, type TimelineSpan, windedLine } from './describe-timeline';
 import { percent } from './strip-shares';
 
@@ -23,9 +24,7 @@ export function SitTimeline({ steps, formatClock, marks = [], className }: SitTi
     .filter((mark) => mark.left >= 0 && mark.left <= 1);
   return (
     <figure className={joinClasses('text-sm', className)}>
-      <div
-        className={joinClasses('grid grid-cols-[2.5rem_minmax(0,1fr)] gap-x-2', placed.length > 0 ? 'pt-5' : 'pt-1')}
-      >
+      <div className={joinClasses('grid beside gap-x-2', placed.length > 0 ? 'pt-5' : 'pt-1')}>
         <div
           aria-hidden="true"
           className="flex h-28 flex-col justify-between text-right text-ink-soft text-xs leading-none"
@@ -172,23 +171,23 @@ function Key({ steps }: { steps: readonly TimelineSpan[] }) {
   return (
     <figcaption className="mt-1 flex flex-wrap gap-x-4 gap-y-0.5 text-ink-soft">
       <span className="flex items-center gap-1.5">
-        <span aria-hidden="true" className="inline-block h-3 w-4 border-ink border-t-[3px] bg-ink/15" />
-        wind in the good arcs
+        <span aria-hidden="true" className="inline-block h-3 w-4 border-ink border-t-3 bg-ink/15" />
+        {WORDS.keyArcs}
       </span>
       <span className="flex items-center gap-1.5">
         <span aria-hidden="true" className="inline-flex h-0.5 w-5 items-center justify-center bg-clay">
           <span className="size-1.5 rounded-full bg-clay" />
         </span>
-        chance of being winded
+        {WORDS.keyWinded}
       </span>
       {steps.some((step) => step.sunInEyes) && (
         <span className="flex items-center gap-1">
-          <SunSign /> sun in the eyes
+          <SunSign /> {WORDS.keySun}
         </span>
       )}
       {steps.some(isWet) && (
         <span className="flex items-center gap-1">
-          <RainSign /> rain
+          <RainSign /> {WORDS.keyRain}
         </span>
       )}
     </figcaption>
@@ -206,15 +205,15 @@ function TimelineTable({
   return (
     <details className="mt-1">
       <summary className="inline-block min-h-11 py-2.5 underline decoration-rule-strong underline-offset-4">
-        The same as a table
+        {WORDS.asTable}
       </summary>
       <table className="w-full border-collapse">
         <thead>
           <tr className="border-rule-strong border-b text-left align-bottom">
-            <th scope="col">Time</th>
-            <th scope="col">In arcs</th>
-            <th scope="col">Winded</th>
-            <th scope="col">Notes</th>
+            <th scope="col">{WORDS.time}</th>
+            <th scope="col">{WORDS.inArcs}</th>
+            <th scope="col">{WORDS.windedHead}</th>
+            <th scope="col">{WORDS.notes}</th>
           </tr>
         </thead>
         <tbody className="divide-y divide-rule">
@@ -226,7 +225,7 @@ function TimelineTable({
               <td>{share(step.arcHold)}</td>
               <td>{share(step.windedChance)}</td>
               <td>
-                {[step.sunInEyes && 'sun in the eyes', isWet(step) && `rain ${step.precipMm} mm`, step.note]
+                {[step.sunInEyes && WORDS.keySun, isWet(step) && WORDS.rainMm(step.precipMm), step.note]
                   .filter(Boolean)
                   .join('; ')}
               </td>

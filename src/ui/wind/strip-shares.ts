@@ -3,6 +3,7 @@ import { compassSpan, mergeArcs } from '@/core/arcs';
 import { circularMean } from '@/core/circular';
 import type { Arc } from '@/core/ground-types';
 import { SECTOR_WIDTH_DEG, type SectorName, sectorName } from '@/core/sectors';
+import { STRIP_WORDS } from '../words/wind';
 
 /** Bins of a direction histogram: bin i holds directions from 5i up to 5i + 5 degrees. */
 export const BIN_COUNT = 72;
@@ -80,19 +81,18 @@ export function percent(share: number): string {
 }
 
 export function nameArcs(arcs: readonly Arc[]): string {
-  return mergeArcs(arcs).map(compassSpan).join(' and ');
+  return mergeArcs(arcs).map(compassSpan).join(STRIP_WORDS.and);
 }
 
 /** The strip in words: 'Wind mostly NW, veering to N, 84 % in the good arcs NW-N'. */
 export function describeWindStrip({ arcs, rows }: { arcs: readonly Arc[]; rows: readonly StripRow[] }): string {
   const merged = mergeRows(rows);
-  const arcText = arcs.length === 0 ? 'no good arcs set' : `the good arcs ${nameArcs(arcs)}`;
-  if (!merged?.shares)
-    return arcs.length === 0 ? `No wind forecast; ${arcText}` : `No wind forecast; ${arcText} are set`;
+  const arcText = arcs.length === 0 ? STRIP_WORDS.noArcs : STRIP_WORDS.arcs(nameArcs(arcs));
+  if (!merged?.shares) return STRIP_WORDS.noForecast(arcText, arcs.length > 0);
   const name = settledName(merged.shares);
-  const wind = name ? `Wind mostly ${name}${describeTurn(rows)}` : 'Wind from no settled direction';
-  if (arcs.length === 0) return `${wind}; ${arcText}`;
-  return `${wind}, ${percent(holdOf(merged, arcs) ?? 0)} in ${arcText}`;
+  const wind = name ? STRIP_WORDS.mostly(name, describeTurn(rows)) : STRIP_WORDS.unsettled;
+  if (arcs.length === 0) return STRIP_WORDS.only(wind, arcText);
+  return STRIP_WORDS.share(wind, percent(holdOf(merged, arcs) ?? 0), arcText);
 }
 
 function describeTurn(rows: readonly StripRow[]): string {
@@ -102,5 +102,5 @@ function describeTurn(rows: readonly StripRow[]): string {
   if (first === null || last === null) return '';
   const turn = turnDeg(first, last);
   if (Math.abs(turn) < SECTOR_WIDTH_DEG) return '';
-  return `, ${turn > 0 ? 'veering' : 'backing'} to ${sectorName(last)}`;
+  return turn > 0 ? STRIP_WORDS.veering(sectorName(last)) : STRIP_WORDS.backing(sectorName(last));
 }

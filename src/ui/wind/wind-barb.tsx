@@ -1,5 +1,6 @@
 import { sectorName } from '@/core/sectors';
 import { mpsToKt } from '@/core/units';
+import { BARB_WORDS } from '../words/wind';
 import { barbMarks, barbParts, STAFF } from './barb-parts';
 
 export interface WindBarbProps {
@@ -14,8 +15,8 @@ export interface WindBarbProps {
 
 export function describeBarb(fromDeg: number | null, speedMps: number): string {
   const parts = barbParts(mpsToKt(speedMps));
-  if (parts.calm) return 'Calm';
-  return `${fromDeg === null ? 'Variable' : sectorName(fromDeg)} wind, ${parts.knots} kt`;
+  if (parts.calm) return BARB_WORDS.calm;
+  return BARB_WORDS.wind(fromDeg === null ? BARB_WORDS.variable : sectorName(fromDeg), parts.knots);
 }
 
 /** A standard wind barb: the staff points to where the wind comes from. */

@@ -1,5 +1,6 @@
 import type { Arc } from '@/core/ground-types';
 import { joinClasses } from '../join-classes';
+import { STRIP_PAGE_WORDS } from '../words/wind';
 import { round, shadePaths } from './strip-drawing';
 import { describeWindStrip, holdOf, percent, type StripRow, settledName, unrollArcs } from './strip-shares';
 
@@ -16,7 +17,7 @@ const HEIGHT = 20;
 
 /** Hours and minutes of the instant in UTC, for when no clock is given. */
 function utcClock(at: number): string {
-  return `${new Date(at).toISOString().slice(11, 16)} UTC`;
+  return STRIP_PAGE_WORDS.utc(new Date(at).toISOString().slice(11, 16));
 }
 
 /** The strip as a table: a row a step, its clock time before it and its share in the good arcs after it. */
@@ -32,9 +33,9 @@ export function WindStripPage({ arcs, rows, formatClock = utcClock, className }:
       </colgroup>
       <thead className="sr-only">
         <tr>
-          <th scope="col">Time</th>
-          <th scope="col">Wind from</th>
-          <th scope="col">In the good arcs</th>
+          <th scope="col">{STRIP_PAGE_WORDS.time}</th>
+          <th scope="col">{STRIP_PAGE_WORDS.windFrom}</th>
+          <th scope="col">{STRIP_PAGE_WORDS.inArcs}</th>
         </tr>
       </thead>
       <tbody>
@@ -66,7 +67,7 @@ export function WindStripPage({ arcs, rows, formatClock = utcClock, className }:
             </span>
           </td>
           <td className="text-right align-top text-ink-soft text-xs">
-            <span aria-hidden="true">in arcs</span>
+            <span aria-hidden="true">{STRIP_PAGE_WORDS.inArcsShort}</span>
           </td>
         </tr>
       </tfoot>
@@ -90,7 +91,9 @@ function StripTableRow({ row, arcs, spans, clock }: RowProps) {
         {clock}
       </th>
       <td className="px-2 py-0">
-        <span className="sr-only">{row.shares ? (name ?? 'no settled direction') : 'no forecast'}</span>
+        <span className="sr-only">
+          {row.shares ? (name ?? STRIP_PAGE_WORDS.unsettled) : STRIP_PAGE_WORDS.noForecast}
+        </span>
         <svg
           viewBox={`0 0 360 ${HEIGHT}`}
           preserveAspectRatio="none"

@@ -9,7 +9,7 @@ import { clockText } from '@/features/bookings/words/sits';
 import { clubNavItems } from '@/features/clubs/club-nav';
 import { ClubSwitch } from '@/features/clubs/components/club-switch';
 import { CLUB_SHELL_WORDS } from '@/features/clubs/words/pages';
-import { LateWaiting } from '@/features/offline/components/late-waiting';
+import { LateFrame } from '@/features/offline/components/late-frame';
 import { pagesToKeep } from '@/features/offline/keep-list';
 import { hashSecret } from '@/lib/secrets';
 import { now } from '@/server/clock';
@@ -20,9 +20,7 @@ import { FollowSun } from '@/ui/follow-sun';
 import { LIGHT_COOKIE, parseLight } from '@/ui/light';
 import { Menu } from '@/ui/menu';
 import { KeptAccount } from '@/ui/offline/account';
-import { KeepPages } from '@/ui/offline/keep-pages';
 import { OfflineMark } from '@/ui/offline/offline-mark';
-import { ZoneNote } from '@/ui/zone-note';
 import { resendAction } from '../../(account)/verify/actions';
 import { signInSitAction, signOutSitAction } from './board/actions';
 import { addVisitAction, saveLogAction } from './log/actions';
@@ -64,12 +62,15 @@ export default async function ClubLayout({ params, children }: ClubLayoutProps) 
         }
       >
         <FollowSun changes={lightBySun(at, scope.club)} />
-        <ZoneNote zone={zone} />
         {user.emailVerifiedAt === null && <ConfirmEmailNotice email={user.email} action={resendAction} />}
-        <LateWaiting zone={zone} units={units} actions={WAITING} />
+        <LateFrame
+          zone={zone}
+          units={units}
+          actions={WAITING}
+          pages={env.production ? pagesToKeep(slug, scope.can) : null}
+        />
         {children}
       </AppShell>
-      {env.production && <KeepPages pages={pagesToKeep(slug, scope.can)} />}
     </KeptAccount>
   );
 }

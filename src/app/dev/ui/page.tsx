@@ -1,11 +1,12 @@
-import { Armchair, CalendarRange, ClipboardList, Map as MapIcon, NotebookPen, TreePine, Users } from 'lucide-react';
 import type { Metadata } from 'next';
 import { cookies } from 'next/headers';
 import { notFound } from 'next/navigation';
 import { env } from '@/env';
 import { AppShell } from '@/ui/app-shell';
-import { LIGHT_COOKIE, LIGHT_NAMES, parseLight } from '@/ui/light';
+import { LIGHT_COOKIE, parseLight } from '@/ui/light';
 import { Badge, PageTitle } from '@/ui/page-parts';
+import { BoardSign, GroundSign, LogSign, PeopleSign, SeatSign, TreeSign, WeekSign } from '@/ui/page-signs';
+import { LIGHT_NAMES } from '@/ui/words/shell';
 import { ShowForms } from './show-forms';
 import { ShowParts } from './show-parts';
 import { ShowWind } from './show-wind';
@@ -13,13 +14,13 @@ import { ShowWind } from './show-wind';
 export const metadata: Metadata = { title: 'Parts of the look' };
 
 const ITEMS = [
-  { href: '/dev/ui', label: 'Sit', icon: <Armchair /> },
-  { href: '/dev/ui/week', label: 'Week', icon: <CalendarRange /> },
-  { href: '/dev/ui/board', label: 'Board', icon: <ClipboardList /> },
-  { href: '/dev/ui/ground', label: 'Ground', icon: <MapIcon /> },
-  { href: '/dev/ui/stands', label: 'Stands', icon: <TreePine /> },
-  { href: '/dev/ui/log', label: 'Log', icon: <NotebookPen /> },
-  { href: '/dev/ui/club', label: 'Club', icon: <Users /> },
+  { href: '/dev/ui', label: 'Sit', icon: <SeatSign /> },
+  { href: '/dev/ui/week', label: 'Week', icon: <WeekSign /> },
+  { href: '/dev/ui/board', label: 'Board', icon: <BoardSign /> },
+  { href: '/dev/ui/ground', label: 'Ground', icon: <GroundSign /> },
+  { href: '/dev/ui/stands', label: 'Stands', icon: <TreeSign /> },
+  { href: '/dev/ui/log', label: 'Log', icon: <LogSign /> },
+  { href: '/dev/ui/club', label: 'Club', icon: <PeopleSign /> },
 ];
 
 const SHOWN = ['day', 'dark', 'dim'] as const;

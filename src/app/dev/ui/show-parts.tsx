@@ -1,8 +1,22 @@
 import { Button } from '@/ui/button';
+import { RangeChart } from '@/ui/charts/range-chart';
 import { EmptyState, ErrorState, Loading, Notice } from '@/ui/notices';
 import { Badge, Card, DefinitionList, Section } from '@/ui/page-parts';
+import * as pageSigns from '@/ui/page-signs';
+import { Pager } from '@/ui/pager';
+import { ProgressBar } from '@/ui/progress-bar';
+import * as signs from '@/ui/signs';
 import { TabLinks } from '@/ui/tab-links';
+import { Wordmark } from '@/ui/wordmark';
 import { ShowOverlays, ShowTable } from './show-client-parts';
+
+const { drawn: _, ...ownSigns } = signs;
+const SIGNS = { ...ownSigns, ...pageSigns };
+
+const CHART = [
+  { key: 'n', label: 'North', range: { value: 1.2, low: 0.6, high: 2.1 }, text: '1.2 in 31 h' },
+  { key: 's', label: 'South', range: { value: 0.4, low: 0.1, high: 1.3 }, text: '0.4 in 12 h' },
+];
 
 export function ShowParts() {
   return (
@@ -47,6 +61,21 @@ export function ShowParts() {
           ]}
         />
         <ShowOverlays />
+      </Section>
+      <Section title="Signs">
+        <div className="flex flex-wrap items-center gap-3">
+          <Wordmark className="text-2xl" />
+          {Object.entries(SIGNS).map(([name, Sign]) => (
+            <Sign key={name} />
+          ))}
+        </div>
+      </Section>
+      <Section title="Pages of a list, work under way, a chart">
+        <div className="grid gap-4">
+          <Pager page={2} pages={3} hrefFor={(page) => `/dev/ui?page=${page}`} />
+          <ProgressBar label="Reading the file" share={0.4} />
+          <RangeChart title="Deer seen an hour, by wind." unit="deer an hour" rows={CHART} />
+        </div>
       </Section>
       <Section title="A table">
         <ShowTable />

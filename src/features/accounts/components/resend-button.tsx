@@ -3,7 +3,7 @@
 import { useState } from 'react';
 import { Button } from '@/ui/button';
 import type { ActionAnswer } from '@/ui/form/use-action-form';
-import { RESEND_WORDS } from '../words/forms';
+import { RESEND_WORDS } from '../words/resend';
 
 interface Props {
   action: (values: Record<string, never>) => Promise<ActionAnswer<{ email: string }>>;

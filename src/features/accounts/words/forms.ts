@@ -72,13 +72,6 @@ export const PASSWORD_WORDS = {
   change: 'Change the password',
 } as const;
 
-export const RESEND_WORDS = {
-  lost: 'The server could not be reached. Try again.',
-  sent: (email: string) => `Sent to ${email}. Only the newest link works.`,
-  sending: 'Sending…',
-  send: 'Send the link again',
-} as const;
-
 export const RESET_WORDS = {
   set: 'Set it and sign in',
 } as const;

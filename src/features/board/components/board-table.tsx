@@ -1,6 +1,6 @@
 'use client';
 
-import { Badge, type BadgeLook } from '@/ui/page-parts';
+import { Badge, type BadgeLook } from '@/ui/badge';
 import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { BoardSit } from '../reads';
 import { BOARD_ROW_WORDS as WORDS } from '../words/board';

@@ -1,11 +1,12 @@
 import type { ReactNode } from 'react';
 import { WindBarb } from '@/ui/wind/wind-barb';
 import type { GateSheet } from '../gate-sheet/read-gate-sheet';
+import { GATE_SITS_WORDS as SITS, GATE_WIND_WORDS as WIND, GATE_SHEET_WORDS as WORDS } from '../words/gate-sheet';
 import { SketchMap } from './sketch-map';
 
 const WALK_UPS = 5;
 const CELL = 'border border-ink px-1.5 py-1 align-top';
-const HEAD = `${CELL} text-left font-semibold text-[0.7rem] uppercase tracking-wide`;
+const HEAD = `${CELL} text-left font-semibold text-xs uppercase tracking-wide`;
 
 function Part({ title, children }: { title: string; children: ReactNode }) {
   return (
@@ -27,32 +28,30 @@ function Wide({ label, children }: { label: string; children: ReactNode }) {
 }
 
 function SitsTable({ sheet }: { sheet: GateSheet }) {
-  const blanks = Array.from({ length: WALK_UPS }, (_, index) => `walk-up ${index + 1}`);
+  const blanks = Array.from({ length: WALK_UPS }, (_, index) => index + 1);
   return (
-    <Wide label="Who is where, as a table">
-      <table className="w-full min-w-[44rem] border-collapse text-sm leading-snug print:min-w-0">
-        <caption className="sr-only">Booked sits, then blank lines for walk-ups</caption>
+    <Wide label={SITS.region}>
+      <table className="w-full min-w-176 border-collapse text-sm leading-snug print:min-w-0">
+        <caption className="sr-only">{SITS.caption}</caption>
         <thead>
           <tr>
-            <th className={HEAD}>Stand</th>
-            <th className={HEAD}>Who</th>
-            <th className={HEAD}>Window</th>
-            <th className={HEAD}>Parking, way in</th>
-            <th className={HEAD}>Back by</th>
-            <th className={`${HEAD} w-16`}>In</th>
-            <th className={`${HEAD} w-16`}>Out</th>
+            <th className={HEAD}>{SITS.stand}</th>
+            <th className={HEAD}>{SITS.who}</th>
+            <th className={HEAD}>{SITS.window}</th>
+            <th className={HEAD}>{SITS.way}</th>
+            <th className={HEAD}>{SITS.backBy}</th>
+            <th className={`${HEAD} w-16`}>{SITS.in}</th>
+            <th className={`${HEAD} w-16`}>{SITS.out}</th>
           </tr>
         </thead>
         <tbody>
           {sheet.sits.map((sit) => (
             <tr key={sit.id}>
               <th scope="row" className={`${CELL} text-left font-semibold`}>
-                {sheet.ground && `${sit.standNumber}. `}
-                {sit.standName}
+                {sheet.ground ? SITS.numbered(sit.standNumber, sit.standName) : sit.standName}
               </th>
               <td className={CELL}>
-                {sit.who}
-                {sit.guests && `, with ${sit.guests}`}
+                {SITS.withGuests(sit.who, sit.guests)}
                 <span className="block">{sit.weapon}</span>
               </td>
               <td className={CELL}>
@@ -68,7 +67,7 @@ function SitsTable({ sheet }: { sheet: GateSheet }) {
           {blanks.map((blank) => (
             <tr key={blank} className="h-8">
               <th scope="row" className={CELL}>
-                <span className="sr-only">Blank line for a {blank}</span>
+                <span className="sr-only">{SITS.blank(blank)}</span>
               </th>
               <td className={CELL} />
               <td className={CELL} />
@@ -86,18 +85,18 @@ function SitsTable({ sheet }: { sheet: GateSheet }) {
 
 function WindTable({ winds }: { winds: GateSheet['winds'] }) {
   const rows = [
-    { label: 'Wind', of: (wind: GateSheet['winds'][number]) => wind.wind },
-    { label: 'Gusts', of: (wind: GateSheet['winds'][number]) => wind.gust },
-    { label: 'Air', of: (wind: GateSheet['winds'][number]) => wind.temp },
-    { label: 'Rain', of: (wind: GateSheet['winds'][number]) => wind.rain },
+    { label: WIND.wind, of: (wind: GateSheet['winds'][number]) => wind.wind },
+    { label: WIND.gusts, of: (wind: GateSheet['winds'][number]) => wind.gust },
+    { label: WIND.air, of: (wind: GateSheet['winds'][number]) => wind.temp },
+    { label: WIND.rain, of: (wind: GateSheet['winds'][number]) => wind.rain },
   ];
   return (
-    <Wide label="Wind by hour, as a table">
-      <table className="w-full min-w-[52rem] table-fixed border-collapse text-center text-xs leading-tight print:min-w-0 print:text-[6.5pt]">
-        <caption className="sr-only">Wind by hour at the club</caption>
+    <Wide label={WIND.region}>
+      <table className="w-full hours-table min-w-208 table-fixed border-collapse text-center text-xs leading-tight print:min-w-0">
+        <caption className="sr-only">{WIND.caption}</caption>
         <thead>
           <tr>
-            <th className="w-10 border border-ink px-0.5 py-0.5 text-left">Hour</th>
+            <th className="w-10 border border-ink px-0.5 py-0.5 text-left">{WIND.hour}</th>
             {winds.map(({ at, clock }) => (
               <th key={at} className="border border-ink px-0.5 py-0.5">
                 {clock}
@@ -108,7 +107,7 @@ function WindTable({ winds }: { winds: GateSheet['winds'] }) {
         <tbody>
           <tr>
             <th scope="row" className="border border-ink px-0.5 text-left">
-              Barb
+              {WIND.barb}
             </th>
             {winds.map(({ at, fromDeg, speedMps, wind }) => (
               <td key={at} className="border border-ink">
@@ -134,8 +133,6 @@ function WindTable({ winds }: { winds: GateSheet['winds'] }) {
   );
 }
 
-const STATE = { free: '', booked: ' (booked)', closed: ' (closed)' } as const;
-
 /** One sheet of paper in black and white, for the gate. */
 export function GateSheetView({ sheet }: { sheet: GateSheet }) {
   const { ground } = sheet;
@@ -143,21 +140,17 @@ export function GateSheetView({ sheet }: { sheet: GateSheet }) {
     <article className="text-ink">
       <header className="flex flex-wrap items-baseline justify-between gap-x-6 border-ink border-b-2 pb-1">
         <p className="font-semibold font-serif text-2xl">{sheet.dayText}</p>
-        <p>
-          {sheet.clubName}. {sheet.madeText}
-        </p>
+        <p>{WORDS.made(sheet.clubName, sheet.madeText)}</p>
       </header>
-      <p className="mt-2 border-2 border-ink px-2 py-1 font-semibold text-sm">
-        This sheet and Windrest are no rescue service. When somebody is missing or hurt, call the emergency number.
-      </p>
-      <Part title="Who is where">
-        {sheet.sits.length === 0 && <p className="mb-2">Nobody has booked this day. Walk-ups sign below.</p>}
+      <p className="mt-2 border-2 border-ink px-2 py-1 font-semibold text-sm">{WORDS.noRescue}</p>
+      <Part title={WORDS.who}>
+        {sheet.sits.length === 0 && <p className="mb-2">{WORDS.nobody}</p>}
         <SitsTable sheet={sheet} />
       </Part>
       <div className="grid gap-x-8 sm:grid-cols-2 print:grid-cols-2">
-        <Part title="Closed">
+        <Part title={WORDS.closed}>
           {sheet.closed.length === 0 ? (
-            <p className="text-sm">Nothing is closed.</p>
+            <p className="text-sm">{WORDS.nothingClosed}</p>
           ) : (
             <ul className="list-disc pl-5 text-sm">
               {sheet.closed.map((line) => (
@@ -166,39 +159,32 @@ export function GateSheetView({ sheet }: { sheet: GateSheet }) {
             </ul>
           )}
         </Part>
-        <Part title="Sun and the club's light">
+        <Part title={WORDS.sun}>
           <p className="text-sm">{sheet.sun}</p>
           {sheet.light.map((line) => (
             <p key={line} className="mt-1 text-sm">
               {line}
             </p>
           ))}
-          {sheet.light.length === 0 && (
-            <p className="mt-1 text-sm">The club has written down no rule of light. State law decides.</p>
-          )}
+          {sheet.light.length === 0 && <p className="mt-1 text-sm">{WORDS.noLight}</p>}
         </Part>
       </div>
-      <Part title="Wind by hour">
+      <Part title={WORDS.wind}>
         {sheet.winds.length > 0 && <WindTable winds={sheet.winds} />}
         <p className="mt-1 text-sm">
           {sheet.forecastText}
-          {sheet.winds.length > 0 && ' The barb points to where the wind comes from; look at the trees all the same.'}
+          {sheet.winds.length > 0 && WORDS.barb}
         </p>
       </Part>
       {ground && (
-        <Part title="The ground">
+        <Part title={WORDS.ground}>
           <SketchMap sketch={ground.sketch} stands={ground.stands} />
           <ul className="mt-1 columns-2 gap-6 text-sm sm:columns-4 print:columns-4">
             {ground.stands.map(({ id, number, name, state }) => (
-              <li key={id}>
-                {number}. {name}
-                {STATE[state]}
-              </li>
+              <li key={id}>{WORDS.stand(number, name, state)}</li>
             ))}
           </ul>
-          <p className="mt-1 text-sm">
-            Black: booked. Crossed: closed. P: parking. Thin broken lines: ways in. Not to be measured from.
-          </p>
+          <p className="mt-1 text-sm">{WORDS.legend}</p>
         </Part>
       )}
     </article>

@@ -2,11 +2,11 @@
 
 import { CancelSitButton } from '@/features/bookings/components/cancel-sit-button';
 import type { CancelAction } from '@/features/bookings/components/cancel-sit-dialog';
+import { Badge } from '@/ui/badge';
 import { Button } from '@/ui/button';
 import { LazyDialog } from '@/ui/lazy-part';
 import { useWaiting } from '@/ui/offline/use-waiting';
 import type { WaitingItem } from '@/ui/offline/waiting-store';
-import { Badge } from '@/ui/page-parts';
 import type { Board, BoardSit } from '../reads';
 import { BOARD_ROW_WORDS, BOARD_BUTTON_WORDS as BUTTONS } from '../words/board';
 import type { BoardActions } from './board-actions';

@@ -49,7 +49,7 @@ function SignInForm({ club, sit, start, board, signIn, onClose }: SignInDialogPr
     <form {...formProps} className="grid gap-4">
       <FormErrorSummary errors={errors} />
       <GroundFields
-        register={(name) => (name.endsWith('Id') ? register(name, EMPTY_IS_NULL) : register(name))}
+        register={(name) => (/Id$/.test(name) ? register(name, EMPTY_IS_NULL) : register(name))}
         errorOf={errorOf}
         waysIn={start.waysIn}
         parkings={board.parkings}

@@ -1,5 +1,6 @@
 import type { GateStand } from '../gate-sheet/read-gate-sheet';
 import type { Sketch } from '../gate-sheet/sketch-ground';
+import { GATE_SHEET_WORDS } from '../words/gate-sheet';
 
 const LINES = {
   boundary: { strokeWidth: 2, strokeDasharray: '10 4 2 4' },
@@ -28,15 +29,14 @@ function StandMark({ x, y, stand }: { x: number; y: number; stand: GateStand }) 
 export function SketchMap({ sketch, stands }: { sketch: Sketch; stands: GateStand[] }) {
   const { width, height, scale } = sketch;
   const byId = new Map(stands.map((stand) => [stand.id, stand]));
-  const label = 'Sketch of the ground, north up: numbered stands, parking places, ways in. The list names the numbers.';
   return (
     <svg
       viewBox={`0 0 ${width} ${height + 26}`}
       role="img"
-      aria-label={label}
+      aria-label={GATE_SHEET_WORDS.sketch}
       className="h-auto w-full border border-ink bg-paper text-ink"
     >
-      <title>{label}</title>
+      <title>{GATE_SHEET_WORDS.sketch}</title>
       {sketch.lines.map(({ kind, path }) => (
         <path key={path} d={path} fill="none" stroke="currentColor" strokeLinejoin="round" {...LINES[kind]} />
       ))}
@@ -44,7 +44,7 @@ export function SketchMap({ sketch, stands }: { sketch: Sketch; stands: GateStan
         <g key={name} transform={`translate(${x} ${y})`}>
           <rect x={-7} y={-7} width={14} height={14} fill={PAPER} stroke="currentColor" strokeWidth={1.4} />
           <text y={4} fontSize={11} fontWeight={700} textAnchor="middle" fill="currentColor">
-            P
+            {GATE_SHEET_WORDS.parkingSign}
           </text>
           <text
             x={side === 'right' ? 11 : -11}
@@ -67,7 +67,7 @@ export function SketchMap({ sketch, stands }: { sketch: Sketch; stands: GateStan
       <g transform={`translate(22 ${height + 6})`}>
         <path d="M0 8V-12M-4-6L0-13L4-6" stroke="currentColor" strokeWidth={1.5} fill="none" />
         <text x={7} y={0} fontSize={11} fontWeight={700} fill="currentColor">
-          N
+          {GATE_SHEET_WORDS.north}
         </text>
       </g>
       {scale && (

@@ -81,7 +81,7 @@ function WalkUpForm({
       />
       <Select label={WALK_UP_WORDS.weapon} options={stand.weapons} {...register('weapon')} error={errorOf('weapon')} />
       <GroundFields
-        register={(name) => (name.endsWith('Id') ? register(name, EMPTY_IS_NULL) : register(name))}
+        register={(name) => (/Id$/.test(name) ? register(name, EMPTY_IS_NULL) : register(name))}
         errorOf={errorOf}
         waysIn={stand.waysIn}
         parkings={board.parkings}

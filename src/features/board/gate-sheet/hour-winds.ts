@@ -1,6 +1,7 @@
 import type { Forecast } from '@/core/condition-types';
 import { sectorName } from '@/core/sectors';
-import { formatSpeed, formatTemp, mmToIn, type Units } from '@/core/units';
+import { formatRain, formatSpeed, formatTemp, type Units } from '@/core/units';
+import { GATE_WIND_WORDS } from '../words/gate-sheet';
 
 export interface HourWind {
   at: number;
@@ -18,8 +19,11 @@ const CALM_MPS = 0.3;
 const TRACE_MM = 0.1;
 
 function windWords(fromDeg: number | null, speedMps: number, units: Units): string {
-  if (speedMps < CALM_MPS) return 'calm';
-  return `${fromDeg === null ? 'variable' : sectorName(fromDeg)} ${formatSpeed(speedMps, units)}`;
+  if (speedMps < CALM_MPS) return GATE_WIND_WORDS.calm;
+  return GATE_WIND_WORDS.windOf(
+    fromDeg === null ? GATE_WIND_WORDS.variable : sectorName(fromDeg),
+    formatSpeed(speedMps, units),
+  );
 }
 
 /** The forecast's hours of a span that give a wind, in words. */
@@ -31,8 +35,6 @@ export function hourWinds(
   return (forecast?.hours ?? []).flatMap((hour) => {
     const { at, windFromDeg: fromDeg, windSpeedMps: speedMps, gustMps, tempC, precipMm } = hour;
     if (at < span.startAt || at > span.endAt || speedMps === null) return [];
-    const rain =
-      precipMm === null ? '' : units === 'us' ? `${mmToIn(precipMm).toFixed(2)} in` : `${precipMm.toFixed(1)} mm`;
     return [
       {
         at,
@@ -41,7 +43,7 @@ export function hourWinds(
         wind: windWords(fromDeg, speedMps, units),
         gust: gustMps === null ? '' : formatSpeed(gustMps, units),
         temp: tempC === null ? '' : formatTemp(tempC, units),
-        rain: (precipMm ?? 0) >= TRACE_MM ? rain : '–',
+        rain: precipMm !== null && precipMm >= TRACE_MM ? formatRain(precipMm, units) : '–',
       },
     ];
   });

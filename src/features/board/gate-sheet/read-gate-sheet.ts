@@ -15,6 +15,7 @@ import { expectedBackBy } from '@/features/outings/walk-out';
 import { loadForecast } from '@/features/sits/load-forecast';
 import { ageText, legalLightText } from '@/features/sits/words/terms';
 import type { ClubScope } from '@/server/scope';
+import { GATE_DAY_WORDS as WORDS } from '../words/gate-sheet';
 import { type HourWind, hourWinds } from './hour-winds';
 import { type Sketch, sketchGround } from './sketch-ground';
 
@@ -66,17 +67,17 @@ const shortHour = (text: string) => text.replace(':00', '');
 function sunText(scope: ClubScope, day: string): string {
   const { club } = scope;
   const { rise, set, civilDawn, civilDusk, polar } = sunTimes(day, club.zone, club.lat, club.lon);
-  if (polar === 'up_all_day') return 'The sun does not set.';
-  if (polar === 'down_all_day' || rise === null || set === null) return 'The sun does not rise.';
+  if (polar === 'up_all_day') return WORDS.neverSets;
+  if (polar === 'down_all_day' || rise === null || set === null) return WORDS.neverRises;
   const say = (at: number | null) => (at === null ? '–' : clockText(at, club));
-  return `Up ${say(rise)}, down ${say(set)}. First light ${say(civilDawn)}, last light ${say(civilDusk)} (civil twilight).`;
+  return WORDS.sun({ rise: say(rise), set: say(set), dawn: say(civilDawn), dusk: say(civilDusk) });
 }
 
 function lightLines(scope: ClubScope, day: string): string[] {
   const { club } = scope;
   return club.rules.legalLight.flatMap((rule) => {
     const span = legalLight(rule, day, club);
-    return span ? [`${rule.name}: ${spanText(span.startAt, span.endAt, club)}. ${legalLightText(rule)}`] : [];
+    return span ? [WORDS.light(rule.name, spanText(span.startAt, span.endAt, club), legalLightText(rule))] : [];
   });
 }
 
@@ -153,7 +154,7 @@ export async function readGateSheet(scope: ClubScope, day: string, now: number):
     endAt: (evening?.endAt ?? now) + HOUR_MS,
   };
   const winds = hourWinds(kept.forecast, span, club.units);
-  const known = kept.ageMs === null ? null : `Forecast fetched ${ageText(kept.ageMs)}.`;
+  const known = kept.ageMs === null ? null : WORDS.fetched(ageText(kept.ageMs));
   const names = new Map(loaded.stands.map(({ id, name }) => [id, name]));
   return {
     clubName: club.name,
@@ -161,16 +162,16 @@ export async function readGateSheet(scope: ClubScope, day: string, now: number):
     dayText: formatDay(day, true),
     before: addDays(day, -1),
     after: addDays(day, 1),
-    madeText: `Made ${clockText(now, club)}. Whatever is booked later is not on it.`,
+    madeText: WORDS.made(clockText(now, club)),
     sits: loaded.sits.map((sit) => gateSit(scope, loaded, sit)),
     closed: loaded.closures.map(({ standId, reason, toDay }) => {
-      const what = standId === null ? 'The whole ground' : (names.get(standId) ?? 'A stand');
-      return `${what}: ${reason} (${toDay === null ? 'until opened again' : `to ${formatDay(toDay)}`})`;
+      const what = standId === null ? WORDS.wholeGround : (names.get(standId) ?? WORDS.someStand);
+      return WORDS.closed(what, reason, toDay === null ? null : formatDay(toDay));
     }),
     sun: sunText(scope, day),
     light: lightLines(scope, day),
     winds: winds.map((wind) => ({ ...wind, clock: shortHour(clockText(wind.at, club)) })),
-    forecastText: winds.length > 0 ? (known ?? '') : 'No forecast reaches this day.',
+    forecastText: winds.length > 0 ? (known ?? '') : WORDS.noForecast,
     ground: scope.can('stands.read') ? await groundOf(scope, loaded) : null,
   };
 }

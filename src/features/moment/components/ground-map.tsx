@@ -13,11 +13,12 @@ import type { MomentAsk } from '../ask-moment';
 import type { MomentView } from '../moment-types';
 import { momentAsked } from '../queries';
 import { weightOf } from '../stretch-view';
+import { GROUND_MAP_WORDS } from '../words';
 import { MomentPanel } from './moment-panel';
 
 const MapScreen = dynamic(() => import('@/features/map/components/map-screen').then((part) => part.MapScreen), {
   ssr: false,
-  loading: () => <Loading label="Unfolding the map" />,
+  loading: () => <Loading label={GROUND_MAP_WORDS.unfolding} />,
 });
 
 export interface GroundMapProps {
@@ -56,7 +57,7 @@ export function GroundMap({ packed, zone, save, selectedId, next }: GroundMapPro
   const overlay = useMemo(() => (view ? overlayOf(view) : null), [view]);
   const panel =
     stands.length === 0 ? (
-      <EmptyState title="No stands yet">Draw a stand first: a moment is looked at from its seat.</EmptyState>
+      <EmptyState title={GROUND_MAP_WORDS.noStandsTitle}>{GROUND_MAP_WORDS.noStands}</EmptyState>
     ) : (
       <MomentPanel
         ask={ask}
@@ -73,7 +74,7 @@ export function GroundMap({ packed, zone, save, selectedId, next }: GroundMapPro
       initial={initial}
       save={save}
       selectedId={selectedId}
-      moment={{ label: 'For a moment', panel, overlay, open, onOpen: setOpen }}
+      moment={{ label: GROUND_MAP_WORDS.moment, panel, overlay, open, onOpen: setOpen }}
     />
   );
 }

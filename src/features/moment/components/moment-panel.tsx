@@ -1,6 +1,6 @@
 'use client';
 
-import { WINDOW_NAMES, type WindowName } from '@/core/condition-types';
+import { WINDOW_NAMES } from '@/core/condition-types';
 import { addDays, formatClock, formatClock12, formatDay } from '@/core/day-time';
 import { sectorName } from '@/core/sectors';
 import { formatDistance, formatSpeed, type Units } from '@/core/units';
@@ -12,6 +12,13 @@ import { CompassMark } from '@/ui/wind/compass-mark';
 import type { MomentAsk } from '../ask-moment';
 import type { MomentView } from '../moment-types';
 import { costlyRuns } from '../stretch-view';
+import {
+  MOMENT_COST_WORDS as COSTS,
+  MOMENT_FACT_WORDS as FACTS,
+  MOMENT_SUN_WORDS,
+  MOMENT_WINDOWS,
+  MOMENT_WORDS as WORDS,
+} from '../words';
 
 export interface MomentPanelProps {
   ask: MomentAsk;
@@ -23,40 +30,39 @@ export interface MomentPanelProps {
   onRetry: () => void;
 }
 
-const WINDOW_WORDS: Record<WindowName, string> = { morning: 'Morning', evening: 'Evening' };
 const percent = (share: number) => `${Math.round(share * 100)} %`;
 
 function windText(wind: MomentView['wind'], units: Units): string {
-  if (!wind) return 'No forecast reaches this half hour';
+  if (!wind) return FACTS.noWind;
   const from =
-    wind.fromDeg === null
-      ? 'From no one direction'
-      : `From ${sectorName(wind.fromDeg)}, ${Math.round(wind.fromDeg) % 360}°`;
-  return wind.speedMps === null ? from : `${from}, ${formatSpeed(wind.speedMps, units)} at the seat`;
+    wind.fromDeg === null ? FACTS.noDirection : FACTS.from(sectorName(wind.fromDeg), Math.round(wind.fromDeg) % 360);
+  return wind.speedMps === null ? from : FACTS.atSeat(from, formatSpeed(wind.speedMps, units));
 }
 
 function sunText({ altitudeDeg, azimuthDeg, inEyes }: MomentView['sun']): string {
-  if (altitudeDeg < -6) return 'Down: night';
-  if (altitudeDeg < 0) return `Down: twilight in the ${sectorName(azimuthDeg)}`;
-  return `In the ${sectorName(azimuthDeg)}, ${Math.round(altitudeDeg)}° up${inEyes ? ', in your eyes' : ''}`;
+  if (altitudeDeg < -6) return MOMENT_SUN_WORDS.night;
+  if (altitudeDeg < 0) return MOMENT_SUN_WORDS.twilight(sectorName(azimuthDeg));
+  return MOMENT_SUN_WORDS.up(sectorName(azimuthDeg), Math.round(altitudeDeg), inEyes);
 }
 
 function Costs({ view, units }: { view: MomentView; units: Units }) {
-  if (!view.way) return <p>No way in is drawn for this stand.</p>;
+  if (!view.way) return <p>{COSTS.noWay}</p>;
   const runs = costlyRuns(view.way.stretches).slice(0, 4);
   return (
     <>
-      <p>
-        {view.way.name}: {percent(view.way.inChance)} to alert deer walking in.
-      </p>
+      <p>{COSTS.way(view.way.name, percent(view.way.inChance))}</p>
       {runs.length === 0 ? (
-        <p className="text-ink-soft">No piece of it costs more than another.</p>
+        <p className="text-ink-soft">{COSTS.even}</p>
       ) : (
         <ul className="list-disc pl-5">
           {runs.map((run) => (
             <li key={run.startM}>
-              {formatDistance(run.startM, units)} to {formatDistance(run.endM, units)} in: {percent(run.chance)}
-              {run.worst && `, at ${run.worst}`}
+              {COSTS.run(
+                formatDistance(run.startM, units),
+                formatDistance(run.endM, units),
+                percent(run.chance),
+                run.worst,
+              )}
             </li>
           ))}
         </ul>
@@ -74,7 +80,7 @@ export function MomentPanel({ ask, stands, club, view, error, onAsk, onRetry }: 
   const facts: Definition[] = view
     ? [
         {
-          term: 'Wind',
+          term: FACTS.wind,
           detail: (
             <span className="inline-flex items-center gap-2">
               {view.wind?.fromDeg != null && (
@@ -87,40 +93,38 @@ export function MomentPanel({ ask, stands, club, view, error, onAsk, onRetry }: 
           ),
         },
         {
-          term: 'Scent',
-          detail: view.winded
-            ? `${percent(view.winded.chance)} to be winded in this half hour${view.winded.most ? `, most at ${view.winded.most}` : ''}`
-            : 'Not known',
+          term: FACTS.scent,
+          detail: view.winded ? FACTS.winded(percent(view.winded.chance), view.winded.most) : FACTS.notKnown,
         },
-        { term: 'Sun', detail: sunText(view.sun) },
-        { term: 'Walk in', detail: <Costs view={view} units={club.units} /> },
+        { term: FACTS.sun, detail: sunText(view.sun) },
+        { term: FACTS.walk, detail: <Costs view={view} units={club.units} /> },
         {
-          term: 'Who sits',
+          term: FACTS.sitters,
           detail:
             view.sitters.length === 0
-              ? 'Nobody has booked this window'
-              : view.sitters.map((sitter) => `${sitter.name} at ${sitter.standName}`).join(', '),
+              ? FACTS.nobody
+              : view.sitters.map((sitter) => FACTS.sits(sitter.name, sitter.standName)).join(', '),
         },
       ]
     : [];
   return (
     <div className="grid gap-4">
       <Select
-        label="Stand"
+        label={WORDS.stand}
         options={stands.map(({ id, name }) => ({ value: id, label: name }))}
         value={ask.stand}
         onChange={({ target }) => onAsk({ ...ask, stand: target.value, step: 0 })}
       />
       <div className="grid grid-cols-2 gap-2">
         <DateInput
-          label="Day"
+          label={WORDS.day}
           value={ask.day}
           onChange={({ target }) => target.value && onAsk({ ...ask, day: target.value, step: 0 })}
         />
         <Select
-          label="Window"
+          label={WORDS.window}
           value={ask.window}
-          options={WINDOW_NAMES.map((value) => ({ value, label: WINDOW_WORDS[value] }))}
+          options={WINDOW_NAMES.map((value) => ({ value, label: MOMENT_WINDOWS[value] }))}
           onChange={({ target }) => {
             const window = WINDOW_NAMES.find((one) => one === target.value);
             if (window) onAsk({ ...ask, window, step: 0 });
@@ -129,14 +133,14 @@ export function MomentPanel({ ask, stands, club, view, error, onAsk, onRetry }: 
       </div>
       <div className="flex gap-2">
         <Button look="quiet" onClick={() => onAsk({ ...ask, day: addDays(ask.day, -1), step: 0 })}>
-          ‹ Day before
+          {WORDS.dayBefore}
         </Button>
         <Button look="quiet" onClick={() => onAsk({ ...ask, day: addDays(ask.day, 1), step: 0 })}>
-          Day after ›
+          {WORDS.dayAfter}
         </Button>
       </div>
       <label className="block">
-        <span className="font-semibold">Half hour from {spoken || 'the start'}</span>
+        <span className="font-semibold">{WORDS.halfHour(spoken)}</span>
         <input
           type="range"
           className="mt-1 block h-11 w-full accent-moss"
@@ -149,29 +153,26 @@ export function MomentPanel({ ask, stands, club, view, error, onAsk, onRetry }: 
         />
       </label>
       <Select
-        label="Or choose the time"
+        label={WORDS.orChoose}
         value={String(step)}
         options={steps.map((at, i) => ({ value: String(i), label: clock(at) }))}
         onChange={({ target }) => onAsk({ ...ask, step: Number(target.value) })}
       />
       {error && (
-        <ErrorState title="This moment could not be read" action={<Button onClick={onRetry}>Try again</Button>}>
+        <ErrorState title={WORDS.failed} action={<Button onClick={onRetry}>{WORDS.again}</Button>}>
           {error}
         </ErrorState>
       )}
-      {!view && !error && <Loading label="Working it out" />}
+      {!view && !error && <Loading label={WORDS.working} />}
       {view && !view.wind && (
-        <Notice level="caution" title="No forecast">
-          Scent is not drawn for {formatDay(view.window.day)}: the forecast does not reach it.
+        <Notice level="caution" title={WORDS.noForecastTitle}>
+          {WORDS.noForecast(formatDay(view.window.day))}
         </Notice>
       )}
       {view && (
         <div aria-live="polite">
           <DefinitionList items={facts} />
-          <p className="mt-2 text-ink-soft text-sm">
-            Clay shading is where your scent would lie, the deeper the stronger: an index for comparing, no promise. The
-            walk is thicker where it costs more. The dashed line points at the sun.
-          </p>
+          <p className="mt-2 text-ink-soft text-sm">{WORDS.legend}</p>
         </div>
       )}
     </div>

@@ -12,6 +12,7 @@ import { queryClient } from '@/ui/query';
 import { useToast } from '@/ui/toast';
 import { flushWaiting } from '../flush-waiting';
 import type { WaitingActions } from '../send-waiting';
+import { WAITING_WORDS as WORDS } from '../words';
 
 /** Between tries while something waits and the device thinks that it has a signal. */
 const AGAIN_MS = 20_000;
@@ -38,7 +39,7 @@ function useFlush(actions: WaitingActions, items: WaitingItem[], online: boolean
       const done = await flushWaiting(waitingStore, account, (item) => sendWaiting(actions, item));
       setHeld(done.held);
       if (done.sent.length === 0) return;
-      toast({ title: 'Sent', text: `${done.sent.map((item) => item.label).join('; ')}.` });
+      toast({ title: WORDS.sent, text: WORDS.sentWhat(done.sent.map((item) => item.label)) });
       await queryClient().invalidateQueries();
     })();
     await flushing.catch(() => undefined);
@@ -58,17 +59,18 @@ function WaitingLine({ item, zone, units }: { item: WaitingItem } & Omit<Waiting
   return (
     <li className="py-2">
       <p>
-        <strong className="font-semibold">{item.label}</strong>, pressed at {clock}
+        <strong className="font-semibold">{item.label}</strong>
+        {WORDS.pressedAt(clock)}
       </p>
       {item.refused !== null && (
         <>
-          <p>Not taken: {item.refused}</p>
+          <p>{WORDS.notTaken(item.refused)}</p>
           <Button
             look="quiet"
-            aria-label={`Take off this list: ${item.label}`}
+            aria-label={WORDS.takeOffWhich(item.label)}
             onClick={() => void waitingStore.drop(item.key)}
           >
-            Take off this list
+            {WORDS.takeOff}
           </Button>
         </>
       )}
@@ -88,13 +90,8 @@ export function WaitingPanel({ zone, units, actions }: WaitingPanelProps) {
   return (
     <div className="mb-6 grid gap-3 print:hidden">
       {open.length > 0 && (
-        <Notice level="caution" live title="Waiting to be sent">
-          <p>
-            {held ??
-              (online
-                ? 'Being sent. You can go on.'
-                : 'Kept on this device and sent when there is a signal. Nobody else sees it yet: say it by voice if it matters now.')}
-          </p>
+        <Notice level="caution" live title={WORDS.waits}>
+          <p>{held ?? (online ? WORDS.beingSent : WORDS.kept)}</p>
           <ul>
             {open.map((item) => (
               <WaitingLine key={item.key} item={item} {...line} />
@@ -103,7 +100,7 @@ export function WaitingPanel({ zone, units, actions }: WaitingPanelProps) {
         </Notice>
       )}
       {refused.length > 0 && (
-        <Notice level="stop" live title="Sent, and not taken">
+        <Notice level="stop" live title={WORDS.refused}>
           <ul>
             {refused.map((item) => (
               <WaitingLine key={item.key} item={item} {...line} />

@@ -4,7 +4,7 @@ import { useEffect, useState } from 'react';
 import { TextLink } from '@/ui/button';
 import { type KeptWindow, keepWindow, readKeptWindow } from '../remember';
 import { sitAddress } from '../sit-address';
-import { BACK_WORDS } from '../words/list';
+import { BACK_WORDS } from '../words/rows';
 
 interface BackToWindowProps {
   club: string;

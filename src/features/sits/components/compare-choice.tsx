@@ -4,7 +4,7 @@ import { Suspense, useState } from 'react';
 import { makeLazy } from '@/ui/lazy-part';
 import { Select } from '@/ui/text-inputs';
 import { useToast } from '@/ui/toast';
-import { LAZY_WORDS } from '@/ui/words';
+import { LAZY_WORDS } from '@/ui/words/late';
 import type { SitsAskText } from '../ask-schema';
 import type { SitsBrief } from '../view-types';
 import { COMPARE_WORDS } from '../words/detail';

@@ -30,7 +30,7 @@ export function CompareDialog({ view, ask, standIds, onClose }: CompareDialogPro
       onOpenChange={(open) => !open && onClose()}
       title={WORDS.title}
       description={WORDS.about(windowTitle(formatDay(day), window))}
-      className="sm:w-[min(48rem,calc(100vw-3rem))]"
+      className="wide-sheet"
     >
       {first.data && second.data ? (
         <CompareTable view={view} pair={[first.data, second.data]} />
@@ -56,7 +56,7 @@ function CompareTable({ view, pair }: { view: SitsBrief; pair: [SitDetailView, S
       <caption className="sr-only">{WORDS.both(pair[0].name, pair[1].name)}</caption>
       <thead>
         <tr className="border-rule-strong border-b align-bottom">
-          <td className="w-[26%] py-1.5" />
+          <td className="w-1/4 py-1.5" />
           {pair.map(({ standId, name }) => (
             <th key={standId} scope="col" className="py-1.5 pl-3 text-left font-serif text-lg leading-snug">
               {name}

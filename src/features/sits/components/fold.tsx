@@ -2,7 +2,7 @@
 
 import { type ReactNode, useId, useState } from 'react';
 import { Button } from '@/ui/button';
-import { WINDOW_PICKER_WORDS } from '../words/list';
+import { FOLD_WORDS } from '../words/rows';
 
 /** Folded on a phone, so that the list comes first; a desk has room for all. */
 export function Fold({ beside, children }: { beside: ReactNode; children: ReactNode }) {
@@ -18,7 +18,7 @@ export function Fold({ beside, children }: { beside: ReactNode; children: ReactN
           aria-controls={id}
           onClick={() => setUnfolded(!unfolded)}
         >
-          {unfolded ? WINDOW_PICKER_WORDS.fold : WINDOW_PICKER_WORDS.unfold}
+          {unfolded ? FOLD_WORDS.fold : FOLD_WORDS.unfold}
         </Button>
         {beside}
       </div>

@@ -4,7 +4,7 @@ import { useRouter } from 'next/navigation';
 import { type ReactNode, useCallback, useEffect, useRef, useState } from 'react';
 import { getJson } from '@/lib/get-json';
 import { Button } from '@/ui/button';
-import { OLD_LIST_WORDS } from '../words/list';
+import { OLD_LIST_WORDS } from '../words/rows';
 
 /** A list looked at again sooner than this stays as it is. */
 const FRESH_MS = 30_000;

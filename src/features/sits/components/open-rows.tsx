@@ -4,11 +4,11 @@ import { createContext, type ReactNode, Suspense, useContext, useEffect, useStat
 import { Button } from '@/ui/button';
 import { type Closes, makeLazy } from '@/ui/lazy-part';
 import { useToast } from '@/ui/toast';
-import { LAZY_WORDS } from '@/ui/words';
+import { LAZY_WORDS } from '@/ui/words/late';
 import type { SitsAskText } from '../ask-schema';
 import type { BookActions, Hunter } from '../book-actions';
 import type { SitsBrief } from '../view-types';
-import { BOOK_BUTTON_WORDS } from '../words/list';
+import { BOOK_BUTTON_WORDS } from '../words/rows';
 import type { BookDialogProps } from './book-dialog';
 import type { SitDetailProps } from './sit-detail';
 
@@ -91,7 +91,7 @@ export function RowButton({ standId, children }: { standId: string; children: Re
       aria-controls={`${standId}-more`}
       onClick={() => toggle(standId)}
       {...lazyDetail.ahead}
-      className="text-left font-serif text-lg leading-snug after:absolute after:inset-0 after:content-['']"
+      className="text-left font-serif text-lg leading-snug after:absolute after:inset-0"
     >
       {children}
       <span aria-hidden="true" className="ml-1.5 inline-block text-ink-soft">

@@ -8,10 +8,7 @@ export function ReasonList({ reasons }: { reasons: ReasonView[] }) {
   return (
     <ul>
       {reasons.map((reason) => (
-        <li
-          key={reason.code}
-          className="grid grid-cols-[2.5rem_minmax(0,1fr)] gap-x-3 border-rule border-b py-1.5 last:border-b-0"
-        >
+        <li key={reason.code} className="beside grid gap-x-3 border-rule border-b py-1.5 last:border-b-0">
           <span className="text-right font-semibold">
             {pointsText(reason.change)}
             <span className="sr-only">{REASON_WORDS.points}</span>

@@ -83,7 +83,7 @@ function DetailBody({ detail, view, ask }: { detail: SitDetailView; view: SitsBr
   const known = detail.timeline.some((step) => step.shares !== null);
   const hours = detail.timeline.filter((_, step) => step % 2 === 0);
   return (
-    <div className="grid gap-x-10 gap-y-6 pt-1 pb-8 sm:pl-[3.75rem] lg:grid-cols-2">
+    <div className="grid gap-x-10 gap-y-6 pt-1 pb-8 sm:pl-15 lg:grid-cols-2">
       <p className="lg:col-span-2">
         <Figure name={WORDS.score} value={detail.score} /> <Figure name={WORDS.quiet} value={detail.quiet} />{' '}
         <Figure name={WORDS.promise} value={detail.promise} />

@@ -55,8 +55,8 @@ function WindowList({ view, column, show }: { view: WeekView; column: WeekColumn
                 <span className="min-w-0">{cell.mine ? WORDS.yours(stand?.name ?? '') : stand?.name}</span>
                 <span className="flex shrink-0 items-center gap-3">
                   <MiniStrip
-                    arcs={stand?.arcs[window] ?? []}
-                    thousandths={cell.strip === null ? null : (view.strips[cell.strip] ?? null)}
+                    bars={stand?.bars[window] ?? []}
+                    shades={cell.strip === null ? null : (view.strips[cell.strip] ?? null)}
                   />
                   <span className="sr-only">{cellText(cell)}</span>
                   <span className="w-18 text-right">

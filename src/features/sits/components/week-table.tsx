@@ -11,6 +11,8 @@ import { MiniStrip } from './mini-strip';
 
 /** A screen or three of them: more would be slow to draw on a phone. */
 const ROWS_AT_ONCE = 60;
+/** Days, and windows below them. */
+const HEAD_ROWS = 2;
 
 /** Stands down, windows across: each cell says the word, the score and where the wind lies. */
 export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
@@ -18,7 +20,7 @@ export function WeekTable({ view, show }: { view: WeekView; show: WeekShow }) {
   const stands = shownStands(view, show);
   const { shown, foot, showAll } = useMoreRows(stands.length, ROWS_AT_ONCE);
   return (
-    <table className="week-table border-collapse text-sm">
+    <table className="week-table border-collapse text-sm" aria-rowcount={stands.length + HEAD_ROWS}>
       <caption className="sr-only">{WORDS.caption}</caption>
       <thead>
         <tr>
@@ -110,10 +112,7 @@ function Cell({ view, column, stand, show }: CellProps) {
       prefetch={false}
     >
       <CellWords cell={cell} />
-      <MiniStrip
-        arcs={stand.arcs[window]}
-        thousandths={cell.strip === null ? null : (view.strips[cell.strip] ?? null)}
-      />
+      <MiniStrip bars={stand.bars[window]} shades={cell.strip === null ? null : (view.strips[cell.strip] ?? null)} />
       <span className="sr-only">{cellText(cell)}</span>
     </Link>
   );

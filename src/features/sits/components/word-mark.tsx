@@ -1,5 +1,5 @@
 import type { Word } from '@/core/verdict-types';
-import { Badge, type BadgeLook } from '@/ui/page-parts';
+import { Badge, type BadgeLook } from '@/ui/badge';
 
 const LOOKS: Record<Word, BadgeLook> = { Quiet: 'moss', Touchy: 'plain', Loud: 'clay' };
 

@@ -30,13 +30,6 @@ export const SIT_LIST_WORDS = {
   rank: (rank: number) => `${rank}. `,
 } as const;
 
-export const BOOK_BUTTON_WORDS = {
-  book: 'Book',
-  bookWhich: (stand: string) => ` ${stand}`,
-  move: 'Move here',
-  moveWhich: (stand: string) => `: ${stand}`,
-} as const;
-
 export const DETAIL_LOADING_WORDS = { reading: 'Reading the stand' } as const;
 
 export const WINDOW_PICKER_WORDS = {
@@ -47,17 +40,6 @@ export const WINDOW_PICKER_WORDS = {
   weapon: 'Weapon',
   anyWeapon: 'Any weapon',
   show: 'Show',
-  fold: 'Fold',
-  unfold: 'Day, weapon, moon',
-} as const;
-
-export const BACK_WORDS = { backTo: (window: string) => `Back to ${window}` } as const;
-
-export const OLD_LIST_WORDS = {
-  listTitle: 'This list may be old',
-  weekTitle: 'This week may be old',
-  text: 'The server could not be reached. What is shown may be old.',
-  again: 'Try again',
 } as const;
 
 export const ALMANAC_WORDS = {

@@ -3,13 +3,14 @@ import { isDay } from '@/core/day-time';
 import { GateSheetView } from '@/features/board/components/gate-sheet';
 import { PrintButton } from '@/features/board/components/print-button';
 import { readGateSheet } from '@/features/board/gate-sheet/read-gate-sheet';
+import { GATE_PAGE_WORDS as WORDS } from '@/features/board/words/gate-sheet';
 import { windowToPick } from '@/features/sits/reads';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
 import { PageTitle } from '@/ui/page-parts';
 
-export const metadata: Metadata = { title: 'Gate sheet' };
+export const metadata: Metadata = { title: WORDS.title };
 
 /** A day of this century, else the one whose sits come next. */
 function dayAsked(asked: string | string[] | undefined, next: string): string {
@@ -26,12 +27,12 @@ export default clubPage('board.read', async ({ scope, search }) => {
       <div className="print:hidden">
         <PageTitle
           over={name}
-          title="Gate sheet"
-          lead="One sheet to hang at the gate: it works where no phone does."
+          title={WORDS.title}
+          lead={WORDS.lead}
           actions={
             <>
-              <ButtonLink href={`${address}?day=${sheet.before}`}>Day before</ButtonLink>
-              <ButtonLink href={`${address}?day=${sheet.after}`}>Day after</ButtonLink>
+              <ButtonLink href={`${address}?day=${sheet.before}`}>{WORDS.dayBefore}</ButtonLink>
+              <ButtonLink href={`${address}?day=${sheet.after}`}>{WORDS.dayAfter}</ButtonLink>
               <PrintButton />
             </>
           }
