@@ -38,7 +38,7 @@ export async function updateResult(
   scope: ClubScope,
   tx: Tx,
   at: Pick<ResultRow, 'drawId' | 'memberId' | 'slot'>,
-  set: Partial<Pick<ResultRow, 'standId' | 'sitId' | 'swapWith'>>,
+  set: Partial<Pick<ResultRow, 'standId' | 'reasons' | 'sitId' | 'swapWith'>>,
 ): Promise<void> {
   await tx
     .update(drawResults)

@@ -6,8 +6,9 @@ import { newRequestKey } from '@/lib/request-key';
 import { AppError, notFound } from '@/server/errors';
 import type { ClubScope } from '@/server/scope';
 import { needDraw, noteDraw } from './note-draw';
-import { listResults, updateResult } from './results-data';
+import { listResults, type ResultRow, updateResult } from './results-data';
 import { DRAW_AUDIT, DRAW_ERRORS } from './words/errors';
+import { RESULT_WORDS } from './words/results';
 
 interface SwapInput {
   drawId: string;
@@ -47,6 +48,11 @@ function swapped({ standId, day, windows }: SitDetail, { memberId, weapon, guest
   return { standId, day, windows, memberId, weapon, guests, approachId: null, note: '', requestKey: newRequestKey() };
 }
 
+async function keepSwap(scope: ClubScope, tx: Tx, result: ResultRow, sit: SitDetail, told: string): Promise<void> {
+  const reasons = [...result.reasons, told];
+  await updateResult(scope, tx, result, { sitId: sit.id, standId: sit.standId, reasons, swapWith: null });
+}
+
 /** Takes an offer: both sits change hands in one transaction, under every rule. */
 export async function acceptSwap(scope: ClubScope, input: SwapInput, now: number): Promise<{ standName: string }> {
   return write(async (tx) => {
@@ -59,8 +65,8 @@ export async function acceptSwap(scope: ClubScope, input: SwapInput, now: number
     await cancelSitIn(tx, scope, other.sit, reason, now);
     const mine = await placeSitIn(tx, scope, swapped(other.sit, own.sit), now);
     const theirs = await placeSitIn(tx, scope, swapped(own.sit, other.sit), now);
-    await updateResult(scope, tx, own.result, { sitId: mine.id, standId: mine.standId, swapWith: null });
-    await updateResult(scope, tx, other.result, { sitId: theirs.id, standId: theirs.standId, swapWith: null });
+    await keepSwap(scope, tx, own.result, mine, RESULT_WORDS.swapped(other.name, own.sit.standName));
+    await keepSwap(scope, tx, other.result, theirs, RESULT_WORDS.swapped(own.name, other.sit.standName));
     await noteDraw(scope, tx, { id: input.drawId, verb: 'swapped', summary: reason }, now);
     return { standName: mine.standName };
   });

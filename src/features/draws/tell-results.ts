@@ -19,12 +19,29 @@ export function tellResults(input: TellInput): string[][][] {
       const rank = gotId === null ? -1 : entry.choices.indexOf(gotId);
       const gave = gotId === null ? WORDS.gaveNothing : rank < 0 ? WORDS.gaveByScore : WORDS.gaveChoice(rank);
       const above = rank < 0 ? entry.choices : entry.choices.slice(0, rank);
-      return [
-        WORDS.head(points, turn, members.length, gave),
-        ...above.map((standId, at) => tellChoice(input, { member, slot, standId, rank: at })),
-      ];
+      const why = above.map((standId, at) => tellChoice(input, { member, slot, standId, rank: at }));
+      const left = gotId === null && entry.anyByScore ? tellLeft(input, { member, slot }) : null;
+      return [WORDS.head(points, turn, members.length, gave), ...why, ...(left === null ? [] : [left])];
     }),
   );
+}
+
+/** Why nothing was left by score, counted; null: every stand was among the choices. */
+function tellLeft(input: TellInput, { member, slot }: { member: number; slot: number }): string | null {
+  const { allotment, given, members, stands, ruleTexts } = input;
+  const kinds = stands.flatMap((stand, at) => {
+    if (members[member]?.entry.choices.includes(stand.id)) return [];
+    const place = slot * stands.length + at;
+    return [whyNot(allotment, given, { member, place, ruleText: ruleTexts[member]?.[place] ?? null }).kind];
+  });
+  if (kinds.length === 0) return null;
+  const count = (...some: (typeof kinds)[number][]) => kinds.filter((kind) => some.includes(kind)).length;
+  return WORDS.noneByScore({
+    taken: count('taken'),
+    blocked: count('blocked'),
+    rule: count('rule'),
+    other: count('limit', 'total'),
+  });
 }
 
 function tellChoice(

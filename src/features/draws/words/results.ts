@@ -26,11 +26,22 @@ export const RESULT_WORDS = {
   rests: (rank: number, stand: string, when: string, by: Holder) =>
     `The ${ordinal(rank)} choice, ${stand}, has to rest between the days: it went to ${holder(by)} for ${when}.`,
   restsByOwn: (rank: number, stand: string, when: string) =>
-    `The ${ordinal(rank)} choice, ${stand}, has to rest between the days: it is yours for ${when}.`,
+    `The ${ordinal(rank)} choice, ${stand}, has to rest between the days: the same member has it for ${when}.`,
   limit: (rank: number, stand: string) =>
     `The ${ordinal(rank)} choice, ${stand}, would be more than the club allows a member, a stand or its guests.`,
   total: (rank: number, stand: string) =>
     `The ${ordinal(rank)} choice, ${stand}, would have left others worse off by more.`,
+  /** Of the stands left to the score, how many could not be had, and why. */
+  noneByScore: (of: { taken: number; blocked: number; rule: number; other: number }) => {
+    const parts = [
+      of.taken > 0 ? `${of.taken} went to others` : null,
+      of.blocked > 0 ? `${of.blocked} must rest, or lie too near a stand given or on the way to it` : null,
+      of.rule > 0 ? `${of.rule} ${of.rule === 1 ? 'is' : 'are'} against a rule` : null,
+      of.other > 0 ? `${of.other} would have left others worse off or been more than is allowed` : null,
+    ].filter((part) => part !== null);
+    return `Of the stands left to the score: ${parts.join('; ')}.`;
+  },
+  swapped: (name: string, before: string) => `Swapped since with ${name}, who has ${before}.`,
 } as const;
 
 export const RESULT_LIST_WORDS = {

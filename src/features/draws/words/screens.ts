@@ -78,8 +78,8 @@ export const DRAW_READ_WORDS = {
   cutByNodes: (percent: string) =>
     `The best answer found in the steps allowed; a better one could be worth ${percent} % more at most.`,
   within: (percent: string) => `Within ${percent} % of the best answer there can be.`,
-  fair: (seated: number, members: number, stands: number, shared: string, gini: string) =>
-    `${stands} ${stands === 1 ? 'stand' : 'stands'} given; ${seated} of ${members} members have one: ${shared} (Gini ${gini}, where 0 is the same for all).`,
+  fair: (seated: number, members: number, sits: number, shared: string, gini: string) =>
+    `${sits} ${sits === 1 ? 'sit' : 'sits'} given; ${seated} of ${members} members have one: ${shared} (Gini ${gini}, where 0 is the same for all).`,
 } as const;
 
 export const RUN_WORDS = {
