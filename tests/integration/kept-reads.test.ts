@@ -15,6 +15,8 @@ import { eachSitsClub, MORNING } from '../helpers/sits-club';
 const made = eachSitsClub();
 const list = (who: TestMember, now = TEST_NOW) => readKeptSits(who.scope, MORNING, now);
 const fresh = (who: TestMember, now = TEST_NOW) => readSits(who.scope, MORNING, now);
+/** A kept answer without the mark that tells it from others. */
+const said = <T extends { mark: string }>({ mark: _, ...view }: T) => view;
 
 describe('a kept list', () => {
   let admin: TestMember;
@@ -27,7 +29,7 @@ describe('a kept list', () => {
 
   it('is the very same answer while nothing changes, and is worked out anew each minute', async () => {
     const first = await list(made.ann);
-    expect(first).toEqual(await fresh(made.ann));
+    expect(said(first)).toEqual(await fresh(made.ann));
     expect(await list(made.ann)).toBe(first);
     expect(await list(made.ann, TEST_NOW + 60_000)).not.toBe(first);
   });
@@ -62,7 +64,7 @@ describe('a kept list', () => {
       await change();
       const after = await list(ann);
       expect(after, what).not.toEqual(before);
-      expect(after, what).toEqual(await fresh(ann));
+      expect(said(after), what).toEqual(await fresh(ann));
     }
   });
 
@@ -77,7 +79,7 @@ describe('a kept list', () => {
     await saveLog(bert.scope, logOf(sit.id, { bumpedIn: 3 }), noon);
     const after = await readKeptSits(ann.scope, wednesday, noon);
     expect(after).not.toEqual(before);
-    expect(after).toEqual(await readSits(ann.scope, wednesday, noon));
+    expect(said(after)).toEqual(await readSits(ann.scope, wednesday, noon));
   });
 
   it('is dropped by a newer forecast', async () => {
@@ -97,6 +99,6 @@ it('keeps the week in the same way', async () => {
   expect(await readKeptWeek(ann.scope, ask, TEST_NOW)).toBe(before);
   await book(bert, west);
   const after = await readKeptWeek(ann.scope, ask, TEST_NOW);
-  expect(after).toEqual(await readWeek(ann.scope, ask, TEST_NOW));
+  expect(said(after)).toEqual(await readWeek(ann.scope, ask, TEST_NOW));
   expect(after).not.toEqual(before);
 });
