@@ -179,6 +179,26 @@ describe('a draw for a busy weekend', () => {
       .waitFor();
   });
 
+  it('shows work under way, since when and how good it is so far, stops it, and says when a process was lost', async () => {
+    const { page } = who.admin;
+    const clubId = (await reader().select().from(draws).where(eq(draws.id, drawId)))[0]?.clubId ?? '';
+    const run = { drawId, clubId, startedBy: 'somebody', startedAt: Date.now(), leaseUntil: Date.now() + 600_000 };
+    await write((tx) => tx.insert(drawRuns).values({ ...run, id: 'drn_at_work', value: 2000, bound: 2062 }));
+    await openDraw(who.admin);
+    await page.getByText(/^Since .* The best answer so far is at most 3\.1 % from the best there can be\.$/).waitFor();
+    expect(await page.getByRole('button', { name: 'Make the draw' }).count()).toBe(0);
+    await write((tx) => tx.update(drawRuns).set({ bound: 2010 }));
+    await page.getByText(/at most 0\.5 % from the best/).waitFor();
+    await looksRight(who.admin, 'draw-at-work', DESKTOP);
+    await press(page, 'Stop it', 'Stop it');
+    await page.getByRole('button', { name: 'Make the draw' }).waitFor();
+    const lost = { ...run, id: 'drn_lost', startedAt: Date.now() + 1, leaseUntil: Date.now() - 1 };
+    await write((tx) => tx.insert(drawRuns).values(lost));
+    await openDraw(who.admin);
+    await page.getByText('The work ended before it was done. Make the draw again.').waitFor();
+    expect(await bookedCount()).toBe(0);
+  });
+
   it('is made apart from the page and explained; members see nothing yet', async () => {
     await makeDraw('Make the draw');
     const { page } = who.admin;
