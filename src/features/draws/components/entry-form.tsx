@@ -46,6 +46,7 @@ export function EntryForm({ club, draw, enter }: EntryFormProps) {
         />
       )}
       <Select label={WORDS.weapon} options={WEAPON_CHOICES} {...register('weapon')} error={errorOf('weapon')} />
+      {slots.length > 1 && <p className="-mb-3 text-ink-soft text-sm">{WORDS.choicesHint}</p>}
       <div className="grid gap-4 sm:grid-cols-2">
         {values.choices.map((_, at) => (
           <Select
@@ -53,7 +54,6 @@ export function EntryForm({ club, draw, enter }: EntryFormProps) {
             key={at}
             label={WORDS.choices[at] ?? WORDS.laterChoice}
             placeholder={WORDS.noChoice}
-            hint={at === 0 && slots.length > 1 ? WORDS.choicesHint : undefined}
             options={stands}
             {...register(`choices.${at}`)}
             error={errorOf(`choices.${at}`)}
