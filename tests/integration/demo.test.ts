@@ -11,7 +11,7 @@ import { reader } from '@/db/client';
 import * as schema from '@/db/schema';
 import { gatesFor, loadBookingContext } from '@/features/bookings/booking-context';
 import { guestKey } from '@/features/bookings/guest-parties';
-import { windowsHeld } from '@/features/bookings/sit-words';
+import { windowsHeld } from '@/features/bookings/words/sits';
 import { BOUNDARY, boundaryPolygon } from '@/features/demo/boundary';
 import { buildDemo, DEMO_SLUG } from '@/features/demo/build-demo';
 import { DEMO_PLACE, pointOf } from '@/features/demo/demo-place';
