@@ -6,7 +6,7 @@ import { type ReadFile, readMapFile } from './read-file';
 /** Smaller files are read sooner than a thread starts. Our choice. */
 const SMALL_BYTES = 1024 * 1024;
 /** A track of 199 000 points took some 7 s of one core and fitted into 700 MB when this was set. Our choice. */
-const MOST_MS = 120_000;
+const MOST_MS = 300_000;
 const MOST_MEMORY_MB = 1536;
 
 const startThread = () =>
