@@ -1,11 +1,11 @@
 import { SHELL_WORDS } from './words/shell';
 
-/** First stop of the Tab key on every page. */
+/** First stop of the Tab key on every page; not there at all until it has the focus, wherever the page is scrolled or pulled. */
 export function SkipLink() {
   return (
     <a
       href="#main"
-      className="fixed top-2 left-2 z-50 -translate-y-20 border-2 border-moss bg-panel px-4 py-2.5 font-semibold focus:translate-y-0 print:hidden"
+      className="sr-only z-50 border-2 border-moss bg-panel font-semibold focus:not-sr-only focus:fixed focus:top-2 focus:left-2 focus:px-4 focus:py-2.5 print:hidden"
     >
       {SHELL_WORDS.skip}
     </a>

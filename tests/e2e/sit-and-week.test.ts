@@ -44,6 +44,20 @@ async function likeDesk(options: Parameters<Browser['newContext']>[0]): Promise<
   return context.newPage();
 }
 
+/** A window ahead in which the person may book, and the first stand they may; the page then shows it. */
+async function freeStand(page: Page): Promise<{ address: string; stand: string }> {
+  await page.goto(SIT);
+  for (let step = 0; step < 12; step++) {
+    const free = page.getByRole('button', { name: /^Book / });
+    if (step > 1 && (await free.count()) > 0) {
+      return { address: page.url(), stand: ((await free.first().textContent()) ?? '').replace(/^Book /, '') };
+    }
+    const next = await page.locator('a[rel="next"]').getAttribute('href');
+    await page.goto(next ?? SIT);
+  }
+  throw new Error('No window of the demo has a stand to book.');
+}
+
 describe('the Sit screen', () => {
   it('has the ranked list in its first answer, and turns to another window, without any script', async () => {
     const page = await likeDesk({ javaScriptEnabled: false });
@@ -108,6 +122,38 @@ describe('the Sit screen', () => {
     await page.waitForURL((url) => !url.search.includes('weapon'));
     await page.goto(SIT);
     expect(await page.getByLabel('Weapon', { exact: true }).inputValue()).toBe('');
+  });
+
+  it('shows what has changed when it is come back to, and says when it cannot look', async () => {
+    const { address, stand } = await freeStand(phone.page);
+    const page = await likeDesk({});
+    await page.clock.install();
+    await page.goto(address);
+    const row = page.locator('[data-row]').filter({ hasText: stand });
+    await row.waitFor();
+    const comeBack = async () => {
+      await page.clock.fastForward('01:00');
+      await page.evaluate(() => document.dispatchEvent(new Event('visibilitychange')));
+    };
+    const old = page.getByText('This list may be old');
+    await page.context().setOffline(true);
+    // Again and again, since nothing tells from outside when the page's script has come.
+    const tried = async () => {
+      await comeBack();
+      return old.count();
+    };
+    await expect.poll(tried, { timeout: 30_000, interval: 500 }).toBe(1);
+    await page.context().setOffline(false);
+    await page.getByRole('button', { name: 'Try again' }).click();
+    await old.waitFor({ state: 'detached' });
+    expect(await row.count()).toBe(1);
+    await phone.page.getByRole('button', { name: `Book ${stand}`, exact: true }).click();
+    await phone.page.getByRole('dialog').getByRole('button', { name: 'Book this sit' }).click();
+    await phone.page.getByText('Sit booked').first().waitFor();
+    await comeBack();
+    await row.waitFor({ state: 'detached' });
+    await page.getByRole('region', { name: 'Not open' }).getByText(stand, { exact: true }).waitFor();
+    await page.context().close();
   });
 
   it('names the zone to a reader whose clock differs, and to no other', async () => {
