@@ -151,4 +151,4 @@ it(`keeps its promises in each of the ${HOURS} hours of a season lived by two pr
   // Nothing is held for a sit that does not stand.
   const held = await reader().select().from(claims).where(eq(claims.clubId, clubId));
   expect(held.filter((row) => made.find((sit) => sit.id === row.sitId)?.status !== 'booked')).toEqual([]);
-}, 900_000);
+}, 2_400_000);
