@@ -57,7 +57,7 @@ interface AxeViolation {
   id: string;
   help: string;
   impact?: string | null;
-  nodes: { target: unknown[] }[];
+  nodes: { target: unknown[]; failureSummary?: string }[];
 }
 
 /** axe itself, of the version its Playwright package brings. */
@@ -85,7 +85,7 @@ export async function allAxeFindings(page: Page, rules?: string[]): Promise<{ im
   }, rules);
   return violations.map((v) => ({
     impact: v.impact ?? 'unknown',
-    text: `${v.id}: ${v.help}: ${v.nodes.map((n) => n.target.join(' ')).join(', ')}`,
+    text: `${v.id}: ${v.help}: ${v.nodes.map((n) => `${n.target.join(' ')} (${n.failureSummary})`).join(', ')}`,
   }));
 }
 

@@ -19,7 +19,7 @@ export function SitRow({ row, startAt, detail, mayBook }: SitRowProps) {
   const notes = row.cautions.filter((caution) => caution.level !== 'note');
   return (
     <li className="border-rule border-b" id={row.standId} data-detail={detail}>
-      <div className="sit-row relative grid items-start gap-x-3 gap-y-2 py-3.5 hover:bg-panel sm:gap-x-5 sm:px-1">
+      <div className="sit-row relative grid items-start gap-x-3 gap-y-2 py-3.5 hover:bg-panel lg:gap-x-5 lg:px-1">
         <span className="font-serif text-ink-soft text-xl leading-snug" aria-hidden="true">
           {row.rank}
         </span>
@@ -29,23 +29,25 @@ export function SitRow({ row, startAt, detail, mayBook }: SitRowProps) {
               <span className="sr-only">{SIT_LIST_WORDS.rank(row.rank)}</span>
               {row.name}
             </RowButton>
-            <WordMark word={row.word} />
             {row.mine && <Badge look="strong">{SIT_LIST_WORDS.yourSit}</Badge>}
           </h3>
-          <p className="mt-1 hidden sm:block">{row.sentence}</p>
+          <p className="mt-1 hidden lg:block">{row.sentence}</p>
           {notes.map((caution) => (
-            <p key={caution.text} className="mt-1 hidden font-semibold text-clay text-sm sm:block">
+            <p key={caution.text} className="mt-1 hidden font-semibold text-clay text-sm lg:block">
               {caution.text}
             </p>
           ))}
         </div>
-        <div className="col-start-2 row-start-2 sm:col-start-3 sm:row-start-1 sm:pt-1">
+        <div className="col-start-3 row-start-2 self-center lg:row-start-1 lg:self-start lg:pt-1">
+          <WordMark word={row.word} />
+        </div>
+        <div className="col-start-2 row-start-2 lg:col-start-4 lg:row-start-1 lg:pt-1">
           <WindStrip arcs={row.arcs} rows={[{ at: startAt, shares: row.shares, hold: row.hold }]} />
         </div>
-        <div className="relative z-10 col-start-3 row-start-1 sm:col-start-4 sm:justify-self-end">
+        <div className="relative z-10 col-start-3 row-start-1 lg:col-start-5 lg:justify-self-end">
           {mayBook && !row.mine && <BookButton standId={row.standId} name={row.name} first={row.rank === 1} />}
         </div>
-        <div className="col-span-2 col-start-2 row-start-3 sm:hidden">
+        <div className="col-span-2 col-start-2 row-start-3 lg:hidden">
           <p>{row.sentence}</p>
           {notes.map((caution) => (
             <p key={caution.text} className="mt-1 font-semibold text-clay text-sm">

@@ -1,5 +1,5 @@
 import { formatDay } from '@/core/day-time';
-import { ButtonLink, TextLink } from '@/ui/button';
+import { ButtonLink } from '@/ui/button';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import type { SitsAskText } from '../ask-schema';
@@ -83,8 +83,10 @@ function ListNotices({ view }: { view: KeptSitsView }) {
       ))}
       {over && <Notice title={WORDS.overTitle}>{WORDS.over}</Notice>}
       {mine && (
-        <Notice title={WORDS.youSit(mine.standName, mine.windows)}>
-          <TextLink href={`/clubs/${club.slug}/my-sits`}>{WORDS.change}</TextLink>
+        <Notice
+          title={WORDS.youSit(mine.standName, mine.windows)}
+          actions={<ButtonLink href={`/clubs/${club.slug}/my-sits`}>{WORDS.change}</ButtonLink>}
+        >
           {!over && WORDS.orMove}
         </Notice>
       )}

@@ -15,7 +15,7 @@ export const SIT_LIST_WORDS = {
   youSit: (stand: string, windows: WindowName | 'all_day') =>
     `You sit at ${stand}, ${windows === 'all_day' ? 'all day' : windows}`,
   change: 'Change or cancel it',
-  orMove: ', or move to another stand below.',
+  orMove: 'You can move to another stand below.',
   heading: 'Stands by sit score',
   noStandsTitle: 'No stands yet',
   addFirst: 'Add the first stand',
