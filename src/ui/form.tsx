@@ -68,7 +68,17 @@ export function SubmitButton({
   ...rest
 }: SubmitButtonProps) {
   const status = useFormStatus();
-  return <Button {...rest} type="submit" look={look} pending={pending || status.pending} pendingLabel={pendingLabel} />;
+  return (
+    <Button
+      {...rest}
+      type="submit"
+      look={look}
+      pending={pending || status.pending}
+      pendingLabel={pendingLabel}
+      // Keeps the focus in the field: a fault shown as it is left would move the button from under the pointer.
+      onMouseDown={(event) => event.preventDefault()}
+    />
+  );
 }
 
 export interface SubmitRowProps {

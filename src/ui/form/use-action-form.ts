@@ -44,7 +44,8 @@ export function useActionForm<Values extends FieldValues, T>(options: ActionForm
   const form = useForm<Values, unknown, Values>({
     resolver: zodResolver(schema, undefined, { raw: true }),
     defaultValues,
-    mode: 'onBlur',
+    // A fault once shown goes while it is mended, not as the hand leaves for the button below: that would move under it.
+    mode: 'onTouched',
   });
   const [ready, setReady] = useState(false);
   const [summary, setSummary] = useState<NamedError[]>([]);
