@@ -8,6 +8,7 @@ import {
   formatClock,
   formatClock12,
   formatDay,
+  formatMonth,
   isClock,
   isDay,
   isZone,
@@ -45,6 +46,7 @@ describe('days', () => {
     expect(formatDay('2026-11-07')).toBe('Sat 7 Nov');
     expect(formatDay('2026-11-07', true)).toBe('Sat 7 Nov 2026');
     expect(monthOf('2026-11-07')).toBe(11);
+    expect(formatMonth('2026-11-07')).toBe('Nov');
     expect(dayOfYear('2024-12-31')).toBe(366);
   });
 });

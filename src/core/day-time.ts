@@ -118,6 +118,9 @@ export function formatDay(day: string, withYear = false): string {
   return withYear ? `${text} ${day.slice(0, 4)}` : text;
 }
 
+/** The month of a day, for people: 'Nov'. */
+export const formatMonth = (day: string): string => MONTHS[monthOf(day) - 1] ?? '';
+
 /** An instant rounded to the whole minute, halves up, as printed almanacs do. */
 export function roundToMinute(at: number): number {
   return Math.floor(at / MINUTE_MS + 0.5) * MINUTE_MS;

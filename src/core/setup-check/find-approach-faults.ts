@@ -2,9 +2,11 @@ import { monthOf } from '../day-time';
 import { bearingDeg, distanceM, distanceToShapeM, nearestOnShape } from '../geometry';
 import { type Point, type ScoredApproach, type ScoredFeature, type ScoredStand, TIMES_OF_DAY } from '../ground-types';
 import { usesOf } from '../whereabouts';
-import { approachFacts, away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
+import { approachFacts, away, featureFacts, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import { carries, footPath, isBed, isLine, nearness, standOf, windowsHunted, windsHunted } from './shot-of';
+import { PART_WORDS } from './words/parts';
+import { WAY_WORDS } from './words/walks';
 
 /** Where two segments meet; null when they do not. */
 function meet(a: Point, b: Point, c: Point, d: Point): Point | null {
@@ -91,26 +93,22 @@ function windward(stand: ScoredStand, path: Point[], bed: ScoredFeature, input: 
 
 function actsOf({ approach, stand, crossings, beds }: WayFaults, input: SetupInput): Finding['acts'] {
   const others = input.approaches.filter((a) => a.standId === stand.id && a.id !== approach.id);
-  const [bed, line] = [beds[0]?.bed, crossings[0]?.line];
-  const clear = bed ? `stays downwind of ${bed.name}` : `does not cross ${line?.name ?? 'the line'}`;
+  const bed = beds[0]?.bed;
+  const line = crossings[0]?.line.name ?? WAY_WORDS.theLine;
   return [
     ...others.map((other): Finding['acts'][number] => ({
       act: 'other_time',
-      text: `Give up ${approach.name} and walk to ${stand.name} by ${other.name}`,
+      text: WAY_WORDS.otherWay(approach.name, stand.name, other.name),
       work: null,
     })),
-    { act: 'new_way', text: `Lay ${approach.name} so that it ${clear}`, work: 'cutting' },
+    {
+      act: 'new_way',
+      text: bed ? WAY_WORDS.layDownwind(approach.name, bed.name) : WAY_WORDS.layClear(approach.name, line),
+      work: 'cutting',
+    },
     bed
-      ? {
-          act: 'move_seat',
-          text: `Hunt ${stand.name} only on winds that keep the walk off ${bed.name}`,
-          work: null,
-        }
-      : {
-          act: 'move',
-          text: `Lead ${line?.name ?? 'the line'} round ${approach.name} with brush or a fence gap`,
-          work: 'cutting',
-        },
+      ? { act: 'move_seat', text: WAY_WORDS.pickWinds(stand.name, bed.name), work: null }
+      : { act: 'move', text: WAY_WORDS.leadRound(line, approach.name), work: 'cutting' },
   ];
 }
 
@@ -121,16 +119,12 @@ function tell(group: WayFaults[], input: SetupInput): Finding {
   const worst = [...beds].sort((a, b) => b.share - a.share)[0];
   const at = worst?.at ?? (crossings[0] as Crossing).at;
   const [metres, bearing] = [distanceM(stand.at, at), bearingDeg(stand.at, at)];
-  const over = listText(crossings.map(({ line }) => line.name));
-  const crosses = over ? `crosses ${over}` : '';
-  const upwind = worst
-    ? `runs upwind of ${listText(beds.map(({ bed }) => bed.name))} on ${Math.round(worst.share * 100)} % of the winds ${stand.name} is hunted on`
-    : '';
-  const others = listText(group.slice(1).map((w) => `${w.approach.name} to ${w.stand.name}`));
+  const lines = crossings.map(({ line }) => line.name);
+  const others = group.slice(1).map((w) => PART_WORDS.wayTo(w.approach.name, w.stand.name));
   const why = [
-    worst && 'Scent of the walk goes into the beds before the sit begins, whatever the seat itself does.',
-    over && 'Ground scent stays where a person crosses: deer that come along the line later stop at it or turn.',
-    others && `So does ${others}, at the same place.`,
+    worst && WAY_WORDS.whyUpwind,
+    lines.length > 0 && WAY_WORDS.whyCrosses,
+    others.length > 0 && WAY_WORDS.soDoOthers(others),
   ];
   const found = makeFinding(
     {
@@ -142,8 +136,14 @@ function tell(group: WayFaults[], input: SetupInput): Finding {
       distanceM: metres,
       bearingDeg: bearing,
       text: worst
-        ? [`${approach.name} ${upwind}`, crosses].filter(Boolean).join(', and ')
-        : `${approach.name} ${crosses} ${away(metres, bearing, input.units)} of ${stand.name}`,
+        ? WAY_WORDS.upwind({
+            way: approach.name,
+            beds: beds.map(({ bed }) => bed.name),
+            share: Math.round(worst.share * 100),
+            stand: stand.name,
+            lines,
+          })
+        : WAY_WORDS.crosses(approach.name, lines, away(metres, bearing, input.units), stand.name),
       why: why.filter(Boolean).join(' '),
       acts: actsOf(first, input),
       trial: { change: 'without_approach', standId: stand.id, approachId: approach.id, window: null },

@@ -11,9 +11,11 @@ import {
 } from '../ground-types';
 import { formatDistance } from '../units';
 import { usesOf } from '../whereabouts';
-import { approachFacts, away, featureFacts, listText, makeFinding } from './make-finding';
+import { approachFacts, away, featureFacts, makeFinding } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import { footPath, isAttraction, isMovable, nearness, standOf, windowsHunted, workOn } from './shot-of';
+import { PART_WORDS } from './words/parts';
+import { BESIDE_WORDS } from './words/walks';
 
 type Leg = 'in' | 'out';
 
@@ -22,15 +24,6 @@ const WALKED: Record<WindowName, { in: TimeOfDay[]; out: TimeOfDay[]; later: Tim
   morning: { in: ['night', 'dawn'], out: ['midday'], later: 'morning' },
   evening: { in: ['afternoon'], out: ['dusk', 'night'], later: 'midday' },
 };
-const SPOKEN: Record<TimeOfDay, string> = {
-  night: 'in the dark',
-  dawn: 'at first light',
-  morning: 'in the morning',
-  midday: 'at midday',
-  afternoon: 'in the afternoon',
-  dusk: 'at last light',
-};
-const LATER: Record<WindowName, string> = { morning: 'half an hour after daybreak', evening: 'at midday' };
 
 /** A way that passes a place at a time when deer are at it. */
 interface Pass {
@@ -109,16 +102,16 @@ function actsOf(pass: Pass, passes: Pass[], input: SetupInput): Finding['acts'] 
   const other = otherWay(pass, passes, input);
   const acts: Finding['acts'] = [];
   if (other) {
-    acts.push({ act: 'new_way', text: `Walk ${pass.leg} to ${stand.name} by ${other.name} instead`, work: null });
+    acts.push({ act: 'new_way', text: BESIDE_WORDS.otherWay(pass.leg, stand.name, other.name), work: null });
   }
   if (mayWait(pass, input)) {
-    acts.push({ act: 'other_time', text: `Walk in past ${feature.name} only ${LATER[window]}`, work: null });
+    acts.push({ act: 'other_time', text: BESIDE_WORDS.walkLater(feature.name, window), work: null });
   }
   if (isMovable(feature)) {
-    acts.push({ act: 'move', text: `Move ${feature.name} off ${approach.name}`, work: workOn(feature) });
+    acts.push({ act: 'move', text: BESIDE_WORDS.move(feature.name, approach.name), work: workOn(feature) });
   }
-  acts.push({ act: 'new_way', text: `Lay ${approach.name} round ${feature.name}`, work: 'cutting' });
-  acts.push({ act: 'block', text: `Screen ${approach.name} from ${feature.name}`, work: 'planting' });
+  acts.push({ act: 'new_way', text: BESIDE_WORDS.layRound(approach.name, feature.name), work: 'cutting' });
+  acts.push({ act: 'block', text: BESIDE_WORDS.screen(approach.name, feature.name), work: 'planting' });
   return acts;
 }
 
@@ -131,9 +124,7 @@ function tell(feature: ScoredFeature, all: Pass[], passes: Pass[], input: SetupI
   const { stand, approach, gapM, leg, window, use, time } = worst;
   const ways = [...new Map(ranked.map((p) => [p.approach.id, p])).values()];
   const [metres, bearing] = [distanceM(stand.at, worst.at), bearingDeg(stand.at, worst.at)];
-  const near = gapM < 1 ? 'on' : `${formatDistance(gapM, units)} from`;
-  const where = `${away(metres, bearing, units)} of the seat`;
-  const others = listText(ways.slice(1).map((w) => `${w.approach.name} to ${w.stand.name}`));
+  const others = ways.slice(1).map((w) => PART_WORDS.wayTo(w.approach.name, w.stand.name));
   const also = [...new Map(ways.map((w) => [w.stand.id, { id: w.stand.id, name: w.stand.name }])).values()];
   const other = otherWay(worst, passes, input);
   const found = makeFinding(
@@ -145,8 +136,15 @@ function tell(feature: ScoredFeature, all: Pass[], passes: Pass[], input: SetupI
       at: worst.at,
       distanceM: metres,
       bearingDeg: bearing,
-      text: `${feature.name} lies ${near} the walk ${leg} by ${approach.name} to ${stand.name}, ${where}`,
-      why: `The walk ${leg} for the ${window} passes it ${SPOKEN[time]}, when deer are there ${Math.round(use * 100)} times in a hundred.${others ? ` So does ${others}.` : ''}`,
+      text: BESIDE_WORDS.text({
+        feature: feature.name,
+        gap: gapM < 1 ? null : formatDistance(gapM, units),
+        leg,
+        way: approach.name,
+        stand: stand.name,
+        away: away(metres, bearing, units),
+      }),
+      why: BESIDE_WORDS.why({ leg, window, time, inHundred: Math.round(use * 100), others }),
       acts: actsOf(worst, passes, input),
       trial:
         other && !isMovable(feature)

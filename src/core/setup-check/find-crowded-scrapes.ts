@@ -1,9 +1,10 @@
 import { bearingDeg, distanceM, nearestOnShape } from '../geometry';
 import type { Point, ScoredFeature, ScoredStand } from '../ground-types';
 import { formatDistance } from '../units';
-import { away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
+import { away, featureFacts, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import { canShoot, footPath, gapM, isLine, shotOf, windowsHunted } from './shot-of';
+import { SCRAPE_WORDS } from './words/attractions';
 
 interface Rated {
   scrape: ScoredFeature;
@@ -35,7 +36,7 @@ function rate(scrape: ScoredFeature, input: SetupInput): Rated {
   );
   if (line <= settings.onLineM) {
     worth += 2;
-    reasons.push('on a travel line');
+    reasons.push(SCRAPE_WORDS.onLine);
   }
   const seats = input.stands
     .filter((s) => windowsHunted(s).length > 0)
@@ -44,11 +45,11 @@ function rate(scrape: ScoredFeature, input: SetupInput): Rated {
   const bow = seats.find(({ shot }) => shot.metres >= settings.scrapeFromM && shot.metres <= settings.scrapeToM);
   if (bow) {
     worth += 2;
-    reasons.push(`${formatDistance(bow.shot.metres, units)} from ${bow.stand.name}`);
+    reasons.push(SCRAPE_WORDS.bowShot(formatDistance(bow.shot.metres, units), bow.stand.name));
   }
   if (seats.some(({ shot }) => canShoot(shot))) {
     worth += 1;
-    reasons.push('on the shot side');
+    reasons.push(SCRAPE_WORDS.onShotSide);
   }
   const walk = Math.min(
     Number.POSITIVE_INFINITY,
@@ -56,11 +57,11 @@ function rate(scrape: ScoredFeature, input: SetupInput): Rated {
   );
   if (walk > settings.onLineM) {
     worth += 1;
-    reasons.push('off the walk');
+    reasons.push(SCRAPE_WORDS.offWalk);
   }
   if ((seats[0]?.shot.metres ?? Number.POSITIVE_INFINITY) < settings.noiseM) {
     worth -= 3;
-    reasons.push('so near a seat that noise carries');
+    reasons.push(SCRAPE_WORDS.nearSeat);
   }
   return { scrape, at, worth, reasons, stand: (bow ?? seats[0])?.stand ?? null };
 }
@@ -92,7 +93,8 @@ export function findCrowdedScrapes(input: SetupInput): Finding[] {
       const { stand, at, scrape } = keep;
       const rest = rated.slice(1);
       const where = stand ? { distanceM: distanceM(stand.at, at), bearingDeg: bearingDeg(stand.at, at) } : null;
-      const from = stand && where ? `, ${away(where.distanceM, where.bearingDeg, input.units)} of ${stand.name}` : '';
+      const seat =
+        stand && where ? { stand: stand.name, away: away(where.distanceM, where.bearingDeg, input.units) } : null;
       return [
         makeFinding(
           {
@@ -102,12 +104,15 @@ export function findCrowdedScrapes(input: SetupInput): Finding[] {
             at,
             distanceM: where?.distanceM ?? null,
             bearingDeg: where?.bearingDeg ?? null,
-            text: `${group.length} scrapes in one opening: keep ${scrape.name}${from}`,
-            why: `One scrape an opening is worth more than many: deer then stop at the one with a shot. ${scrape.name} is ${keep.reasons.join(', ') || 'as good as the others'}.`,
+            text: SCRAPE_WORDS.text(group.length, scrape.name, seat),
+            why: SCRAPE_WORDS.why(scrape.name, keep.reasons),
             acts: [
               {
                 act: 'keep_one',
-                text: `Keep ${scrape.name} and take away ${listText(rest.map((r) => r.scrape.name))}`,
+                text: SCRAPE_WORDS.keepOne(
+                  scrape.name,
+                  rest.map((r) => r.scrape.name),
+                ),
                 work: 'mock_scrape',
               },
             ],

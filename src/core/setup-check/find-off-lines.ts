@@ -3,6 +3,8 @@ import { formatDistance } from '../units';
 import { featureFacts, makeFinding } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import { gapM, isAttraction, isLine, isMovable, workOn } from './shot-of';
+import { OFF_LINES_WORDS } from './words/attractions';
+import { PART_WORDS } from './words/parts';
 
 /** Attractions off every line of movement, themselves and all in their opening, on a ground that has lines drawn. */
 export function findOffLines(input: SetupInput): Finding[] {
@@ -27,15 +29,21 @@ export function findOffLines(input: SetupInput): Finding[] {
           at,
           distanceM: seat ? distanceM(seat.at, at) : null,
           bearingDeg: seat ? bearingDeg(seat.at, at) : null,
-          text: `${feature.name} is off every line of movement: the nearest, ${near.line.name}, is ${formatDistance(near.gap, units)} away`,
-          why: 'Deer leave the line they should travel to reach it, by a way nobody has drawn or sits on.',
+          text: OFF_LINES_WORDS.text(feature.name, near.line.name, formatDistance(near.gap, units)),
+          why: OFF_LINES_WORDS.why,
           acts: [
             ...(isMovable(feature)
-              ? [{ act: 'move' as const, text: `Move ${feature.name} to ${near.line.name}`, work: workOn(feature) }]
+              ? [
+                  {
+                    act: 'move' as const,
+                    text: OFF_LINES_WORDS.move(feature.name, near.line.name),
+                    work: workOn(feature),
+                  },
+                ]
               : []),
-            { act: 'draw_line', text: `Draw the line deer take to ${feature.name}`, work: null },
+            { act: 'draw_line', text: OFF_LINES_WORDS.drawLine(feature.name), work: null },
             ...(isMovable(feature)
-              ? [{ act: 'take_away' as const, text: `Take away ${feature.name}`, work: workOn(feature) }]
+              ? [{ act: 'take_away' as const, text: PART_WORDS.takeAway(feature.name), work: workOn(feature) }]
               : []),
           ],
           trial: null,

@@ -1,24 +1,21 @@
 import type { ScoredFeature, ScoredStand } from '../ground-types';
 import { sectorName } from '../sectors';
 import { formatDistance } from '../units';
-import { away, featureFacts, listText, makeFinding, standFacts } from './make-finding';
+import { away, featureFacts, makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import { canShoot, isAttraction, isMovable, type Shot, shotOf, windowsHunted, workOn } from './shot-of';
-
-function how(shot: Shot): string {
-  if (shot.side === 'behind') return 'behind the seat';
-  return shot.side === 'off' ? 'off the shot side' : 'out of range';
-}
+import { OFF_SHOT_WORDS } from './words/attractions';
+import { PART_WORDS } from './words/parts';
 
 function actsOf(feature: ScoredFeature, stand: ScoredStand, shot: Shot): Finding['acts'] {
   const first: Finding['acts'][number] = isMovable(feature)
-    ? { act: 'take_away', text: `Take away ${feature.name}`, work: workOn(feature) }
-    : { act: 'block', text: `Block the way from ${feature.name} past ${stand.name}`, work: 'cutting' };
+    ? { act: 'take_away', text: PART_WORDS.takeAway(feature.name), work: workOn(feature) }
+    : { act: 'block', text: OFF_SHOT_WORDS.block(feature.name, stand.name), work: 'cutting' };
   const lane: Finding['acts'] =
     shot.inRange && shot.side === 'off'
-      ? [{ act: 'trim', text: `Trim a lane from ${stand.name} to ${feature.name}`, work: 'cutting' }]
+      ? [{ act: 'trim', text: OFF_SHOT_WORDS.trim(stand.name, feature.name), work: 'cutting' }]
       : [];
-  const seat = `Move or turn ${stand.name} so that ${feature.name} is in shot`;
+  const seat = OFF_SHOT_WORDS.moveSeat(stand.name, feature.name);
   return [first, ...lane, { act: 'move_seat', text: seat, work: 'cutting' }];
 }
 
@@ -36,7 +33,7 @@ export function findOffShot(input: SetupInput): Finding[] {
       if (shot.metres > settings.pullWithinM || canShoot(shot)) return [];
       const others = hunted.filter((s) => s.id !== stand.id && canShoot(shotOf(s, feature.shape, input)));
       if (!isMovable(feature) && (shot.side === 'fine' || others.length > 0)) return [];
-      const elsewhere = others.length > 0 ? ` It is in shot from ${listText(others.map((s) => s.name))}.` : '';
+      const otherNames = others.map((s) => s.name);
       return [
         makeFinding(
           {
@@ -46,8 +43,13 @@ export function findOffShot(input: SetupInput): Finding[] {
             at: shot.nearest,
             distanceM: shot.metres,
             bearingDeg: shot.bearing,
-            text: `${feature.name} lies ${how(shot)} of ${stand.name}, ${away(shot.metres, shot.bearing, units)} of it`,
-            why: `What draws deer within ${formatDistance(settings.pullWithinM, units)} of a seat and gives no shot pulls them ${sectorName(shot.bearing)} of it, where they look back at it and wind it.${elsewhere}`,
+            text: OFF_SHOT_WORDS.text(
+              feature.name,
+              OFF_SHOT_WORDS.side[shot.side],
+              stand.name,
+              away(shot.metres, shot.bearing, units),
+            ),
+            why: OFF_SHOT_WORDS.why(formatDistance(settings.pullWithinM, units), sectorName(shot.bearing), otherNames),
             acts: actsOf(feature, stand, shot),
             trial: { change: 'without_features', standId: stand.id, featureIds: [feature.id], window: null },
           },

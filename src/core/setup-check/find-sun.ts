@@ -1,18 +1,17 @@
 import { apartDeg, normalizeDeg } from '../angles';
-import { formatClock, formatClock12, localToUtc, monthOf } from '../day-time';
+import { formatClock, formatClock12, formatMonth, localToUtc } from '../day-time';
 import type { ScoredStand } from '../ground-types';
 import { sunInEyes } from '../promise/sun-in-eyes';
 import { sectorName } from '../sectors';
 import { sunPosition } from '../sun';
-
 import { makeFinding, standFacts } from './make-finding';
 import type { Finding, SetupInput } from './setup-types';
 import { canShoot, isAttraction, isLine, shotOf, windowsHunted } from './shot-of';
+import { SUN_WORDS } from './words/sun';
 
 const STEP_MS = 5 * 60_000;
 /** Sun in the eyes less than this (0-1) troubles nobody. */
 const TROUBLES = 0.3;
-const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
 
 interface Moment {
   at: number;
@@ -68,9 +67,10 @@ function whenText(moments: Moment[], days: string[], input: SetupInput): string 
   const last = moments.find((m) => formatClock(m.at, input.place.zone) === clocks.at(-1));
   const clock = (at: number) =>
     input.units === 'us' ? formatClock12(at, input.place.zone) : formatClock(at, input.place.zone);
-  const months = days.map((day) => MONTHS[monthOf(day) - 1] ?? '');
-  return `${first ? clock(first.at) : ''} to ${last ? clock(last.at) : ''} in ${months.join(', ')}`;
+  return SUN_WORDS.when(first ? clock(first.at) : '', last ? clock(last.at) : '', days.map(formatMonth));
 }
+
+const directionText = (deg: number) => `${Math.round(deg)}° (${sectorName(deg)})`;
 
 /** Whether a seat turned to a direction still has in shot all that draws deer to it now. */
 function keepsInShot(stand: ScoredStand, input: SetupInput): (deg: number) => boolean {
@@ -102,7 +102,7 @@ export function findSeatSun(input: SetupInput): Finding[] {
       worst.spell.days.map((i) => worst.windows[i]?.day ?? ''),
       input,
     );
-    const turned = better === null ? '' : ` Facing ${Math.round(better)}° (${sectorName(better)}) avoids it.`;
+    const betterText = better === null ? null : directionText(better);
     return [
       makeFinding(
         {
@@ -112,19 +112,13 @@ export function findSeatSun(input: SetupInput): Finding[] {
           at: stand.at,
           distanceM: null,
           bearingDeg: facing,
-          text: `${stand.name} faces the low sun on clear ${worst.name}s, ${when}`,
-          why: `The sitter is blinded and lit up for as long as ${worst.spell.most} minutes of ${worst.name === 'evening' ? 'an evening' : 'a morning'}.${turned}`,
+          text: SUN_WORDS.seat(stand.name, worst.name, when),
+          why: SUN_WORDS.whySeat(worst.spell.most, worst.name, betterText),
           acts: [
-            ...(better === null
+            ...(betterText === null
               ? []
-              : [
-                  {
-                    act: 'turn' as const,
-                    text: `Turn ${stand.name} to face ${Math.round(better)}° (${sectorName(better)})`,
-                    work: null,
-                  },
-                ]),
-            { act: 'block', text: `Brush in ${stand.name} against the ${worst.name} sun`, work: 'cutting' },
+              : [{ act: 'turn' as const, text: SUN_WORDS.turn(stand.name, betterText), work: null }]),
+            { act: 'block', text: SUN_WORDS.brushIn(stand.name, worst.name), work: 'cutting' },
           ],
           trial:
             better === null ? null : { change: 'facing', standId: stand.id, facingDeg: better, window: worst.name },
@@ -149,13 +143,13 @@ export function findCameraSun(input: SetupInput): Finding[] {
     const found = spell(days, blinds(facing), settings);
     if (found.days.length === 0) return [];
     const better = nearestFree(facing, (deg) => spell(days, blinds(deg), anyMonth(settings)).days.length === 0);
-    const name = camera.name || 'A camera';
+    const name = camera.name || SUN_WORDS.unnamedCamera;
     const when = whenText(
       found.moments,
       found.days.map((i) => input.days[i] ?? ''),
       input,
     );
-    const to = better === null ? 'another way' : `${Math.round(better)}° (${sectorName(better)})`;
+    const to = better === null ? SUN_WORDS.anotherWay : directionText(better);
     return [
       makeFinding(
         {
@@ -165,9 +159,9 @@ export function findCameraSun(input: SetupInput): Finding[] {
           at: camera.at,
           distanceM: null,
           bearingDeg: facing,
-          text: `${name} looks into the low sun, ${when}`,
-          why: `Pictures wash out and the sun sets it off. Facing ${to} keeps it out of the picture.`,
-          acts: [{ act: 'turn', text: `Turn ${name} to face ${to}`, work: null }],
+          text: SUN_WORDS.camera(name, when),
+          why: SUN_WORDS.whyCamera(to),
+          acts: [{ act: 'turn', text: SUN_WORDS.turn(name, to), work: null }],
           trial: null,
         },
         [camera.id, Math.round(camera.at.eastM), Math.round(camera.at.northM), facing],

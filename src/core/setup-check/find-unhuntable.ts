@@ -13,6 +13,8 @@ import {
   windsHunted,
   workOn,
 } from './shot-of';
+import { UNHUNTABLE_WORDS } from './words/attractions';
+import { PART_WORDS } from './words/parts';
 
 interface InShot {
   stand: ScoredStand;
@@ -30,10 +32,7 @@ function tell(feature: ScoredFeature, nearest: InShot, shots: InShot[], input: S
   const { stand, shot } = nearest;
   const far = away(shot.metres, shot.bearing, input.units);
   const reached = shots.length > 0;
-  const names = shots.map((s) => s.stand.name).join(', ');
-  const text = reached
-    ? `${feature.name} can be hunted on no wind: ${names} ${shots.length === 1 ? 'reaches' : 'reach'} it only with scent blowing to it`
-    : `${feature.name} is in shot from no stand; the nearest, ${stand.name}, has it ${far}`;
+  const names = shots.map((s) => s.stand.name);
   return makeFinding(
     {
       code: 'unhuntable',
@@ -42,14 +41,14 @@ function tell(feature: ScoredFeature, nearest: InShot, shots: InShot[], input: S
       at: shot.nearest,
       distanceM: shot.metres,
       bearingDeg: shot.bearing,
-      text,
-      why: reached
-        ? 'Every good wind of the stands that reach it carries scent from the seat to where the deer come.'
-        : 'What draws deer where nobody can sit draws them away from where somebody does.',
+      text: reached
+        ? UNHUNTABLE_WORDS.noWind(feature.name, names)
+        : UNHUNTABLE_WORDS.noStand(feature.name, stand.name, far),
+      why: reached ? UNHUNTABLE_WORDS.whyNoWind : UNHUNTABLE_WORDS.whyNoStand,
       acts: [
-        { act: 'move_seat', text: `Hang a seat off ${feature.name}, crosswind of it`, work: 'cutting' },
+        { act: 'move_seat', text: UNHUNTABLE_WORDS.hangSeat(feature.name), work: 'cutting' },
         ...(isMovable(feature)
-          ? [{ act: 'take_away' as const, text: `Take away ${feature.name}`, work: workOn(feature) }]
+          ? [{ act: 'take_away' as const, text: PART_WORDS.takeAway(feature.name), work: workOn(feature) }]
           : []),
       ],
       trial: reached ? { change: 'without_features', standId: stand.id, featureIds: [feature.id], window: null } : null,

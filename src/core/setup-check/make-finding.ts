@@ -48,8 +48,3 @@ export function makeFinding(
   const key = [found.code, found.subject.id, found.stand?.id ?? ''].join(':');
   return { also: [], ...found, key, print: printOf(facts), evidence: 'practice' };
 }
-
-/** 'A', 'A and B', 'A, B and C'. */
-export function listText(names: string[]): string {
-  return names.length < 2 ? (names[0] ?? '') : `${names.slice(0, -1).join(', ')} and ${names.at(-1)}`;
-}

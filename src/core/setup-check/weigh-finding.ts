@@ -5,6 +5,7 @@ import type { GroundInput } from '../rank-input';
 import type { Verdict } from '../verdict-types';
 import type { Finding, SetupEffect, SetupTrial, UsualWinds } from './setup-types';
 import { windowsHunted, windsHunted } from './shot-of';
+import { PART_WORDS } from './words/parts';
 
 const HOUR = 3_600_000;
 /** A middling hunting wind: 8 mph. */
@@ -29,7 +30,7 @@ function steadyWind(window: SitWindow, fromDeg: number): Forecast {
       thunder: false,
     }),
   );
-  return { issuedAt: first, fetchedAt: first, source: 'a usual wind', hours, members: [] };
+  return { issuedAt: first, fetchedAt: first, source: PART_WORDS.usualWind, hours, members: [] };
 }
 
 /** The window a stand is rated best for, and the commonest of the winds it is hunted on then. */
