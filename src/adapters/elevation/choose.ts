@@ -1,5 +1,6 @@
 import { makeHostedElevation } from './hosted';
 import { type ElevationPort, elevationFailure } from './port';
+import { ELEVATION_FAULTS, ELEVATION_LABELS } from './words';
 
 export interface ElevationSettings {
   /** fake or hosted. */
@@ -7,8 +8,6 @@ export interface ElevationSettings {
   elevationUrl?: string | undefined;
   weatherApiKey?: string | undefined;
 }
-
-const FAKE_LABEL = 'made-up hills (no elevation service is set up)';
 
 /** The heights a setting names. */
 export function chooseElevation(settings: ElevationSettings): ElevationPort {
@@ -18,7 +17,7 @@ export function chooseElevation(settings: ElevationSettings): ElevationPort {
     url: settings.elevationUrl ?? `https://${customer}api.open-meteo.com/v1/elevation`,
     apiKey: settings.weatherApiKey,
     source: 'hosted',
-    label: 'Open-Meteo, Copernicus heights 90 m apart',
+    label: ELEVATION_LABELS.hosted,
   });
 }
 
@@ -26,16 +25,16 @@ export function chooseElevation(settings: ElevationSettings): ElevationPort {
 function fake(): ElevationPort {
   return {
     source: 'fake',
-    label: FAKE_LABEL,
+    label: ELEVATION_LABELS.made,
     heights: async (places, signal) => {
       let url: string;
       try {
         const { serveFakeElevation } = await import('./fake/serve');
         url = await serveFakeElevation();
       } catch {
-        return elevationFailure('unavailable', 'The made hills could not be started on this machine.');
+        return elevationFailure('unavailable', ELEVATION_FAULTS.madeNotStarted);
       }
-      return makeHostedElevation({ url, source: 'fake', label: FAKE_LABEL }).heights(places, signal);
+      return makeHostedElevation({ url, source: 'fake', label: ELEVATION_LABELS.made }).heights(places, signal);
     },
   };
 }

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { type ElevationPort, type ElevationResult, elevationFailure, MOST_AT_ONCE } from './port';
+import { ELEVATION_FAULTS } from './words';
 
 export interface HostedElevationOptions {
   /** The whole address, such as https://host/v1/elevation. */
@@ -21,8 +22,7 @@ export function makeHostedElevation(options: HostedElevationOptions): ElevationP
     label: options.label,
     heights: async (places, signal): Promise<ElevationResult> => {
       if (places.length === 0) return { ok: true, heightsM: [] };
-      if (places.length > MOST_AT_ONCE)
-        return elevationFailure('bad_answer', 'Too many places were asked for at once.');
+      if (places.length > MOST_AT_ONCE) return elevationFailure('bad_answer', ELEVATION_FAULTS.tooMany);
       const url = new URL(options.url);
       url.searchParams.set('latitude', places.map(({ lat }) => lat.toFixed(6)).join(','));
       url.searchParams.set('longitude', places.map(({ lon }) => lon.toFixed(6)).join(','));
@@ -30,15 +30,15 @@ export function makeHostedElevation(options: HostedElevationOptions): ElevationP
       const limit = AbortSignal.timeout(options.timeLimitMs ?? TIME_LIMIT_MS);
       try {
         const response = await fetch(url, { signal: signal ? AbortSignal.any([signal, limit]) : limit });
-        if (response.status === 429) return elevationFailure('limit', 'The elevation service was asked too often.');
-        if (!response.ok) return elevationFailure('unavailable', 'The elevation service is out of order.');
+        if (response.status === 429) return elevationFailure('limit', ELEVATION_FAULTS.tooOften);
+        if (!response.ok) return elevationFailure('unavailable', ELEVATION_FAULTS.outOfOrder);
         const parsed = answerShape.safeParse(await response.json().catch(() => null));
         if (!parsed.success || parsed.data.elevation.length !== places.length) {
-          return elevationFailure('bad_answer', "The elevation service's answer cannot be used.");
+          return elevationFailure('bad_answer', ELEVATION_FAULTS.badAnswer);
         }
         return { ok: true, heightsM: parsed.data.elevation };
       } catch {
-        return elevationFailure('unavailable', 'The elevation service cannot be reached or did not answer in time.');
+        return elevationFailure('unavailable', ELEVATION_FAULTS.noAnswer);
       }
     },
   };

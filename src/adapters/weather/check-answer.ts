@@ -4,6 +4,7 @@ import { z } from 'zod';
 import type { EnsembleMember, WeatherHour } from '@/core/condition-types';
 import type { DecodedAnswer, DecodedVariable } from './decode-answer';
 import type { WeatherPlace } from './port';
+import { ANSWER_PROBLEMS } from './words';
 
 const HOUR_S = 3600;
 const DAY_MS = 86_400_000;
@@ -48,20 +49,20 @@ function forecastSpan(now: number): AnswerSpan {
 function frameSchema(place: WeatherPlace, span: AnswerSpan) {
   const lonReach = MOST_OFF_DEG / Math.max(0.05, Math.cos((place.lat * Math.PI) / 180));
   return z.object({
-    lat: z.number().refine((lat) => Math.abs(lat - place.lat) <= MOST_OFF_DEG, 'is for another place'),
+    lat: z.number().refine((lat) => Math.abs(lat - place.lat) <= MOST_OFF_DEG, ANSWER_PROBLEMS.otherPlace),
     lon: z.number().refine((lon) => {
       const off = Math.abs(lon - place.lon) % 360;
       return Math.min(off, 360 - off) <= lonReach;
-    }, 'is for another place'),
+    }, ANSWER_PROBLEMS.otherPlace),
     intervalS: z.literal(HOUR_S),
     startS: z
       .int()
       .multipleOf(HOUR_S)
-      .refine((start) => span.startsAt(start * 1000), 'starts at no time near the one asked for'),
+      .refine((start) => span.startsAt(start * 1000), ANSWER_PROBLEMS.startsElsewhen),
     endS: z
       .int()
       .multipleOf(HOUR_S)
-      .refine((end) => span.endsAt(end * 1000), 'ends at no time asked for'),
+      .refine((end) => span.endsAt(end * 1000), ANSWER_PROBLEMS.endsElsewhen),
   });
 }
 
@@ -80,7 +81,7 @@ export function checkHours(
   const column = (variable: Variable, unit: Unit) => findColumn(variables, variable, unit, 0, instants.length);
   const speed = column(Variable.wind_speed, Unit.metre_per_second);
   const from = column(Variable.wind_direction, Unit.degree_direction);
-  if (!speed || !from) return { ok: false, problem: 'has no wind in metres per second' };
+  if (!speed || !from) return { ok: false, problem: ANSWER_PROBLEMS.noWind };
   const gust = column(Variable.wind_gusts, Unit.metre_per_second);
   const temp = column(Variable.temperature, Unit.celsius);
   const pressure = column(Variable.pressure_msl, Unit.hectopascal);
@@ -104,7 +105,7 @@ export function checkHours(
     };
   });
   if (hours.filter((hour) => hour.windSpeedMps !== null).length * 2 < hours.length) {
-    return { ok: false, problem: 'has no wind for most hours' };
+    return { ok: false, problem: ANSWER_PROBLEMS.mostlyNoWind };
   }
   return parsed(z.array(hourSchema), hours);
 }
@@ -135,7 +136,7 @@ export function checkMembers(
 }
 
 function checkFrame(answer: DecodedAnswer | null, place: WeatherPlace, span: AnswerSpan) {
-  if (!answer) return { ok: false, problem: 'holds no hours' } as const;
+  if (!answer) return { ok: false, problem: ANSWER_PROBLEMS.noHours } as const;
   const frame = frameSchema(place, span).safeParse(answer);
   if (!frame.success) return { ok: false, problem: firstProblem(frame.error) } as const;
   const { startS, endS } = frame.data;
@@ -161,5 +162,5 @@ function parsed<T>(schema: z.ZodType<T>, value: unknown): Checked<T> {
 
 function firstProblem(error: z.ZodError): string {
   const issue = error.issues[0];
-  return issue ? `${issue.path.join('.')}: ${issue.message}` : 'is not a forecast';
+  return issue ? `${issue.path.join('.')}: ${issue.message}` : ANSWER_PROBLEMS.noForecast;
 }

@@ -1,6 +1,7 @@
 import { makeHostedWeather } from './hosted';
 import { type WeatherPort, type WeatherResult, weatherFailure } from './port';
 import { makeReplayWeather } from './replay';
+import { WEATHER_FAULTS, WEATHER_LABELS } from './words';
 
 export interface WeatherSettings {
   /** fake, hosted or replay:FILE. */
@@ -34,7 +35,7 @@ function hosted(settings: WeatherSettings, now: () => number): WeatherPort {
     archiveUrl: settings.weatherArchiveUrl ?? `https://${customer}archive-api.open-meteo.com/v1/archive`,
     apiKey: settings.weatherApiKey,
     source: 'hosted',
-    label: 'Open-Meteo',
+    label: WEATHER_LABELS.hosted,
     now,
   });
 }
@@ -47,7 +48,7 @@ function fake(now: () => number): WeatherPort {
       const { serveFakeWeather } = await import('./fake/serve');
       url = await serveFakeWeather(now);
     } catch {
-      return weatherFailure('unavailable', 'The made weather could not be started on this machine.');
+      return weatherFailure('unavailable', WEATHER_FAULTS.madeNotStarted);
     }
     return request(
       makeHostedWeather({
@@ -55,7 +56,7 @@ function fake(now: () => number): WeatherPort {
         ensembleUrl: `${url}/v1/ensemble`,
         archiveUrl: `${url}/v1/archive`,
         source: 'fake',
-        label: 'Made weather (no real forecast)',
+        label: WEATHER_LABELS.made,
         now,
       }),
     );

@@ -10,6 +10,7 @@ import {
   type WeatherResult,
   weatherFailure,
 } from './port';
+import { WEATHER_FAULTS, WEATHER_LABELS } from './words';
 
 export interface HostedWeatherOptions {
   /** Whole addresses of the two services, such as https://host/v1/forecast. */
@@ -58,8 +59,7 @@ export function makeHostedWeather(options: HostedWeatherOptions): WeatherPort {
       if (!plain.ok) return plain;
       const fetchedAt = options.now();
       const hours = checkHours(plain.answer, place, fetchedAt);
-      if (!hours.ok)
-        return weatherFailure('bad_answer', `The weather service's answer cannot be used: ${hours.problem}.`);
+      if (!hours.ok) return weatherFailure('bad_answer', WEATHER_FAULTS.badAnswer(hours.problem));
       const instants = hours.value.map((hour) => hour.at);
       let members: EnsembleMember[] = [];
       if (ensemble.ok) {
@@ -87,9 +87,8 @@ export function makeHostedWeather(options: HostedWeatherOptions): WeatherPort {
       const until = Date.parse(`${days.toDay}T00:00:00Z`) + DAY_MS;
       const span = { startsAt: (at: number) => at === from, endsAt: (at: number) => at === until };
       const hours = checkHours(answered.answer, place, fetchedAt, span);
-      if (!hours.ok)
-        return weatherFailure('bad_answer', `The weather archive's answer cannot be used: ${hours.problem}.`);
-      const source = `${options.label}, past hours`;
+      if (!hours.ok) return weatherFailure('bad_answer', WEATHER_FAULTS.badArchive(hours.problem));
+      const source = WEATHER_LABELS.pastHours(options.label);
       return { ok: true, forecast: { issuedAt: fetchedAt, fetchedAt, source, hours: hours.value, members: [] } };
     },
   };
@@ -109,12 +108,12 @@ async function ask(url: string, query: Record<string, string>, signal: AbortSign
 
 /** The SDK throws the service's own reason for 400 and 429, the status line for 5xx, and what fetch or the reader threw. */
 function explain(error: unknown, signal: AbortSignal): WeatherFailure {
-  if (signal.aborted) return weatherFailure('unavailable', 'The weather service did not answer in time.');
+  if (signal.aborted) return weatherFailure('unavailable', WEATHER_FAULTS.late);
   if (error instanceof Error && /limit exceeded|too many requests/i.test(error.message)) {
-    return weatherFailure('limit', 'The weather service was asked too often.');
+    return weatherFailure('limit', WEATHER_FAULTS.tooOften);
   }
-  if (error instanceof RangeError) return weatherFailure('bad_answer', "The weather service's answer is cut short.");
-  return weatherFailure('unavailable', 'The weather service cannot be reached or is out of order.');
+  if (error instanceof RangeError) return weatherFailure('bad_answer', WEATHER_FAULTS.cutShort);
+  return weatherFailure('unavailable', WEATHER_FAULTS.noAnswer);
 }
 
 function placeQuery(place: WeatherPlace, apiKey: string | undefined): Record<string, string> {

@@ -1,4 +1,5 @@
 import type { WeatherHour } from '@/core/condition-types';
+import { REPLAY_FAULTS } from './words';
 
 /** A row that was left out, by its line in the file (the heading is line 1). */
 export interface ReplayProblem {
@@ -40,7 +41,7 @@ export function parseReplayCsv(text: string): ReplayHours {
   const heading = cells(lines[0] ?? '').map((name) => name.toLowerCase());
   const missing = NEEDED.filter((name) => !heading.includes(name));
   if (missing.length > 0) {
-    return { hours: [], problems: [{ line: 1, message: `The heading has no column ${missing.join(', ')}.` }] };
+    return { hours: [], problems: [{ line: 1, message: REPLAY_FAULTS.noColumns(missing) }] };
   }
   const problems: ReplayProblem[] = [];
   const byInstant = new Map<number, { line: number; hour: WeatherHour }>();
@@ -53,7 +54,7 @@ export function parseReplayCsv(text: string): ReplayHours {
       continue;
     }
     const earlier = byInstant.get(row.at);
-    if (earlier) problems.push({ line, message: `The same time stands on line ${earlier.line}; that one is kept.` });
+    if (earlier) problems.push({ line, message: REPLAY_FAULTS.sameTime(earlier.line) });
     else byInstant.set(row.at, { line, hour: row });
   }
   const hours = [...byInstant.values()].map((kept) => kept.hour).sort((a, b) => a.at - b.at);
@@ -71,16 +72,16 @@ function cells(line: string): string[] {
 
 /** The hour, or what is wrong with the row. */
 function readRow(heading: string[], row: string[]): WeatherHour | string {
-  if (row.length !== heading.length) return `Has ${row.length} cells; the heading has ${heading.length}.`;
+  if (row.length !== heading.length) return REPLAY_FAULTS.cells(row.length, heading.length);
   const time = row[heading.indexOf('time_utc')] ?? '';
   const at = readInstant(time);
-  if (at === null) return `time_utc "${time}" is not an instant such as 2013-11-09T11:00:00Z.`;
+  if (at === null) return REPLAY_FAULTS.notInstant(time);
   const values = new Map<NumberColumn, number | null>();
   for (const [column, [least, most]] of Object.entries(LIMITS) as [NumberColumn, readonly [number, number]][]) {
     const cell = row[heading.indexOf(column)] ?? '';
     const value = cell === '' ? null : Number(cell);
     if (value !== null && !(value >= least && value <= most)) {
-      return `${column} "${cell}" is not a number from ${least} to ${most}.`;
+      return REPLAY_FAULTS.outOfRange(column, cell, least, most);
     }
     values.set(column, value);
   }

@@ -2,6 +2,7 @@ import { readFile } from 'node:fs/promises';
 import type { Forecast, WeatherHour } from '@/core/condition-types';
 import { type WeatherPort, weatherFailure } from './port';
 import { parseReplayCsv } from './replay-csv';
+import { REPLAY_FAULTS, WEATHER_LABELS } from './words';
 
 export interface ReplayOptions {
   file: string;
@@ -35,16 +36,14 @@ export function makeReplayWeather(options: ReplayOptions): WeatherPort {
     try {
       text = await readFile(options.file, { encoding: 'utf8', ...(signal ? { signal } : {}) });
     } catch {
-      return weatherFailure('unavailable', `The file ${options.file} cannot be read.`);
+      return weatherFailure('unavailable', REPLAY_FAULTS.unreadable(options.file));
     }
     const { hours, problems } = parseReplayCsv(text);
     if (hours.length === 0) {
-      const first = problems[0];
-      const why = first ? ` Line ${first.line}: ${first.message}` : '';
-      return weatherFailure('bad_answer', `The file ${options.file} holds no hours.${why}`);
+      return weatherFailure('bad_answer', REPLAY_FAULTS.noHours(options.file, problems[0]));
     }
     const { fromAt, toAt } = options;
-    const label = `Replay of ${options.file.split(/[\\/]/).at(-1)}`;
+    const label = WEATHER_LABELS.replay(options.file.split(/[\\/]/).at(-1) ?? '');
     return { ok: true, forecast: replayForecast(hours, { issuedAt: options.issuedAt(), label, fromAt, toAt }) };
   };
   return {
