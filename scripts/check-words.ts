@@ -8,12 +8,17 @@ import { findWords } from './find-words';
  */
 const WORDS_MAY_STAND = [
   /\.test\.tsx?$/,
-  // Made ground for tests.
+  // Made ground for tests, and what the demo club is called and has written down.
   /\/example-[\w-]+\.ts$/,
+  /^src\/features\/demo\/[\w-]+\.ts$/,
   /(^|\/)words\.ts$/,
   /\/words\/[\w-]+\.ts$/,
   // Numbers, units and dates are formatted in one place each; the source of a constant stands beside it.
   /^src\/core\/(units|day-time|settings|setting-notes)\.ts$/,
+  // Settings are refused to whoever starts the program, by the names they have in .env.
+  /^src\/env\.ts$/,
+  // Made services answer our programs in the real ones' words; a worker's code is kept as text.
+  /^src\/adapters\/(\w+\/fake\/[\w-]+|solver\/worker-code)\.ts$/,
   // Names of columns as other programs write them, and markup.
   /^src\/features\/exchange\/(read\/read-csv|write\/write-gpx)\.ts$/,
 ];

@@ -23,9 +23,9 @@ const READ_MOSTLY =
   /^(heading|legend|caption|subject|subtitle|detail|description|summary|empty|note|said|text|term|children|\w+(Text|Title|Note|Hint))$/;
 const FOR_MACHINES =
   /^(className|\w*ClassName|style|d|transform|points|viewBox|preserveAspectRatio|log|href|data-.*|autoComplete|accept|sizes|type|\w*[fF]allback|key|prodId|[A-Z]\w*-[\w-]*)$/;
-/** Calls whose texts are for us: the log, faults of the program, class names, rules of the browser. */
+/** Calls whose texts are for us: the log, the database, faults of the program, parts looked for, class names, rules of the browser. */
 const CALLS_FOR_US =
-  /^(log\.\w+|console\.\w+|(\w*\.)?sql|joinClasses|Error|RangeError|TypeError|URL|RegExp|Intl\.\w+|(.*\.)?matchMedia|press|.*\.(on|off)|.*\.querySelector\w*|.*\.getElementsBy\w+|.*\.closest|z\.literal)$/;
+  /^(log\.\w+|console\.\w+|(\w*\.)?sql|client\.execute|.*\.(includes|startsWith|endsWith)|joinClasses|Error|RangeError|TypeError|URL|RegExp|Intl\.\w+|(.*\.)?matchMedia|press|.*\.(on|off)|.*\.querySelector\w*|.*\.getElementsBy\w+|.*\.closest|z\.literal)$/;
 const BARE_CLASS =
   /^(absolute|block|border|capitalize|container|contents|fixed|flex|grid|group|hidden|inline|invisible|italic|outline|peer|relative|rounded|static|sticky|table|truncate|underline|uppercase|lowercase|transition|shadow)$/;
 

@@ -1,5 +1,10 @@
 import { formatDay } from '@/core/day-time';
+import { SIT_AUDIT } from '@/features/bookings/words/audit';
 import { dayAndWindow } from '@/features/bookings/words/sits';
+import { CLUB_AUDIT } from '@/features/clubs/words/audit';
+import { aRole } from '@/features/clubs/words/roles';
+import { GROUND_AUDIT } from '@/features/ground/words/audit';
+import { WHOLE_GROUND } from '@/features/ground/words/closures';
 import type { MadeClub } from './build-club';
 import type { MadeGround } from './build-ground';
 import type { DemoDay } from './demo-day';
@@ -29,7 +34,7 @@ export function buildAudit(
   if (!founder || !steward) throw new Error('The demo club has nobody in it.');
   const names = new Map(made.ground.stands.map(({ id, name }) => [id, name]));
   const memberName = (id: string) => members.find((member) => member.id === id)?.name ?? '';
-  const standName = (id: string | null | undefined) => (id ? (names.get(id) ?? '') : 'The whole ground');
+  const standName = (id: string | null | undefined) => (id ? (names.get(id) ?? '') : WHOLE_GROUND);
 
   const told: Told[] = [
     {
@@ -37,36 +42,53 @@ export function buildAudit(
       actorId: founder.id,
       action: 'club.created',
       subjectId: row.id,
-      summary: `${founder.name} started ${row.name}.`,
+      summary: CLUB_AUDIT.started(founder.name, row.name),
     },
     ...memberships.slice(1).map(({ id, role, joinedAt }) => ({
       at: joinedAt,
       actorId: id,
       action: 'member.joined',
       subjectId: id,
-      summary: `${memberName(id)} joined as ${role}.`,
+      summary: CLUB_AUDIT.joined(memberName(id), aRole(role), memberName(id)),
     })),
     ...made.ground.stands.map(({ id, name, createdAt }) => ({
       at: createdAt,
       actorId: steward.id,
       action: 'stand.added',
       subjectId: id,
-      summary: `Added stand ${name}.`,
+      summary: GROUND_AUDIT.standAdded(name),
     })),
     ...made.closures.map(({ id, standId, fromDay, toDay, reason, byMemberId, createdAt }) => ({
       at: createdAt,
       actorId: byMemberId,
       action: 'closure.added',
       subjectId: id,
-      summary: `Closed ${standName(standId)} from ${formatDay(fromDay, true)}${toDay ? ` to ${formatDay(toDay, true)}` : ''}: ${reason}.`,
+      summary: GROUND_AUDIT.closed(
+        standName(standId),
+        formatDay(fromDay, true),
+        toDay ? formatDay(toDay, true) : null,
+        reason,
+      ),
     })),
     ...made.sits.flatMap((sit): Told[] => {
-      const what = `${standName(sit.standId)} for ${memberName(sit.memberId)}: ${dayAndWindow(sit.day, sit.windows, true)}.`;
+      const [stand, member] = [standName(sit.standId), memberName(sit.memberId)];
+      const when = dayAndWindow(sit.day, sit.windows, true);
       const by = { actorId: sit.memberId, subjectId: sit.id };
-      const booked = { ...by, at: sit.createdAt, action: 'sit.booked', summary: `Booked ${what}` };
+      const booked = {
+        ...by,
+        at: sit.createdAt,
+        action: 'sit.booked',
+        summary: SIT_AUDIT.booked(stand, member, when),
+      };
       if (!sit.cancelledAt) return [booked];
-      const detail = { reason: sit.cancelReason };
-      return [booked, { ...by, at: sit.cancelledAt, action: 'sit.cancelled', summary: `Cancelled ${what}`, detail }];
+      const cancelled = {
+        ...by,
+        at: sit.cancelledAt,
+        action: 'sit.cancelled',
+        summary: SIT_AUDIT.cancelled(member, stand, when),
+        detail: { reason: sit.cancelReason },
+      };
+      return [booked, cancelled];
     }),
   ];
   return told

@@ -1,4 +1,5 @@
 import { addDays } from '@/core/day-time';
+import { FILE_REMARKS, THING_PROBLEMS } from '@/features/exchange/words/files';
 import type { MadeClub } from './build-club';
 import type { DemoDay } from './demo-day';
 import { positionOf } from './demo-place';
@@ -42,11 +43,11 @@ export function buildImports(day: DemoDay, club: MadeClub): DemoRows['imports'] 
           notes: '',
           told: '',
           geometry: null,
-          problem: 'Line 412: latitude "", longitude "" is no place.',
+          problem: THING_PROBLEMS.badPoint(412, '', ''),
           remarks: [],
         },
       ],
-      remarks: ['Heights in the file are left out: the map is flat.'],
+      remarks: [FILE_REMARKS.heights],
       createdAt: Date.parse(`${addDays(day.today, -2)}T21:10:00Z`),
     },
   ];

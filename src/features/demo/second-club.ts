@@ -7,6 +7,7 @@ import { latLonOf } from './demo-place';
 import { SECOND_CLUB_MEMBERS } from './people';
 import { CLOSE, type DemoStand, good, OPEN_WOOD } from './stand-types';
 
+export const SECOND_CLUB_NAME = 'Quill Hollow';
 const DAYS_OLD = 300;
 const PLACE = { lat: 41.006, lon: -77.522, zone: 'America/New_York' };
 
@@ -49,7 +50,7 @@ const STANDS: readonly DemoStand[] = [
 export function buildSecondClub(day: DemoDay, users: readonly UserRow[]): MadeClub & { stands: StandRow[] } {
   const club = buildClub(
     day,
-    { slug: 'quill-hollow', name: 'Quill Hollow', ...PLACE, rules: DEFAULT_CLUB_RULES, daysOld: DAYS_OLD },
+    { slug: 'quill-hollow', name: SECOND_CLUB_NAME, ...PLACE, rules: DEFAULT_CLUB_RULES, daysOld: DAYS_OLD },
     SECOND_CLUB_MEMBERS,
     users,
   );

@@ -3,12 +3,11 @@
 import { useState } from 'react';
 import type { ActionResult } from '@/server/doors';
 import { Button } from '@/ui/button';
+import { TRY_DEMO_WORDS } from '../words/try-demo';
 
 interface Props {
   action: (values: Record<string, never>) => Promise<ActionResult<{ to: string }>>;
 }
-
-const LOST = 'The server could not be reached. Try again.';
 
 /** Into the demo club as one of its members, without an account. */
 export function TryDemoButton({ action }: Props) {
@@ -19,14 +18,14 @@ export function TryDemoButton({ action }: Props) {
     setPending(true);
     const answer = await action({}).catch(() => null);
     if (answer?.ok) return window.location.assign(answer.data.to);
-    setProblem(answer ? answer.error.message : LOST);
+    setProblem(answer ? answer.error.message : TRY_DEMO_WORDS.lost);
     setPending(false);
   }
 
   return (
     <>
-      <Button onClick={enter} pending={pending} pendingLabel="Opening the demo…">
-        Try the demo club
+      <Button onClick={enter} pending={pending} pendingLabel={TRY_DEMO_WORDS.opening}>
+        {TRY_DEMO_WORDS.open}
       </Button>
       {problem && (
         <p role="alert" className="w-full text-clay">

@@ -3,11 +3,12 @@ import { notFound } from 'next/navigation';
 import { PlainFrame } from '@/app/plain-frame';
 import { findLinks } from '@/features/mail/find-links';
 import { readKeptMail } from '@/features/mail/reads';
+import { KEPT_MAIL_WORDS } from '@/features/mail/words';
 import { publicPage } from '@/server/doors';
 import { TextLink } from '@/ui/button';
 import { DefinitionList, PageTitle, Section } from '@/ui/page-parts';
 
-export const metadata: Metadata = { title: 'Kept mail' };
+export const metadata: Metadata = { title: KEPT_MAIL_WORDS.title };
 
 const PRE = 'whitespace-pre-wrap break-words border border-rule bg-panel p-4';
 
@@ -15,7 +16,7 @@ const PRE = 'whitespace-pre-wrap break-words border border-rule bg-panel p-4';
 function HtmlLink({ id }: { id: string }) {
   return (
     <a href={`/dev/mail/${id}/html`} className="text-moss underline">
-      Read it as HTML
+      {KEPT_MAIL_WORDS.readHtml}
     </a>
   );
 }
@@ -24,16 +25,16 @@ export default publicPage(async ({ params }) => {
   const mail = await readKeptMail(params.id ?? '');
   if (!mail) notFound();
   return (
-    <PlainFrame width="page" links={<TextLink href="/dev/mail">All kept mail</TextLink>}>
-      <PageTitle title={mail.subject} over="Kept mail" />
+    <PlainFrame width="page" links={<TextLink href="/dev/mail">{KEPT_MAIL_WORDS.all}</TextLink>}>
+      <PageTitle title={mail.subject} over={KEPT_MAIL_WORDS.title} />
       <DefinitionList
         items={[
-          { term: 'To', detail: mail.toEmail },
-          ...(mail.html ? [{ term: 'HTML', detail: <HtmlLink id={mail.id} /> }] : []),
-          { term: 'Message-ID', detail: <span className="break-all">{mail.messageId}</span> },
+          { term: KEPT_MAIL_WORDS.to, detail: mail.toEmail },
+          ...(mail.html ? [{ term: KEPT_MAIL_WORDS.html, detail: <HtmlLink id={mail.id} /> }] : []),
+          { term: KEPT_MAIL_WORDS.messageId, detail: <span className="break-all">{mail.messageId}</span> },
         ]}
       />
-      <Section title="Plain text" className="mt-6">
+      <Section title={KEPT_MAIL_WORDS.plain} className="mt-6">
         <p className={PRE}>
           {findLinks(mail.text).map(({ kind, text }, index) =>
             kind === 'link' ? (
@@ -48,7 +49,7 @@ export default publicPage(async ({ params }) => {
         </p>
       </Section>
       {mail.calendar && (
-        <Section title="Calendar part">
+        <Section title={KEPT_MAIL_WORDS.calendar}>
           <pre className={PRE}>{mail.calendar}</pre>
         </Section>
       )}
