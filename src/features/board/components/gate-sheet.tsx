@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { SidewaysBox } from '@/ui/figure-table';
 import { WindBarb } from '@/ui/wind/wind-barb';
 import type { GateSheet } from '../gate-sheet/read-gate-sheet';
 import { GATE_SITS_WORDS as SITS, GATE_WIND_WORDS as WIND, GATE_SHEET_WORDS as WORDS } from '../words/gate-sheet';
@@ -17,20 +18,10 @@ function Part({ title, children }: { title: string; children: ReactNode }) {
   );
 }
 
-/** A wide table scrolls by itself on a phone; on paper it has all the room there is. */
-function Wide({ label, children }: { label: string; children: ReactNode }) {
-  return (
-    // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls must be reached by keyboard
-    <section aria-label={label} tabIndex={0} className="overflow-x-auto print:overflow-visible">
-      {children}
-    </section>
-  );
-}
-
 function SitsTable({ sheet }: { sheet: GateSheet }) {
   const blanks = Array.from({ length: WALK_UPS }, (_, index) => index + 1);
   return (
-    <Wide label={SITS.region}>
+    <SidewaysBox label={SITS.region}>
       <table className="w-full min-w-176 border-collapse text-sm leading-snug print:min-w-0">
         <caption className="sr-only">{SITS.caption}</caption>
         <thead>
@@ -79,7 +70,7 @@ function SitsTable({ sheet }: { sheet: GateSheet }) {
           ))}
         </tbody>
       </table>
-    </Wide>
+    </SidewaysBox>
   );
 }
 
@@ -91,7 +82,7 @@ function WindTable({ winds }: { winds: GateSheet['winds'] }) {
     { label: WIND.rain, of: (wind: GateSheet['winds'][number]) => wind.rain },
   ];
   return (
-    <Wide label={WIND.region}>
+    <SidewaysBox label={WIND.region}>
       <table className="w-full hours-table min-w-208 table-fixed border-collapse text-center text-xs leading-tight print:min-w-0">
         <caption className="sr-only">{WIND.caption}</caption>
         <thead>
@@ -129,7 +120,7 @@ function WindTable({ winds }: { winds: GateSheet['winds'] }) {
           ))}
         </tbody>
       </table>
-    </Wide>
+    </SidewaysBox>
   );
 }
 

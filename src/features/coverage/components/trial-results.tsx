@@ -1,7 +1,8 @@
 import type { TrialGain } from '@/core/coverage/try-stand';
 import { SECTOR_NAMES } from '@/core/sectors';
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { Section } from '@/ui/page-parts';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import { shareText } from '../share-text';
 import { COVERAGE_WORDS, MONTH_NAMES, TRIAL_WORDS as W, WINDOW_TITLES } from '../words';
 import { PointBars } from './point-bars';
@@ -33,7 +34,7 @@ export function TrialResults({ gains }: { gains: readonly TrialGain[] }) {
           </Section>
         ))}
       </div>
-      <Table caption={W.addsByMonth} stack={false}>
+      <FigureTable caption={W.addsByMonth}>
         <THead>
           <Th>{W.month}</Th>
           {gains.map(({ window }) => (
@@ -45,7 +46,7 @@ export function TrialResults({ gains }: { gains: readonly TrialGain[] }) {
         <TBody>
           {months.map((month) => (
             <Tr key={month}>
-              <RowHead>{MONTH_NAMES[month - 1]}</RowHead>
+              <FigureHead>{MONTH_NAMES[month - 1]}</FigureHead>
               {gains.map((gain) => (
                 <Td key={gain.window} align="right">
                   {shareText(addedIn(gain, month))}
@@ -54,7 +55,7 @@ export function TrialResults({ gains }: { gains: readonly TrialGain[] }) {
             </Tr>
           ))}
         </TBody>
-      </Table>
+      </FigureTable>
     </>
   );
 }

@@ -1,5 +1,6 @@
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { Section } from '@/ui/page-parts';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import { WindRose } from '@/ui/wind/wind-rose';
 import type { WindowCoverage } from '../reads';
 import { shareText } from '../share-text';
@@ -19,7 +20,7 @@ export function WindowSection({ coverage }: { coverage: WindowCoverage }) {
       </Section>
       <details className="mt-4">
         <summary className="cursor-pointer py-2.5 font-semibold">{W.openMonths}</summary>
-        <Table caption={W.byMonth(window)} stack={false}>
+        <FigureTable caption={W.byMonth(window)}>
           <THead>
             <Th>{W.month}</Th>
             <Th align="right">{W.hours}</Th>
@@ -29,14 +30,14 @@ export function WindowSection({ coverage }: { coverage: WindowCoverage }) {
           <TBody>
             {months.map((month) => (
               <Tr key={month.month}>
-                <RowHead>{MONTH_NAMES[month.month - 1]}</RowHead>
+                <FigureHead>{MONTH_NAMES[month.month - 1]}</FigureHead>
                 <Td align="right">{month.hours}</Td>
                 <Td align="right">{shareText(month.covered)}</Td>
                 <Td>{month.uncovered}</Td>
               </Tr>
             ))}
           </TBody>
-        </Table>
+        </FigureTable>
       </details>
     </div>
   );

@@ -1,5 +1,6 @@
 import { type Figure, figureText, type Indices, intervalText } from '@/core/indices';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { FigureHead, FigureTable } from '@/ui/figure-table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { IndexGroup } from '../sightings-reads';
 import { INDEX_TABLE_WORDS } from '../words/sightings';
 
@@ -38,43 +39,37 @@ interface IndexTableProps {
   groups: IndexGroup[];
 }
 
-/**
- * The indices of some groups of sits; the 95 % interval stands small below each. Figures are read down a column, so on a
- * phone the table keeps its columns and is moved sideways under the names.
- */
+/** The indices of some groups of sits; the 95 % interval stands small below each. */
 export function IndexTable({ caption, head, groups }: IndexTableProps) {
   return (
-    // biome-ignore lint/a11y/noNoninteractiveTabindex: a box that scrolls must be reached by keyboard
-    <section aria-label={caption} tabIndex={0} className="overflow-x-auto">
-      <Table caption={caption} stack={false}>
-        <THead>
-          <Th>{head}</Th>
-          <Th align="right">{words.sits}</Th>
-          <Th align="right">{words.hours}</Th>
-          {COLUMNS.map((column) => (
-            <Th key={column.head} align="right">
-              {column.head}
-            </Th>
-          ))}
-          <Th align="right">{words.bumped}</Th>
-        </THead>
-        <TBody>
-          {groups.map(({ key, label, indices }) => (
-            <Tr key={key}>
-              <RowHead className="sticky left-0 min-w-28 bg-paper first-letter:uppercase">{label}</RowHead>
-              <Td align="right">{indices.sits}</Td>
-              <Td align="right">{indices.hours.toFixed(1)}</Td>
-              {COLUMNS.map(({ head: name, of, as = 'number' }) => (
-                <FigureCell key={name} figure={of(indices)} as={as} />
-              ))}
-              <Td align="right">
-                {indices.bumpedSits}
-                <span className="block text-ink-soft text-xs">{figureText(indices.bumpedShare, 'percent')}</span>
-              </Td>
-            </Tr>
-          ))}
-        </TBody>
-      </Table>
-    </section>
+    <FigureTable caption={caption}>
+      <THead>
+        <Th>{head}</Th>
+        <Th align="right">{words.sits}</Th>
+        <Th align="right">{words.hours}</Th>
+        {COLUMNS.map((column) => (
+          <Th key={column.head} align="right">
+            {column.head}
+          </Th>
+        ))}
+        <Th align="right">{words.bumped}</Th>
+      </THead>
+      <TBody>
+        {groups.map(({ key, label, indices }) => (
+          <Tr key={key}>
+            <FigureHead>{label}</FigureHead>
+            <Td align="right">{indices.sits}</Td>
+            <Td align="right">{indices.hours.toFixed(1)}</Td>
+            {COLUMNS.map(({ head: name, of, as = 'number' }) => (
+              <FigureCell key={name} figure={of(indices)} as={as} />
+            ))}
+            <Td align="right">
+              {indices.bumpedSits}
+              <span className="block text-ink-soft text-xs">{figureText(indices.bumpedShare, 'percent')}</span>
+            </Td>
+          </Tr>
+        ))}
+      </TBody>
+    </FigureTable>
   );
 }

@@ -1,13 +1,13 @@
 import { figureText, intervalText } from '@/core/indices';
 import type { BumpCount } from '@/core/report/bumps';
 import { RangeChart } from '@/ui/charts/range-chart';
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { Section } from '@/ui/page-parts';
 import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { BumpsPart } from '../parts/bumps';
 import { BUMPS_WORDS as words } from '../words/bumps';
 import { PART_TITLES } from '../words/page';
 import { CsvLink } from './csv-link';
-import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 /** A share and its interval in percent, as the axis counts. */

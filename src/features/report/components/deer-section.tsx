@@ -2,12 +2,12 @@ import { figureText, intervalText } from '@/core/indices';
 import type { IndexGroup } from '@/features/logs/sightings-reads';
 import { ButtonLink, TextLink } from '@/ui/button';
 import { RangeChart } from '@/ui/charts/range-chart';
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { Section } from '@/ui/page-parts';
 import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import { DEER_WORDS as words } from '../words/deer';
 import { PART_TITLES } from '../words/page';
 import { CsvLink } from './csv-link';
-import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 const rowsOf = (groups: IndexGroup[]) =>

@@ -1,12 +1,12 @@
 import { numberText } from '@/features/clubs/read-number';
 import { ButtonLink } from '@/ui/button';
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { Section } from '@/ui/page-parts';
 import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { HoursPart, HoursRow } from '../parts/hours';
 import { HOURS_WORDS as words } from '../words/hours';
 import { PART_TITLES } from '../words/page';
 import { CsvLink } from './csv-link';
-import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 export function HoursSection({ club, report, hours }: PartProps & { hours: HoursPart }) {

@@ -1,12 +1,12 @@
 import { fairnessWords } from '@/core/draw/fairness';
 import { LEAST_SCORES } from '@/core/report/good-sits';
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { Section } from '@/ui/page-parts';
 import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { MembersPart } from '../parts/members';
 import { MEMBERS_WORDS, MEMBERS_TABLE_WORDS as words } from '../words/members';
 import { PART_TITLES } from '../words/page';
 import { CsvLink } from './csv-link';
-import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 export function MembersSection({ club, report }: PartProps) {

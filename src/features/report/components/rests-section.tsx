@@ -1,9 +1,9 @@
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { Section } from '@/ui/page-parts';
 import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import { PART_TITLES } from '../words/page';
 import { RESTS_WORDS as words } from '../words/rests';
 import { CsvLink } from './csv-link';
-import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 
 export function RestsSection({ club, report }: PartProps) {

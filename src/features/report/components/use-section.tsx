@@ -1,10 +1,10 @@
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { Section } from '@/ui/page-parts';
 import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 import type { UsePart } from '../parts/use';
 import { PART_TITLES } from '../words/page';
 import { USE_WORDS, WEEKS_TABLE_WORDS, USE_TABLE_WORDS as words } from '../words/use';
 import { CsvLink } from './csv-link';
-import { FigureHead, FigureTable } from './figure-table';
 import type { PartProps } from './part-props';
 import { UseStrips } from './use-strips';
 

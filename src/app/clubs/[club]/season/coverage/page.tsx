@@ -8,9 +8,10 @@ import { TRIAL_WORDS, COVERAGE_WORDS as W } from '@/features/coverage/words';
 import { now } from '@/server/clock';
 import { clubPage } from '@/server/doors';
 import { ButtonLink } from '@/ui/button';
+import { FigureHead, FigureTable } from '@/ui/figure-table';
 import { EmptyState, Notice } from '@/ui/notices';
 import { PageTitle, Section } from '@/ui/page-parts';
-import { RowHead, Table, TBody, Td, THead, Th, Tr } from '@/ui/table';
+import { TBody, Td, THead, Th, Tr } from '@/ui/table';
 
 export const metadata = { title: W.title };
 
@@ -56,7 +57,7 @@ export default clubPage('features.read', async ({ scope, search }) => {
         <TrialStand club={slug} ask={readCoverageAsk(search)} winds={view.winds} />
       </Section>
       <Section title={W.byStand} note={W.byStandNote}>
-        <Table caption={W.byStandCaption} captionHidden stack={false}>
+        <FigureTable caption={W.byStandCaption}>
           <THead>
             <Th>{W.stand}</Th>
             <Th align="right">{W.mornings}</Th>
@@ -67,7 +68,7 @@ export default clubPage('features.read', async ({ scope, search }) => {
           <TBody>
             {view.stands.map((stand) => (
               <Tr key={stand.id}>
-                <RowHead>{stand.name}</RowHead>
+                <FigureHead>{stand.name}</FigureHead>
                 <Td align="right">{stand.morning}</Td>
                 <Td align="right">{stand.evening}</Td>
                 <Td align="right">{shareText(stand.share)}</Td>
@@ -75,7 +76,7 @@ export default clubPage('features.read', async ({ scope, search }) => {
               </Tr>
             ))}
           </TBody>
-        </Table>
+        </FigureTable>
       </Section>
     </>
   );
