@@ -40,6 +40,7 @@ export default defineConfig({
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],
           environment: 'node',
+          setupFiles: ['tests/helpers/say-where.ts'],
           // A look that is repeated until it is true waits as long as a click does: a busy machine is slow, not wrong.
           expect: { poll: { timeout: 30_000 } },
           testTimeout: 240_000,

@@ -29,6 +29,20 @@ export interface Visitor {
   troubles: string[];
 }
 
+/** Everybody who is looking now, for what is said of a test that fails. */
+const visitors: Visitor[] = [];
+
+/** Where everybody is, what the pages said aloud and what troubled them: a failure elsewhere can be read from this. */
+export async function whereVisitorsAre(): Promise<string[]> {
+  const open = visitors.filter(({ page }) => !page.isClosed());
+  return Promise.all(
+    open.map(async ({ page, troubles }) => {
+      const said = await page.locator('[role=alert], [role=status]').allTextContents();
+      return [page.url(), ...said, ...troubles].filter(Boolean).join('\n    ');
+    }),
+  );
+}
+
 /** A browser of its own for one person, with touch at phone size. */
 export async function newVisitor(browser: Browser, baseURL: string, size = PHONE): Promise<Visitor> {
   const touch = size.width < 600;
@@ -43,7 +57,9 @@ export async function newVisitor(browser: Browser, baseURL: string, size = PHONE
     const { protocol, hostname } = new URL(request.url());
     if (protocol.startsWith('http') && hostname !== '127.0.0.1') troubles.push(`left the machine: ${request.url()}`);
   });
-  return { context, page, troubles };
+  const visitor = { context, page, troubles };
+  visitors.push(visitor);
+  return visitor;
 }
 
 /** Serious and critical findings of axe on the page as it stands, in words. */
