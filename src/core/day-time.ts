@@ -9,7 +9,8 @@ import { tzOffset } from '@date-fns/tz';
 const DAY_MS = 86_400_000;
 const MINUTE_MS = 60_000;
 const WEEKDAYS = ['Sun', 'Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat'] as const;
-const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'] as const;
+/** Months for people, January first. */
+export const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'] as const;
 
 /** The day's number since 1970-01-01, or null when the text is no day of the calendar. */
 function dayNumber(text: string): number | null {

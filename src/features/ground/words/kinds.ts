@@ -1,3 +1,4 @@
+import { MONTHS } from '@/core/day-time';
 import type { FeatureKind, ShelterClass, ShotSide, StandKind, Suitability, Weapon } from '@/core/ground-types';
 
 export const STAND_KIND_WORDS: Record<StandKind, string> = {
@@ -50,15 +51,13 @@ export const DIRECTION_WORDS = { in: 'In', out: 'Out', both: 'In and out' } as c
 
 export const SHAPE_WORDS = { point: 'Point', line: 'Line', area: 'Area' } as const;
 
-const MONTH_WORDS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'] as const;
-
-export const MONTH_CHOICES = MONTH_WORDS.map((label, i) => ({ value: String(i + 1), label }));
+export const MONTH_CHOICES = MONTHS.map((label, i) => ({ value: String(i + 1), label }));
 
 /** Months as runs that may cross the new year: 'Sep–Jan', 'Mar, Oct–Nov'; all twelve are 'All year'. */
 export function formatMonths(months: readonly number[]): string {
   const used = new Set(months);
   if (used.size === 12) return 'All year';
-  const word = (month: number) => MONTH_WORDS[(month - 1) % 12] ?? '';
+  const word = (month: number) => MONTHS[(month - 1) % 12] ?? '';
   const starts = [...used].filter((m) => !used.has(m === 1 ? 12 : m - 1)).sort((a, b) => a - b);
   return starts
     .map((start) => {

@@ -1,3 +1,5 @@
+import { formatMonth } from '@/core/day-time';
+
 export const SEASON_WORDS = {
   tabs: 'About the season',
   report: 'Report',
@@ -45,11 +47,9 @@ export const SIGHTINGS_PAGE_WORDS = {
   logList: 'Logs',
 } as const;
 
-const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
-
 /** 'Nov 2026' of '2026-11'. */
 export function monthText(month: string): string {
-  return `${MONTHS[Number(month.slice(5, 7)) - 1]} ${month.slice(0, 4)}`;
+  return `${formatMonth(`${month}-01`)} ${month.slice(0, 4)}`;
 }
 
 interface Seen {

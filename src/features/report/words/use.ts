@@ -1,6 +1,4 @@
-import { formatDay } from '@/core/day-time';
-
-const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'];
+import { formatDay, formatMonth } from '@/core/day-time';
 
 export const USE_WORDS = {
   note: 'A sit is one booking that stood and is over; an all-day sit is one sit and counts in both windows. Pressure is what sits, bumps, camera checks and work near the stand have left by the time the morning window begins: about 1 is one sit just over, half of it is left after a day and a half.',
@@ -9,7 +7,7 @@ export const USE_WORDS = {
   key: (mostSits: number, mostPressure: number) =>
     `Bars: sits in a week, ${mostSits} at the full height. Line: pressure as the morning begins, ${mostPressure.toFixed(1)} at the full height.`,
   sits: (sits: number) => (sits === 1 ? '1 sit' : `${sits} sits`),
-  month: (day: string) => MONTHS[Number(day.slice(5, 7)) - 1] ?? '',
+  month: formatMonth,
   sitsFile: 'Sits',
   pressureFile: 'Pressure',
   gone: (name: string) => `${name} (taken out of use)`,
