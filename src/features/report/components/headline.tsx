@@ -19,7 +19,14 @@ export function Headline({ report }: { report: Report }) {
     { term: words.unused, detail: words.unusedOf(never, unused.length - never) },
     {
       term: words.fair,
-      detail: members.ofGood === null ? words.fairNone : words.fairOf(fairnessWords(members.ofGood), members.ofGood),
+      detail:
+        members.ofGood === null
+          ? words.fairNone
+          : words.fairOf(
+              fairnessWords(members.ofGood),
+              members.ofGood,
+              members.luck ? words.luck[members.luck.as] : '',
+            ),
     },
     {
       term: words.bumps,

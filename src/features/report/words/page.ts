@@ -48,7 +48,13 @@ export const HEADLINE_WORDS = {
   unusedOf: (never: number, oneWindow: number) =>
     `${never === 0 ? 'every stand was sat' : `nobody sat ${count(never, 'stand', 'stands')}`}${oneWindow === 0 ? '' : `; ${oneWindow} in one window only`}`,
   fair: 'Good sits',
-  fairOf: (words: string, value: number) => `${words} among those who sat (Gini ${value.toFixed(2)})`,
+  fairOf: (words: string, value: number, luck: string) =>
+    `${words} among those who sat (Gini ${value.toFixed(2)})${luck && `; ${luck}`}`,
+  luck: {
+    by_lot: 'luck and who sat how often explain it',
+    less_even: 'fewer hands than luck and who sat how often explain',
+    more_even: 'more evenly than luck would have done it',
+  },
   fairNone: 'none to share out yet',
   bumps: 'Bumps',
   bumpsOf: (bumped: number, sits: number, share: string, interval: string) =>
