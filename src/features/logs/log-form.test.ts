@@ -27,6 +27,13 @@ describe('the hours a log starts from', () => {
       endAt: sit.endAt,
     });
   });
+
+  it('do not reach into what is to come while the sit has only begun', () => {
+    const began = { startAt: sit.startAt, endAt: at('06:25') };
+    expect(proposedSpan(sit, nobody, at('06:21'))).toEqual(began);
+    expect(proposedSpan(sit, { inAt: at('06:00'), outAt: null }, at('06:24'))).toEqual(began);
+    expect(proposedSpan(sit, { inAt: at('08:58'), outAt: null }, at('09:00'))).toEqual(began);
+  });
 });
 
 describe('what a log form takes', () => {

@@ -19,13 +19,15 @@ interface OutingSpan {
 
 /**
  * Hours a new log starts from: those of the sit, cut to when its member signed in and out, and to now while it still goes
- * on; all that where it leaves at least five minutes, else the sit's own.
+ * on; all that where it leaves at least five minutes, else the sit's own, or its first five minutes when it has only begun:
+ * a log of hours to come is refused.
  */
 export function proposedSpan(sit: SitSpan, outing: OutingSpan, now: number): { startAt: number; endAt: number } {
   const startAt = Math.max(sit.startAt, outing.inAt ?? sit.startAt);
   const ended = Math.min(sit.endAt, outing.outAt ?? sit.endAt, now);
   const endAt = ended === sit.endAt ? ended : Math.floor(ended / STEP_MS) * STEP_MS;
-  return endAt - startAt >= STEP_MS ? { startAt, endAt } : { startAt: sit.startAt, endAt: sit.endAt };
+  if (endAt - startAt >= STEP_MS) return { startAt, endAt };
+  return { startAt: sit.startAt, endAt: now < sit.endAt ? sit.startAt + STEP_MS : sit.endAt };
 }
 
 /** A clock of the sit's own day: what lies beyond midnight is shown as its last minute. */

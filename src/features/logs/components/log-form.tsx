@@ -93,7 +93,7 @@ export function LogFormView({ club, values, day, zone, units, harvest, save }: L
           label={words.save}
           pending={pending}
           pendingLabel={words.saving}
-          className="sticky bottom-[calc(3.6rem+env(safe-area-inset-bottom))] z-20 bg-paper py-3 md:static"
+          className="sticky above-bar z-20 bg-paper py-3 md:static"
         >
           <ButtonLink href={back} look="quiet">
             {words.back}
