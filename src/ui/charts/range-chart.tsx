@@ -48,10 +48,7 @@ export function RangeChart({ title, unit, rows, className }: RangeChartProps) {
       <div role="img" aria-label={CHART_WORDS.name(title)}>
         <div className="flex flex-col gap-2 sm:gap-1" aria-hidden="true">
           {rows.map((row) => (
-            <div
-              key={row.key}
-              className="grid grid-cols-[minmax(0,1fr)_auto] gap-x-3 sm:grid-cols-[11rem_minmax(0,1fr)_7rem] sm:items-center"
-            >
+            <div key={row.key} className="chart-row sm:items-center">
               <span className="truncate text-sm">
                 {row.label} {row.note && <span className="text-ink-soft">{row.note}</span>}
               </span>
@@ -59,7 +56,7 @@ export function RangeChart({ title, unit, rows, className }: RangeChartProps) {
               <Track row={row} at={scale} ticks={ticks} className="col-span-2 h-4 sm:order-none sm:col-span-1 sm:h-6" />
             </div>
           ))}
-          <div className="grid grid-cols-1 sm:grid-cols-[11rem_minmax(0,1fr)_7rem] sm:gap-x-3">
+          <div className="chart-axis">
             <div className="relative h-5 text-ink-soft text-xs sm:col-start-2">
               {ticks.map((tick) => (
                 <span

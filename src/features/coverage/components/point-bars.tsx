@@ -16,10 +16,7 @@ export function PointBars({ points, label, trial = false }: { points: PointShare
               <span className="font-semibold">{point.name}</span>
               <span aria-hidden="true" className="flex h-4 items-stretch">
                 <span className="bg-ink" style={{ width: width(point.covered) }} />
-                <span
-                  className="border-moss border-y bg-[repeating-linear-gradient(45deg,var(--color-moss)_0_3px,transparent_3px_6px)]"
-                  style={{ width: width(point.added) }}
-                />
+                <span className="border-moss border-y hatched" style={{ width: width(point.added) }} />
                 <span className={open > 0 ? 'border border-ink' : ''} style={{ width: width(open) }} />
               </span>
               <span className="text-right tabular-nums">

@@ -77,7 +77,7 @@ export function TrialMap({ club, at, arcs, onPlace, onTurn }: TrialMapProps) {
         onSeat={place}
         onTurn={onTurn}
         label={W.label}
-        className="relative h-96 sm:h-[30rem]"
+        className="relative map-room"
       />
       <figcaption className="mt-1 max-w-prose text-ink-soft text-sm">{W.caption}</figcaption>
     </figure>

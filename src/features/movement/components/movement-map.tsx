@@ -66,7 +66,7 @@ export function MovementMap({ club, lines }: { club: string; lines: DrawnLine[] 
         things={things}
         overlay={overlay}
         label={W.label}
-        className="relative h-[60dvh] min-h-80 max-h-[40rem]"
+        className="relative map-room"
       />
       <figcaption className="max-w-prose text-ink-soft text-sm">{W.legend}</figcaption>
     </figure>

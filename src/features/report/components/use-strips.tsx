@@ -29,10 +29,7 @@ export function UseStrips({ use }: { use: UsePart }) {
       <div role="img" aria-label={words.chartLabel}>
         <div aria-hidden="true" className="flex flex-col gap-2 sm:gap-1">
           {use.rows.map((row) => (
-            <div
-              key={row.standId}
-              className="grid break-inside-avoid grid-cols-[minmax(0,1fr)_auto] gap-x-3 sm:grid-cols-[11rem_minmax(0,1fr)_4rem] sm:items-end print:grid-cols-[9rem_minmax(0,1fr)_4rem] print:items-end"
-            >
+            <div key={row.standId} className="chart-row break-inside-avoid sm:items-end print:items-end">
               <span className="truncate text-sm">{row.gone ? words.gone(row.name) : row.name}</span>
               <span className="text-right text-sm sm:order-last print:order-last">{words.sits(row.sits)}</span>
               <Strip
@@ -45,7 +42,7 @@ export function UseStrips({ use }: { use: UsePart }) {
               />
             </div>
           ))}
-          <div className="grid sm:grid-cols-[11rem_minmax(0,1fr)_4rem] sm:gap-x-3 print:grid-cols-[9rem_minmax(0,1fr)_4rem] print:gap-x-3">
+          <div className="chart-axis">
             <div className="relative h-5 text-ink-soft text-xs sm:col-start-2 print:col-start-2">
               {months.map(({ at, day }) => (
                 <span key={day} className="absolute" style={{ left: `${(100 * at) / wide}%` }}>

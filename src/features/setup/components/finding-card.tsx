@@ -33,7 +33,7 @@ export function FindingCard(props: FindingCardProps) {
           </span>
           <ChevronDown aria-hidden="true" className="mt-1 size-5 text-ink-soft group-open:rotate-180" />
         </summary>
-        <div className="grid gap-3 pb-4 pl-[2.25rem]">
+        <div className="grid gap-3 pb-4 pl-9">
           <p className="max-w-prose">{finding.why}</p>
           {finding.effect && <p className="font-semibold">{finding.effect}</p>}
           <p className="text-ink-soft text-sm">{W.evidence(finding.evidence)}</p>
@@ -61,7 +61,7 @@ export function FindingCard(props: FindingCardProps) {
         </div>
       </details>
       {answer && (
-        <p className="max-w-prose pb-3 pl-[2.25rem] text-ink-soft text-sm">
+        <p className="max-w-prose pb-3 pl-9 text-ink-soft text-sm">
           {answer.kind === 'chore' ? W.choreBy(answer.by, answer.on) : W.leftBy(answer.by, answer.on, answer.reason)}{' '}
           {answer.choreId && mayOpenChores && <TextLink href={`/clubs/${club}/chores`}>{W.openChores}</TextLink>}
         </p>

@@ -46,7 +46,7 @@ function NumberedMap({ club, findings }: FindingsMapProps) {
       things={query.data.things}
       overlay={overlay}
       label={W.label}
-      className="relative h-96 sm:h-[32rem]"
+      className="relative map-room"
     />
   );
 }
