@@ -184,6 +184,7 @@ describe.each([
     await isFine(page, `coverage-${size}`);
 
     const address = page.url();
+    await expect.poll(() => said.locator('[aria-busy=true]').count()).toBe(0);
     const text = await said.textContent();
     await page.goto(address);
     await said.getByText('Where it stands').waitFor();

@@ -172,7 +172,8 @@ export function TrialStand({ club, ask, winds: packed }: TrialStandProps) {
 function SeatText({ club, ...asked }: { club: string; trial: string; window: TrialWindow } & Seat) {
   const { trial, window: hunted, lat, lon } = asked;
   const ask = useMemo(() => ({ trial, window: hunted, lat, lon }), [trial, hunted, lat, lon]);
-  const query = useRead(seatQuery(club, useDeferredValue(ask)));
+  const later = useDeferredValue(ask);
+  const query = useRead(seatQuery(club, later));
   if (query.isError) {
     return (
       <p>
@@ -181,5 +182,11 @@ function SeatText({ club, ...asked }: { club: string; trial: string; window: Tri
     );
   }
   if (!query.data) return <p className="text-ink-soft">{W.seatLooking}</p>;
-  return query.data.text ? <p className={query.isPlaceholderData ? 'text-ink-soft' : ''}>{query.data.text}</p> : null;
+  if (!query.data.text) return null;
+  const old = query.isPlaceholderData || later !== ask;
+  return (
+    <p aria-busy={old || undefined} className={old ? 'text-ink-soft' : ''}>
+      {query.data.text}
+    </p>
+  );
 }
