@@ -31,7 +31,7 @@ export function SitRow({ row, startAt, detail, mayBook }: SitRowProps) {
             </RowButton>
             {row.mine && <Badge look="strong">{SIT_LIST_WORDS.yourSit}</Badge>}
           </h3>
-          <p className="mt-1 hidden lg:block">{row.sentence}</p>
+          <p className="mt-1 hidden text-pretty lg:block">{row.sentence}</p>
           {notes.map((caution) => (
             <p key={caution.text} className="mt-1 hidden font-semibold text-clay text-sm lg:block">
               {caution.text}
@@ -48,7 +48,7 @@ export function SitRow({ row, startAt, detail, mayBook }: SitRowProps) {
           {mayBook && !row.mine && <BookButton standId={row.standId} name={row.name} first={row.rank === 1} />}
         </div>
         <div className="col-span-2 col-start-2 row-start-3 lg:hidden">
-          <p>{row.sentence}</p>
+          <p className="text-pretty">{row.sentence}</p>
           {notes.map((caution) => (
             <p key={caution.text} className="mt-1 font-semibold text-clay text-sm">
               {caution.text}
