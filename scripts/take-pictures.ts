@@ -40,7 +40,8 @@ try {
     for (const path of listPages().filter((one) => one.includes(values.only))) {
       const address = addressOf(path);
       if (!address || (await page.goto(address))?.status() !== 200) continue;
-      await page.waitForLoadState('networkidle');
+      // What is kept ahead for when there is no signal may still be on its way: no part of the picture.
+      await page.waitForLoadState('networkidle', { timeout: 10_000 }).catch(() => undefined);
       await page.evaluate(() => document.fonts.ready);
       for (const light of values.lights.split(',')) {
         await page.evaluate((name) => {
