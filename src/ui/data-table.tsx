@@ -15,7 +15,7 @@ import { type ReactNode, useMemo, useState } from 'react';
 import { compareValues, rowMatches, type SortValue } from './data-table-values';
 import { EmptyState } from './notices';
 import { Pager } from './pager';
-import { RowHead, type Sorted, Table, TBody, Td, THead, Th, Tr } from './table';
+import { NOTHING, RowHead, type Sorted, Table, TBody, Td, THead, Th, Tr } from './table';
 import { TextInput } from './text-inputs';
 import { TABLE_WORDS } from './words/tables';
 
@@ -135,7 +135,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
                   if (index === 0) return <RowHead key={column.id}>{shownCell}</RowHead>;
                   return (
                     <Td key={column.id} label={column.header} align={column.align}>
-                      {shownCell ?? <span className="text-ink-soft">–</span>}
+                      {shownCell ?? NOTHING}
                     </Td>
                   );
                 })}

@@ -113,7 +113,7 @@ export interface TdProps extends ComponentProps<'td'> {
 }
 
 /** Where there is nothing to say. A card leaves it out: only a column needs the place. */
-const NOTHING = '–';
+export const NOTHING = '–';
 
 export function Td({ label, align = 'left', className, ...rest }: TdProps) {
   return (

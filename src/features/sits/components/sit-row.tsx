@@ -19,7 +19,7 @@ export function SitRow({ row, startAt, detail, mayBook }: SitRowProps) {
   const notes = row.cautions.filter((caution) => caution.level !== 'note');
   return (
     <li className="border-rule border-b" id={row.standId} data-detail={detail}>
-      <div className="sit-row relative grid items-start gap-x-3 gap-y-2 py-3.5 hover:bg-panel lg:gap-x-5 lg:px-1">
+      <div className="sit-row relative grid items-start gap-x-3 gap-y-2 py-3.5 hover:bg-panel lg:gap-x-5 lg:gap-y-1 lg:px-1">
         <span className="font-serif text-ink-soft text-xl leading-snug" aria-hidden="true">
           {row.rank}
         </span>
@@ -31,23 +31,17 @@ export function SitRow({ row, startAt, detail, mayBook }: SitRowProps) {
             </RowButton>
             {row.mine && <Badge look="strong">{SIT_LIST_WORDS.yourSit}</Badge>}
           </h3>
-          <p className="mt-1 hidden text-pretty lg:block">{row.sentence}</p>
-          {notes.map((caution) => (
-            <p key={caution.text} className="mt-1 hidden font-semibold text-clay text-sm lg:block">
-              {caution.text}
-            </p>
-          ))}
         </div>
-        <div className="col-start-3 row-start-2 self-center lg:row-start-1 lg:self-start lg:pt-1">
+        <div className="col-start-3 row-start-2 self-center lg:row-start-1">
           <WordMark word={row.word} />
         </div>
-        <div className="col-start-2 row-start-2 lg:col-start-4 lg:row-start-1 lg:pt-1">
+        <div className="col-start-2 row-start-2 lg:col-start-4 lg:row-span-2 lg:row-start-1 lg:pt-1">
           <WindStrip arcs={row.arcs} rows={[{ at: startAt, shares: row.shares, hold: row.hold }]} />
         </div>
-        <div className="relative z-10 col-start-3 row-start-1 lg:col-start-5 lg:justify-self-end">
+        <div className="relative z-10 col-start-3 row-start-1 lg:col-start-5 lg:row-span-2 lg:justify-self-end">
           {mayBook && !row.mine && <BookButton standId={row.standId} name={row.name} first={row.rank === 1} />}
         </div>
-        <div className="col-span-2 col-start-2 row-start-3 lg:hidden">
+        <div className="col-span-2 col-start-2 row-start-3 lg:row-start-2">
           <p className="text-pretty">{row.sentence}</p>
           {notes.map((caution) => (
             <p key={caution.text} className="mt-1 font-semibold text-clay text-sm">
