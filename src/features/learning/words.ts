@@ -70,12 +70,18 @@ export const RELIABILITY_WORDS = {
 } as const;
 
 export const BRIER_WORDS = {
-  sits: 'Sits with a prediction and a log',
-  score: 'Brier score (0 is perfect; always saying 50 gives 0.250)',
-  reliability: 'Reliability: what was said is off by (less is better)',
-  resolution: 'Resolution: it tells sits apart by (more is better)',
-  uncertainty: 'Uncertainty of the outcome itself',
-  within: 'Predictions that differ inside a row add',
+  sits: 'Sits',
+  sitsOf: (sits: number) => `${sits} with a prediction and a log`,
+  score: 'Brier score',
+  scoreOf: (score: string) => `${score}: 0 is perfect, always saying 50 gives 0.250`,
+  reliability: 'Reliability',
+  reliabilityOf: (off: string) => `${off}: how far off what was said is; less is better`,
+  resolution: 'Resolution',
+  resolutionOf: (apart: string) => `${apart}: how well it tells sits apart; more is better`,
+  uncertainty: 'Uncertainty',
+  uncertaintyOf: (of: string) => `${of}, of the outcome itself`,
+  within: 'Within rows',
+  withinOf: (add: string) => `${add}: what predictions that differ inside a row add`,
 } as const;
 
 interface Adjustment {

@@ -49,12 +49,12 @@ export function BrierList({ brier }: { brier: BrierParts }) {
     <DefinitionList
       className="max-w-2xl"
       items={[
-        { term: BRIER_WORDS.sits, detail: brier.sits },
-        { term: BRIER_WORDS.score, detail: three(brier.score) },
-        { term: BRIER_WORDS.reliability, detail: three(brier.reliability) },
-        { term: BRIER_WORDS.resolution, detail: three(brier.resolution) },
-        { term: BRIER_WORDS.uncertainty, detail: three(brier.uncertainty) },
-        { term: BRIER_WORDS.within, detail: three(brier.within) },
+        { term: BRIER_WORDS.sits, detail: BRIER_WORDS.sitsOf(brier.sits) },
+        { term: BRIER_WORDS.score, detail: BRIER_WORDS.scoreOf(three(brier.score)) },
+        { term: BRIER_WORDS.reliability, detail: BRIER_WORDS.reliabilityOf(three(brier.reliability)) },
+        { term: BRIER_WORDS.resolution, detail: BRIER_WORDS.resolutionOf(three(brier.resolution)) },
+        { term: BRIER_WORDS.uncertainty, detail: BRIER_WORDS.uncertaintyOf(three(brier.uncertainty)) },
+        { term: BRIER_WORDS.within, detail: BRIER_WORDS.withinOf(three(brier.within)) },
       ]}
     />
   );
