@@ -3,7 +3,7 @@ import { fromLocal } from '@/core/geometry';
 import { DEMO_PLACE } from '@/features/demo/demo-place';
 import { launchBrowser, newVisitor } from '../tests/helpers/browser';
 import { serveApp } from '../tests/helpers/serve-app';
-import { signInDemo } from '../tests/helpers/sign-in-demo';
+import { signInDemo } from '../tests/helpers/sign-in';
 
 /** Frame times of the ground map while it is moved about, with 5,000 features drawn. Needs a build and Chromium. Speeds are printed, never asserted. */
 const FEATURES = 5000;

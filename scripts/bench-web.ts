@@ -7,7 +7,7 @@ import type { BrowserContext } from 'playwright-core';
 import { z } from 'zod';
 import { launchBrowser, newVisitor, PHONE } from '../tests/helpers/browser';
 import { serveApp } from '../tests/helpers/serve-app';
-import { signInDemo } from '../tests/helpers/sign-in-demo';
+import { signInDemo } from '../tests/helpers/sign-in';
 
 /** Weight, Lighthouse and load of the built app on the demo club. Prints tables; asserts nothing. Build first. */
 const root = resolve(import.meta.dirname, '..');

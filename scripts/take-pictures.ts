@@ -6,7 +6,7 @@ import { LIGHT_COOKIE } from '@/ui/light';
 import { DESKTOP, launchBrowser, newVisitor, PHONE } from '../tests/helpers/browser';
 import { fillerOf, listPages } from '../tests/helpers/list-pages';
 import { serveApp } from '../tests/helpers/serve-app';
-import { signInDemo } from '../tests/helpers/sign-in-demo';
+import { signInDemo } from '../tests/helpers/sign-in';
 
 /**
  * A picture of every page of the demo club on a phone and a desk in each light, from the built app.

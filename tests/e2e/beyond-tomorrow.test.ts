@@ -2,7 +2,7 @@ import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE } from '../helpers/browser';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
-import { signInDemo } from '../helpers/sign-in-demo';
+import { signInDemo } from '../helpers/sign-in';
 
 let app: ServedApp;
 let browser: Browser;

@@ -7,6 +7,7 @@ import { newId } from '@/lib/ids';
 import { DESKTOP, launchBrowser, newVisitor, type Visitor } from '../helpers/browser';
 import { DAY_PASSWORD, DAY_PEOPLE, DAY_SLUG, makeDayClub } from '../helpers/day-club';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signIn } from '../helpers/sign-in';
 
 /** The club of the test has two of its own. */
 const MORE = 138;
@@ -40,13 +41,7 @@ beforeAll(async () => {
   await addStands();
   browser = await launchBrowser();
   visitor = await newVisitor(browser, app.url, DESKTOP);
-  const { page } = visitor;
-  await page.goto('/sign-in');
-  await page.locator('form[data-ready]').waitFor();
-  await page.getByLabel('E-mail').fill(DAY_PEOPLE.officer.email);
-  await page.getByLabel('Password').fill(DAY_PASSWORD);
-  await page.getByRole('button', { name: 'Sign in' }).click();
-  await page.waitForURL(/\/clubs/);
+  await signIn(visitor.page, DAY_PEOPLE.officer.email, DAY_PASSWORD);
 });
 
 afterAll(async () => {

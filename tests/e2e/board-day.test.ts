@@ -5,6 +5,7 @@ import { outings } from '@/db/schema';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } from '../helpers/browser';
 import { DAY_PASSWORD, DAY_PEOPLE, DAY_SLUG, makeDayClub } from '../helpers/day-club';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signIn } from '../helpers/sign-in';
 
 const CLUB = `/clubs/${DAY_SLUG}`;
 
@@ -14,15 +15,6 @@ let member: Visitor;
 let officer: Visitor;
 let landowner: Visitor;
 let home: Visitor;
-
-async function signIn({ page }: Visitor, email: string): Promise<void> {
-  await page.goto('/sign-in');
-  await page.locator('form[data-ready]').waitFor();
-  await page.getByLabel('E-mail').fill(email);
-  await page.getByLabel('Password').fill(DAY_PASSWORD);
-  await page.getByRole('button', { name: 'Sign in' }).click();
-  await page.waitForURL(/\/clubs/);
-}
 
 /** Opens the newest kept mail of a subject and gives its first link; waits until the mail job has run. */
 async function linkInMail(page: Page, subject: RegExp): Promise<string> {
@@ -56,9 +48,9 @@ beforeAll(async () => {
   officer = await newVisitor(browser, app.url, DESKTOP);
   landowner = await newVisitor(browser, app.url, DESKTOP);
   home = await newVisitor(browser, app.url, PHONE);
-  await signIn(member, DAY_PEOPLE.member.email);
-  await signIn(officer, DAY_PEOPLE.officer.email);
-  await signIn(landowner, DAY_PEOPLE.landowner.email);
+  await signIn(member.page, DAY_PEOPLE.member.email, DAY_PASSWORD);
+  await signIn(officer.page, DAY_PEOPLE.officer.email, DAY_PASSWORD);
+  await signIn(landowner.page, DAY_PEOPLE.landowner.email, DAY_PASSWORD);
 });
 
 afterAll(async () => {

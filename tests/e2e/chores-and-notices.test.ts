@@ -6,9 +6,9 @@ import { closeDatabase, reader, useDatabase } from '@/db/client';
 import { memberships, outbox, sits, stands, users } from '@/db/schema';
 import { DEMO_SLUG } from '@/features/demo/build-demo';
 import { DEMO_PLACE } from '@/features/demo/demo-place';
-import { DEMO_PASSWORD } from '@/features/demo/people';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } from '../helpers/browser';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signInDemo } from '../helpers/sign-in';
 
 const CLUB = `/clubs/${DEMO_SLUG}`;
 const today = dayOf(Date.now(), DEMO_PLACE.zone);
@@ -17,15 +17,6 @@ let app: ServedApp;
 let browser: Browser;
 let member: Visitor;
 let steward: Visitor;
-
-async function signIn({ page }: Visitor, key: string): Promise<void> {
-  await page.goto('/sign-in');
-  await page.locator('form[data-ready]').waitFor();
-  await page.getByLabel('E-mail').fill(`${key}@example.org`);
-  await page.getByLabel('Password').fill(DEMO_PASSWORD);
-  await page.getByRole('button', { name: 'Sign in' }).click();
-  await page.waitForURL(/\/clubs/);
-}
 
 const looksRight = async (page: Page, name: string) => {
   expect(await axeFindings(page), name).toEqual([]);
@@ -67,8 +58,8 @@ beforeAll(async () => {
   browser = await launchBrowser();
   member = await newVisitor(browser, app.url, PHONE);
   steward = await newVisitor(browser, app.url, DESKTOP);
-  await signIn(member, 'odalys');
-  await signIn(steward, 'abel');
+  await signInDemo(member.page, 'odalys');
+  await signInDemo(steward.page, 'abel');
 });
 
 afterAll(async () => {

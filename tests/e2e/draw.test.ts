@@ -11,6 +11,7 @@ import { DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } 
 import { DRAW_PASSWORD, DRAW_PEOPLE, DRAW_SLUG, type DrawPerson, makeDrawClub } from '../helpers/draw-club';
 import { lookAtPage } from '../helpers/look-at-page';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signIn } from '../helpers/sign-in';
 
 const CLUB = `/clubs/${DRAW_SLUG}`;
 const ZONE = 'America/New_York';
@@ -22,15 +23,6 @@ let browser: Browser;
 const who = {} as Record<DrawPerson, Visitor>;
 let drawUrl = '';
 let drawId = '';
-
-async function signIn({ page }: Visitor, email: string): Promise<void> {
-  await page.goto('/sign-in');
-  await page.locator('form[data-ready]').waitFor();
-  await page.getByLabel('E-mail').fill(email);
-  await page.getByLabel('Password').fill(DRAW_PASSWORD);
-  await page.getByRole('button', { name: 'Sign in' }).click();
-  await page.waitForURL(/\/clubs/);
-}
 
 /** Looks in every light and width, then puts the window back as it was. */
 async function looksRight({ page }: Visitor, name: string, size = PHONE): Promise<void> {
@@ -94,7 +86,7 @@ beforeAll(async () => {
   browser = await launchBrowser();
   for (const key of Object.keys(DRAW_PEOPLE) as DrawPerson[]) {
     who[key] = await newVisitor(browser, app.url, key === 'ada' || key === 'cal' ? PHONE : DESKTOP);
-    await signIn(who[key], DRAW_PEOPLE[key].email);
+    await signIn(who[key].page, DRAW_PEOPLE[key].email, DRAW_PASSWORD);
   }
 });
 

@@ -5,7 +5,7 @@ import { fillerOf, leadsNowhere, listPages } from '../helpers/list-pages';
 import { makeLiveLinks } from '../helpers/live-links';
 import { lookAtPage } from '../helpers/look-at-page';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
-import { signInDemo } from '../helpers/sign-in-demo';
+import { signInDemo } from '../helpers/sign-in';
 
 /** Who looks at which pages of the demo club. The club's admin may open every one of it. */
 const PEOPLE = [

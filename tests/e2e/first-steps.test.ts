@@ -14,6 +14,7 @@ import {
 } from '../helpers/browser';
 import { DAY_PASSWORD, DAY_PEOPLE, DAY_SLUG, makeDayClub } from '../helpers/day-club';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signIn } from '../helpers/sign-in';
 
 let app: ServedApp;
 let browser: Browser;
@@ -51,12 +52,7 @@ describe('coming in for the first time', () => {
 
   it('shows a new club its first steps, a list of samples at once, and takes them away again', async () => {
     const { page, troubles } = await newVisitor(browser, app.url, DESKTOP);
-    await page.goto('/sign-in');
-    await page.locator('form[data-ready]').waitFor();
-    await page.getByLabel('E-mail').fill(DAY_PEOPLE.officer.email);
-    await page.getByLabel('Password').fill(DAY_PASSWORD);
-    await page.getByRole('button', { name: 'Sign in' }).click();
-    await page.waitForURL(/\/clubs/);
+    await signIn(page, DAY_PEOPLE.officer.email, DAY_PASSWORD);
     await page.goto(`/clubs/${DAY_SLUG}/sit`);
     await page.getByRole('heading', { name: 'First steps' }).waitFor();
     expect(await allAxeFindings(page)).toEqual([]);

@@ -1,10 +1,10 @@
-import type { Browser, Page } from 'playwright-core';
+import type { Browser } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DEMO_PLACE, positionOf } from '@/features/demo/demo-place';
-import { DEMO_PASSWORD } from '@/features/demo/people';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE } from '../helpers/browser';
 import { HAS_GDAL, runGdal } from '../helpers/gdal';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signInDemo } from '../helpers/sign-in';
 
 let app: ServedApp;
 let browser: Browser;
@@ -33,14 +33,6 @@ function gpxByGdal(east: number): Buffer {
   return runGdal('ogr2ogr', args, { 'in.geojson': source }, 'out.gpx');
 }
 
-async function signIn(page: Page): Promise<void> {
-  await page.goto('/sign-in');
-  await page.getByLabel('E-mail').fill('abel@example.org');
-  await page.getByLabel('Password').fill(DEMO_PASSWORD);
-  await page.getByRole('button', { name: 'Sign in' }).click();
-  await page.waitForURL(/\/clubs/);
-}
-
 const file = (name: string, body: Buffer | string) => ({
   name,
   mimeType: 'application/gpx+xml',
@@ -55,7 +47,7 @@ describe.skipIf(!HAS_GDAL)(
       ['desktop', DESKTOP, 300],
     ] as const)('at %s size', async (size, viewport, east) => {
       const { page, troubles, context } = await newVisitor(browser, app.url, viewport);
-      await signIn(page);
+      await signInDemo(page, 'abel');
       await page.goto('/clubs/tansy-fork/ground');
       await page.getByRole('link', { name: 'Bring in a file' }).click();
       await page.getByRole('heading', { name: 'Bring in a file', level: 1 }).waitFor();
@@ -101,7 +93,7 @@ describe.skipIf(!HAS_GDAL)(
 
     it('takes the ground out as a file that GDAL reads', async () => {
       const { page, context } = await newVisitor(browser, app.url, DESKTOP);
-      await signIn(page);
+      await signInDemo(page, 'abel');
       await page.goto('/clubs/tansy-fork/ground/export');
       expect(await axeFindings(page)).toEqual([]);
       await keepPicture(page, 'export-desktop');
@@ -135,7 +127,7 @@ describe('a steward brings in a large file', () => {
     const body = longTrack();
     expect(body.length).toBeGreaterThan(1024 * 1024);
     const { page, troubles, context } = await newVisitor(browser, app.url, DESKTOP);
-    await signIn(page);
+    await signInDemo(page, 'abel');
     await page.goto('/clubs/tansy-fork/ground/import');
     await page.getByLabel('File', { exact: true }).setInputFiles(file('day.gpx', body));
     await page.getByRole('button', { name: 'Read the file' }).click();

@@ -4,6 +4,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { DEMO_PASSWORD } from '@/features/demo/people';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } from '../helpers/browser';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signIn } from '../helpers/sign-in';
 
 const CLUB = '/clubs/tansy-fork';
 
@@ -24,15 +25,6 @@ async function whoOwesLog(): Promise<string> {
   return String(rows[0]?.email);
 }
 
-async function signIn({ page }: Visitor, email: string): Promise<void> {
-  await page.goto('/sign-in');
-  await page.locator('form[data-ready]').waitFor();
-  await page.getByLabel('E-mail').fill(email);
-  await page.getByLabel('Password').fill(DEMO_PASSWORD);
-  await page.getByRole('button', { name: 'Sign in' }).click();
-  await page.waitForURL(/\/clubs/);
-}
-
 const waiting = (page: Page) => page.getByRole('region', { name: 'Waiting for a log' }).getByRole('listitem');
 const more = (page: Page, label: string) => page.getByRole('button', { name: `One more: ${label}`, exact: true });
 const looksRight = async (page: Page, name: string) => {
@@ -47,8 +39,8 @@ beforeAll(async () => {
   browser = await launchBrowser();
   member = await newVisitor(browser, app.url, PHONE);
   officer = await newVisitor(browser, app.url, DESKTOP);
-  await signIn(member, await whoOwesLog());
-  await signIn(officer, 'abel@example.org');
+  await signIn(member.page, await whoOwesLog(), DEMO_PASSWORD);
+  await signIn(officer.page, 'abel@example.org', DEMO_PASSWORD);
 });
 
 afterAll(async () => {

@@ -5,6 +5,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } from '../helpers/browser';
 import { drawLine, drawPoint, type Ground, openGround, saveGround } from '../helpers/draw-ground';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signIn } from '../helpers/sign-in';
 import { makeAccount, startClub } from '../helpers/start-club';
 
 const person = { name: 'Wilma Hask', email: 'wilma@example.org', password: 'a long walk by the creek' };
@@ -129,12 +130,7 @@ describe('a new steward draws the ground', () => {
 
   it('with a thumb: the same on a phone', async () => {
     const { page } = phone;
-    await page.goto('/sign-in');
-    await page.locator('form[data-ready]').waitFor();
-    await page.getByLabel('E-mail').fill(person.email);
-    await page.getByLabel('Password').fill(person.password);
-    await page.getByRole('button', { name: 'Sign in' }).click();
-    await page.waitForURL(/\/clubs/);
+    await signIn(page, person.email, person.password);
     const ground = await drawTheGround(phone, 'thumb-hollow', true);
     await saveGround(ground);
     expect(await axeFindings(page)).toEqual([]);

@@ -6,6 +6,7 @@ import { outings, stands, visits } from '@/db/schema';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } from '../helpers/browser';
 import { DAY_PASSWORD, DAY_PEOPLE, DAY_SLUG, makeDayClub } from '../helpers/day-club';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signIn } from '../helpers/sign-in';
 
 const CLUB = `/clubs/${DAY_SLUG}`;
 
@@ -13,15 +14,6 @@ let app: ServedApp;
 let browser: Browser;
 let member: Visitor;
 let officer: Visitor;
-
-async function signIn({ page }: Visitor, email: string): Promise<void> {
-  await page.goto('/sign-in');
-  await page.locator('form[data-ready]').waitFor();
-  await page.getByLabel('E-mail').fill(email);
-  await page.getByLabel('Password').fill(DAY_PASSWORD);
-  await page.getByRole('button', { name: 'Sign in' }).click();
-  await page.waitForURL(/\/clubs/);
-}
 
 /** Addresses of the pages kept in this browser. */
 const keptPages = (page: Page) =>
@@ -55,8 +47,8 @@ beforeAll(async () => {
   browser = await launchBrowser();
   member = await newVisitor(browser, app.url, PHONE);
   officer = await newVisitor(browser, app.url, DESKTOP);
-  await signIn(member, DAY_PEOPLE.member.email);
-  await signIn(officer, DAY_PEOPLE.officer.email);
+  await signIn(member.page, DAY_PEOPLE.member.email, DAY_PASSWORD);
+  await signIn(officer.page, DAY_PEOPLE.officer.email, DAY_PASSWORD);
 });
 
 afterAll(async () => {

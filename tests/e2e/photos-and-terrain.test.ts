@@ -1,9 +1,9 @@
 import type { Browser } from 'playwright-core';
 import sharp from 'sharp';
 import { afterAll, beforeAll, expect, it } from 'vitest';
-import { DEMO_PASSWORD } from '@/features/demo/people';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE } from '../helpers/browser';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
+import { signInDemo } from '../helpers/sign-in';
 
 let app: ServedApp;
 let browser: Browser;
@@ -32,11 +32,7 @@ it.each([
   'a steward at %s size adds photos, and takes slope and drain off the terrain',
   async (size, viewport, nth) => {
     const { page, troubles, context } = await newVisitor(browser, app.url, viewport);
-    await page.goto('/sign-in');
-    await page.getByLabel('E-mail').fill('abel@example.org');
-    await page.getByLabel('Password').fill(DEMO_PASSWORD);
-    await page.getByRole('button', { name: 'Sign in' }).click();
-    await page.waitForURL(/\/clubs/);
+    await signInDemo(page, 'abel');
     await page.goto('/clubs/tansy-fork/stands');
     await page.locator('a[href^="/clubs/tansy-fork/stands/std_"]').nth(nth).click();
     await page.getByRole('heading', { name: 'Photos' }).waitFor();

@@ -3,7 +3,7 @@ import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { axeFindings, DESKTOP, keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } from '../helpers/browser';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
-import { signInDemo } from '../helpers/sign-in-demo';
+import { signInDemo } from '../helpers/sign-in';
 
 const CLUB = '/clubs/tansy-fork';
 const PARTS = [

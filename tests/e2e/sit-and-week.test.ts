@@ -11,7 +11,7 @@ import {
   type Visitor,
 } from '../helpers/browser';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
-import { signInDemo } from '../helpers/sign-in-demo';
+import { signInDemo } from '../helpers/sign-in';
 
 const SIT = '/clubs/tansy-fork/sit';
 /** A day further ahead than the next window, by the demo club's clock. */

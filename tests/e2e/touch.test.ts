@@ -2,7 +2,7 @@ import type { Browser, Locator, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { keepPicture, launchBrowser, newVisitor, PHONE, type Visitor } from '../helpers/browser';
 import { type ServedApp, serveApp } from '../helpers/serve-app';
-import { signInDemo } from '../helpers/sign-in-demo';
+import { signInDemo } from '../helpers/sign-in';
 
 /** WCAG 2.5.5: a target that a thumb in a glove can hit, in CSS pixels. */
 const THUMB = 44;
