@@ -28,7 +28,9 @@ const LEFT = 5;
 const SPAN = WIDTH - 2 * LEFT;
 const xOf = (deg: number) => LEFT + (deg / 360) * SPAN;
 
-const LETTERS = ['N', 'E', 'S', 'W', 'N'];
+/** One text whose letters each have their own place: a list has many strips. */
+const QUARTERS = 'NESWN';
+const QUARTERS_AT = [0, 90, 180, 270, 360].map(xOf).join(' ');
 
 function WindStripLine({ arcs, rows, className }: { arcs: Arc[]; rows: StripRow[]; className?: string }) {
   const text = describeWindStrip({ arcs, rows });
@@ -54,20 +56,9 @@ function WindStripLine({ arcs, rows, className }: { arcs: Arc[]; rows: StripRow[
           fill="var(--color-moss)"
         />
       ))}
-      {LETTERS.map((letter, quarter) => (
-        <text
-          // biome-ignore lint/suspicious/noArrayIndexKey: N stands at both ends
-          key={quarter}
-          x={xOf(quarter * 90)}
-          y={23}
-          fontSize={8}
-          fontWeight={600}
-          textAnchor="middle"
-          fill="var(--color-ink-soft)"
-        >
-          {letter}
-        </text>
-      ))}
+      <text x={QUARTERS_AT} y={23} fontSize={8} fontWeight={600} textAnchor="middle" fill="var(--color-ink-soft)">
+        {QUARTERS}
+      </text>
     </svg>
   );
 }

@@ -1,7 +1,7 @@
 'use client';
 
 import { useRouter } from 'next/navigation';
-import { type ChangeEvent, type ReactNode, useState } from 'react';
+import { Activity, type ChangeEvent, type ReactNode, useState } from 'react';
 import { askText } from '../read-addresses';
 import type { WeekView } from '../view-types';
 import { WEEK_SHOWS, type WeekShow } from '../week-cells';
@@ -44,15 +44,20 @@ export function WeekRows({ view, choices, children }: WeekRowsProps) {
       <div className="mt-3 grid gap-3">{children}</div>
       {view.stands.length > 0 && (
         <>
-          <div className="mt-6 sm:hidden print:hidden">
-            <WeekDays view={view} show={show} />
-          </div>
-          <section
-            aria-label={WEEK_TABLE_WORDS.region}
-            className="relative mt-6 hidden overflow-x-auto pb-3 sm:block print:block print:overflow-visible"
-          >
-            <WeekTable view={view} show={show} />
-          </section>
+          {/* Each an activity of its own: the browser makes them live one by one, and answers a press in between. */}
+          <Activity>
+            <div className="mt-6 sm:hidden print:hidden">
+              <WeekDays view={view} show={show} />
+            </div>
+          </Activity>
+          <Activity>
+            <section
+              aria-label={WEEK_TABLE_WORDS.region}
+              className="relative mt-6 hidden overflow-x-auto pb-3 sm:block print:block print:overflow-visible"
+            >
+              <WeekTable view={view} show={show} />
+            </section>
+          </Activity>
           <p className="mt-2 hidden text-ink-soft text-sm sm:block">{WEEK_TABLE_WORDS.legend}</p>
         </>
       )}
