@@ -1,8 +1,8 @@
-import Link from 'next/link';
 import type { ReactNode } from 'react';
 import { KeyboardMap } from './keyboard-map';
 import type { Light } from './light';
 import { LightSwitch } from './light-switch';
+import { Link } from './link';
 import { BottomBar, type NavItem, RailLinks } from './nav-links';
 import { SkipLink } from './skip-link';
 import { Wordmark } from './wordmark';

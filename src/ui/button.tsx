@@ -1,7 +1,7 @@
-import Link from 'next/link';
 import type { ComponentProps, ReactNode } from 'react';
 import { type ButtonLook, buttonClasses } from './button-classes';
 import { joinClasses } from './join-classes';
+import { Link, type LinkProps } from './link';
 
 export type { ButtonLook };
 export { buttonClasses };
@@ -27,7 +27,7 @@ export function Button({ look = 'plain', pending, pendingLabel, type = 'button',
   );
 }
 
-export interface ButtonLinkProps extends ComponentProps<typeof Link> {
+export interface ButtonLinkProps extends LinkProps {
   look?: ButtonLook;
 }
 
@@ -36,7 +36,7 @@ export function ButtonLink({ look = 'plain', className, ...rest }: ButtonLinkPro
 }
 
 /** A link in running text. */
-export function TextLink({ className, ...rest }: ComponentProps<typeof Link>) {
+export function TextLink({ className, ...rest }: LinkProps) {
   return (
     <Link
       {...rest}

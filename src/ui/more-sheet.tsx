@@ -1,8 +1,8 @@
 'use client';
 
-import Link from 'next/link';
 import { type ReactNode, useState } from 'react';
 import { Dialog } from './dialog';
+import { Link } from './link';
 import type { NavItem } from './nav-links';
 import { PagesSign } from './signs';
 import { MORE_WORDS } from './words/shell';

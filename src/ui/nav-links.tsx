@@ -1,11 +1,11 @@
 'use client';
 
-import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 import type { ReactNode } from 'react';
 import { findCurrent } from './current-path';
 import { joinClasses } from './join-classes';
 import { LazyPart, makeLazy } from './lazy-part';
+import { Link } from './link';
 import type { MoreSheetProps } from './more-sheet';
 import { PagesSign } from './signs';
 import { MORE_WORDS } from './words/shell';

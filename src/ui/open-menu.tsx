@@ -1,9 +1,9 @@
 'use client';
 
-import Link from 'next/link';
 import * as Dropdown from 'radix-ui/dropdown-menu';
 import { Button } from './button';
 import { joinClasses } from './join-classes';
+import { Link } from './link';
 import type { MenuItem, MenuProps } from './menu';
 import { DownSign } from './signs';
 

@@ -1,8 +1,8 @@
-import Link from 'next/link';
 import type { ReactNode } from 'react';
 import { joinClasses } from './join-classes';
 import type { Light } from './light';
 import { LightSwitch } from './light-switch';
+import { Link } from './link';
 import { SkipLink } from './skip-link';
 import { Wordmark } from './wordmark';
 import { SHELL_WORDS } from './words/shell';

@@ -1,5 +1,5 @@
-import Link from 'next/link';
 import type { ReactNode } from 'react';
+import { Link } from './link';
 import { TAB_CLASSES, TAB_LIST_CLASSES } from './tab-classes';
 
 export interface TabLinksProps {

@@ -1,6 +1,6 @@
-import Link from 'next/link';
 import type { ComponentProps, ReactNode } from 'react';
 import { joinClasses } from './join-classes';
+import { Link } from './link';
 import { FallingSign, RisingSign, SortableSign } from './signs';
 
 /** Written out because a stacked table's display values would drop the built-in roles in some browsers. */

@@ -1,5 +1,4 @@
 import type { Metadata } from 'next';
-import Link from 'next/link';
 import { ConfirmEmailNotice } from '@/features/accounts/components/confirm-email-notice';
 import { SignOutButton } from '@/features/accounts/components/sign-out-button';
 import { listMyClubs } from '@/features/accounts/reads';
@@ -8,6 +7,7 @@ import { ROLE_WORDS } from '@/features/clubs/words/roles';
 import { now } from '@/server/clock';
 import { accountPage } from '@/server/doors';
 import { ButtonLink, TextLink } from '@/ui/button';
+import { Link } from '@/ui/link';
 import { EmptyState } from '@/ui/notices';
 import { PageTitle } from '@/ui/page-parts';
 import { signOutAction } from '../account/actions';

@@ -53,7 +53,6 @@ export function ExportForm({ club, counts }: ExportFormProps) {
           <ButtonLink
             look="primary"
             href={`/api/clubs/${club}/ground/export?format=${format}&layers=${chosen.join(',')}`}
-            prefetch={false}
             download
           >
             {words.take(number)}

@@ -18,7 +18,6 @@ export function CsvLink({ club, report, part, title, named = false }: CsvLinkPro
     <span className="print:hidden">
       <ButtonLink
         href={reportAddress(`/api/clubs/${club}/report`, report.period, { part })}
-        prefetch={false}
         aria-label={words.csvOf(title)}
       >
         {named ? words.csvOf(title) : words.csv}

@@ -1,5 +1,5 @@
-import Link from 'next/link';
 import { TextLink } from '@/ui/button';
+import { Link } from '@/ui/link';
 import { sitAddress } from '../sit-address';
 import type { WeekColumnView, WeekView } from '../view-types';
 import { cellText, groupByDay, rankedCells, type WeekShow } from '../week-cells';
@@ -48,7 +48,6 @@ function WindowList({ view, column, show }: { view: WeekView; column: WeekColumn
           return (
             <li key={cell.standId} className="border-rule border-t">
               <Link
-                prefetch={false}
                 href={sitAddress(view.club.slug, { day, window, ...weapon, stand: cell.standId })}
                 className="flex min-h-11 items-center justify-between gap-3 py-1.5"
               >

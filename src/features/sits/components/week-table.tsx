@@ -1,6 +1,6 @@
-import Link from 'next/link';
 import { Button } from '@/ui/button';
 import { joinClasses } from '@/ui/join-classes';
+import { Link } from '@/ui/link';
 import { useMoreRows } from '@/ui/use-more-rows';
 import { sitAddress } from '../sit-address';
 import type { WeekCell, WeekColumnView, WeekView } from '../view-types';
@@ -106,11 +106,7 @@ function Cell({ view, column, stand, show }: CellProps) {
   const { day, window } = column.window;
   const ask = { day, window, ...(view.weapon ? { weapon: view.weapon } : {}), stand: stand.standId };
   return (
-    <Link
-      href={sitAddress(view.club.slug, ask)}
-      className="block px-2 py-1.5 no-underline hover:bg-panel"
-      prefetch={false}
-    >
+    <Link href={sitAddress(view.club.slug, ask)} className="block px-2 py-1.5 no-underline hover:bg-panel">
       <CellWords cell={cell} />
       <MiniStrip bars={stand.bars[window]} shades={cell.strip === null ? null : (view.strips[cell.strip] ?? null)} />
       <span className="sr-only">{cellText(cell)}</span>

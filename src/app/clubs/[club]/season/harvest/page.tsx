@@ -36,9 +36,7 @@ export default clubPage('harvest.read', async ({ scope, search }) => {
           <>
             {write}
             {sheets.length > 0 && (
-              <ButtonLink href={`/api/clubs/${slug}/harvest?year=${year.year}`} prefetch={false}>
-                {words.csv}
-              </ButtonLink>
+              <ButtonLink href={`/api/clubs/${slug}/harvest?year=${year.year}`}>{words.csv}</ButtonLink>
             )}
           </>
         }

@@ -47,12 +47,8 @@ export default clubPage('log.read', async ({ scope, search }) => {
         actions={
           total.sits > 0 && (
             <>
-              <ButtonLink href={file('tables')} prefetch={false}>
-                {words.tables}
-              </ButtonLink>
-              <ButtonLink href={file('logs')} prefetch={false}>
-                {words.logs}
-              </ButtonLink>
+              <ButtonLink href={file('tables')}>{words.tables}</ButtonLink>
+              <ButtonLink href={file('logs')}>{words.logs}</ButtonLink>
             </>
           )
         }
