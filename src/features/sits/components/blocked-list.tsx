@@ -13,13 +13,11 @@ export function BlockedList({ rows }: { rows: BlockedRow[] }) {
           <li
             key={row.standId}
             id={row.standId}
-            className="border-rule border-b py-2.5 sm:grid sm:grid-cols-[14rem_minmax(0,1fr)] sm:gap-5"
+            className="blocked-row grid items-baseline gap-x-5 border-rule border-b py-2.5"
           >
-            <h3 className="flex flex-wrap items-baseline gap-x-2.5">
-              <span className="font-serif text-lg">{row.name}</span>
-              <WordMark word={row.word} />
-            </h3>
-            <div>
+            <h3 className="font-serif text-lg">{row.name}</h3>
+            <WordMark word={row.word} />
+            <div className="col-span-2 lg:col-span-1">
               {row.gates.map((gate) => (
                 <p key={`${gate.code} ${gate.text}`}>
                   {gate.text}{' '}
