@@ -1,9 +1,11 @@
+import { LOST } from '@/ui/words/lost';
+
 import type { FeedScope } from './feed-schema';
 
 export const FEED_NAMES: Record<FeedScope, string> = { own: 'My sits', club: "The club's sits" };
 
 export const CALENDAR_FEED_WORDS = {
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   none: 'No address is in use.',
   inUse: (madeOn: string, withPlace: boolean) =>
     `An address made on ${madeOn} is in use, ${withPlace ? 'with' : 'without'} stand positions.`,

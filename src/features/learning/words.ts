@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 /** '+4', '-3', '0'. */
 export const signed = (points: number) => (points > 0 ? `+${points}` : String(points));
 
@@ -44,7 +46,7 @@ export const APPLY_WORDS = {
   title: (points: number, stand: string) => `Apply ${signed(points)} points to ${stand}`,
   text: 'From now on the list adds these points to the quiet of every sit there, and says so among its reasons. It can be undone at any time.',
   applied: (points: number, stand: string) => `${stand} counts ${signed(points)} points`,
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;
 
 export const UNDO_WORDS = {
@@ -54,7 +56,7 @@ export const UNDO_WORDS = {
   confirm: 'Undo it',
   text: 'The list goes by the sums alone again. The record keeps that it was applied.',
   undone: (stand: string) => `${stand} counts by the sums alone`,
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;
 
 export const RELIABILITY_WORDS = {

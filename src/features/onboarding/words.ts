@@ -1,5 +1,7 @@
+import { LOST } from '@/ui/words/lost';
+
 export const FIRST_STEPS_WORDS = {
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   title: 'First steps',
   doneOf: (done: number, all: number) => `${done} of ${all} done`,
   done: 'Done',

@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 export const PHOTOS_WORDS = {
   title: 'Photos',
   note: 'Kept without their position. Only members of the club see them.',
@@ -15,7 +17,7 @@ export const PHOTO_WORDS = {
   removeTitle: 'Remove this photo?',
   removeConfirm: 'Remove the photo',
   removeText: 'It is gone for everyone and cannot be brought back.',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;
 
 export const ADD_PHOTOS_WORDS = {

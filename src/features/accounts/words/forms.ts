@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 export const ACCOUNT_FIELD_WORDS = {
   name: 'Your name',
   nameHint: 'As the club knows you. Members see it on the board.',
@@ -77,7 +79,7 @@ export const RESET_WORDS = {
 } as const;
 
 export const SESSIONS_WORDS = {
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   here: 'This one',
   signedIn: (since: string, address: string) => `Signed in ${since}, from ${address}`,
   title: (browser: string) => `Sign ${browser} out?`,

@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 /** Texts of what opens from the board. */
 
 export const SIGN_IN_WORDS = {
@@ -63,7 +65,7 @@ export const SHARE_WORDS = {
   makeAnother: 'Make another link',
   turnOff: 'Turn all links off',
   off: 'The links no longer work.',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;
 
 export const WALK_UP_WORDS = {

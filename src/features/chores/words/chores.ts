@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 export const CHORES_PAGE_WORDS = {
   title: 'Chores',
   lead: 'What the ground and the stands need, who does it, and the hours it has taken.',
@@ -43,7 +45,7 @@ export const CHORE_LIST_WORDS = {
   taking: 'Taking…',
   of: (title: string) => `: ${title}`,
   taken: 'It is yours',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   done: (day: string, doer: string | null, hours: string) => `${day}, ${doer ?? 'a former member'}, ${hours} h`,
 } as const;
 
@@ -78,7 +80,7 @@ export const FINISH_WORDS = {
   saving: 'Saving…',
 } as const;
 
-export const REMOVE_WORDS = { lost: 'The server could not be reached. Try again.' } as const;
+export const REMOVE_WORDS = { lost: LOST } as const;
 
 export const CHORE_FIELD_ERRORS = {
   long: (most: number) => `Keep it to ${most} characters.`,

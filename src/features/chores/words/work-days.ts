@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 export const WORK_DAY_PAGE_WORDS = {
   title: 'Work day',
   setTitle: 'Set a work day',
@@ -24,7 +26,7 @@ export const WORK_DAY_LIST_WORDS = {
   comes: 'You are on the list',
   comesNot: 'You are off the list',
   saving: 'Saving…',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;
 
 export const WORK_DAY_FORM_WORDS = {

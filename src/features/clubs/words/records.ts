@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 export const AUDIT_FILTERS_WORDS = {
   person: 'Person',
   everyone: 'Everyone',
@@ -21,7 +23,7 @@ export const AUDIT_WORDS = {
 
 export const DEAD_MAIL_WORDS = {
   to: (to: string) => `To ${to}`,
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   notSent: 'Not sent',
   again: (to: string) => `In the line again for ${to}`,
   working: 'Working…',

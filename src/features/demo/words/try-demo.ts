@@ -1,5 +1,7 @@
+import { LOST } from '@/ui/words/lost';
+
 export const TRY_DEMO_WORDS = {
   open: 'Try the demo club',
   opening: 'Opening the demo…',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;

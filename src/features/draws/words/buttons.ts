@@ -1,1 +1,3 @@
-export const DRAW_BUTTON_WORDS = { lost: 'The server could not be reached. Try again.' } as const;
+import { LOST } from '@/ui/words/lost';
+
+export const DRAW_BUTTON_WORDS = { lost: LOST } as const;

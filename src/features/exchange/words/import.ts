@@ -1,4 +1,5 @@
 import type { DrawnShape } from '@/core/map-layers';
+import { LOST } from '@/ui/words/lost';
 import type { Fate } from '../fate';
 
 export const IMPORT_PAGE_WORDS = {
@@ -119,7 +120,7 @@ export const UNDO_WORDS = {
     `Takes away the ${things} things this file added. What has been changed, booked or built upon since stays where it is.`,
   undone: (things: number) => `${things} taken away again`,
   kept: (names: string[]) => `Kept, because changed or used since: ${names.join(', ')}`,
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;
 
 export const IMPORT_ERRORS = {

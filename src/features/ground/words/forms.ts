@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 export const HERE_WORDS = {
   here: 'I am standing there',
   noPosition: 'This device tells no position: type the numbers.',
@@ -80,7 +82,7 @@ export const OPEN_AGAIN_WORDS = {
   title: (what: string) => `Open ${what} again?`,
   openAgain: 'Open again',
   keepClosed: 'Keep closed',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   text: 'Members can book from today on. Closed days that are past stay on record.',
 } as const;
 
@@ -102,6 +104,6 @@ export const REMOVE_WORDS = {
   title: (name: string) => `Remove ${name}?`,
   removeLabel: (name: string) => `Remove ${name}`,
   remove: 'Remove',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   removed: (name: string) => `${name} is removed`,
 } as const;

@@ -1,4 +1,5 @@
 import type { PressureKind } from '@/core/condition-types';
+import { LOST } from '@/ui/words/lost';
 
 export const VISIT_WORDS: Record<PressureKind, string> = {
   camera_check: 'Camera check',
@@ -53,7 +54,7 @@ export const VISIT_LIST_WORDS = {
   confirm: 'Take it out',
   confirmText: 'It no longer counts as pressure. The audit log keeps that it was written.',
   takenOut: 'The visit is taken out',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   from: (distance: string, stand: string) => `${distance} from ${stand}`,
   onTheGround: 'On the ground',
   hasLeft: 'Somebody who has left',

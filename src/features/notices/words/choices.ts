@@ -1,4 +1,5 @@
 import type { NoticeKind } from '@/core/notices/notice-kinds';
+import { LOST } from '@/ui/words/lost';
 
 export const KIND_WORDS: Record<NoticeKind, { label: string; note: string }> = {
   wind_turned: {
@@ -73,5 +74,5 @@ export const UNSUBSCRIBE_BUTTON_WORDS = {
   stop: 'Stop this mail',
   stopping: 'Stopping…',
   notStopped: 'Not stopped',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;

@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 export const SWAP_PAGE_WORDS = {
   title: 'Move a sit',
   mySits: 'My sits',
@@ -21,7 +23,7 @@ export const SWAP_LIST_WORDS = {
   wayIn: (way: string | null) => (way === null ? 'No way in is drawn for it' : `Walk in by ${way}`),
   move: (stand: string) => `Move to ${stand}`,
   moving: 'Moving…',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;
 
 export const SWAP_ERRORS = { reload: 'Reload the page and try again.' } as const;

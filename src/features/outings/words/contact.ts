@@ -1,3 +1,5 @@
+import { LOST } from '@/ui/words/lost';
+
 import type { ContactState } from '../read-contact';
 
 export const CONTACT_STATES: Record<ContactState, string> = {
@@ -19,7 +21,7 @@ export const CONTACT_FORM_WORDS = {
   removeText: 'Nobody at home is told when you are overdue, until you name somebody who agrees.',
   removed: 'Safety contact removed',
   notSaved: 'Not saved',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   asked: 'Asked',
   askedText: 'They get a mail and answer there.',
   saved: 'Saved',
@@ -37,7 +39,7 @@ export const CONTACT_ANSWER_WORDS = {
   no: 'No',
   stop: 'Stop being the contact',
   notSaved: 'Not saved',
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
 } as const;
 
 export const CONTACT_PAGE_WORDS = {

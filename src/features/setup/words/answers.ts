@@ -1,5 +1,7 @@
+import { LOST } from '@/ui/words/lost';
+
 export const ANSWER_WORDS = {
-  lost: 'The server could not be reached. Try again.',
+  lost: LOST,
   reasonNeeded: 'Say why it can stay as it is.',
   reasonLong: 'Keep it to 300 characters.',
   back: 'Back on the list',
