@@ -48,16 +48,21 @@ export function RangeChart({ title, unit, rows, className }: RangeChartProps) {
       <div role="img" aria-label={CHART_WORDS.name(title)}>
         <div className="flex flex-col gap-2 sm:gap-1" aria-hidden="true">
           {rows.map((row) => (
-            <div key={row.key} className="chart-row sm:items-center">
+            <div key={row.key} className="chart-row sm:items-center print:items-center">
               <span className="truncate text-sm">
                 {row.label} {row.note && <span className="text-ink-soft">{row.note}</span>}
               </span>
-              <span className="text-right text-sm sm:order-last">{row.text}</span>
-              <Track row={row} at={scale} ticks={ticks} className="col-span-2 h-4 sm:order-none sm:col-span-1 sm:h-6" />
+              <span className="text-right text-sm sm:order-last print:order-last">{row.text}</span>
+              <Track
+                row={row}
+                at={scale}
+                ticks={ticks}
+                className="col-span-2 h-4 sm:col-span-1 sm:h-6 print:col-span-1"
+              />
             </div>
           ))}
           <div className="chart-axis">
-            <div className="relative h-5 text-ink-soft text-xs sm:col-start-2">
+            <div className="relative h-5 text-ink-soft text-xs sm:col-start-2 print:col-start-2">
               {ticks.map((tick) => (
                 <span
                   key={tick}

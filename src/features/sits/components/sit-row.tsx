@@ -23,15 +23,13 @@ export function SitRow({ row, startAt, detail, mayBook }: SitRowProps) {
         <span className="font-serif text-ink-soft text-xl leading-snug" aria-hidden="true">
           {row.rank}
         </span>
-        <div className="min-w-0">
-          <h3 className="flex flex-wrap items-baseline gap-x-2.5 gap-y-1">
-            <RowButton standId={row.standId}>
-              <span className="sr-only">{SIT_LIST_WORDS.rank(row.rank)}</span>
-              {row.name}
-            </RowButton>
-            {row.mine && <Badge look="strong">{SIT_LIST_WORDS.yourSit}</Badge>}
-          </h3>
-        </div>
+        <h3 className="flex min-w-0 flex-wrap items-baseline gap-x-2.5 gap-y-1">
+          <RowButton standId={row.standId}>
+            <span className="sr-only">{SIT_LIST_WORDS.rank(row.rank)}</span>
+            {row.name}
+          </RowButton>
+          {row.mine && <Badge look="strong">{SIT_LIST_WORDS.yourSit}</Badge>}
+        </h3>
         <div className="col-start-3 row-start-2 self-center lg:row-start-1">
           <WordMark word={row.word} />
         </div>
